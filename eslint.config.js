@@ -1,0 +1,56 @@
+import tseslint from 'typescript-eslint';
+
+/** `shared/` must give the same bits in every engine, so only exactly rounded Math functions. */
+const inexactMath = [
+  'acos', 'acosh', 'asin', 'asinh', 'atan', 'atan2', 'atanh', 'cbrt', 'cos', 'cosh', 'exp', 'expm1',
+  'hypot', 'log', 'log10', 'log1p', 'log2', 'pow', 'random', 'sin', 'sinh', 'tan', 'tanh',
+]; // prettier-ignore
+
+export default tseslint.config(
+  { ignores: ['node_modules/', 'dist/', '.cache/', '.data/'] },
+  ...tseslint.configs.strictTypeChecked,
+  ...tseslint.configs.stylisticTypeChecked,
+  {
+    languageOptions: {
+      parserOptions: {
+        projectService: { allowDefaultProject: ['eslint.config.js', 'scripts/*.mjs'] },
+        tsconfigRootDir: import.meta.dirname,
+      },
+    },
+    rules: {
+      '@typescript-eslint/consistent-type-definitions': ['error', 'type'],
+      '@typescript-eslint/consistent-type-imports': 'error',
+      '@typescript-eslint/no-non-null-assertion': 'error',
+      '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
+      '@typescript-eslint/switch-exhaustiveness-check': 'error',
+      eqeqeq: 'error',
+      'func-style': ['error', 'declaration'],
+      'no-console': 'error',
+      'no-param-reassign': 'error',
+      'prefer-const': 'error',
+    },
+  },
+  {
+    files: ['shared/**/*.ts'],
+    rules: {
+      'no-restricted-globals': ['error', 'Date', 'performance', 'process', 'window', 'document'],
+      'no-restricted-properties': [
+        'error',
+        ...inexactMath.map((property) => ({
+          object: 'Math',
+          property,
+          message: 'Engines round it differently: use shared/numerics, or + − × ÷ and √.',
+        })),
+      ],
+      'no-restricted-syntax': [
+        'error',
+        { selector: "BinaryExpression[operator='**']", message: 'Write the product out.' },
+      ],
+    },
+  },
+  {
+    files: ['scripts/**'],
+    rules: { 'no-console': 'off' },
+  },
+  { files: ['**/*.{js,mjs}'], ...tseslint.configs.disableTypeChecked },
+);

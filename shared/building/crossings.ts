@@ -1,0 +1,77 @@
+import { at } from '../numerics/at.ts';
+import { monotoneRoot } from '../numerics/monotone-root.ts';
+import { evaluatePolynomial } from '../numerics/evaluate-polynomial.ts';
+import { polynomialRoots } from '../numerics/polynomial-roots.ts';
+import { polynomialSide } from '../numerics/polynomial-side.ts';
+import { PROFILE, PROFILE_STRIDE, type Profile, type ProfileQuantity } from './profile.ts';
+import { intervalOf, shareOf } from './profile-value.ts';
+
+/** The quantity whose sign tells that the first is monotone. */
+const DERIVATIVE: Partial<Record<ProfileQuantity, ProfileQuantity>> = {
+  settlement: 'slope',
+  slope: 'curvature',
+  displacement: 'strain',
+};
+
+function isMonotone(profile: Profile, quantity: ProfileQuantity, base: number): boolean {
+  const derivative = DERIVATIVE[quantity];
+  if (derivative === undefined) return false;
+  const { offset, degree } = PROFILE[derivative];
+  return polynomialSide(profile.coefficients, base + offset, degree, 0) !== 0;
+}
+
+function crossingsInInterval(
+  profile: Profile,
+  quantity: ProfileQuantity,
+  level: number,
+  interval: number,
+  from: number,
+  to: number,
+): number[] {
+  const { offset, degree } = PROFILE[quantity];
+  const c = profile.coefficients;
+  const base = interval * PROFILE_STRIDE;
+  const start = base + offset;
+  if (polynomialSide(c, start, degree, level) !== 0) return [];
+  if (isMonotone(profile, quantity, base)) {
+    const [a, b] = [
+      evaluatePolynomial(c, start, degree, from) - level,
+      evaluatePolynomial(c, start, degree, to) - level,
+    ];
+    if (a === 0) return [from];
+    if (b === 0) return [to];
+    return a > 0 === b > 0 ? [] : [monotoneRoot(c, start, degree, level, from, to)];
+  }
+  const own = c.slice(start, start + degree + 1);
+  own[0] = at(own, 0) - level;
+  return polynomialRoots(own, degree, from, to);
+}
+
+/**
+ * All distances along a wall, in order, at which a quantity of its profile passes a level.
+ *
+ * Units: level as PROFILE, distances m. Valid: 0 ≤ from ≤ to ≤ the wall's length; none is missed,
+ * since bounds of the polynomials decide and not samples. Source: [own].
+ */
+export function crossings(
+  profile: Profile,
+  quantity: ProfileQuantity,
+  level: number,
+  from: number,
+  to: number,
+): number[] {
+  const found: number[] = [];
+  const last = intervalOf(profile, to);
+  for (let interval = intervalOf(profile, from); interval <= last; interval++) {
+    const start = at(profile.nodes, interval);
+    const width = at(profile.nodes, interval + 1) - start;
+    const a = Math.max(0, shareOf(profile, interval, from));
+    const b = Math.min(1, shareOf(profile, interval, to));
+    if (!(a < b)) continue;
+    for (const t of crossingsInInterval(profile, quantity, level, interval, a, b)) {
+      const x = start + t * width;
+      if (x !== found.at(-1)) found.push(x);
+    }
+  }
+  return found;
+}

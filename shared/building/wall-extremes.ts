@@ -1,0 +1,39 @@
+import { crossings } from './crossings.ts';
+import type { Profile } from './profile.ts';
+import { profileValue } from './profile-value.ts';
+
+/**
+ * How a whole wall moves: largest settlement and where, steepest slope, tilt from end to end and
+ * angular distortion, which is the largest departure of the slope from the tilt.
+ *
+ * Units: m and m/m. Valid: length > 0. Source: burland-wroth-1974 for the words; rankin-1988 uses
+ * settlement and slope.
+ */
+export type WallExtremes = {
+  readonly settlementMax: number;
+  readonly settlementMaxAt: number;
+  readonly slopeMax: number;
+  readonly tilt: number;
+  readonly angularDistortion: number;
+};
+
+/**
+ * The extremes of a wall that moves as `scale` times a profile.
+ *
+ * Units: m; scale without unit. Valid: scale ≥ 0. Source: as WallExtremes.
+ */
+export function wallExtremes(profile: Profile, scale: number, length: number): WallExtremes {
+  const settlementAt = (x: number) => scale * profileValue(profile, 'settlement', x);
+  const slopeAt = (x: number) => scale * profileValue(profile, 'slope', x);
+  const tilt = (settlementAt(length) - settlementAt(0)) / length;
+  let [settlementMax, settlementMaxAt] = [-Infinity, 0];
+  for (const x of [0, ...crossings(profile, 'slope', 0, 0, length), length]) {
+    if (settlementAt(x) > settlementMax) [settlementMax, settlementMaxAt] = [settlementAt(x), x];
+  }
+  let [slopeMax, angularDistortion] = [0, 0];
+  for (const x of [0, ...crossings(profile, 'curvature', 0, 0, length), length]) {
+    slopeMax = Math.max(slopeMax, Math.abs(slopeAt(x)));
+    angularDistortion = Math.max(angularDistortion, Math.abs(slopeAt(x) - tilt));
+  }
+  return { settlementMax, settlementMaxAt, slopeMax, tilt, angularDistortion };
+}

@@ -1,0 +1,174 @@
+import { atPosition, type FivePosition } from '../numerics/range.ts';
+import { MethodError } from '../method-error.ts';
+import type { Warning } from '../warnings.ts';
+import type { Block } from './block.ts';
+import { blockIsNegligible } from './block-is-negligible.ts';
+import { crownRule } from './crown-rule.ts';
+import { drivenEnd } from './driven-end.ts';
+import type { GroundModel } from './ground-model.ts';
+import { PACK_STRIDE } from './kernel.ts';
+import type { Levels } from './levels.ts';
+import { levelAlong, type Piece } from './piece.ts';
+import type { Place } from './place.ts';
+import { troughWidth } from './trough-width.ts';
+import { ruleAt, type TroughWidthRule } from './trough-width-rule.ts';
+import { troughWidthWarning } from './trough-width-warning.ts';
+import { depthToFocus, focusWarning } from './vector-focus.ts';
+
+/**
+ * Which state of the ground: the position of K in its range, the face of each drive (undefined:
+ * complete), and, where the movement of one drive alone is wanted, which.
+ *
+ * Units: face chainages m. Valid: faces in the order of the drives; a missing one is complete.
+ * Source: [own].
+ */
+export type GroundState = {
+  readonly position: FivePosition;
+  readonly faces: readonly (number | undefined)[];
+  readonly onlyDrive?: number;
+};
+
+/**
+ * The drives as they act at one place: one pack of pieces for the kernel per group of volume loss.
+ *
+ * Units: smallestWidth m, Infinity where nothing reaches the place. Valid: for points of that place
+ * only. Source: [own].
+ */
+export type LevelField = {
+  readonly packs: readonly { readonly pack: Float64Array; readonly count: number }[];
+  readonly smallestWidth: number;
+  readonly warnings: readonly Warning[];
+};
+
+/** A piece on a gradient is cut until i changes by less than this share along a part of it. */
+const LARGEST_WIDTH_CHANGE = 0.02;
+/** Where the width all but vanishes the rule for it is no longer worth following. */
+const MOST_PARTS = 64;
+
+type Packing = {
+  readonly model: GroundModel;
+  readonly rule: TroughWidthRule<number>;
+  readonly place: Place;
+  readonly state: GroundState;
+  readonly numbers: number[][];
+  readonly warnings: Set<Warning>;
+  smallestWidth: number;
+};
+
+function levelsAt(place: Place, axis: number): Levels {
+  return { ground: place.groundLevel, founding: place.foundingLevel, axis };
+}
+
+function packPart(packing: Packing, piece: Piece, k: number, start: number, length: number): void {
+  const { rule, place, model } = packing;
+  const levels = levelsAt(place, levelAlong(piece, start + length / 2));
+  const width = troughWidth(rule, k, levels);
+  packing.smallestWidth = Math.min(packing.smallestWidth, width);
+  packing.numbers[piece.group]?.push(
+    piece.plan.start[0] + start * piece.cosEast,
+    piece.plan.start[1] + start * piece.cosNorth,
+    piece.cosEast,
+    piece.cosNorth,
+    1 / width,
+    length / width,
+    piece.unitLoss / width,
+    (width * width) / depthToFocus(model.rules.focus, levels),
+  );
+}
+
+function packPiece(packing: Packing, piece: Piece, length: number): void {
+  const { rule, place, model, warnings } = packing;
+  const k = atPosition(piece.troughWidth, packing.state.position);
+  const highest = Math.max(piece.startLevel, levelAlong(piece, length));
+  const levels = levelsAt(place, highest);
+  const width = troughWidth(rule, k, levels);
+  const atGround = troughWidth(rule, k, { ...levels, founding: place.groundLevel });
+  const name = model.drives[piece.drive]?.name ?? '';
+  const crown = crownRule(piece, name, place, levels, width, atGround);
+  for (const warning of crown.warnings) warnings.add(warning);
+  if (crown.leftOut) return;
+  const ofWidth = troughWidthWarning(rule, k, levels);
+  if (ofWidth !== undefined) warnings.add(ofWidth);
+  const ofFocus = focusWarning(model.rules.focus, rule, k);
+  if (ofFocus !== undefined) warnings.add(ofFocus);
+  if (piece.startLevel === piece.endLevel) {
+    packPart(packing, piece, k, 0, length);
+    return;
+  }
+  const lowest = levelsAt(place, Math.min(piece.startLevel, levelAlong(piece, length)));
+  const change = Math.abs(troughWidth(rule, k, lowest) - width);
+  const parts = Math.min(MOST_PARTS, Math.max(1, Math.ceil(change / (LARGEST_WIDTH_CHANGE * width))));
+  for (let part = 0; part < parts; part++) {
+    packPart(packing, piece, k, (part * length) / parts, length / parts);
+  }
+}
+
+function packBlock(packing: Packing, block: Block, ends: readonly number[]): void {
+  for (const piece of block.pieces) {
+    const end = ends[piece.drive] ?? 0;
+    if (end > piece.from) packPiece(packing, piece, Math.min(piece.length, end - piece.from));
+  }
+}
+
+function drivenEnds({ model, state, place, rule }: Packing): number[] {
+  return model.drives.map((drive, index) => {
+    if (state.onlyDrive !== undefined && state.onlyDrive !== index) return 0;
+    const length = model.lengths[index] ?? 0;
+    return drivenEnd(
+      model.pieces[index] ?? [],
+      length,
+      state.faces[index],
+      drive.faceShare,
+      (piece, axis) =>
+        troughWidth(rule, atPosition(piece.troughWidth, state.position), levelsAt(place, axis)),
+    );
+  });
+}
+
+/**
+ * Packs the pieces that act at a place, for unit volume losses: driven up to the face, not culled,
+ * cut finely enough on gradients, refused or left out by the crown rule. `culling` is off only where
+ * a test asks what it leaves out.
+ *
+ * Units: m. Valid: throws `founding-above-ground`, `below-crown-beside-drive` and
+ * `trough-width-not-positive` with field `foundingLevel`. Source: [own]; the parts cite theirs.
+ */
+export function levelField(
+  model: GroundModel,
+  place: Place,
+  state: GroundState,
+  culling = true,
+): LevelField {
+  if (place.foundingLevel > place.groundLevel) {
+    throw new MethodError(
+      'founding-above-ground',
+      `A founding level of ${place.foundingLevel} m is above the ground level of ${place.groundLevel} m.`,
+      'foundingLevel',
+    );
+  }
+  const packing: Packing = {
+    model,
+    rule: ruleAt(model.rules.depth, state.position),
+    place,
+    state,
+    numbers: model.groups.map(() => []),
+    warnings: new Set(),
+    smallestWidth: Infinity,
+  };
+  const ends = drivenEnds(packing);
+  for (const block of model.blocks) {
+    if (culling && blockIsNegligible(block, place, packing.rule, model.blocks.length)) continue;
+    packBlock(packing, block, ends);
+  }
+  for (const drive of model.drives) {
+    if (drive.laterFactor !== 1) packing.warnings.add('later drive increased');
+  }
+  return {
+    packs: packing.numbers.map((numbers) => ({
+      pack: Float64Array.from(numbers),
+      count: numbers.length / PACK_STRIDE,
+    })),
+    smallestWidth: packing.smallestWidth,
+    warnings: [...packing.warnings],
+  };
+}

@@ -1,0 +1,64 @@
+import type { Levels } from './levels.ts';
+import type { Layer, TroughWidthRule } from './trough-width-rule.ts';
+
+/**
+ * The loss of K with depth in clay: K(z) = (K − 0.325 z/z0)/(1 − z/z0).
+ *
+ * Units: none. Valid: clay. Source: mair-taylor-bracegirdle-1993; for K other than 0.5 [common].
+ */
+export const CLAY_DEPTH_FACTOR = 0.325;
+
+function layeredWidth(layers: readonly Layer<number>[], founding: number, axis: number): number {
+  let width = 0;
+  let top = founding;
+  for (const { baseLevel, troughWidth } of layers) {
+    const base = Math.max(axis, Math.min(top, baseLevel));
+    width += troughWidth * (top - base);
+    top = base;
+  }
+  return width;
+}
+
+/**
+ * i, the trough width at the founding level: the distance from the axis to the inflexion of the
+ * settlement trough.
+ *
+ * Units: K without unit, levels m → m. Valid: see TroughWidthRule; may come out at 0 or less, which
+ * callers refuse or leave out. `troughWidth` is not read by the fitted lines and layers.
+ * Source: mair-taylor-bracegirdle-1993 (clay), oreilly-new-1982 (fitted lines at ground level; below
+ * it i − 0.325 z in clay and i·h/z0 in sand [common]), new-oreilly-1991 (layers).
+ */
+export function troughWidth(
+  rule: TroughWidthRule<number>,
+  troughWidthParameter: number,
+  { ground, founding, axis }: Levels,
+): number {
+  const axisDepth = ground - axis;
+  const depth = ground - founding;
+  switch (rule.kind) {
+    case 'constant':
+      return troughWidthParameter * (axisDepth - depth);
+    case 'clay':
+      return troughWidthParameter * axisDepth - CLAY_DEPTH_FACTOR * depth;
+    case 'oreilly-new-clay':
+      return 0.43 * axisDepth + 1.1 - CLAY_DEPTH_FACTOR * depth;
+    case 'oreilly-new-sand':
+      return ((0.28 * axisDepth - 0.1) * (axisDepth - depth)) / axisDepth;
+    case 'layered':
+      return layeredWidth(rule.layers, founding, axis);
+  }
+}
+
+/**
+ * The same rule as plain arithmetic, for workings.
+ *
+ * Units: z0, z, h in m → i in m. Valid: as `troughWidth`; layers are given by their sum.
+ * Source: as `troughWidth`.
+ */
+export const TROUGH_WIDTH_EXPRESSIONS = {
+  constant: 'K * h',
+  clay: 'K * z0 - 0.325 * z',
+  'oreilly-new-clay': '0.43 * z0 + 1.1 - 0.325 * z',
+  'oreilly-new-sand': '(0.28 * z0 - 0.1) * h / z0',
+  layered: 'K * h',
+} as const satisfies Record<TroughWidthRule['kind'], string>;
