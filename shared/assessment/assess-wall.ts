@@ -13,7 +13,7 @@ import type { Warning } from '../warnings.ts';
 import { loadedProfile, type LoadedProfile } from './loaded-profile.ts';
 import type { AssessmentRules } from './rules.ts';
 import { shapesOfWall } from './shapes-of-wall.ts';
-import { wallField, type WallField } from './wall-field.ts';
+import { siteOfWall, wallField, type WallField } from './wall-field.ts';
 
 /**
  * A zone with both of its horizontal strains, whichever counts.
@@ -98,6 +98,7 @@ export function assessWall(
   rules: AssessmentRules,
   faces: readonly (number | undefined)[],
 ): WallResult {
-  const field = wallField(model, wall, rules.cutOff, { position: CENTRAL, faces });
+  const site = siteOfWall(model, wall);
+  const field = wallField(model, wall, site, rules.cutOff, { position: CENTRAL, faces });
   return resultOfWall(field, loadedProfile(field, lossFactorsAt(model, 'central')), wall, rules);
 }

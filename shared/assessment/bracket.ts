@@ -8,7 +8,7 @@ import { CENTRAL, FIVE_POSITIONS, isRange, type FivePosition, type Range } from 
 import { loadedProfile } from './loaded-profile.ts';
 import type { AssessmentRules } from './rules.ts';
 import { largestStrain, shapesOfWall } from './shapes-of-wall.ts';
-import { wallField, type WallField } from './wall-field.ts';
+import { siteOfWall, wallField, type WallField } from './wall-field.ts';
 
 /**
  * The three levels of volume loss in the bracket, in order.
@@ -57,7 +57,9 @@ export function fieldsOverTroughWidth(
   rules: AssessmentRules,
   faces: readonly (number | undefined)[],
 ): FieldsOverTroughWidth {
-  const fieldAt = (position: FivePosition) => wallField(model, wall, rules.cutOff, { position, faces });
+  const site = siteOfWall(model, wall);
+  const fieldAt = (position: FivePosition) =>
+    wallField(model, wall, site, rules.cutOff, { position, faces });
   if (troughWidthMatters(model)) return FIVE_POSITIONS.map(fieldAt);
   const only = fieldAt(CENTRAL);
   return FIVE_POSITIONS.map(() => only);

@@ -9,12 +9,11 @@ import type { GroundModel } from '../ground/ground-model.ts';
 import { FIELD } from '../ground/kernel.ts';
 import { levelField } from '../ground/level-field.ts';
 import { lossFactorsAt } from '../ground/loss-factors-at.ts';
-import { placeOf } from '../ground/place.ts';
 import { eOverGValues, type FieldsOverTroughWidth } from './bracket.ts';
 import { breakpointFactor } from './breakpoint.ts';
 import { loadedProfile } from './loaded-profile.ts';
 import type { AssessmentRules } from './rules.ts';
-import { directionOf } from './wall-field.ts';
+import { directionOf, siteOfWall } from './wall-field.ts';
 
 /**
  * The volume loss up to which a breakpoint is looked for.
@@ -61,10 +60,10 @@ export function drivePressingMost(
     wall.segment.start[0] + lowest * tx,
     wall.segment.start[1] + lowest * ty,
   ];
-  const place = placeOf([wall.segment], wall.groundLevel, wall.foundingLevel);
+  const site = siteOfWall(model, wall);
   let [drive, largest] = [0, -1];
   for (const index of model.drives.keys()) {
-    const alone = levelField(model, place, { position: CENTRAL, faces, onlyDrive: index });
+    const alone = levelField(model, site, { position: CENTRAL, faces, onlyDrive: index });
     const settlement = at(fieldAtPoints(alone, Float64Array.from(point), factors), FIELD.settlement);
     if (settlement > largest) [drive, largest] = [index, settlement];
   }

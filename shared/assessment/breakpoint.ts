@@ -9,8 +9,8 @@ import { largestStrain, shapesOfWall } from './shapes-of-wall.ts';
 import type { WallField } from './wall-field.ts';
 
 /** Each step of the walk multiplies the volume loss by this. */
-const STEP = 1.05;
-const TOLERANCE = 1e-7;
+const STEP = 1.1;
+const TOLERANCE = 1e-6;
 
 function largestOf(profile: Profile, quantity: ProfileQuantity): number {
   const { offset, degree } = PROFILE[quantity];
@@ -56,24 +56,28 @@ export function breakpointFactor(
   most: number,
 ): number | undefined {
   const limit = limitingStrain(rules.leadingCategory);
-  const reaches = (factor: number): boolean => {
+  const excess = (factor: number): number => {
     const scaled = { profile: loaded.profile, scale: factor * loaded.scale };
-    const shapes = shapesOfWall(scaled, field.cutOff, rules);
-    return atOrAbove(largestStrain(shapes, wall, eOverG), limit);
+    return largestStrain(shapesOfWall(scaled, field.cutOff, rules), wall, eOverG) - limit;
   };
-  const bound = strainBound(loaded, field.length, wall.height, eOverG);
-  let below = limit / bound / STEP;
+  let below = limit / strainBound(loaded, field.length, wall.height, eOverG) / STEP;
   if (!(below < most)) return undefined;
   let above = below;
-  while (!reaches(above)) {
+  let excessAbove = excess(above);
+  let excessBelow = -limit;
+  while (!atOrAbove(excessAbove, 0)) {
     if (above >= most) return undefined;
-    below = above;
+    [below, excessBelow] = [above, excessAbove];
     above = Math.min(most, above * STEP);
+    excessAbove = excess(above);
   }
-  while (above - below > TOLERANCE * above) {
-    const middle = (below + above) / 2;
-    if (reaches(middle)) above = middle;
-    else below = middle;
+  for (let turn = 0; above - below > TOLERANCE * above; turn++) {
+    const secant = above - ((above - below) * excessAbove) / (excessAbove - excessBelow);
+    const middle = turn % 2 === 0 ? secant * (1 + TOLERANCE / 4) : (below + above) / 2;
+    const inside = middle > below && middle < above ? middle : (below + above) / 2;
+    const found = excess(inside);
+    if (atOrAbove(found, 0)) [above, excessAbove] = [inside, found];
+    else [below, excessBelow] = [inside, found];
   }
   return above;
 }

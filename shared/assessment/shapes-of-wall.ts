@@ -1,5 +1,5 @@
 import type { CutOff } from '../building/cut-off.ts';
-import { strainedZone } from '../building/strained-zone.ts';
+import { beamStrains } from '../building/deep-beam.ts';
 import type { Wall } from '../building/wall.ts';
 import { zoneShape, type StrainRules, type ZoneShape } from '../building/zone-shape.ts';
 import { zonesOfWall } from '../building/zones.ts';
@@ -30,8 +30,9 @@ export function largestStrain(
   eOverG: number,
 ): number {
   let largest = 0;
-  for (const shape of shapes) {
-    largest = Math.max(largest, strainedZone(shape, { height, eOverG, poisson }).strain);
+  for (const { mode, start, end, deflectionRatio, horizontalStrain } of shapes) {
+    const beam = { length: end - start, height, eOverG, poisson };
+    largest = Math.max(largest, beamStrains(mode, beam, deflectionRatio, horizontalStrain).strain);
   }
   return largest;
 }

@@ -6,6 +6,7 @@ import type { GroundModel } from '../ground/ground-model.ts';
 import { FIELD, FIELD_SIZE, sumPieces } from '../ground/kernel.ts';
 import { levelField, type GroundState, type LevelField } from '../ground/level-field.ts';
 import { placeOf } from '../ground/place.ts';
+import { siteOf, type Site } from '../ground/site.ts';
 import { stretchesWithinReach } from '../ground/stretches-within-reach.ts';
 import type { PlanPoint } from '../geometry/point.ts';
 import type { CutOffRule } from './rules.ts';
@@ -78,19 +79,29 @@ export function directionOf(wall: Wall, length: number): PlanPoint {
 }
 
 /**
+ * Where a wall stands, with the parts of the drives that reach it.
+ *
+ * Units: m. Valid: any wall. Source: [own].
+ */
+export function siteOfWall(model: GroundModel, wall: Wall): Site {
+  return siteOf(model, placeOf([wall.segment], wall.groundLevel, wall.foundingLevel));
+}
+
+/**
  * The movement of the ground along a wall in one state.
  *
- * Units: m. Valid: wall length > 0; throws as `levelField`. Source: attewell-woodman-1982; the
- * profile is [own].
+ * Units: m. Valid: wall length > 0, `site` is the wall's; throws as `levelField`.
+ * Source: attewell-woodman-1982; the profile is [own].
  */
 export function wallField(
   model: GroundModel,
   wall: Wall,
+  site: Site,
   cutOff: CutOffRule,
   state: GroundState,
 ): WallField {
-  const { segment, groundLevel, foundingLevel } = wall;
-  const field = levelField(model, placeOf([segment], groundLevel, foundingLevel), state);
+  const { segment } = wall;
+  const field = levelField(model, site, state);
   const length = wallLength(wall);
   const direction = directionOf(wall, length);
   const nodes = nodesAlong(length, field.smallestWidth);

@@ -1,24 +1,11 @@
 import { at } from '../numerics/at.ts';
 import { monotoneRoot } from '../numerics/monotone-root.ts';
 import { evaluatePolynomial } from '../numerics/evaluate-polynomial.ts';
+import { polynomialIsMonotone } from '../numerics/polynomial-is-monotone.ts';
 import { polynomialRoots } from '../numerics/polynomial-roots.ts';
 import { polynomialSide } from '../numerics/polynomial-side.ts';
 import { PROFILE, PROFILE_STRIDE, type Profile, type ProfileQuantity } from './profile.ts';
 import { intervalOf, shareOf } from './profile-value.ts';
-
-/** The quantity whose sign tells that the first is monotone. */
-const DERIVATIVE: Partial<Record<ProfileQuantity, ProfileQuantity>> = {
-  settlement: 'slope',
-  slope: 'curvature',
-  displacement: 'strain',
-};
-
-function isMonotone(profile: Profile, quantity: ProfileQuantity, base: number): boolean {
-  const derivative = DERIVATIVE[quantity];
-  if (derivative === undefined) return false;
-  const { offset, degree } = PROFILE[derivative];
-  return polynomialSide(profile.coefficients, base + offset, degree, 0) !== 0;
-}
 
 function crossingsInInterval(
   profile: Profile,
@@ -30,10 +17,9 @@ function crossingsInInterval(
 ): number[] {
   const { offset, degree } = PROFILE[quantity];
   const c = profile.coefficients;
-  const base = interval * PROFILE_STRIDE;
-  const start = base + offset;
+  const start = interval * PROFILE_STRIDE + offset;
   if (polynomialSide(c, start, degree, level) !== 0) return [];
-  if (isMonotone(profile, quantity, base)) {
+  if (polynomialIsMonotone(c, start, degree)) {
     const [a, b] = [
       evaluatePolynomial(c, start, degree, from) - level,
       evaluatePolynomial(c, start, degree, to) - level,

@@ -1,8 +1,7 @@
 import { at } from '../numerics/at.ts';
 import { findRoot } from '../numerics/find-root.ts';
-import { polynomialSide } from '../numerics/polynomial-side.ts';
 import { crossings } from './crossings.ts';
-import { PROFILE, PROFILE_STRIDE, type Profile } from './profile.ts';
+import type { Profile } from './profile.ts';
 import { profileValue } from './profile-value.ts';
 
 /**
@@ -49,15 +48,13 @@ function addRun(runs: Run[], run: Run): void {
 
 function sidesAlong(profile: Profile, flat: number): Run[] {
   const runs: Run[] = [];
-  const { nodes, coefficients } = profile;
-  const { offset, degree } = PROFILE.curvature;
+  const { nodes, curvatureHull } = profile;
   for (let k = 0; k < nodes.length - 1; k++) {
-    const [start, end, base] = [at(nodes, k), at(nodes, k + 1), k * PROFILE_STRIDE + offset];
-    const upper = polynomialSide(coefficients, base, degree, flat);
-    const lower = polynomialSide(coefficients, base, degree, -flat);
-    if (upper === 1) addRun(runs, { side: 1, start, end });
-    else if (lower === -1) addRun(runs, { side: -1, start, end });
-    else if (upper === -1 && lower === 1) addRun(runs, { side: 0, start, end });
+    const [start, end] = [at(nodes, k), at(nodes, k + 1)];
+    const [low, high] = [at(curvatureHull, 2 * k), at(curvatureHull, 2 * k + 1)];
+    if (low > flat) addRun(runs, { side: 1, start, end });
+    else if (high < -flat) addRun(runs, { side: -1, start, end });
+    else if (low > -flat && high < flat) addRun(runs, { side: 0, start, end });
     else {
       const cuts = [
         ...crossings(profile, 'curvature', flat, start, end),

@@ -58,12 +58,11 @@ export function deflectionPerStrain(
   const { I, t } = beamSection(mode, H, record);
   const bending = L / (12 * t) + ((3 * I) / (2 * t * L * H)) * EG;
   const diagonal = 1 + (H * L * L) / (18 * I * EG);
-  const inputs = { L, H, I, t, EG };
   record?.({
     symbol: 'r_b',
     meaning: 'deflection ratio per unit of bending strain',
     expression: 'L / (12 * t) + 3 * I / (2 * t * L * H) * EG',
-    inputs,
+    inputs: { L, H, I, t, EG },
     value: bending,
     unit: '',
     reference: 'burland-1995',

@@ -1,5 +1,7 @@
 import { at } from '../numerics/at.ts';
+import { MethodError } from '../method-error.ts';
 import { cubicHermite } from '../numerics/cubic-hermite.ts';
+import { writePolynomialHull } from '../numerics/polynomial-hull.ts';
 import { quinticHermite } from '../numerics/quintic-hermite.ts';
 
 /**
@@ -38,7 +40,12 @@ export type ProfileQuantity = keyof typeof PROFILE;
  * Units: nodes m from the wall's start. Valid: with nodes a fifth of the trough width apart the
  * settlement is right to 1e-7 and the curvature to 1e-4 of their largest. Source: [own].
  */
-export type Profile = { readonly nodes: Float64Array; readonly coefficients: Float64Array };
+export type Profile = {
+  readonly nodes: Float64Array;
+  readonly coefficients: Float64Array;
+  /** Per interval, two numbers between which its curvature surely stays. */
+  readonly curvatureHull: Float64Array;
+};
 
 /**
  * Numbers per node from which a profile is made: settlement, slope, curvature, displacement along the
@@ -47,6 +54,16 @@ export type Profile = { readonly nodes: Float64Array; readonly coefficients: Flo
  * Units: m, m/m, 1/m, m, m/m. Valid: a constant. Source: [own].
  */
 export const NODE_STRIDE = 5;
+
+function hullOfCurvature(coefficients: Float64Array): Float64Array {
+  const { offset, degree } = PROFILE.curvature;
+  const intervals = coefficients.length / PROFILE_STRIDE;
+  const hull = new Float64Array(2 * intervals);
+  for (let k = 0; k < intervals; k++) {
+    writePolynomialHull(coefficients, k * PROFILE_STRIDE + offset, degree, hull, 2 * k);
+  }
+  return hull;
+}
 
 function writeDerivative(c: Float64Array, from: number, degree: number, to: number, width: number) {
   for (let k = 1; k <= degree; k++) c[to + k - 1] = (k * at(c, from + k)) / width;
@@ -93,13 +110,14 @@ export function profileFromNodes(nodes: Float64Array, values: Float64Array): Pro
       width,
     );
   }
-  return { nodes, coefficients };
+  return { nodes, coefficients, curvatureHull: hullOfCurvature(coefficients) };
 }
 
 /**
  * The profile of several fields together, each multiplied by a factor.
  *
- * Units: none. Valid: profiles on the same nodes, one factor each. Source: new-oreilly-1991, for
+ * Units: none. Valid: at least one profile, all on the same nodes, one factor each; throws
+ * `bad-table`. Source: new-oreilly-1991, for
  * adding the movements of several drives.
  */
 export function combineProfiles(
@@ -107,7 +125,7 @@ export function combineProfiles(
   factors: readonly number[],
 ): Profile {
   const [first, ...others] = profiles;
-  if (first === undefined) return { nodes: new Float64Array(0), coefficients: new Float64Array(0) };
+  if (first === undefined) throw new MethodError('bad-table', 'There are no profiles to combine.');
   const scale = factors[0] ?? 0;
   const coefficients = first.coefficients.map((c) => scale * c);
   for (const [index, other] of others.entries()) {
@@ -116,5 +134,9 @@ export function combineProfiles(
       coefficients[k] = at(coefficients, k) + factor * at(other.coefficients, k);
     }
   }
-  return { nodes: first.nodes, coefficients };
+  return {
+    nodes: first.nodes,
+    coefficients,
+    curvatureHull: hullOfCurvature(coefficients),
+  };
 }

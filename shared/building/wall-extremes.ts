@@ -1,3 +1,4 @@
+import type { Recorder } from '../working.ts';
 import { crossings } from './crossings.ts';
 import type { Profile } from './profile.ts';
 import { profileValue } from './profile-value.ts';
@@ -22,7 +23,12 @@ export type WallExtremes = {
  *
  * Units: m; scale without unit. Valid: scale ≥ 0. Source: as WallExtremes.
  */
-export function wallExtremes(profile: Profile, scale: number, length: number): WallExtremes {
+export function wallExtremes(
+  profile: Profile,
+  scale: number,
+  length: number,
+  record?: Recorder,
+): WallExtremes {
   const settlementAt = (x: number) => scale * profileValue(profile, 'settlement', x);
   const slopeAt = (x: number) => scale * profileValue(profile, 'slope', x);
   const tilt = (settlementAt(length) - settlementAt(0)) / length;
@@ -30,10 +36,31 @@ export function wallExtremes(profile: Profile, scale: number, length: number): W
   for (const x of [0, ...crossings(profile, 'slope', 0, 0, length), length]) {
     if (settlementAt(x) > settlementMax) [settlementMax, settlementMaxAt] = [settlementAt(x), x];
   }
-  let [slopeMax, angularDistortion] = [0, 0];
+  let [slopeMax, angularDistortion, distortedAt] = [0, 0, 0];
   for (const x of [0, ...crossings(profile, 'curvature', 0, 0, length), length]) {
     slopeMax = Math.max(slopeMax, Math.abs(slopeAt(x)));
-    angularDistortion = Math.max(angularDistortion, Math.abs(slopeAt(x) - tilt));
+    const distortion = Math.abs(slopeAt(x) - tilt);
+    if (distortion > angularDistortion) [angularDistortion, distortedAt] = [distortion, x];
+  }
+  if (record) {
+    record({
+      symbol: 'tilt',
+      meaning: 'difference of settlement between the ends of the wall, by its length',
+      expression: '(S_end - S_start) / L',
+      inputs: { S_end: settlementAt(length), S_start: settlementAt(0), L: length },
+      value: tilt,
+      unit: 'm/m',
+      reference: 'burland-wroth-1974',
+    });
+    record({
+      symbol: 'angular distortion',
+      meaning: `largest departure of the slope m from the tilt, at ${distortedAt.toFixed(3)} m`,
+      expression: 'abs(m - tilt)',
+      inputs: { m: slopeAt(distortedAt), tilt },
+      value: angularDistortion,
+      unit: 'm/m',
+      reference: 'burland-wroth-1974',
+    });
   }
   return { settlementMax, settlementMaxAt, slopeMax, tilt, angularDistortion };
 }

@@ -14,7 +14,12 @@ function cross(a: PlanPoint, b: PlanPoint): number {
  * Negative where a point is to the right of the line at its nearest point. Nearest to a vertex, it is
  * on the outer side of the turn there, which neither part by itself can tell.
  */
-function sideOf(point: PlanPoint, parts: readonly PolylinePart[], k: number, share: number): number {
+function sideOf(
+  point: PlanPoint,
+  parts: readonly PolylinePart[],
+  k: number,
+  share: number,
+): number {
   const part = parts[k];
   if (part === undefined) return 0;
   const before = share === 0 ? (parts[k - 1] ?? part) : part;

@@ -13,9 +13,7 @@ function side(of: Segment, p: PlanPoint): number {
  * Source: [own].
  */
 export function segmentsCross(a: Segment, b: Segment): boolean {
-  return (
-    side(a, b.start) * side(a, b.end) < 0 && side(b, a.start) * side(b, a.end) < 0
-  );
+  return side(a, b.start) * side(a, b.end) < 0 && side(b, a.start) * side(b, a.end) < 0;
 }
 
 /**

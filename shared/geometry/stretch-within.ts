@@ -13,7 +13,8 @@ export type Line = {
 
 /** Where a line's coordinate `from + rate · t` lies between `low` and `high`, as [first t, last t]. */
 function between(from: number, rate: number, low: number, high: number): [number, number] {
-  if (rate === 0) return from >= low && from <= high ? [-Infinity, Infinity] : [Infinity, -Infinity];
+  if (rate === 0)
+    return from >= low && from <= high ? [-Infinity, Infinity] : [Infinity, -Infinity];
   const [a, b] = [(low - from) / rate, (high - from) / rate];
   return rate > 0 ? [a, b] : [b, a];
 }

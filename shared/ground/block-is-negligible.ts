@@ -3,7 +3,7 @@ import { exponential } from '../numerics/exponential.ts';
 import type { Block } from './block.ts';
 import type { Place } from './place.ts';
 import { troughWidth } from './trough-width.ts';
-import type { TroughWidthRule } from './trough-width-rule.ts';
+import { ruleAt, type TroughWidthRule } from './trough-width-rule.ts';
 
 /**
  * The settlement that all culled blocks together may be short of.
@@ -25,7 +25,8 @@ const NEVER_CULLED_WITHIN = 2;
 /**
  * Whether a block moves the ground at a place too little to be summed. A drive is a row of point
  * sinks V/(2πi²)·exp(−r²/2i²) whose second derivatives are at most (1 + r²/i²)/i² times that; with
- * the block's whole volume at its least distance and its extreme widths this bounds both sums, and
+ * the block's whole volume at its least distance and its extreme widths, over the whole range of K,
+ * this bounds both sums, and
  * each of `blocks` blocks may use an equal share of what may be missing.
  *
  * Units: m. Valid: false, never a guess, where the widths of the block are not positive or its crown
@@ -35,15 +36,15 @@ const NEVER_CULLED_WITHIN = 2;
 export function blockIsNegligible(
   block: Block,
   place: Place,
-  rule: TroughWidthRule<number>,
+  rule: TroughWidthRule,
   blocks: number,
 ): boolean {
   const { groundLevel: ground, foundingLevel: founding } = place;
   if (block.highestAxis + block.largestDiameter / 2 >= founding) return false;
-  const widest = troughWidth(rule, block.largestK, { ground, founding, axis: block.lowestAxis });
+  const widest = troughWidth(ruleAt(rule, 4), block.largestK, { ground, founding, axis: block.lowestAxis });
   const distance = boxDistance(block.box, place.box);
   if (!(widest > 0) || distance < NEVER_CULLED_WITHIN * widest) return false;
-  const narrowest = troughWidth(rule, block.smallestK, {
+  const narrowest = troughWidth(ruleAt(rule, 0), block.smallestK, {
     ground,
     founding,
     axis: block.highestAxis,

@@ -12,6 +12,16 @@ import { distanceFromPlace, type Place } from './place.ts';
 export const BESIDE_IN_WIDTHS = 2.5;
 
 /**
+ * Whether a piece of drive comes so high, or its trough width so low, that the crown rule must be asked.
+ *
+ * Units: m. Valid: `width` is i at the founding level. Source: [common] for one diameter.
+ */
+export function needsCrownRule(piece: Piece, levels: Levels, width: number): boolean {
+  const crown = levels.axis + piece.diameter / 2;
+  return Math.min(levels.founding, levels.ground) - crown < piece.diameter || !(width > 0);
+}
+
+/**
  * Whether a piece of drive can be computed at a place, and what to warn of. A trough forms above a
  * drive: a piece whose crown is at or above the founding level, or which has no trough width there,
  * is refused when it is beside the place, and left out with a warning when it is farther off.
@@ -32,10 +42,6 @@ export function crownRule(
   const crown = levels.axis + diameter / 2;
   const belowCrown = crown >= levels.founding;
   const impossible = belowCrown || !(width > 0);
-  const nearCrown = levels.founding - crown < diameter;
-  const shallow = levels.ground - crown < diameter;
-  if (!impossible && !nearCrown && !shallow) return { leftOut: false, warnings: [] };
-
   const distance = distanceFromPlace(place, piece.plan);
   const beside = distance < BESIDE_IN_WIDTHS * Math.max(0, widthAtGround) + diameter / 2;
   if (impossible && !beside) {
@@ -57,7 +63,9 @@ export function crownRule(
     );
   }
   const warnings: Warning[] = [];
-  if (beside && nearCrown) warnings.push('founded within one diameter of the crown');
-  if (beside && shallow) warnings.push('cover under one diameter');
+  if (beside && levels.founding - crown < diameter) {
+    warnings.push('founded within one diameter of the crown');
+  }
+  if (beside && levels.ground - crown < diameter) warnings.push('cover under one diameter');
   return { leftOut: false, warnings };
 }

@@ -1,5 +1,10 @@
 import { at } from '../numerics/at.ts';
-import { NODES_PER_UNIT, NORMAL_TABLE, TABLE_REACH } from '../numerics/normal-table.ts';
+import {
+  NODES_PER_UNIT,
+  NORMAL_TABLE,
+  NORMAL_TABLE_STRIDE,
+  TABLE_REACH,
+} from '../numerics/normal-table.ts';
 
 /**
  * Numbers per piece in a pack: easting and northing of its start, its direction east and north, 1/i,
@@ -30,6 +35,13 @@ export const FIELD = {
 } as const;
 
 /**
+ * The name of a quantity in the kernel's answer.
+ *
+ * Units: see FIELD. Valid: a key of FIELD. Source: [own].
+ */
+export type FieldQuantity = keyof typeof FIELD;
+
+/**
  * How many numbers the kernel answers with.
  *
  * Units: none. Valid: a constant. Source: [own].
@@ -39,10 +51,8 @@ export const FIELD_SIZE = 11;
 /** Across a piece, φ under 3e-15 of its peak adds less than rounding does. */
 const REACH_ACROSS = 8.2;
 
-/** Division is slow: the series' divisors as factors, right to the last bit but one. */
+/** Division is slow in the innermost loop. */
 const THIRD = 1 / 3;
-const SIXTH = 1 / 6;
-const TWENTY_FOURTH = 1 / 24;
 
 /** The node nearest an argument x ≥ −TABLE_REACH, rounding by truncation. */
 const NEAREST_NODE = TABLE_REACH * NODES_PER_UNIT + 0.5;
@@ -90,14 +100,12 @@ export function sumPieces(
     if (b >= TABLE_REACH) continue;
 
     let k = (y * NODES_PER_UNIT + NEAREST_NODE) | 0;
-    let x = k / NODES_PER_UNIT - TABLE_REACH;
-    let d = y - x;
-    let q = x * x;
-    let c2 = (q - 1) * 0.5;
-    let c3 = (3 - q) * x * SIXTH;
-    let c4 = (q * q - 6 * q + 3) * TWENTY_FOURTH;
+    let d = y - (k / NODES_PER_UNIT - TABLE_REACH);
+    k *= NORMAL_TABLE_STRIDE;
     const across =
-      at(pack, o + 6) * at(table, 2 * k + 1) * (1 + d * (d * (c2 + d * (c3 + d * c4)) - x));
+      at(pack, o + 6) *
+      (at(table, k + 1) +
+        d * (at(table, k + 2) + d * (at(table, k + 3) + d * (at(table, k + 4) + d * at(table, k + 5)))));
 
     let bigA = 1;
     let phiA = 0;
@@ -105,27 +113,25 @@ export function sumPieces(
     let phiB = 0;
     if (a < TABLE_REACH) {
       k = (a * NODES_PER_UNIT + NEAREST_NODE) | 0;
-      x = k / NODES_PER_UNIT - TABLE_REACH;
-      d = a - x;
-      q = x * x;
-      c2 = (q - 1) * 0.5;
-      c3 = (3 - q) * x * SIXTH;
-      c4 = (q * q - 6 * q + 3) * TWENTY_FOURTH;
-      const phi = at(table, 2 * k + 1);
-      bigA = at(table, 2 * k) + phi * d * (1 + d * (d * (c2 * THIRD + d * (c3 * 0.25)) - x * 0.5));
-      phiA = phi * (1 + d * (d * (c2 + d * (c3 + d * c4)) - x));
+      d = a - (k / NODES_PER_UNIT - TABLE_REACH);
+      k *= NORMAL_TABLE_STRIDE;
+      const t1 = at(table, k + 1);
+      const t2 = at(table, k + 2);
+      const t3 = at(table, k + 3);
+      const t4 = at(table, k + 4);
+      bigA = at(table, k) + d * (t1 + d * (t2 * 0.5 + d * (t3 * THIRD + d * (t4 * 0.25))));
+      phiA = t1 + d * (t2 + d * (t3 + d * (t4 + d * at(table, k + 5))));
     }
     if (b > -TABLE_REACH) {
       k = (b * NODES_PER_UNIT + NEAREST_NODE) | 0;
-      x = k / NODES_PER_UNIT - TABLE_REACH;
-      d = b - x;
-      q = x * x;
-      c2 = (q - 1) * 0.5;
-      c3 = (3 - q) * x * SIXTH;
-      c4 = (q * q - 6 * q + 3) * TWENTY_FOURTH;
-      const phi = at(table, 2 * k + 1);
-      bigB = at(table, 2 * k) + phi * d * (1 + d * (d * (c2 * THIRD + d * (c3 * 0.25)) - x * 0.5));
-      phiB = phi * (1 + d * (d * (c2 + d * (c3 + d * c4)) - x));
+      d = b - (k / NODES_PER_UNIT - TABLE_REACH);
+      k *= NORMAL_TABLE_STRIDE;
+      const t1 = at(table, k + 1);
+      const t2 = at(table, k + 2);
+      const t3 = at(table, k + 3);
+      const t4 = at(table, k + 4);
+      bigB = at(table, k) + d * (t1 + d * (t2 * 0.5 + d * (t3 * THIRD + d * (t4 * 0.25))));
+      phiB = t1 + d * (t2 + d * (t3 + d * (t4 + d * at(table, k + 5))));
     }
 
     const settlement = across * (bigA - bigB);

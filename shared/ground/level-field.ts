@@ -2,14 +2,14 @@ import { atPosition, type FivePosition } from '../numerics/range.ts';
 import { MethodError } from '../method-error.ts';
 import type { Warning } from '../warnings.ts';
 import type { Block } from './block.ts';
-import { blockIsNegligible } from './block-is-negligible.ts';
-import { crownRule } from './crown-rule.ts';
+import { crownRule, needsCrownRule } from './crown-rule.ts';
 import { drivenEnd } from './driven-end.ts';
 import type { GroundModel } from './ground-model.ts';
 import { PACK_STRIDE } from './kernel.ts';
 import type { Levels } from './levels.ts';
 import { levelAlong, type Piece } from './piece.ts';
 import type { Place } from './place.ts';
+import type { Site } from './site.ts';
 import { troughWidth } from './trough-width.ts';
 import { ruleAt, type TroughWidthRule } from './trough-width-rule.ts';
 import { troughWidthWarning } from './trough-width-warning.ts';
@@ -50,10 +50,22 @@ type Packing = {
   readonly rule: TroughWidthRule<number>;
   readonly place: Place;
   readonly state: GroundState;
-  readonly numbers: number[][];
+  readonly packs: Pack[];
   readonly warnings: Set<Warning>;
   smallestWidth: number;
 };
+
+type Pack = { pack: Float64Array; count: number };
+
+/** The array of a pack, made larger when gradients have filled it. */
+function roomFor(target: Pack): Float64Array {
+  if ((target.count + 1) * PACK_STRIDE > target.pack.length) {
+    const larger = new Float64Array(2 * target.pack.length + PACK_STRIDE);
+    larger.set(target.pack);
+    target.pack = larger;
+  }
+  return target.pack;
+}
 
 function levelsAt(place: Place, axis: number): Levels {
   return { ground: place.groundLevel, founding: place.foundingLevel, axis };
@@ -64,16 +76,19 @@ function packPart(packing: Packing, piece: Piece, k: number, start: number, leng
   const levels = levelsAt(place, levelAlong(piece, start + length / 2));
   const width = troughWidth(rule, k, levels);
   packing.smallestWidth = Math.min(packing.smallestWidth, width);
-  packing.numbers[piece.group]?.push(
-    piece.plan.start[0] + start * piece.cosEast,
-    piece.plan.start[1] + start * piece.cosNorth,
-    piece.cosEast,
-    piece.cosNorth,
-    1 / width,
-    length / width,
-    piece.unitLoss / width,
-    (width * width) / depthToFocus(model.rules.focus, levels),
-  );
+  const target = packing.packs[piece.group];
+  if (target === undefined) return;
+  const into = roomFor(target);
+  const o = target.count * PACK_STRIDE;
+  into[o] = piece.plan.start[0] + start * piece.cosEast;
+  into[o + 1] = piece.plan.start[1] + start * piece.cosNorth;
+  into[o + 2] = piece.cosEast;
+  into[o + 3] = piece.cosNorth;
+  into[o + 4] = 1 / width;
+  into[o + 5] = length / width;
+  into[o + 6] = piece.unitLoss / width;
+  into[o + 7] = (width * width) / depthToFocus(model.rules.focus, levels);
+  target.count += 1;
 }
 
 function packPiece(packing: Packing, piece: Piece, length: number): void {
@@ -82,11 +97,13 @@ function packPiece(packing: Packing, piece: Piece, length: number): void {
   const highest = Math.max(piece.startLevel, levelAlong(piece, length));
   const levels = levelsAt(place, highest);
   const width = troughWidth(rule, k, levels);
-  const atGround = troughWidth(rule, k, { ...levels, founding: place.groundLevel });
-  const name = model.drives[piece.drive]?.name ?? '';
-  const crown = crownRule(piece, name, place, levels, width, atGround);
-  for (const warning of crown.warnings) warnings.add(warning);
-  if (crown.leftOut) return;
+  if (needsCrownRule(piece, levels, width)) {
+    const atGround = troughWidth(rule, k, { ...levels, founding: place.groundLevel });
+    const name = model.drives[piece.drive]?.name ?? '';
+    const crown = crownRule(piece, name, place, levels, width, atGround);
+    for (const warning of crown.warnings) warnings.add(warning);
+    if (crown.leftOut) return;
+  }
   const ofWidth = troughWidthWarning(rule, k, levels);
   if (ofWidth !== undefined) warnings.add(ofWidth);
   const ofFocus = focusWarning(model.rules.focus, rule, k);
@@ -126,18 +143,16 @@ function drivenEnds({ model, state, place, rule }: Packing): number[] {
 }
 
 /**
- * Packs the pieces that act at a place, for unit volume losses: driven up to the face, not culled,
- * cut finely enough on gradients, refused or left out by the crown rule. `culling` is off only where
- * a test asks what it leaves out.
+ * Packs the pieces that act at a place, for unit volume losses: driven up to the face, cut
+ * finely enough on gradients, refused or left out by the crown rule.
  *
  * Units: m. Valid: throws `founding-above-ground`, `below-crown-beside-drive` and
  * `trough-width-not-positive` with field `foundingLevel`. Source: [own]; the parts cite theirs.
  */
 export function levelField(
   model: GroundModel,
-  place: Place,
+  { place, blocks }: Site,
   state: GroundState,
-  culling = true,
 ): LevelField {
   if (place.foundingLevel > place.groundLevel) {
     throw new MethodError(
@@ -146,28 +161,23 @@ export function levelField(
       'foundingLevel',
     );
   }
+  const room = blocks.reduce((sum, block) => sum + block.pieces.length, 0) * PACK_STRIDE;
   const packing: Packing = {
     model,
     rule: ruleAt(model.rules.depth, state.position),
     place,
     state,
-    numbers: model.groups.map(() => []),
+    packs: model.groups.map(() => ({ pack: new Float64Array(room), count: 0 })),
     warnings: new Set(),
     smallestWidth: Infinity,
   };
   const ends = drivenEnds(packing);
-  for (const block of model.blocks) {
-    if (culling && blockIsNegligible(block, place, packing.rule, model.blocks.length)) continue;
-    packBlock(packing, block, ends);
-  }
+  for (const block of blocks) packBlock(packing, block, ends);
   for (const drive of model.drives) {
     if (drive.laterFactor !== 1) packing.warnings.add('later drive increased');
   }
   return {
-    packs: packing.numbers.map((numbers) => ({
-      pack: Float64Array.from(numbers),
-      count: numbers.length / PACK_STRIDE,
-    })),
+    packs: packing.packs,
     smallestWidth: packing.smallestWidth,
     warnings: [...packing.warnings],
   };

@@ -31,8 +31,9 @@ function layeredWidth(layers: readonly Layer<number>[], founding: number, axis: 
 export function troughWidth(
   rule: TroughWidthRule<number>,
   troughWidthParameter: number,
-  { ground, founding, axis }: Levels,
+  levels: Levels,
 ): number {
+  const { ground, founding, axis } = levels;
   const axisDepth = ground - axis;
   const depth = ground - founding;
   switch (rule.kind) {
@@ -48,17 +49,3 @@ export function troughWidth(
       return layeredWidth(rule.layers, founding, axis);
   }
 }
-
-/**
- * The same rule as plain arithmetic, for workings.
- *
- * Units: z0, z, h in m → i in m. Valid: as `troughWidth`; layers are given by their sum.
- * Source: as `troughWidth`.
- */
-export const TROUGH_WIDTH_EXPRESSIONS = {
-  constant: 'K * h',
-  clay: 'K * z0 - 0.325 * z',
-  'oreilly-new-clay': '0.43 * z0 + 1.1 - 0.325 * z',
-  'oreilly-new-sand': '(0.28 * z0 - 0.1) * h / z0',
-  layered: 'K * h',
-} as const satisfies Record<TroughWidthRule['kind'], string>;

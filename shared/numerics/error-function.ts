@@ -1,9 +1,9 @@
 import { exponential } from './exponential.ts';
 
 const SQRT_PI = 1.7724538509055159;
-/** Below it the series is short, above it the continued fraction is. */
-const CROSSOVER = 2.25;
-const FRACTION_TERMS = 80;
+/** Up to it 1 − erf keeps its digits, above it the continued fraction is short. */
+const CROSSOVER = 1.25;
+const FRACTION_TERMS = 120;
 
 function seriesOfErf(x: number): number {
   let term = x;

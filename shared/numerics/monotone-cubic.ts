@@ -1,5 +1,6 @@
 import { MethodError } from '../method-error.ts';
 import { at } from './at.ts';
+import { intervalIndex } from './interval-index.ts';
 
 /**
  * A piecewise cubic through a table that never overshoots its rows.
@@ -58,7 +59,8 @@ export function monotoneCubic(
 }
 
 /**
- * Value, slope and curvature of a monotone cubic; beyond its rows the value of the nearest row.
+ * Value, slope and curvature of a monotone cubic; beyond its rows the value of the nearest row, level.
+ * On a row the slope and curvature are those of the interval after it, on the last row before it.
  *
  * Units: those of the table. Valid: any finite x. Source: fritsch-carlson-1980.
  */
@@ -68,10 +70,9 @@ export function evaluateMonotoneCubic(
 ): { value: number; slope: number; curvature: number } {
   const xs = cubic.arguments;
   const last = xs.length - 1;
-  if (x <= at(xs, 0)) return { value: at(cubic.values, 0), slope: 0, curvature: 0 };
-  if (x >= at(xs, last)) return { value: at(cubic.values, last), slope: 0, curvature: 0 };
-  let k = 0;
-  while (at(xs, k + 1) <= x) k++;
+  if (x < at(xs, 0)) return { value: at(cubic.values, 0), slope: 0, curvature: 0 };
+  if (x > at(xs, last)) return { value: at(cubic.values, last), slope: 0, curvature: 0 };
+  const k = intervalIndex(xs, x);
   const width = at(xs, k + 1) - at(xs, k);
   const t = (x - at(xs, k)) / width;
   const rise = at(cubic.values, k + 1) - at(cubic.values, k);
