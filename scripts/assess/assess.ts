@@ -1,4 +1,3 @@
-import { METHOD_VERSION } from '../../shared/method-version.ts';
 import { CaseError } from './case-error.ts';
 import { answerAsWorker, assessInThreads } from './in-threads.ts';
 import { readCase } from './read-case.ts';
@@ -21,10 +20,11 @@ function argumentsOf(args: readonly string[]): { file: string; working: string |
 async function output(args: readonly string[]): Promise<string> {
   const { file, working } = argumentsOf(args);
   if (working !== undefined) return workingText(readCase(file), working);
-  const parts = await assessInThreads(file);
+  const { basis, parts } = await assessInThreads(file);
   for (const part of parts) if ('fault' in part) throw new CaseError(part.fault);
   const walls = parts.map((part) => ('json' in part ? part.json : '')).join(',\n');
-  return `{"walls": [\n${walls}\n],\n"methodVersion": ${JSON.stringify(METHOD_VERSION)}}\n`;
+  const { methodVersion, ...rest } = basis;
+  return `{"walls": [\n${walls}\n],\n"basis": ${JSON.stringify(rest)},\n"methodVersion": ${JSON.stringify(methodVersion)}}\n`;
 }
 
 /** Prints the results of a case as JSON, or one line about what is wrong with it and status 2. */

@@ -24,7 +24,8 @@ function documentOf(text: string): unknown {
 
 /** Reads and checks a case; what is wrong is said in one line with its path. */
 export function readCase(file: string): AssessCase {
-  const parsed = assessCaseSchema.safeParse(documentOf(textOf(file)));
-  if (!parsed.success) throw new CaseError(firstIssue(parsed.error));
+  const document = documentOf(textOf(file));
+  const parsed = assessCaseSchema.safeParse(document);
+  if (!parsed.success) throw new CaseError(firstIssue(parsed.error, document));
   return parsed.data;
 }

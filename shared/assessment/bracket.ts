@@ -3,7 +3,7 @@ import { categoryOfStrain } from '../damage/category-of-strain.ts';
 import type { Category } from '../damage/categories.ts';
 import { lossFactorsAt } from '../ground/loss-factors-at.ts';
 import type { GroundModel } from '../ground/ground-model.ts';
-import { usesTroughWidthParameter } from '../ground/trough-width-rule.ts';
+import { troughWidthMatters } from '../ground/trough-width-matters.ts';
 import { CENTRAL, FIVE_POSITIONS, isRange, type FivePosition, type Range } from '../numerics/range.ts';
 import { loadedProfile } from './loaded-profile.ts';
 import type { AssessmentRules } from './rules.ts';
@@ -35,15 +35,6 @@ export type Bracket = {
  * Units: none. Valid: made by `fieldsOverTroughWidth`. Source: [own].
  */
 export type FieldsOverTroughWidth = readonly WallField[];
-
-function troughWidthMatters(model: GroundModel): boolean {
-  const { depth } = model.rules;
-  if (depth.kind === 'layered') return depth.layers.some((layer) => isRange(layer.troughWidth));
-  return (
-    usesTroughWidthParameter(depth) &&
-    model.pieces.some((ofDrive) => ofDrive.some((piece) => isRange(piece.troughWidth)))
-  );
-}
 
 /**
  * Computes the unit fields of a wall for each position of K, once for all that follows: bracket and

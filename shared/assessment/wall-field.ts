@@ -25,7 +25,7 @@ export type WallField = {
 };
 
 /** Nodes per trough width: the error of a profile then stays under a ten-thousandth. */
-const NODES_PER_WIDTH = 5;
+const NODES_PER_WIDTH = 4;
 const MOST_INTERVALS = 2000;
 
 function nodesAlong(length: number, smallestWidth: number): Float64Array {

@@ -58,6 +58,6 @@ export function projectOntoPolyline(
   const { share, distance } = nearest;
   return {
     chainage: interpolate(at(chainages, index), at(chainages, index + 1), share),
-    offset: sideOf(point, parts, index, share) < 0 ? -distance : distance,
+    offset: distance > 0 && sideOf(point, parts, index, share) < 0 ? -distance : distance,
   };
 }

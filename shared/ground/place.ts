@@ -1,5 +1,7 @@
 import { boundingBox, type Box } from '../geometry/bounding-box.ts';
-import type { Segment } from '../geometry/point.ts';
+import { pointInPolygon } from '../geometry/point-in-polygon.ts';
+import type { PlanPoint, Segment } from '../geometry/point.ts';
+import { polygonEdges } from '../geometry/polygon-edges.ts';
 import { segmentDistance } from '../geometry/segment-distance.ts';
 
 /**
@@ -11,6 +13,8 @@ import { segmentDistance } from '../geometry/segment-distance.ts';
  */
 export type Place = {
   readonly lines: readonly Segment[];
+  /** The rings of a footprint, none for a wall: what lies inside them is no distance away. */
+  readonly rings: readonly (readonly PlanPoint[])[];
   readonly box: Box;
   readonly groundLevel: number;
   readonly foundingLevel: number;
@@ -27,15 +31,28 @@ export function placeOf(
   foundingLevel: number,
 ): Place {
   const box = boundingBox(lines.flatMap((line) => [line.start, line.end]));
-  return { lines, box, groundLevel, foundingLevel };
+  return { lines, rings: [], box, groundLevel, foundingLevel };
 }
 
 /**
- * The shortest distance in plan from a place to a line.
+ * The place of a footprint from its outer ring and its holes.
  *
- * Units: m. Valid: any line; a line wholly inside a footprint is as far off as its nearest edge.
- * Source: [own].
+ * Units: m. Valid: at least one ring with an edge. Source: [own].
+ */
+export function placeOfFootprint(
+  rings: readonly (readonly PlanPoint[])[],
+  groundLevel: number,
+  foundingLevel: number,
+): Place {
+  return { ...placeOf(rings.flatMap(polygonEdges), groundLevel, foundingLevel), rings };
+}
+
+/**
+ * The shortest distance in plan from a place to a line, 0 for a line inside a footprint.
+ *
+ * Units: m. Valid: any line. Source: [own].
  */
 export function distanceFromPlace(place: Place, line: Segment): number {
+  if (pointInPolygon(line.start, place.rings)) return 0;
   return Math.min(...place.lines.map((own) => segmentDistance(own, line)));
 }

@@ -33,7 +33,7 @@ const interval = z
     troughWidth: troughWidth.optional(),
     diameter: diameter.optional(),
   })
-  .refine(({ from, to }) => from < to, { path: ['to'], message: 'must be beyond from' });
+  .refine(({ from, to }) => from < to, { path: ['to'], error: 'must be beyond from' });
 
 const drive = z.strictObject({
   name: z.string().min(1).max(200),
@@ -66,13 +66,17 @@ const wall = z
   })
   .refine(({ from, to }) => from[0] !== to[0] || from[1] !== to[1], {
     path: ['to'],
-    message: 'is the same point as from: the wall has no length',
+    error: 'is the same point as from: the wall has no length',
   });
 
 const rules = z.strictObject({
   depth: z.enum(['clay', 'constant', 'oreilly-new-clay', 'oreilly-new-sand']).optional(),
   focus: z.enum(['axis', 'deep']).optional(),
-  cutoff: z.union([z.number().min(0).max(LIMITS.cutOff), z.literal('2.5i')]).optional(),
+  cutoff: z
+    .union([z.number().min(0).max(LIMITS.cutOff), z.literal('2.5i')], {
+      error: `must be metres from 0 (none) to ${LIMITS.cutOff}, or "2.5i"`,
+    })
+    .optional(),
   horizontalStrain: z.enum(['average', 'peak']).optional(),
   compression: z.enum(['counted', 'zero']).optional(),
 });

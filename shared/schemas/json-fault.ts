@@ -63,6 +63,7 @@ export function jsonFault(text: string): string {
     position = next;
   }
   const word = /^[^\s,\]}]{1,30}/.exec(text.slice(position, position + 30))?.[0];
-  const found = word === undefined ? 'the text ends or breaks off' : `"${word}" is not a value`;
-  return `${pathOf(frames)}: ${found} that JSON can hold (${lineAndColumn(text, position)})`;
+  const found =
+    word === undefined ? 'the text ends too early' : `"${word}" is not a value that JSON can hold`;
+  return `${pathOf(frames)}: ${found} (${lineAndColumn(text, position)})`;
 }

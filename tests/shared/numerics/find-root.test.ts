@@ -57,7 +57,9 @@ describe('findRoot', () => {
   it('finds any root of a cubic to the tolerance', () => {
     const cases = fc.tuple(numbers(-10, 10), numbers(0.1, 5), numbers(0.1, 20), numbers(0.1, 20));
     holds(cases, ([root, scale, before, after]) => {
-      const f = (x: number) => scale * (x - root) * ((x - root) * (x - root) + 1);
+      function f(x: number): number {
+        return scale * (x - root) * ((x - root) * (x - root) + 1);
+      }
       expect(Math.abs(findRoot(f, root - before, root + after, 1e-11) - root)).toBeLessThan(1e-10);
     });
   });

@@ -252,7 +252,7 @@ describe('evaluateMonotoneCubic', () => {
       [2, 3],
     ]);
     expect(evaluateMonotoneCubic(cubic, 0).slope).toBe(0.5);
-    expect(evaluateMonotoneCubic(cubic, 2).slope).toBe(2.5);
+    expect(evaluateMonotoneCubic(cubic, 2).slope).toBeCloseTo(2.5, 14);
   });
 
   it('moves with its table', () => {
