@@ -1,20 +1,51 @@
+import path from 'node:path';
+import tailwindcss from '@tailwindcss/vite';
+import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vitest/config';
 
+const server = 'http://127.0.0.1:4600';
+
 export default defineConfig({
+  plugins: [react(), tailwindcss()],
+  worker: { format: 'es' },
+  build: {
+    outDir: path.resolve(import.meta.dirname, 'dist/client'),
+    copyPublicDir: false,
+    target: 'es2022',
+    sourcemap: true,
+  },
+  server: { port: 4601, proxy: { '/api': server, '/tiles': server } },
   test: {
     projects: [
       { test: { name: 'shared', include: ['tests/shared/**/*.test.ts'] } },
       { test: { name: 'verification', include: ['tests/verification/**/*.test.ts'] } },
+      { test: { name: 'architecture', include: ['tests/architecture/**/*.test.ts'] } },
+      { test: { name: 'scripts', include: ['tests/scripts/**/*.test.ts'], testTimeout: 60_000 } },
       {
-        // one thread's files share the compiler, which takes a second to load
         test: {
-          name: 'architecture',
-          include: ['tests/architecture/**/*.test.ts'],
-          isolate: false,
+          name: 'server',
+          include: ['tests/server/**/*.test.ts'],
+          globalSetup: ['tests/support/database-setup.ts'],
+          testTimeout: 20_000,
+          hookTimeout: 30_000,
         },
       },
       {
-        test: { name: 'scripts', include: ['tests/scripts/**/*.test.ts'], testTimeout: 60_000 },
+        test: {
+          name: 'client',
+          include: ['tests/client/**/*.test.{ts,tsx}'],
+          environment: 'jsdom',
+        },
+      },
+      {
+        test: {
+          name: 'e2e',
+          include: ['tests/e2e/**/*.test.ts'],
+          globalSetup: ['tests/support/browser-setup.ts'],
+          fileParallelism: false,
+          testTimeout: 120_000,
+          hookTimeout: 120_000,
+        },
       },
     ],
   },

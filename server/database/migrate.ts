@@ -1,0 +1,45 @@
+import { Sequelize } from 'sequelize';
+import { Umzug, SequelizeStorage } from 'umzug';
+import type { Migration, MigrationContext } from './migration.ts';
+import { migration as roles } from './migrations/01-roles.ts';
+import { migration as people } from './migrations/02-people.ts';
+import { migration as schemes } from './migrations/03-schemes.ts';
+import { migration as audit } from './migrations/04-audit.ts';
+import { migration as buildings } from './migrations/05-buildings.ts';
+import { migration as background } from './migrations/06-background.ts';
+
+/** In the order in which they are applied; a new one goes to the end. */
+const MIGRATIONS: Readonly<Record<string, Migration>> = {
+  '01-roles': roles,
+  '02-people': people,
+  '03-schemes': schemes,
+  '04-audit': audit,
+  '05-buildings': buildings,
+  '06-background': background,
+};
+
+/** Opens the migrations of a database as its owner; `serverUrl` names the role that serves. */
+export function openMigrations(ownerUrl: string, serverUrl: string) {
+  const database = new Sequelize(ownerUrl, { dialect: 'postgres', logging: false });
+  const server = `"${decodeURIComponent(new URL(serverUrl).username).replaceAll('"', '""')}"`;
+  const umzug = new Umzug({
+    migrations: Object.entries(MIGRATIONS).map(([name, { up, down }]) => ({
+      name,
+      up: ({ context }: { context: MigrationContext }) => up(context),
+      down: ({ context }: { context: MigrationContext }) => down(context),
+    })),
+    context: {
+      server,
+      sql: async (text) => {
+        await database.query(text);
+      },
+    } satisfies MigrationContext,
+    storage: new SequelizeStorage({ sequelize: database, tableName: 'migrations' }),
+    logger: undefined,
+  });
+  return {
+    up: async () => (await umzug.up()).map(({ name }) => name),
+    down: async () => (await umzug.down({ to: 0 })).map(({ name }) => name),
+    close: () => database.close(),
+  };
+}

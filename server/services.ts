@@ -1,0 +1,12 @@
+import type { Logger } from 'pino';
+import type { Sequelize } from 'sequelize';
+import type { Env } from './env.ts';
+import type { Mailer } from './mail/mailer.ts';
+
+/** What handlers and commands work with; made once at start, and anew in tests. */
+export type Services = {
+  readonly env: Env;
+  readonly logger: Logger;
+  readonly database: Sequelize;
+  readonly mailer: Mailer;
+};
