@@ -8,7 +8,15 @@ const inexactMath = [
 ]; // prettier-ignore
 
 /** The compiler does not look at scripts that run before it is installed. */
-const nodeGlobals = ['console', 'performance', 'process', 'setTimeout', 'URL'];
+const nodeGlobals = [
+  'AbortController',
+  'clearTimeout',
+  'console',
+  'performance',
+  'process',
+  'setTimeout',
+  'URL',
+];
 
 export default defineConfig(
   globalIgnores(['node_modules/', 'dist/', '.cache/', '.data/']),
@@ -32,6 +40,11 @@ export default defineConfig(
       'no-param-reassign': 'error',
       'prefer-const': 'error',
     },
+  },
+  {
+    // only an interface can be merged with one of a package
+    files: ['**/*.d.ts'],
+    rules: { '@typescript-eslint/consistent-type-definitions': 'off' },
   },
   {
     files: ['shared/**/*.ts'],

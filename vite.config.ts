@@ -3,7 +3,7 @@ import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vitest/config';
 
-const server = 'http://127.0.0.1:4600';
+const server = `http://127.0.0.1:${process.env['PORT'] ?? 4600}`;
 
 export default defineConfig({
   plugins: [react(), tailwindcss()],
@@ -20,7 +20,14 @@ export default defineConfig({
       { test: { name: 'shared', include: ['tests/shared/**/*.test.ts'] } },
       { test: { name: 'verification', include: ['tests/verification/**/*.test.ts'] } },
       { test: { name: 'architecture', include: ['tests/architecture/**/*.test.ts'] } },
-      { test: { name: 'scripts', include: ['tests/scripts/**/*.test.ts'], testTimeout: 60_000 } },
+      {
+        test: {
+          name: 'scripts',
+          include: ['tests/scripts/**/*.test.ts'],
+          exclude: ['tests/scripts/start/**'],
+          testTimeout: 60_000,
+        },
+      },
       {
         test: {
           name: 'server',
@@ -38,11 +45,22 @@ export default defineConfig({
         },
       },
       {
+        // whole applications, one at a time, once the rest has left the machine to them
+        test: {
+          name: 'start',
+          include: ['tests/scripts/start/**/*.test.ts'],
+          fileParallelism: false,
+          sequence: { groupOrder: 1 },
+          testTimeout: 30_000,
+        },
+      },
+      {
         test: {
           name: 'e2e',
           include: ['tests/e2e/**/*.test.ts'],
           globalSetup: ['tests/support/browser-setup.ts'],
           fileParallelism: false,
+          sequence: { groupOrder: 2 },
           testTimeout: 120_000,
           hookTimeout: 120_000,
         },

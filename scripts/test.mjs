@@ -2,7 +2,7 @@ import { existsSync, readFileSync, rmSync } from 'node:fs';
 import path from 'node:path';
 import { installPackages, requireNode, root } from './packages.mjs';
 import { testCounts } from './test-counts.mjs';
-import { FORMAT, LINT, run, TESTS, TYPES, UNUSED } from './tools.mjs';
+import { BUILD, FORMAT, LINT, run, TESTS, TYPES, UNUSED } from './tools.mjs';
 
 const REPORT = path.join(root, '.cache', 'vitest.json');
 
@@ -11,22 +11,32 @@ async function checkCounts(tool) {
   return { passed: Number(passed), failed: Number(!passed) };
 }
 
-/** Counts tests one by one. Where `more` arguments choose some of them, the others are not missed. */
+/** Counts tests one by one. Where they are chosen by name, the others in their files are not missed. */
 async function counts(tool, more) {
   if (tool !== TESTS) return checkCounts(tool);
   rmSync(REPORT, { force: true });
   const { passed: well } = await run(TESTS, { more });
   const report = existsSync(REPORT) ? JSON.parse(readFileSync(REPORT, 'utf8')) : {};
-  const { passed, failed } = testCounts(report, { choosing: more.length > 0 });
+  const { passed, failed } = testCounts(report, {
+    choosing: more.some((word) => /^(-t|--testNamePattern)\b/.test(word)),
+  });
   const faultOutside = failed === 0 && (!well || passed === 0);
   return { passed, failed: faultOutside ? 1 : failed };
 }
 
+/** What the tests need besides packages of npm. */
+async function installPrograms() {
+  const { CHROMIUM, installDebian, POPPLER, POSTGRESQL } = await import('./start/debian.mjs');
+  const { withSentences } = await import('./start/refusal.mjs');
+  await withSentences(() => installDebian(POSTGRESQL, CHROMIUM, POPPLER));
+}
+
 requireNode();
 installPackages();
+await installPrograms();
 const more = process.argv.slice(2);
 const total = { passed: 0, failed: 0 };
-for (const tool of more.length > 0 ? [TESTS] : [TYPES, LINT, FORMAT, UNUSED, TESTS]) {
+for (const tool of more.length > 0 ? [TESTS] : [TYPES, LINT, FORMAT, UNUSED, BUILD, TESTS]) {
   console.log(`\n== ${tool.title}`);
   const start = performance.now();
   const { passed, failed } = await counts(tool, more);

@@ -3,11 +3,12 @@ import path from 'node:path';
 import { root } from './packages.mjs';
 
 const PROGRAMS = {
-  eslint: 'eslint/bin/eslint.js',
-  knip: 'knip/bin/knip.js',
-  prettier: 'prettier/bin/prettier.cjs',
-  tsc: 'typescript/bin/tsc',
-  vitest: 'vitest/vitest.mjs',
+  build: 'scripts/build.mjs',
+  eslint: 'node_modules/eslint/bin/eslint.js',
+  knip: 'node_modules/knip/bin/knip.js',
+  prettier: 'node_modules/prettier/bin/prettier.cjs',
+  tsc: 'node_modules/typescript/bin/tsc',
+  vitest: 'node_modules/vitest/vitest.mjs',
 };
 
 /** A run of a tool: its title, and the command with spaces between its words. */
@@ -28,6 +29,7 @@ export const FORMAT = tool(
   'prettier --check . --log-level=warn --cache --cache-strategy=content --cache-location=.cache/prettier',
 );
 export const UNUSED = tool('Unused code', 'knip --no-progress');
+export const BUILD = tool('Build', 'build');
 export const ARCHITECTURE = tool(
   'Architecture',
   'vitest run --project architecture --reporter=agent',
@@ -39,13 +41,14 @@ export const TESTS = tool(
 
 /** Runs a tool and says whether it passed, with its output where that is `kept` and not shown. */
 export async function run({ program, args }, { kept = false, more = [] } = {}) {
-  const file = path.join(root, 'node_modules', PROGRAMS[program]);
+  const file = path.join(root, PROGRAMS[program]);
   const output = kept ? 'pipe' : 'inherit';
+  const plain = kept || !process.stdout.isTTY;
   const child = spawn(process.execPath, [file, ...args, ...more], {
     cwd: root,
     stdio: ['ignore', output, output],
     // whatever the environment says, tests run as tests; no colours in what is kept
-    env: { ...process.env, NODE_ENV: 'test', ...(kept ? { NO_COLOR: '1' } : {}) },
+    env: { ...process.env, NODE_ENV: 'test', ...(plain ? { NO_COLOR: '1' } : {}) },
   });
   const texts = [];
   for (const stream of [child.stdout, child.stderr]) {

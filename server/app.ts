@@ -1,12 +1,13 @@
 import path from 'node:path';
 import express, { type Express } from 'express';
 import helmet from 'helmet';
-import passport from 'passport';
 import type pg from 'pg';
-import { pinoHttp } from 'pino-http';
+import { passport } from './authentication/passport.ts';
 import { AppError } from './errors.ts';
 import { answerErrors } from './middleware/answer-errors.ts';
+import { logRequests } from './middleware/log-requests.ts';
 import { requireCsrfToken } from './middleware/csrf.ts';
+import { rateLimits } from './middleware/rate-limits.ts';
 import { sessions } from './middleware/sessions.ts';
 import { handlerOf } from './routes/define-route.ts';
 import { ROUTES } from './routes/index.ts';
@@ -29,10 +30,17 @@ const CONTENT_SECURITY_POLICY = {
   },
 };
 
+function answerNotFound(): never {
+  throw new AppError('not-found');
+}
+
 /** The built client and the basemap, and the client's page for every address that is not an API's. */
 function servePages(app: Express, root: string): void {
   const client = path.join(root, 'dist', 'client');
-  app.use('/tiles', express.static(path.join(root, 'public', 'tiles'), { fallthrough: false }));
+  app.use('/tiles', express.static(path.join(root, 'public', 'tiles')), answerNotFound);
+  // a page that is older than the build must not take the client's page for a part of its program
+  const parts = express.static(path.join(client, 'assets'), { immutable: true, maxAge: '1y' });
+  app.use('/assets', parts, answerNotFound);
   app.use(express.static(client, { index: false, maxAge: '1h' }));
   app.get('/{*page}', (_req, res) => {
     res.sendFile(path.join(client, 'index.html'));
@@ -43,18 +51,19 @@ function servePages(app: Express, root: string): void {
 export function createApp(services: Services, pool: pg.Pool, root: string): Express {
   const app = express();
   app.disable('x-powered-by');
+  app.set('trust proxy', services.env.TRUST_PROXY);
   app.use(helmet({ contentSecurityPolicy: CONTENT_SECURITY_POLICY }));
-  app.use(pinoHttp({ logger: services.logger }));
+  app.use(logRequests(services));
   const api = express.Router();
   api.use(sessions(services.env, pool), passport.session(), requireCsrfToken);
   api.use(express.json({ limit: '256kb' }));
   app.use('/api', api);
+  const limits = rateLimits(services.env);
   for (const route of ROUTES) {
-    app[route.method](route.path, ...route.before, handlerOf(route, services));
+    const limit = route.limit === undefined ? [] : limits[route.limit];
+    app[route.method](route.path, ...limit, ...route.before, handlerOf(route, services));
   }
-  app.use('/api', () => {
-    throw new AppError('not-found');
-  });
+  app.use('/api', answerNotFound);
   servePages(app, root);
   app.use(answerErrors(services));
   return app;

@@ -6,8 +6,6 @@ const schema = z.object({
   PORT: z.coerce.number().int().min(0).max(65535).default(4600),
   /** The role that serves: no DDL. */
   DATABASE_URL: z.string().startsWith('postgres'),
-  /** The role that owns and migrates; only `migrate` needs it. */
-  MIGRATE_URL: z.string().startsWith('postgres').optional(),
   SESSION_SECRET: z.string().min(32),
   /** Where people reach the application, for links in mail. */
   PUBLIC_URL: z.url(),
@@ -15,15 +13,42 @@ const schema = z.object({
   DEMO: z.stringbool().default(false),
   SMTP_URL: z.string().startsWith('smtp').optional(),
   MAIL_FROM: z.email().default('groundsill@example.org'),
+  /**
+   * Failed sign-ins, and letters asked for, in a quarter of an hour: so many for one e-mail address, ten
+   * times as many from one IP address.
+   */
+  RATE_LIMIT: z.coerce.number().int().min(1).default(10),
+  /** How many proxies stand before the server; what they say of the caller is believed. */
+  TRUST_PROXY: z.coerce.number().int().min(0).default(0),
   LOG_LEVEL: z.enum(['silent', 'error', 'warn', 'info', 'debug']).default('info'),
 });
 
 export type Env = Readonly<z.infer<typeof schema>>;
 
-/** Reads the environment once; every variable that is wrong is named. */
-export function readEnv(source: NodeJS.ProcessEnv): Env {
-  const parsed = schema.safeParse(source);
+/** What migrating needs: the address of the role that owns, and who serves. */
+const migrateSchema = schema.pick({ DATABASE_URL: true }).extend({
+  MIGRATE_URL: z.string().startsWith('postgres'),
+});
+
+/** What filling the demo needs: a database, and the folder with the town's files. */
+const seedSchema = schema.pick({ DATABASE_URL: true }).extend({ DEMO_FOLDER: z.string().min(1) });
+
+function read<T>(wanted: z.ZodType<T>, source: NodeJS.ProcessEnv): T {
+  const parsed = wanted.safeParse(source);
   if (parsed.success) return parsed.data;
   const faults = parsed.error.issues.map((issue) => `${issue.path.join('.')}: ${issue.message}`);
   throw new Error(`The environment is not right.\n  ${faults.join('\n  ')}`);
+}
+
+/** Reads the environment once; every variable that is wrong is named. */
+export function readEnv(source: NodeJS.ProcessEnv): Env {
+  return read(schema, source);
+}
+
+export function readMigrateEnv(source: NodeJS.ProcessEnv): z.infer<typeof migrateSchema> {
+  return read(migrateSchema, source);
+}
+
+export function readSeedEnv(source: NodeJS.ProcessEnv): z.infer<typeof seedSchema> {
+  return read(seedSchema, source);
 }

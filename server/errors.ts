@@ -5,14 +5,15 @@ const ERRORS = {
   'not-allowed': [403, 'You may not do this.'],
   'csrf-failed': [403, 'This page is out of date. Load it again and repeat the step.'],
   'not-found': [404, 'There is nothing here, or it is not yours to see.'],
-  'conflict': [409, 'Somebody else changed this meanwhile. Load it again to see their change.'],
+  conflict: [409, 'Somebody else changed this meanwhile. Load it again to see their change.'],
   'already-exists': [409, 'This is there already.'],
+  archived: [409, 'This scheme is archived and only read. Bring it back before you change it.'],
   'link-spent': [410, 'This link has been used or is too old. Ask for a new one.'],
   'too-large': [413, 'This is too large.'],
-  'unreadable': [422, 'This could not be read.'],
+  unreadable: [422, 'This could not be read.'],
   'invalid-input': [422, 'Something in the form is not right.'],
   'too-many-requests': [429, 'Too many tries. Wait a few minutes.'],
-  'internal': [500, 'Something failed on our side. Nothing was changed. Try again.'],
+  internal: [500, 'Something failed on our side. Nothing was changed. Try again.'],
 } as const;
 
 export type ErrorCode = keyof typeof ERRORS;

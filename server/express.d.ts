@@ -3,7 +3,7 @@ import 'express-session';
 declare module 'express-session' {
   interface SessionData {
     csrfToken?: string;
-    /** When the person's sessions were last ended everywhere; an older session is not theirs. */
+    /** When the person signed in, in ms; sessions from before people.sessions_valid_from are ended. */
     signedInAt?: number;
   }
 }
@@ -12,6 +12,8 @@ declare global {
   namespace Express {
     interface User {
       id: string;
+      name: string;
+      email: string;
       isAdministrator: boolean;
     }
   }

@@ -2,6 +2,7 @@ import type { Logger } from 'pino';
 import type { Sequelize } from 'sequelize';
 import type { Env } from './env.ts';
 import type { Mailer } from './mail/mailer.ts';
+import type { TileCache } from './tiles/tile-cache.ts';
 
 /** What handlers and commands work with; made once at start, and anew in tests. */
 export type Services = {
@@ -9,4 +10,5 @@ export type Services = {
   readonly logger: Logger;
   readonly database: Sequelize;
   readonly mailer: Mailer;
+  readonly tiles: TileCache;
 };

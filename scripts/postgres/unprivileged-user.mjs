@@ -10,5 +10,7 @@ export function unprivilegedUser() {
     const account = accounts.find(([found]) => found === name);
     if (account) return { uid: Number(account[2]), gid: Number(account[3]) };
   }
-  throw new Error('PostgreSQL does not run as root and there is no account "postgres" or "nobody".');
+  throw new Error(
+    'PostgreSQL does not run as root and there is no account "postgres" or "nobody".',
+  );
 }

@@ -4,6 +4,7 @@ import { AppError } from '../errors.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
+import { lockScheme } from './lock-scheme.ts';
 import { recordChange } from './record-change.ts';
 
 /** Changes a scheme, unless somebody else has changed it since it was read. */
@@ -14,7 +15,7 @@ export async function changeScheme(
   { version, name, description }: z.infer<typeof changeSchemeSchema>,
 ): Promise<Scheme> {
   return database.transaction(async (transaction) => {
-    await scheme.reload({ transaction, lock: transaction.LOCK.UPDATE });
+    await lockScheme(scheme, transaction);
     if (scheme.version !== version) throw new AppError('conflict');
     const before = { name: scheme.name, description: scheme.description };
     const after = { name: name ?? scheme.name, description: description ?? scheme.description };

@@ -7,6 +7,8 @@ import { migration as schemes } from './migrations/03-schemes.ts';
 import { migration as audit } from './migrations/04-audit.ts';
 import { migration as buildings } from './migrations/05-buildings.ts';
 import { migration as background } from './migrations/06-background.ts';
+import { migration as mailbox } from './migrations/07-mailbox.ts';
+import { migration as buildingSearch } from './migrations/08-building-search.ts';
 
 /** In the order in which they are applied; a new one goes to the end. */
 const MIGRATIONS: Readonly<Record<string, Migration>> = {
@@ -16,6 +18,8 @@ const MIGRATIONS: Readonly<Record<string, Migration>> = {
   '04-audit': audit,
   '05-buildings': buildings,
   '06-background': background,
+  '07-mailbox': mailbox,
+  '08-building-search': buildingSearch,
 };
 
 /** Opens the migrations of a database as its owner; `serverUrl` names the role that serves. */

@@ -2,6 +2,7 @@ import type { ErrorRequestHandler } from 'express';
 import { z } from 'zod';
 import { AppError, type ErrorCode } from '../errors.ts';
 import type { Services } from '../services.ts';
+import { loggedUrl } from './log-requests.ts';
 
 const libraryError = z.object({ type: z.string() });
 
@@ -24,7 +25,8 @@ function asAppError(error: unknown): AppError {
 export function answerErrors({ logger }: Services): ErrorRequestHandler {
   return (error: unknown, req, res, next) => {
     const found = asAppError(error);
-    if (found.code === 'internal') logger.error({ err: error, path: req.path }, 'request failed');
+    if (found.code === 'internal')
+      logger.error({ err: error, path: loggedUrl(req.path) }, 'request failed');
     if (res.headersSent) {
       next(error);
       return;

@@ -2,6 +2,7 @@ import type { Sequelize } from 'sequelize';
 import { initAuditEntry } from './audit-entry.ts';
 import { initBackgroundFeature } from './background-feature.ts';
 import { initBuilding } from './building.ts';
+import { initMailboxLetter } from './mailbox-letter.ts';
 import { initMembership } from './membership.ts';
 import { initPerson } from './person.ts';
 import { initScheme } from './scheme.ts';
@@ -18,4 +19,5 @@ export function initModels(sequelize: Sequelize): void {
   initBuilding(sequelize);
   initBackgroundFeature(sequelize);
   initAuditEntry(sequelize);
+  initMailboxLetter(sequelize);
 }

@@ -6,9 +6,7 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize';
-
-export const LINK_PURPOSES = ['invitation', 'password-reset'] as const;
-export type LinkPurpose = (typeof LINK_PURPOSES)[number];
+import type { LinkPurpose } from '../../shared/schemas/links.ts';
 
 /** A link sent by mail that sets a password once. Only the hash of its token is kept. */
 export class SingleUseLink extends Model<

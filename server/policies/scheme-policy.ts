@@ -11,6 +11,7 @@ export const schemePolicy = {
     actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness'),
   updateScheme: (actor: SchemeActor) => actor.isAdministrator,
   archiveScheme: (actor: SchemeActor) => actor.isAdministrator,
+  readMembers: (actor: SchemeActor) => actor.isAdministrator,
   manageMembers: (actor: SchemeActor) => actor.isAdministrator,
   readRules: (actor: SchemeActor) =>
     actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness'),
@@ -21,16 +22,34 @@ export const schemePolicy = {
 
 export type SchemeAction = keyof typeof schemePolicy;
 
+/** What changes what a scheme holds: not in an archived one. */
+const CHANGES: ReadonlySet<SchemeAction> = new Set([
+  'updateScheme',
+  'manageMembers',
+  'updateRules',
+  'updateBackground',
+]);
+
+export function changesScheme(action: SchemeAction): boolean {
+  return CHANGES.has(action);
+}
+
 /** The answer to every question of the policy, for the client. */
-export function schemeAbilities(actor: SchemeActor): Record<SchemeAction, boolean> {
+export function schemeAbilities(
+  actor: SchemeActor,
+  isArchived: boolean,
+): Record<SchemeAction, boolean> {
+  const can = (action: SchemeAction) =>
+    schemePolicy[action](actor) && !(isArchived && changesScheme(action));
   return {
-    readScheme: schemePolicy.readScheme(actor),
-    readRegister: schemePolicy.readRegister(actor),
-    updateScheme: schemePolicy.updateScheme(actor),
-    archiveScheme: schemePolicy.archiveScheme(actor),
-    manageMembers: schemePolicy.manageMembers(actor),
-    readRules: schemePolicy.readRules(actor),
-    updateRules: schemePolicy.updateRules(actor),
-    updateBackground: schemePolicy.updateBackground(actor),
+    readScheme: can('readScheme'),
+    readRegister: can('readRegister'),
+    updateScheme: can('updateScheme'),
+    archiveScheme: can('archiveScheme'),
+    readMembers: can('readMembers'),
+    manageMembers: can('manageMembers'),
+    readRules: can('readRules'),
+    updateRules: can('updateRules'),
+    updateBackground: can('updateBackground'),
   };
 }

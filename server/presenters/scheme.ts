@@ -15,6 +15,6 @@ export function presentScheme(scheme: Scheme, actor: SchemeActor): SchemeAnswer 
     registerVersion: scheme.registerVersion,
     backgroundVersion: scheme.backgroundVersion,
     roles: [...actor.roles].sort(),
-    abilities: schemeAbilities(actor),
+    abilities: schemeAbilities(actor, scheme.archivedAt !== null),
   };
 }

@@ -2,10 +2,11 @@ import type { NextFunction, Request, RequestHandler, Response } from 'express';
 import type { z } from 'zod';
 import { AppError } from '../errors.ts';
 import { loadScheme } from '../middleware/load-scheme.ts';
+import type { RateLimitName } from '../middleware/rate-limits.ts';
 import { requireActor } from '../middleware/require-actor.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor, SchemeActor } from '../policies/actor.ts';
-import { schemePolicy, type SchemeAction } from '../policies/scheme-policy.ts';
+import { changesScheme, schemePolicy, type SchemeAction } from '../policies/scheme-policy.ts';
 import type { Services } from '../services.ts';
 
 /**
@@ -42,7 +43,9 @@ export type Route = {
   readonly method: Method;
   readonly path: string;
   readonly access: Access;
-  /** Middleware for bodies that are not JSON, and for limits of rate. */
+  /** How often it may be called. */
+  readonly limit: RateLimitName | undefined;
+  /** Middleware for bodies that are not JSON. */
   readonly before: readonly RequestHandler[];
   readonly respond: (services: Services) => (req: Request, res: Response) => Promise<void>;
 };
@@ -68,8 +71,11 @@ async function contextOf(access: Access, services: Services, req: Request): Prom
     if (!actor.isAdministrator) throw new AppError('not-allowed');
     return { actor };
   }
-  const loaded = await loadScheme(services, actor, req.params['schemeId']);
+  const loaded = await loadScheme(services, actor, req.params.schemeId);
   if (!schemePolicy[access.scheme](loaded.actor)) throw new AppError('not-allowed');
+  if (loaded.scheme.archivedAt !== null && changesScheme(access.scheme)) {
+    throw new AppError('archived');
+  }
   return loaded;
 }
 
@@ -77,21 +83,28 @@ async function contextOf(access: Access, services: Services, req: Request): Prom
  * Declares a route: who, what shape, then what is done. What `handle` returns is the answer, 204 for
  * nothing; a handler that answers by itself (a tile, a file) ends `res` and returns undefined.
  */
-export function defineRoute<const A extends Access, Params = undefined, Query = undefined, Body = undefined>(
+export function defineRoute<
+  const A extends Access,
+  Params = undefined,
+  Query = undefined,
+  Body = undefined,
+>(
   definition: {
     method: Method;
     path: string;
     access: A;
+    limit?: RateLimitName;
     before?: readonly RequestHandler[];
     status?: number;
     handle: (call: Call<A, Params, Query, Body>) => unknown;
   } & Schemas<Params, Query, Body>,
 ): Route {
-  const { method, path, access, before = [], status = 200, handle } = definition;
+  const { method, path, access, limit, before = [], status = 200, handle } = definition;
   return {
     method,
     path,
     access,
+    limit,
     before,
     respond: (services) => async (req, res) => {
       const context = await contextOf(access, services, req);

@@ -1,5 +1,31 @@
+import { auditRoutes } from './audit.ts';
+import { backgroundRoutes } from './background.ts';
+import { buildingRoutes } from './buildings.ts';
+import { crsRoutes } from './crs.ts';
 import type { Route } from './define-route.ts';
+import { linkRoutes } from './links.ts';
+import { mailboxRoutes } from './mailbox.ts';
+import { memberRoutes } from './members.ts';
+import { peopleRoutes } from './people.ts';
+import { rulesRoutes } from './rules.ts';
 import { schemeRoutes } from './schemes.ts';
+import { sessionRoutes } from './session.ts';
+import { tileRoutes } from './tiles.ts';
+import { waitingRoutes } from './waiting.ts';
 
 /** Every route there is; a test walks this list for every role. */
-export const ROUTES: readonly Route[] = [...schemeRoutes];
+export const ROUTES: readonly Route[] = [
+  ...sessionRoutes,
+  ...linkRoutes,
+  ...peopleRoutes,
+  ...auditRoutes,
+  ...mailboxRoutes,
+  ...schemeRoutes,
+  ...memberRoutes,
+  ...rulesRoutes,
+  ...crsRoutes,
+  ...backgroundRoutes,
+  ...buildingRoutes,
+  ...tileRoutes,
+  ...waitingRoutes,
+];

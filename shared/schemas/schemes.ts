@@ -35,7 +35,17 @@ export const changeSchemeSchema = z.strictObject({
 });
 
 /**
- * A scheme as the server answers, with the caller's roles and abilities.
+ * Archives a scheme or brings it back; `version` is the one it was read at.
+ *
+ * Units: none. Valid: a version that is not the newest is refused. Source: [own].
+ */
+export const archiveSchemeSchema = z.strictObject({
+  archived: z.boolean(),
+  version: z.number().int().positive(),
+});
+
+/**
+ * A scheme as the server answers, with the caller's roles and abilities. An archived one is only read.
  *
  * Units: crs is an EPSG number. Valid: abilities are the server's answers; the client never works them
  * out. Source: [own].
@@ -59,3 +69,10 @@ export const schemeSchema = z.strictObject({
  * Units: as schemeSchema. Valid: parsed by it. Source: [own].
  */
 export type SchemeAnswer = z.infer<typeof schemeSchema>;
+
+/**
+ * The schemes that the caller has a part in, by name; the administrator's are all.
+ *
+ * Units: as schemeSchema. Valid: archived ones are among them. Source: [own].
+ */
+export const schemesSchema = z.array(schemeSchema);

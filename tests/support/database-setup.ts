@@ -1,22 +1,12 @@
-import path from 'node:path';
 import type { TestProject } from 'vitest/node';
-import { startCluster } from '../../scripts/postgres/cluster.mjs';
 import { openMigrations } from '../../server/database/migrate.ts';
+import { startThrowAwayCluster } from './throw-away-cluster.ts';
 
-export const TEMPLATE = 'groundsill_template';
-
-declare module 'vitest' {
-  interface ProvidedContext {
-    /** Addresses of the throw-away cluster, with DATABASE where the name of the database goes. */
-    cluster: { superUrl: string; ownerUrl: string; serverUrl: string };
-  }
-}
+const TEMPLATE = 'groundsill_template';
 
 /** Starts a throw-away cluster and migrates the database that each test file copies. */
 export default async function setUp(project: TestProject): Promise<() => void> {
-  const home = path.resolve(import.meta.dirname, '../../.data/postgres-test');
-  const cluster = await startCluster({ home, fast: true });
-  cluster.sql('postgres', `drop database if exists ${TEMPLATE} with (force)`);
+  const cluster = await startThrowAwayCluster();
   cluster.ensureDatabase(TEMPLATE);
   const migrations = openMigrations(cluster.ownerUrl(TEMPLATE), cluster.serverUrl(TEMPLATE));
   await migrations.up();
@@ -26,7 +16,5 @@ export default async function setUp(project: TestProject): Promise<() => void> {
     ownerUrl: cluster.ownerUrl('DATABASE'),
     serverUrl: cluster.serverUrl('DATABASE'),
   });
-  return () => {
-    cluster.stop();
-  };
+  return cluster.remove;
 }

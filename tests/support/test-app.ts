@@ -1,12 +1,14 @@
 import type { Express } from 'express';
 import pg from 'pg';
-import { pino } from 'pino';
+import type { DestinationStream } from 'pino';
 import { afterAll, beforeAll } from 'vitest';
 import { createApp } from '../../server/app.ts';
 import { connectDatabase } from '../../server/database/connect.ts';
 import { readEnv } from '../../server/env.ts';
+import { createLogger } from '../../server/logger.ts';
 import type { Letter } from '../../server/mail/mailer.ts';
 import type { Services } from '../../server/services.ts';
+import { createTileCache } from '../../server/tiles/tile-cache.ts';
 import { createTestDatabase } from './test-database.ts';
 
 export type TestApp = {
@@ -16,8 +18,15 @@ export type TestApp = {
   readonly letters: Letter[];
 };
 
-/** The application on a database of its own for the tests of one file. */
-export function testApp(): TestApp {
+/** The application on a database of its own for the tests of one file; `env` and `log` override. */
+export function testApp({
+  env: overrides = {},
+  log,
+}: {
+  readonly env?: Readonly<Record<string, string>>;
+  /** Where the log goes; nowhere else. */
+  readonly log?: DestinationStream;
+} = {}): TestApp {
   const letters: Letter[] = [];
   let running: { app: Express; services: Services } | undefined;
   let close: (() => Promise<void>) | undefined;
@@ -31,6 +40,7 @@ export function testApp(): TestApp {
       PUBLIC_URL: 'http://127.0.0.1:4600',
       DEMO: 'true',
       LOG_LEVEL: 'silent',
+      ...overrides,
     });
     const database = connectDatabase(env.DATABASE_URL);
     const pool = new pg.Pool({ connectionString: env.DATABASE_URL, max: 3 });
@@ -40,7 +50,13 @@ export function testApp(): TestApp {
         return Promise.resolve();
       },
     };
-    const services = { env, database, mailer, logger: pino({ level: 'silent' }) };
+    const services = {
+      env,
+      database,
+      mailer,
+      logger: createLogger(env, log),
+      tiles: createTileCache(),
+    };
     running = { services, app: createApp(services, pool, process.cwd()) };
     close = async () => {
       await database.close();

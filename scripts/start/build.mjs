@@ -1,0 +1,62 @@
+import { spawnSync } from 'node:child_process';
+import { mkdirSync, rmSync, writeFileSync } from 'node:fs';
+import path from 'node:path';
+import { root } from '../packages.mjs';
+import { fingerprint, stampIn } from './sources.mjs';
+import { Refusal } from './refusal.mjs';
+
+const CLIENT = ['index.html', 'src', 'shared', 'vite.config.ts', 'tailwind.config.ts'];
+const SERVER = ['server', 'shared'];
+const COMMON = ['package-lock.json', 'tsconfig.json', 'scripts/start/build.mjs'];
+
+function buildClient() {
+  const vite = path.join(root, 'node_modules/vite/bin/vite.js');
+  const { status } = spawnSync(process.execPath, [vite, 'build', '--logLevel', 'warn'], {
+    cwd: root,
+    stdio: ['ignore', process.stderr, process.stderr],
+    env: {
+      ...process.env,
+      ...(process.stderr.isTTY ? {} : { NO_COLOR: '1' }),
+      NODE_ENV: 'production',
+    },
+  });
+  if (status !== 0) throw new Refusal('The pages could not be built: see above.');
+}
+
+async function buildServer() {
+  const { build } = await import('esbuild');
+  await build({
+    absWorkingDir: root,
+    entryPoints: ['server/index.ts', 'server/migrate.ts', 'server/seed.ts'],
+    outdir: 'dist/server',
+    outExtension: { '.js': '.mjs' },
+    bundle: true,
+    packages: 'external',
+    format: 'esm',
+    platform: 'node',
+    target: 'node20',
+    sourcemap: true,
+    logLevel: 'error',
+  });
+}
+
+/** Builds a part of dist/ unless it was built to the end from these very sources. */
+async function buildPart(name, sources, work) {
+  const folder = path.join(root, 'dist', name);
+  const wanted = fingerprint(...sources, ...COMMON);
+  if (stampIn(folder) === wanted) return [];
+  rmSync(folder, { recursive: true, force: true });
+  await work();
+  mkdirSync(folder, { recursive: true });
+  writeFileSync(path.join(folder, '.stamp'), wanted);
+  return [name];
+}
+
+/** Builds client and server where their sources have changed, and says which. */
+export async function build() {
+  const built = [
+    ...(await buildPart('client', CLIENT, buildClient)),
+    ...(await buildPart('server', SERVER, buildServer)),
+  ];
+  return { said: built.length === 0 ? 'there' : `built ${built.join(' and ')}` };
+}

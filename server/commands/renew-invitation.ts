@@ -1,0 +1,31 @@
+import { AppError } from '../errors.ts';
+import { Person } from '../models/person.ts';
+import type { Actor } from '../policies/actor.ts';
+import type { Services } from '../services.ts';
+import { issueLink } from './issue-link.ts';
+import { recordChange } from './record-change.ts';
+import { sendInvitation } from './send-invitation.ts';
+
+/** Sends somebody who has no password yet a new link; the old one ends. Whether the letter went out. */
+export async function renewInvitation(
+  services: Services,
+  by: Actor,
+  personId: string,
+): Promise<boolean> {
+  const link = await services.database.transaction(async (transaction) => {
+    const person = await Person.findByPk(personId, {
+      transaction,
+      lock: transaction.LOCK.NO_KEY_UPDATE,
+    });
+    if (person === null) throw new AppError('not-found');
+    if (person.passwordHash !== null) {
+      throw new AppError('conflict', 'They have a password already. It can be reset at sign-in.');
+    }
+    const issued = await issueLink(services.env, person.id, 'invitation', transaction);
+    const subject = { kind: 'person', id: person.id };
+    const after = { invitedUntil: issued.until };
+    await recordChange({ by, action: 'renew invitation', subject, after }, transaction);
+    return issued;
+  });
+  return sendInvitation(services, by, personId, link);
+}

@@ -1,0 +1,43 @@
+import { promisify } from 'node:util';
+import { crc32, inflateRaw } from 'node:zlib';
+import { AppError } from '../errors.ts';
+import type { ZipEntry } from './zip-entries.ts';
+
+const inflate = promisify<Buffer, { maxOutputLength: number }, Buffer>(inflateRaw);
+
+const OWN_HEADING = 0x04034b50;
+const OWN_HEADING_SIZE = 30;
+const STORED = 0;
+const DEFLATED = 8;
+
+function damaged({ name }: ZipEntry): AppError {
+  return new AppError('unreadable', `The archive cannot be read: "${name}" is damaged.`);
+}
+
+function packedBytes(bytes: Buffer, entry: ZipEntry): Buffer {
+  const { at, packed } = entry;
+  if (at + OWN_HEADING_SIZE > bytes.length || bytes.readUInt32LE(at) !== OWN_HEADING) {
+    throw damaged(entry);
+  }
+  const start = at + OWN_HEADING_SIZE + bytes.readUInt16LE(at + 26) + bytes.readUInt16LE(at + 28);
+  if (start + packed > bytes.length) throw damaged(entry);
+  return bytes.subarray(start, start + packed);
+}
+
+/** A file of an archive, unpacked to the length that the list gives and to no more. */
+export async function unpackEntry(bytes: Buffer, entry: ZipEntry): Promise<Buffer> {
+  const packed = packedBytes(bytes, entry);
+  if (entry.method !== STORED && entry.method !== DEFLATED) {
+    throw new AppError('unreadable', `"${entry.name}" is packed in a way that is not known here.`);
+  }
+  try {
+    const file =
+      entry.method === STORED
+        ? packed
+        : await inflate(packed, { maxOutputLength: Math.max(1, entry.unpacked) });
+    if (file.length === entry.unpacked && crc32(file) === entry.crc) return file;
+  } catch (error) {
+    throw error instanceof AppError ? error : damaged(entry);
+  }
+  throw damaged(entry);
+}

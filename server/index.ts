@@ -1,0 +1,56 @@
+import { createServer, type Server } from 'node:http';
+import { createApp } from './app.ts';
+import { readEnv } from './env.ts';
+import { openServices } from './open-services.ts';
+import { report } from './report.ts';
+
+/** How long requests in hand may take once the server is told to stop. */
+const PATIENCE_MS = 5000;
+
+function listen(server: Server, port: number, host: string): Promise<void> {
+  return new Promise((resolve, reject) => {
+    server.once('error', reject);
+    server.listen(port, host, resolve);
+  });
+}
+
+function close(server: Server): Promise<void> {
+  const patience = setTimeout(() => {
+    server.closeAllConnections();
+  }, PATIENCE_MS);
+  return new Promise((resolve) => {
+    server.close(() => {
+      clearTimeout(patience);
+      resolve();
+    });
+  });
+}
+
+/** Resolves when this process is told to stop, or when the one that started it is gone. */
+function toldToStop(): Promise<void> {
+  return new Promise((resolve) => {
+    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) {
+      process.on(signal, () => {
+        resolve();
+      });
+    }
+    process.once('disconnect', resolve);
+  });
+}
+
+/** Serves until told to stop, then answers what is in hand and closes what was opened. */
+async function serve(): Promise<void> {
+  const env = readEnv(process.env);
+  const stop = toldToStop();
+  const { services, pool, closeServices } = await openServices(env);
+  const server = createServer(createApp(services, pool, process.cwd()));
+  await listen(server, env.PORT, env.HOST);
+  report({ listening: true });
+  services.logger.info({ port: env.PORT }, 'listening');
+  await stop;
+  await close(server);
+  await closeServices();
+  if (process.connected) process.disconnect();
+}
+
+await serve();

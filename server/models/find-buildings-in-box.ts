@@ -1,0 +1,28 @@
+import { QueryTypes, type Sequelize } from 'sequelize';
+import type { Position } from 'geojson';
+
+/** West, south, east and north in degrees. */
+export type LonLatBox = [number, number, number, number];
+
+export type DrawnBuilding = {
+  readonly id: number;
+  readonly reference: string;
+  readonly name: string | null;
+  readonly lonLat: Position[][][];
+};
+
+/** The buildings of a scheme that may reach into a box. The box is written as in the index, or it is not used. */
+export async function findBuildingsInBox(
+  database: Sequelize,
+  schemeId: string,
+  [west, south, east, north]: LonLatBox,
+): Promise<DrawnBuilding[]> {
+  return database.query<DrawnBuilding>(
+    `select id, reference, name, lon_lat as "lonLat"
+     from buildings
+     where scheme_id = $1
+       and box(point(west, south), point(east, north)) && box(point($2, $3), point($4, $5))
+     order by id`,
+    { type: QueryTypes.SELECT, bind: [schemeId, west, south, east, north] },
+  );
+}

@@ -1,0 +1,33 @@
+import pg from 'pg';
+import { connectDatabase } from './database/connect.ts';
+import type { Env } from './env.ts';
+import { createLogger } from './logger.ts';
+import { openMail } from './mail/open-mail.ts';
+import type { Services } from './services.ts';
+import { createTileCache } from './tiles/tile-cache.ts';
+
+export type OpenServices = {
+  readonly services: Services;
+  /** Holds the sessions. */
+  readonly pool: pg.Pool;
+  readonly closeServices: () => Promise<void>;
+};
+
+/** Opens what the application works with, and gives the way to close it. */
+export async function openServices(env: Env): Promise<OpenServices> {
+  const logger = createLogger(env);
+  const database = connectDatabase(env.DATABASE_URL);
+  const pool = new pg.Pool({ connectionString: env.DATABASE_URL, max: 5 });
+  // an idle connection that breaks is replaced at the next request; unheard, it would end the process
+  pool.on('error', (error) => {
+    logger.error({ err: error }, 'a connection for sessions broke');
+  });
+  const mail = await openMail(env, logger);
+  return {
+    services: { env, logger, database, mailer: mail.mailer, tiles: createTileCache() },
+    pool,
+    closeServices: async () => {
+      await Promise.all([mail.close(), database.close(), pool.end()]);
+    },
+  };
+}

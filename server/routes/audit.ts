@@ -1,0 +1,17 @@
+import { auditQuerySchema } from '../../shared/schemas/audit.ts';
+import { findAuditPage } from '../models/find-audit-page.ts';
+import { presentAuditEntry } from '../presenters/audit-entry.ts';
+import { defineRoute } from './define-route.ts';
+
+export const auditRoutes = [
+  defineRoute({
+    method: 'get',
+    path: '/api/audit',
+    access: 'administrator',
+    query: auditQuerySchema,
+    handle: async ({ query }) => {
+      const { records, next } = await findAuditPage(query);
+      return { entries: records.map(presentAuditEntry), next };
+    },
+  }),
+];

@@ -1,0 +1,84 @@
+import { z } from 'zod';
+import { emailSchema } from './passwords.ts';
+import { roleSchema } from './roles.ts';
+
+/**
+ * Lengths and counts of what is written about people.
+ *
+ * Units: characters; memberships as a count. Valid: read only. Source: [own].
+ */
+export const PEOPLE_LIMITS = { name: 120, memberships: 100 } as const;
+
+const name = z
+  .string()
+  .trim()
+  .min(1, 'Say who it is.')
+  .max(PEOPLE_LIMITS.name, `Use at most ${PEOPLE_LIMITS.name} characters.`)
+  .regex(/^\P{Cc}*$/u, 'Write the name on one line.');
+
+/**
+ * A new person: an invitation goes to the address.
+ *
+ * Units: none. Valid: the address is nobody's yet and every scheme is there, checked by the server.
+ * Source: [own].
+ */
+export const newPersonSchema = z.strictObject({
+  name,
+  email: emailSchema,
+  isAdministrator: z.boolean().default(false),
+  memberships: z
+    .array(z.strictObject({ schemeId: z.uuid(), role: roleSchema }))
+    .max(PEOPLE_LIMITS.memberships)
+    .default([]),
+});
+
+/**
+ * A change of a person; what is left out stays.
+ *
+ * Units: none. Valid: one administrator who can sign in must remain. Source: [own].
+ */
+export const changePersonSchema = z.strictObject({
+  name: name.optional(),
+  isAdministrator: z.boolean().optional(),
+});
+
+/**
+ * A person as the administrator sees them.
+ *
+ * Units: none. Valid: `invitedUntil` is when the open invitation ends, null without one; abilities are
+ * the server's answers. Source: [own].
+ */
+export const personSchema = z.strictObject({
+  id: z.uuid(),
+  name: z.string(),
+  email: z.string(),
+  isAdministrator: z.boolean(),
+  hasPassword: z.boolean(),
+  invitedUntil: z.iso.datetime().nullable(),
+  createdAt: z.iso.datetime(),
+  memberships: z.array(
+    z.strictObject({ schemeId: z.uuid(), schemeName: z.string(), role: roleSchema }),
+  ),
+  abilities: z.strictObject({ invite: z.boolean() }),
+});
+
+/**
+ * A person as the administrator sees them.
+ *
+ * Units: as personSchema. Valid: parsed by it. Source: [own].
+ */
+export type PersonAnswer = z.infer<typeof personSchema>;
+
+/**
+ * What an invitation is answered with. The person stands even where the letter could not be sent.
+ *
+ * Units: none. Valid: where letterSent is false, the invitation can be sent again. Source: [own].
+ */
+export const invitedSchema = z.strictObject({ person: personSchema, letterSent: z.boolean() });
+
+/**
+ * What an invitation is answered with.
+ *
+ * Units: as invitedSchema. Valid: parsed by it. Source: [own].
+ */
+export type InvitedAnswer = z.infer<typeof invitedSchema>;

@@ -1,0 +1,48 @@
+import type { SchemeAnswer } from '../../shared/schemas/schemes.ts';
+import type { Destination } from '../components/layout/go-to.tsx';
+import { PATHS, planPath, settingsPath } from '../config/paths.ts';
+import { can } from '../features/schemes/can.ts';
+import type { SignedInPerson } from '../features/session/person-context.ts';
+
+type Link = { readonly to: string; readonly label: string };
+
+/** The administrator's screens outside of schemes; the mailbox is in the demo only. */
+export function administratorLinks({ isAdministrator, demo }: SignedInPerson): readonly Link[] {
+  if (!isAdministrator) return [];
+  const mailbox = { to: PATHS.mailbox, label: 'Mailbox' };
+  return [
+    { to: PATHS.people, label: 'People' },
+    { to: PATHS.audit, label: 'Audit' },
+    ...(demo ? [mailbox] : []),
+  ];
+}
+
+/** The screens of a scheme that the person may see. */
+export function schemeLinks(scheme: SchemeAnswer): readonly Link[] {
+  const plan = { to: planPath(scheme.id), label: 'Plan' };
+  return [
+    ...(can(scheme, 'readRegister') ? [plan] : []),
+    { to: settingsPath(scheme.id), label: 'Settings' },
+  ];
+}
+
+function asDestinations(links: readonly Link[], note: string): Destination[] {
+  return links.map(({ to, label }) => ({ to, title: label, note }));
+}
+
+/** Everywhere that the person can go from anywhere; the scheme at hand comes first. */
+export function destinationsOf(
+  person: SignedInPerson,
+  schemes: readonly SchemeAnswer[],
+  currentId: string | undefined,
+): Destination[] {
+  const here = schemes.filter(({ id }) => id === currentId);
+  const elsewhere = schemes.filter(({ id }) => id !== currentId);
+  return [
+    ...here.flatMap((scheme) => asDestinations(schemeLinks(scheme), scheme.name)),
+    { to: PATHS.schemes, title: 'Schemes', note: 'what waits for you' },
+    ...elsewhere.flatMap((scheme) => asDestinations(schemeLinks(scheme), scheme.name)),
+    ...asDestinations(administratorLinks(person), 'administration'),
+    { to: PATHS.account, title: 'Account', note: 'password and sessions' },
+  ];
+}

@@ -1,0 +1,13 @@
+import type { ReactNode } from 'react';
+import { Content } from '../components/layout/content.tsx';
+import { TopBar } from './top-bar.tsx';
+
+/** A page outside of schemes, under the bar. */
+export function Framed({ children }: { readonly children: ReactNode }) {
+  return (
+    <>
+      <TopBar />
+      <Content>{children}</Content>
+    </>
+  );
+}

@@ -1,0 +1,13 @@
+import { QueryClientProvider } from '@tanstack/react-query';
+import { RouterProvider } from 'react-router-dom';
+import { queryClient } from '../lib/query-client.ts';
+import { router } from './router.tsx';
+
+/** What every page stands on: what has been fetched, and the address. */
+export function Providers() {
+  return (
+    <QueryClientProvider client={queryClient}>
+      <RouterProvider router={router} />
+    </QueryClientProvider>
+  );
+}

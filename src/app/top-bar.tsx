@@ -1,0 +1,64 @@
+import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
+import { useNavigate } from 'react-router-dom';
+import type { SchemeAnswer } from '../../shared/schemas/schemes.ts';
+import { Bar } from '../components/layout/bar.tsx';
+import type { Tab } from '../components/layout/bar-tabs.tsx';
+import { GoTo } from '../components/layout/go-to.tsx';
+import { KeysHelp } from '../components/layout/keys-help.tsx';
+import { PersonMenu } from '../components/layout/person-menu.tsx';
+import { SchemeSwitcher } from '../components/layout/scheme-switcher.tsx';
+import { PATHS, schemePath } from '../config/paths.ts';
+import { schemesQuery } from '../features/schemes/api/list-schemes.ts';
+import { useSignOut } from '../features/session/api/sign-out.ts';
+import { usePerson } from '../features/session/person-context.ts';
+import { useHotkeys } from '../hooks/use-hotkeys.ts';
+import { administratorLinks, destinationsOf, schemeLinks } from './destinations.ts';
+import { KEYS } from './keys.ts';
+
+function tabsOf(scheme: SchemeAnswer | undefined, links: readonly Tab[]): readonly Tab[] {
+  if (scheme !== undefined) return schemeLinks(scheme);
+  return links.length === 0 ? [] : [{ to: PATHS.schemes, label: 'Schemes', end: true }, ...links];
+}
+
+/** The bar with what is known of the person and, inside one, of the scheme. */
+export function TopBar({ scheme }: { readonly scheme?: SchemeAnswer }) {
+  const person = usePerson();
+  const navigate = useNavigate();
+  const { data: schemes = [] } = useQuery(schemesQuery);
+  const signOut = useSignOut();
+  const [showsKeys, setShowsKeys] = useState(false);
+  const links = administratorLinks(person);
+  const others = schemes.filter(({ id, archivedAt }) => id !== scheme?.id && archivedAt === null);
+
+  function showKeys() {
+    setShowsKeys(true);
+  }
+  useHotkeys({ '?': showKeys });
+  return (
+    <Bar
+      tabs={tabsOf(scheme, links)}
+      scheme={scheme && <SchemeSwitcher current={scheme} others={others} pathOf={schemePath} />}
+    >
+      <GoTo
+        destinations={destinationsOf(person, schemes, scheme?.id)}
+        onGo={(to) => void navigate(to)}
+      />
+      <PersonMenu
+        name={person.name}
+        links={[...(scheme === undefined ? [] : links), { to: PATHS.account, label: 'Account' }]}
+        onShowKeys={showKeys}
+        onSignOut={() => {
+          signOut.mutate();
+        }}
+      />
+      <KeysHelp
+        open={showsKeys}
+        help={KEYS}
+        onClose={() => {
+          setShowsKeys(false);
+        }}
+      />
+    </Bar>
+  );
+}

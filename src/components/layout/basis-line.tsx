@@ -1,0 +1,35 @@
+import type { ReactNode } from 'react';
+import { classNames } from '../../lib/class-names.ts';
+
+type BasisLineProps = {
+  /** What the screen rests on, from the most to the least important. */
+  readonly parts: readonly ReactNode[];
+  /** Which value is shown, or what is not recorded. */
+  readonly end?: ReactNode;
+  /** Nothing here is recorded: clay-washed, with a dashed edge. */
+  readonly preview?: boolean;
+};
+
+/** The line under the bar that says what a working screen rests on. */
+export function BasisLine({ parts, end, preview = false }: BasisLineProps) {
+  return (
+    <div
+      role="note"
+      aria-label="What this rests on"
+      className={classNames(
+        'flex h-basis flex-none items-center overflow-x-auto px-4 text-cap whitespace-nowrap text-ink-2',
+        '[&_b]:font-semibold [&_b]:text-ink',
+        preview
+          ? 'border-b-2 border-dashed border-clay bg-clay-wash'
+          : 'border-b border-hairline bg-paper',
+      )}
+    >
+      {parts.map((part, index) => (
+        <span key={index} className="[&+&]:ml-3 [&+&]:border-l [&+&]:border-rule [&+&]:pl-3">
+          {part}
+        </span>
+      ))}
+      {end !== undefined && <span className="ml-auto pl-6">{end}</span>}
+    </div>
+  );
+}

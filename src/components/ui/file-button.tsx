@@ -1,0 +1,35 @@
+import { useRef, type ReactNode } from 'react';
+import { Button } from './button.tsx';
+
+type FileButtonProps = {
+  /** What the button is called where several stand on a page. */
+  readonly label: string;
+  readonly accept: string;
+  readonly onFile: (file: File) => void;
+  readonly children: ReactNode;
+};
+
+/** Asks for a file. */
+export function FileButton({ label, accept, onFile, children }: FileButtonProps) {
+  const input = useRef<HTMLInputElement>(null);
+  return (
+    <>
+      <input
+        ref={input}
+        type="file"
+        accept={accept}
+        className="hidden"
+        aria-label={label}
+        onChange={({ target }) => {
+          const file = target.files?.[0];
+          // so that the same file, mended, can be chosen again
+          target.value = '';
+          if (file !== undefined) onFile(file);
+        }}
+      />
+      <Button aria-label={label} onClick={() => input.current?.click()}>
+        {children}
+      </Button>
+    </>
+  );
+}

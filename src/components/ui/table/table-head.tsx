@@ -1,0 +1,72 @@
+import type { SortDirection, Table as TableModel } from '@tanstack/react-table';
+import { classNames } from '../../../lib/class-names.ts';
+import { columnStyle, type Column } from './column.ts';
+
+const ARIA_SORT = { asc: 'ascending', desc: 'descending' } as const;
+
+function SortMark({ direction }: { readonly direction: SortDirection }) {
+  return (
+    <svg width="7" height="5" aria-hidden="true" className="mb-0.5 ml-1 inline-block fill-ink">
+      <path d={direction === 'asc' ? 'M0 5 3.5 0 7 5z' : 'M0 0 3.5 5 7 0z'} />
+    </svg>
+  );
+}
+
+type HeadingProps<T> = { readonly column: Column<T>; readonly model: TableModel<T> };
+
+function Heading<T>({ column, model }: HeadingProps<T>) {
+  const sorting = model.getColumn(column.id);
+  const direction = sorting?.getIsSorted();
+  const sorted = direction === 'asc' || direction === 'desc' ? direction : undefined;
+  const words = (
+    <>
+      {column.heading}
+      {sorted !== undefined && <SortMark direction={sorted} />}
+      {column.unit !== undefined && (
+        <small className="block text-micro font-normal text-ink-3">{column.unit}</small>
+      )}
+    </>
+  );
+  return (
+    <th
+      scope="col"
+      aria-sort={sorted === undefined ? undefined : ARIA_SORT[sorted]}
+      className={classNames(
+        'sticky top-0 z-10 border-b border-rule bg-paper px-2 pt-1.5 pb-[5px] align-bottom text-cap',
+        'leading-tight font-semibold whitespace-nowrap first:left-0 first:z-20 first:pl-4 last:pr-4',
+        columnStyle(column),
+      )}
+    >
+      {sorting?.getCanSort() === true ? (
+        <button
+          type="button"
+          className="min-h-6 text-inherit [text-align:inherit] hover:text-clay-deep max-sm:min-h-11"
+          onClick={sorting.getToggleSortingHandler()}
+        >
+          {words}
+        </button>
+      ) : (
+        words
+      )}
+    </th>
+  );
+}
+
+/** The headings, at the foot of their cells, each with its unit and how the table is sorted by it. */
+export function TableHead<T>({
+  columns,
+  model,
+}: {
+  readonly columns: readonly Column<T>[];
+  readonly model: TableModel<T>;
+}) {
+  return (
+    <thead>
+      <tr>
+        {columns.map((column) => (
+          <Heading key={column.id} column={column} model={model} />
+        ))}
+      </tr>
+    </thead>
+  );
+}

@@ -1,0 +1,40 @@
+/** The addresses of the pages, each written once. */
+export const PATHS = {
+  schemes: '/',
+  signIn: '/sign-in',
+  forgotPassword: '/forgot-password',
+  link: '/link/:token',
+  newScheme: '/schemes/new',
+  people: '/people',
+  audit: '/audit',
+  mailbox: '/mailbox',
+  account: '/account',
+} as const;
+
+/** The parts of a scheme's settings, by the end of their address. */
+export const SETTINGS = {
+  description: '',
+  people: 'people',
+  rules: 'rules',
+  background: 'background',
+} as const;
+
+export function schemePath(schemeId: string): string {
+  return `/schemes/${schemeId}`;
+}
+
+export function planPath(schemeId: string): string {
+  return `${schemePath(schemeId)}/plan`;
+}
+
+export function settingsPath(
+  schemeId: string,
+  part: keyof typeof SETTINGS = 'description',
+): string {
+  const end = SETTINGS[part];
+  return `${schemePath(schemeId)}/settings${end === '' ? '' : `/${end}`}`;
+}
+
+export function letterPath(letterId: number): string {
+  return `${PATHS.mailbox}/${letterId}`;
+}

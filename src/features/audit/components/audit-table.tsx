@@ -1,0 +1,57 @@
+import { useState } from 'react';
+import type { AuditEntryAnswer } from '../../../../shared/schemas/audit.ts';
+import type { Column } from '../../../components/ui/table/column.ts';
+import { Table } from '../../../components/ui/table/table.tsx';
+import { formatMoment } from '../../../lib/format-date.ts';
+import { AuditDetail } from './audit-detail.tsx';
+
+function inCapitals(text: string): string {
+  return text.charAt(0).toUpperCase() + text.slice(1);
+}
+
+const COLUMNS: readonly Column<AuditEntryAnswer>[] = [
+  { id: 'at', heading: 'When', cell: ({ at }) => formatMoment(at) },
+  {
+    id: 'person',
+    heading: 'Who',
+    cell: ({ person }) => (
+      <span className="inline-block max-w-[220px] truncate align-middle" title={person?.email}>
+        {person?.name ?? <span className="text-ink-3">nobody signed in</span>}
+      </span>
+    ),
+  },
+  {
+    id: 'action',
+    heading: 'What',
+    cell: ({ action }) => <b className="font-semibold">{inCapitals(action)}</b>,
+  },
+  { id: 'subject', heading: 'About', spare: true, cell: ({ subject }) => subject.kind },
+  {
+    id: 'scheme',
+    heading: 'Scheme',
+    wide: true,
+    cell: ({ scheme }) => (
+      <span className="inline-block max-w-[340px] truncate align-middle text-ink-2">
+        {scheme?.name}
+      </span>
+    ),
+  },
+];
+
+/** The audit trail, newest first; a row opens on what it was before and what it is since. */
+export function AuditTable({ entries }: { readonly entries: readonly AuditEntryAnswer[] }) {
+  const [openId, setOpenId] = useState<string>();
+  return (
+    <Table
+      label="Audit trail"
+      className="-mx-8 max-h-[calc(100dvh-210px)] border-t border-rule max-sm:-mx-4"
+      columns={COLUMNS}
+      rows={entries}
+      idOf={({ id }) => id}
+      onOpen={({ id }) => {
+        setOpenId(id === openId ? undefined : id);
+      }}
+      detailOf={(entry) => (entry.id === openId ? <AuditDetail entry={entry} /> : undefined)}
+    />
+  );
+}

@@ -1,0 +1,55 @@
+import type { Map as MapLibreMap, MapMouseEvent } from 'maplibre-gl';
+import { useEffect, useState } from 'react';
+import { formatPlace } from '../place/format-place.ts';
+import type { GridPlace, GridProjection } from '../place/grid-projection.ts';
+import { gridPlaceAt, placeAtCentre } from '../place/view-of-map.ts';
+import { useMapFigure } from '../hooks/use-map-figure.ts';
+
+type CursorPlaceProps = { readonly map: MapLibreMap; readonly projection: GridProjection };
+
+type Pixel = readonly [x: number, y: number];
+
+const OUTSIDE = 'outside the grid';
+const SEPARATOR = '\n';
+
+function words(place: GridPlace | null): string {
+  return place === null ? OUTSIDE : formatPlace(place).join(SEPARATOR);
+}
+
+/** Where the cursor is on the map; null while it is elsewhere. */
+function useCursor(map: MapLibreMap): Pixel | null {
+  const [pixel, setPixel] = useState<Pixel | null>(null);
+  useEffect(() => {
+    const moves = map.on('mousemove', ({ point }: MapMouseEvent) => {
+      setPixel([point.x, point.y]);
+    });
+    const leaves = map.on('mouseout', () => {
+      setPixel(null);
+    });
+    return () => {
+      moves.unsubscribe();
+      leaves.unsubscribe();
+    };
+  }, [map]);
+  return pixel;
+}
+
+/** Easting and northing under the cursor, or in the middle of the map where there is none. */
+export function CursorPlace({ map, projection }: CursorPlaceProps) {
+  const cursor = useCursor(map);
+  const place = useMapFigure(map, () =>
+    words(
+      cursor === null ? placeAtCentre(map, projection) : gridPlaceAt(map, projection, ...cursor),
+    ),
+  );
+  const parts = [...(cursor === null ? ['Middle'] : []), ...place.split(SEPARATOR)];
+  return (
+    <p className="flex rounded border border-rule bg-paper-raised px-2 py-1 text-cap text-ink-2">
+      {parts.map((part) => (
+        <span key={part} className="[&+&]:ml-2.5 [&+&]:border-l [&+&]:border-hairline [&+&]:pl-2.5">
+          {part}
+        </span>
+      ))}
+    </p>
+  );
+}

@@ -1,0 +1,88 @@
+import type { Map as MapLibreMap } from 'maplibre-gl';
+import { useEffect, useEffectEvent, useLayoutEffect, useMemo, useState } from 'react';
+import { installArrowKeys } from '../arrow-keys.ts';
+import { createMapController, type MapController } from '../controller/map-controller.ts';
+import { portOfMap } from '../controller/port-of-map.ts';
+import { useGridCrosses } from '../hooks/use-grid-crosses.ts';
+import { useMapState } from '../hooks/use-map-state.ts';
+import { useMode } from '../hooks/use-mode.ts';
+import { handleOfMap } from '../map-handle.ts';
+import type { BuildingMarks, MapPlan } from '../map-plan.ts';
+import { createGridProjection } from '../place/grid-projection.ts';
+import { sourcesOfPlan } from '../style/sources-of-plan.ts';
+import { CursorPlace } from './cursor-place.tsx';
+import { MapButtons } from './map-buttons.tsx';
+import { MapGaps } from './map-gaps.tsx';
+import type { PlanMapProps } from './plan-map.tsx';
+import { ScaleBar } from './scale-bar.tsx';
+
+/** Keeps the map as the plan and the marks say. */
+function useController(map: MapLibreMap, plan: MapPlan, marks: BuildingMarks): MapController {
+  const controller = useMemo(() => createMapController(portOfMap(map)), [map]);
+  useLayoutEffect(() => {
+    controller.show(plan);
+  }, [controller, plan]);
+  useEffect(() => {
+    controller.mark(marks);
+  }, [controller, marks]);
+  return controller;
+}
+
+function fetchAgain(map: MapLibreMap, plan: MapPlan): void {
+  for (const [name, { type }] of Object.entries(sourcesOfPlan(plan))) {
+    if (type === 'vector') map.refreshTiles(name);
+  }
+}
+
+/** A map that is open, with what stands on it: scale, north, place and buttons. */
+export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap }) {
+  const { map, plan, home, gridDefinition, selected, onSelect } = props;
+  const [hovered, setHovered] = useState<number | null>(null);
+  const marks = useMemo(() => ({ selected, hovered }), [selected, hovered]);
+  const projection = useMemo(() => createGridProjection(gridDefinition), [gridDefinition]);
+  const controller = useController(map, plan, marks);
+  const { isBusy, hasGaps, forgetGaps } = useMapState(map);
+  const handle = useMemo(() => handleOfMap(map), [map]);
+  const giveHandle = useEffectEvent(props.onHandle);
+  useGridCrosses(map, controller, projection);
+  useMode(map, 'select', { select: onSelect, hover: setHovered });
+  useEffect(() => installArrowKeys(map), [map]);
+  useEffect(() => {
+    giveHandle(handle);
+    return () => {
+      giveHandle(null);
+    };
+  }, [handle]);
+
+  return (
+    <div
+      aria-busy={isBusy}
+      className="pointer-events-none absolute inset-0 [&>*]:pointer-events-auto"
+    >
+      <div className="absolute top-3 left-3">
+        <MapButtons
+          onZoom={handle.zoomBy}
+          onFit={() => {
+            handle.fit(home);
+          }}
+        />
+      </div>
+      <div className="absolute top-3 right-3">
+        <ScaleBar map={map} projection={projection} />
+      </div>
+      <div className="absolute bottom-3 left-3">
+        <CursorPlace map={map} projection={projection} />
+      </div>
+      {hasGaps && (
+        <div className="absolute right-3 bottom-12 left-3 flex justify-center">
+          <MapGaps
+            onRetry={() => {
+              forgetGaps();
+              fetchAgain(map, plan);
+            }}
+          />
+        </div>
+      )}
+    </div>
+  );
+}

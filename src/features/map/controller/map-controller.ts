@@ -1,0 +1,90 @@
+import type { LayerSpecification } from 'maplibre-gl';
+import { NO_MARKS, type BuildingMarks, type MapPlan } from '../map-plan.ts';
+import { layersOfPlan } from '../style/layers-of-plan.ts';
+import { BUILDINGS_TILE_LAYER, SOURCES } from '../style/source-names.ts';
+import { sourcesOfPlan, type SourcesByName } from '../style/sources-of-plan.ts';
+import { layerChanges, type LayerChange } from './layer-changes.ts';
+import type { MapPort } from './map-port.ts';
+import { sourceChanges } from './source-changes.ts';
+
+export type MapController = {
+  /** Shows another plan. */
+  readonly show: (plan: MapPlan) => void;
+  /** Marks the selected building and the one under the cursor. */
+  readonly mark: (marks: BuildingMarks) => void;
+  /** Draws other crosses of the grid. */
+  readonly drawGrid: (crosses: GeoJSON.FeatureCollection) => void;
+};
+
+function carryOut(map: MapPort, change: LayerChange): void {
+  switch (change.kind) {
+    case 'remove':
+      map.removeLayer(change.id);
+      break;
+    case 'add':
+      map.addLayer(change.layer, change.before);
+      break;
+    case 'move':
+      map.moveLayer(change.id, change.before);
+      break;
+    case 'paint':
+      map.setPaintProperty(change.id, change.name, change.value);
+      break;
+    case 'layout':
+      map.setLayoutProperty(change.id, change.name, change.value);
+      break;
+    case 'filter':
+      map.setFilter(change.id, change.filter);
+      break;
+    case 'zooms':
+      map.setLayerZoomRange(change.id, change.least, change.most);
+      break;
+  }
+}
+
+/** Keeps a map as the plans ask, and sets only what changed from one to the next. */
+export function createMapController(map: MapPort): MapController {
+  let sources: SourcesByName = {};
+  let layers: readonly LayerSpecification[] = [];
+  let marks = NO_MARKS;
+
+  function setMark(name: keyof BuildingMarks, id: number | null, value: boolean): void {
+    if (id === null || sources[SOURCES.buildings] === undefined) return;
+    const building = { source: SOURCES.buildings, sourceLayer: BUILDINGS_TILE_LAYER, id };
+    map.setFeatureState(building, { [name]: value });
+  }
+
+  function show(plan: MapPlan): void {
+    const [nextSources, nextLayers] = [sourcesOfPlan(plan), layersOfPlan(plan)];
+    const { removed, added, readdressed } = sourceChanges(sources, nextSources);
+    const changes = layerChanges(layers, nextLayers, new Set(removed));
+    // a source can go only after its layers, and has to be there before them
+    for (const change of changes) if (change.kind === 'remove') carryOut(map, change);
+    for (const name of removed) map.removeSource(name);
+    for (const [name, source] of added) map.addSource(name, source);
+    for (const [name, urls] of readdressed) map.setTiles(name, urls);
+    for (const change of changes) if (change.kind !== 'remove') carryOut(map, change);
+    [sources, layers] = [nextSources, nextLayers];
+    if (added.some(([name]) => name === SOURCES.buildings)) {
+      setMark('selected', marks.selected, true);
+      setMark('hovered', marks.hovered, true);
+    }
+  }
+
+  function mark(next: BuildingMarks): void {
+    for (const name of ['selected', 'hovered'] as const) {
+      if (marks[name] === next[name]) continue;
+      setMark(name, marks[name], false);
+      setMark(name, next[name], true);
+    }
+    marks = next;
+  }
+
+  return {
+    show,
+    mark,
+    drawGrid: (crosses) => {
+      map.setData(SOURCES.grid, crosses);
+    },
+  };
+}

@@ -1,0 +1,23 @@
+import type { FilterSpecification, LayerSpecification, SourceSpecification } from 'maplibre-gl';
+
+export type BuildingKey = {
+  readonly source: string;
+  readonly sourceLayer: string;
+  readonly id: number;
+};
+
+/** What the controller asks of a map; tests give it a map that only notes what it is told. */
+export type MapPort = {
+  addSource(name: string, source: SourceSpecification): unknown;
+  removeSource(name: string): unknown;
+  setTiles(name: string, urls: string[]): unknown;
+  addLayer(layer: LayerSpecification, before: string | undefined): unknown;
+  removeLayer(id: string): unknown;
+  moveLayer(id: string, before: string | undefined): unknown;
+  setPaintProperty(layer: string, name: string, value: unknown): unknown;
+  setLayoutProperty(layer: string, name: string, value: unknown): unknown;
+  setFilter(layer: string, filter: FilterSpecification | null): unknown;
+  setLayerZoomRange(layer: string, least: number, most: number): unknown;
+  setFeatureState(building: BuildingKey, state: Readonly<Record<string, boolean>>): unknown;
+  setData(name: string, data: GeoJSON.FeatureCollection): unknown;
+};

@@ -1,0 +1,26 @@
+import type { LonLatBounds } from '../../../shared/schemas/basemap.ts';
+
+/** Where vector tiles are fetched from, and how far and how deep they go. */
+export type TileSet = {
+  readonly url: string;
+  /** Outside of these none are asked for; null where nobody knows how far they go. */
+  readonly bounds: LonLatBounds | null;
+  readonly minzoom: number;
+  readonly maxzoom: number;
+};
+
+/** What the map shows; sources and layers follow from it. */
+export type MapPlan = {
+  /** Where widths in metres hold. */
+  readonly latitude: number;
+  /** The demo's own map, where the scheme stands on it. */
+  readonly basemap: TileSet | null;
+  /** Streets, water, rail and parks that were uploaded for the scheme. */
+  readonly background: TileSet | null;
+  readonly buildings: TileSet | null;
+};
+
+/** What of a scheme's buildings is marked. */
+export type BuildingMarks = { readonly selected: number | null; readonly hovered: number | null };
+
+export const NO_MARKS: BuildingMarks = { selected: null, hovered: null };

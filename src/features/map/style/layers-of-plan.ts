@@ -1,0 +1,42 @@
+import type { LayerSpecification } from 'maplibre-gl';
+import type { MapPlan } from '../map-plan.ts';
+import { backgroundLabelLayers, backgroundLayers } from './background-layers.ts';
+import { buildingLabelLayers, buildingLayers } from './building-layers.ts';
+import { gridLayers } from './grid-layers.ts';
+import { groundLayers, harbourLayers } from './ground-layers.ts';
+import { labelLayers } from './label-layers.ts';
+import { MAP_COLOURS } from './map-colours.ts';
+import { bridgeLayers, streetLayers, treeLayers } from './street-layers.ts';
+
+/** Paper; round the demo town, which is an island, the colour of the sea. */
+function paper({ basemap }: MapPlan): LayerSpecification {
+  const colour = basemap === null ? MAP_COLOURS.land : MAP_COLOURS.water;
+  return { id: 'paper', type: 'background', paint: { 'background-color': colour } };
+}
+
+/** The demo's own map without its labels. */
+function basemapLayers(latitude: number): LayerSpecification[] {
+  return [
+    ...groundLayers(),
+    ...streetLayers(latitude),
+    ...harbourLayers(),
+    ...bridgeLayers(latitude),
+    ...treeLayers(latitude),
+  ];
+}
+
+/** Every layer of what the plan shows, from the ground up. */
+export function layersOfPlan(plan: MapPlan): LayerSpecification[] {
+  const { latitude, basemap, background, buildings } = plan;
+  const layers: (LayerSpecification[] | false)[] = [
+    [paper(plan)],
+    basemap !== null && basemapLayers(latitude),
+    background !== null && backgroundLayers(latitude),
+    buildings !== null && buildingLayers(),
+    gridLayers(),
+    background !== null && backgroundLabelLayers(),
+    basemap !== null && labelLayers(),
+    buildings !== null && buildingLabelLayers(),
+  ];
+  return layers.flatMap((group) => (group === false ? [] : group));
+}

@@ -1,0 +1,13 @@
+/** The sources of the map, by name. */
+export const SOURCES = {
+  basemap: 'basemap',
+  background: 'background',
+  grid: 'grid',
+  buildings: 'buildings',
+} as const;
+
+/** The layer of a tile in which the server puts buildings. */
+export const BUILDINGS_TILE_LAYER = 'buildings';
+
+/** The map layer that a click on a building meets. */
+export const BUILDINGS_LAYER = 'buildings';

@@ -1,0 +1,76 @@
+import { useState } from 'react';
+import type { PersonAnswer } from '../../../../shared/schemas/people.ts';
+import { StateMark } from '../../../components/ui/state-mark.tsx';
+import type { Column } from '../../../components/ui/table/column.ts';
+import { Table } from '../../../components/ui/table/table.tsx';
+import { partsInWords, signInState } from '../person-words.ts';
+import { PersonDetail } from './person-detail.tsx';
+
+const COLUMNS: readonly Column<PersonAnswer>[] = [
+  {
+    id: 'name',
+    heading: 'Name',
+    sortBy: ({ name }) => name.toLowerCase(),
+    cell: ({ name, isAdministrator }) => (
+      <>
+        <b className="inline-block max-w-[220px] truncate align-middle font-semibold max-sm:max-w-[150px]">
+          {name}
+        </b>
+        {isAdministrator && <span className="ml-1.5 text-ink-3">administrator</span>}
+      </>
+    ),
+  },
+  {
+    id: 'email',
+    heading: 'E-mail',
+    sortBy: ({ email }) => email,
+    cell: ({ email }) => (
+      <span className="inline-block max-w-[240px] truncate align-middle" title={email}>
+        {email}
+      </span>
+    ),
+  },
+  {
+    id: 'parts',
+    heading: 'Schemes',
+    wide: true,
+    cell: (person) => (
+      <span
+        className="inline-block max-w-[300px] truncate align-middle text-ink-2"
+        title={partsInWords(person)}
+      >
+        {partsInWords(person)}
+      </span>
+    ),
+  },
+  {
+    id: 'state',
+    heading: 'State',
+    sortBy: (person) => signInState(person, new Date()).words,
+    cell: (person) => {
+      const { state, words } = signInState(person, new Date());
+      return <StateMark state={state}>{words}</StateMark>;
+    },
+  },
+];
+
+/** Everybody who has an account. A row opens on what can be changed about the person. */
+export function PeopleTable({ people }: { readonly people: readonly PersonAnswer[] }) {
+  const [openId, setOpenId] = useState<string>();
+  return (
+    <Table
+      label="People"
+      className="-mx-8 max-h-[calc(100dvh-170px)] border-t border-rule max-sm:-mx-4"
+      columns={COLUMNS}
+      rows={people}
+      idOf={({ id }) => id}
+      sortedBy={{ id: 'name', desc: false }}
+      onOpen={({ id }) => {
+        setOpenId(id === openId ? undefined : id);
+      }}
+      detailOf={(person) =>
+        person.id === openId ? <PersonDetail key={person.id} person={person} /> : undefined
+      }
+    />
+  );
+}

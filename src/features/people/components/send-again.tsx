@@ -1,0 +1,24 @@
+import type { PersonAnswer } from '../../../../shared/schemas/people.ts';
+import { Button } from '../../../components/ui/button.tsx';
+import { MutationError } from '../../../components/ui/mutation-error.tsx';
+import { useInviteAgain } from '../api/invite-again.ts';
+import { LetterNote } from './letter-note.tsx';
+
+/** Sends the invitation of somebody who has not taken it up once more. */
+export function SendAgain({ person }: { readonly person: PersonAnswer }) {
+  const invite = useInviteAgain();
+  return (
+    <div className="grid justify-items-start gap-2">
+      <MutationError failed="No letter was sent." error={invite.error} />
+      <Button
+        busy={invite.isPending}
+        onClick={() => {
+          invite.mutate(person.id);
+        }}
+      >
+        Send the invitation again
+      </Button>
+      {invite.data !== undefined && <LetterNote invited={invite.data} />}
+    </div>
+  );
+}

@@ -1,0 +1,52 @@
+import type { RefObject } from 'react';
+import type { BuildingRow } from '../../../../shared/schemas/buildings.ts';
+import { useScheme } from '../../schemes/scheme-context.ts';
+import type { useSteps } from '../hooks/use-steps.ts';
+import { BuildingSearch } from './building-search.tsx';
+import { NoBuildings } from './no-buildings.tsx';
+import { NothingSelected } from './nothing-selected.tsx';
+import { SelectedBuilding, type BuildingQuery } from './selected-building.tsx';
+import { StepButtons } from './step-buttons.tsx';
+
+type PlanSideProps = {
+  /** Null until it is known. */
+  readonly hasBuildings: boolean | null;
+  readonly selected: number | null;
+  readonly building: BuildingQuery;
+  readonly steps: ReturnType<typeof useSteps>;
+  readonly onGoTo: (buildingId: number) => void;
+  readonly onDeselect: () => void;
+  /** Gets the focus when a building is chosen from the list. */
+  readonly chosen: RefObject<HTMLDivElement | null>;
+};
+
+/** At the side of the map: find, go through, and what is selected. */
+export function PlanSide(props: PlanSideProps) {
+  const { hasBuildings, selected, building, steps, onGoTo, onDeselect, chosen } = props;
+  const scheme = useScheme();
+  if (hasBuildings === false) return <NoBuildings scheme={scheme} />;
+
+  function choose({ id }: BuildingRow, words: string, found: readonly BuildingRow[]): void {
+    steps.follow(words, found);
+    onGoTo(id);
+    chosen.current?.focus({ preventScroll: true });
+  }
+  return (
+    <>
+      <BuildingSearch schemeId={scheme.id} onChoose={choose} />
+      <StepButtons
+        trail={steps.trail}
+        selected={selected}
+        onStep={steps.step}
+        onLeave={steps.leave}
+      />
+      <div ref={chosen} tabIndex={-1} aria-live="polite" className="mt-4 outline-none">
+        {selected === null ? (
+          <NothingSelected />
+        ) : (
+          <SelectedBuilding building={building} onDeselect={onDeselect} />
+        )}
+      </div>
+    </>
+  );
+}

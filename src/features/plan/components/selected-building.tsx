@@ -1,0 +1,45 @@
+import type { UseQueryResult } from '@tanstack/react-query';
+import type { BuildingAnswer } from '../../../../shared/schemas/buildings.ts';
+import { Button } from '../../../components/ui/button.tsx';
+import { KeyCap } from '../../../components/ui/key-cap.tsx';
+import { LoadingRows } from '../../../components/ui/loading-rows.tsx';
+import { QueryError } from '../../../components/ui/query-error.tsx';
+import { isRefusal } from '../../../lib/api-error.ts';
+import { BuildingSheet } from './building-sheet.tsx';
+
+export type BuildingQuery = Pick<UseQueryResult<BuildingAnswer>, 'data' | 'error' | 'refetch'>;
+
+type SelectedBuildingProps = {
+  readonly building: BuildingQuery;
+  readonly onDeselect: () => void;
+};
+
+function Content({ data, error, refetch }: BuildingQuery) {
+  if (data !== undefined) return <BuildingSheet building={data} />;
+  if (isRefusal(error, 'not-found')) {
+    return <p className="text-body text-ink-2">There is no such building in this scheme.</p>;
+  }
+  if (error !== null) {
+    return <QueryError what="The building" error={error} onRetry={() => void refetch()} />;
+  }
+  return <LoadingRows what="the building" rows={8} />;
+}
+
+/** The selected building, and the way to let go of it. */
+export function SelectedBuilding({ building, onDeselect }: SelectedBuildingProps) {
+  return (
+    <div className="relative">
+      <Button
+        kind="quiet"
+        className="float-right -mt-1.5 -mr-1.5 max-sm:-mt-3.5"
+        onClick={onDeselect}
+      >
+        Deselect{' '}
+        <span className="max-sm:hidden">
+          <KeyCap>Esc</KeyCap>
+        </span>
+      </Button>
+      <Content {...building} />
+    </div>
+  );
+}

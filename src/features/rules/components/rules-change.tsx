@@ -1,0 +1,16 @@
+import type { RulesVersion } from '../../../../shared/schemas/rules.ts';
+import { Panel } from '../../../components/ui/panel.tsx';
+import { ValueChanges } from '../../../components/ui/value-changes.tsx';
+import { changesBetween } from '../../../lib/changes-between.ts';
+
+type RulesChangeProps = { readonly before: RulesVersion; readonly after: RulesVersion };
+
+/** What a version changed in the one before it. */
+export function RulesChange({ before, after }: RulesChangeProps) {
+  const title = `What version ${after.version} changed`;
+  return (
+    <Panel title={title} note="lengths in m, slopes as fractions, as they are kept">
+      <ValueChanges label={title} changes={changesBetween(before.rules, after.rules)} />
+    </Panel>
+  );
+}

@@ -1,0 +1,28 @@
+import { useQuery } from '@tanstack/react-query';
+import type { SchemeAnswer } from '../../../../shared/schemas/schemes.ts';
+import { BasisLine } from '../../../components/layout/basis-line.tsx';
+import { formatDay } from '../../../lib/format-date.ts';
+import { crsQuery } from '../../crs/api/get-crs.ts';
+import { yourRoles } from '../../members/roles-in-words.ts';
+
+/** What a scheme's settings rest on: its grid, and what the person is in it. */
+export function SchemeBasis({ scheme }: { readonly scheme: SchemeAnswer }) {
+  const { data: crs } = useQuery(crsQuery(scheme.crs));
+  const grid = (
+    <>
+      <b>EPSG:{scheme.crs}</b> {crs?.name}
+    </>
+  );
+  const archived =
+    scheme.archivedAt !== null && `Archived ${formatDay(scheme.archivedAt)}: only read`;
+  const words = yourRoles(scheme.roles);
+  return (
+    <BasisLine
+      parts={[
+        ...(archived === false ? [] : [<b key="archived">{archived}</b>]),
+        grid,
+        `${words.charAt(0).toUpperCase()}${words.slice(1)}`,
+      ]}
+    />
+  );
+}

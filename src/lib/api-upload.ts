@@ -1,0 +1,55 @@
+import type { z } from 'zod';
+import { csrfHeaders, readAnswer } from './api-client.ts';
+import { unreachableError } from './api-error.ts';
+
+export type UploadProgress = { readonly sent: number; readonly total: number };
+
+type Upload<T> = {
+  readonly path: string;
+  readonly file: File;
+  readonly schema: z.ZodType<T>;
+  readonly signal: AbortSignal;
+  readonly onProgress: (progress: UploadProgress) => void;
+};
+
+function asJson(text: string): unknown {
+  try {
+    return JSON.parse(text);
+  } catch {
+    return null;
+  }
+}
+
+/** Sends a file and says how much of it has gone, which fetch cannot. */
+export function apiUpload<T>({ path, file, schema, signal, onProgress }: Upload<T>): Promise<T> {
+  return new Promise((resolve, reject) => {
+    const request = new XMLHttpRequest();
+    const form = new FormData();
+    form.append('file', file);
+    request.open('PUT', path);
+    for (const [name, value] of Object.entries(csrfHeaders())) {
+      request.setRequestHeader(name, value);
+    }
+    request.upload.onprogress = ({ loaded, total }) => {
+      onProgress({ sent: loaded, total });
+    };
+    request.onload = () => {
+      const answer = request.status === 204 ? undefined : asJson(request.responseText);
+      try {
+        resolve(readAnswer(schema, request.status, answer));
+      } catch (error) {
+        reject(error instanceof Error ? error : unreachableError());
+      }
+    };
+    request.onerror = () => {
+      reject(unreachableError());
+    };
+    request.onabort = () => {
+      reject(new DOMException('The upload was cancelled.', 'AbortError'));
+    };
+    signal.addEventListener('abort', () => {
+      request.abort();
+    });
+    request.send(form);
+  });
+}

@@ -1,0 +1,43 @@
+import { chromium, type Browser } from 'playwright-core';
+import { expect, test } from 'vitest';
+import { newVisitor, type Size, type Visitor } from './visitor.ts';
+
+const FLAGS = [
+  '--no-sandbox',
+  '--disable-dev-shm-usage',
+  '--disable-quic',
+  '--no-first-run',
+  '--disable-background-networking',
+  '--disable-component-update',
+  '--disable-sync',
+  '--use-angle=swiftshader',
+  '--enable-unsafe-swiftshader',
+];
+
+type Stage = {
+  readonly browser: Browser;
+  /** A new visitor; whatever goes wrong in their window fails the journey. */
+  readonly visit: (size?: Size) => Promise<Visitor>;
+};
+
+/** A test that goes through the application in Chromium, as people do. */
+export const journey = test.extend<Stage>({
+  browser: [
+    async ({}, use) => {
+      const browser = await chromium.launch({ executablePath: '/usr/bin/chromium', args: FLAGS });
+      await use(browser);
+      await browser.close();
+    },
+    { scope: 'file' },
+  ],
+  visit: async ({ browser }, use) => {
+    const visitors: Visitor[] = [];
+    await use(async (size) => {
+      const visitor = await newVisitor(browser, size);
+      visitors.push(visitor);
+      return visitor;
+    });
+    await Promise.all(visitors.map(({ leave }) => leave()));
+    expect(visitors.flatMap(({ faults }) => faults)).toEqual([]);
+  },
+});

@@ -1,0 +1,15 @@
+import type { Visitor } from './visitor.ts';
+
+export const DEMO_SCHEME = 'Port Dogger crossing';
+
+/** Opens a scheme from the first page, and gives its address. */
+export async function openScheme({ page }: Visitor, name = DEMO_SCHEME): Promise<string> {
+  await page.getByRole('link', { name }).click();
+  await page.waitForURL(/\/schemes\/[0-9a-f-]{36}\/\w+/);
+  return /\/schemes\/[0-9a-f-]{36}/.exec(page.url())?.[0] ?? '';
+}
+
+/** The words of the tabs across the top. */
+export function tabs({ page }: Visitor): Promise<string[]> {
+  return page.getByRole('navigation', { name: 'Screens' }).getByRole('link').allTextContents();
+}

@@ -1,0 +1,29 @@
+import { inject } from 'vitest';
+import type { Visitor } from './visitor.ts';
+
+export type DemoRole =
+  'administrator' | 'designer' | 'assessor' | 'second-assessor' | 'owner' | 'witness';
+
+/** Fills in the form of the sign-in page, where the visitor stands, and sends it. */
+export async function signInWith(
+  { page }: Visitor,
+  email: string,
+  password: string,
+): Promise<void> {
+  await page.getByLabel('E-mail').fill(email);
+  await page.getByLabel('Password', { exact: true }).fill(password);
+  await page.getByRole('button', { name: 'Sign in' }).click();
+}
+
+/** Signs a person of the demo in and waits for their first page. */
+export async function signInAs(visitor: Visitor, role: DemoRole): Promise<void> {
+  await visitor.open('/');
+  await signInWith(visitor, `${role}@example.org`, inject('demo').password);
+  await visitor.page.getByRole('heading', { name: 'Waiting for you' }).waitFor();
+}
+
+export async function signOut({ page }: Visitor): Promise<void> {
+  await page.getByRole('button', { name: 'account and sign out' }).click();
+  await page.getByRole('button', { name: 'Sign out', exact: true }).click();
+  await page.getByRole('heading', { name: 'Sign in' }).waitFor();
+}

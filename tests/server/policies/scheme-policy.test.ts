@@ -1,0 +1,67 @@
+import { describe, expect, test } from 'vitest';
+import { ROLES, type Role } from '../../../shared/schemas/roles.ts';
+import {
+  changesScheme,
+  schemeAbilities,
+  schemePolicy,
+  type SchemeAction,
+} from '../../../server/policies/scheme-policy.ts';
+
+/** Who may do what, as people agreed on it: the policy is held against this. */
+const MAY: Readonly<Record<SchemeAction, readonly (Role | 'administrator')[]>> = {
+  readScheme: ['designer', 'assessor', 'owner', 'witness', 'administrator'],
+  readRegister: ['designer', 'assessor', 'witness', 'administrator'],
+  updateScheme: ['administrator'],
+  archiveScheme: ['administrator'],
+  readMembers: ['administrator'],
+  manageMembers: ['administrator'],
+  readRules: ['designer', 'assessor', 'witness', 'administrator'],
+  updateRules: ['administrator'],
+  updateBackground: ['designer', 'assessor', 'administrator'],
+};
+
+const ACTIONS = [
+  'readScheme',
+  'readRegister',
+  'updateScheme',
+  'archiveScheme',
+  'readMembers',
+  'manageMembers',
+  'readRules',
+  'updateRules',
+  'updateBackground',
+] as const satisfies readonly SchemeAction[];
+
+function actor(...roles: (Role | 'administrator')[]) {
+  return {
+    id: 'a',
+    isAdministrator: roles.includes('administrator'),
+    roles: new Set(ROLES.filter((role) => roles.includes(role))),
+  };
+}
+
+describe.each([...ROLES, 'administrator'] as const)('the %s', (role) => {
+  test.each(ACTIONS)('may %s where the table says so', (action) => {
+    expect(schemePolicy[action](actor(role))).toBe(MAY[action].includes(role));
+  });
+});
+
+test('nobody else may do anything', () => {
+  expect(Object.values(schemeAbilities(actor(), false))).not.toContain(true);
+});
+
+test('who is several may do what each of them may', () => {
+  const abilities = schemeAbilities(actor('owner', 'designer'), false);
+  expect(abilities).toEqual(schemeAbilities(actor('designer'), false));
+});
+
+test('in an archived scheme everything is read and nothing is changed, but that it can be brought back', () => {
+  const abilities = schemeAbilities(actor('administrator'), true);
+  for (const action of ACTIONS) expect(abilities[action]).toBe(!changesScheme(action));
+  expect(ACTIONS.filter(changesScheme)).toEqual([
+    'updateScheme',
+    'manageMembers',
+    'updateRules',
+    'updateBackground',
+  ]);
+});

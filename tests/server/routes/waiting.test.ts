@@ -1,0 +1,141 @@
+import request from 'supertest';
+import { expect, test } from 'vitest';
+import { waitingSchema, type WaitingAnswer } from '../../../shared/schemas/waiting.ts';
+import { BackgroundFeature } from '../../../server/models/background-feature.ts';
+import type { Person } from '../../../server/models/person.ts';
+import type { Scheme } from '../../../server/models/scheme.ts';
+import {
+  aBuilding,
+  aMember,
+  aMembership,
+  anAdministrator,
+  aPerson,
+  aScheme,
+} from '../../support/factories.ts';
+import { signIn } from '../../support/sign-in.ts';
+import { testApp } from '../../support/test-app.ts';
+
+const { app } = testApp();
+
+async function waitingFor(person: Person): Promise<WaitingAnswer> {
+  const answer = await (await signIn(app(), person)).get('/api/waiting');
+  expect(answer.status).toBe(200);
+  return waitingSchema.parse(answer.body);
+}
+
+async function waitingIn(scheme: Scheme, person: Person) {
+  const { schemes } = await waitingFor(person);
+  return schemes.find((one) => one.scheme.id === scheme.id)?.waiting;
+}
+
+async function withBackground(scheme: Scheme): Promise<void> {
+  const geometry = { type: 'Polygon', coordinates: [] };
+  const box = { west: 3, south: 54, east: 3.1, north: 54.1 };
+  await BackgroundFeature.create({ schemeId: scheme.id, layer: 'parks', name: null, geometry, ...box }); // prettier-ignore
+}
+
+test('lists the schemes that a person has a part in, with their roles', async () => {
+  const [one, other] = [await aScheme({ name: 'B' }), await aScheme({ name: 'A' })];
+  await aScheme({ name: 'C' });
+  const person = await aMember(one, 'witness', 'owner');
+  await aMembership(other, person, 'owner');
+  const { general, schemes } = await waitingFor(person);
+  expect(general).toEqual([]);
+  expect(schemes).toEqual([
+    { scheme: { id: other.id, name: 'A', archivedAt: null }, roles: ['owner'], waiting: [] },
+    {
+      scheme: { id: one.id, name: 'B', archivedAt: null },
+      roles: ['owner', 'witness'],
+      waiting: [],
+    },
+  ]);
+});
+
+test('an assessor waits for buildings and for a map until they are there', async () => {
+  const scheme = await aScheme();
+  const assessor = await aMember(scheme, 'assessor');
+  const since = scheme.createdAt.toISOString();
+  expect(await waitingIn(scheme, assessor)).toEqual([
+    {
+      kind: 'no-buildings',
+      count: 1,
+      text: 'The register has no buildings yet.',
+      since,
+      link: `/schemes/${scheme.id}/plan`,
+    },
+    {
+      kind: 'no-background',
+      count: 1,
+      text: 'The map has no streets, water, rail or parks yet.',
+      since,
+      link: `/schemes/${scheme.id}/settings/background`,
+    },
+  ]);
+  await withBackground(scheme);
+  expect(await waitingIn(scheme, assessor)).toMatchObject([{ kind: 'no-buildings' }]);
+  await aBuilding(scheme);
+  expect(await waitingIn(scheme, assessor)).toEqual([]);
+});
+
+test('a designer waits for a map only', async () => {
+  const scheme = await aScheme();
+  const designer = await aMember(scheme, 'designer');
+  expect(await waitingIn(scheme, designer)).toMatchObject([{ kind: 'no-background' }]);
+});
+
+test('the administrator waits for people', async () => {
+  const scheme = await aScheme();
+  await withBackground(scheme);
+  const administrator = await anAdministrator();
+  const link = `/schemes/${scheme.id}/settings/people`;
+  expect(await waitingIn(scheme, administrator)).toMatchObject([
+    {
+      kind: 'roles-not-filled',
+      count: 3,
+      text: 'Nobody is designer, assessor or witness yet.',
+      link,
+    },
+  ]);
+  const invited = await aPerson({ password: null });
+  await aMembership(scheme, invited, 'designer', 'assessor');
+  await aMembership(scheme, await aPerson({ password: null }), 'owner');
+  expect(await waitingIn(scheme, administrator)).toMatchObject([
+    { kind: 'roles-not-filled', count: 1, text: 'Nobody is witness yet.' },
+    {
+      kind: 'invitations-not-accepted',
+      count: 2,
+      text: 'Invitations not accepted yet.',
+      since: invited.createdAt.toISOString(),
+      link,
+    },
+  ]);
+});
+
+test('the administrator sees invitations of people who are in no scheme, others do not', async () => {
+  const invited = await aPerson({ password: null });
+  const { general } = await waitingFor(await anAdministrator());
+  expect(general).toEqual([
+    {
+      kind: 'invitations-not-accepted',
+      count: 1,
+      text: 'Invitation not accepted yet.',
+      since: invited.createdAt.toISOString(),
+      link: '/people',
+    },
+  ]);
+  expect((await waitingFor(await aPerson())).general).toEqual([]);
+});
+
+test('nothing waits in an archived scheme, and whoever holds several roles is told once', async () => {
+  const archived = await aScheme({ archivedAt: new Date() });
+  const scheme = await aScheme();
+  const person = await aMember(scheme, 'designer', 'assessor');
+  await aMembership(archived, person, 'assessor');
+  expect(await waitingIn(archived, person)).toEqual([]);
+  const kinds = (await waitingIn(scheme, person))?.map(({ kind }) => kind);
+  expect(kinds).toEqual(['no-buildings', 'no-background']);
+});
+
+test('is for people who are signed in', async () => {
+  expect((await request(app()).get('/api/waiting')).status).toBe(401);
+});

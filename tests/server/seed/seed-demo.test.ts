@@ -1,0 +1,97 @@
+import { mkdirSync, writeFileSync } from 'node:fs';
+import path from 'node:path';
+import { afterAll, beforeEach, describe, expect, it } from 'vitest';
+import { isRightPassword } from '../../../server/authentication/password-hash.ts';
+import { AuditEntry } from '../../../server/models/audit-entry.ts';
+import { Building } from '../../../server/models/building.ts';
+import { Membership } from '../../../server/models/membership.ts';
+import { Person } from '../../../server/models/person.ts';
+import { SchemeRules } from '../../../server/models/scheme-rules.ts';
+import { Scheme } from '../../../server/models/scheme.ts';
+import { DEMO_PASSWORD, DEMO_PEOPLE } from '../../../server/seed/demo-people.ts';
+import { seedDemo } from '../../../server/seed/seed-demo.ts';
+import { createDataFolder } from '../../support/data-folder.ts';
+import { aPerson } from '../../support/factories.ts';
+import { testApp } from '../../support/test-app.ts';
+
+const { services } = testApp();
+const { folder, remove } = createDataFolder('seed');
+
+function square(east: number): [number, number][] {
+  const [e, n] = [412_000 + east, 6_068_000];
+  return [[e, n], [e + 8, n], [e + 8, n + 8], [e, n + 8], [e, n]]; // prettier-ignore
+}
+
+function writeTown(...references: string[]): void {
+  const properties = {
+    ...{ name: null, address: '1 Rope Wharf', use: 'dwelling', storeys: 2, eavesHeight: 6 },
+    ...{ groundLevel: 3, foundingLevel: null, foundation: 'strip', construction: 'masonry' },
+    ...{ listed: null, condition: 'fair' },
+  };
+  const features = references.map((reference, index) => ({
+    properties: { reference, ...properties },
+    geometry: { type: 'Polygon', coordinates: [square(10 * index)] },
+  }));
+  mkdirSync(folder, { recursive: true });
+  writeFileSync(path.join(folder, 'buildings.geojson'), JSON.stringify({ features }));
+}
+
+function seed() {
+  return seedDemo(services().database, folder);
+}
+
+beforeEach(() => {
+  writeTown('B0001', 'B0002');
+});
+afterAll(remove);
+
+// in this order: the database is empty until the demo is in it
+describe('seedDemo', () => {
+  it('leaves nothing behind where the town cannot be read in', async () => {
+    writeTown('B0001', 'B0001');
+    await expect(seed()).rejects.toThrow();
+    expect([await Person.count(), await Scheme.count(), await AuditEntry.count()]).toEqual([
+      0, 0, 0,
+    ]);
+  });
+
+  it('does not touch a database of other people', async () => {
+    const stranger = await aPerson();
+    expect(await seed()).toBe('not ours');
+    expect(await Person.count()).toBe(1);
+    await stranger.destroy();
+  });
+
+  it('makes the demo people, who can sign in, and their scheme', async () => {
+    expect(await seed()).toBe('filled');
+    const people = await Person.findAll({ order: ['createdAt'] });
+    expect(people.map(({ email }) => email).sort()).toEqual(
+      DEMO_PEOPLE.map(({ email }) => email).sort(),
+    );
+    expect(await isRightPassword(people[0]?.passwordHash, DEMO_PASSWORD)).toBe(true);
+    const [scheme] = await Scheme.findAll();
+    expect(scheme).toMatchObject({ name: 'Port Dogger crossing', crs: 32631 });
+    const memberships = await Membership.findAll({ where: { schemeId: scheme?.id ?? '' } });
+    expect(memberships.map(({ role }) => role).sort()).toEqual([
+      ...['assessor', 'assessor', 'designer', 'owner', 'witness'],
+    ]);
+    expect(await SchemeRules.count({ where: { schemeId: scheme?.id ?? '', version: 1 } })).toBe(1);
+  });
+
+  it('brought in the town, near where it should lie, and wrote it all down', async () => {
+    const buildings = await Building.findAll({ order: ['reference'] });
+    expect(buildings.map(({ reference }) => reference)).toEqual(['B0001', 'B0002']);
+    expect(buildings[0]).toMatchObject({ address: '1 Rope Wharf', storeys: 2, listedGrade: null });
+    expect(buildings[0]?.west).toBeCloseTo(1.636, 2);
+    expect(buildings[0]?.south).toBeCloseTo(54.749, 2);
+    const actions = (await AuditEntry.findAll()).map(({ action }) => action);
+    expect(new Set(actions)).toEqual(
+      new Set(['create person', 'create scheme', 'change roles', 'insert buildings']),
+    );
+  });
+
+  it('finds it there the next time', async () => {
+    expect(await seed()).toBe('there');
+    expect([await Scheme.count(), await Building.count()]).toEqual([1, 2]);
+  });
+});
