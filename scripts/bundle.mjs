@@ -15,7 +15,9 @@ function newestIn(folder) {
 export async function bundled(entry) {
   const name = path.basename(path.dirname(entry));
   const file = path.join(root, '.cache', `${name}.mjs`);
-  const sources = ['shared', path.dirname(entry)].map((folder) => newestIn(path.join(root, folder)));
+  const sources = ['shared', path.dirname(entry)].map((folder) =>
+    newestIn(path.join(root, folder)),
+  );
   const lock = statSync(path.join(root, 'package-lock.json')).mtimeMs;
   const built = statSync(file, { throwIfNoEntry: false })?.mtimeMs ?? 0;
   if (built > Math.max(...sources, lock)) return file;

@@ -41,11 +41,12 @@ export const TESTS = tool(
 export async function run({ program, args }, { kept = false, more = [] } = {}) {
   const file = path.join(root, 'node_modules', PROGRAMS[program]);
   const output = kept ? 'pipe' : 'inherit';
+  const plain = kept || !process.stdout.isTTY;
   const child = spawn(process.execPath, [file, ...args, ...more], {
     cwd: root,
     stdio: ['ignore', output, output],
     // whatever the environment says, tests run as tests; no colours in what is kept
-    env: { ...process.env, NODE_ENV: 'test', ...(kept ? { NO_COLOR: '1' } : {}) },
+    env: { ...process.env, NODE_ENV: 'test', ...(plain ? { NO_COLOR: '1' } : {}) },
   });
   const texts = [];
   for (const stream of [child.stdout, child.stderr]) {

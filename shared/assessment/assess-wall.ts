@@ -50,7 +50,9 @@ function warningsOf(
   if (length < SHORTEST_ZONE) return [...warnings, 'short wall', 'not affected'];
   const ignored = rules.cutOff.kind === 'settlement' ? rules.cutOff.settlement : 0;
   const moves = result.settlementMax > 0 && result.settlementMax >= ignored;
-  return moves ? [...warnings, 'flat along the wall', 'not affected'] : [...warnings, 'not affected'];
+  return moves
+    ? [...warnings, 'flat along the wall', 'not affected']
+    : [...warnings, 'not affected'];
 }
 
 /**

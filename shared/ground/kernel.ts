@@ -105,7 +105,9 @@ export function sumPieces(
     const across =
       at(pack, o + 6) *
       (at(table, k + 1) +
-        d * (at(table, k + 2) + d * (at(table, k + 3) + d * (at(table, k + 4) + d * at(table, k + 5)))));
+        d *
+          (at(table, k + 2) +
+            d * (at(table, k + 3) + d * (at(table, k + 4) + d * at(table, k + 5)))));
 
     let bigA = 1;
     let phiA = 0;

@@ -114,7 +114,10 @@ function packPiece(packing: Packing, piece: Piece, length: number): void {
   }
   const lowest = levelsAt(place, Math.min(piece.startLevel, levelAlong(piece, length)));
   const change = Math.abs(troughWidth(rule, k, lowest) - width);
-  const parts = Math.min(MOST_PARTS, Math.max(1, Math.ceil(change / (LARGEST_WIDTH_CHANGE * width))));
+  const parts = Math.min(
+    MOST_PARTS,
+    Math.max(1, Math.ceil(change / (LARGEST_WIDTH_CHANGE * width))),
+  );
   for (let part = 0; part < parts; part++) {
     packPart(packing, piece, k, (part * length) / parts, length / parts);
   }
