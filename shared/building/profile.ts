@@ -37,7 +37,7 @@ export type ProfileQuantity = keyof typeof PROFILE;
  * field to its second derivative at each node, displacement to its first. Everything about zones is
  * found on it exactly.
  *
- * Units: nodes m from the wall's start. Valid: with nodes a fifth of the trough width apart the
+ * Units: nodes m from the wall's start. Valid: with nodes a quarter of the trough width apart the
  * settlement is right to 1e-7 and the curvature to 1e-4 of their largest. Source: [own].
  */
 export type Profile = {

@@ -82,11 +82,13 @@ describe('method.md section 3: what holds for any wall', () => {
     });
   });
 
-  it('more volume loss of a straight drive never strains less', () => {
+  it('more volume loss of a straight drive never strains less a wall that it strains at all', () => {
+    // at less than 0.01 % it may, by up to 35 %: as the settlement reaches 1 mm farther off, a zone
+    // under compression grows longer and so is compressed less, or frees itself of its slivers
     const cases = fc.tuple(drawnDrives(straightAxes), drawnWalls, numbers(1.001, 2));
     holds(cases, ([drive, wall, factor]) => {
-      const [less, more] = [1, factor].map((f) => assessed([loaded(drive, f)], wall).strain);
-      expect(more).toBeGreaterThanOrEqual((less ?? NaN) * (1 - 1e-12));
+      const [less = NaN, more] = [1, factor].map((f) => assessed([loaded(drive, f)], wall).strain);
+      if (less > 1e-4) expect(more).toBeGreaterThanOrEqual(less * (1 - 1e-12));
     });
   });
 

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { ALL_COMPLETE } from '../../../shared/assessment/moment.ts';
+import { ALL_COMPLETE, type Moment } from '../../../shared/assessment/moment.ts';
 import {
   DEFAULT_SCREENING_LIMITS,
   screenFootprint,
@@ -79,7 +79,7 @@ describe('screening of a footprint', () => {
   test('the worst moment counts: a face that has not arrived moves less than the complete drive', () => {
     const footprint = { rings: [square(-2, -2, 4)], groundLevel: 0, foundingLevel: 0 };
     const before = { name: 'before', faces: [400] };
-    const screened = (moments: { name: string; faces: (number | undefined)[] }[]) =>
+    const screened = (moments: readonly Moment[]) =>
       screenFootprint(aModel(), footprint, RULES, DEFAULT_SCREENING_LIMITS, moments).settlementMax;
     expect(screened([before])).toBeLessThan(1e-6);
     expect(screened([before, ALL_COMPLETE])).toBeCloseTo(DEEPEST, 9);

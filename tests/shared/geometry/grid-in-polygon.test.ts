@@ -7,7 +7,7 @@ import { pointInPolygon } from '../../../shared/geometry/point-in-polygon.ts';
 import type { PlanPoint } from '../../../shared/geometry/point.ts';
 import { polygonEdges } from '../../../shared/geometry/polygon-edges.ts';
 import { at } from '../../../shared/numerics/at.ts';
-import { rings } from '../../support/drawn-geometry.ts';
+import { regularRing, rings } from '../../support/drawn-geometry.ts';
 import { methodErrorOf } from '../../support/method-error-of.ts';
 import { FAR_FROM_ORIGIN, motions, movePoint } from '../../support/plan-motion.ts';
 import { holds, numbers } from '../../support/property.ts';
@@ -135,6 +135,18 @@ describe('gridInPolygon', () => {
         const off = planDistance(there[k] ?? [NaN, NaN], movePoint(motion, point));
         // the direction of an edge of 1 m, over 60 m
         expect(off).toBeLessThan(60 * FAR_FROM_ORIGIN);
+      }
+    });
+  });
+
+  it('is turned along the first of edges that are equally long, however they round', () => {
+    const hexagon = regularRing(6, 10);
+    holds(motions, (motion) => {
+      const moved = hexagon.map((vertex) => movePoint(motion, vertex));
+      const there = grid([moved], 2.3);
+      for (const [k, point] of grid([hexagon], 2.3).entries()) {
+        const off = planDistance(there[k] ?? [NaN, NaN], movePoint(motion, point));
+        expect(off).toBeLessThan(10 * FAR_FROM_ORIGIN);
       }
     });
   });
