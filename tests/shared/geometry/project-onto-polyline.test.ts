@@ -89,14 +89,15 @@ describe('projectOntoPolyline', () => {
     const turns = fc.tuple(numbers(1.7, 3), fc.constantFrom(1, -1));
     holds(fc.tuple(turns, numbers(0.05, 0.95), motions), ([[turn, side], share, motion]) => {
       const direction = side * turn;
+      const [x, y] = [29.7, 7.1];
       const axis: PlanPoint[] = [
-        [0, 0],
-        [50, 0],
-        [50 + 50 * Math.cos(direction), 50 * Math.sin(direction)],
+        [x - 50, y],
+        [x, y],
+        [x + 50 * Math.cos(direction), y + 50 * Math.sin(direction)],
       ];
       // the wedge of points nearest to the vertex, between the normals of the parts on the outer side
       const towards = side * (-Math.PI / 2 + share * turn);
-      const point: PlanPoint = [50 + 7 * Math.cos(towards), 7 * Math.sin(towards)];
+      const point: PlanPoint = [x + 7 * Math.cos(towards), y + 7 * Math.sin(towards)];
       const moved = axis.map((vertex) => movePoint(motion, vertex));
       const { chainage, offset } = project(movePoint(motion, point), moved);
       expect(chainage).toBeCloseTo(50, 7);
