@@ -14,7 +14,7 @@ export type Reference = {
 /**
  * Every work that the method cites, each once, by the key that doc blocks and workings use.
  *
- * Units: none. Valid: closed list. Source: the works themselves.
+ * Units: none. Valid: closed list. Source: see the parts.
  */
 export const REFERENCES = {
   'abramowitz-stegun-1964': {
@@ -46,7 +46,8 @@ export const REFERENCES = {
     authors: 'Burland, J. B.',
     year: 1995,
     title: 'Assessment of risk of damage to buildings due to tunnelling and excavation',
-    where: 'First International Conference on Earthquake Geotechnical Engineering, Tokyo, 1189–1201',
+    where:
+      'First International Conference on Earthquake Geotechnical Engineering, Tokyo, 1189–1201',
   },
   'burland-broms-de-mello-1977': {
     authors: 'Burland, J. B., Broms, B. B. and de Mello, V. F. B.',
@@ -115,8 +116,7 @@ export const REFERENCES = {
     authors: "New, B. M. and O'Reilly, M. P.",
     year: 1991,
     title: 'Tunnelling induced ground movements: predicting their magnitude and effects',
-    where:
-      'Fourth International Conference on Ground Movements and Structures, Cardiff, 671–697',
+    where: 'Fourth International Conference on Ground Movements and Structures, Cardiff, 671–697',
   },
   'oreilly-new-1982': {
     authors: "O'Reilly, M. P. and New, B. M.",

@@ -12,7 +12,8 @@ function argumentsOf(args: readonly string[]): { file: string; working: string |
   const [file, ...more] = files;
   const unknown = files.find((word) => word.startsWith('--'));
   if (unknown !== undefined) throw new CaseError(`${unknown} is not known. ${USAGE}`);
-  if (at >= 0 && working === undefined) throw new CaseError(`--working needs a wall's name. ${USAGE}`);
+  if (at >= 0 && working === undefined)
+    throw new CaseError(`--working needs a wall's name. ${USAGE}`);
   if (file === undefined || more.length > 0) throw new CaseError(USAGE);
   return { file, working };
 }

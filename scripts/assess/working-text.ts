@@ -19,7 +19,15 @@ function figure(value: number): string {
   return String(Number(value.toPrecision(7)));
 }
 
-function lineText({ symbol, meaning, expression, inputs, value, unit, reference }: WorkingLine): string {
+function lineText({
+  symbol,
+  meaning,
+  expression,
+  inputs,
+  value,
+  unit,
+  reference,
+}: WorkingLine): string {
   const put = Object.entries(inputs).map(([name, number]) => `${name} = ${figure(number)}`);
   return [
     `  ${symbol}: ${meaning}`,
@@ -82,7 +90,9 @@ function wallNamed({ walls }: AssessCase, name: string): [CaseWall, number] {
   const [only, another] = found;
   if (only === undefined) throw new CaseError(`--working: no wall is named "${name}"`);
   if (another !== undefined) {
-    throw new CaseError(`--working: walls[${only[0]}] and walls[${another[0]}] are both named "${name}"`);
+    throw new CaseError(
+      `--working: walls[${only[0]}] and walls[${another[0]}] are both named "${name}"`,
+    );
   }
   return [only[1], only[0]];
 }
@@ -93,7 +103,12 @@ export function workingText({ walls, ...input }: AssessCase, name: string): stri
   const prepared = preparedCase(input);
   try {
     const wall = wallOfCase(caseWall, prepared.groundLevel);
-    const { result, sections } = workingOfWall(prepared.model, wall, prepared.rules, prepared.faces);
+    const { result, sections } = workingOfWall(
+      prepared.model,
+      wall,
+      prepared.rules,
+      prepared.faces,
+    );
     const keys = new Set(sections.flatMap(({ lines }) => lines.map((line) => line.reference)));
     const blocks = [
       `Working of wall "${name}", method version ${METHOD_VERSION}\nMetres, levels above datum, strains as m/m, settlement positive down, tension positive.`,

@@ -2,7 +2,13 @@ import type { Category } from '../damage/categories.ts';
 import type { RankinClass } from '../damage/rankin.ts';
 import type { Mode } from '../building/curvature-runs.ts';
 import { lossFactorsAt } from '../ground/loss-factors-at.ts';
-import { atPosition, CENTRAL, FIVE_POSITIONS, isRange, type FivePosition } from '../numerics/range.ts';
+import {
+  atPosition,
+  CENTRAL,
+  FIVE_POSITIONS,
+  isRange,
+  type FivePosition,
+} from '../numerics/range.ts';
 import type { AssessCase } from '../schemas/assess-case.ts';
 import type { Warning } from '../warnings.ts';
 import { assessWall, resultOfWall, type AssessedZone, type WallResult } from './assess-wall.ts';

@@ -42,15 +42,19 @@ export type WallResult = WallExtremes & {
 
 function warningsOf(
   { field, length }: WallField,
+  wall: Wall,
   result: Pick<WallResult, 'settlementMax' | 'zones'>,
   rules: AssessmentRules,
 ): Warning[] {
   const warnings = [...field.warnings];
+  if (wall.groundLevelAssumed === true) warnings.push('ground level assumed');
   if (result.zones.length > 0) return warnings;
   if (length < SHORTEST_ZONE) return [...warnings, 'short wall', 'not affected'];
   const ignored = rules.cutOff.kind === 'settlement' ? rules.cutOff.settlement : 0;
   const moves = result.settlementMax > 0 && result.settlementMax >= ignored;
-  return moves ? [...warnings, 'flat along the wall', 'not affected'] : [...warnings, 'not affected'];
+  return moves
+    ? [...warnings, 'flat along the wall', 'not affected']
+    : [...warnings, 'not affected'];
 }
 
 /**
@@ -82,7 +86,7 @@ export function resultOfWall(
     strain,
     category: categoryOfStrain(strain),
     rankin: rankinClass(extremes.slopeMax, extremes.settlementMax),
-    warnings: warningsOf(field, { zones, settlementMax: extremes.settlementMax }, rules),
+    warnings: warningsOf(field, wall, { zones, settlementMax: extremes.settlementMax }, rules),
   };
 }
 

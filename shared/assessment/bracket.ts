@@ -4,7 +4,13 @@ import type { Category } from '../damage/categories.ts';
 import { lossFactorsAt } from '../ground/loss-factors-at.ts';
 import type { GroundModel } from '../ground/ground-model.ts';
 import { troughWidthMatters } from '../ground/trough-width-matters.ts';
-import { CENTRAL, FIVE_POSITIONS, isRange, type FivePosition, type Range } from '../numerics/range.ts';
+import {
+  CENTRAL,
+  FIVE_POSITIONS,
+  isRange,
+  type FivePosition,
+  type Range,
+} from '../numerics/range.ts';
 import { loadedProfile } from './loaded-profile.ts';
 import type { AssessmentRules } from './rules.ts';
 import { largestStrain, shapesOfWall } from './shapes-of-wall.ts';

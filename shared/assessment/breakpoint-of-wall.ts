@@ -64,7 +64,10 @@ export function drivePressingMost(
   let [drive, largest] = [0, -1];
   for (const index of model.drives.keys()) {
     const alone = levelField(model, site, { position: CENTRAL, faces, onlyDrive: index });
-    const settlement = at(fieldAtPoints(alone, Float64Array.from(point), factors), FIELD.settlement);
+    const settlement = at(
+      fieldAtPoints(alone, Float64Array.from(point), factors),
+      FIELD.settlement,
+    );
     if (settlement > largest) [drive, largest] = [index, settlement];
   }
   let [nearest, loss] = [Infinity, { central: 0, high: 0 }];

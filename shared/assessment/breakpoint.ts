@@ -1,5 +1,10 @@
 import { polynomialBound } from '../numerics/polynomial-bound.ts';
-import { PROFILE, PROFILE_STRIDE, type Profile, type ProfileQuantity } from '../building/profile.ts';
+import {
+  PROFILE,
+  PROFILE_STRIDE,
+  type Profile,
+  type ProfileQuantity,
+} from '../building/profile.ts';
 import type { Wall } from '../building/wall.ts';
 import { limitingStrain } from '../damage/category-of-strain.ts';
 import { atOrAbove } from '../damage/at-or-above.ts';

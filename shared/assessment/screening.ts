@@ -113,8 +113,7 @@ export function screenFootprint(
   return {
     settlementMax,
     slopeMax,
-    passes:
-      !atOrAbove(settlementMax, limits.settlement) && !atOrAbove(slopeMax, limits.slope),
+    passes: !atOrAbove(settlementMax, limits.settlement) && !atOrAbove(slopeMax, limits.slope),
     limits,
     warnings: [...warnings],
     basis: basisOf(model, rules),

@@ -89,12 +89,7 @@ function closeShortFlats(profile: Profile, runs: Run[]): Run[] {
       before.end = run.end;
       continue;
     }
-    const turn = findRoot(
-      (x) => profileValue(profile, 'curvature', x),
-      run.start,
-      run.end,
-      1e-12,
-    );
+    const turn = findRoot((x) => profileValue(profile, 'curvature', x), run.start, run.end, 1e-12);
     before.end = turn;
     after.start = turn;
   }

@@ -19,7 +19,11 @@ export type DeepBeam = {
  *
  * Units: m → m⁴/m and m. Valid: height > 0. Source: burland-wroth-1974.
  */
-export function beamSection(mode: Mode, height: number, record?: Recorder): { I: number; t: number } {
+export function beamSection(
+  mode: Mode,
+  height: number,
+  record?: Recorder,
+): { I: number; t: number } {
   const share = mode === 'sagging' ? 12 : 3;
   const I = (height * height * height) / share;
   const t = mode === 'sagging' ? height / 2 : height;
@@ -110,8 +114,7 @@ export function beamStrains(
   const nu = beam.poisson;
   const bendingStrain = bending + horizontalStrain;
   const half = (horizontalStrain * (1 + nu)) / 2;
-  const diagonalStrain =
-    (horizontalStrain * (1 - nu)) / 2 + Math.sqrt(half * half + shear * shear);
+  const diagonalStrain = (horizontalStrain * (1 - nu)) / 2 + Math.sqrt(half * half + shear * shear);
   const governing = bendingStrain > diagonalStrain ? 'bending' : 'diagonal';
   const strain = Math.max(bendingStrain, diagonalStrain);
   record?.({

@@ -37,7 +37,7 @@ export type ProfileQuantity = keyof typeof PROFILE;
  * field to its second derivative at each node, displacement to its first. Everything about zones is
  * found on it exactly.
  *
- * Units: nodes m from the wall's start. Valid: with nodes a fifth of the trough width apart the
+ * Units: nodes m from the wall's start. Valid: with nodes a quarter of the trough width apart the
  * settlement is right to 1e-7 and the curvature to 1e-4 of their largest. Source: [own].
  */
 export type Profile = {
@@ -88,13 +88,7 @@ export function profileFromNodes(nodes: Float64Array, values: Float64Array): Pro
       { value: at(values, b), slope: at(values, b + 1), curvature: at(values, b + 2) },
     );
     writeDerivative(coefficients, o, 5, o + PROFILE.slope.offset, width);
-    writeDerivative(
-      coefficients,
-      o + PROFILE.slope.offset,
-      4,
-      o + PROFILE.curvature.offset,
-      width,
-    );
+    writeDerivative(coefficients, o + PROFILE.slope.offset, 4, o + PROFILE.curvature.offset, width);
     cubicHermite(
       coefficients,
       o + PROFILE.displacement.offset,
@@ -120,10 +114,7 @@ export function profileFromNodes(nodes: Float64Array, values: Float64Array): Pro
  * `bad-table`. Source: new-oreilly-1991, for
  * adding the movements of several drives.
  */
-export function combineProfiles(
-  profiles: readonly Profile[],
-  factors: readonly number[],
-): Profile {
+export function combineProfiles(profiles: readonly Profile[], factors: readonly number[]): Profile {
   const [first, ...others] = profiles;
   if (first === undefined) throw new MethodError('bad-table', 'There are no profiles to combine.');
   const scale = factors[0] ?? 0;

@@ -21,7 +21,13 @@ export function strainedZone(
 ): StrainedZone {
   const { height, eOverG, poisson } = wall;
   const beam = { length: shape.end - shape.start, height, eOverG, poisson };
-  const strains = beamStrains(shape.mode, beam, shape.deflectionRatio, shape.horizontalStrain, record);
+  const strains = beamStrains(
+    shape.mode,
+    beam,
+    shape.deflectionRatio,
+    shape.horizontalStrain,
+    record,
+  );
   return { ...shape, ...strains };
 }
 

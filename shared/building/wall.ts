@@ -13,6 +13,8 @@ export type Wall = {
   readonly name: string;
   readonly segment: Segment;
   readonly groundLevel: number;
+  /** Whether the ground level was taken from beside a drive, not known at the wall. */
+  readonly groundLevelAssumed?: boolean;
   readonly foundingLevel: number;
   readonly height: number;
   readonly eOverG: Range;

@@ -4,11 +4,12 @@ import { polygonEdges } from '../geometry/polygon-edges.ts';
 import type { StraightTolerance } from '../geometry/straight-run-end.ts';
 
 /**
- * How far edges of a footprint may depart from a line and still be one wall: 5 degrees and 0.2 m.
+ * How far edges of a footprint may depart from a line and still be one wall: 5 degrees and 0.2 m, with
+ * jogs of up to 0.2 m between them.
  *
  * Units: radians and m. Valid: a constant. Source: [common].
  */
-export const WALL_TOLERANCE: StraightTolerance = { angle: Math.PI / 36, offset: 0.2 };
+export const WALL_TOLERANCE: StraightTolerance = { angle: Math.PI / 36, offset: 0.2, jog: 0.2 };
 
 /**
  * The walls of a footprint: its edges, nearly collinear ones merged, ring by ring.

@@ -22,7 +22,12 @@ export function categoryOfStrain(strain: number, record?: Recorder): Category {
   for (const { category, limitingStrain: limit } of CATEGORIES) {
     if (category > 0 && atOrAbove(strain, limit)) reached = category;
   }
-  const [c1, c2, c3, c4] = [limitingStrain(1), limitingStrain(2), limitingStrain(3), limitingStrain(4)];
+  const [c1, c2, c3, c4] = [
+    limitingStrain(1),
+    limitingStrain(2),
+    limitingStrain(3),
+    limitingStrain(4),
+  ];
   record?.({
     symbol: 'category',
     meaning: 'number of limiting strains reached',

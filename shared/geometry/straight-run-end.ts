@@ -7,11 +7,16 @@ import type { PolylinePart } from './polyline-parts.ts';
 
 /**
  * How far a run of parts may leave the line between its ends and still count as straight: no part by
- * more than `angle` in direction, no vertex by more than `offset`.
+ * more than `angle` in direction, no vertex by more than `offset`. A part no longer than `jog` may point
+ * anywhere (0 where left out).
  *
- * Units: angle in radians, offset m. Valid: 0 < angle ≤ π/4, offset > 0. Source: [own].
+ * Units: angle in radians, offset and jog m. Valid: 0 < angle ≤ π/4, offset > 0, jog ≥ 0. Source: [own].
  */
-export type StraightTolerance = { readonly angle: number; readonly offset: number };
+export type StraightTolerance = {
+  readonly angle: number;
+  readonly offset: number;
+  readonly jog?: number;
+};
 
 /** The directions from a point in which a line passes a second point within an offset. */
 function fanTowards(from: PlanPoint, to: PlanPoint, offset: number): DirectionFan | undefined {
@@ -24,7 +29,8 @@ function fanTowards(from: PlanPoint, to: PlanPoint, offset: number): DirectionFa
 /**
  * The index of the last part with which the run that begins at a part is straight. Every vertex and
  * every part allows the line from the run's start a fan of directions; the run ends at the last part
- * whose end lies in what all of them have in common. The search stops when nothing is left.
+ * whose end lies in what all of them have in common. The own direction
+ * of a jog says nothing. The search stops when nothing is left.
  *
  * Units: index. Valid: parts follow one another, `from` ≤ `last`, both inside the list; throws
  * `outside-range` for a tolerance outside its own range. Source: [own].
@@ -33,7 +39,7 @@ export function straightRunEnd(
   parts: readonly PolylinePart[],
   from: number,
   last: number,
-  { angle, offset }: StraightTolerance,
+  { angle, offset, jog = 0 }: StraightTolerance,
 ): number {
   if (!(angle > 0 && angle <= Math.PI / 4 && offset > 0)) {
     throw new MethodError('outside-range', `No straightness of ${angle} rad and ${offset} m.`);
@@ -46,7 +52,7 @@ export function straightRunEnd(
     const part = parts[k];
     if (part === undefined) break;
     const fans = [
-      fanAround(part.direction, sineOfAngle),
+      part.length > jog ? fanAround(part.direction, sineOfAngle) : undefined,
       fanTowards(origin, part.start, offset),
       fanTowards(origin, part.end, offset),
     ];

@@ -50,7 +50,11 @@ export function blockIsNegligible(
 ): boolean {
   const { groundLevel: ground, foundingLevel: founding } = place;
   if (block.highestAxis + block.largestDiameter / 2 >= founding) return false;
-  const widest = troughWidth(ruleAt(rule, 4), block.largestK, { ground, founding, axis: block.lowestAxis });
+  const widest = troughWidth(ruleAt(rule, 4), block.largestK, {
+    ground,
+    founding,
+    axis: block.lowestAxis,
+  });
   const distance = boxDistance(block.box, place.box);
   if (!(widest > 0) || distance < NEVER_CULLED_WITHIN * widest) return false;
   const narrowest = troughWidth(ruleAt(rule, 0), block.smallestK, {

@@ -45,10 +45,7 @@ function blockOf(pieces: readonly Piece[], highFactors: readonly number[]): Bloc
  * Units: m. Valid: pieces in the order of driving; highFactors are the high factors of the groups.
  * Source: [own].
  */
-export function blocksOfPieces(
-  pieces: readonly Piece[],
-  highFactors: readonly number[],
-): Block[] {
+export function blocksOfPieces(pieces: readonly Piece[], highFactors: readonly number[]): Block[] {
   const blocks: Block[] = [];
   for (let first = 0; first < pieces.length; first += PIECES_PER_BLOCK) {
     blocks.push(blockOf(pieces.slice(first, first + PIECES_PER_BLOCK), highFactors));

@@ -1,5 +1,6 @@
 import { MethodError } from '../method-error.ts';
 import type { Warning } from '../warnings.ts';
+import type { Segment } from '../geometry/point.ts';
 import type { Levels } from './levels.ts';
 import type { Piece } from './piece.ts';
 import { distanceFromPlace, type Place } from './place.ts';
@@ -26,12 +27,13 @@ export function needsCrownRule(piece: Piece, levels: Levels, width: number): boo
  * drive: a piece whose crown is at or above the founding level, or which has no trough width there,
  * is refused when it is beside the place, and left out with a warning when it is farther off.
  *
- * Units: m. Valid: `widthAtGround` is i at ground level; throws `below-crown-beside-drive` or
+ * Units: m. Valid: `driven` is the plan of what is driven of the piece, `widthAtGround` is i at ground level; throws `below-crown-beside-drive` or
  * `trough-width-not-positive`, field `foundingLevel`. Source: [own]; the reach is
  * mair-taylor-burland-1996, the diameters of the warnings are [common].
  */
 export function crownRule(
   piece: Piece,
+  driven: Segment,
   driveName: string,
   place: Place,
   levels: Levels,
@@ -42,7 +44,7 @@ export function crownRule(
   const crown = levels.axis + diameter / 2;
   const belowCrown = crown >= levels.founding;
   const impossible = belowCrown || !(width > 0);
-  const distance = distanceFromPlace(place, piece.plan);
+  const distance = distanceFromPlace(place, driven);
   const beside = distance < BESIDE_IN_WIDTHS * Math.max(0, widthAtGround) + diameter / 2;
   if (impossible && !beside) {
     return { leftOut: true, warnings: ['drive above the founding level left out'] };

@@ -22,6 +22,14 @@ export type DriveInputs = {
 export type DriveInterval = Partial<DriveInputs> & { readonly from: number; readonly to: number };
 
 /**
+ * The ground level over a drive at one chainage.
+ *
+ * Units: m of chainage, m above datum. Valid: rows in order of chainage; straight between them.
+ * Source: [own].
+ */
+export type GroundLevelRow = { readonly chainage: number; readonly level: number };
+
+/**
  * One bore, driven along its axis in the order of its points; chainage is plan length from the first.
  *
  * Units: axis m; faceShare is the share of the final settlement that has happened above the face;
@@ -35,4 +43,6 @@ export type Drive = DriveInputs & {
   readonly intervals: readonly DriveInterval[];
   readonly faceShare: number;
   readonly laterFactor: number;
+  /** For walls whose own ground level is not known. */
+  readonly groundLevels?: readonly GroundLevelRow[];
 };

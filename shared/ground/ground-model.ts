@@ -1,3 +1,4 @@
+import { certain } from '../numerics/range.ts';
 import type { Drive } from './drive.ts';
 import { blocksOfPieces, type Block } from './block.ts';
 import type { LossGroup } from './loss-group.ts';
@@ -39,7 +40,7 @@ function piecesOrNamedError(drive: Drive, index: number, groups: LossGroup[]): P
 }
 
 /**
- * Makes drives ready for computing, once for any number of walls.
+ * Makes drives ready for computing, once for any number of walls. Without drives nothing moves.
  *
  * Units: m. Valid: throws `zero-length` or `bad-intervals` with the field at fault, as
  * `drives[0].axis[3]`. Source: [own].
@@ -47,6 +48,7 @@ function piecesOrNamedError(drive: Drive, index: number, groups: LossGroup[]): P
 export function groundModel(drives: readonly Drive[], rules: GroundRules): GroundModel {
   const groups: LossGroup[] = [];
   const pieces = drives.map((drive, index) => piecesOrNamedError(drive, index, groups));
+  if (groups.length === 0) groups.push({ factors: certain(0) });
   const highFactors = groups.map((group) => group.factors.high);
   const lengths = pieces.map((ofDrive) => {
     const last = ofDrive.at(-1);

@@ -1,6 +1,7 @@
 import { at } from '../numerics/at.ts';
 import {
   NODES_PER_UNIT,
+  NODE_STEP,
   NORMAL_TABLE,
   NORMAL_TABLE_STRIDE,
   TABLE_REACH,
@@ -100,12 +101,14 @@ export function sumPieces(
     if (b >= TABLE_REACH) continue;
 
     let k = (y * NODES_PER_UNIT + NEAREST_NODE) | 0;
-    let d = y - (k / NODES_PER_UNIT - TABLE_REACH);
+    let d = y - (k * NODE_STEP - TABLE_REACH);
     k *= NORMAL_TABLE_STRIDE;
     const across =
       at(pack, o + 6) *
       (at(table, k + 1) +
-        d * (at(table, k + 2) + d * (at(table, k + 3) + d * (at(table, k + 4) + d * at(table, k + 5)))));
+        d *
+          (at(table, k + 2) +
+            d * (at(table, k + 3) + d * (at(table, k + 4) + d * at(table, k + 5)))));
 
     let bigA = 1;
     let phiA = 0;
@@ -113,7 +116,7 @@ export function sumPieces(
     let phiB = 0;
     if (a < TABLE_REACH) {
       k = (a * NODES_PER_UNIT + NEAREST_NODE) | 0;
-      d = a - (k / NODES_PER_UNIT - TABLE_REACH);
+      d = a - (k * NODE_STEP - TABLE_REACH);
       k *= NORMAL_TABLE_STRIDE;
       const t1 = at(table, k + 1);
       const t2 = at(table, k + 2);
@@ -124,7 +127,7 @@ export function sumPieces(
     }
     if (b > -TABLE_REACH) {
       k = (b * NODES_PER_UNIT + NEAREST_NODE) | 0;
-      d = b - (k / NODES_PER_UNIT - TABLE_REACH);
+      d = b - (k * NODE_STEP - TABLE_REACH);
       k *= NORMAL_TABLE_STRIDE;
       const t1 = at(table, k + 1);
       const t2 = at(table, k + 2);

@@ -7,7 +7,7 @@ import { drivenEnd } from './driven-end.ts';
 import type { GroundModel } from './ground-model.ts';
 import { PACK_STRIDE } from './kernel.ts';
 import type { Levels } from './levels.ts';
-import { levelAlong, type Piece } from './piece.ts';
+import { drivenPlan, levelAlong, type Piece } from './piece.ts';
 import type { Place } from './place.ts';
 import type { Site } from './site.ts';
 import { troughWidth } from './trough-width.ts';
@@ -100,7 +100,7 @@ function packPiece(packing: Packing, piece: Piece, length: number): void {
   if (needsCrownRule(piece, levels, width)) {
     const atGround = troughWidth(rule, k, { ...levels, founding: place.groundLevel });
     const name = model.drives[piece.drive]?.name ?? '';
-    const crown = crownRule(piece, name, place, levels, width, atGround);
+    const crown = crownRule(piece, drivenPlan(piece, length), name, place, levels, width, atGround);
     for (const warning of crown.warnings) warnings.add(warning);
     if (crown.leftOut) return;
   }
@@ -114,7 +114,10 @@ function packPiece(packing: Packing, piece: Piece, length: number): void {
   }
   const lowest = levelsAt(place, Math.min(piece.startLevel, levelAlong(piece, length)));
   const change = Math.abs(troughWidth(rule, k, lowest) - width);
-  const parts = Math.min(MOST_PARTS, Math.max(1, Math.ceil(change / (LARGEST_WIDTH_CHANGE * width))));
+  const parts = Math.min(
+    MOST_PARTS,
+    Math.max(1, Math.ceil(change / (LARGEST_WIDTH_CHANGE * width))),
+  );
   for (let part = 0; part < parts; part++) {
     packPart(packing, piece, k, (part * length) / parts, length / parts);
   }

@@ -31,3 +31,17 @@ export type Piece = {
 export function levelAlong(piece: Piece, along: number): number {
   return piece.startLevel + ((piece.endLevel - piece.startLevel) * along) / piece.length;
 }
+
+/**
+ * The plan of a piece up to a length from its start, which is all of it that a face has driven.
+ *
+ * Units: m. Valid: 0 < length ≤ the piece's. Source: [own].
+ */
+export function drivenPlan(piece: Piece, length: number): Segment {
+  const { start, end } = piece.plan;
+  if (length >= piece.length) return { start, end };
+  return {
+    start,
+    end: [start[0] + length * piece.cosEast, start[1] + length * piece.cosNorth],
+  };
+}

@@ -10,7 +10,13 @@ import { volumePerMetre } from './volume-loss.ts';
 /** Level change along a piece, in diameters: so that the crown rule sees gradients locally. */
 const LARGEST_LEVEL_CHANGE = 0.1;
 
-type Leg = { start: PlanPoint; end: PlanPoint; levels: [number, number]; from: number; length: number };
+type Leg = {
+  start: PlanPoint;
+  end: PlanPoint;
+  levels: [number, number];
+  from: number;
+  length: number;
+};
 
 function legsOfAxis(drive: Drive): Leg[] {
   const legs: Leg[] = [];
@@ -66,7 +72,13 @@ function cutOnGradient(leg: Leg, section: Section, owner: Owner): Piece[] {
   const change = (Math.abs(leg.levels[1] - leg.levels[0]) * length) / leg.length;
   const parts = Math.max(1, Math.ceil(change / (LARGEST_LEVEL_CHANGE * section.diameter)));
   return Array.from({ length: parts }, (_, part) =>
-    cutLeg(leg, from + (part * length) / parts, from + ((part + 1) * length) / parts, section, owner),
+    cutLeg(
+      leg,
+      from + (part * length) / parts,
+      from + ((part + 1) * length) / parts,
+      section,
+      owner,
+    ),
   );
 }
 

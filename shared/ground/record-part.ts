@@ -47,7 +47,8 @@ function recordInputs(
   record({
     symbol: 'f',
     meaning: `height of the founding level above the vector focus, "${focus}"`,
-    expression: focus === 'axis' ? 'founding - axis' : '(ground - axis) * (1 + c) - (ground - founding)',
+    expression:
+      focus === 'axis' ? 'founding - axis' : '(ground - axis) * (1 + c) - (ground - founding)',
     inputs: focus === 'axis' ? { founding, axis } : { ground, founding, axis, c: DEEP_FOCUS_SHARE },
     value: f,
     unit: 'm',
@@ -148,7 +149,8 @@ export function recordPart(
   const [t_s, t_y] = [tx * c_E + ty * c_N, ty * c_E - tx * c_N];
   record({
     symbol: 'm_part',
-    meaning: 'slope along the wall from this part; t_s and t_y are the wall along and across the drive',
+    meaning:
+      'slope along the wall from this part; t_s and t_y are the wall along and across the drive',
     expression:
       't_s * V_s / (2 * pi * i^2) * exp(-y^2 / (2 * i^2)) * (exp(-A^2 / 2) - exp(-B^2 / 2)) - t_y * y / i^2 * S_part',
     inputs: { t_s, t_y, V_s, i, y, A, B, S_part: settlement },

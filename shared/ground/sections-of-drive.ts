@@ -29,7 +29,11 @@ export function sectionsOfDrive(drive: Drive, length: number): Section[] {
       throw new MethodError('bad-intervals', `It runs from ${from} to ${to} m.`, field);
     }
     if (from < earlierEnd) {
-      throw new MethodError('bad-intervals', `It overlaps another that ends at ${earlierEnd} m.`, field);
+      throw new MethodError(
+        'bad-intervals',
+        `It overlaps another that ends at ${earlierEnd} m.`,
+        field,
+      );
     }
     earlierEnd = to;
     const [start, end] = [Math.max(0, from), Math.min(length, to)];

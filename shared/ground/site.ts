@@ -22,8 +22,6 @@ export function siteOf(model: GroundModel, place: Place, culling = true): Site {
   if (!culling) return { place, blocks };
   return {
     place,
-    blocks: blocks.filter(
-      (block) => !blockIsNegligible(block, place, rules.depth, blocks.length),
-    ),
+    blocks: blocks.filter((block) => !blockIsNegligible(block, place, rules.depth, blocks.length)),
   };
 }

@@ -39,7 +39,6 @@ export function focusWarning(
   troughWidthParameter: number,
 ): Warning | undefined {
   if (focus === 'axis') return undefined;
-  const meant =
-    rule.kind === 'clay' && troughWidthParameter >= 0.4 && troughWidthParameter <= 0.6;
+  const meant = rule.kind === 'clay' && troughWidthParameter >= 0.4 && troughWidthParameter <= 0.6;
   return meant ? undefined : 'deep focus outside its range';
 }

@@ -40,5 +40,6 @@ export function complementaryErrorFunction(x: number): number {
  * and 7.1.14.
  */
 export function errorFunction(x: number): number {
-  return Math.abs(x) <= CROSSOVER ? seriesOfErf(x) : 1 - complementaryErrorFunction(x);
+  if (x < 0) return -errorFunction(-x);
+  return x <= CROSSOVER ? seriesOfErf(x) : 1 - complementaryErrorFunction(x);
 }

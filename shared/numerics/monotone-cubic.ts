@@ -25,7 +25,7 @@ function slopeAtEnd(secant: number, width: number, next: number, nextWidth: numb
  *
  * Units: those of the rows. Valid: at least two rows, arguments growing, else throws `bad-table`.
  * Source: fritsch-carlson-1980; slopes between rows by the weighted harmonic mean, which stays in
- * their region of monotonicity [own choice].
+ * their region of monotonicity [own].
  */
 export function monotoneCubic(
   rows: readonly (readonly [number, number])[],

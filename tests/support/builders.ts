@@ -32,7 +32,7 @@ export function aDrive(overrides: Partial<Drive> = {}): Drive {
 
 /**
  * A wall: unless said otherwise from (0, 2) to (0, 28), founded at a ground level of 0, 12 m high,
- * masonry. It is the wall of method.md section 8, item 6.
+ * masonry.
  */
 export function aWall(
   overrides: Partial<Wall> & { readonly from?: PlanPoint; readonly to?: PlanPoint } = {},

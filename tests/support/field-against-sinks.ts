@@ -32,13 +32,13 @@ export function kernelMovements(
   { ground, founding }: SinkGround['levels'],
   state: GroundState,
   points: Float64Array,
-  V_L: keyof Range = 'central',
+  { V_L = 'central', culling = true }: { V_L?: keyof Range; culling?: boolean } = {},
 ): Movement[] {
   const lines = Array.from({ length: points.length / 2 }, (_, k) => {
     const point = [points[2 * k] ?? 0, points[2 * k + 1] ?? 0] as const;
     return { start: point, end: point };
   });
-  const field = levelField(model, siteOf(model, placeOf(lines, ground, founding)), state);
+  const field = levelField(model, siteOf(model, placeOf(lines, ground, founding), culling), state);
   const values = fieldAtPoints(field, points, lossFactorsAt(model, V_L));
   return lines.map((_, k) => {
     function value(name: keyof typeof FIELD): number {

@@ -16,7 +16,7 @@ function rule(n: number): { node: number; weight: number }[] {
   });
 }
 
-const EIGHT = rule(8);
+const FIVE = rule(5);
 
 /** Points and weights by which to integrate from `from` to `to` in equal panels no longer than `panel`. */
 export function quadraturePoints(
@@ -27,7 +27,7 @@ export function quadraturePoints(
   const panels = Math.max(1, Math.ceil((to - from) / panel));
   const half = (to - from) / panels / 2;
   return Array.from({ length: panels }, (_, k) => from + (2 * k + 1) * half).flatMap((middle) =>
-    EIGHT.map(({ node, weight }) => ({ s: middle + half * node, weight: half * weight })),
+    FIVE.map(({ node, weight }) => ({ s: middle + half * node, weight: half * weight })),
   );
 }
 

@@ -29,11 +29,18 @@ export type SinkGround = {
   readonly levels: SinkLevels;
 };
 
-/** Numbers per sink: E, N, weight · V_s/(2π i²), 1/i² and i²/f. */
-const STRIDE = 5;
-/** exp(−9²/2) is 2.6e-18. */
-const REACH = 9;
-/** Eight points integrate a Gaussian over half its width to 1e-15. */
+/** One sink: where it is, q = weight · V_s/(2π i²), w = 1/i² and i²/f. */
+export type Sink = {
+  readonly E: number;
+  readonly N: number;
+  readonly q: number;
+  readonly w: number;
+  readonly towardsFocus: number;
+};
+
+/** exp(−8²/2) is 1.3e-14. */
+const REACH = 8;
+/** Five points integrate a Gaussian over half its width to 2e-13 of its peak. */
 const PANEL_IN_WIDTHS = 0.5;
 
 function density(x: number): number {
@@ -70,9 +77,9 @@ export function sinksOf(
   ground: SinkGround,
   centre: readonly [E: number, N: number],
   radius: number,
-): Float64Array {
+): Sink[] {
   const { focus, levels } = ground;
-  const sinks: number[] = [];
+  const sinks: Sink[] = [];
   for (const drive of drives) {
     const { path, lossPerMetre } = drive;
     const end = sinkEnd(drive, ground);
@@ -88,22 +95,19 @@ export function sinksOf(
         const i = widthAt(drive, ground, s);
         if (Math.hypot(E - centre[0], N - centre[1]) > radius + REACH * i) continue;
         const q = (weight * lossPerMetre(s)) / (2 * Math.PI * i * i);
-        sinks.push(E, N, q, 1 / (i * i), (i * i) / sinkFocus(focus, levels, level));
+        const towardsFocus = (i * i) / sinkFocus(focus, levels, level);
+        sinks.push({ E, N, q, w: 1 / (i * i), towardsFocus });
       }
     }
   }
-  return Float64Array.from(sinks);
+  return sinks;
 }
 
 /** Movement at a point: Σ q·exp(−r²/2i²) and its first and second derivatives, term by term. */
-export function movementAt(sinks: Float64Array, E: number, N: number): Movement {
+export function movementAt(sinks: readonly Sink[], E: number, N: number): Movement {
   let [S, mE, mN, kEE, kEN, kNN, uE, uN, eEE, eEN, eNN] = [0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0];
-  for (let o = 0; o < sinks.length; o += STRIDE) {
-    const dE = E - (sinks[o] ?? 0);
-    const dN = N - (sinks[o + 1] ?? 0);
-    const q = sinks[o + 2] ?? 0;
-    const w = sinks[o + 3] ?? 0;
-    const toFocus = sinks[o + 4] ?? 0;
+  for (const { E: sinkE, N: sinkN, q, w, towardsFocus } of sinks) {
+    const [dE, dN] = [E - sinkE, N - sinkN];
     const g = q * Math.exp((-(dE * dE + dN * dN) * w) / 2);
     const gE = -dE * w * g;
     const gN = -dN * w * g;
@@ -116,11 +120,11 @@ export function movementAt(sinks: Float64Array, E: number, N: number): Movement 
     kEE += gEE;
     kEN += gEN;
     kNN += gNN;
-    uE += toFocus * gE;
-    uN += toFocus * gN;
-    eEE += toFocus * gEE;
-    eEN += toFocus * gEN;
-    eNN += toFocus * gNN;
+    uE += towardsFocus * gE;
+    uN += towardsFocus * gN;
+    eEE += towardsFocus * gEE;
+    eEN += towardsFocus * gEN;
+    eNN += towardsFocus * gNN;
   }
   return {
     S,

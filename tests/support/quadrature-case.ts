@@ -44,7 +44,9 @@ export function kernelAgainstSinks({
   path,
 }: QuadratureCase): ReturnType<typeof deviations> {
   const state = { position: POSITIONS[end], faces };
-  const got = kernelMovements(aModel(drives, { depth, focus }), levels, state, points, end);
+  const got = kernelMovements(aModel(drives, { depth, focus }), levels, state, points, {
+    V_L: end,
+  });
   const sinks = drives.map((drive, k) =>
     sinksOfDrive(drive, {
       face: faces[k],

@@ -20,8 +20,8 @@ describe('the quadrature by which the kernel is checked', () => {
     const sinks = sinksOf([sinksOfDrive(aDrive())], CLAY, [0, 0], 40);
     const { S, slope, curvature, u, strain } = movementAt(sinks, 0, y);
     const wanted = S_MAX * Math.exp((-y * y) / 200);
-    // eight points on half a width leave 1e-15; a decade for the rounding of 1,300 terms
-    const digits = 1e-14 * S_MAX;
+    // five points on half a width leave 2e-13; a decade for second derivatives
+    const digits = 2e-12 * S_MAX;
     expect(Math.abs(S - wanted)).toBeLessThan(digits);
     expect(Math.abs(slope[1] + (y / 100) * wanted)).toBeLessThan(digits / 10);
     expect(Math.abs(curvature[2] - (y * y - 100) * 1e-4 * wanted)).toBeLessThan(digits / 100);
@@ -31,7 +31,7 @@ describe('the quadrature by which the kernel is checked', () => {
   });
 
   it('gives half the settlement over an open face', () => {
-    expect(shareAt(0)).toBeCloseTo(0.5, 13);
+    expect(shareAt(0)).toBeCloseTo(0.5, 12);
   });
 
   it('gives 27.5 % where tables of Φ have it', () => {
@@ -40,7 +40,7 @@ describe('the quadrature by which the kernel is checked', () => {
     expect(shareAt(5.9776)).toBeCloseTo(0.275, 5);
   });
 
-  it('integrates a polynomial of degree 15 exactly', () => {
-    expect(integral((x) => 16 * x ** 15, 0, 1, 2)).toBeCloseTo(1, 14);
+  it('integrates a polynomial of degree 9 exactly', () => {
+    expect(integral((x) => 10 * x ** 9, 0, 1, 2)).toBeCloseTo(1, 14);
   });
 });

@@ -3,7 +3,7 @@ import { facadeChains } from '../../../shared/building/facade-chains.ts';
 import { facadesOf, type BuildingWalls } from '../../../shared/building/facade.ts';
 import { joinedBuildings } from '../../../shared/building/joined-buildings.ts';
 import { ROW_TOLERANCE } from '../../../shared/building/row-tolerance.ts';
-import type { PlanPoint } from '../../../shared/geometry/point.ts';
+import type { PlanPoint, Segment } from '../../../shared/geometry/point.ts';
 import { arcPoints, house, terrace } from '../../support/terraces.ts';
 
 function chains(buildings: readonly BuildingWalls[]) {
@@ -49,12 +49,27 @@ describe('facadeChains', () => {
     ]);
   });
 
-  it('link the nearest ends where several are near', () => {
-    // the front of b starts 0.1 m from that of a; c stands 0.3 m in front of b and shares its side
-    const found = chains([house('a', 0, 0), house('b', 5.1, 0), house('c', 5.1, -0.3, 5, 0.3)]);
-    const [front] = found.filter(({ facades }) => facades.some((f) => f.buildingId === 'a'));
-    const names = front?.facades.map((f) => f.buildingId).sort();
-    expect(names).toEqual(['a', 'b']);
+  const party: Segment = { start: [5, 0], end: [5, 8] };
+
+  function frontOfA(buildings: readonly BuildingWalls[]): string[] {
+    const front = chains(buildings).find(({ facades }) =>
+      facades.some((f) => f.buildingId === 'a' && f.wallIndex === 0),
+    );
+    return (front?.facades ?? []).map((f) => `${f.buildingId}${f.wallIndex}`).sort();
+  }
+
+  it('link the nearest of several ends', () => {
+    const far: Segment = { start: [5, 0.4], end: [10, 0.4] };
+    const near: Segment = { start: [5, 0.1], end: [10, 0.1] };
+    const b = { id: 'b', walls: [party, far, near] };
+    expect(frontOfA([house('a', 0, 0), b])).toEqual(['a0', 'b2']);
+  });
+
+  it('link the straightest of ends equally near', () => {
+    const bent: Segment = { start: [5, 0], end: [10, 0.6] };
+    const straight: Segment = { start: [5, 0], end: [10, 0.1] };
+    const b = { id: 'b', walls: [party, bent, straight] };
+    expect(frontOfA([house('a', 0, 0), b])).toEqual(['a0', 'b2']);
   });
 
   it('hold no façade twice', () => {

@@ -36,7 +36,11 @@ describe('facadeLinks', () => {
   });
 
   it('measures the turn by its sine', () => {
-    const [link] = facadeLinks(base, facade('b', { start: [5, 0], end: [9.95, 0.5] }), ROW_TOLERANCE);
+    const [link] = facadeLinks(
+      base,
+      facade('b', { start: [5, 0], end: [9.95, 0.5] }),
+      ROW_TOLERANCE,
+    );
     // 0.5 over √(4.95² + 0.5²) = 4.975189
     expect(link?.turn).toBe(100499);
   });

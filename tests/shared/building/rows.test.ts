@@ -222,6 +222,17 @@ describe('rows of any terrace', () => {
     });
   });
 
+  it('do not depend on the order of houses that have equal claims', () => {
+    const party: Segment = { start: [5, 0], end: [5, 8] };
+    const left = { id: 'b', walls: [party, { start: [5.2, 0.2], end: [10, 0.2] } as const] };
+    const right = { id: 'c', walls: [party, { start: [5.2, -0.2], end: [10, -0.2] } as const] };
+    const a = house('a', 0, 0);
+    const wanted = members(rows([a, left, right]));
+    expect(wanted).toContain('a0 b1');
+    expect(members(rows([right, left, a]))).toEqual(wanted);
+    expect(members(rows([right, a, left]))).toEqual(wanted);
+  });
+
   it('move with the houses, to a national grid too', () => {
     holds(fc.tuple(strayTerraces, motions), ([houses, motion]) => {
       const moved = houses.map(({ id, walls }) => ({

@@ -148,4 +148,18 @@ describe('mergeEdges', () => {
     const once = merged([[0, 0], [5, 0.05], [10, 0], [10.05, 3], [10, 6], [4, 5.95], [0, 6]]); // prettier-ignore
     expect(mergeEdges(once, TOLERANCE)).toEqual(once);
   });
+
+  it('looks past a jog no longer than it may be, whatever way it points', () => {
+    const jogged: PlanPoint[] = [
+      [0, 0],
+      [10, 0],
+      [10, 0.05],
+      [20, 0.05],
+      [20, 8],
+      [0, 8],
+    ];
+    const tolerance = { angle: Math.PI / 36, offset: 0.2 };
+    expect(mergeEdges(polygonEdges(jogged), tolerance)).toHaveLength(6);
+    expect(mergeEdges(polygonEdges(jogged), { ...tolerance, jog: 0.1 })).toHaveLength(4);
+  });
 });

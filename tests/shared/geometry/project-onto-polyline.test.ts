@@ -85,6 +85,26 @@ describe('projectOntoPolyline', () => {
     });
   });
 
+  it('is on the outer side of any hairpin, wherever the grid is', () => {
+    const turns = fc.tuple(numbers(1.7, 3), fc.constantFrom(1, -1));
+    holds(fc.tuple(turns, numbers(0.05, 0.95), motions), ([[turn, side], share, motion]) => {
+      const direction = side * turn;
+      const [x, y] = [29.7, 7.1];
+      const axis: PlanPoint[] = [
+        [x - 50, y],
+        [x, y],
+        [x + 50 * Math.cos(direction), y + 50 * Math.sin(direction)],
+      ];
+      // the wedge of points nearest to the vertex, between the normals of the parts on the outer side
+      const towards = side * (-Math.PI / 2 + share * turn);
+      const point: PlanPoint = [x + 7 * Math.cos(towards), y + 7 * Math.sin(towards)];
+      const moved = axis.map((vertex) => movePoint(motion, vertex));
+      const { chainage, offset } = project(movePoint(motion, point), moved);
+      expect(chainage).toBeCloseTo(50, 7);
+      expect(offset).toBeCloseTo(-7 * side, 7);
+    });
+  });
+
   it('finds again what was set out square to a part', () => {
     holds(fc.tuple(axes, numbers(0.2, 0.8), numbers(-0.2, 0.2)), ([axis, share, offset]) => {
       const [part] = polylineParts(axis);

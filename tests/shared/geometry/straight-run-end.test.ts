@@ -71,6 +71,31 @@ describe('straightRunEnd', () => {
     expect(straightRunEnd(parts, 0, 1, TOLERANCE)).toBe(1);
   });
 
+  it('stops where a part starts, or ends, off the line, beside a gap', () => {
+    const startsOff = [
+      ...polylineParts([
+        [0, 0],
+        [10, 0],
+      ]),
+      ...polylineParts([
+        [10, 0.7],
+        [30, 0],
+      ]),
+    ];
+    const endsOff = [
+      ...polylineParts([
+        [0, 0],
+        [10, 0.7],
+      ]),
+      ...polylineParts([
+        [10, 0],
+        [30, 0],
+      ]),
+    ];
+    expect(straightRunEnd(startsOff, 0, 1, TOLERANCE)).toBe(0);
+    expect(straightRunEnd(endsOff, 0, 1, TOLERANCE)).toBe(0);
+  });
+
   it.each([
     { angle: 0, offset: 1 },
     { angle: 1, offset: 1 },

@@ -135,6 +135,17 @@ describe('monotoneCubic', () => {
     ).toBe(0);
   });
 
+  it('has three times the secant at an end at most, where the values turn next to it, by hand', () => {
+    // secants 1 and −6: the three-point rule gives (3·1 + 6)/2 = 4.5
+    expect(
+      monotoneCubic([
+        [0, 0],
+        [1, 1],
+        [2, -5],
+      ]).slopes[0],
+    ).toBe(3);
+  });
+
   it('is level where the values turn', () => {
     expect(
       monotoneCubic([
