@@ -11,7 +11,7 @@ const COMMON = ['package-lock.json', 'tsconfig.json', 'scripts/start/build.mjs']
 
 function buildClient() {
   const vite = path.join(root, 'node_modules/vite/bin/vite.js');
-  const { status } = spawnSync(process.execPath, [vite, 'build', '--logLevel', 'warn'], {
+  const { status } = spawnSync(process.execPath, [vite, 'build', '--logLevel', 'error'], {
     cwd: root,
     stdio: ['ignore', process.stderr, process.stderr],
     env: {

@@ -4,7 +4,7 @@ import session from 'express-session';
 import type pg from 'pg';
 import type { Env } from '../env.ts';
 
-export const SESSION_COOKIE = 'groundsill';
+const SESSION_COOKIE = 'groundsill';
 const TWELVE_HOURS = 12 * 60 * 60 * 1000;
 
 /** Sessions in PostgreSQL; the cookie is out of reach of scripts and of other sites. */

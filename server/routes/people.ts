@@ -1,5 +1,10 @@
 import { z } from 'zod';
-import { changePersonSchema, newPersonSchema } from '../../shared/schemas/people.ts';
+import {
+  changePersonSchema,
+  newPersonSchema,
+  type InvitedAnswer,
+  type PersonAnswer,
+} from '../../shared/schemas/people.ts';
 import { changePerson } from '../commands/change-person.ts';
 import { invitePerson } from '../commands/invite-person.ts';
 import { renewInvitation } from '../commands/renew-invitation.ts';
@@ -9,8 +14,12 @@ import { defineRoute } from './define-route.ts';
 
 const personParams = z.object({ personId: z.uuid() });
 
-async function personAnswer(personId: string) {
+async function personAnswer(personId: string): Promise<PersonAnswer> {
   return presentPerson(await findPersonRecord(personId));
+}
+
+async function invitedAnswer(personId: string, letterSent: boolean): Promise<InvitedAnswer> {
+  return { person: await personAnswer(personId), letterSent };
 }
 
 export const peopleRoutes = [
@@ -28,7 +37,7 @@ export const peopleRoutes = [
     body: newPersonSchema,
     handle: async ({ services, actor, body }) => {
       const { personId, letterSent } = await invitePerson(services, actor, body);
-      return { person: await personAnswer(personId), letterSent };
+      return invitedAnswer(personId, letterSent);
     },
   }),
   defineRoute({
@@ -57,7 +66,7 @@ export const peopleRoutes = [
     params: personParams,
     handle: async ({ services, actor, params }) => {
       const letterSent = await renewInvitation(services, actor, params.personId);
-      return { person: await personAnswer(params.personId), letterSent };
+      return invitedAnswer(params.personId, letterSent);
     },
   }),
 ];

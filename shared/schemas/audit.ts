@@ -13,13 +13,7 @@ export const auditQuerySchema = z.strictObject({
   schemeId: z.uuid().optional(),
 });
 
-/**
- * One entry of the audit trail: who changed what, when, from which values to which.
- *
- * Units: none. Valid: person null where nobody was signed in; before and after hold what changed.
- * Source: [own].
- */
-export const auditEntrySchema = z.strictObject({
+const auditEntrySchema = z.strictObject({
   id: entryId,
   at: z.iso.datetime(),
   person: z.strictObject({ id: z.uuid(), name: z.string(), email: z.string() }).nullable(),
@@ -41,9 +35,10 @@ export const auditPageSchema = z.strictObject({
 });
 
 /**
- * One entry of the audit trail.
+ * One entry of the audit trail: who changed what, when, from which values to which.
  *
- * Units: as auditEntrySchema. Valid: parsed by it. Source: [own].
+ * Units: none. Valid: person null where nobody was signed in; before and after hold what changed.
+ * Source: [own].
  */
 export type AuditEntryAnswer = z.infer<typeof auditEntrySchema>;
 

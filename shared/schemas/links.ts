@@ -1,17 +1,12 @@
 import { z } from 'zod';
 import { emailSchema, newPasswordSchema } from './passwords.ts';
 
-/**
- * What a link sent by mail is for.
- *
- * Units: none. Valid: closed list. Source: [own].
- */
-export const LINK_PURPOSES = ['invitation', 'password-reset'] as const;
+const LINK_PURPOSES = ['invitation', 'password-reset'] as const;
 
 /**
  * What a link sent by mail is for.
  *
- * Units: none. Valid: one of LINK_PURPOSES. Source: [own].
+ * Units: none. Valid: closed list. Source: [own].
  */
 export type LinkPurpose = (typeof LINK_PURPOSES)[number];
 

@@ -2,18 +2,13 @@ import { z } from 'zod';
 import { emailSchema } from './passwords.ts';
 import { roleSchema } from './roles.ts';
 
-/**
- * Lengths and counts of what is written about people.
- *
- * Units: characters; memberships as a count. Valid: read only. Source: [own].
- */
-export const PEOPLE_LIMITS = { name: 120, memberships: 100 } as const;
+const LIMITS = { name: 120, memberships: 100 } as const;
 
 const name = z
   .string()
   .trim()
   .min(1, 'Say who it is.')
-  .max(PEOPLE_LIMITS.name, `Use at most ${PEOPLE_LIMITS.name} characters.`)
+  .max(LIMITS.name, `Use at most ${LIMITS.name} characters.`)
   .regex(/^\P{Cc}*$/u, 'Write the name on one line.');
 
 /**
@@ -28,7 +23,7 @@ export const newPersonSchema = z.strictObject({
   isAdministrator: z.boolean().default(false),
   memberships: z
     .array(z.strictObject({ schemeId: z.uuid(), role: roleSchema }))
-    .max(PEOPLE_LIMITS.memberships)
+    .max(LIMITS.memberships)
     .default([]),
 });
 

@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { Outlet } from 'react-router-dom';
 import { Content } from '../components/layout/content.tsx';
 import { TopBar } from './top-bar.tsx';
 
@@ -9,5 +10,14 @@ export function Framed({ children }: { readonly children: ReactNode }) {
       <TopBar />
       <Content>{children}</Content>
     </>
+  );
+}
+
+/** The pages outside of schemes. */
+export function FramedPages() {
+  return (
+    <Framed>
+      <Outlet />
+    </Framed>
   );
 }

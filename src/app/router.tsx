@@ -1,6 +1,7 @@
 import { createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { PATHS, SETTINGS } from '../config/paths.ts';
 import { AdministratorsOnly } from './administrators-only.tsx';
+import { FramedPages } from './framed.tsx';
 import { PageError } from './page-error.tsx';
 import { Root } from './root.tsx';
 import { NotFoundPage } from './routes/not-found.tsx';
@@ -80,7 +81,7 @@ const ofScheme: RouteObject[] = [
   },
 ];
 
-const forSignedIn: RouteObject[] = [
+const outsideOfSchemes: RouteObject[] = [
   {
     index: true,
     lazy: { Component: async () => (await import('./routes/schemes.tsx')).SchemesPage },
@@ -90,8 +91,12 @@ const forSignedIn: RouteObject[] = [
     lazy: { Component: async () => (await import('./routes/account.tsx')).AccountPage },
   },
   { Component: AdministratorsOnly, children: forAdministrators },
-  { path: '/schemes/:schemeId', Component: SchemeFrame, children: ofScheme },
   { path: '*', Component: NotFoundPage },
+];
+
+const forSignedIn: RouteObject[] = [
+  { Component: FramedPages, children: outsideOfSchemes },
+  { path: '/schemes/:schemeId', Component: SchemeFrame, children: ofScheme },
 ];
 
 /** Every page by its address; each is fetched when it is first opened. */

@@ -20,10 +20,10 @@ export function SchemeFrame() {
       </SchemeContext>
     );
   }
-  if (isRefusal(error, 'not-found')) return <NotFoundPage />;
   return (
     <Framed>
-      {error !== null && (
+      {isRefusal(error, 'not-found') && <NotFoundPage />}
+      {error !== null && !isRefusal(error, 'not-found') && (
         <div className="p-8">
           <QueryError what="The scheme" error={error} onRetry={() => void refetch()} />
         </div>

@@ -3,7 +3,7 @@ export const PATHS = {
   schemes: '/',
   signIn: '/sign-in',
   forgotPassword: '/forgot-password',
-  link: '/link/:token',
+  link: '/links/:token',
   newScheme: '/schemes/new',
   people: '/people',
   audit: '/audit',

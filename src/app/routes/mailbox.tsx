@@ -16,7 +16,9 @@ function Letters() {
     <>
       <div className="flex items-start justify-between gap-3 px-4 pt-[22px] pb-3 max-sm:pt-4">
         <div>
-          <h1 className="text-h1 max-sm:text-h2">Mailbox</h1>
+          <p aria-hidden="true" className="text-h1 leading-tight font-semibold max-sm:text-h2">
+            Mailbox
+          </p>
           <p className="text-small text-ink-2">
             In the demo every letter ends here and goes no further.
           </p>
@@ -46,6 +48,7 @@ export function MailboxPage() {
   return (
     <div className="grid min-h-full grid-cols-[404px_minmax(0,1fr)] max-lg:block">
       <PageTitle>Mailbox</PageTitle>
+      <h1 className="sr-only">Mailbox</h1>
       <div
         className={classNames(
           'border-r border-ink max-lg:border-r-0',

@@ -13,8 +13,7 @@ type BasisLineProps = {
 /** The line under the bar that says what a working screen rests on. */
 export function BasisLine({ parts, end, preview = false }: BasisLineProps) {
   return (
-    <div
-      role="note"
+    <section
       aria-label="What this rests on"
       className={classNames(
         'flex h-basis flex-none items-center overflow-x-auto px-4 text-cap whitespace-nowrap text-ink-2',
@@ -30,6 +29,6 @@ export function BasisLine({ parts, end, preview = false }: BasisLineProps) {
         </span>
       ))}
       {end !== undefined && <span className="ml-auto pl-6">{end}</span>}
-    </div>
+    </section>
   );
 }

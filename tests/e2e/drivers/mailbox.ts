@@ -8,7 +8,7 @@ export async function readLetterTo(
   await open('/mailbox');
   await page.getByRole('link', { name: email }).first().click();
   const subject = await page.getByRole('heading', { level: 2 }).textContent();
-  const letter = page.getByTitle(/^Letter: /).contentFrame();
+  const letter = page.getByRole('region', { name: 'The letter as text' });
   const link = await letter.getByRole('link').first().getAttribute('href');
   return { subject: subject ?? '', link: link ?? '' };
 }

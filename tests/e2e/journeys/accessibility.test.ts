@@ -23,7 +23,7 @@ describe.each([
 ])('at %s axe finds nothing', (_name, size) => {
   journey('before signing in', async ({ visit }) => {
     const visitor = await visit(size);
-    const paths = ['/sign-in', '/forgot-password', '/link/of-nobody'];
+    const paths = ['/sign-in', '/forgot-password', '/links/of-nobody'];
     expect(await faultsOn(visitor, paths)).toEqual([]);
     visitor.expectFault(/status of 4\d\d/);
   });

@@ -1,6 +1,6 @@
 import request from 'supertest';
 import { beforeAll, describe, expect, test } from 'vitest';
-import { Building } from '../../../server/models/building.ts';
+import type { Building } from '../../../server/models/building.ts';
 import { BackgroundFeature } from '../../../server/models/background-feature.ts';
 import type { Scheme } from '../../../server/models/scheme.ts';
 import { aBuilding, aMember, aScheme } from '../../support/factories.ts';
@@ -78,7 +78,7 @@ describe('tiles of buildings', () => {
     const agent = await asWitness();
     for (let z = 13; z <= 17; z += 1) {
       const answer = await agent.get(buildingsAt(1, placeAt(z))).responseType('blob');
-      expect(readTile(answer.body)['buildings']).toHaveLength(1);
+      expect(readTile(answer.body).buildings).toHaveLength(1);
     }
   });
 
@@ -145,7 +145,7 @@ describe('tiles of the background', () => {
     const owner = await signIn(app(), await aMember(scheme, 'owner'));
     expect((await owner.get(backgroundAt(1))).status).toBe(200);
     const answer = await owner.get(backgroundAt(9)).redirects(0);
-    expect(answer.headers['location']).toBe(backgroundAt(1));
+    expect(answer.headers.location).toBe(backgroundAt(1));
   });
 
   test('leave away far out what cannot be seen', async () => {

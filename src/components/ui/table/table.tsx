@@ -92,7 +92,11 @@ export function Table<T>(props: TableProps<T>) {
     );
   }
   return (
-    <div ref={scroller} className={classNames('relative overflow-auto', className)}>
+    <div
+      ref={scroller}
+      className={classNames('relative overflow-auto', className)}
+      {...(onOpen === undefined && { role: 'region', 'aria-label': label, tabIndex: 0 })}
+    >
       <table
         aria-label={label}
         aria-rowcount={sorted.length + 1}

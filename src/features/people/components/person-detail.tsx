@@ -66,7 +66,7 @@ export function PersonDetail({ person }: { readonly person: PersonAnswer }) {
     <div className="sticky left-4 grid max-w-[min(760px,calc(100vw-32px))] grid-cols-2 gap-x-8 gap-y-4 text-small whitespace-normal max-sm:grid-cols-1">
       <PersonForm person={person} />
       <div className="grid content-start gap-3">
-        <h3 className="text-small">Takes part in</h3>
+        <h2 className="text-small">Takes part in</h2>
         <Parts person={person} />
         {person.abilities.invite && <SendAgain person={person} />}
       </div>

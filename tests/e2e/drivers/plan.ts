@@ -1,0 +1,56 @@
+import type { Locator } from 'playwright-core';
+import { openScheme } from './schemes.ts';
+import type { Visitor } from './visitor.ts';
+
+/** Drawing by software takes its time. */
+const PATIENCE_MS = 60_000;
+
+export function mapOf({ page }: Visitor): Locator {
+  return page.getByRole('region', { name: /^Map of / });
+}
+
+/** Waits until the map has drawn all that it was asked to show. */
+export async function mapIsStill({ page }: Visitor): Promise<void> {
+  await page.locator('[aria-busy="false"]').waitFor({ timeout: PATIENCE_MS });
+}
+
+/** Opens the plan of the demo scheme and waits for its map. */
+export async function openPlan(visitor: Visitor): Promise<string> {
+  const scheme = await openScheme(visitor);
+  await mapIsStill(visitor);
+  return scheme;
+}
+
+/** What the side of the map says is selected. */
+export function selectedName({ page }: Visitor): Promise<string | null> {
+  return page.getByRole('complementary').getByRole('heading', { level: 2 }).textContent();
+}
+
+/** Waits until the side of the map shows a building. */
+export async function isSelected(visitor: Visitor, name: string): Promise<void> {
+  const side = visitor.page.getByRole('complementary');
+  await side.getByRole('heading', { name, exact: true }).waitFor();
+  await mapIsStill(visitor);
+}
+
+/** Writes into the search and waits for what is found. */
+export async function search({ page }: Visitor, words: string): Promise<string[]> {
+  await page.getByRole('combobox', { name: 'Find a building' }).fill(words);
+  const options = page.getByRole('option');
+  await options.first().waitFor();
+  return options.allTextContents();
+}
+
+/** A fact at the side of the map. */
+export function factOf({ page }: Visitor, label: string): Promise<string | null> {
+  return page.getByRole('term').filter({ hasText: label }).locator('..').textContent();
+}
+
+/** A picture of the middle of the map, to see whether something there changed. */
+export async function middleOf(visitor: Visitor): Promise<string> {
+  const box = await mapOf(visitor).boundingBox();
+  if (box === null) throw new Error('The map is not to be seen.');
+  const [x, y] = [box.x + box.width / 2 - 60, box.y + box.height / 2 - 60];
+  const picture = await visitor.page.screenshot({ clip: { x, y, width: 120, height: 120 } });
+  return picture.toString('base64');
+}

@@ -1,0 +1,70 @@
+import type { Express } from 'express';
+import type TestAgent from 'supertest/lib/agent.js';
+import { ROLES } from '../../shared/schemas/roles.ts';
+import { defaultRules } from '../../server/commands/default-rules.ts';
+import { BackgroundFeature } from '../../server/models/background-feature.ts';
+import type { Building } from '../../server/models/building.ts';
+import type { Person } from '../../server/models/person.ts';
+import { SchemeRules } from '../../server/models/scheme-rules.ts';
+import type { Scheme } from '../../server/models/scheme.ts';
+import { aBuilding, aMember, anAdministrator, aPerson, aScheme } from './factories.ts';
+import { signIn, visitor } from './sign-in.ts';
+
+/** Who walks: each role of the scheme at hand, the administrator, a member of another scheme, and nobody. */
+export const WALKERS = [...ROLES, 'administrator', 'stranger', 'nobody'] as const;
+export type Walker = (typeof WALKERS)[number];
+
+/** A scheme with something of everything in it, all of it marked by a word. */
+export type Place = {
+  readonly scheme: Scheme;
+  readonly building: Building;
+  readonly mark: string;
+};
+
+async function aPlace(mark: string, author: Person): Promise<Place> {
+  const scheme = await aScheme({ name: `${mark} scheme`, description: `${mark} words` });
+  const building = await aBuilding(scheme, { reference: `${mark}-1`, name: `${mark} house` });
+  await BackgroundFeature.create({
+    schemeId: scheme.id,
+    layer: 'streets',
+    name: `${mark} street`,
+    geometry: { type: 'LineString', coordinates: [[3, 54], [3.1, 54]] }, // prettier-ignore
+    ...{ west: 3, south: 54, east: 3.1, north: 54 },
+  });
+  const rules = defaultRules('2026-12-01');
+  await SchemeRules.create({ schemeId: scheme.id, version: 1, rules, createdBy: author.id });
+  return { scheme, building, mark };
+}
+
+/** Two places, everybody who walks, and how to enter as each of them. */
+export async function walkWorld(app: Express) {
+  const administrator = await anAdministrator();
+  const own = await aPlace('own-secret', administrator);
+  const foreign = await aPlace('foreign-secret', administrator);
+  const invited = await aPerson({ name: 'Invited', password: null });
+  const people = new Map<Walker, Person>([
+    ['administrator', administrator],
+    ['stranger', await aMember(foreign.scheme, ...ROLES)],
+  ]);
+  for (const role of ROLES) people.set(role, await aMember(own.scheme, role));
+
+  function enter(walker: Walker): Promise<TestAgent> {
+    const person = people.get(walker);
+    return person === undefined ? visitor(app) : signIn(app, person);
+  }
+  const entered = new Map<Walker, TestAgent>();
+  for (const walker of WALKERS) entered.set(walker, await enter(walker));
+
+  return {
+    own,
+    foreign,
+    invited,
+    enter,
+    /** The session that a walker keeps for the whole walk. */
+    session: (walker: Walker): TestAgent => {
+      const agent = entered.get(walker);
+      if (agent === undefined) throw new Error(`Nobody walks as ${walker}.`);
+      return agent;
+    },
+  };
+}
