@@ -41,7 +41,7 @@ const config: Config = {
     borderRadius: { none: '0', DEFAULT: '2px', lg: '3px' },
     boxShadow: { none: 'none', lift: 'var(--lift)' },
     extend: {
-      height: { row: 'var(--row)', bar: 'var(--bar)', basis: 'var(--basis)' },
+      height: { row: 'var(--row)', bar: 'calc(var(--bar) - 1px)', basis: 'var(--basis)' },
       minHeight: { touch: 'var(--target-touch)' },
       minWidth: { touch: 'var(--target-touch)' },
     },

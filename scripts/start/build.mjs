@@ -1,5 +1,5 @@
 import { spawnSync } from 'node:child_process';
-import { mkdirSync, rmSync, writeFileSync } from 'node:fs';
+import { renameSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { root } from '../packages.mjs';
 import { fingerprint, stampIn } from './sources.mjs';
@@ -9,26 +9,30 @@ const CLIENT = ['index.html', 'src', 'shared', 'vite.config.ts', 'tailwind.confi
 const SERVER = ['server', 'shared'];
 const COMMON = ['package-lock.json', 'tsconfig.json', 'scripts/start/build.mjs'];
 
-function buildClient() {
+function buildClient(outDir) {
   const vite = path.join(root, 'node_modules/vite/bin/vite.js');
-  const { status } = spawnSync(process.execPath, [vite, 'build', '--logLevel', 'error'], {
-    cwd: root,
-    stdio: ['ignore', process.stderr, process.stderr],
-    env: {
-      ...process.env,
-      ...(process.stderr.isTTY ? {} : { NO_COLOR: '1' }),
-      NODE_ENV: 'production',
+  const { status } = spawnSync(
+    process.execPath,
+    [vite, 'build', '--outDir', outDir, '--logLevel', 'error'],
+    {
+      cwd: root,
+      stdio: ['ignore', process.stderr, process.stderr],
+      env: {
+        ...process.env,
+        ...(process.stderr.isTTY ? {} : { NO_COLOR: '1' }),
+        NODE_ENV: 'production',
+      },
     },
-  });
+  );
   if (status !== 0) throw new Refusal('The pages could not be built: see above.');
 }
 
-async function buildServer() {
+async function buildServer(outdir) {
   const { build } = await import('esbuild');
   await build({
     absWorkingDir: root,
     entryPoints: ['server/index.ts', 'server/migrate.ts', 'server/seed.ts'],
-    outdir: 'dist/server',
+    outdir,
     outExtension: { '.js': '.mjs' },
     bundle: true,
     packages: 'external',
@@ -40,15 +44,23 @@ async function buildServer() {
   });
 }
 
-/** Builds a part of dist/ unless it was built to the end from these very sources. */
+/**
+ * Builds a part of dist/ unless it was built from these very sources. It is built beside the old one, which
+ * is served from until the new one is whole.
+ */
 async function buildPart(name, sources, work) {
   const folder = path.join(root, 'dist', name);
   const wanted = fingerprint(...sources, ...COMMON);
   if (stampIn(folder) === wanted) return [];
-  rmSync(folder, { recursive: true, force: true });
-  await work();
-  mkdirSync(folder, { recursive: true });
-  writeFileSync(path.join(folder, '.stamp'), wanted);
+  const beside = `${folder}-${process.pid}`;
+  try {
+    await work(beside);
+    writeFileSync(path.join(beside, '.stamp'), wanted);
+    rmSync(folder, { recursive: true, force: true });
+    renameSync(beside, folder);
+  } finally {
+    rmSync(beside, { recursive: true, force: true });
+  }
   return [name];
 }
 

@@ -93,7 +93,7 @@ const limits = z.strictObject({
  * AssessmentRules, ScreeningLimits and Hold of the method.
  *
  * Units: lengths m, slope m/m, K and total without unit. Valid: strict; settlement of cutOff 0 means
- * nothing is ignored; holds by different names. Source: each rule's own.
+ * nothing is ignored; holds by different names. Source: [own] for the shape; each rule names its own.
  */
 export const rulesSchema = z.strictObject({
   screening: ruled(limits),
@@ -145,7 +145,7 @@ export const rulesVersionsSchema = z.array(rulesVersionSchema);
 /**
  * The rules and limits of a scheme.
  *
- * Units: as rulesSchema. Valid: parsed by it. Source: each rule's own.
+ * Units: as rulesSchema. Valid: parsed by it. Source: [own] for the shape; each rule names its own.
  */
 export type RuleSet = z.infer<typeof rulesSchema>;
 

@@ -22,7 +22,7 @@ export function schemeLinks(scheme: SchemeAnswer): readonly Link[] {
   const plan = { to: planPath(scheme.id), label: 'Plan' };
   return [
     ...(can(scheme, 'readRegister') ? [plan] : []),
-    { to: settingsPath(scheme.id), label: 'Settings' },
+    { to: settingsPath(scheme.id), label: can(scheme, 'readRules') ? 'Settings' : 'Description' },
   ];
 }
 

@@ -7,6 +7,10 @@ export type ValueChange = {
 
 type Values = Readonly<Record<string, unknown>> | null;
 
+function isPlain(value: unknown): value is object {
+  return typeof value === 'object' && value !== null;
+}
+
 function wordsOf(value: unknown): string {
   if (value === null) return 'none';
   if (value === true) return 'yes';
@@ -15,17 +19,21 @@ function wordsOf(value: unknown): string {
   return typeof value === 'string' ? value : JSON.stringify(value);
 }
 
-function isPlain(value: unknown): value is object {
-  return typeof value === 'object' && value !== null;
+/** A list of words or figures in one line; undefined for one of things that have parts. */
+function inOneLine(value: unknown): string | undefined {
+  if (!isPlain(value)) return wordsOf(value);
+  if (!Array.isArray(value)) return Object.keys(value).length === 0 ? 'none' : undefined;
+  if (value.some(isPlain)) return undefined;
+  return value.length === 0 ? 'none' : value.map(wordsOf).join(', ');
 }
 
 function leaves(value: unknown, path: string, found: Map<string, string>): void {
-  const parts = isPlain(value) ? Object.entries(value) : [];
-  if (parts.length === 0) {
-    found.set(path, Array.isArray(value) ? 'none' : wordsOf(value));
+  const line = inOneLine(value);
+  if (line !== undefined || !isPlain(value)) {
+    found.set(path, line ?? '');
     return;
   }
-  for (const [key, part] of parts) {
+  for (const [key, part] of Object.entries(value)) {
     const name = Array.isArray(value) ? String(Number(key) + 1) : key;
     leaves(part, path === '' ? name : `${path} ${name}`, found);
   }

@@ -11,6 +11,31 @@ const SHORT_DAY = new Intl.DateTimeFormat('en-GB', {
   year: 'numeric',
 });
 
+const DAY_OF_YEAR = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'long' });
+const DAY_OF_WEEK = new Intl.DateTimeFormat('en-GB', { weekday: 'long' });
+const ONE_DAY = 86_400_000;
+
+function startOfDay(moment: Date): number {
+  return new Date(moment.getFullYear(), moment.getMonth(), moment.getDate()).getTime();
+}
+
+/** As "today", "yesterday", "Friday", "3 May" or, in another year, "3 May 2025". */
+export function formatDaySince(at: string | Date, now: Date): string {
+  const moment = new Date(at);
+  const days = Math.round((startOfDay(now) - startOfDay(moment)) / ONE_DAY);
+  if (days === 0) return 'today';
+  if (days === 1) return 'yesterday';
+  if (days > 1 && days < 7) return DAY_OF_WEEK.format(moment);
+  return moment.getFullYear() === now.getFullYear()
+    ? DAY_OF_YEAR.format(moment)
+    : formatDay(moment);
+}
+
+/** As "1 Dec 2026", for tables. */
+export function formatShortDay(at: string | Date): string {
+  return SHORT_DAY.format(new Date(at));
+}
+
 /** As "1 December 2026". */
 export function formatDay(at: string | Date): string {
   return DAY.format(new Date(at));

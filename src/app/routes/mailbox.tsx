@@ -57,9 +57,14 @@ export function MailboxPage() {
       >
         <Letters />
       </div>
-      <div className="min-w-0 bg-paper-raised px-6 pt-[26px] pb-8 max-sm:px-4 max-sm:pt-2">
+      <div
+        className={classNames(
+          'min-w-0 bg-paper-raised px-6 pt-[26px] pb-8 max-sm:px-4 max-sm:pt-2',
+          letterId === undefined && 'max-lg:hidden',
+        )}
+      >
         {letterId === undefined ? (
-          <p className="text-small text-ink-2 max-lg:hidden">Choose a letter to read it here.</p>
+          <p className="text-small text-ink-2">Choose a letter to read it here.</p>
         ) : (
           <Letter key={letterId} letterId={letterId} />
         )}

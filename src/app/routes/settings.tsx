@@ -14,14 +14,14 @@ type Part = {
 
 const PARTS: readonly Part[] = [
   { part: 'description', label: 'Description', needs: 'readScheme' },
-  { part: 'people', label: 'People and roles', needs: 'readMembers' },
-  { part: 'rules', label: 'Rules and limits', needs: 'readRules' },
-  { part: 'background', label: 'Background map', needs: 'updateBackground' },
+  { part: 'people', label: 'People', needs: 'readMembers' },
+  { part: 'rules', label: 'Rules', needs: 'readRules' },
+  { part: 'background', label: 'Background', needs: 'updateBackground' },
 ];
 
 function partStyle({ isActive }: { readonly isActive: boolean }): string {
   return classNames(
-    'flex h-row items-center border-l-[3px] px-3 text-small whitespace-nowrap no-underline max-sm:h-11',
+    'flex h-row items-center border-l-[3px] px-3 text-small whitespace-nowrap no-underline max-md:h-11 max-md:border-b-[3px] max-md:border-l-0',
     isActive
       ? 'border-clay font-semibold text-ink'
       : 'border-transparent text-ink-2 hover:border-clay-line hover:text-ink',
@@ -31,11 +31,17 @@ function partStyle({ isActive }: { readonly isActive: boolean }): string {
 export function SettingsPage() {
   const scheme = useScheme();
   const parts = PARTS.filter(({ needs }) => can(scheme, needs));
+  const hasParts = parts.length > 1;
   return (
     <>
       <SchemeBasis scheme={scheme} />
-      <Content className="grid grid-cols-[196px_minmax(0,1fr)] overflow-auto max-md:flex max-md:flex-col">
-        {parts.length > 1 && (
+      <Content
+        className={classNames(
+          'overflow-auto',
+          hasParts && 'grid grid-cols-[196px_minmax(0,1fr)] max-md:flex max-md:flex-col',
+        )}
+      >
+        {hasParts && (
           <nav
             aria-label="Settings"
             className="border-r border-hairline pt-[22px] max-md:flex max-md:flex-none max-md:overflow-x-auto max-md:border-r-0 max-md:border-b max-md:pt-0"

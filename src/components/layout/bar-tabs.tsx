@@ -18,7 +18,7 @@ export function BarTabs({ tabs }: { readonly tabs: readonly Tab[] }) {
   return (
     <nav
       aria-label="Screens"
-      className="-mb-px flex max-sm:order-last max-sm:w-full max-sm:overflow-x-auto max-sm:border-t max-sm:border-hairline"
+      className="-mb-px flex max-sm:order-last max-sm:-mx-1 max-sm:w-[calc(100%+8px)] max-sm:overflow-x-auto max-sm:px-1 max-sm:border-t max-sm:border-hairline"
     >
       {tabs.map(({ to, label, end = false }) => (
         <NavLink key={to} to={to} end={end} className={tabStyle}>

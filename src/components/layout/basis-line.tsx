@@ -16,7 +16,7 @@ export function BasisLine({ parts, end, preview = false }: BasisLineProps) {
     <section
       aria-label="What this rests on"
       className={classNames(
-        'flex h-basis flex-none items-center overflow-x-auto px-4 text-cap whitespace-nowrap text-ink-2',
+        'flex min-h-7 flex-none flex-wrap items-center gap-y-0.5 px-4 py-1 text-cap text-ink-2',
         '[&_b]:font-semibold [&_b]:text-ink',
         preview
           ? 'border-b-2 border-dashed border-clay bg-clay-wash'

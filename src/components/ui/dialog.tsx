@@ -47,7 +47,12 @@ export function Dialog({ open, title, onClose, children }: DialogProps) {
             <h2 id={id} className="text-lead">
               {title}
             </h2>
-            <Button kind="quiet" aria-label="Close" onClick={onClose}>
+            <Button
+              kind="quiet"
+              className="-mr-1.5 no-underline"
+              aria-label="Close"
+              onClick={onClose}
+            >
               <KeyCap>Esc</KeyCap>
             </Button>
           </div>

@@ -1,4 +1,5 @@
 import { useId, type ReactNode } from 'react';
+import { classNames } from '../../lib/class-names.ts';
 
 /** What every field is told around its input. */
 export type FieldWords = {
@@ -31,7 +32,7 @@ export function FieldFrame({ label, hint, error, className, children }: FramePro
   const errorId = error === undefined ? undefined : `${id}-error`;
   const described = [hintId, errorId].filter((part) => part !== undefined).join(' ');
   return (
-    <div className={className}>
+    <div className={classNames('min-w-0', className)}>
       <label htmlFor={id} className="mb-1 block text-small font-semibold">
         {label}
       </label>

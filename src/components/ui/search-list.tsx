@@ -38,12 +38,16 @@ function FoundOption({ id, title, note, listId, isReached, onReach, onChoose }: 
       onMouseMove={onReach}
       onClick={onChoose}
       className={classNames(
-        'flex min-h-row cursor-pointer items-baseline gap-x-3 border-b border-hairline px-2 py-1.5 text-small last:border-0 max-sm:min-h-11 max-sm:flex-col',
+        'flex min-h-row cursor-pointer items-baseline gap-x-4 border-b border-hairline px-2 py-1.5 text-small last:border-0 max-sm:min-h-11 max-sm:flex-col',
         isReached && 'bg-select-wash shadow-[inset_4px_0_var(--select)]',
       )}
     >
-      <span className="font-semibold">{title}</span>
-      {note !== undefined && <span className="text-ink-2 sm:ml-auto sm:text-right">{note}</span>}
+      <span className="flex-none font-semibold max-sm:flex-initial">{title}</span>
+      {note !== undefined && (
+        <span className="text-ink-2 max-sm:line-clamp-2 sm:ml-auto sm:min-w-0 sm:truncate">
+          {note}
+        </span>
+      )}
     </li>
   );
 }

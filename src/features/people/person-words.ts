@@ -1,7 +1,7 @@
 import type { PersonAnswer } from '../../../shared/schemas/people.ts';
 import type { Role } from '../../../shared/schemas/roles.ts';
 import type { State } from '../../components/ui/state-mark.tsx';
-import { formatDay } from '../../lib/format-date.ts';
+import { formatShortDay } from '../../lib/format-date.ts';
 
 /** Whether somebody can sign in, as shape and words. */
 export function signInState(
@@ -11,7 +11,7 @@ export function signInState(
   if (hasPassword) return { state: 'done', words: 'Can sign in' };
   if (invitedUntil === null) return { state: 'not-started', words: 'Not invited' };
   if (new Date(invitedUntil) < now) return { state: 'not-started', words: 'Invitation too old' };
-  return { state: 'in-hand', words: `Invited until ${formatDay(invitedUntil)}` };
+  return { state: 'in-hand', words: `Invited until ${formatShortDay(invitedUntil)}` };
 }
 
 export type Part = {

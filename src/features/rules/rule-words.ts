@@ -65,7 +65,7 @@ export function ruleValue(rules: RuleSet, rule: RuleName): string {
   switch (rule) {
     case 'screening': {
       const { settlement, slope } = rules.screening.value;
-      return `${fromMetres(settlement)} mm and 1 in ${fromSlope(slope)}`;
+      return `${fromMetres(settlement)}\u00a0mm and 1 in ${fromSlope(slope)}`;
     }
     case 'depth': {
       const { value } = rules.depth;
@@ -80,7 +80,7 @@ export function ruleValue(rules: RuleSet, rule: RuleName): string {
         return `what lies beyond ${value.widths} trough widths of every drive`;
       return value.settlement === 0
         ? 'nothing'
-        : `settlement below ${fromMetres(value.settlement)} mm`;
+        : `settlement below ${fromMetres(value.settlement)}\u00a0mm`;
     }
     case 'horizontalStrain':
       return STRAIN_WORDS[rules.horizontalStrain.value] ?? '';
@@ -94,6 +94,6 @@ export function ruleValue(rules: RuleSet, rule: RuleName): string {
 /** When a hold acts, in words. */
 export function conditionInWords(condition: RuleSet['holds'][number]['condition']): string {
   const words = CONDITION_WORDS[condition.kind] ?? condition.kind;
-  if ('depth' in condition) return `${words} ${condition.depth} m`;
+  if ('depth' in condition) return `${words} ${condition.depth}\u00a0m`;
   return 'total' in condition ? `${words} ${condition.total}` : words;
 }

@@ -3,7 +3,8 @@ import type { Category } from '../../../shared/damage/categories.ts';
 /** The drawing beside the sign-in: an invented street, drawn in no scale. */
 export const SECTION = {
   width: 800,
-  height: 520,
+  top: 70,
+  height: 424,
   ground: 290,
   drives: [
     { x: 352, y: 446, radius: 34 },

@@ -1,5 +1,6 @@
 import type { WaitingAnswer, WaitingItem } from '../../../shared/schemas/waiting.ts';
-import { formatWeekday } from '../../lib/format-date.ts';
+import { formatDaySince, formatWeekday } from '../../lib/format-date.ts';
+import { countInWords } from '../../lib/number-words.ts';
 
 const BUTTONS: Readonly<Record<WaitingItem['kind'], string>> = {
   'roles-not-filled': 'Give roles',
@@ -13,13 +14,27 @@ export function waitingButton(kind: WaitingItem['kind']): string {
   return BUTTONS[kind];
 }
 
-/** The first sentence of the page: the day, and what waits. */
-export function waitingSentence({ general, schemes }: WaitingAnswer, today: Date): string {
+const THINGS: Readonly<Record<WaitingItem['kind'], readonly [one: string, several: string]>> = {
+  'roles-not-filled': ['role to fill', 'roles to fill'],
+  'invitations-not-accepted': ['invitation still out', 'invitations still out'],
+  'no-buildings': ['register to begin', 'registers to begin'],
+  'no-background': ['background map to bring in', 'background maps to bring in'],
+};
+
+/** What there are so many of. */
+export function waitingThing({ kind, count }: Pick<WaitingItem, 'kind' | 'count'>): string {
+  const [one, several] = THINGS[kind];
+  return count === 1 ? one : several;
+}
+
+/** The first sentence of the page: the day, and what has waited longest. */
+export function waitingSentence({ general, schemes }: WaitingAnswer, now: Date): string {
   const all = [...general, ...schemes.flatMap(({ waiting }) => waiting)];
-  const day = formatWeekday(today);
-  const [first, ...others] = [...all].sort((a, b) => a.since.localeCompare(b.since));
-  if (first === undefined) return `${day}. Nothing waits for you.`;
-  const since = `the oldest since ${formatWeekday(first.since)}`;
-  if (others.length === 0) return `${day}. One thing waits, since ${formatWeekday(first.since)}.`;
-  return `${day}. ${all.length} things wait, ${since}.`;
+  const [oldest, ...others] = [...all].sort((a, b) => a.since.localeCompare(b.since));
+  const day = `${formatWeekday(now)}.`;
+  if (oldest === undefined) return `${day} Nothing waits for you.`;
+  const since = formatDaySince(oldest.since, now);
+  if (others.length === 0) return `${day} One thing waits, since ${since}.`;
+  const count = countInWords(all.length);
+  return `${day} ${count.charAt(0).toUpperCase()}${count.slice(1)} things wait, the oldest since ${since}.`;
 }

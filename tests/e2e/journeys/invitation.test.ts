@@ -11,7 +11,7 @@ for (const [role, screens] of [
   ['Designer', ['Plan', 'Settings']],
   ['Assessor', ['Plan', 'Settings']],
   ['Witness', ['Plan', 'Settings']],
-  ['Owner', ['Settings']],
+  ['Owner', ['Description']],
 ] as const) {
   const email = `new-${role.toLowerCase()}@example.org`;
   journey(
@@ -26,7 +26,7 @@ for (const [role, screens] of [
       const invited = await visit();
       await invited.open(link);
       await choosePassword(invited, PASSWORD);
-      await openScheme(invited);
+      const scheme = await openScheme(invited);
       expect(await tabs(invited)).toEqual(screens);
 
       await signOut(invited);

@@ -16,6 +16,7 @@ journey(
 
     await page.keyboard.press('/');
     await page.keyboard.type('Settings');
+    await page.getByRole('option', { name: 'Settings' }).waitFor();
     await page.keyboard.press('Enter');
     await page.waitForURL(/\/settings$/);
 

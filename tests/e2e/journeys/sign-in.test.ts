@@ -1,4 +1,4 @@
-import { describe, expect } from 'vitest';
+import { describe, expect, inject } from 'vitest';
 import { journey } from '../drivers/journey.ts';
 import { DEMO_SCHEME, openScheme, tabs } from '../drivers/schemes.ts';
 import { signInAs, signInWith, signOut } from '../drivers/sign-in.ts';
@@ -27,7 +27,7 @@ describe('signing in', () => {
     const visitor = await visit();
     await signInAs(visitor, 'owner');
     const scheme = await openScheme(visitor);
-    expect(await tabs(visitor)).toEqual(['Settings']);
+    expect(await tabs(visitor)).toEqual(['Description']);
     const answer = await visitor.page.request.get(`/api${scheme}/buildings?search=B0001`);
     expect(answer.status()).toBe(403);
   });
@@ -51,7 +51,7 @@ describe('signing in', () => {
   journey('leads to where one wanted to go, and out again', async ({ visit }) => {
     const visitor = await visit();
     await visitor.open('/account');
-    await signInWith(visitor, 'witness@example.org', 'groundsill-demo');
+    await signInWith(visitor, 'witness@example.org', inject('demo').password);
     await visitor.page.getByRole('heading', { name: 'Account' }).waitFor();
     await signOut(visitor);
   });

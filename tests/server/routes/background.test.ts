@@ -22,7 +22,9 @@ beforeAll(async () => {
   administrator = await anAdministrator();
 });
 
-const asAdministrator = () => signIn(app(), administrator);
+function asAdministrator() {
+  return signIn(app(), administrator);
+}
 
 const LINE = [[3, 54], [3.1, 54.2]]; // prettier-ignore
 const RING = [[3, 54], [3.1, 54], [3.1, 54.1], [3, 54]]; // prettier-ignore

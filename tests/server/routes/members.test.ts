@@ -22,7 +22,9 @@ beforeAll(async () => {
   administrator = await anAdministrator();
 });
 
-const asAdministrator = () => signIn(app(), administrator);
+function asAdministrator() {
+  return signIn(app(), administrator);
+}
 
 async function rolesOf(scheme: Scheme, person: Person): Promise<string[]> {
   const where = { schemeId: scheme.id, personId: person.id };

@@ -23,7 +23,9 @@ beforeAll(async () => {
   administrator = await anAdministrator();
 });
 
-const asAdministrator = () => signIn(app(), administrator);
+function asAdministrator() {
+  return signIn(app(), administrator);
+}
 
 /** A scheme made through the front door, with its first rules. */
 async function aSchemeWithRules(): Promise<Scheme> {

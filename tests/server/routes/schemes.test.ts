@@ -17,7 +17,9 @@ beforeAll(async () => {
   administrator = await anAdministrator();
 });
 
-const asAdministrator = () => signIn(app(), administrator);
+function asAdministrator() {
+  return signIn(app(), administrator);
+}
 
 async function trailOf(scheme: { readonly id: string }) {
   return AuditEntry.findAll({ where: { schemeId: scheme.id }, order: ['id'] });

@@ -98,6 +98,7 @@ test('the administrator waits for people', async () => {
   ]);
   const invited = await aPerson({ password: null });
   await aMembership(scheme, invited, 'designer', 'assessor');
+  await aMember(scheme, 'owner');
   await aMembership(scheme, await aPerson({ password: null }), 'owner');
   expect(await waitingIn(scheme, administrator)).toMatchObject([
     { kind: 'roles-not-filled', count: 1, text: 'Nobody is witness yet.' },

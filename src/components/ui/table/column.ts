@@ -1,5 +1,6 @@
 import type { ColumnDef } from '@tanstack/react-table';
 import type { ReactNode } from 'react';
+import { classNames } from '../../../lib/class-names.ts';
 
 /** A column of a table. */
 export type Column<T> = {
@@ -7,11 +8,11 @@ export type Column<T> = {
   readonly heading: string;
   /** Stands under the heading, never in the rows. */
   readonly unit?: string;
-  /** A figure: set to the right. */
-  readonly figure?: boolean;
+  /** A figure is set to the right, a tick in the middle, words to the left. */
+  readonly holds?: 'figure' | 'tick';
   /** May be left out where the screen is narrow. */
   readonly spare?: boolean;
-  /** Takes what room the others leave. */
+  /** Takes what room the others leave; what it holds is cut short where that is little. */
   readonly wide?: boolean;
   /** What the column is sorted by; without it, it is not. */
   readonly sortBy?: (row: T) => string | number;
@@ -25,10 +26,12 @@ export function columnDef<T>({ id, sortBy }: Column<T>): ColumnDef<T> {
 }
 
 /** The look of a column's cells, heading and rows alike. */
-export function columnStyle<T>({ figure, spare, wide }: Column<T>): string {
-  return [
-    figure === true ? 'text-right' : 'text-left',
-    spare === true ? 'max-sm:hidden' : '',
-    wide === true ? 'w-full' : '',
-  ].join(' ');
+export function columnStyle<T>({ holds, spare, wide }: Column<T>): string {
+  const align = { figure: 'text-right', tick: 'text-center', words: 'text-left' }[holds ?? 'words'];
+  return classNames(
+    align,
+    'first:pl-(--edge) last:pr-(--edge)',
+    spare === true && 'max-sm:hidden',
+    wide === true && 'w-full max-w-0 min-w-[140px] truncate',
+  );
 }

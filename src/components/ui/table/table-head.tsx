@@ -20,8 +20,10 @@ function Heading<T>({ column, model }: HeadingProps<T>) {
   const sorted = direction === 'asc' || direction === 'desc' ? direction : undefined;
   const words = (
     <>
-      {column.heading}
-      {sorted !== undefined && <SortMark direction={sorted} />}
+      <span>
+        {column.heading}
+        {sorted !== undefined && <SortMark direction={sorted} />}
+      </span>
       {column.unit !== undefined && (
         <small className="block text-micro font-normal text-ink-3">{column.unit}</small>
       )}
@@ -33,14 +35,14 @@ function Heading<T>({ column, model }: HeadingProps<T>) {
       aria-sort={sorted === undefined ? undefined : ARIA_SORT[sorted]}
       className={classNames(
         'sticky top-0 z-10 border-b border-rule bg-paper px-2 pt-1.5 pb-[5px] align-bottom text-cap',
-        'leading-tight font-semibold whitespace-nowrap first:left-0 first:z-20 first:pl-4 last:pr-4',
+        'leading-tight font-semibold whitespace-nowrap first:left-0 first:z-20',
         columnStyle(column),
       )}
     >
       {sorting?.getCanSort() === true ? (
         <button
           type="button"
-          className="min-h-6 text-inherit [text-align:inherit] hover:text-clay-deep max-sm:min-h-11"
+          className="inline-flex min-h-6 flex-col justify-end text-inherit hover:text-clay-deep max-sm:min-h-9"
           onClick={sorting.getToggleSortingHandler()}
         >
           {words}

@@ -15,6 +15,9 @@ type TableRowProps<T> = {
   readonly bodyRef: Ref<HTMLTableSectionElement> | undefined;
 };
 
+const ACTIVE =
+  'bg-select-wash [&>td:first-child]:shadow-[inset_4px_0_var(--select)] ' +
+  'focus-visible:[&>td:first-child]:shadow-[inset_4px_0_var(--select),inset_0_2px_var(--focus),inset_0_-2px_var(--focus)]';
 const PRESSED = 'a, button, input, select, label';
 
 function isOwnPress(event: MouseEvent): boolean {
@@ -28,7 +31,7 @@ function Cells<T>({ row, columns }: Pick<TableRowProps<T>, 'row' | 'columns'>) {
       key={column.id}
       className={classNames(
         'h-row border-b border-hairline bg-inherit px-2 whitespace-nowrap max-sm:h-11',
-        'first:sticky first:left-0 first:z-[1] first:pl-4 last:pr-4',
+        'first:sticky first:left-0 first:z-[1]',
         columnStyle(column),
       )}
     >
@@ -60,18 +63,20 @@ export function TableRow<T>(props: TableRowProps<T>) {
         onKeyDown={openByKey}
         onClick={onOpen === undefined ? undefined : openByPress}
         className={classNames(
-          'focus-visible:outline-offset-[-2px]',
-          isActive
-            ? 'bg-select-wash [&>td:first-child]:shadow-[inset_4px_0_var(--select)]'
-            : 'bg-paper',
-          onOpen !== undefined && 'cursor-pointer hover:bg-paper-sunk',
+          'outline-none focus-visible:[&>td]:shadow-[inset_0_2px_var(--focus),inset_0_-2px_var(--focus)]',
+          isActive ? ACTIVE : 'bg-paper',
+          onOpen !== undefined && 'cursor-pointer',
+          onOpen !== undefined && !isActive && 'hover:bg-paper-sunk',
         )}
       >
         <Cells {...props} />
       </tr>
       {detail !== undefined && (
         <tr>
-          <td colSpan={columns.length} className="border-b border-hairline bg-sheet px-4 py-3">
+          <td
+            colSpan={columns.length}
+            className="border-b border-hairline bg-sheet px-(--edge) py-3"
+          >
             {detail}
           </td>
         </tr>

@@ -24,9 +24,12 @@ type TableProps<T> = {
   /** What stands under an opened row. */
   readonly detailOf?: (row: T) => ReactNode;
   readonly sortedBy?: ColumnSort;
+  /** Runs from edge to edge of the page; otherwise it keeps to the column it stands in. */
+  readonly wide?: boolean;
   readonly className?: string;
 };
 
+const EDGE_TO_EDGE = '-mx-8 border-t border-rule [--edge:32px] max-sm:-mx-4 max-sm:[--edge:16px]';
 const NO_ROWS: ColumnSort[] = [];
 
 function Gap({ height, columns }: { readonly height: number; readonly columns: number }) {
@@ -56,7 +59,7 @@ function useSortedRows<T>({ columns, rows, idOf, sortedBy }: TableProps<T>) {
 
 /** Hairline rows, headings with their units at the foot of their cells, figures to the right. */
 export function Table<T>(props: TableProps<T>) {
-  const { label, columns, onOpen, detailOf, className } = props;
+  const { label, columns, onOpen, detailOf, wide = false, className } = props;
   const scroller = useRef<HTMLDivElement>(null);
   const { model, sorted } = useSortedRows(props);
   const { indexes, above, below, measure, reveal } = useVirtualRows(sorted.length, scroller);
@@ -94,7 +97,11 @@ export function Table<T>(props: TableProps<T>) {
   return (
     <div
       ref={scroller}
-      className={classNames('relative overflow-auto', className)}
+      className={classNames(
+        'relative overflow-auto',
+        wide ? EDGE_TO_EDGE : '[--edge:0px]',
+        className,
+      )}
       {...(onOpen === undefined && { role: 'region', 'aria-label': label, tabIndex: 0 })}
     >
       <table

@@ -6,7 +6,7 @@ import { changesBetween } from '../../../lib/changes-between.ts';
 export function AuditDetail({ entry }: { readonly entry: AuditEntryAnswer }) {
   const changes = changesBetween(entry.before, entry.after);
   return (
-    <div className="sticky left-4 max-w-[calc(100vw-32px)]">
+    <div className="sticky left-(--edge) max-w-[calc(100vw-32px)]">
       {changes.length === 0 ? (
         <p className="text-small text-ink-2">No values go with this.</p>
       ) : (

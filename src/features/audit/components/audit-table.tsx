@@ -30,11 +30,7 @@ const COLUMNS: readonly Column<AuditEntryAnswer>[] = [
     id: 'scheme',
     heading: 'Scheme',
     wide: true,
-    cell: ({ scheme }) => (
-      <span className="inline-block max-w-[340px] truncate align-middle text-ink-2">
-        {scheme?.name}
-      </span>
-    ),
+    cell: ({ scheme }) => <span className="text-ink-2">{scheme?.name}</span>,
   },
 ];
 
@@ -44,7 +40,8 @@ export function AuditTable({ entries }: { readonly entries: readonly AuditEntryA
   return (
     <Table
       label="Audit trail"
-      className="-mx-8 max-h-[calc(100dvh-210px)] border-t border-rule max-sm:-mx-4"
+      wide
+      className="max-h-[calc(100dvh-210px)]"
       columns={COLUMNS}
       rows={entries}
       idOf={({ id }) => id}

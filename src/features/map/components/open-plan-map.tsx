@@ -13,7 +13,7 @@ import { sourcesOfPlan } from '../style/sources-of-plan.ts';
 import { CursorPlace } from './cursor-place.tsx';
 import { MapButtons } from './map-buttons.tsx';
 import { MapGaps } from './map-gaps.tsx';
-import type { PlanMapProps } from './plan-map.tsx';
+import type { PlanMapProps } from './plan-map-props.ts';
 import { ScaleBar } from './scale-bar.tsx';
 
 /** Keeps the map as the plan and the marks say. */

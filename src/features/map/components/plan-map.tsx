@@ -1,24 +1,8 @@
 import { useRef } from 'react';
 import { ErrorNote } from '../../../components/ui/error-note.tsx';
-import type { CameraBounds } from '../camera.ts';
-import type { MapHandle } from '../map-handle.ts';
-import type { MapPlan } from '../map-plan.ts';
 import { useOpenMap } from '../hooks/use-open-map.ts';
 import { OpenPlanMap } from './open-plan-map.tsx';
-
-export type PlanMapProps = {
-  readonly plan: MapPlan;
-  /** What the map is called for who hears it. */
-  readonly label: string;
-  /** What the map shows at first and when it is fitted. */
-  readonly home: CameraBounds;
-  /** The scheme's grid for proj4. */
-  readonly gridDefinition: string;
-  readonly selected: number | null;
-  readonly onSelect: (buildingId: number | null) => void;
-  /** Gives the page its way to move the map, and null when the map goes. */
-  readonly onHandle: (handle: MapHandle | null) => void;
-};
+import type { PlanMapProps } from './plan-map-props.ts';
 
 /** The map of a scheme: draws the plan, selects, moves by pointer and keys. */
 export function PlanMap(props: PlanMapProps) {

@@ -7,6 +7,8 @@ export type GridBounds = readonly [number, number, number, number];
 const MOST_SPACING_PIXELS = 280;
 const ARM_PIXELS = 4.5;
 const MOST_CROSSES = 400;
+/** Further out a grid bends too much to be read off its crosses. */
+const MOST_METRES_PER_PIXEL = 200;
 
 function steps(from: number, to: number, step: number): number[] {
   const first = Math.ceil(from / step);
@@ -29,7 +31,7 @@ export function gridCrosses(
   const [eastings, northings] = [steps(west, east, step), steps(south, north, step)];
   const reach = ARM_PIXELS * metresPerPixel;
   const places =
-    eastings.length * northings.length > MOST_CROSSES
+    metresPerPixel > MOST_METRES_PER_PIXEL || eastings.length * northings.length > MOST_CROSSES
       ? []
       : eastings.flatMap((e) => northings.map((n) => [e, n] as const));
   const coordinates = places.flatMap(([e, n]) => [

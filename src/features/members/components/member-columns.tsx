@@ -1,6 +1,5 @@
 import type { MemberAnswer } from '../../../../shared/schemas/members.ts';
 import { ROLES, type Role } from '../../../../shared/schemas/roles.ts';
-import { StateMark } from '../../../components/ui/state-mark.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { roleName } from '../roles-in-words.ts';
 
@@ -10,44 +9,29 @@ const PERSON: Column<MemberAnswer> = {
   id: 'name',
   heading: 'Name',
   sortBy: ({ person }) => person.name.toLowerCase(),
-  cell: ({ person }) => (
-    <b className="inline-block max-w-[200px] truncate align-middle font-semibold max-sm:max-w-[130px]">
-      {person.name}
-    </b>
-  ),
-};
-
-const STATE: Column<MemberAnswer> = {
-  id: 'state',
-  heading: 'State',
-  wide: true,
-  cell: ({ accepted }) =>
-    accepted ? (
-      <StateMark state="done">Can sign in</StateMark>
-    ) : (
-      <StateMark state="in-hand">Invited</StateMark>
-    ),
-};
-
-const EMAIL: Column<MemberAnswer> = {
-  id: 'email',
-  heading: 'E-mail',
-  spare: true,
-  sortBy: ({ person }) => person.email,
-  cell: ({ person }) => (
-    <span
-      className="inline-block max-w-[220px] truncate align-middle text-ink-2"
-      title={person.email}
-    >
-      {person.email}
+  cell: ({ person, accepted }) => (
+    <span className="block max-w-[300px] py-1 leading-snug max-sm:max-w-[150px]">
+      <span className="flex gap-1.5">
+        <b className="truncate font-semibold" title={person.name}>
+          {person.name}
+        </b>
+        {!accepted && <span className="text-ink-3">invited</span>}
+      </span>
+      <span className="block truncate text-cap text-ink-2" title={person.email}>
+        {person.email}
+      </span>
     </span>
   ),
 };
+
+/** Takes the room that is left, so that the ticks stand close to the names. */
+const REST: Column<MemberAnswer> = { id: 'rest', heading: '', wide: true, cell: () => null };
 
 function roleColumn(role: Role, onSwitch: OnSwitch | undefined): Column<MemberAnswer> {
   return {
     id: role,
     heading: roleName(role),
+    holds: 'tick',
     cell: (member) => {
       const has = member.roles.includes(role);
       if (onSwitch === undefined) return has ? 'yes' : '';
@@ -70,5 +54,5 @@ function roleColumn(role: Role, onSwitch: OnSwitch | undefined): Column<MemberAn
 
 /** A person and a tick for each role; without `onSwitch` it is only read. */
 export function memberColumns(onSwitch: OnSwitch | undefined): Column<MemberAnswer>[] {
-  return [PERSON, ...ROLES.map((role) => roleColumn(role, onSwitch)), EMAIL, STATE];
+  return [PERSON, ...ROLES.map((role) => roleColumn(role, onSwitch)), REST];
 }

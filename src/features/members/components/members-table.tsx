@@ -45,7 +45,8 @@ export function MembersTable({ schemeId, members, mayChange }: MembersTableProps
       <MutationError failed="The roles were not changed." error={change.error} />
       <Table
         label="People and their roles"
-        className="-mx-8 max-h-[calc(100dvh-200px)] border-t border-rule max-sm:-mx-4"
+        wide
+        className="max-h-[calc(100dvh-200px)]"
         columns={columns}
         rows={members}
         idOf={({ person }) => person.id}

@@ -13,7 +13,7 @@ const COLUMNS: readonly Column<PersonAnswer>[] = [
     sortBy: ({ name }) => name.toLowerCase(),
     cell: ({ name, isAdministrator }) => (
       <>
-        <b className="inline-block max-w-[220px] truncate align-middle font-semibold max-sm:max-w-[150px]">
+        <b className="inline-block max-w-[190px] truncate align-middle font-semibold max-sm:max-w-[150px]">
           {name}
         </b>
         {isAdministrator && <span className="ml-1.5 text-ink-3">administrator</span>}
@@ -25,7 +25,7 @@ const COLUMNS: readonly Column<PersonAnswer>[] = [
     heading: 'E-mail',
     sortBy: ({ email }) => email,
     cell: ({ email }) => (
-      <span className="inline-block max-w-[240px] truncate align-middle" title={email}>
+      <span className="inline-block max-w-[220px] truncate align-middle" title={email}>
         {email}
       </span>
     ),
@@ -35,10 +35,7 @@ const COLUMNS: readonly Column<PersonAnswer>[] = [
     heading: 'Schemes',
     wide: true,
     cell: (person) => (
-      <span
-        className="inline-block max-w-[300px] truncate align-middle text-ink-2"
-        title={partsInWords(person)}
-      >
+      <span className="text-ink-2" title={partsInWords(person)}>
         {partsInWords(person)}
       </span>
     ),
@@ -60,7 +57,8 @@ export function PeopleTable({ people }: { readonly people: readonly PersonAnswer
   return (
     <Table
       label="People"
-      className="-mx-8 max-h-[calc(100dvh-170px)] border-t border-rule max-sm:-mx-4"
+      wide
+      className="max-h-[calc(100dvh-170px)]"
       columns={COLUMNS}
       rows={people}
       idOf={({ id }) => id}

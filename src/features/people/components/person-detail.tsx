@@ -63,7 +63,7 @@ function PersonForm({ person }: { readonly person: PersonAnswer }) {
 /** What can be changed about a person, and where they take part. */
 export function PersonDetail({ person }: { readonly person: PersonAnswer }) {
   return (
-    <div className="sticky left-4 grid max-w-[min(760px,calc(100vw-32px))] grid-cols-2 gap-x-8 gap-y-4 text-small whitespace-normal max-sm:grid-cols-1">
+    <div className="sticky left-(--edge) grid max-w-[min(760px,calc(100vw-32px))] grid-cols-2 gap-x-8 gap-y-4 text-small whitespace-normal max-sm:grid-cols-1">
       <PersonForm person={person} />
       <div className="grid content-start gap-3">
         <h2 className="text-small">Takes part in</h2>

@@ -1,5 +1,5 @@
 import { lazy, Suspense } from 'react';
-import type { PlanMapProps } from '../../map/components/plan-map.tsx';
+import type { PlanMapProps } from '../../map/components/plan-map-props.ts';
 import { MapPause } from './map-pause.tsx';
 
 /** The map and its library come only where a map is shown. */

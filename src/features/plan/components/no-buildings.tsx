@@ -3,20 +3,26 @@ import { EmptyState } from '../../../components/ui/empty-state.tsx';
 import { settingsPath } from '../../../config/paths.ts';
 import type { SchemeAnswer } from '../../../../shared/schemas/schemes.ts';
 
+type NoBuildingsProps = {
+  readonly scheme: SchemeAnswer;
+  /** Whether streets, water, rail or parks are there already. */
+  readonly hasBackground: boolean;
+};
+
 /** In place of a building where a scheme has none. */
-export function NoBuildings({ scheme }: { readonly scheme: SchemeAnswer }) {
-  const mayBring = scheme.abilities.updateBackground === true;
+export function NoBuildings({ scheme, hasBackground }: NoBuildingsProps) {
+  const canBring = scheme.abilities.updateBackground === true && !hasBackground;
   return (
     <EmptyState
       action={
-        mayBring && (
+        canBring && (
           <ButtonLink kind="main" to={settingsPath(scheme.id, 'background')}>
             Bring in streets and water
           </ButtonLink>
         )
       }
     >
-      {mayBring
+      {canBring
         ? 'No buildings yet. Bring in streets and water to see where they will stand.'
         : 'No buildings yet. They stand here once the register has some.'}
     </EmptyState>

@@ -1,5 +1,5 @@
 import type { RefObject } from 'react';
-import type { BuildingRow } from '../../../../shared/schemas/buildings.ts';
+import type { BuildingRow, ExtentAnswer } from '../../../../shared/schemas/buildings.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import type { useSteps } from '../hooks/use-steps.ts';
 import { BuildingSearch } from './building-search.tsx';
@@ -9,8 +9,8 @@ import { SelectedBuilding, type BuildingQuery } from './selected-building.tsx';
 import { StepButtons } from './step-buttons.tsx';
 
 type PlanSideProps = {
-  /** Null until it is known. */
-  readonly hasBuildings: boolean | null;
+  /** What the scheme's extent is taken from; undefined until it is known. */
+  readonly from: ExtentAnswer['from'] | undefined;
   readonly selected: number | null;
   readonly building: BuildingQuery;
   readonly steps: ReturnType<typeof useSteps>;
@@ -22,9 +22,11 @@ type PlanSideProps = {
 
 /** At the side of the map: find, go through, and what is selected. */
 export function PlanSide(props: PlanSideProps) {
-  const { hasBuildings, selected, building, steps, onGoTo, onDeselect, chosen } = props;
+  const { from = 'buildings', selected, building, steps, onGoTo, onDeselect, chosen } = props;
   const scheme = useScheme();
-  if (hasBuildings === false) return <NoBuildings scheme={scheme} />;
+  if (from !== 'buildings') {
+    return <NoBuildings scheme={scheme} hasBackground={from === 'background'} />;
+  }
 
   function choose({ id }: BuildingRow, words: string, found: readonly BuildingRow[]): void {
     steps.follow(words, found);

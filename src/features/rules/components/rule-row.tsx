@@ -21,7 +21,7 @@ type RuleRowProps = {
 export function RuleRow({ form, rule, name, what }: RuleRowProps) {
   const faults = form.formState.errors[rule];
   return (
-    <fieldset className="grid grid-cols-[150px_minmax(0,1fr)_210px_140px] gap-x-4 gap-y-2.5 border-b border-hairline py-3 max-xl:grid-cols-2 max-sm:grid-cols-1">
+    <fieldset className="grid grid-cols-[150px_minmax(0,1fr)_236px_140px] gap-x-4 gap-y-2.5 border-b border-hairline py-3 max-xl:grid-cols-2 max-sm:grid-cols-1">
       <legend className="sr-only">{name}</legend>
       <div aria-hidden="true" className="max-xl:col-span-2 max-sm:col-span-1">
         <b className="block text-small font-semibold">{name}</b>

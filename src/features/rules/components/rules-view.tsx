@@ -3,7 +3,7 @@ import type { RuleSet } from '../../../../shared/schemas/rules.ts';
 import { Panel } from '../../../components/ui/panel.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
-import { formatDay } from '../../../lib/format-date.ts';
+import { formatShortDay } from '../../../lib/format-date.ts';
 import { conditionInWords, RULES, ruleValue } from '../rule-words.ts';
 import { sourceInFull, sourceWords } from '../source-words.ts';
 
@@ -29,7 +29,7 @@ const SOURCE: Column<Line> = {
 const FROM: Column<Line> = {
   id: 'date',
   heading: 'Holds from',
-  cell: ({ date }) => formatDay(date),
+  cell: ({ date }) => formatShortDay(date),
 };
 
 const RULE_COLUMNS: readonly Column<Line>[] = [
@@ -82,9 +82,14 @@ export function RulesView({ rules }: { readonly rules: RuleSet }) {
   }));
   return (
     <>
-      <Table label="Rules" columns={RULE_COLUMNS} rows={ruleLines} idOf={({ id }) => id} />
+      <Table label="Rules in force" columns={RULE_COLUMNS} rows={ruleLines} idOf={({ id }) => id} />
       <Panel title="Holds" note="keep a building from being let go, whatever its figures">
-        <Table label="Holds" columns={HOLD_COLUMNS} rows={holdLines} idOf={({ id }) => id} />
+        <Table
+          label="What holds a building"
+          columns={HOLD_COLUMNS}
+          rows={holdLines}
+          idOf={({ id }) => id}
+        />
       </Panel>
     </>
   );

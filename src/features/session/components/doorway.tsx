@@ -15,7 +15,7 @@ export function Doorway({
   return (
     <Content className="grid grid-cols-[minmax(0,1fr)_404px] overflow-auto max-md:block">
       <PageTitle>{title}</PageTitle>
-      <div className="flex flex-col bg-sheet p-8 max-md:h-[190px] max-md:p-0">
+      <div className="flex flex-col bg-sheet p-8 max-md:p-0">
         <StreetSection />
         <p className="max-w-[46ch] text-h2 leading-snug text-ink-2 max-md:hidden">
           What a tunnel will do to every building above it, with the working shown.

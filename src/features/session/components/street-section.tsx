@@ -17,15 +17,14 @@ function HouseInSection({ house, prefix }: { readonly house: House; readonly pre
 /** A street over two drives, in section, with the trough under it drawn many times too deep. */
 export function StreetSection() {
   const prefix = useId();
-  const { width, height, ground, drives } = SECTION;
+  const { width, top, height, ground, drives } = SECTION;
   return (
     <svg
-      viewBox={`0 0 ${width} ${height}`}
-      preserveAspectRatio="xMidYMid meet"
-      className="min-h-0 w-full flex-1 max-md:h-full"
+      viewBox={`0 ${top} ${width} ${height}`}
+      className="min-h-0 w-full flex-1 max-md:h-auto"
       aria-hidden="true"
     >
-      <HatchPatterns prefix={prefix} />
+      <HatchPatterns prefix={prefix} scale={1.2} />
       {HOUSES.map((house) => (
         <HouseInSection key={house.from} house={house} prefix={prefix} />
       ))}

@@ -1,19 +1,25 @@
+import type { WaitingItem } from '../../../../shared/schemas/waiting.ts';
 import { ButtonLink } from '../../../components/ui/button-link.tsx';
 import { StateShape } from '../../../components/ui/state-mark.tsx';
-import { formatDay } from '../../../lib/format-date.ts';
-import type { WaitingItem } from '../../../../shared/schemas/waiting.ts';
-import { waitingButton } from '../waiting-words.ts';
+import { formatDaySince } from '../../../lib/format-date.ts';
+import { waitingButton, waitingThing } from '../waiting-words.ts';
 
 function WaitingRow({ item }: { readonly item: WaitingItem }) {
+  const state = item.kind === 'invitations-not-accepted' ? 'in-hand' : 'not-started';
   return (
-    <li className="grid min-h-[56px] grid-cols-[22px_44px_minmax(0,1fr)_auto_104px] items-center border-b border-hairline py-2 max-sm:grid-cols-[20px_minmax(0,auto)_minmax(0,1fr)] max-sm:gap-y-1.5">
-      <StateShape state={item.kind === 'invitations-not-accepted' ? 'in-hand' : 'not-started'} />
-      <b className="pr-3.5 text-right text-count leading-none font-bold">{item.count}</b>
-      <span className="pr-4 text-roomy font-semibold text-balance">{item.text}</span>
-      <span className="pr-5 text-small whitespace-nowrap text-ink-2 max-sm:col-start-3">
-        Since {formatDay(item.since)}
+    <li className="grid min-h-[56px] grid-cols-[22px_44px_minmax(0,1fr)_132px_112px] items-center border-b border-hairline py-2 max-sm:grid-cols-[20px_32px_minmax(0,1fr)_auto] max-sm:gap-y-1.5">
+      <StateShape state={state} />
+      <b className="pr-3.5 text-right text-count leading-none font-bold max-sm:text-left">
+        {item.count}
+      </b>
+      <span className="pr-4 max-sm:col-span-2 max-sm:pr-0">
+        <span className="block text-roomy font-semibold">{waitingThing(item)}</span>
+        <span className="block text-small text-ink-2">{item.text}</span>
       </span>
-      <ButtonLink to={item.link} className="max-sm:col-start-3 max-sm:justify-self-start">
+      <span className="text-small whitespace-nowrap text-ink-2 max-sm:col-start-3">
+        Since {formatDaySince(item.since, new Date())}
+      </span>
+      <ButtonLink to={item.link} className="min-w-[104px] justify-self-end">
         {waitingButton(item.kind)}
       </ButtonLink>
     </li>

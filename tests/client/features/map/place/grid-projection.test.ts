@@ -47,4 +47,8 @@ describe('gridCrosses', () => {
   it('are left out where they would be too many', () => {
     expect(ends(gridCrosses(UTM_31, [0, 0, 1e6, 1e6], 0.5))).toEqual([]);
   });
+
+  it('are left out where the grid bends', () => {
+    expect(ends(gridCrosses(UTM_31, [0, 5e6, 1e6, 7e6], 2000))).toEqual([]);
+  });
 });

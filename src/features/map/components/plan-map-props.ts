@@ -1,0 +1,18 @@
+import type { CameraBounds } from '../camera.ts';
+import type { MapHandle } from '../map-handle.ts';
+import type { MapPlan } from '../map-plan.ts';
+
+/** What the page tells the map. */
+export type PlanMapProps = {
+  readonly plan: MapPlan;
+  /** What the map is called for who hears it. */
+  readonly label: string;
+  /** What the map shows at first and when it is fitted. */
+  readonly home: CameraBounds;
+  /** The scheme's grid for proj4. */
+  readonly gridDefinition: string;
+  readonly selected: number | null;
+  readonly onSelect: (buildingId: number | null) => void;
+  /** Gives the page its way to move the map, and null when the map goes. */
+  readonly onHandle: (handle: MapHandle | null) => void;
+};
