@@ -1,5 +1,5 @@
 import { averageHorizontalStrain, peakHorizontalStrain } from '../building/horizontal-strain.ts';
-import { SHORTEST_ZONE } from '../building/curvature-runs.ts';
+import { curvatureRuns, FLAT_CURVATURE, SHORTEST_ZONE } from '../building/curvature-runs.ts';
 import { governingZone, strainedZone, type StrainedZone } from '../building/strained-zone.ts';
 import { wallExtremes, type WallExtremes } from '../building/wall-extremes.ts';
 import type { Wall } from '../building/wall.ts';
@@ -42,6 +42,7 @@ export type WallResult = WallExtremes & {
 
 function warningsOf(
   { field, length }: WallField,
+  { profile, scale }: LoadedProfile,
   wall: Wall,
   result: Pick<WallResult, 'settlementMax' | 'zones'>,
   rules: AssessmentRules,
@@ -52,7 +53,8 @@ function warningsOf(
   if (length < SHORTEST_ZONE) return [...warnings, 'short wall', 'not affected'];
   const ignored = rules.cutOff.kind === 'settlement' ? rules.cutOff.settlement : 0;
   const moves = result.settlementMax > 0 && result.settlementMax >= ignored;
-  return moves
+  const flat = moves && curvatureRuns(profile, FLAT_CURVATURE / scale).length === 0;
+  return flat
     ? [...warnings, 'flat along the wall', 'not affected']
     : [...warnings, 'not affected'];
 }
@@ -86,14 +88,20 @@ export function resultOfWall(
     strain,
     category: categoryOfStrain(strain),
     rankin: rankinClass(extremes.slopeMax, extremes.settlementMax),
-    warnings: warningsOf(field, wall, { zones, settlementMax: extremes.settlementMax }, rules),
+    warnings: warningsOf(
+      field,
+      loaded,
+      wall,
+      { zones, settlementMax: extremes.settlementMax },
+      rules,
+    ),
   };
 }
 
 /**
  * Assesses a wall at the central value of every input.
  *
- * Units: m and m/m; faces are chainages m. Valid: wall length > 0; throws as `levelField`.
+ * Units: m and m/m; faces are chainages m. Valid: any wall; throws as `levelField`.
  * Source: as `resultOfWall`.
  */
 export function assessWall(

@@ -1,14 +1,14 @@
 import { at } from '../numerics/at.ts';
-import { CENTRAL, type FivePosition } from '../numerics/range.ts';
+import { CENTRAL, type FivePosition, type Range } from '../numerics/range.ts';
 import type { Wall } from '../building/wall.ts';
 import { wallExtremes } from '../building/wall-extremes.ts';
-import { nearestOnSegment } from '../geometry/nearest-on-segment.ts';
-import type { PlanPoint } from '../geometry/point.ts';
 import { fieldAtPoints } from '../ground/field-at-points.ts';
 import type { GroundModel } from '../ground/ground-model.ts';
 import { FIELD } from '../ground/kernel.ts';
 import { levelField } from '../ground/level-field.ts';
 import { lossFactorsAt } from '../ground/loss-factors-at.ts';
+import type { Piece } from '../ground/piece.ts';
+import type { Site } from '../ground/site.ts';
 import { eOverGValues, type FieldsOverTroughWidth } from './bracket.ts';
 import { breakpointFactor } from './breakpoint.ts';
 import { loadedProfile } from './loaded-profile.ts';
@@ -39,43 +39,50 @@ export type Breakpoint = {
   readonly reserveOverHigh: number;
 };
 
+type Pressing = { readonly drive: number; readonly volumeLoss: Range };
+
+/** The drives that reach a site, each with every volume loss that it has there. */
+function pressingAt(site: Site): Pressing[] {
+  const found: Pressing[] = [];
+  for (const { drive, volumeLoss } of site.blocks.flatMap(({ pieces }) => pieces)) {
+    const known = found.some((one) => one.drive === drive && one.volumeLoss === volumeLoss);
+    if (!known) found.push({ drive, volumeLoss });
+  }
+  return found;
+}
+
 /**
- * The drive that gives most of the settlement at the wall's lowest point, with its volume loss there.
+ * The drive that gives most of the settlement at the wall's lowest point, with the volume loss of its
+ * lengths that give it.
  *
- * Units: volume losses m/m. Valid: undefined without drives. Source: [own].
+ * Units: volume losses m/m. Valid: undefined where no drive reaches the wall. Source: [own].
  */
 export function drivePressingMost(
   model: GroundModel,
   fields: FieldsOverTroughWidth,
   wall: Wall,
   faces: readonly (number | undefined)[],
-): { drive: number; central: number; high: number } | undefined {
+): Pressing | undefined {
   const field = fields[CENTRAL];
   if (field === undefined) return undefined;
+  const site = siteOfWall(model, wall);
+  const candidates = pressingAt(site);
+  if (candidates.length < 2) return candidates[0];
   const factors = lossFactorsAt(model, 'central');
   const { profile, scale } = loadedProfile(field, factors);
   const lowest = wallExtremes(profile, scale, field.length).settlementMaxAt;
-  const [tx, ty] = directionOf(wall, field.length);
-  const point: PlanPoint = [
-    wall.segment.start[0] + lowest * tx,
-    wall.segment.start[1] + lowest * ty,
-  ];
-  const site = siteOfWall(model, wall);
-  let [drive, largest] = [0, -1];
-  for (const index of model.drives.keys()) {
-    const alone = levelField(model, site, { position: CENTRAL, faces, onlyDrive: index });
-    const settlement = at(
-      fieldAtPoints(alone, Float64Array.from(point), factors),
-      FIELD.settlement,
-    );
-    if (settlement > largest) [drive, largest] = [index, settlement];
+  const [tx, ty] = directionOf(wall);
+  const [easting, northing] = wall.segment.start;
+  const point = Float64Array.of(easting + lowest * tx, northing + lowest * ty);
+  let [found, largest]: [Pressing | undefined, number] = [undefined, -1];
+  for (const candidate of candidates) {
+    const only = (piece: Piece) =>
+      piece.drive === candidate.drive && piece.volumeLoss === candidate.volumeLoss;
+    const alone = levelField(model, site, { position: CENTRAL, faces, only });
+    const settlement = at(fieldAtPoints(alone, point, factors), FIELD.settlement);
+    if (settlement > largest) [found, largest] = [candidate, settlement];
   }
-  let [nearest, loss] = [Infinity, { central: 0, high: 0 }];
-  for (const piece of model.pieces[drive] ?? []) {
-    const { distance } = nearestOnSegment(point, piece.plan);
-    if (distance < nearest) [nearest, loss] = [distance, piece.volumeLoss];
-  }
-  return { drive, central: loss.central, high: loss.high };
+  return found;
 }
 
 /**
@@ -92,10 +99,10 @@ export function breakpointOfWall(
   faces: readonly (number | undefined)[],
 ): Breakpoint | undefined {
   const pressing = drivePressingMost(model, fields, wall, faces);
-  if (pressing === undefined || pressing.central === 0) return undefined;
+  if (pressing === undefined || pressing.volumeLoss.central === 0) return undefined;
   const factors = lossFactorsAt(model, 'central');
   const positions = new Set<FivePosition>(fields[0] === fields[4] ? [2] : [0, 2, 4]);
-  let most = LARGEST_VOLUME_LOSS / pressing.central;
+  let most = LARGEST_VOLUME_LOSS / pressing.volumeLoss.central;
   let found: { factor: number; position: FivePosition; eOverG: number } | undefined;
   for (const position of positions) {
     const field = fields[position];
@@ -110,12 +117,12 @@ export function breakpointOfWall(
     }
   }
   if (found === undefined) return undefined;
-  const volumeLoss = found.factor * pressing.central;
+  const volumeLoss = found.factor * pressing.volumeLoss.central;
   return {
     ...found,
     drive: pressing.drive,
     volumeLoss,
     reserveOverCentral: found.factor - 1,
-    reserveOverHigh: volumeLoss / pressing.high - 1,
+    reserveOverHigh: volumeLoss / pressing.volumeLoss.high - 1,
   };
 }

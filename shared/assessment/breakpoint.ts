@@ -16,6 +16,8 @@ import type { WallField } from './wall-field.ts';
 /** Each step of the walk multiplies the volume loss by this. */
 const STEP = 1.1;
 const TOLERANCE = 1e-6;
+/** A rise and fall of the strain within this share of a factor is not looked for. */
+const FINEST_STEP = 1e-4;
 
 function largestOf(profile: Profile, quantity: ProfileQuantity): number {
   const { offset, degree } = PROFILE[quantity];
@@ -44,11 +46,42 @@ export function strainBound(
   return scale * (largestOf(profile, 'curvature') * perCurvature + largestOf(profile, 'strain'));
 }
 
+type Walk = {
+  /** The strain at a factor less the limiting strain. */
+  readonly excess: (factor: number) => number;
+  readonly limit: number;
+};
+
+/**
+ * The first factor in a step at which the limit is reached. While its zones stay the same a strain grows as
+ * the factor, so a stretch can hold the limit only if that reaches it, or if its end does; such a stretch is
+ * halved and the lower half searched first.
+ */
+function firstReached(
+  walk: Walk,
+  from: number,
+  excessFrom: number,
+  to: number,
+  endReaches: boolean,
+): number | undefined {
+  const { excess, limit } = walk;
+  const mayReach = atOrAbove(((excessFrom + limit) * to) / from, limit);
+  if (!endReaches && (!mayReach || to - from <= FINEST_STEP * to)) return undefined;
+  if (to - from <= TOLERANCE * to) return to;
+  const middle = (from + to) / 2;
+  const found = excess(middle);
+  if (atOrAbove(found, 0)) return firstReached(walk, from, excessFrom, middle, true);
+  return (
+    firstReached(walk, from, excessFrom, middle, false) ??
+    firstReached(walk, middle, found, to, endReaches)
+  );
+}
+
 /**
  * The smallest factor on all central volume losses together at which a wall reaches the category that
- * leads on, in one state of the ground and at one E/G; undefined up to `most`. The strain jumps where
- * a zone appears or joins, so the factor is walked upwards and the step that reaches is bisected; it
- * is never taken from strain/limit.
+ * leads on, in one state of the ground and at one E/G; undefined up to `most`. The strain jumps where a zone
+ * appears or joins, up or down, so the factor is walked upwards and every step that may reach the limit is
+ * searched from its lower end; it is never taken from strain/limit.
  *
  * Units: none. Valid: `loaded` at the central volume loss; most > 0. Source: [own].
  */
@@ -65,24 +98,17 @@ export function breakpointFactor(
     const scaled = { profile: loaded.profile, scale: factor * loaded.scale };
     return largestStrain(shapesOfWall(scaled, field.cutOff, rules), wall, eOverG) - limit;
   };
-  let below = limit / strainBound(loaded, field.length, wall.height, eOverG) / STEP;
-  if (!(below < most)) return undefined;
-  let above = below;
-  let excessAbove = excess(above);
-  let excessBelow = -limit;
-  while (!atOrAbove(excessAbove, 0)) {
-    if (above >= most) return undefined;
-    [below, excessBelow] = [above, excessAbove];
-    above = Math.min(most, above * STEP);
-    excessAbove = excess(above);
+  let from = limit / strainBound(loaded, field.length, wall.height, eOverG);
+  if (!(from < most)) return undefined;
+  let excessFrom = excess(from);
+  if (atOrAbove(excessFrom, 0)) return from;
+  while (from < most) {
+    const to = Math.min(most, from * STEP);
+    const excessTo = excess(to);
+    const walk = { excess, limit };
+    const first = firstReached(walk, from, excessFrom, to, atOrAbove(excessTo, 0));
+    if (first !== undefined) return first;
+    [from, excessFrom] = [to, excessTo];
   }
-  for (let turn = 0; above - below > TOLERANCE * above; turn++) {
-    const secant = above - ((above - below) * excessAbove) / (excessAbove - excessBelow);
-    const middle = turn % 2 === 0 ? secant * (1 + TOLERANCE / 4) : (below + above) / 2;
-    const inside = middle > below && middle < above ? middle : (below + above) / 2;
-    const found = excess(inside);
-    if (atOrAbove(found, 0)) [above, excessAbove] = [inside, found];
-    else [below, excessBelow] = [inside, found];
-  }
-  return above;
+  return undefined;
 }

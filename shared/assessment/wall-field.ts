@@ -68,13 +68,18 @@ function profileOfPack(
   return profileFromNodes(nodes, values);
 }
 
+/** A wall of no length is computed as if it were this long and ran east: it settles, and has no zone. */
+const LEAST_LENGTH = 1e-6;
+
 /**
  * The direction of a wall in plan from its start.
  *
- * Units: none. Valid: length > 0. Source: [own].
+ * Units: none. Valid: east for a wall of no length. Source: [own].
  */
-export function directionOf(wall: Wall, length: number): PlanPoint {
+export function directionOf(wall: Wall): PlanPoint {
   const { start, end } = wall.segment;
+  const length = wallLength(wall);
+  if (length < LEAST_LENGTH) return [1, 0];
   return [(end[0] - start[0]) / length, (end[1] - start[1]) / length];
 }
 
@@ -90,7 +95,7 @@ export function siteOfWall(model: GroundModel, wall: Wall): Site {
 /**
  * The movement of the ground along a wall in one state.
  *
- * Units: m. Valid: wall length > 0, `site` is the wall's; throws as `levelField`.
+ * Units: m. Valid: `site` is the wall's; throws as `levelField`.
  * Source: attewell-woodman-1982; the profile is [own].
  */
 export function wallField(
@@ -102,8 +107,8 @@ export function wallField(
 ): WallField {
   const { segment } = wall;
   const field = levelField(model, site, state);
-  const length = wallLength(wall);
-  const direction = directionOf(wall, length);
+  const length = Math.max(LEAST_LENGTH, wallLength(wall));
+  const direction = directionOf(wall);
   const nodes = nodesAlong(length, field.smallestWidth);
   const profiles = field.packs.map(({ pack, count }) =>
     profileOfPack(pack, count, segment.start, direction, nodes),

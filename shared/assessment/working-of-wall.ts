@@ -11,6 +11,7 @@ import type { GroundModel } from '../ground/ground-model.ts';
 import { FIELD } from '../ground/kernel.ts';
 import { levelField } from '../ground/level-field.ts';
 import { lossFactorsAt } from '../ground/loss-factors-at.ts';
+import type { Piece } from '../ground/piece.ts';
 import { nearestPart } from '../ground/nearest-part.ts';
 import { recordPart, type PointOnWall } from '../ground/record-part.ts';
 import type { Recorder, WorkingLine } from '../working.ts';
@@ -40,11 +41,10 @@ type Context = {
   readonly model: GroundModel;
   readonly wall: Wall;
   readonly faces: readonly (number | undefined)[];
-  readonly length: number;
 };
 
-function pointAt({ wall, length }: Context, x: number): PointOnWall {
-  const direction = directionOf(wall, length);
+function pointAt({ wall }: Context, x: number): PointOnWall {
+  const direction = directionOf(wall);
   const [E, N] = wall.segment.start;
   return { point: [E + x * direction[0], N + x * direction[1]], direction };
 }
@@ -58,7 +58,8 @@ function recordPoint(context: Context, x: number, sections: Sections): void {
   const settlements: Record<string, number> = {};
   const movements: Record<string, number> = {};
   for (const [drive, { name }] of model.drives.entries()) {
-    const state = { position: CENTRAL, faces, onlyDrive: drive };
+    const only = (piece: Piece) => piece.drive === drive;
+    const state = { position: CENTRAL, faces, only };
     const field = levelField(model, site, state);
     const part = nearestPart(field, model.pieces[drive] ?? [], on.point);
     if (part === undefined) continue;
@@ -143,7 +144,7 @@ export function workingOfWall(
   });
   const loaded = loadedProfile(field, lossFactorsAt(model, 'central'));
   const result = resultOfWall(field, loaded, wall, rules);
-  const context = { model, wall, faces, length: field.length };
+  const context = { model, wall, faces };
   const sections: Sections = [];
   const governing = result.zones[result.governingZone];
   const points =

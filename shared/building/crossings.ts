@@ -46,7 +46,9 @@ export function crossings(
   from: number,
   to: number,
 ): number[] {
+  const { offset, degree } = PROFILE[quantity];
   const found: number[] = [];
+  let before = 0;
   const last = intervalOf(profile, to);
   for (let interval = intervalOf(profile, from); interval <= last; interval++) {
     const start = at(profile.nodes, interval);
@@ -54,6 +56,11 @@ export function crossings(
     const a = Math.max(0, shareOf(profile, interval, from));
     const b = Math.min(1, shareOf(profile, interval, to));
     if (!(a < b)) continue;
+    const base = interval * PROFILE_STRIDE + offset;
+    // Two polynomials agree at their node only to rounding: a level between the two values is passed there.
+    const here = evaluatePolynomial(profile.coefficients, base, degree, a) - level;
+    if (before * here < 0 && start !== found.at(-1)) found.push(start);
+    before = evaluatePolynomial(profile.coefficients, base, degree, b) - level;
     for (const t of crossingsInInterval(profile, quantity, level, interval, a, b)) {
       const x = start + t * width;
       if (x !== found.at(-1)) found.push(x);

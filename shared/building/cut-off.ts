@@ -44,7 +44,7 @@ function endsByStretches(
 
 /**
  * A stretch without its two ends that the cut-off ignores, undefined where nothing is left. A dip
- * below the cut-off inside it stays in, which is the safe side.
+ * below the cut-off inside it stays in.
  *
  * Units: m. Valid: any profile. Source: as CutOff.
  */

@@ -1,5 +1,6 @@
 import { boxDistance } from '../geometry/bounding-box.ts';
 import type { Block } from './block.ts';
+import { BESIDE_IN_WIDTHS } from './crown-rule.ts';
 import type { Place } from './place.ts';
 import { troughWidth } from './trough-width.ts';
 import { ruleAt, type TroughWidthRule } from './trough-width-rule.ts';
@@ -35,11 +36,10 @@ const NEVER_CULLED_WITHIN = 2;
  * Whether a block moves the ground at a place too little to be summed. A drive is a row of point
  * sinks V/(2πi²)·exp(−r²/2i²) whose second derivatives are at most (1 + r²/i²)/i² times that; with
  * the block's whole volume at its least distance and its extreme widths, over the whole range of K,
- * this bounds both sums, and
- * each of `blocks` blocks may use an equal share of what may be missing.
+ * this bounds both sums, and each of `blocks` blocks may use an equal share of what may be missing.
  *
  * Units: m. Valid: false, never a guess, where the widths of the block are not positive or its crown
- * rises to the founding level, which the crown rule must see.
+ * comes near the founding level, which the crown rule must see.
  * Source: [own].
  */
 export function blockIsNegligible(
@@ -49,13 +49,19 @@ export function blockIsNegligible(
   blocks: number,
 ): boolean {
   const { groundLevel: ground, foundingLevel: founding } = place;
-  if (block.highestAxis + block.largestDiameter / 2 >= founding) return false;
+  const crown = block.highestAxis + block.largestDiameter / 2;
+  if (crown >= founding) return false;
   const widest = troughWidth(ruleAt(rule, 4), block.largestK, {
     ground,
     founding,
     axis: block.lowestAxis,
   });
   const distance = boxDistance(block.box, place.box);
+  if (founding - crown < block.largestDiameter) {
+    const levels = { ground, founding: ground, axis: block.lowestAxis };
+    const reach = BESIDE_IN_WIDTHS * troughWidth(ruleAt(rule, 4), block.largestK, levels);
+    if (distance < reach + block.largestDiameter / 2) return false;
+  }
   if (!(widest > 0) || distance < NEVER_CULLED_WITHIN * widest) return false;
   const narrowest = troughWidth(ruleAt(rule, 0), block.smallestK, {
     ground,

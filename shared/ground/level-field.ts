@@ -17,7 +17,7 @@ import { depthToFocus, focusWarning } from './vector-focus.ts';
 
 /**
  * Which state of the ground: the position of K in its range, the face of each drive (undefined:
- * complete), and, where the movement of one drive alone is wanted, which.
+ * complete), and, where the movement of some pieces alone is wanted, which.
  *
  * Units: face chainages m. Valid: faces in the order of the drives; a missing one is complete.
  * Source: [own].
@@ -25,7 +25,7 @@ import { depthToFocus, focusWarning } from './vector-focus.ts';
 export type GroundState = {
   readonly position: FivePosition;
   readonly faces: readonly (number | undefined)[];
-  readonly onlyDrive?: number;
+  readonly only?: (piece: Piece) => boolean;
 };
 
 /**
@@ -40,10 +40,14 @@ export type LevelField = {
   readonly warnings: readonly Warning[];
 };
 
-/** A piece on a gradient is cut until i changes by less than this share along a part of it. */
-const LARGEST_WIDTH_CHANGE = 0.02;
+/**
+ * A piece on a gradient is cut until a part is no longer than half of i, over which the middle stands for
+ * all of it, or until i changes along it by no more than the method's 0.1 %.
+ */
+const PARTS_PER_WIDTH = 2;
+const LARGEST_WIDTH_CHANGE = 0.001;
 /** Where the width all but vanishes the rule for it is no longer worth following. */
-const MOST_PARTS = 64;
+const MOST_PARTS = 256;
 
 type Packing = {
   readonly model: GroundModel;
@@ -114,17 +118,18 @@ function packPiece(packing: Packing, piece: Piece, length: number): void {
   }
   const lowest = levelsAt(place, Math.min(piece.startLevel, levelAlong(piece, length)));
   const change = Math.abs(troughWidth(rule, k, lowest) - width);
-  const parts = Math.min(
-    MOST_PARTS,
-    Math.max(1, Math.ceil(change / (LARGEST_WIDTH_CHANGE * width))),
-  );
+  const byChange = change / (LARGEST_WIDTH_CHANGE * width);
+  const byLength = (PARTS_PER_WIDTH * length) / width;
+  const parts = Math.min(MOST_PARTS, Math.max(1, Math.ceil(Math.min(byChange, byLength))));
   for (let part = 0; part < parts; part++) {
     packPart(packing, piece, k, (part * length) / parts, length / parts);
   }
 }
 
 function packBlock(packing: Packing, block: Block, ends: readonly number[]): void {
+  const { only } = packing.state;
   for (const piece of block.pieces) {
+    if (only?.(piece) === false) continue;
     const end = ends[piece.drive] ?? 0;
     if (end > piece.from) packPiece(packing, piece, Math.min(piece.length, end - piece.from));
   }
@@ -132,7 +137,6 @@ function packBlock(packing: Packing, block: Block, ends: readonly number[]): voi
 
 function drivenEnds({ model, state, place, rule }: Packing): number[] {
   return model.drives.map((drive, index) => {
-    if (state.onlyDrive !== undefined && state.onlyDrive !== index) return 0;
     const length = model.lengths[index] ?? 0;
     return drivenEnd(
       model.pieces[index] ?? [],

@@ -44,6 +44,7 @@ export function troughWidth(
     case 'oreilly-new-clay':
       return 0.43 * axisDepth + 1.1 - CLAY_DEPTH_FACTOR * depth;
     case 'oreilly-new-sand':
+      if (!(axisDepth > 0)) return 0.28 * axisDepth - 0.1;
       return ((0.28 * axisDepth - 0.1) * (axisDepth - depth)) / axisDepth;
     case 'layered':
       return layeredWidth(rule.layers, founding, axis);

@@ -64,10 +64,14 @@ const wall = z
     ]),
     poisson: z.number().min(0).max(LIMITS.poisson),
   })
-  .refine(({ from, to }) => from[0] !== to[0] || from[1] !== to[1], {
-    path: ['to'],
-    error: 'is the same point as from: the wall has no length',
-  });
+  .refine(
+    ({ from, to }) =>
+      Math.max(Math.abs(to[0] - from[0]), Math.abs(to[1] - from[1])) >= LIMITS.wallLength,
+    {
+      path: ['to'],
+      error: 'is the same point as from, or within a millimetre of it: the wall has no length',
+    },
+  );
 
 const rules = z.strictObject({
   depth: z.enum(['clay', 'constant', 'oreilly-new-clay', 'oreilly-new-sand']).optional(),

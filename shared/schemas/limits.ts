@@ -11,6 +11,7 @@ export const LIMITS = {
   volumeLoss: 0.2,
   troughWidth: 2,
   height: 500,
+  wallLength: 0.001,
   eOverG: 1000,
   poisson: 0.5,
   laterFactor: 1.6,

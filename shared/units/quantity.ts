@@ -33,10 +33,3 @@ export type Ratio = Quantity<'m/m'>;
  * Units: %. Valid: finite. Source: [own].
  */
 export type Percent = Quantity<'%'>;
-
-/**
- * Curvature of the ground or of a wall.
- *
- * Units: 1/m. Valid: finite. Source: [own].
- */
-export type PerMetre = Quantity<'1/m'>;

@@ -1,4 +1,4 @@
-/** The deep beam of method.md section 3, item 4, written out anew. */
+/** The deep beam of the method, written out anew. */
 export type OracleBeam = {
   readonly height: number;
   readonly eOverG: number;

@@ -76,7 +76,7 @@ function lengthOf({ start, end }: Piece): number {
   return end - start;
 }
 
-/** Joins pieces under 0.5 m as method.md section 3, item 2 says, the shortest first. */
+/** Joins pieces under 0.5 m as the method says, the shortest first. */
 export function withoutSlivers(
   pieces: readonly Piece[],
   meanCurvature: (start: number, end: number) => number,

@@ -1,14 +1,14 @@
 /** Layers from the top down, each with the level of its base. */
 export type SinkLayers = readonly { readonly base: number; readonly K: number }[];
 
-/** How wide a trough is, by name as in method.md section 1, or by layers. */
+/** How wide a trough is, by name as in the method, or by layers. */
 export type SinkRule =
   'constant' | 'clay' | 'oreilly-new-clay' | 'oreilly-new-sand' | { readonly layers: SinkLayers };
 
 /** Ground and founding level of a wall. */
 export type SinkLevels = { readonly ground: number; readonly founding: number };
 
-/** i at a founding level over an axis, written out from method.md section 1. */
+/** i at a founding level over an axis, written out from the method. */
 export function sinkWidth(
   rule: SinkRule,
   K: number,

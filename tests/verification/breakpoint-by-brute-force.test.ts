@@ -77,7 +77,7 @@ const CASES = fc.noShrink(
   }),
 );
 
-describe('method.md section 5: the breakpoint by a walk of half a per cent', () => {
+describe('the method: the breakpoint by a walk of half a per cent', { timeout: 60_000 }, () => {
   it('is the smallest factor that reaches the category, and there is none without it', () => {
     const seen = { found: 0, none: 0 };
     holds(

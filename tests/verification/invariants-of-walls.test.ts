@@ -50,7 +50,7 @@ function expectAlike(got: WallResult, wanted: WallResult, length: number, share:
   }
 }
 
-describe('method.md section 3: what holds for any wall', () => {
+describe('the method: what holds for any wall', { timeout: 60_000 }, () => {
   it('the same when all is moved and turned, to where national grids are too', () => {
     holds(
       fc.noShrink(fc.tuple(CASES, motions)),

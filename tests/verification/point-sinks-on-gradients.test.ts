@@ -8,7 +8,7 @@ import { kernelAgainstSinks, type QuadratureCase } from '../support/quadrature-c
 import { chordsOf } from '../support/sink-path.ts';
 
 /**
- * What method.md section 1 allows that halving the pieces may change: 0.1 % and 0.01 mm of S. The
+ * What the method allows that halving the pieces may change: 0.1 % and 0.01 mm of S. The
  * pieces differ from the sinks in i alone, which each derivative feels once more: S goes with 1/i,
  * slope with 1/i², curvature with 1/i³, u and strain with one i²/f less.
  */

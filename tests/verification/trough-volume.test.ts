@@ -20,7 +20,7 @@ function sum(values: readonly number[]): number {
   return values.reduce((total, value) => total + value, 0);
 }
 
-describe('attewell-woodman-1982: the volume of the trough', () => {
+describe('attewell-woodman-1982: the volume of the trough', { timeout: 60_000 }, () => {
   it('across a straight drive is V_s per metre', () => {
     const cases = drawnDrives(straightAxes);
     holds(

@@ -49,7 +49,7 @@ it.each<[string, number, Scheme, number]>([
   ['peak strain', 25, { ...curved, rules: someRules({ horizontalStrain: 'peak' }) }, 0.02],
   ['compression zero', 25, { ...curved, rules: someRules({ compression: 'zero' }) }, 0.02],
 ])(
-  'method.md section 3 by sampling: %s, %d walls',
+  'the method by sampling: %s, %d walls',
   (_, walls, scheme, farthest) => {
     const { ends, settlement, zoneStrain, wallStrain, most } = worstOf(scheme, walls);
     expect(ends).toBeLessThan(farthest);

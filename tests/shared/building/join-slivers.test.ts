@@ -24,7 +24,7 @@ function joined(text: string, whole: Stretch['mode'] = 'hogging'): string {
   return written(joinSlivers(parsed(text), () => whole));
 }
 
-describe('joinSlivers: method.md section 3, item 2', () => {
+describe('joinSlivers: the method', () => {
   it.each([
     ['nothing short', 'S 0-5, H 5-9', 'S 0-5, H 5-9'],
     ['exactly 0.5 m is no sliver', 'S 0-5, H 5-5.5, S 5.5-9', 'S 0-5, H 5-5.5, S 5.5-9'],

@@ -27,7 +27,7 @@ function packed(off: number, foundingLevel: number, drives?: readonly Drive[]): 
 
 // axis 20 m deep, D 6 m, K 0.5: crown at −17 m, i at ground level 10 m, beside within 25 + 3 m
 
-describe('the crown rule of method.md section 1', () => {
+describe('the crown rule of the method', () => {
   it.each([-17, -17.5, -20, -30])('refuses a founding level of %d m beside the drive', (level) => {
     expect(methodErrorOf(() => fieldAt(10, level))).toEqual({
       code: 'below-crown-beside-drive',

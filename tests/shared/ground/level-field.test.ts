@@ -39,8 +39,10 @@ describe('levelField', () => {
       aDrive(),
       aDrive({ volumeLoss: { low: 0.01, central: 0.02, high: 0.04 } }),
     ]);
-    const counts = [0, 1].map((onlyDrive) =>
-      fieldOf(model, { ...COMPLETE, onlyDrive }).packs.map(({ count }) => count),
+    const counts = [0, 1].map((drive) =>
+      fieldOf(model, { ...COMPLETE, only: (piece) => piece.drive === drive }).packs.map(
+        ({ count }) => count,
+      ),
     );
     expect(counts).toEqual([
       [1, 0],

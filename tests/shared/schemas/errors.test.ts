@@ -72,7 +72,7 @@ describe('one line says where a case is wrong', () => {
     [
       'zero length',
       withWall({ to: [50, 2] }),
-      'walls[0].to: is the same point as from: the wall has no length',
+      'walls[0].to: is the same point as from, or within a millimetre of it: the wall has no length',
     ],
     [
       'per cent for a fraction',
