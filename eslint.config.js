@@ -1,4 +1,5 @@
 import { defineConfig, globalIgnores } from 'eslint/config';
+import reactHooks from 'eslint-plugin-react-hooks';
 import tseslint from 'typescript-eslint';
 
 /** `shared/` must give the same bits in every engine, so only exactly rounded Math functions. */
@@ -62,6 +63,15 @@ export default defineConfig(
         'error',
         { selector: "BinaryExpression[operator='**']", message: 'Write the product out.' },
       ],
+    },
+  },
+  {
+    files: ['src/**/*.{ts,tsx}'],
+    extends: [reactHooks.configs.flat['recommended-latest']],
+    rules: {
+      'react-hooks/exhaustive-deps': 'error',
+      // speaks of a compiler that is not used here
+      'react-hooks/incompatible-library': 'off',
     },
   },
   {

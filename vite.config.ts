@@ -3,7 +3,7 @@ import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vitest/config';
 
-const server = `http://127.0.0.1:${process.env['PORT'] ?? 4600}`;
+const server = `http://127.0.0.1:${process.env.PORT ?? 4600}`;
 
 export default defineConfig({
   plugins: [react(), tailwindcss()],
@@ -42,6 +42,7 @@ export default defineConfig({
           name: 'client',
           include: ['tests/client/**/*.test.{ts,tsx}'],
           environment: 'jsdom',
+          setupFiles: ['tests/support/client-setup.ts'],
         },
       },
       {

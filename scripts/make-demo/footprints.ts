@@ -1,12 +1,31 @@
 import type { Point, Ring } from './vector.ts';
 
-const kinds = [
-  'terraced house', 'shop', 'public house', 'town house', 'warehouse', 'workshop', 'outbuilding', 'semi-detached house',
-  'detached house', 'flats', 'office', 'courtyard block', 'church', 'chapel', 'customs house', 'bridge keeper’s house',
-  'school', 'town hall', 'market hall', 'ropewalk', 'fish market', 'almshouses', 'lifeboat house', 'net loft', 'garage',
-] as const; // prettier-ignore
-
-export type Kind = (typeof kinds)[number];
+export type Kind =
+  | 'terraced house'
+  | 'shop'
+  | 'public house'
+  | 'town house'
+  | 'warehouse'
+  | 'workshop'
+  | 'outbuilding'
+  | 'semi-detached house'
+  | 'detached house'
+  | 'flats'
+  | 'office'
+  | 'courtyard block'
+  | 'church'
+  | 'chapel'
+  | 'customs house'
+  | 'bridge keeper’s house'
+  | 'school'
+  | 'town hall'
+  | 'market hall'
+  | 'ropewalk'
+  | 'fish market'
+  | 'almshouses'
+  | 'lifeboat house'
+  | 'net loft'
+  | 'garage';
 
 /** A building on the ground, before anything is known of it but its shape. */
 export type Footprint = {

@@ -4,7 +4,7 @@ import { between } from './vector.ts';
 import type { Point, Ring } from './vector.ts';
 
 /** How far a quay may stand from the land's edge to be one with it. */
-const NEAR = 1.5;
+const NEAR = 0.4;
 
 /** The stretches of a line of which each piece runs along the land. */
 function stretchesAlong(line: readonly Point[], land: readonly Ring[]): Point[][] {

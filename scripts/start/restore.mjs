@@ -11,26 +11,38 @@ function quoted(name) {
   return `"${name.replaceAll('"', '""')}"`;
 }
 
+/** Rights on the database itself are not in the file. */
+const RIGHTS = `do $$ begin
+  execute format('revoke temporary on database %I from public', current_database());
+end $$`;
+
+function fill(url, file) {
+  load(url, file);
+  query(url, RIGHTS);
+}
+
 /** Reads the file into a new database beside, which takes the place of the old one once it is whole. */
 function replace(url, file) {
   const name = decodeURIComponent(new URL(url).pathname.slice(1));
-  const beside = `${name}_restored`;
+  const [beside, old] = [`${name}_restored`, `${name}_replaced`];
   const postgres = withDatabase(url, 'postgres');
   query(postgres, `drop database if exists ${quoted(beside)}`);
   query(postgres, `create database ${quoted(beside)}`);
   try {
-    load(withDatabase(url, beside), file);
+    fill(withDatabase(url, beside), file);
+    // refused while somebody is connected
+    query(postgres, `alter database ${quoted(name)} rename to ${quoted(old)}`);
   } catch (error) {
     query(postgres, `drop database ${quoted(beside)}`);
     throw error;
   }
-  query(postgres, `drop database ${quoted(name)}`);
   query(postgres, `alter database ${quoted(beside)} rename to ${quoted(name)}`);
+  query(postgres, `drop database ${quoted(old)}`);
 }
 
 function restoreInto(url, file, replacing) {
   if (query(url, TABLES) === '0') {
-    load(url, file);
+    fill(url, file);
     return;
   }
   if (!replacing) {

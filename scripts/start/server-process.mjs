@@ -14,11 +14,15 @@ function endOf(name, status, log) {
 /** Runs one of our programs with its output in a log file; `ended` is its exit status. */
 function launch(args, { env, log }) {
   const output = openSync(log, 'w');
-  const child = spawn(process.execPath, ['--enable-source-maps', ...args], {
-    cwd: root,
-    env,
-    stdio: ['ignore', output, output, 'ipc'],
-  });
+  const child = spawn(
+    process.execPath,
+    ['--enable-source-maps', '--max-semi-space-size=64', ...args],
+    {
+      cwd: root,
+      env,
+      stdio: ['ignore', output, output, 'ipc'],
+    },
+  );
   closeSync(output);
   const ended = new Promise((resolve, reject) => {
     child.once('error', reject);

@@ -5,7 +5,7 @@ import { mapDefinition } from './map-definition.ts';
 
 export type UsableCrs = { readonly crs: CrsAnswer } | { readonly fault: string };
 
-/** How far a point may come back from where it was, in degrees: a tenth of a millimetre is 1e-9. */
+/** How far a point may come back from where it was, in degrees: about a metre. */
 const RETURNS_WITHIN = 1e-5;
 
 function middle([west, south, east, north]: CrsAnswer['bounds']): [number, number] {

@@ -17,6 +17,8 @@ const BY_TYPE: Readonly<Record<string, ErrorCode>> = {
 
 function asAppError(error: unknown): AppError {
   if (error instanceof AppError) return error;
+  // an address whose letters cannot be read is nobody's
+  if (error instanceof URIError) return new AppError('not-found');
   const known = libraryError.safeParse(error);
   return new AppError(BY_TYPE[known.success ? known.data.type : ''] ?? 'internal');
 }

@@ -1,5 +1,5 @@
 import { randomBytes, timingSafeEqual } from 'node:crypto';
-import type { Request, RequestHandler } from 'express';
+import type { NextFunction, Request, Response } from 'express';
 import { AppError } from '../errors.ts';
 
 const SAFE = new Set(['GET', 'HEAD', 'OPTIONS']);
@@ -16,7 +16,7 @@ function same(given: string, wanted: string): boolean {
 }
 
 /** Whatever changes something must carry the session's token, which another site cannot read. */
-export const requireCsrfToken: RequestHandler = (req, _res, next) => {
+export function requireCsrfToken(req: Request, _res: Response, next: NextFunction): void {
   if (SAFE.has(req.method)) {
     next();
     return;
@@ -27,4 +27,4 @@ export const requireCsrfToken: RequestHandler = (req, _res, next) => {
     throw new AppError('csrf-failed');
   }
   next();
-};
+}

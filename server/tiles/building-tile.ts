@@ -4,22 +4,58 @@ import { findBuildingsInBox, type DrawnBuilding } from '../models/find-buildings
 import { encodeTile } from './encode-tile.ts';
 import { tileBounds, type TilePlace } from './tile-bounds.ts';
 
-function featureOf({ id, reference, name, lonLat }: DrawnBuilding): Feature {
-  const properties = name === null ? { reference } : { reference, name };
+/** From here on names of buildings are written on the map, and further in their references. */
+const NAMES_FROM = 16;
+const REFERENCES_FROM = 17;
+
+function propertiesOf({ reference, name }: DrawnBuilding): Record<string, string> {
+  return name === null ? { reference } : { reference, name };
+}
+
+function featureOf(building: DrawnBuilding): Feature {
   return {
     type: 'Feature',
-    id,
-    properties,
-    geometry: { type: 'MultiPolygon', coordinates: lonLat },
+    id: building.id,
+    properties: propertiesOf(building),
+    geometry: { type: 'MultiPolygon', coordinates: building.lonLat },
   };
 }
 
-/** A tile of a scheme's buildings, by their numbers, corners kept so that shared walls stay shared. */
+function middleOf(lonLat: DrawnBuilding['lonLat']): [longitude: number, latitude: number] {
+  const corners = lonLat.flat(2);
+  const longitudes = corners.map(([longitude = 0]) => longitude);
+  const latitudes = corners.map(([, latitude = 0]) => latitude);
+  return [
+    (Math.min(...longitudes) + Math.max(...longitudes)) / 2,
+    (Math.min(...latitudes) + Math.max(...latitudes)) / 2,
+  ];
+}
+
+/** Where to write on buildings, each once in its middle: one cut by tiles would be named in each. */
+function labelOf(building: DrawnBuilding): Feature {
+  return {
+    type: 'Feature',
+    id: building.id,
+    properties: propertiesOf(building),
+    geometry: { type: 'Point', coordinates: middleOf(building.lonLat) },
+  };
+}
+
+function labelsOf(buildings: readonly DrawnBuilding[], zoom: number): Feature[] {
+  if (zoom < NAMES_FROM) return [];
+  return buildings.filter(({ name }) => zoom >= REFERENCES_FROM || name !== null).map(labelOf);
+}
+
+/**
+ * A tile of a scheme's buildings, by their numbers, corners kept so that shared walls stay shared; from
+ * close by with where to write their names.
+ */
 export async function buildingTile(
   database: Sequelize,
   schemeId: string,
   place: TilePlace,
 ): Promise<Buffer> {
   const buildings = await findBuildingsInBox(database, schemeId, tileBounds(place));
-  return encodeTile({ buildings: buildings.map(featureOf) }, place, 0);
+  const layers = { buildings: buildings.map(featureOf), labels: labelsOf(buildings, place.z) };
+  return encodeTile(layers, place, 0);
 }

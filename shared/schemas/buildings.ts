@@ -13,7 +13,12 @@ export const MOST_BUILDINGS_FOUND = 20;
  * Units: none. Valid: upper and lower case and accents are alike; nothing finds nothing. Source: [own].
  */
 export const buildingSearchSchema = z.object({
-  search: z.string().trim().max(200).default(''),
+  search: z
+    .string()
+    .trim()
+    .max(200)
+    .regex(/^\P{Cc}*$/u)
+    .default(''),
   limit: z.coerce.number().int().min(1).max(MOST_BUILDINGS_FOUND).default(MOST_BUILDINGS_FOUND),
 });
 

@@ -68,7 +68,12 @@ const condition = z.discriminatedUnion('kind', [
 ]);
 
 const hold = z.strictObject({
-  name: z.string().trim().min(1, 'Give it a name.').max(RULE_LIMITS.name),
+  name: z
+    .string()
+    .trim()
+    .min(1, 'Give it a name.')
+    .max(RULE_LIMITS.name)
+    .regex(/^\P{Cc}*$/u, 'Write the name on one line.'),
   condition,
   stages: z
     .array(z.union([z.literal(1), z.literal(2)]))

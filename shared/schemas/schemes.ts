@@ -8,8 +8,17 @@ import { roleSchema } from './roles.ts';
  */
 export const SCHEME_LIMITS = { name: 200, description: 5000 } as const;
 
-const name = z.string().trim().min(1, 'Give it a name.').max(SCHEME_LIMITS.name);
-const description = z.string().trim().max(SCHEME_LIMITS.description);
+const name = z
+  .string()
+  .trim()
+  .min(1, 'Give it a name.')
+  .max(SCHEME_LIMITS.name)
+  .regex(/^\P{Cc}*$/u, 'Write the name on one line.');
+const description = z
+  .string()
+  .trim()
+  .max(SCHEME_LIMITS.description)
+  .regex(/^[^\0]*$/, 'Write letters only.');
 
 /**
  * What a new scheme needs.

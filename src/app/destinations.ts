@@ -46,3 +46,12 @@ export function destinationsOf(
     { to: PATHS.account, title: 'Account', note: 'password and sessions' },
   ];
 }
+
+/** The destinations that every word of a query stands in. */
+export function meantBy(query: string, destinations: readonly Destination[]): Destination[] {
+  const words = query.toLowerCase().split(/\s+/);
+  return destinations.filter(({ title, note }) => {
+    const text = `${title} ${note}`.toLowerCase();
+    return words.every((word) => text.includes(word));
+  });
+}

@@ -1,10 +1,8 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { useNavigate } from 'react-router-dom';
 import type { SchemeAnswer } from '../../shared/schemas/schemes.ts';
 import { Bar } from '../components/layout/bar.tsx';
 import type { Tab } from '../components/layout/bar-tabs.tsx';
-import { GoTo } from '../components/layout/go-to.tsx';
 import { KeysHelp } from '../components/layout/keys-help.tsx';
 import { PersonMenu } from '../components/layout/person-menu.tsx';
 import { SchemeSwitcher } from '../components/layout/scheme-switcher.tsx';
@@ -13,7 +11,8 @@ import { schemesQuery } from '../features/schemes/api/list-schemes.ts';
 import { useSignOut } from '../features/session/api/sign-out.ts';
 import { usePerson } from '../features/session/person-context.ts';
 import { useHotkeys } from '../hooks/use-hotkeys.ts';
-import { administratorLinks, destinationsOf, schemeLinks } from './destinations.ts';
+import { administratorLinks, schemeLinks } from './destinations.ts';
+import { GoAnywhere } from './go-anywhere.tsx';
 import { KEYS } from './keys.ts';
 
 function tabsOf(scheme: SchemeAnswer | undefined, links: readonly Tab[]): readonly Tab[] {
@@ -24,7 +23,6 @@ function tabsOf(scheme: SchemeAnswer | undefined, links: readonly Tab[]): readon
 /** The bar with what is known of the person and, inside one, of the scheme. */
 export function TopBar({ scheme }: { readonly scheme?: SchemeAnswer }) {
   const person = usePerson();
-  const navigate = useNavigate();
   const { data: schemes = [] } = useQuery(schemesQuery);
   const signOut = useSignOut();
   const [showsKeys, setShowsKeys] = useState(false);
@@ -40,10 +38,7 @@ export function TopBar({ scheme }: { readonly scheme?: SchemeAnswer }) {
       tabs={tabsOf(scheme, links)}
       scheme={scheme && <SchemeSwitcher current={scheme} others={others} pathOf={schemePath} />}
     >
-      <GoTo
-        destinations={destinationsOf(person, schemes, scheme?.id)}
-        onGo={(to) => void navigate(to)}
-      />
+      <GoAnywhere scheme={scheme} schemes={schemes} />
       <PersonMenu
         name={person.name}
         links={[...(scheme === undefined ? [] : links), { to: PATHS.account, label: 'Account' }]}

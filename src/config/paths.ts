@@ -27,6 +27,11 @@ export function planPath(schemeId: string): string {
   return `${schemePath(schemeId)}/plan`;
 }
 
+/** The plan with a building selected. */
+export function buildingPath(schemeId: string, buildingId: number): string {
+  return `${planPath(schemeId)}?building=${buildingId}`;
+}
+
 export function settingsPath(
   schemeId: string,
   part: keyof typeof SETTINGS = 'description',

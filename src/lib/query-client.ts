@@ -23,7 +23,8 @@ export const queryClient = new QueryClient({
   queryCache: new QueryCache({ onError: askWhoIsSignedIn }),
   mutationCache: new MutationCache({ onError: askWhoIsSignedIn }),
   defaultOptions: {
-    queries: { staleTime: ONE_MINUTE, retry: retryOnce },
-    mutations: { retry: false },
+    // without a network, say so at once instead of waiting for one
+    queries: { staleTime: ONE_MINUTE, retry: retryOnce, networkMode: 'always' },
+    mutations: { retry: false, networkMode: 'always' },
   },
 });

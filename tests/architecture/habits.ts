@@ -19,8 +19,14 @@ export function exportFaults(file: SourceFile): string[] {
   ];
 }
 
+/** Only an interface can add to a library's own type, which is done in a file of declarations. */
+function mayBeInterface(node: ts.Node): boolean {
+  return node.getSourceFile().fileName.endsWith('.d.ts');
+}
+
 function typeFault(node: ts.Node): string | undefined {
-  if (ts.isInterfaceDeclaration(node)) return 'is an interface where a type would do';
+  if (ts.isInterfaceDeclaration(node) && !mayBeInterface(node))
+    return 'is an interface where a type would do';
   if (node.kind === ts.SyntaxKind.AnyKeyword) return 'says any';
   if (ts.isNonNullExpression(node)) return 'asserts with !';
   const declares = ts.isVariableDeclaration(node) || ts.isPropertyDeclaration(node);

@@ -26,7 +26,7 @@ function faultOf({ from, target, package: name }: Import): string | undefined {
     return allowed ? undefined : `shared may not import ${name}`;
   }
   if (target === undefined) return undefined;
-  if (!/\.\w+$/.test(target)) return `${target} is not named with its extension`;
+  if (!/\.\w+(\?[\w&]+)?$/.test(target)) return `${target} is not named with its extension`;
   const other = roomOf(target);
   if (other !== undefined && MAY_IMPORT[room].includes(other)) return undefined;
   return room === 'tests' ? undefined : `${room} may not import ${target}`;

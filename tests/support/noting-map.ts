@@ -59,9 +59,9 @@ export function notingMap(): NotingMap {
     setLayerZoomRange: (layer, least, most) => {
       note('zooms', layer, least, most);
     },
-    setFeatureState: ({ source, id }, state) => {
+    setFeatureState: ({ source, sourceLayer, id }, state) => {
       need(sources.has(source), `There is no source ${source}.`);
-      note('mark', id, state);
+      note('mark', sourceLayer, id, state);
     },
     setData: (name, data) => {
       note('draw', name, data.features.length);

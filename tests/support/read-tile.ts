@@ -7,29 +7,46 @@ export type TileFeature = {
   readonly properties: Readonly<Record<string, string>>;
 };
 
-/** The fields of a message in protocol buffers, of the two kinds that vector tiles use here. */
-function fieldsOf(bytes: Buffer): Field[] {
-  let at = 0;
-  function varint(): number {
-    let [value, scale] = [0, 1];
-    for (;;) {
-      const byte = bytes.readUInt8(at);
-      at += 1;
-      value += (byte & 0x7f) * scale;
-      if (byte < 0x80) return value;
-      scale *= 128;
-    }
+/** The number that stands packed at a place, and the place after it. */
+function varintAt(bytes: Buffer, start: number): [value: number, next: number] {
+  let [value, scale, at] = [0, 1, start];
+  for (;;) {
+    const byte = bytes.readUInt8(at);
+    at += 1;
+    value += (byte & 0x7f) * scale;
+    if (byte < 0x80) return [value, at];
+    scale *= 128;
   }
-  const fields: Field[] = [];
+}
+
+function varintsOf(bytes: Buffer): number[] {
+  const values: number[] = [];
+  let at = 0;
   while (at < bytes.length) {
-    const key = varint();
+    const [value, next] = varintAt(bytes, at);
+    values.push(value);
+    at = next;
+  }
+  return values;
+}
+
+/** The fields of a message in protocol buffers, of the three kinds that vector tiles use here. */
+function fieldsOf(bytes: Buffer): Field[] {
+  const fields: Field[] = [];
+  let at = 0;
+  while (at < bytes.length) {
+    const [key, start] = varintAt(bytes, at);
     const number = Math.floor(key / 8);
-    if (key % 8 === 0) fields.push({ number, value: varint() });
-    else if (key % 8 === 2) {
-      const length = varint();
-      fields.push({ number, value: bytes.subarray(at, at + length) });
-      at += length;
-    } else throw new Error(`A tile has no fields of kind ${key % 8} here.`);
+    if (key % 8 === 1) {
+      fields.push({ number, value: bytes.readDoubleLE(start) });
+      at = start + 8;
+      continue;
+    }
+    const [value, next] = varintAt(bytes, start);
+    if (key % 8 === 0) fields.push({ number, value });
+    else if (key % 8 === 2) fields.push({ number, value: bytes.subarray(next, next + value) });
+    else throw new Error(`A tile has no fields of kind ${key % 8} here.`);
+    at = key % 8 === 2 ? next + value : next;
   }
   return fields;
 }
@@ -51,7 +68,7 @@ function layerOf(bytes: Buffer): [string, TileFeature[]] {
   const values = buffers(layer, 4).map((value) => String(buffers(fieldsOf(value), 1)[0]));
   const features = buffers(layer, 2).map((feature) => {
     const fields = fieldsOf(feature);
-    const tags = [...(buffers(fields, 2)[0] ?? [])];
+    const tags = varintsOf(buffers(fields, 2)[0] ?? Buffer.alloc(0));
     const pairs = tags.flatMap((tag, k) =>
       k % 2 === 0 ? [[keys[tag] ?? '', values[tags[k + 1] ?? -1] ?? ''] as const] : [],
     );
@@ -61,7 +78,7 @@ function layerOf(bytes: Buffer): [string, TileFeature[]] {
   return [String(buffers(layer, 1)[0]), features];
 }
 
-/** The layers of a small vector tile (fewer than 128 different values), written apart from what makes them. */
+/** The layers of a vector tile, read apart from what makes them; only texts are read of properties. */
 export function readTile(bytes: unknown): Readonly<Record<string, TileFeature[]>> {
   if (!Buffer.isBuffer(bytes)) throw new Error('A tile is bytes.');
   return Object.fromEntries(buffers(fieldsOf(bytes), 3).map(layerOf));

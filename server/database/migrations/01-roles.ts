@@ -5,6 +5,9 @@ export const migration: Migration = {
   up: async ({ sql, server }) => {
     await sql(`
       revoke create on schema public from public;
+      do $$ begin
+        execute format('revoke temporary on database %I from public', current_database());
+      end $$;
       grant usage on schema public to ${server};
       alter default privileges in schema public
         grant select, insert, update, delete on tables to ${server};
@@ -24,6 +27,9 @@ export const migration: Migration = {
       alter default privileges in schema public
         revoke select, insert, update, delete on tables from ${server};
       revoke usage on schema public from ${server};
+      do $$ begin
+        execute format('grant temporary on database %I to public', current_database());
+      end $$;
     `);
   },
 };

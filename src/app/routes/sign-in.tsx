@@ -11,9 +11,9 @@ function cameFrom(state: unknown): string {
 }
 
 export function SignInPage() {
-  const { state } = useLocation();
+  const destination = cameFrom(useLocation().state);
   const { data: session } = useQuery(sessionQuery);
-  if (session?.person) return <Navigate replace to={cameFrom(state)} />;
+  if (session?.person) return <Navigate replace to={destination} />;
   return (
     <Doorway title="Sign in">
       <SignInForm />

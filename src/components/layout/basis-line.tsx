@@ -24,11 +24,14 @@ export function BasisLine({ parts, end, preview = false }: BasisLineProps) {
       )}
     >
       {parts.map((part, index) => (
-        <span key={index} className="[&+&]:ml-3 [&+&]:border-l [&+&]:border-rule [&+&]:pl-3">
+        <span
+          key={index}
+          className="border-rule max-sm:mr-3 sm:[&+&]:ml-3 sm:[&+&]:border-l sm:[&+&]:pl-3"
+        >
           {part}
         </span>
       ))}
-      {end !== undefined && <span className="ml-auto pl-6">{end}</span>}
+      {end !== undefined && <span className="sm:ml-auto sm:pl-6">{end}</span>}
     </section>
   );
 }

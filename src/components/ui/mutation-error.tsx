@@ -14,6 +14,9 @@ export function MutationError({ failed, error, shown = [] }: MutationErrorProps)
   if (error === null || error.name === 'AbortError') return null;
   if (!(error instanceof ApiError)) return <ErrorNote failed={failed} />;
   const left = error.fields.filter(({ path }) => !shown.includes(path));
+  if (error.fields.length > 0 && left.length === 0) {
+    return <ErrorNote failed={failed} stands="Mend what is marked." />;
+  }
   const words = [error.message, ...left.map(({ message }) => message)];
   return <ErrorNote failed={failed} stands={words.join(' ')} />;
 }

@@ -52,6 +52,41 @@ function FoundOption({ id, title, note, listId, isReached, onReach, onChoose }: 
   );
 }
 
+type FoundListProps = Pick<SearchListProps, 'found' | 'onChoose'> & {
+  readonly listId: string;
+  readonly cursor: number;
+  readonly moveTo: (index: number) => void;
+};
+
+function FoundList({ listId, found, cursor, moveTo, onChoose }: FoundListProps) {
+  return (
+    <ul
+      id={listId}
+      role="listbox"
+      aria-label="Found"
+      className={classNames(
+        'mt-1 max-h-[300px] overflow-auto border-rule bg-sheet',
+        found.length > 0 && 'border',
+      )}
+    >
+      {found.map((one, index) => (
+        <FoundOption
+          key={one.id}
+          {...one}
+          listId={listId}
+          isReached={index === cursor}
+          onReach={() => {
+            moveTo(index);
+          }}
+          onChoose={() => {
+            onChoose(one.id);
+          }}
+        />
+      ))}
+    </ul>
+  );
+}
+
 /** A field that searches and the list of what it finds; arrows move, Enter takes. */
 export function SearchList(props: SearchListProps) {
   const { query, onQuery, found, onChoose, nothing, firstInFocus, placeholder, ...words } = props;
@@ -87,30 +122,7 @@ export function SearchList(props: SearchListProps) {
               }}
               className={classNames(INPUT_STYLE, 'h-[34px] max-sm:h-11')}
             />
-            <ul
-              id={listId}
-              role="listbox"
-              aria-label="Found"
-              className={classNames(
-                'mt-1 max-h-[300px] overflow-auto border-rule bg-sheet',
-                found.length > 0 && 'border',
-              )}
-            >
-              {found.map((one, index) => (
-                <FoundOption
-                  key={one.id}
-                  {...one}
-                  listId={listId}
-                  isReached={index === cursor}
-                  onReach={() => {
-                    moveTo(index);
-                  }}
-                  onChoose={() => {
-                    onChoose(one.id);
-                  }}
-                />
-              ))}
-            </ul>
+            <FoundList {...{ listId, found, cursor, moveTo, onChoose }} />
             <p role="status" className="text-small text-ink-2">
               {found.length === 0 ? nothing : ''}
             </p>

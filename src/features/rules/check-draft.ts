@@ -6,25 +6,16 @@ import { draftSchema } from '../../lib/draft-schema.ts';
 import { rulesOf, type RulesDraft } from './rules-draft.ts';
 
 /** The schema speaks in its own units, so what is out of range is said without them. */
-function faultWords({ code, message }: z.core.$ZodIssue): string {
-  switch (code) {
-    case 'invalid_type':
-      return 'Give a figure.';
-    case 'too_small':
-      return message.startsWith('Too') ? 'This is too small.' : message;
-    case 'too_big':
-      return message.startsWith('Too') ? 'This is too large.' : message;
-    case 'invalid_format':
-      return 'Give a day.';
-    case 'custom':
-    case 'invalid_element':
-    case 'invalid_key':
-    case 'invalid_union':
-    case 'invalid_value':
-    case 'not_multiple_of':
-    case 'unrecognized_keys':
-      return message;
+function faultWords(issue: z.core.$ZodIssue): string {
+  const { code, message } = issue;
+  const isOwn = !message.startsWith('Too') && !message.startsWith('Invalid');
+  if (isOwn) return message;
+  if (code === 'invalid_type') return 'Give a figure.';
+  if (code === 'too_small') {
+    return issue.origin === 'array' ? 'Give at least one.' : 'This is too small.';
   }
+  if (code === 'too_big') return 'This is too large.';
+  return code === 'invalid_format' ? 'Give a day.' : message;
 }
 
 /** Checks rules while they are being written, by the schema that the server checks them by. */

@@ -1,5 +1,6 @@
 import { CATEGORIES } from '../../../shared/damage/categories.ts';
 import type { RuleSet } from '../../../shared/schemas/rules.ts';
+import { formatCount } from '../../lib/format-number.ts';
 import { fromMetres, fromSlope } from './display-units.ts';
 
 export type RuleName = Exclude<keyof RuleSet, 'holds'>;
@@ -60,6 +61,16 @@ export const CATEGORY_WORDS: Words = Object.fromEntries(
   ]),
 );
 
+type Depth = RuleSet['depth']['value'];
+
+function layersInWords(layers: Extract<Depth, { kind: 'layered' }>['layers']): string {
+  return layers
+    .map(({ baseLevel, troughWidth: { low, central, high } }) => {
+      return `${low}, ${central}, ${high} down to ${formatCount(baseLevel)}\u00a0m`;
+    })
+    .join('; ');
+}
+
 /** What a rule says in a scheme. */
 export function ruleValue(rules: RuleSet, rule: RuleName): string {
   switch (rule) {
@@ -69,8 +80,8 @@ export function ruleValue(rules: RuleSet, rule: RuleName): string {
     }
     case 'depth': {
       const { value } = rules.depth;
-      const layers = value.kind === 'layered' ? `, ${value.layers.length} of them` : '';
-      return `${DEPTH_WORDS[value.kind] ?? value.kind}${layers}`;
+      const words = DEPTH_WORDS[value.kind] ?? value.kind;
+      return value.kind === 'layered' ? `${words}: ${layersInWords(value.layers)}` : words;
     }
     case 'focus':
       return FOCUS_WORDS[rules.focus.value] ?? '';

@@ -30,8 +30,13 @@ export type RulesDraft = {
 
 type Depth = RuleSet['depth']['value'];
 
+/** A layer that nothing is known of yet. */
+export function blankLayer(): LayerDraft {
+  return { baseLevel: '', troughWidth: { low: '', central: '', high: '' } };
+}
+
 function layersOf(depth: Depth): LayerDraft[] {
-  if (depth.kind !== 'layered') return [];
+  if (depth.kind !== 'layered') return [blankLayer()];
   return depth.layers.map(({ baseLevel, troughWidth: { low, central, high } }) => ({
     baseLevel: String(baseLevel),
     troughWidth: { low: String(low), central: String(central), high: String(high) },

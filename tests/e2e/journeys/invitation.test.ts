@@ -31,7 +31,7 @@ for (const [role, screens] of [
 
       await signOut(invited);
       await signInWith(invited, email, PASSWORD);
-      await invited.page.getByRole('heading', { name: 'Waiting for you' }).waitFor();
+      await invited.page.waitForURL(`**${scheme}/**`);
       await invited.open(link);
       await invited.page.getByRole('heading', { name: 'This link is spent' }).waitFor();
       invited.expectFault(/status of 410/);

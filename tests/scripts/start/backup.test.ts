@@ -1,5 +1,6 @@
 import { existsSync, statSync, truncateSync } from 'node:fs';
 import path from 'node:path';
+import pg from 'pg';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { openMigrations } from '../../../server/database/migrate.ts';
 import { createDataFolder } from '../../support/data-folder.ts';
@@ -83,11 +84,24 @@ describe('npm run restore', () => {
       return cluster.sql('empty', query).trim();
     }
     expect([may('insert', 'audit_entries'), may('update', 'audit_entries')]).toEqual(['t', 'f']);
+    const temporary = `select has_database_privilege('groundsill_server', 'empty', 'temporary')`;
+    expect(cluster.sql('empty', temporary).trim()).toBe('f');
     const owner = cluster.sql(
       'empty',
       `select tableowner from pg_tables where tablename = 'people'`,
     );
     expect(owner.trim()).toBe('groundsill_owner');
+  });
+
+  it('leaves everything standing while somebody is at work in it', async () => {
+    const somebody = new pg.Client(cluster.serverUrl('groundsill'));
+    await somebody.connect();
+    const failed = await run('restore', [file, '--replace']);
+    await somebody.end();
+    expect(failed).toMatchObject({ status: 1 });
+    expect(failed.output).toContain('being accessed by other users');
+    expect(cluster.sql('postgres', 'select datname from pg_database')).not.toContain('_re');
+    expect(names()).toEqual(['before']);
   });
 
   it('leaves everything standing where the file is cut short', async () => {
@@ -97,6 +111,6 @@ describe('npm run restore', () => {
     expect(failed).toMatchObject({ status: 1 });
     expect(failed.output).toContain('The database stands as it was.');
     expect(names()).toEqual(['before', 'since']);
-    expect(cluster.sql('postgres', 'select datname from pg_database')).not.toContain('_restored');
+    expect(cluster.sql('postgres', 'select datname from pg_database')).not.toContain('_re');
   });
 });

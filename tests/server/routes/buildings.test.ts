@@ -79,6 +79,7 @@ describe('searching buildings', () => {
     const address = `/api/schemes/${scheme.id}/buildings`;
     expect((await agent.get(`${address}?search=r&limit=1000`)).status).toBe(422);
     expect((await agent.get(`${address}?search=${'r'.repeat(201)}`)).status).toBe(422);
+    expect((await agent.get(`${address}?search=%00`)).status).toBe(422);
   });
 
   test('says where each is', async () => {

@@ -14,7 +14,9 @@ beforeAll(async () => {
   administrator = await anAdministrator();
 });
 
-const asAdministrator = () => signIn(app(), administrator);
+function asAdministrator() {
+  return signIn(app(), administrator);
+}
 
 describe('changing a person', () => {
   test('keeps name and rights and tells the trail from what to what', async () => {

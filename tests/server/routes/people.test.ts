@@ -19,7 +19,9 @@ beforeAll(async () => {
   administrator = await anAdministrator();
 });
 
-const asAdministrator = () => signIn(app(), administrator);
+function asAdministrator() {
+  return signIn(app(), administrator);
+}
 
 describe('reading people', () => {
   test('shows everybody by name with roles and open invitation, and no hash', async () => {

@@ -132,7 +132,15 @@ describe('creating a scheme', () => {
     expect(answer.status).toBe(422);
     const fields = [{ path: 'name', message: 'Give it a name.' }];
     expect(answer.body).toMatchObject({ error: { code: 'invalid-input', fields } });
-    expect(newSchemeSchema.safeParse({ name: 'A', crs: 32631, rules: {} }).success).toBe(false);
+    for (const form of [
+      { name: 'A\0' },
+      { name: 'A', description: '\0' },
+      { name: 'A', rules: {} },
+    ]) {
+      expect(newSchemeSchema.safeParse({ crs: 32631, ...form }).success).toBe(false);
+    }
+    const lines = { name: 'A', description: 'One line.\nAnother.', crs: 32631 };
+    expect(newSchemeSchema.safeParse(lines).success).toBe(true);
   });
 
   test('is for the administrator', async () => {

@@ -82,6 +82,24 @@ describe('tiles of buildings', () => {
     }
   });
 
+  test('say from close by where to write, on each building once', async () => {
+    const own = await aScheme();
+    const agent = await asWitness(own);
+    const at = { lonLat: [[ringOf(CORNERS)]], ...CORNERS };
+    await aBuilding(own, { ...at, reference: 'PD-2' });
+    await aBuilding(own, { ...at, reference: 'PD-3', name: 'Net Loft' });
+    for (const [z, references] of [
+      [15, []],
+      [16, ['PD-3']],
+      [17, ['PD-2', 'PD-3']],
+    ] as const) {
+      const answer = await agent.get(buildingsAt(1, placeAt(z), own)).responseType('blob');
+      const { labels = [] } = readTile(answer.body);
+      expect(labels.map(({ type }) => type)).toEqual(references.map(() => 1));
+      expect(labels.map(({ properties }) => properties.reference)).toEqual(references);
+    }
+  });
+
   test('are empty where nothing stands, and where only others’ buildings do', async () => {
     const other = await aScheme();
     const agent = await asWitness(other);

@@ -23,7 +23,7 @@ function Heading<T>({ column, model }: HeadingProps<T>) {
       <span>
         {column.heading}
         {sorted !== undefined && <SortMark direction={sorted} />}
-      </span>
+      </span>{' '}
       {column.unit !== undefined && (
         <small className="block text-micro font-normal text-ink-3">{column.unit}</small>
       )}

@@ -57,6 +57,15 @@ function useSortedRows<T>({ columns, rows, idOf, sortedBy }: TableProps<T>) {
   return { model, sorted: model.getRowModel().rows };
 }
 
+function opener<T>(onOpen: ((row: T) => void) | undefined, row: T): (() => void) | undefined {
+  return (
+    onOpen &&
+    (() => {
+      onOpen(row);
+    })
+  );
+}
+
 /** Hairline rows, headings with their units at the foot of their cells, figures to the right. */
 export function Table<T>(props: TableProps<T>) {
   const { label, columns, onOpen, detailOf, wide = false, className } = props;
@@ -83,12 +92,7 @@ export function Table<T>(props: TableProps<T>) {
         onActivate={() => {
           activate(index);
         }}
-        onOpen={
-          onOpen &&
-          (() => {
-            onOpen(row.original);
-          })
-        }
+        onOpen={opener(onOpen, row.original)}
         detail={detailOf?.(row.original)}
         bodyRef={measure}
       />

@@ -18,7 +18,11 @@ function focusRow(scroller: HTMLDivElement | null, index: number, tries = 5): vo
   const row = scroller?.querySelector<HTMLElement>(`[data-row="${index}"]`);
   if (row !== null && row !== undefined) row.focus();
   // a row far away comes into the page only once the table has scrolled
-  else if (tries > 0) requestAnimationFrame(() => focusRow(scroller, index, tries - 1));
+  else if (tries > 0) {
+    requestAnimationFrame(() => {
+      focusRow(scroller, index, tries - 1);
+    });
+  }
 }
 
 /** The row that the keys have reached: J and ↓ go on, K and ↑ go back. */

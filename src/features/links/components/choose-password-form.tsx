@@ -8,9 +8,9 @@ import { PASSWORD_LIMITS } from '../../../../shared/schemas/passwords.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { PasswordField } from '../../../components/ui/password-field.tsx';
-import { isRefusal } from '../../../lib/api-error.ts';
 import { showFieldFaults } from '../../../lib/form-errors.ts';
 import { useFollowLink } from '../api/follow-link.ts';
+import { UsernameForBrowser } from '../../session/components/username-for-browser.tsx';
 
 type ChoosePasswordFormProps = {
   readonly token: string;
@@ -33,15 +33,14 @@ export function ChoosePasswordForm({ token, link, onDone }: ChoosePasswordFormPr
       },
     });
   });
-  const fault = isRefusal(follow.error, 'invalid-input') ? null : follow.error;
   return (
     <form noValidate className="grid gap-3.5" onSubmit={(event) => void submit(event)}>
       <p className="text-roomy text-ink-2">
         {link.name}, choose a password for{' '}
         <b className="font-semibold break-words text-ink">{link.email}</b>.
       </p>
-      <MutationError failed="The password was not set." error={fault} />
-      <input type="hidden" autoComplete="username" value={link.email} readOnly />
+      <MutationError failed="The password was not set." error={follow.error} shown={['password']} />
+      <UsernameForBrowser email={link.email} />
       <PasswordField
         label="Password"
         autoComplete="new-password"

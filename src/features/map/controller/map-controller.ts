@@ -1,7 +1,7 @@
 import type { LayerSpecification } from 'maplibre-gl';
 import { NO_MARKS, type BuildingMarks, type MapPlan } from '../map-plan.ts';
 import { layersOfPlan } from '../style/layers-of-plan.ts';
-import { BUILDINGS_TILE_LAYER, SOURCES } from '../style/source-names.ts';
+import { BUILDINGS_TILE_LAYER, LABELS_TILE_LAYER, SOURCES } from '../style/source-names.ts';
 import { sourcesOfPlan, type SourcesByName } from '../style/sources-of-plan.ts';
 import { layerChanges, type LayerChange } from './layer-changes.ts';
 import type { MapPort } from './map-port.ts';
@@ -50,8 +50,9 @@ export function createMapController(map: MapPort): MapController {
 
   function setMark(name: keyof BuildingMarks, id: number | null, value: boolean): void {
     if (id === null || sources[SOURCES.buildings] === undefined) return;
-    const building = { source: SOURCES.buildings, sourceLayer: BUILDINGS_TILE_LAYER, id };
-    map.setFeatureState(building, { [name]: value });
+    for (const sourceLayer of [BUILDINGS_TILE_LAYER, LABELS_TILE_LAYER]) {
+      map.setFeatureState({ source: SOURCES.buildings, sourceLayer, id }, { [name]: value });
+    }
   }
 
   function show(plan: MapPlan): void {

@@ -1,8 +1,18 @@
-import type { ExpressionSpecification, LayerSpecification } from 'maplibre-gl';
+import type {
+  ExpressionSpecification,
+  LayerSpecification,
+  SymbolLayerSpecification,
+} from 'maplibre-gl';
 import { LABEL_FONTS } from './label-fonts.ts';
 import { MAP_COLOURS } from './map-colours.ts';
-import { BUILDINGS_LAYER, BUILDINGS_TILE_LAYER, SOURCES } from './source-names.ts';
+import {
+  BUILDINGS_LAYER,
+  BUILDINGS_TILE_LAYER,
+  LABELS_TILE_LAYER,
+  SOURCES,
+} from './source-names.ts';
 
+const LABELS = { source: SOURCES.buildings, 'source-layer': LABELS_TILE_LAYER } as const;
 const BUILDINGS = { source: SOURCES.buildings, 'source-layer': BUILDINGS_TILE_LAYER } as const;
 
 function whileMarked(mark: 'selected' | 'hovered'): ExpressionSpecification {
@@ -47,38 +57,45 @@ export function buildingLayers(): LayerSpecification[] {
   ];
 }
 
-function label(
-  id: string,
-  minzoom: number,
-  text: ExpressionSpecification,
-  isNamed: boolean,
-): LayerSpecification {
-  const hasName: ExpressionSpecification = ['has', 'name'];
-  return {
-    id,
-    type: 'symbol',
-    ...BUILDINGS,
-    minzoom,
-    filter: isNamed ? hasName : ['!', hasName],
-    layout: {
-      'text-field': text,
-      'text-font': isNamed ? LABEL_FONTS.semibold : LABEL_FONTS.regular,
-      'text-size': isNamed ? 11 : 10,
-      'text-max-width': 9,
-      'text-padding': 4,
-    },
-    paint: {
-      'text-color': isNamed ? MAP_COLOURS.ink : MAP_COLOURS.ink2,
-      'text-halo-color': MAP_COLOURS.paperRaised,
-      'text-halo-width': 1.6,
-    },
-  };
-}
+const LABEL_LAYOUT = { 'text-max-width': 9, 'text-padding': 4 } as const;
+
+const LABEL_PAINT = {
+  'text-halo-color': MAP_COLOURS.paperRaised,
+  'text-halo-width': 1.6,
+  // what is selected is named at the side, and its outline stays clear
+  'text-opacity': ['case', SELECTED, 0, 1],
+} satisfies SymbolLayerSpecification['paint'];
 
 /** Names of buildings that have one, and from close by the references of the others. */
 export function buildingLabelLayers(): LayerSpecification[] {
   return [
-    label('building-references', 18.5, ['get', 'reference'], false),
-    label('building-names', 16.3, ['get', 'name'], true),
+    {
+      id: 'building-references',
+      type: 'symbol',
+      ...LABELS,
+      minzoom: 18.5,
+      filter: ['!', ['has', 'name']],
+      layout: {
+        ...LABEL_LAYOUT,
+        'text-field': ['get', 'reference'],
+        'text-font': LABEL_FONTS.regular,
+        'text-size': 10,
+      },
+      paint: { ...LABEL_PAINT, 'text-color': MAP_COLOURS.ink2 },
+    },
+    {
+      id: 'building-names',
+      type: 'symbol',
+      ...LABELS,
+      minzoom: 16.3,
+      filter: ['has', 'name'],
+      layout: {
+        ...LABEL_LAYOUT,
+        'text-field': ['get', 'name'],
+        'text-font': LABEL_FONTS.semibold,
+        'text-size': 11,
+      },
+      paint: { ...LABEL_PAINT, 'text-color': MAP_COLOURS.ink },
+    },
   ];
 }

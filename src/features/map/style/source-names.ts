@@ -9,5 +9,8 @@ export const SOURCES = {
 /** The layer of a tile in which the server puts buildings. */
 export const BUILDINGS_TILE_LAYER = 'buildings';
 
+/** The layer of a tile in which the server says where to write on buildings. */
+export const LABELS_TILE_LAYER = 'labels';
+
 /** The map layer that a click on a building meets. */
 export const BUILDINGS_LAYER = 'buildings';

@@ -1,23 +1,16 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useForm } from 'react-hook-form';
 import { newPersonSchema } from '../../../../shared/schemas/people.ts';
-import type { Role } from '../../../../shared/schemas/roles.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { Checkbox } from '../../../components/ui/checkbox.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { draftSchema } from '../../../lib/draft-schema.ts';
 import { showFieldFaults } from '../../../lib/form-errors.ts';
+import type { Invitation } from '../invitation.ts';
 import { useInvitePerson } from '../api/invite-person.ts';
 import { LetterNote } from './letter-note.tsx';
 import { MembershipFields } from './membership-fields.tsx';
-
-export type Invitation = {
-  name: string;
-  email: string;
-  isAdministrator: boolean;
-  memberships: { schemeId: string; role: Role }[];
-};
 
 const NO_MEMBERSHIP = { schemeId: '', role: 'assessor' } as const;
 const EMPTY: Invitation = {

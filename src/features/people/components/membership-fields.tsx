@@ -7,7 +7,7 @@ import { Button } from '../../../components/ui/button.tsx';
 import { Select } from '../../../components/ui/select.tsx';
 import { roleName } from '../../members/roles-in-words.ts';
 import { schemesQuery } from '../../schemes/api/list-schemes.ts';
-import type { Invitation } from './invite-form.tsx';
+import type { Invitation } from '../invitation.ts';
 
 const ROLE_OPTIONS = ROLES.map((role) => ({ value: role, label: roleName(role) }));
 

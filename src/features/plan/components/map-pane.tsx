@@ -24,7 +24,7 @@ export function MapPane({ ready, error, retry, ...map }: MapPaneProps) {
   }
   if (error === null) return <MapPause />;
   return (
-    <div className="p-4">
+    <div className="max-w-[640px] p-4">
       <QueryError what="The map" error={error} onRetry={retry} />
     </div>
   );

@@ -9,11 +9,7 @@ export function PlanBasis({ scheme, crs }: PlanBasisProps) {
   const grid = crs === undefined ? `EPSG:${scheme.crs}` : `${crs.name}, EPSG:${crs.code}`;
   return (
     <BasisLine
-      parts={[
-        <b key="register">Register as it stands</b>,
-        `Grid ${grid}`,
-        'Eastings, northings and levels in metres',
-      ]}
+      parts={[<b key="register">Register as it stands</b>, `Grid ${grid}`]}
       end="Nothing worked out yet"
     />
   );

@@ -3,7 +3,7 @@ import { Field } from '../../../components/ui/field.tsx';
 import { Select } from '../../../components/ui/select.tsx';
 import { CUT_OFF_WORDS } from '../rule-words.ts';
 import { optionsOf } from './options-of.ts';
-import type { RulesFormModel } from './rule-row.tsx';
+import type { RulesFormModel } from '../rules-form-model.ts';
 
 /** What of a wall is ignored. */
 export function CutOffFields({ form }: { readonly form: RulesFormModel }) {

@@ -3,11 +3,10 @@ import { Button } from '../../../components/ui/button.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { Select } from '../../../components/ui/select.tsx';
 import { DEPTH_WORDS } from '../rule-words.ts';
-import type { LayerDraft } from '../rules-draft.ts';
+import { blankLayer } from '../rules-draft.ts';
 import { optionsOf } from './options-of.ts';
-import type { RulesFormModel } from './rule-row.tsx';
+import type { RulesFormModel } from '../rules-form-model.ts';
 
-const BLANK: LayerDraft = { baseLevel: '', troughWidth: { low: '', central: '', high: '' } };
 const RANGE = ['low', 'central', 'high'] as const;
 
 type LayerProps = { readonly form: RulesFormModel; readonly index: number };
@@ -33,6 +32,9 @@ function LayerFields({ form, index }: LayerProps) {
           {...form.register(`${layer}.troughWidth.${part}`)}
         />
       ))}
+      <p className="col-span-full text-small font-medium text-clay-deep empty:hidden">
+        {faults?.troughWidth?.message ?? faults?.troughWidth?.root?.message}
+      </p>
     </>
   );
 }
@@ -53,12 +55,14 @@ function Layers({ form }: { readonly form: RulesFormModel }) {
           <LayerFields form={form} index={index} />
         </div>
       ))}
-      <p className="text-small text-clay-deep">{faults?.message ?? faults?.root?.message}</p>
+      <p className="text-small font-medium text-clay-deep empty:hidden">
+        {faults?.message ?? faults?.root?.message}
+      </p>
       <div className="-ml-1.5 flex gap-2">
         <Button
           kind="quiet"
           onClick={() => {
-            append(BLANK);
+            append(blankLayer());
           }}
         >
           Another layer below

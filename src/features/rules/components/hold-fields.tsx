@@ -2,7 +2,7 @@ import { useFieldArray } from 'react-hook-form';
 import { Button } from '../../../components/ui/button.tsx';
 import type { HoldDraft } from '../rules-draft.ts';
 import { HoldRow } from './hold-row.tsx';
-import type { RulesFormModel } from './rule-row.tsx';
+import type { RulesFormModel } from '../rules-form-model.ts';
 
 function blankHold(): HoldDraft {
   return {
@@ -30,7 +30,7 @@ export function HoldFields({ form }: { readonly form: RulesFormModel }) {
           }}
         />
       ))}
-      <p className="text-small font-medium text-clay-deep">
+      <p className="text-small font-medium text-clay-deep empty:hidden">
         {faults?.message ?? faults?.root?.message}
       </p>
       <Button

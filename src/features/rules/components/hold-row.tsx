@@ -6,7 +6,7 @@ import { Select } from '../../../components/ui/select.tsx';
 import { CONDITION_WORDS } from '../rule-words.ts';
 import { SOURCE_OPTIONS } from '../source-words.ts';
 import { optionsOf } from './options-of.ts';
-import type { RulesFormModel } from './rule-row.tsx';
+import type { RulesFormModel } from '../rules-form-model.ts';
 
 type HoldRowProps = {
   readonly form: RulesFormModel;

@@ -1,14 +1,9 @@
-import type { UseFormReturn } from 'react-hook-form';
-import type { RuleSet } from '../../../../shared/schemas/rules.ts';
 import { Field } from '../../../components/ui/field.tsx';
 import { Select } from '../../../components/ui/select.tsx';
 import type { RuleName } from '../rule-words.ts';
-import type { RulesDraft } from '../rules-draft.ts';
+import type { RulesFormModel } from '../rules-form-model.ts';
 import { SOURCE_OPTIONS } from '../source-words.ts';
 import { RuleValue } from './rule-value.tsx';
-
-/** The form of the rules, as its parts are handed it. */
-export type RulesFormModel = UseFormReturn<RulesDraft, unknown, RuleSet>;
 
 type RuleRowProps = {
   readonly form: RulesFormModel;

@@ -9,7 +9,7 @@ import {
 import { CutOffFields } from './cut-off-fields.tsx';
 import { DepthFields } from './depth-fields.tsx';
 import { optionsOf } from './options-of.ts';
-import type { RulesFormModel } from './rule-row.tsx';
+import type { RulesFormModel } from '../rules-form-model.ts';
 import { ScreeningFields } from './screening-fields.tsx';
 
 const CHOICES = {

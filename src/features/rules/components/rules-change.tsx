@@ -1,7 +1,7 @@
 import type { RulesVersion } from '../../../../shared/schemas/rules.ts';
 import { Panel } from '../../../components/ui/panel.tsx';
 import { ValueChanges } from '../../../components/ui/value-changes.tsx';
-import { changesBetween } from '../../../lib/changes-between.ts';
+import { ruleChanges } from '../rule-lines.ts';
 
 type RulesChangeProps = { readonly before: RulesVersion; readonly after: RulesVersion };
 
@@ -9,8 +9,8 @@ type RulesChangeProps = { readonly before: RulesVersion; readonly after: RulesVe
 export function RulesChange({ before, after }: RulesChangeProps) {
   const title = `What version ${after.version} changed`;
   return (
-    <Panel title={title} note="lengths in m, slopes as fractions, as they are kept">
-      <ValueChanges label={title} changes={changesBetween(before.rules, after.rules)} />
+    <Panel title={title}>
+      <ValueChanges label={title} changes={ruleChanges(before.rules, after.rules)} />
     </Panel>
   );
 }

@@ -4,35 +4,26 @@ import { Panel } from '../../../components/ui/panel.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
 import { formatShortDay } from '../../../lib/format-date.ts';
-import { conditionInWords, RULES, ruleValue } from '../rule-words.ts';
+import { holdLines, ruleLines, type RuleLine } from '../rule-lines.ts';
 import { sourceInFull, sourceWords } from '../source-words.ts';
-
-type Line = {
-  readonly id: string;
-  readonly name: string;
-  readonly what: string;
-  readonly value: string;
-  readonly source: RuleSet['screening']['source'];
-  readonly date: string;
-};
 
 function wrapped(content: ReactNode) {
   return <span className="block min-w-[130px] py-1 whitespace-normal">{content}</span>;
 }
 
-const SOURCE: Column<Line> = {
+const SOURCE: Column<RuleLine> = {
   id: 'source',
   heading: 'Source',
   cell: ({ source }) => wrapped(<span title={sourceInFull(source)}>{sourceWords(source)}</span>),
 };
 
-const FROM: Column<Line> = {
+const FROM: Column<RuleLine> = {
   id: 'date',
   heading: 'Holds from',
   cell: ({ date }) => formatShortDay(date),
 };
 
-const RULE_COLUMNS: readonly Column<Line>[] = [
+const RULE_COLUMNS: readonly Column<RuleLine>[] = [
   {
     id: 'name',
     heading: 'Rule',
@@ -49,7 +40,7 @@ const RULE_COLUMNS: readonly Column<Line>[] = [
   FROM,
 ];
 
-const HOLD_COLUMNS: readonly Column<Line>[] = [
+const HOLD_COLUMNS: readonly Column<RuleLine>[] = [
   {
     id: 'name',
     heading: 'Held because',
@@ -68,26 +59,19 @@ const HOLD_COLUMNS: readonly Column<Line>[] = [
 
 /** Rules and holds of one version, each with its source and the day from which it holds. */
 export function RulesView({ rules }: { readonly rules: RuleSet }) {
-  const ruleLines = RULES.map(({ rule, name, what }) => {
-    const { source, date } = rules[rule];
-    return { id: rule, name, what, value: ruleValue(rules, rule), source, date };
-  });
-  const holdLines = rules.holds.map(({ name, condition, stages, source, date }) => ({
-    id: name,
-    name,
-    what: stages.join(' and '),
-    value: conditionInWords(condition),
-    source,
-    date,
-  }));
   return (
     <>
-      <Table label="Rules in force" columns={RULE_COLUMNS} rows={ruleLines} idOf={({ id }) => id} />
+      <Table
+        label="Rules in force"
+        columns={RULE_COLUMNS}
+        rows={ruleLines(rules)}
+        idOf={({ id }) => id}
+      />
       <Panel title="Holds" note="keep a building from being let go, whatever its figures">
         <Table
           label="What holds a building"
           columns={HOLD_COLUMNS}
-          rows={holdLines}
+          rows={holdLines(rules)}
           idOf={({ id }) => id}
         />
       </Panel>

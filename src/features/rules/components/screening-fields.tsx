@@ -1,5 +1,5 @@
 import { Field } from '../../../components/ui/field.tsx';
-import type { RulesFormModel } from './rule-row.tsx';
+import type { RulesFormModel } from '../rules-form-model.ts';
 
 /** The settlement and slope under both of which a building is let go. */
 export function ScreeningFields({ form }: { readonly form: RulesFormModel }) {

@@ -6,9 +6,9 @@ import { Button } from '../../../components/ui/button.tsx';
 import { DoneNote } from '../../../components/ui/done-note.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { PasswordField } from '../../../components/ui/password-field.tsx';
-import { isRefusal } from '../../../lib/api-error.ts';
 import { showFieldFaults } from '../../../lib/form-errors.ts';
 import { useChangePassword } from '../api/change-password.ts';
+import { UsernameForBrowser } from './username-for-browser.tsx';
 
 /** Changes one's own password. */
 export function ChangePasswordForm({ email }: { readonly email: string }) {
@@ -28,15 +28,18 @@ export function ChangePasswordForm({ email }: { readonly email: string }) {
       },
     });
   });
-  const fault = isRefusal(change.error, 'invalid-input') ? null : change.error;
   return (
     <form
       noValidate
       className="mt-3.5 grid max-w-[360px] gap-3.5"
       onSubmit={(event) => void submit(event)}
     >
-      <MutationError failed="The password was not changed." error={fault} />
-      <input type="hidden" autoComplete="username" value={email} readOnly />
+      <MutationError
+        failed="The password was not changed."
+        error={change.error}
+        shown={['currentPassword', 'newPassword']}
+      />
+      <UsernameForBrowser email={email} />
       <PasswordField
         label="The one you have"
         autoComplete="current-password"

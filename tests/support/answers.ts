@@ -1,0 +1,88 @@
+import type { MemberAnswer } from '../../shared/schemas/members.ts';
+import type { PersonAnswer } from '../../shared/schemas/people.ts';
+import type { RulesVersion } from '../../shared/schemas/rules.ts';
+import type { SchemeAnswer } from '../../shared/schemas/schemes.ts';
+import type { SessionAnswer } from '../../shared/schemas/session.ts';
+import { defaultRules } from '../../server/commands/default-rules.ts';
+
+/** An id that is one; `n` tells it from others. */
+export function anId(n = 1): string {
+  return `00000000-0000-4000-8000-${String(n).padStart(12, '0')}`;
+}
+
+/** The session of an assessor, unless said otherwise. */
+export function aSession(
+  person: Partial<NonNullable<SessionAnswer['person']>> | null = {},
+): SessionAnswer {
+  const known = { id: anId(), name: 'Assessor', email: 'assessor@example.org' };
+  return {
+    csrfToken: 'token',
+    demo: true,
+    person: person === null ? null : { ...known, isAdministrator: false, ...person },
+  };
+}
+
+/** A scheme in which the caller may read everything and change nothing. */
+export function aSchemeAnswer(overrides: Partial<SchemeAnswer> = {}): SchemeAnswer {
+  return {
+    id: anId(10),
+    name: 'Port Dogger crossing',
+    description: '',
+    crs: 32631,
+    archivedAt: null,
+    version: 1,
+    registerVersion: 1,
+    backgroundVersion: 1,
+    roles: ['assessor'],
+    abilities: { readScheme: true, readRegister: true, readRules: true },
+    ...overrides,
+  };
+}
+
+/** A person who can sign in, as the administrator sees them. */
+export function aPersonAnswer(overrides: Partial<PersonAnswer> = {}): PersonAnswer {
+  return {
+    id: anId(20),
+    name: 'Designer',
+    email: 'designer@example.org',
+    isAdministrator: false,
+    hasPassword: true,
+    invitedUntil: null,
+    createdAt: '2026-05-01T09:00:00.000Z',
+    memberships: [],
+    abilities: { invite: false },
+    ...overrides,
+  };
+}
+
+/** An assessor of a scheme. */
+export function aMemberAnswer(overrides: Partial<MemberAnswer> = {}): MemberAnswer {
+  return {
+    person: { id: anId(30), name: 'Assessor', email: 'assessor@example.org' },
+    roles: ['assessor'],
+    accepted: true,
+    ...overrides,
+  };
+}
+
+/** Version 1 of a scheme's rules: the defaults. */
+export function aRulesVersion(overrides: Partial<RulesVersion> = {}): RulesVersion {
+  return {
+    version: 1,
+    rules: defaultRules('2026-05-01'),
+    createdAt: '2026-05-01T09:00:00.000Z',
+    createdBy: { id: anId(40), name: 'Administrator' },
+    ...overrides,
+  };
+}
+
+/** A projected system. */
+export function aCrsAnswer() {
+  return {
+    code: 32631,
+    name: 'WGS 84 / UTM zone 31N',
+    area: 'North Sea.',
+    definition: '+proj=utm +zone=31',
+    bounds: [0, 0, 6, 84],
+  };
+}
