@@ -5,6 +5,9 @@ import { defineConfig } from 'vitest/config';
 
 const server = `http://127.0.0.1:${process.env.PORT ?? 4600}`;
 
+/** No test is timed: a busy machine may take its time, a hung test must end. */
+const PATIENCE = 60_000;
+
 export default defineConfig({
   plugins: [react(), tailwindcss()],
   worker: { format: 'es' },
@@ -17,15 +20,28 @@ export default defineConfig({
   server: { port: 4601, proxy: { '/api': server, '/tiles': server } },
   test: {
     projects: [
-      { test: { name: 'shared', include: ['tests/shared/**/*.test.ts'] } },
-      { test: { name: 'verification', include: ['tests/verification/**/*.test.ts'] } },
-      { test: { name: 'architecture', include: ['tests/architecture/**/*.test.ts'] } },
+      { test: { name: 'shared', include: ['tests/shared/**/*.test.ts'], testTimeout: PATIENCE } },
+      {
+        test: {
+          name: 'verification',
+          include: ['tests/verification/**/*.test.ts'],
+          testTimeout: PATIENCE,
+        },
+      },
+      {
+        test: {
+          name: 'architecture',
+          include: ['tests/architecture/**/*.test.ts'],
+          isolate: false,
+          testTimeout: PATIENCE,
+        },
+      },
       {
         test: {
           name: 'scripts',
           include: ['tests/scripts/**/*.test.ts'],
           exclude: ['tests/scripts/start/**'],
-          testTimeout: 60_000,
+          testTimeout: PATIENCE,
         },
       },
       {
@@ -33,8 +49,8 @@ export default defineConfig({
           name: 'server',
           include: ['tests/server/**/*.test.ts'],
           globalSetup: ['tests/support/database-setup.ts'],
-          testTimeout: 20_000,
-          hookTimeout: 30_000,
+          testTimeout: PATIENCE,
+          hookTimeout: PATIENCE,
         },
       },
       {
@@ -43,6 +59,8 @@ export default defineConfig({
           include: ['tests/client/**/*.test.{ts,tsx}'],
           environment: 'jsdom',
           setupFiles: ['tests/support/client-setup.ts'],
+          testTimeout: PATIENCE,
+          hookTimeout: PATIENCE,
         },
       },
       {
@@ -52,7 +70,8 @@ export default defineConfig({
           include: ['tests/scripts/start/**/*.test.ts'],
           fileParallelism: false,
           sequence: { groupOrder: 1 },
-          testTimeout: 30_000,
+          testTimeout: PATIENCE,
+          hookTimeout: PATIENCE,
         },
       },
       {

@@ -1,7 +1,9 @@
 import { QueryClientProvider } from '@tanstack/react-query';
-import { RouterProvider } from 'react-router-dom';
+import { createBrowserRouter, RouterProvider } from 'react-router-dom';
 import { queryClient } from '../lib/query-client.ts';
-import { router } from './router.tsx';
+import { ROUTES } from './router.tsx';
+
+const router = createBrowserRouter([...ROUTES]);
 
 /** What every page stands on: what has been fetched, and the address. */
 export function Providers() {

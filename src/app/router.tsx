@@ -1,4 +1,4 @@
-import { createBrowserRouter, type RouteObject } from 'react-router-dom';
+import type { RouteObject } from 'react-router-dom';
 import { PATHS, SETTINGS } from '../config/paths.ts';
 import { AdministratorsOnly } from './administrators-only.tsx';
 import { FramedPages } from './framed.tsx';
@@ -12,59 +12,59 @@ import { SignedIn } from './signed-in.tsx';
 const forAnyone: RouteObject[] = [
   {
     path: PATHS.signIn,
-    lazy: { Component: async () => (await import('./routes/sign-in.tsx')).SignInPage },
+    lazy: async () => ({ Component: (await import('./routes/sign-in.tsx')).SignInPage }),
   },
   {
     path: PATHS.forgotPassword,
-    lazy: {
-      Component: async () => (await import('./routes/forgot-password.tsx')).ForgotPasswordPage,
-    },
+    lazy: async () => ({
+      Component: (await import('./routes/forgot-password.tsx')).ForgotPasswordPage,
+    }),
   },
   {
     path: PATHS.link,
-    lazy: { Component: async () => (await import('./routes/link.tsx')).LinkPage },
+    lazy: async () => ({ Component: (await import('./routes/link.tsx')).LinkPage }),
   },
 ];
 
 const forAdministrators: RouteObject[] = [
   {
     path: PATHS.newScheme,
-    lazy: { Component: async () => (await import('./routes/new-scheme.tsx')).NewSchemePage },
+    lazy: async () => ({ Component: (await import('./routes/new-scheme.tsx')).NewSchemePage }),
   },
   {
     path: PATHS.people,
-    lazy: { Component: async () => (await import('./routes/people.tsx')).PeoplePage },
+    lazy: async () => ({ Component: (await import('./routes/people.tsx')).PeoplePage }),
   },
   {
     path: PATHS.audit,
-    lazy: { Component: async () => (await import('./routes/audit.tsx')).AuditPage },
+    lazy: async () => ({ Component: (await import('./routes/audit.tsx')).AuditPage }),
   },
   {
     path: `${PATHS.mailbox}/:letterId?`,
-    lazy: { Component: async () => (await import('./routes/mailbox.tsx')).MailboxPage },
+    lazy: async () => ({ Component: (await import('./routes/mailbox.tsx')).MailboxPage }),
   },
 ];
 
 const settings: RouteObject[] = [
   {
     index: true,
-    lazy: {
-      Component: async () => (await import('./routes/settings-description.tsx')).DescriptionPage,
-    },
+    lazy: async () => ({
+      Component: (await import('./routes/settings-description.tsx')).DescriptionPage,
+    }),
   },
   {
     path: SETTINGS.people,
-    lazy: { Component: async () => (await import('./routes/settings-people.tsx')).MembersPage },
+    lazy: async () => ({ Component: (await import('./routes/settings-people.tsx')).MembersPage }),
   },
   {
     path: SETTINGS.rules,
-    lazy: { Component: async () => (await import('./routes/settings-rules.tsx')).RulesPage },
+    lazy: async () => ({ Component: (await import('./routes/settings-rules.tsx')).RulesPage }),
   },
   {
     path: SETTINGS.background,
-    lazy: {
-      Component: async () => (await import('./routes/settings-background.tsx')).BackgroundPage,
-    },
+    lazy: async () => ({
+      Component: (await import('./routes/settings-background.tsx')).BackgroundPage,
+    }),
   },
 ];
 
@@ -72,11 +72,11 @@ const ofScheme: RouteObject[] = [
   { index: true, Component: SchemeStart },
   {
     path: 'plan',
-    lazy: { Component: async () => (await import('../features/plan/plan-page.tsx')).PlanPage },
+    lazy: async () => ({ Component: (await import('../features/plan/plan-page.tsx')).PlanPage }),
   },
   {
     path: 'settings',
-    lazy: { Component: async () => (await import('./routes/settings.tsx')).SettingsPage },
+    lazy: async () => ({ Component: (await import('./routes/settings.tsx')).SettingsPage }),
     children: settings,
   },
 ];
@@ -84,11 +84,11 @@ const ofScheme: RouteObject[] = [
 const outsideOfSchemes: RouteObject[] = [
   {
     index: true,
-    lazy: { Component: async () => (await import('./routes/schemes.tsx')).SchemesPage },
+    lazy: async () => ({ Component: (await import('./routes/schemes.tsx')).SchemesPage }),
   },
   {
     path: PATHS.account,
-    lazy: { Component: async () => (await import('./routes/account.tsx')).AccountPage },
+    lazy: async () => ({ Component: (await import('./routes/account.tsx')).AccountPage }),
   },
   { Component: AdministratorsOnly, children: forAdministrators },
   { path: '*', Component: NotFoundPage },
@@ -100,11 +100,11 @@ const forSignedIn: RouteObject[] = [
 ];
 
 /** Every page by its address; each is fetched when it is first opened. */
-export const router = createBrowserRouter([
+export const ROUTES: readonly RouteObject[] = [
   {
     Component: Root,
     ErrorBoundary: PageError,
     HydrateFallback: () => null,
     children: [...forAnyone, { Component: SignedIn, children: forSignedIn }],
   },
-]);
+];

@@ -31,6 +31,10 @@ function asResponse(answer: unknown): Response {
   return Response.json({ error: answer.error }, { status: answer.status });
 }
 
+function makesAnswer(answer: unknown): answer is (body: unknown) => unknown {
+  return typeof answer === 'function';
+}
+
 /**
  * Puts answers in place of the server's; a function among them makes its own of the body. What is asked
  * for and not there is a fault of the test.
@@ -43,7 +47,7 @@ export function fakeApi(answers: Answers): { readonly calls: Call[] } {
     const body = bodyOf(init);
     calls.push({ route, body, headers: new Headers(init?.headers) });
     const answer = answers[route];
-    return Promise.resolve(asResponse(typeof answer === 'function' ? answer(body) : answer));
+    return Promise.resolve(asResponse(makesAnswer(answer) ? answer(body) : answer));
   });
   return { calls };
 }

@@ -14,6 +14,16 @@ export type Run = {
 
 export type RunningApp = Run & { readonly address: string; readonly password: string };
 
+/** What whoever runs the tests may have set for their own workbench. */
+const UNSET = {
+  NODE_ENV: undefined,
+  DATABASE_URL: undefined,
+  MIGRATE_URL: undefined,
+  PUBLIC_URL: undefined,
+  SMTP_URL: undefined,
+  DEMO: undefined,
+};
+
 /** Runs one of the commands in scripts/ with its own environment on top of ours. */
 export function runScript(
   name: string,
@@ -22,7 +32,7 @@ export function runScript(
 ): Run {
   const child = spawn(process.execPath, [`scripts/${name}.mjs`, ...args], {
     cwd: ROOT,
-    env: { ...process.env, NODE_ENV: undefined, ...more },
+    env: { ...process.env, ...UNSET, ...more },
     stdio: ['ignore', 'pipe', 'pipe'],
   });
   const texts: string[] = [];

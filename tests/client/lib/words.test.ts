@@ -1,3 +1,4 @@
+// @vitest-environment node
 import { describe, expect, it } from 'vitest';
 import { changesBetween } from '../../../src/lib/changes-between.ts';
 import { formatDaySince, formatMoment, formatWeekday } from '../../../src/lib/format-date.ts';

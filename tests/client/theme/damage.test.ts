@@ -1,3 +1,4 @@
+// @vitest-environment node
 import { describe, expect, it } from 'vitest';
 import { CATEGORIES } from '../../../shared/damage/categories.ts';
 import { DAMAGE, HATCH_TILE, hatchTileSvg, hatchTileUrl } from '../../../src/theme/damage.ts';

@@ -20,6 +20,8 @@ export async function invite({ page, open }: Visitor, invitation: Invitation): P
 
 /** Chooses a password on the page that a link has opened, and goes in. */
 export async function choosePassword({ page }: Visitor, password: string): Promise<void> {
+  // nobody types a password before the page has its session
+  await page.waitForLoadState('networkidle');
   await page.getByLabel('Password', { exact: true }).fill(password);
   await page.getByRole('button', { name: 'Set the password and go in' }).click();
   await page.getByRole('heading', { name: 'Waiting for you' }).waitFor();

@@ -8,9 +8,10 @@ type OnSwitch = (member: MemberAnswer, role: Role) => void;
 const PERSON: Column<MemberAnswer> = {
   id: 'name',
   heading: 'Name',
+  wide: true,
   sortBy: ({ person }) => person.name.toLowerCase(),
   cell: ({ person, accepted }) => (
-    <span className="block max-w-[300px] py-1 leading-snug max-sm:max-w-[150px]">
+    <span className="block py-1 leading-snug">
       <span className="flex gap-1.5">
         <b className="truncate font-semibold" title={person.name}>
           {person.name}
@@ -23,9 +24,6 @@ const PERSON: Column<MemberAnswer> = {
     </span>
   ),
 };
-
-/** Takes the room that is left, so that the ticks stand close to the names. */
-const REST: Column<MemberAnswer> = { id: 'rest', heading: '', wide: true, cell: () => null };
 
 function roleColumn(role: Role, onSwitch: OnSwitch | undefined): Column<MemberAnswer> {
   return {
@@ -54,5 +52,5 @@ function roleColumn(role: Role, onSwitch: OnSwitch | undefined): Column<MemberAn
 
 /** A person and a tick for each role; without `onSwitch` it is only read. */
 export function memberColumns(onSwitch: OnSwitch | undefined): Column<MemberAnswer>[] {
-  return [PERSON, ...ROLES.map((role) => roleColumn(role, onSwitch)), REST];
+  return [PERSON, ...ROLES.map((role) => roleColumn(role, onSwitch))];
 }

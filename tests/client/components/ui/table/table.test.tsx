@@ -26,7 +26,7 @@ const COLUMNS: readonly Column<Building>[] = [
     heading: 'Held because',
     spare: true,
     wide: true,
-    cell: () => <a href="/x">why</a>,
+    cell: () => <a href="#why">why</a>,
   },
 ];
 

@@ -1,0 +1,146 @@
+import { fireEvent, screen, waitFor } from '@testing-library/react';
+import { describe, expect, it } from 'vitest';
+import { PeoplePage } from '../../../../src/app/routes/people.tsx';
+import {
+  partsInWords,
+  partsOf,
+  signInState,
+} from '../../../../src/features/people/person-words.ts';
+import { anId, aPersonAnswer, aSchemeAnswer } from '../../../support/answers.ts';
+import { axeFaults } from '../../../support/axe-faults.ts';
+import { fakeApi, Refusal } from '../../../support/fake-api.ts';
+import { renderPage } from '../../../support/render-page.tsx';
+
+const SCHEME = { schemeId: anId(10), schemeName: 'Port Dogger crossing' };
+const INVITED = aPersonAnswer({
+  id: anId(21),
+  name: 'Clerk of works',
+  email: 'clerk@example.org',
+  hasPassword: false,
+  invitedUntil: '2999-05-08T09:00:00.000Z',
+  memberships: [{ ...SCHEME, role: 'assessor' }],
+  abilities: { invite: true },
+});
+
+const LISTS = {
+  'GET /api/people': [aPersonAnswer(), INVITED],
+  'GET /api/schemes': [
+    aSchemeAnswer(),
+    aSchemeAnswer({ id: anId(11), archivedAt: '2026-05-01T09:00:00Z' }),
+  ],
+};
+
+function type(label: string, value: string): void {
+  fireEvent.change(screen.getByLabelText(label), { target: { value } });
+}
+
+describe('signInState', () => {
+  const now = new Date('2026-05-21T09:00:00Z');
+
+  it.each([
+    [{ hasPassword: true, invitedUntil: null }, 'Can sign in'],
+    [{ hasPassword: false, invitedUntil: '2026-05-28T09:00:00.000Z' }, 'Invited until 28 May 2026'],
+    [{ hasPassword: false, invitedUntil: '2026-05-20T09:00:00.000Z' }, 'Invitation too old'],
+    [{ hasPassword: false, invitedUntil: null }, 'Not invited'],
+  ])('of %j is "%s"', (person, words) => {
+    expect(signInState(person, now).words).toBe(words);
+  });
+});
+
+describe('partsOf', () => {
+  it('gathers roles by scheme', () => {
+    const memberships = [
+      { ...SCHEME, role: 'assessor' },
+      { schemeId: anId(12), schemeName: 'Sewer', role: 'witness' },
+      { ...SCHEME, role: 'designer' },
+    ] as const;
+    expect(partsOf({ memberships: [...memberships] })).toHaveLength(2);
+    expect(partsInWords({ memberships: [...memberships] })).toBe(
+      'Port Dogger crossing: assessor, designer; Sewer: witness',
+    );
+  });
+});
+
+describe('the page of people', () => {
+  it('lists everybody, and says who cannot sign in yet', async () => {
+    fakeApi(LISTS);
+    renderPage(<PeoplePage />);
+    expect(
+      await screen.findByText('2 with an account; 1 of them cannot sign in yet.'),
+    ).toBeTruthy();
+    expect(screen.getAllByRole('row')).toHaveLength(3);
+    expect(await axeFaults()).toEqual([]);
+  });
+
+  it('invites with a scheme and a role, and leaves out a line with no scheme', async () => {
+    const { calls } = fakeApi({
+      ...LISTS,
+      'POST /api/people': { person: INVITED, letterSent: true },
+    });
+    renderPage(<PeoplePage />);
+    await screen.findByRole('option', { name: 'Port Dogger crossing' });
+    expect(screen.getAllByRole('option', { name: 'Port Dogger crossing' })).toHaveLength(1);
+    type('Name', 'Clerk of works');
+    type('E-mail', 'Clerk@example.org');
+    fireEvent.change(screen.getByLabelText('Scheme'), { target: { value: anId(10) } });
+    fireEvent.change(screen.getByLabelText('Role'), { target: { value: 'witness' } });
+    fireEvent.click(screen.getByRole('button', { name: 'Another scheme or role' }));
+    fireEvent.click(screen.getByRole('button', { name: 'Send the invitation' }));
+    expect(await screen.findByText(/went out/)).toBeTruthy();
+    expect(calls.find(({ route }) => route === 'POST /api/people')?.body).toEqual({
+      name: 'Clerk of works',
+      email: 'clerk@example.org',
+      isAdministrator: false,
+      memberships: [{ schemeId: anId(10), role: 'witness' }],
+    });
+    expect(screen.getByLabelText<HTMLInputElement>('Name').value).toBe('');
+  });
+
+  it('says so when the letter did not go out', async () => {
+    fakeApi({ ...LISTS, 'POST /api/people': { person: INVITED, letterSent: false } });
+    renderPage(<PeoplePage />);
+    type('Name', 'Clerk of works');
+    type('E-mail', 'clerk@example.org');
+    fireEvent.click(screen.getByRole('button', { name: 'Send the invitation' }));
+    expect((await screen.findByRole('alert')).textContent).toContain('The account is made.');
+  });
+
+  it('keeps what was typed when somebody has the address already', async () => {
+    const fields = [{ path: 'email', message: 'Somebody has this address already.' }];
+    const refusal = new Refusal(
+      409,
+      'already-exists',
+      'Somebody has this address already.',
+      fields,
+    );
+    fakeApi({ ...LISTS, 'POST /api/people': refusal });
+    renderPage(<PeoplePage />);
+    type('Name', 'Clerk again');
+    type('E-mail', 'clerk@example.org');
+    fireEvent.click(screen.getByRole('button', { name: 'Send the invitation' }));
+    expect(await screen.findByText('Somebody has this address already.')).toBeTruthy();
+    expect(screen.getByLabelText<HTMLInputElement>('Name').value).toBe('Clerk again');
+  });
+
+  it('opens a row on what can be changed, and sends an invitation again', async () => {
+    const again = `POST /api/people/${INVITED.id}/invitations`;
+    const { calls } = fakeApi({ ...LISTS, [again]: { person: INVITED, letterSent: true } });
+    renderPage(<PeoplePage />);
+    fireEvent.click(await screen.findByText('Clerk of works'));
+    fireEvent.click(screen.getByRole('button', { name: 'Send the invitation again' }));
+    await waitFor(() => {
+      expect(calls.map(({ route }) => route)).toContain(again);
+    });
+    expect(await screen.findByText(/went out/)).toBeTruthy();
+    fireEvent.click(screen.getAllByText('Clerk of works')[0] ?? document.body);
+    expect(screen.queryByRole('button', { name: 'Send the invitation again' })).toBeNull();
+  });
+
+  it('offers no second invitation to who can sign in', async () => {
+    fakeApi(LISTS);
+    renderPage(<PeoplePage />);
+    fireEvent.click(await screen.findByText('Designer', { selector: 'b' }));
+    expect(screen.getByText('In no scheme yet.')).toBeTruthy();
+    expect(screen.queryByRole('button', { name: 'Send the invitation again' })).toBeNull();
+  });
+});
