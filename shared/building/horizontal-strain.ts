@@ -1,5 +1,5 @@
 import { at } from '../numerics/at.ts';
-import type { Profile } from './profile.ts';
+import { PROFILE, PROFILE_STRIDE, type Profile } from './profile.ts';
 import { intervalOf, profileValue } from './profile-value.ts';
 
 /**
@@ -12,17 +12,18 @@ export function averageHorizontalStrain(profile: Profile, start: number, end: nu
   return (u(end) - u(start)) / (end - start);
 }
 
-/** Where a parabola of strain may be largest: its ends and, inside, its vertex. */
+/** Where the strain may be largest: the ends, the nodes between them and the vertices of its parabolas. */
 function candidates(profile: Profile, start: number, end: number): number[] {
+  const { nodes, coefficients } = profile;
   const found = [start, end];
-  for (let k = intervalOf(profile, start); k <= intervalOf(profile, end); k++) {
-    const [a, b] = [at(profile.nodes, k), at(profile.nodes, k + 1)];
+  const last = intervalOf(profile, end);
+  for (let k = intervalOf(profile, start); k <= last; k++) {
+    const [a, b] = [at(nodes, k), at(nodes, k + 1)];
     if (a > start && a < end) found.push(a);
-    const [from, middle, to] = [a, (a + b) / 2, b].map((x) => profileValue(profile, 'strain', x));
-    if (from === undefined || middle === undefined || to === undefined) continue;
-    const bend = from - 2 * middle + to;
+    const base = k * PROFILE_STRIDE + PROFILE.strain.offset;
+    const bend = at(coefficients, base + 2);
     if (bend >= 0) continue;
-    const vertex = (a + b) / 2 - ((to - from) / bend) * ((b - a) / 4);
+    const vertex = a - (at(coefficients, base + 1) / (2 * bend)) * (b - a);
     if (vertex > Math.max(a, start) && vertex < Math.min(b, end)) found.push(vertex);
   }
   return found;

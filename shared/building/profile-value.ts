@@ -1,5 +1,6 @@
 import { at } from '../numerics/at.ts';
 import { evaluatePolynomial } from '../numerics/evaluate-polynomial.ts';
+import { intervalIndex } from '../numerics/interval-index.ts';
 import { PROFILE, PROFILE_STRIDE, type Profile, type ProfileQuantity } from './profile.ts';
 
 /**
@@ -8,14 +9,7 @@ import { PROFILE, PROFILE_STRIDE, type Profile, type ProfileQuantity } from './p
  * Units: x in m. Valid: x beyond the ends gives the first or last interval. Source: [own].
  */
 export function intervalOf(profile: Profile, x: number): number {
-  const { nodes } = profile;
-  let [low, high] = [0, nodes.length - 2];
-  while (low < high) {
-    const middle = (low + high + 1) >> 1;
-    if (at(nodes, middle) <= x) low = middle;
-    else high = middle - 1;
-  }
-  return low;
+  return intervalIndex(profile.nodes, x);
 }
 
 /**
