@@ -5,7 +5,7 @@ export type Tab = { readonly to: string; readonly label: string; readonly end?: 
 
 function tabStyle({ isActive }: { readonly isActive: boolean }): string {
   return classNames(
-    'flex h-bar items-center border-b-[3px] px-2.5 pt-0.5 no-underline max-sm:px-3.5',
+    'flex h-bar items-center border-b-[3px] px-2.5 pt-0.5 no-underline max-md:px-3.5',
     isActive
       ? 'border-clay font-semibold text-ink'
       : 'border-transparent text-ink-2 hover:text-ink hover:border-clay-line',
@@ -18,7 +18,7 @@ export function BarTabs({ tabs }: { readonly tabs: readonly Tab[] }) {
   return (
     <nav
       aria-label="Screens"
-      className="-mb-px flex max-sm:order-last max-sm:-mx-1 max-sm:w-[calc(100%+8px)] max-sm:overflow-x-auto max-sm:px-1 max-sm:border-t max-sm:border-hairline"
+      className="-mb-px flex max-md:order-last max-md:-mx-1 max-md:w-[calc(100%+8px)] max-md:overflow-x-auto max-md:px-1 max-md:border-t max-md:border-hairline"
     >
       {tabs.map(({ to, label, end = false }) => (
         <NavLink key={to} to={to} end={end} className={tabStyle}>

@@ -21,11 +21,11 @@ export function GoTo({ isOpen, onOpen, onClose, query, onQuery, found, onGo }: G
     <>
       <button
         type="button"
-        className="flex h-7 w-44 items-center justify-between rounded border border-control bg-sheet px-2 text-small text-ink-3 hover:border-ink max-sm:h-bar max-sm:w-auto max-sm:border-0 max-sm:bg-transparent max-sm:px-3 max-sm:text-clay-deep max-sm:underline"
+        className="flex h-7 w-44 max-lg:w-28 items-center justify-between rounded border border-control bg-sheet px-2 text-small text-ink-3 hover:border-ink max-md:h-bar max-md:w-auto max-md:border-0 max-md:bg-transparent max-md:px-3 max-md:text-clay-deep max-md:underline"
         onClick={onOpen}
       >
         Go to…
-        <span className="max-sm:hidden">
+        <span className="max-md:hidden">
           <KeyCap>/</KeyCap>
         </span>
       </button>

@@ -22,7 +22,14 @@ export function Page({ title, lead, aside, children }: PageProps) {
     >
       <PageTitle>{title}</PageTitle>
       <div className="min-w-0 px-8 pt-[22px] pb-8 max-sm:px-4 max-sm:pt-4">
-        <h1 className="mb-1 text-h1 text-balance max-sm:text-h2">{title}</h1>
+        <h1
+          className={classNames(
+            'text-h1 text-balance max-sm:text-h2',
+            lead === undefined ? 'mb-3' : 'mb-1',
+          )}
+        >
+          {title}
+        </h1>
         {lead !== undefined && (
           <div className="mb-4 max-w-[84ch] text-roomy text-ink-2">{lead}</div>
         )}

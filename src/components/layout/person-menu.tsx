@@ -12,7 +12,7 @@ type PersonMenuProps = {
 
 function Figure() {
   return (
-    <svg width="18" height="18" aria-hidden="true" className="fill-none stroke-ink sm:hidden">
+    <svg width="18" height="18" aria-hidden="true" className="fill-none stroke-ink md:hidden">
       <circle cx="9" cy="6" r="3.3" strokeWidth="1.4" />
       <path d="M2.5 16.5c.6-4 3.2-5.6 6.5-5.6s5.9 1.6 6.5 5.6" strokeWidth="1.4" />
     </svg>
@@ -25,16 +25,16 @@ export function PersonMenu({ name, links, onShowKeys, onSignOut }: PersonMenuPro
     <Menu
       align="right"
       name={`${name}: account and sign out`}
-      buttonClassName="flex h-bar min-w-0 items-center gap-2 text-small text-ink-2 hover:text-ink max-sm:min-w-touch max-sm:justify-center"
+      buttonClassName="flex h-bar min-w-0 items-center gap-2 text-small text-ink-2 hover:text-ink max-md:min-w-touch max-md:justify-center"
       button={
         <>
-          <span className="max-w-[170px] truncate max-sm:hidden">{name}</span>
+          <span className="max-w-[170px] truncate max-lg:max-w-[110px] max-md:hidden">{name}</span>
           <Figure />
           <Chevron />
         </>
       }
     >
-      <p className="border-b border-hairline px-3 pt-1 pb-2 text-cap text-ink-3 sm:hidden">
+      <p className="border-b border-hairline px-3 pt-1 pb-2 text-cap text-ink-3 md:hidden">
         {name}
       </p>
       <ul>
@@ -45,7 +45,7 @@ export function PersonMenu({ name, links, onShowKeys, onSignOut }: PersonMenuPro
             </Link>
           </li>
         ))}
-        <li className="max-sm:hidden">
+        <li className="max-md:hidden">
           <button type="button" className={MENU_LINE} onClick={onShowKeys}>
             Keys here
             <span className="ml-auto">

@@ -15,12 +15,12 @@ export function SchemeSwitcher({ current, others, pathOf }: SchemeSwitcherProps)
   return (
     <Menu
       align="left"
-      className="mr-1.5 min-w-0 border-x border-hairline max-sm:mr-0 max-sm:flex-1 max-sm:border-r-0"
+      className="mr-1.5 min-w-0 border-x border-hairline max-md:mr-0 max-md:flex-1 max-md:border-r-0"
       name={`${current.name}: other schemes`}
-      buttonClassName="flex min-w-0 items-center gap-2 px-3.5 font-semibold max-sm:px-2.5"
+      buttonClassName="flex min-w-0 items-center gap-2 px-3.5 font-semibold max-md:px-2.5"
       button={
         <>
-          <span className="max-w-[280px] truncate" title={current.name}>
+          <span className="max-w-[min(280px,22vw)] truncate max-md:max-w-none" title={current.name}>
             {current.name}
           </span>
           <Chevron />

@@ -1,5 +1,4 @@
 import { useEffect, useId, useRef, type MouseEvent, type ReactNode } from 'react';
-import { Button } from './button.tsx';
 import { KeyCap } from './key-cap.tsx';
 
 /** Marks what has the focus when the dialog opens; without it, its first button. */
@@ -47,14 +46,14 @@ export function Dialog({ open, title, onClose, children }: DialogProps) {
             <h2 id={id} className="text-lead">
               {title}
             </h2>
-            <Button
-              kind="quiet"
-              className="-mr-1.5 no-underline"
+            <button
+              type="button"
               aria-label="Close"
+              className="-mr-1.5 min-h-6 px-1.5 max-sm:min-h-11 max-sm:min-w-11"
               onClick={onClose}
             >
               <KeyCap>Esc</KeyCap>
-            </Button>
+            </button>
           </div>
           {children}
         </div>

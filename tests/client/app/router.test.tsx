@@ -27,6 +27,7 @@ function answers(more: Record<string, unknown> = {}) {
     'GET /api/schemes': [aSchemeAnswer()],
     [`GET /api${SCHEME}`]: aSchemeAnswer({ abilities: OWNER, roles: ['owner'] }),
     'GET /api/crs/32631': aCrsAnswer(),
+    [`GET /api${SCHEME}/extent`]: { bounds: [0, 0, 6, 84], crs: 32631, from: 'crs' },
     'GET /api/waiting': { general: [], schemes: [] },
     ...more,
   });

@@ -6,7 +6,7 @@ import { SchemeCard } from './scheme-card.tsx';
 
 function Cards({ schemes }: { readonly schemes: readonly SchemeAnswer[] }) {
   return (
-    <ul>
+    <ul className="max-lg:grid max-lg:grid-cols-2 max-lg:items-start max-lg:gap-x-4 max-sm:block">
       {schemes.map((scheme) => (
         <SchemeCard key={scheme.id} scheme={scheme} />
       ))}

@@ -21,7 +21,7 @@ export function StreetSection() {
   return (
     <svg
       viewBox={`0 ${top} ${width} ${height}`}
-      className="min-h-0 w-full flex-1 max-md:h-auto"
+      className="min-h-0 w-full flex-1 max-md:h-auto max-md:max-h-[210px]"
       aria-hidden="true"
     >
       <HatchPatterns prefix={prefix} scale={1.2} />

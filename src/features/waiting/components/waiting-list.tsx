@@ -19,7 +19,7 @@ function WaitingRow({ item }: { readonly item: WaitingItem }) {
       <span className="text-small whitespace-nowrap text-ink-2 max-sm:col-start-3">
         Since {formatDaySince(item.since, new Date())}
       </span>
-      <ButtonLink to={item.link} className="min-w-[104px] justify-self-end">
+      <ButtonLink to={item.link} className="w-28">
         {waitingButton(item.kind)}
       </ButtonLink>
     </li>
