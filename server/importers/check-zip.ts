@@ -1,12 +1,12 @@
 import { AppError } from '../errors.ts';
 import type { ZipEntry } from './zip-entries.ts';
 
-/** What an archive may unpack to: as much as a computer can hold many times over. */
-const MOST_UNPACKED = 100 * 1024 * 1024;
+/** What an archive may unpack to: as much as a computer can hold some times over. */
+const MOST_UNPACKED = 400 * 1024 * 1024;
 /** How many times smaller than itself a large file may be packed; tables full of blanks come near it. */
 const MOST_TIMES = 250;
 const SMALL = 1024 * 1024;
-const DEEPEST = 4;
+const DEEPEST = 5;
 
 function nameFault(name: string): string | undefined {
   const parts = name.split('/');
@@ -38,6 +38,6 @@ export function checkZip(entries: readonly ZipEntry[], size: number): void {
     throw new AppError('unreadable', 'The archive is refused: its files overlap.');
   }
   if (entries.reduce((sum, entry) => sum + entry.unpacked, 0) > MOST_UNPACKED) {
-    throw new AppError('too-large', 'The archive unpacks to more than 100 MB.');
+    throw new AppError('too-large', 'The archive unpacks to more than 400 MB.');
   }
 }

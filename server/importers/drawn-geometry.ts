@@ -1,14 +1,11 @@
 import type { LineString, MultiLineString, MultiPolygon, Polygon } from 'geojson';
 import { z } from 'zod';
 import type { BackgroundLayer } from '../../shared/schemas/background.ts';
-import type { Drawing } from './drawing.ts';
+import { RowFault } from './geometry/row-fault.ts';
+import type { Place } from './place-of-crs.ts';
 
 export type DrawnGeometry = LineString | MultiLineString | Polygon | MultiPolygon;
-type Place = Drawing['place'];
 type Position = [number, number];
-
-/** Why a feature cannot be drawn, as the end of a sentence about it. */
-export class FeatureFault extends Error {}
 
 const LINES = ['LineString', 'MultiLineString'];
 const AREAS = ['Polygon', 'MultiPolygon'];
@@ -24,25 +21,25 @@ const TAKES: Readonly<Record<BackgroundLayer, { what: string; types: readonly st
 const geometrySchema = z.object({ type: z.string(), coordinates: z.unknown() });
 
 function list(value: unknown): readonly unknown[] {
-  if (!Array.isArray(value) || value.length === 0) throw new FeatureFault('has no points');
+  if (!Array.isArray(value) || value.length === 0) throw new RowFault('It has no points.');
   return value;
 }
 
 function position(value: unknown, place: Place): Position {
   const [x, y]: readonly unknown[] = list(value);
   if (typeof x !== 'number' || typeof y !== 'number' || !Number.isFinite(x + y)) {
-    throw new FeatureFault('has a point that is not two numbers');
+    throw new RowFault('It has a point that is not two numbers.');
   }
   const [longitude, latitude] = place([x, y]);
   if (!(Math.abs(longitude) <= 180 && Math.abs(latitude) <= 90)) {
-    throw new FeatureFault('is not on the map: check which grid the file is in');
+    throw new RowFault('It is not on the map: check which grid the file is in.');
   }
   return [longitude, latitude];
 }
 
 function line(value: unknown, place: Place): Position[] {
   const points = list(value).map((one) => position(one, place));
-  if (points.length < 2) throw new FeatureFault('has a line of one point');
+  if (points.length < 2) throw new RowFault('It has a line of one point.');
   return points;
 }
 
@@ -50,7 +47,7 @@ function ring(value: unknown, place: Place): Position[] {
   const points = line(value, place);
   const [first, last] = [points[0], points.at(-1)];
   if (first && last && (first[0] !== last[0] || first[1] !== last[1])) points.push([...first]);
-  if (points.length < 4) throw new FeatureFault('has a ring of fewer than three corners');
+  if (points.length < 4) throw new RowFault('It has a ring of fewer than three corners.');
   return points;
 }
 
@@ -58,13 +55,13 @@ function rings(value: unknown, place: Place): Position[][] {
   return list(value).map((one) => ring(one, place));
 }
 
-/** A geometry of a layer in longitude and latitude, or a FeatureFault. */
+/** A geometry of a layer in longitude and latitude, or a RowFault. */
 export function drawnGeometry(value: unknown, layer: BackgroundLayer, place: Place): DrawnGeometry {
   const geometry = geometrySchema.safeParse(value);
-  if (!geometry.success) throw new FeatureFault('has no geometry');
+  if (!geometry.success) throw new RowFault('It has no geometry.');
   const { type, coordinates: given } = geometry.data;
   const { what, types } = TAKES[layer];
-  if (!types.includes(type)) throw new FeatureFault(`is a ${type}: the layer takes ${what}`);
+  if (!types.includes(type)) throw new RowFault(`It is a ${type}: the layer takes ${what}.`);
   switch (type) {
     case 'LineString':
       return { type, coordinates: line(given, place) };

@@ -1,6 +1,6 @@
 import { boundingBox, type Box } from '../../shared/geometry/bounding-box.ts';
 import { AppError } from '../errors.ts';
-import type { FootprintRings } from '../models/building.ts';
+import type { FootprintRings } from '../models/building-footprint.ts';
 
 type Point = readonly [number, number];
 type Ring = readonly Point[];
@@ -38,9 +38,9 @@ export function placedFootprint(
   const hasRings = footprint.length > 0 && footprint.flat().every((ring) => ring.length >= 4);
   if (!hasRings || !isPlaced) {
     const message = hasRings
-      ? "The footprint lies outside the scheme's grid."
-      : 'The footprint has a ring of fewer than three corners.';
-    throw new AppError('invalid-input', undefined, [{ path: reference, message }]);
+      ? `The footprint of ${reference} lies outside the scheme's grid.`
+      : `The footprint of ${reference} has a ring of fewer than three corners.`;
+    throw new AppError('invalid-input', message, [{ path: 'footprint', message }]);
   }
   return { footprint, lonLat, bounds: boundingBox(points) };
 }

@@ -1,10 +1,12 @@
-import { setImmediate } from 'node:timers/promises';
 import { boundingBox, type Box } from '../../shared/geometry/bounding-box.ts';
-import { BACKGROUND_LIMITS, type BackgroundLayer } from '../../shared/schemas/background.ts';
+import type { BackgroundLayer } from '../../shared/schemas/background.ts';
 import { AppError, type FieldFault } from '../errors.ts';
-import { drawnGeometry, FeatureFault, type DrawnGeometry } from './drawn-geometry.ts';
-import { readGeojson } from './read-geojson.ts';
-import { readShapefile } from './read-shapefile.ts';
+import { drawnGeometry, type DrawnGeometry } from './drawn-geometry.ts';
+import { RowFault } from './geometry/row-fault.ts';
+import { openSource } from './open-source.ts';
+import { pacedRows } from './paced-rows.ts';
+import { placeOfCrs } from './place-of-crs.ts';
+import type { Properties } from './source.ts';
 
 export type BackgroundRow = {
   readonly name: string | null;
@@ -15,14 +17,10 @@ export type BackgroundRow = {
 
 const LONGEST_NAME = 200;
 const MOST_FAULTS = 20;
-/** Others are served between so many features. */
-const AT_ONCE = 2000;
+const TAKEN = ['geojson', 'shapefile'];
 
-function isZip(bytes: Buffer): boolean {
-  return bytes.toString('latin1', 0, 2) === 'PK';
-}
-
-function nameOf(given: unknown): string | null {
+function nameOf(properties: Properties): string | null {
+  const given = Object.entries(properties).find(([name]) => name.toLowerCase() === 'name')?.[1];
   if (typeof given !== 'string') return null;
   const name = given
     .replaceAll(/\p{Cc}+/gu, ' ')
@@ -42,29 +40,38 @@ function pointsOf(geometry: DrawnGeometry): readonly (readonly [number, number])
   return points;
 }
 
+/** A sentence about "it" as one about a row. */
+function ofRow(row: number, sentence: string): string {
+  return sentence.startsWith('It ') ? `Row ${row} ${sentence.slice(3)}` : `Row ${row}: ${sentence}`;
+}
+
 /** The features of an uploaded layer, or a refusal that names what is wrong by row: all of it or none. */
 export async function readBackground(
   bytes: Buffer,
   layer: BackgroundLayer,
 ): Promise<BackgroundRow[]> {
-  const { features, place } = await (isZip(bytes) ? readShapefile(bytes) : readGeojson(bytes));
-  if (features.length === 0) throw new AppError('unreadable', 'The file holds nothing to draw.');
-  if (features.length > BACKGROUND_LIMITS.features) {
-    throw new AppError('too-large', 'The file holds more than 200,000 features.');
+  const source = await openSource(bytes);
+  if (!TAKEN.includes(source.format)) {
+    throw new AppError('unreadable', 'A background is GeoJSON or a zipped Shapefile.');
   }
+  const place = await placeOfCrs(source);
   const rows: BackgroundRow[] = [];
   const faults: FieldFault[] = [];
-  for (const [index, { geometry: given, name }] of features.entries()) {
-    if (index % AT_ONCE === AT_ONCE - 1) await setImmediate();
+  let count = 0;
+  for await (const { row, geometry: given, fault, properties } of pacedRows(source)) {
+    count += 1;
     try {
+      if (fault !== null) throw new RowFault(fault);
       const geometry = drawnGeometry(given, layer, place);
-      rows.push({ name: nameOf(name), geometry, bounds: boundingBox(pointsOf(geometry)) });
+      const name = nameOf(properties);
+      rows.push({ name, geometry, bounds: boundingBox(pointsOf(geometry)) });
     } catch (error) {
-      if (!(error instanceof FeatureFault)) throw error;
-      faults.push({ path: `row ${index + 1}`, message: `Row ${index + 1} ${error.message}.` });
+      if (!(error instanceof RowFault)) throw error;
+      faults.push({ path: `row ${row}`, message: ofRow(row, error.message) });
     }
   }
+  if (count === 0) throw new AppError('unreadable', 'The file holds nothing to draw.');
   if (faults.length === 0) return rows;
-  const message = `${faults.length} of ${features.length} rows are not right. Nothing was brought in.`;
+  const message = `${faults.length} of ${count} rows are not right. Nothing was brought in.`;
   throw new AppError('invalid-input', message, faults.slice(0, MOST_FAULTS));
 }

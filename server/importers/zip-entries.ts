@@ -16,7 +16,8 @@ const END_SIZE = 22;
 const LONGEST_COMMENT = 0xffff;
 const LISTED = 0x02014b50;
 const LISTED_SIZE = 46;
-const MOST_ENTRIES = 100;
+/** A workbook with many sheets and pictures has hundreds. */
+const MOST_ENTRIES = 1000;
 const ENCRYPTED = 1;
 
 function unreadable(reason: string): AppError {
@@ -52,7 +53,8 @@ function entryAt(bytes: Buffer, at: number): ZipEntry & { readonly next: number 
 export function zipEntries(bytes: Buffer): ZipEntry[] {
   const end = endOf(bytes);
   const count = bytes.readUInt16LE(end + 10);
-  if (count > MOST_ENTRIES) throw unreadable(`it holds more than ${MOST_ENTRIES} files.`);
+  if (count > MOST_ENTRIES)
+    throw unreadable(`it holds more than ${MOST_ENTRIES.toLocaleString('en-GB')} files.`);
   const entries: ZipEntry[] = [];
   let at = bytes.readUInt32LE(end + 16);
   for (let k = 0; k < count; k += 1) {

@@ -1,5 +1,7 @@
+import type { BuildingAnswer } from '../../shared/schemas/buildings.ts';
 import type { MemberAnswer } from '../../shared/schemas/members.ts';
 import type { PersonAnswer } from '../../shared/schemas/people.ts';
+import type { RegisterRow } from '../../shared/schemas/register.ts';
 import type { RulesVersion } from '../../shared/schemas/rules.ts';
 import type { SchemeAnswer } from '../../shared/schemas/schemes.ts';
 import type { SessionAnswer } from '../../shared/schemas/session.ts';
@@ -48,9 +50,16 @@ export function aPersonAnswer(overrides: Partial<PersonAnswer> = {}): PersonAnsw
     isAdministrator: false,
     hasPassword: true,
     invitedUntil: null,
+    shutOutAt: null,
     createdAt: '2026-05-01T09:00:00.000Z',
     memberships: [],
-    abilities: { invite: false },
+    abilities: {
+      invite: false,
+      withdraw: false,
+      changeEmail: false,
+      shutOut: true,
+      readmit: false,
+    },
     ...overrides,
   };
 }
@@ -84,5 +93,44 @@ export function aCrsAnswer() {
     area: 'North Sea.',
     definition: '+proj=utm +zone=31',
     bounds: [0, 0, 6, 84],
+  };
+}
+
+/** A building of the register of which everything is known. */
+export function aRegisterRow(overrides: Partial<RegisterRow> = {}): RegisterRow {
+  return {
+    id: 1,
+    reference: 'B0001',
+    centre: [1.64, 54.75],
+    name: null,
+    address: '10 Net Street',
+    use: 'terrace',
+    storeys: 2,
+    eavesHeight: 6.2,
+    groundLevel: 3,
+    foundingLevel: 1.6,
+    foundation: 'strip',
+    construction: 'masonry',
+    eOverG: 2.6,
+    poisson: 0.3,
+    listedGrade: 'not listed',
+    condition: 'good',
+    inspected: 'outside',
+    area: 84.5,
+    groundLevelFrom: 'file',
+    assumed: [],
+    version: 1,
+    ...overrides,
+  };
+}
+
+/** The same building with all that is answered of one. */
+export function aBuildingAnswer(overrides: Partial<BuildingAnswer> = {}): BuildingAnswer {
+  return {
+    ...aRegisterRow(),
+    footprint: [],
+    bounds: [1.63, 54.74, 1.65, 54.76],
+    walls: [],
+    ...overrides,
   };
 }

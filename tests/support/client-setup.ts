@@ -18,6 +18,17 @@ function closeOnEscape({ key }: KeyboardEvent): void {
   if (key === 'Escape') document.querySelector<HTMLDialogElement>('dialog[open]')?.close();
 }
 
+/** jsdom knows no media: the window is as wide as at a desk, which no query for narrow ones is true of. */
+function atDesk(media: string): MediaQueryList {
+  return Object.assign(new EventTarget(), {
+    media,
+    matches: media.includes('min-width'),
+    onchange: null,
+    addListener: () => undefined,
+    removeListener: () => undefined,
+  });
+}
+
 /** What a page says in the console is a fault of it. */
 function fail(...said: readonly unknown[]): never {
   throw new Error(`The console was told: ${said.map(String).join(' ')}`);
@@ -28,6 +39,8 @@ if (typeof document !== 'undefined') {
   HTMLDialogElement.prototype.showModal = openDialog;
   HTMLDialogElement.prototype.close = closeDialog;
   Element.prototype.scrollIntoView = () => undefined;
+  Element.prototype.scrollTo = () => undefined;
+  window.matchMedia = atDesk;
   document.addEventListener('keydown', closeOnEscape);
 
   beforeEach(() => {

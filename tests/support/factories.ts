@@ -2,7 +2,8 @@ import { hash } from '@node-rs/argon2';
 import type { LinkPurpose } from '../../shared/schemas/links.ts';
 import type { Role } from '../../shared/schemas/roles.ts';
 import { linkTokenHash } from '../../server/authentication/link-token.ts';
-import { Building, type FootprintRings } from '../../server/models/building.ts';
+import { BuildingFootprint, type FootprintRings } from '../../server/models/building-footprint.ts';
+import { Building, type GroundLevelFrom } from '../../server/models/building.ts';
 import { Membership } from '../../server/models/membership.ts';
 import { Person } from '../../server/models/person.ts';
 import { Scheme } from '../../server/models/scheme.ts';
@@ -92,12 +93,21 @@ function square(place: number): FootprintRings {
 }
 
 /** A building of a scheme; its place in longitude and latitude is near the footprint's. */
-export function aBuilding(
+export async function aBuilding(
   scheme: Scheme,
   overrides: Partial<{
     reference: string;
     name: string;
     address: string;
+    storeys: number;
+    eavesHeight: number;
+    groundLevel: number;
+    foundingLevel: number;
+    construction: string;
+    condition: string;
+    area: number;
+    groundLevelFrom: GroundLevelFrom;
+    removedAt: Date;
     footprint: FootprintRings;
     lonLat: FootprintRings;
     west: number;
@@ -110,7 +120,8 @@ export function aBuilding(
   const [west, south] = [3 + made * 0.0003, 54.86];
   const [east, north] = [west + 0.00015, south + 0.0001];
   const corners = [[west, south], [east, south], [east, north], [west, north], [west, south]] as const; // prettier-ignore
-  return Building.create({
+  const { footprint = square(made), lonLat = [[corners]], ...others } = overrides;
+  const building = await Building.create({
     schemeId: scheme.id,
     reference: `B-${String(made).padStart(4, '0')}`,
     name: null,
@@ -124,12 +135,13 @@ export function aBuilding(
     construction: null,
     listedGrade: null,
     condition: null,
-    footprint: square(made),
-    lonLat: [[corners]],
+    area: 100,
     west,
     south,
     east,
     north,
-    ...overrides,
+    ...others,
   });
+  await BuildingFootprint.create({ buildingId: building.id, footprint, lonLat });
+  return building;
 }

@@ -36,18 +36,22 @@ function makesAnswer(answer: unknown): answer is (body: unknown) => unknown {
 }
 
 /**
- * Puts answers in place of the server's; a function among them makes its own of the body. What is asked
- * for and not there is a fault of the test.
+ * Puts answers in place of the server's; a function among them makes its own of the body, or of the words of
+ * the query where the answer stands under the path alone. What is asked for and not there is a fault of the
+ * test.
  */
 export function fakeApi(answers: Answers): { readonly calls: Call[] } {
   const calls: Call[] = [];
   vi.stubGlobal('fetch', (path: string, init?: RequestInit) => {
     const route = `${init?.method ?? 'GET'} ${path}`;
-    if (!(route in answers)) return Promise.reject(new Error(`Nobody answers ${route}.`));
+    const [alone = '', words] = route.split('?');
+    const known = route in answers ? route : alone;
+    if (!(known in answers)) return Promise.reject(new Error(`Nobody answers ${route}.`));
     const body = bodyOf(init);
     calls.push({ route, body, headers: new Headers(init?.headers) });
-    const answer = answers[route];
-    return Promise.resolve(asResponse(makesAnswer(answer) ? answer(body) : answer));
+    const answer = answers[known];
+    const asked = known === route ? body : new URLSearchParams(words);
+    return Promise.resolve(asResponse(makesAnswer(answer) ? answer(asked) : answer));
   });
   return { calls };
 }

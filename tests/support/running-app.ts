@@ -21,6 +21,7 @@ const UNSET = {
   MIGRATE_URL: undefined,
   PUBLIC_URL: undefined,
   SMTP_URL: undefined,
+  FIRST_ADMINISTRATOR: undefined,
   DEMO: undefined,
 };
 

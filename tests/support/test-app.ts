@@ -1,3 +1,6 @@
+import { mkdtemp, rm } from 'node:fs/promises';
+import { tmpdir } from 'node:os';
+import path from 'node:path';
 import type { Express } from 'express';
 import pg from 'pg';
 import type { DestinationStream } from 'pino';
@@ -5,6 +8,7 @@ import { afterAll, beforeAll } from 'vitest';
 import { createApp } from '../../server/app.ts';
 import { connectDatabase } from '../../server/database/connect.ts';
 import { readEnv } from '../../server/env.ts';
+import { openJobs, openJobsInline } from '../../server/jobs/open-jobs.ts';
 import { createLogger } from '../../server/logger.ts';
 import type { Letter } from '../../server/mail/mailer.ts';
 import type { Services } from '../../server/services.ts';
@@ -18,14 +22,20 @@ export type TestApp = {
   readonly letters: Letter[];
 };
 
-/** The application on a database of its own for the tests of one file; `env` and `log` override. */
+/** The application on a database of its own for the tests of one file; others override. */
 export function testApp({
   env: overrides = {},
   log,
+  root = process.cwd(),
+  threads = false,
 }: {
   readonly env?: Readonly<Record<string, string>>;
   /** Where the log goes; nowhere else. */
   readonly log?: DestinationStream;
+  /** Where the built client is. */
+  readonly root?: string;
+  /** Jobs in threads of their own, as they are in earnest. */
+  readonly threads?: boolean;
 } = {}): TestApp {
   const letters: Letter[] = [];
   let running: { app: Express; services: Services } | undefined;
@@ -33,6 +43,7 @@ export function testApp({
 
   beforeAll(async () => {
     const copy = await createTestDatabase();
+    const uploads = await mkdtemp(path.join(tmpdir(), 'groundsill-uploads-'));
     const env = readEnv({
       NODE_ENV: 'test',
       DATABASE_URL: copy.serverUrl,
@@ -40,6 +51,7 @@ export function testApp({
       PUBLIC_URL: 'http://127.0.0.1:4600',
       DEMO: 'true',
       LOG_LEVEL: 'silent',
+      UPLOADS_FOLDER: uploads,
       ...overrides,
     });
     const database = connectDatabase(env.DATABASE_URL);
@@ -50,18 +62,22 @@ export function testApp({
         return Promise.resolve();
       },
     };
-    const services = {
+    const tools = {
       env,
       database,
       mailer,
       logger: createLogger(env, log),
       tiles: createTileCache(),
     };
-    running = { services, app: createApp(services, pool, process.cwd()) };
+    const jobs = threads ? openJobs(tools) : openJobsInline(tools);
+    const services = { ...tools, jobs };
+    running = { services, app: createApp(services, pool, root) };
     close = async () => {
+      await jobs.close();
       await database.close();
       await pool.end();
       await copy.drop();
+      await rm(uploads, { recursive: true });
     };
   });
 

@@ -2,9 +2,12 @@ import type { Express } from 'express';
 import type TestAgent from 'supertest/lib/agent.js';
 import { ROLES } from '../../shared/schemas/roles.ts';
 import { defaultRules } from '../../server/commands/default-rules.ts';
+import { NO_OPTIONS } from '../../server/imports/first-options.ts';
 import { BackgroundFeature } from '../../server/models/background-feature.ts';
 import type { Building } from '../../server/models/building.ts';
 import type { Person } from '../../server/models/person.ts';
+import { RegisterChange } from '../../server/models/register-change.ts';
+import { RegisterImport } from '../../server/models/register-import.ts';
 import { SchemeRules } from '../../server/models/scheme-rules.ts';
 import type { Scheme } from '../../server/models/scheme.ts';
 import { aBuilding, aMember, anAdministrator, aPerson, aScheme } from './factories.ts';
@@ -18,6 +21,8 @@ export type Walker = (typeof WALKERS)[number];
 export type Place = {
   readonly scheme: Scheme;
   readonly building: Building;
+  readonly importId: string;
+  readonly change: RegisterChange;
   readonly mark: string;
 };
 
@@ -33,7 +38,15 @@ async function aPlace(mark: string, author: Person): Promise<Place> {
   });
   const rules = defaultRules('2026-12-01');
   await SchemeRules.create({ schemeId: scheme.id, version: 1, rules, createdBy: author.id });
-  return { scheme, building, mark };
+  const change = await RegisterChange.create({
+    ...{ schemeId: scheme.id, personId: null, kind: 'draw' },
+    ...{ source: `${mark} survey`, importId: null, undoes: null },
+  });
+  const sent = await RegisterImport.create({
+    ...{ schemeId: scheme.id, personId: null, state: 'asking' },
+    ...{ fileName: `${mark}.geojson`, options: NO_OPTIONS },
+  });
+  return { scheme, building, importId: sent.id, change, mark };
 }
 
 /** Two places, everybody who walks, and how to enter as each of them. */

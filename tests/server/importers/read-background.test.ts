@@ -93,10 +93,14 @@ describe('GeoJSON', () => {
     );
     expect(await refusal(text.replace('"NaN"', '1e999'))).toMatch(/^invalid-input: 1 of 1 rows/);
     expect(await refusal(text.slice(0, -3))).toMatch(/the text ends too early/);
-    expect(await refusal(Buffer.from([0xff, 0xfe, 0x00]))).toMatch(/neither a zipped Shapefile/);
+    const western = Buffer.from(
+      text.replace('"NaN"', '54').replace('null', '{"name":"Å"}'),
+      'latin1',
+    );
+    expect(await refusal(western)).toMatch(/^unreadable: The file is not a text in UTF-8/);
   });
 
-  test.each(['{"type":"Feature"}', '[]', '"x"', 'null', '{"type":"FeatureCollection"}'])(
+  test.each(['{}', '[]', '{"type":"Topology"}', '[1,2]', '{"type":"FeatureCollection"}'])(
     'that is no collection is refused: %s',
     async (text) => {
       expect(await refusal(text)).toMatch(/is not a FeatureCollection/);
@@ -126,7 +130,17 @@ describe('GeoJSON', () => {
   });
 
   test('that holds millions of empty lists is refused', async () => {
-    expect(await refusal(`[${'[],'.repeat(3_000_001)}0]`)).toMatch(/^too-large: /);
+    const lists = `[${'[],'.repeat(3_000_001)}0]`;
+    expect(await refusal(lists)).toMatch(/is not a FeatureCollection/);
+    const file = collection([]).replace('[]', lists);
+    expect(await refusal(file)).toMatch(/^too-large: /);
+  });
+
+  test('may be one feature, or features line by line', async () => {
+    const one = JSON.stringify(feature('LineString', LINE));
+    expect(await read(one)).toHaveLength(1);
+    expect(await read(`${one}\n${one}\n`)).toHaveLength(2);
+    expect(await read(`\u001e${one}\n\u001e${one}`)).toHaveLength(2);
   });
 
   test('with names that are not texts has none', async () => {
@@ -159,7 +173,7 @@ describe('a Shapefile', () => {
     const points = shpFile('points', [SHAPE]);
     const prj = { name: 'a.prj', content: UTM_31_PRJ };
     expect(await refusal(zipFile([{ name: 'a.shp', content: points }, prj]))).toMatch(
-      /shapes that are neither lines nor areas/,
+      /^invalid-input: 1 of 1 rows/,
     );
     const empty = Buffer.concat([shpFile('lines', []), Buffer.from('0000000100000002', 'hex'), Buffer.alloc(4)]); // prettier-ignore
     expect(await refusal(zipFile([{ name: 'a.shp', content: empty }, prj]))).toMatch(
@@ -176,7 +190,7 @@ describe('a Shapefile', () => {
   });
 
   test.each([
-    ['no .shp', [{ name: 'a.txt', content: 'x' }], /holds 0 \.shp files/],
+    ['no .shp', [{ name: 'a.md', content: 'x' }], /holds 0 \.shp files/],
     ['no .prj', [{ name: 'a.shp', content: shpFile('lines', [SHAPE]) }], /has no \.prj file/],
     [
       'another grid’s name',
@@ -184,7 +198,7 @@ describe('a Shapefile', () => {
         { name: 'a.shp', content: '' },
         { name: 'a.prj', content: 'GEOGRAPHIC MOON' },
       ],
-      /grid that is not known/,
+      /describes no system that can be read/,
     ],
     [
       'an endless .prj',
@@ -192,7 +206,7 @@ describe('a Shapefile', () => {
         { name: 'a.shp', content: '' },
         { name: 'a.prj', content: UTM_31_PRJ.repeat(30) },
       ],
-      /grid that is not known/,
+      /describes no system that can be read/,
     ],
   ])('with %s is refused', async (_, files, words) => {
     expect(await refusal(zipFile(files))).toMatch(words);
@@ -255,16 +269,16 @@ describe('an archive', () => {
     expect(await refusal(zipped({ name: 'more.ZIP', content: 'x' }))).toMatch(
       /archive in the archive/,
     );
-    expect(await refusal(zipped({ name: 'a/b/c/d/e.dbf', content: 'x' }))).toMatch(/too deep/);
+    expect(await refusal(zipped({ name: 'a/b/c/d/e/f.dbf', content: 'x' }))).toMatch(/too deep/);
   });
 
   test('that unpacks to far too much is refused before it is unpacked', async () => {
     const zeros = Buffer.alloc(30 * 1024 * 1024);
     expect(await refusal(zipped({ name: 'a.dbf', content: zeros }))).toMatch(/unpacks to far too/);
-    const claims = { unpacked: 101 * 1024 * 1024 };
+    const claims = { unpacked: 401 * 1024 * 1024 };
     const noise = Buffer.from(Array.from({ length: 500_000 }, (_, k) => (k * k * 31) % 251));
     expect(await refusal(zipped({ name: 'b.bin', content: noise, claims }))).toMatch(
-      /^(too-large|unreadable): .*(100 MB|far too much)/,
+      /^(too-large|unreadable): .*(400 MB|far too much)/,
     );
   });
 
@@ -277,8 +291,8 @@ describe('an archive', () => {
   });
 
   test('of too many files, or of files that overlap, is refused', async () => {
-    const many = Array.from({ length: 101 }, (_, k) => ({ name: `${k}.txt`, content: 'x' }));
-    expect(await refusal(zipFile(many))).toMatch(/more than 100 files/);
+    const many = Array.from({ length: 1001 }, (_, k) => ({ name: `${k}.txt`, content: 'x' }));
+    expect(await refusal(zipFile(many))).toMatch(/more than 1,000 files/);
     expect(await refusal(zipped({ name: 'A.SHP', content: 'x' }))).toMatch(/overlap/);
   });
 

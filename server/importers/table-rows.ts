@@ -1,0 +1,105 @@
+import { IMPORT_LIMITS } from '../../shared/schemas/imports.ts';
+import { AppError } from '../errors.ts';
+import { noProperties } from './flat-properties.ts';
+import { looksLikeWkt, readWkt, sridOf } from './geometry/read-wkt.ts';
+import { RowFault } from './geometry/row-fault.ts';
+import type { FileCrs, Scalar, SourceRow } from './source.ts';
+
+/** A record of a table as people see it: its number, and a value for each column. */
+export type TableRecord = { readonly row: number; readonly values: readonly Scalar[] };
+
+export type Heading = {
+  readonly columns: readonly string[];
+  /** Which column holds footprints in well-known text. */
+  readonly wkt: number | undefined;
+  readonly crs: FileCrs | null;
+};
+
+const LONGEST_NAME = 300;
+
+export function isBlank(value: Scalar | undefined): boolean {
+  return value === null || value === undefined || (typeof value === 'string' && !/\S/.test(value));
+}
+
+export function tooWide(width: number): AppError {
+  const found = width.toLocaleString('en-GB');
+  const message = `The table has ${found} columns. At most ${IMPORT_LIMITS.columns} are taken.`;
+  return new AppError('too-large', message);
+}
+
+/** Names of columns, each once and none blank. */
+function columnNames(values: readonly Scalar[]): string[] {
+  const names: string[] = [];
+  for (const [index, value] of values.entries()) {
+    const given = isBlank(value) ? `column ${index + 1}` : String(value).trim();
+    const short = given.replaceAll(/\s+/g, ' ').slice(0, LONGEST_NAME - 10);
+    let name = short;
+    for (let k = 2; names.includes(name); k += 1) name = `${short} (${k})`;
+    names.push(name);
+  }
+  return names;
+}
+
+/** The column in which most values are well-known text, by what it holds and not by its name. */
+function wktColumn(columns: number, sample: readonly TableRecord[]): number | undefined {
+  const fits = Array.from({ length: columns }, (_, index) => {
+    const filled = sample.map(({ values }) => values[index]).filter((value) => !isBlank(value));
+    const texts = filled.filter((value) => typeof value === 'string' && looksLikeWkt(value));
+    return texts.length * 2 > filled.length ? texts.length : 0;
+  });
+  const most = Math.max(...fits);
+  return most === 0 ? undefined : fits.indexOf(most);
+}
+
+function crsOf(wkt: number | undefined, sample: readonly TableRecord[]): FileCrs | null {
+  if (wkt === undefined) return null;
+  const texts = sample.map(({ values }) => values[wkt]).filter((one) => typeof one === 'string');
+  const code = texts.map(sridOf).find((one) => one !== undefined && one > 0);
+  return code === undefined ? null : { code, said: `SRID=${code}` };
+}
+
+/** What the heading of a table says, and which column of a sample of its rows holds footprints. */
+export function headingOf(names: readonly Scalar[], sample: readonly TableRecord[]): Heading {
+  const width = names.findLastIndex((value) => !isBlank(value)) + 1;
+  if (width > IMPORT_LIMITS.columns) throw tooWide(width);
+  if (width === 0) throw new AppError('unreadable', 'The table has no row with names of columns.');
+  if (names.some((value) => typeof value === 'string' && looksLikeWkt(value))) {
+    throw new AppError(
+      'unreadable',
+      'The first row holds values. It has to hold the names of the columns.',
+    );
+  }
+  const columns = columnNames(names.slice(0, width));
+  const wkt = wktColumn(width, sample);
+  if (width === 1 && wkt === undefined) {
+    const message =
+      'The file is no table that can be read: it has one column. Separate values by commas, semicolons or tabs.';
+    throw new AppError('unreadable', message);
+  }
+  return { columns, wkt, crs: crsOf(wkt, sample) };
+}
+
+function geometryIn(value: Scalar | undefined): Pick<SourceRow, 'geometry' | 'fault'> {
+  if (isBlank(value)) return { geometry: null, fault: null };
+  try {
+    return { geometry: readWkt(String(value)), fault: null };
+  } catch (error) {
+    if (error instanceof RowFault) return { geometry: null, fault: error.message };
+    throw error;
+  }
+}
+
+/** A row of a table: its values by column and the footprint in its well-known text. */
+export function tableRow({ columns, wkt }: Heading, { row, values }: TableRecord): SourceRow {
+  const properties = noProperties();
+  for (const [index, name] of columns.entries()) {
+    const value = values[index] ?? null;
+    if (index !== wkt) properties[name] = isBlank(value) ? null : value;
+  }
+  if (!values.slice(columns.length).every(isBlank)) {
+    const fault = `It has ${values.length} values for ${columns.length} columns.`;
+    return { row, geometry: null, fault, properties };
+  }
+  const shape = wkt === undefined ? { geometry: null, fault: null } : geometryIn(values[wkt]);
+  return { row, ...shape, properties };
+}
