@@ -10,6 +10,9 @@ export const crsEntrySchema = z.object({
   bbox: z.tuple([z.number(), z.number(), z.number(), z.number()]),
   unit: z.string().nullable(),
   area: z.string().nullable(),
+  wkt: z.string().nullable(),
+  /** In metres, of the shift to WGS 84. */
+  accuracy: z.number().nullable(),
 });
 
 export type CrsEntry = z.infer<typeof crsEntrySchema>;

@@ -13,24 +13,36 @@ export type ListedCrs = {
 
 const LAST_EPSG = 32767;
 
-async function readList(): Promise<readonly ListedCrs[]> {
+async function readEvery(): Promise<readonly CrsEntry[]> {
   const file = createRequire(import.meta.url).resolve('epsg-index/all.json');
   const all: unknown = JSON.parse(await readFile(file, 'utf8'));
-  return Object.values(z.record(z.string(), crsEntrySchema).parse(all))
-    .filter(({ kind, unit, code }) => {
-      return kind === 'CRS-PROJCRS' && unit === 'metre' && code <= LAST_EPSG;
-    })
-    .map((entry) => ({
-      entry,
-      nameWords: foldedWords(entry.name),
-      areaWords: foldedWords(entry.area ?? ''),
-    }));
+  const entries = Object.values(z.record(z.string(), crsEntrySchema).parse(all));
+  return entries.filter(({ code }) => code <= LAST_EPSG);
 }
 
-/** Reads the list when it is first asked for, and once: it is large and never changes. */
-function readOnce(): () => Promise<readonly ListedCrs[]> {
-  let list: Promise<readonly ListedCrs[]> | undefined;
-  return () => (list ??= readList());
+async function readList(isListed: (entry: CrsEntry) => boolean): Promise<readonly ListedCrs[]> {
+  return (await everyCrs()).filter(isListed).map((entry) => ({
+    entry,
+    nameWords: foldedWords(entry.name),
+    areaWords: foldedWords(entry.area ?? ''),
+  }));
 }
 
-export const crsList = readOnce();
+/** Reads a list when it is first asked for, and once: it is large and never changes. */
+function readOnce<T>(read: () => Promise<T>): () => Promise<T> {
+  let list: Promise<T> | undefined;
+  return () => (list ??= read());
+}
+
+/** Every EPSG system of the index. */
+export const everyCrs = readOnce(readEvery);
+
+/** The projected ones in metres. */
+export const crsList = readOnce(() =>
+  readList(({ kind, unit }) => kind === 'CRS-PROJCRS' && unit === 'metre'),
+);
+
+/** The projected ones in any unit and those in degrees. */
+export const fileCrsList = readOnce(() =>
+  readList(({ kind }) => kind === 'CRS-PROJCRS' || kind === 'CRS-GEOGCRS'),
+);

@@ -1,7 +1,8 @@
 import { readFile } from 'node:fs/promises';
 import { createRequire } from 'node:module';
 import { z } from 'zod';
-import { crsEntrySchema } from './crs-entry.ts';
+import { crsEntrySchema, type CrsEntry } from './crs-entry.ts';
+import { stretchFault } from './stretch-fault.ts';
 import { usableCrs, type UsableCrs } from './usable-crs.ts';
 
 const require = createRequire(import.meta.url);
@@ -18,8 +19,22 @@ async function readEntry(code: number): Promise<unknown> {
   }
 }
 
-/** The system of an EPSG number, or why a scheme cannot be drawn on it; undefined where there is none. */
-export async function findCrs(code: number): Promise<UsableCrs | undefined> {
+/** What the index knows of an EPSG number, usable or not. */
+export async function findEntry(code: number): Promise<CrsEntry | undefined> {
   const entry = await readEntry(code);
-  return entry === undefined ? undefined : usableCrs(crsEntrySchema.parse(entry));
+  return entry === undefined ? undefined : crsEntrySchema.parse(entry);
+}
+
+/** The system of an EPSG number, or why nothing can be drawn on it; undefined where there is none. */
+export async function findCrs(code: number): Promise<UsableCrs | undefined> {
+  const entry = await findEntry(code);
+  return entry === undefined ? undefined : usableCrs(entry);
+}
+
+/** The same for a new scheme, whose walls must have the length that they have on the ground. */
+export async function findCrsForScheme(code: number): Promise<UsableCrs | undefined> {
+  const found = await findCrs(code);
+  if (found === undefined || 'fault' in found) return found;
+  const fault = stretchFault(found.crs);
+  return fault === undefined ? found : { fault };
 }

@@ -132,6 +132,8 @@ describe('the role that serves', () => {
 describe.each([
   ['audit_entries', `action = 'other'`],
   ['scheme_rules', `rules = '{}'`],
+  ['register_changes', `kind = 'other'`],
+  ['building_changes', `version = 7`],
 ])('rows of %s', (table, change) => {
   beforeAll(async () => {
     await owner.query(`
@@ -139,15 +141,28 @@ describe.each([
         insert into people (id, email, name)
         values (gen_random_uuid(), gen_random_uuid() || '@example.org', 'A') returning id
       ), scheme as (
-        insert into schemes (id, name, crs) values (gen_random_uuid(), 'A', 32631) returning id
+        insert into schemes (id, name, crs) values (gen_random_uuid(), gen_random_uuid(), 32631) returning id
       ), entry as (
         insert into audit_entries (action, subject_kind, subject_id) values ('a', 'b', 'c')
+      ), building as (
+        insert into buildings (scheme_id, reference, west, south, east, north)
+        select id, 'A', 0, 0, 0, 0 from scheme returning id
+      ), change as (
+        insert into register_changes (id, scheme_id, kind)
+        select gen_random_uuid(), id, 'draw' from scheme returning id
+      ), history as (
+        insert into building_changes (change_id, building_id, version)
+        select change.id, building.id, 1 from change, building
       )
       insert into scheme_rules (scheme_id, version, rules, created_by)
       select scheme.id, 1, '[]', person.id from scheme, person`);
   });
 
-  const CHANGES = [`update ${table} set ${change}`, `delete from ${table}`, `truncate ${table}`];
+  const CHANGES = [
+    `update ${table} set ${change}`,
+    `delete from ${table}`,
+    `truncate ${table} cascade`,
+  ];
 
   test.each(CHANGES)('the role that serves may not: %s', async (text) => {
     expect(await codeOf(server, text)).toBe(DENIED);
@@ -163,5 +178,10 @@ test('tables of other migrations are not forgotten here', async () => {
     `select distinct tgrelid::regclass::text as name from pg_trigger
      where tgname like '%_refuse_change' order by name`,
   );
-  expect(rows.map(({ name }) => name)).toEqual(['audit_entries', 'scheme_rules']);
+  expect(rows.map(({ name }) => name)).toEqual([
+    'audit_entries',
+    'building_changes',
+    'register_changes',
+    'scheme_rules',
+  ]);
 });

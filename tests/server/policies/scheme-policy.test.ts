@@ -11,6 +11,7 @@ import {
 const MAY: Readonly<Record<SchemeAction, readonly (Role | 'administrator')[]>> = {
   readScheme: ['designer', 'assessor', 'owner', 'witness', 'administrator'],
   readRegister: ['designer', 'assessor', 'witness', 'administrator'],
+  updateRegister: ['assessor'],
   updateScheme: ['administrator'],
   archiveScheme: ['administrator'],
   readMembers: ['administrator'],
@@ -23,6 +24,7 @@ const MAY: Readonly<Record<SchemeAction, readonly (Role | 'administrator')[]>> =
 const ACTIONS = [
   'readScheme',
   'readRegister',
+  'updateRegister',
   'updateScheme',
   'archiveScheme',
   'readMembers',
@@ -59,6 +61,7 @@ test('in an archived scheme everything is read and nothing is changed, but that 
   const abilities = schemeAbilities(actor('administrator'), true);
   for (const action of ACTIONS) expect(abilities[action]).toBe(!changesScheme(action));
   expect(ACTIONS.filter(changesScheme)).toEqual([
+    'updateRegister',
     'updateScheme',
     'manageMembers',
     'updateRules',

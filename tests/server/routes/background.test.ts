@@ -192,17 +192,43 @@ describe('an upload that is not right', () => {
     const agent = await asAdministrator();
     const address = `/api/schemes/${scheme.id}/background/streets`;
     const none = await agent.put(address).field('layer', 'streets');
-    const json = await agent.put(address).send({ file: 'x' });
     const other = await agent.put(address).attach('upload', Buffer.from('x'), 'x');
     const two = await agent
       .put(address)
       .attach('file', Buffer.from('x'), 'x')
       .attach('file', Buffer.from('x'), 'x');
-    const answers = [none, json, other, two];
-    expect(answers.map(({ status }) => status)).toEqual([422, 422, 422, 422]);
+    const answers = [none, other, two];
+    expect(answers.map(({ status }) => status)).toEqual([422, 422, 422]);
     for (const { body } of answers) {
       expect(body).toMatchObject({ error: { fields: [{ path: 'file' }] } });
     }
+  });
+
+  test('is refused in words where it is no form with a file', async () => {
+    const scheme = await aScheme();
+    const address = `/api/schemes/${scheme.id}/background/streets`;
+    const answer = await (await asAdministrator()).put(address).send({ file: 'x' });
+    expect(answer.status).toBe(415);
+    expect(answer.body).toMatchObject({ error: { code: 'wrong-content-type' } });
+  });
+
+  test('is refused far from where the system of the scheme is used', async () => {
+    const scheme = await aScheme();
+    const agent = await asAdministrator();
+    const exchanged = LINE.map(([x, y]) => [y, x]);
+    const all = await put(agent, scheme, 'streets', collection([street('Quay', exchanged)]));
+    expect(all.status).toBe(422);
+    expect(all.body).toMatchObject({
+      error: {
+        message: expect.stringMatching(
+          /^These lie 5\d{3} km outside of where EPSG:32631 is used\. Are the axes exchanged\?$/,
+        ) as string,
+      },
+    });
+    const some = collection([street(), street('Quay', exchanged)]);
+    const one = await put(agent, scheme, 'streets', some);
+    expect(one.text).toContain('1 of 2 lie ');
+    expect(await kept(scheme)).toEqual([]);
   });
 
   test('is refused beyond 20 MB', async () => {

@@ -106,7 +106,9 @@ describe('one building', () => {
       reference: building.reference,
       name: 'Lighthouse',
       storeys: null,
-      footprint: building.footprint,
+      area: 100,
+      assumed: ['storeys', 'eavesHeight', 'foundingDepth', 'eOverG', 'poisson'],
+      version: 1,
       bounds: [building.west, building.south, building.east, building.north],
     });
   });

@@ -32,8 +32,20 @@ describe('searching systems', () => {
     ['reunion', 2975],
     ['Réunion', 2975],
     ['rd new', 28992],
+    ['27700 british', 27700],
+    ['Spain', 25829],
+    ['Spain', 25831],
   ])('"%s" finds EPSG:%d', async (search, code) => {
     expect((await found(search)).slice(0, 6)).toContain(code);
+  });
+
+  test.each([
+    ['27700 british', 27700],
+    ['Spain', 25830],
+    ['France', 2154],
+    ['Sweden', 3006],
+  ])('of "%s" the first is EPSG:%d', async (search, code) => {
+    expect((await found(search))[0]).toBe(code);
   });
 
   test('finds a zone by its name', async () => {
@@ -48,6 +60,12 @@ describe('searching systems', () => {
     expect(await found('California zone 1 (ftUS)')).toEqual([]);
     expect(await found('5513')).toEqual([]);
     expect(await found('4326')).toEqual([]);
+  });
+
+  test('leaves out maps of the world, on which lengths are wrong', async () => {
+    expect(await found('3857')).toEqual([]);
+    expect(await found('Pseudo-Mercator')).toEqual([]);
+    expect(await found('World Mercator')).toEqual([]);
   });
 
   test('finds nothing for nothing, and nothing for nonsense', async () => {
@@ -66,7 +84,48 @@ describe('searching systems', () => {
   });
 });
 
+describe('searching systems of files', () => {
+  async function foundForFile(search: string): Promise<number[]> {
+    const answer = await agent.get('/api/crs').query({ search, for: 'file' });
+    expect(answer.status).toBe(200);
+    return crsListSchema.parse(answer.body).map(({ code }) => code);
+  }
+
+  test.each([
+    ['4326', 4326],
+    ['WGS 84', 4326],
+    ['ETRS89', 4258],
+    ['EPSG:2225', 2225],
+    ['California zone 1 (ftUS)', 2225],
+    ['british national grid', 27700],
+    ['Pseudo-Mercator', 3857],
+    ['WGS 84 / UTM zone 31N', 32631],
+  ])('"%s" finds EPSG:%d', async (search, code) => {
+    expect((await foundForFile(search)).slice(0, 6)).toContain(code);
+  });
+
+  test('leaves out those that nothing can be placed by', async () => {
+    expect(await foundForFile('5513')).toEqual([]);
+    expect(await foundForFile('NTF (Paris)')).not.toContain(4807);
+  });
+
+  test('takes no other purpose', async () => {
+    const answer = await agent.get('/api/crs').query({ search: 'utm', for: 'tunnels' });
+    expect(answer.status).toBe(422);
+  });
+});
+
 describe('one system', () => {
+  test.each([
+    [4326, 'World.'],
+    [2225, 'United States (USA)'],
+  ])('EPSG:%d can be a file’s', async (code, area) => {
+    const answer = await agent.get(`/api/crs/${code}?for=file`);
+    expect(answer.status).toBe(200);
+    expect(crsSchema.parse(answer.body).area).toContain(area);
+    expect((await agent.get(`/api/crs/${code}`)).status).toBe(422);
+  });
+
   async function definitionOf(code: number): Promise<string> {
     const answer = await agent.get(`/api/crs/${code}`);
     expect(answer.status).toBe(200);
@@ -98,6 +157,17 @@ describe('one system', () => {
       error: {
         message:
           'EPSG:4326 (WGS 84) is not a projected system. Choose one with eastings and northings in metres.',
+      },
+    });
+  });
+
+  test('is refused in words where its lengths are not those on the ground', async () => {
+    const answer = await agent.get('/api/crs/3857');
+    expect(answer.status).toBe(422);
+    expect(answer.body).toMatchObject({
+      error: {
+        message:
+          'Lengths on EPSG:3857 (WGS 84 / Pseudo-Mercator) are not those on the ground: 100 m can be 1,144 m. Choose a national grid or a UTM zone.',
       },
     });
   });

@@ -1,3 +1,4 @@
+import { QueryTypes } from 'sequelize';
 import { beforeAll, describe, expect, test, vi } from 'vitest';
 import { z } from 'zod';
 import { invitedSchema, personSchema } from '../../../shared/schemas/people.ts';
@@ -6,6 +7,7 @@ import { AuditEntry } from '../../../server/models/audit-entry.ts';
 import { Membership } from '../../../server/models/membership.ts';
 import { Person } from '../../../server/models/person.ts';
 import { SingleUseLink } from '../../../server/models/single-use-link.ts';
+import type { Services } from '../../../server/services.ts';
 import { aLink, aMember, anAdministrator, aPerson, aScheme } from '../../support/factories.ts';
 import { signIn, visitor } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
@@ -18,6 +20,15 @@ let administrator: Person;
 beforeAll(async () => {
   administrator = await anAdministrator();
 });
+
+/** How many in this database wait for somebody else's transaction. */
+async function waitingForLocks({ database }: Services): Promise<number> {
+  const [row] = await database.query<{ count: string }>(
+    `select count(*) from pg_stat_activity where datname = current_database() and wait_event_type = 'Lock'`,
+    { type: QueryTypes.SELECT },
+  );
+  return Number(row?.count);
+}
 
 function asAdministrator() {
   return signIn(app(), administrator);
@@ -61,7 +72,7 @@ describe('reading people', () => {
 
 describe('inviting a person', () => {
   test('keeps them, their roles and a hash of the link, sends the letter, and tells the trail', async () => {
-    const scheme = await aScheme({ name: 'Port Dogger' });
+    const scheme = await aScheme({ name: 'North Mole' });
     const agent = await asAdministrator();
     const answer = await agent.post('/api/people').send({
       name: ' Ada Lind ',
@@ -158,6 +169,21 @@ describe('inviting a person', () => {
     expect(answer.status).toBe(409);
     expect(answer.body).toMatchObject({ error: { code: 'archived' } });
     expect(await Person.count({ where: { name: 'Late' } })).toBe(0);
+  });
+
+  test('does not add to a scheme that is being archived meanwhile', async () => {
+    const [agent, scheme] = [await asAdministrator(), await aScheme()];
+    const form = { name: 'Later', email: 'later@example.org' };
+    const memberships = [{ schemeId: scheme.id, role: 'owner' }];
+    const answer = await services().database.transaction(async (transaction) => {
+      await scheme.update({ archivedAt: new Date() }, { transaction });
+      const asked = agent.post('/api/people').send({ ...form, memberships });
+      const waiting = asked.then((answered) => answered);
+      await expect.poll(() => waitingForLocks(services()), { timeout: 10_000 }).toBe(1);
+      return () => waiting;
+    });
+    expect(await answer()).toMatchObject({ status: 409, body: { error: { code: 'archived' } } });
+    expect(await Person.count({ where: form })).toBe(0);
   });
 
   test('stands where the letter cannot be sent, and says so', async () => {

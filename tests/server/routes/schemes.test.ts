@@ -105,8 +105,42 @@ describe('creating a scheme', () => {
     [2056, 'CH1903+'],
   ])('takes EPSG:%d, %s', async (crs) => {
     const agent = await asAdministrator();
-    const answer = await agent.post('/api/schemes').send({ name: 'Elsewhere', crs });
+    const answer = await agent.post('/api/schemes').send({ name: `On ${crs}`, crs });
     expect(answer.status).toBe(201);
+  });
+
+  test('refuses a name that another one has, whatever its capitals', async () => {
+    const agent = await asAdministrator();
+    const { name } = await aScheme({ name: 'Nørre Havn' });
+    for (const given of [name, 'NØRRE HAVN', ` ${name} `]) {
+      const answer = await agent.post('/api/schemes').send({ name: given, crs: 32631 });
+      expect(answer.body).toMatchObject({
+        error: { code: 'already-exists', fields: [{ path: 'name' }] },
+      });
+    }
+    expect(await Scheme.count({ where: { name } })).toBe(1);
+  });
+
+  test('takes the name of an archived one, which is then not brought back', async () => {
+    const agent = await asAdministrator();
+    const old = await aScheme({ name: 'Old Harbour', archivedAt: new Date() });
+    const answer = await agent.post('/api/schemes').send({ name: 'Old Harbour', crs: 32631 });
+    expect(answer.status).toBe(201);
+    const back = await agent
+      .put(`/api/schemes/${old.id}/archived`)
+      .send({ archived: false, version: 1 });
+    expect(back.body).toMatchObject({ error: { code: 'already-exists' } });
+    expect((await old.reload()).archivedAt).not.toBeNull();
+  });
+
+  test('refuses to be renamed to another one', async () => {
+    const [one, other] = [await aScheme(), await aScheme()];
+    const agent = await asAdministrator();
+    const answer = await agent
+      .patch(`/api/schemes/${one.id}`)
+      .send({ version: 1, name: other.name });
+    expect(answer.status).toBe(409);
+    expect(await one.reload()).toMatchObject({ version: 1 });
   });
 
   test.each([
@@ -116,6 +150,7 @@ describe('creating a scheme', () => {
     [6244, /cannot be laid on the map/],
     [2000, /cannot be laid on the map/],
     [9999, /There is no system EPSG:9999/],
+    [3857, /Lengths on .* are not those on the ground/],
   ])('refuses EPSG:%d in words', async (crs, words) => {
     const before = await Scheme.count();
     const agent = await asAdministrator();

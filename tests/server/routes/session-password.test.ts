@@ -94,12 +94,36 @@ describe('changing the password', () => {
   test.each([12, 200])('takes one of %i characters', async (length) => {
     const person = await aPerson();
     const agent = await signIn(app(), person);
-    const newPassword = 'ø'.repeat(length);
+    const newPassword = 'mølle og å, '.repeat(17).slice(0, length - 1) + 'ø';
     const answer = await agent
       .put('/api/session/password')
       .send({ currentPassword: PASSWORD, newPassword });
     expect(answer.status).toBe(200);
     expect(await isPasswordOf(person, newPassword)).toBe(true);
+  });
+
+  test.each([
+    ['Password-2026', /one of the first/],
+    [PASSWORD, /another one than you have/],
+  ])('does not take "%s"', async (newPassword, words) => {
+    const person = await aPerson();
+    const agent = await signIn(app(), person);
+    const answer = await agent
+      .put('/api/session/password')
+      .send({ currentPassword: PASSWORD, newPassword });
+    const message = expect.stringMatching(words) as string;
+    expect(answer.body).toMatchObject({ error: { fields: [{ path: 'newPassword', message }] } });
+    expect(await isPasswordOf(person, PASSWORD)).toBe(true);
+  });
+
+  test('does not take the name of the e-mail address in it', async () => {
+    const person = await aPerson();
+    const agent = await signIn(app(), person);
+    const newPassword = `the gate of ${person.email.replace('@example.org', '')}`;
+    const answer = await agent
+      .put('/api/session/password')
+      .send({ currentPassword: PASSWORD, newPassword });
+    expect(answer.status).toBe(422);
   });
 
   test('is done by one of two at once', async () => {

@@ -43,8 +43,33 @@ describe('reading the session', () => {
   });
 
   test('is kept from caches of others by a cookie out of reach of scripts', async () => {
-    const cookie = cookieOf(await request(app()).get('/api/session'));
-    expect(cookie).toMatch(/^groundsill=.*HttpOnly; SameSite=Lax$/);
+    const answer = await request(app()).get('/api/session');
+    expect(cookieOf(answer)).toMatch(/^groundsill-visitor=.*HttpOnly; SameSite=Lax$/);
+    expect(answer.headers['cache-control']).toBe('no-store');
+  });
+
+  test('leaves nothing behind for who is not signed in', async () => {
+    const count = 'select count(*)::int as rows from sessions';
+    const [before] = await services().database.query(count);
+    await request(app()).get('/api/session');
+    await visitor(app());
+    expect(await services().database.query(count)).toMatchObject([before, {}]);
+  });
+
+  test('gives a visitor one token, and no other visitor the same', async () => {
+    const [one, other] = [request.agent(app()), request.agent(app())];
+    const tokens = [];
+    for (const agent of [one, one, other]) {
+      tokens.push(sessionSchema.parse((await agent.get('/api/session')).body).csrfToken);
+    }
+    expect(tokens[0]).toBe(tokens[1]);
+    expect(tokens[0]).not.toBe(tokens[2]);
+    const body = { email: 'nobody@example.org', password: 'x' };
+    const forged = await one
+      .post('/api/session')
+      .set('X-CSRF-Token', tokens[2] ?? '')
+      .send(body);
+    expect(forged.body).toMatchObject({ error: { code: 'csrf-failed' } });
   });
 });
 

@@ -26,7 +26,7 @@ function writeTown(...references: string[]): void {
   const properties = {
     ...{ name: null, address: '1 Rope Wharf', use: 'dwelling', storeys: 2, eavesHeight: 6 },
     ...{ groundLevel: 3, foundingLevel: null, foundation: 'strip', construction: 'masonry' },
-    ...{ listed: null, condition: 'fair' },
+    ...{ listed: 'not listed', condition: 'fair' },
   };
   const features = references.map((reference, index) => ({
     properties: { reference, ...properties },
@@ -81,12 +81,16 @@ describe('seedDemo', () => {
   it('brought in the town, near where it should lie, and wrote it all down', async () => {
     const buildings = await Building.findAll({ order: ['reference'] });
     expect(buildings.map(({ reference }) => reference)).toEqual(['B0001', 'B0002']);
-    expect(buildings[0]).toMatchObject({ address: '1 Rope Wharf', storeys: 2, listedGrade: null });
+    expect(buildings[0]).toMatchObject({
+      address: '1 Rope Wharf',
+      storeys: 2,
+      listedGrade: 'not listed',
+    });
     expect(buildings[0]?.west).toBeCloseTo(1.636, 2);
     expect(buildings[0]?.south).toBeCloseTo(54.749, 2);
     const actions = (await AuditEntry.findAll()).map(({ action }) => action);
     expect(new Set(actions)).toEqual(
-      new Set(['create person', 'create scheme', 'change roles', 'insert buildings']),
+      new Set(['create person', 'create scheme', 'change roles', 'change register']),
     );
   });
 

@@ -1,0 +1,80 @@
+import { rm } from 'node:fs/promises';
+import { IMPORT_LIMITS } from '../../shared/schemas/imports.ts';
+import { AppError } from '../errors.ts';
+import { openUpload } from '../importers/open-upload.ts';
+import type { Upload, UploadRow } from '../importers/upload.ts';
+import { createColumnCollector } from '../imports/column-collector.ts';
+import { firstOptions } from '../imports/first-options.ts';
+import { createPointSample } from '../imports/point-sample.ts';
+import { RegisterImport } from '../models/register-import.ts';
+import { insertStagedRows } from '../models/staged-rows.ts';
+import type { Job, JobTools } from './job.ts';
+import { createProgress } from './progress.ts';
+
+const AT_ONCE = 1000;
+
+type Reading = {
+  readonly count: number;
+  readonly columns: ReturnType<ReturnType<typeof createColumnCollector>['columns']>;
+  readonly points: readonly (readonly [number, number])[];
+};
+
+function tooLong(): AppError {
+  const most = IMPORT_LIMITS.rows.toLocaleString('en-GB');
+  return new AppError('too-large', `The file has more than ${most} rows. Send it in parts.`);
+}
+
+/** Brings the rows of a file into the database, and gives what can be said of all of them. */
+async function stageRows(
+  { database, signal }: JobTools,
+  importId: string,
+  upload: Upload,
+): Promise<Reading> {
+  const [collector, sample] = [createColumnCollector(upload.columns), createPointSample()];
+  const progress = createProgress(importId);
+  let [count, batch]: [number, UploadRow[]] = [0, []];
+  async function put(): Promise<void> {
+    signal.throwIfAborted();
+    await insertStagedRows(database, importId, batch);
+    batch = [];
+    await progress(count);
+  }
+  for await (const row of upload.rows()) {
+    count += 1;
+    if (count > IMPORT_LIMITS.rows) throw tooLong();
+    collector.add(row.properties);
+    const corner = row.geometry?.[0]?.[0]?.[0];
+    if (corner !== undefined) sample.add(corner);
+    batch.push(row);
+    if (batch.length === AT_ONCE) await put();
+  }
+  if (batch.length > 0) await put();
+  return { count, columns: collector.columns(), points: sample.points() };
+}
+
+async function stage(
+  tools: JobTools,
+  { importId, schemeId, file }: Extract<Job, { kind: 'read' }>,
+): Promise<void> {
+  const upload = await openUpload(file);
+  const { format, kind, layer } = upload;
+  if (upload.count > IMPORT_LIMITS.rows) throw tooLong();
+  const where = { id: importId, state: 'reading' } as const;
+  await RegisterImport.update({ format, kind, layer, of: upload.count }, { where });
+  const reading = await stageRows(tools, importId, upload);
+  const first = await firstOptions(tools.database, schemeId, upload, reading);
+  const { columns, count } = reading;
+  await RegisterImport.update({ columns, ...first, done: 0, of: count, state: 'checking' }, { where }); // prettier-ignore
+}
+
+/** Reads a file that was sent into rows that can be checked, and removes it. */
+export async function readImport(
+  tools: JobTools,
+  job: Extract<Job, { kind: 'read' }>,
+): Promise<void> {
+  try {
+    await stage(tools, job);
+  } finally {
+    await rm(job.file, { force: true });
+  }
+}
