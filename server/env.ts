@@ -1,4 +1,7 @@
+import { tmpdir } from 'node:os';
+import path from 'node:path';
 import { z } from 'zod';
+import { emailSchema } from '../shared/schemas/passwords.ts';
 
 const schema = z.object({
   NODE_ENV: z.enum(['development', 'production', 'test']).default('development'),
@@ -11,6 +14,9 @@ const schema = z.object({
   PUBLIC_URL: z.url(),
   /** Demo people, demo scheme and the local mailbox. */
   DEMO: z.stringbool().default(false),
+  /** Without the demo: who is asked in while no administrator can sign in. */
+  FIRST_ADMINISTRATOR: emailSchema.optional(),
+  FIRST_ADMINISTRATOR_NAME: z.string().trim().min(1).max(200).default('Administrator'),
   SMTP_URL: z.string().startsWith('smtp').optional(),
   MAIL_FROM: z.email().default('groundsill@example.org'),
   /**
@@ -20,6 +26,8 @@ const schema = z.object({
   RATE_LIMIT: z.coerce.number().int().min(1).default(10),
   /** How many proxies stand before the server; what they say of the caller is believed. */
   TRUST_PROXY: z.coerce.number().int().min(0).default(0),
+  /** Where files that are sent wait until they are read. */
+  UPLOADS_FOLDER: z.string().min(1).default(path.join(tmpdir(), 'groundsill-uploads')),
   LOG_LEVEL: z.enum(['silent', 'error', 'warn', 'info', 'debug']).default('info'),
 });
 

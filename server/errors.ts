@@ -10,6 +10,7 @@ const ERRORS = {
   archived: [409, 'This scheme is archived and only read. Bring it back before you change it.'],
   'link-spent': [410, 'This link has been used or is too old. Ask for a new one.'],
   'too-large': [413, 'This is too large.'],
+  'wrong-content-type': [415, 'This was sent in a form that is not taken here.'],
   unreadable: [422, 'This could not be read.'],
   'invalid-input': [422, 'Something in the form is not right.'],
   'too-many-requests': [429, 'Too many tries. Wait a few minutes.'],
@@ -17,6 +18,10 @@ const ERRORS = {
 } as const;
 
 export type ErrorCode = keyof typeof ERRORS;
+
+export function isErrorCode(value: unknown): value is ErrorCode {
+  return typeof value === 'string' && Object.hasOwn(ERRORS, value);
+}
 
 /** A fault of one field: where, as `rules.cutoff` or `email`, and what to do. */
 export type FieldFault = { readonly path: string; readonly message: string };

@@ -1,5 +1,6 @@
 import { createServer, type Server } from 'node:http';
 import { createApp } from './app.ts';
+import { recoverImports } from './commands/recover-imports.ts';
 import { readEnv } from './env.ts';
 import { openServices } from './open-services.ts';
 import { report } from './report.ts';
@@ -43,6 +44,7 @@ async function serve(): Promise<void> {
   const env = readEnv(process.env);
   const stop = toldToStop();
   const { services, pool, closeServices } = await openServices(env);
+  await recoverImports(services);
   const server = createServer(createApp(services, pool, process.cwd()));
   await listen(server, env.PORT, env.HOST);
   report({ listening: true });

@@ -1,6 +1,7 @@
 import pg from 'pg';
 import { connectDatabase } from './database/connect.ts';
 import type { Env } from './env.ts';
+import { openJobs } from './jobs/open-jobs.ts';
 import { createLogger } from './logger.ts';
 import { openMail } from './mail/open-mail.ts';
 import type { Services } from './services.ts';
@@ -22,11 +23,13 @@ export async function openServices(env: Env): Promise<OpenServices> {
   pool.on('error', (error) => {
     logger.error({ err: error }, 'a connection for sessions broke');
   });
+  const jobs = openJobs({ env, logger, database });
   const mail = await openMail(env, logger);
   return {
-    services: { env, logger, database, mailer: mail.mailer, tiles: createTileCache() },
+    services: { env, logger, database, mailer: mail.mailer, tiles: createTileCache(), jobs },
     pool,
     closeServices: async () => {
+      await jobs.close();
       await Promise.all([mail.close(), database.close(), pool.end()]);
     },
   };

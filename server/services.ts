@@ -1,6 +1,7 @@
 import type { Logger } from 'pino';
 import type { Sequelize } from 'sequelize';
 import type { Env } from './env.ts';
+import type { Jobs } from './jobs/jobs.ts';
 import type { Mailer } from './mail/mailer.ts';
 import type { TileCache } from './tiles/tile-cache.ts';
 
@@ -11,4 +12,6 @@ export type Services = {
   readonly database: Sequelize;
   readonly mailer: Mailer;
   readonly tiles: TileCache;
+  /** What is done of imports beside requests. */
+  readonly jobs: Jobs;
 };

@@ -1,7 +1,7 @@
 import type { Kind } from './footprints.ts';
 
 export type Foundation = 'strip' | 'raft' | 'piled' | 'unknown';
-export type Construction = 'masonry' | 'framed' | 'timber' | 'steel framed' | 'unknown';
+export type Construction = 'masonry' | 'framed' | 'timber framed' | 'steel framed' | 'unknown';
 export type Condition = 'good' | 'fair' | 'poor' | 'unknown';
 
 /** What buildings of one kind tend to be like. */
@@ -46,15 +46,15 @@ export const traitsByKind: Record<Kind, KindTraits> = {
   school: traits('school', [2, 2], 4.1, 'strip', 'masonry'),
   'town hall': traits('civic', [3, 3], 4.2, 'strip', 'masonry', [1, 1]),
   'market hall': traits('market', [1, 1], 8.5, 'strip', 'steel framed', [1, 1]),
-  ropewalk: traits('workshop', [1, 1], 4.2, 'strip', 'timber', [1, 1]),
+  ropewalk: traits('workshop', [1, 1], 4.2, 'strip', 'timber framed', [1, 1]),
   'fish market': traits('market', [1, 1], 6.5, 'raft', 'steel framed'),
   almshouses: traits('dwellings', [1, 1], 3.4, 'strip', 'masonry', [1, 1]),
   'lifeboat house': traits('lifeboat station', [1, 1], 6.2, 'raft', 'framed'),
-  'net loft': traits('storage', [1, 2], 2.9, 'strip', 'timber', [0.1, 0.1]),
+  'net loft': traits('storage', [1, 2], 2.9, 'strip', 'timber framed', [0.1, 0.1]),
   garage: traits('garage', [1, 1], 2.4, 'raft', 'masonry'),
 };
 
-export type Listing = 'listed, outstanding' | 'listed, special' | 'listed, local';
+export type Listing = 'listed, outstanding' | 'listed, special' | 'listed, local' | 'not listed';
 
 /** Landmarks whose grade is known. */
 export const gradeByName: ReadonlyMap<string, Listing> = new Map([

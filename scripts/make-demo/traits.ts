@@ -13,7 +13,7 @@ type Traits = {
   readonly foundingLevel: number | null;
   readonly foundation: Foundation;
   readonly construction: Construction;
-  readonly listed: Listing | null;
+  readonly listed: Listing;
   readonly condition: Condition;
 };
 
@@ -32,7 +32,7 @@ function listingOf(
   kind: KindTraits,
   isOld: boolean,
   random: Random,
-): Listing | null {
+): Listing {
   const known = footprint.name === null ? undefined : gradeByName.get(footprint.name);
   if (known !== undefined) return known;
   const share = isOld ? kind.listed[0] : kind.listed[1];
@@ -41,7 +41,7 @@ function listingOf(
         ['listed, special', 0.3],
         ['listed, local', 0.7],
       ])
-    : null;
+    : 'not listed';
 }
 
 function foundationOf(kind: KindTraits, storeys: number, random: Random): Foundation {

@@ -9,6 +9,8 @@ const CLIENT = ['index.html', 'src', 'shared', 'vite.config.ts', 'tailwind.confi
 const SERVER = ['server', 'shared'];
 const COMMON = ['package-lock.json', 'tsconfig.json', 'scripts/start/build.mjs'];
 
+const PROGRAMS = ['index', 'migrate', 'seed', 'first-administrator', 'jobs/thread'];
+
 function buildClient(outDir) {
   const vite = path.join(root, 'node_modules/vite/bin/vite.js');
   const { status } = spawnSync(
@@ -31,7 +33,7 @@ async function buildServer(outdir) {
   const { build } = await import('esbuild');
   await build({
     absWorkingDir: root,
-    entryPoints: ['server/index.ts', 'server/migrate.ts', 'server/seed.ts'],
+    entryPoints: PROGRAMS.map((name) => `server/${name}.ts`),
     outdir,
     outExtension: { '.js': '.mjs' },
     bundle: true,

@@ -2,6 +2,7 @@ import path from 'node:path';
 import { setTimeout as wait } from 'node:timers/promises';
 import { startCluster } from '../postgres/cluster.mjs';
 import { answers } from '../postgres/ports.mjs';
+import { reachDatabase } from './reach-database.mjs';
 
 export const DATABASE = 'groundsill';
 const BETWEEN_LOOKS_MS = 2000;
@@ -17,6 +18,7 @@ async function silenceOn(port) {
 export async function openDatabase(folder, undo) {
   const { DATABASE_URL, MIGRATE_URL } = process.env;
   if (DATABASE_URL !== undefined) {
+    await reachDatabase(DATABASE_URL, MIGRATE_URL);
     return {
       said: 'the one of DATABASE_URL',
       serverUrl: DATABASE_URL,

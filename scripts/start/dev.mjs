@@ -6,15 +6,18 @@ import { whenAborted } from './signals.mjs';
 import { stepper } from './step.mjs';
 import { untilStopped } from './until-stopped.mjs';
 
-const PAGES_PORT = 4601;
-
 function program(name) {
   return ['--import', 'tsx', `server/${name}.ts`];
 }
 
+/** The pages are served beside the server, which gives them what they ask for. */
+function pagesPort(port) {
+  return Number(port) + 1;
+}
+
 /** Links in letters lead to where the pages are. */
-function publicUrl() {
-  return `http://127.0.0.1:${PAGES_PORT}`;
+function publicUrl(port) {
+  return `http://127.0.0.1:${pagesPort(port)}`;
 }
 
 /** Runs a program of node with its output on the screen. */
@@ -41,9 +44,9 @@ async function serve(signal, undo) {
   ];
   const server = show([...flags, entry], env, undo);
   const vite = ['node_modules/vite/bin/vite.js', '--host', '127.0.0.1', '--strictPort'];
-  const pages = show([...vite, '--port', String(PAGES_PORT)], env, undo);
+  const pages = show([...vite, '--port', String(pagesPort(env.PORT))], env, undo);
   prepared.lock.setAddress(env.PUBLIC_URL);
-  sayWhere(env.PUBLIC_URL, prepared.signIns);
+  sayWhere(env.PUBLIC_URL, prepared.people);
   return Promise.race([whenAborted(signal), server, pages, prepared.database.ended]);
 }
 

@@ -3,9 +3,10 @@ import { installPackages } from '../packages.mjs';
 import { portToServeOn } from './address.mjs';
 import { openDatabase } from './database.mjs';
 import { installDebian, POSTGRESQL } from './debian.mjs';
+import { askInFirstAdministrator } from './first-administrator.mjs';
 import { dataFolder, townFolder } from './folders.mjs';
 import { takeLock } from './lock.mjs';
-import { Refusal } from './refusal.mjs';
+import { seed } from './seed.mjs';
 import { runToEnd } from './server-process.mjs';
 import { isDemo, settings } from './settings.mjs';
 import { ensureTown } from './town.mjs';
@@ -14,14 +15,6 @@ async function migrate(run, { serverUrl, ownerUrl }) {
   if (ownerUrl === undefined) return { said: 'left as they are, without MIGRATE_URL' };
   const { applied } = await run('migrate', { DATABASE_URL: serverUrl, MIGRATE_URL: ownerUrl });
   return { said: applied.length === 0 ? 'there' : `${applied.length} applied` };
-}
-
-async function seed(run) {
-  const seeded = await run('seed');
-  if (seeded.said !== 'not ours') return seeded;
-  throw new Refusal(
-    'This database holds people and is not the demo. To serve it as it is, set DEMO=false.',
-  );
 }
 
 /**
@@ -45,6 +38,8 @@ export async function prepare({ step, undo, program, publicUrl, build }) {
     return runToEnd(program(name), { env: { ...env, ...more }, log });
   }
   await step('Migrations', () => migrate(run, database));
-  const signIns = isDemo() ? await step('Demo data', () => seed(run)) : undefined;
-  return { folder, lock, env, database, signIns };
+  const people = isDemo()
+    ? await step('Demo data', () => seed(run))
+    : await step('People', () => askInFirstAdministrator(run));
+  return { folder, lock, env, database, people };
 }

@@ -1,3 +1,4 @@
+import path from 'node:path';
 import { townFolder } from './folders.mjs';
 import { Refusal } from './refusal.mjs';
 import { secretsOf } from './secrets.mjs';
@@ -17,6 +18,7 @@ export function settings({ folder, port, serverUrl, publicUrl }) {
     LOG_LEVEL: 'warn',
     PUBLIC_URL: publicUrl,
     SESSION_SECRET: secretsOf(folder).session,
+    UPLOADS_FOLDER: path.join(folder, 'uploads'),
     ...process.env,
     PORT: String(port),
     DATABASE_URL: serverUrl,

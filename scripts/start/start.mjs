@@ -17,7 +17,7 @@ function publicUrl(port) {
 
 async function serve(signal, undo) {
   const step = stepper(signal);
-  const { folder, lock, env, database, signIns } = await prepare({
+  const { folder, lock, env, database, people } = await prepare({
     step,
     undo,
     program,
@@ -27,8 +27,10 @@ async function serve(signal, undo) {
   const log = path.join(folder, 'server.log');
   const server = await step('Server', () => startServer(program('index'), { env, log }, undo));
   lock.setAddress(env.PUBLIC_URL);
-  sayWhere(env.PUBLIC_URL, signIns);
-  return Promise.race([whenAborted(signal), server.ended, database.ended]);
+  sayWhere(env.PUBLIC_URL, people);
+  const ended = Promise.race([server.ended, database.ended]);
+  const whatNext = ended.then((reason) => `${reason}\nRun npm start again; the log is ${log}.`);
+  return Promise.race([whenAborted(signal), whatNext]);
 }
 
 /** Serves the built application. */

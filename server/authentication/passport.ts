@@ -8,17 +8,17 @@ import { userOf } from './user-of.ts';
 
 type Done = (error: unknown, user?: Express.User | false) => void;
 
-/** One way for an unknown address, an invited person without a password and a wrong password. */
+/** One way for an unknown address, somebody without a password or shut out, and a wrong password. */
 async function userByPassword(email: string, password: string): Promise<Express.User | false> {
   const person = await findPersonByEmail(email);
   const isRight = await isRightPassword(person?.passwordHash, password);
-  return person !== null && isRight ? userOf(person) : false;
+  return person?.shutOutAt === null && isRight ? userOf(person) : false;
 }
 
-/** The person of a session as they are now; nobody where their sessions have been ended since. */
+/** The person of a session as they are now; nobody where it has been ended since. */
 async function userOfSession(id: string, signedInAt?: number): Promise<Express.User | false> {
   const person = await Person.findByPk(id);
-  if (person === null || signedInAt === undefined) return false;
+  if (person?.shutOutAt !== null || signedInAt === undefined) return false;
   return signedInAt < person.sessionsValidFrom.getTime() ? false : userOf(person);
 }
 

@@ -5,6 +5,7 @@ import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import { recordChange } from './record-change.ts';
+import { withOwnName } from './with-own-name.ts';
 
 /** Archives a scheme, which is then only read, or brings it back. */
 export async function archiveScheme(
@@ -19,7 +20,7 @@ export async function archiveScheme(
     const before = { archivedAt: scheme.archivedAt };
     if (archived === (before.archivedAt !== null)) return scheme;
     const after = { archivedAt: archived ? new Date() : null };
-    await scheme.update({ ...after, version: version + 1 }, { transaction });
+    await withOwnName(() => scheme.update({ ...after, version: version + 1 }, { transaction }));
     const action = archived ? 'archive scheme' : 'bring back scheme';
     const subject = { kind: 'scheme', id: scheme.id };
     await recordChange(

@@ -20,6 +20,10 @@ export async function changeOwnPassword(
     const fault = { path: 'currentPassword', message: 'This is not your password.' };
     throw new AppError('invalid-input', undefined, [fault]);
   }
+  if (newPassword === currentPassword) {
+    const fault = { path: 'newPassword', message: 'Choose another one than you have.' };
+    throw new AppError('invalid-input', undefined, [fault]);
+  }
   const passwordHash = await hashNewPassword(person, 'newPassword', newPassword);
   return database.transaction(async (transaction) => {
     await person.reload({ transaction, lock: transaction.LOCK.NO_KEY_UPDATE });

@@ -1,33 +1,44 @@
-import { Op, type Transaction } from 'sequelize';
+import { UniqueConstraintError, type Transaction } from 'sequelize';
 import type { z } from 'zod';
 import type { changePersonSchema } from '../../shared/schemas/people.ts';
 import { AppError } from '../errors.ts';
 import { Person } from '../models/person.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
+import { addressTaken } from './address-taken.ts';
+import { endLinks } from './end-links.ts';
 import { recordChange } from './record-change.ts';
+import { requireAnotherAdministrator } from './require-another-administrator.ts';
 
-/** Refuses to leave nobody who can give roles. The lock makes two who remove each other take turns. */
-async function requireAnotherAdministrator(
+/** Writes the new values; a link that went to a wrong address ends. */
+async function update(
   person: Person,
+  after: Pick<Person, 'name' | 'email' | 'isAdministrator'>,
   transaction: Transaction,
 ): Promise<void> {
-  const administrators = await Person.findAll({
-    where: { isAdministrator: true, passwordHash: { [Op.ne]: null } },
-    order: ['id'],
-    lock: transaction.LOCK.NO_KEY_UPDATE,
-    transaction,
-  });
-  if (administrators.some(({ id }) => id !== person.id)) return;
-  throw new AppError('conflict', 'Nobody else is administrator. Make somebody one first.');
+  if (after.email !== person.email) {
+    if (person.passwordHash !== null) {
+      const message = 'They sign in with this address. It stays.';
+      throw new AppError('invalid-input', undefined, [{ path: 'email', message }]);
+    }
+    await endLinks(person.id, transaction);
+  }
+  try {
+    await person.update(after, { transaction });
+  } catch (error) {
+    throw error instanceof UniqueConstraintError ? addressTaken() : error;
+  }
 }
 
-/** Changes a person's name or takes and gives the administrator's rights, which acts at once. */
+/**
+ * Changes a person's name, the address of one who has no password yet, or takes and gives the
+ * administrator's rights, which acts at once.
+ */
 export async function changePerson(
   { database }: Services,
   by: Actor,
   personId: string,
-  { name, isAdministrator }: z.infer<typeof changePersonSchema>,
+  { name, email, isAdministrator }: z.infer<typeof changePersonSchema>,
 ): Promise<void> {
   await database.transaction(async (transaction) => {
     const person = await Person.findByPk(personId, { transaction });
@@ -41,8 +52,18 @@ export async function changePerson(
       name: name ?? before.name,
       isAdministrator: isAdministrator ?? before.isAdministrator,
     };
-    await person.update(after, { transaction });
-    const subject = { kind: 'person', id: person.id };
-    await recordChange({ by, action: 'change person', subject, before, after }, transaction);
+    const [from, to] = [person.email, email ?? person.email];
+    await update(person, { ...after, email: to }, transaction);
+    const moved = from !== to;
+    await recordChange(
+      {
+        by,
+        action: 'change person',
+        subject: { kind: 'person', id: person.id },
+        before: moved ? { ...before, email: from } : before,
+        after: moved ? { ...after, email: to } : after,
+      },
+      transaction,
+    );
   });
 }

@@ -6,6 +6,7 @@ import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import { lockScheme } from './lock-scheme.ts';
 import { recordChange } from './record-change.ts';
+import { withOwnName } from './with-own-name.ts';
 
 /** Changes a scheme, unless somebody else has changed it since it was read. */
 export async function changeScheme(
@@ -19,7 +20,7 @@ export async function changeScheme(
     if (scheme.version !== version) throw new AppError('conflict');
     const before = { name: scheme.name, description: scheme.description };
     const after = { name: name ?? scheme.name, description: description ?? scheme.description };
-    await scheme.update({ ...after, version: version + 1 }, { transaction });
+    await withOwnName(() => scheme.update({ ...after, version: version + 1 }, { transaction }));
     const subject = { kind: 'scheme', id: scheme.id };
     await recordChange(
       { by: actor, schemeId: scheme.id, action: 'change scheme', subject, before, after },

@@ -1,6 +1,6 @@
 import type { z } from 'zod';
 import type { newSchemeSchema } from '../../shared/schemas/schemes.ts';
-import { findCrs } from '../crs/find-crs.ts';
+import { findCrsForScheme } from '../crs/find-crs.ts';
 import { AppError } from '../errors.ts';
 import { SchemeRules } from '../models/scheme-rules.ts';
 import { Scheme } from '../models/scheme.ts';
@@ -8,6 +8,7 @@ import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import { defaultRules } from './default-rules.ts';
 import { recordChange } from './record-change.ts';
+import { withOwnName } from './with-own-name.ts';
 
 /** Creates a scheme on a projected system in metres, with the default rules as their version 1. */
 export async function createScheme(
@@ -15,12 +16,14 @@ export async function createScheme(
   actor: Actor,
   { name, description, crs }: z.infer<typeof newSchemeSchema>,
 ): Promise<Scheme> {
-  const system = (await findCrs(crs)) ?? { fault: `There is no system EPSG:${crs}.` };
+  const system = (await findCrsForScheme(crs)) ?? { fault: `There is no system EPSG:${crs}.` };
   if ('fault' in system) {
     throw new AppError('invalid-input', undefined, [{ path: 'crs', message: system.fault }]);
   }
   return database.transaction(async (transaction) => {
-    const scheme = await Scheme.create({ name, description, crs }, { transaction });
+    const scheme = await withOwnName(() =>
+      Scheme.create({ name, description, crs }, { transaction }),
+    );
     const rules = defaultRules(scheme.createdAt.toISOString().slice(0, 10));
     await SchemeRules.create(
       { schemeId: scheme.id, version: 1, rules, createdBy: actor.id },

@@ -8,6 +8,7 @@ import { Person } from '../models/person.ts';
 import { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
+import { addressTaken } from './address-taken.ts';
 import { issueLink } from './issue-link.ts';
 import { lockScheme } from './lock-scheme.ts';
 import { recordChange } from './record-change.ts';
@@ -22,9 +23,7 @@ async function createPerson(
   try {
     return await Person.create({ name, email, isAdministrator }, { transaction });
   } catch (error) {
-    if (!(error instanceof UniqueConstraintError)) throw error;
-    const message = 'Somebody has this address already.';
-    throw new AppError('already-exists', message, [{ path: 'email', message }]);
+    throw error instanceof UniqueConstraintError ? addressTaken() : error;
   }
 }
 

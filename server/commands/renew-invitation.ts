@@ -18,6 +18,7 @@ export async function renewInvitation(
       lock: transaction.LOCK.NO_KEY_UPDATE,
     });
     if (person === null) throw new AppError('not-found');
+    if (person.shutOutAt !== null) throw new AppError('conflict', 'They are shut out.');
     if (person.passwordHash !== null) {
       throw new AppError('conflict', 'They have a password already. It can be reset at sign-in.');
     }

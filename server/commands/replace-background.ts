@@ -7,6 +7,7 @@ import { insertBackgroundRows } from '../models/insert-background-rows.ts';
 import type { Services } from '../services.ts';
 import { lockScheme } from './lock-scheme.ts';
 import { recordChange } from './record-change.ts';
+import { refuseFarBackground } from './refuse-far-background.ts';
 
 const AT_ONCE = 5000;
 
@@ -17,6 +18,7 @@ export async function replaceBackground(
   scheme: Scheme,
   { layer, rows }: { readonly layer: BackgroundLayer; readonly rows: readonly BackgroundRow[] },
 ): Promise<Scheme> {
+  await refuseFarBackground(scheme, rows);
   const of = { schemeId: scheme.id, layer };
   return database.transaction(async (transaction) => {
     await lockScheme(scheme, transaction);

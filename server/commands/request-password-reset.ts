@@ -7,16 +7,17 @@ import { sendLetter } from './send-letter.ts';
 
 /**
  * Sends a link for a new password to an address that is known. Who was never here has an invitation,
- * whose end is the administrator's to set.
+ * whose end is the administrator's to set; who is shut out gets none.
  */
 export async function requestPasswordReset(services: Services, email: string): Promise<void> {
   const person = await findPersonByEmail(email);
   if (!person?.passwordHash) return;
   const link = await services.database.transaction(async (transaction) => {
     await person.reload({ transaction, lock: transaction.LOCK.NO_KEY_UPDATE });
+    if (person.shutOutAt !== null) return undefined;
     const subject = { kind: 'person', id: person.id };
     await recordChange({ by: null, action: 'ask for password reset', subject }, transaction);
     return issueLink(services.env, person.id, 'password-reset', transaction);
   });
-  await sendLetter(services, passwordResetLetter(person, link));
+  if (link !== undefined) await sendLetter(services, passwordResetLetter(person, link));
 }

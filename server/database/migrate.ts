@@ -9,6 +9,14 @@ import { migration as buildings } from './migrations/05-buildings.ts';
 import { migration as background } from './migrations/06-background.ts';
 import { migration as mailbox } from './migrations/07-mailbox.ts';
 import { migration as buildingSearch } from './migrations/08-building-search.ts';
+import { migration as footprints } from './migrations/09-footprints.ts';
+import { migration as register } from './migrations/10-register.ts';
+import { migration as registerChanges } from './migrations/11-register-changes.ts';
+import { migration as registerViews } from './migrations/12-register-views.ts';
+import { migration as imports } from './migrations/13-imports.ts';
+import { migration as ground } from './migrations/14-ground.ts';
+import { migration as peopleShutOut } from './migrations/15-people-shut-out.ts';
+import { migration as schemeNames } from './migrations/16-scheme-names.ts';
 
 /** In the order in which they are applied; a new one goes to the end. */
 const MIGRATIONS: Readonly<Record<string, Migration>> = {
@@ -20,6 +28,14 @@ const MIGRATIONS: Readonly<Record<string, Migration>> = {
   '06-background': background,
   '07-mailbox': mailbox,
   '08-building-search': buildingSearch,
+  '09-footprints': footprints,
+  '10-register': register,
+  '11-register-changes': registerChanges,
+  '12-register-views': registerViews,
+  '13-imports': imports,
+  '14-ground': ground,
+  '15-people-shut-out': peopleShutOut,
+  '16-scheme-names': schemeNames,
 };
 
 /** Opens the migrations of a database as its owner; `serverUrl` names the role that serves. */

@@ -27,6 +27,13 @@ function byPerson(req: Request): string {
   return req.user?.id ?? byIp(req);
 }
 
+/** How long to wait, of the seconds that the answer's head names. */
+function waitInWords(seconds: string | undefined): string | undefined {
+  const minutes = Math.ceil(Number(seconds ?? NaN) / 60);
+  if (!(minutes > 0)) return undefined;
+  return `Too many tries. Wait ${minutes === 1 ? 'a minute' : `${minutes} minutes`}.`;
+}
+
 function limiter(
   limit: number,
   keyGenerator: (req: Request) => string,
@@ -39,8 +46,8 @@ function limiter(
     skipSuccessfulRequests,
     standardHeaders: 'draft-8',
     legacyHeaders: false,
-    handler: (_req, _res, next) => {
-      next(new AppError('too-many-requests'));
+    handler: (_req, res, next) => {
+      next(new AppError('too-many-requests', waitInWords(res.get('Retry-After'))));
     },
   });
 }

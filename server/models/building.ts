@@ -6,9 +6,10 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize';
+import type { GROUND_LEVEL_FROM } from '../../shared/schemas/register.ts';
 
-/** Outer ring and holes of each part, easting and northing in the scheme's grid. */
-export type FootprintRings = readonly (readonly (readonly [number, number])[])[][];
+/** A file, somebody's hand, or the scheme's ground. */
+export type GroundLevelFrom = (typeof GROUND_LEVEL_FROM)[number];
 
 /** A building of a scheme's register. What is null is unknown. */
 export class Building extends Model<InferAttributes<Building>, InferCreationAttributes<Building>> {
@@ -26,9 +27,18 @@ export class Building extends Model<InferAttributes<Building>, InferCreationAttr
   declare construction: string | null;
   declare listedGrade: string | null;
   declare condition: string | null;
-  declare footprint: FootprintRings;
-  /** The same in longitude and latitude, derived for the map. */
-  declare lonLat: FootprintRings;
+  declare eOverG: CreationOptional<number | null>;
+  declare poisson: CreationOptional<number | null>;
+  declare inspected: CreationOptional<string | null>;
+  /** Of the footprint, in square metres. */
+  declare area: number;
+  declare groundLevelFrom: CreationOptional<GroundLevelFrom | null>;
+  /** Grows with every change: who saves an older one is told. */
+  declare version: CreationOptional<number>;
+  /** What the last file said, by field; of a footprint its hash. Tells a hand's change from a file's. */
+  declare imported: CreationOptional<Readonly<Record<string, string | number | null>>>;
+  /** When it was taken out of the register; its history stays. */
+  declare removedAt: CreationOptional<Date | null>;
   declare west: number;
   declare south: number;
   declare east: number;
@@ -52,8 +62,14 @@ export function initBuilding(sequelize: Sequelize): void {
       construction: { type: DataTypes.TEXT },
       listedGrade: { type: DataTypes.TEXT },
       condition: { type: DataTypes.TEXT },
-      footprint: { type: DataTypes.JSONB, allowNull: false },
-      lonLat: { type: DataTypes.JSONB, allowNull: false },
+      eOverG: { type: DataTypes.DOUBLE, field: 'e_over_g' },
+      poisson: { type: DataTypes.DOUBLE },
+      inspected: { type: DataTypes.TEXT },
+      area: { type: DataTypes.DOUBLE, allowNull: false },
+      groundLevelFrom: { type: DataTypes.TEXT },
+      version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
+      imported: { type: DataTypes.JSONB, allowNull: false, defaultValue: {} },
+      removedAt: { type: DataTypes.DATE },
       west: { type: DataTypes.DOUBLE, allowNull: false },
       south: { type: DataTypes.DOUBLE, allowNull: false },
       east: { type: DataTypes.DOUBLE, allowNull: false },

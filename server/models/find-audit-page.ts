@@ -10,7 +10,18 @@ export type AuditRecord = {
   readonly entry: AuditEntry;
   readonly person: Person | undefined;
   readonly scheme: Scheme | undefined;
+  /** Who is named in it by id: what it is about, or in its values. */
+  readonly named: readonly Person[];
 };
+
+/** Ids of people are random, so any id that stands somewhere may be asked for. */
+const ID = /"([0-9a-f]{8}(?:-[0-9a-f]{4}){3}-[0-9a-f]{12})"/g;
+
+function idsIn({ subjectKind, subjectId, before, after }: AuditEntry): string[] {
+  const inValues = JSON.stringify([before, after]).matchAll(ID);
+  const ids = [...inValues].flatMap(([, id]) => id ?? []);
+  return subjectKind === 'person' ? [subjectId, ...ids] : ids;
+}
 
 async function byId<Row extends { readonly id: string }>(
   ids: readonly (string | null)[],
@@ -37,7 +48,7 @@ export async function findAuditPage(wanted: {
   const entries = found.slice(0, PAGE);
   const [people, schemes] = await Promise.all([
     byId(
-      entries.map(({ personId }) => personId),
+      entries.flatMap((entry) => [entry.personId, ...idsIn(entry)]),
       (id) => Person.findAll({ where: { id } }),
     ),
     byId(
@@ -49,6 +60,7 @@ export async function findAuditPage(wanted: {
     entry,
     person: people.get(entry.personId ?? ''),
     scheme: schemes.get(entry.schemeId ?? ''),
+    named: [...new Set(idsIn(entry))].flatMap((id) => people.get(id) ?? []),
   }));
   return { records, next: found.length > PAGE ? (entries.at(-1)?.id ?? null) : null };
 }

@@ -19,8 +19,8 @@ export async function findBuildingsInBox(
 ): Promise<DrawnBuilding[]> {
   return database.query<DrawnBuilding>(
     `select id, reference, name, lon_lat as "lonLat"
-     from buildings
-     where scheme_id = $1
+     from buildings join building_footprints on building_id = id
+     where scheme_id = $1 and removed_at is null
        and box(point(west, south), point(east, north)) && box(point($2, $3), point($4, $5))
      order by id`,
     { type: QueryTypes.SELECT, bind: [schemeId, west, south, east, north] },

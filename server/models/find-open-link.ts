@@ -16,6 +16,6 @@ export async function findOpenLink(
     },
   });
   const person = link && (await Person.findByPk(link.personId));
-  if (!link || !person) throw new AppError('link-spent');
+  if (!link || person?.shutOutAt !== null) throw new AppError('link-spent');
   return { link, person };
 }

@@ -16,6 +16,8 @@ export class Person extends Model<InferAttributes<Person>, InferCreationAttribut
   declare isAdministrator: CreationOptional<boolean>;
   /** Sessions begun before it are ended. */
   declare sessionsValidFrom: CreationOptional<Date>;
+  /** Since when they may not sign in; what they are in schemes stays. */
+  declare shutOutAt: CreationOptional<Date | null>;
   declare createdAt: CreationOptional<Date>;
 }
 
@@ -28,6 +30,7 @@ export function initPerson(sequelize: Sequelize): void {
       passwordHash: { type: DataTypes.TEXT },
       isAdministrator: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
       sessionsValidFrom: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
+      shutOutAt: { type: DataTypes.DATE },
       createdAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
     },
     { sequelize, tableName: 'people' },

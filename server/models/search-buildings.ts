@@ -27,7 +27,7 @@ export async function searchBuildings(
      ), enough as (
        select id, reference, name, address, west, south, east, north
        from buildings, wanted
-       where scheme_id = $1 and words @@ query
+       where scheme_id = $1 and removed_at is null and words @@ query
        limit ${ENOUGH}
      )
      select * from enough

@@ -9,6 +9,7 @@ export const schemePolicy = {
     actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness', 'owner'),
   readRegister: (actor: SchemeActor) =>
     actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness'),
+  updateRegister: (actor: SchemeActor) => holds(actor, 'assessor'),
   updateScheme: (actor: SchemeActor) => actor.isAdministrator,
   archiveScheme: (actor: SchemeActor) => actor.isAdministrator,
   readMembers: (actor: SchemeActor) => actor.isAdministrator,
@@ -24,6 +25,7 @@ export type SchemeAction = keyof typeof schemePolicy;
 
 /** What changes what a scheme holds: not in an archived one. */
 const CHANGES: ReadonlySet<SchemeAction> = new Set([
+  'updateRegister',
   'updateScheme',
   'manageMembers',
   'updateRules',
@@ -44,6 +46,7 @@ export function schemeAbilities(
   return {
     readScheme: can('readScheme'),
     readRegister: can('readRegister'),
+    updateRegister: can('updateRegister'),
     updateScheme: can('updateScheme'),
     archiveScheme: can('archiveScheme'),
     readMembers: can('readMembers'),

@@ -1,9 +1,14 @@
 import type { PersonAnswer } from '../../shared/schemas/people.ts';
 import type { PersonRecord } from '../models/find-person-records.ts';
+import type { Actor } from '../policies/actor.ts';
 
-/** What leaves the server of a person, for the administrator. */
-export function presentPerson({ person, memberships, invitedUntil }: PersonRecord): PersonAnswer {
+/** What leaves the server of a person, for the administrator who asks. */
+export function presentPerson(
+  { person, memberships, invitedUntil }: PersonRecord,
+  actor: Actor,
+): PersonAnswer {
   const hasPassword = person.passwordHash !== null;
+  const isShutOut = person.shutOutAt !== null;
   return {
     id: person.id,
     name: person.name,
@@ -11,12 +16,19 @@ export function presentPerson({ person, memberships, invitedUntil }: PersonRecor
     isAdministrator: person.isAdministrator,
     hasPassword,
     invitedUntil: invitedUntil?.toISOString() ?? null,
+    shutOutAt: person.shutOutAt?.toISOString() ?? null,
     createdAt: person.createdAt.toISOString(),
     memberships: memberships.map(({ schemeId, schemeName, role }) => ({
       schemeId,
       schemeName,
       role,
     })),
-    abilities: { invite: !hasPassword },
+    abilities: {
+      invite: !hasPassword && !isShutOut,
+      withdraw: !hasPassword && invitedUntil !== null,
+      changeEmail: !hasPassword,
+      shutOut: !isShutOut && person.id !== actor.id,
+      readmit: isShutOut,
+    },
   };
 }

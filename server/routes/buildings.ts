@@ -1,10 +1,12 @@
 import { buildingParamsSchema, buildingSearchSchema } from '../../shared/schemas/buildings.ts';
 import { findCrs } from '../crs/find-crs.ts';
-import { AppError } from '../errors.ts';
-import { Building } from '../models/building.ts';
+import { findBuilding } from '../models/find-building.ts';
 import { presentBuilding, presentFoundBuilding } from '../presenters/building.ts';
 import { presentExtent } from '../presenters/extent.ts';
 import { findExtent } from '../models/find-extent.ts';
+import { findFootprints } from '../models/footprints.ts';
+import { findNeighbours } from '../models/find-neighbours.ts';
+import { buildingWalls } from '../register/building-walls.ts';
 import { searchBuildings } from '../models/search-buildings.ts';
 import { defineRoute } from './define-route.ts';
 
@@ -22,12 +24,13 @@ export const buildingRoutes = [
     path: '/api/schemes/:schemeId/buildings/:buildingId',
     access: { scheme: 'readRegister' },
     params: buildingParamsSchema,
-    handle: async ({ scheme, params }) => {
-      const building = await Building.findOne({
-        where: { id: params.buildingId, schemeId: scheme.id },
-      });
-      if (building === null) throw new AppError('not-found');
-      return presentBuilding(building);
+    handle: async ({ services, scheme, params }) => {
+      const { database } = services;
+      const building = await findBuilding(scheme.id, params.buildingId);
+      const { id } = building;
+      const footprint = (await findFootprints(database, [id])).get(id) ?? [];
+      const neighbours = await findNeighbours(database, building);
+      return presentBuilding(building, footprint, buildingWalls(id, footprint, neighbours));
     },
   }),
   defineRoute({

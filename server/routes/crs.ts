@@ -1,5 +1,6 @@
-import { crsParamsSchema, crsSearchSchema } from '../../shared/schemas/crs.ts';
-import { findCrs } from '../crs/find-crs.ts';
+import { crsParamsSchema, crsPurposeSchema, crsSearchSchema } from '../../shared/schemas/crs.ts';
+import { findFileCrs } from '../crs/file-crs.ts';
+import { findCrsForScheme } from '../crs/find-crs.ts';
 import { searchCrs } from '../crs/search-crs.ts';
 import { AppError } from '../errors.ts';
 import { defineRoute } from './define-route.ts';
@@ -10,18 +11,21 @@ export const crsRoutes = [
     path: '/api/crs',
     access: 'signed-in',
     query: crsSearchSchema,
-    handle: ({ query }) => searchCrs(query.search),
+    handle: ({ query }) => searchCrs(query.search, query.for),
   }),
   defineRoute({
     method: 'get',
     path: '/api/crs/:code',
     access: 'signed-in',
     params: crsParamsSchema,
-    handle: async ({ params }) => {
-      const found = await findCrs(params.code);
+    query: crsPurposeSchema,
+    handle: async ({ params, query }) => {
+      const find = query.for === 'file' ? findFileCrs : findCrsForScheme;
+      const found = await find(params.code);
       if (found === undefined) throw new AppError('not-found');
       if ('fault' in found) throw new AppError('invalid-input', found.fault);
-      return found.crs;
+      const { code, name, area, definition, bounds } = found.crs;
+      return { code, name, area, definition, bounds };
     },
   }),
 ];

@@ -15,6 +15,9 @@ import type { Services } from '../services.ts';
  */
 export type Access = 'anyone' | 'signed-in' | 'administrator' | { readonly scheme: SchemeAction };
 
+/** What people write is short; outlines have thousands of corners. */
+export type BodyLimit = '256kb' | '1mb';
+
 type Method = 'get' | 'post' | 'put' | 'patch' | 'delete';
 
 type Schemas<Params, Query, Body> = {
@@ -45,8 +48,8 @@ export type Route = {
   readonly access: Access;
   /** How often it may be called. */
   readonly limit: RateLimitName | undefined;
-  /** Middleware for bodies that are not JSON. */
-  readonly before: readonly RequestHandler[];
+  /** How long a body of JSON may be. */
+  readonly bodyLimit: BodyLimit;
   readonly respond: (services: Services) => (req: Request, res: Response) => Promise<void>;
 };
 
@@ -61,6 +64,15 @@ function parsed<T>(schema: z.ZodType<T> | undefined, value: unknown, part: strin
     message: issue.message,
   }));
   throw new AppError('invalid-input', undefined, fields);
+}
+
+/** A body that is no JSON has not been read, and would look like one that is empty. */
+function requireJson(req: Request): void {
+  if (req.is('json') !== false) return;
+  throw new AppError(
+    'wrong-content-type',
+    'Send this as JSON, with Content-Type application/json.',
+  );
 }
 
 async function contextOf(access: Access, services: Services, req: Request): Promise<object> {
@@ -94,20 +106,22 @@ export function defineRoute<
     path: string;
     access: A;
     limit?: RateLimitName;
-    before?: readonly RequestHandler[];
+    bodyLimit?: BodyLimit;
     status?: number;
     handle: (call: Call<A, Params, Query, Body>) => unknown;
   } & Schemas<Params, Query, Body>,
 ): Route {
-  const { method, path, access, limit, before = [], status = 200, handle } = definition;
+  const { method, path, access, limit, status = 200, handle } = definition;
+  const { bodyLimit = '256kb' } = definition;
   return {
     method,
     path,
     access,
     limit,
-    before,
+    bodyLimit,
     respond: (services) => async (req, res) => {
       const context = await contextOf(access, services, req);
+      if (definition.body !== undefined) requireJson(req);
       const call = {
         ...context,
         services,

@@ -3,10 +3,15 @@ import { backgroundRoutes } from './background.ts';
 import { buildingRoutes } from './buildings.ts';
 import { crsRoutes } from './crs.ts';
 import type { Route } from './define-route.ts';
+import { groundRoutes } from './ground.ts';
+import { importRoutes } from './imports.ts';
 import { linkRoutes } from './links.ts';
 import { mailboxRoutes } from './mailbox.ts';
 import { memberRoutes } from './members.ts';
 import { peopleRoutes } from './people.ts';
+import { registerChangeRoutes } from './register-changes.ts';
+import { registerViewRoutes } from './register-views.ts';
+import { registerRoutes } from './register.ts';
 import { rulesRoutes } from './rules.ts';
 import { schemeRoutes } from './schemes.ts';
 import { sessionRoutes } from './session.ts';
@@ -26,6 +31,11 @@ export const ROUTES: readonly Route[] = [
   ...crsRoutes,
   ...backgroundRoutes,
   ...buildingRoutes,
+  ...registerRoutes,
+  ...registerChangeRoutes,
+  ...registerViewRoutes,
+  ...groundRoutes,
+  ...importRoutes,
   ...tileRoutes,
   ...waitingRoutes,
 ];

@@ -41,9 +41,9 @@ export const linkRoutes = [
     limit: 'link',
     params: linkParams,
     body: useLinkSchema,
-    handle: async ({ services, params, body, req }) => {
+    handle: async ({ services, params, body, req, res }) => {
       await beginSession(req, await useLink(services, params.token, body.password));
-      return presentSession(services, req);
+      return presentSession(services, req, res);
     },
   }),
 ];

@@ -2,24 +2,32 @@ import { z } from 'zod';
 import {
   changePersonSchema,
   newPersonSchema,
+  shutOutSchema,
   type InvitedAnswer,
   type PersonAnswer,
 } from '../../shared/schemas/people.ts';
 import { changePerson } from '../commands/change-person.ts';
 import { invitePerson } from '../commands/invite-person.ts';
 import { renewInvitation } from '../commands/renew-invitation.ts';
+import { shutOutPerson } from '../commands/shut-out-person.ts';
+import { withdrawInvitation } from '../commands/withdraw-invitation.ts';
 import { findPersonRecord, findPersonRecords } from '../models/find-person-records.ts';
+import type { Actor } from '../policies/actor.ts';
 import { presentPerson } from '../presenters/person.ts';
 import { defineRoute } from './define-route.ts';
 
 const personParams = z.object({ personId: z.uuid() });
 
-async function personAnswer(personId: string): Promise<PersonAnswer> {
-  return presentPerson(await findPersonRecord(personId));
+async function personAnswer(actor: Actor, personId: string): Promise<PersonAnswer> {
+  return presentPerson(await findPersonRecord(personId), actor);
 }
 
-async function invitedAnswer(personId: string, letterSent: boolean): Promise<InvitedAnswer> {
-  return { person: await personAnswer(personId), letterSent };
+async function invitedAnswer(
+  actor: Actor,
+  personId: string,
+  letterSent: boolean,
+): Promise<InvitedAnswer> {
+  return { person: await personAnswer(actor, personId), letterSent };
 }
 
 export const peopleRoutes = [
@@ -27,7 +35,8 @@ export const peopleRoutes = [
     method: 'get',
     path: '/api/people',
     access: 'administrator',
-    handle: async () => (await findPersonRecords()).map(presentPerson),
+    handle: async ({ actor }) =>
+      (await findPersonRecords()).map((record) => presentPerson(record, actor)),
   }),
   defineRoute({
     method: 'post',
@@ -37,7 +46,7 @@ export const peopleRoutes = [
     body: newPersonSchema,
     handle: async ({ services, actor, body }) => {
       const { personId, letterSent } = await invitePerson(services, actor, body);
-      return invitedAnswer(personId, letterSent);
+      return invitedAnswer(actor, personId, letterSent);
     },
   }),
   defineRoute({
@@ -45,7 +54,7 @@ export const peopleRoutes = [
     path: '/api/people/:personId',
     access: 'administrator',
     params: personParams,
-    handle: ({ params }) => personAnswer(params.personId),
+    handle: ({ actor, params }) => personAnswer(actor, params.personId),
   }),
   defineRoute({
     method: 'patch',
@@ -55,7 +64,7 @@ export const peopleRoutes = [
     body: changePersonSchema,
     handle: async ({ services, actor, params, body }) => {
       await changePerson(services, actor, params.personId, body);
-      return personAnswer(params.personId);
+      return personAnswer(actor, params.personId);
     },
   }),
   defineRoute({
@@ -66,7 +75,28 @@ export const peopleRoutes = [
     params: personParams,
     handle: async ({ services, actor, params }) => {
       const letterSent = await renewInvitation(services, actor, params.personId);
-      return invitedAnswer(params.personId, letterSent);
+      return invitedAnswer(actor, params.personId, letterSent);
+    },
+  }),
+  defineRoute({
+    method: 'delete',
+    path: '/api/people/:personId/invitations',
+    access: 'administrator',
+    params: personParams,
+    handle: async ({ services, actor, params }) => {
+      await withdrawInvitation(services, actor, params.personId);
+      return personAnswer(actor, params.personId);
+    },
+  }),
+  defineRoute({
+    method: 'put',
+    path: '/api/people/:personId/shut-out',
+    access: 'administrator',
+    params: personParams,
+    body: shutOutSchema,
+    handle: async ({ services, actor, params, body }) => {
+      await shutOutPerson(services, actor, params.personId, body.shutOut);
+      return personAnswer(actor, params.personId);
     },
   }),
 ];

@@ -13,7 +13,7 @@ export const sessionRoutes = [
     method: 'get',
     path: '/api/session',
     access: 'anyone',
-    handle: ({ services, req }) => presentSession(services, req),
+    handle: ({ services, req, res }) => presentSession(services, req, res),
   }),
   defineRoute({
     method: 'post',
@@ -23,26 +23,26 @@ export const sessionRoutes = [
     body: signInSchema,
     handle: async ({ services, req, res }) => {
       await beginSession(req, await checkCredentials(req, res));
-      return presentSession(services, req);
+      return presentSession(services, req, res);
     },
   }),
   defineRoute({
     method: 'delete',
     path: '/api/session',
     access: 'signed-in',
-    handle: async ({ services, req }) => {
+    handle: async ({ services, req, res }) => {
       await endSession(req);
-      return presentSession(services, req);
+      return presentSession(services, req, res);
     },
   }),
   defineRoute({
     method: 'delete',
     path: '/api/sessions',
     access: 'signed-in',
-    handle: async ({ services, actor, req }) => {
+    handle: async ({ services, actor, req, res }) => {
       await endSessions(services, actor);
       await endSession(req);
-      return presentSession(services, req);
+      return presentSession(services, req, res);
     },
   }),
   defineRoute({
@@ -51,9 +51,9 @@ export const sessionRoutes = [
     access: 'signed-in',
     limit: 'own-password',
     body: changePasswordSchema,
-    handle: async ({ services, actor, body, req }) => {
+    handle: async ({ services, actor, body, req, res }) => {
       await beginSession(req, await changeOwnPassword(services, actor, body));
-      return presentSession(services, req);
+      return presentSession(services, req, res);
     },
   }),
 ];

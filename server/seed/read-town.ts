@@ -2,7 +2,11 @@ import { readFileSync } from 'node:fs';
 import path from 'node:path';
 import { z } from 'zod';
 
-const text = z.string().nullable();
+/** The town's file says "unknown" where a register says nothing. */
+const text = z
+  .string()
+  .nullable()
+  .transform((words) => (words === 'unknown' ? null : words));
 const point = z.tuple([z.number(), z.number()]);
 
 const townSchema = z.object({
@@ -31,9 +35,9 @@ const townSchema = z.object({
 export function readTown(folder: string) {
   const file = path.join(folder, 'buildings.geojson');
   const { features } = townSchema.parse(JSON.parse(readFileSync(file, 'utf8')));
-  return features.map(({ properties: { listed, ...others }, geometry }) => ({
-    ...others,
-    listedGrade: listed,
-    footprint: [geometry.coordinates],
-  }));
+  return features.map(({ properties: { reference, listed, ...others }, geometry }) => {
+    const attributes = { ...others, listedGrade: listed };
+    // as after an import: a later file is held against what this one said
+    return { reference, attributes, imported: attributes, footprint: [geometry.coordinates] };
+  });
 }

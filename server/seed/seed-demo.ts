@@ -1,7 +1,7 @@
 import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
 import { hashPassword } from '../authentication/password-hash.ts';
 import { defaultRules } from '../commands/default-rules.ts';
-import { insertBuildings } from '../commands/insert-buildings.ts';
+import { changeRegister } from '../commands/change-register.ts';
 import { recordChange } from '../commands/record-change.ts';
 import { Membership } from '../models/membership.ts';
 import { Person } from '../models/person.ts';
@@ -82,7 +82,9 @@ async function fill(townFolder: string, transaction: Transaction): Promise<void>
     const person = await createPerson(one, transaction);
     await giveRoles(scheme.id, person, one.roles, transaction);
   }
-  await insertBuildings(scheme, readTown(townFolder), transaction);
+  const cause = { kind: 'import', by: null, source: 'The demo town' } as const;
+  const created = readTown(townFolder);
+  await changeRegister(scheme.sequelize, scheme, cause, { created }, transaction);
 }
 
 /** Fills an empty database with the demo: people, their town and its scheme, all or nothing. */

@@ -4,6 +4,8 @@ const MOST_BYTES = 64 * 1024 * 1024;
 /** Keeps what was made last; of two who ask at once, the second waits for the first. */
 export type TileCache = {
   readonly get: (key: string, make: () => Promise<Buffer>) => Promise<Buffer>;
+  /** Whether it is kept, so that nothing has to be made. */
+  readonly has: (key: string) => boolean;
 };
 
 /** A cache of tiles that forgets the longest unused ones beyond so many bytes. */
@@ -34,6 +36,7 @@ export function createTileCache(mostBytes = MOST_BYTES): TileCache {
   }
 
   return {
+    has: (key) => kept.has(key),
     get: (key, make) => {
       const known = kept.get(key);
       if (known === undefined) {

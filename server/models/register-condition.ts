@@ -1,0 +1,97 @@
+import { STIFF_CONSTRUCTIONS } from '../../shared/building/stiffness-of-construction.ts';
+import { BUILDING_FIELD_NAMES, type BuildingField } from '../../shared/schemas/building-fields.ts';
+import { REGISTER_COLUMNS, type RegisterFilter } from '../../shared/schemas/register.ts';
+import { AppError } from '../errors.ts';
+import { BUILDING_COLUMNS } from './building-columns.ts';
+import { NUMBER_COLUMNS, registerColumn } from './register-columns.ts';
+
+/** A condition in SQL with the values that it is asked with. */
+export type Condition = { readonly where: string; readonly bind: readonly unknown[] };
+
+type Bind = (value: unknown) => string;
+
+function wantedWords(given: string): string {
+  return `(select string_agg('''' || word || ''':*', ' & ')::tsquery
+    from unnest(tsvector_to_array(folded_words(${given}))) as word)`;
+}
+
+/** As knownOfBuilding and completeAttributes tell it: something of these is not known. */
+function assumedSql(bind: Bind): string {
+  const stiff = `coalesce(lower(btrim(replace(construction, '-', ' '))) = any(${bind(STIFF_CONSTRUCTIONS)}::text[]), false)`;
+  return `(storeys is null or eaves_height is null
+    or coalesce(ground_level <= founding_level, true)
+    or ((e_over_g is null or poisson is null) and not ${stiff}))`;
+}
+
+function anySql(field: BuildingField, values: readonly (string | null)[], bind: Bind): string {
+  const { name, type } = BUILDING_COLUMNS[field];
+  const texts = values.filter((value) => value !== null);
+  const known =
+    type === 'text'
+      ? texts
+      : texts
+          .filter((text) => text.trim() !== '')
+          .map(Number)
+          .filter(Number.isFinite);
+  const kind = type === 'text' ? 'text' : 'double precision';
+  const among = `${name} = any(${bind(known)}::${kind}[])`;
+  return values.includes(null) ? `(${among} or ${name} is null)` : among;
+}
+
+function rangesSql(ranges: NonNullable<RegisterFilter['ranges']>, bind: Bind): string[] {
+  return REGISTER_COLUMNS.flatMap((column) => {
+    const range = ranges[column];
+    if (range === undefined) return [];
+    if (!NUMBER_COLUMNS.has(column)) {
+      const message = 'Only numbers have a range.';
+      throw new AppError('invalid-input', undefined, [
+        { path: `filter.ranges.${column}`, message },
+      ]);
+    }
+    const { name } = registerColumn(column);
+    return [
+      ...(range.from === undefined ? [] : [`${name} >= ${bind(range.from)}::double precision`]),
+      ...(range.to === undefined ? [] : [`${name} <= ${bind(range.to)}::double precision`]),
+    ];
+  });
+}
+
+function placeSql({ within, ids, importId }: RegisterFilter, bind: Bind): string[] {
+  const conditions: string[] = [];
+  if (within !== undefined) {
+    const [west, south, east, north] = within.map(
+      (degrees) => `${bind(degrees)}::double precision`,
+    );
+    conditions.push(
+      `box(point(west, south), point(east, north)) && box(point(${west}, ${south}), point(${east}, ${north}))`,
+    );
+  }
+  if (ids !== undefined) conditions.push(`id = any(${bind(ids)}::integer[])`);
+  if (importId !== undefined) {
+    conditions.push(`id in (select c.building_id from building_changes c
+      join register_changes r on r.id = c.change_id where r.import_id = ${bind(importId)}::uuid)`);
+  }
+  return conditions;
+}
+
+/** The buildings of a scheme's register that a filter means. */
+export function registerCondition(schemeId: string, filter: RegisterFilter): Condition {
+  const values: unknown[] = [schemeId];
+  const bind: Bind = (value) => `$${values.push(value)}`;
+  const { search, any = {}, ranges = {}, unknown = [], assumed } = filter;
+  const conditions = ['scheme_id = $1', 'removed_at is null'];
+  if (search !== undefined && search !== '') {
+    conditions.push(`words @@ ${wantedWords(bind(search))}`);
+  }
+  for (const field of BUILDING_FIELD_NAMES) {
+    const wanted = any[field];
+    if (wanted !== undefined) conditions.push(anySql(field, wanted, bind));
+  }
+  conditions.push(...rangesSql(ranges, bind));
+  conditions.push(...unknown.map((field) => `${BUILDING_COLUMNS[field].name} is null`));
+  if (assumed !== undefined) {
+    conditions.push(assumed ? assumedSql(bind) : `not ${assumedSql(bind)}`);
+  }
+  conditions.push(...placeSql(filter, bind));
+  return { where: conditions.join('\n and '), bind: values };
+}

@@ -1,0 +1,36 @@
+import { completeAttributes } from '../../shared/building/assumed-attributes.ts';
+import { knownOfBuilding } from '../../shared/building/known-of-building.ts';
+import type { RegisterRow } from '../../shared/schemas/register.ts';
+import type { Building } from '../models/building.ts';
+
+type Values = Omit<RegisterRow, 'id' | 'reference' | 'centre'>;
+
+/** The fields of a building as lists and pages show them. */
+export type ListedBuilding = Pick<
+  Building,
+  Exclude<keyof Values, 'assumed'> | 'id' | 'reference' | 'west' | 'south' | 'east' | 'north'
+>;
+
+/** What leaves the server of a building's values, with what the method has to assume. */
+export function presentValues(building: Pick<Building, Exclude<keyof Values, 'assumed'>>): Values {
+  return {
+    name: building.name,
+    address: building.address,
+    use: building.use,
+    storeys: building.storeys,
+    eavesHeight: building.eavesHeight,
+    groundLevel: building.groundLevel,
+    foundingLevel: building.foundingLevel,
+    foundation: building.foundation,
+    construction: building.construction,
+    eOverG: building.eOverG,
+    poisson: building.poisson,
+    listedGrade: building.listedGrade,
+    condition: building.condition,
+    inspected: building.inspected,
+    area: building.area,
+    groundLevelFrom: building.groundLevelFrom,
+    assumed: [...completeAttributes(knownOfBuilding(building)).assumed],
+    version: building.version,
+  };
+}

@@ -1,0 +1,85 @@
+import type { RegisterFilter, RegisterSort } from '../../shared/schemas/register.ts';
+import { findRegisterIds, findRegisterOrder } from '../models/find-register-order.ts';
+import { countRows } from '../models/find-register-rows.ts';
+import { registerCondition } from '../models/register-condition.ts';
+import type { Scheme } from '../models/scheme.ts';
+import type { Services } from '../services.ts';
+
+type Which = { readonly filter: RegisterFilter; readonly sort: RegisterSort };
+
+/** Numbers of buildings, packed. */
+export type PackedIds = {
+  readonly count: number;
+  readonly slice: (from: number, to: number) => number[];
+  readonly indexOf: (id: number) => number | null;
+};
+
+const BYTES = 4;
+
+function unpacked(bytes: Buffer): PackedIds {
+  const count = bytes.byteLength / BYTES;
+  return {
+    count,
+    slice: (from, to) => {
+      const length = Math.max(0, Math.min(to, count) - from);
+      return Array.from({ length }, (_, k) => bytes.readInt32BE((from + k) * BYTES));
+    },
+    indexOf: (id) => {
+      for (let k = 0; k < count; k += 1) if (bytes.readInt32BE(k * BYTES) === id) return k;
+      return null;
+    },
+  };
+}
+
+function orderKey({ id, registerVersion }: Scheme, { filter, sort }: Which): string {
+  return `order/${id}/${registerVersion}/${JSON.stringify([filter, sort])}`;
+}
+
+/** Whether the buildings that a filter means have been put in order already. */
+export function isOrdered(
+  { tiles }: Pick<Services, 'tiles'>,
+  scheme: Scheme,
+  which: Which,
+): boolean {
+  return tiles.has(orderKey(scheme, which));
+}
+
+/**
+ * The buildings that a filter means, in order. Kept as long as tiles are: a register that changed has
+ * another version and so another key.
+ */
+export async function registerOrder(
+  { database, tiles }: Pick<Services, 'database' | 'tiles'>,
+  scheme: Scheme,
+  { filter, sort }: Which,
+): Promise<PackedIds> {
+  const key = orderKey(scheme, { filter, sort });
+  const condition = registerCondition(scheme.id, filter);
+  return unpacked(await tiles.get(key, () => findRegisterOrder(database, condition, sort)));
+}
+
+/** The numbers of the buildings that a filter means, ascending. */
+export async function registerIds(
+  { database }: Pick<Services, 'database'>,
+  scheme: Scheme,
+  filter: RegisterFilter,
+): Promise<number[]> {
+  const condition = registerCondition(scheme.id, filter);
+  const ids = unpacked(await findRegisterIds(database, condition));
+  return ids.slice(0, ids.count);
+}
+
+/** How many buildings a filter means, kept as their order is. */
+export async function registerCount(
+  { database, tiles }: Pick<Services, 'database' | 'tiles'>,
+  scheme: Scheme,
+  filter: RegisterFilter,
+): Promise<number> {
+  const key = `count/${scheme.id}/${scheme.registerVersion}/${JSON.stringify(filter)}`;
+  const count = await tiles.get(key, async () => {
+    const bytes = Buffer.alloc(BYTES);
+    bytes.writeInt32BE(await countRows(database, registerCondition(scheme.id, filter)));
+    return bytes;
+  });
+  return count.readInt32BE();
+}
