@@ -39,3 +39,15 @@ export function bringIntoView(map: MapLibreMap, [west, south, east, north]: Came
     zoom: Math.max(map.getZoom(), CLOSE_ZOOM),
   });
 }
+
+/** The piece of ground that is seen, to about a metre. */
+export function viewOf(map: MapLibreMap): CameraBounds {
+  const view = map.getBounds();
+  const [west, south, east, north] = [
+    view.getWest(),
+    view.getSouth(),
+    view.getEast(),
+    view.getNorth(),
+  ].map((degrees) => Number(degrees.toFixed(5)));
+  return [west ?? 0, south ?? 0, east ?? 0, north ?? 0];
+}

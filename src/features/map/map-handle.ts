@@ -1,6 +1,6 @@
 import type { Map as MapLibreMap } from 'maplibre-gl';
 import { buildingsInView } from './buildings-in-view.ts';
-import { bringIntoView, fitBounds, zoomBy, type CameraBounds } from './camera.ts';
+import { bringIntoView, fitBounds, viewOf, zoomBy, type CameraBounds } from './camera.ts';
 
 /** What the page may ask of the map. */
 export type MapHandle = {
@@ -8,6 +8,8 @@ export type MapHandle = {
   readonly zoomBy: (steps: number) => void;
   readonly bringIntoView: (bounds: CameraBounds) => void;
   readonly buildingsInView: () => number[];
+  /** What piece of ground is seen. */
+  readonly view: () => CameraBounds;
 };
 
 export function handleOfMap(map: MapLibreMap): MapHandle {
@@ -22,5 +24,6 @@ export function handleOfMap(map: MapLibreMap): MapHandle {
       bringIntoView(map, bounds);
     },
     buildingsInView: () => buildingsInView(map),
+    view: () => viewOf(map),
   };
 }

@@ -18,6 +18,12 @@ export type MapPlan = {
   /** Streets, water, rail and parks that were uploaded for the scheme. */
   readonly background: TileSet | null;
   readonly buildings: TileSet | null;
+  /** Rows of a file that is being brought in; the buildings are then faint, and rows are what is marked. */
+  readonly rows?: TileSet;
+  /** Of the buildings only these are meant; the others are faint. Without it, all of them are meant. */
+  readonly meant?: ReadonlySet<number>;
+  /** Whether buildings can be drawn on it. */
+  readonly canDraw?: boolean;
 };
 
 /** What of a scheme's buildings is marked. */

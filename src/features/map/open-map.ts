@@ -2,9 +2,11 @@ import { Map as MapLibreMap, setWorkerUrl } from 'maplibre-gl';
 import 'maplibre-gl/dist/maplibre-gl.css';
 import workerUrl from 'maplibre-gl/dist/maplibre-gl-worker.mjs?worker&url';
 import { fitBounds, type CameraBounds } from './camera.ts';
+import { addHatches } from './style/hatch-images.ts';
 import { loadLabelFonts } from './load-label-fonts.ts';
 
-const FARTHEST = 3;
+/** About 400 km across a wide screen: a region, beyond which nothing is drawn. */
+const FARTHEST = 8;
 const NEAREST = 22;
 
 setWorkerUrl(workerUrl);
@@ -46,5 +48,6 @@ export async function openMap(start: MapStart, signal: AbortSignal): Promise<Map
   fitBounds(map, start.home);
   await map.once('style.load');
   signal.throwIfAborted();
+  addHatches(map);
   return map;
 }

@@ -3,6 +3,7 @@ import { useEffect, useEffectEvent, useLayoutEffect, useMemo, useState } from 'r
 import { installArrowKeys } from '../arrow-keys.ts';
 import { createMapController, type MapController } from '../controller/map-controller.ts';
 import { portOfMap } from '../controller/port-of-map.ts';
+import { useDrawing } from '../hooks/use-drawing.ts';
 import { useGridCrosses } from '../hooks/use-grid-crosses.ts';
 import { useMapState } from '../hooks/use-map-state.ts';
 import { useMode } from '../hooks/use-mode.ts';
@@ -15,6 +16,7 @@ import { MapButtons } from './map-buttons.tsx';
 import { MapGaps } from './map-gaps.tsx';
 import type { PlanMapProps } from './plan-map-props.ts';
 import { ScaleBar } from './scale-bar.tsx';
+import { ZoomHint } from './zoom-hint.tsx';
 
 /** Keeps the map as the plan and the marks say. */
 function useController(map: MapLibreMap, plan: MapPlan, marks: BuildingMarks): MapController {
@@ -36,7 +38,8 @@ function fetchAgain(map: MapLibreMap, plan: MapPlan): void {
 
 /** A map that is open, with what stands on it: scale, north, place and buttons. */
 export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap }) {
-  const { map, plan, home, gridDefinition, selected, onSelect } = props;
+  const { map, plan, home, gridDefinition, selected, onSelect, drawing = null } = props;
+  const isSelecting = drawing === null || drawing.mode === 'none';
   const [hovered, setHovered] = useState<number | null>(null);
   const marks = useMemo(() => ({ selected, hovered }), [selected, hovered]);
   const projection = useMemo(() => createGridProjection(gridDefinition), [gridDefinition]);
@@ -45,7 +48,8 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
   const handle = useMemo(() => handleOfMap(map), [map]);
   const giveHandle = useEffectEvent(props.onHandle);
   useGridCrosses(map, controller, projection);
-  useMode(map, 'select', { select: onSelect, hover: setHovered });
+  useDrawing(map, controller, projection, drawing);
+  useMode(map, isSelecting ? 'select' : null, { select: onSelect, hover: setHovered });
   useEffect(() => installArrowKeys(map), [map]);
   useEffect(() => {
     giveHandle(handle);
@@ -73,6 +77,7 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
       <div className="absolute bottom-3 left-3">
         <CursorPlace map={map} projection={projection} />
       </div>
+      <ZoomHint map={map} plan={plan} />
       {hasGaps && (
         <div className="absolute right-3 bottom-12 left-3 flex justify-center">
           <MapGaps

@@ -1,4 +1,5 @@
 import type { CameraBounds } from '../camera.ts';
+import type { MapDrawing } from '../map-drawing.ts';
 import type { MapHandle } from '../map-handle.ts';
 import type { MapPlan } from '../map-plan.ts';
 
@@ -12,6 +13,8 @@ export type PlanMapProps = {
   /** The scheme's grid for proj4. */
   readonly gridDefinition: string;
   readonly selected: number | null;
+  /** What is being drawn by hand; buildings can then not be selected, unless nothing has to be pointed at. */
+  readonly drawing?: MapDrawing | null;
   readonly onSelect: (buildingId: number | null) => void;
   /** Gives the page its way to move the map, and null when the map goes. */
   readonly onHandle: (handle: MapHandle | null) => void;

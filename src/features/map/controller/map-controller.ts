@@ -1,10 +1,16 @@
 import type { LayerSpecification } from 'maplibre-gl';
 import { NO_MARKS, type BuildingMarks, type MapPlan } from '../map-plan.ts';
 import { layersOfPlan } from '../style/layers-of-plan.ts';
-import { BUILDINGS_TILE_LAYER, LABELS_TILE_LAYER, SOURCES } from '../style/source-names.ts';
+import {
+  BUILDINGS_TILE_LAYER,
+  LABELS_TILE_LAYER,
+  ROWS_TILE_LAYER,
+  SOURCES,
+} from '../style/source-names.ts';
 import { sourcesOfPlan, type SourcesByName } from '../style/sources-of-plan.ts';
 import { layerChanges, type LayerChange } from './layer-changes.ts';
 import type { MapPort } from './map-port.ts';
+import { createMeantBuildings } from './meant-buildings.ts';
 import { sourceChanges } from './source-changes.ts';
 
 export type MapController = {
@@ -14,7 +20,15 @@ export type MapController = {
   readonly mark: (marks: BuildingMarks) => void;
   /** Draws other crosses of the grid. */
   readonly drawGrid: (crosses: GeoJSON.FeatureCollection) => void;
+  /** Draws what is being drawn by hand. */
+  readonly drawDraft: (shapes: GeoJSON.FeatureCollection) => void;
 };
+
+/** The layers of a tile whose shapes and names can be marked, by source. */
+const MARKED = {
+  [SOURCES.rows]: [ROWS_TILE_LAYER],
+  [SOURCES.buildings]: [BUILDINGS_TILE_LAYER, LABELS_TILE_LAYER],
+} as const;
 
 function carryOut(map: MapPort, change: LayerChange): void {
   switch (change.kind) {
@@ -47,11 +61,13 @@ export function createMapController(map: MapPort): MapController {
   let sources: SourcesByName = {};
   let layers: readonly LayerSpecification[] = [];
   let marks = NO_MARKS;
+  const showMeant = createMeantBuildings(map);
 
   function setMark(name: keyof BuildingMarks, id: number | null, value: boolean): void {
-    if (id === null || sources[SOURCES.buildings] === undefined) return;
-    for (const sourceLayer of [BUILDINGS_TILE_LAYER, LABELS_TILE_LAYER]) {
-      map.setFeatureState({ source: SOURCES.buildings, sourceLayer, id }, { [name]: value });
+    const source = [SOURCES.rows, SOURCES.buildings].find((one) => sources[one] !== undefined);
+    if (id === null || source === undefined) return;
+    for (const sourceLayer of MARKED[source]) {
+      map.setFeatureState({ source, sourceLayer, id }, { [name]: value });
     }
   }
 
@@ -66,9 +82,15 @@ export function createMapController(map: MapPort): MapController {
     for (const [name, urls] of readdressed) map.setTiles(name, urls);
     for (const change of changes) if (change.kind !== 'remove') carryOut(map, change);
     [sources, layers] = [nextSources, nextLayers];
-    if (added.some(([name]) => name === SOURCES.buildings)) {
+    if (added.some(([name]) => name === SOURCES.buildings || name === SOURCES.rows)) {
       setMark('selected', marks.selected, true);
       setMark('hovered', marks.hovered, true);
+    }
+    if (sources[SOURCES.buildings] !== undefined) {
+      showMeant(
+        plan.meant,
+        added.some(([name]) => name === SOURCES.buildings),
+      );
     }
   }
 
@@ -86,6 +108,9 @@ export function createMapController(map: MapPort): MapController {
     mark,
     drawGrid: (crosses) => {
       map.setData(SOURCES.grid, crosses);
+    },
+    drawDraft: (shapes) => {
+      map.setData(SOURCES.draft, shapes);
     },
   };
 }

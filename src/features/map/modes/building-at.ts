@@ -1,10 +1,11 @@
 import type { Map as MapLibreMap, Point } from 'maplibre-gl';
-import { BUILDINGS_LAYER } from '../style/source-names.ts';
+import { BUILDINGS_LAYER, ROWS_LAYER } from '../style/source-names.ts';
 
-/** The building at a point of the screen, or no further from it than `reach` pixels. */
+/** The building or, where rows are shown, the row at a point of the screen, or within `reach` pixels. */
 export function buildingAt(map: MapLibreMap, { x, y }: Point, reach = 0): number | null {
-  if (map.getLayer(BUILDINGS_LAYER) === undefined) return null;
-  const options = { layers: [BUILDINGS_LAYER] };
+  const layer = [ROWS_LAYER, BUILDINGS_LAYER].find((id) => map.getLayer(id) !== undefined);
+  if (layer === undefined) return null;
+  const options = { layers: [layer] };
   const exact = map.queryRenderedFeatures([x, y], options);
   const near: [[number, number], [number, number]] = [
     [x - reach, y - reach],

@@ -2,10 +2,13 @@ import type { LayerSpecification } from 'maplibre-gl';
 import type { MapPlan } from '../map-plan.ts';
 import { backgroundLabelLayers, backgroundLayers } from './background-layers.ts';
 import { buildingLabelLayers, buildingLayers } from './building-layers.ts';
+import { draftLayers } from './draft-layers.ts';
 import { gridLayers } from './grid-layers.ts';
 import { groundLayers, harbourLayers } from './ground-layers.ts';
 import { labelLayers } from './label-layers.ts';
 import { MAP_COLOURS } from './map-colours.ts';
+import { meantLayers } from './meant-layers.ts';
+import { faintLayers, rowLayers } from './row-layers.ts';
 import { bridgeLayers, streetLayers, treeLayers } from './street-layers.ts';
 
 /** Paper; round the demo town, which is an island, the colour of the sea. */
@@ -25,18 +28,34 @@ function basemapLayers(latitude: number): LayerSpecification[] {
   ];
 }
 
+/** Buildings and their names: plain, faint under the rows of a file, or only some of them plain. */
+function ofBuildings({
+  buildings,
+  rows,
+  meant,
+}: MapPlan): Record<'shapes' | 'names', LayerSpecification[]> {
+  if (buildings === null) return { shapes: [], names: [] };
+  const [shapes, names] = [buildingLayers(), buildingLabelLayers()];
+  if (rows !== undefined) return { shapes: faintLayers(shapes), names: [] };
+  if (meant !== undefined) return { shapes: meantLayers(shapes), names: meantLayers(names) };
+  return { shapes, names };
+}
+
 /** Every layer of what the plan shows, from the ground up. */
 export function layersOfPlan(plan: MapPlan): LayerSpecification[] {
-  const { latitude, basemap, background, buildings } = plan;
+  const { latitude, basemap, background, rows } = plan;
+  const { shapes, names } = ofBuildings(plan);
   const layers: (LayerSpecification[] | false)[] = [
     [paper(plan)],
     basemap !== null && basemapLayers(latitude),
     background !== null && backgroundLayers(latitude),
-    buildings !== null && buildingLayers(),
+    shapes,
+    rows !== undefined && rowLayers(),
     gridLayers(),
     background !== null && backgroundLabelLayers(),
     basemap !== null && labelLayers(),
-    buildings !== null && buildingLabelLayers(),
+    names,
+    plan.canDraw === true && draftLayers(),
   ];
   return layers.flatMap((group) => (group === false ? [] : group));
 }

@@ -21,4 +21,6 @@ export const MAP_COLOURS = {
   rule: '#a39a87',
   select: '#174c9e',
   selectWash: '#dfe8f4',
+  clay: '#9e4326',
+  clayWash: '#f3e1d5',
 } as const;

@@ -4,6 +4,8 @@ export const SOURCES = {
   background: 'background',
   grid: 'grid',
   buildings: 'buildings',
+  rows: 'rows',
+  draft: 'draft',
 } as const;
 
 /** The layer of a tile in which the server puts buildings. */
@@ -14,3 +16,9 @@ export const LABELS_TILE_LAYER = 'labels';
 
 /** The map layer that a click on a building meets. */
 export const BUILDINGS_LAYER = 'buildings';
+
+/** The layer of a tile in which the server puts the rows of an import. */
+export const ROWS_TILE_LAYER = 'rows';
+
+/** The map layer that a click on a row of an import meets. */
+export const ROWS_LAYER = 'rows';

@@ -9,14 +9,20 @@ function vectorSource({ url, bounds, minzoom, maxzoom }: TileSet): SourceSpecifi
   return { type: 'vector', tiles: [url], ...extent, minzoom, maxzoom };
 }
 
+function shapesOfOurs(): SourceSpecification {
+  return { type: 'geojson', data: { type: 'FeatureCollection', features: [] } };
+}
+
 /** Where the map takes what the plan shows from. */
-export function sourcesOfPlan({ basemap, background, buildings }: MapPlan): SourcesByName {
-  const tileSets = { basemap, background, buildings };
+export function sourcesOfPlan(plan: MapPlan): SourcesByName {
+  const { basemap, background, buildings, rows } = plan;
+  const tileSets = { basemap, background, buildings, rows };
   const named = Object.entries(tileSets).flatMap(([name, tiles]) =>
-    tiles === null ? [] : [[name, vectorSource(tiles)] as const],
+    tiles === null || tiles === undefined ? [] : [[name, vectorSource(tiles)] as const],
   );
   return {
     ...Object.fromEntries(named),
-    [SOURCES.grid]: { type: 'geojson', data: { type: 'FeatureCollection', features: [] } },
+    [SOURCES.grid]: shapesOfOurs(),
+    ...(plan.canDraw === true && { [SOURCES.draft]: shapesOfOurs() }),
   };
 }

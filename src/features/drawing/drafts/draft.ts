@@ -1,0 +1,57 @@
+import type { BuildingAnswer } from '../../../../shared/schemas/buildings.ts';
+import type { GridPlace } from '../../map/place/grid-projection.ts';
+
+/** Corners in order, the first not repeated at the end. */
+export type Ring = readonly GridPlace[];
+/** Parts of a building, each an outline and its courtyards. */
+export type Parts = readonly (readonly Ring[])[];
+
+/** What is drawn corner by corner: a new building, another outline, or a line to split along. */
+export type ShapeDraft = {
+  readonly tool: 'draw' | 'edit' | 'split';
+  /** The building as it was seen; null for a new one. */
+  readonly building: BuildingAnswer | null;
+  /** Of a line, one part with one ring. */
+  readonly parts: Parts;
+  readonly isClosed: boolean;
+};
+
+/** Buildings that are to become one, in the order in which they were picked. */
+export type JoinDraft = { readonly tool: 'join'; readonly buildings: readonly BuildingAnswer[] };
+
+export type Draft = ShapeDraft | JoinDraft;
+
+/** A footprint as the register has it, without the repeated corners; no value of it is touched. */
+export function partsOf(footprint: BuildingAnswer['footprint']): Parts {
+  return footprint.map((part) =>
+    part.map((ring) => {
+      const [first, last] = [ring[0], ring.at(-1)];
+      const isRepeated = ring.length > 1 && first?.[0] === last?.[0] && first?.[1] === last?.[1];
+      return isRepeated ? ring.slice(0, -1) : ring;
+    }),
+  );
+}
+
+/** The same as it is sent: rings repeat their first corner. */
+export function footprintOf(parts: Parts): [number, number][][][] {
+  return parts.map((part) =>
+    part.map((ring) => [...ring, ...ring.slice(0, 1)].map(([east, north]) => [east, north])),
+  );
+}
+
+export function newOutline(): ShapeDraft {
+  return { tool: 'draw', building: null, parts: [[[]]], isClosed: false };
+}
+
+export function outlineOf(building: BuildingAnswer): ShapeDraft {
+  return { tool: 'edit', building, parts: partsOf(building.footprint), isClosed: true };
+}
+
+export function newCut(building: BuildingAnswer): ShapeDraft {
+  return { tool: 'split', building, parts: [[[]]], isClosed: false };
+}
+
+/** The corners of what is drawn one after another. */
+export function lineOf({ parts }: ShapeDraft): Ring {
+  return parts[0]?.[0] ?? [];
+}

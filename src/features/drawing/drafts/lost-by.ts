@@ -1,0 +1,14 @@
+import { lineOf, type Draft } from './draft.ts';
+import type { History } from './history.ts';
+
+/** So little is drawn again without a thought. */
+const FEW = 3;
+
+/** How many corners giving up would lose; nought where they are too few to ask. */
+export function lostBy(history: History<Draft> | null): number {
+  if (history === null) return 0;
+  const { past, present } = history;
+  if (present.tool === 'join') return 0;
+  const lost = present.tool === 'edit' ? past.length : lineOf(present).length;
+  return lost > FEW ? lost : 0;
+}

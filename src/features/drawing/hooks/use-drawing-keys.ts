@@ -1,0 +1,69 @@
+import { useHotkeys } from '../../../hooks/use-hotkeys.ts';
+import { useKeyHelp } from '../../../hooks/use-key-help.ts';
+import type { CornerAt } from '../../map/map-drawing.ts';
+import { DRAFT_KEYS, TOOL_KEYS } from '../draw-keys.ts';
+import type { Draft } from '../drafts/draft.ts';
+import { closeOutline, removeCorner, takeLastBack } from '../drafts/edit-corners.ts';
+import type { ToolId } from '../tools.ts';
+import type { Drafting } from './use-drafting.ts';
+import { useDraftKeys } from './use-draft-keys.ts';
+
+type Actions = {
+  readonly press: (tool: ToolId) => void;
+  readonly save: () => void;
+};
+
+/** Enter closes an outline and splits or joins; an outline that is closed waits for its form. */
+function close(draft: Draft | null, { editShape }: Drafting, save: () => void): boolean {
+  if (draft === null || (draft.tool !== 'join' && draft.isClosed)) return false;
+  if (draft.tool === 'draw') editShape(closeOutline);
+  else save();
+  return true;
+}
+
+function remove({ chosen, editShape }: Drafting, press: Actions['press']): boolean {
+  const at: CornerAt | null = chosen;
+  if (at === null) press('remove');
+  else editShape((now) => removeCorner(now, at));
+  return true;
+}
+
+/** The keys of the tools and of what is drawn. */
+export function useDrawingKeys(
+  drafting: Drafting,
+  { press, save }: Actions,
+  active: boolean,
+): void {
+  const { draft } = drafting;
+  useKeyHelp(TOOL_KEYS, active);
+  useKeyHelp(DRAFT_KEYS, active && draft !== null);
+  useHotkeys(
+    {
+      v: () => { press('select'); },
+      d: () => { press('draw'); },
+      e: () => { press('edit'); },
+      c: () => { press('split'); },
+      u: () => { press('join'); },
+    },
+    active,
+  ); // prettier-ignore
+  useDraftKeys(
+    {
+      undo: () => { press('undo'); },
+      redo: () => { press('redo'); },
+      giveUp: () => {
+        if (draft === null) return false;
+        press('select');
+        return true;
+      },
+      takeBack: () => {
+        if (draft === null || draft.tool === 'join' || draft.isClosed) return false;
+        drafting.editShape(takeLastBack);
+        return true;
+      },
+      remove: () => (draft !== null && drafting.chosen === null ? false : remove(drafting, press)),
+      close: () => close(draft, drafting, save),
+    },
+    active,
+  ); // prettier-ignore
+}
