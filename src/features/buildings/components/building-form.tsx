@@ -1,0 +1,80 @@
+import { zodResolver } from '@hookform/resolvers/zod';
+import { useForm } from 'react-hook-form';
+import {
+  BUILDING_FIELD_NAMES,
+  BUILDING_FIELDS,
+} from '../../../../shared/schemas/building-fields.ts';
+import type { BuildingAnswer } from '../../../../shared/schemas/buildings.ts';
+import type { RegisterChange } from '../../../../shared/schemas/register-changes.ts';
+import { Button } from '../../../components/ui/button.tsx';
+import { Field } from '../../../components/ui/field.tsx';
+import { MutationError } from '../../../components/ui/mutation-error.tsx';
+import { buildingDraftSchema, draftOf, draftOfWritten } from '../building-draft.ts';
+import { useEditBuilding } from '../hooks/use-edit-building.ts';
+import { AttributeField } from './attribute-field.tsx';
+import { ClashChoice } from './clash-choice.tsx';
+
+type BuildingFormProps = {
+  readonly schemeId: string;
+  readonly building: BuildingAnswer;
+  /** Given the change, or null where there was nothing to change. */
+  readonly onSaved: (change: RegisterChange | null) => void;
+  readonly onCancel: () => void;
+};
+
+/** Changes the reference and the values of a building. What is left empty is not known. */
+export function BuildingForm({ schemeId, building, onSaved, onCancel }: BuildingFormProps) {
+  const edit = useEditBuilding(schemeId, building, onSaved);
+  const form = useForm({
+    resolver: zodResolver(buildingDraftSchema),
+    defaultValues: draftOf(building),
+  });
+  const { errors } = form.formState;
+  const submit = form.handleSubmit(edit.save);
+  if (edit.clash !== null) {
+    const { clash, busy, settle, leaveClash } = edit;
+    const back = () => {
+      const written = leaveClash();
+      if (written !== null) form.reset(draftOfWritten(written));
+    };
+    return <ClashChoice {...{ clash, busy }} onSave={settle} onBack={back} />;
+  }
+  return (
+    <form
+      noValidate
+      aria-label={`Change ${building.reference}`}
+      onSubmit={(event) => void submit(event)}
+      onKeyDown={(event) => {
+        if (event.key === 'Escape') onCancel();
+      }}
+      className="mt-3"
+    >
+      <MutationError failed="The building was not changed." error={edit.error} />
+      <div className="grid grid-cols-2 gap-x-4 gap-y-2.5">
+        <Field
+          label="Reference"
+          autoFocus
+          autoComplete="off"
+          error={errors.reference?.message}
+          {...form.register('reference')}
+        />
+        {BUILDING_FIELD_NAMES.map((field) => (
+          <AttributeField
+            key={field}
+            field={field}
+            error={errors.attributes?.[field]?.message}
+            frameClassName={BUILDING_FIELDS[field].label === 'Address' ? 'col-span-2' : ''}
+            {...form.register(`attributes.${field}`)}
+          />
+        ))}
+      </div>
+      <p className="mt-2 text-cap text-ink-3">What is left empty is not known.</p>
+      <div className="sticky bottom-0 mt-3 flex gap-2 border-t border-hairline bg-paper py-3">
+        <Button kind="main" type="submit" busy={edit.busy}>
+          Save
+        </Button>
+        <Button onClick={onCancel}>Leave it as it is</Button>
+      </div>
+    </form>
+  );
+}

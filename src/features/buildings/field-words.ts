@@ -1,0 +1,43 @@
+import {
+  BUILDING_FIELDS,
+  type BuildingFieldFacts,
+} from '../../../shared/schemas/building-fields.ts';
+import type { RegisterColumn } from '../../../shared/schemas/register.ts';
+import { formatCount } from '../../lib/format-number.ts';
+
+const BESIDE: Readonly<Record<'reference' | 'area', BuildingFieldFacts>> = {
+  reference: { label: 'Reference', kind: 'text' },
+  area: { label: 'Area in plan', kind: 'number', unit: 'm²' },
+};
+
+/** How a column of the register is called and written. */
+export function factsOf(column: RegisterColumn): BuildingFieldFacts {
+  return column === 'reference' || column === 'area' ? BESIDE[column] : BUILDING_FIELDS[column];
+}
+
+/** Of a field as it stands inside a sentence: small, unless it is a sign. */
+export function inSentence(column: RegisterColumn): string {
+  const { label } = factsOf(column);
+  return /^[A-Z]\/|^Poisson/.test(label) ? label : label.charAt(0).toLowerCase() + label.slice(1);
+}
+
+const PLACES: Readonly<Partial<Record<RegisterColumn, number>>> = {
+  eavesHeight: 1,
+  groundLevel: 2,
+  foundingLevel: 2,
+  eOverG: 1,
+  poisson: 2,
+  area: 1,
+};
+const MOST_PLACES = 3;
+
+/** A figure of a column, with the places that are usual there or as many as it has, up to three. */
+export function formatFigure(column: RegisterColumn, value: number): string {
+  const least = PLACES[column] ?? 0;
+  const [whole = '', fraction = ''] = String(Number(Math.abs(value).toFixed(MOST_PLACES))).split(
+    '.',
+  );
+  const digits = fraction.padEnd(least, '0');
+  const sign = value < 0 && Number(`${whole}.${digits}`) !== 0 ? '\u2212' : '';
+  return `${sign}${formatCount(Number(whole))}${digits === '' ? '' : `.${digits}`}`;
+}

@@ -1,0 +1,100 @@
+import type { RegisterColumn, RegisterRow } from '../../../../shared/schemas/register.ts';
+import type { Column } from '../../../components/ui/table/column.ts';
+import { formatCount } from '../../../lib/format-number.ts';
+import { Shown } from '../../buildings/components/shown.tsx';
+import { factsOf } from '../../buildings/field-words.ts';
+import { shownValue } from '../../buildings/shown-value.ts';
+import type { Marks } from '../hooks/use-marks.ts';
+import { SHORT_HEADINGS, WIDTHS } from '../register-columns.ts';
+import { TickBox } from './tick-box.tsx';
+
+const TICK_WIDTH = 44;
+const BUILDING_WIDTH = 210;
+
+function tickColumn(marks: Marks, found: number): Column<RegisterRow> {
+  return {
+    id: 'mark',
+    width: TICK_WIDTH,
+    heading: (
+      <TickBox
+        name={`Mark all ${formatCount(found)} found`}
+        checked={marks.isAll}
+        mixed={!marks.isAll && marks.count > 0}
+        onToggle={marks.toggleAll}
+      />
+    ),
+    cell: ({ id, reference }) => (
+      <TickBox
+        name={`Mark ${reference}`}
+        checked={marks.isMarked(id)}
+        onToggle={() => {
+          marks.toggle(id);
+        }}
+      />
+    ),
+  };
+}
+
+function referenceColumn(stuckAt: number | undefined): Column<RegisterRow> {
+  return {
+    id: 'reference',
+    heading: SHORT_HEADINGS.reference,
+    width: WIDTHS.reference + (stuckAt === undefined ? 12 : 0),
+    ...(stuckAt !== undefined && { stuckAt }),
+    cell: ({ reference }) => (
+      <span title={reference} className="text-ink-2">
+        {reference}
+      </span>
+    ),
+  };
+}
+
+/** The name of a building, or else its address, and what it is used for. */
+function Building({ row }: { readonly row: RegisterRow }) {
+  const name = row.name ?? row.address;
+  const use = row.use ?? '';
+  return (
+    <span title={[row.name, row.address, row.use].filter((part) => part !== null).join(', ')}>
+      {name === null ? (
+        <span className="text-ink-3">no address</span>
+      ) : (
+        <b className="font-semibold">{name}</b>
+      )}{' '}
+      <span className="text-ink-2">{use}</span>
+    </span>
+  );
+}
+
+const BUILDING: Column<RegisterRow> = {
+  id: 'building',
+  heading: 'Building',
+  wide: true,
+  width: BUILDING_WIDTH,
+  cell: (row) => <Building row={row} />,
+};
+
+function fieldColumn(column: RegisterColumn): Column<RegisterRow> {
+  const { label, kind, unit } = factsOf(column);
+  return {
+    id: column,
+    heading: SHORT_HEADINGS[column] ?? label,
+    width: WIDTHS[column],
+    ...(kind !== 'text' && { holds: 'figure' }),
+    ...(unit !== undefined && { unit }),
+    cell: (row) => <Shown shown={shownValue(column, row)} />,
+  };
+}
+
+/** The columns of the register's table; without marks for who only reads. */
+export function registerColumns(
+  chosen: readonly RegisterColumn[],
+  marks: Marks | null,
+  found: number,
+): readonly Column<RegisterRow>[] {
+  return [
+    ...(marks === null ? [] : [tickColumn(marks, found)]),
+    referenceColumn(marks === null ? undefined : TICK_WIDTH),
+    BUILDING,
+    ...chosen.map(fieldColumn),
+  ];
+}

@@ -1,0 +1,59 @@
+import { useState } from 'react';
+import type { SideView } from '../components/building-side.tsx';
+import type { Done } from '../components/done-line.tsx';
+import { useActiveBuilding } from './use-active-building.ts';
+import { useMapPane } from './use-map-pane.ts';
+import { useMarks } from './use-marks.ts';
+import { useRegisterAddress } from './use-register-address.ts';
+import { useRegisterRows } from './use-register-rows.ts';
+import { useShowOnPlan } from './use-show-on-plan.ts';
+
+/** The register at work: its rows, the row that is reached, what is marked, opened and shown on the map. */
+export function useRegisterDesk(schemeId: string, personId: string) {
+  const address = useRegisterAddress();
+  const { which, opened } = address;
+  const rows = useRegisterRows(schemeId, which);
+  const active = useActiveBuilding(schemeId, which, rows, opened);
+  const marks = useMarks(schemeId, which.filter, rows.page?.found ?? 0);
+  const mapPane = useMapPane(personId);
+  const onPlan = useShowOnPlan(schemeId, { activeId: active.id, opened, mapPane });
+  const [sideView, setSideView] = useState<SideView>('facts');
+  const [done, setDone] = useState<Done | null>(null);
+
+  /** What is opened goes along with the row, unless it is being changed. */
+  function follow(buildingId: number | undefined) {
+    if (opened === null || buildingId === undefined || sideView === 'edit') return;
+    address.open(buildingId);
+  }
+  return {
+    address,
+    rows,
+    active,
+    marks,
+    mapPane,
+    ...onPlan,
+    sideView,
+    setSideView,
+    done,
+    setDone,
+    reachRow: (index: number) => {
+      active.reachRow(index);
+      follow(rows.rowAt(index)?.id);
+    },
+    pressOnMap: (buildingId: number | null) => {
+      active.reachBuilding(buildingId);
+      follow(buildingId ?? undefined);
+    },
+    open: (buildingId: number | null) => {
+      if (buildingId === null || sideView === 'edit') return;
+      setSideView('facts');
+      address.open(buildingId);
+    },
+    close: () => {
+      setSideView('facts');
+      address.open(null);
+    },
+  };
+}
+
+export type RegisterDesk = ReturnType<typeof useRegisterDesk>;
