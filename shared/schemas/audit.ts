@@ -13,13 +13,16 @@ export const auditQuerySchema = z.strictObject({
   schemeId: z.uuid().optional(),
 });
 
+const personSchema = z.strictObject({ id: z.uuid(), name: z.string(), email: z.string() });
+
 const auditEntrySchema = z.strictObject({
   id: entryId,
   at: z.iso.datetime(),
-  person: z.strictObject({ id: z.uuid(), name: z.string(), email: z.string() }).nullable(),
+  person: personSchema.nullable(),
   scheme: z.strictObject({ id: z.uuid(), name: z.string() }).nullable(),
   action: z.string(),
   subject: z.strictObject({ kind: z.string(), id: z.string() }),
+  named: z.array(personSchema),
   before: z.record(z.string(), z.unknown()).nullable(),
   after: z.record(z.string(), z.unknown()).nullable(),
 });
@@ -37,8 +40,8 @@ export const auditPageSchema = z.strictObject({
 /**
  * One entry of the audit trail: who changed what, when, from which values to which.
  *
- * Units: none. Valid: person null where nobody was signed in; before and after hold what changed.
- * Source: [own].
+ * Units: none. Valid: person null where nobody was signed in; named are those whose ids stand in subject,
+ * before or after; these two hold what changed. Source: [own].
  */
 export type AuditEntryAnswer = z.infer<typeof auditEntrySchema>;
 

@@ -1,4 +1,6 @@
 import { z } from 'zod';
+import { footprintSchema } from './building-fields.ts';
+import { buildingValuesShape } from './register.ts';
 
 /**
  * The most buildings that a search answers with.
@@ -52,25 +54,42 @@ const buildingRow = {
 export const buildingsFoundSchema = z.array(z.strictObject(buildingRow));
 
 /**
+ * A wall of a building: its letter, where it stands, how long it is, which way it runs, and the
+ * buildings that stand against it.
+ *
+ * Units: start and end easting and northing m, length m, bearing degrees clockwise from grid north.
+ * Valid: letters A to Z, then AA and on, part by part and ring by ring; a wall has no direction, so its
+ * bearing is under 180. Source: [own].
+ */
+export const buildingWallSchema = z.strictObject({
+  letter: z.string(),
+  start: lonLat,
+  end: lonLat,
+  length: z.number(),
+  bearing: z.number(),
+  sharedWith: z.array(z.strictObject({ id: z.number(), reference: z.string() })),
+});
+
+/**
+ * A wall of a building.
+ *
+ * Units: as buildingWallSchema. Valid: parsed by it. Source: [own].
+ */
+export type BuildingWall = z.infer<typeof buildingWallSchema>;
+
+/**
  * One building of the register. What is null is unknown.
  *
- * Units: heights and levels m, levels above datum; footprint easting and northing m: parts of outer
- * ring and holes; centre and bounds (west, south, east, north) in degrees. Valid: rings repeat their
- * first corner. Source: [own].
+ * Units: as buildingValuesShape; footprint easting and northing m: parts of outer ring and holes; centre
+ * and bounds (west, south, east, north) in degrees. Valid: rings repeat their first corner.
+ * Source: [own].
  */
 export const buildingSchema = z.strictObject({
   ...buildingRow,
-  use: z.string().nullable(),
-  storeys: z.number().nullable(),
-  eavesHeight: z.number().nullable(),
-  groundLevel: z.number().nullable(),
-  foundingLevel: z.number().nullable(),
-  foundation: z.string().nullable(),
-  construction: z.string().nullable(),
-  listedGrade: z.string().nullable(),
-  condition: z.string().nullable(),
-  footprint: z.array(z.array(z.array(lonLat).readonly()).readonly()).readonly(),
+  ...buildingValuesShape,
+  footprint: footprintSchema,
   bounds,
+  walls: z.array(buildingWallSchema),
 });
 
 /**

@@ -8,11 +8,28 @@ import { z } from 'zod';
 export const MOST_CRS = 30;
 
 /**
- * Words to find a projected system by: its EPSG number, its name or where it is used.
+ * What a system is wanted for: a scheme is drawn on one in true metres, a file may come in degrees or in
+ * feet as well.
+ *
+ * Units: none. Valid: a scheme where nothing is said. Source: [own].
+ */
+export const crsPurposeSchema = z.object({ for: z.enum(['scheme', 'file']).default('scheme') });
+
+/**
+ * What a system is wanted for.
+ *
+ * Units: none. Valid: parsed by crsPurposeSchema. Source: [own].
+ */
+export type CrsPurpose = z.infer<typeof crsPurposeSchema>['for'];
+
+/**
+ * Words to find a system by: its EPSG number, its name or where it is used.
  *
  * Units: none. Valid: nothing finds nothing. Source: [own].
  */
-export const crsSearchSchema = z.object({ search: z.string().trim().max(200).default('') });
+export const crsSearchSchema = crsPurposeSchema.extend({
+  search: z.string().trim().max(200).default(''),
+});
 
 /**
  * The address of one system.
@@ -26,7 +43,8 @@ const crsRow = { code: z.number(), name: z.string(), area: z.string() };
 /**
  * The systems found, the best first.
  *
- * Units: code is an EPSG number. Valid: projected, in metres, axes east and north. Source: [own].
+ * Units: code is an EPSG number. Valid: for schemes projected, in metres, axes east and north; for files in
+ * feet or degrees too. Source: [own].
  */
 export const crsListSchema = z.array(z.strictObject(crsRow));
 

@@ -30,18 +30,27 @@ export const newPersonSchema = z.strictObject({
 /**
  * A change of a person; what is left out stays.
  *
- * Units: none. Valid: one administrator who can sign in must remain. Source: [own].
+ * Units: none. Valid: one administrator who can sign in must remain; the address changes only while there
+ * is no password. Source: [own].
  */
 export const changePersonSchema = z.strictObject({
   name: name.optional(),
+  email: emailSchema.optional(),
   isAdministrator: z.boolean().optional(),
 });
 
 /**
+ * Keeps a person from signing in, or lets them in again.
+ *
+ * Units: none. Valid: not oneself, and not the last administrator. Source: [own].
+ */
+export const shutOutSchema = z.strictObject({ shutOut: z.boolean() });
+
+/**
  * A person as the administrator sees them.
  *
- * Units: none. Valid: `invitedUntil` is when the open invitation ends, null without one; abilities are
- * the server's answers. Source: [own].
+ * Units: none. Valid: `invitedUntil` is when the open invitation ends, null without one; `shutOutAt` since
+ * when they may not sign in; abilities are the server's answers. Source: [own].
  */
 export const personSchema = z.strictObject({
   id: z.uuid(),
@@ -50,11 +59,18 @@ export const personSchema = z.strictObject({
   isAdministrator: z.boolean(),
   hasPassword: z.boolean(),
   invitedUntil: z.iso.datetime().nullable(),
+  shutOutAt: z.iso.datetime().nullable(),
   createdAt: z.iso.datetime(),
   memberships: z.array(
     z.strictObject({ schemeId: z.uuid(), schemeName: z.string(), role: roleSchema }),
   ),
-  abilities: z.strictObject({ invite: z.boolean() }),
+  abilities: z.strictObject({
+    invite: z.boolean(),
+    withdraw: z.boolean(),
+    changeEmail: z.boolean(),
+    shutOut: z.boolean(),
+    readmit: z.boolean(),
+  }),
 });
 
 /**

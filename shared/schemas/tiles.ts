@@ -35,6 +35,13 @@ function tileParams({ least, most }: { readonly least: number; readonly most: nu
 export const buildingTileSchema = tileParams(BUILDING_ZOOMS);
 
 /**
+ * The address of a tile of an import's footprints; the version is the import's.
+ *
+ * Units: none. Valid: zooms of BUILDING_ZOOMS, x and y on the map. Source: [own].
+ */
+export const importTileSchema = tileParams(BUILDING_ZOOMS).and(z.object({ importId: z.uuid() }));
+
+/**
  * The address of a tile of the background; the version is the scheme's backgroundVersion.
  *
  * Units: none. Valid: zooms of BACKGROUND_ZOOMS, x and y on the map. Source: [own].

@@ -1,6 +1,6 @@
 import type { SchemeAnswer } from '../../shared/schemas/schemes.ts';
 import type { Destination } from '../components/layout/go-to.tsx';
-import { PATHS, planPath, settingsPath } from '../config/paths.ts';
+import { PATHS, planPath, registerPath, settingsPath } from '../config/paths.ts';
 import { can } from '../features/schemes/can.ts';
 import type { SignedInPerson } from '../features/session/person-context.ts';
 
@@ -19,9 +19,12 @@ export function administratorLinks({ isAdministrator, demo }: SignedInPerson): r
 
 /** The screens of a scheme that the person may see. */
 export function schemeLinks(scheme: SchemeAnswer): readonly Link[] {
-  const plan = { to: planPath(scheme.id), label: 'Plan' };
+  const ofRegister = [
+    { to: planPath(scheme.id), label: 'Plan' },
+    { to: registerPath(scheme.id), label: 'Register' },
+  ];
   return [
-    ...(can(scheme, 'readRegister') ? [plan] : []),
+    ...(can(scheme, 'readRegister') ? ofRegister : []),
     { to: settingsPath(scheme.id), label: can(scheme, 'readRules') ? 'Settings' : 'Description' },
   ];
 }

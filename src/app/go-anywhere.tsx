@@ -10,6 +10,7 @@ import { can } from '../features/schemes/can.ts';
 import { usePerson } from '../features/session/person-context.ts';
 import { useDelayedValue } from '../hooks/use-delayed-value.ts';
 import { useHotkeys } from '../hooks/use-hotkeys.ts';
+import { useKeysAtHand } from '../hooks/use-keys-at-hand.ts';
 import { destinationsOf, meantBy } from './destinations.ts';
 
 const WHILE_TYPING = 200;
@@ -54,8 +55,11 @@ export function GoAnywhere({ scheme, schemes }: GoAnywhereProps) {
     setQuery('');
   }
   useHotkeys({ '/': open });
+  // some screens take it for a search of their own
+  const isTaken = useKeysAtHand().some(({ keys }) => keys.includes('/'));
   return (
     <GoTo
+      hasKey={!isTaken}
       isOpen={isOpen}
       onOpen={open}
       onClose={close}

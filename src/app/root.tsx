@@ -1,15 +1,11 @@
-import { useQuery } from '@tanstack/react-query';
 import { Outlet } from 'react-router-dom';
-import { sessionQuery } from '../features/session/api/get-session.ts';
 import { useFocusOnArrival } from '../hooks/use-focus-on-arrival.ts';
 
 /** Around every page: full height, and the way past the bar for who walks by keyboard. */
 export function Root() {
   useFocusOnArrival('content');
-  // whatever a page sends carries the session's token, also where nobody need be signed in
-  useQuery(sessionQuery);
   return (
-    <div className="flex h-full flex-col">
+    <div className="flex h-full flex-col print:block print:h-auto">
       <a
         href="#content"
         className="sr-only focus:not-sr-only focus:absolute focus:z-50 focus:m-2 focus:bg-sheet focus:p-2"

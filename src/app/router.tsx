@@ -66,6 +66,10 @@ const settings: RouteObject[] = [
       Component: (await import('./routes/settings-background.tsx')).BackgroundPage,
     }),
   },
+  {
+    path: SETTINGS.ground,
+    lazy: async () => ({ Component: (await import('./routes/settings-ground.tsx')).GroundPage }),
+  },
 ];
 
 const ofScheme: RouteObject[] = [
@@ -73,6 +77,20 @@ const ofScheme: RouteObject[] = [
   {
     path: 'plan',
     lazy: async () => ({ Component: (await import('../features/plan/plan-page.tsx')).PlanPage }),
+  },
+  {
+    path: 'register/imports',
+    lazy: async () => ({ Component: (await import('./routes/imports.tsx')).ImportsPage }),
+  },
+  {
+    path: 'register/imports/:importId',
+    lazy: async () => ({ Component: (await import('./routes/import.tsx')).ImportPage }),
+  },
+  {
+    path: 'register',
+    lazy: async () => ({
+      Component: (await import('../features/register/register-page.tsx')).RegisterPage,
+    }),
   },
   {
     path: 'settings',

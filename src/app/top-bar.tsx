@@ -6,11 +6,13 @@ import type { Tab } from '../components/layout/bar-tabs.tsx';
 import { KeysHelp } from '../components/layout/keys-help.tsx';
 import { PersonMenu } from '../components/layout/person-menu.tsx';
 import { SchemeSwitcher } from '../components/layout/scheme-switcher.tsx';
+import type { KeyHelp } from '../config/keys-at-hand.ts';
 import { PATHS, schemePath } from '../config/paths.ts';
 import { schemesQuery } from '../features/schemes/api/list-schemes.ts';
 import { useSignOut } from '../features/session/api/sign-out.ts';
 import { usePerson } from '../features/session/person-context.ts';
 import { useHotkeys } from '../hooks/use-hotkeys.ts';
+import { useKeysAtHand } from '../hooks/use-keys-at-hand.ts';
 import { administratorLinks, schemeLinks } from './destinations.ts';
 import { GoAnywhere } from './go-anywhere.tsx';
 import { KEYS } from './keys.ts';
@@ -20,12 +22,18 @@ function tabsOf(scheme: SchemeAnswer | undefined, links: readonly Tab[]): readon
   return links.length === 0 ? [] : [{ to: PATHS.schemes, label: 'Schemes', end: true }, ...links];
 }
 
+/** Whether a screen does something of its own with keys that otherwise work everywhere. */
+function isTaken(atHand: readonly KeyHelp[], keys: readonly string[]): boolean {
+  return atHand.some((help) => help.keys.join() === keys.join());
+}
+
 /** The bar with what is known of the person and, inside one, of the scheme. */
-export function TopBar({ scheme }: { readonly scheme?: SchemeAnswer }) {
+export function TopBar({ scheme }: { readonly scheme?: SchemeAnswer | undefined }) {
   const person = usePerson();
   const { data: schemes = [] } = useQuery(schemesQuery);
   const signOut = useSignOut();
   const [showsKeys, setShowsKeys] = useState(false);
+  const keysAtHand = useKeysAtHand();
   const links = administratorLinks(person);
   const others = schemes.filter(({ id, archivedAt }) => id !== scheme?.id && archivedAt === null);
 
@@ -49,7 +57,7 @@ export function TopBar({ scheme }: { readonly scheme?: SchemeAnswer }) {
       />
       <KeysHelp
         open={showsKeys}
-        help={KEYS}
+        help={[...keysAtHand, ...KEYS.filter(({ keys }) => !isTaken(keysAtHand, keys))]}
         onClose={() => {
           setShowsKeys(false);
         }}

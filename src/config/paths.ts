@@ -17,6 +17,7 @@ export const SETTINGS = {
   people: 'people',
   rules: 'rules',
   background: 'background',
+  ground: 'ground',
 } as const;
 
 export function schemePath(schemeId: string): string {
@@ -30,6 +31,19 @@ export function planPath(schemeId: string): string {
 /** The plan with a building selected. */
 export function buildingPath(schemeId: string, buildingId: number): string {
   return `${planPath(schemeId)}?building=${buildingId}`;
+}
+
+export function registerPath(schemeId: string): string {
+  return `${schemePath(schemeId)}/register`;
+}
+
+/** Bringing buildings in, and what was brought in before. */
+export function importsPath(schemeId: string): string {
+  return `${registerPath(schemeId)}/imports`;
+}
+
+export function importPath(schemeId: string, importId: string): string {
+  return `${importsPath(schemeId)}/${importId}`;
 }
 
 export function settingsPath(

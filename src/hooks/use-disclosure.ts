@@ -9,8 +9,8 @@ export type Disclosure = {
 };
 
 /** Something small that opens under its button; closes on Esc, by a press outside and when focus leaves. */
-export function useDisclosure(): Disclosure {
-  const [isOpen, setOpen] = useState(false);
+export function useDisclosure(startsOpen = false): Disclosure {
+  const [isOpen, setOpen] = useState(startsOpen);
   const frame = useRef<HTMLDivElement>(null);
 
   useEffect(() => {
@@ -21,16 +21,18 @@ export function useDisclosure(): Disclosure {
     }
     function closeOnEscape(event: KeyboardEvent) {
       if (event.key !== 'Escape') return;
+      // the key closes this and nothing behind it
+      event.preventDefault();
       setOpen(false);
       frame.current?.querySelector('button')?.focus();
     }
     document.addEventListener('pointerdown', closeOutside);
     document.addEventListener('focusin', closeOutside);
-    document.addEventListener('keydown', closeOnEscape);
+    document.addEventListener('keydown', closeOnEscape, true);
     return () => {
       document.removeEventListener('pointerdown', closeOutside);
       document.removeEventListener('focusin', closeOutside);
-      document.removeEventListener('keydown', closeOnEscape);
+      document.removeEventListener('keydown', closeOnEscape, true);
     };
   }, [isOpen]);
 

@@ -13,8 +13,11 @@ function isBusyElsewhere({ target }: KeyboardEvent): boolean {
   return document.querySelector('dialog[open]') !== null;
 }
 
-/** Keys of a screen. They rest while something is being written or a dialog is open. */
-export function useHotkeys(keys: Hotkeys, active = true): void {
+/**
+ * Keys of a screen. They rest while something is being written or a dialog is open. With `first` they come
+ * before the keys of what stands around the screen.
+ */
+export function useHotkeys(keys: Hotkeys, active = true, first = false): void {
   const press = useEffectEvent((event: KeyboardEvent) => {
     if (event.defaultPrevented || event.ctrlKey || event.metaKey || event.altKey) return;
     const key = event.key.length === 1 ? event.key.toLowerCase() : event.key;
@@ -30,9 +33,9 @@ export function useHotkeys(keys: Hotkeys, active = true): void {
     const listen = (event: KeyboardEvent) => {
       press(event);
     };
-    document.addEventListener('keydown', listen);
+    document.addEventListener('keydown', listen, first);
     return () => {
-      document.removeEventListener('keydown', listen);
+      document.removeEventListener('keydown', listen, first);
     };
-  }, [active]);
+  }, [active, first]);
 }

@@ -1,11 +1,13 @@
 import type { z } from 'zod';
-import { csrfHeaders, readAnswer } from './api-client.ts';
+import { readAnswer } from './api-call.ts';
 import { unreachableError } from './api-error.ts';
+import { withCsrfToken } from './with-csrf-token.ts';
 
 export type UploadProgress = { readonly sent: number; readonly total: number };
 
 type Upload<T> = {
   readonly path: string;
+  readonly method?: 'POST' | 'PUT';
   readonly file: File;
   readonly schema: z.ZodType<T>;
   readonly signal: AbortSignal;
@@ -20,16 +22,16 @@ function asJson(text: string): unknown {
   }
 }
 
-/** Sends a file and says how much of it has gone, which fetch cannot. */
-export function apiUpload<T>({ path, file, schema, signal, onProgress }: Upload<T>): Promise<T> {
+function send<T>(
+  { path, method = 'PUT', file, schema, signal, onProgress }: Upload<T>,
+  headers: Readonly<Record<string, string>>,
+): Promise<T> {
   return new Promise((resolve, reject) => {
     const request = new XMLHttpRequest();
     const form = new FormData();
     form.append('file', file);
-    request.open('PUT', path);
-    for (const [name, value] of Object.entries(csrfHeaders())) {
-      request.setRequestHeader(name, value);
-    }
+    request.open(method, path);
+    for (const [name, value] of Object.entries(headers)) request.setRequestHeader(name, value);
     request.upload.onprogress = ({ loaded, total }) => {
       onProgress({ sent: loaded, total });
     };
@@ -51,5 +53,14 @@ export function apiUpload<T>({ path, file, schema, signal, onProgress }: Upload<
       request.abort();
     });
     request.send(form);
+  });
+}
+
+/** Sends a file and says how much of it has gone, which fetch cannot. */
+export function apiUpload<T>(upload: Upload<T>): Promise<T> {
+  return withCsrfToken((token) => {
+    // it may have been cancelled while the token was waited for
+    upload.signal.throwIfAborted();
+    return send(upload, token);
   });
 }

@@ -2,8 +2,8 @@ import type { FieldPath, FieldValues, UseFormReturn } from 'react-hook-form';
 import { ApiError } from './api-error.ts';
 
 /**
- * Puts the faults that the server found beside the fields that the form has. What is left over is said
- * above the form.
+ * Puts the faults that the server found beside the fields that the form has, and the focus into the first
+ * of them. What is left over is said above the form, and has the focus then.
  */
 export function showFieldFaults<T extends FieldValues>(
   error: unknown,
@@ -11,8 +11,11 @@ export function showFieldFaults<T extends FieldValues>(
   fields: readonly FieldPath<T>[],
 ): void {
   if (!(error instanceof ApiError)) return;
-  for (const field of fields) {
+  const faults = fields.flatMap((field) => {
     const fault = error.fields.find(({ path }) => path === field);
-    if (fault !== undefined) form.setError(field, { message: fault.message });
+    return fault === undefined ? [] : [{ field, message: fault.message }];
+  });
+  for (const [index, { field, message }] of faults.entries()) {
+    form.setError(field, { message }, { shouldFocus: index === 0 });
   }
 }

@@ -46,7 +46,7 @@ function Letters() {
 export function MailboxPage() {
   const { letterId } = useParams();
   return (
-    <div className="grid min-h-full grid-cols-[404px_minmax(0,1fr)] max-lg:block">
+    <div className="grid min-h-full grid-cols-[404px_minmax(0,1fr)] max-lg:grid-cols-[minmax(0,1fr)]">
       <PageTitle>Mailbox</PageTitle>
       <h1 className="sr-only">Mailbox</h1>
       <div

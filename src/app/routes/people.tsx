@@ -8,16 +8,19 @@ import { InviteForm } from '../../features/people/components/invite-form.tsx';
 import { PeopleTable } from '../../features/people/components/people-table.tsx';
 import { formatCount } from '../../lib/format-number.ts';
 
+function inWords(count: number, waiting: number): string {
+  const all = `${formatCount(count)} with an account`;
+  return waiting === 0 ? `${all}.` : `${all}; ${formatCount(waiting)} of them cannot sign in.`;
+}
+
 export function PeoplePage() {
   const { data: people, error, refetch } = useQuery(peopleQuery);
-  const waiting = people?.filter(({ hasPassword }) => !hasPassword).length ?? 0;
+  const waiting =
+    people?.filter(({ hasPassword, shutOutAt }) => !hasPassword || shutOutAt !== null).length ?? 0;
   return (
     <Page
       title="People"
-      lead={
-        people &&
-        `${formatCount(people.length)} with an account; ${formatCount(waiting)} of them cannot sign in yet.`
-      }
+      lead={people && inWords(people.length, waiting)}
       aside={
         <Panel title="Invite a person">
           <InviteForm />

@@ -11,14 +11,15 @@ import { NotFoundPage } from './not-found.tsx';
 
 const LARGEST = BACKGROUND_LIMITS.bytes / 1024 / 1024;
 
+const LEAD = 'What is drawn under the buildings.';
+const HOW = `Bring in GeoJSON or a zipped Shapefile, up to ${LARGEST} MB each. A file takes the place of the one before once all of it has been read.`;
+
 function Background() {
   const scheme = useScheme();
+  const canChange = can(scheme, 'updateBackground');
   const { data: layers, error, refetch } = useQuery(backgroundQuery(scheme.id));
   return (
-    <Page
-      title="Background map"
-      lead={`What is drawn under the buildings. Bring in GeoJSON or a zipped Shapefile, up to ${LARGEST} MB each. A file takes the place of the one before once all of it has been read.`}
-    >
+    <Page title="Background map" lead={canChange ? `${LEAD} ${HOW}` : LEAD}>
       {error !== null && (
         <QueryError what="The background" error={error} onRetry={() => void refetch()} />
       )}
@@ -26,7 +27,7 @@ function Background() {
       {layers !== undefined && (
         <ul className="max-w-[760px] border-t-2 border-ink">
           {layers.map(({ layer, features }) => (
-            <LayerRow key={layer} schemeId={scheme.id} layer={layer} features={features} />
+            <LayerRow key={layer} {...{ layer, features, canChange }} schemeId={scheme.id} />
           ))}
         </ul>
       )}
@@ -35,5 +36,5 @@ function Background() {
 }
 
 export function BackgroundPage() {
-  return can(useScheme(), 'updateBackground') ? <Background /> : <NotFoundPage />;
+  return can(useScheme(), 'readRegister') ? <Background /> : <NotFoundPage />;
 }

@@ -5,20 +5,24 @@ import { can } from '../../features/schemes/can.ts';
 import { ArchiveScheme } from '../../features/schemes/components/archive-scheme.tsx';
 import { DescriptionForm } from '../../features/schemes/components/description-form.tsx';
 import { useScheme } from '../../features/schemes/scheme-context.ts';
+import { classNames } from '../../lib/class-names.ts';
+
+const OWNERS_READ = 'text-owner leading-owner';
 
 export function DescriptionPage() {
   const scheme = useScheme();
+  const worksOnIt = can(scheme, 'readRegister');
   return (
     <Page title={can(scheme, 'updateScheme') ? 'Description' : scheme.name}>
       <div className="grid max-w-[620px] gap-5">
         {can(scheme, 'updateScheme') ? (
           <DescriptionForm scheme={scheme} />
         ) : (
-          scheme.description !== '' && (
-            <p className="text-roomy whitespace-pre-line">{scheme.description}</p>
-          )
+          <p className={classNames('whitespace-pre-line', worksOnIt ? 'text-roomy' : OWNERS_READ)}>
+            {scheme.description === '' ? 'Nothing is written about it yet.' : scheme.description}
+          </p>
         )}
-        <CrsFacts code={scheme.crs} />
+        {worksOnIt && <CrsFacts code={scheme.crs} />}
         {can(scheme, 'archiveScheme') && (
           <Panel title={scheme.archivedAt === null ? 'Archive' : 'Archived'}>
             <ArchiveScheme scheme={scheme} />

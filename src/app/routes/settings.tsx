@@ -16,7 +16,8 @@ const PARTS: readonly Part[] = [
   { part: 'description', label: 'Description', needs: 'readScheme' },
   { part: 'people', label: 'People', needs: 'readMembers' },
   { part: 'rules', label: 'Rules', needs: 'readRules' },
-  { part: 'background', label: 'Background', needs: 'updateBackground' },
+  { part: 'background', label: 'Background', needs: 'readRegister' },
+  { part: 'ground', label: 'Ground', needs: 'readRegister' },
 ];
 
 function partStyle({ isActive }: { readonly isActive: boolean }): string {

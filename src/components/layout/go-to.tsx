@@ -5,6 +5,8 @@ import { SearchList } from '../ui/search-list.tsx';
 export type Destination = { readonly to: string; readonly title: string; readonly note: string };
 
 type GoToProps = {
+  /** Whether `/` opens it here. */
+  readonly hasKey: boolean;
   readonly isOpen: boolean;
   readonly onOpen: () => void;
   readonly onClose: () => void;
@@ -16,7 +18,7 @@ type GoToProps = {
 };
 
 /** Goes anywhere by name. */
-export function GoTo({ isOpen, onOpen, onClose, query, onQuery, found, onGo }: GoToProps) {
+export function GoTo({ hasKey, isOpen, onOpen, onClose, query, onQuery, found, onGo }: GoToProps) {
   return (
     <>
       <button
@@ -25,9 +27,11 @@ export function GoTo({ isOpen, onOpen, onClose, query, onQuery, found, onGo }: G
         onClick={onOpen}
       >
         Go to…
-        <span className="max-md:hidden">
-          <KeyCap>/</KeyCap>
-        </span>
+        {hasKey && (
+          <span className="max-md:hidden">
+            <KeyCap>/</KeyCap>
+          </span>
+        )}
       </button>
       <Dialog open={isOpen} title="Go to…" onClose={onClose}>
         <SearchList

@@ -17,7 +17,7 @@ export function Page({ title, lead, aside, children }: PageProps) {
     <div
       className={classNames(
         'min-h-full',
-        aside !== undefined && 'grid grid-cols-[minmax(0,1fr)_404px] max-lg:block',
+        aside !== undefined && 'grid grid-cols-[minmax(0,1fr)_404px] max-lg:flex max-lg:flex-col',
       )}
     >
       <PageTitle>{title}</PageTitle>
@@ -36,7 +36,7 @@ export function Page({ title, lead, aside, children }: PageProps) {
         {children}
       </div>
       {aside !== undefined && (
-        <aside className="border-l border-ink bg-paper-raised px-6 pt-[26px] pb-8 max-lg:border-t max-lg:border-l-0 max-lg:px-8 max-sm:px-4">
+        <aside className="border-l border-ink bg-paper-raised px-6 pt-[26px] pb-8 max-lg:flex-1 max-lg:border-t max-lg:border-l-0 max-lg:px-8 max-sm:px-4">
           {aside}
         </aside>
       )}

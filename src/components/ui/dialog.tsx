@@ -52,7 +52,10 @@ export function Dialog({ open, title, onClose, children }: DialogProps) {
               className="-mr-1.5 min-h-6 px-1.5 max-sm:min-h-11 max-sm:min-w-11"
               onClick={onClose}
             >
-              <KeyCap>Esc</KeyCap>
+              <span className="max-sm:hidden">
+                <KeyCap>Esc</KeyCap>
+              </span>
+              <span className="text-small text-clay-deep underline sm:hidden">Close</span>
             </button>
           </div>
           {children}

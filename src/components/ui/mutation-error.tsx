@@ -1,3 +1,4 @@
+import { useEffect, useRef, type ReactNode } from 'react';
 import { ApiError } from '../../lib/api-error.ts';
 import { ErrorNote } from './error-note.tsx';
 
@@ -7,16 +8,32 @@ type MutationErrorProps = {
   readonly error: Error | null;
   /** Names of fields beside which their faults stand already. */
   readonly shown?: readonly string[];
+  /** What still stands, where this form knows it better than the server. */
+  readonly stands?: string | undefined;
+  /** What can be done about it. */
+  readonly action?: ReactNode;
 };
 
-/** Something was not done. What a field says already is not said again. */
-export function MutationError({ failed, error, shown = [] }: MutationErrorProps) {
-  if (error === null || error.name === 'AbortError') return null;
-  if (!(error instanceof ApiError)) return <ErrorNote failed={failed} />;
+function leftOver(error: Error | null, shown: readonly string[]) {
+  if (!(error instanceof ApiError)) return { left: [], isAllShown: false };
   const left = error.fields.filter(({ path }) => !shown.includes(path));
-  if (error.fields.length > 0 && left.length === 0) {
-    return <ErrorNote failed={failed} stands="Mend what is marked." />;
-  }
-  const words = [error.message, ...left.map(({ message }) => message)];
-  return <ErrorNote failed={failed} stands={words.join(' ')} />;
+  return { left, isAllShown: error.fields.length > 0 && left.length === 0 };
+}
+
+/**
+ * Something was not done. What a field says already is not said again, and the focus is left to the field;
+ * otherwise it comes here, for the note may stand far from the button that was pressed.
+ */
+export function MutationError(props: MutationErrorProps) {
+  const { failed, error, shown = [], stands, action } = props;
+  const note = useRef<HTMLDivElement>(null);
+  const { left, isAllShown } = leftOver(error, shown);
+  useEffect(() => {
+    if (error !== null && !isAllShown) note.current?.focus();
+  }, [error, isAllShown]);
+  if (error === null || error.name === 'AbortError') return null;
+  if (!(error instanceof ApiError)) return <ErrorNote ref={note} failed={failed} />;
+  if (isAllShown) return <ErrorNote failed={failed} stands="Mend what is marked." />;
+  const words = [stands ?? error.message, ...left.map(({ message }) => message)];
+  return <ErrorNote ref={note} failed={failed} stands={words.join(' ')} action={action} />;
 }

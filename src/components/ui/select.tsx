@@ -29,7 +29,7 @@ export function Select({
         <select
           {...select}
           {...ties}
-          className={classNames(INPUT_STYLE, 'h-[30px] pr-1 max-sm:h-11', className)}
+          className={classNames(INPUT_STYLE, 'h-[30px] pr-1 text-ellipsis max-sm:h-11', className)}
         >
           {unchosen !== undefined && <option value="">{unchosen}</option>}
           {options.map(({ value, label: words }) => (

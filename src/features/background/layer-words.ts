@@ -4,7 +4,7 @@ import type { BackgroundLayer } from '../../../shared/schemas/background.ts';
 export const LAYER_WORDS: Readonly<
   Record<BackgroundLayer, { readonly name: string; readonly holds: string }>
 > = {
-  streets: { name: 'Streets', holds: 'lines or surfaces; a name is drawn along them' },
+  streets: { name: 'Streets', holds: 'lines; a name is drawn along them' },
   water: { name: 'Water', holds: 'surfaces, and lines for streams' },
   rail: { name: 'Rail', holds: 'lines' },
   parks: { name: 'Parks', holds: 'surfaces' },

@@ -5,9 +5,14 @@ import { formatShortDay } from '../../lib/format-date.ts';
 
 /** Whether somebody can sign in, as shape and words. */
 export function signInState(
-  { hasPassword, invitedUntil }: Pick<PersonAnswer, 'hasPassword' | 'invitedUntil'>,
+  {
+    hasPassword,
+    invitedUntil,
+    shutOutAt,
+  }: Pick<PersonAnswer, 'hasPassword' | 'invitedUntil' | 'shutOutAt'>,
   now: Date,
 ): { readonly state: State; readonly words: string } {
+  if (shutOutAt !== null) return { state: 'not-started', words: 'Shut out' };
   if (hasPassword) return { state: 'done', words: 'Can sign in' };
   if (invitedUntil === null) return { state: 'not-started', words: 'Not invited' };
   if (new Date(invitedUntil) < now) return { state: 'not-started', words: 'Invitation too old' };

@@ -10,7 +10,9 @@ function faultWords(issue: z.core.$ZodIssue): string {
   const { code, message } = issue;
   const isOwn = !message.startsWith('Too') && !message.startsWith('Invalid');
   if (isOwn) return message;
-  if (code === 'invalid_type') return 'Give a figure.';
+  if (code === 'invalid_type') return 'Give a figure, such as 12.5.';
+  // the slope is what the n of "1 in n" divides
+  if (issue.path.at(-1) === 'slope') return 'Give 1 or more.';
   if (code === 'too_small') {
     return issue.origin === 'array' ? 'Give at least one.' : 'This is too small.';
   }

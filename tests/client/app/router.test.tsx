@@ -1,7 +1,7 @@
 import { QueryClientProvider } from '@tanstack/react-query';
 import { fireEvent, render, screen, waitFor, within } from '@testing-library/react';
 import { createMemoryRouter, RouterProvider } from 'react-router-dom';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { ROUTES } from '../../../src/app/router.tsx';
 import { queryClient } from '../../../src/lib/query-client.ts';
 import { aCrsAnswer, anId, aSchemeAnswer, aSession } from '../../support/answers.ts';
@@ -156,5 +156,44 @@ describe('the administrator', () => {
       .map(({ textContent }) => textContent);
     expect(names).toEqual(['Schemes', 'People', 'Audit']);
     expect(await screen.findByRole('link', { name: 'New scheme' })).toBeTruthy();
+  });
+});
+
+describe('the bar of a scheme', () => {
+  it('keeps a menu open that was opened before the scheme arrived', async () => {
+    let arrive: (scheme: unknown) => void = () => undefined;
+    const scheme = new Promise((resolve) => {
+      arrive = resolve;
+    });
+    answers();
+    const fetchNow = globalThis.fetch;
+    vi.stubGlobal('fetch', async (path: string, init?: RequestInit) => {
+      if (path === `/api${SCHEME}`) await scheme;
+      return fetchNow(path, init);
+    });
+    open(`${SCHEME}/settings`);
+    fireEvent.click(await screen.findByRole('button', { name: /^Assessor/ }));
+    arrive(undefined);
+    expect(await screen.findByRole('heading', { name: 'Port Dogger crossing' })).toBeTruthy();
+    expect(screen.getByRole('link', { name: 'Account' })).toBeTruthy();
+  });
+
+  it('tells an owner what is driven, and nothing of grids', async () => {
+    answers();
+    open(`${SCHEME}/settings`);
+    expect(await screen.findByText('Nothing is written about it yet.')).toBeTruthy();
+    expect(screen.queryByText(/EPSG/)).toBeNull();
+  });
+
+  it('lists the keys that work on its screen', async () => {
+    answers();
+    open(`${SCHEME}/settings`);
+    await screen.findByRole('heading', { name: 'Port Dogger crossing' });
+    fireEvent.keyDown(document.body, { key: '?' });
+    expect(screen.getAllByRole('term').map(({ textContent }) => textContent)).toEqual([
+      '/',
+      '?',
+      'Esc',
+    ]);
   });
 });

@@ -4,7 +4,7 @@ import { apiGet, apiSend, noAnswer } from '../../../src/lib/api-client.ts';
 import { ApiError, isRefusal } from '../../../src/lib/api-error.ts';
 import { apiPath } from '../../../src/lib/api-path.ts';
 import { queryClient, SESSION_KEY } from '../../../src/lib/query-client.ts';
-import { aSession } from '../../support/answers.ts';
+import { anId, aSession } from '../../support/answers.ts';
 import { fakeApi, Refusal } from '../../support/fake-api.ts';
 
 const named = z.object({ name: z.string() });
@@ -65,7 +65,59 @@ describe('apiSend', () => {
     expect(calls[0]?.headers.get('content-type')).toBe('application/json');
   });
 
+  it('waits for the session where it has not been fetched yet', async () => {
+    const { calls } = fakeApi({ 'GET /api/session': aSession(null), 'POST /api/x': { name: 'y' } });
+    await Promise.all([apiSend('POST', '/api/x', named), apiSend('POST', '/api/x', named)]);
+    expect(calls.map(({ route }) => route)).toEqual([
+      'GET /api/session',
+      'POST /api/x',
+      'POST /api/x',
+    ]);
+    expect(calls[2]?.headers.get('x-csrf-token')).toBe('token');
+  });
+
+  it('sends once more where another window has renewed the session', async () => {
+    queryClient.setQueryData(SESSION_KEY, aSession());
+    const answers = [new Refusal(403, 'csrf-failed'), { name: 'made' }];
+    const { calls } = fakeApi({
+      'GET /api/session': { ...aSession(), csrfToken: 'renewed' },
+      'POST /api/x': () => answers.shift(),
+    });
+    expect(await apiSend('POST', '/api/x', named, { a: 1 })).toEqual({ name: 'made' });
+    expect(calls.map(({ headers }) => headers.get('x-csrf-token'))).toEqual([
+      'token',
+      null,
+      'renewed',
+    ]);
+    expect(calls[2]?.body).toEqual({ a: 1 });
+  });
+
+  it('gives up after the second refusal', async () => {
+    queryClient.setQueryData(SESSION_KEY, aSession());
+    const { calls } = fakeApi({
+      'GET /api/session': aSession(),
+      'POST /api/x': new Refusal(403, 'csrf-failed'),
+    });
+    expect((await errorOf(apiSend('POST', '/api/x', named))).code).toBe('csrf-failed');
+    expect(calls).toHaveLength(3);
+  });
+
+  it.each([aSession(null), aSession({ id: anId(2) })])(
+    'sends nothing in the name of somebody else',
+    async (session) => {
+      queryClient.setQueryData(SESSION_KEY, aSession());
+      const { calls } = fakeApi({
+        'GET /api/session': session,
+        'POST /api/x': new Refusal(403, 'csrf-failed'),
+      });
+      expect((await errorOf(apiSend('POST', '/api/x', named))).code).toBe('csrf-failed');
+      expect(calls.map(({ route }) => route)).toEqual(['POST /api/x', 'GET /api/session']);
+      expect(queryClient.getQueryData(SESSION_KEY)).toEqual(session);
+    },
+  );
+
   it('takes an answer that says nothing', async () => {
+    queryClient.setQueryData(SESSION_KEY, aSession());
     fakeApi({ 'DELETE /api/x': undefined });
     const answering: Promise<unknown> = apiSend('DELETE', '/api/x', noAnswer);
     expect(await answering).toBeUndefined();

@@ -18,7 +18,7 @@ journey(
     await page.keyboard.type('Settings');
     await page.getByRole('option', { name: 'Settings' }).waitFor();
     await page.keyboard.press('Enter');
-    await page.waitForURL(/\/settings$/);
+    await page.getByRole('heading', { name: 'Port Dogger crossing', level: 1 }).waitFor();
 
     await tabTo(page, 'button', 'account and sign out');
     await page.keyboard.press('Enter');

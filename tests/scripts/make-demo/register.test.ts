@@ -23,6 +23,10 @@ describe.each([
     const known = features.filter(({ properties }) => properties.foundingLevel !== null);
     expect(known.length / features.length).toBeLessThan(0.25);
     expect(known.length).toBeGreaterThan(10);
+    const listings = features.map(({ properties }) => String(properties.listed));
+    expect(listings.every((listing) => /^(not listed|listed, \w+)$/.test(listing))).toBe(true);
+    const unlisted = listings.filter((listing) => listing === 'not listed');
+    expect(unlisted.length / features.length).toBeGreaterThan(0.8);
     expect(features.every(({ properties }) => properties.address !== 'Port Dogger')).toBe(true);
   });
 });

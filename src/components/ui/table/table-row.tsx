@@ -1,9 +1,10 @@
 import type { KeyboardEvent, MouseEvent, ReactNode, Ref } from 'react';
 import { classNames } from '../../../lib/class-names.ts';
-import { columnStyle, type Column } from './column.ts';
+import { columnStyle, stuckStyle, type Column } from './column.ts';
 
 type TableRowProps<T> = {
-  readonly row: T;
+  /** Undefined while it is still being fetched. */
+  readonly row: T | undefined;
   readonly columns: readonly Column<T>[];
   /** Counted from 0, without the headings. */
   readonly index: number;
@@ -29,13 +30,15 @@ function Cells<T>({ row, columns }: Pick<TableRowProps<T>, 'row' | 'columns'>) {
   return columns.map((column) => (
     <td
       key={column.id}
+      style={stuckStyle(column)}
       className={classNames(
         'h-row border-b border-hairline bg-inherit px-2 whitespace-nowrap max-sm:h-11',
-        'first:sticky first:left-0 first:z-[1]',
+        'first:sticky first:left-0 first:z-[1] print:whitespace-normal print:static!',
+        column.stuckAt !== undefined && 'sticky z-[1]',
         columnStyle(column),
       )}
     >
-      {column.cell(row)}
+      {row !== undefined && column.cell(row)}
     </td>
   ));
 }
@@ -54,10 +57,11 @@ export function TableRow<T>(props: TableRowProps<T>) {
     if (isOwnPress(event)) onOpen?.();
   }
   return (
-    <tbody ref={bodyRef} data-index={index}>
+    <tbody ref={bodyRef} data-index={index} className="print:break-inside-avoid">
       <tr
         data-row={index}
         aria-rowindex={index + 2}
+        aria-busy={props.row === undefined || undefined}
         tabIndex={onOpen === undefined ? undefined : isInTabOrder ? 0 : -1}
         onFocus={onActivate}
         onKeyDown={openByKey}

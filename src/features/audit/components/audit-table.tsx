@@ -3,6 +3,7 @@ import type { AuditEntryAnswer } from '../../../../shared/schemas/audit.ts';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
 import { formatMoment } from '../../../lib/format-date.ts';
+import { doerWithoutPerson, personAbout } from '../entry-words.ts';
 import { AuditDetail } from './audit-detail.tsx';
 
 function inCapitals(text: string): string {
@@ -14,9 +15,12 @@ const COLUMNS: readonly Column<AuditEntryAnswer>[] = [
   {
     id: 'person',
     heading: 'Who',
-    cell: ({ person }) => (
-      <span className="inline-block max-w-[220px] truncate align-middle" title={person?.email}>
-        {person?.name ?? <span className="text-ink-3">nobody signed in</span>}
+    cell: (entry) => (
+      <span
+        className="inline-block max-w-[220px] truncate align-middle"
+        title={entry.person?.email}
+      >
+        {entry.person?.name ?? <span className="text-ink-3">{doerWithoutPerson(entry)}</span>}
       </span>
     ),
   },
@@ -25,7 +29,24 @@ const COLUMNS: readonly Column<AuditEntryAnswer>[] = [
     heading: 'What',
     cell: ({ action }) => <b className="font-semibold">{inCapitals(action)}</b>,
   },
-  { id: 'subject', heading: 'About', spare: true, cell: ({ subject }) => subject.kind },
+  {
+    id: 'subject',
+    heading: 'About',
+    spare: true,
+    cell: (entry) => {
+      const person = personAbout(entry);
+      return person === undefined ? (
+        entry.subject.kind
+      ) : (
+        <span
+          className="inline-block max-w-[220px] truncate align-middle"
+          title={`${person.name}, ${person.email}`}
+        >
+          {person.name}
+        </span>
+      );
+    },
+  },
   {
     id: 'scheme',
     heading: 'Scheme',

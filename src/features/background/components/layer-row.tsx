@@ -14,6 +14,7 @@ type LayerRowProps = {
   readonly schemeId: string;
   readonly layer: BackgroundLayer;
   readonly features: number;
+  readonly canChange: boolean;
 };
 
 function Held({ features }: Pick<LayerRowProps, 'features'>) {
@@ -26,8 +27,8 @@ function Held({ features }: Pick<LayerRowProps, 'features'>) {
   );
 }
 
-/** One layer: what it holds, and a file in its place. */
-export function LayerRow({ schemeId, layer, features }: LayerRowProps) {
+/** One layer: what it holds, and a file in its place for who may change it. */
+export function LayerRow({ schemeId, layer, features, canChange }: LayerRowProps) {
   const { name, holds } = LAYER_WORDS[layer];
   const { upload, progress } = useUploadBackground(schemeId, layer);
   const stop = useRef<AbortController>(null);
@@ -44,8 +45,8 @@ export function LayerRow({ schemeId, layer, features }: LayerRowProps) {
       </div>
       <div className="flex flex-wrap items-center gap-x-3 gap-y-1 text-small">
         <Held features={features} />
-        {features > 0 && <RemoveLayer schemeId={schemeId} layer={layer} />}
-        {!upload.isPending && (
+        {canChange && features > 0 && <RemoveLayer schemeId={schemeId} layer={layer} />}
+        {canChange && !upload.isPending && (
           <FileButton
             label={`Bring in a file for ${name.toLowerCase()}`}
             accept=".geojson,.json,.zip"

@@ -11,18 +11,20 @@ const COLUMNS: readonly Column<PersonAnswer>[] = [
     id: 'name',
     heading: 'Name',
     sortBy: ({ name }) => name.toLowerCase(),
-    cell: ({ name, isAdministrator }) => (
+    cell: ({ name, email, isAdministrator }) => (
       <>
         <b className="inline-block max-w-[190px] truncate align-middle font-semibold max-sm:max-w-[150px]">
           {name}
         </b>
         {isAdministrator && <span className="ml-1.5 text-ink-3">administrator</span>}
+        <span className="block max-w-[220px] truncate text-cap text-ink-2 sm:hidden">{email}</span>
       </>
     ),
   },
   {
     id: 'email',
     heading: 'E-mail',
+    spare: true,
     sortBy: ({ email }) => email,
     cell: ({ email }) => (
       <span className="inline-block max-w-[220px] truncate align-middle" title={email}>
@@ -33,6 +35,7 @@ const COLUMNS: readonly Column<PersonAnswer>[] = [
   {
     id: 'parts',
     heading: 'Schemes',
+    spare: true,
     wide: true,
     cell: (person) => (
       <span className="text-ink-2" title={partsInWords(person)}>

@@ -1,16 +1,9 @@
-import { zodResolver } from '@hookform/resolvers/zod';
-import { useForm } from 'react-hook-form';
 import { Link } from 'react-router-dom';
-import { changePersonSchema, type PersonAnswer } from '../../../../shared/schemas/people.ts';
-import { Button } from '../../../components/ui/button.tsx';
-import { Checkbox } from '../../../components/ui/checkbox.tsx';
-import { DoneNote } from '../../../components/ui/done-note.tsx';
-import { Field } from '../../../components/ui/field.tsx';
-import { MutationError } from '../../../components/ui/mutation-error.tsx';
+import type { PersonAnswer } from '../../../../shared/schemas/people.ts';
 import { settingsPath } from '../../../config/paths.ts';
-import { showFieldFaults } from '../../../lib/form-errors.ts';
-import { useChangePerson } from '../api/change-person.ts';
 import { partsOf } from '../person-words.ts';
+import { PersonAccess } from './person-access.tsx';
+import { PersonForm } from './person-form.tsx';
 import { SendAgain } from './send-again.tsx';
 
 function Parts({ person }: { readonly person: PersonAnswer }) {
@@ -28,38 +21,6 @@ function Parts({ person }: { readonly person: PersonAnswer }) {
   );
 }
 
-function PersonForm({ person }: { readonly person: PersonAnswer }) {
-  const change = useChangePerson(person.id);
-  const form = useForm({
-    resolver: zodResolver(changePersonSchema),
-    defaultValues: { name: person.name, isAdministrator: person.isAdministrator },
-  });
-  const submit = form.handleSubmit((values) => {
-    change.mutate(values, {
-      onError: (error) => {
-        showFieldFaults(error, form, ['name', 'isAdministrator']);
-      },
-    });
-  });
-  return (
-    <form noValidate className="grid gap-3" onSubmit={(event) => void submit(event)}>
-      <MutationError failed="The person was not changed." error={change.error} shown={['name']} />
-      <Field label="Name" error={form.formState.errors.name?.message} {...form.register('name')} />
-      <Checkbox
-        label="Administrator"
-        hint="Sees every scheme, and manages schemes, people and rules."
-        {...form.register('isAdministrator')}
-      />
-      <div className="flex items-center gap-3">
-        <Button type="submit" busy={change.isPending}>
-          Save
-        </Button>
-        {change.isSuccess && <DoneNote>Saved.</DoneNote>}
-      </div>
-    </form>
-  );
-}
-
 /** What can be changed about a person, and where they take part. */
 export function PersonDetail({ person }: { readonly person: PersonAnswer }) {
   return (
@@ -69,6 +30,7 @@ export function PersonDetail({ person }: { readonly person: PersonAnswer }) {
         <h2 className="text-small">Takes part in</h2>
         <Parts person={person} />
         {person.abilities.invite && <SendAgain person={person} />}
+        <PersonAccess person={person} />
       </div>
     </div>
   );

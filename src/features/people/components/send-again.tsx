@@ -16,7 +16,7 @@ export function SendAgain({ person }: { readonly person: PersonAnswer }) {
           invite.mutate(person.id);
         }}
       >
-        Send the invitation again
+        {person.invitedUntil === null ? 'Send an invitation' : 'Send the invitation again'}
       </Button>
       {invite.data !== undefined && <LetterNote invited={invite.data} />}
     </div>

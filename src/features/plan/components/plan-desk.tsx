@@ -1,9 +1,11 @@
-import { useQuery } from '@tanstack/react-query';
 import { useRef, useState } from 'react';
-import { buildingQuery } from '../../buildings/api/get-building.ts';
+import { DrawingSide } from '../../drawing/components/drawing-side.tsx';
+import { DrawingTools } from '../../drawing/components/drawing-tools.tsx';
+import { usePlanDrawing } from '../../drawing/hooks/use-plan-drawing.ts';
 import type { MapHandle } from '../../map/map-handle.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { useBringIntoView } from '../hooks/use-bring-into-view.ts';
+import { useBuildingQuery } from '../hooks/use-building-query.ts';
 import { usePlanKeys } from '../hooks/use-plan-keys.ts';
 import { useSchemePlan } from '../hooks/use-scheme-plan.ts';
 import { useSelectedBuilding } from '../hooks/use-selected-building.ts';
@@ -11,6 +13,10 @@ import { useSteps } from '../hooks/use-steps.ts';
 import { MapPane } from './map-pane.tsx';
 import { PlanBasis } from './plan-basis.tsx';
 import { PlanSide } from './plan-side.tsx';
+
+function doNothing(): void {
+  // keys that go from building to building rest while something is drawn
+}
 
 /** The map and what stands at its side; on a phone, under it. */
 export function PlanDesk() {
@@ -20,10 +26,10 @@ export function PlanDesk() {
   const [selected, select] = useSelectedBuilding();
   const [handle, setHandle] = useState<MapHandle | null>(null);
   const chosen = useRef<HTMLDivElement>(null);
-  const building = useQuery({
-    ...buildingQuery(scheme.id, selected ?? 0),
-    enabled: selected !== null,
-  });
+  const { building, known } = useBuildingQuery(scheme.id, selected);
+  const canDraw = scheme.abilities.updateRegister === true;
+  const drawing = usePlanDrawing({ schemeId: scheme.id, canDraw, building: known, select });
+  const isDrawing = drawing.map !== null;
   const bring = useBringIntoView(handle, selected, building.data);
 
   function goTo(buildingId: number): void {
@@ -37,25 +43,37 @@ export function PlanDesk() {
     if (ready !== null) handle?.fit(ready.extent.bounds);
   }
   const steps = useSteps(selected, () => handle?.buildingsInView() ?? [], goTo);
-  usePlanKeys({ handle, step: steps.step, fit, deselect });
+  usePlanKeys(
+    { handle, step: isDrawing ? doNothing : steps.step, fit, deselect },
+    ready?.extent.from === 'buildings',
+  );
 
   return (
     <>
       <PlanBasis scheme={scheme} crs={ready?.crs} />
-      <div className="grid min-h-0 flex-1 grid-cols-[minmax(0,1fr)_312px] max-md:flex max-md:flex-none max-md:flex-col">
+      <div className="relative grid min-h-0 flex-1 grid-cols-[minmax(0,1fr)_312px] max-md:flex max-md:flex-none max-md:flex-col">
         <div className="min-w-0 max-md:h-[46vh] max-md:min-h-[300px]">
-          <MapPane {...schemePlan} selected={selected} onSelect={select} onHandle={setHandle} />
+          <MapPane
+            {...schemePlan}
+            selected={isDrawing ? null : selected}
+            drawing={drawing.map}
+            onSelect={drawing.pressBuilding}
+            onHandle={setHandle}
+          />
         </div>
+        <DrawingTools drawing={drawing} select={select} />
         <aside
           aria-label="Buildings"
           className="min-h-0 overflow-auto border-l border-ink bg-paper px-4 pt-3.5 pb-6 max-md:overflow-visible max-md:border-t max-md:border-l-0"
         >
-          <PlanSide
-            {...{ selected, building, steps, chosen }}
-            from={ready?.extent.from}
-            onGoTo={goTo}
-            onDeselect={deselect}
-          />
+          <DrawingSide drawing={drawing}>
+            <PlanSide
+              {...{ selected, building, steps, chosen }}
+              from={ready?.extent.from}
+              onGoTo={goTo}
+              onDeselect={deselect}
+            />
+          </DrawingSide>
         </aside>
       </div>
     </>

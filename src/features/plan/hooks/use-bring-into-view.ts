@@ -17,7 +17,7 @@ export function useBringIntoView(
   }, [handle, building]);
 
   return (buildingId) => {
-    if (building?.id === buildingId) handle?.bringIntoView(building.bounds);
+    if (building?.id === buildingId && handle !== null) handle.bringIntoView(building.bounds);
     else awaited.current = buildingId;
   };
 }

@@ -1,5 +1,7 @@
 import { useHotkeys } from '../../../hooks/use-hotkeys.ts';
+import { useKeyHelp } from '../../../hooks/use-key-help.ts';
 import type { MapHandle } from '../../map/map-handle.ts';
+import { BUILDING_KEYS, MAP_KEYS } from '../plan-keys.ts';
 
 type PlanKeys = {
   readonly handle: MapHandle | null;
@@ -9,7 +11,12 @@ type PlanKeys = {
 };
 
 /** The keys of the plan; arrows move the map only while it has the focus. */
-export function usePlanKeys({ handle, step, fit, deselect }: PlanKeys): void {
+export function usePlanKeys(
+  { handle, step, fit, deselect }: PlanKeys,
+  hasBuildings: boolean,
+): void {
+  useKeyHelp(MAP_KEYS, handle !== null);
+  useKeyHelp(BUILDING_KEYS, hasBuildings);
   const closer = () => handle?.zoomBy(1);
   useHotkeys({
     j: () => {

@@ -31,7 +31,8 @@ export function useSchemePlan() {
       hasBackground,
       origin: window.location.origin,
     });
-    return { plan, extent: extent.data, crs: crs.data };
+    const canDraw = scheme.abilities.updateRegister === true;
+    return { plan: { ...plan, canDraw }, extent: extent.data, crs: crs.data };
   }, [scheme, demo, extent.data, crs.data, background.data, basemap.data, basemap.isPending]);
 
   return {

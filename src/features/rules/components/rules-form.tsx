@@ -1,15 +1,23 @@
+import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import type { RuleSet, RulesVersion } from '../../../../shared/schemas/rules.ts';
 import { Button } from '../../../components/ui/button.tsx';
+import { ConflictChoice } from '../../../components/ui/conflict-choice.tsx';
 import { ErrorNote } from '../../../components/ui/error-note.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { Panel } from '../../../components/ui/panel.tsx';
+import { UnsavedEdits } from '../../../components/ui/unsaved-edits.tsx';
+import { isRefusal } from '../../../lib/api-error.ts';
 import { useSaveRules } from '../api/save-rules.ts';
 import { checkDraft } from '../check-draft.ts';
+import { rebasedDraft } from '../rebased-draft.ts';
+import { ruleChanges } from '../rule-lines.ts';
 import { RULES } from '../rule-words.ts';
 import { draftOf, type RulesDraft } from '../rules-draft.ts';
 import { HoldFields } from './hold-fields.tsx';
 import { RuleRow } from './rule-row.tsx';
+
+const FASTER = 'Somebody else saved a version meanwhile. What you wrote is still here.';
 
 type RulesFormProps = {
   readonly schemeId: string;
@@ -20,18 +28,40 @@ type RulesFormProps = {
 /** Writes the next version of a scheme's rules. The one before stays, for what was worked out by it. */
 export function RulesForm({ schemeId, newest, onDone }: RulesFormProps) {
   const save = useSaveRules(schemeId);
+  /** The version that this one is made from; the newest may have moved on since. */
+  const [base, setBase] = useState(newest);
   const form = useForm<RulesDraft, unknown, RuleSet>({
     resolver: checkDraft,
-    defaultValues: draftOf(newest.rules),
+    defaultValues: draftOf(base.rules),
   });
-  const faults = Object.keys(form.formState.errors).length;
+  const { errors, isDirty, isSubmitted } = form.formState;
+  const faults = Object.keys(errors).length;
+  const isLate = isRefusal(save.error, 'conflict');
   const submit = form.handleSubmit((rules) => {
-    save.mutate({ basedOn: newest.version, rules }, { onSuccess: onDone });
+    save.mutate({ basedOn: base.version, rules }, { onSuccess: onDone });
   });
+  function keepMine() {
+    const [from, onto] = [draftOf(base.rules), draftOf(newest.rules)];
+    const mine = rebasedDraft(form.getValues(), from, onto);
+    form.reset(onto);
+    form.reset(mine, { keepDefaultValues: true });
+    setBase(newest);
+    save.reset();
+  }
   return (
     <form noValidate onSubmit={(event) => void submit(event)}>
-      <MutationError failed="The rules were not saved." error={save.error} />
-      {faults > 0 && form.formState.isSubmitted && (
+      <UnsavedEdits hasEdits={isDirty && !save.isSuccess} />
+      <MutationError
+        failed="The rules were not saved."
+        error={save.error}
+        stands={isLate ? FASTER : undefined}
+        action={
+          isLate && newest.version > base.version ? (
+            <ConflictChoice changes={ruleChanges(base.rules, newest.rules)} onKeepMine={keepMine} />
+          ) : undefined
+        }
+      />
+      {faults > 0 && isSubmitted && (
         <ErrorNote
           failed="Not saved yet."
           stands="Mend what is marked. The version before stands until then."
@@ -45,7 +75,7 @@ export function RulesForm({ schemeId, newest, onDone }: RulesFormProps) {
       </Panel>
       <div className="mt-4 flex gap-2">
         <Button kind="main" type="submit" busy={save.isPending}>
-          Save as version {newest.version + 1}
+          Save as version {base.version + 1}
         </Button>
         <Button onClick={onDone}>Leave version {newest.version}</Button>
       </div>

@@ -3,12 +3,15 @@ import type { RuleSet } from '../../../../shared/schemas/rules.ts';
 import { Panel } from '../../../components/ui/panel.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
+import { classNames } from '../../../lib/class-names.ts';
 import { formatShortDay } from '../../../lib/format-date.ts';
 import { holdLines, ruleLines, type RuleLine } from '../rule-lines.ts';
 import { sourceInFull, sourceWords } from '../source-words.ts';
 
-function wrapped(content: ReactNode) {
-  return <span className="block min-w-[130px] py-1 whitespace-normal">{content}</span>;
+const NAME_ROOM = 'min-w-[130px] sm:min-w-[190px]';
+
+function wrapped(content: ReactNode, room = 'min-w-[130px]') {
+  return <span className={classNames('block py-1 whitespace-normal', room)}>{content}</span>;
 }
 
 const SOURCE: Column<RuleLine> = {
@@ -33,6 +36,7 @@ const RULE_COLUMNS: readonly Column<RuleLine>[] = [
           <b className="font-semibold">{name}</b>
           <span className="block text-cap text-ink-3">{what}</span>
         </>,
+        NAME_ROOM,
       ),
   },
   { id: 'value', heading: 'In this scheme', wide: true, cell: ({ value }) => wrapped(value) },

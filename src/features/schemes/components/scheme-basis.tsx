@@ -4,10 +4,12 @@ import { BasisLine } from '../../../components/layout/basis-line.tsx';
 import { formatDay } from '../../../lib/format-date.ts';
 import { crsQuery } from '../../crs/api/get-crs.ts';
 import { yourRoles } from '../../members/roles-in-words.ts';
+import { can } from '../can.ts';
 
 /** What a scheme's settings rest on: its grid, and what the person is in it. */
 export function SchemeBasis({ scheme }: { readonly scheme: SchemeAnswer }) {
-  const { data: crs } = useQuery(crsQuery(scheme.crs));
+  const worksOnIt = can(scheme, 'readRegister');
+  const { data: crs } = useQuery({ ...crsQuery(scheme.crs), enabled: worksOnIt });
   const grid = (
     <>
       <b>EPSG:{scheme.crs}</b> {crs?.name}
@@ -20,7 +22,7 @@ export function SchemeBasis({ scheme }: { readonly scheme: SchemeAnswer }) {
     <BasisLine
       parts={[
         ...(archived === false ? [] : [<b key="archived">{archived}</b>]),
-        grid,
+        ...(worksOnIt ? [grid] : []),
         `${words.charAt(0).toUpperCase()}${words.slice(1)}`,
       ]}
     />

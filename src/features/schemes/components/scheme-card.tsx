@@ -2,6 +2,7 @@ import { Link } from 'react-router-dom';
 import type { SchemeAnswer } from '../../../../shared/schemas/schemes.ts';
 import { schemePath } from '../../../config/paths.ts';
 import { formatDay } from '../../../lib/format-date.ts';
+import { can } from '../can.ts';
 import { CardPicture } from './card-picture.tsx';
 
 /** A scheme in the list of them; the whole card leads to it. */
@@ -12,7 +13,7 @@ export function SchemeCard({ scheme }: { readonly scheme: SchemeAnswer }) {
       {archivedAt === null && <CardPicture scheme={scheme} />}
       <div className="px-3.5 pt-3 pb-[13px]">
         <div className="flex items-baseline gap-2">
-          <h3 className="min-w-0 text-lead break-words">
+          <h3 className="min-w-0 text-lead break-words text-balance">
             <Link
               to={schemePath(id)}
               className="text-ink no-underline after:absolute after:inset-0 hover:underline"
@@ -21,11 +22,12 @@ export function SchemeCard({ scheme }: { readonly scheme: SchemeAnswer }) {
             </Link>
           </h3>
           <small className="ml-auto text-small whitespace-nowrap text-ink-2">
-            {archivedAt === null ? `EPSG:${crs}` : `Archived ${formatDay(archivedAt)}`}
+            {archivedAt !== null && `Archived ${formatDay(archivedAt)}`}
+            {archivedAt === null && can(scheme, 'readRegister') && `EPSG:${crs}`}
           </small>
         </div>
         {description !== '' && (
-          <p className="mt-0.5 line-clamp-3 text-small text-ink-2">{description}</p>
+          <p className="mt-1 line-clamp-3 text-small text-ink-2">{description}</p>
         )}
       </div>
     </li>

@@ -1,11 +1,10 @@
 import { queryOptions } from '@tanstack/react-query';
-import { sessionSchema } from '../../../../shared/schemas/session.ts';
-import { apiGet } from '../../../lib/api-client.ts';
 import { SESSION_KEY } from '../../../lib/query-client.ts';
+import { fetchSession } from '../../../lib/with-csrf-token.ts';
 
 /** Who is signed in, if anybody. */
 export const sessionQuery = queryOptions({
   queryKey: SESSION_KEY,
-  queryFn: ({ signal }) => apiGet('/api/session', sessionSchema, signal),
+  queryFn: fetchSession,
   staleTime: 5 * 60_000,
 });

@@ -20,7 +20,14 @@ export function WaitingForYou({ waiting }: { readonly waiting: WaitingAnswer }) 
           key={scheme.id}
           title={scheme.name}
           note={yourRoles(roles)}
-          action={<Link to={schemePath(scheme.id)}>Open the scheme</Link>}
+          action={
+            <Link
+              to={schemePath(scheme.id)}
+              className="max-sm:-my-3.5 max-sm:inline-block max-sm:py-3.5"
+            >
+              Open the scheme
+            </Link>
+          }
         >
           <WaitingList items={items} />
         </Panel>

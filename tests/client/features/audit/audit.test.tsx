@@ -2,7 +2,7 @@ import { fireEvent, screen } from '@testing-library/react';
 import { describe, expect, it } from 'vitest';
 import type { AuditEntryAnswer } from '../../../../shared/schemas/audit.ts';
 import { AuditPage } from '../../../../src/app/routes/audit.tsx';
-import { anId, aSchemeAnswer } from '../../../support/answers.ts';
+import { anId, aRulesVersion, aSchemeAnswer } from '../../../support/answers.ts';
 import { axeFaults } from '../../../support/axe-faults.ts';
 import { fakeApi } from '../../../support/fake-api.ts';
 import { renderPage } from '../../../support/render-page.tsx';
@@ -15,6 +15,7 @@ function anEntry(overrides: Partial<AuditEntryAnswer> = {}): AuditEntryAnswer {
     scheme: { id: anId(10), name: 'Port Dogger crossing' },
     action: 'change scheme',
     subject: { kind: 'scheme', id: anId(10) },
+    named: [],
     before: { name: 'Port Dogger' },
     after: { name: 'Port Dogger crossing' },
     ...overrides,
@@ -41,6 +42,38 @@ describe('the audit page', () => {
     fireEvent.click(await screen.findByText('Reset password'));
     expect(screen.getByText('No values go with this.')).toBeTruthy();
     expect(screen.getByText('nobody signed in')).toBeTruthy();
+  });
+
+  it('calls people by name, and says when the demo did it', async () => {
+    const designer = { id: anId(20), name: 'Designer', email: 'designer@example.org' };
+    const entry = anEntry({
+      person: null,
+      action: 'change roles',
+      subject: { kind: 'person', id: designer.id },
+      named: [designer],
+      before: { by: designer.id },
+      after: { by: 'nobody' },
+    });
+    fakeApi({ ...SCHEMES, 'GET /api/audit?': { entries: [entry], next: null } });
+    renderPage(<AuditPage />);
+    fireEvent.click(await screen.findByText('Change roles'));
+    expect(screen.getByText('the demo')).toBeTruthy();
+    const values = screen.getByRole('table', { name: 'Values of: change roles' });
+    expect(values.textContent).toContain('Designer, designer@example.org');
+    expect(screen.getByText(/^Entry 2, person Designer, designer@example.org/)).toBeTruthy();
+    expect(document.body.textContent).not.toContain(designer.id);
+  });
+
+  it('says rules as their page does', async () => {
+    const { rules } = aRulesVersion();
+    const value = { ...rules.screening.value, settlement: 0.0125 };
+    const changed = { ...rules, screening: { ...rules.screening, value } };
+    const entry = anEntry({ action: 'change rules', before: { rules }, after: { rules: changed } });
+    fakeApi({ ...SCHEMES, 'GET /api/audit?': { entries: [entry], next: null } });
+    renderPage(<AuditPage />);
+    fireEvent.click(await screen.findByText('Change rules'));
+    const values = screen.getByRole('table', { name: 'Values of: change rules' });
+    expect(values.textContent).toContain('12.5\u00a0mm and 1 in 500');
   });
 
   it('fetches older entries when asked', async () => {

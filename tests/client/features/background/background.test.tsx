@@ -20,7 +20,7 @@ const LAYERS = {
 };
 
 function openBackground(mayUpdate = true) {
-  const scheme = aSchemeAnswer({ abilities: { updateBackground: mayUpdate } });
+  const scheme = aSchemeAnswer({ abilities: { readRegister: true, updateBackground: mayUpdate } });
   renderPage(
     <SchemeContext value={scheme}>
       <BackgroundPage />
@@ -94,8 +94,11 @@ describe('the background', () => {
     });
   });
 
-  it('is not there for who may not change it', () => {
+  it('is only read by who may not change it', async () => {
+    fakeApi(LAYERS);
     openBackground(false);
-    expect(screen.getByRole('heading', { name: 'Nothing here' })).toBeTruthy();
+    expect(await screen.findByText('1 204 features')).toBeTruthy();
+    expect(screen.queryByRole('button')).toBeNull();
+    expect(screen.queryByLabelText(/^Bring in/)).toBeNull();
   });
 });

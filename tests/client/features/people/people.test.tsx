@@ -1,4 +1,4 @@
-import { fireEvent, screen, waitFor } from '@testing-library/react';
+import { fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { describe, expect, it } from 'vitest';
 import { PeoplePage } from '../../../../src/app/routes/people.tsx';
 import {
@@ -6,6 +6,7 @@ import {
   partsOf,
   signInState,
 } from '../../../../src/features/people/person-words.ts';
+import { PersonContext } from '../../../../src/features/session/person-context.ts';
 import { anId, aPersonAnswer, aSchemeAnswer } from '../../../support/answers.ts';
 import { axeFaults } from '../../../support/axe-faults.ts';
 import { fakeApi, Refusal } from '../../../support/fake-api.ts';
@@ -19,7 +20,7 @@ const INVITED = aPersonAnswer({
   hasPassword: false,
   invitedUntil: '2999-05-08T09:00:00.000Z',
   memberships: [{ ...SCHEME, role: 'assessor' }],
-  abilities: { invite: true },
+  abilities: { invite: true, withdraw: true, changeEmail: true, shutOut: true, readmit: false },
 });
 
 const LISTS = {
@@ -42,8 +43,9 @@ describe('signInState', () => {
     [{ hasPassword: false, invitedUntil: '2026-05-28T09:00:00.000Z' }, 'Invited until 28 May 2026'],
     [{ hasPassword: false, invitedUntil: '2026-05-20T09:00:00.000Z' }, 'Invitation too old'],
     [{ hasPassword: false, invitedUntil: null }, 'Not invited'],
+    [{ hasPassword: true, invitedUntil: null, shutOutAt: '2026-05-20T09:00:00.000Z' }, 'Shut out'],
   ])('of %j is "%s"', (person, words) => {
-    expect(signInState(person, now).words).toBe(words);
+    expect(signInState({ shutOutAt: null, ...person }, now).words).toBe(words);
   });
 });
 
@@ -65,9 +67,7 @@ describe('the page of people', () => {
   it('lists everybody, and says who cannot sign in yet', async () => {
     fakeApi(LISTS);
     renderPage(<PeoplePage />);
-    expect(
-      await screen.findByText('2 with an account; 1 of them cannot sign in yet.'),
-    ).toBeTruthy();
+    expect(await screen.findByText('2 with an account; 1 of them cannot sign in.')).toBeTruthy();
     expect(screen.getAllByRole('row')).toHaveLength(3);
     expect(await axeFaults()).toEqual([]);
   });
@@ -101,6 +101,7 @@ describe('the page of people', () => {
     renderPage(<PeoplePage />);
     type('Name', 'Clerk of works');
     type('E-mail', 'clerk@example.org');
+    fireEvent.click(screen.getByLabelText('Administrator'));
     fireEvent.click(screen.getByRole('button', { name: 'Send the invitation' }));
     expect((await screen.findByRole('alert')).textContent).toContain('The account is made.');
   });
@@ -117,9 +118,66 @@ describe('the page of people', () => {
     renderPage(<PeoplePage />);
     type('Name', 'Clerk again');
     type('E-mail', 'clerk@example.org');
+    fireEvent.click(screen.getByLabelText('Administrator'));
     fireEvent.click(screen.getByRole('button', { name: 'Send the invitation' }));
     expect(await screen.findByText('Somebody has this address already.')).toBeTruthy();
     expect(screen.getByLabelText<HTMLInputElement>('Name').value).toBe('Clerk again');
+    expect(document.activeElement).toBe(screen.getByLabelText('E-mail'));
+  });
+
+  it('asks before somebody is invited who will see nothing', async () => {
+    const { calls } = fakeApi({
+      ...LISTS,
+      'POST /api/people': { person: INVITED, letterSent: true },
+    });
+    renderPage(<PeoplePage />);
+    type('Name', 'Clerk of works');
+    type('E-mail', 'clerk@example.org');
+    fireEvent.click(screen.getByRole('button', { name: 'Send the invitation' }));
+    const question = await screen.findByRole('dialog', { name: 'Invite without a scheme?' });
+    expect(calls.map(({ route }) => route)).not.toContain('POST /api/people');
+    fireEvent.click(within(question).getByRole('button', { name: 'Send the invitation' }));
+    expect(await screen.findByText(/went out/)).toBeTruthy();
+  });
+
+  it('withdraws an invitation', async () => {
+    const address = `DELETE /api/people/${INVITED.id}/invitations`;
+    const { calls } = fakeApi({ ...LISTS, [address]: { ...INVITED, invitedUntil: null } });
+    renderPage(<PeoplePage />);
+    fireEvent.click(await screen.findByText('Clerk of works'));
+    fireEvent.click(screen.getByRole('button', { name: 'Withdraw the invitation' }));
+    await waitFor(() => {
+      expect(calls.map(({ route }) => route)).toContain(address);
+    });
+  });
+
+  it('shuts a person out once it has asked', async () => {
+    const address = `PUT /api/people/${anId(20)}/shut-out`;
+    const { calls } = fakeApi({ ...LISTS, [address]: aPersonAnswer() });
+    renderPage(<PeoplePage />);
+    fireEvent.click(await screen.findByText('Designer', { selector: 'b' }));
+    fireEvent.click(screen.getByRole('button', { name: 'Shut out' }));
+    const question = screen.getByRole('dialog', { name: 'Shut out Designer?' });
+    fireEvent.click(within(question).getByRole('button', { name: 'Shut out' }));
+    await waitFor(() => {
+      expect(calls.find(({ route }) => route === address)?.body).toEqual({ shutOut: true });
+    });
+  });
+
+  it('asks before an administrator gives up their own right', async () => {
+    const me = aPersonAnswer({ isAdministrator: true });
+    const { calls } = fakeApi({ ...LISTS, 'GET /api/people': [me] });
+    renderPage(
+      <PersonContext value={{ ...me, demo: false }}>
+        <PeoplePage />
+      </PersonContext>,
+    );
+    fireEvent.click(await screen.findByText('Designer', { selector: 'b' }));
+    fireEvent.click(screen.getAllByLabelText('Administrator')[0] ?? document.body);
+    fireEvent.click(screen.getByRole('button', { name: 'Save' }));
+    const question = await screen.findByRole('dialog', { name: 'Give up being administrator?' });
+    fireEvent.click(within(question).getByRole('button', { name: 'Leave it as it is' }));
+    expect(calls.some(({ route }) => route.startsWith('PATCH'))).toBe(false);
   });
 
   it('opens a row on what can be changed, and sends an invitation again', async () => {

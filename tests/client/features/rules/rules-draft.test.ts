@@ -3,7 +3,14 @@ import { describe, expect, it } from 'vitest';
 import { rulesSchema, type RuleSet } from '../../../../shared/schemas/rules.ts';
 import { defaultRules } from '../../../../server/commands/default-rules.ts';
 import { checkDraft } from '../../../../src/features/rules/check-draft.ts';
-import { toNumber } from '../../../../src/features/rules/display-units.ts';
+import {
+  fromMetres,
+  fromSlope,
+  toMetres,
+  toNumber,
+  toSlope,
+} from '../../../../src/features/rules/display-units.ts';
+import { rebasedDraft } from '../../../../src/features/rules/rebased-draft.ts';
 import { ruleChanges } from '../../../../src/features/rules/rule-lines.ts';
 import { conditionInWords, RULES, ruleValue } from '../../../../src/features/rules/rule-words.ts';
 import { blankLayer, draftOf, rulesOf } from '../../../../src/features/rules/rules-draft.ts';
@@ -50,6 +57,51 @@ describe('a draft of rules', () => {
     expect(cutOff.value.settlement).toBe('1');
   });
 
+  it.each(['600', '333', '10.5', '750', '1200', '0.1', '12.34'])(
+    'writes %s as it was typed',
+    (text) => {
+      expect(fromSlope(toSlope(text))).toBe(text);
+      expect(fromMetres(toMetres(text))).toBe(text);
+    },
+  );
+
+  it('writes a slope that was kept with fewer figures as it was meant', () => {
+    expect(fromSlope(0.00166666666667)).toBe('600');
+  });
+
+  it('keeps the whole number behind what is typed', () => {
+    expect([toSlope('600'), toMetres('0.1'), toSlope('10,5')]).toEqual([1 / 600, 0.0001, 1 / 10.5]);
+    expect(['1e9', '1,000.5', '0x10', '1 in 500'].map(toSlope)).toEqual([NaN, NaN, NaN, NaN]);
+  });
+
+  it('says what is wrong with a slope in its own terms', async () => {
+    for (const [typed, words] of [
+      ['1e9', 'Give a figure, such as 12.5.'],
+      ['0.5', 'Give 1 or more.'],
+      ['-3', 'Give 1 or more.'],
+    ] as const) {
+      const draft = draftOf(RULES_OF_TODAY);
+      draft.screening.value.slope = typed;
+      const { screening } = await faultsOf(draft);
+      expect(screening?.value?.slope?.message).toBe(words);
+    }
+  });
+
+  it('laid on a newer version keeps what was written and takes the rest', () => {
+    const newer: RuleSet = {
+      ...RULES_OF_TODAY,
+      focus: { ...RULES_OF_TODAY.focus, value: 'deep' },
+      compression: { ...RULES_OF_TODAY.compression, value: 'zero' },
+    };
+    const mine = draftOf(RULES_OF_TODAY);
+    mine.screening.value.settlement = '12';
+    mine.compression = { ...mine.compression, date: '2026-06-01' };
+    const laid = rebasedDraft(mine, draftOf(RULES_OF_TODAY), draftOf(newer));
+    expect(laid.screening.value.settlement).toBe('12');
+    expect(laid.focus.value).toBe('deep');
+    expect(laid.compression).toEqual(mine.compression);
+  });
+
   it('takes a comma for a point, and nothing for no figure', () => {
     expect(['2,5', ' 3 ', '−1.5', '', 'twelve'].map(toNumber)).toEqual([2.5, 3, -1.5, NaN, NaN]);
   });
@@ -60,7 +112,7 @@ describe('a draft of rules', () => {
     draft.cutOff.value.settlement = '-1';
     draft.screening.date = '';
     const errors = await faultsOf(draft);
-    expect(errors.screening?.value?.settlement?.message).toBe('Give a figure.');
+    expect(errors.screening?.value?.settlement?.message).toBe('Give a figure, such as 12.5.');
     expect(errors.cutOff?.value?.settlement?.message).toBe('This is too small.');
     expect(errors.screening?.date?.message).toBe('Give a day.');
   });

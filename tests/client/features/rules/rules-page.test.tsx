@@ -64,6 +64,44 @@ describe('the page of rules', () => {
     expect(screen.getByRole('button', { name: 'Save as version 2' })).toBeTruthy();
   });
 
+  it('shows the change of who was faster and lays what was written on it', async () => {
+    const first = aRulesVersion();
+    const focus = { ...first.rules.focus, value: 'deep' } as const;
+    const second = aRulesVersion({ version: 2, rules: { ...first.rules, focus } });
+    const kept = [first];
+    const { calls } = fakeApi({
+      [`GET ${RULES}`]: () => kept,
+      [`POST ${RULES}`]: (body: unknown) => {
+        if (JSON.stringify(body).includes('"basedOn":2')) return aRulesVersion({ version: 3 });
+        kept.unshift(second);
+        return new Refusal(409, 'conflict', 'Somebody else changed this meanwhile.');
+      },
+    });
+    openRules({ updateRules: true });
+    fireEvent.click(await screen.findByRole('button', { name: 'Change the rules' }));
+    const [settlement] = screen.getAllByLabelText('Settlement, mm');
+    fireEvent.change(settlement ?? document.body, { target: { value: '12' } });
+    fireEvent.click(screen.getByRole('button', { name: 'Save as version 2' }));
+    const alert = await screen.findByRole('alert');
+    await waitFor(() => {
+      expect(document.activeElement).toBe(alert);
+    });
+    fireEvent.click(await screen.findByRole('button', { name: 'See their change' }));
+    expect(screen.getByRole('table', { name: 'Their change' }).textContent).toContain(
+      'a point below the axis',
+    );
+    expect(await axeFaults()).toEqual([]);
+    fireEvent.click(screen.getByRole('button', { name: 'Keep mine on top of it' }));
+    expect(screen.queryByRole('alert')).toBeNull();
+    fireEvent.click(screen.getByRole('button', { name: 'Save as version 3' }));
+    await waitFor(() => {
+      expect(calls.findLast(({ route }) => route.startsWith('POST'))?.body).toMatchObject({
+        basedOn: 2,
+        rules: { screening: { value: { settlement: 0.012 } }, focus: { value: 'deep' } },
+      });
+    });
+  });
+
   it('marks what is wrong and saves nothing', async () => {
     const { calls } = fakeApi({ [`GET ${RULES}`]: [aRulesVersion()] });
     openRules({ updateRules: true });
@@ -72,7 +110,7 @@ describe('the page of rules', () => {
     fireEvent.change(settlement ?? document.body, { target: { value: 'twelve' } });
     fireEvent.click(screen.getByRole('button', { name: 'Another hold' }));
     fireEvent.click(screen.getByRole('button', { name: 'Save as version 2' }));
-    expect(await screen.findByText('Give a figure.')).toBeTruthy();
+    expect(await screen.findByText('Give a figure, such as 12.5.')).toBeTruthy();
     expect(screen.getByText('Give it a name.')).toBeTruthy();
     expect(calls).toHaveLength(1);
   });

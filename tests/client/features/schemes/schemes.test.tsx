@@ -1,6 +1,9 @@
 import { fireEvent, screen, waitFor } from '@testing-library/react';
+import { useState } from 'react';
 import { describe, expect, it, vi } from 'vitest';
+import type { SchemeAnswer } from '../../../../shared/schemas/schemes.ts';
 import { DescriptionPage } from '../../../../src/app/routes/settings-description.tsx';
+import { DescriptionForm } from '../../../../src/features/schemes/components/description-form.tsx';
 import { NewSchemeForm } from '../../../../src/features/schemes/components/new-scheme-form.tsx';
 import { SchemeList } from '../../../../src/features/schemes/components/scheme-list.tsx';
 import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
@@ -12,6 +15,24 @@ import { renderPage } from '../../../support/render-page.tsx';
 const CRS = aCrsAnswer();
 const FOUND = [{ code: CRS.code, name: CRS.name, area: CRS.area }];
 const MANAGES = { readScheme: true, updateScheme: true, archiveScheme: true };
+
+/** The form of a scheme that a newer one comes for while something is written. */
+function LateDescription({ theirs }: { readonly theirs: SchemeAnswer }) {
+  const [scheme, setScheme] = useState(aSchemeAnswer({ abilities: MANAGES }));
+  return (
+    <>
+      <DescriptionForm scheme={scheme} />
+      <button
+        type="button"
+        onClick={() => {
+          setScheme(theirs);
+        }}
+      >
+        Theirs comes
+      </button>
+    </>
+  );
+}
 
 describe('NewSchemeForm', () => {
   it('finds a system by what is typed, explains it and makes the scheme on it', async () => {
@@ -92,6 +113,34 @@ describe('the description of a scheme', () => {
         version: 1,
         name: 'Dogger',
         description: '',
+      });
+    });
+  });
+
+  it('lays what was written on the change of who was faster', async () => {
+    const theirs = aSchemeAnswer({ version: 2, description: 'Theirs.', abilities: MANAGES });
+    const { calls } = fakeApi({
+      'GET /api/crs/32631': CRS,
+      [`PATCH ${path}`]: (body: unknown) =>
+        JSON.stringify(body).includes('"version":1')
+          ? new Refusal(409, 'conflict', 'Somebody else changed this meanwhile.')
+          : theirs,
+    });
+    renderPage(<LateDescription theirs={theirs} />);
+    fireEvent.change(screen.getByLabelText('Name'), { target: { value: 'Dogger' } });
+    fireEvent.click(screen.getByRole('button', { name: 'Save' }));
+    await screen.findByRole('alert');
+    expect(screen.queryByRole('button', { name: 'See their change' })).toBeNull();
+    fireEvent.click(screen.getByRole('button', { name: 'Theirs comes' }));
+    fireEvent.click(screen.getByRole('button', { name: 'See their change' }));
+    expect(screen.getByRole('table', { name: 'Their change' }).textContent).toContain('Theirs.');
+    fireEvent.click(screen.getByRole('button', { name: 'Keep mine on top of it' }));
+    fireEvent.click(screen.getByRole('button', { name: 'Save' }));
+    await waitFor(() => {
+      expect(calls.findLast(({ route }) => route.startsWith('PATCH'))?.body).toEqual({
+        version: 2,
+        name: 'Dogger',
+        description: 'Theirs.',
       });
     });
   });

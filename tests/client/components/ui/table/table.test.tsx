@@ -137,4 +137,26 @@ describe('a table of many rows', () => {
     expect(screen.getByRole('table').ariaRowCount).toBe('301');
     expect(rows[1]?.getAttribute('aria-rowindex')).toBe('2');
   });
+
+  it('has all of them on paper, and those in view afterwards', () => {
+    render(<Table {...BUILDINGS} rows={many} />);
+    fireEvent(window, new Event('beforeprint'));
+    expect(references()).toHaveLength(300);
+    expect(screen.queryByText(/Left out/)).toBeNull();
+    fireEvent(window, new Event('afterprint'));
+    expect(references().length).toBeLessThan(60);
+  });
+
+  it('says on paper how many are left out of very many', () => {
+    const rows = Array.from({ length: 2345 }, (_, index) => ({
+      reference: `B${String(index).padStart(4, '0')}`,
+      settlement: index,
+    }));
+    render(<Table {...BUILDINGS} columns={COLUMNS.slice(0, 1)} rows={rows} />);
+    fireEvent(window, new Event('beforeprint'));
+    expect(screen.getByRole('table').querySelectorAll('[data-row]')).toHaveLength(2000);
+    expect(screen.getByText('The first 2 000 rows are printed. Left out: 345.')).toBeTruthy();
+    fireEvent(window, new Event('afterprint'));
+    expect(screen.queryByText(/Left out/)).toBeNull();
+  });
 });

@@ -1,14 +1,18 @@
-import { useState, type RefObject } from 'react';
+import type { RefObject } from 'react';
+import type { KeyHelp } from '../../../config/keys-at-hand.ts';
 import { useHotkeys } from '../../../hooks/use-hotkeys.ts';
+import { useKeyHelp } from '../../../hooks/use-key-help.ts';
 
-type ActiveRow = {
-  /** Index of the row that J and K have reached; −1 before the first. */
-  readonly active: number;
-  readonly activate: (index: number) => void;
-};
+const ROW_KEYS: readonly KeyHelp[] = [
+  { keys: ['J', 'K'], does: 'Next and previous row of a table' },
+  { keys: ['Enter', 'O'], does: 'Open the row' },
+];
 
 type Rows = {
-  readonly ids: readonly string[];
+  readonly count: number;
+  /** Index of the row that J and K have reached; −1 before the first. */
+  readonly active: number;
+  readonly onActivate: (index: number) => void;
   readonly enabled: boolean;
   readonly scroller: RefObject<HTMLDivElement | null>;
   readonly reveal: (index: number) => void;
@@ -25,15 +29,12 @@ function focusRow(scroller: HTMLDivElement | null, index: number, tries = 5): vo
   }
 }
 
-/** The row that the keys have reached: J and ↓ go on, K and ↑ go back. */
-export function useActiveRow({ ids, enabled, scroller, reveal }: Rows): ActiveRow {
-  const [activeId, setActiveId] = useState<string>();
-  const active = activeId === undefined ? -1 : ids.indexOf(activeId);
-
+/** J and ↓ go on to the next row, K and ↑ back. */
+export function useRowKeys({ count, active, onActivate, enabled, scroller, reveal }: Rows): void {
   function move(step: number) {
-    const index = active < 0 ? 0 : Math.min(ids.length - 1, Math.max(0, active + step));
-    if (ids[index] === undefined) return;
-    setActiveId(ids[index]);
+    if (count === 0) return;
+    const index = active < 0 ? 0 : Math.min(count - 1, Math.max(0, active + step));
+    onActivate(index);
     reveal(index);
     focusRow(scroller.current, index);
   }
@@ -41,6 +42,7 @@ export function useActiveRow({ ids, enabled, scroller, reveal }: Rows): ActiveRo
     const { target } = event;
     if (target instanceof Node && scroller.current?.contains(target) === true) move(step);
   }
+  useKeyHelp(ROW_KEYS, enabled && count > 0);
   useHotkeys(
     {
       j: () => {
@@ -63,10 +65,4 @@ export function useActiveRow({ ids, enabled, scroller, reveal }: Rows): ActiveRo
     },
     enabled && active >= 0,
   );
-  return {
-    active,
-    activate: (index) => {
-      setActiveId(ids[index]);
-    },
-  };
 }

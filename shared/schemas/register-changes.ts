@@ -1,0 +1,160 @@
+import { z } from 'zod';
+import {
+  BUILDING_FIELD_NAMES,
+  buildingAttributesSchema,
+  buildingReferenceSchema,
+  drawnFootprintSchema,
+} from './building-fields.ts';
+import { registerFilterSchema } from './register.ts';
+
+/**
+ * The ways in which a register changes.
+ *
+ * Units: none. Valid: closed list. Source: [own].
+ */
+export const REGISTER_CHANGE_KINDS = [
+  'import',
+  'draw',
+  'edit',
+  'edit many',
+  'split',
+  'join',
+  'remove',
+  'ground',
+  'undo',
+] as const;
+
+const version = z.number().int().min(1);
+const someAttributes = buildingAttributesSchema.refine(
+  (attributes) => Object.keys(attributes).length > 0,
+  'Change at least one value.',
+);
+
+/**
+ * A building drawn by hand.
+ *
+ * Units: as buildingAttributesSchema and drawnFootprintSchema. Valid: a reference that is free.
+ * Source: [own].
+ */
+export const drawBuildingSchema = z.strictObject({
+  reference: buildingReferenceSchema,
+  footprint: drawnFootprintSchema,
+  attributes: buildingAttributesSchema.default({}),
+});
+
+/**
+ * A change of one building: its reference, values or footprint, on top of the version that was seen.
+ *
+ * Units: as drawBuildingSchema. Valid: an older version is refused, and what changed is told.
+ * Source: [own].
+ */
+export const editBuildingSchema = z.strictObject({
+  version,
+  reference: buildingReferenceSchema.optional(),
+  attributes: buildingAttributesSchema.optional(),
+  footprint: drawnFootprintSchema.optional(),
+});
+
+/**
+ * The same values for many buildings. `expected` is how many the person was told it would be.
+ *
+ * Units: as buildingAttributesSchema. Valid: refused where another number is found. Source: [own].
+ */
+export const editManySchema = z.strictObject({
+  filter: registerFilterSchema,
+  expected: z.number().int().min(1),
+  attributes: someAttributes,
+});
+
+/**
+ * Cuts a building in two along a line across it.
+ *
+ * Units: easting and northing m in the scheme's grid. Valid: a line that crosses the footprint from
+ * outside to outside; the largest part keeps the reference. Source: [own].
+ */
+export const splitBuildingSchema = z.strictObject({
+  version,
+  line: z
+    .array(z.tuple([z.number(), z.number()]))
+    .min(2)
+    .max(200),
+});
+
+/**
+ * Makes one building of several; the first keeps its reference and values, gaps filled from the others.
+ *
+ * Units: none. Valid: two to 50 buildings, each with the version that was seen. Source: [own].
+ */
+export const joinBuildingsSchema = z.strictObject({
+  buildings: z
+    .array(z.strictObject({ id: z.number().int().positive(), version }))
+    .min(2, 'Choose two buildings at least.')
+    .max(50),
+});
+
+/**
+ * Takes a building out of the register; its history stays.
+ *
+ * Units: none. Valid: the version that was seen. Source: [own].
+ */
+export const removeBuildingSchema = z.strictObject({ version });
+
+/**
+ * The address of a change.
+ *
+ * Units: none. Valid: a change of the scheme. Source: [own].
+ */
+export const changeParamsSchema = z.object({ schemeId: z.string(), changeId: z.uuid() });
+
+/**
+ * What was done: the change, for undoing it, and the buildings that it left.
+ *
+ * Units: none. Valid: version is the scheme's new registerVersion; removed buildings are not among
+ * buildingIds; conflicts of an undo are refused whole. Source: [own].
+ */
+export const registerChangeSchema = z.strictObject({
+  changeId: z.uuid(),
+  version: z.number(),
+  buildingIds: z.array(z.number()),
+});
+
+/**
+ * What was done to a register.
+ *
+ * Units: none. Valid: parsed by registerChangeSchema. Source: [own].
+ */
+export type RegisterChange = z.infer<typeof registerChangeSchema>;
+
+const changed = z
+  .partialRecord(
+    z.enum([...BUILDING_FIELD_NAMES, 'reference', 'footprint', 'area', 'groundLevelFrom']),
+    z.unknown(),
+  )
+  .nullable();
+
+/**
+ * The history of one building, the newest first. Before and after hold what changed; null before means
+ * that it came in, null after that it was taken out.
+ *
+ * Units: as the fields; of a footprint only its area is answered. Valid: at most 200 entries.
+ * Source: [own].
+ */
+export const buildingHistorySchema = z.array(
+  z.strictObject({
+    changeId: z.uuid(),
+    at: z.string(),
+    by: z.string().nullable(),
+    kind: z.enum(REGISTER_CHANGE_KINDS),
+    source: z.string().nullable(),
+    before: changed,
+    after: changed,
+    mayUndo: z.boolean(),
+  }),
+);
+
+/**
+ * The history of one building.
+ *
+ * Units: as buildingHistorySchema. Valid: parsed by it. Source: [own].
+ */
+export type BuildingHistory = z.infer<typeof buildingHistorySchema>;
