@@ -7,7 +7,8 @@ export function connectDatabase(url: string): Sequelize {
     dialect: 'postgres',
     logging: false,
     define: { underscored: true, timestamps: false },
-    dialectOptions: { options: '-c jit=off' },
+    // a register of a hundred thousand buildings is put in order in memory
+    dialectOptions: { options: '-c jit=off -c work_mem=16MB' },
     pool: { max: 12 },
   });
   initModels(database);

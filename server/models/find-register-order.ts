@@ -1,5 +1,5 @@
 import { QueryTypes, type Sequelize } from 'sequelize';
-import type { RegisterSort } from '../../shared/schemas/register.ts';
+import type { RegisterColumn, RegisterSort } from '../../shared/schemas/register.ts';
 import { registerColumn } from './register-columns.ts';
 import type { Condition } from './register-condition.ts';
 
@@ -12,15 +12,31 @@ export function orderSql({ column, descending }: RegisterSort): string {
   return `${name}${collation} ${direction} nulls last, reference collate natural_order, id`;
 }
 
+/** Columns of which nearly every value differs; an index keeps them in order. */
+const KEPT_IN_ORDER: ReadonlySet<RegisterColumn> = new Set(['reference', 'name', 'address']);
+
+/** The other way round by an index that runs forwards: whole values are turned, not what is alike. */
+function turnedIds(name: string, where: string): string {
+  return `select id from (
+      select id, ${name} is null as is_unknown,
+        dense_rank() over (order by ${name} collate natural_order) as rank,
+        row_number() over (order by ${name} collate natural_order, reference collate natural_order, id) as place
+      from buildings where ${where}
+    ) as placed order by is_unknown, rank desc, place`;
+}
+
 /**
- * All of it in order. Texts are compared by the rules of languages, which is slow: references come
- * ordered from their index, and of other texts each is compared once, however often it is there.
+ * All of it in order. Texts are compared by the rules of languages, which is slow: those that
+ * differ come ordered from their index, and of others each is compared once, however often it is there.
  */
 function orderedIds(sort: RegisterSort, where: string): string {
-  if (sort.column === 'reference') {
-    return `select id from buildings where ${where} order by ${orderSql(sort)}`;
-  }
   const { name, type } = registerColumn(sort.column);
+  if (KEPT_IN_ORDER.has(sort.column)) {
+    const isTurned = sort.descending && sort.column !== 'reference';
+    return isTurned
+      ? turnedIds(name, where)
+      : `select id from buildings where ${where} order by ${orderSql(sort)}`;
+  }
   const direction = `${sort.descending ? 'desc' : 'asc'} nulls last`;
   const places = `select id, ${name} as value,
     row_number() over (order by reference collate natural_order, id) as place

@@ -24,10 +24,18 @@ export const migration: Migration = {
         where removed_at is not null;
       create index buildings_order on buildings (scheme_id, reference collate natural_order, id)
         where removed_at is null;
+      create index buildings_by_name on buildings
+        (scheme_id, name collate natural_order, reference collate natural_order, id)
+        where removed_at is null;
+      create index buildings_by_address on buildings
+        (scheme_id, address collate natural_order, reference collate natural_order, id)
+        where removed_at is null;
     `);
   },
   down: async ({ sql }) => {
     await sql(`
+      drop index buildings_by_address;
+      drop index buildings_by_name;
       drop index buildings_order;
       drop index buildings_removed;
       drop index buildings_reference;
