@@ -5,7 +5,7 @@ import { AppError } from '../../server/errors.ts';
 import { openUpload } from '../../server/importers/open-upload.ts';
 import { HOSTILE_FILES } from './hostile/hostile-files.ts';
 
-const SLOWEST_SHOWN = 5;
+const SLOWEST_SHOWN = 3;
 
 type Timed = { readonly name: string; readonly seconds: number };
 

@@ -27,7 +27,8 @@ import { townOfBoxes } from './town-of-boxes.ts';
 
 const BUILDINGS = 100_000;
 const TOWN = 2000;
-const PAGES = 40;
+const RUNS = { first: 11, far: 5, turned: 21 } as const;
+const FAR = 90_000;
 
 const FILTERS: readonly (readonly [name: string, filter: RegisterFilter])[] = [
   ['words', { search: 'quay 12' }],
@@ -36,7 +37,7 @@ const FILTERS: readonly (readonly [name: string, filter: RegisterFilter])[] = [
   ['unknown', { unknown: ['groundLevel', 'foundation'] }],
   ['assumed', { assumed: true }],
   ['nothing assumed', { assumed: false }],
-  ['a box', { within: [3.01, 54.865, 3.03, 54.875] }],
+  ['a box', { within: [3.01, 54.865, 3.03, 54.885] }],
 ];
 
 type Bench = { readonly services: Pick<Services, 'database' | 'tiles'>; readonly scheme: Scheme };
@@ -45,38 +46,50 @@ function say(name: string, words: string): void {
   console.log(`register, ${name}: ${words}`);
 }
 
-/** Pages as people turn them: most near the beginning, some anywhere. */
-async function pages({ services, scheme }: Bench, filter: RegisterFilter, sort: RegisterSort) {
+function pageAt({ services, scheme }: Bench, filter: RegisterFilter, sort: RegisterSort) {
+  return (offset: number) => registerPage(services, scheme, { filter, sort, offset, limit: 100 });
+}
+
+/** The first page, a jump far down before anything is in order, and pages turned anywhere after it. */
+async function pageTimes(bench: Bench, filter: RegisterFilter, sort: RegisterSort) {
   const random = seededRandom(3);
-  return times(PAGES, (index) => {
-    const offset = index % 2 === 0 ? 100 * Math.floor(random() * 4) : Math.floor(random() * 99_000);
-    return registerPage(services, scheme, { filter, sort, offset, limit: 100 });
-  });
+  const anew = () => ({ ...bench, services: { ...bench.services, tiles: createTileCache() } });
+  const page = pageAt(anew(), filter, sort);
+  return {
+    first: await times(RUNS.first, () => page(0)),
+    far: await times(RUNS.far, () => pageAt(anew(), filter, sort)(FAR)),
+    turned: await times(RUNS.turned, () => page(Math.floor(random() * FAR))),
+  };
 }
 
 async function benchPages(bench: Bench): Promise<void> {
-  const all: number[] = [];
-  for (const column of REGISTER_COLUMNS) {
-    for (const descending of [false, true]) {
-      const taken = await pages(bench, {}, { column, descending });
-      all.push(...taken);
-      say(`by ${column}${descending ? ', descending' : ''}`, percentiles(taken));
-    }
+  const asked = [
+    ...REGISTER_COLUMNS.flatMap((column) =>
+      [false, true].map((descending) => {
+        return [`by ${column}${descending ? ', descending' : ''}`, {}, { column, descending }] as const; // prettier-ignore
+      }),
+    ),
+    ...FILTERS.map(([name, filter]) => [`filtered by ${name}`, filter, REGISTER_ORDER] as const),
+  ];
+  const all: Record<'first' | 'far' | 'turned', number[]> = { first: [], far: [], turned: [] };
+  for (const [name, filter, sort] of asked) {
+    const { first, far, turned } = await pageTimes(bench, filter, sort);
+    say(name, `first page ${percentiles(first)}; far jump ${percentiles(far)}; then ${percentiles(turned)}`); // prettier-ignore
+    all.first.push(...first);
+    all.far.push(...far);
+    all.turned.push(...turned);
   }
-  for (const [name, filter] of FILTERS) {
-    const taken = await pages(bench, filter, REGISTER_ORDER);
-    all.push(...taken);
-    say(`filtered by ${name}`, percentiles(taken));
-  }
-  say('all of these', percentiles(all));
+  say('all first pages', percentiles(all.first));
+  say('all far jumps', percentiles(all.far));
+  say('all pages turned then', percentiles(all.turned));
 }
 
 async function benchTiles(database: Sequelize, scheme: Scheme): Promise<void> {
   for (const z of [13, 14, 15, 16]) {
-    const [x, y] = [((3 + 0.01 + 180) / 360) * 2 ** z, northOf(54.865, z)];
+    const [x, y] = [((3.005 + 180) / 360) * 2 ** z, northOf(54.866, z)];
     const place = { z, x: Math.floor(x), y: Math.floor(y) };
     const found = await findBuildingsInBox(database, scheme.id, tileBounds(place));
-    const taken = await times(9, () => buildingTile(database, scheme.id, place));
+    const taken = await times(25, () => buildingTile(database, scheme.id, place));
     say(`tile at zoom ${z} of ${found.length} buildings`, percentiles(taken));
   }
 }
@@ -111,7 +124,7 @@ async function benchExports({ services, scheme }: Bench): Promise<void> {
 }
 
 async function bringIn(database: Sequelize, count: number): Promise<Scheme> {
-  const scheme = await Scheme.create({ name: 'Bench', crs: 32631 });
+  const scheme = await Scheme.create({ name: `Bench of ${count}`, crs: 32631 });
   const start = performance.now();
   const cause = { kind: 'import', by: null } as const;
   await database.transaction((transaction) =>

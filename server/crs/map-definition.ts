@@ -1,3 +1,5 @@
+import { withRightShift } from './turned-shifts.ts';
+
 /**
  * Published shifts to WGS 84 that stand in for grids of shifts, which are too large to carry. Good to
  * some metres, and only where a scheme lies on the map hangs on it: footprints stay in the scheme's grid.
@@ -18,7 +20,7 @@ const GRIDS = /\+nadgrids=(?!@null)(?:"([^"]*)"|(\S+))/;
 /** A definition that proj4 can use without files beside it; undefined where there is no stand-in. */
 export function mapDefinition(definition: string): string | undefined {
   const found = GRIDS.exec(definition);
-  if (found === null) return definition;
+  if (found === null) return withRightShift(definition);
   const shift = SHIFTS[found[1] ?? found[2] ?? ''];
   return shift === undefined ? undefined : definition.replace(GRIDS, `+towgs84=${shift}`);
 }

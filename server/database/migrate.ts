@@ -17,6 +17,7 @@ import { migration as imports } from './migrations/13-imports.ts';
 import { migration as ground } from './migrations/14-ground.ts';
 import { migration as peopleShutOut } from './migrations/15-people-shut-out.ts';
 import { migration as schemeNames } from './migrations/16-scheme-names.ts';
+import { migration as alignments } from './migrations/17-alignments.ts';
 
 /** In the order in which they are applied; a new one goes to the end. */
 const MIGRATIONS: Readonly<Record<string, Migration>> = {
@@ -36,6 +37,7 @@ const MIGRATIONS: Readonly<Record<string, Migration>> = {
   '14-ground': ground,
   '15-people-shut-out': peopleShutOut,
   '16-scheme-names': schemeNames,
+  '17-alignments': alignments,
 };
 
 /** Opens the migrations of a database as its owner; `serverUrl` names the role that serves. */

@@ -1,7 +1,7 @@
 import { IMPORT_LIMITS } from '../../shared/schemas/imports.ts';
 import { AppError } from '../errors.ts';
 import { noProperties } from './flat-properties.ts';
-import { looksLikeWkt, readWkt, sridOf } from './geometry/read-wkt.ts';
+import { looksLikeGeometry, readGeometryText, sridOfText } from './geometry/geometry-text.ts';
 import { RowFault } from './geometry/row-fault.ts';
 import type { FileCrs, Scalar, SourceRow } from './source.ts';
 
@@ -10,7 +10,7 @@ export type TableRecord = { readonly row: number; readonly values: readonly Scal
 
 export type Heading = {
   readonly columns: readonly string[];
-  /** Which column holds footprints in well-known text. */
+  /** Which column holds footprints in well-known text or binary. */
   readonly wkt: number | undefined;
   readonly crs: FileCrs | null;
 };
@@ -40,11 +40,11 @@ function columnNames(values: readonly Scalar[]): string[] {
   return names;
 }
 
-/** The column in which most values are well-known text, by what it holds and not by its name. */
+/** The column in which most values are geometries, by what it holds and not by its name. */
 function wktColumn(columns: number, sample: readonly TableRecord[]): number | undefined {
   const fits = Array.from({ length: columns }, (_, index) => {
     const filled = sample.map(({ values }) => values[index]).filter((value) => !isBlank(value));
-    const texts = filled.filter((value) => typeof value === 'string' && looksLikeWkt(value));
+    const texts = filled.filter((value) => typeof value === 'string' && looksLikeGeometry(value));
     return texts.length * 2 > filled.length ? texts.length : 0;
   });
   const most = Math.max(...fits);
@@ -54,7 +54,7 @@ function wktColumn(columns: number, sample: readonly TableRecord[]): number | un
 function crsOf(wkt: number | undefined, sample: readonly TableRecord[]): FileCrs | null {
   if (wkt === undefined) return null;
   const texts = sample.map(({ values }) => values[wkt]).filter((one) => typeof one === 'string');
-  const code = texts.map(sridOf).find((one) => one !== undefined && one > 0);
+  const code = texts.map(sridOfText).find((one) => one !== undefined && one > 0);
   return code === undefined ? null : { code, said: `SRID=${code}` };
 }
 
@@ -63,7 +63,7 @@ export function headingOf(names: readonly Scalar[], sample: readonly TableRecord
   const width = names.findLastIndex((value) => !isBlank(value)) + 1;
   if (width > IMPORT_LIMITS.columns) throw tooWide(width);
   if (width === 0) throw new AppError('unreadable', 'The table has no row with names of columns.');
-  if (names.some((value) => typeof value === 'string' && looksLikeWkt(value))) {
+  if (names.some((value) => typeof value === 'string' && looksLikeGeometry(value))) {
     throw new AppError(
       'unreadable',
       'The first row holds values. It has to hold the names of the columns.',
@@ -82,14 +82,14 @@ export function headingOf(names: readonly Scalar[], sample: readonly TableRecord
 function geometryIn(value: Scalar | undefined): Pick<SourceRow, 'geometry' | 'fault'> {
   if (isBlank(value)) return { geometry: null, fault: null };
   try {
-    return { geometry: readWkt(String(value)), fault: null };
+    return { geometry: readGeometryText(String(value)), fault: null };
   } catch (error) {
     if (error instanceof RowFault) return { geometry: null, fault: error.message };
     throw error;
   }
 }
 
-/** A row of a table: its values by column and the footprint in its well-known text. */
+/** A row of a table: its values by column and the footprint in its geometry. */
 export function tableRow({ columns, wkt }: Heading, { row, values }: TableRecord): SourceRow {
   const properties = noProperties();
   for (const [index, name] of columns.entries()) {

@@ -3,7 +3,8 @@ import { pointInPolygon } from '../../shared/geometry/point-in-polygon.ts';
 import { IMPORT_LIMITS } from '../../shared/schemas/imports.ts';
 import type { FootprintRings } from '../models/building-footprint.ts';
 import { cleanRings } from './clean-rings.ts';
-import { crossingOfFootprint } from './crossing-of-footprint.ts';
+import { crossingOfEdges } from './crossing-of-footprint.ts';
+import { lappedRings } from './lapped-rings.ts';
 import { mendFootprint } from './mend-footprint.ts';
 import { REMARKS } from './remarks.ts';
 
@@ -50,18 +51,10 @@ function reachesInto(ring: Ring, part: readonly Ring[]): boolean {
   return ring.some((corner) => pointInPolygon(corner, part));
 }
 
-function liesIn(ring: Ring, part: readonly Ring[]): boolean {
-  return ring.every((corner) => pointInPolygon(corner, part));
-}
-
-/** Why the rings of a footprint do not belong together; undefined where they do. */
-function ringsFault(footprint: FootprintRings): string | undefined {
-  for (const [at, [outer = [], ...holes]] of footprint.entries()) {
-    if (!holes.every((hole) => reachesInto(hole, [outer]))) return REMARKS.holeOutside;
-    const isOver = footprint.some((part, other) => other !== at && liesIn(outer, part));
-    if (isOver) return REMARKS.partsOverlap;
-  }
-  return undefined;
+function hasHoleOutside(footprint: FootprintRings): boolean {
+  return footprint.some(([outer = [], ...holes]) => {
+    return !holes.every((hole) => reachesInto(hole, [outer]));
+  });
 }
 
 /** Looks at a footprint in the scheme's grid: whether it can be a building's, and what was done to it. */
@@ -69,15 +62,18 @@ export function checkFootprint(placed: FootprintRings, mend: boolean): CheckedFo
   if (placed.flat(2).length > IMPORT_LIMITS.corners) return refused(REMARKS.manyCorners);
   const footprint = cleanRings(placed);
   if (footprint === undefined) return refused(REMARKS.fewCorners);
-  const crossing = crossingOfFootprint(footprint);
-  if (crossing === undefined) {
-    const fault = ringsFault(footprint);
-    return fault === undefined ? sized(footprint, [], false) : refused(fault, footprint);
+  const edges = crossingOfEdges(footprint);
+  if (edges === undefined && hasHoleOutside(footprint)) {
+    return refused(REMARKS.holeOutside, footprint);
   }
+  const crossing = edges ?? lappedRings(footprint);
+  if (crossing === undefined) return sized(footprint, [], false);
+  const isOneRing = footprint.flat().length === 1;
   const mended = mendFootprint(footprint);
   if (!mend || mended === undefined) {
     const canBeMended = mended !== undefined;
-    return refused(REMARKS.crossing(crossing, canBeMended), footprint, canBeMended);
+    const remark = REMARKS.crossing(crossing, { isOneRing, canBeMended });
+    return refused(remark, footprint, canBeMended);
   }
-  return sized(mended, [REMARKS.mended(crossing)], true);
+  return sized(mended, [REMARKS.mended(crossing, isOneRing)], true);
 }

@@ -62,9 +62,11 @@ function placeFault(
   if (!isOutside && distance === 0) return undefined;
   const [x, y] = geometry[0]?.[0]?.[0] ?? [NaN, NaN];
   const exchanged = placement.toGrid([y, x]);
-  const isRight = placement.isInArea(placement.toLonLat(exchanged)) && crowd.distance(exchanged) === 0; // prettier-ignore
-  if (isRight) return REMARKS.exchanged;
+  const isRight = placement.isInArea(placement.toLonLat(exchanged));
+  if (isRight && crowd.distance(exchanged) === 0) return REMARKS.exchanged;
   const { name } = placement.isInArea(lonLat) ? placement.file : placement.scheme;
+  // the rest lies outside with it
+  if (isRight && distance === 0) return REMARKS.allExchanged(name);
   return isOutside ? REMARKS.outside(name) : REMARKS.far(distance);
 }
 

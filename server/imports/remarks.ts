@@ -12,6 +12,10 @@ function quoted(text: string): string {
   return `“${text.length > 40 ? `${text.slice(0, 40)}…` : text}”`;
 }
 
+function near([east, north]: readonly [number, number]): string {
+  return `near E ${metres(east)}, N ${metres(north)}`;
+}
+
 const DAY = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' });
 
 type Cell = { readonly field: BuildingField | 'reference'; readonly column: string };
@@ -44,14 +48,22 @@ export const REMARKS = {
     `The footprint lies outside the area of ${system}. Check the system of the file, or this row’s coordinates.`,
   exchanged:
     'Easting and northing look exchanged in this row: the other way round it lies with the rest. Exchange them.',
+  allExchanged: (system: string) =>
+    `Easting and northing look exchanged: only the other way round the footprint lies in the area of ${system}. Exchange the axes of the file.`,
   far: (kilometres: number) =>
     `The footprint lies ${Math.round(kilometres)} km from the rest of the file. Check its coordinates.`,
-  crossing: ([east, north]: readonly [number, number], canBeMended: boolean) =>
-    `The ring crosses itself near E ${metres(east)}, N ${metres(north)}. ${canBeMended ? 'Have it mended, or draw it anew.' : 'Draw it anew.'}`,
-  mended: ([east, north]: readonly [number, number]) =>
-    `The ring crossed itself near E ${metres(east)}, N ${metres(north)} and was mended. Compare it with the building.`,
+  crossing: (
+    place: readonly [number, number],
+    { isOneRing, canBeMended }: { readonly isOneRing: boolean; readonly canBeMended: boolean },
+  ) => {
+    const what = isOneRing ? 'The ring crosses itself' : 'Its rings cross or lie over each other';
+    return `${what} ${near(place)}. ${canBeMended ? 'Have it mended, or draw it anew.' : 'Draw it anew.'}`;
+  },
+  mended: (place: readonly [number, number], isOneRing: boolean) => {
+    const [what, were] = isOneRing ? ['The ring crossed itself', 'was'] : ['Its rings crossed or lay over each other', 'were']; // prettier-ignore
+    return `${what} ${near(place)} and ${were} mended. Compare it with the building.`;
+  },
   holeOutside: 'A hole lies outside the ring that it should be cut from. Draw it anew.',
-  partsOverlap: 'Two parts of the footprint lie over each other. Draw it anew.',
   tiny: (area: number) =>
     `The footprint has an area of ${metres(area)} m², which is no building. Leave it out, or check the file’s units.`,
   small: (area: number) =>

@@ -1,4 +1,5 @@
 import type { Sequelize } from 'sequelize';
+import { initAlignment } from './alignment.ts';
 import { initAuditEntry } from './audit-entry.ts';
 import { initBackgroundFeature } from './background-feature.ts';
 import { initBuilding } from './building.ts';
@@ -26,6 +27,7 @@ export function initModels(sequelize: Sequelize): void {
   initBuildingFootprint(sequelize);
   initRegisterChange(sequelize);
   initRegisterView(sequelize);
+  initAlignment(sequelize);
   initBackgroundFeature(sequelize);
   initRegisterImport(sequelize);
   initAuditEntry(sequelize);

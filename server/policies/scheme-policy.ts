@@ -10,6 +10,9 @@ export const schemePolicy = {
   readRegister: (actor: SchemeActor) =>
     actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness'),
   updateRegister: (actor: SchemeActor) => holds(actor, 'assessor'),
+  readAlignments: (actor: SchemeActor) =>
+    actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness'),
+  updateAlignments: (actor: SchemeActor) => holds(actor, 'designer'),
   updateScheme: (actor: SchemeActor) => actor.isAdministrator,
   archiveScheme: (actor: SchemeActor) => actor.isAdministrator,
   readMembers: (actor: SchemeActor) => actor.isAdministrator,
@@ -26,6 +29,7 @@ export type SchemeAction = keyof typeof schemePolicy;
 /** What changes what a scheme holds: not in an archived one. */
 const CHANGES: ReadonlySet<SchemeAction> = new Set([
   'updateRegister',
+  'updateAlignments',
   'updateScheme',
   'manageMembers',
   'updateRules',
@@ -47,6 +51,8 @@ export function schemeAbilities(
     readScheme: can('readScheme'),
     readRegister: can('readRegister'),
     updateRegister: can('updateRegister'),
+    readAlignments: can('readAlignments'),
+    updateAlignments: can('updateAlignments'),
     updateScheme: can('updateScheme'),
     archiveScheme: can('archiveScheme'),
     readMembers: can('readMembers'),

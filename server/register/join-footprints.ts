@@ -1,9 +1,9 @@
 import { union } from 'polyclip-ts';
+import { closedGaps, MOST_GAP } from '../../shared/building/closed-gaps.ts';
 import { boundingBox, boxDistance } from '../../shared/geometry/bounding-box.ts';
 import { AppError } from '../errors.ts';
 import type { FootprintRings } from '../models/building-footprint.ts';
 import { clipped } from './clipped.ts';
-import { closedGaps, MOST_GAP } from './close-gaps.ts';
 
 /** One footprint of two that share a stretch of a wall or some area; undefined where they do not. */
 function joined(a: FootprintRings, b: FootprintRings): FootprintRings | undefined {

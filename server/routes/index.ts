@@ -1,3 +1,4 @@
+import { alignmentRoutes } from './alignments.ts';
 import { auditRoutes } from './audit.ts';
 import { backgroundRoutes } from './background.ts';
 import { buildingRoutes } from './buildings.ts';
@@ -35,6 +36,7 @@ export const ROUTES: readonly Route[] = [
   ...registerChangeRoutes,
   ...registerViewRoutes,
   ...groundRoutes,
+  ...alignmentRoutes,
   ...importRoutes,
   ...tileRoutes,
   ...waitingRoutes,

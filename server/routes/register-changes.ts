@@ -6,6 +6,7 @@ import {
   editManySchema,
   joinBuildingsSchema,
   removeBuildingSchema,
+  removeManySchema,
   splitBuildingSchema,
 } from '../../shared/schemas/register-changes.ts';
 import { drawBuilding } from '../commands/draw-building.ts';
@@ -13,6 +14,7 @@ import { editBuilding } from '../commands/edit-building.ts';
 import { editBuildings } from '../commands/edit-buildings.ts';
 import { joinBuildings } from '../commands/join-buildings.ts';
 import { removeBuilding } from '../commands/remove-building.ts';
+import { removeBuildings } from '../commands/remove-buildings.ts';
 import { splitBuilding } from '../commands/split-building.ts';
 import { undoChange } from '../commands/undo-change.ts';
 import { findBuilding, findBuildingEverKept } from '../models/find-building.ts';
@@ -37,6 +39,13 @@ export const registerChangeRoutes = [
     access: { scheme: 'updateRegister' },
     body: editManySchema,
     handle: ({ services, actor, scheme, body }) => editBuildings(services, actor, scheme, body),
+  }),
+  defineRoute({
+    method: 'post',
+    path: '/api/schemes/:schemeId/buildings/removals',
+    access: { scheme: 'updateRegister' },
+    body: removeManySchema,
+    handle: ({ services, actor, scheme, body }) => removeBuildings(services, actor, scheme, body),
   }),
   defineRoute({
     method: 'post',

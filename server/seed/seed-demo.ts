@@ -2,11 +2,13 @@ import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
 import { hashPassword } from '../authentication/password-hash.ts';
 import { defaultRules } from '../commands/default-rules.ts';
 import { changeRegister } from '../commands/change-register.ts';
+import { insertAlignment } from '../commands/insert-alignment.ts';
 import { recordChange } from '../commands/record-change.ts';
 import { Membership } from '../models/membership.ts';
 import { Person } from '../models/person.ts';
 import { SchemeRules } from '../models/scheme-rules.ts';
 import { Scheme } from '../models/scheme.ts';
+import { DEMO_ALIGNMENTS } from './demo-alignments.ts';
 import {
   DEMO_ADMINISTRATOR,
   DEMO_MEMBERS,
@@ -85,6 +87,9 @@ async function fill(townFolder: string, transaction: Transaction): Promise<void>
   const cause = { kind: 'import', by: null, source: 'The demo town' } as const;
   const created = readTown(townFolder);
   await changeRegister(scheme.sequelize, scheme, cause, { created }, transaction);
+  for (const option of DEMO_ALIGNMENTS) {
+    await insertAlignment(scheme, null, option, 'create alignment', transaction);
+  }
 }
 
 /** Fills an empty database with the demo: people, their town and its scheme, all or nothing. */

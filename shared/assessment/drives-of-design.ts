@@ -8,39 +8,11 @@ import { interpolate } from '../numerics/interpolate.ts';
 import { intervalIndex } from '../numerics/interval-index.ts';
 import { MethodError } from '../method-error.ts';
 import type { AlignmentDesign } from '../schemas/alignments.ts';
+import { axisLevelAt } from './axis-level-at.ts';
+import { boresOfDesign, type Bore } from './bores-of-design.ts';
 
 /** Stations nearer to each other are one, or a part of the axis would have no length. */
 const SAME_STATION = 0.001;
-
-type Bore = {
-  readonly name: string;
-  /** To the left of the line. */
-  readonly offset: number;
-  readonly laterFactor: number;
-};
-
-function boresOf({ bores }: AlignmentDesign): Bore[] {
-  if (bores.kind === 'single') return [{ name: 'Drive', offset: 0, laterFactor: 1 }];
-  const sides = [
-    { side: 'left', name: 'Left drive', offset: bores.spacing / 2 },
-    { side: 'right', name: 'Right drive', offset: -bores.spacing / 2 },
-  ] as const;
-  return sides
-    .map(({ side, name, offset }) => {
-      const isLater = side === bores.later;
-      return { name, offset, isLater, laterFactor: isLater ? bores.laterFactor : 1 };
-    })
-    .sort((a, b) => Number(a.isLater) - Number(b.isLater));
-}
-
-function levelAt(levels: AlignmentDesign['levels'], chainage: number): number {
-  const after = levels.findIndex((one) => one.chainage > chainage);
-  const [before, next] = [levels.at(after === -1 ? -1 : Math.max(0, after - 1)), levels[after]];
-  if (before === undefined) return 0;
-  if (next === undefined || before.chainage >= chainage) return before.level;
-  const share = (chainage - before.chainage) / (next.chainage - before.chainage);
-  return interpolate(before.level, next.level, share);
-}
 
 /** From chainage along the drawn line to chainage along a bore beside it, part by part in proportion. */
 function alongBore(line: Float64Array, bore: Float64Array): (chainage: number) => number {
@@ -100,7 +72,7 @@ function driveOf(design: AlignmentDesign, bore: Bore): Drive {
   const along = alongBore(line, own);
   const axis = stationsOf(line, design.levels).map((station): SpacePoint => {
     const [e, n] = pointAtChainage(moved, own, along(station));
-    return [e, n, levelAt(design.levels, station)];
+    return [e, n, axisLevelAt(design.levels, station)];
   });
   const length = at(own, own.length - 1);
   const intervals = design.intervals
@@ -132,5 +104,5 @@ function driveOf(design: AlignmentDesign, bore: Bore): Drive {
  * Source: [own].
  */
 export function drivesOfDesign(design: AlignmentDesign): Drive[] {
-  return namingVertices(() => boresOf(design).map((bore) => driveOf(design, bore)));
+  return namingVertices(() => boresOfDesign(design).map((bore) => driveOf(design, bore)));
 }

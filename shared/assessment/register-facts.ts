@@ -1,8 +1,8 @@
 import { completeAttributes, type CompleteAttributes } from '../building/assumed-attributes.ts';
-import { stiffnessOfConstruction } from '../building/stiffness-of-construction.ts';
+import { footprintMiddle } from '../building/footprint-middle.ts';
+import { knownOfBuilding, type RegisteredAttributes } from '../building/known-of-building.ts';
 import type { Wall } from '../building/wall.ts';
 import { wallsOfFootprint } from '../building/walls-of-footprint.ts';
-import { boundingBox } from '../geometry/bounding-box.ts';
 import type { PlanPoint } from '../geometry/point.ts';
 import { groundLevelBeside } from '../ground/ground-level-beside.ts';
 import type { GroundModel } from '../ground/ground-model.ts';
@@ -14,16 +14,9 @@ import type { HoldFacts } from './holds.ts';
  *
  * Units: m, levels above datum. Valid: parts of outer ring and holes, rings closed or not. Source: [own].
  */
-export type RegisterFacts = {
+export type RegisterFacts = RegisteredAttributes & {
   readonly id: string;
   readonly parts: readonly (readonly (readonly PlanPoint[])[])[];
-  readonly storeys: number | null;
-  readonly eavesHeight: number | null;
-  readonly groundLevel: number | null;
-  readonly foundingLevel: number | null;
-  readonly eOverG: number | null;
-  readonly poisson: number | null;
-  readonly construction: string | null;
   readonly foundation: string | null;
   readonly listedGrade: string | null;
   readonly condition: string | null;
@@ -65,47 +58,34 @@ export function wallLetter(index: number): string {
   return rest < 0 ? letter : wallLetter(rest) + letter;
 }
 
-function middleOf(parts: RegisterFacts['parts']): PlanPoint {
-  const { west, south, east, north } = boundingBox(parts.flat(2));
-  return [(west + east) / 2, (south + north) / 2];
-}
+const UNKNOWN = /^(unknown|not known|n\/?a|-|\?)$/i;
 
 /** Undefined where nobody knows: what is unknown holds nothing. */
-function says(words: string | null, pattern: RegExp): boolean | undefined {
-  return words === null ? undefined : pattern.test(words);
+function says(words: string | null, yes: RegExp, no: RegExp): boolean | undefined {
+  const said = words?.trim() ?? '';
+  if (said === '' || UNKNOWN.test(said)) return undefined;
+  return yes.test(said) && !no.test(said);
 }
 
+/** What holds a building, as the words of its register have it; whatever grade is listed. */
 function holdFacts(facts: RegisterFacts, foundingDepth: number | undefined): HoldFacts {
-  const known = {
-    foundingDepth,
-    piled: says(facts.foundation, /\bpile/i),
-    listed:
-      facts.listedGrade === null ? undefined : !/^(not listed|none|no)$/i.test(facts.listedGrade),
-    poorCondition: says(facts.condition, /\b(very )?(poor|bad)\b/i),
+  const piled = says(facts.foundation, /\bpile/i, /^(not |no |without )/i);
+  const listed = says(facts.listedGrade, /./, /^(not listed|unlisted|none|no)$/i);
+  const poorCondition = says(facts.condition, /\b(poor|bad)\b/i, /^not /i);
+  return {
+    ...(foundingDepth !== undefined && { foundingDepth }),
+    ...(piled !== undefined && { piled }),
+    ...(listed !== undefined && { listed }),
+    ...(poorCondition !== undefined && { poorCondition }),
   };
-  return Object.fromEntries(Object.entries(known).filter(([, value]) => value !== undefined));
-}
-
-function attributesOf(facts: RegisterFacts, foundingDepth: number | undefined): CompleteAttributes {
-  const stiffness = stiffnessOfConstruction(facts.construction);
-  const known = {
-    storeys: facts.storeys ?? undefined,
-    eavesHeight: facts.eavesHeight ?? undefined,
-    foundingDepth,
-    eOverG: facts.eOverG ?? stiffness?.eOverG,
-    poisson: facts.poisson ?? stiffness?.poisson,
-  };
-  const given = Object.fromEntries(
-    Object.entries(known).filter(([, value]) => value !== undefined),
-  );
-  return completeAttributes(given);
 }
 
 /**
  * Makes a building of the register ready for the method: what is unknown is assumed and named, the ground
  * level is that beside the nearest drive where the building has none, walls are lettered part by part.
  *
- * Units: m. Valid: any facts; `defaultGroundLevel` stands where no drive tells one either.
+ * Units: m. Valid: any facts; `defaultGroundLevel` stands where no drive tells one either. A founding level
+ * at the ground says nothing; one above it stays, for the method to refuse.
  * Source: [own]; assumed values are [common].
  */
 export function preparedBuilding(
@@ -114,10 +94,17 @@ export function preparedBuilding(
   defaultGroundLevel: number,
 ): PreparedBuilding {
   const groundLevel =
-    facts.groundLevel ?? groundLevelBeside(model, middleOf(facts.parts)) ?? defaultGroundLevel;
-  const depth = facts.foundingLevel === null ? undefined : groundLevel - facts.foundingLevel;
-  const attributes = attributesOf(facts, depth);
-  const foundingLevel = facts.foundingLevel ?? groundLevel - attributes.foundingDepth;
+    facts.groundLevel ??
+    groundLevelBeside(model, footprintMiddle(facts.parts)) ??
+    defaultGroundLevel;
+  const known = knownOfBuilding({ ...facts, groundLevel });
+  const attributes = completeAttributes(known);
+  const isFoundingGiven =
+    facts.foundingLevel !== null &&
+    (known.foundingDepth !== undefined || facts.foundingLevel > groundLevel);
+  const foundingLevel = isFoundingGiven
+    ? facts.foundingLevel
+    : groundLevel - attributes.foundingDepth;
   const isGroundAssumed = facts.groundLevel === null;
   const walls = facts.parts.flatMap((rings) => wallsOfFootprint(rings));
   return {
@@ -136,7 +123,7 @@ export function preparedBuilding(
       eOverG: certain(attributes.eOverG),
       poisson: attributes.poisson,
     })),
-    holds: holdFacts(facts, depth),
+    holds: holdFacts(facts, known.foundingDepth),
     assumed: [...attributes.assumed, ...(isGroundAssumed ? (['groundLevel'] as const) : [])],
   };
 }

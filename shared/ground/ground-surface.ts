@@ -1,9 +1,10 @@
+import { nearestOnSegment } from '../geometry/nearest-on-segment.ts';
 import type { PlanPoint, Segment } from '../geometry/point.ts';
 import { MethodError } from '../method-error.ts';
 import { at } from '../numerics/at.ts';
 import { atPosition } from '../numerics/range.ts';
 import type { GroundModel } from './ground-model.ts';
-import { FIELD_SIZE, sumPieces } from './kernel.ts';
+import { FIELD_SIZE, PACK_STRIDE, sumPieces } from './kernel.ts';
 import { levelField, type GroundState, type LevelField } from './level-field.ts';
 import { placeOfFootprint } from './place.ts';
 import { siteOf } from './site.ts';
@@ -16,9 +17,9 @@ import { ruleAt } from './trough-width-rule.ts';
  *
  * Units: m. Valid: a constant. Source: [own].
  */
-export const SURFACE_SQUARE = 60;
+export const SURFACE_SQUARE = 30;
 
-/** Coordinates are under 1e8 m, so that columns and rows of squares have 22 digits of two. */
+/** Coordinates are under 1e8 m, so that a row of squares has at most 22 binary digits. */
 const ROWS = 1 << 22;
 
 /**
@@ -33,6 +34,32 @@ export type GroundSurface = {
   readonly widthAt: (point: PlanPoint) => number | undefined;
   readonly parts: readonly { readonly plan: Segment; readonly width: number }[];
 };
+
+/** In trough widths: farther off in plan a part moves the ground by under 1e-9 of what it does at most. */
+const REACH = 6.5;
+
+/** The parts of a pack that reach a square; gradients have many that do not. */
+function partsInReach(
+  { pack, count }: LevelField['packs'][number],
+  middle: PlanPoint,
+): LevelField['packs'][number] {
+  const kept = new Float64Array(count * PACK_STRIDE);
+  let reached = 0;
+  for (let o = 0; o < count * PACK_STRIDE; o += PACK_STRIDE) {
+    const width = 1 / at(pack, o + 4);
+    const length = at(pack, o + 5) * width;
+    const start: PlanPoint = [at(pack, o), at(pack, o + 1)];
+    const end: PlanPoint = [
+      start[0] + length * at(pack, o + 2),
+      start[1] + length * at(pack, o + 3),
+    ];
+    const most = REACH * width + SURFACE_SQUARE * Math.SQRT1_2;
+    if (nearestOnSegment(middle, { start, end }).distance > most) continue;
+    kept.set(pack.subarray(o, o + PACK_STRIDE), reached * PACK_STRIDE);
+    reached += 1;
+  }
+  return { pack: kept, count: reached };
+}
 
 function fieldOfSquare(
   model: GroundModel,
@@ -51,7 +78,9 @@ function fieldOfSquare(
   ];
   try {
     const site = siteOf(model, placeOfFootprint([ring], groundLevel, groundLevel));
-    return levelField(model, site, state);
+    const field = levelField(model, site, state);
+    const middle: PlanPoint = [(west + east) / 2, (south + north) / 2];
+    return { ...field, packs: field.packs.map((pack) => partsInReach(pack, middle)) };
   } catch (error) {
     if (!(error instanceof MethodError)) throw error;
     return undefined;

@@ -16,6 +16,8 @@ export type SettlementContour = {
   readonly isClosed: boolean;
 };
 
+type Ring = readonly (readonly number[])[];
+
 /** A corner of a ring lies half-way along an edge of the grid: x or y is whole, and names the farther node. */
 function edgeOf(grid: SettlementGrid, [x = 0, y = 0]: readonly number[]) {
   const isAcross = Number.isInteger(x);
@@ -25,6 +27,18 @@ function edgeOf(grid: SettlementGrid, [x = 0, y = 0]: readonly number[]) {
     point: nodeAt(grid, i, j),
     settlement: grid.values[j * grid.columns + i] ?? 0,
   }));
+}
+
+/** Ground that passes its level by less has no line: on a grid it would be a string of beads. */
+const LEAST_RISE = 0.015;
+
+/** Whether the nodes beside a ring pass its level by enough, above it inside a ring and below it inside a hole. */
+function isWorthALine(grid: SettlementGrid, level: number, ring: Ring, isHole: boolean): boolean {
+  return ring.some((corner) =>
+    edgeOf(grid, corner).some(({ settlement }) =>
+      isHole ? settlement <= (1 - LEAST_RISE) * level : settlement >= (1 + LEAST_RISE) * level,
+    ),
+  );
 }
 
 function vertexOf(
@@ -69,11 +83,12 @@ function stretchesOf(
   return stretches.filter(({ length }) => length > 1);
 }
 
-function contourOf(level: number, stretch: readonly PointOnLevel[]): SettlementContour {
+/** None where a closed line is so thin that nothing of it is left. */
+function contourOf(level: number, stretch: readonly PointOnLevel[]): SettlementContour[] {
   const line = thinnedLine(stretch);
   const [first, last] = [line[0], line.at(-1)];
-  const isClosed = line.length > 3 && first?.[0] === last?.[0] && first?.[1] === last?.[1];
-  return { level, line, isClosed };
+  const isClosed = first?.[0] === last?.[0] && first?.[1] === last?.[1];
+  return isClosed && line.length < 4 ? [] : [{ level, line, isClosed }];
 }
 
 /**
@@ -81,23 +96,27 @@ function contourOf(level: number, stretch: readonly PointOnLevel[]): SettlementC
  * until each segment keeps to it, and thinned. They close, except where the method refuses, as where a
  * drive comes out of the ground.
  *
- * Units: m. Valid: levels > 0; levels that are not reached have no line. Source: [own]; marching squares
+ * Units: m. Valid: levels > 0; levels that are not reached, or passed by less than 1.5 %, have no line.
+ * Source: [own]; marching squares
  * by d3-contour.
  */
 export function settlementContours(
   surface: GroundSurface,
   levels: readonly number[],
 ): SettlementContour[] {
-  const grid = settlementGrid(surface);
+  const grid = settlementGrid(surface, Math.min(...levels));
   if (grid === undefined) return [];
   const generator = contours().size([grid.columns, grid.rows]).smooth(false);
-  return levels.flatMap((level) =>
-    generator
+  return levels.flatMap((level) => {
+    const rings = generator
       .contour(grid.values, level)
-      .coordinates.flat()
-      .flatMap((ring) => {
-        const vertices = ring.map((corner) => vertexOf(surface, grid, level, corner));
-        return stretchesOf(surface, level, vertices).map((stretch) => contourOf(level, stretch));
-      }),
-  );
+      .coordinates.flatMap((polygon) =>
+        polygon.filter((ring, k) => isWorthALine(grid, level, ring, k > 0)),
+      );
+    return rings.flatMap((ring) => {
+      const vertices = ring.map((corner) => vertexOf(surface, grid, level, corner));
+      const stretches = stretchesOf(surface, level, vertices);
+      return stretches.flatMap((stretch) => contourOf(level, stretch));
+    });
+  });
 }

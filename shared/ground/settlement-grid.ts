@@ -2,6 +2,8 @@ import { boundingBox, type Box } from '../geometry/bounding-box.ts';
 import { nearestOnSegment } from '../geometry/nearest-on-segment.ts';
 import type { PlanPoint } from '../geometry/point.ts';
 import { at } from '../numerics/at.ts';
+import { exponential } from '../numerics/exponential.ts';
+import { interpolate } from '../numerics/interpolate.ts';
 import { SURFACE_SQUARE, type GroundSurface } from './ground-surface.ts';
 import { FIELD } from './kernel.ts';
 
@@ -18,8 +20,10 @@ export type SettlementGrid = {
   readonly values: number[];
 };
 
-/** In trough widths from a drive; beyond, settlement is under 4e-6 of the largest. */
-const REACH = 5;
+/** In trough widths from a drive: how far to look at least and at most. */
+const REACH = { least: 2, most: 5, step: 0.25 } as const;
+/** How many times what settles above one drive may settle between several. */
+const DRIVES_TOGETHER = 4;
 const NODES_PER_WIDTH = 6;
 const MOST_NODES = 3_000_000;
 /** Where a drive comes up steeply its trough is all but a line, and no grid needs to show that. */
@@ -27,19 +31,40 @@ const LARGEST_SPREAD = 3;
 
 type Part = GroundSurface['parts'][number];
 
-function boxOf(part: Part): Box {
+/** In trough widths: beyond, settlement is under some level, as it falls off by φ across a drive. */
+function reachOf(surface: GroundSurface, parts: readonly Part[], level: number): number {
+  let largest = 0;
+  for (const { plan } of parts) {
+    const middle: PlanPoint = [
+      interpolate(plan.start[0], plan.end[0], 0.5),
+      interpolate(plan.start[1], plan.end[1], 0.5),
+    ];
+    const field = surface.at(middle);
+    if (field !== undefined) largest = Math.max(largest, at(field, FIELD.settlement));
+  }
+  let reach: number = REACH.least;
+  while (
+    reach < REACH.most &&
+    DRIVES_TOGETHER * largest * exponential(-(reach * reach) / 2) > level
+  ) {
+    reach += REACH.step;
+  }
+  return reach;
+}
+
+function boxOf(part: Part, widths: number): Box {
   const { west, south, east, north } = boundingBox([part.plan.start, part.plan.end]);
-  const reach = REACH * part.width;
+  const reach = widths * part.width;
   return { west: west - reach, south: south - reach, east: east + reach, north: north + reach };
 }
 
 /** The squares of the surface that a drive may reach, each by the column and row of its corner. */
-function squaresNear(parts: readonly Part[]): [column: number, row: number][] {
+function squaresNear(parts: readonly Part[], reach: number): [column: number, row: number][] {
   const found = new Map<string, [number, number]>();
   const square = (coordinate: number) => Math.floor(coordinate / SURFACE_SQUARE);
   for (const part of parts) {
-    const { west, south, east, north } = boxOf(part);
-    const most = REACH * part.width + SURFACE_SQUARE * Math.SQRT1_2;
+    const { west, south, east, north } = boxOf(part, reach);
+    const most = reach * part.width + SURFACE_SQUARE * Math.SQRT1_2;
     for (let column = square(west); column <= square(east); column++) {
       for (let row = square(south); row <= square(north); row++) {
         const middle: PlanPoint = [(column + 0.5) * SURFACE_SQUARE, (row + 0.5) * SURFACE_SQUARE];
@@ -72,16 +97,18 @@ export function nodeAt(
 }
 
 /**
- * Settlement on a grid as fine as a sixth of the trough width and of at most 3 million nodes; beyond five
- * trough widths from every drive it is taken as zero.
+ * Settlement on a grid as fine as a sixth of the trough width and of at most 3 million nodes; so far
+ * from every drive that it is under the level asked about, it is taken as zero.
  *
  * Units: m. Valid: undefined where there is no drive with a trough. Source: [own].
  */
-export function settlementGrid(surface: GroundSurface): SettlementGrid | undefined {
+export function settlementGrid(surface: GroundSurface, level: number): SettlementGrid | undefined {
   const parts = surface.parts.filter(({ width }) => width > 0);
   if (parts.length === 0) return undefined;
+  const reach = reachOf(surface, parts, level);
+  const boxes = parts.map((part) => boxOf(part, reach));
   const box = boundingBox(
-    parts.map(boxOf).flatMap(({ west, south, east, north }): PlanPoint[] => [
+    boxes.flatMap(({ west, south, east, north }): PlanPoint[] => [
       [west, south],
       [east, north],
     ]),
@@ -96,7 +123,7 @@ export function settlementGrid(surface: GroundSurface): SettlementGrid | undefin
   const origin: PlanPoint = [box.west - spacing, box.south - spacing];
   const values = new Array<number>(columns * rows).fill(0);
   const grid = { columns, rows, spacing, origin, values };
-  for (const [column, row] of squaresNear(parts)) {
+  for (const [column, row] of squaresNear(parts, reach)) {
     const ofColumns = nodesIn(column * SURFACE_SQUARE, origin[0], spacing, columns);
     for (const j of nodesIn(row * SURFACE_SQUARE, origin[1], spacing, rows)) {
       for (const i of ofColumns) {

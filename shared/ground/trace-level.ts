@@ -22,12 +22,8 @@ const MOST_HALVINGS = 10;
 /** Of an edge of the grid. */
 const ROOT_TOLERANCE = 1e-6;
 
-/**
- * How far settlement on a drawn line may be off its level: 2 % or 0.1 mm, whichever is more.
- *
- * Units: m. Valid: level > 0. Source: [own].
- */
-export function contourTolerance(level: number): number {
+/** How far settlement on a drawn line may be off its level: 2 % or 0.1 mm, whichever is more. */
+function contourTolerance(level: number): number {
   return Math.max(0.02 * level, 0.0001);
 }
 

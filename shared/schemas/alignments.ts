@@ -41,44 +41,49 @@ const interval = z
  * Units: m, levels above datum, volume losses as fractions, K without unit; chainage is plan length from
  * the first point. Valid: points differ by a millimetre or more; levels in order of chainage, straight
  * between them and level beyond them; intervals do not overlap, elsewhere the whole line's values hold;
- * `spacing` is between the axes of twin bores, `later` the one driven second with its volume loss times
+ * `spacing` is between the axes of twin bores and at least the diameter, `later` the one driven second with its volume loss times
  * `laterFactor`; backward drives run from the last point to the first. Source: [own].
  */
-export const alignmentDesignSchema = z.strictObject({
-  line: z
-    .array(z.tuple([coordinate, coordinate]))
-    .min(2, 'Draw two points at least.')
-    .max(ALIGNMENT_LIMITS.points),
-  levels: z
-    .array(z.strictObject({ chainage, level }))
-    .min(1, 'Give the level of the axis at one chainage at least.')
-    .max(ALIGNMENT_LIMITS.levels)
-    .refine(
-      (given) => given.every(({ chainage: at }, k) => at > (given[k - 1]?.chainage ?? -1)),
-      'Give levels in the order of their chainage.',
-    ),
-  diameter: z.number('Write a number.').positive().max(LIMITS.diameter),
-  bores: z.discriminatedUnion('kind', [
-    z.strictObject({ kind: z.literal('single') }),
-    z.strictObject({
-      kind: z.literal('twin'),
-      spacing: z.number('Write a number.').positive().max(500),
-      later: z.enum(['left', 'right']),
-      laterFactor: z.number('Write a number.').min(1).max(LIMITS.laterFactor),
-    }),
-  ]),
-  direction: z.enum(['forward', 'backward']),
-  groundLevel: level,
-  volumeLoss: range(volumeLoss),
-  troughWidth: range(troughWidth),
-  intervals: z
-    .array(interval)
-    .max(ALIGNMENT_LIMITS.intervals)
-    .refine(
-      (given) => given.every(({ from }, k) => from >= (given[k - 1]?.to ?? 0)),
-      'Give intervals in order, without overlap.',
-    ),
-});
+export const alignmentDesignSchema = z
+  .strictObject({
+    line: z
+      .array(z.tuple([coordinate, coordinate]))
+      .min(2, 'Draw two points at least.')
+      .max(ALIGNMENT_LIMITS.points),
+    levels: z
+      .array(z.strictObject({ chainage, level }))
+      .min(1, 'Give the level of the axis at one chainage at least.')
+      .max(ALIGNMENT_LIMITS.levels)
+      .refine(
+        (given) => given.every(({ chainage: at }, k) => at > (given[k - 1]?.chainage ?? -1)),
+        'Give levels in the order of their chainage.',
+      ),
+    diameter: z.number('Write a number.').positive().max(LIMITS.diameter),
+    bores: z.discriminatedUnion('kind', [
+      z.strictObject({ kind: z.literal('single') }),
+      z.strictObject({
+        kind: z.literal('twin'),
+        spacing: z.number('Write a number.').positive().max(500),
+        later: z.enum(['left', 'right']),
+        laterFactor: z.number('Write a number.').min(1).max(LIMITS.laterFactor),
+      }),
+    ]),
+    direction: z.enum(['forward', 'backward']),
+    groundLevel: level,
+    volumeLoss: range(volumeLoss),
+    troughWidth: range(troughWidth),
+    intervals: z
+      .array(interval)
+      .max(ALIGNMENT_LIMITS.intervals)
+      .refine(
+        (given) => given.every(({ from }, k) => from >= (given[k - 1]?.to ?? 0)),
+        'Give intervals in order, without overlap.',
+      ),
+  })
+  .refine(({ bores, diameter }) => bores.kind === 'single' || bores.spacing >= diameter, {
+    path: ['bores', 'spacing'],
+    error: 'Leave at least the diameter between the axes of two bores.',
+  });
 
 /**
  * A designed alignment.

@@ -67,6 +67,13 @@ export const editManySchema = z.strictObject({
 });
 
 /**
+ * Takes many buildings out of the register at once. `expected` is how many the person was told it would be.
+ *
+ * Units: none. Valid: refused where another number is found. Source: [own].
+ */
+export const removeManySchema = editManySchema.omit({ attributes: true });
+
+/**
  * Cuts a building in two along a line across it.
  *
  * Units: easting and northing m in the scheme's grid. Valid: a line that crosses the footprint from

@@ -38,6 +38,7 @@ function paramsOf(place: Place | undefined): Params {
     letterId: UNKNOWN_NUMBER,
     changeId: place?.change.id ?? UNKNOWN_ID,
     viewId: UNKNOWN_ID,
+    alignmentId: place?.alignment.id ?? UNKNOWN_ID,
     importId: place?.importId ?? UNKNOWN_ID,
     row: 1,
     field: 'use',

@@ -1,13 +1,16 @@
 import { hash } from '@node-rs/argon2';
+import type { AlignmentDesign } from '../../shared/schemas/alignments.ts';
 import type { LinkPurpose } from '../../shared/schemas/links.ts';
 import type { Role } from '../../shared/schemas/roles.ts';
 import { linkTokenHash } from '../../server/authentication/link-token.ts';
+import { Alignment } from '../../server/models/alignment.ts';
 import { BuildingFootprint, type FootprintRings } from '../../server/models/building-footprint.ts';
 import { Building, type GroundLevelFrom } from '../../server/models/building.ts';
 import { Membership } from '../../server/models/membership.ts';
 import { Person } from '../../server/models/person.ts';
 import { Scheme } from '../../server/models/scheme.ts';
 import { SingleUseLink } from '../../server/models/single-use-link.ts';
+import { aDesign } from './designs.ts';
 
 /** The password of everybody made here. */
 export const PASSWORD = 'harbour wall at low tide';
@@ -144,4 +147,19 @@ export async function aBuilding(
   });
   await BuildingFootprint.create({ buildingId: building.id, footprint, lonLat });
   return building;
+}
+
+/** An option for the line of a scheme, changed by nobody yet. */
+export function anAlignment(
+  scheme: Scheme,
+  overrides: Partial<{ name: string; design: AlignmentDesign; changedBy: string }> = {},
+): Promise<Alignment> {
+  made += 1;
+  return Alignment.create({
+    schemeId: scheme.id,
+    name: `Option ${made}`,
+    design: aDesign(),
+    changedBy: null,
+    ...overrides,
+  });
 }

@@ -3,6 +3,7 @@ import type TestAgent from 'supertest/lib/agent.js';
 import { ROLES } from '../../shared/schemas/roles.ts';
 import { defaultRules } from '../../server/commands/default-rules.ts';
 import { NO_OPTIONS } from '../../server/imports/first-options.ts';
+import type { Alignment } from '../../server/models/alignment.ts';
 import { BackgroundFeature } from '../../server/models/background-feature.ts';
 import type { Building } from '../../server/models/building.ts';
 import type { Person } from '../../server/models/person.ts';
@@ -10,7 +11,7 @@ import { RegisterChange } from '../../server/models/register-change.ts';
 import { RegisterImport } from '../../server/models/register-import.ts';
 import { SchemeRules } from '../../server/models/scheme-rules.ts';
 import type { Scheme } from '../../server/models/scheme.ts';
-import { aBuilding, aMember, anAdministrator, aPerson, aScheme } from './factories.ts';
+import { aBuilding, aMember, anAdministrator, anAlignment, aPerson, aScheme } from './factories.ts';
 import { signIn, visitor } from './sign-in.ts';
 
 /** Who walks: each role of the scheme at hand, the administrator, a member of another scheme, and nobody. */
@@ -22,6 +23,7 @@ export type Place = {
   readonly scheme: Scheme;
   readonly building: Building;
   readonly importId: string;
+  readonly alignment: Alignment;
   readonly change: RegisterChange;
   readonly mark: string;
 };
@@ -46,7 +48,8 @@ async function aPlace(mark: string, author: Person): Promise<Place> {
     ...{ schemeId: scheme.id, personId: null, state: 'asking' },
     ...{ fileName: `${mark}.geojson`, options: NO_OPTIONS },
   });
-  return { scheme, building, importId: sent.id, change, mark };
+  const alignment = await anAlignment(scheme, { name: `${mark} option` });
+  return { scheme, building, importId: sent.id, alignment, change, mark };
 }
 
 /** Two places, everybody who walks, and how to enter as each of them. */

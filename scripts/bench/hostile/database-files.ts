@@ -80,7 +80,7 @@ export const DATABASE_FILES: readonly HostileFile[] = [
   },
   {
     name: 'a GeoPackage with curves',
-    make: () => packageOf('CURVEPOLYGON', blob('010a00000000000000')),
+    make: () => packageOf('CURVEPOLYGON', blob('010a00000001000000010800000000000000')),
     says: /curves or faces in space/,
   },
   {

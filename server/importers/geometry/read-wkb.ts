@@ -15,6 +15,8 @@ const DEEPEST = 5;
 /** How some databases mark heights, measures and a number of the system. */
 const [HAS_Z, HAS_M, HAS_SRID] = [0x80000000, 0x40000000, 0x20000000];
 const PLAIN = ['', 'Point', 'LineString', 'Polygon', 'MultiPoint', 'MultiLineString', 'MultiPolygon', 'GeometryCollection']; // prettier-ignore
+/** Those that may hold curves, and often hold none, by what they are then. */
+const STRAIGHT: Readonly<Record<number, 'LineString' | 'Polygon' | 'MultiLineString' | 'MultiPolygon'>> = { 9: 'LineString', 10: 'Polygon', 11: 'MultiLineString', 12: 'MultiPolygon' }; // prettier-ignore
 
 function damaged(): RowFault {
   return new RowFault('Its geometry is damaged.');
@@ -79,8 +81,21 @@ function membersOf(cursor: Cursor, { isLittle }: Heading): Geometry[] {
   return all;
 }
 
+function coordinatesOf(all: readonly Geometry[]): unknown[] {
+  return all.map((one) => ('coordinates' in one ? one.coordinates : undefined));
+}
+
+/** What may hold curves: each of its members tells its kind, and is refused where it is one. */
+function straightAt(cursor: Cursor, heading: Heading, type: string): Geometry {
+  const members = coordinatesOf(membersOf(cursor, heading));
+  // pieces of one line, end to end
+  return { type, coordinates: type === 'LineString' ? members.flat() : members };
+}
+
 function geometryAt(cursor: Cursor): Geometry {
   const heading = headingOf(cursor);
+  const straight = STRAIGHT[heading.type];
+  if (straight !== undefined) return straightAt(cursor, heading, straight);
   const type = PLAIN[heading.type] ?? '';
   switch (type) {
     case 'Point':
@@ -95,16 +110,21 @@ function geometryAt(cursor: Cursor): Geometry {
       throw new RowFault('It has curves or faces in space, which are not taken. Export polygons.');
     case 'GeometryCollection':
       return { type, geometries: membersOf(cursor, heading) };
-    default: {
-      const coordinates = membersOf(cursor, heading).map((one) =>
-        'coordinates' in one ? one.coordinates : undefined,
-      );
-      return { type, coordinates };
-    }
+    default:
+      return { type, coordinates: coordinatesOf(membersOf(cursor, heading)) };
   }
 }
 
 /** Reads a geometry in well-known binary, plain or with heights, measures and marks of databases. */
 export function readWkb(bytes: Buffer): Geometry {
   return geometryAt({ bytes, at: 0, depth: 0 });
+}
+
+/** The number of the system that stands in a geometry as some databases mark it. */
+export function sridOfWkb(bytes: Buffer): number | undefined {
+  const isLittle = bytes[0] === 1;
+  if (bytes.length < 9) return undefined;
+  const word = isLittle ? bytes.readUInt32LE(1) : bytes.readUInt32BE(1);
+  if ((word & HAS_SRID) === 0) return undefined;
+  return isLittle ? bytes.readUInt32LE(5) : bytes.readUInt32BE(5);
 }

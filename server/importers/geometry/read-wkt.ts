@@ -10,6 +10,8 @@ const NAMES: Readonly<Record<string, string>> = {
   MULTILINESTRING: 'MultiLineString',
   POLYGON: 'Polygon',
   MULTIPOLYGON: 'MultiPolygon',
+  CURVEPOLYGON: 'Polygon',
+  MULTISURFACE: 'MultiPolygon',
 };
 /** Brackets about the points of each kind. */
 const DEPTHS: Readonly<Record<string, number>> = { Polygon: 2, MultiPolygon: 3 };
@@ -17,7 +19,7 @@ const HEAD = /^\s*(?:SRID\s*=\s*(\d{1,6})\s*;\s*)?([A-Z]{1,20})\s*(ZM|Z|M)?\s*(E
 const NUMBERS = /\s*([-+]?(?:\d+\.?\d*|\.\d+)(?:e[-+]?\d+)?)/iy;
 const MOST_POINTS = 1_000_000;
 
-const CURVED = /^(CURVEPOLYGON|COMPOUNDCURVE|CIRCULARSTRING|MULTI(CURVE|SURFACE)|GEOMETRYCOLLECTION|TIN|POLYHEDRALSURFACE)$/; // prettier-ignore
+const CURVED = /^(COMPOUNDCURVE|CIRCULARSTRING|MULTICURVE|GEOMETRYCOLLECTION|TIN|POLYHEDRALSURFACE)$/; // prettier-ignore
 
 /** The word in front, in capitals; Z and M may be joined to it. */
 function wordOf(text: string): string | undefined {
@@ -86,6 +88,9 @@ export function readWkt(text: string): { readonly type: string; readonly coordin
   const depth = DEPTHS[type];
   if (depth === undefined || /EMPTY/i.test(head[4] ?? '')) return { type, coordinates: [] };
   const cursor = { text, at: head[0].length };
+  if (/CURVE|CIRCULAR/i.test(text.slice(cursor.at))) {
+    throw new RowFault('It has curves, which are not taken. Export polygons.');
+  }
   const coordinates = bracket(cursor, depth);
   while (/\s|;/.test(text.charAt(cursor.at))) cursor.at += 1;
   if (cursor.at < text.length) throw damaged(cursor);

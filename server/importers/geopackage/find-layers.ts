@@ -16,6 +16,8 @@ export type Layer = {
 
 const MOST_LAYERS = 200;
 const AREAS = /^(MULTI)?(POLYGON|SURFACE)$|^CURVEPOLYGON$/i;
+/** Words for buildings in names of layers, in some languages. */
+const BUILDINGS = /build|bldg|footprint|edific|geb(ä|ae?)ude|b(â|a)ti|pand|fabbric|bygg|bygn/i;
 const ANY = /^GEOM(ETRY|COLLECTION|ETRYCOLLECTION)$/i;
 
 /** Tables that hold rows themselves: what views and other modules hold is made up while it is read. */
@@ -38,7 +40,11 @@ function countOf(database: Database, table: string): number {
   return typeof count === 'number' ? count : 0;
 }
 
-/** The layers that may hold areas, those that say so first and then the largest. */
+function rank({ kind, table }: { readonly kind: string; readonly table: string }): number {
+  return (AREAS.test(kind) ? 2 : 0) + (BUILDINGS.test(table) ? 1 : 0);
+}
+
+/** The layers that may hold areas: those that say so first, then those called buildings, then the largest. */
 export function findLayers(database: Database): Layer[] {
   for (const name of ['gpkg_contents', 'gpkg_geometry_columns', 'gpkg_spatial_ref_sys']) {
     if (!isPlainTable(database, name)) {
@@ -73,7 +79,7 @@ export function findLayers(database: Database): Layer[] {
   }
   return plain
     .map((layer) => ({ ...layer, count: countOf(database, layer.table) }))
-    .sort((a, b) => Number(AREAS.test(b.kind)) - Number(AREAS.test(a.kind)) || b.count - a.count);
+    .sort((a, b) => rank(b) - rank(a) || b.count - a.count);
 }
 
 /** The columns of a table that hold values themselves, without the geometry. */

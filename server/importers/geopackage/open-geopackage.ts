@@ -49,7 +49,9 @@ function noteOn(layers: readonly Layer[]): string[] {
   const [taken, ...others] = layers;
   if (taken === undefined || others.length === 0) return [];
   const names = others.slice(0, 5).map(({ table }) => `"${table}"`);
-  return [`The layer "${taken.table}" was taken. There is also ${names.join(', ')}.`];
+  return [
+    `The layer "${taken.table}" was taken. There is also ${names.join(', ')}: to take another, send it alone.`,
+  ];
 }
 
 type Opened = Pick<Source, 'crs' | 'notes'> & {
@@ -79,7 +81,7 @@ async function* readLayer(bytes: Buffer, { layer, columns }: Opened): AsyncGener
   }
 }
 
-/** Reads the layer of a GeoPackage that holds areas; where several do, the largest. */
+/** Reads the layer of a GeoPackage that holds areas; where several do, one called buildings, else the largest. */
 export async function openGeopackage(bytes: Buffer): Promise<Source> {
   const opened = await lookInto(bytes);
   return {

@@ -29,6 +29,14 @@ function pageOf(words: string): string | undefined {
   return called.find((one) => one !== undefined && iconv.encodingExists(one));
 }
 
+/** A text in UTF-8 without a last letter that its column was too narrow for. */
+function wholeLetters(bytes: Buffer): Buffer {
+  const start = bytes.findLastIndex((byte) => byte < 0x80 || byte >= 0xc0);
+  const first = bytes[start] ?? 0;
+  const length = first < 0xc0 ? 1 : first < 0xe0 ? 2 : first < 0xf0 ? 3 : 4;
+  return start > 0 && bytes.length - start < length ? bytes.subarray(0, start) : bytes;
+}
+
 export type CodePage = {
   readonly decode: (bytes: Buffer) => string;
   /** That the page which the file names is not known, as a sentence. */
@@ -44,7 +52,12 @@ export function codePage(dbf: Buffer, cpg: string | undefined): CodePage {
   const page = named ?? BY_LANGUAGE[dbf[LANGUAGE_AT] ?? 0] ?? FALLBACK;
   const isStrange = named === undefined && (cpg ?? '').trim() !== '';
   return {
-    decode: (bytes) => iconv.decode(bytes, isUtf8(bytes) ? 'utf8' : page),
+    decode: (bytes) => {
+      const text = page === 'utf8' ? wholeLetters(bytes) : bytes;
+      if (isUtf8(text)) return iconv.decode(text, 'utf8');
+      // many say UTF-8 and are not
+      return iconv.decode(bytes, page === 'utf8' ? FALLBACK : page);
+    },
     note: isStrange
       ? 'The .cpg file names letters that are not known here: look at names with accents.'
       : undefined,

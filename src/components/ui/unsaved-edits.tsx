@@ -2,8 +2,14 @@ import { useUnsavedEdits } from '../../hooks/use-unsaved-edits.ts';
 import { Button } from './button.tsx';
 import { Dialog } from './dialog.tsx';
 
+type UnsavedEditsProps = {
+  readonly hasEdits: boolean;
+  /** Begins the sentence that says what would be lost. */
+  readonly what?: string;
+};
+
 /** Asks before what has been written on this page is lost. */
-export function UnsavedEdits({ hasEdits }: { readonly hasEdits: boolean }) {
+export function UnsavedEdits({ hasEdits, what = 'What you wrote here' }: UnsavedEditsProps) {
   const blocker = useUnsavedEdits(hasEdits);
   return (
     <Dialog
@@ -11,7 +17,7 @@ export function UnsavedEdits({ hasEdits }: { readonly hasEdits: boolean }) {
       title="Leave without saving?"
       onClose={() => blocker.reset?.()}
     >
-      <p className="text-body">What you wrote here is not saved yet. Leaving throws it away.</p>
+      <p className="text-body">{what} is not saved yet. Leaving throws it away.</p>
       <div className="mt-4 flex gap-2">
         <Button kind="main" onClick={() => blocker.proceed?.()}>
           Throw it away and leave

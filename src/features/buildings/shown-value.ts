@@ -79,7 +79,8 @@ export function shownValue(column: RegisterColumn, building: BuildingValues): Sh
     return { kind: 'known', text: value };
   if (typeof value === 'number') {
     const from = column === 'groundLevel' ? building.groundLevelFrom : null;
-    const text = formatFigure(column, value);
+    // worked out of the outline: more places would say more than is known
+    const text = formatFigure(column, column === 'area' ? Number(value.toFixed(1)) : value);
     return { kind: 'known', text, ...(from !== null && { why: GROUND_FROM[from] }) };
   }
   if (isFilledIn(column)) return filledIn(column, building);

@@ -33,10 +33,13 @@ export type Situation = {
   readonly steps: { readonly past: number; readonly future: number } | null;
   /** Changes that were saved from here and can be taken back. */
   readonly saved: number;
+  /** Values of a building are being written. */
+  readonly isWriting: boolean;
 };
 
 /** Why a tool cannot be used now, or null. */
 export function reasonAgainst(id: ToolId, now: Situation): string | null {
+  if (now.isWriting && id !== 'select') return 'Save the values, or leave them, first.';
   switch (id) {
     case 'edit':
     case 'split':

@@ -30,7 +30,8 @@ describe('the plan', () => {
     await page.keyboard.press('Enter');
     await isSelected(visitor, 'Customs House');
     expect(await factOf(visitor, 'Eaves above ground')).toMatch(/^Eaves above ground\d+\.\dm$/);
-    expect(await factOf(visitor, 'Founding depth')).toBe('Founding depthnot known');
+    expect(await factOf(visitor, 'Founding level')).toMatch(/\(assumed\)m$/);
+    await page.getByRole('table', { name: 'Walls' }).waitFor();
     const marked = await middleOf(visitor);
 
     await page.keyboard.press('Escape');

@@ -20,8 +20,18 @@ describe('a GeoPackage', () => {
     const upload = await uploadOf(file);
     expect(upload).toMatchObject({ layer: 'many "quoted"', count: 5 });
     expect(upload.notes).toEqual([
-      'The layer "many "quoted"" was taken. There is also "few", "anything".',
+      'The layer "many "quoted"" was taken. There is also "few", "anything": to take another, send it alone.',
     ]);
+  });
+
+  test('of several layers is read by the one that is called buildings', async () => {
+    const file = await geopackageFile([
+      layer('parcels', 'MULTIPOLYGON', 9),
+      layer('Edificios', 'MULTIPOLYGON', 3),
+      layer('building points', 'POINT', 9),
+      layer('buildings of any kind', 'GEOMETRY', 9),
+    ]);
+    expect(await uploadOf(file)).toMatchObject({ layer: 'Edificios', count: 3 });
   });
 
   test.each([

@@ -66,6 +66,14 @@ describe('a table beside shapes', () => {
     ['a language in its heading', Buffer.from([0x8f, 0x87]), {}, 0x02, 'Åç'],
     ['nothing', Buffer.from('Å', 'latin1'), {}, 0, 'Å'],
     ['nothing, and is in UTF-8', Buffer.from('Å'), {}, 0x57, 'Å'],
+    ['a .cpg of UTF-8 that is wrong', Buffer.from('Ñandú', 'latin1'), { cpg: 'UTF-8' }, 0, 'Ñandú'],
+    [
+      'a .cpg of UTF-8 and a narrow column',
+      Buffer.from('Calle añó').subarray(0, 10),
+      { cpg: 'UTF-8' },
+      0,
+      'Calle añ',
+    ],
     ['a .cpg of nonsense', Buffer.from('Å', 'latin1'), { cpg: '<html>\0' }, 0, 'Å'],
   ])('is read where %s tells its letters', async (_, bytes, beside, language, text) => {
     const table = tableFile(columns.slice(0, 1), [[bytes]], { language });

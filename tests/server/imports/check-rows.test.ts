@@ -40,7 +40,7 @@ describe('a row', () => {
     ['with its axes exchanged', EXCHANGED, 'Easting and northing look exchanged'],
     ['there twice', rectangle(0, 0).map(([x, y]) => [x + 0.004, y]), 'The footprint is that of row 1.'],
     ['with a hole beside it', polygon(OUTSIDE), 'A hole lies outside'],
-    ['with parts over each other', { type: 'MultiPolygon', coordinates: [[rectangle(0, 500, 40, 40)], [rectangle(10, 510, 5, 5)]] }, 'Two parts of the footprint lie over each other'],
+    ['with parts over each other', { type: 'MultiPolygon', coordinates: [[rectangle(0, 500, 40, 40)], [rectangle(10, 510, 5, 5)]] }, 'Its rings cross or lie over each other near'],
   ] as const)('%s is refused', async (_, geometry, remark) => {
     const drawn = geometry as Parameters<typeof feature>[1];
     const [row] = await checked([feature({ ref: 'odd' }, drawn)]);
@@ -128,6 +128,10 @@ describe('the order of axes', () => {
     const place = { ...exchanged.options.place, exchangeAxes: false };
     const flipped = await session.choose(exchanged, { place });
     expect(flipped.counts).toMatchObject({ new: 0, refused: 1 });
+    const [row] = await session.rows(flipped);
+    expect(row?.remarks.join(' ')).toMatch(
+      /^Easting and northing look exchanged: only the other way/,
+    );
   });
 
   test('of degrees is told by the area too', async () => {

@@ -12,6 +12,8 @@ const MAY: Readonly<Record<SchemeAction, readonly (Role | 'administrator')[]>> =
   readScheme: ['designer', 'assessor', 'owner', 'witness', 'administrator'],
   readRegister: ['designer', 'assessor', 'witness', 'administrator'],
   updateRegister: ['assessor'],
+  readAlignments: ['designer', 'assessor', 'witness', 'administrator'],
+  updateAlignments: ['designer'],
   updateScheme: ['administrator'],
   archiveScheme: ['administrator'],
   readMembers: ['administrator'],
@@ -25,6 +27,8 @@ const ACTIONS = [
   'readScheme',
   'readRegister',
   'updateRegister',
+  'readAlignments',
+  'updateAlignments',
   'updateScheme',
   'archiveScheme',
   'readMembers',
@@ -62,6 +66,7 @@ test('in an archived scheme everything is read and nothing is changed, but that 
   for (const action of ACTIONS) expect(abilities[action]).toBe(!changesScheme(action));
   expect(ACTIONS.filter(changesScheme)).toEqual([
     'updateRegister',
+    'updateAlignments',
     'updateScheme',
     'manageMembers',
     'updateRules',

@@ -334,7 +334,8 @@ describe('after a stop of the server', () => {
     await RegisterImport.update(sent(13.9), { where: { id: young.id } });
     await recoverImports(services());
     const dropped = await session.settled(old.id);
-    expect(dropped).toMatchObject({ state: 'cancelled', fault: expect.stringMatching(/14 days/) });
+    expect(dropped.state).toBe('cancelled');
+    expect(dropped.fault).toMatch(/14 days/);
     expect(await session.rows(old)).toEqual([]);
     expect((await session.settled(young.id)).state).toBe('asking');
     expect(await session.rows(young)).toHaveLength(2);

@@ -9,6 +9,7 @@ import { AuditEntry } from '../../../server/models/audit-entry.ts';
 import { Building } from '../../../server/models/building.ts';
 import type { Scheme } from '../../../server/models/scheme.ts';
 import { aMember, anAdministrator, aScheme } from '../../support/factories.ts';
+import { regularRing } from '../../support/drawn-geometry.ts';
 import { box, change, drawn, E, footprintOf, N, registered } from '../../support/register.ts';
 import { signIn } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
@@ -56,6 +57,19 @@ describe('drawing a building', () => {
     expect(buildingHistorySchema.parse(history.body)).toMatchObject([
       { kind: 'draw', before: null, mayUndo: true, after: { reference: 'N1', storeys: 2 } },
     ]);
+  });
+
+  test('takes an outline of thousands of corners; of other bodies less is taken', async () => {
+    const { scheme } = await aRow();
+    const agent = await asAssessor(scheme);
+    const round = regularRing(9000, 50).map(([x, y]) => [E + 100 + x, N + 100 + y]);
+    const body = { reference: 'N1', footprint: [[round]] };
+    expect(JSON.stringify(body).length).toBeGreaterThan(300_000);
+    expect((await agent.post(at(scheme)).send(body)).status).toBe(201);
+    const long = { ...body, note: 'a'.repeat(800_000) };
+    const answer = await agent.post(at(scheme)).send(long);
+    expect([answer.status, answer.body]).toMatchObject([413, { error: { code: 'too-large' } }]);
+    expect((await agent.post(at(scheme, '/joins')).send(body)).status).toBe(413);
   });
 
   const [outer = []] = box(0, 0)[0] ?? [];
@@ -380,6 +394,55 @@ describe('removing a building', () => {
   });
 });
 
+describe('removing many', () => {
+  test('takes all that are meant out, in one change that can be undone', async () => {
+    const { scheme, row } = await aRow('A', 'B', 'C');
+    const agent = await asAssessor(scheme);
+    const ids = [idOf(row, 0), idOf(row, 2)];
+    const answer = await agent.post(at(scheme, '/removals')).send({ filter: { ids }, expected: 2 });
+    expect([answer.status, answer.body]).toMatchObject([200, { buildingIds: [] }]);
+    const { changeId, version } = registerChangeSchema.parse(answer.body);
+    expect((await registered(scheme)).map(({ reference }) => reference)).toEqual(['B']);
+    await scheme.reload();
+    expect(scheme.registerVersion).toBe(version);
+    const history = await agent.get(at(scheme, `/${idOf(row)}/history`));
+    expect(buildingHistorySchema.parse(history.body)[0]).toMatchObject({
+      ...{ changeId, kind: 'remove', source: '2 chosen buildings', after: null },
+    });
+    const trail = await AuditEntry.findAll({ where: { schemeId: scheme.id }, order: ['id'] });
+    expect(trail.at(-1)).toMatchObject({ after: { kind: 'remove', removed: 2 } });
+    const undo = `/api/schemes/${scheme.id}/register-changes/${changeId}/undo`;
+    expect((await agent.post(undo)).status).toBe(200);
+    expect((await registered(scheme)).map(({ reference }) => reference)).toEqual(['A', 'B', 'C']);
+  });
+
+  test('refuses another number than was said, and leaves others in peace', async () => {
+    const { scheme } = await aRow('A', 'B');
+    const foreign = await aRow('F');
+    const agent = await asAssessor(scheme);
+    const remove = (body: object) => agent.post(at(scheme, '/removals')).send(body);
+    const wrong = await remove({ filter: {}, expected: 3 });
+    expect([wrong.status, wrong.body]).toMatchObject([409, { error: { code: 'conflict' } }]);
+    expect(JSON.stringify(wrong.body)).toContain('These are 2 buildings now, not 3.');
+    const others = { filter: { ids: [idOf(foreign.row)] }, expected: 1 };
+    expect((await remove(others)).status).toBe(409);
+    expect(await registered(scheme)).toHaveLength(2);
+    expect(await registered(foreign.scheme)).toHaveLength(1);
+  });
+
+  test.each([
+    [{ expected: 1 }],
+    [{ filter: {}, expected: 0 }],
+    [{ filter: { x: 1 }, expected: 1 }],
+    [{ filter: {}, expected: 1, attributes: {} }],
+  ])('refuses %j', async (body) => {
+    const { scheme } = await aRow('A');
+    const agent = await asAssessor(scheme);
+    expect((await agent.post(at(scheme, '/removals')).send(body)).status).toBe(422);
+    expect(await registered(scheme)).toHaveLength(1);
+  });
+});
+
 describe('the history of a building', () => {
   test('is read by those who may read the register, and undone by assessors', async () => {
     const { scheme, row } = await aRow('A');
@@ -439,6 +502,7 @@ describe('changing a register', () => {
   test('is for assessors, and not in an archived scheme', async () => {
     const { scheme, row } = await aRow('A');
     const good = { reference: 'N1', footprint: box(50, 0) };
+    const all = { filter: {}, expected: 1 };
     const members = [
       await anAdministrator(),
       await aMember(scheme, 'designer'),
@@ -450,13 +514,17 @@ describe('changing a register', () => {
       expect((await agent.post(at(scheme)).send(good)).status).toBe(403);
       const edit = await agent.patch(at(scheme, `/${idOf(row)}`)).send({ version: 1 });
       expect(edit.status).toBe(403);
+      expect((await agent.post(at(scheme, '/removals')).send(all)).status).toBe(403);
     }
     const stranger = await asAssessor(await aScheme());
     expect((await stranger.post(at(scheme)).send(good)).status).toBe(404);
+    expect((await stranger.post(at(scheme, '/removals')).send(all)).status).toBe(404);
     expect((await request(app()).post(at(scheme)).send(good)).status).toBe(403);
+    expect((await request(app()).post(at(scheme, '/removals')).send(all)).status).toBe(403);
     const agent = await asAssessor(scheme);
     await scheme.update({ archivedAt: new Date() });
     expect((await agent.post(at(scheme)).send(good)).status).toBe(409);
+    expect((await agent.post(at(scheme, '/removals')).send(all)).status).toBe(409);
     expect(await registered(scheme)).toHaveLength(1);
   });
 });

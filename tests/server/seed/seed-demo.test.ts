@@ -2,6 +2,11 @@ import { mkdirSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { afterAll, beforeEach, describe, expect, it } from 'vitest';
 import { isRightPassword } from '../../../server/authentication/password-hash.ts';
+import { drivesOfDesign } from '../../../shared/assessment/drives-of-design.ts';
+import { DEFAULT_RULES } from '../../../shared/assessment/rules.ts';
+import { groundModel } from '../../../shared/ground/ground-model.ts';
+import { alignmentDesignSchema } from '../../../shared/schemas/alignments.ts';
+import { Alignment } from '../../../server/models/alignment.ts';
 import { AuditEntry } from '../../../server/models/audit-entry.ts';
 import { Building } from '../../../server/models/building.ts';
 import { Membership } from '../../../server/models/membership.ts';
@@ -90,8 +95,36 @@ describe('seedDemo', () => {
     expect(buildings[0]?.south).toBeCloseTo(54.749, 2);
     const actions = (await AuditEntry.findAll()).map(({ action }) => action);
     expect(new Set(actions)).toEqual(
-      new Set(['create person', 'create scheme', 'change roles', 'change register']),
+      new Set([
+        ...['create person', 'create scheme', 'change roles', 'change register'],
+        'create alignment',
+      ]),
     );
+  });
+
+  it('has three options for the line that the method takes, crossing harbour and old town', async () => {
+    const options = await Alignment.findAll({ order: ['name'] });
+    expect(options.map(({ name }) => name)).toEqual([
+      ...['A, Market Place', 'B, harbour head', 'C, deep and south'],
+    ]);
+    for (const { design } of options) {
+      expect(alignmentDesignSchema.parse(design)).toEqual(design);
+      const { drives, lengths, pieces } = groundModel(drivesOfDesign(design), DEFAULT_RULES);
+      expect(drives).toHaveLength(2);
+      for (const length of lengths) {
+        expect(length).toBeGreaterThan(2400);
+        expect(length).toBeLessThan(2600);
+      }
+      const depths = pieces.flat().map(({ startLevel }) => design.groundLevel - startLevel);
+      expect(Math.min(...depths)).toBeGreaterThanOrEqual(18);
+      expect(Math.max(...depths)).toBeLessThanOrEqual(25);
+      // the harbour is some 400 m east of the town's corner, the old town 560 m
+      const near = (east: number) => design.line.filter(([e]) => Math.abs(e - 412_000 - east) < 80);
+      for (const east of [400, 560]) {
+        expect(near(east).length).toBeGreaterThan(0);
+        for (const [, north] of near(east)) expect(Math.abs(north - 6_068_350)).toBeLessThan(120);
+      }
+    }
   });
 
   it('finds it there the next time', async () => {

@@ -227,7 +227,7 @@ describe('a design that no bore can follow is refused at its place', () => {
 
   test('where the spacing leaves nothing of a part, or the line turns back', () => {
     const tight = aDesign({
-      ...{ line: [[0, 0], [100, 0], [100, 6], [200, 6]] },
+      ...{ line: [[0, 0], [100, 0], [100, 6], [0, 6]] },
       bores: { ...TWIN, spacing: 40 },
     }); // prettier-ignore
     expect(methodErrorOf(() => drivesOfDesign(tight))).toMatchObject({

@@ -5,6 +5,7 @@ import {
   STIFF_CONSTRUCTIONS,
   stiffnessOfConstruction,
 } from '../../../shared/building/stiffness-of-construction.ts';
+import { BUILDING_WORDS } from '../../../shared/schemas/building-fields.ts';
 import { REFERENCES } from '../../../shared/references.ts';
 
 const NOTHING = {
@@ -28,6 +29,12 @@ describe('stiffness by construction', () => {
       expect(stiffnessOfConstruction(words)?.eOverG).toBe(12.5);
     }
     expect(Object.keys(REFERENCES)).toContain(stiffnessOfConstruction('masonry')?.source);
+  });
+
+  it('is known of every word that is offered', () => {
+    for (const words of BUILDING_WORDS.construction ?? []) {
+      expect(stiffnessOfConstruction(words)).toBeDefined();
+    }
   });
 
   it('is not known of anything else', () => {

@@ -3,6 +3,7 @@ import { classNames } from '../../../lib/class-names.ts';
 import { formatCount } from '../../../lib/format-number.ts';
 import type { Column } from './column.ts';
 import type { Ordering } from './ordering.ts';
+import { MoreAtSides } from './more-at-sides.tsx';
 import { TableFrame } from './table-frame.tsx';
 import { TableRow } from './table-row.tsx';
 import { useRevealed } from './use-revealed.ts';
@@ -69,22 +70,27 @@ export function RowTable<T>(props: RowTableProps<T>) {
   }
   return (
     <div
-      ref={scroller}
       className={classNames(
-        'relative overflow-auto print:max-h-none! print:overflow-visible',
+        'relative flex min-w-0 flex-col print:block print:max-h-none!',
         props.className,
       )}
-      {...(!enabled && { role: 'region', 'aria-label': label, tabIndex: 0 })}
     >
-      <TableFrame {...{ label, columns, count }} ordering={props.ordering} gaps={rows}>
-        {indexes.map(drawRow)}
-      </TableFrame>
-      {rows.unprinted > 0 && (
-        <p className="mt-2 px-(--edge) text-small">
-          The first {formatCount(indexes.length)} rows are printed. Left out:{' '}
-          {formatCount(rows.unprinted)}.
-        </p>
-      )}
+      <div
+        ref={scroller}
+        className="relative min-h-0 overflow-auto print:overflow-visible"
+        {...(!enabled && { role: 'region', 'aria-label': label, tabIndex: 0 })}
+      >
+        <TableFrame {...{ label, columns, count }} ordering={props.ordering} gaps={rows}>
+          {indexes.map(drawRow)}
+        </TableFrame>
+        {rows.unprinted > 0 && (
+          <p className="mt-2 px-(--edge) text-small">
+            The first {formatCount(indexes.length)} rows are printed. Left out:{' '}
+            {formatCount(rows.unprinted)}.
+          </p>
+        )}
+      </div>
+      <MoreAtSides scroller={scroller} />
     </div>
   );
 }

@@ -46,7 +46,7 @@ function Heading<T>({ column, ordering }: HeadingProps<T>) {
           type="button"
           className={classNames(
             'inline-flex min-h-6 flex-col justify-end text-inherit hover:text-clay-deep max-sm:min-h-9 print:contents',
-            column.holds === 'figure' && 'items-end',
+            column.holds === 'figure' ? 'items-end' : 'items-start',
           )}
           onClick={() => {
             ordering.sortBy(column.id);

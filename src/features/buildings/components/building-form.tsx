@@ -9,6 +9,7 @@ import type { RegisterChange } from '../../../../shared/schemas/register-changes
 import { Button } from '../../../components/ui/button.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
+import { UnsavedEdits } from '../../../components/ui/unsaved-edits.tsx';
 import { buildingDraftSchema, draftOf, draftOfWritten } from '../building-draft.ts';
 import { useEditBuilding } from '../hooks/use-edit-building.ts';
 import { AttributeField } from './attribute-field.tsx';
@@ -29,7 +30,7 @@ export function BuildingForm({ schemeId, building, onSaved, onCancel }: Building
     resolver: zodResolver(buildingDraftSchema),
     defaultValues: draftOf(building),
   });
-  const { errors } = form.formState;
+  const { errors, isDirty } = form.formState;
   const submit = form.handleSubmit(edit.save);
   if (edit.clash !== null) {
     const { clash, busy, settle, leaveClash } = edit;
@@ -37,44 +38,52 @@ export function BuildingForm({ schemeId, building, onSaved, onCancel }: Building
       const written = leaveClash();
       if (written !== null) form.reset(draftOfWritten(written));
     };
-    return <ClashChoice {...{ clash, busy }} onSave={settle} onBack={back} />;
+    return (
+      <>
+        <UnsavedEdits hasEdits />
+        <ClashChoice {...{ clash, busy }} onSave={settle} onBack={back} />
+      </>
+    );
   }
   return (
-    <form
-      noValidate
-      aria-label={`Change ${building.reference}`}
-      onSubmit={(event) => void submit(event)}
-      onKeyDown={(event) => {
-        if (event.key === 'Escape') onCancel();
-      }}
-      className="mt-3"
-    >
-      <MutationError failed="The building was not changed." error={edit.error} />
-      <div className="grid grid-cols-2 gap-x-4 gap-y-2.5">
-        <Field
-          label="Reference"
-          autoFocus
-          autoComplete="off"
-          error={errors.reference?.message}
-          {...form.register('reference')}
-        />
-        {BUILDING_FIELD_NAMES.map((field) => (
-          <AttributeField
-            key={field}
-            field={field}
-            error={errors.attributes?.[field]?.message}
-            frameClassName={BUILDING_FIELDS[field].label === 'Address' ? 'col-span-2' : ''}
-            {...form.register(`attributes.${field}`)}
+    <>
+      <UnsavedEdits hasEdits={isDirty} />
+      <form
+        noValidate
+        aria-label={`Change ${building.reference}`}
+        onSubmit={(event) => void submit(event)}
+        onKeyDown={(event) => {
+          if (event.key === 'Escape') onCancel();
+        }}
+        className="mt-3"
+      >
+        <MutationError failed="The building was not changed." error={edit.error} />
+        <div className="grid grid-cols-2 gap-x-4 gap-y-2.5">
+          <Field
+            label="Reference"
+            autoFocus
+            autoComplete="off"
+            error={errors.reference?.message}
+            {...form.register('reference')}
           />
-        ))}
-      </div>
-      <p className="mt-2 text-cap text-ink-3">What is left empty is not known.</p>
-      <div className="sticky bottom-0 mt-3 flex gap-2 border-t border-hairline bg-paper py-3">
-        <Button kind="main" type="submit" busy={edit.busy}>
-          Save
-        </Button>
-        <Button onClick={onCancel}>Leave it as it is</Button>
-      </div>
-    </form>
+          {BUILDING_FIELD_NAMES.map((field) => (
+            <AttributeField
+              key={field}
+              field={field}
+              error={errors.attributes?.[field]?.message}
+              frameClassName={BUILDING_FIELDS[field].label === 'Address' ? 'col-span-2' : ''}
+              {...form.register(`attributes.${field}`)}
+            />
+          ))}
+        </div>
+        <p className="mt-2 text-cap text-ink-3">What is left empty is not known.</p>
+        <div className="sticky bottom-0 mt-3 flex gap-2 border-t border-hairline bg-paper py-3">
+          <Button kind="main" type="submit" busy={edit.busy}>
+            Save
+          </Button>
+          <Button onClick={onCancel}>Leave it as it is</Button>
+        </div>
+      </form>
+    </>
   );
 }

@@ -14,7 +14,7 @@ export function DrawingSide({ drawing, children }: DrawingSideProps) {
   const { draft } = drawing.drafting;
   return (
     <>
-      <DoneLine done={drawing.done} />
+      {!drawing.situation.isWriting && <DoneLine done={drawing.done} />}
       {draft === null ? children : <DrawingPanel drawing={drawing} draft={draft} />}
     </>
   );

@@ -1,4 +1,5 @@
 import type { PlanDrawing } from '../hooks/use-plan-drawing.ts';
+import { UnsavedEdits } from '../../../components/ui/unsaved-edits.tsx';
 import { GiveUpDialog } from './give-up-dialog.tsx';
 import { RemoveDialog } from './remove-dialog.tsx';
 import { ToolColumn } from './tool-column.tsx';
@@ -16,6 +17,7 @@ export function DrawingTools({ drawing, select }: DrawingToolsProps) {
     <>
       <ToolColumn situation={situation} onPress={press} />
       <GiveUpDialog drafting={drafting} />
+      {drafting.isWorthKeeping && <UnsavedEdits hasEdits what="What you drew" />}
       <RemoveDialog {...{ schemeId, removing, done, select }} />
     </>
   );

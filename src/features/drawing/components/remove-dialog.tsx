@@ -1,6 +1,6 @@
 import { ConfirmDialog } from '../../../components/ui/confirm-dialog.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
-import { useRemoveBuildings } from '../../buildings/api/remove-buildings.ts';
+import { useRemoveBuilding } from '../../buildings/api/remove-building.ts';
 import type { PlanDrawing } from '../hooks/use-plan-drawing.ts';
 
 type RemoveDialogProps = Pick<PlanDrawing, 'schemeId' | 'removing' | 'done'> & {
@@ -10,21 +10,23 @@ type RemoveDialogProps = Pick<PlanDrawing, 'schemeId' | 'removing' | 'done'> & {
 /** Asks before a building is taken out of the register. */
 export function RemoveDialog({ schemeId, removing, done, select }: RemoveDialogProps) {
   const { building, setRemoving } = removing;
-  const remove = useRemoveBuildings(schemeId);
+  const remove = useRemoveBuilding(schemeId);
 
   function confirm(): void {
     if (building === undefined) return;
     const { id, version, reference } = building;
-    remove.mutate([{ id, version }], {
-      onSuccess: ({ changeIds: [changeId] }) => {
-        if (changeId === undefined) return;
-        done.push({ changeId, words: `${reference} is removed.`, before: id });
+    remove.mutate(
+      { id, version },
+      {
+        onSuccess: ({ changeId }) => {
+          done.push({ changeId, words: `${reference} is removed.`, before: id });
+        },
+        onError: () => {
+          select(id);
+          setRemoving(true);
+        },
       },
-      onError: () => {
-        select(id);
-        setRemoving(true);
-      },
-    });
+    );
     // what is not there any more is not asked for again
     select(null);
     setRemoving(false);

@@ -4,6 +4,11 @@ import type { History } from './history.ts';
 /** So little is drawn again without a thought. */
 const FEW = 3;
 
+/** Whether leaving the page would lose something that was drawn; picking buildings is done again at once. */
+export function isWorthKeeping(history: History<Draft> | null): boolean {
+  return history !== null && history.present.tool !== 'join' && history.past.length > 0;
+}
+
 /** How many corners giving up would lose; nought where they are too few to ask. */
 export function lostBy(history: History<Draft> | null): number {
   if (history === null) return 0;

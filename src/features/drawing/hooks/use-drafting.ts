@@ -2,7 +2,7 @@ import { useState } from 'react';
 import type { CornerAt } from '../../map/map-drawing.ts';
 import type { Draft, JoinDraft, ShapeDraft } from '../drafts/draft.ts';
 import { begun, redone, stepped, undone, type History } from '../drafts/history.ts';
-import { lostBy } from '../drafts/lost-by.ts';
+import { isWorthKeeping, lostBy } from '../drafts/lost-by.ts';
 
 type Asking = { readonly corners: number; readonly next: () => void };
 
@@ -24,6 +24,8 @@ export function useDrafting() {
   return {
     draft: history?.present ?? null,
     steps: history === null ? null : { past: history.past.length, future: history.future.length },
+    /** Something is drawn that leaving the page would lose. */
+    isWorthKeeping: isWorthKeeping(history),
     chosen,
     choose,
     set,

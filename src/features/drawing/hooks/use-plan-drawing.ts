@@ -1,6 +1,7 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { BuildingAnswer } from '../../../../shared/schemas/buildings.ts';
+import type { RegisterChange } from '../../../../shared/schemas/register-changes.ts';
 import { buildingQuery } from '../../buildings/api/get-building.ts';
 import { newCut, newOutline, outlineOf, type Draft } from '../drafts/draft.ts';
 import { togglePicked } from '../drafts/edit-join.ts';
@@ -16,6 +17,8 @@ import { useSaveDraft } from './use-save-draft.ts';
 type Around = {
   readonly schemeId: string;
   readonly canDraw: boolean;
+  /** Values of the selected building are being written: tools rest until that is saved or left. */
+  readonly isWriting: boolean;
   /** The selected building, once it is there. */
   readonly building: BuildingAnswer | undefined;
   readonly select: (buildingId: number | null) => void;
@@ -67,12 +70,17 @@ function useSaving({ schemeId, building, select }: Around) {
   function saveOnTop(draft: Draft): void {
     saving.save(draft, '');
   }
-  return { drafting, done, saving, save, saveOnTop };
+  function changedByHand({ changeId }: RegisterChange): void {
+    if (building === undefined) return;
+    const { id, reference } = building;
+    done.push({ changeId, words: `${reference} is changed.`, before: id });
+  }
+  return { drafting, done, saving, save, saveOnTop, changedByHand };
 }
 
 /** The tools for drawing on the plan: what is drawn, by pointer and keys, until it is saved. */
 export function usePlanDrawing(around: Around) {
-  const { schemeId, canDraw, building } = around;
+  const { schemeId, canDraw, isWriting, building } = around;
   const client = useQueryClient();
   const saved = useSaving(around);
   const { drafting, done, saving, save } = saved;
@@ -86,6 +94,7 @@ export function usePlanDrawing(around: Around) {
     hasBuilding: building !== undefined,
     steps: drafting.steps,
     saved: done.saved,
+    isWriting,
   };
 
   function begin(next: ToolId): void {
@@ -109,6 +118,7 @@ export function usePlanDrawing(around: Around) {
   }
   /** A building of the map, or none, is pressed. */
   function pressBuilding(buildingId: number | null): void {
+    if (isWriting) return;
     if (draft === null) around.select(buildingId);
     else if (buildingId !== null) pick(buildingId);
   }

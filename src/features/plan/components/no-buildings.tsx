@@ -1,7 +1,8 @@
 import { ButtonLink } from '../../../components/ui/button-link.tsx';
 import { EmptyState } from '../../../components/ui/empty-state.tsx';
-import { settingsPath } from '../../../config/paths.ts';
+import { importsPath, settingsPath } from '../../../config/paths.ts';
 import type { SchemeAnswer } from '../../../../shared/schemas/schemes.ts';
+import { can } from '../../schemes/can.ts';
 
 type NoBuildingsProps = {
   readonly scheme: SchemeAnswer;
@@ -11,7 +12,20 @@ type NoBuildingsProps = {
 
 /** In place of a building where a scheme has none. */
 export function NoBuildings({ scheme, hasBackground }: NoBuildingsProps) {
-  const canBring = scheme.abilities.updateBackground === true && !hasBackground;
+  if (can(scheme, 'updateRegister')) {
+    return (
+      <EmptyState
+        action={
+          <ButtonLink kind="main" to={importsPath(scheme.id)}>
+            Bring in footprints
+          </ButtonLink>
+        }
+      >
+        No buildings yet. Bring in footprints to start the register.
+      </EmptyState>
+    );
+  }
+  const canBring = can(scheme, 'updateBackground') && !hasBackground;
   return (
     <EmptyState
       action={

@@ -9,13 +9,14 @@ import { useBuildingQuery } from '../hooks/use-building-query.ts';
 import { usePlanKeys } from '../hooks/use-plan-keys.ts';
 import { useSchemePlan } from '../hooks/use-scheme-plan.ts';
 import { useSelectedBuilding } from '../hooks/use-selected-building.ts';
+import { useSheetView } from '../hooks/use-sheet-view.ts';
 import { useSteps } from '../hooks/use-steps.ts';
 import { MapPane } from './map-pane.tsx';
 import { PlanBasis } from './plan-basis.tsx';
 import { PlanSide } from './plan-side.tsx';
 
 function doNothing(): void {
-  // keys that go from building to building rest while something is drawn
+  // keys that go from building to building rest while something is drawn or written
 }
 
 /** The map and what stands at its side; on a phone, under it. */
@@ -28,7 +29,9 @@ export function PlanDesk() {
   const chosen = useRef<HTMLDivElement>(null);
   const { building, known } = useBuildingQuery(scheme.id, selected);
   const canDraw = scheme.abilities.updateRegister === true;
-  const drawing = usePlanDrawing({ schemeId: scheme.id, canDraw, building: known, select });
+  const { view, setView, isWriting } = useSheetView(selected);
+  const around = { schemeId: scheme.id, canDraw, isWriting, building: known, select };
+  const drawing = usePlanDrawing(around);
   const isDrawing = drawing.map !== null;
   const bring = useBringIntoView(handle, selected, building.data);
 
@@ -44,7 +47,12 @@ export function PlanDesk() {
   }
   const steps = useSteps(selected, () => handle?.buildingsInView() ?? [], goTo);
   usePlanKeys(
-    { handle, step: isDrawing ? doNothing : steps.step, fit, deselect },
+    {
+      handle,
+      step: isDrawing || isWriting ? doNothing : steps.step,
+      fit,
+      deselect: isWriting ? doNothing : deselect,
+    },
     ready?.extent.from === 'buildings',
   );
 
@@ -70,6 +78,10 @@ export function PlanDesk() {
             <PlanSide
               {...{ selected, building, steps, chosen }}
               from={ready?.extent.from}
+              sheet={{
+                ...{ schemeId: scheme.id, mayEdit: canDraw, view, onView: setView },
+                onChanged: drawing.changedByHand,
+              }}
               onGoTo={goTo}
               onDeselect={deselect}
             />

@@ -1,11 +1,12 @@
 import type { RefObject } from 'react';
 import type { BuildingRow, ExtentAnswer } from '../../../../shared/schemas/buildings.ts';
+import { classNames } from '../../../lib/class-names.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import type { useSteps } from '../hooks/use-steps.ts';
 import { BuildingSearch } from './building-search.tsx';
 import { NoBuildings } from './no-buildings.tsx';
 import { NothingSelected } from './nothing-selected.tsx';
-import { SelectedBuilding, type BuildingQuery } from './selected-building.tsx';
+import { SelectedBuilding, type BuildingQuery, type SheetProps } from './selected-building.tsx';
 import { StepButtons } from './step-buttons.tsx';
 
 type PlanSideProps = {
@@ -13,6 +14,7 @@ type PlanSideProps = {
   readonly from: ExtentAnswer['from'] | undefined;
   readonly selected: number | null;
   readonly building: BuildingQuery;
+  readonly sheet: SheetProps;
   readonly steps: ReturnType<typeof useSteps>;
   readonly onGoTo: (buildingId: number) => void;
   readonly onDeselect: () => void;
@@ -22,7 +24,17 @@ type PlanSideProps = {
 
 /** At the side of the map: find, go through, and what is selected. */
 export function PlanSide(props: PlanSideProps) {
-  const { from = 'buildings', selected, building, steps, onGoTo, onDeselect, chosen } = props;
+  const {
+    from = 'buildings',
+    selected,
+    building,
+    sheet,
+    steps,
+    onGoTo,
+    onDeselect,
+    chosen,
+  } = props;
+  const isWriting = sheet.view === 'edit';
   const scheme = useScheme();
   if (from !== 'buildings') {
     return <NoBuildings scheme={scheme} hasBackground={from === 'background'} />;
@@ -35,18 +47,27 @@ export function PlanSide(props: PlanSideProps) {
   }
   return (
     <>
-      <BuildingSearch schemeId={scheme.id} onChoose={choose} />
-      <StepButtons
-        trail={steps.trail}
-        selected={selected}
-        onStep={steps.step}
-        onLeave={steps.leave}
-      />
-      <div ref={chosen} tabIndex={-1} aria-live="polite" className="mt-4 outline-none">
+      {!isWriting && (
+        <>
+          <BuildingSearch schemeId={scheme.id} onChoose={choose} />
+          <StepButtons
+            trail={steps.trail}
+            selected={selected}
+            onStep={steps.step}
+            onLeave={steps.leave}
+          />
+        </>
+      )}
+      <div
+        ref={chosen}
+        tabIndex={-1}
+        aria-live={isWriting ? 'off' : 'polite'}
+        className={classNames('outline-none', !isWriting && 'mt-4')}
+      >
         {selected === null ? (
           <NothingSelected />
         ) : (
-          <SelectedBuilding building={building} onDeselect={onDeselect} />
+          <SelectedBuilding {...{ building, sheet, onDeselect }} />
         )}
       </div>
     </>

@@ -51,7 +51,7 @@ export function BulkForm({ draft, onReview, onClose }: BulkFormProps) {
   const faults: Readonly<Record<string, { message?: string } | undefined>> = errors;
   return (
     <form noValidate onSubmit={(event) => void submit(event)}>
-      <div className="max-h-[56vh] overflow-auto">
+      <div className="max-h-[56vh] scroll-pb-12 overflow-auto">
         {BUILDING_FIELD_NAMES.map((field) => (
           <div key={field} className="border-b border-hairline py-1">
             <Checkbox label={factsOf(field).label} {...form.register(`set.${field}`)} />

@@ -1,4 +1,8 @@
-import type { RegisterColumn, RegisterRow } from '../../../../shared/schemas/register.ts';
+import type {
+  RegisterColumn,
+  RegisterRow,
+  RegisterSort,
+} from '../../../../shared/schemas/register.ts';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { formatCount } from '../../../lib/format-number.ts';
 import { Shown } from '../../buildings/components/shown.tsx';
@@ -65,13 +69,17 @@ function Building({ row }: { readonly row: RegisterRow }) {
   );
 }
 
-const BUILDING: Column<RegisterRow> = {
-  id: 'building',
-  heading: 'Building',
-  wide: true,
-  width: BUILDING_WIDTH,
-  cell: (row) => <Building row={row} />,
-};
+/** Few have a name, so that these are ordered by address, and say so. */
+function buildingColumn(sort: RegisterSort): Column<RegisterRow> {
+  return {
+    id: 'building',
+    heading: 'Building',
+    wide: true,
+    width: BUILDING_WIDTH,
+    ...(sort.column === 'address' && { unit: 'by address' }),
+    cell: (row) => <Building row={row} />,
+  };
+}
 
 function fieldColumn(column: RegisterColumn): Column<RegisterRow> {
   const { label, kind, unit } = factsOf(column);
@@ -90,11 +98,12 @@ export function registerColumns(
   chosen: readonly RegisterColumn[],
   marks: Marks | null,
   found: number,
+  sort: RegisterSort,
 ): readonly Column<RegisterRow>[] {
   return [
     ...(marks === null ? [] : [tickColumn(marks, found)]),
     referenceColumn(marks === null ? undefined : TICK_WIDTH),
-    BUILDING,
+    buildingColumn(sort),
     ...chosen.map(fieldColumn),
   ];
 }

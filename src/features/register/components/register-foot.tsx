@@ -8,9 +8,6 @@ import { BulkDialog } from './bulk-dialog.tsx';
 import { DoneLine, type Done } from './done-line.tsx';
 import { RemoveDialog } from './remove-dialog.tsx';
 
-/** Buildings are taken out one after the other: more of them would take too long to wait for. */
-const MOST_REMOVED = 50;
-
 type RegisterFootProps = {
   readonly schemeId: string;
   readonly marks: Marks;
@@ -54,7 +51,8 @@ function Marked({ schemeId, marks, onDone }: MarkedProps) {
     <div className="flex flex-wrap items-center gap-x-3 gap-y-1 text-small">
       <span>
         <b className="font-semibold">{formatCount(marks.count)}</b>
-        {marks.isAll ? ' marked, all that are found' : ' marked'}
+        {' marked'}
+        {marks.isAll && <span className="max-sm:sr-only">, all that are found</span>}
       </span>
       <Button
         kind="quiet"
@@ -64,16 +62,14 @@ function Marked({ schemeId, marks, onDone }: MarkedProps) {
       >
         Set values…
       </Button>
-      {marks.count <= MOST_REMOVED && (
-        <Button
-          kind="quiet"
-          onClick={() => {
-            setAsks('removal');
-          }}
-        >
-          Remove…
-        </Button>
-      )}
+      <Button
+        kind="quiet"
+        onClick={() => {
+          setAsks('removal');
+        }}
+      >
+        Remove…
+      </Button>
       <Button kind="quiet" onClick={marks.clear}>
         Unmark
       </Button>

@@ -55,8 +55,8 @@ export function RegisterTable({ desk, columns, mayEdit }: RegisterTableProps) {
   const { filter, sort } = address.which;
   const found = page?.found ?? WAITING_ROWS;
   const shown = useMemo(
-    () => registerColumns(columns, mayEdit ? marks : null, found),
-    [columns, mayEdit, marks, found],
+    () => registerColumns(columns, mayEdit ? marks : null, found, sort),
+    [columns, mayEdit, marks, found, sort],
   );
   return (
     <div className="flex min-h-0 min-w-0 flex-1 flex-col print:block">

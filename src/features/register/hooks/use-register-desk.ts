@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import type { SideView } from '../components/building-side.tsx';
+import type { SheetView } from '../../buildings/components/building-sheet.tsx';
 import type { Done } from '../components/done-line.tsx';
 import { useActiveBuilding } from './use-active-building.ts';
 import { useMapPane } from './use-map-pane.ts';
@@ -17,7 +17,7 @@ export function useRegisterDesk(schemeId: string, personId: string) {
   const marks = useMarks(schemeId, which.filter, rows.page?.found ?? 0);
   const mapPane = useMapPane(personId);
   const onPlan = useShowOnPlan(schemeId, { activeId: active.id, opened, mapPane });
-  const [sideView, setSideView] = useState<SideView>('facts');
+  const [sideView, setSideView] = useState<SheetView>('facts');
   const [done, setDone] = useState<Done | null>(null);
 
   /** What is opened goes along with the row, unless it is being changed. */
@@ -50,6 +50,7 @@ export function useRegisterDesk(schemeId: string, personId: string) {
       address.open(buildingId);
     },
     close: () => {
+      if (sideView === 'edit') return;
       setSideView('facts');
       address.open(null);
     },

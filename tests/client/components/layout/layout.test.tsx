@@ -44,7 +44,7 @@ describe('GoTo', () => {
   it('shows what is meant and goes there', () => {
     const onGo = vi.fn();
     const found = [{ to: '/audit', title: 'Audit', note: 'administration' }];
-    const shared = { isOpen: true, query: 'aud', found, onGo };
+    const shared = { hasKey: true, isOpen: true, query: 'aud', found, onGo };
     const nothing = () => undefined;
     renderPage(<GoTo {...shared} onOpen={nothing} onClose={nothing} onQuery={nothing} />);
     const search = screen.getByRole('combobox');

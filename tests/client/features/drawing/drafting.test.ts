@@ -65,7 +65,10 @@ describe('nextReference', () => {
 });
 
 describe('reasonAgainst', () => {
-  const idle: Situation = { tool: 'select', hasBuilding: false, steps: null, saved: 0 };
+  const idle: Situation = {
+    ...{ tool: 'select', hasBuilding: false, steps: null, saved: 0 },
+    isWriting: false,
+  };
 
   it.each<[Parameters<typeof reasonAgainst>[0], Partial<Situation>, string | null]>([
     ['draw', {}, null],
@@ -78,6 +81,8 @@ describe('reasonAgainst', () => {
     ['undo', { saved: 1 }, null],
     ['undo', { saved: 1, steps: { past: 0, future: 0 } }, 'Nothing to take back here.'],
     ['redo', {}, 'Nothing was taken back.'],
+    ['draw', { isWriting: true }, 'Save the values, or leave them, first.'],
+    ['select', { isWriting: true }, null],
     ['redo', { steps: { past: 0, future: 1 } }, null],
   ])('of %s with %o', (tool, change, reason) => {
     expect(reasonAgainst(tool, { ...idle, ...change })).toBe(reason);

@@ -1,4 +1,5 @@
 import { fireEvent, screen, waitFor, within } from '@testing-library/react';
+import { Link } from 'react-router-dom';
 import { describe, expect, it, vi } from 'vitest';
 import { DrawingSide } from '../../../../src/features/drawing/components/drawing-side.tsx';
 import { DrawingTools } from '../../../../src/features/drawing/components/drawing-tools.tsx';
@@ -25,24 +26,27 @@ const HOUSE = aBuildingAnswer({
 
 type DeskProps = {
   readonly building?: BuildingAnswer;
+  readonly isWriting?: boolean;
   readonly select: (id: number | null) => void;
 };
 
 /** The side of the plan without its map. */
-function Desk({ building, select }: DeskProps) {
-  const drawing = usePlanDrawing({ schemeId: anId(10), canDraw: true, building, select });
+function Desk({ building, isWriting = false, select }: DeskProps) {
+  const around = { schemeId: anId(10), canDraw: true, isWriting, building, select };
+  const drawing = usePlanDrawing(around);
   return (
     <main>
       <h1>Plan</h1>
       <DrawingTools drawing={drawing} select={select} />
       <DrawingSide drawing={drawing}>Nothing is drawn.</DrawingSide>
+      <Link to="/register">Register</Link>
     </main>
   );
 }
 
-function openDesk(building?: BuildingAnswer) {
+function openDesk(building?: BuildingAnswer, isWriting = false) {
   const select = vi.fn();
-  renderPage(<Desk {...(building !== undefined && { building })} select={select} />);
+  renderPage(<Desk {...(building !== undefined && { building })} {...{ isWriting, select }} />);
   return select;
 }
 
@@ -75,6 +79,16 @@ describe('the tools', () => {
       'Select a building first.',
     );
     expect(await axeFaults()).toEqual([]);
+  });
+
+  it('rest while values of a building are being written', () => {
+    openDesk(HOUSE, true);
+    press('e');
+    expect(screen.getByText('Nothing is drawn.')).toBeTruthy();
+    fireEvent.click(screen.getByRole('button', { name: 'Split' }));
+    expect(screen.getAllByRole('status').map(({ textContent }) => textContent)).toContain(
+      'Save the values, or leave them, first.',
+    );
   });
 
   it('have keys', () => {
@@ -128,6 +142,17 @@ describe('drawing by figures', () => {
     expect(select).toHaveBeenLastCalledWith(9);
     press('z', { ctrlKey: true });
     await screen.findByText('Undone: B0198 is in the register.');
+  });
+
+  it('asks before the page is left with something drawn', async () => {
+    openDesk();
+    press('d');
+    addCorner('1', '0');
+    fireEvent.click(screen.getByRole('link', { name: 'Register' }));
+    const question = await screen.findByRole('dialog', { name: 'Leave without saving?' });
+    expect(question.textContent).toContain('What you drew is not saved yet.');
+    fireEvent.click(within(question).getByRole('button', { name: 'Stay here' }));
+    expect(screen.getByLabelText('Corner 1, easting')).toBeTruthy();
   });
 
   it('asks before more than three corners are lost', () => {

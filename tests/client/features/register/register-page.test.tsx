@@ -173,6 +173,56 @@ describe('the register', () => {
     expect(await screen.findByText(/^Undone: /)).toBeTruthy();
   });
 
+  it('removes all that are found in one change, after asking', async () => {
+    const { calls } = fakeApi({ ...ANSWERS, [`POST ${SCHEME}/buildings/removals`]: CHANGE });
+    await openRegister(EDITS);
+    fireEvent.click(screen.getByLabelText('Mark all 3 found'));
+    fireEvent.click(screen.getByRole('button', { name: 'Remove…' }));
+    const dialog = screen.getByRole('dialog', { name: 'Remove these 3 buildings?' });
+    fireEvent.click(within(dialog).getByRole('button', { name: 'Remove 3' }));
+    expect(await screen.findByText('3 buildings removed.')).toBeTruthy();
+    expect(calls.find(({ route }) => route.startsWith('POST'))?.body).toEqual({
+      filter: {},
+      expected: 3,
+    });
+    expect(screen.queryByText('3', { selector: 'b' })).toBeNull();
+  });
+
+  it('says so where others were marked than are there now, and removes nothing', async () => {
+    const message = 'These are 1 buildings now, not 2. Look at them again.';
+    const { calls } = fakeApi({
+      ...ANSWERS,
+      [`POST ${SCHEME}/buildings/removals`]: new Refusal(409, 'conflict', message),
+    });
+    await openRegister(EDITS);
+    for (const name of ['Mark B0001', 'Mark B0003']) fireEvent.click(screen.getByLabelText(name));
+    fireEvent.click(screen.getByRole('button', { name: 'Remove…' }));
+    fireEvent.click(screen.getByRole('button', { name: 'Remove 2' }));
+    expect((await screen.findByRole('alert')).textContent).toBe(`Nothing was removed. ${message}`);
+    expect(calls.find(({ route }) => route.startsWith('POST'))?.body).toEqual({
+      filter: { ids: [1, 3] },
+      expected: 2,
+    });
+  });
+
+  it('says that buildings are ordered by their address', async () => {
+    fakeApi(ANSWERS);
+    await openRegister();
+    fireEvent.click(screen.getByRole('button', { name: 'Building' }));
+    const heading = await screen.findByRole('columnheader', { name: 'Building by address' });
+    expect(heading.getAttribute('aria-sort')).toBe('ascending');
+  });
+
+  it('keeps an opened building open while it is being changed', async () => {
+    fakeApi(ANSWERS);
+    await openRegister(EDITS, '/?building=2');
+    fireEvent.click(await screen.findByRole('button', { name: 'Edit' }));
+    expect(screen.queryByRole('button', { name: 'Close the building' })).toBeNull();
+    press('Escape');
+    expect(address()).toBe('?building=2');
+    expect(await screen.findByRole('button', { name: 'Close the building' })).toBeTruthy();
+  });
+
   it('exports what is seen', async () => {
     fakeApi(ANSWERS);
     await openRegister({}, '/?sort=-area');

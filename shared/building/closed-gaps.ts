@@ -1,20 +1,25 @@
-import { nearestOnSegment } from '../../shared/geometry/nearest-on-segment.ts';
-import type { PlanPoint, Segment } from '../../shared/geometry/point.ts';
-import { polygonEdges } from '../../shared/geometry/polygon-edges.ts';
-import type { FootprintRings } from '../models/building-footprint.ts';
+import { nearestOnSegment } from '../geometry/nearest-on-segment.ts';
+import { planDistance } from '../geometry/plan-distance.ts';
+import type { PlanPoint, Segment } from '../geometry/point.ts';
+import { polygonEdges } from '../geometry/polygon-edges.ts';
 
-/** Walls so far apart, in metres, are one that was surveyed twice. */
+/**
+ * Walls so far apart are one that was surveyed twice.
+ *
+ * Units: m. Valid: read only. Source: [own].
+ */
 export const MOST_GAP = 0.05;
 /** Where a corner was put on a wall it is on it but for rounding, in metres. */
 const ROUNDING = 1e-6;
 
 type Ring = readonly PlanPoint[];
+type Footprint = readonly (readonly Ring[])[];
 
-function edgesOf(footprint: FootprintRings): Segment[] {
+function edgesOf(footprint: Footprint): Segment[] {
   return footprint.flat().flatMap(polygonEdges);
 }
 
-function eachRing(footprint: FootprintRings, change: (ring: Ring) => Ring): FootprintRings {
+function eachRing(footprint: Footprint, change: (ring: Ring) => Ring): Footprint {
   return footprint.map((part) => part.map(change));
 }
 
@@ -30,7 +35,7 @@ function along({ start, end }: Segment, share: number): PlanPoint {
 function pulled(corner: PlanPoint, edges: readonly Segment[]): PlanPoint {
   let [best, least, isCorner]: [PlanPoint, number, boolean] = [corner, MOST_GAP, false];
   for (const edge of edges) {
-    const distance = Math.hypot(corner[0] - edge.start[0], corner[1] - edge.start[1]);
+    const distance = planDistance(corner, edge.start);
     if (distance <= (isCorner ? least : MOST_GAP)) {
       [best, least, isCorner] = [edge.start, distance, true];
     }
@@ -55,11 +60,7 @@ function between(edge: Segment, corners: readonly PlanPoint[], near: number): Pl
 }
 
 /** A footprint whose edges run by way of the corners that stand on them, or so near them. */
-function withCorners(
-  footprint: FootprintRings,
-  corners: readonly PlanPoint[],
-  near: number,
-): FootprintRings {
+function withCorners(footprint: Footprint, corners: readonly PlanPoint[], near: number): Footprint {
   return eachRing(footprint, (ring) =>
     polygonEdges(ring).flatMap((edge) => [edge.start, ...between(edge, corners, near)]),
   );
@@ -68,11 +69,10 @@ function withCorners(
 /**
  * Two footprints whose walls meet where they stood so little apart, or reached so little over each
  * other: the second is moved on to the first, and both get the same corners along what they share.
+ *
+ * Units: m. Valid: walls at most MOST_GAP apart; what is farther stays as it is. Source: [own].
  */
-export function closedGaps(
-  first: FootprintRings,
-  second: FootprintRings,
-): readonly [FootprintRings, FootprintRings] {
+export function closedGaps(first: Footprint, second: Footprint): readonly [Footprint, Footprint] {
   const edges = edgesOf(first);
   const moved = eachRing(second, (ring) => ring.map((corner) => pulled(corner, edges)));
   const standing = withCorners(first, moved.flat(2), ROUNDING);

@@ -1,0 +1,16 @@
+import { drivesOfDesign } from '../../shared/assessment/drives-of-design.ts';
+import { MethodError } from '../../shared/method-error.ts';
+import type { AlignmentDesign } from '../../shared/schemas/alignments.ts';
+import { AppError } from '../errors.ts';
+
+/** Refuses a design whose bores cannot follow its line, at the place in it that is at fault. */
+export function refuseBadDesign(design: AlignmentDesign): void {
+  try {
+    drivesOfDesign(design);
+  } catch (error) {
+    if (!(error instanceof MethodError)) throw error;
+    const { message, field } = error;
+    const path = field === undefined ? 'design' : `design.${field}`;
+    throw new AppError('invalid-input', message, [{ path, message }]);
+  }
+}

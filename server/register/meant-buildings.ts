@@ -1,0 +1,21 @@
+import type { Sequelize, Transaction } from 'sequelize';
+import type { RegisterFilter } from '../../shared/schemas/register.ts';
+import { AppError } from '../errors.ts';
+import { findVersions } from '../models/find-register-rows.ts';
+import { registerCondition } from '../models/register-condition.ts';
+import type { VersionedBuilding } from './register-edits.ts';
+
+type Meant = { readonly filter: RegisterFilter; readonly expected: number };
+
+/** The buildings that a filter means, unless there are more or fewer than was said. */
+export async function meantBuildings(
+  database: Sequelize,
+  schemeId: string,
+  { filter, expected }: Meant,
+  transaction: Transaction,
+): Promise<VersionedBuilding[]> {
+  const found = await findVersions(database, registerCondition(schemeId, filter), transaction);
+  if (found.length === expected) return found;
+  const message = `These are ${found.length} buildings now, not ${expected}. Look at them again.`;
+  throw new AppError('conflict', message);
+}
