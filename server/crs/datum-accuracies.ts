@@ -26,6 +26,7 @@ export const DATUM_ACCURACIES: Readonly<
   NTF: { metres: 5, source: 'value from memory: IGN, three parameters, 2 m on average' },
   NAD27: { metres: 10, source: 'value from memory: parameters in place of NADCON' },
   NZGD49: { metres: 4, source: 'value from memory: LINZ, seven parameters' },
+  'S-JTSK': { metres: 12, source: 'PROJ 9.1, compared on 2026-12-01 in Prague' },
   // turned about a point of their own, which is left out: as far as PROJ 9.1 says otherwise
   'Korean 1985': { metres: 30, source: 'PROJ 9.1, compared on 2026-12-01' },
   'Katanga 1955': { metres: 320, source: 'PROJ 9.1, compared on 2026-12-01' },

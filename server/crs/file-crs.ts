@@ -1,3 +1,4 @@
+import proj4 from 'proj4';
 import { crsList } from './crs-list.ts';
 import type { CrsEntry } from './crs-entry.ts';
 import { findEntry } from './find-crs.ts';
@@ -60,9 +61,20 @@ function faultOf({ code, kind, name, unit, proj4 }: CrsEntry): string | undefine
   return undefined;
 }
 
+/** Whether the way of projecting is known here: of some only the name is. */
+function isProjectable(definition: string | undefined): definition is string {
+  if (definition === undefined || definition === '') return false;
+  try {
+    proj4(definition);
+    return true;
+  } catch {
+    return false;
+  }
+}
+
 /** Whether coordinates of a file can be placed by a system. */
 export function canPlace(entry: CrsEntry): boolean {
-  return faultOf(entry) === undefined && Boolean(mapDefinition(entry.proj4 ?? ''));
+  return faultOf(entry) === undefined && isProjectable(mapDefinition(entry.proj4 ?? ''));
 }
 
 /** The number of the flat system in one with heights. */
@@ -86,7 +98,7 @@ export async function findFileCrs(
   const given = entry.proj4 ?? '';
   const definition = mapDefinition(given);
   const [north, west, south, east] = entry.bbox;
-  if (definition === undefined || definition === '') {
+  if (!isProjectable(definition)) {
     return { fault: `EPSG:${code} (${entry.name}) cannot be placed here. Send another system.` };
   }
   const grid = GRID.exec(given);

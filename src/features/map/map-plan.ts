@@ -22,7 +22,9 @@ export type MapPlan = {
   readonly rows?: TileSet;
   /** Of the buildings only these are meant; the others are faint. Without it, all of them are meant. */
   readonly meant?: ReadonlySet<number>;
-  /** Whether buildings can be drawn on it. */
+  /** Whether a designed line and its settlement can stand on it. */
+  readonly hasLine?: boolean;
+  /** Whether something can be drawn on it. */
   readonly canDraw?: boolean;
 };
 

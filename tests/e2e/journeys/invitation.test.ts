@@ -8,9 +8,9 @@ import { signInAs, signInWith, signOut } from '../drivers/sign-in.ts';
 const PASSWORD = 'a lantern on the mole';
 
 for (const [role, screens] of [
-  ['Designer', ['Plan', 'Settings']],
-  ['Assessor', ['Plan', 'Settings']],
-  ['Witness', ['Plan', 'Settings']],
+  ['Designer', ['Plan', 'Register', 'Settings']],
+  ['Assessor', ['Plan', 'Register', 'Settings']],
+  ['Witness', ['Plan', 'Register', 'Settings']],
   ['Owner', ['Description']],
 ] as const) {
   const email = `new-${role.toLowerCase()}@example.org`;

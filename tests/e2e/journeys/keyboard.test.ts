@@ -15,8 +15,8 @@ journey(
     await page.getByRole('heading', { name: 'Waiting for you' }).waitFor();
 
     await page.keyboard.press('/');
-    await page.keyboard.type('Settings');
-    await page.getByRole('option', { name: 'Settings' }).waitFor();
+    await page.keyboard.type('Settings Port Dogger');
+    await page.getByRole('option', { name: 'Settings Port Dogger crossing' }).waitFor();
     await page.keyboard.press('Enter');
     await page.getByRole('heading', { name: 'Port Dogger crossing', level: 1 }).waitFor();
 

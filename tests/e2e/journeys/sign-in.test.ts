@@ -9,7 +9,7 @@ describe('signing in', () => {
     await signInAs(visitor, 'administrator');
     expect(await tabs(visitor)).toEqual(['Schemes', 'People', 'Audit', 'Mailbox']);
     await openScheme(visitor);
-    expect(await tabs(visitor)).toEqual(['Plan', 'Settings']);
+    expect(await tabs(visitor)).toEqual(['Plan', 'Register', 'Settings']);
   });
 
   for (const role of ['designer', 'assessor', 'second-assessor', 'witness'] as const) {

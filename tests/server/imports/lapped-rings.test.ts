@@ -17,7 +17,11 @@ describe('rings whose edges do not cross', () => {
   test.each([
     ['a knot in a corner', [[ring([0, 0], [10, 10], [20, 20], [20, 0], [10, 10], [0, 12])]], 160],
     ['a knot on an edge', [[ring([0, 0], [20, 10], [20, 0], [10, 5], [0, 20])]], 150],
-    ['a ring run through twice', [[ring([0, 0], [20, 0], [20, 20], [0, 20], [0, 0], [20, 0], [20, 20], [0, 20])]], 400],
+    [
+      'a ring run through twice',
+      [[ring([0, 0], [20, 0], [20, 20], [0, 20], [0, 0], [20, 0], [20, 20], [0, 20])]],
+      400,
+    ],
     ['one part twice', [[box(0, 0, 20)], [box(0, 0, 20)]], 400],
     ['a part on the edge of another', [[box(0, 0, 20)], [box(0, 5, 5)]], 400],
     ['parts that share two edges', [[box(0, 0, 20)], [box(10, 0, 20)]], 600],

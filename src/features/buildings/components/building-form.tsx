@@ -23,6 +23,21 @@ type BuildingFormProps = {
   readonly onCancel: () => void;
 };
 
+/** Stays in view under a form that is longer than its place. */
+function FormFoot({ busy, onCancel }: { readonly busy: boolean; readonly onCancel: () => void }) {
+  return (
+    <>
+      <p className="mt-2 text-cap text-ink-3">What is left empty is not known.</p>
+      <div className="sticky bottom-0 z-10 -mx-4 mt-3 flex gap-2 border-t border-hairline bg-paper px-4 py-3">
+        <Button kind="main" type="submit" busy={busy}>
+          Save
+        </Button>
+        <Button onClick={onCancel}>Leave it as it is</Button>
+      </div>
+    </>
+  );
+}
+
 /** Changes the reference and the values of a building. What is left empty is not known. */
 export function BuildingForm({ schemeId, building, onSaved, onCancel }: BuildingFormProps) {
   const edit = useEditBuilding(schemeId, building, onSaved);
@@ -55,7 +70,7 @@ export function BuildingForm({ schemeId, building, onSaved, onCancel }: Building
         onKeyDown={(event) => {
           if (event.key === 'Escape') onCancel();
         }}
-        className="mt-3"
+        className="mt-3 [&_input]:scroll-mb-24"
       >
         <MutationError failed="The building was not changed." error={edit.error} />
         <div className="grid grid-cols-2 gap-x-4 gap-y-2.5">
@@ -76,13 +91,7 @@ export function BuildingForm({ schemeId, building, onSaved, onCancel }: Building
             />
           ))}
         </div>
-        <p className="mt-2 text-cap text-ink-3">What is left empty is not known.</p>
-        <div className="sticky bottom-0 mt-3 flex gap-2 border-t border-hairline bg-paper py-3">
-          <Button kind="main" type="submit" busy={edit.busy}>
-            Save
-          </Button>
-          <Button onClick={onCancel}>Leave it as it is</Button>
-        </div>
+        <FormFoot busy={edit.busy} onCancel={onCancel} />
       </form>
     </>
   );

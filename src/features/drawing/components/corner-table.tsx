@@ -1,5 +1,5 @@
 import type { CornerAt } from '../../map/map-drawing.ts';
-import type { ShapeDraft } from '../drafts/draft.ts';
+import type { CornerDraft } from '../drafts/draft.ts';
 import {
   insertCorner,
   middleAfter,
@@ -12,24 +12,27 @@ import {
 import { CornerRow } from './corner-row.tsx';
 import { RingHead } from './ring-head.tsx';
 
-type CornerTableProps = {
-  readonly draft: ShapeDraft;
+type CornerTableProps<T extends CornerDraft> = {
+  readonly draft: T;
   readonly chosen: CornerAt | null;
-  readonly onEdit: (edit: (draft: ShapeDraft) => ShapeDraft) => void;
+  readonly onEdit: (edit: (draft: T) => T) => void;
 };
 
-function ringName({ parts, tool }: ShapeDraft, part: number, ring: number): string {
-  if (tool === 'split') return 'Line';
+function ringName({ parts, tool }: CornerDraft, part: number, ring: number): string {
+  if (tool === 'split' || tool === 'line') return 'Line';
   const name = ring === 0 ? 'Outline' : `Courtyard ${ring}`;
   return parts.length > 1 ? `Part ${part + 1}, ${name.toLowerCase()}` : name;
 }
 
-type RingRowsProps = CornerTableProps & { readonly part: number; readonly ring: number };
+type RingRowsProps<T extends CornerDraft> = CornerTableProps<T> & {
+  readonly part: number;
+  readonly ring: number;
+};
 
-function RingTable({ draft, chosen, onEdit, part, ring }: RingRowsProps) {
+function RingTable<T extends CornerDraft>({ draft, chosen, onEdit, part, ring }: RingRowsProps<T>) {
   const name = ringName(draft, part, ring);
   const corners = ringAt(draft, { part, ring, corner: 0 });
-  const word = draft.tool === 'split' ? 'Point' : 'Corner';
+  const word = draft.tool === 'split' || draft.tool === 'line' ? 'Point' : 'Corner';
   return (
     <table className="mt-2 w-full table-fixed border-collapse">
       <RingHead
@@ -78,7 +81,7 @@ function RingTable({ draft, chosen, onEdit, part, ring }: RingRowsProps) {
 }
 
 /** Every corner of a draft in figures, so that what the pointer does can be done by keys. */
-export function CornerTable(props: CornerTableProps) {
+export function CornerTable<T extends CornerDraft>(props: CornerTableProps<T>) {
   const { parts } = props.draft;
   return parts.map((rings, part) =>
     rings.map((corners, ring) =>

@@ -1,6 +1,6 @@
 import type { Aim, AimRequest, Handle } from '../../map/map-drawing.ts';
 import type { GridPlace } from '../../map/place/grid-projection.ts';
-import { lineOf, type Parts, type ShapeDraft } from './draft.ts';
+import { lineOf, type CornerDraft, type Parts } from './draft.ts';
 import { ringAt } from './edit-corners.ts';
 import { rightAngle } from './right-angle.ts';
 import { snap } from './snap.ts';
@@ -13,7 +13,7 @@ function rounded([east, north]: GridPlace): GridPlace {
 type Anchors = { readonly last: GridPlace | undefined; readonly before: GridPlace | undefined };
 
 /** The corners that a right angle is measured from. */
-function anchorsOf(draft: ShapeDraft, held: Handle | null): Anchors {
+function anchorsOf(draft: CornerDraft, held: Handle | null): Anchors {
   if (held === null) return { last: lineOf(draft).at(-1), before: lineOf(draft).at(-2) };
   const ring = ringAt(draft, held.at);
   const back = held.kind === 'middle' ? held.at.corner : held.at.corner - 1;
@@ -21,7 +21,7 @@ function anchorsOf(draft: ShapeDraft, held: Handle | null): Anchors {
 }
 
 /** Where the pointer means: at a right angle when asked for, else at a neighbour within reach. */
-export function aimAt(draft: ShapeDraft, request: AimRequest, neighbours: readonly Parts[]): Aim {
+export function aimAt(draft: CornerDraft, request: AimRequest, neighbours: readonly Parts[]): Aim {
   const { place, reach, isSquare, held } = request;
   if (isSquare) {
     const { last, before } = anchorsOf(draft, held);

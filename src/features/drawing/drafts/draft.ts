@@ -6,14 +6,19 @@ export type Ring = readonly GridPlace[];
 /** Parts of a building, each an outline and its courtyards. */
 export type Parts = readonly (readonly Ring[])[];
 
-/** What is drawn corner by corner: a new building, another outline, or a line to split along. */
-export type ShapeDraft = {
-  readonly tool: 'draw' | 'edit' | 'split';
-  /** The building as it was seen; null for a new one. */
-  readonly building: BuildingAnswer | null;
+/** What is set corner by corner. */
+export type CornerDraft = {
+  readonly tool: 'draw' | 'edit' | 'split' | 'line';
   /** Of a line, one part with one ring. */
   readonly parts: Parts;
   readonly isClosed: boolean;
+};
+
+/** What is drawn of a building: a new one, another outline, or a line to split along. */
+export type ShapeDraft = CornerDraft & {
+  readonly tool: 'draw' | 'edit' | 'split';
+  /** The building as it was seen; null for a new one. */
+  readonly building: BuildingAnswer | null;
 };
 
 /** Buildings that are to become one, in the order in which they were picked. */
@@ -52,6 +57,6 @@ export function newCut(building: BuildingAnswer): ShapeDraft {
 }
 
 /** The corners of what is drawn one after another. */
-export function lineOf({ parts }: ShapeDraft): Ring {
+export function lineOf({ parts }: Pick<CornerDraft, 'parts'>): Ring {
   return parts[0]?.[0] ?? [];
 }

@@ -1,57 +1,63 @@
 import type { CornerAt } from '../../map/map-drawing.ts';
 import type { GridPlace } from '../../map/place/grid-projection.ts';
-import { lineOf, type Parts, type Ring, type ShapeDraft } from './draft.ts';
+import { lineOf, type CornerDraft, type Parts, type Ring } from './draft.ts';
 
 /** A ring has three corners at least. */
 export const LEAST_CORNERS = 3;
+/** A line has two ends. */
+const LEAST_POINTS = 2;
 
 function isSamePlace(a: GridPlace | undefined, b: GridPlace): boolean {
   return a?.[0] === b[0] && a[1] === b[1];
 }
 
-function withRing(draft: ShapeDraft, at: CornerAt, change: (ring: Ring) => Ring): ShapeDraft {
+function withRing<T extends CornerDraft>(draft: T, at: CornerAt, change: (ring: Ring) => Ring): T {
   const parts: Parts = draft.parts.map((part, p) =>
     p === at.part ? part.map((ring, r) => (r === at.ring ? change(ring) : ring)) : part,
   );
   return { ...draft, parts };
 }
 
-export function ringAt({ parts }: Pick<ShapeDraft, 'parts'>, { part, ring }: CornerAt): Ring {
+export function ringAt({ parts }: Pick<CornerDraft, 'parts'>, { part, ring }: CornerAt): Ring {
   return parts[part]?.[ring] ?? [];
 }
 
 /** One more corner at the end of what is drawn; none where the last one stands already. */
-export function addCorner(draft: ShapeDraft, place: GridPlace): ShapeDraft {
+export function addCorner<T extends CornerDraft>(draft: T, place: GridPlace): T {
   if (draft.isClosed || isSamePlace(lineOf(draft).at(-1), place)) return draft;
   return withRing(draft, { part: 0, ring: 0, corner: 0 }, (ring) => [...ring, place]);
 }
 
 /** The last corner taken back; a closed outline is opened again. */
-export function takeLastBack(draft: ShapeDraft): ShapeDraft {
+export function takeLastBack<T extends CornerDraft>(draft: T): T {
   if (draft.tool === 'edit') return draft;
   if (draft.isClosed) return { ...draft, isClosed: false };
   if (lineOf(draft).length === 0) return draft;
   return withRing(draft, { part: 0, ring: 0, corner: 0 }, (ring) => ring.slice(0, -1));
 }
 
-export function closeOutline(draft: ShapeDraft): ShapeDraft {
+export function closeOutline<T extends CornerDraft>(draft: T): T {
   if (draft.tool !== 'draw' || draft.isClosed) return draft;
   return lineOf(draft).length < LEAST_CORNERS ? draft : { ...draft, isClosed: true };
 }
 
 /** A corner at another place; every other corner stays to the last digit. */
-export function moveCorner(draft: ShapeDraft, at: CornerAt, place: GridPlace): ShapeDraft {
+export function moveCorner<T extends CornerDraft>(draft: T, at: CornerAt, place: GridPlace): T {
   if (isSamePlace(ringAt(draft, at)[at.corner], place)) return draft;
   return withRing(draft, at, (ring) => ring.with(at.corner, place));
 }
 
 /** A new corner on the side that begins at one. */
-export function insertCorner(draft: ShapeDraft, after: CornerAt, place: GridPlace): ShapeDraft {
+export function insertCorner<T extends CornerDraft>(
+  draft: T,
+  after: CornerAt,
+  place: GridPlace,
+): T {
   return withRing(draft, after, (ring) => ring.toSpliced(after.corner + 1, 0, place));
 }
 
 /** The middle of the side that begins at a corner, to the millimetre; null where there is no side. */
-export function middleAfter(draft: ShapeDraft, { corner, ...of }: CornerAt): GridPlace | null {
+export function middleAfter(draft: CornerDraft, { corner, ...of }: CornerAt): GridPlace | null {
   const ring = ringAt(draft, { corner, ...of });
   const from = ring[corner];
   const to = ring[corner + 1] ?? (draft.isClosed ? ring[0] : undefined);
@@ -61,18 +67,20 @@ export function middleAfter(draft: ShapeDraft, { corner, ...of }: CornerAt): Gri
 }
 
 /** Why a corner has to stay, or null. */
-export function reasonToKeepCorner(draft: ShapeDraft, at: CornerAt): string | null {
+export function reasonToKeepCorner(draft: CornerDraft, at: CornerAt): string | null {
+  const isEnd = draft.tool === 'line' && ringAt(draft, at).length <= LEAST_POINTS;
+  if (isEnd) return 'A line has two points at least.';
   const isTooFew = draft.isClosed && ringAt(draft, at).length <= LEAST_CORNERS;
   return isTooFew ? 'An outline has three corners at least.' : null;
 }
 
-export function removeCorner(draft: ShapeDraft, at: CornerAt): ShapeDraft {
+export function removeCorner<T extends CornerDraft>(draft: T, at: CornerAt): T {
   if (reasonToKeepCorner(draft, at) !== null) return draft;
   return withRing(draft, at, (ring) => ring.toSpliced(at.corner, 1));
 }
 
 /** Without a courtyard. */
-export function removeHole(draft: ShapeDraft, at: CornerAt): ShapeDraft {
+export function removeHole<T extends CornerDraft>(draft: T, at: CornerAt): T {
   if (at.ring === 0) return draft;
   const parts = draft.parts.map((part, p) => (p === at.part ? part.toSpliced(at.ring, 1) : part));
   return { ...draft, parts };

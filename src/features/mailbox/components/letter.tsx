@@ -27,7 +27,10 @@ export function Letter({ letterId }: { readonly letterId: string }) {
   const html = way === 'sent' ? letter.html : null;
   return (
     <article>
-      <Link to={PATHS.mailbox} className="mb-2 inline-block py-2 text-small max-sm:py-3.5 lg:hidden">
+      <Link
+        to={PATHS.mailbox}
+        className="mb-2 inline-block py-2 text-small max-sm:py-3.5 lg:hidden"
+      >
         All letters
       </Link>
       <h2 className="mb-2 text-h2 break-words">{letter.subject}</h2>

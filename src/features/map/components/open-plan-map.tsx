@@ -4,6 +4,7 @@ import { installArrowKeys } from '../arrow-keys.ts';
 import { createMapController, type MapController } from '../controller/map-controller.ts';
 import { portOfMap } from '../controller/port-of-map.ts';
 import { useDrawing } from '../hooks/use-drawing.ts';
+import { useDrawnLine } from '../hooks/use-drawn-line.ts';
 import { useGridCrosses } from '../hooks/use-grid-crosses.ts';
 import { useMapState } from '../hooks/use-map-state.ts';
 import { useMode } from '../hooks/use-mode.ts';
@@ -45,9 +46,10 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
   const projection = useMemo(() => createGridProjection(gridDefinition), [gridDefinition]);
   const controller = useController(map, plan, marks);
   const { isBusy, hasGaps, forgetGaps } = useMapState(map);
-  const handle = useMemo(() => handleOfMap(map), [map]);
+  const handle = useMemo(() => handleOfMap(map, projection), [map, projection]);
   const giveHandle = useEffectEvent(props.onHandle);
   useGridCrosses(map, controller, projection);
+  useDrawnLine(controller, projection, props.line);
   useDrawing(map, controller, projection, drawing);
   useMode(map, isSelecting ? 'select' : null, { select: onSelect, hover: setHovered });
   useEffect(() => installArrowKeys(map), [map]);
@@ -75,7 +77,7 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
         <ScaleBar map={map} projection={projection} />
       </div>
       <div className="absolute bottom-3 left-3">
-        <CursorPlace map={map} projection={projection} />
+        <CursorPlace map={map} projection={projection} cursor={props.cursor} />
       </div>
       <ZoomHint map={map} plan={plan} />
       {hasGaps && (

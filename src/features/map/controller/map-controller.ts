@@ -20,6 +20,8 @@ export type MapController = {
   readonly mark: (marks: BuildingMarks) => void;
   /** Draws other crosses of the grid. */
   readonly drawGrid: (crosses: GeoJSON.FeatureCollection) => void;
+  /** Draws the designed line and its settlement. */
+  readonly drawLine: (shapes: GeoJSON.FeatureCollection) => void;
   /** Draws what is being drawn by hand. */
   readonly drawDraft: (shapes: GeoJSON.FeatureCollection) => void;
 };
@@ -108,6 +110,9 @@ export function createMapController(map: MapPort): MapController {
     mark,
     drawGrid: (crosses) => {
       map.setData(SOURCES.grid, crosses);
+    },
+    drawLine: (shapes) => {
+      map.setData(SOURCES.line, shapes);
     },
     drawDraft: (shapes) => {
       map.setData(SOURCES.draft, shapes);

@@ -6,6 +6,7 @@ import { draftLayers } from './draft-layers.ts';
 import { gridLayers } from './grid-layers.ts';
 import { groundLayers, harbourLayers } from './ground-layers.ts';
 import { labelLayers } from './label-layers.ts';
+import { lineLabelLayers, lineLayers } from './line-layers.ts';
 import { MAP_COLOURS } from './map-colours.ts';
 import { meantLayers } from './meant-layers.ts';
 import { faintLayers, rowLayers } from './row-layers.ts';
@@ -51,10 +52,12 @@ export function layersOfPlan(plan: MapPlan): LayerSpecification[] {
     background !== null && backgroundLayers(latitude),
     shapes,
     rows !== undefined && rowLayers(),
+    plan.hasLine === true && lineLayers(),
     gridLayers(),
     background !== null && backgroundLabelLayers(),
     basemap !== null && labelLayers(),
     names,
+    plan.hasLine === true && lineLabelLayers(),
     plan.canDraw === true && draftLayers(),
   ];
   return layers.flatMap((group) => (group === false ? [] : group));

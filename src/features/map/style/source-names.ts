@@ -5,6 +5,7 @@ export const SOURCES = {
   grid: 'grid',
   buildings: 'buildings',
   rows: 'rows',
+  line: 'line',
   draft: 'draft',
 } as const;
 

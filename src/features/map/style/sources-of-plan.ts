@@ -23,6 +23,7 @@ export function sourcesOfPlan(plan: MapPlan): SourcesByName {
   return {
     ...Object.fromEntries(named),
     [SOURCES.grid]: shapesOfOurs(),
+    ...(plan.hasLine === true && { [SOURCES.line]: shapesOfOurs() }),
     ...(plan.canDraw === true && { [SOURCES.draft]: shapesOfOurs() }),
   };
 }

@@ -1,0 +1,8 @@
+const KILOMETRE = 1000;
+
+/** A chainage as it is read along a line: `2+645`, metres rounded. */
+export function chainageWords(metres: number): string {
+  const whole = Math.round(metres);
+  const rest = String(whole % KILOMETRE).padStart(3, '0');
+  return `${Math.floor(whole / KILOMETRE)}+${rest}`;
+}

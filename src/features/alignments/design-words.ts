@@ -1,0 +1,34 @@
+import type { AlignmentDesign } from '../../../shared/schemas/alignments.ts';
+import { formatCount } from '../../lib/format-number.ts';
+
+type Range = AlignmentDesign['volumeLoss'];
+
+/** A figure with so many places at most, and a true minus. */
+export function figure(value: number, places: number): string {
+  return formatCount(Number(value.toFixed(places)));
+}
+
+/** A volume loss in %. */
+export function percent(fraction: number): string {
+  return figure(fraction * 100, 3);
+}
+
+/** Low, central and high of something, each in words of its own. */
+export function rangeWords(
+  { low, central, high }: Range,
+  words: (value: number) => string,
+): string {
+  return `${words(low)} / ${words(central)} / ${words(high)}`;
+}
+
+/** One bore, or two and how far apart. */
+export function boresWords({ bores }: Pick<AlignmentDesign, 'bores'>): string {
+  return bores.kind === 'single' ? 'one drive' : `two drives, ${figure(bores.spacing, 2)} m apart`;
+}
+
+/** What follows the later of two drives. */
+export function laterWords({ bores }: Pick<AlignmentDesign, 'bores'>): string | null {
+  return bores.kind === 'single'
+    ? null
+    : `${bores.later === 'left' ? 'Left' : 'Right'} drive later × ${figure(bores.laterFactor, 3)}`;
+}

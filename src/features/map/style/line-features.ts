@@ -1,0 +1,34 @@
+import type { LineShape } from '../map-line.ts';
+import type { GridPlace, GridProjection } from '../place/grid-projection.ts';
+
+type Position = [number, number];
+
+function positions(projection: GridProjection, places: readonly GridPlace[]): Position[] {
+  return places.flatMap((place): Position[] => {
+    const lonLat = projection.toLonLat(place);
+    return lonLat === null ? [] : [[lonLat[0], lonLat[1]]];
+  });
+}
+
+function featureOf(projection: GridProjection, shape: LineShape): GeoJSON.Feature | null {
+  const { kind } = shape;
+  if (kind === 'chainage') {
+    const [coordinates] = positions(projection, [shape.place]);
+    if (coordinates === undefined) return null;
+    const properties = { kind, text: shape.text };
+    return { type: 'Feature', properties, geometry: { type: 'Point', coordinates } };
+  }
+  const properties = kind === 'contour' ? { kind, level: shape.level } : { kind };
+  const coordinates = positions(projection, shape.places);
+  if (coordinates.length < 2) return null;
+  return { type: 'Feature', properties, geometry: { type: 'LineString', coordinates } };
+}
+
+/** A designed line and its settlement, as the map draws it. */
+export function lineFeatures(
+  projection: GridProjection,
+  shapes: readonly LineShape[],
+): GeoJSON.FeatureCollection {
+  const features = shapes.flatMap((shape) => featureOf(projection, shape) ?? []);
+  return { type: 'FeatureCollection', features };
+}

@@ -1,0 +1,112 @@
+import type { ExpressionSpecification, LayerSpecification } from 'maplibre-gl';
+import type { LineShape } from '../map-line.ts';
+import { LABEL_FONTS } from './label-fonts.ts';
+import { MAP_COLOURS } from './map-colours.ts';
+import { SOURCES } from './source-names.ts';
+
+const LINE = { source: SOURCES.line } as const;
+const { ink, bandLine, clay, paperRaised } = MAP_COLOURS;
+const LEVEL: ExpressionSpecification = ['get', 'level'];
+/** In mm: the outermost contour is dashed, the one that people ask for first is drawn heavier. */
+const [OUTERMOST, EMPHASISED] = [1, 10];
+
+function kind(name: LineShape['kind']): ExpressionSpecification {
+  return ['==', ['get', 'kind'], name];
+}
+
+function contours(): LayerSpecification[] {
+  return [
+    {
+      id: 'line-contours',
+      type: 'line',
+      ...LINE,
+      filter: ['all', kind('contour'), ['!=', LEVEL, OUTERMOST]],
+      layout: { 'line-join': 'round' },
+      paint: {
+        'line-color': bandLine,
+        'line-width': ['case', ['==', LEVEL, EMPHASISED], 2, 1],
+      },
+    },
+    {
+      id: 'line-outermost-contours',
+      type: 'line',
+      ...LINE,
+      filter: ['all', kind('contour'), ['==', LEVEL, OUTERMOST]],
+      layout: { 'line-join': 'round' },
+      paint: { 'line-color': bandLine, 'line-width': 1, 'line-dasharray': [5, 3] },
+    },
+  ];
+}
+
+function drives(): LayerSpecification[] {
+  return [
+    {
+      id: 'line-edges',
+      type: 'line',
+      ...LINE,
+      filter: kind('edge'),
+      paint: { 'line-color': ink, 'line-width': 1.1, 'line-dasharray': [1, 2] },
+    },
+    {
+      id: 'line-axes',
+      type: 'line',
+      ...LINE,
+      filter: kind('axis'),
+      paint: { 'line-color': ink, 'line-width': 1.5, 'line-dasharray': [8, 2.2, 1.4, 2.2] },
+    },
+    {
+      id: 'line-ticks',
+      type: 'line',
+      ...LINE,
+      filter: kind('tick'),
+      paint: { 'line-color': ink, 'line-width': 1.3 },
+    },
+    {
+      id: 'line-section',
+      type: 'line',
+      ...LINE,
+      filter: kind('section'),
+      paint: { 'line-color': clay, 'line-width': 1.4 },
+    },
+  ];
+}
+
+/** Contours of settlement, edges, axes and chainages of a designed line. */
+export function lineLayers(): LayerSpecification[] {
+  return [...contours(), ...drives()];
+}
+
+/** What is written on them; what meets something else is left out. */
+export function lineLabelLayers(): LayerSpecification[] {
+  return [
+    {
+      id: 'line-contour-levels',
+      type: 'symbol',
+      ...LINE,
+      filter: kind('contour'),
+      layout: {
+        'symbol-placement': 'line',
+        'symbol-spacing': 300,
+        'text-field': ['case', ['==', LEVEL, EMPHASISED], '10 mm', ['to-string', LEVEL]],
+        'text-font': LABEL_FONTS.semibold,
+        'text-size': 10.5,
+        'text-max-angle': 40,
+        'text-padding': 3,
+      },
+      paint: { 'text-color': bandLine, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
+    },
+    {
+      id: 'line-chainages',
+      type: 'symbol',
+      ...LINE,
+      filter: kind('chainage'),
+      layout: {
+        'text-field': ['get', 'text'],
+        'text-font': LABEL_FONTS.semibold,
+        'text-size': 11,
+        'text-padding': 3,
+      },
+      paint: { 'text-color': ink, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
+    },
+  ];
+}
