@@ -1,4 +1,4 @@
-import { DATUM_ACCURACIES } from './datum-accuracies.ts';
+import { DATUM_ACCURACIES, SYSTEM_ACCURACIES } from './datum-accuracies.ts';
 import type { FileCrs } from './file-crs.ts';
 
 type Side = Pick<FileCrs, 'code' | 'name' | 'datum' | 'grid' | 'accuracy'>;
@@ -12,8 +12,8 @@ export type ShiftAccuracy = {
 /** Where a grid's stand-in is not in the table, so many metres are assumed. */
 const STAND_IN = 5;
 
-function metresOf({ datum, grid, accuracy }: Side): number | null {
-  const known = DATUM_ACCURACIES[datum]?.metres;
+function metresOf({ code, datum, grid, accuracy }: Side): number | null {
+  const known = (SYSTEM_ACCURACIES[code] ?? DATUM_ACCURACIES[datum])?.metres;
   if (known !== undefined) return known;
   return grid === null ? accuracy : Math.max(STAND_IN, accuracy ?? 0);
 }

@@ -19,7 +19,13 @@ function judgedCrs(
   { count, offGlobe }: Survey,
 ): Pick<Source, 'crs' | 'notes'> {
   if (crs !== WGS84 || offGlobe * 2 < count) return { crs, notes };
-  const note = 'GeoJSON without a `crs` should be in longitude and latitude, and this one is not.';
+  const which =
+    offGlobe === count
+      ? 'this one'
+      : offGlobe * 2 === count
+        ? 'half of this one'
+        : 'most of this one';
+  const note = `GeoJSON without a \`crs\` should be in longitude and latitude, and ${which} is not.`;
   return { crs: null, notes: [...notes, note] };
 }
 

@@ -2,7 +2,10 @@ import { IMPORT_LIMITS } from '../../shared/schemas/imports.ts';
 import { AppError } from '../errors.ts';
 import { noProperties } from './flat-properties.ts';
 import { looksLikeGeometry, readGeometryText, sridOfText } from './geometry/geometry-text.ts';
+import { looksLikeGeojson } from './geometry/geojson-text.ts';
 import { RowFault } from './geometry/row-fault.ts';
+import { WGS84 } from './named-crs.ts';
+import { giveOnlyPoints } from './point-columns.ts';
 import type { FileCrs, Scalar, SourceRow } from './source.ts';
 
 /** A record of a table as people see it: its number, and a value for each column. */
@@ -10,7 +13,7 @@ export type TableRecord = { readonly row: number; readonly values: readonly Scal
 
 export type Heading = {
   readonly columns: readonly string[];
-  /** Which column holds footprints in well-known text or binary. */
+  /** Which column holds footprints in well-known text, binary or GeoJSON. */
   readonly wkt: number | undefined;
   readonly crs: FileCrs | null;
 };
@@ -55,7 +58,8 @@ function crsOf(wkt: number | undefined, sample: readonly TableRecord[]): FileCrs
   if (wkt === undefined) return null;
   const texts = sample.map(({ values }) => values[wkt]).filter((one) => typeof one === 'string');
   const code = texts.map(sridOfText).find((one) => one !== undefined && one > 0);
-  return code === undefined ? null : { code, said: `SRID=${code}` };
+  if (code !== undefined) return { code, said: `SRID=${code}` };
+  return texts.some(looksLikeGeojson) ? WGS84 : null;
 }
 
 /** What the heading of a table says, and which column of a sample of its rows holds footprints. */
@@ -74,6 +78,11 @@ export function headingOf(names: readonly Scalar[], sample: readonly TableRecord
   if (width === 1 && wkt === undefined) {
     const message =
       'The file is no table that can be read: it has one column. Separate values by commas, semicolons or tabs.';
+    throw new AppError('unreadable', message);
+  }
+  if (wkt === undefined && giveOnlyPoints(columns)) {
+    const message =
+      'The table holds points by X and Y only, and points are not footprints. Export the outlines of the buildings as polygons.';
     throw new AppError('unreadable', message);
   }
   return { columns, wkt, crs: crsOf(wkt, sample) };

@@ -9,6 +9,22 @@ function markedEncoding(bytes: Buffer): 'utf-16le' | 'utf-16be' | undefined {
   return bytes[0] === 0xfe && bytes[1] === 0xff ? 'utf-16be' : undefined;
 }
 
+/** The first letters, which name columns or open brackets, are Latin for the most part. */
+const SAMPLE = 512;
+
+/** UTF-16 without its mark has a zero beside most letters, always on the same side. */
+function unmarkedEncoding(bytes: Buffer): 'utf-16le' | 'utf-16be' | undefined {
+  if (bytes.length < 4 || bytes.length % 2 !== 0) return undefined;
+  const zeros = [0, 0];
+  const sample = bytes.subarray(0, SAMPLE);
+  for (const [at, byte] of sample.entries())
+    if (byte === 0) zeros[at % 2] = (zeros[at % 2] ?? 0) + 1;
+  const [first = 0, second = 0] = zeros;
+  const most = sample.length / 4;
+  if (second > most && first === 0) return 'utf-16le';
+  return first > most && second === 0 ? 'utf-16be' : undefined;
+}
+
 function recoded(bytes: Buffer, encoding: string): Buffer {
   const decoder = new TextDecoder(encoding);
   const parts: Buffer[] = [];
@@ -25,11 +41,11 @@ function isBinary(bytes: Buffer): boolean {
 }
 
 /**
- * A text in UTF-8 without its mark. UTF-16 is told by its mark; what is neither is `otherwise`, or
- * refused.
+ * A text in UTF-8 without its mark. UTF-16 is told by its mark or by its zeros; what is neither is
+ * `otherwise`, or refused.
  */
 export function utf8Bytes(bytes: Buffer, otherwise?: 'windows-1252'): Buffer {
-  const marked = markedEncoding(bytes);
+  const marked = markedEncoding(bytes) ?? unmarkedEncoding(bytes);
   if (marked !== undefined) return recoded(bytes, marked);
   const isMarked = bytes[0] === 0xef && bytes[1] === 0xbb && bytes[2] === 0xbf;
   const text = isMarked ? bytes.subarray(3) : bytes;

@@ -16,14 +16,28 @@ const MOST = 0.8;
 /** Beside what a scheme holds already, in degrees: some 50 km. */
 const NEAR = 0.6;
 
+/** Whether what was said of the order of a file's axes is that they were exchanged. */
+export function wereExchanged({ axes }: { readonly axes: string | null }): boolean {
+  return axes?.includes('were exchanged') === true;
+}
+
+const BOTH = 'Both orders of the axes are possible: look at the map before you bring them in.';
+
+function howMuch(part: number): string {
+  if (part > 0.5) return 'Most';
+  return part === 0.5 ? 'Half' : 'Part';
+}
+
 function share(points: readonly Point[], isRight: (point: Point) => boolean): number {
   return points.filter(isRight).length / Math.max(1, points.length);
 }
 
 function fits(points: readonly Point[], placement: Placement, around: LonLatBox | undefined) {
   const lonLats = points.map((point) => placement.toLonLat(placement.toGrid(point)));
+  const inside = share(lonLats, placement.isInArea);
   return {
-    inArea: share(lonLats, placement.isInArea) >= MOST,
+    inside,
+    inArea: inside >= MOST,
     isNear:
       around !== undefined && share(lonLats, (one) => withinBounds(around, one, NEAR)) >= MOST,
   };
@@ -59,8 +73,12 @@ export async function axesOrder(
     return { isExchanged: true, words };
   }
   if (!given.inArea && !exchanged.inArea) {
-    const words = `Most of the file lies outside the area of ${given.name}, whichever axis comes first. Check the system.`;
+    const outside = howMuch(1 - Math.max(given.inside, exchanged.inside));
+    const words = `${outside} of the file lies outside the area of ${given.name}, whichever axis comes first. Check the system.`;
     return { isExchanged: false, words };
+  }
+  if (given.inArea && exchanged.inArea && given.isNear === exchanged.isNear) {
+    return { isExchanged: false, words: BOTH };
   }
   return { isExchanged: false, words: null };
 }

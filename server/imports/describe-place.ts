@@ -1,6 +1,7 @@
 import type { ImportAnswer, ImportOptions } from '../../shared/schemas/imports.ts';
 import { findEntry } from '../crs/find-crs.ts';
 import { shiftAccuracy } from '../crs/shift-accuracy.ts';
+import { wereExchanged } from './axes-order.ts';
 import type { SaidPlace } from '../models/register-import.ts';
 import type { Placement } from './placement.ts';
 
@@ -12,6 +13,12 @@ export function unknownPlace({ said, candidates }: SaidPlace): PlaceFound {
   const words = `${said} ${choose}, by number or name.`;
   const nothing = { crs: null, name: null, accuracy: null };
   return { ...nothing, from: 'nobody', candidates: [...candidates], words };
+}
+
+/** What was found of the order of its axes, where it is as it was found. */
+function axesWords(said: SaidPlace, exchangeAxes: boolean): string | null {
+  if (exchangeAxes === wereExchanged(said)) return said.axes;
+  return exchangeAxes ? 'Its axes are exchanged.' : null;
 }
 
 /** How the place of a file was found, how well it is known, and what was done to it, in words. */
@@ -26,8 +33,7 @@ export function describePlace(
   const sentences = [
     isSaid ? said.said : `EPSG:${file.code} (${file.name}) was chosen.`,
     words,
-    isSaid && exchangeAxes ? (said.axes ?? 'Its axes are exchanged.') : exchangeAxes && 'Its axes are exchanged.',
-    isSaid && !exchangeAxes && said.axes !== null && !said.axes.includes('exchanged') && said.axes,
+    axesWords(said, exchangeAxes),
     (east !== 0 || north !== 0) && `Shifted by ${east} m east and ${north} m north.`,
   ]; // prettier-ignore
   return {

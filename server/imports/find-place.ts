@@ -1,4 +1,5 @@
 import { findFileCrs } from '../crs/file-crs.ts';
+import { isProj4, matchProj4 } from '../crs/match-proj4.ts';
 import { matchWkt } from '../crs/match-wkt.ts';
 import type { FileCrs as FileSays } from '../importers/source.ts';
 import type { SaidPlace } from '../models/register-import.ts';
@@ -10,7 +11,7 @@ async function found({ code, wkt }: FileSays): Promise<Found> {
   const listed = code === undefined ? undefined : await findFileCrs(code);
   if (listed !== undefined && 'crs' in listed) return { crs: listed.crs.code, candidates: [] };
   if (wkt === undefined) return { crs: null, candidates: [] };
-  const match = await matchWkt(wkt);
+  const match = isProj4(wkt) ? await matchProj4(wkt) : await matchWkt(wkt);
   return { crs: match.code, candidates: match.candidates };
 }
 

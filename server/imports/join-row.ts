@@ -1,5 +1,6 @@
 import { BUILDING_FIELD_NAMES, type BuildingValue } from '../../shared/schemas/building-fields.ts';
 import type { ImportOptions, ImportRow } from '../../shared/schemas/imports.ts';
+import type { FootprintRings } from '../models/building-footprint.ts';
 import type { CheckedRow, Taking } from '../models/checked-rows.ts';
 import type { KnownBuilding, RemovedBuilding } from '../models/known-buildings.ts';
 import { mergeBuilding, type Merged, type MergeValues } from '../register/merge-building.ts';
@@ -7,6 +8,7 @@ import { cleanRings } from './clean-rings.ts';
 import { footprintHash } from './footprint-hash.ts';
 import type { JudgedRow } from './judge-row.ts';
 import { REMARKS } from './remarks.ts';
+import { isSameFootprint } from './same-footprint.ts';
 
 type Joining = {
   readonly settle: ImportOptions['settle'];
@@ -25,10 +27,24 @@ function said({ values, drawn }: JudgedRow): MergeValues {
   return { ...values, ...(drawn !== null && { footprint: drawn.hash }) };
 }
 
+/** The same where the register's footprint is known: figures that a format rounds are no change. */
+function saidAgainst(
+  row: JudgedRow,
+  ours: MergeValues,
+  clean: FootprintRings | undefined,
+): MergeValues {
+  const { drawn } = row;
+  const isSame = clean !== undefined && drawn !== null && isSameFootprint(clean, drawn.footprint);
+  return { ...said(row), ...(isSame && { footprint: ours.footprint ?? null }) };
+}
+
+function cleanFootprint({ footprint }: KnownBuilding): FootprintRings | undefined {
+  return footprint === null ? undefined : cleanRings(footprint);
+}
+
 /** What the register holds. A level taken from the scheme's ground is nobody's word. */
-function held(building: KnownBuilding): MergeValues {
-  const { footprint, groundLevelFrom } = building;
-  const clean = footprint === null ? undefined : cleanRings(footprint);
+function held(building: KnownBuilding, clean: FootprintRings | undefined): MergeValues {
+  const { groundLevelFrom } = building;
   const values: Record<string, BuildingValue> = {};
   for (const field of BUILDING_FIELD_NAMES) values[field] = building[field];
   if (groundLevelFrom === 'ground') values.groundLevel = null;
@@ -84,10 +100,12 @@ function newRow(row: JudgedRow, removed: RemovedBuilding | undefined): CheckedRo
 }
 
 function mergedRow(row: JudgedRow, building: KnownBuilding, { settle }: Joining): CheckedRow {
+  const clean = cleanFootprint(building);
+  const ours = held(building, clean);
   const merged = mergeBuilding({
-    ours: held(building),
+    ours,
     base: building.imported,
-    theirs: said(row),
+    theirs: saidAgainst(row, ours, clean),
     settle: settling(settle, building.reference),
   });
   const taking: Taking = {
@@ -116,5 +134,5 @@ export function joinRow(
   if (row.isRefused || reference === null) return refusedRow(row, [], building?.id ?? null);
   if (building !== undefined) return mergedRow(row, building, joining);
   if (joining.mayCreate) return newRow(row, joining.removed.get(reference));
-  return refusedRow(row, [REMARKS.noSuchBuilding(reference)], null);
+  return refusedRow(row, [REMARKS.noSuchBuilding(reference, row.isPoint)], null);
 }

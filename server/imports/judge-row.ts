@@ -1,11 +1,13 @@
 import { boundingBox, type Box } from '../../shared/geometry/bounding-box.ts';
 import type { ImportOptions } from '../../shared/schemas/imports.ts';
+import { givePoints } from '../importers/point-columns.ts';
 import type { UploadRow } from '../importers/upload.ts';
 import type { FootprintRings } from '../models/building-footprint.ts';
 import { checkFootprint } from './check-footprint.ts';
 import type { Crowd } from './crowd.ts';
 import { footprintHash } from './footprint-hash.ts';
 import type { FootprintStore } from './footprint-store.ts';
+import { looksLikeDegrees } from './looks-like-degrees.ts';
 import type { Numbering } from './numbering.ts';
 import { eachCorner, type Placement } from './placement.ts';
 import { readReference, readValues, type ReadValues } from './read-values.ts';
@@ -40,11 +42,16 @@ export type JudgedRow = {
   readonly values: ReadValues['values'];
   readonly drawn: JudgedFootprint | null;
   readonly isMended: boolean;
+  /** Its values give a point, where footprints are wanted or known. */
+  readonly isPoint: boolean;
 };
 
 type Drawn = Pick<JudgedRow, 'drawn' | 'isRefused' | 'isMended' | 'remarks'>;
 
 const NOT_DRAWN = { drawn: null, isRefused: true, isMended: false } as const;
+
+/** No building is as wide, in degrees: one that seems to be lies on both sides of the date line. */
+const HALF_WAY_ROUND = 180;
 
 function middleOf({ west, south, east, north }: Box): readonly [number, number] {
   return [(west + east) / 2, (south + north) / 2];
@@ -86,11 +93,17 @@ function drawFootprint(memory: CheckMemory, geometry: FootprintRings, row: numbe
   }
   const checked = checkFootprint(placed, options.mend);
   const { footprint, area, isMended } = checked;
+  if (checked.isRefused && !placement.file.isInDegrees && looksLikeDegrees(geometry)) {
+    return { ...NOT_DRAWN, remarks: [REMARKS.degrees] };
+  }
   if (footprint === undefined) return { ...NOT_DRAWN, remarks: checked.remarks };
   const onMap = laidOnMap(footprint, placement);
   const drawn = { footprint, area, ...onMap, hash: footprintHash(footprint) };
   if (onMap.box === null) {
     return { ...NOT_DRAWN, isMended, remarks: [REMARKS.unplaced(placement.scheme.name)] };
+  }
+  if (onMap.box.east - onMap.box.west > HALF_WAY_ROUND) {
+    return { ...NOT_DRAWN, isMended, remarks: [REMARKS.acrossDateLine] };
   }
   const grid = middleOf(boundingBox(footprint.flat(2)));
   const fault = placeFault({ ...memory, placement }, geometry, grid, middleOf(onMap.box));
@@ -142,5 +155,6 @@ export function judgeRow(memory: CheckMemory, staged: UploadRow): JudgedRow {
     values: reading.values,
     drawn: drawing.drawn,
     isMended: drawing.isMended,
+    isPoint: memory.placement === undefined && givePoints(Object.keys(staged.properties)),
   };
 }

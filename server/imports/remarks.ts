@@ -34,14 +34,17 @@ export const REMARKS = {
   longReference: 'The reference is longer than 60 letters. Shorten it.',
   sameReference: (reference: string, row: number) =>
     `The reference ${quoted(reference)} stands in row ${row} already. Give each building its own.`,
-  noSuchBuilding: (reference: string) =>
-    `No building of the register has the reference ${quoted(reference)}. Correct it, or import its footprint first.`,
+  noSuchBuilding: (reference: string, isPoint: boolean) =>
+    `No building of the register has the reference ${quoted(reference)}. ${isPoint ? 'Its X and Y are a point, which is no footprint. ' : ''}Correct it, or import its footprint first.`,
   unreadable: (at: Cell, text: string, why: string) =>
     `${cell(at)}: ${quoted(text)} ${why}. ${LEFT}`,
   commaRead: (at: Cell, text: string, value: number) =>
     `${cell(at)}: ${quoted(text)} was read as ${value}, with a decimal comma.`,
   longText: (at: Cell) => `${cell(at)}: the text is longer than 300 letters and was cut.`,
   fewCorners: 'A ring has fewer than three corners that differ. Draw it anew.',
+  degrees: 'These look like longitude and latitude: choose a system in degrees.',
+  acrossDateLine:
+    'The footprint lies across 180° of longitude, where the map is cut, and cannot be kept. Leave it out, or bring in the part on one side.',
   unplaced: (system: string) =>
     `The coordinates cannot be placed in ${system}. Check the system of the file.`,
   outside: (system: string) =>

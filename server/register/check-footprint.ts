@@ -2,6 +2,7 @@ import { footprintArea } from '../../shared/building/footprint-area.ts';
 import { pointInPolygon } from '../../shared/geometry/point-in-polygon.ts';
 import { ringCrossing } from '../../shared/geometry/ring-crossing.ts';
 import { AppError } from '../errors.ts';
+import { lappedRings } from '../imports/lapped-rings.ts';
 import type { FootprintRings } from '../models/building-footprint.ts';
 
 type Point = readonly [number, number];
@@ -32,27 +33,30 @@ function words([east, north]: Point): string {
   return `E ${east.toFixed(1)}, N ${north.toFixed(1)}`;
 }
 
-function isInside([corner]: Ring, part: readonly Ring[]): boolean {
-  return corner !== undefined && pointInPolygon(corner, part);
+/** By any corner of a hole, for others may stand on the edge of its building. */
+function hasHoleOutside(footprint: FootprintRings): boolean {
+  return footprint.some(([outer = [], ...holes]) => {
+    return !holes.every((hole) => hole.some((corner) => pointInPolygon(corner, [outer])));
+  });
 }
 
-function checkPlaces(footprint: FootprintRings): void {
-  for (const [k, [outer = [], ...holes]] of footprint.entries()) {
-    if (!holes.every((hole) => isInside(hole, [outer]))) {
-      throw refusal('A courtyard lies outside its building.');
-    }
-    if (footprint.some((part, other) => other !== k && isInside(outer, part))) {
-      throw refusal('Two parts lie over each other.');
-    }
-  }
+function checkRings(footprint: FootprintRings): void {
+  const crossing = ringCrossing(footprint.flat(), 0);
+  if (crossing !== undefined) throw refusal(`The outline crosses itself near ${words(crossing)}.`);
+  if (hasHoleOutside(footprint)) throw refusal('A courtyard lies outside its building.');
+  const lapped = lappedRings(footprint);
+  if (lapped === undefined) return;
+  throw refusal(
+    footprint.flat().length === 1
+      ? `The outline crosses itself near ${words(lapped)}.`
+      : `Parts or courtyards lie over each other near ${words(lapped)}.`,
+  );
 }
 
 /** A footprint drawn by hand made tidy, or a refusal that says what is wrong with it and where. */
 export function checkedFootprint(given: FootprintRings): FootprintRings {
   const footprint = given.map((part) => part.map(tidied));
-  const crossing = ringCrossing(footprint.flat(), 0);
-  if (crossing !== undefined) throw refusal(`The outline crosses itself near ${words(crossing)}.`);
-  checkPlaces(footprint);
+  checkRings(footprint);
   const area = footprintArea(footprint);
   if (area < LEAST_AREA) throw refusal('The building is smaller than 1 m².');
   if (area > MOST_AREA) throw refusal('The building is larger than 200,000 m².');

@@ -1,3 +1,4 @@
+import { looksLikeGeojson, readGeojsonText, sridOfGeojson } from './geojson-text.ts';
 import { readWkb, sridOfWkb } from './read-wkb.ts';
 import { looksLikeWkt, readWkt, sridOf } from './read-wkt.ts';
 
@@ -14,17 +15,19 @@ function hexBytes(text: string): Buffer | undefined {
 
 /** Whether a text of a table holds a geometry. */
 export function looksLikeGeometry(text: string): boolean {
-  return looksLikeWkt(text) || hexBytes(text) !== undefined;
+  return looksLikeWkt(text) || looksLikeGeojson(text) || hexBytes(text) !== undefined;
 }
 
 /** The number of the system that a geometry in a text gives itself. */
 export function sridOfText(text: string): number | undefined {
+  if (looksLikeGeojson(text)) return sridOfGeojson(text);
   const bytes = hexBytes(text);
   return bytes === undefined ? sridOf(text) : sridOfWkb(bytes);
 }
 
 /** Reads a geometry of a table, or throws a RowFault. */
 export function readGeometryText(text: string): unknown {
+  if (looksLikeGeojson(text)) return readGeojsonText(text);
   const bytes = hexBytes(text);
   return bytes === undefined ? readWkt(text) : readWkb(bytes);
 }

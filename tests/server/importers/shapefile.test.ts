@@ -9,7 +9,11 @@ function box(x: number, y: number, size: number): readonly Point[] {
   return [[x, y], [x, y + size], [x + size, y + size], [x + size, y], [x, y]]; // prettier-ignore
 }
 
-function archive(shapes: readonly Shape[], table?: Buffer, beside: Record<string, string> = {}) {
+function archive(
+  shapes: readonly Shape[],
+  table?: Buffer,
+  beside: Record<string, string | Buffer> = {},
+) {
   return zipFile([
     { name: 'Town/B.SHP', content: shpFile('areas', shapes) },
     ...(table === undefined ? [] : [{ name: 'Town/b.dbf', content: table }]),
@@ -107,6 +111,15 @@ describe('shapes', () => {
     ['\uFEFFGEOGCRS["Z"]', { wkt: 'GEOGCRS["Z"]', said: 'Z' }, undefined],
     ['<html>404</html>', null, /holds a web page instead of a system/],
     ['EPSG 25830', null, /describes no system/],
+    ['EPSG:25830\n', { code: 25830, said: 'EPSG:25830' }, undefined],
+    ['+proj=utm +zone=30', { wkt: '+proj=utm +zone=30', said: '+proj=utm +zone=30' }, undefined],
+    [
+      '+init=epsg:25830',
+      { code: 25830, wkt: '+init=epsg:25830', said: '+init=epsg:25830' },
+      undefined,
+    ],
+    [Buffer.from('PROJCS["X"]', 'utf16le'), { wkt: 'PROJCS["X"]', said: 'X' }, undefined],
+    [Buffer.alloc(200), null, /describes no system/],
     [undefined, null, /has no \.prj file/],
   ])('beside a .prj %j', async (prj, crs, note) => {
     const upload = await uploadOf(archive([ONE], undefined, prj === undefined ? {} : { prj }));

@@ -1,7 +1,7 @@
 import ExcelJS from 'exceljs';
 import { describe, expect, test } from 'vitest';
 import { sheetOf, workbookOf } from '../../../scripts/bench/hostile/archive-files.ts';
-import { rowsOf, uploadOf } from '../../support/upload-of.ts';
+import { refusalOf, rowsOf, uploadOf } from '../../support/upload-of.ts';
 
 const POLYGON = 'POLYGON((3 54,3.1 54,3.1 54.1,3 54))';
 const RINGS = [[[[3, 54], [3.1, 54], [3.1, 54.1], [3, 54]]]]; // prettier-ignore
@@ -40,6 +40,11 @@ describe('CSV', () => {
     }
   });
 
+  test.each([false, true])('is read in UTF-16 without its mark (turned: %j)', async (isTurned) => {
+    const bytes = Buffer.from('reference,street\n1,Ålgade “bajo”\n', 'utf16le');
+    expect(await values(isTurned ? bytes.swap16() : bytes)).toEqual([[2, '1', 'Ålgade “bajo”']]);
+  });
+
   test('has names for columns that have none, or the same', async () => {
     const upload = await uploadOf('a,,a,a,__proto__\n1,2,3,4,5\n');
     expect(upload.columns).toEqual(['a', 'column 2', 'a (2)', 'a (3)', '__proto__']);
@@ -73,6 +78,34 @@ describe('CSV', () => {
 
   test('of points by X and Y holds values', async () => {
     expect((await uploadOf('x,y,name\n1,2,a\n')).kind).toBe('values');
+    expect(await refusalOf('X_Coord;Y_Coord;Z\n1;2;3\n')).toContain('points are not footprints');
+  });
+
+  test.each([
+    ['', 4326],
+    [',"crs":{"type":"name","properties":{"name":"EPSG:25830"}}', 25830],
+  ])('finds footprints in GeoJSON%s', async (more, code) => {
+    const polygon = `{"type":"Polygon"${more},"coordinates":${JSON.stringify(RINGS[0])}}`;
+    const texts = [polygon, `{"type":"Feature","geometry":${polygon}}`, polygon.slice(0, -9), '{"type":"Point","coordinates":[1,2]}']; // prettier-ignore
+    const file = ['ref,geom', ...texts.map((text, k) => `${k},"${text.replaceAll('"', '""')}"`)].join('\n'); // prettier-ignore
+    const upload = await uploadOf(file);
+    expect([upload.kind, upload.columns, upload.crs?.code]).toEqual(['footprints', ['ref'], code]);
+    const rows = await rowsOf(file);
+    expect(rows.map(({ geometry }) => geometry)).toEqual([RINGS, RINGS, null, null]);
+    expect(rows.map(({ fault }) => fault)).toEqual([
+      null,
+      null,
+      'Its GeoJSON is damaged: it may be cut off.',
+      'It is a point: a footprint is a polygon.',
+    ]);
+  });
+
+  test('does not take GeoJSON that is nested without end', async () => {
+    const deep = '{"type":"GeometryCollection","geometries":['.repeat(20_000);
+    const good = '{"type":"Polygon","coordinates":[[[3,54],[3.1,54],[3.1,54.1],[3,54]]]}';
+    const file = `ref,geom\n${[deep, good].map((text, k) => `${k},"${text.replaceAll('"', '""')}"`).join('\n')}`;
+    const [first] = await rowsOf(file);
+    expect(first?.fault).toBe('Its GeoJSON is nested too deep.');
   });
 });
 

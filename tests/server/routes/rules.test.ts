@@ -27,10 +27,14 @@ function asAdministrator() {
   return signIn(app(), administrator);
 }
 
+let made = 0;
+
 /** A scheme made through the front door, with its first rules. */
 async function aSchemeWithRules(): Promise<Scheme> {
   const agent = await asAdministrator();
-  const answer = await agent.post('/api/schemes').send({ name: 'With rules', crs: 32631 });
+  made += 1;
+  const named = { name: `With rules ${made}`, crs: 32631 };
+  const answer = await agent.post('/api/schemes').send(named);
   return Scheme.findByPk(schemeSchema.parse(answer.body).id, { rejectOnEmpty: true });
 }
 
