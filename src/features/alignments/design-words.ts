@@ -32,3 +32,14 @@ export function laterWords({ bores }: Pick<AlignmentDesign, 'bores'>): string | 
     ? null
     : `${bores.later === 'left' ? 'Left' : 'Right'} drive later × ${figure(bores.laterFactor, 3)}`;
 }
+
+/** What settlement is worked out from, in the words of the line under the bar. */
+export function designParts(design: AlignmentDesign): string[] {
+  const { diameter, volumeLoss, troughWidth, intervals } = design;
+  const own = intervals.length > 0 ? ', intervals apart' : '';
+  return [
+    `D ${figure(diameter, 2)} m, ${boresWords(design)}`,
+    `Volume loss ${rangeWords(volumeLoss, percent)} %, K ${rangeWords(troughWidth, (k) => figure(k, 3))}${own}`,
+    ...[laterWords(design)].filter((words) => words !== null),
+  ];
+}

@@ -10,6 +10,7 @@ const SETTINGS = 'the server’s settings';
 const WITHOUT_PERSON: Readonly<Record<string, string>> = {
   'create person': 'the demo',
   'create scheme': 'the demo',
+  'create alignment': 'the demo',
   'change roles': 'the demo',
   'change register': 'the demo',
   'invite person': SETTINGS,

@@ -2,6 +2,6 @@ import type { GridPlace } from './place/grid-projection.ts';
 
 /** What is seen of a designed line and its settlement, in the grid. Levels of contours are in mm. */
 export type LineShape =
-  | { readonly kind: 'axis' | 'edge' | 'tick' | 'section'; readonly places: readonly GridPlace[] }
+  | { readonly kind: 'axis' | 'edge' | 'tick'; readonly places: readonly GridPlace[] }
   | { readonly kind: 'contour'; readonly places: readonly GridPlace[]; readonly level: number }
   | { readonly kind: 'chainage'; readonly place: GridPlace; readonly text: string };

@@ -23,7 +23,9 @@ export async function openPlan(visitor: Visitor): Promise<string> {
 
 /** What the side of the map says is selected. */
 export function selectedName({ page }: Visitor): Promise<string | null> {
-  return page.getByRole('complementary').getByRole('heading', { level: 2 }).textContent();
+  const headings = page.getByRole('complementary').getByRole('heading', { level: 2 });
+  // the option of the line stands under it
+  return headings.first().textContent();
 }
 
 /** Waits until the side of the map shows a building. */

@@ -5,7 +5,7 @@ import { useDelayedValue } from '../../../hooks/use-delayed-value.ts';
 import { rulesQuery } from '../../rules/api/list-rules.ts';
 import type { LineShape } from '../../map/map-line.ts';
 import { shapesOfContours, shapesOfDesign } from '../line-shapes.ts';
-import type { Asked, Case } from '../preview/preview-work.ts';
+import type { Case } from '../preview/preview-work.ts';
 import { useWorked } from './use-worked.ts';
 
 /** How long a line has to rest before its settlement is worked out again. */
@@ -28,11 +28,7 @@ export function useCase(schemeId: string, design: AlignmentDesign | null): Case 
 /** What is seen of a line: its drives at once, its settlement as soon as it is worked out. */
 export function usePreview(design: AlignmentDesign | null, preview: Case | null) {
   const settled = useDelayedValue(preview, REST);
-  const asked = useMemo<Asked | null>(
-    () => (settled === null ? null : { kind: 'contours', ...settled }),
-    [settled],
-  );
-  const worked = useWorked(asked)?.worked;
+  const worked = useWorked(settled);
   const drives = useMemo(() => (design === null ? NOTHING : shapesOfDesign(design)), [design]);
   const contours = useMemo(
     () => (worked?.kind === 'contours' ? shapesOfContours(worked.contours) : NOTHING),

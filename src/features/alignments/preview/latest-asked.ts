@@ -1,35 +1,32 @@
-import type { Asked, Worked } from './preview-work.ts';
+import type { Case, Worked } from './preview-work.ts';
 
-/** What a worker is asked of; tests give one that only notes it. */
-export type WorkerPort = Pick<Worker, 'postMessage' | 'terminate' | 'addEventListener'>;
+/** What is asked of a worker; tests give one that only notes it. */
+export type WorkerPort = Pick<Worker, 'postMessage' | 'terminate'> & {
+  readonly addEventListener: (
+    type: 'message',
+    listener: (event: MessageEvent<Worked>) => void,
+  ) => void;
+};
 
-/**
- * Asks a worker one thing at a time: while it is busy only the newest question waits, and an answer comes
- * with its question.
- */
-export function createLatestAsked(
-  worker: WorkerPort,
-  onWorked: (worked: Worked, asked: Asked) => void,
-) {
-  let [busyWith, waiting]: [Asked | null, Asked | null] = [null, null];
+/** Asks a worker one thing at a time: while it is busy, only the newest question waits. */
+export function createLatestAsked(worker: WorkerPort, onWorked: (worked: Worked) => void) {
+  let isBusy = false;
+  let waiting: Case | null = null;
 
-  function send(asked: Asked): void {
-    busyWith = asked;
+  function send(asked: Case): void {
+    isBusy = true;
     worker.postMessage(asked);
   }
-  worker.addEventListener('message', (event) => {
-    if (!(event instanceof MessageEvent) || busyWith === null) return;
-    const asked = busyWith;
-    busyWith = null;
+  worker.addEventListener('message', ({ data }) => {
+    isBusy = false;
     if (waiting !== null) send(waiting);
     waiting = null;
-    const worked: Worked = event.data;
-    onWorked(worked, asked);
+    onWorked(data);
   });
   return {
-    ask: (asked: Asked) => {
-      if (busyWith === null) send(asked);
-      else waiting = asked;
+    ask: (asked: Case) => {
+      if (isBusy) waiting = asked;
+      else send(asked);
     },
     end: () => {
       worker.terminate();

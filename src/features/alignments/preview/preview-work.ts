@@ -1,9 +1,4 @@
 import { drivesOfDesign } from '../../../../shared/assessment/drives-of-design.ts';
-import {
-  sectionsOfDesign,
-  type SectionAcross,
-  type SectionsOfDesign,
-} from '../../../../shared/assessment/sections-of-design.ts';
 import { groundModel, type GroundRules } from '../../../../shared/ground/ground-model.ts';
 import { groundSurface, type GroundSurface } from '../../../../shared/ground/ground-surface.ts';
 import { lossFactorsAt } from '../../../../shared/ground/loss-factors-at.ts';
@@ -18,15 +13,9 @@ import type { AlignmentDesign } from '../../../../shared/schemas/alignments.ts';
 /** A design and the rules that its settlement follows. */
 export type Case = { readonly design: AlignmentDesign; readonly rules: GroundRules };
 
-/** Something to be worked out beside the page. */
-export type Asked =
-  | ({ readonly kind: 'contours' } & Case)
-  | ({ readonly kind: 'section'; readonly chainage: number; readonly halfWidth: number } & Case);
-
-/** What came of it; a fault says in words why the method refuses. */
+/** Contours of a case, or in words why the method refuses. */
 export type Worked =
   | { readonly kind: 'contours'; readonly contours: readonly SettlementContour[] }
-  | { readonly kind: 'section'; readonly section: SectionAcross }
   | { readonly kind: 'fault'; readonly message: string };
 
 /** In metres. */
@@ -39,25 +28,12 @@ export function centralSurface({ design, rules }: Case): GroundSurface {
   return groundSurface(model, design.groundLevel, state, lossFactorsAt(model, 'central'));
 }
 
-/** Works out what is asked, and keeps what the next section of the same design needs. */
-export function createPreviewWork(): (asked: Asked) => Worked {
-  let kept: { readonly of: string; readonly sections: SectionsOfDesign } | null = null;
-
-  function sectionsOf({ design, rules }: Case): SectionsOfDesign {
-    const of = JSON.stringify([design, rules]);
-    if (kept?.of !== of) kept = { of, sections: sectionsOfDesign(design, rules) };
-    return kept.sections;
+/** The contours that the plan shows. */
+export function previewWork(asked: Case): Worked {
+  try {
+    return { kind: 'contours', contours: settlementContours(centralSurface(asked), LEVELS) };
+  } catch (error) {
+    if (!(error instanceof MethodError)) throw error;
+    return { kind: 'fault', message: error.message };
   }
-  return (asked) => {
-    try {
-      if (asked.kind === 'section') {
-        const section = sectionsOf(asked)(asked.chainage, asked.halfWidth);
-        return { kind: 'section', section };
-      }
-      return { kind: 'contours', contours: settlementContours(centralSurface(asked), LEVELS) };
-    } catch (error) {
-      if (!(error instanceof MethodError)) throw error;
-      return { kind: 'fault', message: error.message };
-    }
-  };
 }

@@ -1,7 +1,5 @@
-import { createPreviewWork, type Asked } from './preview-work.ts';
+import { previewWork, type Case } from './preview-work.ts';
 
-const work = createPreviewWork();
-
-self.addEventListener('message', ({ data }: MessageEvent<Asked>) => {
-  self.postMessage(work(data));
+self.addEventListener('message', ({ data }: MessageEvent<Case>) => {
+  self.postMessage(previewWork(data));
 });

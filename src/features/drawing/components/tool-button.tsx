@@ -4,7 +4,7 @@ import { classNames } from '../../../lib/class-names.ts';
 import type { Tool } from '../tools.ts';
 
 type ToolButtonProps = {
-  readonly tool: Tool;
+  readonly tool: Omit<Tool, 'id'> & { readonly id: string };
   readonly isOn: boolean;
   /** Why it cannot be used now. */
   readonly reason: string | null;

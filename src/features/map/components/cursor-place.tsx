@@ -1,15 +1,16 @@
 import type { Map as MapLibreMap, MapMouseEvent } from 'maplibre-gl';
-import { useEffect, useEffectEvent, useState } from 'react';
+import { useEffect, useState } from 'react';
 import { formatPlace } from '../place/format-place.ts';
 import type { GridPlace, GridProjection } from '../place/grid-projection.ts';
-import type { MapCursor } from '../map-cursor.ts';
+import type { WordsAt } from './plan-map-props.ts';
 import { gridPlaceAt, placeAtCentre } from '../place/view-of-map.ts';
 import { useMapFigure } from '../hooks/use-map-figure.ts';
 
 type CursorPlaceProps = {
   readonly map: MapLibreMap;
   readonly projection: GridProjection;
-  readonly cursor: MapCursor | undefined;
+  /** What else is said of a place. */
+  readonly wordsAt: WordsAt | undefined;
 };
 
 type Pixel = readonly [x: number, y: number];
@@ -17,7 +18,7 @@ type Pixel = readonly [x: number, y: number];
 const OUTSIDE = 'outside the grid';
 const SEPARATOR = '\n';
 
-function words(place: GridPlace | null, more: MapCursor['wordsAt'] | undefined): string {
+function words(place: GridPlace | null, more: WordsAt | undefined): string {
   if (place === null) return OUTSIDE;
   return [...formatPlace(place), ...(more?.(place) ?? [])].join(SEPARATOR);
 }
@@ -40,31 +41,13 @@ function useCursor(map: MapLibreMap): Pixel | null {
   return pixel;
 }
 
-/** Tells who wants to know where the cursor is, as it moves. */
-function useTold({ map, projection, cursor }: CursorPlaceProps): void {
-  const tell = useEffectEvent(({ point }: MapMouseEvent) => {
-    const place = map.isMoving() ? null : gridPlaceAt(map, projection, point.x, point.y);
-    if (place !== null) cursor?.onPlace(place);
-  });
-  useEffect(() => {
-    const moves = map.on('mousemove', (event) => {
-      tell(event);
-    });
-    return () => {
-      moves.unsubscribe();
-    };
-  }, [map]);
-}
-
 /** Easting and northing under the cursor, or in the middle of the map where there is none. */
-export function CursorPlace(props: CursorPlaceProps) {
-  const { map, projection } = props;
+export function CursorPlace({ map, projection, wordsAt }: CursorPlaceProps) {
   const cursor = useCursor(map);
-  useTold(props);
   const place = useMapFigure(map, () =>
     words(
       cursor === null ? placeAtCentre(map, projection) : gridPlaceAt(map, projection, ...cursor),
-      props.cursor?.wordsAt,
+      wordsAt,
     ),
   );
   const parts = [...(cursor === null ? ['Middle'] : []), ...place.split(SEPARATOR)];

@@ -46,7 +46,7 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
   const projection = useMemo(() => createGridProjection(gridDefinition), [gridDefinition]);
   const controller = useController(map, plan, marks);
   const { isBusy, hasGaps, forgetGaps } = useMapState(map);
-  const handle = useMemo(() => handleOfMap(map, projection), [map, projection]);
+  const handle = useMemo(() => handleOfMap(map), [map]);
   const giveHandle = useEffectEvent(props.onHandle);
   useGridCrosses(map, controller, projection);
   useDrawnLine(controller, projection, props.line);
@@ -76,8 +76,8 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
       <div className="absolute top-3 right-3">
         <ScaleBar map={map} projection={projection} />
       </div>
-      <div className="absolute bottom-3 left-3">
-        <CursorPlace map={map} projection={projection} cursor={props.cursor} />
+      <div className="absolute bottom-3 left-3 max-w-[calc(100%-24px)]">
+        <CursorPlace map={map} projection={projection} wordsAt={props.wordsAt} />
       </div>
       <ZoomHint map={map} plan={plan} />
       {hasGaps && (

@@ -1,9 +1,12 @@
 import type { CameraBounds } from '../camera.ts';
-import type { MapCursor } from '../map-cursor.ts';
 import type { MapDrawing } from '../map-drawing.ts';
 import type { MapHandle } from '../map-handle.ts';
 import type { LineShape } from '../map-line.ts';
 import type { MapPlan } from '../map-plan.ts';
+import type { GridPlace } from '../place/grid-projection.ts';
+
+/** What is said of a place beside its easting and northing. */
+export type WordsAt = (place: GridPlace) => readonly string[];
 
 /** What the page tells the map. */
 export type PlanMapProps = {
@@ -19,8 +22,8 @@ export type PlanMapProps = {
   readonly drawing?: MapDrawing | null;
   /** A designed line and its settlement. */
   readonly line?: readonly LineShape[];
-  /** What else is said of the place under the cursor, and who wants to know of it. */
-  readonly cursor?: MapCursor;
+  /** What else is said of the place under the cursor. */
+  readonly wordsAt?: WordsAt;
   readonly onSelect: (buildingId: number | null) => void;
   /** Gives the page its way to move the map, and null when the map goes. */
   readonly onHandle: (handle: MapHandle | null) => void;

@@ -5,7 +5,7 @@ import { MAP_COLOURS } from './map-colours.ts';
 import { SOURCES } from './source-names.ts';
 
 const LINE = { source: SOURCES.line } as const;
-const { ink, bandLine, clay, paperRaised } = MAP_COLOURS;
+const { ink, bandLine, paperRaised } = MAP_COLOURS;
 const LEVEL: ExpressionSpecification = ['get', 'level'];
 /** In mm: the outermost contour is dashed, the one that people ask for first is drawn heavier. */
 const [OUTERMOST, EMPHASISED] = [1, 10];
@@ -60,13 +60,6 @@ function drives(): LayerSpecification[] {
       ...LINE,
       filter: kind('tick'),
       paint: { 'line-color': ink, 'line-width': 1.3 },
-    },
-    {
-      id: 'line-section',
-      type: 'line',
-      ...LINE,
-      filter: kind('section'),
-      paint: { 'line-color': clay, 'line-width': 1.4 },
     },
   ];
 }

@@ -6,7 +6,7 @@ import { LazyPlanMap } from './lazy-plan-map.tsx';
 import { MapPause } from './map-pause.tsx';
 
 type MapPaneProps = ReturnType<typeof useSchemePlan> &
-  Pick<PlanMapProps, 'selected' | 'drawing' | 'onSelect' | 'onHandle'>;
+  Pick<PlanMapProps, 'selected' | 'drawing' | 'line' | 'wordsAt' | 'onSelect' | 'onHandle'>;
 
 /** The map, or why it is not there. */
 export function MapPane({ ready, error, retry, ...map }: MapPaneProps) {

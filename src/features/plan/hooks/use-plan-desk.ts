@@ -1,11 +1,11 @@
 import { useState } from 'react';
-import { usePlanDrawing } from '../../drawing/hooks/use-plan-drawing.ts';
 import type { MapHandle } from '../../map/map-handle.ts';
 import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { useBringIntoView } from './use-bring-into-view.ts';
 import { useBuildingQuery } from './use-building-query.ts';
 import { usePlanKeys } from './use-plan-keys.ts';
+import { usePlanTools } from './use-plan-tools.ts';
 import { useSchemePlan } from './use-scheme-plan.ts';
 import { useSelectedBuilding } from './use-selected-building.ts';
 import { useSheetView } from './use-sheet-view.ts';
@@ -25,9 +25,8 @@ export function usePlanDesk() {
   const { building, known } = useBuildingQuery(scheme.id, selected);
   const { view, setView, isWriting } = useSheetView(selected);
   const canDraw = can(scheme, 'updateRegister');
-  const around = { schemeId: scheme.id, canDraw, isWriting, building: known, select };
-  const drawing = usePlanDrawing(around);
-  const isDrawing = drawing.map !== null;
+  const tools = usePlanTools(scheme, { isWriting, building: known, select });
+  const { drawing, isDrawing } = tools;
   const bring = useBringIntoView(handle, selected, building.data);
 
   function goTo(buildingId: number): void {
@@ -59,7 +58,7 @@ export function usePlanDesk() {
     setHandle,
     building,
     sheet,
-    drawing,
+    ...tools,
     steps,
     goTo,
     deselect,

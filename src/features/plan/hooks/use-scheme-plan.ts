@@ -4,6 +4,7 @@ import { backgroundQuery } from '../../background/api/list-background.ts';
 import { extentQuery } from '../../buildings/api/get-extent.ts';
 import { crsQuery } from '../../crs/api/get-crs.ts';
 import { basemapQuery } from '../../map/api/get-basemap.ts';
+import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { usePerson } from '../../session/person-context.ts';
 import { planOfScheme } from '../plan-of-scheme.ts';
@@ -31,8 +32,9 @@ export function useSchemePlan() {
       hasBackground,
       origin: window.location.origin,
     });
-    const canDraw = scheme.abilities.updateRegister === true;
-    return { plan: { ...plan, canDraw }, extent: extent.data, crs: crs.data };
+    const canDraw = can(scheme, 'updateRegister') || can(scheme, 'updateAlignments');
+    const hasLine = can(scheme, 'readAlignments');
+    return { plan: { ...plan, canDraw, hasLine }, extent: extent.data, crs: crs.data };
   }, [scheme, demo, extent.data, crs.data, background.data, basemap.data, basemap.isPending]);
 
   return {

@@ -1,0 +1,83 @@
+import { describe, expect, it } from 'vitest';
+import {
+  beginningLike,
+  BLANK_OPTION,
+  designIfWhole,
+  draftOf,
+  rebasedLine,
+  rebasedOption,
+} from '../../../../src/features/alignments/drafts/option-draft.ts';
+import { optionChanges } from '../../../../src/features/alignments/option-changes.ts';
+import type { AlignmentDesign } from '../../../../shared/schemas/alignments.ts';
+import { aDesign, aRange } from '../../../support/designs.ts';
+
+const DESIGN = aDesign({
+  bores: { kind: 'twin', spacing: 15, later: 'left', laterFactor: 1.2 },
+  volumeLoss: aRange(0.0143),
+  troughWidth: aRange(0.55),
+  intervals: [{ from: 100, to: 200, volumeLoss: aRange(0.007), troughWidth: aRange(0.4) }],
+});
+
+describe('an option while it is written', () => {
+  it('is the same design again, to the last bit', () => {
+    expect(designIfWhole(draftOf('A', DESIGN), DESIGN.line)).toEqual(DESIGN);
+  });
+
+  it('is no design while something is missing or wrong', () => {
+    const draft = draftOf('A', DESIGN);
+    expect(designIfWhole(BLANK_OPTION, DESIGN.line)).toBeNull();
+    expect(designIfWhole(draft, DESIGN.line.slice(0, 1))).toBeNull();
+    const odd = { ...draft, design: { ...draft.design, diameter: 'wide' } };
+    expect(designIfWhole(odd, DESIGN.line)).toBeNull();
+  });
+
+  it('begins like another without its intervals and further levels', () => {
+    const levels = [40, 200].map((chainage) => ({ chainage, level: -20 }));
+    const { name, design } = beginningLike({ ...DESIGN, levels });
+    expect(name).toBe('');
+    expect(design.levels).toEqual([{ chainage: '0', level: '-20' }]);
+    expect(design.intervals).toEqual([]);
+    expect(design.bores).toMatchObject({ kind: 'twin', spacing: '15' });
+  });
+});
+
+describe('an option on top of what somebody else left', () => {
+  it('keeps what was written and takes theirs for the rest', () => {
+    const from = draftOf('A', DESIGN);
+    const onto = draftOf('A, deep', { ...DESIGN, diameter: 7, groundLevel: 3 });
+    const mine = { ...from, design: { ...from.design, diameter: '6.6' } };
+    const merged = rebasedOption(mine, from, onto);
+    expect(merged.name).toBe('A, deep');
+    expect(merged.design).toEqual({ ...onto.design, diameter: '6.6' });
+  });
+
+  it('keeps a line that was drawn on, and else takes theirs', () => {
+    const [from, mine, onto] = [0, 1, 2].map((north): AlignmentDesign['line'] => [
+      [0, north],
+      [9, 0],
+    ]);
+    if (from === undefined || mine === undefined || onto === undefined) throw new Error('no line');
+    expect(rebasedLine(mine, from, onto)).toBe(mine);
+    expect(rebasedLine([...from], from, onto)).toBe(onto);
+  });
+});
+
+describe('what somebody changed of an option', () => {
+  it('is said value by value', () => {
+    const design = { ...DESIGN, diameter: 7, direction: 'backward' as const };
+    expect(optionChanges({ name: 'A', design: DESIGN }, { name: 'B', design })).toEqual([
+      { path: 'Name', before: 'A', after: 'B' },
+      { path: 'Diameter', before: '6 m', after: '7 m' },
+      { path: 'Direction', before: 'as drawn', after: 'against the line' },
+    ]);
+  });
+
+  it('names a line whose points moved where length and start are the same', () => {
+    const bent = (north: number): AlignmentDesign => ({
+      ...DESIGN,
+      line: [[0, 0], [50, north], [100, 0]],
+    }); // prettier-ignore
+    const [change] = optionChanges({ name: 'A', design: bent(9) }, { name: 'A', design: bent(-9) });
+    expect(change?.after).toMatch(/points moved$/);
+  });
+});
