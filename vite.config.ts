@@ -22,11 +22,20 @@ export default defineConfig({
   server: { port: 4601, proxy: { '/api': server, '/tiles': server } },
   test: {
     projects: [
-      { test: { name: 'shared', include: ['tests/shared/**/*.test.ts'], testTimeout: PATIENCE } },
+      {
+        // pure code keeps nothing from file to file, so files may share what they import
+        test: {
+          name: 'shared',
+          include: ['tests/shared/**/*.test.ts'],
+          isolate: false,
+          testTimeout: PATIENCE,
+        },
+      },
       {
         test: {
           name: 'verification',
           include: ['tests/verification/**/*.test.ts'],
+          isolate: false,
           testTimeout: PATIENCE,
         },
       },

@@ -6,14 +6,8 @@ import { BUILD, FORMAT, LINT, run, TESTS, TYPES, UNUSED } from './tools.mjs';
 
 const REPORT = path.join(root, '.cache', 'vitest.json');
 
-async function checkCounts(tool) {
-  const { passed } = await run(tool);
-  return { passed: Number(passed), failed: Number(!passed) };
-}
-
 /** Counts tests one by one. Where they are chosen by name, the others in their files are not missed. */
-async function counts(tool, more) {
-  if (tool !== TESTS) return checkCounts(tool);
+async function testsCounted(more) {
   rmSync(REPORT, { force: true });
   const { passed: well } = await run(TESTS, { more });
   const report = existsSync(REPORT) ? JSON.parse(readFileSync(REPORT, 'utf8')) : {};
@@ -36,14 +30,29 @@ installPackages();
 await installPrograms();
 const more = process.argv.slice(2);
 const total = { passed: 0, failed: 0 };
-for (const tool of more.length > 0 ? [TESTS] : [TYPES, LINT, FORMAT, UNUSED, BUILD, TESTS]) {
-  console.log(`\n== ${tool.title}`);
-  const start = performance.now();
-  const { passed, failed } = await counts(tool, more);
+
+function count({ title }, start, { passed, failed }) {
   const seconds = ((performance.now() - start) / 1000).toFixed(1);
-  console.log(`== ${tool.title}: ${failed === 0 ? 'passed' : 'FAILED'} in ${seconds} s`);
+  console.log(`== ${title}: ${failed === 0 ? 'passed' : 'FAILED'} in ${seconds} s`);
   total.passed += passed;
   total.failed += failed;
 }
+
+/** One check after the other; what a check says is printed whole, since another lane prints meanwhile. */
+async function checkLane(...tools) {
+  for (const tool of tools) {
+    const start = performance.now();
+    const { passed, output } = await run(tool, { kept: true });
+    if (output !== '') console.log(`\n${output}`);
+    count(tool, start, { passed: Number(passed), failed: Number(!passed) });
+  }
+}
+
+// linting takes as long as all other checks together, and there are two processors
+if (more.length === 0)
+  await Promise.all([checkLane(LINT), checkLane(TYPES, FORMAT, UNUSED, BUILD)]);
+console.log(`\n== ${TESTS.title}`);
+const start = performance.now();
+count(TESTS, start, await testsCounted(more));
 console.log(`\n${total.passed} passed, ${total.failed} failed`);
 process.exitCode = total.failed === 0 ? 0 : 1;

@@ -59,6 +59,8 @@ describe('the plan', () => {
     await mapIsStill(visitor);
     await page.keyboard.press('j');
     const first = await page.waitForURL(/building=\d+/).then(() => page.url());
+    // the next one is the next of what is drawn, and the map has moved
+    await mapIsStill(visitor);
     await page.keyboard.press('j');
     await page.waitForURL((url) => url.href !== first);
     await page.keyboard.press('k');
