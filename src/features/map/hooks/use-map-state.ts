@@ -14,6 +14,11 @@ export function useMapState(map: MapLibreMap): MapState & { readonly forgetGaps:
     const subscriptions = [
       map.on('dataloading', () => {
         set({ isBusy: true });
+        // what changes nothing draws nothing, and without a frame the map never says that it is done
+        map.triggerRepaint();
+      }),
+      map.on('dataabort', () => {
+        map.triggerRepaint();
       }),
       map.on('idle', () => {
         set({ isBusy: false });
