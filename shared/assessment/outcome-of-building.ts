@@ -9,7 +9,7 @@ import { assessBuilding, type BuildingResult } from './assess-building.ts';
 import type { Breakpoint } from './breakpoint-of-wall.ts';
 import { holdsAt, type Hold } from './holds.ts';
 import { ALL_COMPLETE, type Moment } from './moment.ts';
-import type { Assumed, PreparedBuilding } from './register-facts.ts';
+import type { Assumed, PreparedBuilding } from './prepared-building.ts';
 import type { AssessmentRules } from './rules.ts';
 import { screenFootprint, type ScreeningLimits } from './screening.ts';
 import type { BracketInput } from './sensitivity.ts';

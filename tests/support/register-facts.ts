@@ -1,4 +1,4 @@
-import type { RegisterFacts } from '../../shared/assessment/register-facts.ts';
+import type { RegisterFacts } from '../../shared/assessment/prepared-building.ts';
 import type { PlanPoint } from '../../shared/geometry/point.ts';
 
 /** The closed ring of a rectangle along the grid. */

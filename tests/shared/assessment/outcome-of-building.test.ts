@@ -6,7 +6,7 @@ import {
   outcomeOfBuilding,
   type RunInputs,
 } from '../../../shared/assessment/outcome-of-building.ts';
-import { preparedBuilding } from '../../../shared/assessment/register-facts.ts';
+import { preparedBuilding } from '../../../shared/assessment/prepared-building.ts';
 import { DEFAULT_SCREENING_LIMITS, screenFootprint } from '../../../shared/assessment/screening.ts';
 import { joinedWalls, rowsByBuilding } from '../../../shared/building/joined-walls.ts';
 import { rows } from '../../../shared/building/rows.ts';

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { preparedBuilding, wallLetter } from '../../../shared/assessment/register-facts.ts';
+import { preparedBuilding, wallLetter } from '../../../shared/assessment/prepared-building.ts';
 import { certain } from '../../../shared/numerics/range.ts';
 import { aDrive, aModel } from '../../support/builders.ts';
 import { aRing, noFacts, someFacts } from '../../support/register-facts.ts';
