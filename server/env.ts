@@ -38,6 +38,9 @@ const migrateSchema = schema.pick({ DATABASE_URL: true }).extend({
   MIGRATE_URL: z.string().startsWith('postgres'),
 });
 
+/** What working at runs beside the server needs. */
+const workerSchema = schema.pick({ DATABASE_URL: true, LOG_LEVEL: true });
+
 /** What filling the demo needs: a database, and the folder with the town's files. */
 const seedSchema = schema.pick({ DATABASE_URL: true }).extend({ DEMO_FOLDER: z.string().min(1) });
 
@@ -59,4 +62,8 @@ export function readMigrateEnv(source: NodeJS.ProcessEnv): z.infer<typeof migrat
 
 export function readSeedEnv(source: NodeJS.ProcessEnv): z.infer<typeof seedSchema> {
   return read(seedSchema, source);
+}
+
+export function readWorkerEnv(source: NodeJS.ProcessEnv): z.infer<typeof workerSchema> {
+  return read(workerSchema, source);
 }

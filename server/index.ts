@@ -1,9 +1,11 @@
 import { createServer, type Server } from 'node:http';
 import { createApp } from './app.ts';
 import { recoverImports } from './commands/recover-imports.ts';
+import { recoverRuns } from './commands/recover-runs.ts';
 import { readEnv } from './env.ts';
 import { openServices } from './open-services.ts';
 import { report } from './report.ts';
+import { toldToStop } from './told-to-stop.ts';
 
 /** How long requests in hand may take once the server is told to stop. */
 const PATIENCE_MS = 5000;
@@ -27,24 +29,13 @@ function close(server: Server): Promise<void> {
   });
 }
 
-/** Resolves when this process is told to stop, or when the one that started it is gone. */
-function toldToStop(): Promise<void> {
-  return new Promise((resolve) => {
-    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) {
-      process.on(signal, () => {
-        resolve();
-      });
-    }
-    process.once('disconnect', resolve);
-  });
-}
-
 /** Serves until told to stop, then answers what is in hand and closes what was opened. */
 async function serve(): Promise<void> {
   const env = readEnv(process.env);
   const stop = toldToStop();
   const { services, pool, closeServices } = await openServices(env);
   await recoverImports(services);
+  await recoverRuns(services);
   const server = createServer(createApp(services, pool, process.cwd()));
   await listen(server, env.PORT, env.HOST);
   report({ listening: true });

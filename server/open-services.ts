@@ -4,6 +4,7 @@ import type { Env } from './env.ts';
 import { openJobs } from './jobs/open-jobs.ts';
 import { createLogger } from './logger.ts';
 import { openMail } from './mail/open-mail.ts';
+import { openRunQueue } from './runs/open-run-queue.ts';
 import type { Services } from './services.ts';
 import { createTileCache } from './tiles/tile-cache.ts';
 
@@ -24,12 +25,13 @@ export async function openServices(env: Env): Promise<OpenServices> {
     logger.error({ err: error }, 'a connection for sessions broke');
   });
   const jobs = openJobs({ env, logger, database });
+  const runs = await openRunQueue({ env, logger, database });
   const mail = await openMail(env, logger);
   return {
-    services: { env, logger, database, mailer: mail.mailer, tiles: createTileCache(), jobs },
+    services: { env, logger, database, mailer: mail.mailer, tiles: createTileCache(), jobs, runs },
     pool,
     closeServices: async () => {
-      await jobs.close();
+      await Promise.all([jobs.close(), runs.close()]);
       await Promise.all([mail.close(), database.close(), pool.end()]);
     },
   };

@@ -3,6 +3,7 @@ import type { Sequelize } from 'sequelize';
 import type { Env } from './env.ts';
 import type { Jobs } from './jobs/jobs.ts';
 import type { Mailer } from './mail/mailer.ts';
+import type { RunQueue } from './runs/run-queue.ts';
 import type { TileCache } from './tiles/tile-cache.ts';
 
 /** What handlers and commands work with; made once at start, and anew in tests. */
@@ -14,4 +15,6 @@ export type Services = {
   readonly tiles: TileCache;
   /** What is done of imports beside requests. */
   readonly jobs: Jobs;
+  /** Where runs are worked out, here or on another machine. */
+  readonly runs: RunQueue;
 };

@@ -3,14 +3,19 @@ import { MethodError } from '../../shared/method-error.ts';
 import type { AlignmentDesign } from '../../shared/schemas/alignments.ts';
 import { AppError } from '../errors.ts';
 
-/** Refuses a design whose bores cannot follow its line, at the place in it that is at fault. */
-export function refuseBadDesign(design: AlignmentDesign): void {
+/** Does something with a design, and refuses it at the place in it that is at fault. */
+export function refusingBadDesign(work: () => unknown): void {
   try {
-    drivesOfDesign(design);
+    work();
   } catch (error) {
     if (!(error instanceof MethodError)) throw error;
     const { message, field } = error;
     const path = field === undefined ? 'design' : `design.${field}`;
     throw new AppError('invalid-input', message, [{ path, message }]);
   }
+}
+
+/** Refuses a design whose bores cannot follow its line. */
+export function refuseBadDesign(design: AlignmentDesign): void {
+  refusingBadDesign(() => drivesOfDesign(design));
 }

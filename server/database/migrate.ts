@@ -18,6 +18,10 @@ import { migration as ground } from './migrations/14-ground.ts';
 import { migration as peopleShutOut } from './migrations/15-people-shut-out.ts';
 import { migration as schemeNames } from './migrations/16-scheme-names.ts';
 import { migration as alignments } from './migrations/17-alignments.ts';
+import { migration as registerOrder } from './migrations/18-register-order.ts';
+import { migration as jobQueue } from './migrations/19-job-queue.ts';
+import { migration as runs } from './migrations/20-runs.ts';
+import { migration as importChoices } from './migrations/21-import-choices.ts';
 
 /** In the order in which they are applied; a new one goes to the end. */
 const MIGRATIONS: Readonly<Record<string, Migration>> = {
@@ -38,6 +42,10 @@ const MIGRATIONS: Readonly<Record<string, Migration>> = {
   '15-people-shut-out': peopleShutOut,
   '16-scheme-names': schemeNames,
   '17-alignments': alignments,
+  '18-register-order': registerOrder,
+  '19-job-queue': jobQueue,
+  '20-runs': runs,
+  '21-import-choices': importChoices,
 };
 
 /** Opens the migrations of a database as its owner; `serverUrl` names the role that serves. */

@@ -10,6 +10,8 @@ import { initPerson } from './person.ts';
 import { initRegisterChange } from './register-change.ts';
 import { initRegisterView } from './register-view.ts';
 import { initRegisterImport } from './register-import.ts';
+import { initRunState } from './run-state.ts';
+import { initRun } from './run.ts';
 import { initSchemeGround } from './scheme-ground.ts';
 import { initScheme } from './scheme.ts';
 import { initSchemeRules } from './scheme-rules.ts';
@@ -28,6 +30,8 @@ export function initModels(sequelize: Sequelize): void {
   initRegisterChange(sequelize);
   initRegisterView(sequelize);
   initAlignment(sequelize);
+  initRun(sequelize);
+  initRunState(sequelize);
   initBackgroundFeature(sequelize);
   initRegisterImport(sequelize);
   initAuditEntry(sequelize);

@@ -13,6 +13,9 @@ export const schemePolicy = {
   readAlignments: (actor: SchemeActor) =>
     actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness'),
   updateAlignments: (actor: SchemeActor) => holds(actor, 'designer'),
+  readRuns: (actor: SchemeActor) =>
+    actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness'),
+  startRuns: (actor: SchemeActor) => holds(actor, 'designer', 'assessor'),
   updateScheme: (actor: SchemeActor) => actor.isAdministrator,
   archiveScheme: (actor: SchemeActor) => actor.isAdministrator,
   readMembers: (actor: SchemeActor) => actor.isAdministrator,
@@ -30,6 +33,7 @@ export type SchemeAction = keyof typeof schemePolicy;
 const CHANGES: ReadonlySet<SchemeAction> = new Set([
   'updateRegister',
   'updateAlignments',
+  'startRuns',
   'updateScheme',
   'manageMembers',
   'updateRules',
@@ -53,6 +57,8 @@ export function schemeAbilities(
     updateRegister: can('updateRegister'),
     readAlignments: can('readAlignments'),
     updateAlignments: can('updateAlignments'),
+    readRuns: can('readRuns'),
+    startRuns: can('startRuns'),
     updateScheme: can('updateScheme'),
     archiveScheme: can('archiveScheme'),
     readMembers: can('readMembers'),

@@ -1,6 +1,7 @@
 import { alignmentRoutes } from './alignments.ts';
 import { auditRoutes } from './audit.ts';
 import { backgroundRoutes } from './background.ts';
+import { buildingOutlineRoutes } from './building-outlines.ts';
 import { buildingRoutes } from './buildings.ts';
 import { crsRoutes } from './crs.ts';
 import type { Route } from './define-route.ts';
@@ -14,6 +15,7 @@ import { registerChangeRoutes } from './register-changes.ts';
 import { registerViewRoutes } from './register-views.ts';
 import { registerRoutes } from './register.ts';
 import { rulesRoutes } from './rules.ts';
+import { runRoutes } from './runs.ts';
 import { schemeRoutes } from './schemes.ts';
 import { sessionRoutes } from './session.ts';
 import { tileRoutes } from './tiles.ts';
@@ -32,11 +34,13 @@ export const ROUTES: readonly Route[] = [
   ...crsRoutes,
   ...backgroundRoutes,
   ...buildingRoutes,
+  ...buildingOutlineRoutes,
   ...registerRoutes,
   ...registerChangeRoutes,
   ...registerViewRoutes,
   ...groundRoutes,
   ...alignmentRoutes,
+  ...runRoutes,
   ...importRoutes,
   ...tileRoutes,
   ...waitingRoutes,

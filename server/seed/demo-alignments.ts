@@ -56,12 +56,21 @@ function option(
   };
 }
 
+/** Where option A runs through what filled the old harbour: more is lost, and less is known of it. */
+const OLD_HARBOUR_SILT = {
+  from: 1050,
+  to: 1750,
+  volumeLoss: { low: 0.015, central: 0.025, high: 0.038 },
+  troughWidth: { low: 0.4, central: 0.45, high: 0.55 },
+};
+
 /** Three ways to take a twin-bore metro under the old harbour and the old town of Port Dogger, all invented. */
 export const DEMO_ALIGNMENTS = [
   option(
     'A, Market Place',
     [[-740, 190], [-400, 220], [-60, 262], [180, 282], [310, 305], [430, 335], [550, 372], [660, 408], [760, 438], [880, 462], [1000, 474], [1340, 470], [1720, 440]],
     [{ chainage: 0, level: -13 }, { chainage: 700, level: -16 }, { chainage: 1150, level: -20 }, { chainage: 1500, level: -17 }, { chainage: 2500, level: -13 }],
+    { intervals: [OLD_HARBOUR_SILT] },
   ),
   option(
     'B, harbour head',

@@ -57,7 +57,9 @@ export function fieldsOverTroughWidth(
   const site = siteOfWall(model, wall);
   const fieldAt = (position: FivePosition) =>
     wallField(model, wall, site, rules.cutOff, { position, faces });
-  if (troughWidthMatters(model)) return FIVE_POSITIONS.map(fieldAt);
+  // where nothing reaches the wall, no K changes that
+  const isReached = site.blocks.length > 0;
+  if (isReached && troughWidthMatters(model)) return FIVE_POSITIONS.map(fieldAt);
   const only = fieldAt(CENTRAL);
   return FIVE_POSITIONS.map(() => only);
 }

@@ -3,7 +3,7 @@ import { groundModel, type GroundModel } from '../ground/ground-model.ts';
 import { certain, isRange, rangeOf } from '../numerics/range.ts';
 import type { Wall } from '../building/wall.ts';
 import type { AssessCase } from '../schemas/assess-case.ts';
-import { DEFAULT_RULES, type AssessmentRules } from './rules.ts';
+import { DEFAULT_RULES, type AssessmentRules, type CutOffRule } from './rules.ts';
 
 type CaseDrive = AssessCase['drives'][number];
 type CaseWall = AssessCase['walls'][number];
@@ -46,18 +46,32 @@ function driveOfCase(drive: CaseDrive): Drive {
   };
 }
 
-function rulesOfCase(rules: AssessCase['rules']): AssessmentRules {
-  const cutoff = rules?.cutoff;
+type CaseRules = NonNullable<AssessCase['rules']>;
+
+function depthOfCase(depth: NonNullable<CaseRules['depth']>): AssessmentRules['depth'] {
+  if (typeof depth === 'string') return { kind: depth };
+  const layers = depth.layers.map(({ baseLevel, troughWidth }) => ({
+    baseLevel,
+    troughWidth: rangeOf(troughWidth),
+  }));
+  return { kind: 'layered', layers };
+}
+
+function cutOffOfCase(cutoff: NonNullable<CaseRules['cutoff']>): CutOffRule {
+  if (typeof cutoff === 'number') return { kind: 'settlement', settlement: cutoff };
+  return { kind: 'widths', widths: cutoff === '2.5i' ? 2.5 : cutoff.widths };
+}
+
+function rulesOfCase(rules: CaseRules = {}): AssessmentRules {
+  const { depth, focus, cutoff, horizontalStrain, compression, leadingCategory } = rules;
   return {
     ...DEFAULT_RULES,
-    ...(rules?.depth === undefined ? {} : { depth: { kind: rules.depth } }),
-    ...(rules?.focus === undefined ? {} : { focus: rules.focus }),
-    ...(rules?.horizontalStrain === undefined ? {} : { horizontalStrain: rules.horizontalStrain }),
-    ...(rules?.compression === undefined ? {} : { compression: rules.compression }),
-    ...(cutoff === '2.5i' ? { cutOff: { kind: 'widths', widths: 2.5 } as const } : {}),
-    ...(typeof cutoff === 'number'
-      ? { cutOff: { kind: 'settlement', settlement: cutoff } as const }
-      : {}),
+    ...(depth !== undefined && { depth: depthOfCase(depth) }),
+    ...(focus !== undefined && { focus }),
+    ...(cutoff !== undefined && { cutOff: cutOffOfCase(cutoff) }),
+    ...(horizontalStrain !== undefined && { horizontalStrain }),
+    ...(compression !== undefined && { compression }),
+    ...(leadingCategory !== undefined && { leadingCategory }),
   };
 }
 

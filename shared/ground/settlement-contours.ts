@@ -16,6 +16,13 @@ export type SettlementContour = {
   readonly isClosed: boolean;
 };
 
+/**
+ * The settlements that plans and runs draw lines for.
+ *
+ * Units: m. Valid: ascending. Source: [common].
+ */
+export const CONTOUR_LEVELS: readonly number[] = [0.001, 0.002, 0.005, 0.01, 0.02, 0.03, 0.05];
+
 type Ring = readonly (readonly number[])[];
 
 /** A corner of a ring lies half-way along an edge of the grid: x or y is whole, and names the farther node. */

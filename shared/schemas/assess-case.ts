@@ -73,14 +73,33 @@ const wall = z
     },
   );
 
+const layers = z
+  .array(z.strictObject({ baseLevel: level, troughWidth }))
+  .min(1)
+  .refine(
+    (given) => given.every(({ baseLevel }, k) => baseLevel < (given[k - 1]?.baseLevel ?? Infinity)),
+    'must be given from the top down',
+  );
+
 const rules = z.strictObject({
-  depth: z.enum(['clay', 'constant', 'oreilly-new-clay', 'oreilly-new-sand']).optional(),
+  depth: z
+    .union([
+      z.enum(['clay', 'constant', 'oreilly-new-clay', 'oreilly-new-sand']),
+      z.strictObject({ layers }),
+    ])
+    .optional(),
   focus: z.enum(['axis', 'deep']).optional(),
   cutoff: z
-    .union([z.number().min(0).max(LIMITS.cutOff), z.literal('2.5i')], {
-      error: `must be metres from 0 (none) to ${LIMITS.cutOff}, or "2.5i"`,
-    })
+    .union(
+      [
+        z.number().min(0).max(LIMITS.cutOff),
+        z.literal('2.5i'),
+        z.strictObject({ widths: z.number().positive().max(10) }),
+      ],
+      { error: `must be metres from 0 (none) to ${LIMITS.cutOff}, "2.5i" or { "widths": … }` },
+    )
     .optional(),
+  leadingCategory: z.union([z.literal(1), z.literal(2), z.literal(3), z.literal(4)]).optional(),
   horizontalStrain: z.enum(['average', 'peak']).optional(),
   compression: z.enum(['counted', 'zero']).optional(),
 });

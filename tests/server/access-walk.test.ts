@@ -9,11 +9,11 @@ import { testApp } from '../support/test-app.ts';
 import { UNKNOWN_ID, UNKNOWN_NUMBER } from '../support/unknown-ids.ts';
 import { WALKERS, walkWorld, type Place, type Walker } from '../support/walk-world.ts';
 
-const { app } = testApp();
+const walked = testApp();
 let world: Awaited<ReturnType<typeof walkWorld>>;
 
 beforeAll(async () => {
-  world = await walkWorld(app());
+  world = await walkWorld(walked);
 });
 
 /** What a refusal and what a step that may be taken are answered with; the latter may lack a good form. */
@@ -39,6 +39,7 @@ function paramsOf(place: Place | undefined): Params {
     changeId: place?.change.id ?? UNKNOWN_ID,
     viewId: UNKNOWN_ID,
     alignmentId: place?.alignment.id ?? UNKNOWN_ID,
+    runId: place?.runId ?? UNKNOWN_ID,
     importId: place?.importId ?? UNKNOWN_ID,
     row: 1,
     field: 'use',

@@ -134,6 +134,11 @@ describe.each([
   ['scheme_rules', `rules = '{}'`],
   ['register_changes', `kind = 'other'`],
   ['building_changes', `version = 7`],
+  ['building_snapshots', `facts = '[]'`],
+  ['runs', `number = 7`],
+  ['run_buildings', `version = 7`],
+  ['run_contours', `contours = '[1]'`],
+  ['run_results', `stage = 3`],
 ])('rows of %s', (table, change) => {
   beforeAll(async () => {
     await owner.query(`
@@ -153,6 +158,22 @@ describe.each([
       ), history as (
         insert into building_changes (change_id, building_id, version)
         select change.id, building.id, 1 from change, building
+      ), snapshot as (
+        insert into building_snapshots (building_id, version, facts, west, south, east, north)
+        select id, 1, '{}', 0, 0, 0, 0 from building returning building_id
+      ), run as (
+        insert into runs (id, scheme_id, number, alignment_id, alignment_version, option_name, design,
+          rules_version, rules, method_version, register_version, buildings)
+        select gen_random_uuid(), id, 1, gen_random_uuid(), 1, 'A', '{}', 1, '{}', '1.0.0', 1, 1
+        from scheme returning id
+      ), member as (
+        insert into run_buildings (run_id, building_id, version)
+        select run.id, building_id, 1 from run, snapshot returning run_id, building_id
+      ), contours as (
+        insert into run_contours (run_id, contours) select id, '[]' from run
+      ), result as (
+        insert into run_results (run_id, building_id, stage, settlement, slope, held_by, assumed, warnings)
+        select run_id, building_id, 1, 0, 0, '{}', '{}', '{}' from member
       )
       insert into scheme_rules (scheme_id, version, rules, created_by)
       select scheme.id, 1, '[]', person.id from scheme, person`);
@@ -181,7 +202,12 @@ test('tables of other migrations are not forgotten here', async () => {
   expect(rows.map(({ name }) => name)).toEqual([
     'audit_entries',
     'building_changes',
+    'building_snapshots',
     'register_changes',
+    'run_buildings',
+    'run_contours',
+    'run_results',
+    'runs',
     'scheme_rules',
   ]);
 });

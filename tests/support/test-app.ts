@@ -11,6 +11,7 @@ import { readEnv } from '../../server/env.ts';
 import { openJobs, openJobsInline } from '../../server/jobs/open-jobs.ts';
 import { createLogger } from '../../server/logger.ts';
 import type { Letter } from '../../server/mail/mailer.ts';
+import { inlineRunQueue, type InlineRunQueue } from '../../server/runs/inline-run-queue.ts';
 import type { Services } from '../../server/services.ts';
 import { createTileCache } from '../../server/tiles/tile-cache.ts';
 import { createTestDatabase } from './test-database.ts';
@@ -18,6 +19,8 @@ import { createTestDatabase } from './test-database.ts';
 export type TestApp = {
   readonly app: () => Express;
   readonly services: () => Services;
+  /** Steps of runs are done in it at once. */
+  readonly runQueue: () => InlineRunQueue;
   /** What was sent, oldest first. */
   readonly letters: Letter[];
 };
@@ -38,7 +41,7 @@ export function testApp({
   readonly threads?: boolean;
 } = {}): TestApp {
   const letters: Letter[] = [];
-  let running: { app: Express; services: Services } | undefined;
+  let running: { app: Express; services: Services; queue: InlineRunQueue } | undefined;
   let close: (() => Promise<void>) | undefined;
 
   beforeAll(async () => {
@@ -72,10 +75,12 @@ export function testApp({
       tiles: createTileCache(),
     };
     const jobs = threads ? openJobs(tools) : openJobsInline(tools);
-    const services = { ...tools, jobs };
-    running = { services, app: createApp(services, pool, root) };
+    const queue = inlineRunQueue(database);
+    const services = { ...tools, jobs, runs: queue };
+    running = { services, queue, app: createApp(services, pool, root) };
     close = async () => {
       await jobs.close();
+      await queue.close();
       await database.close();
       await pool.end();
       await copy.drop();
@@ -91,5 +96,10 @@ export function testApp({
     if (running === undefined) throw new Error('The application has not started yet.');
     return running;
   }
-  return { app: () => started().app, services: () => started().services, letters };
+  return {
+    app: () => started().app,
+    services: () => started().services,
+    runQueue: () => started().queue,
+    letters,
+  };
 }

@@ -1,4 +1,3 @@
-import type { Express } from 'express';
 import type TestAgent from 'supertest/lib/agent.js';
 import { ROLES } from '../../shared/schemas/roles.ts';
 import { defaultRules } from '../../server/commands/default-rules.ts';
@@ -12,7 +11,9 @@ import { RegisterImport } from '../../server/models/register-import.ts';
 import { SchemeRules } from '../../server/models/scheme-rules.ts';
 import type { Scheme } from '../../server/models/scheme.ts';
 import { aBuilding, aMember, anAdministrator, anAlignment, aPerson, aScheme } from './factories.ts';
+import { aRun } from './runs.ts';
 import { signIn, visitor } from './sign-in.ts';
+import type { TestApp } from './test-app.ts';
 
 /** Who walks: each role of the scheme at hand, the administrator, a member of another scheme, and nobody. */
 export const WALKERS = [...ROLES, 'administrator', 'stranger', 'nobody'] as const;
@@ -24,11 +25,12 @@ export type Place = {
   readonly building: Building;
   readonly importId: string;
   readonly alignment: Alignment;
+  readonly runId: string;
   readonly change: RegisterChange;
   readonly mark: string;
 };
 
-async function aPlace(mark: string, author: Person): Promise<Place> {
+async function aPlace(app: TestApp, mark: string, author: Person): Promise<Place> {
   const scheme = await aScheme({ name: `${mark} scheme`, description: `${mark} words` });
   const building = await aBuilding(scheme, { reference: `${mark}-1`, name: `${mark} house` });
   await BackgroundFeature.create({
@@ -49,14 +51,16 @@ async function aPlace(mark: string, author: Person): Promise<Place> {
     ...{ fileName: `${mark}.geojson`, options: NO_OPTIONS },
   });
   const alignment = await anAlignment(scheme, { name: `${mark} option` });
-  return { scheme, building, importId: sent.id, alignment, change, mark };
+  const { id: runId } = await aRun(app, scheme, alignment);
+  return { scheme, building, importId: sent.id, alignment, runId, change, mark };
 }
 
 /** Two places, everybody who walks, and how to enter as each of them. */
-export async function walkWorld(app: Express) {
+export async function walkWorld(testApp: TestApp) {
+  const app = testApp.app();
   const administrator = await anAdministrator();
-  const own = await aPlace('own-secret', administrator);
-  const foreign = await aPlace('foreign-secret', administrator);
+  const own = await aPlace(testApp, 'own-secret', administrator);
+  const foreign = await aPlace(testApp, 'foreign-secret', administrator);
   const invited = await aPerson({ name: 'Invited', password: null });
   const people = new Map<Walker, Person>([
     ['administrator', administrator],

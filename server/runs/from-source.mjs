@@ -1,0 +1,5 @@
+import { register } from 'tsx/esm/api';
+
+// a thread does not take over how its process reads TypeScript
+register();
+export const { compute } = await import('./thread.ts');

@@ -1,0 +1,53 @@
+import { caseOfBuilding } from '../../shared/assessment/case-of-building.ts';
+import { preparedBuilding } from '../../shared/assessment/prepared-building.ts';
+import { runInputs } from '../../shared/assessment/run-inputs.ts';
+import type { AssessCase } from '../../shared/schemas/assess-case.ts';
+import { runBuildingSchema, type RunBuilding } from '../../shared/schemas/runs.ts';
+import { AppError } from '../errors.ts';
+import { findNeighboursText, findRunBuilding } from '../models/find-run-building.ts';
+import { findResult } from '../models/run-results.ts';
+import { Run } from '../models/run.ts';
+import type { Services } from '../services.ts';
+
+type Place = { readonly runId: string; readonly buildingId: number };
+
+async function findOwnRun(schemeId: string, { runId }: Place): Promise<Run> {
+  const run = await Run.findOne({ where: { id: runId, schemeId } });
+  if (run === null) throw new AppError('not-found');
+  return run;
+}
+
+/**
+ * One building of a run with all that it takes to work it out again: what was known of it and the rows that
+ * it stood in.
+ */
+export async function runBuilding(
+  { database, runs }: Pick<Services, 'database' | 'runs'>,
+  schemeId: string,
+  place: Place,
+): Promise<RunBuilding> {
+  const { runId, buildingId } = place;
+  const run = await findOwnRun(schemeId, place);
+  const [found, result, neighbours] = await Promise.all([
+    findRunBuilding(database, runId, buildingId),
+    findResult(database, runId, buildingId),
+    findNeighboursText(database, runId, buildingId),
+  ]);
+  if (result === undefined) throw new AppError('not-found');
+  const { design, rules } = run;
+  const asked = { kind: 'rows', design, rules, id: String(buildingId), neighbours } as const;
+  return runBuildingSchema.parse({ ...found, result, rows: await runs.compute(asked) });
+}
+
+/** One building of a run as a case that anyone can work out again with the command for cases. */
+export async function runBuildingCase(
+  services: Pick<Services, 'database' | 'runs'>,
+  schemeId: string,
+  place: Place,
+): Promise<AssessCase> {
+  const { design, rules } = await findOwnRun(schemeId, place);
+  const { facts, rows } = await runBuilding(services, schemeId, place);
+  const inputs = runInputs(design, rules);
+  const building = preparedBuilding(facts, inputs.model, design.groundLevel);
+  return caseOfBuilding(inputs, design, building, new Map([[building.id, rows]]));
+}
