@@ -1,0 +1,120 @@
+import { inputsBesideWall } from '../../../../shared/assessment/inputs-beside-wall.ts';
+import type { OpenedWall } from '../../../../shared/assessment/open-wall.ts';
+import type { BuildingSheet } from '../../../../shared/assessment/sheet-of-building.ts';
+import { resultOfOutcome } from '../../../../shared/assessment/result-of-outcome.ts';
+import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
+import { troughWidthMatters } from '../../../../shared/ground/trough-width-matters.ts';
+import { WARNINGS } from '../../../../shared/warnings.ts';
+import { Panel } from '../../../components/ui/panel.tsx';
+import { settledWords } from '../../assessment/bracket-words.ts';
+import { BracketTable } from '../../assessment/components/bracket-table.tsx';
+import { BreakpointBar } from '../../assessment/components/breakpoint-bar.tsx';
+import { RangeBar } from '../../assessment/components/range-bar.tsx';
+import { WallFacts } from '../../assessment/components/wall-facts.tsx';
+import { strainRange } from '../../assessment/strain-range.ts';
+import { CAUTIONS } from '../../method/method-words.ts';
+import { reserveWords, stageWords } from '../../runs/result-words.ts';
+import { assumedWords, plainWords } from '../plain-words.ts';
+
+type SheetAnswersProps = {
+  readonly run: RunDetail;
+  readonly building: RunBuilding;
+  readonly sheet: BuildingSheet;
+  readonly opened: OpenedWall | null;
+};
+
+/** Whether what was worked out here is what was recorded, figure by figure. */
+function Record({ run, building, sheet }: SheetAnswersProps) {
+  const again = JSON.stringify(resultOfOutcome(sheet.outcome));
+  const isSame = again === JSON.stringify(building.result);
+  return (
+    <p className={isSame ? 'mt-2 text-cap text-ink-2' : 'mt-2 text-small text-clay-deep'}>
+      {isSame
+        ? `Worked out again in this browser from what run ${run.number} went by: the same figures as recorded, to the last digit.`
+        : `Worked out again in this browser, the figures differ from the record of run ${run.number}. The record stands; tell whoever looks after this workbench.`}
+    </p>
+  );
+}
+
+function BracketPanels({ building, sheet, opened }: SheetAnswersProps) {
+  const { bracket } = sheet.strain ?? {};
+  const { model } = sheet.inputs;
+  const beside = opened === null ? undefined : inputsBesideWall(model, opened.wall);
+  if (bracket === undefined || beside === undefined) return null;
+  return (
+    <>
+      <Panel title="Bracket" note="volume loss down, K across; the worst of all walls, strain %">
+        <div className="mt-2">
+          <BracketTable
+            bracket={bracket}
+            volumeLoss={beside.volumeLoss}
+            troughWidth={troughWidthMatters(model) ? beside.troughWidth : null}
+          />
+        </div>
+        <div className="mt-2">
+          <RangeBar strain={strainRange(bracket)} />
+        </div>
+        {sheet.strain?.sensitivity !== undefined && (
+          <p className="mt-1 text-small">{settledWords(sheet.strain.sensitivity)}</p>
+        )}
+      </Panel>
+      <Panel title="Breakpoint" note="volume loss that makes it the category that leads on">
+        <div className="mt-2">
+          <BreakpointBar breakpoint={sheet.strain?.breakpoint} volumeLoss={beside.volumeLoss} />
+          <p className="mt-1 text-small">{reserveWords(building.result)}</p>
+        </div>
+      </Panel>
+    </>
+  );
+}
+
+/** What the figures mean: in plain words, the bracket, the breakpoint, the stage, and the cautions. */
+export function SheetAnswers(props: SheetAnswersProps) {
+  const { building, opened } = props;
+  const { result } = building;
+  const assumed = assumedWords(result.assumed);
+  return (
+    <div className="min-w-0 lg:col-span-2 xl:col-span-1">
+      <Panel title="In plain words">
+        <div className="mt-2 border-l-4 border-clay pl-3 text-roomy">
+          {plainWords(result).map((sentence) => (
+            <p key={sentence} className="[&+&]:mt-1.5">
+              {sentence}
+            </p>
+          ))}
+          {assumed !== null && <p className="mt-1.5">{assumed}</p>}
+        </div>
+        <Record {...props} />
+      </Panel>
+      <BracketPanels {...props} />
+      {opened !== null && (
+        <Panel title="The wall as a whole" note={`wall ${opened.wall.name}`}>
+          <WallFacts opened={opened} />
+        </Panel>
+      )}
+      <Panel title="Stage" note="by the figures; nothing is decided by them">
+        <p className="mt-2 text-small">{stageWords(result)}</p>
+        {result.warnings.length > 0 && (
+          <ul className="mt-2 text-small" aria-label="Warnings">
+            {result.warnings.map((name) => (
+              <li
+                key={name}
+                className="border-l-4 border-clay-line bg-clay-wash px-2.5 py-1 [&+&]:mt-1"
+              >
+                <b className="inline-block font-semibold first-letter:uppercase">{name}.</b>{' '}
+                {name in WARNINGS ? WARNINGS[name as keyof typeof WARNINGS] : ''}
+              </li>
+            ))}
+          </ul>
+        )}
+      </Panel>
+      <Panel title="Cautions">
+        <ul className="mt-2 list-disc pl-4 text-small text-ink-2">
+          {CAUTIONS.map((caution) => (
+            <li key={caution}>{caution}</li>
+          ))}
+        </ul>
+      </Panel>
+    </div>
+  );
+}

@@ -1,0 +1,79 @@
+import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
+import { CATEGORIES, type Category } from '../../../../shared/damage/categories.ts';
+import { Button } from '../../../components/ui/button.tsx';
+import { ButtonLink } from '../../../components/ui/button-link.tsx';
+import { DamageChip } from '../../../components/ui/damage-chip.tsx';
+import { buildingPath, registerPath } from '../../../config/paths.ts';
+import { stageWords } from '../../runs/result-words.ts';
+
+type SheetHeadProps = {
+  readonly schemeId: string;
+  readonly run: RunDetail;
+  readonly building: RunBuilding;
+};
+
+function label(category: Category): string {
+  return CATEGORIES[category]?.label ?? '';
+}
+
+function Verdict({ result }: Pick<RunBuilding, 'result'>) {
+  const { category, categoryLow, categoryHigh, fault } = result;
+  if (fault !== null) return <p className="text-roomy font-semibold">Not worked out</p>;
+  if (category === null || categoryLow === null || categoryHigh === null) {
+    return (
+      <p className="text-roomy">
+        <b className="font-semibold">{stageWords(result)}</b>
+        <span className="block text-small text-ink-2">by screening, over the whole bracket</span>
+      </p>
+    );
+  }
+  const range =
+    categoryLow === categoryHigh
+      ? `central; the same over the bracket`
+      : `central; ${label(categoryLow)} to ${label(categoryHigh)} over the bracket`;
+  return (
+    <p className="flex items-center gap-3">
+      <span className="text-h2">
+        <DamageChip category={category} />
+      </span>
+      <span className="text-roomy">
+        <b className="inline-block font-semibold first-letter:uppercase">
+          {CATEGORIES[category]?.name}
+        </b>
+        <span className="block text-small text-ink-2">{range}</span>
+      </span>
+    </p>
+  );
+}
+
+/** What building this is, where it stands in the answer, and what can be done with its sheet. */
+export function SheetHead({ schemeId, run, building }: SheetHeadProps) {
+  const { facts, result } = building;
+  const id = Number(facts.id);
+  const casePath = `/api/schemes/${schemeId}/runs/${run.id}/buildings/${id}/case`;
+  return (
+    <header className="flex flex-wrap items-center gap-x-8 gap-y-3 border-b-2 border-ink px-8 py-3.5 max-sm:px-4">
+      <div className="min-w-0 flex-1">
+        <p className="text-small text-ink-3">Sheet · {facts.reference}</p>
+        <h1 className="text-h1 break-words max-sm:text-h2">
+          {facts.name ?? facts.address ?? facts.reference}
+        </h1>
+      </div>
+      <Verdict result={result} />
+      <div className="flex flex-wrap gap-2 print:hidden">
+        <ButtonLink to={`${buildingPath(schemeId, id)}&run=${run.id}`}>Show on plan</ButtonLink>
+        <ButtonLink to={`${registerPath(schemeId)}?building=${id}`}>Show in register</ButtonLink>
+        <a className="inline-flex items-center text-small underline" href={casePath} download>
+          The case for assess
+        </a>
+        <Button
+          onClick={() => {
+            window.print();
+          }}
+        >
+          Print
+        </Button>
+      </div>
+    </header>
+  );
+}

@@ -1,0 +1,50 @@
+import { footprintArea } from '../../../../shared/building/footprint-area.ts';
+import type { BuildingSheet } from '../../../../shared/assessment/sheet-of-building.ts';
+import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
+import { Panel } from '../../../components/ui/panel.tsx';
+import { BuildingFacts } from '../../buildings/components/building-facts.tsx';
+import type { BuildingValues } from '../../buildings/shown-value.ts';
+import { PlanExtract } from './plan-extract.tsx';
+import { WallTable } from './wall-table.tsx';
+
+type SheetPlaceProps = {
+  readonly schemeId: string;
+  readonly run: RunDetail;
+  readonly building: RunBuilding;
+  readonly sheet: BuildingSheet;
+  /** The wall that is opened. */
+  readonly index: number;
+  readonly onChoose: (index: number) => void;
+};
+
+/** The register's values as the run took them, in the shape in which they are shown. */
+function valuesOf({ facts, version }: RunBuilding, { prepared }: BuildingSheet): BuildingValues {
+  const { parts, ...values } = facts;
+  return {
+    ...values,
+    area: footprintArea(parts),
+    groundLevelFrom: null,
+    assumed: [...prepared.attributes.assumed],
+    version,
+  };
+}
+
+/** Where the building stands, its walls by letter, and what is known of it. */
+export function SheetPlace(props: SheetPlaceProps) {
+  const { schemeId, run, building, sheet, index, onChoose } = props;
+  const address = building.facts.name === null ? null : building.facts.address;
+  return (
+    <div className="min-w-0">
+      <Panel title="Walls" note="by letter; the clay one is opened">
+        <PlanExtract {...{ schemeId, run, building, sheet, index }} />
+        {sheet.strain !== null && (
+          <WallTable strain={sheet.strain} index={index} onChoose={onChoose} />
+        )}
+      </Panel>
+      <Panel title="Facts" note="as the run took them; dotted where assumed">
+        {address !== null && <p className="mt-2 text-small">{address}</p>}
+        <BuildingFacts building={valuesOf(building, sheet)} />
+      </Panel>
+    </div>
+  );
+}
