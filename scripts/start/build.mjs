@@ -9,7 +9,15 @@ const CLIENT = ['index.html', 'src', 'shared', 'vite.config.ts', 'tailwind.confi
 const SERVER = ['server', 'shared'];
 const COMMON = ['package-lock.json', 'tsconfig.json', 'scripts/start/build.mjs'];
 
-const PROGRAMS = ['index', 'migrate', 'seed', 'first-administrator', 'jobs/thread', 'runs/thread', 'worker'];
+const PROGRAMS = [
+  'index',
+  'migrate',
+  'seed',
+  'first-administrator',
+  'jobs/thread',
+  'runs/compute',
+  'worker',
+];
 
 function buildClient(outDir) {
   const vite = path.join(root, 'node_modules/vite/bin/vite.js');

@@ -15,7 +15,7 @@ const IDLE = 30_000;
 /** Beside the sources while they are read as they are, beside the built server otherwise. */
 function entry(): string {
   const isSource = import.meta.url.endsWith('.ts');
-  return new URL(isSource ? './from-source.mjs' : './runs/thread.mjs', import.meta.url).href;
+  return new URL(isSource ? './from-source.mjs' : './runs/compute.mjs', import.meta.url).href;
 }
 
 /** Threads for the arithmetic of runs, one for each processor, so that requests are answered meanwhile. */
