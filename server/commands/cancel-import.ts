@@ -1,4 +1,5 @@
 import { AppError } from '../errors.ts';
+import { removeKeptFile } from '../jobs/remove-file.ts';
 import { RegisterImport } from '../models/register-import.ts';
 import { deleteStagedRows } from '../models/staged-rows.ts';
 import type { Actor } from '../policies/actor.ts';
@@ -29,6 +30,7 @@ export async function cancelImport(
       transaction,
     );
   });
-  await deleteStagedRows(database, id, { keepNoted: false });
   await row.reload();
+  await removeKeptFile(row);
+  await deleteStagedRows(database, id, { keepNoted: false });
 }

@@ -6,7 +6,7 @@ import { createPointSample } from '../imports/point-sample.ts';
 import { findExtent } from '../models/find-extent.ts';
 import { RegisterImport } from '../models/register-import.ts';
 import type { Scheme } from '../models/scheme.ts';
-import { findFirstCorners } from '../models/staged-rows.ts';
+import { deleteStagedRows, findFirstCorners } from '../models/staged-rows.ts';
 import type { Services } from '../services.ts';
 
 type Chosen = Pick<RegisterImport, 'options' | 'said'>;
@@ -20,6 +20,29 @@ function columnFaults({ columns }: RegisterImport, options: ImportOptions): Fiel
       path: `options.columns.${field}`,
       message: 'The file has no such column.',
     }));
+}
+
+/** Reads another layer of the file, with columns and a place of its own. */
+async function readOther(
+  { database, jobs }: Services,
+  row: RegisterImport,
+  version: number,
+  layer: string,
+): Promise<void> {
+  const { id, schemeId, file, layers } = row;
+  if (file === null || !layers.includes(layer)) {
+    const message = 'The file has no such layer, or is not kept any more. Send it again.';
+    throw new AppError('invalid-input', undefined, [{ path: 'options.layer', message }]);
+  }
+  const anew = { version: version + 1, state: 'reading', fault: null, done: 0, of: null } as const;
+  const nothing = { columns: [], counts: null, bounds: null, place: null, missing: [] };
+  const where = { id, version, state: ['asking', 'checking'] };
+  const [changed] = await RegisterImport.update({ ...anew, ...nothing }, { where });
+  if (changed !== 1) throw new AppError('conflict');
+  await jobs.stop(id);
+  await deleteStagedRows(database, id, { keepNoted: false });
+  jobs.start({ kind: 'read', importId: id, schemeId, file, layer });
+  await row.reload();
 }
 
 async function refuseWrong(row: RegisterImport, scheme: Scheme, options: ImportOptions) {
@@ -58,13 +81,20 @@ async function withAxes(
   return { options: { ...options, place }, said: { ...said, axes: words } };
 }
 
-/** Chooses anew for an import, which is checked again; a check of what was chosen before stops. */
+/**
+ * Chooses anew for an import, which is checked again, and read again where another layer is wanted; a check
+ * of what was chosen before stops.
+ */
 export async function changeImport(
   services: Services,
   scheme: Scheme,
   row: RegisterImport,
   { version, options }: { readonly version: number; readonly options: ImportOptions },
 ): Promise<void> {
+  if (options.layer !== undefined && options.layer !== row.layer) {
+    await readOther(services, row, version, options.layer);
+    return;
+  }
   await refuseWrong(row, scheme, options);
   const { jobs } = services;
   const chosen = await withAxes(services, scheme, row, options);

@@ -4,10 +4,11 @@ import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import { checkedFootprint } from '../register/check-footprint.ts';
 import { checkInArea } from '../register/check-in-area.ts';
+import { overlapsOf } from '../register/overlaps-of.ts';
 import type { Services } from '../services.ts';
 import { changeRegister } from './change-register.ts';
 
-/** Brings in a building drawn by hand. */
+/** Brings in a building drawn by hand, and tells which it lies over: a gallery may lie over a lane. */
 export async function drawBuilding(
   { database }: Services,
   by: Actor,
@@ -17,7 +18,9 @@ export async function drawBuilding(
   const footprint = checkedFootprint(given);
   await checkInArea(scheme, footprint);
   const created = [{ reference, footprint, attributes }];
-  return database.transaction((transaction) =>
+  const change = await database.transaction((transaction) =>
     changeRegister(database, scheme, { kind: 'draw', by }, { created }, transaction),
   );
+  const [id = 0] = change.buildingIds;
+  return { ...change, overlaps: await overlapsOf(database, scheme, id) };
 }

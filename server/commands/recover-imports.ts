@@ -53,6 +53,7 @@ export async function recoverImports({
   const failed = { state: 'failed', fault: STOPPED } as const;
   await RegisterImport.update(failed, { where: { state: 'reading' } });
   await removeUploads(env.UPLOADS_FOLDER);
+  await RegisterImport.update({ file: null }, { where: { file: { [Op.ne]: null } } });
   await dropAbandoned(database);
   const again = { state: 'checking', fault: NOT_TAKEN, version: literal('version + 1') } as const;
   await RegisterImport.update(again, { where: { state: 'importing' } });

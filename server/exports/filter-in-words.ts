@@ -22,7 +22,7 @@ function rangesInWords({ ranges = {} }: RegisterFilter): string[] {
 
 /** A filter as people read it on a sheet. */
 export function filterInWords(filter: RegisterFilter): string {
-  const { search, assumed, importId, within, ids } = filter;
+  const { search, assumed, importId, within, ids, except } = filter;
   const conditions = [
     ...(search !== undefined && search !== '' ? [`Words: ${search}`] : []),
     ...anyInWords(filter),
@@ -32,6 +32,7 @@ export function filterInWords(filter: RegisterFilter): string {
     ...(importId === undefined ? [] : [`From import ${importId}`]),
     ...(within === undefined ? [] : [`In the box ${within.join(', ')} (degrees)`]),
     ...(ids === undefined ? [] : [`${ids.length} chosen buildings`]),
+    ...(except === undefined ? [] : [`All but ${except.length} of them`]),
   ];
   return conditions.length === 0 ? 'All buildings' : conditions.join('; ');
 }

@@ -3,6 +3,7 @@ import { GROUND_LIMITS } from '../../shared/schemas/ground.ts';
 import { AppError } from '../errors.ts';
 import type { Grid } from './ground.ts';
 import { readNumber } from './read-number.ts';
+import { createRowFaults, quoted } from './row-faults.ts';
 
 const KEYS = new Set([
   ...['ncols', 'nrows', 'xllcorner', 'xllcenter', 'yllcorner', 'yllcenter', 'cellsize'],
@@ -13,6 +14,8 @@ const HEADING = /^\s*([a-z_]+)[ \t]+(\S+)[ \t]*(?:\r?\n|\r|$)/i;
 const LONGEST_HEADING = 4096;
 const AT_ONCE = 200_000;
 const SPACE = 32;
+/** Longer is no number. */
+const LONGEST_WORD = 40;
 
 function unreadable(message: string): AppError {
   return new AppError('unreadable', message);
@@ -61,8 +64,12 @@ function sizeOf(values: ReadonlyMap<string, number>): Omit<Grid, 'levels' | 'crs
   return { columns, rows, width, height, west: from('x', width), south: from('y', height) };
 }
 
-async function readLevels(bytes: Buffer, start: number, count: number, none: number) {
+type Cells = { readonly columns: number; readonly rows: number; readonly none: number };
+
+async function readLevels(bytes: Buffer, start: number, { columns, rows, none }: Cells) {
+  const count = columns * rows;
   const levels = new Float32Array(count);
+  const faults = createRowFaults();
   let [at, read] = [start, 0];
   for (;;) {
     while (at < bytes.length && (bytes[at] ?? 0) <= SPACE) at += 1;
@@ -70,10 +77,11 @@ async function readLevels(bytes: Buffer, start: number, count: number, none: num
     let end = at;
     while (end < bytes.length && (bytes[end] ?? 0) > SPACE) end += 1;
     // a word as long as a file is no number
-    const word = end - at > 40 ? '' : bytes.toString('latin1', at, end);
+    const word = bytes.toString('latin1', at, Math.min(end, at + LONGEST_WORD));
     const value = readNumber(word);
     if (Number.isNaN(value) && !/^nan$/i.test(word)) {
-      throw unreadable(`Value ${read + 1} of the grid is not a number.`);
+      const place = `Row ${Math.floor(read / columns) + 1}, column ${(read % columns) + 1}`;
+      faults.add(place, `${quoted(word)} is not a number.`);
     }
     if (read === count) throw unreadable('The grid holds more values than its heading says.');
     levels[read] = value === none ? NaN : value;
@@ -81,6 +89,7 @@ async function readLevels(bytes: Buffer, start: number, count: number, none: num
     at = end;
     if (read % AT_ONCE === 0) await setImmediate();
   }
+  faults.refuse();
   if (read < count) {
     throw unreadable(`The grid holds ${read} values, but its heading says ${count}.`);
   }
@@ -92,6 +101,6 @@ export async function readGrid(bytes: Buffer, crs: number | undefined): Promise<
   const { values, end } = headingOf(bytes);
   const size = sizeOf(values);
   const none = values.get('nodata_value') ?? -9999;
-  const levels = await readLevels(bytes, end, size.columns * size.rows, none);
+  const levels = await readLevels(bytes, end, { ...size, none });
   return { kind: 'grid', ...size, crs: crs ?? null, levels };
 }

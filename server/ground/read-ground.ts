@@ -1,12 +1,9 @@
 import { AppError } from '../errors.ts';
 import { betweenGrids } from './grid-place.ts';
 import { groundFacts, type Ground } from './ground.ts';
+import { isLevel } from './level-range.ts';
 import { isGrid, readGrid } from './read-grid.ts';
 import { readSpots } from './read-spots.ts';
-
-/** Between the deepest pit and the highest town, as ground levels are bounded in the register. */
-const LOWEST = -500;
-const HIGHEST = 9000;
 
 /** Reads an uploaded file of levels, a grid or spot heights, or a refusal that says what is wrong. */
 export async function readGround(
@@ -22,7 +19,7 @@ export async function readGround(
     : await readSpots(bytes, { crs, schemeCrs });
   const { points, lowest, highest } = groundFacts(ground);
   if (points === 0) throw new AppError('unreadable', 'The grid holds no level.');
-  if (lowest < LOWEST || highest > HIGHEST) {
+  if (!isLevel(lowest) || !isLevel(highest)) {
     const message = `Levels run from ${lowest} to ${highest} m. Check units, and which value stands for none.`;
     throw new AppError('unreadable', message);
   }

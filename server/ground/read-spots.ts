@@ -5,7 +5,9 @@ import { GROUND_LIMITS } from '../../shared/schemas/ground.ts';
 import { AppError } from '../errors.ts';
 import { betweenGrids } from './grid-place.ts';
 import type { Spots } from './ground.ts';
+import { isLevel } from './level-range.ts';
 import { readNumber } from './read-number.ts';
+import { createRowFaults, quoted } from './row-faults.ts';
 
 const DEGREES = 4326;
 const AT_ONCE = 20_000;
@@ -21,6 +23,8 @@ const NAMES = {
 } as const;
 
 type Columns = {
+  /** As the file calls them. */
+  readonly names: readonly string[];
   readonly x: number;
   readonly y: number;
   readonly level: number;
@@ -44,9 +48,9 @@ function columnsOf(heading: readonly string[]): Columns {
   const find = (wanted: readonly string[]) => names.findIndex((name) => wanted.includes(name));
   const [x, y, level] = [find(NAMES.x), find(NAMES.y), find(NAMES.level)];
   const [longitude, latitude] = [find(NAMES.longitude), find(NAMES.latitude)];
-  if (level >= 0 && x >= 0 && y >= 0) return { x, y, level, isDegrees: false };
+  if (level >= 0 && x >= 0 && y >= 0) return { names: heading, x, y, level, isDegrees: false };
   if (level >= 0 && longitude >= 0 && latitude >= 0) {
-    return { x: longitude, y: latitude, level, isDegrees: true };
+    return { names: heading, x: longitude, y: latitude, level, isDegrees: true };
   }
   throw unreadable(
     'Name the columns in the first line: x, y and z; easting, northing and level; or lon, lat and level.',
@@ -81,6 +85,24 @@ async function placeOf({ isDegrees }: Columns, crs: number | undefined, scheme: 
   return betweenGrids(from, scheme);
 }
 
+type Place = Awaited<ReturnType<typeof placeOf>>;
+
+/** A row as a point, or why it is none. */
+function pointOf(row: readonly string[], columns: Columns, place: Place): number[] | string {
+  const { x, y, level } = columns;
+  for (const column of [x, y, level]) {
+    const word = row[column]?.trim() ?? '';
+    const name = `column ${quoted(columns.names[column]?.trim() ?? '')}`;
+    if (word === '') return `${name} is blank.`;
+    if (Number.isNaN(readNumber(word))) return `${quoted(word)} in ${name} is not a number.`;
+  }
+  const [east, north, height] = [x, y, level].map((column) => readNumber(row[column] ?? ''));
+  const [onEast, onNorth] = place([east ?? NaN, north ?? NaN]);
+  if (!Number.isFinite(onEast + onNorth)) return 'the point cannot be placed in the grid.';
+  if (!isLevel(height ?? NaN)) return `no ground lies at ${String(height)} m. Check the units.`;
+  return [onEast, onNorth, height ?? NaN];
+}
+
 /** Reads spot heights from CSV, brought to the scheme's grid. */
 export async function readSpots(
   bytes: Buffer,
@@ -89,7 +111,8 @@ export async function readSpots(
   const text = bytes.toString('utf8');
   const points: number[] = [];
   let columns: Columns | undefined;
-  let place: Awaited<ReturnType<typeof placeOf>> | undefined;
+  let place: Place | undefined;
+  const faults = createRowFaults();
   let line = 0;
   for await (const row of rowsOf(text)) {
     line += 1;
@@ -98,19 +121,15 @@ export async function readSpots(
       place = await placeOf(columns, crs, schemeCrs);
       continue;
     }
-    if (points.length >= 3 * GROUND_LIMITS.spots) {
+    if (line > GROUND_LIMITS.spots + 1) {
       throw new AppError('too-large', 'The file holds more than 500,000 points.');
     }
-    const [x, y, level] = [columns.x, columns.y, columns.level].map((k) =>
-      readNumber(row[k] ?? ''),
-    );
-    const [east, north] = place([x ?? NaN, y ?? NaN]);
-    if (!Number.isFinite(east + north) || !Number.isFinite(level)) {
-      throw unreadable(`Row ${line} does not hold three numbers that make a point.`);
-    }
-    points.push(east, north, level ?? NaN);
+    const point = pointOf(row, columns, place);
+    if (typeof point === 'string') faults.add(`Row ${line}`, point);
+    else points.push(...point);
     if (line % AT_ONCE === 0) await setImmediate();
   }
+  faults.refuse();
   if (points.length === 0) throw unreadable('The file holds no points.');
   return { kind: 'spots', points: Float64Array.from(points) };
 }

@@ -18,9 +18,9 @@ function isJson(head: string): boolean {
   return /^[\s\u001e]*[{[]/.test(head);
 }
 
-async function openPlain(bytes: Buffer): Promise<Source> {
+async function openPlain(bytes: Buffer, layer?: string): Promise<Source> {
   if (bytes.length === 0) throw new AppError('unreadable', 'The file is empty.');
-  if (begins(bytes, 'SQLite format 3\0')) return openGeopackage(bytes);
+  if (begins(bytes, 'SQLite format 3\0')) return openGeopackage(bytes, layer);
   if (begins(bytes, 'PK')) {
     throw new AppError('unreadable', 'The archive is refused: it holds an archive.');
   }
@@ -32,7 +32,8 @@ async function openPlain(bytes: Buffer): Promise<Source> {
   return isJson(head) ? openJson(bytes) : openCsv(text);
 }
 
-/** Finds out by what a file holds which format it has, never by its name, and opens it. */
-export async function openSource(bytes: Buffer): Promise<Source> {
-  return begins(bytes, 'PK') ? openArchive(bytes, openPlain) : openPlain(bytes);
+/** Finds out by what a file holds which format it has, never by its name, and opens it, or a layer of it. */
+export async function openSource(bytes: Buffer, layer?: string): Promise<Source> {
+  const open = (plain: Buffer) => openPlain(plain, layer);
+  return begins(bytes, 'PK') ? openArchive(bytes, open) : open(bytes);
 }

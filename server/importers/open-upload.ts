@@ -31,19 +31,20 @@ function judgedCrs(
 
 /**
  * Opens a file of buildings by what it holds and looks through it once, so that what is taken can be
- * read to its end. Refuses it with a sentence for people.
+ * read to its end; of several layers the one that is wanted. Refuses it with a sentence for people.
  */
-export async function openUpload(file: string): Promise<Upload> {
+export async function openUpload(file: string, layer?: string): Promise<Upload> {
   const { size } = await stat(file);
   if (size > IMPORT_LIMITS.bytes) {
     throw new AppError('too-large', 'The file is larger than 200 MB. Split it into several files.');
   }
-  const source = await openSource(await readFile(file));
+  const source = await openSource(await readFile(file), layer);
   const found = await survey(source);
   return {
     format: source.format,
     kind: source.kind,
     layer: source.layer,
+    layers: source.layers ?? [],
     ...judgedCrs(source, found),
     columns: found.columns,
     count: found.count,

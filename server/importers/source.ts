@@ -22,6 +22,8 @@ export type Source = {
   readonly format: keyof typeof IMPORT_FORMATS;
   readonly kind: 'footprints' | 'values';
   readonly layer: string | null;
+  /** All layers that could be read, where there are several; left out where there is one. */
+  readonly layers?: readonly string[];
   readonly crs: FileCrs | null;
   /** What people should know about how the file was read, as sentences. */
   readonly notes: readonly string[];

@@ -14,6 +14,8 @@ export type UploadRow = {
 
 /** A file that was looked through once and can be taken, as far as its format goes. */
 export type Upload = Pick<Source, 'format' | 'kind' | 'layer' | 'crs' | 'notes' | 'columns'> & {
+  /** All layers that could be read; none where there is no choice. */
+  readonly layers: readonly string[];
   readonly count: number;
   /** In the order of the file, again at every call, in bounded memory. */
   readonly rows: () => AsyncIterable<UploadRow>;

@@ -1,82 +1,66 @@
 import Flatbush from 'flatbush';
-import * as polyclip from 'polyclip-ts';
-import { footprintArea } from '../../shared/building/footprint-area.ts';
-import { ringCrossing } from '../../shared/geometry/ring-crossing.ts';
-import type { Box } from '../../shared/geometry/bounding-box.ts';
-import { pointInPolygon } from '../../shared/geometry/point-in-polygon.ts';
+import { boundingBox, type Box } from '../../shared/geometry/bounding-box.ts';
 import type { FootprintRings } from '../models/building-footprint.ts';
 import { unpacked, type StoredFootprint } from './footprint-store.ts';
+import { overlapArea, SHARED, type Outlined } from './overlap-area.ts';
 
-export type Overlap = { readonly row: number; readonly other: number; readonly area: number };
+/** How a row's footprint lies over another one. */
+export type Overlap<Other> = { readonly row: number; readonly other: Other; readonly area: number };
 
-/** Edges that reach less than this over each other belong to a shared wall, in metres. */
-const SHARED = 0.05;
-/** Overlaps of less than this, in square metres, are noise. */
-const LEAST = 1;
+/** The footprints of a file, to find those that lie over others. */
+export type OverlapSearch = {
+  /** Those that lie over earlier ones of the file, each with the other's row. */
+  readonly within: () => Overlap<number>[];
+  /** Those that lie over a footprint that is not of the file; `isOwn` leaves rows out. */
+  readonly over: <Other>(
+    footprint: FootprintRings,
+    other: Other,
+    isOwn: (row: number) => boolean,
+  ) => Overlap<Other>[];
+};
+
 /** A file that is one heap of overlaps says so with fewer. */
-const MOST = 20_000;
+export const MOST_OVERLAPS = 20_000;
 
-type Unpacked = ReturnType<typeof ringsOf>;
-
-function ringsOf({ rings }: StoredFootprint) {
-  return rings.map((part) => part.map(unpacked));
+function outlined(stored: StoredFootprint): Outlined {
+  return { box: stored, rings: stored.rings.map((part) => part.map(unpacked)) };
 }
 
-type Drawn = { readonly box: Box; readonly rings: Unpacked };
-
-function holdsBox(outer: Box, inner: Box): boolean {
-  const [west, south] = [inner.west - outer.west, inner.south - outer.south];
-  const [east, north] = [outer.east - inner.east, outer.north - inner.north];
-  return Math.min(west, south, east, north) > -SHARED;
-}
-
-/** Whether one may lie in the other; neighbours that share a wall mostly do not. */
-function isInside(one: Drawn, other: Drawn): boolean {
-  if (!holdsBox(other.box, one.box)) return false;
-  const corner = one.rings[0]?.[0]?.[0];
-  return corner !== undefined && other.rings.some((part) => pointInPolygon(corner, part));
-}
-
-function mayOverlap(one: Drawn, other: Drawn): boolean {
-  const both = [...one.rings.flat(), ...other.rings.flat()];
-  return ringCrossing(both, SHARED) !== undefined || isInside(one, other) || isInside(other, one);
-}
-
-function overlapArea(one: Unpacked, other: Unpacked): number {
-  const mutable = (parts: Unpacked) =>
-    parts.map((part) => part.map((ring) => ring.map(([x, y]): [number, number] => [x, y])));
-  try {
-    const common: FootprintRings = polyclip.intersection(mutable(one), mutable(other));
-    return footprintArea(common);
-  } catch {
-    // what it cannot cut is no reason to stop an import
-    return 0;
-  }
-}
-
-/** Footprints of a file that lie over earlier ones by more than a shared wall. */
-export function findOverlaps(all: readonly StoredFootprint[]): Overlap[] {
-  if (all.length < 2) return [];
+function indexOf(all: readonly StoredFootprint[]): Flatbush | undefined {
+  if (all.length === 0) return undefined;
   const index = new Flatbush(all.length);
   for (const { west, south, east, north } of all) index.add(west, south, east, north);
   index.finish();
-  const found: Overlap[] = [];
-  for (const [at, one] of all.entries()) {
-    const near = index.search(
-      one.west + SHARED, one.south + SHARED, one.east - SHARED, one.north - SHARED,
-      (other) => other < at,
-    ); // prettier-ignore
-    const drawn = { box: one, rings: ringsOf(one) };
-    for (const other of near
-      .sort((a, b) => a - b)
-      .map((place) => all[place])
-      .filter((stored) => stored !== undefined)) {
-      const others = { box: other, rings: ringsOf(other) };
-      if (!mayOverlap(drawn, others)) continue;
-      const area = overlapArea(drawn.rings, others.rings);
-      if (area > LEAST) found.push({ row: one.row, other: other.row, area });
-      if (found.length === MOST) return found;
-    }
+  return index;
+}
+
+/** Makes the footprints of a file ready to be searched. */
+export function createOverlapSearch(all: readonly StoredFootprint[]): OverlapSearch {
+  const index = indexOf(all);
+
+  function near({ west, south, east, north }: Box, isMeant?: (place: number) => boolean) {
+    const places = index?.search(west + SHARED, south + SHARED, east - SHARED, north - SHARED, isMeant); // prettier-ignore
+    return (places ?? []).sort((a, b) => a - b).flatMap((place) => all[place] ?? []);
   }
-  return found;
+  return {
+    within: () => {
+      const found: Overlap<number>[] = [];
+      for (const [at, one] of all.entries()) {
+        const drawn = outlined(one);
+        for (const other of near(one, (place) => place < at)) {
+          const area = overlapArea(drawn, outlined(other));
+          if (area > 0) found.push({ row: one.row, other: other.row, area });
+          if (found.length === MOST_OVERLAPS) return found;
+        }
+      }
+      return found;
+    },
+    over: (footprint, other, isOwn) => {
+      const drawn = { box: boundingBox(footprint.flat(2)), rings: footprint };
+      return near(drawn.box)
+        .filter(({ row }) => !isOwn(row))
+        .map((stored) => ({ row: stored.row, other, area: overlapArea(outlined(stored), drawn) }))
+        .filter(({ area }) => area > 0);
+    },
+  };
 }

@@ -25,7 +25,7 @@ type Reading = {
   readonly points: readonly (readonly [number, number])[];
 };
 
-type Begun = Pick<RegisterImport, 'options' | 'said' | 'isRemembered'>;
+type Begun = Pick<RegisterImport, 'options' | 'said' | 'remembered'>;
 
 async function place(
   database: Sequelize,
@@ -56,17 +56,19 @@ export async function firstOptions(
   const scheme = await Scheme.findByPk(schemeId);
   if (scheme === null) throw new AppError('not-found');
   const names = columns.map(({ name }) => name);
-  const remembered = await findRememberedOptions(database, schemeId, upload.kind, names);
+  const found = await findRememberedOptions(database, schemeId, upload.kind, names);
+  const remembered = found && { at: found.at.toISOString(), fileName: found.fileName };
   const said = await findPlace(upload.crs, upload.crs === WGS84, upload.notes);
-  const mapped = remembered?.columns ?? guessColumns(columns);
-  const kept = { ...NO_OPTIONS, ...remembered, columns: mapped, settle: NO_OPTIONS.settle };
+  const mapped = found?.options.columns ?? guessColumns(columns);
+  const kept = { ...NO_OPTIONS, ...found?.options, columns: mapped, settle: NO_OPTIONS.settle };
+  const begun = { remembered: remembered ?? null };
   if (upload.kind === 'values') {
-    return { options: { ...kept, place: NO_OPTIONS.place }, said: null, isRemembered: remembered !== undefined }; // prettier-ignore
+    return { ...begun, options: { ...kept, place: NO_OPTIONS.place }, said: null };
   }
-  const found = await place(database, scheme, said, remembered?.place, points);
+  const lies = await place(database, scheme, said, found?.options.place, points);
   return {
-    options: { ...kept, place: found.place },
-    said: { ...said, axes: found.axes },
-    isRemembered: remembered !== undefined,
+    ...begun,
+    options: { ...kept, place: lies.place },
+    said: { ...said, axes: lies.axes },
   };
 }

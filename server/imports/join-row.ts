@@ -9,6 +9,7 @@ import { footprintHash } from './footprint-hash.ts';
 import type { JudgedRow } from './judge-row.ts';
 import { REMARKS } from './remarks.ts';
 import { isSameFootprint } from './same-footprint.ts';
+import { isToldBefore, withOutline } from './told-footprint.ts';
 
 type Joining = {
   readonly settle: ImportOptions['settle'];
@@ -16,6 +17,8 @@ type Joining = {
   readonly mayCreate: boolean;
   /** What somebody took out of the register, by reference. */
   readonly removed: ReadonlyMap<string, RemovedBuilding>;
+  /** The footprints that buildings had before, by their numbers. */
+  readonly earlier: ReadonlyMap<number, readonly FootprintRings[]>;
 };
 
 function settling({ others, rows }: ImportOptions['settle'], reference: string) {
@@ -27,15 +30,25 @@ function said({ values, drawn }: JudgedRow): MergeValues {
   return { ...values, ...(drawn !== null && { footprint: drawn.hash }) };
 }
 
-/** The same where the register's footprint is known: figures that a format rounds are no change. */
+/**
+ * The same, where figures that a format rounds are no change: neither of what the register holds, nor of
+ * what the last file said where a hand has drawn otherwise since.
+ */
 function saidAgainst(
   row: JudgedRow,
+  building: KnownBuilding,
   ours: MergeValues,
   clean: FootprintRings | undefined,
+  earlier: readonly FootprintRings[],
 ): MergeValues {
   const { drawn } = row;
-  const isSame = clean !== undefined && drawn !== null && isSameFootprint(clean, drawn.footprint);
-  return { ...said(row), ...(isSame && { footprint: ours.footprint ?? null }) };
+  const base = building.imported.footprint;
+  if (clean === undefined || drawn === null || drawn.hash === base) return said(row);
+  if (isSameFootprint(clean, drawn.footprint)) {
+    return { ...said(row), footprint: ours.footprint ?? null };
+  }
+  const isOld = base !== undefined && isToldBefore(drawn.footprint, building, earlier);
+  return isOld ? { ...said(row), footprint: base } : said(row);
 }
 
 function cleanFootprint({ footprint }: KnownBuilding): FootprintRings | undefined {
@@ -65,7 +78,7 @@ function takenValues(merged: Merged): Taking['attributes'] {
   return Object.fromEntries(taken.map(({ field, theirs }) => [field, theirs]));
 }
 
-function isToldAnew({ imported }: Merged, building: KnownBuilding): boolean {
+function isToldAnew(imported: Taking['imported'], building: KnownBuilding): boolean {
   return Object.entries(imported).some(([field, value]) => building.imported[field] !== value);
 }
 
@@ -99,22 +112,30 @@ function newRow(row: JudgedRow, removed: RemovedBuilding | undefined): CheckedRo
   return { ...kept, remarks, outcome: 'new', changes: [], buildingId: null, taking };
 }
 
-function mergedRow(row: JudgedRow, building: KnownBuilding, { settle }: Joining): CheckedRow {
+/** What is kept of what the file said; an outline that is not taken stands nowhere else. */
+function remembered({ fields, imported }: Merged, { drawn }: JudgedRow): Taking['imported'] {
+  const isLeft = fields.some(({ field, isConflict, isKept }) => field === 'footprint' && isConflict && isKept); // prettier-ignore
+  return isLeft && drawn !== null ? withOutline(imported, drawn.footprint) : imported;
+}
+
+function mergedRow(row: JudgedRow, building: KnownBuilding, joining: Joining): CheckedRow {
   const clean = cleanFootprint(building);
   const ours = held(building, clean);
+  const earlier = joining.earlier.get(building.id) ?? [];
   const merged = mergeBuilding({
     ours,
     base: building.imported,
-    theirs: saidAgainst(row, ours, clean),
-    settle: settling(settle, building.reference),
+    theirs: saidAgainst(row, building, ours, clean, earlier),
+    settle: settling(joining.settle, building.reference),
   });
+  const imported = remembered(merged, row);
   const taking: Taking = {
     attributes: takenValues(merged),
     takesFootprint: merged.fields.some(({ field, isKept }) => field === 'footprint' && !isKept),
-    imported: merged.imported,
+    imported,
     version: building.version,
   };
-  const isTaken = merged.outcome !== 'same' || isToldAnew(merged, building);
+  const isTaken = merged.outcome !== 'same' || isToldAnew(imported, building);
   return {
     ...base(row),
     outcome: merged.outcome,

@@ -81,4 +81,6 @@ export const REMARKS = {
       : `${reference} was joined into ${joinedInto} on ${DAY.format(at)}. It would come back beside it.`,
   overlap: (row: number, area: number) =>
     `The footprint overlaps that of row ${row} by ${metres(area)} m².`,
+  overlapRegister: (reference: string, area: number) =>
+    `The footprint overlaps ${reference} of the register by ${metres(area)} m².`,
 } as const;

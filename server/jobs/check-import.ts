@@ -3,17 +3,17 @@ import {
   findRemovedBuildings,
   findTakenReferences,
 } from '../models/known-buildings.ts';
-import { addRemarks, writeCheckedRows } from '../models/checked-rows.ts';
+import { findEarlierFootprints } from '../models/building-changes.ts';
+import { writeCheckedRows, type CheckedRow } from '../models/checked-rows.ts';
 import { crowdOf } from '../imports/crowd.ts';
 import { describePlace, unknownPlace } from '../imports/describe-place.ts';
-import { findOverlaps } from '../imports/find-overlaps.ts';
 import { createFootprintStore } from '../imports/footprint-store.ts';
 import { joinRow } from '../imports/join-row.ts';
 import { judgeRow, type CheckMemory } from '../imports/judge-row.ts';
 import { missingChoices } from '../imports/missing-choices.ts';
 import { createNumbering } from '../imports/numbering.ts';
 import { placementOf, type Placement } from '../imports/placement.ts';
-import { REMARKS } from '../imports/remarks.ts';
+import { createStandingBuildings, type StandingBuildings } from '../imports/standing-buildings.ts';
 import { countAbsent, countUnsettled, sumImport } from '../models/import-report.ts';
 import { RegisterImport } from '../models/register-import.ts';
 import { rowRanges } from '../models/row-ranges.ts';
@@ -21,6 +21,7 @@ import { Scheme } from '../models/scheme.ts';
 import { findFirstCorners, findStagedRows } from '../models/staged-rows.ts';
 import type { UploadRow } from '../importers/upload.ts';
 import type { JobTools } from './job.ts';
+import { noteOverlaps } from './note-overlaps.ts';
 import { createProgress } from './progress.ts';
 
 const AT_ONCE = 1000;
@@ -60,7 +61,7 @@ async function checkBatch(
   { tools: { database }, row, scheme }: Checking,
   memory: CheckMemory,
   staged: readonly UploadRow[],
-): Promise<void> {
+): Promise<CheckedRow[]> {
   const judged = staged.map((one) => judgeRow(memory, one));
   const references = judged.flatMap(({ reference }) => reference ?? []);
   const withFootprints = row.kind === 'footprints';
@@ -68,30 +69,28 @@ async function checkBatch(
   // a number that was counted is not the file's word for a building that is gone
   const isNamed = withFootprints && row.options.columns.reference !== undefined;
   const removed = await findRemovedBuildings(database, scheme.id, isNamed ? references : []);
-  const joining = { settle: row.options.settle, mayCreate: withFootprints, removed };
+  const drawn = withFootprints ? [...known.values()].map(({ id }) => id) : [];
+  const earlier = await findEarlierFootprints(database, drawn);
+  const joining = { settle: row.options.settle, mayCreate: withFootprints, removed, earlier };
   const checked = judged.map((one) => joinRow(one, known.get(one.reference ?? ''), joining));
   await writeCheckedRows(database, row.id, checked);
+  return checked;
 }
 
-async function checkRows(checking: Checking, memory: CheckMemory): Promise<void> {
+async function checkRows(checking: Checking, memory: CheckMemory): Promise<StandingBuildings> {
   const { tools, row } = checking;
+  const standing = createStandingBuildings();
   const progress = createProgress(row.id);
   let done = 0;
   for await (const range of rowRanges(tools.database, row.id, AT_ONCE)) {
     tools.signal.throwIfAborted();
     const staged = await findStagedRows(tools.database, row.id, range);
     if (staged.length === 0) continue;
-    await checkBatch(checking, memory, staged);
+    (await checkBatch(checking, memory, staged)).forEach(standing.add);
     done += staged.length;
     await progress(done);
   }
-}
-
-async function noteOverlaps({ tools: { database }, row }: Checking, memory: CheckMemory) {
-  const remarks = findOverlaps(memory.footprints.all).map(({ row: at, other, area }) => {
-    return { row: at, remark: REMARKS.overlap(other, area) };
-  });
-  if (remarks.length > 0) await addRemarks(database, row.id, remarks);
+  return standing;
 }
 
 /** What the person sees once every row is checked. */
@@ -123,8 +122,8 @@ export async function checkImport(tools: JobTools, importId: string): Promise<vo
     return;
   }
   const memory = await memoryOf(checking, placement);
-  await checkRows(checking, memory);
-  await noteOverlaps(checking, memory);
+  const standing = await checkRows(checking, memory);
+  await noteOverlaps(tools, row, memory.footprints, standing);
   const { counts, bounds, isUnsettled } = await sumUp(checking);
   const still = isUnsettled ? (['settle'] as const) : [];
   const asked = { place, counts, bounds, missing: [...still], state: 'asking' as const };

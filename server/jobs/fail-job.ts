@@ -4,12 +4,19 @@ import { RegisterImport } from '../models/register-import.ts';
 import { deleteStagedRows } from '../models/staged-rows.ts';
 import type { Services } from '../services.ts';
 import type { Job } from './job.ts';
+import { removeKeptFile } from './remove-file.ts';
 
 /** What people read of a fault: our own words, never a program's. */
 function wordsOf(error: unknown): string {
   if (!(error instanceof AppError)) return new AppError('internal').message;
   const [field] = error.fields;
   return field?.message ?? error.message;
+}
+
+async function forget(database: Services['database'], importId: string): Promise<void> {
+  await deleteStagedRows(database, importId, { keepNoted: false });
+  const row = await RegisterImport.findByPk(importId);
+  if (row !== null) await removeKeptFile(row);
 }
 
 /**
@@ -33,6 +40,6 @@ export async function failJob(
   const failed = { state: 'failed', fault: wordsOf(error) } as const;
   const where = { id: importId, state: ['reading', 'checking'] };
   const [found] = await RegisterImport.update(failed, { where });
-  if (found === 1) await deleteStagedRows(database, importId, { keepNoted: false });
+  if (found === 1) await forget(database, importId);
   return undefined;
 }

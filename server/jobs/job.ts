@@ -4,8 +4,10 @@ import type { Sequelize } from 'sequelize';
 export type Job = { readonly importId: string; readonly schemeId: string } & (
   | {
       readonly kind: 'read';
-      /** On disk; removed when it is read. */
+      /** On disk; removed when it is read, unless another of its layers may be wanted. */
       readonly file: string;
+      /** Which of its layers; where it is left out, the likeliest. */
+      readonly layer?: string;
     }
   | { readonly kind: 'check' }
   | {

@@ -1,8 +1,7 @@
-import { rm } from 'node:fs/promises';
 import type { Services } from '../services.ts';
 import { failJob } from './fail-job.ts';
-import type { Job } from './job.ts';
 import { createJobs, type Jobs } from './jobs.ts';
+import { removeReadFile } from './remove-file.ts';
 import { runInThread } from './run-in-thread.ts';
 import { runJob } from './run-job.ts';
 
@@ -10,16 +9,12 @@ type Tools = Pick<Services, 'env' | 'database' | 'logger'>;
 
 const AT_ONCE = 2;
 
-async function removeFile(job: Job): Promise<void> {
-  if (job.kind === 'read') await rm(job.file, { force: true });
-}
-
 /** Jobs in threads of their own, so that requests are answered meanwhile. */
 export function openJobs(tools: Tools): Jobs {
   return createJobs({
     run: (job, signal) => runInThread(tools.env.DATABASE_URL, job, signal),
     onFailed: (job, error) => failJob(tools, job, error),
-    onEnded: removeFile,
+    onEnded: removeReadFile,
     atOnce: AT_ONCE,
   });
 }
@@ -30,7 +25,7 @@ export function openJobsInline(tools: Tools): Jobs {
   return createJobs({
     run: (job, signal) => runJob({ database, signal, onChecking: () => undefined }, job),
     onFailed: (job, error) => failJob(tools, job, error),
-    onEnded: removeFile,
+    onEnded: removeReadFile,
     atOnce: AT_ONCE,
   });
 }

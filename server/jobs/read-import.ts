@@ -1,4 +1,3 @@
-import { rm } from 'node:fs/promises';
 import { IMPORT_LIMITS } from '../../shared/schemas/imports.ts';
 import { AppError } from '../errors.ts';
 import { openUpload } from '../importers/open-upload.ts';
@@ -10,6 +9,7 @@ import { RegisterImport } from '../models/register-import.ts';
 import { insertStagedRows } from '../models/staged-rows.ts';
 import type { Job, JobTools } from './job.ts';
 import { createProgress } from './progress.ts';
+import { removeReadFile } from './remove-file.ts';
 
 const AT_ONCE = 1000;
 
@@ -54,20 +54,21 @@ async function stageRows(
 
 async function stage(
   tools: JobTools,
-  { importId, schemeId, file }: Extract<Job, { kind: 'read' }>,
+  { importId, schemeId, file, layer: wanted }: Extract<Job, { kind: 'read' }>,
 ): Promise<void> {
-  const upload = await openUpload(file);
+  const upload = await openUpload(file, wanted);
   const { format, kind, layer } = upload;
+  const layers = { layers: [...upload.layers], file: upload.layers.length > 1 ? file : null };
   if (upload.count > IMPORT_LIMITS.rows) throw tooLong();
   const where = { id: importId, state: 'reading' } as const;
-  await RegisterImport.update({ format, kind, layer, of: upload.count }, { where });
+  await RegisterImport.update({ format, kind, layer, ...layers, of: upload.count }, { where });
   const reading = await stageRows(tools, importId, upload);
   const first = await firstOptions(tools.database, schemeId, upload, reading);
   const { columns, count } = reading;
   await RegisterImport.update({ columns, ...first, done: 0, of: count, state: 'checking' }, { where }); // prettier-ignore
 }
 
-/** Reads a file that was sent into rows that can be checked, and removes it. */
+/** Reads a file that was sent into rows that can be checked; it goes unless another layer may be wanted. */
 export async function readImport(
   tools: JobTools,
   job: Extract<Job, { kind: 'read' }>,
@@ -75,6 +76,6 @@ export async function readImport(
   try {
     await stage(tools, job);
   } finally {
-    await rm(job.file, { force: true });
+    await removeReadFile(job);
   }
 }

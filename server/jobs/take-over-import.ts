@@ -9,6 +9,7 @@ import { deleteStagedRows } from '../models/staged-rows.ts';
 import type { ChangedBuilding, CreatedBuilding } from '../register/register-edits.ts';
 import type { Job, JobTools } from './job.ts';
 import { createProgress } from './progress.ts';
+import { removeKeptFile } from './remove-file.ts';
 
 const AT_ONCE = 2000;
 
@@ -77,5 +78,6 @@ export async function takeOverImport(
     const [ended] = await RegisterImport.update({ state: 'done', changeId, fault: null }, { where, transaction }); // prettier-ignore
     if (ended !== 1) throw new AppError('conflict');
   });
+  await removeKeptFile(row);
   await deleteStagedRows(database, importId, { keepNoted: true });
 }

@@ -1,4 +1,5 @@
-import type { Sequelize, Transaction } from 'sequelize';
+import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
+import type { FootprintRings } from './building-footprint.ts';
 
 /** What changed of one building: null before where it came in, null after where it was taken out. */
 export type BuildingChange = {
@@ -34,4 +35,18 @@ export async function insertBuildingChanges(
       transaction,
     },
   );
+}
+
+/** The footprints that some buildings had before others took their place, by the buildings' numbers. */
+export async function findEarlierFootprints(
+  database: Sequelize,
+  ids: readonly number[],
+): Promise<Map<number, FootprintRings[]>> {
+  const rows = await database.query<{ id: number; footprints: FootprintRings[] }>(
+    `select building_id as id, jsonb_agg(before->'footprint') as footprints
+     from building_changes where building_id = any($1) and before ? 'footprint'
+     group by building_id`,
+    { type: QueryTypes.SELECT, bind: [ids] },
+  );
+  return new Map(rows.map(({ id, footprints }) => [id, footprints]));
 }

@@ -11,6 +11,8 @@ export type HistoryEntry = BuildingChange & {
   readonly kind: RegisterChangeKind;
   readonly source: string | null;
   readonly isUndone: boolean;
+  /** How often over a change was undone and done again: the undoing of another is 1, of that one 2. */
+  readonly undoings: number;
   /** Whether none of the buildings of the change was changed since. */
   readonly isNewest: boolean;
 };
@@ -27,6 +29,11 @@ export async function findHistory(
        change.id as "changeId", change.at, change.kind, change.source,
        change.person_id as "personId", person.name as by,
        exists (select from register_changes u where u.undoes = change.id) as "isUndone",
+       (with recursive chain as (
+          select change.undoes, 0 as depth
+          union all
+          select r.undoes, chain.depth + 1 from chain join register_changes r on r.id = chain.undoes
+        ) select max(depth) from chain) as undoings,
        own.version = building.version and not exists (
          select from building_changes c join buildings b on b.id = c.building_id
          where c.change_id = change.id and b.version <> c.version

@@ -1,25 +1,9 @@
 import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
 import type { BuildingField } from '../../shared/schemas/building-fields.ts';
-import type { RegisterSort } from '../../shared/schemas/register.ts';
 import type { ListedBuilding } from '../presenters/building-values.ts';
 import { BUILDING_COLUMNS } from './building-columns.ts';
-import { orderSql } from './find-register-order.ts';
 import { LISTED } from './register-columns.ts';
 import type { Condition } from './register-condition.ts';
-
-/** Rows near the beginning of an order, found without putting all of it in order. */
-export async function findFirstRows(
-  database: Sequelize,
-  { where, bind }: Condition,
-  sort: RegisterSort,
-  { offset, limit }: { readonly offset: number; readonly limit: number },
-): Promise<ListedBuilding[]> {
-  return database.query<ListedBuilding>(
-    `select ${LISTED} from buildings where ${where} order by ${orderSql(sort)}
-     offset ${offset} limit ${limit}`,
-    { type: QueryTypes.SELECT, bind: [...bind] },
-  );
-}
 
 /** Rows by their numbers, in the order of the numbers; one that was taken out meanwhile is left out. */
 export async function findRows(

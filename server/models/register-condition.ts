@@ -56,7 +56,7 @@ function rangesSql(ranges: NonNullable<RegisterFilter['ranges']>, bind: Bind): s
   });
 }
 
-function placeSql({ within, ids, importId }: RegisterFilter, bind: Bind): string[] {
+function placeSql({ within, ids, except, importId }: RegisterFilter, bind: Bind): string[] {
   const conditions: string[] = [];
   if (within !== undefined) {
     const [west, south, east, north] = within.map(
@@ -67,6 +67,7 @@ function placeSql({ within, ids, importId }: RegisterFilter, bind: Bind): string
     );
   }
   if (ids !== undefined) conditions.push(`id = any(${bind(ids)}::integer[])`);
+  if (except !== undefined) conditions.push(`id <> all(${bind(except)}::integer[])`);
   if (importId !== undefined) {
     conditions.push(`id in (select c.building_id from building_changes c
       join register_changes r on r.id = c.change_id where r.import_id = ${bind(importId)}::uuid)`);

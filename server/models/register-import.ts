@@ -35,12 +35,16 @@ export class RegisterImport extends Model<
   declare format: CreationOptional<ImportAnswer['format']>;
   declare kind: CreationOptional<ImportAnswer['kind']>;
   declare layer: CreationOptional<string | null>;
+  /** Those that could be read instead, with the one that was; none where there is no choice. */
+  declare layers: CreationOptional<ImportAnswer['layers']>;
+  /** Where the file lies while another of its layers can be chosen. */
+  declare file: CreationOptional<string | null>;
   /** Rows done of rows in all, by the job at hand. */
   declare done: CreationOptional<number>;
   declare of: CreationOptional<number | null>;
   declare columns: CreationOptional<ImportAnswer['columns']>;
   declare options: ImportOptions;
-  declare isRemembered: CreationOptional<boolean>;
+  declare remembered: CreationOptional<ImportAnswer['remembered']>;
   declare said: CreationOptional<SaidPlace | null>;
   declare place: CreationOptional<ImportAnswer['place']>;
   declare counts: CreationOptional<ImportAnswer['counts']>;
@@ -63,11 +67,13 @@ export function initRegisterImport(sequelize: Sequelize): void {
       format: { type: DataTypes.TEXT },
       kind: { type: DataTypes.TEXT },
       layer: { type: DataTypes.TEXT },
+      layers: { type: DataTypes.JSONB, allowNull: false, defaultValue: [] },
+      file: { type: DataTypes.TEXT },
       done: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 },
       of: { type: DataTypes.INTEGER },
       columns: { type: DataTypes.JSONB, allowNull: false, defaultValue: [] },
       options: { type: DataTypes.JSONB, allowNull: false },
-      isRemembered: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
+      remembered: { type: DataTypes.JSONB },
       said: { type: DataTypes.JSONB },
       place: { type: DataTypes.JSONB },
       counts: { type: DataTypes.JSONB },

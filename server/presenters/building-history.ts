@@ -27,7 +27,8 @@ export function presentHistory(
     changeId: entry.changeId,
     at: entry.at.toISOString(),
     by: entry.by,
-    kind: entry.kind,
+    // what was undone is done again by undoing that
+    kind: entry.undoings > 0 && entry.undoings % 2 === 0 ? 'redo' : entry.kind,
     source: entry.source,
     before: presentSide(entry.before),
     after: presentSide(entry.after),

@@ -12,5 +12,5 @@ export function presentExtent(
 ): ExtentAnswer {
   if (drawn !== undefined) return { ...drawn, crs };
   const bounds = system !== undefined && 'crs' in system ? system.crs.bounds : WORLD;
-  return { bounds, crs, from: 'crs' };
+  return { bounds, home: bounds, crs, from: 'crs' };
 }

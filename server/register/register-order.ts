@@ -1,9 +1,18 @@
-import type { RegisterFilter, RegisterSort } from '../../shared/schemas/register.ts';
-import { findRegisterIds, findRegisterOrder } from '../models/find-register-order.ts';
+import {
+  REGISTER_ORDER,
+  type RegisterFilter,
+  type RegisterSort,
+} from '../../shared/schemas/register.ts';
+import {
+  findReferenceOrder,
+  findRegisterGroups,
+  findRegisterIds,
+} from '../models/find-register-order.ts';
 import { countRows } from '../models/find-register-rows.ts';
 import { registerCondition } from '../models/register-condition.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Services } from '../services.ts';
+import { orderGroups } from './order-groups.ts';
 
 type Which = { readonly filter: RegisterFilter; readonly sort: RegisterSort };
 
@@ -44,18 +53,35 @@ export function isOrdered(
   return tiles.has(orderKey(scheme, which));
 }
 
+type Kept = Pick<Services, 'database' | 'tiles'>;
+
+/** By one column, then by reference: the order by reference is that of the whole register, kept for all. */
+async function makeOrder(services: Kept, scheme: Scheme, { filter, sort }: Which): Promise<Buffer> {
+  const { database } = services;
+  const { column, descending } = sort;
+  const condition = registerCondition(scheme.id, filter);
+  if (column === 'reference') return findReferenceOrder(database, condition, descending);
+  const [groups, references] = await Promise.all([
+    findRegisterGroups(database, condition, column),
+    packedOrder(services, scheme, { filter: {}, sort: REGISTER_ORDER }),
+  ]);
+  return orderGroups(groups, references, descending);
+}
+
+function packedOrder(services: Kept, scheme: Scheme, which: Which): Promise<Buffer> {
+  return services.tiles.get(orderKey(scheme, which), () => makeOrder(services, scheme, which));
+}
+
 /**
  * The buildings that a filter means, in order. Kept as long as tiles are: a register that changed has
  * another version and so another key.
  */
 export async function registerOrder(
-  { database, tiles }: Pick<Services, 'database' | 'tiles'>,
+  services: Kept,
   scheme: Scheme,
-  { filter, sort }: Which,
+  which: Which,
 ): Promise<PackedIds> {
-  const key = orderKey(scheme, { filter, sort });
-  const condition = registerCondition(scheme.id, filter);
-  return unpacked(await tiles.get(key, () => findRegisterOrder(database, condition, sort)));
+  return unpacked(await packedOrder(services, scheme, which));
 }
 
 /** The numbers of the buildings that a filter means, ascending. */

@@ -1,6 +1,7 @@
 import type { z } from 'zod';
 import type { registerQuerySchema } from '../../shared/schemas/register.ts';
-import { findFirstRows, findRows } from '../models/find-register-rows.ts';
+import { findFirstRows } from '../models/find-first-rows.ts';
+import { findRows } from '../models/find-register-rows.ts';
 import { registerCondition } from '../models/register-condition.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { ListedBuilding } from '../presenters/building-values.ts';

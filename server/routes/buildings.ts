@@ -4,6 +4,7 @@ import { findBuilding } from '../models/find-building.ts';
 import { presentBuilding, presentFoundBuilding } from '../presenters/building.ts';
 import { presentExtent } from '../presenters/extent.ts';
 import { findExtent } from '../models/find-extent.ts';
+import { findHome } from '../models/find-home.ts';
 import { findFootprints } from '../models/footprints.ts';
 import { findNeighbours } from '../models/find-neighbours.ts';
 import { buildingWalls } from '../register/building-walls.ts';
@@ -37,11 +38,10 @@ export const buildingRoutes = [
     method: 'get',
     path: '/api/schemes/:schemeId/extent',
     access: { scheme: 'readRegister' },
-    handle: async ({ services, scheme }) =>
-      presentExtent(
-        scheme,
-        await findExtent(services.database, scheme.id),
-        await findCrs(scheme.crs),
-      ),
+    handle: async ({ services: { database }, scheme }) => {
+      const extent = await findExtent(database, scheme.id);
+      const drawn = extent && { ...extent, home: await findHome(database, scheme.id, extent) };
+      return presentExtent(scheme, drawn, await findCrs(scheme.crs));
+    },
   }),
 ];

@@ -5,6 +5,7 @@ import {
   editBuildingSchema,
   editManySchema,
   joinBuildingsSchema,
+  previewManySchema,
   removeBuildingSchema,
   removeManySchema,
   splitBuildingSchema,
@@ -17,8 +18,10 @@ import { removeBuilding } from '../commands/remove-building.ts';
 import { removeBuildings } from '../commands/remove-buildings.ts';
 import { splitBuilding } from '../commands/split-building.ts';
 import { undoChange } from '../commands/undo-change.ts';
+import { countValues } from '../models/count-values.ts';
 import { findBuilding, findBuildingEverKept } from '../models/find-building.ts';
 import { findHistory } from '../models/find-building-changes.ts';
+import { registerCondition } from '../models/register-condition.ts';
 import { schemeAbilities } from '../policies/scheme-policy.ts';
 import { presentHistory } from '../presenters/building-history.ts';
 import { defineRoute } from './define-route.ts';
@@ -39,6 +42,14 @@ export const registerChangeRoutes = [
     access: { scheme: 'updateRegister' },
     body: editManySchema,
     handle: ({ services, actor, scheme, body }) => editBuildings(services, actor, scheme, body),
+  }),
+  defineRoute({
+    method: 'post',
+    path: '/api/schemes/:schemeId/buildings/edits/preview',
+    access: { scheme: 'updateRegister' },
+    body: previewManySchema,
+    handle: ({ services, scheme, body: { filter, attributes } }) =>
+      countValues(services.database, registerCondition(scheme.id, filter), attributes),
   }),
   defineRoute({
     method: 'post',

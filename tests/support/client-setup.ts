@@ -1,4 +1,4 @@
-import { cleanup } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 import { afterEach, beforeEach, vi } from 'vitest';
 import { queryClient } from '../../src/lib/query-client.ts';
 
@@ -36,6 +36,8 @@ function fail(...said: readonly unknown[]): never {
 
 // modules of plain logic are tested without a page
 if (typeof document !== 'undefined') {
+  // what a page is to show may take its time on a busy machine
+  configure({ asyncUtilTimeout: 30_000 });
   HTMLDialogElement.prototype.showModal = openDialog;
   HTMLDialogElement.prototype.close = closeDialog;
   Element.prototype.scrollIntoView = () => undefined;

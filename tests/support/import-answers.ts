@@ -42,6 +42,7 @@ export function anImportAnswer(overrides: Partial<ImportAnswer> = {}): ImportAns
     format: 'geojson',
     kind: 'footprints',
     layer: null,
+    layers: [],
     by: 'Assessor',
     at: '2026-12-01T09:00:00.000Z',
     progress: { done: 2253, of: 2253 },
@@ -51,7 +52,7 @@ export function anImportAnswer(overrides: Partial<ImportAnswer> = {}): ImportAns
       { name: 'localId', filled: 2253, samples: ['x1'] },
     ],
     options: importOptions(),
-    isRemembered: false,
+    remembered: null,
     place: {
       crs: 4326,
       name: 'WGS 84',

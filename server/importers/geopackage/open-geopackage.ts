@@ -1,4 +1,5 @@
 import type { Database, SqlValue } from 'sql.js';
+import { AppError } from '../../errors.ts';
 import { noProperties } from '../flat-properties.ts';
 import { RowFault } from '../geometry/row-fault.ts';
 import type { Properties, Scalar, Source, SourceRow } from '../source.ts';
@@ -45,28 +46,34 @@ function* rowsOf(
   }
 }
 
-function noteOn(layers: readonly Layer[]): string[] {
-  const [taken, ...others] = layers;
-  if (taken === undefined || others.length === 0) return [];
+function noteOn(taken: Layer, layers: readonly Layer[]): string[] {
+  const others = layers.filter((layer) => layer !== taken);
+  if (others.length === 0) return [];
   const names = others.slice(0, 5).map(({ table }) => `"${table}"`);
-  return [
-    `The layer "${taken.table}" was taken. There is also ${names.join(', ')}: to take another, send it alone.`,
-  ];
+  return [`The layer "${taken.table}" was taken. There is also ${names.join(', ')}.`];
 }
 
 type Opened = Pick<Source, 'crs' | 'notes'> & {
   readonly layer: Layer;
+  readonly layers: readonly string[];
   readonly columns: readonly Column[];
 };
 
-async function lookInto(bytes: Buffer): Promise<Opened> {
+function chosen(layers: readonly Layer[], wanted: string | undefined): Layer {
+  const layer = wanted === undefined ? layers[0] : layers.find(({ table }) => table === wanted);
+  if (layer === undefined) throw new AppError('unreadable', 'The file has no such layer.');
+  return layer;
+}
+
+async function lookInto(bytes: Buffer, wanted: string | undefined): Promise<Opened> {
   const database = await openDatabase(bytes);
   try {
     const layers = findLayers(database);
-    const [layer] = layers;
-    if (layer === undefined) throw new Error('layers are found or refused');
+    const layer = chosen(layers, wanted);
     const crs = await crsOfLayer(database, layer);
-    return { layer, crs, notes: noteOn(layers), columns: columnsOf(database, layer) };
+    const names = layers.length === 1 ? [] : layers.map(({ table }) => table);
+    const columns = columnsOf(database, layer);
+    return { layer, layers: names, crs, notes: noteOn(layer, layers), columns };
   } finally {
     database.close();
   }
@@ -81,13 +88,17 @@ async function* readLayer(bytes: Buffer, { layer, columns }: Opened): AsyncGener
   }
 }
 
-/** Reads the layer of a GeoPackage that holds areas; where several do, one called buildings, else the largest. */
-export async function openGeopackage(bytes: Buffer): Promise<Source> {
-  const opened = await lookInto(bytes);
+/**
+ * Reads the layer of a GeoPackage that holds areas; where several do the one that is wanted, or one called
+ * buildings, else the largest.
+ */
+export async function openGeopackage(bytes: Buffer, layer?: string): Promise<Source> {
+  const opened = await lookInto(bytes, layer);
   return {
     format: 'geopackage',
     kind: 'footprints',
     layer: opened.layer.table,
+    layers: opened.layers,
     crs: opened.crs,
     notes: opened.notes,
     columns: opened.columns.map(({ name }) => name),

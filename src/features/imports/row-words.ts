@@ -1,13 +1,15 @@
 import type { ImportOptions, ImportRow } from '../../../shared/schemas/imports.ts';
 import { formatCount } from '../../lib/format-number.ts';
+import { formatFigure } from '../buildings/field-words.ts';
 import { fieldWords } from './field-words.ts';
 
 type RowChange = ImportRow['changes'][number];
 type Way = ImportOptions['settle']['others'];
 
-/** A value of a row as people read it. */
-export function valueWords(value: RowChange['ours']): string {
+/** A value of a row as people read it; of a footprint its area. */
+export function valueWords(value: RowChange['ours'], field: string): string {
   if (value === null) return 'not known';
+  if (field === 'footprint') return `${formatFigure('area', Number(Number(value).toFixed(1)))} m²`;
   return typeof value === 'number' ? formatCount(value) : value;
 }
 

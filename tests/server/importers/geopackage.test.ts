@@ -19,8 +19,9 @@ describe('a GeoPackage', () => {
     ]);
     const upload = await uploadOf(file);
     expect(upload).toMatchObject({ layer: 'many "quoted"', count: 5 });
+    expect(upload.layers).toEqual(['many "quoted"', 'few', 'anything']);
     expect(upload.notes).toEqual([
-      'The layer "many "quoted"" was taken. There is also "few", "anything": to take another, send it alone.',
+      'The layer "many "quoted"" was taken. There is also "few", "anything".',
     ]);
   });
 

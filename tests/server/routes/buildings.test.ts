@@ -140,7 +140,37 @@ describe('the extent of a scheme', () => {
     await aBuilding(scheme, { west: 3.1, south: 54.1, east: 3.2, north: 54.2 });
     await aBuilding(scheme, { west: 3.0, south: 54.15, east: 3.15, north: 54.3 });
     const bounds = [3.0, 54.1, 3.2, 54.3];
-    expect(await extentOf(scheme)).toEqual({ bounds, crs: 32631, from: 'buildings' });
+    expect(await extentOf(scheme)).toMatchObject({ bounds, crs: 32631, from: 'buildings' });
+  });
+
+  test('has a home that leaves out what lies far from nearly all', async () => {
+    const scheme = await aScheme();
+    const near = { west: 3, south: 54, east: 3.01, north: 54.01 };
+    for (let k = 0; k < 50; k += 1) await aBuilding(scheme, near);
+    expect(await extentOf(scheme)).toMatchObject({ home: [3, 54, 3.01, 54.01] });
+    await aBuilding(scheme, { west: 3.5, south: 54.5, east: 3.51, north: 54.51 });
+    expect(await extentOf(scheme)).toMatchObject({
+      bounds: [3, 54, 3.51, 54.51],
+      home: [3, 54, 3.01, 54.01],
+    });
+  });
+
+  test('has a home round the densest of several towns', async () => {
+    const scheme = await aScheme();
+    for (const [west, count] of [
+      [3, 2],
+      [3.4, 5],
+      [3.8, 2],
+    ] as const) {
+      const house = { west, south: 54.5, east: west + 0.001, north: 54.501 };
+      for (let k = 0; k < count; k += 1) await aBuilding(scheme, house);
+    }
+    const { home } = await extentOf(scheme);
+    const [west, south, east, north] = home;
+    expect([(west + east) / 2, (south + north) / 2].map((degrees) => degrees.toFixed(6))).toEqual([
+      ...['3.400000', '54.500000'],
+    ]);
+    expect(north - south).toBeCloseTo(0.015, 9);
   });
 
   test('is round its background where there are none', async () => {
@@ -154,12 +184,22 @@ describe('the extent of a scheme', () => {
       ...{ west, south, east, north },
     });
     const bounds = [west, south, east, north];
-    expect(await extentOf(scheme)).toEqual({ bounds, crs: 32631, from: 'background' });
+    expect(await extentOf(scheme)).toEqual({
+      bounds,
+      home: bounds,
+      crs: 32631,
+      from: 'background',
+    });
   });
 
   test('is where its system is used before anything is there', async () => {
     const bounds = [0, 0, 6, 84];
-    expect(await extentOf(await aScheme())).toEqual({ bounds, crs: 32631, from: 'crs' });
+    expect(await extentOf(await aScheme())).toEqual({
+      bounds,
+      home: bounds,
+      crs: 32631,
+      from: 'crs',
+    });
   });
 });
 

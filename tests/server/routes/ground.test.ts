@@ -1,5 +1,6 @@
 import request from 'supertest';
 import { describe, expect, test } from 'vitest';
+import { z } from 'zod';
 import { groundSchema } from '../../../shared/schemas/ground.ts';
 import { Building } from '../../../server/models/building.ts';
 import { RegisterChange } from '../../../server/models/register-change.ts';
@@ -10,6 +11,13 @@ import { signIn } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
 
 const { app } = testApp();
+
+const refusalSchema = z.object({
+  error: z.object({
+    message: z.string(),
+    fields: z.array(z.object({ path: z.string(), message: z.string() })),
+  }),
+});
 
 async function aTown() {
   const scheme = await aScheme();
@@ -151,6 +159,42 @@ describe('spot heights', () => {
     const answer = await put(text);
     expect([answer.status, answer.body]).toMatchObject([422, { error: { code: 'unreadable' } }]);
     expect(await levels(scheme)).toEqual([null, null, 7]);
+  });
+});
+
+describe('what is wrong with a file of levels', () => {
+  async function faultsOf(text: string) {
+    const { put } = await aTown();
+    const answer = await put(text);
+    expect(answer.status).toBe(422);
+    return refusalSchema.parse(answer.body).error;
+  }
+
+  test('is told for every row at once', async () => {
+    const rows = [`${E},${N},1`, `${E},${N},high`, `${E},${N}`, `,${N},1`, `${E},${N},9001`];
+    const { message, fields } = await faultsOf(`E,N,Level (m)\n${rows.join('\n')}\n`);
+    expect(message).toBe('4 places cannot be read.');
+    expect(fields.map((fault) => fault.message)).toEqual([
+      'Row 3: “high” in column “Level (m)” is not a number.',
+      'Row 4: column “Level (m)” is blank.',
+      'Row 5: column “E” is blank.',
+      'Row 6: no ground lies at 9001 m. Check the units.',
+    ]);
+  });
+
+  test('is told one by one up to fifty, then counted', async () => {
+    const { message, fields } = await faultsOf(`x,y,z\n${'1,2,x\n'.repeat(1204)}`);
+    expect(message).toBe('1 204 places cannot be read; the first 50 are listed.');
+    expect([fields.length, fields.at(-1)?.path]).toEqual([50, 'row 51']);
+  });
+
+  test('is told by row and column of a grid', async () => {
+    const heading = `ncols 2\nnrows 2\nxllcorner ${E}\nyllcorner ${N}\ncellsize 5\n`;
+    const { fields } = await faultsOf(`${heading}1 two\nthree 4\n`);
+    expect(fields.map((fault) => fault.message)).toEqual([
+      'Row 1, column 2: “two” is not a number.',
+      'Row 2, column 1: “three” is not a number.',
+    ]);
   });
 });
 

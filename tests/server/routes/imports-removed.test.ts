@@ -31,7 +31,13 @@ describe('buildings that somebody took out', () => {
     expect(rows.map(({ reference, remarks }) => [reference, remarks])).toEqual([
       ['A', []],
       ['B', []],
-      ['C', [`C was joined into B on ${today}. It would come back beside it.`]],
+      [
+        'C',
+        [
+          `C was joined into B on ${today}. It would come back beside it.`,
+          'The footprint overlaps B of the register by 80 m².',
+        ],
+      ],
       ['D', [`D was taken out of the register on ${today}. It would come back.`]],
       ['E', []],
     ]);

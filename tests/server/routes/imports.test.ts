@@ -49,7 +49,8 @@ describe('sending a file', () => {
       by: person.name,
       progress: { done: 3, of: 3 },
       missing: [],
-      isRemembered: false,
+      remembered: null,
+      layers: [],
       fault: null,
     });
     expect(answer.columns).toContainEqual({
@@ -115,7 +116,8 @@ describe('choosing', () => {
     const kept = await BuildingFootprint.findByPk(building?.id ?? 0);
     expect(kept?.footprint[0]?.[0]?.[0]).toEqual([500_001.5, 6_079_998]);
     const again = await session.send(geojson(houses(3)));
-    expect(again.isRemembered).toBe(true);
+    expect(again.remembered).toMatchObject({ fileName: 'town.geojson' });
+    expect(again.remembered?.at).toMatch(/^\d{4}-\d\d-\d\dT/);
     expect(again.options).toMatchObject({ prefix: 'Q', columns: { address: 'name' } });
     expect(again.counts).toMatchObject({ new: 1, same: 2 });
   });

@@ -194,6 +194,29 @@ describe('editing a building', () => {
   });
 });
 
+describe('a footprint over others', () => {
+  test('is kept, and tells which, but not of a shared wall', async () => {
+    const { scheme, row } = await aRow('A', 'B');
+    const agent = await asAssessor(scheme);
+    const drawn = { reference: 'Gallery', footprint: box(5, 2, 10, 4) };
+    const answer = await agent.post(at(scheme)).send(drawn);
+    expect(answer.status).toBe(201);
+    const { overlaps, buildingIds } = registerChangeSchema.parse(answer.body);
+    expect(overlaps).toEqual([
+      { id: idOf(row, 0), reference: 'A', area: 20 },
+      { id: idOf(row, 1), reference: 'B', area: 20 },
+    ]);
+    expect(await Building.findByPk(buildingIds[0] ?? 0)).toMatchObject({ area: 40 });
+    const address = at(scheme, `/${buildingIds[0] ?? 0}`);
+    const edited = await agent.patch(address).send({ version: 1, footprint: box(0, 8, 10, 4) });
+    expect(registerChangeSchema.parse(edited.body).overlaps).toMatchObject([{ reference: 'A' }]);
+    const beside = await agent.patch(address).send({ version: 2, footprint: box(0, 10, 20, 4) });
+    expect(registerChangeSchema.parse(beside.body).overlaps).toEqual([]);
+    const named = await agent.patch(address).send({ version: 3, attributes: { use: 'shop' } });
+    expect(registerChangeSchema.parse(named.body).overlaps).toBeUndefined();
+  });
+});
+
 describe('editing many', () => {
   test('gives all that are meant the same values, in one change that can be undone', async () => {
     const { scheme } = await aRow('A', 'B', 'C');
@@ -215,6 +238,57 @@ describe('editing many', () => {
       ...[null, null, null],
     ]);
     expect((await agent.post(undo)).status).toBe(409);
+  });
+
+  test('tells before what they have, and leaves out whom it is told to', async () => {
+    const scheme = await aScheme();
+    const created = [
+      drawn('A', { attributes: { use: 'shop', storeys: 2 } }),
+      ...[drawn('B', { footprint: box(20, 0) }), drawn('C', { footprint: box(40, 0) })],
+      drawn('D', { footprint: box(60, 0), attributes: { use: 'mill', storeys: 2 } }),
+    ];
+    await change(scheme, { created });
+    const row = await registered(scheme);
+    const agent = await asAssessor(scheme);
+    const filter = { except: [idOf(row, 1)] };
+    const attributes = { use: 'shop', storeys: null };
+    const preview = await agent.post(at(scheme, '/edits/preview')).send({ filter, attributes });
+    expect([preview.status, preview.body]).toEqual([
+      200,
+      [
+        { field: 'use', same: 1, unknown: 1 },
+        { field: 'storeys', same: 1, unknown: 1 },
+      ],
+    ]);
+    expect((await registered(scheme)).map(({ use }) => use)).toEqual(['shop', null, null, 'mill']);
+    const body = { filter, expected: 3, attributes };
+    expect((await agent.post(at(scheme, '/edits')).send(body)).status).toBe(200);
+    expect((await registered(scheme)).map(({ use }) => use)).toEqual([
+      ...['shop', null, 'shop', 'shop'],
+    ]);
+  });
+
+  test('takes as many by number as can be marked', async () => {
+    const { scheme, row } = await aRow('A');
+    const agent = await asAssessor(scheme);
+    const ids = Array.from({ length: 5000 }, (_, k) => (k === 0 ? idOf(row) : 2_000_000_000 + k));
+    const asked = { filter: { ids }, attributes: { use: 'shop' } };
+    const preview = await agent.post(at(scheme, '/edits/preview')).send(asked);
+    expect(preview.body).toEqual([{ field: 'use', same: 0, unknown: 1 }]);
+    expect((await agent.post(at(scheme, '/edits')).send({ ...asked, expected: 1 })).status).toBe(
+      200,
+    );
+    const more = { ...asked, filter: { ids: [...ids, 1] } };
+    expect((await agent.post(at(scheme, '/edits/preview')).send(more)).status).toBe(422);
+  });
+
+  test('is previewed only by who may edit, where the scheme is theirs', async () => {
+    const { scheme } = await aRow('A');
+    const body = { filter: {}, attributes: { use: 'x' } };
+    const of = (agent: Awaited<ReturnType<typeof asAssessor>>) =>
+      agent.post(at(scheme, '/edits/preview')).send(body);
+    expect((await of(await signIn(app(), await aMember(scheme, 'witness')))).status).toBe(403);
+    expect((await of(await asAssessor(await aScheme()))).status).toBe(404);
   });
 
   test.each([
@@ -470,6 +544,42 @@ describe('the history of a building', () => {
     expect((await assessor.post(`${undo}/${own[0]?.changeId ?? ''}/undo`)).status).toBe(200);
     const elsewhere = await asAssessor(await aScheme());
     expect((await elsewhere.get(`${address}/history`)).status).toBe(404);
+  });
+
+  test('tells what was undone and done again, and lets it be turned once more', async () => {
+    const { scheme, row } = await aRow('A');
+    const agent = await asAssessor(scheme);
+    const address = at(scheme, `/${idOf(row)}`);
+    const history = async () => {
+      return buildingHistorySchema.parse((await agent.get(`${address}/history`)).body);
+    };
+    await agent.patch(address).send({ version: 1, attributes: { use: 'mill' } });
+    const uses: unknown[] = [];
+    for (let turn = 0; turn < 3; turn += 1) {
+      const [newest] = await history();
+      expect(newest?.mayUndo).toBe(true);
+      const undo = `/api/schemes/${scheme.id}/register-changes/${newest?.changeId ?? ''}/undo`;
+      expect((await agent.post(undo)).status).toBe(200);
+      uses.push((await registered(scheme))[0]?.use);
+    }
+    expect(uses).toEqual([null, 'mill', null]);
+    expect((await history()).map(({ kind }) => kind)).toEqual([
+      ...['undo', 'redo', 'undo', 'edit', 'import'],
+    ]);
+  });
+
+  test('brings a removed building back, takes it out again, and back', async () => {
+    const { scheme, row } = await aRow('A');
+    const agent = await asAssessor(scheme);
+    const out = await agent.delete(at(scheme, `/${idOf(row)}`)).send({ version: 1 });
+    let { changeId } = registerChangeSchema.parse(out.body);
+    const counts: number[] = [];
+    for (let turn = 0; turn < 3; turn += 1) {
+      const undo = `/api/schemes/${scheme.id}/register-changes/${changeId}/undo`;
+      ({ changeId } = registerChangeSchema.parse((await agent.post(undo)).body));
+      counts.push((await registered(scheme)).length);
+    }
+    expect(counts).toEqual([1, 0, 1]);
   });
 
   test('of another scheme cannot be undone from here', async () => {

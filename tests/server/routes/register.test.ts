@@ -118,6 +118,35 @@ describe('the register', () => {
     30_000,
   );
 
+  test.each(REGISTER_COLUMNS)(
+    'finds the first rows by %s as they stand in the whole order',
+    async (column) => {
+      const scheme = await aScheme();
+      await change(scheme, {
+        created: ['C3', 'C20', 'C1', 'C10', 'C2', 'C4'].map((reference, k) => {
+          const some =
+            k % 2 === 0 ? { use: `shop ${k}`, groundLevel: 1.1 * k, name: 'Mill 2' } : {};
+          const footprint = box(30 * k, 0, k < 3 ? 10 : 8);
+          return drawn(reference, { footprint, attributes: { storeys: 2, ...some } });
+        }),
+      });
+      for (const descending of [false, true]) {
+        const sort = { column, descending };
+        const first = [];
+        for (const offset of [0, 1, 2, 3, 4, 5]) {
+          first.push(...(await references(scheme, { sort, offset, limit: 1 })));
+        }
+        const pairs = await references(scheme, { sort, offset: 1, limit: 3 });
+        // asking for its place puts all of it in order
+        const [row] = (await page(scheme, { sort })).rows;
+        await get(scheme, '/place', { sort, buildingId: row?.id ?? 0 });
+        const whole = await references(scheme, { sort });
+        expect([first, pairs]).toEqual([whole, whole.slice(1, 4)]);
+      }
+    },
+    30_000,
+  );
+
   test.each<[string, Asked['filter'], string[]]>([
     ['words', { search: 'mil' }, ['B10']],
     ['words of an address', { search: '12 qu' }, ['Ä3']],

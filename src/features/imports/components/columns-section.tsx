@@ -1,6 +1,7 @@
 import { IMPORT_FIELDS, type ImportAnswer } from '../../../../shared/schemas/imports.ts';
 import { Field } from '../../../components/ui/field.tsx';
 import { Panel } from '../../../components/ui/panel.tsx';
+import { formatDay } from '../../../lib/format-date.ts';
 import { unusedColumns, withColumn } from '../field-words.ts';
 import type { ImportDraft } from '../hooks/use-import-draft.ts';
 import { ColumnLine } from './column-line.tsx';
@@ -25,6 +26,10 @@ function Numbering({ draft }: Pick<ColumnsSectionProps, 'draft'>) {
   );
 }
 
+function rememberedWords({ at, fileName }: NonNullable<ImportAnswer['remembered']>): string {
+  return `As chosen on ${formatDay(at)} for ${fileName}, which has the same columns.`;
+}
+
 /** Which column of the file fills which field of the register. */
 export function ColumnsSection({ answer, draft }: ColumnsSectionProps) {
   const { columns } = draft.options;
@@ -33,7 +38,7 @@ export function ColumnsSection({ answer, draft }: ColumnsSectionProps) {
   return (
     <Panel
       title="Which column is what"
-      note={answer.isRemembered && 'Remembered from an earlier file with the same columns.'}
+      note={answer.remembered !== null && rememberedWords(answer.remembered)}
     >
       <ul className="border-b border-hairline">
         {IMPORT_FIELDS.map((field) => (

@@ -22,6 +22,7 @@ function systemWords({ options, place }: ImportAnswer): string {
 export function HowItWasRead({ answer }: { readonly answer: ImportAnswer }) {
   const { columns } = answer.options;
   const facts: (readonly [string, ReactNode])[] = [
+    ...(answer.layer === null ? [] : [['Layer', answer.layer] as const]),
     ...(answer.kind === 'values' ? [] : [['System', systemWords(answer)] as const]),
     ...IMPORT_FIELDS.flatMap((field) => {
       const column = columns[field];

@@ -8,6 +8,7 @@ import { isOpen } from '../import-states.ts';
 import { ColumnsSection } from './columns-section.tsx';
 import { HowItWasRead } from './how-it-was-read.tsx';
 import { ImportEnd } from './import-end.tsx';
+import { LayerSection } from './layer-section.tsx';
 import { OutcomeSection } from './outcome-section.tsx';
 import { PlaceSection } from './place-section.tsx';
 
@@ -38,6 +39,7 @@ export function ImportReading({ answer, checked, draft, report }: ImportReadingP
         </div>
       )}
       <div className={classNames('max-w-[1020px]', hasEnded && 'mt-5')}>
+        {asks && answer.layers.length > 0 && <LayerSection answer={answer} draft={draft} />}
         {asks && answer.place !== null && answer.kind === 'footprints' && (
           <PlaceSection place={answer.place} draft={draft} />
         )}

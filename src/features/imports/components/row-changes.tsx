@@ -45,8 +45,10 @@ export function RowChanges({ row, settle }: RowChangesProps) {
                 {label}
                 {unit !== undefined && `, ${unit}`}
               </th>
-              <td className={weight(stands === 'ours')}>{valueWords(change.ours)}</td>
-              <td className={weight(stands === 'theirs')}>{valueWords(change.theirs)}</td>
+              <td className={weight(stands === 'ours')}>{valueWords(change.ours, change.field)}</td>
+              <td className={weight(stands === 'theirs')}>
+                {valueWords(change.theirs, change.field)}
+              </td>
               <td className={`${CELL} text-ink-2`}>{changeWords(change, way)}</td>
             </tr>
           );

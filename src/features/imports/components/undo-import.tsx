@@ -6,16 +6,40 @@ import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { useUndoChanges } from '../../buildings/api/undo-changes.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 
-/** Takes an import back once that is confirmed. */
+type Turn = { readonly changeIds: readonly string[]; readonly isUndone: boolean };
+
+/** Takes an import back once that is confirmed, and puts it back. */
 export function UndoImport({ changeId }: { readonly changeId: string }) {
   const scheme = useScheme();
   const [asks, setAsks] = useState(false);
+  const [{ changeIds, isUndone }, setTurn] = useState<Turn>({
+    changeIds: [changeId],
+    isUndone: false,
+  });
   const undo = useUndoChanges(scheme.id);
 
   function close() {
     setAsks(false);
   }
-  if (undo.isSuccess) return <DoneNote>Undone. The register is as it was before.</DoneNote>;
+  function turn() {
+    undo.mutate(changeIds, {
+      onSuccess: (made) => {
+        setTurn({ changeIds: made.map((one) => one.changeId), isUndone: !isUndone });
+        close();
+      },
+    });
+  }
+  if (isUndone) {
+    return (
+      <>
+        <DoneNote>Undone. The register is as it was before.</DoneNote>
+        <Button busy={undo.isPending} onClick={turn}>
+          Put it back
+        </Button>
+        <MutationError failed="It was not put back." error={undo.error} />
+      </>
+    );
+  }
   return (
     <>
       <Button
@@ -31,9 +55,7 @@ export function UndoImport({ changeId }: { readonly changeId: string }) {
         doIt="Undo it"
         busy={undo.isPending}
         onClose={close}
-        onConfirm={() => {
-          undo.mutate([changeId], { onSuccess: close });
-        }}
+        onConfirm={turn}
       >
         <p className="mb-2">
           Its new buildings are taken out and changed values go back. The history keeps both.

@@ -26,7 +26,7 @@ export function useImportPlan(
   const withRows = useMemo(() => {
     if (ready === null) return null;
     const around = checked?.bounds ? homeOfRows(checked.bounds, places) : null;
-    const home = around ?? ready.extent.bounds;
+    const home = around ?? ready.extent.home;
     // once they are in, they are buildings
     const hasRows = checked !== null && (isOpen(checked.state) || checked.state === 'importing');
     if (!hasRows) return { ...ready, home, hasRows };
