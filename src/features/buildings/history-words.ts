@@ -17,6 +17,7 @@ const DONE: Readonly<Record<Entry['kind'], string>> = {
   remove: 'removed',
   ground: 'ground level sampled',
   undo: 'undone',
+  redo: 'done again',
 };
 
 export function doneWords({ kind, before, after, source }: Entry): string {

@@ -1,7 +1,8 @@
 import type { CornerAt, MapDrawing } from '../map/map-drawing.ts';
 import type { Draft, ShapeDraft } from './drafts/draft.ts';
 import { shapesOfDraft, shapesOfJoin } from './drafts/draft-shapes.ts';
-import { addCorner, closeOutline, insertCorner, moveCorner } from './drafts/edit-corners.ts';
+import { addCorner, insertCorner, moveCorner } from './drafts/edit-corners.ts';
+import { closeRing } from './drafts/edit-rings.ts';
 import { handlesOf } from './drafts/handles.ts';
 import type { useAim } from './hooks/use-aim.ts';
 
@@ -15,7 +16,7 @@ type Hands = ReturnType<typeof useAim> & {
 function drawingOfShape(draft: ShapeDraft, hands: Hands): MapDrawing {
   const { chosen, isSquare, edit, choose } = hands;
   return {
-    mode: draft.isClosed ? 'outline' : 'line',
+    mode: draft.open === null ? 'outline' : 'line',
     handles: handlesOf(draft),
     shapes: (aim) => shapesOfDraft(draft, aim, chosen),
     aim: (request) => hands.aim(draft, { ...request, isSquare: isSquare || request.isSquare }),
@@ -29,8 +30,8 @@ function drawingOfShape(draft: ShapeDraft, hands: Hands): MapDrawing {
       });
     },
     press: ({ kind, at, place }) => {
-      if (!draft.isClosed) {
-        edit(closeOutline);
+      if (draft.open !== null) {
+        edit(closeRing);
         return;
       }
       if (kind === 'middle') edit((now) => insertCorner(now, at, place));

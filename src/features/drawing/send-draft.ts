@@ -3,6 +3,7 @@ import { changeBuilding } from '../buildings/api/change-building.ts';
 import { drawBuilding } from '../buildings/api/draw-building.ts';
 import { joinBuildings } from '../buildings/api/join-buildings.ts';
 import { splitBuilding } from '../buildings/api/split-building.ts';
+import { formatFigure } from '../buildings/field-words.ts';
 import { footprintOf, lineOf, type Draft } from './drafts/draft.ts';
 import { splitLine } from './drafts/split-line.ts';
 
@@ -42,4 +43,17 @@ export function sentWords(draft: Draft, reference: string): string {
       return `${others.join(', ')} joined to ${first ?? ''}.`;
     }
   }
+}
+
+const NAMED = 3;
+
+/** Which others a new outline lies over: it is kept all the same, since galleries lie over lanes. */
+export function overlapWords({ overlaps = [] }: RegisterChange): string {
+  if (overlaps.length === 0) return '';
+  const named = overlaps.slice(0, NAMED).map(({ reference, area }) => {
+    return `${reference} by ${formatFigure('area', Number(area.toFixed(1)))} m²`;
+  });
+  const others = overlaps.length - named.length;
+  const more = others === 0 ? '' : ` and ${others} ${others === 1 ? 'other' : 'others'}`;
+  return ` It lies over ${named.join(', ')}${more}.`;
 }

@@ -33,6 +33,8 @@ export type Situation = {
   readonly steps: { readonly past: number; readonly future: number } | null;
   /** Changes that were saved from here and can be taken back. */
   readonly saved: number;
+  /** Of these, those that were taken back and can be done again. */
+  readonly undone: number;
   /** Values of a building are being written. */
   readonly isWriting: boolean;
 };
@@ -49,7 +51,7 @@ export function reasonAgainst(id: ToolId, now: Situation): string | null {
       if (now.steps !== null) return now.steps.past > 0 ? null : 'Nothing to take back here.';
       return now.saved > 0 ? null : 'Nothing was changed here yet.';
     case 'redo':
-      return (now.steps?.future ?? 0) > 0 ? null : 'Nothing was taken back.';
+      return (now.steps?.future ?? now.undone) > 0 ? null : 'Nothing was taken back.';
     case 'select':
     case 'draw':
     case 'join':

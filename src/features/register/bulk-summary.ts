@@ -4,10 +4,8 @@ import type {
   BuildingValue,
 } from '../../../shared/schemas/building-fields.ts';
 import { BUILDING_FIELD_NAMES } from '../../../shared/schemas/building-fields.ts';
-import type { RegisterFilter } from '../../../shared/schemas/register.ts';
 import { formatCount } from '../../lib/format-number.ts';
 import { factsOf, formatFigure, inSentence } from '../buildings/field-words.ts';
-import { columnFilter, withColumn } from './filter-parts.ts';
 
 /** One value to be set, and how many buildings have what now. */
 export type BulkLine = {
@@ -25,28 +23,6 @@ export function fieldsSet(
     const value = attributes[field];
     return value === undefined ? [] : [{ field, value }];
   });
-}
-
-/** The buildings of a filter that have a value; null where the filter leaves all of them out. */
-export function havingValue(
-  filter: RegisterFilter,
-  field: BuildingField,
-  value: BuildingValue,
-): RegisterFilter | null {
-  const { any, range, unknown } = columnFilter(filter, field);
-  if (value === null) {
-    if (range !== undefined || (any !== undefined && !any.includes(null))) return null;
-    return withColumn(filter, field, { unknown: true });
-  }
-  if (unknown === true) return null;
-  if (typeof value === 'string') {
-    if (any !== undefined && !any.includes(value)) return null;
-    return withColumn(filter, field, { any: [value] });
-  }
-  const { from = -Infinity, to = Infinity } = range ?? {};
-  return value < from || value > to
-    ? null
-    : withColumn(filter, field, { range: { from: value, to: value } });
 }
 
 function buildings(count: number): string {

@@ -13,6 +13,7 @@ const LABELS = {
   within: 'On the map',
   importId: 'Import',
   ids: 'Chosen',
+  except: 'Left out',
 } as const;
 
 /** What a part of a filter is called. */
@@ -53,6 +54,7 @@ export function partWords(filter: RegisterFilter, part: FilterPart, importName =
     case 'importId':
       return importName;
     case 'ids':
-      return `${formatCount(filter.ids?.length ?? 0)} buildings`;
+    case 'except':
+      return `${formatCount(filter[part].length)} buildings`;
   }
 }

@@ -45,6 +45,19 @@ export const WIDTHS: Readonly<Record<RegisterColumn, number>> = {
   inspected: 100,
 };
 
+/** A letter of a reference, and the most that references may take of a desk and of a phone. */
+const LETTER = 8;
+const WIDEST_REFERENCE = { desk: 168, phone: 120 } as const;
+
+/** Pixels that references need to be told apart. */
+export function referenceWidth(
+  references: readonly string[],
+  on: keyof typeof WIDEST_REFERENCE,
+): number {
+  const longest = references.reduce((most, { length }) => Math.max(most, length), 0);
+  return Math.max(WIDTHS.reference, Math.min(WIDEST_REFERENCE[on], 16 + LETTER * longest));
+}
+
 /** Headings that are shorter than the field's name. */
 export const SHORT_HEADINGS: Readonly<Partial<Record<RegisterColumn, string>>> = {
   reference: 'Ref',

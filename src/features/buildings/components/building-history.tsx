@@ -29,7 +29,7 @@ function Entry({ entry, busy, onUndo }: EntryProps) {
         <b className="font-semibold">{by ?? 'Groundsill'}</b>
         {mayUndo && (
           <Button kind="quiet" busy={busy} className="ml-auto h-6" onClick={onUndo}>
-            Undo
+            {entry.kind === 'undo' ? 'Redo' : 'Undo'}
           </Button>
         )}
       </div>

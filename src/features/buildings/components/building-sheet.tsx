@@ -20,6 +20,8 @@ type BuildingSheetProps = {
   readonly onChanged: (change: RegisterChange) => void;
   /** What else can be done with it here. */
   readonly action?: ReactNode;
+  /** What was found of it, before its facts. */
+  readonly found?: ReactNode;
 };
 
 function Heading({ building }: { readonly building: BuildingAnswer }) {
@@ -37,7 +39,7 @@ function Heading({ building }: { readonly building: BuildingAnswer }) {
 
 /** A building of the register: what is known of it, changed by hand, and its history. */
 export function BuildingSheet(props: BuildingSheetProps) {
-  const { schemeId, building, mayEdit, view, onView, onChanged, action } = props;
+  const { schemeId, building, mayEdit, view, onView, onChanged, action, found } = props;
   const show = (next: SheetView) => () => {
     onView(next);
   };
@@ -57,6 +59,7 @@ export function BuildingSheet(props: BuildingSheetProps) {
       )}
       {view === 'facts' && (
         <>
+          {found}
           <BuildingFacts building={building} />
           <BuildingWalls walls={building.walls} />
         </>

@@ -1,14 +1,14 @@
 import type { CornerAt } from '../../map/map-drawing.ts';
-import type { CornerDraft } from '../drafts/draft.ts';
+import type { CornerDraft, RingAt } from '../drafts/draft.ts';
 import {
   insertCorner,
   middleAfter,
   moveCorner,
   reasonToKeepCorner,
   removeCorner,
-  removeHole,
   ringAt,
 } from '../drafts/edit-corners.ts';
+import { isRemovable, removeRing } from '../drafts/edit-rings.ts';
 import { CornerRow } from './corner-row.tsx';
 import { RingHead } from './ring-head.tsx';
 
@@ -18,31 +18,35 @@ type CornerTableProps<T extends CornerDraft> = {
   readonly onEdit: (edit: (draft: T) => T) => void;
 };
 
-function ringName({ parts, tool }: CornerDraft, part: number, ring: number): string {
+/** As `Courtyard 1`, or `Part 2, courtyard 1` where there are several parts. */
+function ringName({ parts, tool }: CornerDraft, { part, ring }: RingAt): string {
   if (tool === 'split' || tool === 'line') return 'Line';
   const name = ring === 0 ? 'Outline' : `Courtyard ${ring}`;
   return parts.length > 1 ? `Part ${part + 1}, ${name.toLowerCase()}` : name;
 }
 
-type RingRowsProps<T extends CornerDraft> = CornerTableProps<T> & {
-  readonly part: number;
-  readonly ring: number;
-};
+/** What goes with a ring: an outline takes its courtyards along. */
+function removedName(draft: CornerDraft, at: RingAt): string {
+  return at.ring === 0 ? `part ${at.part + 1}` : ringName(draft, at).toLowerCase();
+}
+
+type RingRowsProps<T extends CornerDraft> = CornerTableProps<T> & RingAt;
 
 function RingTable<T extends CornerDraft>({ draft, chosen, onEdit, part, ring }: RingRowsProps<T>) {
-  const name = ringName(draft, part, ring);
-  const corners = ringAt(draft, { part, ring, corner: 0 });
+  const name = ringName(draft, { part, ring });
+  const corners = ringAt(draft, { part, ring });
   const word = draft.tool === 'split' || draft.tool === 'line' ? 'Point' : 'Corner';
   return (
     <table className="mt-2 w-full table-fixed border-collapse">
       <RingHead
         name={name}
+        removed={removedName(draft, { part, ring })}
         onRemove={
-          ring === 0
-            ? null
-            : () => {
-                onEdit((now) => removeHole(now, { part, ring, corner: 0 }));
+          draft.open === null && isRemovable(draft, { part, ring })
+            ? () => {
+                onEdit((now) => removeRing(now, { part, ring }));
               }
+            : null
         }
       />
       <tbody>
@@ -80,14 +84,18 @@ function RingTable<T extends CornerDraft>({ draft, chosen, onEdit, part, ring }:
   );
 }
 
-/** Every corner of a draft in figures, so that what the pointer does can be done by keys. */
+/**
+ * Every corner of a draft in figures, so that what the pointer does can be done by keys; while a ring is
+ * drawn, its corners alone.
+ */
 export function CornerTable<T extends CornerDraft>(props: CornerTableProps<T>) {
-  const { parts } = props.draft;
+  const { parts, open } = props.draft;
+  if (open !== null) {
+    return ringAt(props.draft, open).length > 0 && <RingTable {...props} {...open} />;
+  }
   return parts.map((rings, part) =>
-    rings.map((corners, ring) =>
-      corners.length === 0 ? null : (
-        <RingTable key={`${part}.${ring}`} {...props} part={part} ring={ring} />
-      ),
-    ),
+    rings.map((_, ring) => (
+      <RingTable key={`${part}.${ring}`} {...props} part={part} ring={ring} />
+    )),
   );
 }

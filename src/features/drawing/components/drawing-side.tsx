@@ -15,7 +15,11 @@ export function DrawingSide({ drawing, children }: DrawingSideProps) {
   return (
     <>
       {!drawing.situation.isWriting && <DoneLine done={drawing.done} />}
-      {draft === null ? children : <DrawingPanel drawing={drawing} draft={draft} />}
+      {draft === null ? (
+        children
+      ) : (
+        <DrawingPanel key={draft.tool} drawing={drawing} draft={draft} />
+      )}
     </>
   );
 }

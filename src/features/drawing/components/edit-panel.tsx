@@ -8,6 +8,7 @@ import { areaWords } from '../measure-words.ts';
 import { CornerTable } from './corner-table.tsx';
 import { FigureLine } from './figure-line.tsx';
 import { GiveUp } from './give-up.tsx';
+import { MoreRings } from './more-rings.tsx';
 import { OutlineClash } from './outline-clash.tsx';
 import { PanelFrame } from './panel-frame.tsx';
 import { RightAngles } from './right-angles.tsx';
@@ -55,6 +56,7 @@ export function EditPanel({ drawing, draft }: EditPanelProps) {
       <div className="mt-1.5">
         <RightAngles square={drawing.square} />
       </div>
+      <MoreRings drafting={drafting} />
       <CornerTable draft={draft} chosen={drafting.chosen} onEdit={drafting.editShape} />
     </PanelFrame>
   );

@@ -80,7 +80,8 @@ export function JoinPanel({ drawing, draft }: JoinPanelProps) {
         )}
         {joined === null && draft.buildings.length > 1 && (
           <p className="py-1 text-small font-medium text-clay-deep">
-            They do not touch: only buildings that share a wall can be joined.
+            They do not touch: only buildings that share a wall, or stand at most 5 cm apart, can be
+            joined.
           </p>
         )}
       </div>

@@ -12,6 +12,7 @@ import { areaWords } from '../measure-words.ts';
 import { CornerTable } from './corner-table.tsx';
 import { FigureLine } from './figure-line.tsx';
 import { GiveUp } from './give-up.tsx';
+import { MoreRings } from './more-rings.tsx';
 import { PanelFrame } from './panel-frame.tsx';
 import { RightAngles } from './right-angles.tsx';
 
@@ -23,13 +24,18 @@ function referenceFault(error: Error | null): string | undefined {
   return error.fields.find(({ path }) => path === 'reference')?.message;
 }
 
-type NamePanelProps = { readonly drawing: PlanDrawing; readonly draft: ShapeDraft };
+type NamePanelProps = {
+  readonly drawing: PlanDrawing;
+  readonly draft: ShapeDraft;
+  /** What was written as its reference; null while the proposed one stands. */
+  readonly written: string | null;
+  readonly onWrite: (reference: string) => void;
+};
 
 /** A new building whose outline is closed: what it is called, and saving it. */
-export function NamePanel({ drawing, draft }: NamePanelProps) {
+export function NamePanel({ drawing, draft, written, onWrite }: NamePanelProps) {
   const { drafting, saving, save, schemeId } = drawing;
   const proposed = useNextReference(schemeId);
-  const [written, setWritten] = useState<string | null>(null);
   const [fault, setFault] = useState<string | undefined>(undefined);
   // a finger would get a keyboard over what it has drawn
   const isByFinger = useMedia('(pointer: coarse)');
@@ -71,13 +77,14 @@ export function NamePanel({ drawing, draft }: NamePanelProps) {
           value={reference}
           error={fault ?? referenceFault(saving.error)}
           onChange={({ target }) => {
-            setWritten(target.value);
+            onWrite(target.value);
           }}
         />
       </form>
       <div className="mt-2">
         <RightAngles square={drawing.square} />
       </div>
+      <MoreRings drafting={drafting} />
       <CornerTable draft={draft} chosen={drafting.chosen} onEdit={drafting.editShape} />
     </PanelFrame>
   );

@@ -2,12 +2,14 @@ import { Button } from '../../../components/ui/button.tsx';
 
 type RingHeadProps = {
   readonly name: string;
-  /** Takes a courtyard away; null for what has to stay. */
+  /** How it is called where it is taken away. */
+  readonly removed: string;
+  /** Takes it away; null for what has to stay. */
   readonly onRemove: (() => void) | null;
 };
 
 /** What a ring is called, over its columns. */
-export function RingHead({ name, onRemove }: RingHeadProps) {
+export function RingHead({ name, removed, onRemove }: RingHeadProps) {
   return (
     <>
       <caption className="py-1 text-left text-small font-semibold">
@@ -17,7 +19,7 @@ export function RingHead({ name, onRemove }: RingHeadProps) {
             <Button
               kind="quiet"
               className="h-6"
-              aria-label={`Remove ${name.toLowerCase()}`}
+              aria-label={`Remove ${removed}`}
               onClick={onRemove}
             >
               Remove it

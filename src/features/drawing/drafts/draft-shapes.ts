@@ -10,6 +10,7 @@ import {
   type ShapeDraft,
 } from './draft.ts';
 import { addCorner, insertCorner, moveCorner } from './edit-corners.ts';
+import { closedParts } from './edit-rings.ts';
 import { handlesOf } from './handles.ts';
 import { joinPreview } from './join-preview.ts';
 import { splitLine } from './split-line.ts';
@@ -28,12 +29,17 @@ function areasOf(parts: Parts, look: 'outline' | 'piece', text: string): DraftSh
   ];
 }
 
-/** The sides of a ring with their lengths. */
-function sidesOf(ring: Ring, isClosed: boolean, look: 'outline' | 'cut'): DraftShape[] {
+/** The sides of a ring, with their lengths where they are measured. */
+function sidesOf(
+  ring: Ring,
+  isClosed: boolean,
+  look: 'outline' | 'cut',
+  isMeasured = true,
+): DraftShape[] {
   return ring.flatMap((from, k): DraftShape[] => {
     const to = ring[k + 1] ?? (isClosed ? ring[0] : undefined);
     if (to === undefined) return [];
-    const text = lengthWords(Math.hypot(to[0] - from[0], to[1] - from[1]));
+    const text = isMeasured ? lengthWords(Math.hypot(to[0] - from[0], to[1] - from[1])) : '';
     return [{ kind: 'line', look, places: [from, to], text }];
   });
 }
@@ -66,11 +72,15 @@ function cornersOf(ring: Ring): DraftShape[] {
   return ring.map((place) => ({ kind: 'point', look: 'corner', place }));
 }
 
+/** What is being drawn, and what of the building is closed already. */
 function openShapes(draft: ShapeDraft, aim: Aim | null): DraftShape[] {
   const ring = lineOf(aimed(draft, aim));
+  const standing = closedParts(draft);
   const [first, last] = [ring[0], ring.at(-1)];
   const isArea = ring.length > 2 && first !== undefined && last !== undefined;
   return [
+    ...standing.map((rings): DraftShape => ({ kind: 'area', look: 'outline', rings })),
+    ...standing.flat().flatMap((closed) => sidesOf(closed, true, 'outline', false)),
     ...(isArea ? [{ kind: 'area', look: 'ghost', rings: [ring] } as const] : []),
     ...(isArea ? [{ kind: 'line', look: 'ghost', places: [last, first] } as const] : []),
     ...sidesOf(ring, false, 'outline'),
@@ -100,7 +110,7 @@ function cutShapes(draft: ShapeDraft, aim: Aim | null): DraftShape[] {
   return [
     ...areasOf(kept, 'outline', areaWords(kept)),
     ...others.flatMap((piece) => areasOf(piece, 'piece', areaWords(piece))),
-    ...sidesOf(line, false, 'cut').map((side) => ({ ...side, text: '' })),
+    ...sidesOf(line, false, 'cut', false),
     ...cornersOf(lineOf(draft)),
     ...targetOf(aim),
   ];
@@ -113,7 +123,7 @@ export function shapesOfDraft(
   chosen: CornerAt | null,
 ): readonly DraftShape[] {
   if (draft.tool === 'split') return cutShapes(draft, aim);
-  return draft.isClosed ? closedShapes(draft, aim, chosen) : openShapes(draft, aim);
+  return draft.open === null ? closedShapes(draft, aim, chosen) : openShapes(draft, aim);
 }
 
 /** What is seen of buildings that are to be joined. */

@@ -6,10 +6,10 @@ import { LEAST_CORNERS, middleAfter } from './edit-corners.ts';
 export function handlesOf(draft: ShapeDraft): readonly Handle[] {
   const line = lineOf(draft);
   const [first] = line;
-  if (!draft.isClosed) {
-    const closes = draft.tool === 'draw' && line.length >= LEAST_CORNERS && first !== undefined;
+  if (draft.open !== null) {
+    const closes = draft.tool !== 'split' && line.length >= LEAST_CORNERS && first !== undefined;
     if (!closes) return [];
-    return [{ kind: 'corner', at: { part: 0, ring: 0, corner: 0 }, place: first }];
+    return [{ kind: 'corner', at: { ...draft.open, corner: 0 }, place: first }];
   }
   return draft.parts.flatMap((rings, part) =>
     rings.flatMap((corners, ring) =>

@@ -1,4 +1,4 @@
-import { lineOf, type Draft } from './draft.ts';
+import type { Draft } from './draft.ts';
 import type { History } from './history.ts';
 
 /** So little is drawn again without a thought. */
@@ -14,6 +14,6 @@ export function lostBy(history: History<Draft> | null): number {
   if (history === null) return 0;
   const { past, present } = history;
   if (present.tool === 'join') return 0;
-  const lost = present.tool === 'edit' ? past.length : lineOf(present).length;
+  const lost = present.tool === 'edit' ? past.length : present.parts.flat(2).length;
   return lost > FEW ? lost : 0;
 }

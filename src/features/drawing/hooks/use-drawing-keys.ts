@@ -3,7 +3,8 @@ import { useKeyHelp } from '../../../hooks/use-key-help.ts';
 import type { CornerAt } from '../../map/map-drawing.ts';
 import { DRAFT_KEYS, TOOL_KEYS } from '../draw-keys.ts';
 import type { Draft } from '../drafts/draft.ts';
-import { closeOutline, removeCorner, takeLastBack } from '../drafts/edit-corners.ts';
+import { removeCorner, takeLastBack } from '../drafts/edit-corners.ts';
+import { addingOf, beginRing, closeRing, leaveRing, type RingKind } from '../drafts/edit-rings.ts';
 import type { ToolId } from '../tools.ts';
 import type { Drafting } from './use-drafting.ts';
 import { useDraftKeys } from './use-draft-keys.ts';
@@ -13,11 +14,19 @@ type Actions = {
   readonly save: () => void;
 };
 
-/** Enter closes an outline and splits or joins; an outline that is closed waits for its form. */
+/** Enter closes what is drawn and splits or joins; what is closed waits for its form. */
 function close(draft: Draft | null, { editShape }: Drafting, save: () => void): boolean {
-  if (draft === null || (draft.tool !== 'join' && draft.isClosed)) return false;
-  if (draft.tool === 'draw') editShape(closeOutline);
+  if (draft === null || (draft.tool !== 'join' && draft.open === null)) return false;
+  if (draft.tool === 'draw' || draft.tool === 'edit') editShape(closeRing);
   else save();
+  return true;
+}
+
+/** Gives up what is being added, else all that is drawn. */
+function giveUp({ draft, editShape }: Drafting, press: Actions['press']): boolean {
+  if (draft === null) return false;
+  if (draft.tool !== 'join' && addingOf(draft) !== null) editShape(leaveRing);
+  else press('select');
   return true;
 }
 
@@ -35,6 +44,11 @@ export function useDrawingKeys(
   active: boolean,
 ): void {
   const { draft } = drafting;
+  const isClosed = draft !== null && draft.tool !== 'join' && draft.open === null;
+  const begin = (kind: RingKind) => () => {
+    drafting.editShape((now) => beginRing(now, kind));
+  };
+  useHotkeys({ h: begin('courtyard'), n: begin('part') }, active && isClosed);
   useKeyHelp(TOOL_KEYS, active);
   useKeyHelp(DRAFT_KEYS, active && draft !== null);
   useHotkeys(
@@ -51,13 +65,9 @@ export function useDrawingKeys(
     {
       undo: () => { press('undo'); },
       redo: () => { press('redo'); },
-      giveUp: () => {
-        if (draft === null) return false;
-        press('select');
-        return true;
-      },
+      giveUp: () => giveUp(drafting, press),
       takeBack: () => {
-        if (draft === null || draft.tool === 'join' || draft.isClosed) return false;
+        if (draft === null || draft.tool === 'join' || draft.open === null) return false;
         drafting.editShape(takeLastBack);
         return true;
       },

@@ -7,7 +7,7 @@ import { newCut, newOutline, outlineOf, type Draft } from '../drafts/draft.ts';
 import { togglePicked } from '../drafts/edit-join.ts';
 import { mapDrawingOf } from '../map-drawing-of.ts';
 import { reasonAgainst, type Situation, type ToolId } from '../tools.ts';
-import { sentWords } from '../send-draft.ts';
+import { overlapWords, sentWords } from '../send-draft.ts';
 import { useAim } from './use-aim.ts';
 import { useDone } from './use-done.ts';
 import { useDrafting } from './use-drafting.ts';
@@ -53,9 +53,11 @@ function selectedAfter(draft: Draft, left: readonly number[]): number | null {
 function useSaving({ schemeId, building, select }: Around) {
   const drafting = useDrafting();
   const done = useDone(schemeId, select);
-  const saving = useSaveDraft(schemeId, ({ changeId, buildingIds }, { draft, reference }) => {
+  const saving = useSaveDraft(schemeId, (change, { draft, reference }) => {
+    const { changeId, buildingIds } = change;
     const before = building?.id ?? null;
-    done.push({ changeId, words: sentWords(draft, reference), before });
+    const words = sentWords(draft, reference);
+    done.push({ changeId, words, remark: overlapWords(change), before });
     drafting.set(null);
     select(selectedAfter(draft, buildingIds));
   });
@@ -94,6 +96,7 @@ export function usePlanDrawing(around: Around) {
     hasBuilding: building !== undefined,
     steps: drafting.steps,
     saved: done.saved,
+    undone: done.undone,
     isWriting,
   };
 
@@ -108,7 +111,7 @@ export function usePlanDrawing(around: Around) {
   function press(next: ToolId): void {
     if (!canDraw || saving.isPending || reasonAgainst(next, situation) !== null) return;
     if (next === 'undo') (draft === null ? done : drafting).undo();
-    else if (next === 'redo') drafting.redo();
+    else if (next === 'redo') (draft === null ? done : drafting).redo();
     else if (next !== tool) begin(next);
   }
   function pick(buildingId: number): void {

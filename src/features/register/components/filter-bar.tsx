@@ -31,6 +31,11 @@ function isStanding(part: FilterPart): boolean {
   return STANDING_PARTS.some((one) => one === part);
 }
 
+/** Those are chosen at the buildings themselves. */
+function isByNumber(part: FilterPart): boolean {
+  return part === 'ids' || part === 'except';
+}
+
 type PartProps = FilterBarProps & { readonly part: FilterPart; readonly close: () => void };
 
 /** What can be chosen for one part of the filter. */
@@ -83,7 +88,7 @@ export function FilterBar(props: FilterBarProps) {
     ...STANDING_PARTS,
     ...FILTER_PARTS.filter((part) => !isStanding(part) && (isSet(filter, part) || part === added)),
   ];
-  const addable = FILTER_PARTS.filter((part) => part !== 'ids' && !shown.includes(part));
+  const addable = FILTER_PARTS.filter((part) => !isByNumber(part) && !shown.includes(part));
   const isFiltered = JSON.stringify(filter) !== '{}';
   return (
     <div role="group" aria-label="Filter" className="flex flex-wrap items-center gap-1.5">

@@ -5,12 +5,25 @@ import { classNames } from '../../../lib/class-names.ts';
 import type { RegisterDesk } from '../hooks/use-register-desk.ts';
 import type { useRegisterPlan } from '../hooks/use-register-plan.ts';
 import { BuildingSide } from './building-side.tsx';
+import { DoneLine } from './done-line.tsx';
 
 type RegisterAsideProps = {
   readonly desk: RegisterDesk;
   readonly plan: ReturnType<typeof useRegisterPlan>;
   readonly mayEdit: boolean;
 };
+
+/** What was done last, where the opened building covers the foot of the page. */
+function DoneInSide({ desk }: Pick<RegisterAsideProps, 'desk'>) {
+  const { id } = useScheme();
+  const { inSide } = desk.done;
+  if (inSide === null) return null;
+  return (
+    <div className="flex-none border-t border-ink bg-paper-raised px-4 py-1">
+      <DoneLine key={inSide.words} schemeId={id} done={inSide} onDone={desk.setDone} />
+    </div>
+  );
+}
 
 /** Beside the table: the map, and under it the opened building; where there is no room, that lies over the table. */
 export function RegisterAside({ desk, plan, mayEdit }: RegisterAsideProps) {
@@ -66,6 +79,7 @@ export function RegisterAside({ desk, plan, mayEdit }: RegisterAsideProps) {
           />
         </div>
       )}
+      <DoneInSide desk={desk} />
     </aside>
   );
 }

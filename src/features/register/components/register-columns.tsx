@@ -22,8 +22,8 @@ function tickColumn(marks: Marks, found: number): Column<RegisterRow> {
     heading: (
       <TickBox
         name={`Mark all ${formatCount(found)} found`}
-        checked={marks.isAll}
-        mixed={!marks.isAll && marks.count > 0}
+        checked={marks.isAll && marks.letGo === 0}
+        mixed={marks.count > 0 && (!marks.isAll || marks.letGo > 0)}
         onToggle={marks.toggleAll}
       />
     ),
@@ -39,11 +39,11 @@ function tickColumn(marks: Marks, found: number): Column<RegisterRow> {
   };
 }
 
-function referenceColumn(stuckAt: number | undefined): Column<RegisterRow> {
+function referenceColumn(needed: number, stuckAt: number | undefined): Column<RegisterRow> {
   return {
     id: 'reference',
     heading: SHORT_HEADINGS.reference,
-    width: WIDTHS.reference + (stuckAt === undefined ? 12 : 0),
+    width: needed + (stuckAt === undefined ? 12 : 0),
     ...(stuckAt !== undefined && { stuckAt }),
     cell: ({ reference }) => (
       <span title={reference} className="text-ink-2">
@@ -99,10 +99,11 @@ export function registerColumns(
   marks: Marks | null,
   found: number,
   sort: RegisterSort,
+  widthOfReference: number,
 ): readonly Column<RegisterRow>[] {
   return [
     ...(marks === null ? [] : [tickColumn(marks, found)]),
-    referenceColumn(marks === null ? undefined : TICK_WIDTH),
+    referenceColumn(widthOfReference, marks === null ? undefined : TICK_WIDTH),
     buildingColumn(sort),
     ...chosen.map(fieldColumn),
   ];

@@ -52,8 +52,17 @@ function Marked({ schemeId, marks, onDone }: MarkedProps) {
       <span>
         <b className="font-semibold">{formatCount(marks.count)}</b>
         {' marked'}
-        {marks.isAll && <span className="max-sm:sr-only">, all that are found</span>}
+        {marks.isAll && (
+          <span className="max-sm:sr-only">
+            , all that are found{marks.letGo > 0 && ` but ${formatCount(marks.letGo)}`}
+          </span>
+        )}
       </span>
+      {marks.isFull && (
+        <span role="status" className="text-ink-2">
+          No more one by one: filter, then mark all that are found.
+        </span>
+      )}
       <Button
         kind="quiet"
         onClick={() => {
@@ -99,15 +108,7 @@ export function RegisterFoot({ schemeId, marks, mayEdit, done, onDone }: Registe
       )}
     >
       {hasMarks && <Marked {...{ schemeId, marks, onDone }} />}
-      {done !== null && (
-        <DoneLine
-          key={done.words}
-          {...{ schemeId, done, onDone }}
-          onClose={() => {
-            onDone(null);
-          }}
-        />
-      )}
+      {done !== null && <DoneLine key={done.words} {...{ schemeId, done, onDone }} />}
       <Keys mayEdit={mayEdit} />
     </div>
   );

@@ -4,8 +4,10 @@ import { Button } from '../../../components/ui/button.tsx';
 import { EmptyState } from '../../../components/ui/empty-state.tsx';
 import { QueryError } from '../../../components/ui/query-error.tsx';
 import { RowTable } from '../../../components/ui/table/row-table.tsx';
+import { NARROW, useMedia } from '../../../hooks/use-media.ts';
 import { classNames } from '../../../lib/class-names.ts';
 import type { RegisterDesk } from '../hooks/use-register-desk.ts';
+import { referenceWidth } from '../register-columns.ts';
 import { registerOrdering } from '../register-ordering.ts';
 import { registerColumns } from './register-columns.tsx';
 
@@ -54,9 +56,12 @@ export function RegisterTable({ desk, columns, mayEdit }: RegisterTableProps) {
   const { page, error } = rows;
   const { filter, sort } = address.which;
   const found = page?.found ?? WAITING_ROWS;
+  const isNarrow = useMedia(NARROW);
+  const references = page?.rows.map(({ reference }) => reference) ?? [];
+  const widest = referenceWidth(references, isNarrow ? 'phone' : 'desk');
   const shown = useMemo(
-    () => registerColumns(columns, mayEdit ? marks : null, found, sort),
-    [columns, mayEdit, marks, found, sort],
+    () => registerColumns(columns, mayEdit ? marks : null, found, sort, widest),
+    [columns, mayEdit, marks, found, sort, widest],
   );
   return (
     <div className="flex min-h-0 min-w-0 flex-1 flex-col print:block">

@@ -1,5 +1,6 @@
 import { useRef } from 'react';
 import { PlanBasis } from '../../plan/components/plan-basis.tsx';
+import { RunProgressLine } from '../../runs/components/run-progress-line.tsx';
 import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { usePerson } from '../../session/person-context.ts';
@@ -45,6 +46,7 @@ export function RegisterWork() {
   return (
     <>
       <PlanBasis scheme={scheme} crs={plan.ready?.crs} />
+      <RunProgressLine />
       <RegisterHead
         {...{ mayEdit, address, columns, mapPane, searchField }}
         schemeId={scheme.id}
@@ -59,7 +61,7 @@ export function RegisterWork() {
       <RegisterFoot
         {...{ marks, mayEdit }}
         schemeId={scheme.id}
-        done={desk.done}
+        done={desk.done.inFoot}
         onDone={desk.setDone}
       />
     </>

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { NARROW, useMedia } from '../../../hooks/use-media.ts';
 import type { SheetView } from '../../buildings/components/building-sheet.tsx';
 import type { Done } from '../components/done-line.tsx';
 import { useActiveBuilding } from './use-active-building.ts';
@@ -14,11 +15,13 @@ export function useRegisterDesk(schemeId: string, personId: string) {
   const { which, opened } = address;
   const rows = useRegisterRows(schemeId, which);
   const active = useActiveBuilding(schemeId, which, rows, opened);
-  const marks = useMarks(schemeId, which.filter, rows.page?.found ?? 0);
+  const marks = useMarks(which.filter, rows.page?.found ?? 0);
   const mapPane = useMapPane(personId);
   const onPlan = useShowOnPlan(schemeId, { activeId: active.id, opened, mapPane });
   const [sideView, setSideView] = useState<SheetView>('facts');
   const [done, setDone] = useState<Done | null>(null);
+  // there an opened building covers the whole page
+  const isCovered = useMedia(NARROW) && opened !== null;
 
   /** What is opened goes along with the row, unless it is being changed. */
   function follow(buildingId: number | undefined) {
@@ -34,7 +37,7 @@ export function useRegisterDesk(schemeId: string, personId: string) {
     ...onPlan,
     sideView,
     setSideView,
-    done,
+    done: { inSide: isCovered ? done : null, inFoot: isCovered ? null : done },
     setDone,
     reachRow: (index: number) => {
       active.reachRow(index);

@@ -2,7 +2,8 @@
 import { describe, expect, it } from 'vitest';
 import { aimAt } from '../../../../src/features/drawing/drafts/aim.ts';
 import { newOutline, type Parts } from '../../../../src/features/drawing/drafts/draft.ts';
-import { addCorner, closeOutline } from '../../../../src/features/drawing/drafts/edit-corners.ts';
+import { addCorner } from '../../../../src/features/drawing/drafts/edit-corners.ts';
+import { closeRing } from '../../../../src/features/drawing/drafts/edit-rings.ts';
 import { rightAngle } from '../../../../src/features/drawing/drafts/right-angle.ts';
 import { snap } from '../../../../src/features/drawing/drafts/snap.ts';
 import type { GridPlace } from '../../../../src/features/map/place/grid-projection.ts';
@@ -69,11 +70,7 @@ describe('aimAt', () => {
       at: { part: 0, ring: 0, corner: 2 },
       place: [4, 3],
     } as const;
-    const aim = aimAt(
-      closeOutline(draft),
-      { ...request, place: [4.2, 5], isSquare: true, held },
-      [],
-    );
+    const aim = aimAt(closeRing(draft), { ...request, place: [4.2, 5], isSquare: true, held }, []);
     expect(aim).toEqual({ place: [4, 5], to: 'ground', held });
   });
 });

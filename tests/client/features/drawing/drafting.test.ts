@@ -66,7 +66,7 @@ describe('nextReference', () => {
 
 describe('reasonAgainst', () => {
   const idle: Situation = {
-    ...{ tool: 'select', hasBuilding: false, steps: null, saved: 0 },
+    ...{ tool: 'select', hasBuilding: false, steps: null, saved: 0, undone: 0 },
     isWriting: false,
   };
 
@@ -81,6 +81,8 @@ describe('reasonAgainst', () => {
     ['undo', { saved: 1 }, null],
     ['undo', { saved: 1, steps: { past: 0, future: 0 } }, 'Nothing to take back here.'],
     ['redo', {}, 'Nothing was taken back.'],
+    ['redo', { undone: 1 }, null],
+    ['redo', { undone: 1, steps: { past: 1, future: 0 } }, 'Nothing was taken back.'],
     ['draw', { isWriting: true }, 'Save the values, or leave them, first.'],
     ['select', { isWriting: true }, null],
     ['redo', { steps: { past: 0, future: 1 } }, null],

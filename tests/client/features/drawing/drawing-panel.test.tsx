@@ -117,7 +117,8 @@ describe('drawing by figures', () => {
         version: 4,
       },
       [`POST ${SCHEME}/buildings`]: CHANGE,
-      [`POST ${SCHEME}/register-changes/${anId(70)}/undo`]: CHANGE,
+      [`POST ${SCHEME}/register-changes/${anId(70)}/undo`]: { ...CHANGE, changeId: anId(71) },
+      [`POST ${SCHEME}/register-changes/${anId(71)}/undo`]: CHANGE,
     });
     const select = openDesk();
     press('d');
@@ -142,6 +143,27 @@ describe('drawing by figures', () => {
     expect(select).toHaveBeenLastCalledWith(9);
     press('z', { ctrlKey: true });
     await screen.findByText('Undone: B0198 is in the register.');
+    press('z', { ctrlKey: true, shiftKey: true });
+    await screen.findByText('Done again: B0198 is in the register.');
+    expect(select).toHaveBeenLastCalledWith(9);
+    fireEvent.click(screen.getByRole('button', { name: /^Undo Ctrl Z/ }));
+    await screen.findByText('Undone: B0198 is in the register.');
+    const undone = calls.filter(({ route }) => route.endsWith('/undo'));
+    expect(undone.map(({ route }) => route.split('/').at(-2))).toEqual([
+      ...[anId(70), anId(71), anId(70)],
+    ]);
+  });
+
+  it('keeps the reference that was written while a courtyard is added', async () => {
+    fakeApi({ [`GET ${LAST}`]: { rows: [], found: 0, all: 0, version: 1 } });
+    openDesk();
+    press('d');
+    for (const [east, north] of [['0', '0'], ['9', '0'], ['9', '9']] as const) addCorner(east, north); // prettier-ignore
+    press('Enter');
+    fireEvent.change(await screen.findByLabelText('Reference'), { target: { value: 'Mill' } });
+    fireEvent.click(screen.getByRole('button', { name: 'Add a courtyard H' }));
+    fireEvent.click(screen.getByRole('button', { name: 'Leave it out Esc' }));
+    expect(screen.getByLabelText<HTMLInputElement>('Reference').value).toBe('Mill');
   });
 
   it('asks before the page is left with something drawn', async () => {
@@ -183,6 +205,48 @@ describe('an outline', () => {
     expect(calls[0]?.body).toEqual({
       version: 1,
       footprint: [[[[0.123456789, 0], [10, 0], [10, 9], [0, 8], [0.123456789, 0]]]],
+    }); // prettier-ignore
+  });
+
+  it('gets a courtyard and a part by keys, and loses one again', async () => {
+    const { calls } = fakeApi({ [`PATCH ${ROUTE}`]: CHANGE });
+    openDesk(HOUSE);
+    press('e');
+    press('h');
+    expect(screen.getByRole('heading', { name: 'Add a courtyard' })).toBeTruthy();
+    addCorner('2', '2');
+    addCorner('4', '2');
+    addCorner('4', '9');
+    expect(screen.getByText(/A courtyard lies inside the building/)).toBeTruthy();
+    press('Enter');
+    rewrite('Courtyard 1, Corner 3, northing', '4');
+    expect(screen.getByText('2.0 m²')).toBeTruthy();
+    expect(await axeFaults()).toEqual([]);
+    press('Enter');
+    expect(screen.getByText('\u22122.0 m²')).toBeTruthy();
+    press('n');
+    for (const [east, north] of [['20', '0'], ['25', '0'], ['25', '4']] as const) addCorner(east, north); // prettier-ignore
+    press('Enter');
+    expect(screen.getByText('+8.0 m²')).toBeTruthy();
+    press('h');
+    addCorner('6', '6');
+    press('Escape');
+    expect(screen.getByRole('heading', { name: 'Outline of B0007' })).toBeTruthy();
+    expect(await axeFaults()).toEqual([]);
+    fireEvent.click(screen.getByRole('button', { name: 'Remove part 2' }));
+    press('z', { ctrlKey: true });
+    fireEvent.click(screen.getByRole('button', { name: 'Remove part 1, courtyard 1' }));
+    press('z', { ctrlKey: true });
+    fireEvent.click(screen.getByRole('button', { name: 'Save the outline' }));
+    await screen.findByText('The outline of B0007 is changed.');
+    expect(calls[0]?.body).toMatchObject({
+      footprint: [
+        [
+          [[0.123456789, 0], [10, 0], [10, 8], [0, 8], [0.123456789, 0]],
+          [[2, 2], [4, 2], [4, 4], [2, 2]],
+        ],
+        [[[20, 0], [25, 0], [25, 4], [20, 0]]],
+      ],
     }); // prettier-ignore
   });
 

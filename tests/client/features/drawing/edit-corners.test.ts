@@ -9,15 +9,21 @@ import {
 } from '../../../../src/features/drawing/drafts/draft.ts';
 import {
   addCorner,
-  closeOutline,
   insertCorner,
   middleAfter,
   moveCorner,
   reasonToKeepCorner,
   removeCorner,
-  removeHole,
   takeLastBack,
 } from '../../../../src/features/drawing/drafts/edit-corners.ts';
+import {
+  addingOf,
+  beginRing,
+  closeRing,
+  leaveRing,
+  reasonToStayOpen,
+  removeRing,
+} from '../../../../src/features/drawing/drafts/edit-rings.ts';
 import { handlesOf } from '../../../../src/features/drawing/drafts/handles.ts';
 import type { GridPlace } from '../../../../src/features/map/place/grid-projection.ts';
 import { aBuildingAnswer } from '../../../support/answers.ts';
@@ -71,17 +77,17 @@ describe('drawing', () => {
     ['three corners', drawn([0, 0], [4, 0], [4, 3]), 3],
     ['one taken back', takeLastBack(drawn([0, 0], [4, 0])), 1],
     ['none to take back', takeLastBack(drawn()), 0],
-    ['an outline with too few corners to close', closeOutline(drawn([0, 0], [4, 0])), 2],
+    ['an outline with too few corners to close', closeRing(drawn([0, 0], [4, 0])), 2],
   ])('%s', (_name, draft, count) => {
     expect(ring(draft)).toHaveLength(count);
-    expect(draft.isClosed).toBe(false);
+    expect(draft.open).toEqual({ part: 0, ring: 0 });
   });
 
-  it('closes from three corners on, and opens again', () => {
-    const done = closeOutline(drawn([0, 0], [4, 0], [4, 3]));
-    expect(done.isClosed).toBe(true);
+  it('closes from three corners on, and then takes no more', () => {
+    const done = closeRing(drawn([0, 0], [4, 0], [4, 3]));
+    expect(done.open).toBeNull();
     expect(addCorner(done, [9, 9])).toBe(done);
-    expect(takeLastBack(done).isClosed).toBe(false);
+    expect(takeLastBack(done)).toBe(done);
   });
 });
 
@@ -101,13 +107,78 @@ describe('an outline', () => {
   });
 
   it('loses a courtyard, but not itself', () => {
-    expect(removeHole(withCourtyard(), { ...FIRST, ring: 1 }).parts).toEqual([[OUTER]]);
-    expect(removeHole(withCourtyard(), FIRST).parts[0]).toHaveLength(2);
+    expect(removeRing(withCourtyard(), { part: 0, ring: 1 }).parts).toEqual([[OUTER]]);
+    expect(removeRing(withCourtyard(), FIRST).parts[0]).toHaveLength(2);
   });
 
   it('can be taken hold of at corners and middles', () => {
     expect(handlesOf(withCourtyard())).toHaveLength(14);
     expect(handlesOf(drawn([0, 0], [4, 0]))).toEqual([]);
     expect(handlesOf(drawn([0, 0], [4, 0], [4, 3]))).toMatchObject([{ place: [0, 0] }]);
+  });
+});
+
+/** A square of so many metres with its south-western corner there. */
+function square(east: number, north: number, side: number): GridPlace[] {
+  return [
+    [east, north],
+    [east + side, north],
+    [east + side, north + side],
+    [east, north + side],
+  ];
+}
+
+describe('a courtyard or a part', () => {
+  const house = closeRing(drawn(...square(0, 0, 10)));
+  const two = closeRing(square(20, 0, 10).reduce(addCorner, beginRing(house, 'part')));
+
+  function added(draft: ShapeDraft, kind: 'courtyard' | 'part', corners: GridPlace[]): ShapeDraft {
+    return corners.reduce(addCorner, beginRing(draft, kind));
+  }
+
+  it('is drawn beside what is closed, corner by corner', () => {
+    const open = added(house, 'courtyard', [[3, 3], [5, 3]]); // prettier-ignore
+    expect([addingOf(house), addingOf(open)]).toEqual([null, 'courtyard']);
+    expect(takeLastBack(open).parts).toEqual([[square(0, 0, 10), [[3, 3]]]]);
+    expect(closeRing(open)).toBe(open);
+    expect(leaveRing(open).parts).toEqual(house.parts);
+    expect(beginRing(open, 'part')).toBe(open);
+    expect(two.parts).toEqual([[square(0, 0, 10)], [square(20, 0, 10)]]);
+  });
+
+  it('goes to the part that it lies in', () => {
+    const done = closeRing(added(two, 'courtyard', square(23, 3, 2)));
+    expect(done.parts).toEqual([[square(0, 0, 10)], [square(20, 0, 10), square(23, 3, 2)]]);
+    expect(done.open).toBeNull();
+  });
+
+  it.each([
+    ['courtyard', 'inside', square(3, 3, 2), null],
+    ['courtyard', 'half outside', square(8, 3, 5), /lies inside the building/],
+    ['courtyard', 'across two parts', square(5, 3, 20), /lies inside the building/],
+    ['part', 'beside', square(0, 20, 5), null],
+    ['part', 'against a wall', square(10, 0, 5), null],
+    ['part', 'half inside', square(8, 3, 5), /lies beside the others/],
+  ] as const)('a %s that lies %s', (kind, _where, corners, reason) => {
+    const open = added(two, kind, [...corners]);
+    if (reason === null) {
+      expect(reasonToStayOpen(open)).toBeNull();
+      expect(closeRing(open).open).toBeNull();
+    } else {
+      expect(reasonToStayOpen(open)).toMatch(reason);
+      expect(closeRing(open)).toBe(open);
+    }
+  });
+
+  it('is taken away with what lies in it', () => {
+    const done = closeRing(added(two, 'courtyard', square(23, 3, 2)));
+    expect(removeRing(done, { part: 1, ring: 0 }).parts).toEqual(house.parts);
+    expect(removeRing(done, { part: 1, ring: 1 }).parts).toEqual(two.parts);
+  });
+
+  it('closes at its own first corner', () => {
+    expect(handlesOf(added(house, 'courtyard', [[3, 3], [5, 3], [5, 5]]))).toMatchObject([
+      { at: { part: 0, ring: 1, corner: 0 }, place: [3, 3] },
+    ]); // prettier-ignore
   });
 });

@@ -2,7 +2,6 @@
 import { describe, expect, it } from 'vitest';
 import { footprintArea } from '../../../../shared/building/footprint-area.ts';
 import type { Parts } from '../../../../src/features/drawing/drafts/draft.ts';
-import { joinPreview } from '../../../../src/features/drawing/drafts/join-preview.ts';
 import { splitLine } from '../../../../src/features/drawing/drafts/split-line.ts';
 import { splitPreview } from '../../../../src/features/drawing/drafts/split-preview.ts';
 
@@ -52,28 +51,5 @@ describe('splitLine', () => {
   it('goes straight on at both ends', () => {
     expect(splitLine(line([3, 0], [3, 4], [10, 4]))).toEqual(line([3, -0.25], [3, 4], [10.25, 4]));
     expect(splitLine(line([3, 0]))).toEqual(line([3, 0]));
-  });
-});
-
-describe('joinPreview', () => {
-  const a: Parts = [[box(0, 0, 10, 8)]];
-
-  it.each([
-    ['two that share a wall', [a, [[box(10, 0, 5, 8)]]], 120],
-    ['three in a row', [a, [[box(10, 0, 5, 8)]], [[box(15, 0, 5, 8)]]], 160],
-    ['two apart', [a, [[box(11, 0, 5, 8)]]], null],
-    ['two that meet at a corner', [a, [[box(10, 8, 5, 8)]]], null],
-    [
-      'parts of which only some touch',
-      [
-        [...a, [box(40, 0, 5, 5)]],
-        [[box(10, 0, 5, 8)], [box(60, 0, 5, 5)]],
-      ],
-      170,
-    ],
-    ['one alone', [a], null],
-  ])('%s', (_name, buildings, area) => {
-    const joined = joinPreview(buildings);
-    expect(joined === null ? null : footprintArea(joined)).toBe(area);
   });
 });

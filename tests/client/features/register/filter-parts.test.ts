@@ -1,9 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import {
-  doneWords,
-  havingValue,
-  lineWords,
-} from '../../../../src/features/register/bulk-summary.ts';
+import { doneWords, lineWords } from '../../../../src/features/register/bulk-summary.ts';
 import { withBeside, withColumn, without } from '../../../../src/features/register/filter-parts.ts';
 import { partWords } from '../../../../src/features/register/filter-words.ts';
 import {
@@ -59,17 +55,6 @@ describe('the address of the register', () => {
 });
 
 describe('setting values for many', () => {
-  it('counts within what the filter leaves', () => {
-    expect(havingValue({ any: { use: ['a'] } }, 'use', 'b')).toBeNull();
-    expect(havingValue({ any: { use: ['a', 'b'] } }, 'use', 'b')).toEqual({ any: { use: ['b'] } });
-    expect(havingValue({ ranges: { storeys: { from: 3 } } }, 'storeys', 2)).toBeNull();
-    expect(havingValue({ ids: [1] }, 'storeys', 2)).toEqual({
-      ids: [1],
-      ranges: { storeys: { from: 2, to: 2 } },
-    });
-    expect(havingValue({ unknown: ['storeys'] }, 'storeys', 2)).toBeNull();
-  });
-
   it('says what it means and what was done', () => {
     const line = { field: 'construction', value: 'masonry', same: 20, unknown: 11 } as const;
     expect(lineWords(line, 43)).toBe(

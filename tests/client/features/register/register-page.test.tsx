@@ -18,6 +18,7 @@ import { renderPage } from '../../../support/render-page.tsx';
 const SCHEME = `/api/schemes/${anId(10)}`;
 const PERSON = { id: anId(), name: 'Assessor', email: 'a@example.org', isAdministrator: false };
 const CHANGE = { changeId: anId(90), version: 2, buildingIds: [1] };
+const UNDOING = { ...CHANGE, changeId: anId(91) };
 const ROWS = [
   aRegisterRow(),
   aRegisterRow({
@@ -49,7 +50,12 @@ const ANSWERS = {
   [`GET ${SCHEME}/register-views`]: [],
   [`GET ${SCHEME}/buildings/1`]: aBuildingAnswer(),
   [`GET ${SCHEME}/buildings/2`]: aBuildingAnswer({ id: 2, reference: 'B0002' }),
-  [`GET ${SCHEME}/extent`]: { bounds: [0, 50, 1, 51], crs: 32631, from: 'buildings' },
+  [`GET ${SCHEME}/extent`]: {
+    bounds: [0, 50, 1, 51],
+    home: [0, 50, 1, 51],
+    crs: 32631,
+    from: 'buildings',
+  },
   [`GET ${SCHEME}/background`]: [],
   'GET /api/crs/32631': aCrsAnswer(),
   [`GET ${SCHEME}`]: aSchemeAnswer(),
@@ -148,8 +154,10 @@ describe('the register', () => {
   it('sets values for what is marked after saying what that means, and takes it back', async () => {
     const { calls } = fakeApi({
       ...ANSWERS,
+      [`POST ${SCHEME}/buildings/edits/preview`]: [{ field: 'condition', same: 1, unknown: 1 }],
       [`POST ${SCHEME}/buildings/edits`]: CHANGE,
-      [`POST ${SCHEME}/register-changes/${CHANGE.changeId}/undo`]: CHANGE,
+      [`POST ${SCHEME}/register-changes/${CHANGE.changeId}/undo`]: UNDOING,
+      [`POST ${SCHEME}/register-changes/${UNDOING.changeId}/undo`]: CHANGE,
     });
     await openRegister(EDITS);
     fireEvent.click(screen.getByLabelText('Mark all 3 found'));
@@ -164,13 +172,16 @@ describe('the register', () => {
     expect(await screen.findByText(line)).toBeTruthy();
     fireEvent.click(screen.getByRole('button', { name: 'Set for 3' }));
     expect(await screen.findByText('Condition set to poor for 3 buildings.')).toBeTruthy();
-    expect(calls.find(({ route }) => route.startsWith('POST'))?.body).toEqual({
-      filter: {},
-      expected: 3,
-      attributes: { condition: 'poor' },
-    });
+    const posted = calls.filter(({ route }) => route.startsWith('POST'));
+    expect(posted.slice(0, 2).map(({ body }) => body)).toEqual([
+      { filter: {}, attributes: { condition: 'poor' } },
+      { filter: {}, expected: 3, attributes: { condition: 'poor' } },
+    ]);
     fireEvent.click(screen.getByRole('button', { name: 'Undo' }));
     expect(await screen.findByText(/^Undone: /)).toBeTruthy();
+    fireEvent.click(screen.getByRole('button', { name: 'Redo' }));
+    expect(await screen.findByText('Condition set to poor for 3 buildings.')).toBeTruthy();
+    expect(screen.getByRole('button', { name: 'Undo' })).toBeTruthy();
   });
 
   it('removes all that are found in one change, after asking', async () => {
@@ -186,6 +197,26 @@ describe('the register', () => {
       expected: 3,
     });
     expect(screen.queryByText('3', { selector: 'b' })).toBeNull();
+  });
+
+  it('marks all that are found but some', async () => {
+    const { calls } = fakeApi({ ...ANSWERS, [`POST ${SCHEME}/buildings/removals`]: CHANGE });
+    await openRegister(EDITS);
+    const all = screen.getByLabelText<HTMLInputElement>('Mark all 3 found');
+    fireEvent.click(all);
+    fireEvent.click(screen.getByLabelText('Mark B0002'));
+    expect([all.checked, all.indeterminate]).toEqual([false, true]);
+    expect(screen.getByText('2', { selector: 'b' }).parentElement?.textContent).toBe(
+      '2 marked, all that are found but 1',
+    );
+    fireEvent.click(screen.getByRole('button', { name: 'Remove…' }));
+    fireEvent.click(screen.getByRole('button', { name: 'Remove 2' }));
+    await waitFor(() => {
+      expect(calls.find(({ route }) => route.startsWith('POST'))?.body).toEqual({
+        filter: { except: [2] },
+        expected: 2,
+      });
+    });
   });
 
   it('says so where others were marked than are there now, and removes nothing', async () => {
