@@ -93,13 +93,15 @@ export const buildingSchema = z.strictObject({
 });
 
 /**
- * Where a scheme is: round its buildings, else round its background, else where its system is used.
+ * Where a scheme is: round its buildings, else round its background, else where its system is used; and
+ * what a map shows of it at first, which leaves out farms far from the town.
  *
- * Units: bounds are west, south, east, north in degrees; crs is an EPSG number. Valid: from tells
- * which. Source: [own].
+ * Units: bounds and home are west, south, east, north in degrees; crs is an EPSG number. Valid: from tells
+ * which; home lies among them. Source: [own].
  */
 export const extentSchema = z.strictObject({
   bounds,
+  home: bounds,
   crs: z.number(),
   from: z.enum(['buildings', 'background', 'crs']),
 });

@@ -66,7 +66,7 @@ export const importPlaceSchema = z.strictObject({
 });
 
 /**
- * What a person chooses of an import: where, which column fills which field, whether crossing rings are
+ * What a person chooses of an import: where, which layer, which column fills which field, whether crossing rings are
  * mended and how a value that changed both here and in the file is settled.
  *
  * Units: none. Valid: `columns` by field; a footprint file without a column for reference gets numbers
@@ -81,6 +81,8 @@ export const importOptionsSchema = z.strictObject({
     .max(20)
     .regex(/^\P{Cc}*$/u),
   mend: z.boolean(),
+  /** Another layer to read; where it is left out, the one that was read stays. */
+  layer: z.string().max(300).optional(),
   settle: z.strictObject({
     others: z.enum(['ask', 'keep ours', 'take theirs']),
     rows: z.record(z.string().max(60), z.enum(['keep ours', 'take theirs'])),
@@ -229,6 +231,8 @@ export const importSchema = z.strictObject({
   format: formatName.nullable(),
   kind: z.enum(['footprints', 'values']).nullable(),
   layer: z.string().nullable(),
+  /** The layers that can be chosen instead, with the one that was read; none where there is no choice. */
+  layers: z.array(z.string()),
   by: z.string().nullable(),
   at: z.string(),
   /** Rows done of rows in all, where known. */
@@ -237,8 +241,8 @@ export const importSchema = z.strictObject({
     z.strictObject({ name: z.string(), filled: z.number(), samples: z.array(z.string()) }),
   ),
   options: importOptionsSchema,
-  /** Whether the mapping was remembered from an earlier import with the same columns. */
-  isRemembered: z.boolean(),
+  /** The earlier file with the same columns that the mapping is remembered from, and when it was sent. */
+  remembered: z.strictObject({ at: z.string(), fileName: z.string() }).nullable(),
   place: placeFoundSchema.nullable(),
   missing: z.array(z.enum(['crs', 'reference', 'columns', 'settle'])),
   counts: counts.nullable(),

@@ -67,6 +67,30 @@ export const editManySchema = z.strictObject({
 });
 
 /**
+ * Asks what many buildings have now where values are to be set.
+ *
+ * Units: as editManySchema. Valid: as editManySchema. Source: [own].
+ */
+export const previewManySchema = editManySchema.omit({ expected: true });
+
+/**
+ * How many of the buildings have the value already that is to be set, and of how many none is known; a field
+ * that is made unknown counts the same ones twice.
+ *
+ * Units: counts of buildings. Valid: one entry for each field that is to be set. Source: [own].
+ */
+export const manyPreviewSchema = z.array(
+  z.strictObject({ field: z.enum(BUILDING_FIELD_NAMES), same: z.number(), unknown: z.number() }),
+);
+
+/**
+ * What many buildings have now.
+ *
+ * Units: as manyPreviewSchema. Valid: parsed by it. Source: [own].
+ */
+export type ManyPreview = z.infer<typeof manyPreviewSchema>;
+
+/**
  * Takes many buildings out of the register at once. `expected` is how many the person was told it would be.
  *
  * Units: none. Valid: refused where another number is found. Source: [own].
@@ -116,13 +140,17 @@ export const changeParamsSchema = z.object({ schemeId: z.string(), changeId: z.u
 /**
  * What was done: the change, for undoing it, and the buildings that it left.
  *
- * Units: none. Valid: version is the scheme's new registerVersion; removed buildings are not among
- * buildingIds; conflicts of an undo are refused whole. Source: [own].
+ * Units: area m². Valid: version is the scheme's new registerVersion; removed buildings are not among
+ * buildingIds; conflicts of an undo are refused whole; overlaps are told where a footprint was drawn:
+ * the buildings that it lies over, the largest overlap first. Source: [own].
  */
 export const registerChangeSchema = z.strictObject({
   changeId: z.uuid(),
   version: z.number(),
   buildingIds: z.array(z.number()),
+  overlaps: z
+    .array(z.strictObject({ id: z.number(), reference: z.string(), area: z.number() }))
+    .optional(),
 });
 
 /**
@@ -141,7 +169,7 @@ const changed = z
 
 /**
  * The history of one building, the newest first. Before and after hold what changed; null before means
- * that it came in, null after that it was taken out.
+ * that it came in, null after that it was taken out; the undoing of an undoing is told as `redo`.
  *
  * Units: as the fields; of a footprint only its area is answered. Valid: at most 200 entries.
  * Source: [own].
@@ -151,7 +179,7 @@ export const buildingHistorySchema = z.array(
     changeId: z.uuid(),
     at: z.string(),
     by: z.string().nullable(),
-    kind: z.enum(REGISTER_CHANGE_KINDS),
+    kind: z.enum([...REGISTER_CHANGE_KINDS, 'redo']),
     source: z.string().nullable(),
     before: changed,
     after: changed,

@@ -27,11 +27,20 @@ export type RegisterColumn = (typeof REGISTER_COLUMNS)[number];
 export const registerColumnSchema = z.enum(REGISTER_COLUMNS);
 
 /**
+ * The most buildings that a filter names one by one.
+ *
+ * Units: none. Valid: read only. Source: [own].
+ */
+export const MOST_NAMED_BUILDINGS = 5000;
+
+const named = z.array(z.number().int().positive()).max(MOST_NAMED_BUILDINGS);
+
+/**
  * Which buildings of a register are meant: all conditions together; an empty filter means all of them.
  *
  * Units: ranges in the unit of their column; within is west, south, east, north in degrees. Valid: `any`
  * holds the wanted values of a field, null for unknown; `assumed` tells whether the method has to assume
- * something. Source: [own].
+ * something; `ids` are the only ones meant, `except` are left out. Source: [own].
  */
 export const registerFilterSchema = z.strictObject({
   search: z
@@ -51,7 +60,8 @@ export const registerFilterSchema = z.strictObject({
   assumed: z.boolean().optional(),
   importId: z.uuid().optional(),
   within: z.tuple([z.number(), z.number(), z.number(), z.number()]).optional(),
-  ids: z.array(z.number().int().positive()).max(5000).optional(),
+  ids: named.optional(),
+  except: named.optional(),
 });
 
 /**

@@ -185,7 +185,7 @@ const category = z.union([z.literal(0), z.literal(1), z.literal(2), z.literal(3)
  * let the building go.
  *
  * Units: settlements m; slopes, strains and deflection ratios m/m; breakpoint a factor on the central
- * volume losses, breakpointVolumeLoss m/m; reserves m/m. Valid: settlement and slope are the largest over
+ * volume losses, breakpointVolumeLoss m/m; reserves are shares of the volume losses. Valid: settlement and slope are the largest over
  * the bracket at founding level, wallSettlement and wallSlope the central ones along its walls.
  * Source: mair-taylor-burland-1996.
  */

@@ -1,14 +1,20 @@
 import { drivesOfDesign } from '../../../shared/assessment/drives-of-design.ts';
 import { chainages } from '../../../shared/geometry/chainages.ts';
 import { offsetPolyline } from '../../../shared/geometry/offset-polyline.ts';
+import { pointInPolygon } from '../../../shared/geometry/point-in-polygon.ts';
 import { pointAtChainage } from '../../../shared/geometry/point-at-chainage.ts';
 import type { SpacePoint } from '../../../shared/geometry/point.ts';
-import type { SettlementContour } from '../../../shared/ground/settlement-contours.ts';
+import {
+  CONTOUR_LEVELS,
+  type SettlementContour,
+} from '../../../shared/ground/settlement-contours.ts';
 import { MethodError } from '../../../shared/method-error.ts';
 import type { AlignmentDesign } from '../../../shared/schemas/alignments.ts';
 import type { LineShape } from '../map/map-line.ts';
 import type { GridPlace } from '../map/place/grid-projection.ts';
 import { chainageWords } from './chainage-words.ts';
+
+type GridRing = readonly GridPlace[];
 
 const TICK_STEP = 100;
 /** How far a tick stands out beyond the outer edge of the drives, and its label beyond it. */
@@ -37,7 +43,7 @@ function driveShapes(design: AlignmentDesign): LineShape[] {
 }
 
 /** A point beside a line, positive to the left. */
-function placeBeside(
+export function placeBeside(
   line: readonly SpacePoint[],
   stations: Float64Array,
   chainage: number,
@@ -79,10 +85,27 @@ export function shapesOfDesign(design: AlignmentDesign): LineShape[] {
 
 const MILLIMETRES = 1000;
 
+/** What the outermost contours enclose; one inside of another is a hole in it. */
+function bandShapes(contours: readonly SettlementContour[]): LineShape[] {
+  const [outermost = 0] = CONTOUR_LEVELS;
+  const rings = contours.flatMap(({ level, line }) => (level === outermost ? [line] : []));
+  const isInside = (ring: GridRing, other: GridRing) =>
+    ring !== other && ring[0] !== undefined && pointInPolygon(ring[0], [other]);
+  const isHole = (ring: GridRing) => rings.some((other) => isInside(ring, other));
+  return rings
+    .filter((ring) => !isHole(ring))
+    .map((ring) => ({
+      kind: 'band',
+      rings: [ring, ...rings.filter((other) => isInside(other, ring))],
+    }));
+}
+
+/** Lines of equal settlement, and lightly where it reaches. */
 export function shapesOfContours(contours: readonly SettlementContour[]): LineShape[] {
-  return contours.map(({ level, line }) => ({
+  const lines = contours.map(({ level, line }): LineShape => ({
     kind: 'contour',
     level: Math.round(level * MILLIMETRES),
     places: line,
   }));
+  return [...bandShapes(contours), ...lines];
 }

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { Button } from '../../../components/ui/button.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { KeyCap } from '../../../components/ui/key-cap.tsx';
@@ -93,7 +94,12 @@ function hintOf(isSet: boolean): string {
 export function OptionEditorPanel({
   editor,
   fault,
-}: EditorProps & { readonly fault: string | null }) {
+  action,
+}: EditorProps & {
+  readonly fault: string | null;
+  /** What else can be done with it, or cannot yet. */
+  readonly action?: ReactNode;
+}) {
   const { base, drafting, points, save, busy, theirs, giveUp, form } = editor;
   const { errors, isSubmitted } = form.formState;
   const lineFault = points.length < LEAST_POINTS ? 'Draw two points at least.' : undefined;
@@ -116,6 +122,7 @@ export function OptionEditorPanel({
               <KeyCap>Esc</KeyCap>
             </span>
           </Button>
+          {action}
           {faults && (
             <p role="status" className="w-full text-small font-medium text-clay-deep">
               Not saved yet. Mend what is marked.

@@ -1,5 +1,5 @@
 import type { AlignmentDesign } from '../../../../shared/schemas/alignments.ts';
-import { lineOf, type CornerDraft, type Ring } from '../../drawing/drafts/draft.ts';
+import { FIRST_RING, lineOf, type CornerDraft, type Ring } from '../../drawing/drafts/draft.ts';
 import {
   addCorner,
   insertCorner,
@@ -16,11 +16,11 @@ export type LineDraft = CornerDraft & { readonly tool: 'line'; readonly isSet: b
 export const LEAST_POINTS = 2;
 
 export function newLine(): LineDraft {
-  return { tool: 'line', parts: [[[]]], isClosed: false, isSet: false };
+  return { tool: 'line', parts: [[[]]], open: FIRST_RING, isSet: false };
 }
 
 export function lineDraftOf(line: AlignmentDesign['line']): LineDraft {
-  return { tool: 'line', parts: [[line]], isClosed: false, isSet: true };
+  return { tool: 'line', parts: [[line]], open: FIRST_RING, isSet: true };
 }
 
 /** The points as they are sent. */

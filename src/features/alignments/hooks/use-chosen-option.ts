@@ -1,33 +1,47 @@
 import { useQuery } from '@tanstack/react-query';
 import { useSearchParams } from 'react-router-dom';
 import type { AlignmentAnswer } from '../../../../shared/schemas/alignments.ts';
+import type { RunAnswer } from '../../../../shared/schemas/runs.ts';
+import { runsQuery } from '../../runs/api/list-runs.ts';
+import { NO_OPTION, shownOnPlan } from '../../runs/shown-on-plan.ts';
 import { alignmentsQuery } from '../api/list-alignments.ts';
 
-const NAME = 'option';
-/** In the address where no option is to be seen. */
-const NONE = 'none';
+const [OPTION, RUN] = ['option', 'run'];
 
-/** The option that the address names, or the first; and the way to name another, or none. */
-export function useChosenOption(schemeId: string, canRead: boolean) {
+type MayRead = { readonly alignments: boolean; readonly runs: boolean };
+
+/** The option and the run that the address names, or what goes with them; and the way to name others. */
+export function useChosenOption(schemeId: string, mayRead: MayRead) {
   const [search, setSearch] = useSearchParams();
-  const { data } = useQuery({ ...alignmentsQuery(schemeId), enabled: canRead });
-  const named = search.get(NAME);
+  const { data } = useQuery({ ...alignmentsQuery(schemeId), enabled: mayRead.alignments });
+  const listed = useQuery({ ...runsQuery(schemeId), enabled: mayRead.runs });
   const options: readonly AlignmentAnswer[] = data ?? [];
-  const first = options[0] ?? null;
-  const option = named === NONE ? null : (options.find(({ id }) => id === named) ?? first);
+  const runs: readonly RunAnswer[] = listed.data ?? [];
+  // the line stands without its runs, where they do not come
+  const isKnown = data !== undefined && !(mayRead.runs && listed.isPending);
+  const named = { option: search.get(OPTION), run: search.get(RUN) };
+  const shown = shownOnPlan(named, isKnown ? options : [], isKnown ? runs : []);
+
+  function name(what: string, id: string, instead: string): void {
+    setSearch(
+      (now) => {
+        const next = new URLSearchParams(now);
+        next.delete(instead);
+        next.set(what, id);
+        return next;
+      },
+      { replace: true },
+    );
+  }
   return {
-    options,
-    isKnown: data !== undefined,
-    option,
+    ...{ options, runs, isKnown, ...shown },
     choose: (alignmentId: string | null) => {
-      setSearch(
-        (now) => {
-          const next = new URLSearchParams(now);
-          next.set(NAME, alignmentId ?? NONE);
-          return next;
-        },
-        { replace: true },
-      );
+      name(OPTION, alignmentId ?? NO_OPTION, RUN);
+    },
+    chooseRun: (runId: string) => {
+      name(RUN, runId, OPTION);
     },
   };
 }
+
+export type ChosenOption = ReturnType<typeof useChosenOption>;

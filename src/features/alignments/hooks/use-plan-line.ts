@@ -1,5 +1,7 @@
 import { useMemo } from 'react';
+import { centralSurface } from '../../../../shared/assessment/central-surface.ts';
 import { MethodError } from '../../../../shared/method-error.ts';
+import type { AlignmentDesign } from '../../../../shared/schemas/alignments.ts';
 import type { SchemeAnswer } from '../../../../shared/schemas/schemes.ts';
 import type { WordsAt } from '../../map/components/plan-map-props.ts';
 import type { LineShape } from '../../map/map-line.ts';
@@ -7,33 +9,55 @@ import { can } from '../../schemes/can.ts';
 import { cursorWords } from '../cursor-words.ts';
 import { mapDrawingOfLine } from '../map-drawing-of-line.ts';
 import { placeOnLine } from '../place-on-line.ts';
-import { centralSurface, type Case } from '../preview/preview-work.ts';
-import { useChosenOption } from './use-chosen-option.ts';
+import type { Case } from '../preview/preview-work.ts';
+import { useChosenOption, type ChosenOption } from './use-chosen-option.ts';
 import { useLineKeys } from './use-line-keys.ts';
-import { useOptionEditor } from './use-option-editor.ts';
+import { useOptionEditor, type OptionEditor } from './use-option-editor.ts';
 import { useCase, usePreview } from './use-preview.ts';
+import { useRecordedLine, type RecordedLine } from './use-recorded-line.ts';
+import { usePreviewThread } from './use-worked.ts';
 
 function surfaceOf(preview: Case | null) {
   if (preview === null) return null;
   try {
-    return centralSurface(preview);
+    return centralSurface(preview.design, preview.rules);
   } catch (error) {
     if (error instanceof MethodError) return null;
     throw error;
   }
 }
 
+/** What is drawn of the line: what is edited, what a run recorded, or the option as it is. */
+function designOf(
+  { isEditing, design }: OptionEditor,
+  { record, isPending }: RecordedLine,
+  { option, isNamed }: ChosenOption,
+): AlignmentDesign | null {
+  if (isEditing) return design;
+  if (record !== null) return record.design;
+  return isPending && isNamed ? null : (option?.design ?? null);
+}
+
 /** The line on the plan: the option that is chosen or edited, what is seen of it, and its tools. */
 export function usePlanLine(scheme: SchemeAnswer, isBusyElsewhere: boolean) {
   const mayEdit = can(scheme, 'updateAlignments');
-  const chosen = useChosenOption(scheme.id, can(scheme, 'readAlignments'));
+  const chosen = useChosenOption(scheme.id, {
+    alignments: can(scheme, 'readAlignments'),
+    runs: can(scheme, 'readRuns'),
+  });
   const { option, options, choose } = chosen;
   const editor = useOptionEditor(scheme.id, options, ({ id }) => {
     choose(id);
   });
-  const design = editor.isEditing ? editor.design : (option?.design ?? null);
-  const preview = useCase(scheme.id, design);
-  const { drives, contours, fault } = usePreview(design, preview);
+  const recorded = useRecordedLine(scheme.id, chosen, editor.isEditing);
+  const { record, isPending } = recorded;
+  const design = designOf(editor, recorded, chosen);
+  const preview = useCase(scheme.id, design, record?.rules);
+  // contours take their time, and what follows the cursor does not wait for them
+  const thread = usePreviewThread();
+  const estimated = usePreview(design, record === null && !isPending ? preview : null);
+  const { drives, fault } = estimated;
+  const contours = record === null ? estimated.contours : recorded.contours;
   const shapes = useMemo<readonly LineShape[]>(() => [...contours, ...drives], [contours, drives]);
   const surface = useMemo(() => surfaceOf(preview), [preview]);
   const mayBegin = mayEdit && chosen.isKnown && !editor.isEditing && !isBusyElsewhere;
@@ -51,18 +75,22 @@ export function usePlanLine(scheme: SchemeAnswer, isBusyElsewhere: boolean) {
   return {
     ...{
       ...chosen,
+      schemeId: scheme.id,
       mayEdit,
       mayBegin,
       isBusyElsewhere,
       editor,
+      recorded,
       design,
       preview,
+      thread,
       fault,
       shapes,
       edit,
       wordsAt,
     },
-    hasContours: contours.length > 0,
+    /** Settlement is seen that no run recorded. */
+    isPreview: record === null && contours.length > 0,
     draw: () => {
       editor.begin(null, option);
     },

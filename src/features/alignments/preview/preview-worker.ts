@@ -1,5 +1,7 @@
-import { previewWork, type Case } from './preview-work.ts';
+import { createPreviewWork, type Message } from './preview-work.ts';
 
-self.addEventListener('message', ({ data }: MessageEvent<Case>) => {
-  self.postMessage(previewWork(data));
+const work = createPreviewWork();
+
+self.addEventListener('message', ({ data }: MessageEvent<Message>) => {
+  self.postMessage(work(data));
 });
