@@ -1,0 +1,53 @@
+import { bracketCategories, type Bracket } from '../../../shared/assessment/bracket.ts';
+import {
+  LARGEST_VOLUME_LOSS,
+  type Breakpoint,
+} from '../../../shared/assessment/breakpoint-of-wall.ts';
+import type { BracketInput, Sensitivity } from '../../../shared/assessment/sensitivity.ts';
+import { CATEGORIES, type Category } from '../../../shared/damage/categories.ts';
+import type { Range } from '../../../shared/numerics/range.ts';
+import { percentFromRatio } from '../../../shared/units/percent-from-ratio.ts';
+
+const INPUT_WORDS: Readonly<Record<BracketInput, string>> = {
+  volumeLoss: 'volume loss',
+  troughWidth: 'K',
+  eOverG: 'E/G',
+};
+
+function label(category: Category): string {
+  return CATEGORIES[category]?.label ?? '';
+}
+
+/** A strain or volume loss in per cent. */
+export function percentWords(ratio: number, digits: number): string {
+  return `${percentFromRatio(ratio).toFixed(digits).replace('-', '\u2212')}\u00a0%`;
+}
+
+/** The categories of a bracket from the lowest to the highest, as "Category 0 or 1". */
+export function categoriesWords(bracket: Bracket): string {
+  const all = bracketCategories(bracket).flat();
+  const present = CATEGORIES.map(({ category }) => category).filter((one) => all.includes(one));
+  const [lowest = 0] = present;
+  const highest = present.at(-1) ?? lowest;
+  if (present.length < 3) return `Category ${present.map(label).join(' or ')}`;
+  return `Category ${label(lowest)} to ${label(highest)}`;
+}
+
+/** Whether the category holds over the whole range, and what it is sensitive to where it does not. */
+export function settledWords({ settled, input }: Sensitivity): string {
+  if (settled || input === null) return 'Settled: the category holds over the whole range.';
+  return `Sensitive, most of all to ${INPUT_WORDS[input]}.`;
+}
+
+function placeInRange(value: number, { low, central, high }: Range): string {
+  if (value > high) return 'above the high value';
+  if (value > central) return 'above the central value, not above the high';
+  return value > low ? 'not above the central value' : 'not above the low value';
+}
+
+/** Where the wall breaks into the category that leads on, in a sentence. */
+export function breakpointWords(breakpoint: Breakpoint | undefined, volumeLoss: Range): string {
+  if (breakpoint === undefined) return `None below ${percentWords(LARGEST_VOLUME_LOSS, 0)}.`;
+  const place = placeInRange(breakpoint.volumeLoss, volumeLoss);
+  return `Breaks at ${percentWords(breakpoint.volumeLoss, 2)}: ${place}.`;
+}
