@@ -1,3 +1,5 @@
+import { spawn } from 'node:child_process';
+import { once } from 'node:events';
 import { existsSync, readFileSync, rmSync } from 'node:fs';
 import path from 'node:path';
 import { installPackages, requireNode, root } from './packages.mjs';
@@ -18,16 +20,16 @@ async function testsCounted(more) {
   return { passed, failed: faultOutside ? 1 : failed };
 }
 
-/** What the tests need besides packages of npm. */
-async function installPrograms() {
-  const { CHROMIUM, installDebian, POPPLER, POSTGRESQL } = await import('./start/debian.mjs');
-  const { withSentences } = await import('./start/refusal.mjs');
-  await withSentences(() => installDebian(POSTGRESQL, CHROMIUM, POPPLER));
-}
-
 requireNode();
+// what the tests need besides packages of npm comes meanwhile
+const programs = spawn(process.execPath, ['scripts/start/test-programs.mjs'], {
+  cwd: root,
+  stdio: 'inherit',
+});
+const programsEnd = once(programs, 'exit');
 installPackages();
-await installPrograms();
+const [status] = await programsEnd;
+if (status !== 0) process.exit(1);
 const more = process.argv.slice(2);
 const total = { passed: 0, failed: 0 };
 
@@ -48,11 +50,18 @@ async function checkLane(...tools) {
   }
 }
 
-// linting takes as long as all other checks together, and there are two processors
-if (more.length === 0)
-  await Promise.all([checkLane(LINT), checkLane(TYPES, FORMAT, UNUSED, BUILD)]);
-console.log(`\n== ${TESTS.title}`);
-const start = performance.now();
-count(TESTS, start, await testsCounted(more));
+async function testLane() {
+  console.log(`\n== ${TESTS.title}`);
+  const start = performance.now();
+  count(TESTS, start, await testsCounted(more));
+}
+
+async function quickLane() {
+  await checkLane(TYPES, FORMAT, UNUSED, BUILD);
+  await testLane();
+}
+
+// there are two processors, and linting takes longer than the other checks: tests begin beside it
+await (more.length === 0 ? Promise.all([checkLane(LINT), quickLane()]) : testLane());
 console.log(`\n${total.passed} passed, ${total.failed} failed`);
 process.exitCode = total.failed === 0 ? 0 : 1;

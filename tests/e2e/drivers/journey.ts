@@ -1,5 +1,6 @@
 import { chromium, type Browser } from 'playwright-core';
 import { expect, test } from 'vitest';
+import { takeDemo } from './take-demo.ts';
 import { newVisitor, type Size, type Visitor } from './visitor.ts';
 
 const FLAGS = [
@@ -15,6 +16,8 @@ const FLAGS = [
 ];
 
 type Stage = {
+  /** The address of the demo that the file has to itself. */
+  readonly demo: string;
   readonly browser: Browser;
   /** A new visitor; whatever goes wrong in their window fails the journey. */
   readonly visit: (size?: Size) => Promise<Visitor>;
@@ -22,6 +25,14 @@ type Stage = {
 
 /** A test that goes through the application in Chromium, as people do. */
 export const journey = test.extend<Stage>({
+  demo: [
+    async ({}, use) => {
+      const { address, giveBack } = takeDemo();
+      await use(address);
+      giveBack();
+    },
+    { scope: 'file' },
+  ],
   browser: [
     async ({}, use) => {
       const browser = await chromium.launch({ executablePath: '/usr/bin/chromium', args: FLAGS });
@@ -30,10 +41,10 @@ export const journey = test.extend<Stage>({
     },
     { scope: 'file' },
   ],
-  visit: async ({ browser }, use) => {
+  visit: async ({ browser, demo }, use) => {
     const visitors: Visitor[] = [];
     await use(async (size) => {
-      const visitor = await newVisitor(browser, size);
+      const visitor = await newVisitor(browser, demo, size);
       visitors.push(visitor);
       return visitor;
     });

@@ -1,4 +1,5 @@
 import type { Locator } from 'playwright-core';
+import { expect } from 'vitest';
 import { openScheme } from './schemes.ts';
 import type { Visitor } from './visitor.ts';
 
@@ -48,11 +49,20 @@ export function factOf({ page }: Visitor, label: string): Promise<string | null>
   return page.getByRole('term').filter({ hasText: label }).locator('..').textContent();
 }
 
+/** Waits until the middle of the map looks otherwise than in a picture of it. */
+export async function middleChanges(visitor: Visitor, picture: string): Promise<void> {
+  await expect.poll(() => middleOf(visitor), { timeout: PATIENCE_MS }).not.toBe(picture);
+}
+
 /** A picture of the middle of the map, to see whether something there changed. */
 export async function middleOf(visitor: Visitor): Promise<string> {
   const box = await mapOf(visitor).boundingBox();
   if (box === null) throw new Error('The map is not to be seen.');
   const [x, y] = [box.x + box.width / 2 - 60, box.y + box.height / 2 - 60];
+  // what was changed before is painted in the next frame, and seen in the one after
+  await visitor.page.evaluate(async () => {
+    for (let frame = 0; frame < 2; frame += 1) await new Promise(requestAnimationFrame);
+  });
   const picture = await visitor.page.screenshot({ clip: { x, y, width: 120, height: 120 } });
   return picture.toString('base64');
 }

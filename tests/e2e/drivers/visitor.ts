@@ -1,5 +1,4 @@
 import type { Browser, ConsoleMessage, Page, Request } from 'playwright-core';
-import { inject } from 'vitest';
 
 export type Visitor = {
   readonly page: Page;
@@ -12,7 +11,7 @@ export type Visitor = {
   readonly leave: () => Promise<void>;
 };
 
-const PATIENCE_MS = 15_000;
+const PATIENCE_MS = 60_000;
 
 export type Size = { readonly width: number; readonly height: number };
 export const DESK: Size = { width: 1280, height: 800 };
@@ -34,9 +33,9 @@ function watch(page: Page, faults: string[]): void {
 }
 
 /** Somebody with a browser window of their own, not signed in. */
-export async function newVisitor(browser: Browser, size = DESK): Promise<Visitor> {
+export async function newVisitor(browser: Browser, baseURL: string, size = DESK): Promise<Visitor> {
   const context = await browser.newContext({
-    baseURL: inject('demo').address,
+    baseURL,
     viewport: size,
     locale: 'en-GB',
     reducedMotion: 'reduce',

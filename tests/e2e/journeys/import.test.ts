@@ -72,7 +72,7 @@ describe('an import', () => {
       'Q-11': { floors: '6' },
     });
     await sendFile(assessor, scheme, 'town-later.geojson', later);
-    await page.getByText(/^Remembered/).waitFor();
+    await page.getByText(/^As chosen on /).waitFor();
     expect(await countOf(assessor, 'changed')).toBe('3');
     expect(await countOf(assessor, 'to settle')).toBe('1');
     await page.getByText('Settle the building that changed here and in the file.').waitFor();

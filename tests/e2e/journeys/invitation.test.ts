@@ -8,10 +8,10 @@ import { signInAs, signInWith, signOut } from '../drivers/sign-in.ts';
 const PASSWORD = 'a lantern on the mole';
 
 for (const [role, screens] of [
-  ['Designer', ['Plan', 'Register', 'Settings']],
-  ['Assessor', ['Plan', 'Register', 'Settings']],
-  ['Witness', ['Plan', 'Register', 'Settings']],
-  ['Owner', ['Description']],
+  ['Designer', ['Plan', 'Register', 'Settings', 'Method']],
+  ['Assessor', ['Plan', 'Register', 'Settings', 'Method']],
+  ['Witness', ['Plan', 'Register', 'Settings', 'Method']],
+  ['Owner', ['Description', 'Method']],
 ] as const) {
   const email = `new-${role.toLowerCase()}@example.org`;
   journey(

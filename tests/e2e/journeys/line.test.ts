@@ -1,7 +1,7 @@
 import { expect } from 'vitest';
 import { axeFaults } from '../drivers/axe.ts';
 import { journey } from '../drivers/journey.ts';
-import { mapIsStill, mapOf, middleOf, openPlan } from '../drivers/plan.ts';
+import { mapIsStill, mapOf, middleChanges, middleOf, openPlan } from '../drivers/plan.ts';
 import { signInAs } from '../drivers/sign-in.ts';
 import type { Visitor } from '../drivers/visitor.ts';
 
@@ -56,13 +56,31 @@ async function drawLine(visitor: Visitor): Promise<void> {
   expect(await axeFaults(page)).toEqual([]);
 }
 
+/** Reads the section under the map, sends it along the line and reads it again. */
+async function readSection({ page }: Visitor): Promise<void> {
+  const strip = page.getByRole('region', { name: 'Section' });
+  const figures =
+    /scale 1 to \d+, settlement drawn \d+ times\. Largest settlement \d+\.\d mm central/;
+  await strip.getByRole('img', { name: figures }).waitFor();
+  await strip.getByLabel('at chainage').fill('0+200');
+  await page.keyboard.press('Enter');
+  await strip.getByRole('img', { name: /^Section across the line at 0\+200,/ }).waitFor();
+  await strip.getByRole('heading', { name: 'Section' }).click();
+  await page.keyboard.press('.');
+  await strip.getByRole('img', { name: /^Section across the line at 0\+205,/ }).waitFor();
+  await strip.getByRole('button', { name: 'Along' }).click();
+  await strip.getByRole('img', { name: /height drawn \d+ times length\. Largest/ }).waitFor();
+  expect(await axeFaults(page)).toEqual([]);
+  await strip.getByRole('button', { name: 'Across' }).click();
+}
+
 journey('a line is drawn, shows its settlement, and two who change it meet', async ({ visit }) => {
   const designer = await visit();
   const { page } = designer;
   await signInAs(designer, 'designer');
   await openPlan(designer);
-  await page.getByText(PREVIEW).waitFor();
   await drawLine(designer);
+  await readSection(designer);
 
   const other = await visit();
   await signInAs(other, 'designer');
@@ -98,7 +116,7 @@ journey('a line is drawn, shows its settlement, and two who change it meet', asy
   await page.getByRole('button', { name: 'No option', exact: true }).click();
   await page.getByText('Nothing worked out yet').waitFor();
   await mapIsStill(designer);
-  expect(await middleOf(designer)).not.toBe(seen);
+  await middleChanges(designer, seen);
 
   await openOption(designer, 'Straight on');
   await page.getByRole('button', { name: 'Delete', exact: true }).click();

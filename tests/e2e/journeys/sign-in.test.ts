@@ -7,9 +7,9 @@ describe('signing in', () => {
   journey('as the administrator opens people, audit and mailbox', async ({ visit }) => {
     const visitor = await visit();
     await signInAs(visitor, 'administrator');
-    expect(await tabs(visitor)).toEqual(['Schemes', 'People', 'Audit', 'Mailbox']);
+    expect(await tabs(visitor)).toEqual(['Schemes', 'People', 'Audit', 'Mailbox', 'Method']);
     await openScheme(visitor);
-    expect(await tabs(visitor)).toEqual(['Plan', 'Register', 'Settings']);
+    expect(await tabs(visitor)).toEqual(['Plan', 'Register', 'Settings', 'Method']);
   });
 
   for (const role of ['designer', 'assessor', 'second-assessor', 'witness'] as const) {
@@ -17,7 +17,7 @@ describe('signing in', () => {
       const visitor = await visit();
       await signInAs(visitor, role);
       await visitor.page.getByRole('link', { name: DEMO_SCHEME }).waitFor();
-      expect(await visitor.page.getByRole('navigation', { name: 'Screens' }).count()).toBe(0);
+      expect(await tabs(visitor)).toEqual(['Schemes', 'Method']);
       await openScheme(visitor);
       expect(visitor.page.url()).toMatch(/\/plan$/);
     });
@@ -27,7 +27,7 @@ describe('signing in', () => {
     const visitor = await visit();
     await signInAs(visitor, 'owner');
     const scheme = await openScheme(visitor);
-    expect(await tabs(visitor)).toEqual(['Description']);
+    expect(await tabs(visitor)).toEqual(['Description', 'Method']);
     const answer = await visitor.page.request.get(`/api${scheme}/buildings?search=B0001`);
     expect(answer.status()).toBe(403);
   });

@@ -24,7 +24,7 @@ async function answers({ address }: RunningApp): Promise<boolean> {
 
 beforeAll(async () => {
   app = await startApp(folder);
-}, 90_000);
+});
 
 afterAll(async () => {
   await stopApp(app);
@@ -67,16 +67,16 @@ describe('npm start', () => {
     app = await startApp(folder);
     expect(await answers(app)).toBe(true);
     expect(app.output()).toMatch(/Demo data\s+… there/);
-  }, 60_000);
+  });
 
   it('leaves no server behind when it is killed, and knows its own lock for a dead one', async () => {
     const [server = 0] = childrenOf(pidOf(app));
     app.process.kill('SIGKILL');
     await app.ended;
-    await expect.poll(() => existsSync(`/proc/${server}`), { timeout: 10_000 }).toBe(false);
+    await expect.poll(() => existsSync(`/proc/${server}`), { timeout: 60_000 }).toBe(false);
     app = await startApp(folder);
     expect(await answers(app)).toBe(true);
-  }, 60_000);
+  });
 
   it('stops all that it started', async () => {
     expect(clusterOf(app)).toHaveLength(1);
@@ -84,5 +84,5 @@ describe('npm start', () => {
     expect(await answers(app)).toBe(false);
     expect(clusterOf(app)).toEqual([]);
     expect(existsSync(path.join(folder, 'start.lock'))).toBe(false);
-  }, 30_000);
+  });
 });
