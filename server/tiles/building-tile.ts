@@ -4,9 +4,8 @@ import { findBuildingsInBox, type DrawnBuilding } from '../models/find-buildings
 import { encodeTile } from './encode-tile.ts';
 import { tileBounds, type TilePlace } from './tile-bounds.ts';
 
-/** From here on names of buildings are written on the map, and further in their references. */
-const NAMES_FROM = 16;
-const REFERENCES_FROM = 17;
+/** From here on names, references and numbers of buildings are written on the map. */
+const LABELS_FROM = 16;
 
 function propertiesOf({ reference, name }: DrawnBuilding): Record<string, string> {
   return name === null ? { reference } : { reference, name };
@@ -42,8 +41,7 @@ function labelOf(building: DrawnBuilding): Feature {
 }
 
 function labelsOf(buildings: readonly DrawnBuilding[], zoom: number): Feature[] {
-  if (zoom < NAMES_FROM) return [];
-  return buildings.filter(({ name }) => zoom >= REFERENCES_FROM || name !== null).map(labelOf);
+  return zoom < LABELS_FROM ? [] : buildings.map(labelOf);
 }
 
 /**

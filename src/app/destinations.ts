@@ -33,6 +33,9 @@ function asDestinations(links: readonly Link[], note: string): Destination[] {
   return links.map(({ to, label }) => ({ to, title: label, note }));
 }
 
+/** How figures are worked out, for everybody, wherever they are. */
+export const METHOD_LINK: Link = { to: PATHS.method, label: 'Method' };
+
 /** Everywhere that the person can go from anywhere; the scheme at hand comes first. */
 export function destinationsOf(
   person: SignedInPerson,
@@ -46,6 +49,8 @@ export function destinationsOf(
     { to: PATHS.schemes, title: 'Schemes', note: 'what waits for you' },
     ...elsewhere.flatMap((scheme) => asDestinations(schemeLinks(scheme), scheme.name)),
     ...asDestinations(administratorLinks(person), 'administration'),
+    { to: PATHS.method, title: 'Method', note: 'formulas, sources, checks' },
+    { to: PATHS.whatIf, title: 'What-if on one wall', note: 'method' },
     { to: PATHS.account, title: 'Account', note: 'password and sessions' },
   ];
 }

@@ -79,6 +79,10 @@ const ofScheme: RouteObject[] = [
     lazy: async () => ({ Component: (await import('../features/plan/plan-page.tsx')).PlanPage }),
   },
   {
+    path: 'buildings/:buildingId/sheet',
+    lazy: async () => ({ Component: (await import('../features/sheet/sheet-page.tsx')).SheetPage }),
+  },
+  {
     path: 'register/imports',
     lazy: async () => ({ Component: (await import('./routes/imports.tsx')).ImportsPage }),
   },
@@ -107,6 +111,18 @@ const outsideOfSchemes: RouteObject[] = [
   {
     path: PATHS.account,
     lazy: async () => ({ Component: (await import('./routes/account.tsx')).AccountPage }),
+  },
+  {
+    path: PATHS.method,
+    lazy: async () => ({
+      Component: (await import('../features/method/method-page.tsx')).MethodPage,
+    }),
+  },
+  {
+    path: PATHS.whatIf,
+    lazy: async () => ({
+      Component: (await import('../features/method/what-if-page.tsx')).WhatIfPage,
+    }),
   },
   { Component: AdministratorsOnly, children: forAdministrators },
   { path: '*', Component: NotFoundPage },

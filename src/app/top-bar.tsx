@@ -13,13 +13,13 @@ import { useSignOut } from '../features/session/api/sign-out.ts';
 import { usePerson } from '../features/session/person-context.ts';
 import { useHotkeys } from '../hooks/use-hotkeys.ts';
 import { useKeysAtHand } from '../hooks/use-keys-at-hand.ts';
-import { administratorLinks, schemeLinks } from './destinations.ts';
+import { administratorLinks, METHOD_LINK, schemeLinks } from './destinations.ts';
 import { GoAnywhere } from './go-anywhere.tsx';
 import { KEYS } from './keys.ts';
 
 function tabsOf(scheme: SchemeAnswer | undefined, links: readonly Tab[]): readonly Tab[] {
-  if (scheme !== undefined) return schemeLinks(scheme);
-  return links.length === 0 ? [] : [{ to: PATHS.schemes, label: 'Schemes', end: true }, ...links];
+  if (scheme !== undefined) return [...schemeLinks(scheme), METHOD_LINK];
+  return [{ to: PATHS.schemes, label: 'Schemes', end: true }, ...links, METHOD_LINK];
 }
 
 /** Whether a screen does something of its own with keys that otherwise work everywhere. */

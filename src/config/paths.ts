@@ -9,6 +9,8 @@ export const PATHS = {
   audit: '/audit',
   mailbox: '/mailbox',
   account: '/account',
+  method: '/method',
+  whatIf: '/method/what-if',
 } as const;
 
 /** The parts of a scheme's settings, by the end of their address. */
@@ -31,6 +33,12 @@ export function planPath(schemeId: string): string {
 /** The plan with a building selected. */
 export function buildingPath(schemeId: string, buildingId: number): string {
   return `${planPath(schemeId)}?building=${buildingId}`;
+}
+
+/** One building in one run; the newest complete one where none is named. */
+export function sheetPath(schemeId: string, buildingId: number, runId?: string): string {
+  const path = `${schemePath(schemeId)}/buildings/${buildingId}/sheet`;
+  return runId === undefined ? path : `${path}?run=${runId}`;
 }
 
 export function registerPath(schemeId: string): string {

@@ -11,6 +11,7 @@ const SHORT_DAY = new Intl.DateTimeFormat('en-GB', {
   year: 'numeric',
 });
 
+const SHORT_DAY_OF_YEAR = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'short' });
 const DAY_OF_YEAR = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'long' });
 const DAY_OF_WEEK = new Intl.DateTimeFormat('en-GB', { weekday: 'long' });
 const ONE_DAY = 86_400_000;
@@ -50,4 +51,11 @@ export function formatWeekday(at: string | Date): string {
 export function formatMoment(at: string | Date): string {
   const moment = new Date(at);
   return `${SHORT_DAY.format(moment)}, ${TIME.format(moment)}`;
+}
+
+/** As "1 Dec, 14:05", or in another year "1 Dec 2026, 14:05". */
+export function formatShortMoment(at: string | Date, now: Date): string {
+  const moment = new Date(at);
+  if (moment.getFullYear() !== now.getFullYear()) return formatMoment(at);
+  return `${SHORT_DAY_OF_YEAR.format(moment)}, ${TIME.format(moment)}`;
 }

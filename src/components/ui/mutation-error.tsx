@@ -1,5 +1,5 @@
 import { useEffect, useRef, type ReactNode } from 'react';
-import { ApiError } from '../../lib/api-error.ts';
+import { ApiError, type FieldFault } from '../../lib/api-error.ts';
 import { ErrorNote } from './error-note.tsx';
 
 type MutationErrorProps = {
@@ -13,6 +13,33 @@ type MutationErrorProps = {
   /** What can be done about it. */
   readonly action?: ReactNode;
 };
+
+/** More are read line by line. */
+const MOST_IN_A_SENTENCE = 2;
+
+type FaultListProps = Pick<MutationErrorProps, 'action'> & {
+  readonly faults: readonly FieldFault[];
+};
+
+/** What is wrong line by line, then what can be done about it. */
+function FaultList({ faults, action }: FaultListProps) {
+  return (
+    <>
+      <ul
+        aria-label="What is wrong"
+        tabIndex={0}
+        className="max-h-60 overflow-auto border-t border-rule text-small"
+      >
+        {faults.map(({ path, message }, k) => (
+          <li key={`${path} ${k}`} className="border-b border-hairline py-1">
+            {message}
+          </li>
+        ))}
+      </ul>
+      {action !== undefined && <div className="mt-2">{action}</div>}
+    </>
+  );
+}
 
 function leftOver(error: Error | null, shown: readonly string[]) {
   if (!(error instanceof ApiError)) return { left: [], isAllShown: false };
@@ -34,6 +61,14 @@ export function MutationError(props: MutationErrorProps) {
   if (error === null || error.name === 'AbortError') return null;
   if (!(error instanceof ApiError)) return <ErrorNote ref={note} failed={failed} />;
   if (isAllShown) return <ErrorNote failed={failed} stands="Mend what is marked." />;
-  const words = [stands ?? error.message, ...left.map(({ message }) => message)];
-  return <ErrorNote ref={note} failed={failed} stands={words.join(' ')} action={action} />;
+  const isList = left.length > MOST_IN_A_SENTENCE;
+  const words = [stands ?? error.message, ...(isList ? [] : left.map(({ message }) => message))];
+  return (
+    <ErrorNote
+      ref={note}
+      failed={failed}
+      stands={words.join(' ')}
+      action={isList ? <FaultList faults={left} action={action} /> : action}
+    />
+  );
 }

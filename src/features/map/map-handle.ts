@@ -7,7 +7,10 @@ export type MapHandle = {
   readonly fit: (bounds: CameraBounds) => void;
   readonly zoomBy: (steps: number) => void;
   readonly bringIntoView: (bounds: CameraBounds) => void;
-  readonly buildingsInView: () => number[];
+  /** Null while the map has not drawn all that it was asked to show. */
+  readonly buildingsInView: () => readonly number[] | null;
+  /** Tells once the map has drawn all; what it returns stops waiting. */
+  readonly onceStill: (then: () => void) => () => void;
   /** What piece of ground is seen. */
   readonly view: () => CameraBounds;
 };
@@ -23,7 +26,15 @@ export function handleOfMap(map: MapLibreMap): MapHandle {
     bringIntoView: (bounds) => {
       bringIntoView(map, bounds);
     },
-    buildingsInView: () => buildingsInView(map),
+    buildingsInView: () => (map.loaded() ? buildingsInView(map) : null),
+    onceStill: (then) => {
+      void map.once('idle', then);
+      // without a frame the map never says that it is done
+      map.triggerRepaint();
+      return () => {
+        map.off('idle', then);
+      };
+    },
     view: () => viewOf(map),
   };
 }

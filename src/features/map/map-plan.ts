@@ -22,6 +22,8 @@ export type MapPlan = {
   readonly rows?: TileSet;
   /** Of the buildings only these are meant; the others are faint. Without it, all of them are meant. */
   readonly meant?: ReadonlySet<number>;
+  /** The numbers of the colours that buildings take; those that are not in it stay plain. */
+  readonly shades?: ReadonlyMap<number, number>;
   /** Whether a designed line and its settlement can stand on it. */
   readonly hasLine?: boolean;
   /** Whether something can be drawn on it. */

@@ -2,6 +2,7 @@ import { Map as MapLibreMap, setWorkerUrl } from 'maplibre-gl';
 import 'maplibre-gl/dist/maplibre-gl.css';
 import workerUrl from 'maplibre-gl/dist/maplibre-gl-worker.mjs?worker&url';
 import { fitBounds, type CameraBounds } from './camera.ts';
+import { addDamageImages } from './style/damage-images.ts';
 import { addHatches } from './style/hatch-images.ts';
 import { loadLabelFonts } from './load-label-fonts.ts';
 
@@ -49,5 +50,6 @@ export async function openMap(start: MapStart, signal: AbortSignal): Promise<Map
   await map.once('style.load');
   signal.throwIfAborted();
   addHatches(map);
+  addDamageImages(map);
   return map;
 }

@@ -1,5 +1,5 @@
-import type { Map as MapLibreMap, MapMouseEvent } from 'maplibre-gl';
-import { useEffect, useState } from 'react';
+import type { Map as MapLibreMap } from 'maplibre-gl';
+import { useCursor } from '../hooks/use-cursor.ts';
 import { formatPlace } from '../place/format-place.ts';
 import type { GridPlace, GridProjection } from '../place/grid-projection.ts';
 import type { WordsAt } from './plan-map-props.ts';
@@ -13,32 +13,12 @@ type CursorPlaceProps = {
   readonly wordsAt: WordsAt | undefined;
 };
 
-type Pixel = readonly [x: number, y: number];
-
 const OUTSIDE = 'outside the grid';
 const SEPARATOR = '\n';
 
 function words(place: GridPlace | null, more: WordsAt | undefined): string {
   if (place === null) return OUTSIDE;
   return [...formatPlace(place), ...(more?.(place) ?? [])].join(SEPARATOR);
-}
-
-/** Where the cursor is on the map; null while it is elsewhere. */
-function useCursor(map: MapLibreMap): Pixel | null {
-  const [pixel, setPixel] = useState<Pixel | null>(null);
-  useEffect(() => {
-    const moves = map.on('mousemove', ({ point }: MapMouseEvent) => {
-      setPixel([point.x, point.y]);
-    });
-    const leaves = map.on('mouseout', () => {
-      setPixel(null);
-    });
-    return () => {
-      moves.unsubscribe();
-      leaves.unsubscribe();
-    };
-  }, [map]);
-  return pixel;
 }
 
 /** Easting and northing under the cursor, or in the middle of the map where there is none. */

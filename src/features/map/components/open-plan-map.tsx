@@ -3,6 +3,7 @@ import { useEffect, useEffectEvent, useLayoutEffect, useMemo, useState } from 'r
 import { installArrowKeys } from '../arrow-keys.ts';
 import { createMapController, type MapController } from '../controller/map-controller.ts';
 import { portOfMap } from '../controller/port-of-map.ts';
+import { useCursorPlace } from '../hooks/use-cursor-place.ts';
 import { useDrawing } from '../hooks/use-drawing.ts';
 import { useDrawnLine } from '../hooks/use-drawn-line.ts';
 import { useGridCrosses } from '../hooks/use-grid-crosses.ts';
@@ -12,6 +13,7 @@ import { handleOfMap } from '../map-handle.ts';
 import type { BuildingMarks, MapPlan } from '../map-plan.ts';
 import { createGridProjection } from '../place/grid-projection.ts';
 import { sourcesOfPlan } from '../style/sources-of-plan.ts';
+import { BuildingTip } from './building-tip.tsx';
 import { CursorPlace } from './cursor-place.tsx';
 import { MapButtons } from './map-buttons.tsx';
 import { MapGaps } from './map-gaps.tsx';
@@ -49,7 +51,8 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
   const handle = useMemo(() => handleOfMap(map), [map]);
   const giveHandle = useEffectEvent(props.onHandle);
   useGridCrosses(map, controller, projection);
-  useDrawnLine(controller, projection, props.line);
+  useDrawnLine(controller, projection, props.line, props.section);
+  useCursorPlace(map, projection, props.onCursor);
   useDrawing(map, controller, projection, drawing);
   useMode(map, isSelecting ? 'select' : null, { select: onSelect, hover: setHovered });
   useEffect(() => installArrowKeys(map), [map]);
@@ -79,6 +82,7 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
       <div className="absolute bottom-3 left-3 max-w-[calc(100%-24px)]">
         <CursorPlace map={map} projection={projection} wordsAt={props.wordsAt} />
       </div>
+      <BuildingTip map={map} lines={hovered === null ? null : (props.tipOf?.(hovered) ?? null)} />
       <ZoomHint map={map} plan={plan} />
       {hasGaps && (
         <div className="absolute right-3 bottom-12 left-3 flex justify-center">

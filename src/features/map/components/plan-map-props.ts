@@ -1,7 +1,7 @@
 import type { CameraBounds } from '../camera.ts';
 import type { MapDrawing } from '../map-drawing.ts';
 import type { MapHandle } from '../map-handle.ts';
-import type { LineShape } from '../map-line.ts';
+import type { LineShape, SectionShape } from '../map-line.ts';
 import type { MapPlan } from '../map-plan.ts';
 import type { GridPlace } from '../place/grid-projection.ts';
 
@@ -22,8 +22,14 @@ export type PlanMapProps = {
   readonly drawing?: MapDrawing | null;
   /** A designed line and its settlement. */
   readonly line?: readonly LineShape[];
+  /** Where a section across the line is looked at. */
+  readonly section?: readonly SectionShape[];
   /** What else is said of the place under the cursor. */
   readonly wordsAt?: WordsAt;
+  /** What is said beside the cursor of the building under it. */
+  readonly tipOf?: ((buildingId: number) => readonly string[]) | undefined;
+  /** The cursor is over a place of the grid. When it leaves the map, nothing is told. */
+  readonly onCursor?: (place: GridPlace) => void;
   readonly onSelect: (buildingId: number | null) => void;
   /** Gives the page its way to move the map, and null when the map goes. */
   readonly onHandle: (handle: MapHandle | null) => void;

@@ -11,6 +11,7 @@ import { sourcesOfPlan, type SourcesByName } from '../style/sources-of-plan.ts';
 import { layerChanges, type LayerChange } from './layer-changes.ts';
 import type { MapPort } from './map-port.ts';
 import { createMeantBuildings } from './meant-buildings.ts';
+import { createShadedBuildings } from './shaded-buildings.ts';
 import { sourceChanges } from './source-changes.ts';
 
 export type MapController = {
@@ -22,6 +23,8 @@ export type MapController = {
   readonly drawGrid: (crosses: GeoJSON.FeatureCollection) => void;
   /** Draws the designed line and its settlement. */
   readonly drawLine: (shapes: GeoJSON.FeatureCollection) => void;
+  /** Draws the mark of a section across the line. */
+  readonly drawSection: (shapes: GeoJSON.FeatureCollection) => void;
   /** Draws what is being drawn by hand. */
   readonly drawDraft: (shapes: GeoJSON.FeatureCollection) => void;
 };
@@ -58,12 +61,19 @@ function carryOut(map: MapPort, change: LayerChange): void {
   }
 }
 
+function drawingInto(map: MapPort, name: string): (shapes: GeoJSON.FeatureCollection) => void {
+  return (shapes) => {
+    map.setData(name, shapes);
+  };
+}
+
 /** Keeps a map as the plans ask, and sets only what changed from one to the next. */
 export function createMapController(map: MapPort): MapController {
   let sources: SourcesByName = {};
   let layers: readonly LayerSpecification[] = [];
   let marks = NO_MARKS;
   const showMeant = createMeantBuildings(map);
+  const shade = createShadedBuildings(map);
 
   function setMark(name: keyof BuildingMarks, id: number | null, value: boolean): void {
     const source = [SOURCES.rows, SOURCES.buildings].find((one) => sources[one] !== undefined);
@@ -89,10 +99,9 @@ export function createMapController(map: MapPort): MapController {
       setMark('hovered', marks.hovered, true);
     }
     if (sources[SOURCES.buildings] !== undefined) {
-      showMeant(
-        plan.meant,
-        added.some(([name]) => name === SOURCES.buildings),
-      );
+      const isNew = added.some(([name]) => name === SOURCES.buildings);
+      showMeant(plan.meant, isNew);
+      shade(plan.shades, isNew);
     }
   }
 
@@ -108,14 +117,9 @@ export function createMapController(map: MapPort): MapController {
   return {
     show,
     mark,
-    drawGrid: (crosses) => {
-      map.setData(SOURCES.grid, crosses);
-    },
-    drawLine: (shapes) => {
-      map.setData(SOURCES.line, shapes);
-    },
-    drawDraft: (shapes) => {
-      map.setData(SOURCES.draft, shapes);
-    },
+    drawGrid: drawingInto(map, SOURCES.grid),
+    drawLine: drawingInto(map, SOURCES.line),
+    drawSection: drawingInto(map, SOURCES.section),
+    drawDraft: drawingInto(map, SOURCES.draft),
   };
 }

@@ -18,6 +18,9 @@ export type MapPort = {
   setLayoutProperty(layer: string, name: string, value: unknown): unknown;
   setFilter(layer: string, filter: FilterSpecification | null): unknown;
   setLayerZoomRange(layer: string, least: number, most: number): unknown;
-  setFeatureState(building: BuildingKey, state: Readonly<Record<string, boolean>>): unknown;
+  setFeatureState(
+    building: BuildingKey,
+    state: Readonly<Record<string, boolean | number | null>>,
+  ): unknown;
   setData(name: string, data: GeoJSON.FeatureCollection): unknown;
 };

@@ -15,3 +15,11 @@ export function buildingAt(map: MapLibreMap, { x, y }: Point, reach = 0): number
   const id = found[0]?.id;
   return typeof id === 'number' ? id : null;
 }
+
+/** Reference and name of the building at a place of the map's frame, as its tile has them. */
+export function buildingNamedAt(map: MapLibreMap, [x, y]: readonly [number, number]): string {
+  if (map.getLayer(BUILDINGS_LAYER) === undefined) return '';
+  const [found] = map.queryRenderedFeatures([x, y], { layers: [BUILDINGS_LAYER] });
+  const words: unknown[] = [found?.properties.reference, found?.properties.name];
+  return words.filter((word) => typeof word === 'string').join(' ');
+}

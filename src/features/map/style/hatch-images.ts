@@ -4,7 +4,7 @@ type Hatch = NonNullable<RowLook['hatch']>;
 
 /** Pixels of one tile, as many as fit the stroke's pitch twice on screens of double density. */
 const SIZE = 16;
-const PIXEL_RATIO = 2;
+export const PIXEL_RATIO = 2;
 const STROKE = 2;
 
 /** A square of pixels, four bytes each, as the map takes it. */
@@ -19,7 +19,8 @@ export function hatchName(hatch: Hatch, colour: string): string {
   return `hatch-${hatch}-${colour}`;
 }
 
-function channels(colour: string): [number, number, number] {
+/** Red, green and blue of a colour as `#16212e`. */
+export function channels(colour: string): [number, number, number] {
   const value = Number.parseInt(colour.slice(1), 16);
   return [(value >> 16) & 255, (value >> 8) & 255, value & 255];
 }
@@ -42,7 +43,7 @@ export function hatchImage(hatch: Hatch, colour: string): HatchImage {
   return { width: SIZE, height: SIZE, data };
 }
 
-type ImageTaker = {
+export type ImageTaker = {
   addImage(name: string, image: HatchImage, options: { pixelRatio: number }): unknown;
 };
 

@@ -6,10 +6,11 @@ import { draftLayers } from './draft-layers.ts';
 import { gridLayers } from './grid-layers.ts';
 import { groundLayers, harbourLayers } from './ground-layers.ts';
 import { labelLayers } from './label-layers.ts';
-import { lineLabelLayers, lineLayers } from './line-layers.ts';
+import { bandLayers, lineLabelLayers, lineLayers } from './line-layers.ts';
 import { MAP_COLOURS } from './map-colours.ts';
 import { meantLayers } from './meant-layers.ts';
 import { faintLayers, rowLayers } from './row-layers.ts';
+import { shadeLabelLayers, withShades } from './shade-layers.ts';
 import { bridgeLayers, streetLayers, treeLayers } from './street-layers.ts';
 
 /** Paper; round the demo town, which is an island, the colour of the sea. */
@@ -29,17 +30,20 @@ function basemapLayers(latitude: number): LayerSpecification[] {
   ];
 }
 
-/** Buildings and their names: plain, faint under the rows of a file, or only some of them plain. */
+/** Buildings and their names: plain, faint under the rows of a file, only some of them plain, or coloured. */
 function ofBuildings({
   buildings,
   rows,
   meant,
+  shades,
+  latitude,
 }: MapPlan): Record<'shapes' | 'names', LayerSpecification[]> {
   if (buildings === null) return { shapes: [], names: [] };
   const [shapes, names] = [buildingLayers(), buildingLabelLayers()];
   if (rows !== undefined) return { shapes: faintLayers(shapes), names: [] };
   if (meant !== undefined) return { shapes: meantLayers(shapes), names: meantLayers(names) };
-  return { shapes, names };
+  if (shades === undefined) return { shapes, names };
+  return { shapes: withShades(shapes), names: [...names, ...shadeLabelLayers(latitude)] };
 }
 
 /** Every layer of what the plan shows, from the ground up. */
@@ -50,6 +54,7 @@ export function layersOfPlan(plan: MapPlan): LayerSpecification[] {
     [paper(plan)],
     basemap !== null && basemapLayers(latitude),
     background !== null && backgroundLayers(latitude),
+    plan.hasLine === true && bandLayers(),
     shapes,
     rows !== undefined && rowLayers(),
     plan.hasLine === true && lineLayers(),

@@ -1,16 +1,17 @@
 import type { ExpressionSpecification, LayerSpecification } from 'maplibre-gl';
-import type { LineShape } from '../map-line.ts';
+import type { LineShape, SectionShape } from '../map-line.ts';
 import { LABEL_FONTS } from './label-fonts.ts';
 import { MAP_COLOURS } from './map-colours.ts';
 import { SOURCES } from './source-names.ts';
 
 const LINE = { source: SOURCES.line } as const;
-const { ink, bandLine, paperRaised } = MAP_COLOURS;
+const SECTION = { source: SOURCES.section } as const;
+const { ink, bandLine, paperRaised, clay, clayDeep } = MAP_COLOURS;
 const LEVEL: ExpressionSpecification = ['get', 'level'];
 /** In mm: the outermost contour is dashed, the one that people ask for first is drawn heavier. */
 const [OUTERMOST, EMPHASISED] = [1, 10];
 
-function kind(name: LineShape['kind']): ExpressionSpecification {
+function kind(name: (LineShape | SectionShape)['kind']): ExpressionSpecification {
   return ['==', ['get', 'kind'], name];
 }
 
@@ -64,9 +65,32 @@ function drives(): LayerSpecification[] {
   ];
 }
 
-/** Contours of settlement, edges, axes and chainages of a designed line. */
+/** Where settlement reaches the outermost contour, lightly, under the buildings. */
+export function bandLayers(): LayerSpecification[] {
+  return [
+    {
+      id: 'line-band',
+      type: 'fill',
+      ...LINE,
+      filter: kind('band'),
+      paint: { 'fill-color': bandLine, 'fill-opacity': 0.1, 'fill-antialias': false },
+    },
+  ];
+}
+
+/** Contours of settlement, edges, axes and chainages of a designed line, and the mark of a section. */
 export function lineLayers(): LayerSpecification[] {
-  return [...contours(), ...drives()];
+  return [
+    ...contours(),
+    ...drives(),
+    {
+      id: 'section-mark',
+      type: 'line',
+      ...SECTION,
+      filter: kind('mark'),
+      paint: { 'line-color': clay, 'line-width': 1.6 },
+    },
+  ];
 }
 
 /** What is written on them; what meets something else is left out. */
@@ -100,6 +124,22 @@ export function lineLabelLayers(): LayerSpecification[] {
         'text-padding': 3,
       },
       paint: { 'text-color': ink, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
+    },
+    {
+      id: 'section-name',
+      type: 'symbol',
+      ...SECTION,
+      filter: kind('name'),
+      layout: {
+        'text-field': ['get', 'text'],
+        'text-font': LABEL_FONTS.semibold,
+        'text-size': 11,
+        'text-anchor': 'left',
+        'text-offset': [0.6, 0],
+        'text-allow-overlap': true,
+        'text-ignore-placement': true,
+      },
+      paint: { 'text-color': clayDeep, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
     },
   ];
 }

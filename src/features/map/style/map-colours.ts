@@ -22,5 +22,6 @@ export const MAP_COLOURS = {
   select: '#174c9e',
   selectWash: '#dfe8f4',
   clay: '#9e4326',
+  clayDeep: '#7a3019',
   clayWash: '#f3e1d5',
 } as const;

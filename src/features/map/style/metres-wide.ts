@@ -9,6 +9,11 @@ export function pixelsPerMetre(zoom: number, latitude: number): number {
   return (TILE * 2 ** zoom) / (EQUATOR * Math.cos((latitude * Math.PI) / 180));
 }
 
+/** From which zoom on a metre takes so many pixels. */
+export function zoomOfScale(pixels: number, latitude: number): number {
+  return Math.log2((pixels * EQUATOR * Math.cos((latitude * Math.PI) / 180)) / TILE);
+}
+
 /** A width that is true to the ground at every zoom: metres, and pixels that are added to them. */
 export function metresWide(
   metres: number | ExpressionSpecification,

@@ -6,6 +6,7 @@ export const SOURCES = {
   buildings: 'buildings',
   rows: 'rows',
   line: 'line',
+  section: 'section',
   draft: 'draft',
 } as const;
 

@@ -23,7 +23,10 @@ export function sourcesOfPlan(plan: MapPlan): SourcesByName {
   return {
     ...Object.fromEntries(named),
     [SOURCES.grid]: shapesOfOurs(),
-    ...(plan.hasLine === true && { [SOURCES.line]: shapesOfOurs() }),
+    ...(plan.hasLine === true && {
+      [SOURCES.line]: shapesOfOurs(),
+      [SOURCES.section]: shapesOfOurs(),
+    }),
     ...(plan.canDraw === true && { [SOURCES.draft]: shapesOfOurs() }),
   };
 }

@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import { QueryError } from '../../../components/ui/query-error.tsx';
 import type { PlanMapProps } from '../../map/components/plan-map-props.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
@@ -5,19 +6,38 @@ import type { useSchemePlan } from '../hooks/use-scheme-plan.ts';
 import { LazyPlanMap } from './lazy-plan-map.tsx';
 import { MapPause } from './map-pause.tsx';
 
-type MapPaneProps = ReturnType<typeof useSchemePlan> &
-  Pick<PlanMapProps, 'selected' | 'drawing' | 'line' | 'wordsAt' | 'onSelect' | 'onHandle'>;
+export type MapPaneProps = ReturnType<typeof useSchemePlan> &
+  Pick<
+    PlanMapProps,
+    | 'selected'
+    | 'drawing'
+    | 'line'
+    | 'section'
+    | 'wordsAt'
+    | 'tipOf'
+    | 'onCursor'
+    | 'onSelect'
+    | 'onHandle'
+  > & {
+    /** The colours that buildings take by what was found of them; null where nothing was. */
+    readonly shades?: ReadonlyMap<number, number> | null;
+  };
 
 /** The map, or why it is not there. */
-export function MapPane({ ready, error, retry, ...map }: MapPaneProps) {
+export function MapPane({ ready, error, retry, shades = null, ...map }: MapPaneProps) {
   const { name } = useScheme();
-  if (ready !== null) {
+  const bare = ready?.plan;
+  const plan = useMemo(
+    () => (bare === undefined || shades === null ? bare : { ...bare, shades }),
+    [bare, shades],
+  );
+  if (ready !== null && plan !== undefined) {
     return (
       <LazyPlanMap
         {...map}
-        plan={ready.plan}
+        plan={plan}
         label={`Map of ${name}`}
-        home={ready.extent.bounds}
+        home={ready.extent.home}
         gridDefinition={ready.crs.definition}
       />
     );

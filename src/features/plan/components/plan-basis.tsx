@@ -4,12 +4,18 @@ import type { SchemeAnswer } from '../../../../shared/schemas/schemes.ts';
 import { OptionMenu } from '../../alignments/components/option-menu.tsx';
 import { designParts } from '../../alignments/design-words.ts';
 import type { PlanLine } from '../../alignments/hooks/use-plan-line.ts';
+import { RunInputs } from '../../runs/components/run-inputs.tsx';
+import { RunMenu } from '../../runs/components/run-menu.tsx';
+import type { RunView } from '../../runs/hooks/use-run-view.ts';
+import { completeOf } from '../../runs/run-states.ts';
 
 type PlanBasisProps = {
   readonly scheme: SchemeAnswer;
   readonly crs: CrsAnswer | undefined;
   /** The line that is shown; a page without it says nothing of one. */
   readonly line?: PlanLine;
+  /** What of its run is shown. */
+  readonly view?: RunView;
 };
 
 function lineParts(line: PlanLine) {
@@ -19,22 +25,58 @@ function lineParts(line: PlanLine) {
   );
   const menu = options.length > 0 && <OptionMenu key="option" line={line} />;
   const first = name === false ? menu : name;
-  return [...(first === false ? [] : [first]), ...(design === null ? [] : designParts(design))];
+  return [
+    ...(first === false ? [] : [first]),
+    ...runParts(line),
+    ...(design === null ? [] : designParts(design)),
+  ];
 }
 
-/** What the plan rests on: the option of the line and its values, the register and the grid. */
-export function PlanBasis({ scheme, crs, line }: PlanBasisProps) {
+function runParts({ runs, run, recorded, chooseRun, option, schemeId }: PlanLine) {
+  if (completeOf(runs).length === 0 || (run === null && option === null)) return [];
+  const menu = <RunMenu key="run" runs={runs} shown={run} onChoose={chooseRun} />;
+  const { detail } = recorded;
+  return detail === null
+    ? [menu]
+    : [menu, <RunInputs key="inputs" {...{ schemeId }} run={detail} />];
+}
+
+/** Which values are shown, or that nothing here is recorded. */
+function valueShown({ isPreview, recorded }: PlanLine, view: RunView | undefined) {
+  if (isPreview) return <b>Preview, not a run: central settlement</b>;
+  if (recorded.record === null) return 'Nothing worked out yet';
+  if (view?.by === 'category' && view.end !== 'central') {
+    return (
+      <>
+        Categories at the <b>{view.end}</b> end, contours central
+      </>
+    );
+  }
+  return view?.by === 'settlement' ? (
+    <>
+      Buildings by the <b>largest</b> settlement, contours central
+    </>
+  ) : (
+    <>
+      Figures shown at the <b>central</b> value
+    </>
+  );
+}
+
+/** What the plan rests on: the option of the line and its values, its run or the register, and the grid. */
+export function PlanBasis({ scheme, crs, line, view }: PlanBasisProps) {
   const grid = crs === undefined ? `EPSG:${scheme.crs}` : `${crs.name}, EPSG:${crs.code}`;
-  const isPreview = line?.hasContours === true;
+  const isPreview = line?.isPreview === true;
+  const isRecorded = line !== undefined && line.recorded.record !== null;
   return (
     <BasisLine
       preview={isPreview || line?.editor.isEditing === true}
       parts={[
         ...(line === undefined ? [] : lineParts(line)),
-        <b key="register">Register as it stands</b>,
-        ...(isPreview ? [] : [`Grid ${grid}`]),
+        ...(isRecorded ? [] : [<b key="register">Register as it stands</b>]),
+        ...(isPreview || isRecorded ? [] : [`Grid ${grid}`]),
       ]}
-      end={isPreview ? <b>Preview, not a run: central settlement</b> : 'Nothing worked out yet'}
+      end={line === undefined ? undefined : valueShown(line, view)}
     />
   );
 }

@@ -1,4 +1,4 @@
-import type { RefObject } from 'react';
+import type { ComponentProps, RefObject } from 'react';
 import type { BuildingRow, ExtentAnswer } from '../../../../shared/schemas/buildings.ts';
 import { classNames } from '../../../lib/class-names.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
@@ -15,6 +15,7 @@ type PlanSideProps = {
   readonly selected: number | null;
   readonly building: BuildingQuery;
   readonly sheet: SheetProps;
+  readonly run: ComponentProps<typeof SelectedBuilding>['run'];
   readonly steps: ReturnType<typeof useSteps>;
   readonly onGoTo: (buildingId: number) => void;
   readonly onDeselect: () => void;
@@ -29,6 +30,7 @@ export function PlanSide(props: PlanSideProps) {
     selected,
     building,
     sheet,
+    run,
     steps,
     onGoTo,
     onDeselect,
@@ -67,7 +69,7 @@ export function PlanSide(props: PlanSideProps) {
         {selected === null ? (
           <NothingSelected />
         ) : (
-          <SelectedBuilding {...{ building, sheet, onDeselect }} />
+          <SelectedBuilding {...{ building, sheet, run, onDeselect }} />
         )}
       </div>
     </>

@@ -37,9 +37,14 @@ export function usePlanDesk() {
     select(null);
   }
   function fit(): void {
-    if (ready !== null) handle?.fit(ready.extent.bounds);
+    if (ready !== null) handle?.fit(ready.extent.home);
   }
-  const steps = useSteps(selected, () => handle?.buildingsInView() ?? [], goTo);
+  const steps = useSteps({
+    handle,
+    selected,
+    isThere: selected === null || building.data?.id === selected,
+    goTo,
+  });
   usePlanKeys(
     {
       handle,

@@ -4,12 +4,12 @@ import type { BuildingSheet } from '../../../../shared/assessment/sheet-of-build
 import { resultOfOutcome } from '../../../../shared/assessment/result-of-outcome.ts';
 import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
 import { troughWidthMatters } from '../../../../shared/ground/trough-width-matters.ts';
-import { WARNINGS } from '../../../../shared/warnings.ts';
 import { Panel } from '../../../components/ui/panel.tsx';
 import { settledWords } from '../../assessment/bracket-words.ts';
 import { BracketTable } from '../../assessment/components/bracket-table.tsx';
 import { BreakpointBar } from '../../assessment/components/breakpoint-bar.tsx';
 import { RangeBar } from '../../assessment/components/range-bar.tsx';
+import { Warnings } from '../../assessment/components/warnings.tsx';
 import { WallFacts } from '../../assessment/components/wall-facts.tsx';
 import { strainRange } from '../../assessment/strain-range.ts';
 import { CAUTIONS } from '../../method/method-words.ts';
@@ -94,19 +94,7 @@ export function SheetAnswers(props: SheetAnswersProps) {
       )}
       <Panel title="Stage" note="by the figures; nothing is decided by them">
         <p className="mt-2 text-small">{stageWords(result)}</p>
-        {result.warnings.length > 0 && (
-          <ul className="mt-2 text-small" aria-label="Warnings">
-            {result.warnings.map((name) => (
-              <li
-                key={name}
-                className="border-l-4 border-clay-line bg-clay-wash px-2.5 py-1 [&+&]:mt-1"
-              >
-                <b className="inline-block font-semibold first-letter:uppercase">{name}.</b>{' '}
-                {name in WARNINGS ? WARNINGS[name as keyof typeof WARNINGS] : ''}
-              </li>
-            ))}
-          </ul>
-        )}
+        <Warnings names={result.warnings} />
       </Panel>
       <Panel title="Cautions">
         <ul className="mt-2 list-disc pl-4 text-small text-ink-2">

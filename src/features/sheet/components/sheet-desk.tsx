@@ -5,8 +5,10 @@ import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts'
 import { BasisLine } from '../../../components/layout/basis-line.tsx';
 import { Content } from '../../../components/layout/content.tsx';
 import { PageTitle } from '../../../components/layout/page-title.tsx';
+import { Panel } from '../../../components/ui/panel.tsx';
 import { formatMoment } from '../../../lib/format-date.ts';
 import { designParts } from '../../alignments/design-words.ts';
+import { WorkingList } from '../../assessment/components/working-list.tsx';
 import { runName, staleWords } from '../../runs/run-words.ts';
 import { SheetAnswers } from './sheet-answers.tsx';
 import { SheetHead } from './sheet-head.tsx';
@@ -68,6 +70,15 @@ export function SheetDesk({ schemeId, run, building }: SheetDeskProps) {
           <SheetPlace {...{ schemeId, run, building, sheet, index }} onChoose={setChosen} />
           <SheetSection sheet={sheet} index={index} opened={opened} />
           <SheetAnswers {...{ run, building, sheet, opened }} />
+          {opened !== null && (
+            <Panel
+              title={`Working of wall ${opened.wall.name}`}
+              note="each formula, the numbers put in, the source"
+              className="col-span-full"
+            >
+              <WorkingList sections={opened.working} />
+            </Panel>
+          )}
         </div>
       </Content>
     </>

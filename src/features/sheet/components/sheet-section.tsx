@@ -3,7 +3,6 @@ import type { BuildingSheet } from '../../../../shared/assessment/sheet-of-build
 import { Panel } from '../../../components/ui/panel.tsx';
 import { InteractionChart } from '../../assessment/components/interaction-chart.tsx';
 import { WallSectionChart } from '../../assessment/components/wall-section-chart.tsx';
-import { WorkingList } from '../../assessment/components/working-list.tsx';
 import { ZonesTable } from '../../assessment/components/zones-table.tsx';
 
 type SheetSectionProps = {
@@ -43,9 +42,6 @@ export function SheetSection({ sheet, index, opened }: SheetSectionProps) {
         <div className="mt-2 max-w-[560px]">
           <InteractionChart opened={opened} />
         </div>
-      </Panel>
-      <Panel title="Working" note="each formula, the numbers put in, the source">
-        <WorkingList sections={opened.working} />
       </Panel>
     </div>
   );

@@ -1,4 +1,5 @@
-import { describe, expect, it, vi } from 'vitest';
+import { describe, expect, it } from 'vitest';
+import { centralSurface } from '../../../../shared/assessment/central-surface.ts';
 import { chainageWords } from '../../../../src/features/alignments/chainage-words.ts';
 import { cursorWords } from '../../../../src/features/alignments/cursor-words.ts';
 import {
@@ -6,15 +7,11 @@ import {
   shapesOfDesign,
 } from '../../../../src/features/alignments/line-shapes.ts';
 import { placeOnLine } from '../../../../src/features/alignments/place-on-line.ts';
-import { createLatestAsked } from '../../../../src/features/alignments/preview/latest-asked.ts';
-import {
-  centralSurface,
-  previewWork,
-  type Worked,
-} from '../../../../src/features/alignments/preview/preview-work.ts';
+import { createPreviewWork } from '../../../../src/features/alignments/preview/preview-work.ts';
 import { aDesign } from '../../../support/designs.ts';
 
 const RULES = { depth: { kind: 'clay' }, focus: 'axis' } as const;
+const CASE = { design: aDesign(), rules: RULES };
 
 describe('a place beside a line', () => {
   const line: [number, number][] = [[0, 0], [100, 0], [100, 100]]; // prettier-ignore
@@ -27,7 +24,7 @@ describe('a place beside a line', () => {
   });
 
   it('is said with its settlement, and not at all from far off', () => {
-    const surface = centralSurface({ design: aDesign(), rules: RULES });
+    const surface = centralSurface(aDesign(), RULES);
     expect(cursorWords({ chainage: 500, offset: -3 }, [0, 0], surface)).toEqual([
       'Chainage 0+500',
       'Offset −3.0 m',
@@ -65,39 +62,12 @@ describe('a designed line on the map', () => {
     expect(shapesOfDesign(aDesign({ line: [[0, 0], [0, 0]] }))).toEqual([]); // prettier-ignore
   });
 
-  it('has contours in mm, or says why there are none', () => {
-    const worked = previewWork({ design: aDesign(), rules: RULES });
-    if (worked.kind === 'fault') throw new Error(worked.message);
-    const levels = shapesOfContours(worked.contours).map((shape) =>
-      shape.kind === 'contour' ? shape.level : 0,
+  it('has contours in mm', () => {
+    const worked = createPreviewWork()({ preview: CASE, question: { kind: 'contours' } });
+    if (worked.kind !== 'contours') throw new Error(worked.kind);
+    const levels = shapesOfContours(worked.contours).flatMap((shape) =>
+      shape.kind === 'contour' ? [shape.level] : [],
     );
     expect([...new Set(levels)]).toEqual([1, 2, 5, 10]);
-    const fault = previewWork({ design: aDesign({ line: [[0, 0], [0, 0]] }), rules: RULES }); // prettier-ignore
-    expect(fault).toMatchObject({ kind: 'fault' });
-  });
-});
-
-describe('asking a worker', () => {
-  it('sends one question at a time, and of those that wait only the newest', () => {
-    const sent: unknown[] = [];
-    const answers: ((event: MessageEvent<Worked>) => void)[] = [];
-    const onWorked = vi.fn();
-    const latest = createLatestAsked(
-      {
-        postMessage: (asked: unknown) => sent.push(asked),
-        terminate: () => undefined,
-        addEventListener: (_, answer) => answers.push(answer),
-      },
-      onWorked,
-    );
-    const [first, second, third] = [6, 7, 8].map((diameter) => ({
-      design: aDesign({ diameter }),
-      rules: RULES,
-    }));
-    for (const asked of [first, second, third]) if (asked !== undefined) latest.ask(asked);
-    expect(sent).toEqual([first]);
-    answers[0]?.(new MessageEvent('message', { data: { kind: 'contours', contours: [] } }));
-    expect(sent).toEqual([first, third]);
-    expect(onWorked).toHaveBeenCalledTimes(1);
   });
 });

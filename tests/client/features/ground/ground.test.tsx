@@ -1,4 +1,4 @@
-import { fireEvent, screen, waitFor } from '@testing-library/react';
+import { fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { describe, expect, it, vi } from 'vitest';
 import { GroundPage } from '../../../../src/app/routes/settings-ground.tsx';
 import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
@@ -81,18 +81,22 @@ describe('the ground', () => {
 
   it('says by row what is wrong with a file', async () => {
     fakeApi(ANSWERS);
-    const faults = [{ path: 'row 12', message: 'Row 12: the level is missing.' }];
-    vi.mocked(apiUpload).mockRejectedValue(
-      new ApiError('unreadable', 'Two rows have no level.', 422, faults),
-    );
+    const faults = Array.from({ length: 50 }, (_, k) => ({
+      path: `row ${k + 2}`,
+      message: `Row ${k + 2}: column “z” is blank.`,
+    }));
+    const message = '1 204 places cannot be read; the first 50 are listed.';
+    vi.mocked(apiUpload).mockRejectedValue(new ApiError('unreadable', message, 422, faults));
     openGround();
     fireEvent.change(await screen.findByLabelText('Where the levels come from'), {
       target: { value: 'Scan' },
     });
     await chooseFile();
-    expect((await screen.findByRole('alert')).textContent).toContain(
-      'Row 12: the level is missing.',
-    );
+    expect((await screen.findByRole('alert')).textContent).toContain(message);
+    const list = screen.getByRole('list', { name: 'What is wrong' });
+    expect(within(list).getAllByRole('listitem')).toHaveLength(50);
+    expect(within(list).getByText('Row 12: column “z” is blank.')).toBeTruthy();
+    expect(await axeFaults()).toEqual([]);
   });
 
   it('is taken away once that is confirmed', async () => {

@@ -28,6 +28,7 @@ vi.mock('../../../../src/features/imports/components/import-map.tsx', () => ({
   ),
 }));
 
+const UNDOING = { changeId: anId(61), version: 4, buildingIds: [] };
 const SCHEME = `/api/schemes/${anId(10)}`;
 const IMPORT = `${SCHEME}/imports/${anId(50)}`;
 const SESSION = {
@@ -62,11 +63,15 @@ function openImport() {
 
 describe('the preview of an import', () => {
   it('says where it lies, which column is what, and what will happen', async () => {
-    fakeApi(answersFor(anImportAnswer({ isRemembered: true })));
+    fakeApi(
+      answersFor(
+        anImportAnswer({ remembered: { at: '2025-11-30T09:00:00.000Z', fileName: 'old.gpkg' } }),
+      ),
+    );
     openImport();
     expect(await screen.findByText('EPSG:4326 WGS 84')).toBeTruthy();
     expect(screen.getByText('Files of this kind always are; up to 1 m off.')).toBeTruthy();
-    expect(screen.getByText(/^Remembered/)).toBeTruthy();
+    expect(screen.getByText(/^As chosen on 30 November 2025 for old.gpkg/)).toBeTruthy();
     expect(screen.getByLabelText<HTMLSelectElement>('Use').value).toBe('currentUse');
     expect(screen.getByText('2 229 of 2 253 filled', { exact: false })).toBeTruthy();
     expect(screen.getByText('Not used: localId.')).toBeTruthy();
@@ -82,11 +87,8 @@ describe('the preview of an import', () => {
       ...answersFor(anImportAnswer()),
       [`POST ${IMPORT}/confirm`]: done,
       [`GET ${SCHEME}`]: aSchemeAnswer(),
-      [`POST ${SCHEME}/register-changes/${anId(60)}/undo`]: {
-        changeId: anId(61),
-        version: 4,
-        buildingIds: [],
-      },
+      [`POST ${SCHEME}/register-changes/${anId(60)}/undo`]: UNDOING,
+      [`POST ${SCHEME}/register-changes/${UNDOING.changeId}/undo`]: UNDOING,
     });
     openImport();
     fireEvent.click(await screen.findByRole('button', { name: /^Bring in 2\s253 buildings$/ }));
@@ -99,6 +101,8 @@ describe('the preview of an import', () => {
     fireEvent.click(screen.getByRole('button', { name: 'Undo' }));
     fireEvent.click(screen.getByRole('button', { name: 'Undo it' }));
     expect(await screen.findByText(/^Undone\./)).toBeTruthy();
+    fireEvent.click(screen.getByRole('button', { name: 'Put it back' }));
+    expect(await screen.findByRole('button', { name: 'Undo' })).toBeTruthy();
     expect(await axeFaults()).toEqual([]);
   });
 

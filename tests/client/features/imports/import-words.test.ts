@@ -70,7 +70,9 @@ describe('the words of rows', () => {
   });
 
   it('write values', () => {
-    expect([null, 1204.5, 'raft'].map(valueWords)).toEqual(['not known', '1\u2009204.5', 'raft']);
+    const words = [null, 1204.5, 'raft'].map((value) => valueWords(value, 'foundation'));
+    expect(words).toEqual(['not known', '1\u2009204.5', 'raft']);
+    expect(valueWords(71.57579638819152, 'footprint')).toBe('71.6 m²');
   });
 });
 

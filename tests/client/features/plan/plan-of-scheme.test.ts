@@ -5,7 +5,12 @@ import { planOfScheme, type PlanSources } from '../../../../src/features/plan/pl
 function sources(overrides: Partial<PlanSources> = {}): PlanSources {
   return {
     scheme: { id: 'a', registerVersion: 4, backgroundVersion: 9 },
-    extent: { bounds: [1.63, 54.75, 1.65, 54.76], crs: 32631, from: 'buildings' },
+    extent: {
+      bounds: [1.63, 54.75, 1.65, 54.76],
+      home: [1.63, 54.75, 1.65, 54.76],
+      crs: 32631,
+      from: 'buildings',
+    },
     basemap: {
       tiles: ['/tiles/{z}/{x}/{y}.pbf'],
       bounds: [1.62, 54.74, 1.66, 54.77],
@@ -35,11 +40,27 @@ describe('planOfScheme', () => {
 
   it.each([
     ['elsewhere', { bounds: [10, 50, 10.1, 50.1], crs: 25832, from: 'buildings' }],
-    ['half outside', { bounds: [1.63, 54.75, 1.67, 54.76], crs: 32631, from: 'buildings' }],
-    ['without buildings', { bounds: [1.63, 54.75, 1.65, 54.76], crs: 32631, from: 'crs' }],
+    [
+      'half outside',
+      {
+        bounds: [1.63, 54.75, 1.67, 54.76],
+        crs: 32631,
+        from: 'buildings',
+      },
+    ],
+    [
+      'without buildings',
+      {
+        bounds: [1.63, 54.75, 1.65, 54.76],
+        crs: 32631,
+        from: 'crs',
+      },
+    ],
   ] as const)('keeps the demo map from under a scheme %s', (_where, extent) => {
     const bounds: [number, number, number, number] = [...extent.bounds];
-    expect(planOfScheme(sources({ extent: { ...extent, bounds } })).basemap).toBeNull();
+    expect(
+      planOfScheme(sources({ extent: { ...extent, bounds, home: bounds } })).basemap,
+    ).toBeNull();
   });
 
   it('shows what was uploaded, and no buildings where there are none', () => {

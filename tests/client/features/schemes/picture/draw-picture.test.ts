@@ -8,6 +8,7 @@ import { loadPicture } from '../../../../../src/features/schemes/picture/load-pi
 const SIZE = { width: 356, height: 150 };
 const EXTENT = {
   bounds: [1.627, 54.744, 1.654, 54.757] as [number, number, number, number],
+  home: [1.627, 54.744, 1.654, 54.757] as [number, number, number, number],
   crs: 32631,
   from: 'buildings' as const,
 };

@@ -1,0 +1,89 @@
+import type { ReactNode } from 'react';
+import { CATEGORIES } from '../../../../shared/damage/categories.ts';
+import { HatchSwatch } from '../../../components/ui/hatch-swatch.tsx';
+import { formatCount } from '../../../lib/format-number.ts';
+import { SETTLEMENT_TINTS, STAGE_TINTS } from '../../../theme/ground-movement.ts';
+import { FIRST_SHADE } from '../../map/shades.ts';
+import { bandWords, type Shading } from '../shades-of-run.ts';
+
+type LegendRow = {
+  readonly shade: number;
+  readonly swatch: ReactNode;
+  /** Stands in the building too. */
+  readonly number: string;
+  readonly words: string;
+};
+
+const STAGE_WORDS: Readonly<Record<number, string>> = {
+  2: 'let go: strain small',
+  3: 'to be looked at in detail',
+};
+
+function Swatch({ colour }: { readonly colour: string }) {
+  return (
+    <i
+      aria-hidden="true"
+      className="inline-block h-3.5 w-[22px] flex-none border border-bldg-edge"
+      style={{ backgroundColor: colour }}
+    />
+  );
+}
+
+function rowsOf(by: Shading['by']): readonly LegendRow[] {
+  if (by === 'category') {
+    return CATEGORIES.map(({ category, label, name }) => ({
+      shade: FIRST_SHADE.category + category,
+      swatch: <HatchSwatch category={category} />,
+      number: label,
+      words: name,
+    }));
+  }
+  const tints = by === 'stage' ? STAGE_TINTS : SETTLEMENT_TINTS;
+  return tints.map(([number, colour]) => ({
+    shade: FIRST_SHADE[by] + number,
+    swatch: <Swatch colour={colour} />,
+    number: by === 'stage' ? String(number) : '',
+    words: by === 'stage' ? (STAGE_WORDS[number] ?? '') : bandWords(number),
+  }));
+}
+
+type LegendRowsProps = {
+  readonly by: Shading['by'];
+  readonly counts: ReadonlyMap<number, number>;
+  /** How many take no colour, and why. */
+  readonly others: readonly [count: number, words: string] | null;
+};
+
+/** What each colour stands for: swatch, number, words, and how many buildings take it. */
+export function LegendRows({ by, counts, others }: LegendRowsProps) {
+  return (
+    <table className="w-full text-small" aria-label="Colours and how many buildings take each">
+      <tbody>
+        {rowsOf(by).map(({ shade, swatch, number, words }) => (
+          <tr key={shade}>
+            <td className="w-[30px] py-[1.5px] align-middle leading-none">{swatch}</td>
+            <th scope="row" className="py-[1.5px] text-left font-normal">
+              {number !== '' && <b className="inline-block w-8 font-semibold">{number}</b>}
+              <span className="inline-block first-letter:uppercase">{words}</span>
+            </th>
+            <td className="py-[1.5px] pl-3 text-right">{formatCount(counts.get(shade) ?? 0)}</td>
+          </tr>
+        ))}
+        {others !== null && (
+          <tr className="text-ink-2">
+            <td className="py-[1.5px] align-middle leading-none">
+              <i
+                aria-hidden="true"
+                className="inline-block h-3.5 w-[22px] border border-bldg-edge bg-bldg"
+              />
+            </td>
+            <th scope="row" className="py-[1.5px] text-left font-normal">
+              {others[1]}
+            </th>
+            <td className="py-[1.5px] pl-3 text-right">{formatCount(others[0])}</td>
+          </tr>
+        )}
+      </tbody>
+    </table>
+  );
+}
