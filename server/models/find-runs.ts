@@ -72,12 +72,3 @@ export async function findRun(
   if (run === undefined) throw new AppError('not-found');
   return run;
 }
-
-/** The run that a scheme's register and plan show; null before the first is complete. */
-export async function findShownRun(database: Sequelize, schemeId: string): Promise<string | null> {
-  const [run] = await database.query<{ id: string }>(SHOWN, {
-    type: QueryTypes.SELECT,
-    bind: [schemeId],
-  });
-  return run?.id ?? null;
-}

@@ -27,37 +27,39 @@ describe.each([
       .first()
       .waitFor();
   });
+});
 
-  journey('lets one wall be tried out, in an address to be sent on', async ({ visit }) => {
-    const visitor = await visit(size);
-    await signInAs(visitor, 'witness');
-    const { page } = visitor;
-    await visitor.open('/method');
-    await page.getByRole('link', { name: 'What-if on one wall' }).click();
-    await page.getByText('strain 0.0379').waitFor();
-    const losses = page.getByRole('group', { name: 'Volume loss' });
-    await losses.getByLabel('High').fill('7');
-    await losses.getByLabel('Central').fill('6');
-    await page
-      .getByText(/^Moderate/i)
-      .first()
-      .waitFor();
-    await page.getByText('Breaks at 4.40 %: not above the central value.').waitFor();
-    expect(await axeFaults(page)).toEqual([]);
+journey('lets one wall be tried out, in an address to be sent on', async ({ visit }) => {
+  const visitor = await visit(DESK);
+  await signInAs(visitor, 'witness');
+  const { page } = visitor;
+  await visitor.open('/method');
+  await page.getByRole('link', { name: 'What-if on one wall' }).click();
+  await page.getByText('strain 0.0379').waitFor();
+  const losses = page.getByRole('group', { name: 'Volume loss' });
+  await losses.getByLabel('High').fill('7');
+  await losses.getByLabel('Central').fill('6');
+  await page
+    .getByText(/^Moderate/i)
+    .first()
+    .waitFor();
+  await page.getByText('Breaks at 4.40 %: not above the central value.').waitFor();
+  await page.setViewportSize(PHONE);
+  expect(await axeFaults(page)).toEqual([]);
+  await page.setViewportSize(DESK);
 
-    await visitor.open(page.url());
-    expect(await losses.getByLabel('Central').inputValue()).toBe('6');
-    await page.getByRole('button', { name: /working of the strain of zone 2/ }).click();
-    const working = page.getByRole('group', { name: /working of the strain of zone 2/ });
-    await working.getByText('Copy as text').waitFor();
-    expect(await axeFaults(page)).toEqual([]);
-    await page.keyboard.press('Escape');
-    await working.waitFor({ state: 'detached' });
+  await visitor.open(page.url());
+  expect(await losses.getByLabel('Central').inputValue()).toBe('6');
+  await page.getByRole('button', { name: /working of the strain of zone 2/ }).click();
+  const working = page.getByRole('group', { name: /working of the strain of zone 2/ });
+  await working.getByText('Copy as text').waitFor();
+  expect(await axeFaults(page)).toEqual([]);
+  await page.keyboard.press('Escape');
+  await working.waitFor({ state: 'detached' });
 
-    await page.getByLabel('Founding depth').fill('18');
-    await page.getByText('The wall has to be founded above it.').waitFor();
-    await page.getByRole('link', { name: 'Back to the check' }).click();
-    await page.getByText('strain 0.0379').waitFor();
-    expect(page.url()).toMatch(/\/method\/what-if$/);
-  });
+  await page.getByLabel('Founding depth').fill('18');
+  await page.getByText('The wall has to be founded above it.').waitFor();
+  await page.getByRole('link', { name: 'Back to the check' }).click();
+  await page.getByText('strain 0.0379').waitFor();
+  expect(page.url()).toMatch(/\/method\/what-if$/);
 });

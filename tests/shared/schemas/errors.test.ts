@@ -98,7 +98,7 @@ describe('one line says where a case is wrong', () => {
     [
       'a cut-off that is neither',
       { ...aCase(), rules: { cutoff: '3i' } },
-      'rules.cutoff: must be metres from 0 (none) to 1, or "2.5i"',
+      'rules.cutoff: must be metres from 0 (none) to 1, "2.5i" or { "widths": … }',
     ],
     ['not an object', [], 'the document: must be an object and is a list'],
   ])('%s', (_, document, line) => {
