@@ -12,8 +12,6 @@ const FLAGS = [
   '--disable-component-update',
   '--disable-sync',
   '--use-angle=swiftshader',
-  // pages are painted faster without a graphics card that is only imitated; maps need it
-  '--disable-gpu-rasterization',
   '--enable-unsafe-swiftshader',
 ];
 
