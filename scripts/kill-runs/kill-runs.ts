@@ -41,8 +41,10 @@ function processes(url: string) {
   }
   async function kill(name: Name, signal: NodeJS.Signals): Promise<void> {
     const child = running.get(name);
-    const ended = child === undefined ? undefined : once(child, 'exit');
-    child?.kill(signal);
+    running.delete(name);
+    if (child === undefined) return;
+    const ended = once(child, 'exit');
+    child.kill(signal);
     await ended;
   }
   return { launch, kill };
