@@ -1,3 +1,4 @@
+import { isUnderWay } from '../../shared/schemas/runs.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
@@ -13,7 +14,7 @@ export async function cancelRun(
 ): Promise<void> {
   await database.transaction(async (transaction) => {
     const state = await lockRun(scheme, runId, transaction);
-    if (state.state !== 'planning' && state.state !== 'running') return;
+    if (!isUnderWay(state.state)) return;
     await state.update({ state: 'cancelled', endedAt: new Date() }, { transaction });
     const subject = { kind: 'run', id: runId };
     const change = { by, schemeId: scheme.id, action: 'cancel run', subject };

@@ -1,6 +1,6 @@
 import { UniqueConstraintError, type Sequelize, type Transaction } from 'sequelize';
 import type { RegisterChange as RegisterChangeAnswer } from '../../shared/schemas/register-changes.ts';
-import { findCrs } from '../crs/find-crs.ts';
+import { crsOfScheme } from '../crs/crs-of-scheme.ts';
 import { toLonLat } from '../crs/to-lon-lat.ts';
 import { AppError } from '../errors.ts';
 import { groundUnder } from '../ground/ground-under.ts';
@@ -16,9 +16,7 @@ import { lockScheme } from './lock-scheme.ts';
 import { recordChange } from './record-change.ts';
 
 async function placeOnMap(scheme: Scheme): Promise<ReturnType<typeof toLonLat>> {
-  const system = await findCrs(scheme.crs);
-  if (system === undefined || 'fault' in system) throw new AppError('internal');
-  return toLonLat(system.crs.definition);
+  return toLonLat((await crsOfScheme(scheme)).definition);
 }
 
 async function begin(

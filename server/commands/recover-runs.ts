@@ -1,4 +1,5 @@
 import { METHOD_VERSION } from '../../shared/method-version.ts';
+import { isUnderWay, RUN_STATES } from '../../shared/schemas/runs.ts';
 import { RunState } from '../models/run-state.ts';
 import { Run } from '../models/run.ts';
 import { failRun } from '../runs/do-step.ts';
@@ -13,7 +14,7 @@ export async function recoverRuns(
   services: Pick<Services, 'database' | 'runs' | 'logger'>,
 ): Promise<void> {
   const { database, logger } = services;
-  const open = await RunState.findAll({ where: { state: ['planning', 'running'] } });
+  const open = await RunState.findAll({ where: { state: RUN_STATES.filter(isUnderWay) } });
   for (const { runId } of open) {
     const { methodVersion } = await Run.findByPk(runId, { rejectOnEmpty: true });
     if (methodVersion !== METHOD_VERSION) {
@@ -23,8 +24,7 @@ export async function recoverRuns(
     await database.transaction(async (transaction) => {
       const lock = transaction.LOCK.UPDATE;
       const state = await RunState.findByPk(runId, { transaction, lock, rejectOnEmpty: true });
-      if (state.state === 'planning' || state.state === 'running')
-        await sendOpenSteps(services, state, transaction);
+      if (isUnderWay(state.state)) await sendOpenSteps(services, state, transaction);
     });
     logger.info({ runId }, 'a run goes on');
   }

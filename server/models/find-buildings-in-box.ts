@@ -11,7 +11,11 @@ export type DrawnBuilding = {
   readonly lonLat: Position[][][];
 };
 
-/** The buildings of a scheme that may reach into a box. The box is written as in the index, or it is not used. */
+/** That a building's box meets one from $2 to $5, written as in the index, or the index is not used. */
+export const MEETS_BOX =
+  'box(point(west, south), point(east, north)) && box(point($2, $3), point($4, $5))';
+
+/** The buildings of a scheme that may reach into a box. */
 export async function findBuildingsInBox(
   database: Sequelize,
   schemeId: string,
@@ -21,7 +25,7 @@ export async function findBuildingsInBox(
     `select id, reference, name, lon_lat as "lonLat"
      from buildings join building_footprints on building_id = id
      where scheme_id = $1 and removed_at is null
-       and box(point(west, south), point(east, north)) && box(point($2, $3), point($4, $5))
+       and ${MEETS_BOX}
      order by id`,
     { type: QueryTypes.SELECT, bind: [schemeId, west, south, east, north] },
   );

@@ -1,7 +1,7 @@
 import { QueryTypes, type Sequelize } from 'sequelize';
 import { OUTLINE_LIMITS } from '../../shared/schemas/building-outlines.ts';
 import type { FootprintRings } from './building-footprint.ts';
-import type { LonLatBox } from './find-buildings-in-box.ts';
+import { MEETS_BOX, type LonLatBox } from './find-buildings-in-box.ts';
 
 export type OutlinedBuilding = {
   readonly id: number;
@@ -22,7 +22,7 @@ export async function findOutlinesInBox(
     `select id, reference, name, storeys, eaves_height as "eavesHeight", footprint
      from buildings join building_footprints on building_id = id
      where scheme_id = $1 and removed_at is null
-       and box(point(west, south), point(east, north)) && box(point($2, $3), point($4, $5))
+       and ${MEETS_BOX}
      order by id limit ${OUTLINE_LIMITS.buildings}`,
     { type: QueryTypes.SELECT, bind: [schemeId, west, south, east, north] },
   );

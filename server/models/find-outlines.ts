@@ -1,5 +1,6 @@
 import { QueryTypes, type Sequelize } from 'sequelize';
 import type { Box } from '../../shared/geometry/bounding-box.ts';
+import { MEETS_BOX } from './find-buildings-in-box.ts';
 import type { Neighbour } from './find-neighbours.ts';
 
 /** The numbers of a scheme's buildings whose boxes meet another, in degrees, ascending. */
@@ -10,7 +11,7 @@ export async function findIdsInBox(
 ): Promise<number[]> {
   const rows = await database.query<{ id: number }>(
     `select id from buildings where scheme_id = $1 and removed_at is null
-       and box(point(west, south), point(east, north)) && box(point($2, $3), point($4, $5))
+       and ${MEETS_BOX}
      order by id`,
     { type: QueryTypes.SELECT, bind: [schemeId, west, south, east, north] },
   );

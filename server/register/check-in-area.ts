@@ -1,4 +1,4 @@
-import { findCrs } from '../crs/find-crs.ts';
+import { crsOfScheme } from '../crs/crs-of-scheme.ts';
 import { toLonLat } from '../crs/to-lon-lat.ts';
 import { AppError } from '../errors.ts';
 import type { FootprintRings } from '../models/building-footprint.ts';
@@ -9,10 +9,9 @@ const MARGIN = 0.05;
 
 /** Refuses a footprint that is not where the scheme's system is used, as when axes were exchanged. */
 export async function checkInArea(scheme: Scheme, footprint: FootprintRings): Promise<void> {
-  const system = await findCrs(scheme.crs);
-  if (system === undefined || 'fault' in system) throw new AppError('internal');
-  const [west, south, east, north] = system.crs.bounds;
-  const place = toLonLat(system.crs.definition);
+  const { bounds, definition, name } = await crsOfScheme(scheme);
+  const [west, south, east, north] = bounds;
+  const place = toLonLat(definition);
   const width = (east - west + 360) % 360 || 360;
   const isInside = footprint.flat(2).every((point) => {
     const [longitude, latitude] = place(point);
@@ -20,6 +19,6 @@ export async function checkInArea(scheme: Scheme, footprint: FootprintRings): Pr
     return beyond <= width + 2 * MARGIN && latitude >= south - MARGIN && latitude <= north + MARGIN;
   });
   if (isInside) return;
-  const message = `This is not where EPSG:${scheme.crs} (${system.crs.name}) is used. Check eastings and northings.`;
+  const message = `This is not where EPSG:${scheme.crs} (${name}) is used. Check eastings and northings.`;
   throw new AppError('invalid-input', message, [{ path: 'footprint', message }]);
 }

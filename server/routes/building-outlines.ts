@@ -1,7 +1,6 @@
 import { outlineBoxSchema } from '../../shared/schemas/building-outlines.ts';
 import { boxToLonLat } from '../crs/box-to-lon-lat.ts';
-import { findCrs } from '../crs/find-crs.ts';
-import { AppError } from '../errors.ts';
+import { crsOfScheme } from '../crs/crs-of-scheme.ts';
 import { findOutlinesInBox } from '../models/find-outlines-in-box.ts';
 import { presentBuildingOutline } from '../presenters/building-outline.ts';
 import { defineRoute } from './define-route.ts';
@@ -13,9 +12,8 @@ export const buildingOutlineRoutes = [
     access: { scheme: 'readRegister' },
     query: outlineBoxSchema,
     handle: async ({ services, scheme, query }) => {
-      const system = await findCrs(scheme.crs);
-      if (system === undefined || 'fault' in system) throw new AppError('internal');
-      const box = boxToLonLat(system.crs.definition, query);
+      const { definition } = await crsOfScheme(scheme);
+      const box = boxToLonLat(definition, query);
       // nothing can stand where the grid does not reach
       if (box === null) return [];
       const found = await findOutlinesInBox(services.database, scheme.id, box);

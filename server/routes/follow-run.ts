@@ -1,6 +1,7 @@
 import { setTimeout as sleep } from 'node:timers/promises';
 import type { Response } from 'express';
 import type { Sequelize } from 'sequelize';
+import { isUnderWay } from '../../shared/schemas/runs.ts';
 import { findProgress } from '../models/run-chunks.ts';
 
 /** In milliseconds. */
@@ -24,7 +25,7 @@ export async function followRun(database: Sequelize, runId: string, res: Respons
     const data = JSON.stringify(progress);
     if (data !== told) res.write(`data: ${data}\n\n`);
     told = data;
-    if (progress?.state !== 'planning' && progress?.state !== 'running') break;
+    if (progress === undefined || !isUnderWay(progress.state)) break;
     await sleep(LOOK_EVERY, undefined, { signal: left.signal }).catch(() => undefined);
   }
   res.end();

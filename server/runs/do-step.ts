@@ -1,5 +1,6 @@
 import type { Sequelize, Transaction } from 'sequelize';
-import { findCrs } from '../crs/find-crs.ts';
+import { isUnderWay } from '../../shared/schemas/runs.ts';
+import { crsOfScheme } from '../crs/crs-of-scheme.ts';
 import { AppError } from '../errors.ts';
 import { closeChunk, findOpenChunk, findOpenChunks, insertChunks } from '../models/run-chunks.ts';
 import { hasContours, insertContours } from '../models/run-contours.ts';
@@ -21,8 +22,6 @@ export type StepTools = {
 
 type StepOf<Kind extends RunStep['kind']> = RunStep & { readonly kind: Kind };
 
-const OPEN = new Set<RunState['state']>(['planning', 'running']);
-
 /** Where a run stands, kept from being changed by others until the transaction ends. */
 async function lockState(runId: string, transaction: Transaction): Promise<RunState> {
   const state = await RunState.findByPk(runId, { transaction, lock: transaction.LOCK.UPDATE });
@@ -42,18 +41,12 @@ async function completeIfDone(
   await state.update({ state: 'complete', endedAt: new Date() }, { transaction });
 }
 
-async function definitionOf(run: Run): Promise<string> {
-  const scheme = await Scheme.findByPk(run.schemeId, { rejectOnEmpty: true });
-  const system = await findCrs(scheme.crs);
-  if (system === undefined || 'fault' in system) throw new AppError('internal');
-  return system.crs.definition;
-}
-
 async function plan(tools: StepTools, run: Run): Promise<void> {
   const { database, threads, queue } = tools;
   const buildings = await findRunBoxes(database, run.id);
   const { design } = run;
-  const definition = await definitionOf(run);
+  const scheme = await Scheme.findByPk(run.schemeId, { rejectOnEmpty: true });
+  const { definition } = await crsOfScheme(scheme);
   const chunks = await threads.compute({ kind: 'plan', design, buildings, definition });
   await database.transaction(async (transaction) => {
     const state = await lockState(run.id, transaction);
@@ -100,7 +93,7 @@ async function workOut(tools: StepTools, run: Run, step: StepOf<'chunk'>): Promi
 export async function doStep(tools: StepTools, step: RunStep): Promise<void> {
   const run = await Run.findByPk(step.runId, { rejectOnEmpty: true });
   const { state } = await RunState.findByPk(run.id, { rejectOnEmpty: true });
-  if (!OPEN.has(state)) return;
+  if (!isUnderWay(state)) return;
   if (step.kind === 'plan') await plan(tools, run);
   else if (step.kind === 'contours') await drawContours(tools, run);
   else await workOut(tools, run, step);
@@ -110,7 +103,7 @@ export async function doStep(tools: StepTools, step: RunStep): Promise<void> {
 export async function failRun(database: Sequelize, runId: string, fault: string): Promise<void> {
   await database.transaction(async (transaction) => {
     const state = await lockState(runId, transaction);
-    if (OPEN.has(state.state))
+    if (isUnderWay(state.state))
       await state.update({ state: 'failed', endedAt: new Date(), fault }, { transaction });
   });
 }

@@ -17,26 +17,31 @@ async function findOwnRun(schemeId: string, { runId }: Place): Promise<Run> {
   return run;
 }
 
-/**
- * One building of a run with all that it takes to work it out again: what was known of it and the rows that
- * it stood in.
- */
-export async function runBuilding(
+async function buildingOf(
   { database, runs }: Pick<Services, 'database' | 'runs'>,
-  schemeId: string,
-  place: Place,
+  { id: runId, design, rules }: Run,
+  buildingId: number,
 ): Promise<RunBuilding> {
-  const { runId, buildingId } = place;
-  const run = await findOwnRun(schemeId, place);
   const [found, result, neighbours] = await Promise.all([
     findRunBuilding(database, runId, buildingId),
     findResult(database, runId, buildingId),
     findNeighboursText(database, runId, buildingId),
   ]);
   if (result === undefined) throw new AppError('not-found');
-  const { design, rules } = run;
   const asked = { kind: 'rows', design, rules, id: String(buildingId), neighbours } as const;
   return runBuildingSchema.parse({ ...found, result, rows: await runs.compute(asked) });
+}
+
+/**
+ * One building of a run with all that it takes to work it out again: what was known of it and the rows that
+ * it stood in.
+ */
+export async function runBuilding(
+  services: Pick<Services, 'database' | 'runs'>,
+  schemeId: string,
+  place: Place,
+): Promise<RunBuilding> {
+  return buildingOf(services, await findOwnRun(schemeId, place), place.buildingId);
 }
 
 /** One building of a run as a case that anyone can work out again with the command for cases. */
@@ -45,9 +50,9 @@ export async function runBuildingCase(
   schemeId: string,
   place: Place,
 ): Promise<AssessCase> {
-  const { design, rules } = await findOwnRun(schemeId, place);
-  const { facts, rows } = await runBuilding(services, schemeId, place);
-  const inputs = runInputs(design, rules);
-  const building = preparedBuilding(facts, inputs.model, design.groundLevel);
-  return caseOfBuilding(inputs, design, building, new Map([[building.id, rows]]));
+  const run = await findOwnRun(schemeId, place);
+  const { facts, rows } = await buildingOf(services, run, place.buildingId);
+  const inputs = runInputs(run.design, run.rules);
+  const building = preparedBuilding(facts, inputs.model, run.design.groundLevel);
+  return caseOfBuilding(inputs, run.design, building, new Map([[building.id, rows]]));
 }

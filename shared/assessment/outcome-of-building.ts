@@ -124,47 +124,71 @@ function notWorkedOut(prepared: PreparedBuilding, fault: string): BuildingOutcom
   };
 }
 
-function outcome(
+/**
+ * What a run finds of a building, with the result of the strain stage where it came so far.
+ *
+ * Units: as the parts. Valid: made by `workedBuilding`. Source: mair-taylor-burland-1996.
+ */
+export type WorkedBuilding = {
+  readonly outcome: BuildingOutcome;
+  readonly strain: BuildingResult | null;
+};
+
+function worked(
   { model, rules, limits, holds, moments = [ALL_COMPLETE] }: RunInputs,
   prepared: PreparedBuilding,
   rows: RowsByBuilding,
-): BuildingOutcome {
+): WorkedBuilding {
   const screening = screenFootprint(model, prepared, rules, limits, moments);
   const { settlementMax: settlement, slopeMax: slope, warnings } = screening;
   const { assumed } = prepared;
   const heldAtOne = holdsAt(1, prepared.holds, holds).map(({ name }) => name);
   const screened = { settlement, slope, assumed, fault: null };
   if (screening.passes && heldAtOne.length === 0) {
-    return { ...screened, stage: 1, heldBy: [], strain: null, warnings };
+    return { outcome: { ...screened, stage: 1, heldBy: [], strain: null, warnings }, strain: null };
   }
   const joined = joinedWalls(prepared.id, prepared.walls, rows);
   const result = assessBuilding(model, prepared.walls, joined, rules, moments);
   const heldBy = holdsAt(2, prepared.holds, holds).map(({ name }) => name);
   const passes = result.category < rules.leadingCategory && heldBy.length === 0;
-  return {
+  const outcome: BuildingOutcome = {
     ...screened,
     stage: passes ? 2 : 3,
     heldBy,
     strain: strainOutcome(result),
     warnings: [...new Set([...warnings, ...result.warnings])],
   };
+  return { outcome, strain: result };
 }
 
 /**
  * Takes a building through screening and, where that does not let it go, through the strain stage.
  *
- * Units: as BuildingOutcome. Valid: a building whose levels contradict each other or the drives gets a
+ * Units: as WorkedBuilding. Valid: a building whose levels contradict each other or the drives gets a
  * fault in words, not an error. Source: mair-taylor-burland-1996.
+ */
+export function workedBuilding(
+  inputs: RunInputs,
+  prepared: PreparedBuilding,
+  rows: RowsByBuilding,
+): WorkedBuilding {
+  try {
+    return worked(inputs, prepared, rows);
+  } catch (error) {
+    if (!(error instanceof MethodError)) throw error;
+    return { outcome: notWorkedOut(prepared, error.message), strain: null };
+  }
+}
+
+/**
+ * The same without the walls, which is what a run keeps.
+ *
+ * Units: as BuildingOutcome. Valid: as `workedBuilding`. Source: mair-taylor-burland-1996.
  */
 export function outcomeOfBuilding(
   inputs: RunInputs,
   prepared: PreparedBuilding,
   rows: RowsByBuilding,
 ): BuildingOutcome {
-  try {
-    return outcome(inputs, prepared, rows);
-  } catch (error) {
-    if (!(error instanceof MethodError)) throw error;
-    return notWorkedOut(prepared, error.message);
-  }
+  return workedBuilding(inputs, prepared, rows).outcome;
 }

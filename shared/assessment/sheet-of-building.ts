@@ -4,7 +4,7 @@ import type { AlignmentDesign } from '../schemas/alignments.ts';
 import type { RuleSet } from '../schemas/rules.ts';
 import { assessBuilding, type BuildingResult } from './assess-building.ts';
 import { ALL_COMPLETE } from './moment.ts';
-import { outcomeOfBuilding, type BuildingOutcome, type RunInputs } from './outcome-of-building.ts';
+import { workedBuilding, type BuildingOutcome, type RunInputs } from './outcome-of-building.ts';
 import {
   preparedBuilding,
   type PreparedBuilding,
@@ -53,10 +53,6 @@ export function sheetOfBuilding(
 ): BuildingSheet {
   const inputs = runInputs(design, rules);
   const prepared = preparedBuilding(facts, inputs.model, design.groundLevel);
-  return {
-    inputs,
-    prepared,
-    outcome: outcomeOfBuilding(inputs, prepared, rows),
-    strain: strainOf(inputs, prepared, rows),
-  };
+  const { outcome, strain } = workedBuilding(inputs, prepared, rows);
+  return { inputs, prepared, outcome, strain: strain ?? strainOf(inputs, prepared, rows) };
 }

@@ -18,6 +18,15 @@ export const RUN_STATES = ['planning', 'running', 'complete', 'cancelled', 'fail
 export type RunStateName = (typeof RUN_STATES)[number];
 
 /**
+ * Whether a run is still being planned or worked out.
+ *
+ * Units: none. Valid: any state. Source: [own].
+ */
+export function isUnderWay(state: RunStateName): boolean {
+  return state === 'planning' || state === 'running';
+}
+
+/**
  * What a run is started with: an option of the line at the version that was seen.
  *
  * Units: none. Valid: an older version is refused. Source: [own].

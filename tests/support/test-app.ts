@@ -11,7 +11,7 @@ import { readEnv } from '../../server/env.ts';
 import { openJobs, openJobsInline } from '../../server/jobs/open-jobs.ts';
 import { createLogger } from '../../server/logger.ts';
 import type { Letter } from '../../server/mail/mailer.ts';
-import { inlineRunQueue, type InlineRunQueue } from '../../server/runs/inline-run-queue.ts';
+import { inlineRunQueue, type InlineRunQueue } from './inline-run-queue.ts';
 import type { Services } from '../../server/services.ts';
 import { createTileCache } from '../../server/tiles/tile-cache.ts';
 import { createTestDatabase } from './test-database.ts';

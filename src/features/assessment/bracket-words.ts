@@ -14,7 +14,8 @@ const INPUT_WORDS: Readonly<Record<BracketInput, string>> = {
   eOverG: 'E/G',
 };
 
-function label(category: Category): string {
+/** The number of a category as people write it. */
+export function categoryLabel(category: Category): string {
   return CATEGORIES[category]?.label ?? '';
 }
 
@@ -29,8 +30,8 @@ export function categoriesWords(bracket: Bracket): string {
   const present = CATEGORIES.map(({ category }) => category).filter((one) => all.includes(one));
   const [lowest = 0] = present;
   const highest = present.at(-1) ?? lowest;
-  if (present.length < 3) return `Category ${present.map(label).join(' or ')}`;
-  return `Category ${label(lowest)} to ${label(highest)}`;
+  if (present.length < 3) return `Category ${present.map(categoryLabel).join(' or ')}`;
+  return `Category ${categoryLabel(lowest)} to ${categoryLabel(highest)}`;
 }
 
 /** Whether the category holds over the whole range, and what it is sensitive to where it does not. */

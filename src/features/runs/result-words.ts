@@ -19,11 +19,6 @@ export function reserveWords(
   return `Breaks at a volume loss of ${percentWords(loss, 2)}. Reserve ${over}.`;
 }
 
-/** A slope as it is said, `1 in 780`; level ground has none. */
-export function slopeWords(slope: number): string {
-  return slope <= 0 ? 'none' : `1 in ${Math.round(1 / slope)}`;
-}
-
 /** How far a building came, and why it is held where it is. */
 export function stageWords({ stage, heldBy }: Pick<RunResult, 'stage' | 'heldBy'>): string {
   if (stage < 3) return `Let go at stage ${stage}`;

@@ -1,8 +1,8 @@
-import type { RunAnswer } from '../../../shared/schemas/runs.ts';
+import { isUnderWay, type RunAnswer } from '../../../shared/schemas/runs.ts';
 
 /** Whether a run is still being worked out. */
 export function isActive({ state }: Pick<RunAnswer, 'state'>): boolean {
-  return state === 'planning' || state === 'running';
+  return isUnderWay(state);
 }
 
 /** Whether a run ended before everything was worked out. */

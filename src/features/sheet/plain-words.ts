@@ -1,11 +1,8 @@
-import { CATEGORIES, type Category } from '../../../shared/damage/categories.ts';
+import { CATEGORIES } from '../../../shared/damage/categories.ts';
 import type { RunResult } from '../../../shared/schemas/runs.ts';
 import { millimetresFromMetres } from '../../../shared/units/millimetres-from-metres.ts';
-import { slopeWords } from '../runs/result-words.ts';
-
-function label(category: Category): string {
-  return CATEGORIES[category]?.label ?? '';
-}
+import { slopeWords } from '../../lib/slope-words.ts';
+import { categoryLabel } from '../assessment/bracket-words.ts';
 
 function movement({ settlement, slope }: RunResult): string {
   return `${millimetresFromMetres(settlement).toFixed(1)} mm at most, sloping ${slopeWords(slope)} at most`;
@@ -33,8 +30,8 @@ export function plainWords(result: RunResult): readonly string[] {
   }
   const spread =
     categoryLow === categoryHigh
-      ? `stays in category ${label(categoryLow)}`
-      : `is in category ${label(categoryLow)} to ${label(categoryHigh)}`;
+      ? `stays in category ${categoryLabel(categoryLow)}`
+      : `is in category ${categoryLabel(categoryLow)} to ${categoryLabel(categoryHigh)}`;
   const held =
     heldBy.length === 0 ? [] : [`It is held whatever the figures: ${heldBy.join(', ')}.`];
   const end = result.stage === 2 ? ['The strain stage lets it go at stage 2.'] : [];

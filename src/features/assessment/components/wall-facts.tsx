@@ -1,6 +1,7 @@
 import type { OpenedWall } from '../../../../shared/assessment/open-wall.ts';
 import { millimetresFromMetres } from '../../../../shared/units/millimetres-from-metres.ts';
 import { Facts } from '../../../components/ui/facts.tsx';
+import { slopeWords } from '../../../lib/slope-words.ts';
 import { WorkingPopover } from './working-popover.tsx';
 
 type Opened = Pick<OpenedWall, 'result' | 'working'>;
@@ -13,10 +14,6 @@ function wholeFigure({ working }: Opened, symbol: string, name: string, figure: 
       {figure}
     </WorkingPopover>
   );
-}
-
-function slopeWords(slope: number): string {
-  return slope === 0 ? 'none' : `1 in ${Math.round(1 / Math.abs(slope))}`;
 }
 
 /** What a wall does as a whole; the figures open their working. */

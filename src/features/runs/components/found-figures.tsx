@@ -1,7 +1,8 @@
 import type { ReactNode } from 'react';
 import type { RunResult } from '../../../../shared/schemas/runs.ts';
 import { percentWords } from '../../assessment/bracket-words.ts';
-import { slopeWords, stageWords } from '../result-words.ts';
+import { slopeWords } from '../../../lib/slope-words.ts';
+import { stageWords } from '../result-words.ts';
 import { settlementWords } from '../tip-of-run.ts';
 
 type Line = readonly [word: string, value: ReactNode];

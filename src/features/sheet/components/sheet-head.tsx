@@ -1,9 +1,10 @@
 import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
-import { CATEGORIES, type Category } from '../../../../shared/damage/categories.ts';
+import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { ButtonLink } from '../../../components/ui/button-link.tsx';
 import { DamageChip } from '../../../components/ui/damage-chip.tsx';
 import { buildingPath, registerPath } from '../../../config/paths.ts';
+import { categoryLabel } from '../../assessment/bracket-words.ts';
 import { stageWords } from '../../runs/result-words.ts';
 
 type SheetHeadProps = {
@@ -11,10 +12,6 @@ type SheetHeadProps = {
   readonly run: RunDetail;
   readonly building: RunBuilding;
 };
-
-function label(category: Category): string {
-  return CATEGORIES[category]?.label ?? '';
-}
 
 function Verdict({ result }: Pick<RunBuilding, 'result'>) {
   const { category, categoryLow, categoryHigh, fault } = result;
@@ -30,7 +27,7 @@ function Verdict({ result }: Pick<RunBuilding, 'result'>) {
   const range =
     categoryLow === categoryHigh
       ? `central; the same over the bracket`
-      : `central; ${label(categoryLow)} to ${label(categoryHigh)} over the bracket`;
+      : `central; ${categoryLabel(categoryLow)} to ${categoryLabel(categoryHigh)} over the bracket`;
   return (
     <p className="flex items-center gap-3">
       <span className="text-h2">

@@ -1,9 +1,9 @@
 import { wallLength } from '../../../../shared/building/wall.ts';
 import type { BuildingResult } from '../../../../shared/assessment/assess-building.ts';
-import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { percentFromRatio } from '../../../../shared/units/percent-from-ratio.ts';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
+import { categoryLabel } from '../../assessment/bracket-words.ts';
 
 type Row = {
   readonly index: number;
@@ -42,7 +42,7 @@ const COLUMNS: readonly Column<Row>[] = [
     cell: (row) => governingZone(row)?.mode ?? 'not',
   },
   figure('strain', 'Strain', '%', ({ found }) => percent(found.result.strain, 3)),
-  figure('category', 'Cat.', '', ({ found }) => CATEGORIES[found.result.category]?.label ?? ''),
+  figure('category', 'Cat.', '', ({ found }) => categoryLabel(found.result.category)),
 ];
 
 type WallTableProps = {

@@ -7,12 +7,9 @@ import {
   stoppedWords,
   timeLeftWords,
 } from '../../../../src/features/runs/run-words.ts';
-import {
-  reserveWords,
-  slopeWords,
-  stageWords,
-} from '../../../../src/features/runs/result-words.ts';
+import { reserveWords, stageWords } from '../../../../src/features/runs/result-words.ts';
 import { aRunAnswer, aRunDetail } from '../../../support/run-answers.ts';
+import { slopeWords } from '../../../../src/lib/slope-words.ts';
 
 describe('a run in words', () => {
   it('tells where it stopped, why, and what still stands', () => {

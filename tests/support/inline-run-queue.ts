@@ -1,8 +1,8 @@
 import type { Sequelize } from 'sequelize';
-import { compute, type Asked, type Computed } from './compute.ts';
-import { doStep, failRun } from './do-step.ts';
-import type { RunQueue } from './run-queue.ts';
-import type { RunStep } from './run-step.ts';
+import { compute, type Asked, type Computed } from '../../server/runs/compute.ts';
+import { doStep, failRun } from '../../server/runs/do-step.ts';
+import type { RunQueue } from '../../server/runs/run-queue.ts';
+import type { RunStep } from '../../server/runs/run-step.ts';
 
 export type InlineRunQueue = RunQueue & {
   /** Resolves when there is nothing to do. */
@@ -11,7 +11,7 @@ export type InlineRunQueue = RunQueue & {
   readonly hold: (isHeld: boolean) => void;
 };
 
-/** Steps done one after the other in this very thread as soon as they are sent: for tests. */
+/** Steps done one after the other in this very thread as soon as they are sent. */
 export function inlineRunQueue(database: Sequelize): InlineRunQueue {
   const waiting: RunStep[] = [];
   let working: Promise<void> = Promise.resolve();
