@@ -1,6 +1,7 @@
 import type { Map as MapLibreMap } from 'maplibre-gl';
 import { buildingsInView } from './buildings-in-view.ts';
 import { bringIntoView, fitBounds, viewOf, zoomBy, type CameraBounds } from './camera.ts';
+import { onceStill } from './once-still.ts';
 
 /** What the page may ask of the map. */
 export type MapHandle = {
@@ -27,14 +28,7 @@ export function handleOfMap(map: MapLibreMap): MapHandle {
       bringIntoView(map, bounds);
     },
     buildingsInView: () => (map.loaded() ? buildingsInView(map) : null),
-    onceStill: (then) => {
-      void map.once('idle', then);
-      // without a frame the map never says that it is done
-      map.triggerRepaint();
-      return () => {
-        map.off('idle', then);
-      };
-    },
+    onceStill: (then) => onceStill(map, then),
     view: () => viewOf(map),
   };
 }

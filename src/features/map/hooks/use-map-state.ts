@@ -1,5 +1,6 @@
 import type { Map as MapLibreMap } from 'maplibre-gl';
 import { useEffect, useState } from 'react';
+import { onceStill } from '../once-still.ts';
 
 /** Whether the map is still drawing, and whether some of it did not come. */
 export type MapState = { readonly isBusy: boolean; readonly hasGaps: boolean };
@@ -11,23 +12,25 @@ export function useMapState(map: MapLibreMap): MapState & { readonly forgetGaps:
     function set(change: Partial<MapState>): void {
       setState((now) => ({ ...now, ...change }));
     }
+    let stopWaiting: (() => void) | null = null;
+    function waitUntilStill(): void {
+      stopWaiting ??= onceStill(map, () => {
+        stopWaiting = null;
+        set({ isBusy: false });
+      });
+    }
+    waitUntilStill();
     const subscriptions = [
       map.on('dataloading', () => {
         set({ isBusy: true });
-        // what changes nothing draws nothing, and without a frame the map never says that it is done
-        map.triggerRepaint();
-      }),
-      map.on('dataabort', () => {
-        map.triggerRepaint();
-      }),
-      map.on('idle', () => {
-        set({ isBusy: false });
+        waitUntilStill();
       }),
       map.on('error', () => {
         set({ hasGaps: true });
       }),
     ];
     return () => {
+      stopWaiting?.();
       for (const subscription of subscriptions) subscription.unsubscribe();
     };
   }, [map]);

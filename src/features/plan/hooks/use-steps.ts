@@ -25,21 +25,28 @@ export function useSteps({ handle, selected, isThere, goTo }: Around) {
   const [trail, setTrail] = useState<Trail | null>(null);
   const [awaited, setAwaited] = useState<1 | -1 | null>(null);
   const walk = useRef<Walk | null>(null);
+  // what was gone to and the page does not show as selected yet
+  const ahead = useRef<number | null>(null);
+  useEffect(() => {
+    ahead.current = null;
+  }, [selected]);
 
   /** Null while it cannot be told. */
   function idsNow(): readonly number[] | null {
     if (trail !== null) return trail.ids;
-    const seen = isThere ? (handle?.buildingsInView() ?? null) : null;
+    const isSettled = isThere && ahead.current === null;
+    const seen = isSettled ? (handle?.buildingsInView() ?? null) : null;
     const { current } = walk;
-    if (selected === null || current?.at !== selected) return seen;
+    if (current?.at !== (ahead.current ?? selected)) return seen;
     return seen === null || seen.includes(current.at) ? current.ids : seen;
   }
   function stepNow(by: 1 | -1): boolean {
     const ids = idsNow();
     if (ids === null) return false;
-    const next = stepThrough(ids, selected, by);
+    const next = stepThrough(ids, ahead.current ?? selected, by);
     if (next === null) return true;
     walk.current = { ids, at: next };
+    ahead.current = next === selected ? null : next;
     goTo(next);
     return true;
   }
@@ -48,11 +55,11 @@ export function useSteps({ handle, selected, isThere, goTo }: Around) {
     setAwaited(null);
   });
   useEffect(() => {
-    if (awaited === null || handle === null) return undefined;
+    if (awaited === null || handle === null || !isThere) return undefined;
     return handle.onceStill(() => {
       arrive();
     });
-  }, [awaited, handle]);
+  }, [awaited, handle, isThere]);
 
   return {
     trail,

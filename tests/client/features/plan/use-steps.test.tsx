@@ -24,11 +24,17 @@ function aMap(seen: readonly number[] | null) {
   return map;
 }
 
-function walkOn(map: ReturnType<typeof aMap>, start: number | null = null) {
+/** A page that shows what is selected at once, or only once it is told to. */
+function walkOn(map: ReturnType<typeof aMap>, start: number | null = null, isQuick = true) {
+  const asked: number[] = [];
   const { result } = renderHook(() => {
     const [selected, select] = useState(start);
     const [isThere, setThere] = useState(true);
-    const steps = useSteps({ handle: map, selected, isThere, goTo: select });
+    function goTo(id: number): void {
+      asked.push(id);
+      if (isQuick) select(id);
+    }
+    const steps = useSteps({ handle: map, selected, isThere, goTo });
     return { selected, select, setThere, steps };
   });
   return {
@@ -49,6 +55,7 @@ function walkOn(map: ReturnType<typeof aMap>, start: number | null = null) {
       });
     },
     selected: () => result.current.selected,
+    asked,
   };
 }
 
@@ -85,6 +92,37 @@ describe('useSteps', () => {
     expect(walk.step()).toBe(22);
     walk.select(null);
     expect(walk.step()).toBe(20);
+  });
+
+  it('goes on from where it was going, before the page shows it', () => {
+    const map = aMap([3, 5, 9]);
+    const walk = walkOn(map, null, false);
+    walk.step();
+    map.seen = [77];
+    walk.step();
+    walk.step();
+    walk.step(-1);
+    expect(walk.asked).toEqual([3, 5, 9, 5]);
+    // somebody else's choice ends it
+    walk.select(77);
+    walk.step(-1);
+    expect(walk.asked.at(-1)).toBe(77);
+  });
+
+  it('keeps a step while what is selected is not there', () => {
+    const map = aMap([3, 5]);
+    const walk = walkOn(map, 3);
+    walk.setThere(false);
+    expect(walk.step()).toBe(3);
+    act(() => {
+      map.rest([3, 5]);
+    });
+    expect(walk.selected()).toBe(3);
+    walk.setThere(true);
+    act(() => {
+      map.rest([3, 5]);
+    });
+    expect(walk.selected()).toBe(5);
   });
 
   it('keeps one step until the map is there', () => {
