@@ -13,6 +13,7 @@ const FLAGS = [
   '--disable-sync',
   '--use-angle=swiftshader',
   '--enable-unsafe-swiftshader',
+  '--disable-gpu-rasterization',
 ];
 
 type Stage = {
