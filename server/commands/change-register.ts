@@ -6,8 +6,9 @@ import { AppError } from '../errors.ts';
 import { groundUnder } from '../ground/ground-under.ts';
 import { RegisterChange } from '../models/register-change.ts';
 import type { Scheme } from '../models/scheme.ts';
+import { ahead } from '../register/ahead.ts';
 import { changeBuildings } from '../register/change-buildings.ts';
-import { createBuildings } from '../register/create-buildings.ts';
+import { createBuildings, placedBuildings } from '../register/create-buildings.ts';
 import type { Editing } from '../register/editing.ts';
 import { inBatches } from '../register/in-batches.ts';
 import type { RegisterCause, RegisterEdits } from '../register/register-edits.ts';
@@ -50,7 +51,7 @@ async function edit(editing: Editing, edits: RegisterEdits): Promise<Done> {
     await removeBuildings(editing, some);
     done.removed += some.length;
   }
-  for await (const some of inBatches(edits.changed)) {
+  for await (const some of ahead(inBatches(edits.changed))) {
     done.ids.push(...(await changeBuildings(editing, some)));
     done.changed += some.length;
   }
@@ -58,7 +59,7 @@ async function edit(editing: Editing, edits: RegisterEdits): Promise<Done> {
     done.ids.push(...(await restoreBuildings(editing, some)));
     done.created += some.length;
   }
-  for await (const some of inBatches(edits.created)) {
+  for await (const some of ahead(placedBuildings(editing, inBatches(edits.created)))) {
     done.ids.push(...(await createBuildings(editing, some)));
     done.created += some.length;
   }

@@ -20,6 +20,7 @@ import { rowRanges } from '../models/row-ranges.ts';
 import { Scheme } from '../models/scheme.ts';
 import { findFirstCorners, findStagedRows } from '../models/staged-rows.ts';
 import type { UploadRow } from '../importers/upload.ts';
+import { ahead } from '../register/ahead.ts';
 import type { JobTools } from './job.ts';
 import { noteOverlaps } from './note-overlaps.ts';
 import { createProgress } from './progress.ts';
@@ -57,7 +58,7 @@ async function memoryOf(
   };
 }
 
-async function checkBatch(
+async function checkedOf(
   { tools: { database }, row, scheme }: Checking,
   memory: CheckMemory,
   staged: readonly UploadRow[],
@@ -72,9 +73,16 @@ async function checkBatch(
   const drawn = withFootprints ? [...known.values()].map(({ id }) => id) : [];
   const earlier = await findEarlierFootprints(database, drawn);
   const joining = { settle: row.options.settle, mayCreate: withFootprints, removed, earlier };
-  const checked = judged.map((one) => joinRow(one, known.get(one.reference ?? ''), joining));
-  await writeCheckedRows(database, row.id, checked);
-  return checked;
+  return judged.map((one) => joinRow(one, known.get(one.reference ?? ''), joining));
+}
+
+async function* checkedRows(checking: Checking, memory: CheckMemory): AsyncGenerator<CheckedRow[]> {
+  const { tools, row } = checking;
+  for await (const range of rowRanges(tools.database, row.id, AT_ONCE)) {
+    tools.signal.throwIfAborted();
+    const staged = await findStagedRows(tools.database, row.id, range);
+    if (staged.length > 0) yield await checkedOf(checking, memory, staged);
+  }
 }
 
 async function checkRows(checking: Checking, memory: CheckMemory): Promise<StandingBuildings> {
@@ -82,12 +90,10 @@ async function checkRows(checking: Checking, memory: CheckMemory): Promise<Stand
   const standing = createStandingBuildings();
   const progress = createProgress(row.id);
   let done = 0;
-  for await (const range of rowRanges(tools.database, row.id, AT_ONCE)) {
-    tools.signal.throwIfAborted();
-    const staged = await findStagedRows(tools.database, row.id, range);
-    if (staged.length === 0) continue;
-    (await checkBatch(checking, memory, staged)).forEach(standing.add);
-    done += staged.length;
+  for await (const checked of ahead(checkedRows(checking, memory))) {
+    await writeCheckedRows(tools.database, row.id, checked);
+    checked.forEach(standing.add);
+    done += checked.length;
     await progress(done);
   }
   return standing;

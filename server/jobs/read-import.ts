@@ -1,12 +1,14 @@
 import { IMPORT_LIMITS } from '../../shared/schemas/imports.ts';
 import { AppError } from '../errors.ts';
 import { openUpload } from '../importers/open-upload.ts';
-import type { Upload, UploadRow } from '../importers/upload.ts';
+import type { Upload } from '../importers/upload.ts';
 import { createColumnCollector } from '../imports/column-collector.ts';
 import { firstOptions } from '../imports/first-options.ts';
 import { createPointSample } from '../imports/point-sample.ts';
 import { RegisterImport } from '../models/register-import.ts';
 import { insertStagedRows } from '../models/staged-rows.ts';
+import { ahead } from '../register/ahead.ts';
+import { inBatches } from '../register/in-batches.ts';
 import type { Job, JobTools } from './job.ts';
 import { createProgress } from './progress.ts';
 import { removeReadFile } from './remove-file.ts';
@@ -32,23 +34,19 @@ async function stageRows(
 ): Promise<Reading> {
   const [collector, sample] = [createColumnCollector(upload.columns), createPointSample()];
   const progress = createProgress(importId);
-  let [count, batch]: [number, UploadRow[]] = [0, []];
-  async function put(): Promise<void> {
+  let count = 0;
+  for await (const batch of ahead(inBatches(upload.rows(), AT_ONCE))) {
+    count += batch.length;
+    if (count > IMPORT_LIMITS.rows) throw tooLong();
+    for (const { properties, geometry } of batch) {
+      collector.add(properties);
+      const corner = geometry?.[0]?.[0]?.[0];
+      if (corner !== undefined) sample.add(corner);
+    }
     signal.throwIfAborted();
     await insertStagedRows(database, importId, batch);
-    batch = [];
     await progress(count);
   }
-  for await (const row of upload.rows()) {
-    count += 1;
-    if (count > IMPORT_LIMITS.rows) throw tooLong();
-    collector.add(row.properties);
-    const corner = row.geometry?.[0]?.[0]?.[0];
-    if (corner !== undefined) sample.add(corner);
-    batch.push(row);
-    if (batch.length === AT_ONCE) await put();
-  }
-  if (batch.length > 0) await put();
   return { count, columns: collector.columns(), points: sample.points() };
 }
 

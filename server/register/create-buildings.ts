@@ -8,7 +8,8 @@ import { writeFootprints } from '../models/footprints.ts';
 import { levelWriter, snapshot, type Editing } from './editing.ts';
 import type { CreatedBuilding } from './register-edits.ts';
 
-type Placed = {
+/** A building that is new, with all that follows from its footprint. */
+export type Placed = {
   readonly state: BuildingState;
   readonly footprint: FootprintRings;
   readonly lonLat: FootprintRings;
@@ -34,14 +35,24 @@ async function placed(editing: Editing, building: CreatedBuilding): Promise<Plac
   return { state, footprint, lonLat };
 }
 
+/** Lists of new buildings with all that follows from their footprints. */
+export async function* placedBuildings(
+  editing: Editing,
+  lists: AsyncIterable<readonly CreatedBuilding[]>,
+): AsyncGenerator<readonly Placed[]> {
+  for await (const buildings of lists) {
+    const rows: Placed[] = [];
+    for (const building of buildings) rows.push(await placed(editing, building));
+    yield rows;
+  }
+}
+
 /** Brings some buildings in, with their footprints and the beginning of their histories; gives their numbers. */
 export async function createBuildings(
   editing: Editing,
-  buildings: readonly CreatedBuilding[],
+  rows: readonly Placed[],
 ): Promise<number[]> {
   const { database, schemeId, changeId, transaction } = editing;
-  const rows: Placed[] = [];
-  for (const building of buildings) rows.push(await placed(editing, building));
   const states = rows.map(({ state }) => state);
   const ids = await insertBuildingStates(database, schemeId, states, transaction);
   const numbered = rows.map((row, index) => ({ ...row, id: ids[index] ?? 0 }));

@@ -4,11 +4,14 @@ import type { Many } from './register-edits.ts';
 const AT_ONCE = 2000;
 
 /** What comes one after the other, in lists of a bounded length. */
-export async function* inBatches<T>(many: Many<T> | undefined): AsyncGenerator<T[]> {
+export async function* inBatches<T>(
+  many: Many<T> | undefined,
+  size: number = AT_ONCE,
+): AsyncGenerator<T[]> {
   let batch: T[] = [];
   for await (const one of many ?? []) {
     batch.push(one);
-    if (batch.length < AT_ONCE) continue;
+    if (batch.length < size) continue;
     yield batch;
     batch = [];
   }
