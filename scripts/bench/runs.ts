@@ -4,11 +4,21 @@ import { startRun } from '../../server/commands/start-run.ts';
 import { readEnv } from '../../server/env.ts';
 import { findMapText } from '../../server/models/run-results.ts';
 import { RunState } from '../../server/models/run-state.ts';
+import { Scheme } from '../../server/models/scheme.ts';
 import { openServices } from '../../server/open-services.ts';
+import { registerOf } from '../../server/register/register-of.ts';
 import type { Services } from '../../server/services.ts';
+import { RESULT_COLUMN_NAMES } from '../../shared/schemas/result-columns.ts';
+import { benchPages, type NamedFilter } from './register-pages.ts';
 import { townToRun } from './town-to-run.ts';
 
 const SIZES = [2000, 20_000, 100_000] as const;
+
+const FOUND: readonly NamedFilter[] = [
+  ['stage 3', { any: { stage: ['3'] } }],
+  ['category at the high end', { any: { categoryHigh: ['2', '3'] } }],
+  ['settlement', { ranges: { settlement: { from: 10 } } }],
+];
 
 function say(count: number, words: string): void {
   console.log(`run, ${count} buildings: ${words}`);
@@ -70,6 +80,9 @@ export async function benchRuns(url: string): Promise<void> {
   );
   try {
     for (const count of SIZES) await benchSize(services, count);
+    const scheme = await Scheme.findOne({ order: [['createdAt', 'desc']], rejectOnEmpty: true });
+    const bench = { services, register: await registerOf(services, scheme) };
+    await benchPages(bench, RESULT_COLUMN_NAMES, FOUND);
   } finally {
     await closeServices();
   }

@@ -1,9 +1,12 @@
-import { BUILDING_FIELD_NAMES } from '../../shared/schemas/building-fields.ts';
-import { REGISTER_COLUMNS, type RegisterFilter } from '../../shared/schemas/register.ts';
-import { headingOf } from './export-job.ts';
+import {
+  REGISTER_COLUMNS,
+  REGISTER_FIELDS,
+  type RegisterFilter,
+} from '../../shared/schemas/register.ts';
+import { headingOf } from './register-columns.ts';
 
 function anyInWords({ any = {}, unknown = [] }: RegisterFilter): string[] {
-  const among = BUILDING_FIELD_NAMES.flatMap((field) => {
+  const among = REGISTER_FIELDS.flatMap((field) => {
     const values = any[field];
     if (values === undefined) return [];
     return [`${headingOf(field)} is ${values.map((value) => value ?? 'unknown').join(' or ')}`];

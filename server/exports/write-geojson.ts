@@ -1,6 +1,6 @@
 import { polygonArea } from '../../shared/geometry/polygon-area.ts';
 import type { FootprintRings } from '../models/building-footprint.ts';
-import { valueOf, type ExportedBuilding, type ExportJob } from './export-job.ts';
+import type { ExportColumn, ExportedRow, ExportFile } from './export-file.ts';
 
 type Ring = readonly (readonly [number, number])[];
 
@@ -18,22 +18,25 @@ function geometryOf(lonLat: FootprintRings): object | null {
   return { type: 'MultiPolygon', coordinates: parts };
 }
 
-function featureOf({ building, lonLat = [] }: ExportedBuilding, { columns }: ExportJob): object {
+function featureOf<Row>(
+  { reference, row, lonLat = [] }: ExportedRow<Row>,
+  columns: readonly ExportColumn<Row>[],
+): object {
   return {
     type: 'Feature',
-    id: building.reference,
-    properties: Object.fromEntries(columns.map((column) => [column, valueOf(building, column)])),
+    id: reference,
+    properties: Object.fromEntries(columns.map(({ name, property }) => [name, property(row)])),
     geometry: geometryOf(lonLat),
   };
 }
 
-/** The register as GeoJSON in longitude and latitude, piece by piece. */
-export async function* geojsonText(job: ExportJob): AsyncGenerator<string> {
+/** Buildings as GeoJSON in longitude and latitude, piece by piece, then what is said about them. */
+export async function* geojsonText<Row>(file: ExportFile<Row>): AsyncGenerator<string> {
   yield '{"type":"FeatureCollection","features":[';
   let separator = '\n';
-  for await (const one of job.buildings) {
-    yield separator + JSON.stringify(featureOf(one, job));
+  for await (const one of file.rows) {
+    yield separator + JSON.stringify(featureOf(one, file.columns));
     separator = ',\n';
   }
-  yield '\n]}\n';
+  yield `\n],"about":${JSON.stringify(Object.fromEntries(file.about))}}\n`;
 }

@@ -10,14 +10,14 @@ type Value = string | number;
 /** The value of a column that stands at a place of its order; undefined where fewer are known. */
 async function valueAt(
   database: Sequelize,
-  { where, bind }: Condition,
+  { from, where, bind }: Condition,
   { column, descending }: RegisterSort,
   place: number,
 ): Promise<Value | undefined> {
   const { name } = registerColumn(column);
   const direction = descending ? 'desc' : 'asc';
   const [found] = await database.query<{ value: Value }>(
-    `select ${name} as value from buildings where ${where} and ${name} is not null
+    `select ${name} as value from ${from} where ${where} and ${name} is not null
      order by ${name}${collationSql(column)} ${direction} offset ${place} limit 1`,
     { type: QueryTypes.SELECT, bind: [...bind] },
   );
@@ -29,7 +29,12 @@ async function valueAt(
  * many as are wanted of those that have it. Only what is alike has to be ordered by reference, which the
  * index of references does.
  */
-function nearSql(where: string, sort: RegisterSort, last: string | undefined, most: number) {
+function nearSql(
+  { from, where }: Condition,
+  sort: RegisterSort,
+  last: string | undefined,
+  most: number,
+) {
   const { name } = registerColumn(sort.column);
   const collation = collationSql(sort.column);
   const isBefore =
@@ -37,9 +42,9 @@ function nearSql(where: string, sort: RegisterSort, last: string | undefined, mo
       ? `${name} is not null`
       : `${name}${collation} ${sort.descending ? '>' : '<'} ${last}`;
   const isAtEnd = last === undefined ? `${name} is null` : `${name}${collation} = ${last}`;
-  return `(select * from buildings where ${where} and ${isBefore})
+  return `(select * from ${from} where ${where} and ${isBefore})
     union all
-    (select * from buildings where ${where} and ${isAtEnd}
+    (select * from ${from} where ${where} and ${isAtEnd}
      order by reference collate natural_order, id limit ${most})`;
 }
 
@@ -50,23 +55,20 @@ export async function findFirstRows(
   sort: RegisterSort,
   { offset, limit }: { readonly offset: number; readonly limit: number },
 ): Promise<ListedBuilding[]> {
-  const { where, bind } = condition;
+  const { from, where, bind } = condition;
   const most = offset + limit;
   const page = `order by ${orderSql(sort)} offset ${offset} limit ${limit}`;
   if (sort.column === 'reference') {
-    return database.query<ListedBuilding>(
-      `select ${LISTED} from buildings where ${where} ${page}`,
-      {
-        type: QueryTypes.SELECT,
-        bind: [...bind],
-      },
-    );
+    return database.query<ListedBuilding>(`select ${LISTED} from ${from} where ${where} ${page}`, {
+      type: QueryTypes.SELECT,
+      bind: [...bind],
+    });
   }
   const value = await valueAt(database, condition, sort, most - 1);
   const { type } = registerColumn(sort.column);
   const last = value === undefined ? undefined : `$${bind.length + 1}::${type}`;
   return database.query<ListedBuilding>(
-    `select ${LISTED} from (${nearSql(where, sort, last, most)}) as near ${page}`,
+    `select ${LISTED} from (${nearSql(condition, sort, last, most)}) as near ${page}`,
     { type: QueryTypes.SELECT, bind: value === undefined ? [...bind] : [...bind, value] },
   );
 }

@@ -32,11 +32,11 @@ async function packed(
 /** The numbers of all buildings that are meant, by reference, four bytes each. */
 export function findReferenceOrder(
   database: Sequelize,
-  { where, bind }: Condition,
+  { from, where, bind }: Condition,
   descending: boolean,
 ): Promise<Buffer> {
   const order = orderSql({ column: 'reference', descending });
-  return packed(database, `select id from buildings where ${where} order by ${order}`, bind);
+  return packed(database, `select id from ${from} where ${where} order by ${order}`, bind);
 }
 
 /** Buildings that are alike in a column, group after group. */
@@ -55,7 +55,7 @@ export type RegisterGroups = {
  */
 export async function findRegisterGroups(
   database: Sequelize,
-  { where, bind }: Condition,
+  { from, where, bind }: Condition,
   column: RegisterColumn,
 ): Promise<RegisterGroups> {
   const { name } = registerColumn(column);
@@ -64,7 +64,7 @@ export async function findRegisterGroups(
        coalesce(sum(size) filter (where value is null), 0)::integer as unknown
      from (
        select value, count(*)::integer as size, string_agg(int4send(id), '') as ids
-       from (select id, ${name}${collationSql(column)} as value from buildings where ${where}) as meant
+       from (select id, ${name}${collationSql(column)} as value from ${from} where ${where}) as meant
        group by value order by value nulls last
      ) as grouped`,
     { type: QueryTypes.SELECT, bind: [...bind] },
@@ -74,6 +74,9 @@ export async function findRegisterGroups(
 }
 
 /** The numbers of all buildings that are meant, ascending, four bytes each. */
-export function findRegisterIds(database: Sequelize, { where, bind }: Condition): Promise<Buffer> {
-  return packed(database, `select id from buildings where ${where} order by id`, bind);
+export function findRegisterIds(
+  database: Sequelize,
+  { from, where, bind }: Condition,
+): Promise<Buffer> {
+  return packed(database, `select id from ${from} where ${where} order by id`, bind);
 }

@@ -1,27 +1,31 @@
 import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
-import type { BuildingField } from '../../shared/schemas/building-fields.ts';
+import type { RegisterField } from '../../shared/schemas/register.ts';
 import type { ListedBuilding } from '../presenters/building-values.ts';
-import { BUILDING_COLUMNS } from './building-columns.ts';
-import { LISTED } from './register-columns.ts';
-import type { Condition } from './register-condition.ts';
+import { LISTED, registerField } from './register-columns.ts';
+import type { Condition, RegisterOf } from './register-condition.ts';
+import { buildingsWithResults } from './result-columns.ts';
 
 /** Rows by their numbers, in the order of the numbers; one that was taken out meanwhile is left out. */
 export async function findRows(
   database: Sequelize,
+  { runId }: Pick<RegisterOf, 'runId'>,
   ids: readonly number[],
 ): Promise<ListedBuilding[]> {
   const rows = await database.query<ListedBuilding>(
-    `select ${LISTED} from buildings where id = any($1) and removed_at is null`,
-    { type: QueryTypes.SELECT, bind: [ids] },
+    `select ${LISTED} from ${buildingsWithResults('$2')} where id = any($1) and removed_at is null`,
+    { type: QueryTypes.SELECT, bind: [ids, runId] },
   );
   const byId = new Map(rows.map((row) => [row.id, row]));
   return ids.flatMap((id) => byId.get(id) ?? []);
 }
 
 /** How many buildings are meant. */
-export async function countRows(database: Sequelize, { where, bind }: Condition): Promise<number> {
+export async function countRows(
+  database: Sequelize,
+  { from, where, bind }: Condition,
+): Promise<number> {
   const [row] = await database.query<{ found: number }>(
-    `select count(*)::integer as found from buildings where ${where}`,
+    `select count(*)::integer as found from ${from} where ${where}`,
     { type: QueryTypes.SELECT, bind: [...bind] },
   );
   return row?.found ?? 0;
@@ -30,13 +34,13 @@ export async function countRows(database: Sequelize, { where, bind }: Condition)
 /** Which values a field has, the commonest first. */
 export async function findChoices(
   database: Sequelize,
-  { where, bind }: Condition,
-  field: BuildingField,
+  { from, where, bind }: Condition,
+  field: RegisterField,
 ): Promise<{ value: string | null; count: number }[]> {
-  const { name } = BUILDING_COLUMNS[field];
+  const { name } = registerField(field);
   return database.query<{ value: string | null; count: number }>(
     `select ${name}::text as value, count(*)::integer as count
-     from buildings where ${where}
+     from ${from} where ${where}
      group by ${name} order by count desc, ${name} nulls last limit 50`,
     { type: QueryTypes.SELECT, bind: [...bind] },
   );
@@ -45,11 +49,11 @@ export async function findChoices(
 /** The buildings that are meant, each with its version. */
 export async function findVersions(
   database: Sequelize,
-  { where, bind }: Condition,
+  { from, where, bind }: Condition,
   transaction: Transaction,
 ): Promise<{ id: number; version: number }[]> {
   return database.query<{ id: number; version: number }>(
-    `select id, version from buildings where ${where} order by id`,
+    `select id, version from ${from} where ${where} order by id`,
     { type: QueryTypes.SELECT, bind: [...bind], transaction },
   );
 }

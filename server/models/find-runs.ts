@@ -1,5 +1,6 @@
 import { QueryTypes, type Sequelize } from 'sequelize';
 import { AppError } from '../errors.ts';
+import { SHOWN_RUN } from './find-shown-run.ts';
 
 /** A run with where it stands and what has changed since, as its presenter wants it. */
 export type FoundRun = {
@@ -26,10 +27,6 @@ export type FoundRun = {
 
 const MOST = 100;
 
-/** The run that a scheme's register and plan show: the newest that is complete. */
-const SHOWN = `select r.id from runs r join run_states s on s.run_id = r.id
-  where r.scheme_id = $1 and s.state = 'complete' order by r.number desc limit 1`;
-
 const RUNS = `
   select r.id, r.number, r.alignment_id as "alignmentId", r.alignment_version as "alignmentVersion",
     r.option_name as "optionName", r.rules_version as "rulesVersion",
@@ -43,7 +40,7 @@ const RUNS = `
     a.version is distinct from r.alignment_version as "optionChanged",
     (select max(version) from scheme_rules where scheme_id = r.scheme_id) <> r.rules_version
       as "rulesChanged",
-    coalesce(r.id = (${SHOWN}), false) as "isShown"
+    coalesce(r.id = (${SHOWN_RUN}), false) as "isShown"
   from runs r
   join run_states s on s.run_id = r.id
   join schemes scheme on scheme.id = r.scheme_id

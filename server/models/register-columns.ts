@@ -1,12 +1,23 @@
 import { BUILDING_FIELD_NAMES } from '../../shared/schemas/building-fields.ts';
-import { REGISTER_COLUMNS, type RegisterColumn } from '../../shared/schemas/register.ts';
+import {
+  REGISTER_COLUMNS,
+  type RegisterColumn,
+  type RegisterField,
+} from '../../shared/schemas/register.ts';
+import { isResultColumn } from '../../shared/schemas/result-columns.ts';
 import { BUILDING_COLUMNS, type BuildingColumn } from './building-columns.ts';
+import { RESULT_SELECTION, resultColumn } from './result-columns.ts';
+
+/** Where each field of the register is kept, of a building or of what was found of it. */
+export function registerField(field: RegisterField): BuildingColumn {
+  return isResultColumn(field) ? resultColumn(field) : BUILDING_COLUMNS[field];
+}
 
 /** Where each column of the register is kept: a closed list, so that no word of a request is SQL. */
 export function registerColumn(column: RegisterColumn): BuildingColumn {
   if (column === 'reference') return { name: 'reference', type: 'text' };
   if (column === 'area') return { name: 'area', type: 'double precision' };
-  return BUILDING_COLUMNS[column];
+  return registerField(column);
 }
 
 /** The columns that hold numbers, which ranges are asked of. */
@@ -23,4 +34,5 @@ export const LISTED = [
   'ground_level_from as "groundLevelFrom"',
   ...['west', 'south', 'east', 'north'],
   ...BUILDING_FIELD_NAMES.map((field) => `${BUILDING_COLUMNS[field].name} as "${field}"`),
+  RESULT_SELECTION,
 ].join(', ');

@@ -1,12 +1,23 @@
 import { STIFF_CONSTRUCTIONS } from '../../shared/building/stiffness-of-construction.ts';
-import { BUILDING_FIELD_NAMES, type BuildingField } from '../../shared/schemas/building-fields.ts';
-import { REGISTER_COLUMNS, type RegisterFilter } from '../../shared/schemas/register.ts';
+import {
+  REGISTER_COLUMNS,
+  REGISTER_FIELDS,
+  type RegisterField,
+  type RegisterFilter,
+} from '../../shared/schemas/register.ts';
 import { AppError } from '../errors.ts';
-import { BUILDING_COLUMNS } from './building-columns.ts';
-import { NUMBER_COLUMNS, registerColumn } from './register-columns.ts';
+import { NUMBER_COLUMNS, registerColumn, registerField } from './register-columns.ts';
+import { buildingsWithResults } from './result-columns.ts';
 
-/** A condition in SQL with the values that it is asked with. */
-export type Condition = { readonly where: string; readonly bind: readonly unknown[] };
+/** Buildings that are meant, in SQL: where they stand, a condition, and the values that it is asked with. */
+export type Condition = {
+  readonly from: string;
+  readonly where: string;
+  readonly bind: readonly unknown[];
+};
+
+/** A register: that of a scheme, with the results of one of its runs or of none. */
+export type RegisterOf = { readonly schemeId: string; readonly runId: string | null };
 
 type Bind = (value: unknown) => string;
 
@@ -23,8 +34,8 @@ function assumedSql(bind: Bind): string {
     or ((e_over_g is null or poisson is null) and not ${stiff}))`;
 }
 
-function anySql(field: BuildingField, values: readonly (string | null)[], bind: Bind): string {
-  const { name, type } = BUILDING_COLUMNS[field];
+function anySql(field: RegisterField, values: readonly (string | null)[], bind: Bind): string {
+  const { name, type } = registerField(field);
   const texts = values.filter((value) => value !== null);
   const known =
     type === 'text'
@@ -75,24 +86,27 @@ function placeSql({ within, ids, except, importId }: RegisterFilter, bind: Bind)
   return conditions;
 }
 
-/** The buildings of a scheme's register that a filter means. */
-export function registerCondition(schemeId: string, filter: RegisterFilter): Condition {
-  const values: unknown[] = [schemeId];
+/** The buildings of a register that a filter means. */
+export function registerCondition(
+  { schemeId, runId }: RegisterOf,
+  filter: RegisterFilter,
+): Condition {
+  const values: unknown[] = [schemeId, runId];
   const bind: Bind = (value) => `$${values.push(value)}`;
   const { search, any = {}, ranges = {}, unknown = [], assumed } = filter;
   const conditions = ['scheme_id = $1', 'removed_at is null'];
   if (search !== undefined && search !== '') {
     conditions.push(`words @@ ${wantedWords(bind(search))}`);
   }
-  for (const field of BUILDING_FIELD_NAMES) {
+  for (const field of REGISTER_FIELDS) {
     const wanted = any[field];
     if (wanted !== undefined) conditions.push(anySql(field, wanted, bind));
   }
   conditions.push(...rangesSql(ranges, bind));
-  conditions.push(...unknown.map((field) => `${BUILDING_COLUMNS[field].name} is null`));
+  conditions.push(...unknown.map((field) => `${registerField(field).name} is null`));
   if (assumed !== undefined) {
     conditions.push(assumed ? assumedSql(bind) : `not ${assumedSql(bind)}`);
   }
   conditions.push(...placeSql(filter, bind));
-  return { where: conditions.join('\n and '), bind: values };
+  return { from: buildingsWithResults('$2'), where: conditions.join('\n and '), bind: values };
 }

@@ -94,7 +94,8 @@ export async function findMapText(database: Sequelize, runId: string): Promise<s
   return row?.figures ?? '{}';
 }
 
-const RECORD = ENTRIES.map(([name, [column]]) => `${column} as "${name}"`).join(', ');
+/** The columns of a result, by the names of the record. */
+export const RESULT_RECORD = ENTRIES.map(([name, [column]]) => `${column} as "${name}"`).join(', ');
 
 /** What a run recorded of one building; undefined where it was not in it, or is not worked out yet. */
 export async function findResult(
@@ -103,7 +104,7 @@ export async function findResult(
   buildingId: number,
 ): Promise<RunResult | undefined> {
   const [row] = await database.query<RunResult>(
-    `select ${RECORD} from run_results where run_id = $1 and building_id = $2`,
+    `select ${RESULT_RECORD} from run_results where run_id = $1 and building_id = $2`,
     { type: QueryTypes.SELECT, bind: [runId, buildingId] },
   );
   return row;

@@ -1,15 +1,36 @@
 import { completeAttributes } from '../../shared/building/assumed-attributes.ts';
 import { knownOfBuilding } from '../../shared/building/known-of-building.ts';
 import type { RegisterRow } from '../../shared/schemas/register.ts';
+import type { ResultColumn } from '../../shared/schemas/result-columns.ts';
 import type { Building } from '../models/building.ts';
 
-type Values = Omit<RegisterRow, 'id' | 'reference' | 'centre'>;
+type Values = Omit<RegisterRow, 'id' | 'reference' | 'centre' | ResultColumn>;
 
-/** The fields of a building as lists and pages show them. */
+type Results = Pick<RegisterRow, ResultColumn>;
+
+/** The fields of a building as lists show them, with what a run found of it. */
 export type ListedBuilding = Pick<
   Building,
   Exclude<keyof Values, 'assumed'> | 'id' | 'reference' | 'west' | 'south' | 'east' | 'north'
->;
+> &
+  Results;
+
+/** What leaves the server of a run's findings in a list. */
+export function presentResults(building: Results): Results {
+  return {
+    stage: building.stage,
+    categoryLow: building.categoryLow,
+    category: building.category,
+    categoryHigh: building.categoryHigh,
+    strain: building.strain,
+    settlement: building.settlement,
+    slope: building.slope,
+    breakpoint: building.breakpoint,
+    reserve: building.reserve,
+    settled: building.settled,
+    heldBy: building.heldBy,
+  };
+}
 
 /** What leaves the server of a building's values, with what the method has to assume. */
 export function presentValues(building: Pick<Building, Exclude<keyof Values, 'assumed'>>): Values {

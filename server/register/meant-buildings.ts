@@ -1,6 +1,7 @@
 import type { Sequelize, Transaction } from 'sequelize';
 import type { RegisterFilter } from '../../shared/schemas/register.ts';
 import { AppError } from '../errors.ts';
+import { findShownRun } from '../models/find-shown-run.ts';
 import { findVersions } from '../models/find-register-rows.ts';
 import { registerCondition } from '../models/register-condition.ts';
 import type { VersionedBuilding } from './register-edits.ts';
@@ -14,7 +15,8 @@ export async function meantBuildings(
   { filter, expected }: Meant,
   transaction: Transaction,
 ): Promise<VersionedBuilding[]> {
-  const found = await findVersions(database, registerCondition(schemeId, filter), transaction);
+  const register = { schemeId, runId: await findShownRun(database, schemeId, transaction) };
+  const found = await findVersions(database, registerCondition(register, filter), transaction);
   if (found.length === expected) return found;
   const message = `These are ${found.length} buildings now, not ${expected}. Look at them again.`;
   throw new AppError('conflict', message);

@@ -10,9 +10,9 @@ import {
 } from '../models/find-register-order.ts';
 import { countRows } from '../models/find-register-rows.ts';
 import { registerCondition } from '../models/register-condition.ts';
-import type { Scheme } from '../models/scheme.ts';
 import type { Services } from '../services.ts';
 import { orderGroups } from './order-groups.ts';
+import type { Register } from './register-of.ts';
 
 type Which = { readonly filter: RegisterFilter; readonly sort: RegisterSort };
 
@@ -40,36 +40,42 @@ function unpacked(bytes: Buffer): PackedIds {
   };
 }
 
-function orderKey({ id, registerVersion }: Scheme, { filter, sort }: Which): string {
-  return `order/${id}/${registerVersion}/${JSON.stringify([filter, sort])}`;
+function keyOf(what: string, { schemeId, version, runId }: Register, asked: unknown): string {
+  return `${what}/${schemeId}/${version}/${runId}/${JSON.stringify(asked)}`;
 }
 
 /** Whether the buildings that a filter means have been put in order already. */
 export function isOrdered(
   { tiles }: Pick<Services, 'tiles'>,
-  scheme: Scheme,
+  register: Register,
   which: Which,
 ): boolean {
-  return tiles.has(orderKey(scheme, which));
+  return tiles.has(keyOf('order', register, which));
 }
 
 type Kept = Pick<Services, 'database' | 'tiles'>;
 
 /** By one column, then by reference: the order by reference is that of the whole register, kept for all. */
-async function makeOrder(services: Kept, scheme: Scheme, { filter, sort }: Which): Promise<Buffer> {
+async function makeOrder(
+  services: Kept,
+  register: Register,
+  { filter, sort }: Which,
+): Promise<Buffer> {
   const { database } = services;
   const { column, descending } = sort;
-  const condition = registerCondition(scheme.id, filter);
+  const condition = registerCondition(register, filter);
   if (column === 'reference') return findReferenceOrder(database, condition, descending);
   const [groups, references] = await Promise.all([
     findRegisterGroups(database, condition, column),
-    packedOrder(services, scheme, { filter: {}, sort: REGISTER_ORDER }),
+    packedOrder(services, register, { filter: {}, sort: REGISTER_ORDER }),
   ]);
   return orderGroups(groups, references, descending);
 }
 
-function packedOrder(services: Kept, scheme: Scheme, which: Which): Promise<Buffer> {
-  return services.tiles.get(orderKey(scheme, which), () => makeOrder(services, scheme, which));
+function packedOrder(services: Kept, register: Register, which: Which): Promise<Buffer> {
+  return services.tiles.get(keyOf('order', register, which), () =>
+    makeOrder(services, register, which),
+  );
 }
 
 /**
@@ -78,19 +84,19 @@ function packedOrder(services: Kept, scheme: Scheme, which: Which): Promise<Buff
  */
 export async function registerOrder(
   services: Kept,
-  scheme: Scheme,
+  register: Register,
   which: Which,
 ): Promise<PackedIds> {
-  return unpacked(await packedOrder(services, scheme, which));
+  return unpacked(await packedOrder(services, register, which));
 }
 
 /** The numbers of the buildings that a filter means, ascending. */
 export async function registerIds(
   { database }: Pick<Services, 'database'>,
-  scheme: Scheme,
+  register: Register,
   filter: RegisterFilter,
 ): Promise<number[]> {
-  const condition = registerCondition(scheme.id, filter);
+  const condition = registerCondition(register, filter);
   const ids = unpacked(await findRegisterIds(database, condition));
   return ids.slice(0, ids.count);
 }
@@ -98,13 +104,13 @@ export async function registerIds(
 /** How many buildings a filter means, kept as their order is. */
 export async function registerCount(
   { database, tiles }: Pick<Services, 'database' | 'tiles'>,
-  scheme: Scheme,
+  register: Register,
   filter: RegisterFilter,
 ): Promise<number> {
-  const key = `count/${scheme.id}/${scheme.registerVersion}/${JSON.stringify(filter)}`;
+  const key = keyOf('count', register, filter);
   const count = await tiles.get(key, async () => {
     const bytes = Buffer.alloc(BYTES);
-    bytes.writeInt32BE(await countRows(database, registerCondition(scheme.id, filter)));
+    bytes.writeInt32BE(await countRows(database, registerCondition(register, filter)));
     return bytes;
   });
   return count.readInt32BE();

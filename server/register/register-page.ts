@@ -3,9 +3,9 @@ import type { registerQuerySchema } from '../../shared/schemas/register.ts';
 import { findFirstRows } from '../models/find-first-rows.ts';
 import { findRows } from '../models/find-register-rows.ts';
 import { registerCondition } from '../models/register-condition.ts';
-import type { Scheme } from '../models/scheme.ts';
 import type { ListedBuilding } from '../presenters/building-values.ts';
 import type { Services } from '../services.ts';
+import type { Register } from './register-of.ts';
 import { isOrdered, registerCount, registerOrder } from './register-order.ts';
 
 /** So far the database looks by itself; further down all of it is put in order once and kept. */
@@ -14,24 +14,24 @@ const NEAR = 400;
 /** A page of a register with how many there are by the filter and in all. */
 export async function registerPage(
   services: Pick<Services, 'database' | 'tiles'>,
-  scheme: Scheme,
+  register: Register,
   query: z.infer<typeof registerQuerySchema>,
 ): Promise<{ rows: ListedBuilding[]; found: number; all: number }> {
   const { database } = services;
   const { filter, sort, offset, limit } = query;
   const which = { filter, sort };
-  if (offset + limit > NEAR || isOrdered(services, scheme, which)) {
-    const order = await registerOrder(services, scheme, which);
+  if (offset + limit > NEAR || isOrdered(services, register, which)) {
+    const order = await registerOrder(services, register, which);
     const [rows, all] = await Promise.all([
-      findRows(database, order.slice(offset, offset + limit)),
-      registerCount(services, scheme, {}),
+      findRows(database, register, order.slice(offset, offset + limit)),
+      registerCount(services, register, {}),
     ]);
     return { rows, found: order.count, all };
   }
   const [rows, found, all] = await Promise.all([
-    findFirstRows(database, registerCondition(scheme.id, filter), sort, { offset, limit }),
-    registerCount(services, scheme, filter),
-    registerCount(services, scheme, {}),
+    findFirstRows(database, registerCondition(register, filter), sort, { offset, limit }),
+    registerCount(services, register, filter),
+    registerCount(services, register, {}),
   ]);
   return { rows, found, all };
 }

@@ -1,8 +1,7 @@
 import type { Response } from 'express';
 import type { Sequelize } from 'sequelize';
-import { AppError } from '../errors.ts';
-import { findRun } from '../models/find-runs.ts';
 import type { Scheme } from '../models/scheme.ts';
+import { findCompleteRun } from '../runs/find-complete-run.ts';
 import type { Services } from '../services.ts';
 
 type RunCall = {
@@ -18,9 +17,7 @@ export async function answerRunPart(
   name: string,
   find: (database: Sequelize, runId: string) => Promise<string>,
 ): Promise<void> {
-  const run = await findRun(services.database, scheme.id, params.runId);
-  if (run.state !== 'complete')
-    throw new AppError('conflict', 'This run is not complete yet, so there is nothing to show.');
+  const run = await findCompleteRun(services.database, scheme.id, params.runId);
   const make = async () => Buffer.from(await find(services.database, run.id));
   const part = await services.tiles.get(`run/${run.id}/${name}`, make);
   res.set('Cache-Control', 'private, max-age=31536000, immutable');

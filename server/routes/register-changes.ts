@@ -22,6 +22,7 @@ import { countValues } from '../models/count-values.ts';
 import { findBuilding, findBuildingEverKept } from '../models/find-building.ts';
 import { findHistory } from '../models/find-building-changes.ts';
 import { registerCondition } from '../models/register-condition.ts';
+import { registerOf } from '../register/register-of.ts';
 import { schemeAbilities } from '../policies/scheme-policy.ts';
 import { presentHistory } from '../presenters/building-history.ts';
 import { defineRoute } from './define-route.ts';
@@ -48,8 +49,10 @@ export const registerChangeRoutes = [
     path: '/api/schemes/:schemeId/buildings/edits/preview',
     access: { scheme: 'updateRegister' },
     body: previewManySchema,
-    handle: ({ services, scheme, body: { filter, attributes } }) =>
-      countValues(services.database, registerCondition(scheme.id, filter), attributes),
+    handle: async ({ services, scheme, body: { filter, attributes } }) => {
+      const register = await registerOf(services, scheme);
+      return countValues(services.database, registerCondition(register, filter), attributes);
+    },
   }),
   defineRoute({
     method: 'post',

@@ -8,9 +8,10 @@ import {
 import { findChoices } from '../models/find-register-rows.ts';
 import { registerCondition } from '../models/register-condition.ts';
 import { presentRegisterPage } from '../presenters/register.ts';
+import { registerOf } from '../register/register-of.ts';
 import { registerIds, registerOrder } from '../register/register-order.ts';
 import { registerPage } from '../register/register-page.ts';
-import { sendExport } from '../exports/send-export.ts';
+import { sendRegister } from '../exports/send-register.ts';
 import { defineRoute } from './define-route.ts';
 
 export const registerRoutes = [
@@ -19,8 +20,10 @@ export const registerRoutes = [
     path: '/api/schemes/:schemeId/register',
     access: { scheme: 'readRegister' },
     query: registerQuerySchema,
-    handle: async ({ services, scheme, query }) =>
-      presentRegisterPage(scheme, await registerPage(services, scheme, query)),
+    handle: async ({ services, scheme, query }) => {
+      const register = await registerOf(services, scheme);
+      return presentRegisterPage(register, await registerPage(services, register, query));
+    },
   }),
   defineRoute({
     method: 'get',
@@ -28,7 +31,8 @@ export const registerRoutes = [
     access: { scheme: 'readRegister' },
     query: registerPlaceQuerySchema,
     handle: async ({ services, scheme, query }) => {
-      const order = await registerOrder(services, scheme, query);
+      const register = await registerOf(services, scheme);
+      const order = await registerOrder(services, register, query);
       return { index: order.indexOf(query.buildingId) };
     },
   }),
@@ -38,7 +42,7 @@ export const registerRoutes = [
     access: { scheme: 'readRegister' },
     query: registerIdsQuerySchema,
     handle: async ({ services, scheme, query }) => ({
-      ids: await registerIds(services, scheme, query.filter),
+      ids: await registerIds(services, await registerOf(services, scheme), query.filter),
     }),
   }),
   defineRoute({
@@ -46,14 +50,16 @@ export const registerRoutes = [
     path: '/api/schemes/:schemeId/register/choices/:field',
     access: { scheme: 'readRegister' },
     params: registerChoicesParamsSchema,
-    handle: ({ services, scheme, params }) =>
-      findChoices(services.database, registerCondition(scheme.id, {}), params.field),
+    handle: async ({ services, scheme, params }) => {
+      const register = await registerOf(services, scheme);
+      return findChoices(services.database, registerCondition(register, {}), params.field);
+    },
   }),
   defineRoute({
     method: 'get',
     path: '/api/schemes/:schemeId/register/export',
     access: { scheme: 'readRegister' },
     query: registerExportQuerySchema,
-    handle: (call) => sendExport(call),
+    handle: (call) => sendRegister(call),
   }),
 ];

@@ -1,3 +1,4 @@
+import { runExportQuerySchema } from '../../shared/schemas/run-export.ts';
 import {
   newRunSchema,
   runBuildingParamsSchema,
@@ -6,6 +7,7 @@ import {
 import { cancelRun } from '../commands/cancel-run.ts';
 import { resumeRun } from '../commands/resume-run.ts';
 import { startRun } from '../commands/start-run.ts';
+import { sendRun } from '../exports/send-run.ts';
 import { findRun, findRuns } from '../models/find-runs.ts';
 import { findContours } from '../models/run-contours.ts';
 import { findMapText } from '../models/run-results.ts';
@@ -85,6 +87,14 @@ export const runRoutes = [
     access: { scheme: 'readRuns' },
     params: runParamsSchema,
     handle: (call) => answerRunPart(call, 'contours', findContours),
+  }),
+  defineRoute({
+    method: 'get',
+    path: '/api/schemes/:schemeId/runs/:runId/export',
+    access: { scheme: 'readRuns' },
+    params: runParamsSchema,
+    query: runExportQuerySchema,
+    handle: (call) => sendRun(call),
   }),
   defineRoute({
     method: 'get',

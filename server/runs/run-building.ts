@@ -1,9 +1,11 @@
+import type { z } from 'zod';
 import { caseOfBuilding } from '../../shared/assessment/case-of-building.ts';
 import { preparedBuilding } from '../../shared/assessment/prepared-building.ts';
 import { runInputs } from '../../shared/assessment/run-inputs.ts';
 import type { AssessCase } from '../../shared/schemas/assess-case.ts';
 import { runBuildingSchema, type RunBuilding } from '../../shared/schemas/runs.ts';
 import { AppError } from '../errors.ts';
+import { findBesideInRun } from '../models/find-beside-in-run.ts';
 import { findNeighboursText, findRunBuilding } from '../models/find-run-building.ts';
 import { findResult } from '../models/run-results.ts';
 import { Run } from '../models/run.ts';
@@ -17,11 +19,14 @@ async function findOwnRun(schemeId: string, { runId }: Place): Promise<Run> {
   return run;
 }
 
+/** What it takes to work a building out again, whoever comes before and after it. */
+const aloneSchema = runBuildingSchema.omit({ previous: true, next: true });
+
 async function buildingOf(
   { database, runs }: Pick<Services, 'database' | 'runs'>,
   { id: runId, design, rules }: Run,
   buildingId: number,
-): Promise<RunBuilding> {
+): Promise<z.infer<typeof aloneSchema>> {
   const [found, result, neighbours] = await Promise.all([
     findRunBuilding(database, runId, buildingId),
     findResult(database, runId, buildingId),
@@ -29,19 +34,25 @@ async function buildingOf(
   ]);
   if (result === undefined) throw new AppError('not-found');
   const asked = { kind: 'rows', design, rules, id: String(buildingId), neighbours } as const;
-  return runBuildingSchema.parse({ ...found, result, rows: await runs.compute(asked) });
+  return aloneSchema.parse({ ...found, result, rows: await runs.compute(asked) });
 }
 
 /**
  * One building of a run with all that it takes to work it out again: what was known of it and the rows that
- * it stood in.
+ * it stood in; and who comes before and after it.
  */
 export async function runBuilding(
   services: Pick<Services, 'database' | 'runs'>,
   schemeId: string,
   place: Place,
 ): Promise<RunBuilding> {
-  return buildingOf(services, await findOwnRun(schemeId, place), place.buildingId);
+  const { runId, buildingId } = place;
+  const run = await findOwnRun(schemeId, place);
+  const [building, beside] = await Promise.all([
+    buildingOf(services, run, buildingId),
+    findBesideInRun(services.database, runId, buildingId),
+  ]);
+  return runBuildingSchema.parse({ ...building, ...beside });
 }
 
 /** One building of a run as a case that anyone can work out again with the command for cases. */

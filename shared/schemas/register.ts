@@ -1,16 +1,32 @@
 import { z } from 'zod';
 import { BUILDING_FIELD_NAMES } from './building-fields.ts';
 import { jsonText } from './json-text.ts';
+import { RESULT_COLUMN_NAMES, resultColumnsShape } from './result-columns.ts';
 
-const fieldName = z.enum(BUILDING_FIELD_NAMES);
 const text = z.string().max(300);
 
 /**
- * What the register's table can show and be ordered by, beside the fields of BUILDING_FIELDS.
+ * What can be known or not of a building in the register: what the newest complete run found, and its fields.
+ *
+ * Units: of BUILDING_FIELDS and RESULT_COLUMNS. Valid: read only. Source: [own].
+ */
+export const REGISTER_FIELDS = [...RESULT_COLUMN_NAMES, ...BUILDING_FIELD_NAMES] as const;
+
+/**
+ * One of what can be known or not of a building in the register.
+ *
+ * Units: none. Valid: of REGISTER_FIELDS. Source: [own].
+ */
+export type RegisterField = (typeof REGISTER_FIELDS)[number];
+
+const registerField = z.enum(REGISTER_FIELDS);
+
+/**
+ * What the register's table can show and be ordered by.
  *
  * Units: area m². Valid: read only. Source: [own].
  */
-export const REGISTER_COLUMNS = ['reference', 'area', ...BUILDING_FIELD_NAMES] as const;
+export const REGISTER_COLUMNS = ['reference', 'area', ...REGISTER_FIELDS] as const;
 
 /**
  * One column of the register.
@@ -39,7 +55,7 @@ const named = z.array(z.number().int().positive()).max(MOST_NAMED_BUILDINGS);
  * Which buildings of a register are meant: all conditions together; an empty filter means all of them.
  *
  * Units: ranges in the unit of their column; within is west, south, east, north in degrees. Valid: `any`
- * holds the wanted values of a field, null for unknown; `assumed` tells whether the method has to assume
+ * holds the wanted values of a field, null for unknown, those of results as text; `assumed` tells whether the method has to assume
  * something; `ids` are the only ones meant, `except` are left out. Source: [own].
  */
 export const registerFilterSchema = z.strictObject({
@@ -49,14 +65,14 @@ export const registerFilterSchema = z.strictObject({
     .max(200)
     .regex(/^\P{Cc}*$/u)
     .optional(),
-  any: z.partialRecord(fieldName, z.array(text.nullable()).min(1).max(50)).optional(),
+  any: z.partialRecord(registerField, z.array(text.nullable()).min(1).max(50)).optional(),
   ranges: z
     .partialRecord(
       registerColumnSchema,
       z.strictObject({ from: z.number().optional(), to: z.number().optional() }),
     )
     .optional(),
-  unknown: z.array(fieldName).max(20).optional(),
+  unknown: z.array(registerField).max(40).optional(),
   assumed: z.boolean().optional(),
   importId: z.uuid().optional(),
   within: z.tuple([z.number(), z.number(), z.number(), z.number()]).optional(),
@@ -199,16 +215,17 @@ export const buildingValuesShape = {
 };
 
 /**
- * One row of the register.
+ * One row of the register, with what the newest complete run found.
  *
- * Units: as buildingValuesShape; centre is longitude and latitude in degrees. Valid: read only.
- * Source: [own].
+ * Units: as buildingValuesShape and resultColumnsShape; centre is longitude and latitude in degrees.
+ * Valid: read only. Source: [own].
  */
 export const registerRowSchema = z.strictObject({
   id: z.number(),
   reference: z.string(),
   centre: z.tuple([z.number(), z.number()]),
   ...buildingValuesShape,
+  ...resultColumnsShape,
 });
 
 /**
@@ -219,15 +236,17 @@ export const registerRowSchema = z.strictObject({
 export type RegisterRow = z.infer<typeof registerRowSchema>;
 
 /**
- * A page of the register, with how many there are by the filter and in all.
+ * A page of the register, with how many there are by the filter and in all, and which run its results are of.
  *
- * Units: none. Valid: version is the scheme's registerVersion. Source: [own].
+ * Units: none. Valid: version is the scheme's registerVersion; run is null where none is complete.
+ * Source: [own].
  */
 export const registerPageSchema = z.strictObject({
   rows: z.array(registerRowSchema),
   found: z.number(),
   all: z.number(),
   version: z.number(),
+  run: z.uuid().nullable(),
 });
 
 /**
@@ -252,7 +271,7 @@ export const registerPlaceSchema = z.strictObject({ index: z.number().nullable()
 export const registerIdsSchema = z.strictObject({ ids: z.array(z.number()) });
 
 /**
- * Which values a text field has in a register, the commonest first, for filters to offer.
+ * Which values a field has in a register, the commonest first, for filters to offer.
  *
  * Units: counts of buildings. Valid: at most 50 values; null is unknown. Source: [own].
  */
@@ -265,4 +284,4 @@ export const registerChoicesSchema = z.array(
  *
  * Units: none. Valid: a field of the register. Source: [own].
  */
-export const registerChoicesParamsSchema = z.object({ schemeId: z.string(), field: fieldName });
+export const registerChoicesParamsSchema = z.object({ schemeId: z.string(), field: registerField });

@@ -272,7 +272,8 @@ export type RunFacts = z.infer<typeof runFactsSchema>;
  * everything can be worked out again with the run's design and rules.
  *
  * Units: m. Valid: `changedSince` tells whether the register holds another version by now; `rows` are the
- * joined walls by index of the building's own walls. Source: [own].
+ * joined walls by index of the building's own walls; `previous` and `next` are the numbers of the buildings
+ * of the run beside it by reference, null at either end. Source: [own].
  */
 export const runBuildingSchema = z.strictObject({
   facts: runFactsSchema,
@@ -285,6 +286,8 @@ export const runBuildingSchema = z.strictObject({
     }),
   ),
   result: runResultSchema,
+  previous: z.number().nullable(),
+  next: z.number().nullable(),
 });
 
 /**

@@ -96,8 +96,22 @@ export function aCrsAnswer() {
   };
 }
 
-/** A building of the register of which everything is known. */
-export function aRegisterRow(overrides: Partial<RegisterRow> = {}): RegisterRow {
+const NO_RESULTS = {
+  stage: null,
+  categoryLow: null,
+  category: null,
+  categoryHigh: null,
+  strain: null,
+  settlement: null,
+  slope: null,
+  breakpoint: null,
+  reserve: null,
+  settled: null,
+  heldBy: null,
+};
+
+/** A building of which everything is known. */
+function aKnownBuilding() {
   return {
     id: 1,
     reference: 'B0001',
@@ -120,14 +134,18 @@ export function aRegisterRow(overrides: Partial<RegisterRow> = {}): RegisterRow 
     groundLevelFrom: 'file',
     assumed: [],
     version: 1,
-    ...overrides,
-  };
+  } satisfies Partial<RegisterRow>;
+}
+
+/** A row of the register that no run has been over. */
+export function aRegisterRow(overrides: Partial<RegisterRow> = {}): RegisterRow {
+  return { ...aKnownBuilding(), ...NO_RESULTS, ...overrides };
 }
 
 /** The same building with all that is answered of one. */
 export function aBuildingAnswer(overrides: Partial<BuildingAnswer> = {}): BuildingAnswer {
   return {
-    ...aRegisterRow(),
+    ...aKnownBuilding(),
     footprint: [],
     bounds: [1.63, 54.74, 1.65, 54.76],
     walls: [],

@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import { useDisclosure } from '../../hooks/use-disclosure.ts';
 import { classNames } from '../../lib/class-names.ts';
+import { useInside } from './use-placed.ts';
 
 /** The look of a line in a menu, link or button. */
 export const MENU_LINE =
@@ -21,6 +22,7 @@ type MenuProps = {
 /** A short list that opens under its button. */
 export function Menu({ button, name, buttonClassName, align, className, children }: MenuProps) {
   const { isOpen, toggle, close, frame } = useDisclosure();
+  const panel = useInside(isOpen);
   return (
     <div ref={frame} className={classNames('relative flex', className)}>
       <button
@@ -34,6 +36,7 @@ export function Menu({ button, name, buttonClassName, align, className, children
       </button>
       {isOpen && (
         <div
+          ref={panel}
           className={classNames(
             'appear absolute top-full z-40 max-h-[70vh] w-max min-w-[200px] overflow-auto rounded border',
             'max-w-[min(340px,calc(100vw-24px))] border-rule bg-paper-raised py-1 shadow-lift',

@@ -16,7 +16,7 @@ export function Panel({ title, note, action, className, children }: PanelProps) 
   const id = useId();
   return (
     <section aria-labelledby={id} className={classNames('mt-5 first:mt-0', className)}>
-      <div className="flex flex-wrap items-baseline gap-x-2.5 gap-y-1 border-b-2 border-ink pb-[7px]">
+      <div className="flex flex-wrap items-baseline gap-x-2.5 gap-y-1 border-b-2 border-ink pb-[7px] print:break-after-avoid">
         <h2 id={id} className="text-lead">
           {title}
         </h2>

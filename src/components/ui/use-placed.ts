@@ -24,6 +24,15 @@ function putBeside(panel: HTMLElement): void {
   panel.style.top = `${top}px`;
 }
 
+/** Keeps what opens under its button inside of the window, and leaves the focus where it is. */
+export function useInside(isOpen: boolean) {
+  const panel = useRef<HTMLDivElement>(null);
+  useLayoutEffect(() => {
+    if (isOpen && panel.current !== null) putInside(panel.current);
+  }, [isOpen]);
+  return panel;
+}
+
 /** Keeps what opens inside of the window, and gives it the focus; what is free goes along with its button. */
 export function usePlaced(isOpen: boolean, isFree: boolean) {
   const panel = useRef<HTMLDivElement>(null);

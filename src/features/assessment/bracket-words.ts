@@ -3,16 +3,10 @@ import {
   LARGEST_VOLUME_LOSS,
   type Breakpoint,
 } from '../../../shared/assessment/breakpoint-of-wall.ts';
-import type { BracketInput, Sensitivity } from '../../../shared/assessment/sensitivity.ts';
+import { BRACKET_INPUTS, type Sensitivity } from '../../../shared/assessment/sensitivity.ts';
 import { CATEGORIES, type Category } from '../../../shared/damage/categories.ts';
 import type { Range } from '../../../shared/numerics/range.ts';
 import { percentFromRatio } from '../../../shared/units/percent-from-ratio.ts';
-
-const INPUT_WORDS: Readonly<Record<BracketInput, string>> = {
-  volumeLoss: 'volume loss',
-  troughWidth: 'K',
-  eOverG: 'E/G',
-};
 
 /** The number of a category as people write it. */
 export function categoryLabel(category: Category): string {
@@ -37,7 +31,7 @@ export function categoriesWords(bracket: Bracket): string {
 /** Whether the category holds over the whole range, and what it is sensitive to where it does not. */
 export function settledWords({ settled, input }: Sensitivity): string {
   if (settled || input === null) return 'Settled: the category holds over the whole range.';
-  return `Sensitive, most of all to ${INPUT_WORDS[input]}.`;
+  return `Sensitive, most of all to ${BRACKET_INPUTS[input]}.`;
 }
 
 function placeInRange(value: number, { low, central, high }: Range): string {

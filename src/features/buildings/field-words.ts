@@ -1,18 +1,11 @@
-import {
-  BUILDING_FIELDS,
-  type BuildingFieldFacts,
-} from '../../../shared/schemas/building-fields.ts';
+import type { BuildingFieldFacts } from '../../../shared/schemas/building-fields.ts';
+import { COLUMN_FACTS } from '../../../shared/schemas/column-facts.ts';
 import type { RegisterColumn } from '../../../shared/schemas/register.ts';
 import { formatCount } from '../../lib/format-number.ts';
 
-const BESIDE: Readonly<Record<'reference' | 'area', BuildingFieldFacts>> = {
-  reference: { label: 'Reference', kind: 'text' },
-  area: { label: 'Area in plan', kind: 'number', unit: 'm²' },
-};
-
 /** How a column of the register is called and written. */
 export function factsOf(column: RegisterColumn): BuildingFieldFacts {
-  return column === 'reference' || column === 'area' ? BESIDE[column] : BUILDING_FIELDS[column];
+  return COLUMN_FACTS[column];
 }
 
 /** Of a field as it stands inside a sentence: small, unless it is a sign. */

@@ -1,10 +1,14 @@
 import { ASSUMED, completeAttributes } from '../../../shared/building/assumed-attributes.ts';
 import { knownOfBuilding } from '../../../shared/building/known-of-building.ts';
 import type { RegisterColumn, RegisterRow } from '../../../shared/schemas/register.ts';
+import type { ResultColumn } from '../../../shared/schemas/result-columns.ts';
 import { factsOf, formatFigure, inSentence } from './field-words.ts';
 
 /** The values of a building, of a row of the register or of its sheet. */
-export type BuildingValues = Omit<RegisterRow, 'id' | 'centre'>;
+export type BuildingValues = Omit<RegisterRow, 'id' | 'centre' | ResultColumn>;
+
+/** The columns that say what a building is, not what was found of it. */
+export type OwnColumn = Exclude<RegisterColumn, ResultColumn>;
 
 /**
  * A value as it is shown: known, or assumed by the method, or following from another, or not known; `why`
@@ -48,7 +52,7 @@ function foundingShown(building: BuildingValues): ShownValue {
 const FILLED_IN = ['storeys', 'eavesHeight', 'eOverG', 'poisson'] as const;
 type FilledIn = (typeof FILLED_IN)[number];
 
-function isFilledIn(column: RegisterColumn): column is FilledIn {
+function isFilledIn(column: OwnColumn): column is FilledIn {
   return FILLED_IN.some((one) => one === column);
 }
 
@@ -71,8 +75,8 @@ function filledIn(column: FilledIn, building: BuildingValues): ShownValue {
   };
 }
 
-/** A column of a building as people read it. */
-export function shownValue(column: RegisterColumn, building: BuildingValues): ShownValue {
+/** A column of a building's own as people read it. */
+export function shownValue(column: OwnColumn, building: BuildingValues): ShownValue {
   if (column === 'foundingLevel') return foundingShown(building);
   const value = building[column];
   if (typeof value === 'string' && !NOT_KNOWN.test(value.trim()))

@@ -1,7 +1,7 @@
-import type { BuildingField } from '../../../shared/schemas/building-fields.ts';
 import {
   REGISTER_COLUMNS,
   type RegisterColumn,
+  type RegisterField,
   type RegisterFilter,
 } from '../../../shared/schemas/register.ts';
 
@@ -34,7 +34,7 @@ export type ColumnFilter = {
   readonly unknown?: boolean;
 };
 
-export function columnFilter(filter: RegisterFilter, column: BuildingField | 'area'): ColumnFilter {
+export function columnFilter(filter: RegisterFilter, column: RegisterField | 'area'): ColumnFilter {
   if (column === 'area') return { range: filter.ranges?.area };
   return {
     any: filter.any?.[column],
@@ -71,7 +71,7 @@ function tidy(filter: RegisterFilter): RegisterFilter {
 /** The filter with something else asked of one column. */
 export function withColumn(
   filter: RegisterFilter,
-  column: BuildingField | 'area',
+  column: RegisterField | 'area',
   { any, range, unknown = false }: ColumnFilter,
 ): RegisterFilter {
   const isRange = range?.from !== undefined || range?.to !== undefined;

@@ -1,6 +1,7 @@
-import type { RegisterFilter } from '../../../shared/schemas/register.ts';
+import type { RegisterField, RegisterFilter } from '../../../shared/schemas/register.ts';
 import { formatCount } from '../../lib/format-number.ts';
 import { factsOf } from '../buildings/field-words.ts';
+import { choiceWords } from './choice-words.ts';
 import {
   columnFilter,
   isBesideFields,
@@ -23,8 +24,8 @@ export function partLabel(part: FilterPart): string {
 
 const MOST_NAMED = 2;
 
-function anyWords(values: readonly (string | null)[]): string {
-  const named = values.slice(0, MOST_NAMED).map((value) => value ?? 'not known');
+function anyWords(part: RegisterField, values: readonly (string | null)[]): string {
+  const named = values.slice(0, MOST_NAMED).map((value) => choiceWords(part, value));
   const more = values.length - named.length;
   return more > 0 ? `${named.join(', ')} and ${more} more` : named.join(' or ');
 }
@@ -41,8 +42,8 @@ export function partWords(filter: RegisterFilter, part: FilterPart, importName =
   if (!isBesideFields(part)) {
     const { any, range, unknown } = columnFilter(filter, part);
     const { unit } = factsOf(part);
-    if (unknown === true) return 'not known';
-    if (any !== undefined) return anyWords(any);
+    if (unknown === true && part !== 'area') return choiceWords(part, null);
+    if (any !== undefined && part !== 'area') return anyWords(part, any);
     return range === undefined ? 'any' : rangeWords(range, unit === undefined ? '' : ` ${unit}`);
   }
   if (filter[part] === undefined) return 'any';

@@ -3,7 +3,21 @@ import { REGISTER_COLUMNS, type RegisterColumn } from '../../../shared/schemas/r
 /** The columns that can be chosen; the reference and the building are always there. */
 export const CHOOSABLE = REGISTER_COLUMNS.filter((column) => column !== 'reference');
 
-/** What a desk shows before anybody chooses. */
+/** What a desk shows before anybody chooses, where a run is complete. */
+export const USUAL_RESULTS: readonly RegisterColumn[] = [
+  'stage',
+  'settlement',
+  'category',
+  'categoryHigh',
+  'strain',
+  'reserve',
+  'heldBy',
+  'storeys',
+  'foundation',
+  'listedGrade',
+];
+
+/** What a desk shows before anybody chooses and before there is a run. */
 export const USUAL_COLUMNS: readonly RegisterColumn[] = [
   'storeys',
   'eavesHeight',
@@ -17,7 +31,8 @@ export const USUAL_COLUMNS: readonly RegisterColumn[] = [
   'inspected',
 ];
 
-/** What a phone shows before anybody chooses. */
+/** What a phone shows before anybody chooses, with and without a run. */
+export const FEW_RESULTS: readonly RegisterColumn[] = ['stage', 'settlement', 'category'];
 export const FEW_COLUMNS: readonly RegisterColumn[] = ['storeys', 'eavesHeight', 'condition'];
 
 /** Some columns in the order of the register. */
@@ -29,6 +44,17 @@ export function inOrder(columns: readonly RegisterColumn[]): readonly RegisterCo
 export const WIDTHS: Readonly<Record<RegisterColumn, number>> = {
   reference: 84,
   area: 84,
+  stage: 56,
+  categoryLow: 80,
+  category: 80,
+  categoryHigh: 80,
+  strain: 76,
+  settlement: 88,
+  slope: 64,
+  breakpoint: 88,
+  reserve: 72,
+  settled: 84,
+  heldBy: 150,
   name: 150,
   address: 170,
   use: 120,
@@ -62,8 +88,18 @@ export function referenceWidth(
 export const SHORT_HEADINGS: Readonly<Partial<Record<RegisterColumn, string>>> = {
   reference: 'Ref',
   area: 'Area',
+  categoryLow: 'Category',
+  category: 'Category',
+  categoryHigh: 'Category',
   eavesHeight: 'Eaves',
   groundLevel: 'Ground',
   foundingLevel: 'Founding',
   poisson: 'Poisson',
+};
+
+/** What stands under a heading where the column has no unit. */
+export const UNDER_HEADINGS: Readonly<Partial<Record<RegisterColumn, string>>> = {
+  categoryLow: 'low',
+  category: 'central',
+  categoryHigh: 'high',
 };

@@ -54,7 +54,7 @@ describe('the register as CSV', () => {
       /^attachment; filename="?port-dogger-crossing-register-\d{4}-\d\d-\d\d\.csv"?$/,
     );
     expect(bytesOf(answer.body).toString('utf8').split('\r\n')).toEqual([
-      '\uFEFFReference,Name,Use,Ground level (m),Storeys,Area (m²)',
+      '\uFEFFReference,Name,Use,Ground level (m),Storeys,Area in plan (m²)',
       "'-B3,'+44 20,,,,100",
       'B2,"A ""q"", b",,,,200',
       "B10,'=1+2,-5,-1.25,2,1200",
@@ -130,7 +130,7 @@ describe('the register as a workbook', () => {
       [1, 2, 3, 4, 5, 6].map((column) => sheet?.getRow(row).getCell(column).value),
     );
     expect(rows).toEqual([
-      ['Reference', 'Name', 'Use', 'Ground level (m)', 'Storeys', 'Area (m²)'],
+      ['Reference', 'Name', 'Use', 'Ground level (m)', 'Storeys', 'Area in plan (m²)'],
       ['-B3', '+44 20', null, null, null, 100],
       ['B10', '=1+2', '-5', -1.25, 2, 1200],
     ]);

@@ -1,12 +1,9 @@
 import { describe, expect, test } from 'vitest';
-import { assessCaseWall } from '../../../shared/assessment/assess-case-wall.ts';
 import { centralSurface } from '../../../shared/assessment/central-surface.ts';
 import { outcomesOfBuildings } from '../../../shared/assessment/outcomes-of-buildings.ts';
-import { modelOfCase } from '../../../shared/assessment/model-of-case.ts';
 import { resultOfOutcome } from '../../../shared/assessment/result-of-outcome.ts';
 import { assessmentRules, runInputs } from '../../../shared/assessment/run-inputs.ts';
 import { FIELD } from '../../../shared/ground/kernel.ts';
-import { assessCaseSchema } from '../../../shared/schemas/assess-case.ts';
 import {
   runBuildingSchema,
   runContoursSchema,
@@ -87,30 +84,6 @@ describe('a run', () => {
     }
     const strained = outcomes.filter(({ outcome }) => outcome.strain?.governing?.isRow === true);
     expect(strained.length).toBeGreaterThan(0);
-  });
-
-  test('gives each building as a case whose worst wall has the figures of the record', async () => {
-    const { scheme, option, address, agent } = await anAssessor();
-    const run = await aRun(tested, scheme, option);
-    for (const { id, reference } of await registered(scheme)) {
-      const at = `${address}/${run.id}/buildings/${id}`;
-      const { result } = runBuildingSchema.parse((await agent.get(at)).body);
-      if (result.strain === null) continue;
-      const answer = await agent.get(`${at}/case`);
-      expect(answer.headers['content-disposition']).toContain('attachment');
-      const { walls, ...others } = assessCaseSchema.parse(answer.body);
-      const prepared = modelOfCase(others);
-      const worked = walls.map((wall) => assessCaseWall(prepared, wall));
-      const worst = worked.reduce((a, b) => (b.strain > a.strain ? b : a));
-      expect([reference, worst.strain]).toStrictEqual([reference, result.strain]);
-      expect(worst.strain > 0 ? worst.name : null).toBe(result.governingWall);
-      const strains = worked.flatMap(({ bracket }) => bracket?.strains.flat() ?? []);
-      expect(Math.max(...strains)).toBe(result.strainHigh);
-      const factors = worked.flatMap(({ breakpoint }) => (breakpoint?.reached ? [breakpoint.factor] : [])); // prettier-ignore
-      expect(factors.length === 0 ? null : Math.min(...factors)).toBe(result.breakpoint);
-      expect(Math.max(...worked.map(({ settlementMax }) => settlementMax))).toBe(result.wallSettlement); // prettier-ignore
-      expect(Math.max(...worked.map(({ slopeMax }) => slopeMax))).toBe(result.wallSlope);
-    }
   });
 
   test('colours the map and draws contours that lie on their level', async () => {

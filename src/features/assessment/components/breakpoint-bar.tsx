@@ -17,6 +17,7 @@ type BreakpointBarProps = {
 };
 
 const [HEIGHT, BAND, MEASURE, AXIS] = [84, 26, 52, 62];
+const ON_PAPER = 340;
 const ROOM_FOR_WORDS = 66;
 
 /** Like a dimension on a drawing: from the central volume loss to the breakpoint. */
@@ -107,7 +108,7 @@ function Band({ across, volumeLoss }: { readonly across: Scale; readonly volumeL
 
 /** The volume loss that is likely, that which breaks the wall, and the reserve between. */
 export function BreakpointBar({ breakpoint, volumeLoss }: BreakpointBarProps) {
-  const { width, frame } = useWidth(250);
+  const { width, frame } = useWidth(250, ON_PAPER);
   const broken = breakpoint?.volumeLoss;
   const most = Math.max(
     volumeLoss.high * 1.4,
@@ -115,7 +116,7 @@ export function BreakpointBar({ breakpoint, volumeLoss }: BreakpointBarProps) {
   );
   const across = linearScale([0, most], [8, width - 12]);
   return (
-    <div ref={frame}>
+    <div ref={frame} className="print:max-w-[340px]">
       <svg
         viewBox={`0 0 ${width} ${HEIGHT}`}
         width="100%"

@@ -58,7 +58,7 @@ function Points({
 
 function Chart({ opened, zone }: { readonly opened: Opened; readonly zone: StrainedZone }) {
   const prefix = useId();
-  const { width, frame: box } = useWidth(320);
+  const { width, frame: box } = useWidth(320, 560);
   const beam = beamOf(opened, zone);
   const { alike, otherwise } = pointsBeside(opened.points, zone);
   const frame = interactionFrame([zone, ...alike.map((point) => point.zone)], width);

@@ -11,11 +11,12 @@ type RangeBarProps = {
 };
 
 const HEIGHT = 34;
+const ON_PAPER = 340;
 const LEAST_SCALE = 0.002;
 
 /** The strain from low to high with its central value, among the limits of the categories. */
 export function RangeBar({ strain, upTo }: RangeBarProps) {
-  const { width, frame } = useWidth(250);
+  const { width, frame } = useWidth(250, ON_PAPER);
   const { low, central, high } = strain;
   const most = upTo ?? Math.max(LEAST_SCALE, high * 1.1);
   const across = linearScale([0, most], [1, width - 1]);
@@ -24,7 +25,7 @@ export function RangeBar({ strain, upTo }: RangeBarProps) {
   );
   const words = `Strain ${percentWords(low, 3)} to ${percentWords(high, 3)}, central ${percentWords(central, 3)}`;
   return (
-    <div ref={frame}>
+    <div ref={frame} className="print:max-w-[340px]">
       <svg
         viewBox={`0 0 ${width} ${HEIGHT}`}
         width="100%"

@@ -90,10 +90,13 @@ function Movement({ drawn, frame }: LinesProps) {
   );
 }
 
+/** The width that A4 holds upright. */
+const ON_PAPER = 700;
+
 /** Settlement along a wall with its zones, chords and strains, and the horizontal movement beneath. */
 export function WallSectionChart({ drawn }: { readonly drawn: Drawn }) {
   const prefix = useId();
-  const { width, frame: box } = useWidth(600);
+  const { width, frame: box } = useWidth(600, ON_PAPER);
   const frame = sectionFrame(drawn.section, width);
   const { zones, governingZone } = drawn.result;
   const { along, ticks } = frame;

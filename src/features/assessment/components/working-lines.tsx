@@ -10,7 +10,12 @@ export function Result({ line }: { readonly line: WorkingLine }) {
   return (
     <>
       <b className="font-semibold whitespace-nowrap">{resultWords(line)}</b>
-      {people !== null && <span className="whitespace-nowrap text-ink-2"> = {people}</span>}
+      {people !== null && (
+        <>
+          {' '}
+          <span className="whitespace-nowrap text-ink-2">= {people}</span>
+        </>
+      )}
     </>
   );
 }
@@ -23,12 +28,12 @@ export function Source({ line: { reference } }: { readonly line: WorkingLine }) 
 function Line({ line }: { readonly line: WorkingLine }) {
   const { symbol, expression, inputs, meaning } = line;
   return (
-    <li className="grid gap-x-5 gap-y-1 border-b border-hairline py-2 md:grid-cols-[minmax(150px,1fr)_minmax(0,3fr)_minmax(150px,1fr)] print:break-inside-avoid">
+    <li className="grid gap-x-5 gap-y-1 border-b border-hairline py-2 md:grid-cols-[minmax(150px,1fr)_minmax(0,3fr)_minmax(150px,1fr)] print:grid-cols-[110px_minmax(0,1fr)_124px] print:gap-x-3 print:break-inside-avoid">
       <div className="text-small">
         <SymbolName name={symbol} />
         <p className="text-cap text-ink-2">{meaning}</p>
       </div>
-      <div className="grid min-w-0 gap-y-1 py-0.5">
+      <div className="grid min-w-0 gap-y-1 py-0.5 print:text-small">
         <div>
           <Formula symbol={symbol} expression={expression} />
         </div>
@@ -36,7 +41,7 @@ function Line({ line }: { readonly line: WorkingLine }) {
           <FiguresPutIn expression={expression} figures={inputs} />
         </div>
       </div>
-      <div className="text-small md:text-right">
+      <div className="text-small md:text-right print:text-right">
         <Result line={line} />
         <p className="text-cap text-ink-2">
           <Source line={line} />

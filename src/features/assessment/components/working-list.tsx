@@ -15,12 +15,19 @@ function Part({ section: { title, lines }, startsOpen }: PartProps) {
       onToggle={({ currentTarget }) => {
         setOpen(currentTarget.open);
       }}
-      className="border-b border-rule"
+      className="border-b border-rule print:border-b-0 print:[&:not([open])]:hidden"
     >
-      <summary className="py-1.5 text-small font-semibold max-sm:py-3">{title}</summary>
+      <summary className="py-1.5 text-small font-semibold max-sm:py-3 print:break-after-avoid">
+        {title}
+      </summary>
       {isOpen && (
-        <div className="pb-2">
-          <div role="region" aria-label={title} tabIndex={0} className="overflow-x-auto">
+        <div className="pb-2 print:pb-0">
+          <div
+            role="region"
+            aria-label={title}
+            tabIndex={0}
+            className="overflow-x-auto print:overflow-visible"
+          >
             <WorkingLines lines={lines} />
           </div>
           <CopyButton textOf={() => workingText(title, lines)}>Copy as text</CopyButton>

@@ -1,11 +1,10 @@
 import { BUILDING_FIELD_NAMES } from '../../../../shared/schemas/building-fields.ts';
-import type { RegisterColumn } from '../../../../shared/schemas/register.ts';
 import { factsOf } from '../field-words.ts';
-import { shownValue, type BuildingValues } from '../shown-value.ts';
+import { shownValue, type BuildingValues, type OwnColumn } from '../shown-value.ts';
 import { Shown } from './shown.tsx';
 
 /** Name and address head the sheet already. */
-const LISTED: readonly RegisterColumn[] = [
+const LISTED: readonly OwnColumn[] = [
   ...BUILDING_FIELD_NAMES.filter((field) => field !== 'name' && field !== 'address'),
   'area',
 ];

@@ -1,13 +1,17 @@
 import { BasisLine } from '../../../components/layout/basis-line.tsx';
 import type { CrsAnswer } from '../../../../shared/schemas/crs.ts';
+import type { RunAnswer } from '../../../../shared/schemas/runs.ts';
 import type { SchemeAnswer } from '../../../../shared/schemas/schemes.ts';
+import { formatMoment } from '../../../lib/format-date.ts';
 import { OptionMenu } from '../../alignments/components/option-menu.tsx';
 import { designParts } from '../../alignments/design-words.ts';
 import type { PlanLine } from '../../alignments/hooks/use-plan-line.ts';
+import { RunExport } from '../../runs/components/run-export.tsx';
 import { RunInputs } from '../../runs/components/run-inputs.tsx';
 import { RunMenu } from '../../runs/components/run-menu.tsx';
 import type { RunView } from '../../runs/hooks/use-run-view.ts';
 import { completeOf } from '../../runs/run-states.ts';
+import { runName } from '../../runs/run-words.ts';
 
 type PlanBasisProps = {
   readonly scheme: SchemeAnswer;
@@ -16,6 +20,8 @@ type PlanBasisProps = {
   readonly line?: PlanLine;
   /** What of its run is shown. */
   readonly view?: RunView;
+  /** Whose results stand in the register. */
+  readonly results?: RunAnswer | undefined;
 };
 
 function lineParts(line: PlanLine) {
@@ -38,7 +44,11 @@ function runParts({ runs, run, recorded, chooseRun, option, schemeId }: PlanLine
   const { detail } = recorded;
   return detail === null
     ? [menu]
-    : [menu, <RunInputs key="inputs" {...{ schemeId }} run={detail} />];
+    : [
+        menu,
+        <RunInputs key="inputs" {...{ schemeId }} run={detail} />,
+        <RunExport key="export" {...{ schemeId }} run={detail} />,
+      ];
 }
 
 /** Which values are shown, or that nothing here is recorded. */
@@ -63,8 +73,14 @@ function valueShown({ isPreview, recorded }: PlanLine, view: RunView | undefined
   );
 }
 
+function resultsWords(run: RunAnswer): string {
+  const { option, endedAt } = run;
+  const at = endedAt === null ? '' : `, ${formatMoment(endedAt)}`;
+  return `${runName(run).toLowerCase()}, ${option.name}, version ${option.version}${at}`;
+}
+
 /** What the plan rests on: the option of the line and its values, its run or the register, and the grid. */
-export function PlanBasis({ scheme, crs, line, view }: PlanBasisProps) {
+export function PlanBasis({ scheme, crs, line, view, results }: PlanBasisProps) {
   const grid = crs === undefined ? `EPSG:${scheme.crs}` : `${crs.name}, EPSG:${crs.code}`;
   const isPreview = line?.isPreview === true;
   const isRecorded = line !== undefined && line.recorded.record !== null;
@@ -74,6 +90,7 @@ export function PlanBasis({ scheme, crs, line, view }: PlanBasisProps) {
       parts={[
         ...(line === undefined ? [] : lineParts(line)),
         ...(isRecorded ? [] : [<b key="register">Register as it stands</b>]),
+        ...(results === undefined ? [] : [`Results of ${resultsWords(results)}`]),
         ...(isPreview || isRecorded ? [] : [`Grid ${grid}`]),
       ]}
       end={line === undefined ? undefined : valueShown(line, view)}

@@ -51,7 +51,7 @@ export function PlanDesk() {
         <RunLegend view={view} isPreview={line.isPreview || line.editor.isEditing} />
         <GiveUpLine editor={line.editor} />
         <div className="col-start-1 row-start-2 min-w-0 print:break-inside-avoid">
-          <SectionStrip desk={sections} selected={selected} />
+          <SectionStrip desk={sections} selected={selected} shown={view} />
         </div>
         <aside
           aria-label="Buildings"

@@ -1,11 +1,10 @@
 import { queryOptions } from '@tanstack/react-query';
-import type { BuildingField } from '../../../../shared/schemas/building-fields.ts';
-import { registerChoicesSchema } from '../../../../shared/schemas/register.ts';
+import { registerChoicesSchema, type RegisterField } from '../../../../shared/schemas/register.ts';
 import { apiGet } from '../../../lib/api-client.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 
 /** The values that a field has in the register, the commonest first. */
-export function registerChoicesQuery(schemeId: string, field: BuildingField) {
+export function registerChoicesQuery(schemeId: string, field: RegisterField) {
   return queryOptions({
     queryKey: ['schemes', schemeId, 'register', 'choices', field],
     queryFn: ({ signal }) =>

@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
+import { CLASS_COLUMNS } from '../../../../shared/schemas/result-columns.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { Menu, MENU_LINE } from '../../../components/ui/menu.tsx';
 import { importsQuery } from '../../imports/api/list-imports.ts';
@@ -49,7 +50,7 @@ function PartChoices({ part, close, ...props }: PartProps) {
   }
   const { kind, unit } = factsOf(part);
   const chosen = columnFilter(filter, part);
-  if (kind === 'text' && part !== 'area') {
+  if (part !== 'area' && (kind === 'text' || CLASS_COLUMNS.includes(part))) {
     return (
       <WordChoices
         schemeId={schemeId}

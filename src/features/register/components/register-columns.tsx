@@ -3,13 +3,15 @@ import type {
   RegisterRow,
   RegisterSort,
 } from '../../../../shared/schemas/register.ts';
+import { isResultColumn } from '../../../../shared/schemas/result-columns.ts';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { formatCount } from '../../../lib/format-number.ts';
 import { Shown } from '../../buildings/components/shown.tsx';
 import { factsOf } from '../../buildings/field-words.ts';
 import { shownValue } from '../../buildings/shown-value.ts';
 import type { Marks } from '../hooks/use-marks.ts';
-import { SHORT_HEADINGS, WIDTHS } from '../register-columns.ts';
+import { SHORT_HEADINGS, UNDER_HEADINGS, WIDTHS } from '../register-columns.ts';
+import { ResultCell } from './result-cell.tsx';
 import { TickBox } from './tick-box.tsx';
 
 const TICK_WIDTH = 44;
@@ -82,14 +84,16 @@ function buildingColumn(sort: RegisterSort): Column<RegisterRow> {
 }
 
 function fieldColumn(column: RegisterColumn): Column<RegisterRow> {
-  const { label, kind, unit } = factsOf(column);
+  const { label, kind, unit = UNDER_HEADINGS[column] } = factsOf(column);
   return {
     id: column,
     heading: SHORT_HEADINGS[column] ?? label,
     width: WIDTHS[column],
     ...(kind !== 'text' && { holds: 'figure' }),
     ...(unit !== undefined && { unit }),
-    cell: (row) => <Shown shown={shownValue(column, row)} />,
+    cell: isResultColumn(column)
+      ? (row) => <ResultCell column={column} row={row} />
+      : (row) => <Shown shown={shownValue(column, row)} />,
   };
 }
 

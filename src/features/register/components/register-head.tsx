@@ -11,6 +11,7 @@ import { ColumnChooser } from './column-chooser.tsx';
 import { ExportMenu } from './export-menu.tsx';
 import { FilterBar } from './filter-bar.tsx';
 import { RegisterSearch } from './register-search.tsx';
+import { ResultCounts } from './result-counts.tsx';
 import { ViewsMenu } from './views-menu.tsx';
 
 type RegisterHeadProps = {
@@ -59,6 +60,7 @@ export function RegisterHead(props: RegisterHeadProps) {
   const { schemeId, mayEdit, page, address, columns, onColumns, mapPane, view } = props;
   const { which, setFilter, setWhich } = address;
   const { filter, sort } = which;
+  const run = page?.run ?? null;
   return (
     <div className="grid flex-none gap-y-2 border-b border-ink px-4 py-2.5 print:hidden">
       <div className="flex flex-wrap items-center gap-x-3 gap-y-2">
@@ -94,6 +96,7 @@ export function RegisterHead(props: RegisterHeadProps) {
           {mayEdit && <ButtonLink to={importsPath(schemeId)}>Bring in…</ButtonLink>}
         </div>
       </div>
+      {run !== null && <ResultCounts {...{ schemeId, filter }} runId={run} />}
       <FilterBar
         {...{ schemeId, filter, view }}
         onFilter={(next) => {

@@ -1,5 +1,7 @@
+import { useQuery } from '@tanstack/react-query';
 import { useRef } from 'react';
 import { PlanBasis } from '../../plan/components/plan-basis.tsx';
+import { runQuery } from '../../runs/api/get-run.ts';
 import { RunProgressLine } from '../../runs/components/run-progress-line.tsx';
 import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
@@ -14,14 +16,21 @@ import { RegisterFoot } from './register-foot.tsx';
 import { RegisterHead } from './register-head.tsx';
 import { RegisterTable } from './register-table.tsx';
 
+/** The run whose results stand in the register. */
+function useResults(schemeId: string, runId: string | null) {
+  return useQuery({ ...runQuery(schemeId, runId ?? ''), enabled: runId !== null }).data;
+}
+
 /** The register's table with the map at its side. */
 export function RegisterWork() {
   const scheme = useScheme();
   const person = usePerson();
   const mayEdit = can(scheme, 'updateRegister');
   const desk = useRegisterDesk(scheme.id, person.id);
-  const [columns, chooseColumns] = useColumns(person.id);
   const { address, active, marks, mapPane, handle, rows } = desk;
+  const shownRun = rows.page?.run ?? null;
+  const [columns, chooseColumns] = useColumns(person.id, shownRun !== null);
+  const results = useResults(scheme.id, shownRun);
   const plan = useRegisterPlan(scheme.id, address.which.filter, mapPane.isShown);
   const searchField = useRef<HTMLInputElement>(null);
 
@@ -45,7 +54,7 @@ export function RegisterWork() {
   if (rows.page?.all === 0) return <EmptyRegister schemeId={scheme.id} mayEdit={mayEdit} />;
   return (
     <>
-      <PlanBasis scheme={scheme} crs={plan.ready?.crs} />
+      <PlanBasis scheme={scheme} crs={plan.ready?.crs} results={results} />
       <RunProgressLine />
       <RegisterHead
         {...{ mayEdit, address, columns, mapPane, searchField }}

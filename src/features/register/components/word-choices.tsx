@@ -1,18 +1,19 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import type { BuildingField } from '../../../../shared/schemas/building-fields.ts';
+import type { RegisterField } from '../../../../shared/schemas/register.ts';
 import { Checkbox } from '../../../components/ui/checkbox.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { LoadingRows } from '../../../components/ui/loading-rows.tsx';
 import { QueryError } from '../../../components/ui/query-error.tsx';
 import { formatCount } from '../../../lib/format-number.ts';
 import { registerChoicesQuery } from '../api/get-choices.ts';
+import { choiceWords } from '../choice-words.ts';
 
 type Value = string | null;
 
 type WordChoicesProps = {
   readonly schemeId: string;
-  readonly field: BuildingField;
+  readonly field: RegisterField;
   readonly chosen: readonly Value[];
   readonly onChoose: (chosen: readonly Value[]) => void;
 };
@@ -36,7 +37,7 @@ export function WordChoices({ schemeId, field, chosen: atFirst, onChoose }: Word
   if (data === undefined) return <LoadingRows what="the choices" rows={3} />;
   if (data.length === 0) return <p className="text-small text-ink-2">No building has any.</p>;
   const shown = data.filter(({ value }) =>
-    (value ?? 'not known').toLowerCase().includes(sought.trim().toLowerCase()),
+    choiceWords(field, value).toLowerCase().includes(sought.trim().toLowerCase()),
   );
   return (
     <>
@@ -54,7 +55,13 @@ export function WordChoices({ schemeId, field, chosen: atFirst, onChoose }: Word
         {shown.map(({ value, count }) => (
           <li key={value ?? ''} className="flex items-center justify-between gap-4">
             <Checkbox
-              label={value ?? <span className="text-ink-3">not known</span>}
+              label={
+                value === null ? (
+                  <span className="text-ink-3">{choiceWords(field, null)}</span>
+                ) : (
+                  choiceWords(field, value)
+                )
+              }
               checked={chosen.includes(value)}
               onChange={() => {
                 const next = toggled(chosen, value);

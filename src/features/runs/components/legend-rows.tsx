@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { Link } from 'react-router-dom';
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { HatchSwatch } from '../../../components/ui/hatch-swatch.tsx';
 import { formatCount } from '../../../lib/format-number.ts';
@@ -50,12 +51,34 @@ function rowsOf(by: Shading['by']): readonly LegendRow[] {
 type LegendRowsProps = {
   readonly by: Shading['by'];
   readonly counts: ReadonlyMap<number, number>;
+  /** Where the buildings of a colour are listed; undefined where they are not. */
+  readonly listAt: ((shade: number) => string) | undefined;
   /** How many take no colour, and why. */
   readonly others: readonly [count: number, words: string] | null;
 };
 
+type CountProps = {
+  readonly count: number;
+  readonly to: string | undefined;
+  readonly words: string;
+};
+
+/** How many take a colour; pressed, they are listed. */
+function Count({ count, to, words }: CountProps) {
+  if (to === undefined || count === 0) return formatCount(count);
+  return (
+    <Link
+      to={to}
+      aria-label={`${formatCount(count)} in the register: ${words}`}
+      className="underline decoration-rule underline-offset-2 hover:decoration-ink"
+    >
+      {formatCount(count)}
+    </Link>
+  );
+}
+
 /** What each colour stands for: swatch, number, words, and how many buildings take it. */
-export function LegendRows({ by, counts, others }: LegendRowsProps) {
+export function LegendRows({ by, counts, listAt, others }: LegendRowsProps) {
   return (
     <table className="w-full text-small" aria-label="Colours and how many buildings take each">
       <tbody>
@@ -66,7 +89,9 @@ export function LegendRows({ by, counts, others }: LegendRowsProps) {
               {number !== '' && <b className="inline-block w-8 font-semibold">{number}</b>}
               <span className="inline-block first-letter:uppercase">{words}</span>
             </th>
-            <td className="py-[1.5px] pl-3 text-right">{formatCount(counts.get(shade) ?? 0)}</td>
+            <td className="py-[1.5px] pl-3 text-right">
+              <Count count={counts.get(shade) ?? 0} to={listAt?.(shade)} words={words} />
+            </td>
           </tr>
         ))}
         {others !== null && (

@@ -3,6 +3,8 @@ import type { RunMap } from '../../../../shared/schemas/runs.ts';
 import { QueryError } from '../../../components/ui/query-error.tsx';
 import { Segments } from '../../../components/ui/segments.tsx';
 import { classNames } from '../../../lib/class-names.ts';
+import { registerOfResults } from '../../register/register-of-results.ts';
+import { foundAsShaded } from '../found-as-shaded.ts';
 import { useRunKeys } from '../hooks/use-run-keys.ts';
 import type { RunView } from '../hooks/use-run-view.ts';
 import { runName } from '../run-words.ts';
@@ -32,6 +34,28 @@ function othersOf({ by, shades }: Shading, { ids, stage }: RunMap): [number, str
   return [count, count === letGo ? 'Let go at stage 1' : 'No category'];
 }
 
+/** By what, and at which value, buildings are coloured. */
+function Choices({ view: { by, end, colourBy, showEnd } }: { readonly view: RunView }) {
+  return (
+    <div className="flex flex-wrap items-center gap-x-2 gap-y-1.5 [&_button]:px-2.5">
+      <Segments
+        label="Colour buildings by"
+        segments={COLOURINGS_TO_CHOOSE}
+        value={by}
+        onChange={colourBy}
+      />
+      {by === 'category' && (
+        <Segments
+          label="Value that is shown"
+          segments={ENDS_TO_CHOOSE}
+          value={end}
+          onChange={showEnd}
+        />
+      )}
+    </div>
+  );
+}
+
 /** On the map: what buildings are coloured by, what each colour stands for, and how many take it. */
 export function RunLegend({
   view,
@@ -40,7 +64,7 @@ export function RunLegend({
   readonly view: RunView;
   readonly isPreview: boolean;
 }) {
-  const { run, by, end, figures, shading, error, colourBy, showEnd } = view;
+  const { run, by, end, figures, shading, error, showEnd } = view;
   useRunKeys(showEnd, run !== null && by === 'category');
   const counts = useMemo(() => countsOfShades(shading?.shades ?? new Map()), [shading]);
   if (run === null) return null;
@@ -53,22 +77,7 @@ export function RunLegend({
         'md:rounded md:border md:border-rule md:shadow-lift',
       )}
     >
-      <div className="flex flex-wrap items-center gap-x-2 gap-y-1.5 [&_button]:px-2.5">
-        <Segments
-          label="Colour buildings by"
-          segments={COLOURINGS_TO_CHOOSE}
-          value={by}
-          onChange={colourBy}
-        />
-        {by === 'category' && (
-          <Segments
-            label="Value that is shown"
-            segments={ENDS_TO_CHOOSE}
-            value={end}
-            onChange={showEnd}
-          />
-        )}
-      </div>
+      <Choices view={view} />
       {isPreview && (
         <p className="text-cap text-clay-deep">
           Buildings as {runName(run).toLowerCase()} found them, before this change.
@@ -81,7 +90,16 @@ export function RunLegend({
         <p className="appear-late text-small text-ink-3">Fetching what the run found.</p>
       )}
       {shading !== null && figures !== undefined && (
-        <LegendRows by={shading.by} counts={counts} others={othersOf(shading, figures)} />
+        <LegendRows
+          by={shading.by}
+          counts={counts}
+          listAt={
+            run.isShown
+              ? (shade) => registerOfResults(view.schemeId, foundAsShaded(shading.by, end, shade))
+              : undefined
+          }
+          others={othersOf(shading, figures)}
+        />
       )}
       <LineLegend />
     </section>

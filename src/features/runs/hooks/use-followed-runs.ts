@@ -34,8 +34,10 @@ export function useFollowedRuns(schemeId: string, mayRead: boolean) {
         client.setQueryData(queryKey, (now) =>
           now?.map((run) => (run.id === followed ? { ...run, ...progress } : run)),
         );
-        // which one is shown, and what each says in full, is another now
-        if (!isActive(progress)) void client.invalidateQueries({ queryKey });
+        // which one is shown, what each says in full, and the results in the register are others now
+        if (isActive(progress)) return;
+        void client.invalidateQueries({ queryKey });
+        void client.invalidateQueries({ queryKey: ['schemes', schemeId, 'register'] });
       },
       onBroken: () => {
         setBroken(followed);

@@ -59,6 +59,7 @@ export function useRunView(schemeId: string, run: RunAnswer | null) {
   const shades = figures === undefined ? null : (shading?.shades ?? NO_SHADES);
   return {
     ...colouring,
+    schemeId,
     run,
     figures,
     shading,

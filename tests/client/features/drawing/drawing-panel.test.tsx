@@ -115,6 +115,7 @@ describe('drawing by figures', () => {
         found: 9,
         all: 9,
         version: 4,
+        run: null,
       },
       [`POST ${SCHEME}/buildings`]: CHANGE,
       [`POST ${SCHEME}/register-changes/${anId(70)}/undo`]: { ...CHANGE, changeId: anId(71) },
@@ -155,7 +156,7 @@ describe('drawing by figures', () => {
   });
 
   it('keeps the reference that was written while a courtyard is added', async () => {
-    fakeApi({ [`GET ${LAST}`]: { rows: [], found: 0, all: 0, version: 1 } });
+    fakeApi({ [`GET ${LAST}`]: { rows: [], found: 0, all: 0, version: 1, run: null } });
     openDesk();
     press('d');
     for (const [east, north] of [['0', '0'], ['9', '0'], ['9', '9']] as const) addCorner(east, north); // prettier-ignore

@@ -37,7 +37,7 @@ function page(asked: unknown) {
   const filter = asked instanceof URLSearchParams ? (asked.get('filter') ?? '{}') : '{}';
   const isOne = /poor|unknown/.test(filter);
   const rows = isOne ? ROWS.slice(1, 2) : ROWS;
-  return { rows, found: rows.length, all: 3, version: 1 };
+  return { rows, found: rows.length, all: 3, version: 1, run: null };
 }
 
 const ANSWERS = {
@@ -286,7 +286,7 @@ describe('the register', () => {
   it('says how to start where there are no buildings', async () => {
     fakeApi({
       ...ANSWERS,
-      [`GET ${SCHEME}/register`]: { rows: [], found: 0, all: 0, version: 1 },
+      [`GET ${SCHEME}/register`]: { rows: [], found: 0, all: 0, version: 1, run: null },
     });
     void openRegister(EDITS).catch(() => undefined);
     expect(

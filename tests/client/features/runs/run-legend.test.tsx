@@ -10,8 +10,8 @@ import { aRunAnswer, aRunMap } from '../../../support/run-answers.ts';
 
 const MAP = `GET /api/schemes/${anId(10)}/runs/${anId(60)}/map`;
 
-function Desk() {
-  const view = useRunView(anId(10), aRunAnswer());
+function Desk({ isShown = true }: { readonly isShown?: boolean }) {
+  const view = useRunView(anId(10), aRunAnswer({ isShown }));
   return (
     <main>
       <h1>Plan</h1>
@@ -48,6 +48,25 @@ it('counts what the map shows, follows the keys, and keeps to the address', asyn
   expect(rows().at(-1)).toBe('Under 1 mm1');
   fireEvent.click(screen.getByRole('button', { name: 'Nothing' }));
   await screen.findByText('0 coloured');
+});
+
+it('leads from a count to those buildings in the register, unless a later run stands there', async () => {
+  fakeApi({ 'GET /api/session': undefined, [MAP]: aRunMap() });
+  const { unmount } = renderPage(<Desk />, '/?value=low');
+  const link = await screen.findByRole('link', { name: '1 in the register: slight' });
+  const filterIn = (one: HTMLElement): unknown =>
+    JSON.parse(
+      new URLSearchParams(one.getAttribute('href')?.split('?')[1]).get('filter') ?? 'null',
+    );
+  expect(link.getAttribute('href')).toMatch(new RegExp(`^/schemes/${anId(10)}/register[?]`));
+  expect(filterIn(link)).toEqual({ any: { categoryLow: ['2'] } });
+  fireEvent.click(screen.getByRole('button', { name: 'Settlement' }));
+  const deepest = await screen.findByRole('link', { name: '1 in the register: 50 mm and more' });
+  expect(filterIn(deepest)).toEqual({ ranges: { settlement: { from: 50 } } });
+  unmount();
+  renderPage(<Desk isShown={false} />, '/?value=low');
+  await screen.findByText('3 coloured');
+  expect(screen.queryByRole('link')).toBeNull();
 });
 
 it('says where the figures do not come', async () => {

@@ -1,0 +1,76 @@
+import { useQuery } from '@tanstack/react-query';
+import type { ReactNode } from 'react';
+import { Link } from 'react-router-dom';
+import { CATEGORIES } from '../../../../shared/damage/categories.ts';
+import type { RegisterFilter } from '../../../../shared/schemas/register.ts';
+import { DamageChip } from '../../../components/ui/damage-chip.tsx';
+import { formatCount } from '../../../lib/format-number.ts';
+import { runQuery } from '../../runs/api/get-run.ts';
+import { runName, staleWords } from '../../runs/run-words.ts';
+import { registerOfResults } from '../register-of-results.ts';
+
+type ResultCountsProps = {
+  readonly schemeId: string;
+  readonly runId: string;
+  readonly filter: RegisterFilter;
+};
+
+type CountLink = {
+  readonly key: string;
+  readonly found: RegisterFilter;
+  readonly count: number;
+  readonly children: ReactNode;
+};
+
+const STAGES = [1, 2, 3] as const;
+
+/** How many buildings the run that is shown found where; each number leads to them. */
+export function ResultCounts({ schemeId, runId, filter }: ResultCountsProps) {
+  const { data: run } = useQuery(runQuery(schemeId, runId));
+  const counts = run?.counts;
+  if (run === undefined || counts === undefined || counts === null) return null;
+  const stages = STAGES.map((stage): CountLink => ({
+    key: `stage ${stage}`,
+    found: { any: { stage: [String(stage)] } },
+    count: counts.stages[stage - 1] ?? 0,
+    children: `Stage ${stage}`,
+  }));
+  const categories = CATEGORIES.map(({ category }): CountLink => ({
+    key: `category ${category}`,
+    found: { any: { category: [String(category)] } },
+    count: counts.central[category],
+    children: <DamageChip category={category} />,
+  }));
+  const sensitive: CountLink = {
+    key: 'sensitive',
+    found: { any: { settled: ['sensitive'] } },
+    count: counts.sensitive,
+    children: 'Sensitive',
+  };
+  const asked = JSON.stringify(filter);
+  const linkTo = ({ key, found, count, children }: CountLink) => (
+    <Link
+      key={key}
+      to={registerOfResults(schemeId, found)}
+      aria-current={JSON.stringify(found) === asked ? 'true' : undefined}
+      className="inline-flex h-[26px] items-center gap-1.5 rounded px-2 hover:bg-paper-sunk aria-[current]:bg-sheet aria-[current]:font-semibold max-sm:h-9"
+    >
+      {children} <span className="text-ink-2">{formatCount(count)}</span>
+    </Link>
+  );
+  const stale = staleWords(run, run.since);
+  return (
+    <nav
+      aria-label={`What ${runName(run).toLowerCase()} found`}
+      className="flex flex-wrap items-center gap-1 text-small whitespace-nowrap max-sm:flex-nowrap max-sm:overflow-x-auto"
+    >
+      <span className="mr-2 text-ink-2" title={stale ?? undefined}>
+        {stale ?? `${runName(run)}, ${run.option.name}`}
+      </span>
+      {stages.map(linkTo)}
+      <span className="ml-2 text-ink-2">Category, central</span>
+      {categories.map(linkTo)}
+      {linkTo(sensitive)}
+    </nav>
+  );
+}
