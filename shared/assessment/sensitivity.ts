@@ -9,6 +9,17 @@ import type { Bracket } from './bracket.ts';
 export type BracketInput = 'volumeLoss' | 'troughWidth' | 'eOverG';
 
 /**
+ * The same in words.
+ *
+ * Units: none. Valid: read only. Source: [own].
+ */
+export const BRACKET_INPUTS: Readonly<Record<BracketInput, string>> = {
+  volumeLoss: 'volume loss',
+  troughWidth: 'K',
+  eOverG: 'E/G',
+};
+
+/**
  * Whether a category holds over the whole bracket and, where it does not, the input that moves it most.
  *
  * Units: none. Valid: `input` is null when settled. Source: [own].

@@ -1,5 +1,6 @@
 import { useEffect, useMemo } from 'react';
 import { useLocation } from 'react-router-dom';
+import { CAUTIONS, VALIDITY } from '../../../shared/cautions.ts';
 import { METHOD_VERSION } from '../../../shared/method-version.ts';
 import { Page } from '../../components/layout/page.tsx';
 import { ButtonLink } from '../../components/ui/button-link.tsx';
@@ -14,7 +15,7 @@ import { ReferencesList } from './components/references-list.tsx';
 import { RefusalsList, WarningsList } from './components/warnings-list.tsx';
 import type { MethodPart } from './formulas/formula-parts.ts';
 import { methodParts } from './formulas/method-parts.ts';
-import { CAUTIONS, NOT_KNOWN, VALIDITY } from './method-words.ts';
+import { NOT_KNOWN } from './method-words.ts';
 
 const PLACES = [
   { id: 'checks', title: 'Checks' },

@@ -1,13 +1,3 @@
-/** How far the method as a whole holds. */
-export const VALIDITY: readonly string[] = [
-  'Bored drives in soft ground. Shafts and boxes are not computed yet.',
-  'Ground movement is greenfield: as if no building stood there. Walls are taken to follow it.',
-  'More than one diameter of cover, walls founded above the crown.',
-  'Movement of the short term, as the drive passes. What clay does over years is not in it.',
-  'Walls are straight, whole, and founded at one level.',
-  'The bracket covers the volume losses and K that are given. It cannot cover what nobody gave.',
-];
-
 /** What the method does not know. */
 export const NOT_KNOWN: readonly (readonly [string, string])[] = [
   [
@@ -34,11 +24,4 @@ export const NOT_KNOWN: readonly (readonly [string, string])[] = [
     'What really happens underground',
     'A volume loss is a forecast of workmanship. Readings tell whether it holds.',
   ],
-];
-
-/** What goes on every sheet and notice. */
-export const CAUTIONS: readonly string[] = [
-  'The method estimates ground movement empirically. It does not replace a visit, a survey of condition, or the judgement of a chartered engineer.',
-  'Local codes, statutory procedures and licensed practice govern.',
-  'Predictions are to be followed by measurements.',
 ];

@@ -3,20 +3,23 @@ import { Link, useLocation } from 'react-router-dom';
 import { Page } from '../../components/layout/page.tsx';
 import { ButtonLink } from '../../components/ui/button-link.tsx';
 import { PATHS } from '../../config/paths.ts';
+import { AboutSheet } from './components/about-sheet.tsx';
 import { WhatIfAnswerView } from './components/what-if-answer.tsx';
 import { WhatIfForm } from './components/what-if-form.tsx';
-import { readDraft, whatIfPath } from './what-if/what-if-address.ts';
+import type { LeftOut } from './what-if/left-out.ts';
+import { readDraft, readLeftOut, whatIfPath } from './what-if/what-if-address.ts';
 import { TYPED, useWhatIf } from './what-if/use-what-if.ts';
 import type { WhatIfDraft } from './what-if/what-if-fields.ts';
 
-const START = readDraft(new URLSearchParams());
+type Start = { readonly draft: WhatIfDraft; readonly leftOut: readonly LeftOut[] | null };
 
 function isStart(draft: WhatIfDraft): boolean {
   return whatIfPath(draft) === PATHS.whatIf;
 }
 
-function AboutStart({ draft }: { readonly draft: WhatIfDraft }) {
-  if (isStart(draft)) {
+/** What the figures began with. */
+function AboutStart({ draft, leftOut }: Start) {
+  if (leftOut === null && isStart(draft)) {
     return (
       <p className="mb-3 text-small text-ink-2">
         At the central values this is the wall of the check{' '}
@@ -26,19 +29,22 @@ function AboutStart({ draft }: { readonly draft: WhatIfDraft }) {
     );
   }
   return (
-    <ButtonLink to={PATHS.whatIf} className="mb-3 print:hidden">
-      Back to the check
-    </ButtonLink>
+    <>
+      {leftOut !== null && <AboutSheet leftOut={leftOut} />}
+      <ButtonLink to={PATHS.whatIf} className="mb-3 print:hidden">
+        Back to the check
+      </ButtonLink>
+    </>
   );
 }
 
-function WhatIf({ start }: { readonly start: WhatIfDraft }) {
-  const whatIf = useWhatIf(start);
+function WhatIf({ draft: start, leftOut }: Start) {
+  const whatIf = useWhatIf(start, leftOut);
   const { draft, shown, isBehind } = whatIf;
   return (
     <div className="relative grid gap-x-8 gap-y-6 lg:grid-cols-[272px_minmax(0,1fr)] print:block">
       <div className="min-w-0">
-        <AboutStart draft={draft} />
+        <AboutStart draft={draft} leftOut={leftOut} />
         <WhatIfForm whatIf={whatIf} />
       </div>
       <div className="min-w-0">
@@ -59,6 +65,7 @@ function WhatIf({ start }: { readonly start: WhatIfDraft }) {
 export function WhatIfPage() {
   const location = useLocation();
   const { key, search } = location;
+  const words = new URLSearchParams(search);
   const isTyped = location.state === TYPED;
   const [arrived, setArrived] = useState(key);
   // an address from elsewhere starts anew; one that the fields have written does not
@@ -73,10 +80,7 @@ export function WhatIfPage() {
         </>
       }
     >
-      <WhatIf
-        key={arrived}
-        start={search === '' ? START : readDraft(new URLSearchParams(search))}
-      />
+      <WhatIf key={arrived} draft={readDraft(words)} leftOut={readLeftOut(words)} />
     </Page>
   );
 }

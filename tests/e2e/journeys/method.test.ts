@@ -1,15 +1,11 @@
 import { describe, expect } from 'vitest';
-import { axeFaults } from '../drivers/axe.ts';
+import { axeFaults, axeFaultsAtBothSizes } from '../drivers/axe.ts';
 import { journey } from '../drivers/journey.ts';
 import { signInAs } from '../drivers/sign-in.ts';
-import { DESK, PHONE } from '../drivers/visitor.ts';
 
-describe.each([
-  ['a desk', DESK],
-  ['a phone', PHONE],
-])('the method at %s', (_name, size) => {
+describe('the method', () => {
   journey('is open to an owner, and its checks agree in this browser', async ({ visit }) => {
-    const visitor = await visit(size);
+    const visitor = await visit();
     await signInAs(visitor, 'owner');
     const { page } = visitor;
     await page.getByRole('link', { name: 'Method', exact: true }).click();
@@ -20,7 +16,7 @@ describe.each([
       .waitFor();
     expect(await page.getByText('differs').count()).toBe(0);
     expect(await page.locator('math').count()).toBeGreaterThan(50);
-    expect(await axeFaults(page)).toEqual([]);
+    expect(await axeFaultsAtBothSizes(page)).toEqual([]);
     await page.getByRole('button', { name: 'Run again' }).click();
     await page
       .getByText(/^(\d+) of \1 agree$/)
@@ -30,7 +26,7 @@ describe.each([
 });
 
 journey('lets one wall be tried out, in an address to be sent on', async ({ visit }) => {
-  const visitor = await visit(DESK);
+  const visitor = await visit();
   await signInAs(visitor, 'witness');
   const { page } = visitor;
   await visitor.open('/method');
@@ -44,9 +40,7 @@ journey('lets one wall be tried out, in an address to be sent on', async ({ visi
     .first()
     .waitFor();
   await page.getByText('Breaks at 4.40 %: not above the central value.').waitFor();
-  await page.setViewportSize(PHONE);
-  expect(await axeFaults(page)).toEqual([]);
-  await page.setViewportSize(DESK);
+  expect(await axeFaultsAtBothSizes(page)).toEqual([]);
 
   await visitor.open(page.url());
   expect(await losses.getByLabel('Central').inputValue()).toBe('6');

@@ -1,5 +1,5 @@
 import { describe, expect } from 'vitest';
-import { axeFaults } from '../drivers/axe.ts';
+import { axeFaults, axeFaultsAtBothSizes } from '../drivers/axe.ts';
 import { journey } from '../drivers/journey.ts';
 import { tabTo } from '../drivers/keyboard.ts';
 import {
@@ -14,7 +14,6 @@ import {
   selectedName,
 } from '../drivers/plan.ts';
 import { signInAs } from '../drivers/sign-in.ts';
-import { DESK, PHONE } from '../drivers/visitor.ts';
 
 describe('the plan', () => {
   journey('finds a building by name, goes there, and lets it be pressed', async ({ visit }) => {
@@ -103,21 +102,17 @@ describe('the plan', () => {
   });
 });
 
-describe.each([
-  ['a desk', DESK],
-  ['a phone', PHONE],
-])('at %s', (_name, size) => {
-  journey('axe finds nothing against the plan', async ({ visit }) => {
-    const visitor = await visit(size);
-    await signInAs(visitor, 'assessor');
-    await openPlan(visitor);
-    expect(await axeFaults(visitor.page)).toEqual([]);
-    await search(visitor, 'the');
-    expect(await axeFaults(visitor.page)).toEqual([]);
-    await visitor.page.keyboard.press('Enter');
-    await visitor.page.getByText('Use', { exact: true }).waitFor();
-    expect(await axeFaults(visitor.page)).toEqual([]);
-  });
+journey('axe finds nothing against the plan', async ({ visit }) => {
+  const visitor = await visit();
+  const { page } = visitor;
+  await signInAs(visitor, 'assessor');
+  await openPlan(visitor);
+  expect(await axeFaultsAtBothSizes(page)).toEqual([]);
+  await search(visitor, 'the');
+  expect(await axeFaultsAtBothSizes(page)).toEqual([]);
+  await page.keyboard.press('Enter');
+  await page.getByText('Use', { exact: true }).waitFor();
+  expect(await axeFaultsAtBothSizes(page)).toEqual([]);
 });
 
 journey('a scheme without buildings says what to do first', async ({ visit }) => {

@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { caseOfBuilding } from '../../../shared/assessment/case-of-building.ts';
-import { inputsBesideWall } from '../../../shared/assessment/inputs-beside-wall.ts';
 import { outcomesOfBuildings } from '../../../shared/assessment/outcomes-of-buildings.ts';
+import { pieceBesideWall } from '../../../shared/assessment/piece-beside-wall.ts';
 import { preparedBuilding } from '../../../shared/assessment/prepared-building.ts';
 import { resultOfOutcome } from '../../../shared/assessment/result-of-outcome.ts';
 import { assessmentRules, runInputs } from '../../../shared/assessment/run-inputs.ts';
@@ -84,14 +84,20 @@ describe('a sheet', () => {
     expect(refused.outcome.fault).toContain('founding level');
   });
 
-  test('names the inputs of the piece beside a wall', () => {
+  test('names the piece beside a wall, with its inputs and the level of its axis', () => {
     const own = { from: 500, to: 700, volumeLoss: aRange(0.015), troughWidth: aRange(0.45) };
-    const { model } = runInputs(aDesign({ intervals: [own] }), RULES);
+    const levels = [
+      { chainage: 0, level: -20 },
+      { chainage: 400, level: -24 },
+    ];
+    const { model } = runInputs(aDesign({ intervals: [own], levels }), RULES);
     const at = (east: number) =>
-      inputsBesideWall(model, { segment: { start: [east, 5], end: [east, 15] } });
-    expect(at(100)).toMatchObject({ volumeLoss: own.volumeLoss, troughWidth: own.troughWidth });
-    expect(at(-300)?.volumeLoss.central).toBe(0.015);
-    expect(at(-300)?.troughWidth.central).toBe(0.5);
+      pieceBesideWall(model, { segment: { start: [east, 5], end: [east, 15] } });
+    const { volumeLoss, troughWidth } = own;
+    expect(at(100)?.piece).toMatchObject({ volumeLoss, troughWidth });
+    expect(at(-300)?.piece.volumeLoss.central).toBe(0.015);
+    expect(at(-300)?.piece.troughWidth.central).toBe(0.5);
+    expect(at(-300)?.axis).toBe(-22);
   });
 });
 

@@ -81,7 +81,7 @@ export function WhatIfForm({ whatIf }: { readonly whatIf: WhatIf }) {
       <Figures
         whatIf={whatIf}
         legend="Wall"
-        words="From the axis: in plan to the near end. Height: from founding level to eaves. 90° is square to the drive, 0° along it."
+        words="From the axis: in plan, to where the wall begins. Height: from founding level to eaves. 90° leads straight away from the drive, 0° along it, −90° straight towards it."
         names={['distance', 'length', 'angle', 'height', 'founding', 'eOverG', 'poisson']}
       />
     </form>

@@ -14,10 +14,10 @@ function fraction(percent: number): number {
   return Number(`${percent}e-2`);
 }
 
-/** The far end of a wall whose near end stands beside the middle of the drive. */
+/** Where a wall ends that begins beside the middle of the drive. */
 function farEnd({ distance, length, angle }: WhatIfInputs): [number, number] {
   const turned = (angle * Math.PI) / 180;
-  // it leads away from the drive on the side on which it begins
+  // it leads away from the drive on the side on which it begins, or towards it where the angle is negative
   const side = distance < 0 ? -1 : 1;
   return [rounded(length * Math.cos(turned)), rounded(distance + side * length * Math.sin(turned))];
 }

@@ -16,7 +16,8 @@ export type ReadInputs =
   | { readonly kind: 'faults'; readonly faults: WhatIfFaults };
 
 function withUnit(figure: number, unit: string): string {
-  return unit === '' ? String(figure) : `${figure}\u00a0${unit}`;
+  const words = String(figure).replace('-', '\u2212');
+  return unit === '' ? words : `${words}\u00a0${unit}`;
 }
 
 function faultOf(text: string, { least, most, isOver = false, unit }: WhatIfField): string | null {

@@ -1,5 +1,6 @@
 import { useDeferredValue, useMemo, useState } from 'react';
 import { useNavigate } from 'react-router-dom';
+import type { LeftOut } from './left-out.ts';
 import { whatIfPath } from './what-if-address.ts';
 import type { WhatIfDraft, WhatIfFaults, WhatIfName } from './what-if-fields.ts';
 import { workWhatIf, type WorkedWhatIf } from './work-what-if.ts';
@@ -18,7 +19,7 @@ export type WhatIf = {
 };
 
 /** A what-if as it is being written: worked out at each change, and kept in the address. */
-export function useWhatIf(start: WhatIfDraft): WhatIf {
+export function useWhatIf(start: WhatIfDraft, leftOut: readonly LeftOut[] | null): WhatIf {
   const navigate = useNavigate();
   const [draft, setDraft] = useState(start);
   const settled = useDeferredValue(draft);
@@ -34,7 +35,7 @@ export function useWhatIf(start: WhatIfDraft): WhatIf {
     change: (name, text) => {
       const next = { ...draft, [name]: text };
       setDraft(next);
-      void navigate(whatIfPath(next), { replace: true, state: TYPED });
+      void navigate(whatIfPath(next, leftOut), { replace: true, state: TYPED });
     },
   };
 }

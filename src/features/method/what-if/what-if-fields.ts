@@ -52,7 +52,7 @@ export const WHAT_IF_FIELDS = {
   axisDepth: field('z0', 'Axis depth', 'm', axisDepth, [0, DEEPEST_AXIS], true),
   distance: field('y', 'From the axis', 'm', wall.from, [-FARTHEST, FARTHEST]),
   length: field('l', 'Length', 'm', wall.to - wall.from, [LIMITS.wallLength, LONGEST_WALL]),
-  angle: field('a', 'Angle to drive', '°', SQUARE, [0, SQUARE]),
+  angle: field('a', 'Angle to drive', '°', SQUARE, [-SQUARE, SQUARE]),
   height: field('h', 'Height', 'm', wall.height, [0, LIMITS.height], true),
   founding: field('z', 'Founding depth', 'm', 0, [0, DEEPEST_AXIS]),
   eOverG: field('eg', 'E/G', '', wall.eOverG, [0, LIMITS.eOverG], true),

@@ -5,14 +5,14 @@ import { BracketLines } from '../../../components/chart/bracket-lines.tsx';
 import { niceTicks } from '../../../components/chart/nice-ticks.ts';
 import { figure } from '../../alignments/design-words.ts';
 import type { AcrossLayout } from '../across-layout.ts';
-import type { CutBuilding } from '../cut-buildings.ts';
+import type { ShownBuilding } from '../shown-categories.ts';
 import { BoresAcross } from './bores-across.tsx';
 import { StandingBuildings } from './standing-buildings.tsx';
 
 type AcrossDrawingProps = {
   readonly section: SectionAcross;
   readonly layout: AcrossLayout;
-  readonly buildings: readonly CutBuilding[];
+  readonly buildings: readonly ShownBuilding[];
   readonly selected: number | null;
   /** How many times as large settlement is drawn. */
   readonly factor: number;

@@ -6,6 +6,7 @@ import { useWorked } from '../../alignments/hooks/use-worked.ts';
 import { acrossLayout } from '../across-layout.ts';
 import { useCutBuildings } from '../hooks/use-cut-buildings.ts';
 import { acrossWords, volumeWords } from '../section-words.ts';
+import { withCategories } from '../shown-categories.ts';
 import { AcrossDrawing } from './across-drawing.tsx';
 import { AcrossTables } from './across-tables.tsx';
 import { BracketLegend } from './bracket-legend.tsx';
@@ -40,11 +41,12 @@ type AcrossViewProps = SectionViewProps & { readonly design: AlignmentDesign };
 
 /** The trough across the line where the section is. */
 export function AcrossView(props: AcrossViewProps) {
-  const { design, width, tools, selected } = props;
+  const { design, width, tools, selected, shown } = props;
   const { height } = tools.strip;
   const layout = useMemo(() => acrossLayout(design, width, height), [design, width, height]);
   const { trough, fault } = useAcross(props, layout.halfWidth);
-  const { buildings, hasFailed } = useCutBuildings(trough?.section ?? null, layout.halfWidth);
+  const { buildings: cut, hasFailed } = useCutBuildings(trough?.section ?? null, layout.halfWidth);
+  const buildings = useMemo(() => withCategories(cut, shown.shading), [cut, shown.shading]);
   const { denominator, halfWidth } = layout;
   const factor = trough === null ? 1 : factorOf(trough);
   const largest = trough?.largest ?? null;
@@ -59,7 +61,7 @@ export function AcrossView(props: AcrossViewProps) {
       <StripFault fault={fault} />
       {hasFailed && <p className="px-4 text-cap text-clay-deep">Buildings could not be fetched.</p>}
       {trough !== null && tools.isTable && (
-        <AcrossTables {...{ trough, buildings, halfWidth, height }} />
+        <AcrossTables {...{ trough, buildings, shown, halfWidth, height }} />
       )}
       {trough !== null && !tools.isTable && (
         <AcrossDrawing

@@ -1,16 +1,20 @@
 import { useState } from 'react';
 import type { AlignmentDesign } from '../../../../shared/schemas/alignments.ts';
 import { Button } from '../../../components/ui/button.tsx';
-import { usePrinting } from '../../../hooks/use-printing.ts';
 import { useWidth } from '../../../hooks/use-width.ts';
 import { useSectionChainage, type SectionDesk } from '../hooks/use-section-desk.ts';
 import { useSectionKeys } from '../hooks/use-section-keys.ts';
+import type { ShownRun } from '../shown-categories.ts';
 import { AcrossView } from './across-view.tsx';
 import { AlongView } from './along-view.tsx';
 import { EmptySection } from './empty-section.tsx';
 import { StripEdge } from './strip-edge.tsx';
 
-type SectionStripProps = { readonly desk: SectionDesk; readonly selected: number | null };
+type SectionStripProps = {
+  readonly desk: SectionDesk;
+  readonly selected: number | null;
+  readonly shown: ShownRun;
+};
 
 /** Before it is measured, and on paper: what A4 holds upright. */
 const PAPER_WIDTH = 680;
@@ -19,18 +23,18 @@ function OpenSection({
   desk,
   design,
   selected,
+  shown,
 }: SectionStripProps & { readonly design: AlignmentDesign }) {
   const { strip, store, length } = desk;
   const chainage = useSectionChainage(desk);
   const [isTable, setTable] = useState(false);
-  const { width, frame } = useWidth(PAPER_WIDTH);
-  const isPrinting = usePrinting();
+  const { width, frame } = useWidth(PAPER_WIDTH, PAPER_WIDTH);
   function turn(): void {
     setTable((now) => !now);
   }
   useSectionKeys({ chainage, length, onGo: store.set, onTable: turn });
   const tools = { strip, chainage, onGo: store.set, isTable, onTable: turn };
-  const view = { desk, design, tools, chainage, selected, width: isPrinting ? PAPER_WIDTH : width };
+  const view = { desk, design, tools, chainage, selected, shown, width };
   return (
     <div ref={frame} className="overflow-hidden">
       {strip.view === 'across' ? <AcrossView {...view} /> : <AlongView {...view} />}
@@ -39,7 +43,7 @@ function OpenSection({
 }
 
 /** Under the map: the section across or along the line that is shown. */
-export function SectionStrip({ desk, selected }: SectionStripProps) {
+export function SectionStrip({ desk, selected, shown }: SectionStripProps) {
   const { line, strip } = desk;
   if (!line.isKnown) return null;
   function open(isOpen: boolean): void {
@@ -72,7 +76,7 @@ export function SectionStrip({ desk, selected }: SectionStripProps) {
       {strip.isOpen && line.design !== null && (
         <>
           <StripEdge strip={strip} />
-          <OpenSection {...{ desk, selected }} design={line.design} />
+          <OpenSection {...{ desk, selected, shown }} design={line.design} />
         </>
       )}
     </section>

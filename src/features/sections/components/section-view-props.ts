@@ -1,4 +1,5 @@
 import type { SectionDesk } from '../hooks/use-section-desk.ts';
+import type { ShownRun } from '../shown-categories.ts';
 import type { StripTools } from './strip-head.tsx';
 
 /** What either view of the section is told. */
@@ -9,4 +10,5 @@ export type SectionViewProps = {
   /** Of the strip, in pixels. */
   readonly width: number;
   readonly selected: number | null;
+  readonly shown: ShownRun;
 };

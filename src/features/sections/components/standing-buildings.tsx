@@ -1,56 +1,77 @@
+import { useId } from 'react';
+import { hatchFill, HatchPatterns } from '../../../components/ui/hatch-patterns.tsx';
 import { classNames } from '../../../lib/class-names.ts';
+import { DAMAGE } from '../../../theme/damage.ts';
 import type { AcrossLayout } from '../across-layout.ts';
-import type { CutBuilding } from '../cut-buildings.ts';
+import { labelOf, type ShownBuilding } from '../shown-categories.ts';
+import { StandingWords } from './standing-words.tsx';
 
 type StandingBuildingsProps = {
   readonly layout: AcrossLayout;
-  readonly buildings: readonly CutBuilding[];
+  readonly buildings: readonly ShownBuilding[];
   readonly selected: number | null;
 };
 
-/** A reference needs so much of a building's width and height, in pixels. */
-const NAMED_FROM = { width: 40, height: 16 };
+/** Of hatches, under which they would run together on a screen. */
+const HATCH = 0.8;
 
-function titleOf({ reference, name, eavesHeight, isHeightAssumed }: CutBuilding): string {
+function titleOf(building: ShownBuilding): string {
+  const { reference, name, eavesHeight, isHeightAssumed } = building;
   const called = name === null ? reference : `${reference} ${name}`;
-  return `${called}, ${eavesHeight.toFixed(1)} m to the eaves${isHeightAssumed ? ', assumed' : ''}`;
+  const label = labelOf(building);
+  const found = label === null ? '' : `, category ${label}`;
+  return `${called}${found}, ${eavesHeight.toFixed(1)} m to the eaves${isHeightAssumed ? ', assumed' : ''}`;
 }
 
-/** Buildings where a section cuts them, at their true width and height; an assumed height is dotted. */
+/** Where a building stands in the drawing, in pixels. */
+function frameOf({ x, ground, pixelsPerMetre }: AcrossLayout, building: ShownBuilding) {
+  const [left, right] = [x(building.to), x(building.from)];
+  const height = building.eavesHeight * pixelsPerMetre;
+  return { left, right, width: right - left, height, middle: ground - height / 2 };
+}
+
+/**
+ * Buildings where a section cuts them, at their true width and height, filled as the map fills them; an
+ * assumed height is dotted.
+ */
 export function StandingBuildings({ layout, buildings, selected }: StandingBuildingsProps) {
-  const { x, ground, pixelsPerMetre } = layout;
-  return buildings.map((building) => {
-    const [left, right] = [x(building.to), x(building.from)];
-    const [width, height] = [right - left, building.eavesHeight * pixelsPerMetre];
-    const isSelected = building.id === selected;
-    const isNamed = width >= NAMED_FROM.width && height >= NAMED_FROM.height;
-    return (
-      <g key={`${building.id} ${building.from}`}>
-        <title>{titleOf(building)}</title>
-        <path
-          d={`M${left} ${ground}v${-height}h${width}v${height}`}
-          strokeWidth={isSelected ? 2 : 1}
-          className={classNames('fill-bldg', isSelected ? 'stroke-select' : 'stroke-bldg-edge')}
-        />
-        {building.isHeightAssumed && (
-          <path
-            d={`M${left} ${ground - height}h${width}`}
-            className="stroke-clay"
-            strokeWidth="1.5"
-            strokeDasharray="1.5 2.5"
-          />
-        )}
-        {isNamed && (
-          <text
-            x={(left + right) / 2}
-            y={ground - height / 2 + 3.5}
-            textAnchor="middle"
-            className="fill-ink-2 text-micro"
-          >
-            {building.reference}
-          </text>
-        )}
-      </g>
-    );
-  });
+  const prefix = useId();
+  const { ground } = layout;
+  return (
+    <>
+      <HatchPatterns prefix={prefix} scale={HATCH} />
+      {buildings.map((building) => {
+        const { id, from, category, isHeightAssumed } = building;
+        const frame = frameOf(layout, building);
+        const { left, width, height } = frame;
+        const isSelected = id === selected;
+        return (
+          <g key={`${id} ${from}`}>
+            <title>{titleOf(building)}</title>
+            <path
+              d={`M${left} ${ground}v${-height}h${width}v${height}`}
+              strokeWidth={isSelected ? 2 : 1}
+              {...(category !== null && {
+                fill: hatchFill(prefix, category),
+                stroke: DAMAGE[category].edge,
+              })}
+              className={classNames(
+                category === null && 'fill-bldg',
+                isSelected ? 'stroke-select' : category === null && 'stroke-bldg-edge',
+              )}
+            />
+            {isHeightAssumed && (
+              <path
+                d={`M${left} ${ground - height}h${width}`}
+                className="stroke-clay"
+                strokeWidth="1.5"
+                strokeDasharray="1.5 2.5"
+              />
+            )}
+            <StandingWords building={building} frame={frame} />
+          </g>
+        );
+      })}
+    </>
+  );
 }

@@ -35,7 +35,7 @@ function Neighbours({ frame, buildingId }: { frame: PlanFrame; buildingId: numbe
   const { id, registerVersion } = useScheme();
   const { data = [] } = useQuery(outlinesQuery(id, registerVersion, frame.box));
   return (
-    <g className="fill-bldg stroke-bldg-edge" strokeWidth=".8">
+    <g className="fill-bldg stroke-bldg-edge print:fill-sheet" strokeWidth=".8">
       {data
         .filter((one) => one.id !== buildingId)
         .map((one) => (
@@ -172,10 +172,9 @@ function ScaleBar({ frame }: { readonly frame: PlanFrame }) {
 /** The building in plan with its walls by letter, the drives and the run's contours; north is up. */
 export function PlanExtract({ schemeId, run, building, sheet, index }: PlanExtractProps) {
   const prefix = useId();
-  const { width, frame: box } = useWidth(300);
+  const { width, frame: box } = useWidth(300, 300);
   const { facts, result } = building;
   const frame = planFrame(facts.parts, width);
-  const fill = result.category === null ? 'var(--color-paper)' : hatchFill(prefix, result.category);
   return (
     <div ref={box} className="mt-2">
       <svg
@@ -187,7 +186,13 @@ export function PlanExtract({ schemeId, run, building, sheet, index }: PlanExtra
       >
         <HatchPatterns prefix={prefix} />
         <Neighbours frame={frame} buildingId={Number(facts.id)} />
-        <path d={ringsPath(frame, facts.parts)} fill={fill} fillRule="evenodd" />
+        <path
+          d={ringsPath(frame, facts.parts)}
+          fillRule="evenodd"
+          {...(result.category === null
+            ? { className: 'fill-sheet' }
+            : { fill: hatchFill(prefix, result.category) })}
+        />
         <Contours frame={frame} schemeId={schemeId} runId={run.id} />
         <Drives frame={frame} sheet={sheet} />
         <Walls frame={frame} sheet={sheet} index={index} />

@@ -1,18 +1,18 @@
-import { inputsBesideWall } from '../../../../shared/assessment/inputs-beside-wall.ts';
 import type { OpenedWall } from '../../../../shared/assessment/open-wall.ts';
 import type { BuildingSheet } from '../../../../shared/assessment/sheet-of-building.ts';
+import { pieceBesideWall } from '../../../../shared/assessment/piece-beside-wall.ts';
 import { resultOfOutcome } from '../../../../shared/assessment/result-of-outcome.ts';
+import { CAUTIONS } from '../../../../shared/cautions.ts';
 import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
 import { troughWidthMatters } from '../../../../shared/ground/trough-width-matters.ts';
 import { Panel } from '../../../components/ui/panel.tsx';
-import { settledWords } from '../../assessment/bracket-words.ts';
+import { breakpointWords, settledWords } from '../../assessment/bracket-words.ts';
 import { BracketTable } from '../../assessment/components/bracket-table.tsx';
 import { BreakpointBar } from '../../assessment/components/breakpoint-bar.tsx';
 import { RangeBar } from '../../assessment/components/range-bar.tsx';
 import { Warnings } from '../../assessment/components/warnings.tsx';
 import { WallFacts } from '../../assessment/components/wall-facts.tsx';
 import { strainRange } from '../../assessment/strain-range.ts';
-import { CAUTIONS } from '../../method/method-words.ts';
 import { reserveWords, stageWords } from '../../runs/result-words.ts';
 import { assumedWords, plainWords } from '../plain-words.ts';
 
@@ -39,7 +39,7 @@ function Record({ run, building, sheet }: SheetAnswersProps) {
 function BracketPanels({ building, sheet, opened }: SheetAnswersProps) {
   const { bracket } = sheet.strain ?? {};
   const { model } = sheet.inputs;
-  const beside = opened === null ? undefined : inputsBesideWall(model, opened.wall);
+  const beside = opened === null ? undefined : pieceBesideWall(model, opened.wall)?.piece;
   if (bracket === undefined || beside === undefined) return null;
   return (
     <>
@@ -61,7 +61,12 @@ function BracketPanels({ building, sheet, opened }: SheetAnswersProps) {
       <Panel title="Breakpoint" note="volume loss that makes it the category that leads on">
         <div className="mt-2">
           <BreakpointBar breakpoint={sheet.strain?.breakpoint} volumeLoss={beside.volumeLoss} />
-          <p className="mt-1 text-small">{reserveWords(building.result)}</p>
+          <p className="mt-1 text-small">
+            {/* of a building that screening lets go the run records none */}
+            {building.result.strain === null
+              ? breakpointWords(sheet.strain?.breakpoint, beside.volumeLoss)
+              : reserveWords(building.result)}
+          </p>
         </div>
       </Panel>
     </>
@@ -74,7 +79,7 @@ export function SheetAnswers(props: SheetAnswersProps) {
   const { result } = building;
   const assumed = assumedWords(result.assumed);
   return (
-    <div className="min-w-0 lg:col-span-2 xl:col-span-1">
+    <div className="min-w-0 lg:col-span-2 xl:col-span-1 print:mt-5 print:grid print:grid-cols-2 print:gap-x-8 print:gap-y-5 print:[&>section]:mt-0 print:[&>section]:break-inside-avoid">
       <Panel title="In plain words">
         <div className="mt-2 border-l-4 border-clay pl-3 text-roomy">
           {plainWords(result).map((sentence) => (

@@ -6,6 +6,8 @@ import { DamageChip } from '../../../components/ui/damage-chip.tsx';
 import { buildingPath, registerPath } from '../../../config/paths.ts';
 import { categoryLabel } from '../../assessment/bracket-words.ts';
 import { stageWords } from '../../runs/result-words.ts';
+import { useScheme } from '../../schemes/scheme-context.ts';
+import { SheetsBeside } from './sheets-beside.tsx';
 
 type SheetHeadProps = {
   readonly schemeId: string;
@@ -45,19 +47,23 @@ function Verdict({ result }: Pick<RunBuilding, 'result'>) {
 
 /** What building this is, where it stands in the answer, and what can be done with its sheet. */
 export function SheetHead({ schemeId, run, building }: SheetHeadProps) {
+  const scheme = useScheme();
   const { facts, result } = building;
   const id = Number(facts.id);
   const casePath = `/api/schemes/${schemeId}/runs/${run.id}/buildings/${id}/case`;
   return (
-    <header className="flex flex-wrap items-center gap-x-8 gap-y-3 border-b-2 border-ink px-8 py-3.5 max-sm:px-4">
-      <div className="min-w-0 flex-1">
-        <p className="text-small text-ink-3">Sheet · {facts.reference}</p>
+    <header className="flex flex-wrap items-center gap-x-8 gap-y-3 border-b-2 border-ink px-8 py-3.5 max-sm:px-4 print:px-0">
+      <div className="min-w-0 flex-1 max-sm:basis-full">
+        <p className="text-small text-ink-3">
+          Sheet · {facts.reference} · {scheme.name}
+        </p>
         <h1 className="text-h1 break-words max-sm:text-h2">
           {facts.name ?? facts.address ?? facts.reference}
         </h1>
       </div>
       <Verdict result={result} />
       <div className="flex flex-wrap gap-2 print:hidden">
+        <SheetsBeside schemeId={schemeId} runId={run.id} building={building} />
         <ButtonLink to={`${buildingPath(schemeId, id)}&run=${run.id}`}>Show on plan</ButtonLink>
         <ButtonLink to={`${registerPath(schemeId)}?building=${id}`}>Show in register</ButtonLink>
         <a className="inline-flex items-center text-small underline" href={casePath} download>

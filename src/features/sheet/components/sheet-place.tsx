@@ -34,7 +34,7 @@ export function SheetPlace(props: SheetPlaceProps) {
   const { schemeId, run, building, sheet, index, onChoose } = props;
   const address = building.facts.name === null ? null : building.facts.address;
   return (
-    <div className="min-w-0">
+    <div className="min-w-0 print:grid print:grid-cols-[300px_minmax(0,1fr)] print:gap-x-8 print:[&>section]:mt-0">
       <Panel title="Walls" note="by letter; the clay one is opened">
         <PlanExtract {...{ schemeId, run, building, sheet, index }} />
         {sheet.strain !== null && (
@@ -43,7 +43,10 @@ export function SheetPlace(props: SheetPlaceProps) {
       </Panel>
       <Panel title="Facts" note="as the run took them; dotted where assumed">
         {address !== null && <p className="mt-2 text-small">{address}</p>}
-        <BuildingFacts building={valuesOf(building, sheet)} />
+        {/* the heading has its rule already */}
+        <div className="[&>dl]:mt-0 [&>dl]:border-t-0">
+          <BuildingFacts building={valuesOf(building, sheet)} />
+        </div>
       </Panel>
     </div>
   );

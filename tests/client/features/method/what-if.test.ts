@@ -1,6 +1,10 @@
 import { describe, expect, it } from 'vitest';
 import { assessCaseSchema } from '../../../../shared/schemas/assess-case.ts';
-import { readDraft, whatIfPath } from '../../../../src/features/method/what-if/what-if-address.ts';
+import {
+  readDraft,
+  readLeftOut,
+  whatIfPath,
+} from '../../../../src/features/method/what-if/what-if-address.ts';
 import { caseOfInputs } from '../../../../src/features/method/what-if/case-of-inputs.ts';
 import { readInputs } from '../../../../src/features/method/what-if/read-inputs.ts';
 import type { WhatIfDraft } from '../../../../src/features/method/what-if/what-if-fields.ts';
@@ -45,6 +49,16 @@ describe('the address', () => {
     expect(path).toBe('/method/what-if?vh=3&z=x');
     const search = new URLSearchParams(path.split('?')[1]);
     expect(readDraft(search)).toEqual({ ...START, lossHigh: '3', founding: 'x' });
+    expect(readLeftOut(search)).toBeNull();
+  });
+
+  it('says of a wall of a sheet what is left out of it, if anything', () => {
+    const search = (path: string) => new URLSearchParams(path.split('?')[1]);
+    expect(readLeftOut(search(whatIfPath(START, [])))).toEqual([]);
+    const path = whatIfPath({ ...START, angle: '-30' }, ['drives', 'rules']);
+    expect(readLeftOut(search(path))).toEqual(['drives', 'rules']);
+    expect(readDraft(search(path))).toEqual({ ...START, angle: '-30' });
+    expect(readLeftOut(search('?sheet=rules.toString.drives.rules'))).toEqual(['drives', 'rules']);
   });
 });
 
@@ -53,6 +67,9 @@ describe('a wall', () => {
     const read = readInputs({ ...START, distance: '-4', angle: '30', length: '10' });
     if (read.kind === 'faults') throw new Error('The figures do not fit.');
     expect(caseOfInputs(read.inputs).walls[0]?.to).toEqual([8.660254, -9]);
+    // towards it, and across
+    const turned = { ...read.inputs, angle: -30 };
+    expect(caseOfInputs(turned).walls[0]?.to).toEqual([8.660254, 1]);
   });
 
   it('along the drive is not strained once it is complete, and warns', () => {
@@ -68,7 +85,7 @@ describe('what is wrong', () => {
     [{ diameter: 'six' }, 'diameter', 'This is no number.'],
     [{ diameter: '0' }, 'diameter', 'More than 0\u00a0m.'],
     [{ lossHigh: '21' }, 'lossHigh', 'At most 20\u00a0%.'],
-    [{ angle: '-1' }, 'angle', 'At least 0\u00a0°.'],
+    [{ angle: '-91' }, 'angle', 'At least \u221290\u00a0°.'],
     [{ lossLow: '1.6' }, 'lossLow', 'Not over the central value.'],
     [{ widthHigh: '0.45' }, 'widthHigh', 'Not under the central value.'],
     [

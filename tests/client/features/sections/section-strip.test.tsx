@@ -8,7 +8,9 @@ import {
   useSectionMark,
   type SectionDesk,
 } from '../../../../src/features/sections/hooks/use-section-desk.ts';
+import type { ShownRun } from '../../../../src/features/sections/shown-categories.ts';
 import type { SectionLine } from '../../../../src/features/sections/section-line.ts';
+import { DAMAGE } from '../../../../src/theme/damage.ts';
 import { PersonContext } from '../../../../src/features/session/person-context.ts';
 import { anId, aSchemeAnswer } from '../../../support/answers.ts';
 import { axeFaults } from '../../../support/axe-faults.ts';
@@ -60,23 +62,25 @@ function aLine(overrides: Partial<SectionLine> = {}): SectionLine {
 let desk: SectionDesk;
 let marks: number;
 
-function Desk({ line }: { readonly line: SectionLine }) {
+const NO_RUN: ShownRun = { shading: null, end: 'central' };
+
+function Desk({ line, shown }: { readonly line: SectionLine; readonly shown: ShownRun }) {
   desk = useSectionDesk(line);
   marks = useSectionMark(desk).length;
   return (
     <main>
       <h1>Plan</h1>
-      <SectionStrip desk={desk} selected={null} />
+      <SectionStrip desk={desk} selected={null} shown={shown} />
     </main>
   );
 }
 
-function show(line = aLine()) {
+function show(line = aLine(), shown = NO_RUN) {
   fakeApi({ [OUTLINES]: [HOUSE] });
   return renderPage(
     <PersonContext value={PERSON}>
       <SchemeContext value={aSchemeAnswer()}>
-        <Desk line={line} />
+        <Desk line={line} shown={shown} />
       </SchemeContext>
     </PersonContext>,
   );
@@ -135,6 +139,48 @@ describe('the section across the line', () => {
     const buildings = screen.getByRole('table', { name: 'Buildings on the section' });
     expect(within(buildings).getByRole('row', { name: 'B-0007 10.0 22.0 9.0' })).toBeTruthy();
     expect(await axeFaults(document.body)).toEqual([]);
+  });
+});
+
+describe('buildings on the section', () => {
+  function house(): HTMLElement {
+    const title = screen.getByText(/^B-0007 Customs House/);
+    const group = title.closest('g');
+    if (group === null) throw new Error('The building is not drawn.');
+    return group as unknown as HTMLElement;
+  }
+
+  it('take the hatch and number of the category that the map shows, and say it in the table', async () => {
+    show(aLine(), { shading: { by: 'category', shades: new Map([[7, 2]]) }, end: 'high' });
+    await screen.findByText('B-0007');
+    expect(house().querySelector('title')?.textContent).toBe(
+      'B-0007 Customs House, category 2, 9.0 m to the eaves',
+    );
+    expect(within(house()).getByText('2')).toBeTruthy();
+    const fill = house().querySelector('path')?.getAttribute('fill') ?? '';
+    expect(document.querySelector(fill.replace(/^url\((.*)\)$/, '$1'))?.innerHTML).toContain(
+      DAMAGE[2].fill,
+    );
+    fireEvent.keyDown(document.body, { key: 't' });
+    const table = screen.getByRole('table', { name: 'Buildings on the section' });
+    expect(within(table).getByRole('columnheader', { name: 'Category high' })).toBeTruthy();
+    expect(
+      within(table).getByText('Category', { selector: 'td span' }).parentElement?.textContent,
+    ).toBe('Category 2, slight');
+  });
+
+  it.each([
+    ['without a run', NO_RUN],
+    ['without a category', { shading: { by: 'category', shades: new Map() }, end: 'low' }],
+    ['by stage', { shading: { by: 'stage', shades: new Map([[7, 12]]) }, end: 'central' }],
+  ] satisfies [string, ShownRun][])('are plain %s', async (_name, shown) => {
+    show(aLine(), shown);
+    await screen.findByText('B-0007');
+    const path = house().querySelector('path');
+    expect([path?.hasAttribute('fill'), path?.getAttribute('class')]).toEqual([
+      false,
+      'fill-bldg stroke-bldg-edge',
+    ]);
   });
 });
 

@@ -1,9 +1,11 @@
-import { fireEvent, screen, within } from '@testing-library/react';
+import { fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { expect, it } from 'vitest';
+import { useLocation } from 'react-router-dom';
 import { outcomesOfBuildings } from '../../../../shared/assessment/outcomes-of-buildings.ts';
 import { resultOfOutcome } from '../../../../shared/assessment/result-of-outcome.ts';
 import { runInputs } from '../../../../shared/assessment/run-inputs.ts';
 import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
+import { listsAtHand } from '../../../../src/config/keys-at-hand.ts';
 import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
 import { SheetDesk } from '../../../../src/features/sheet/components/sheet-desk.tsx';
 import { anId, aSchemeAnswer } from '../../../support/answers.ts';
@@ -21,6 +23,11 @@ const RUN = aRunDetail({
   }),
 });
 
+function Address() {
+  const { pathname, search } = useLocation();
+  return <output aria-label="Address">{`${pathname}${search}`}</output>;
+}
+
 function aRunBuilding(north: number, overrides: Partial<RunBuilding> = {}): RunBuilding {
   const known = someFacts({ id: '7', parts: [[aRing(-5, north, 10, 30)]], storeys: null });
   const { design, rules } = RUN;
@@ -35,21 +42,25 @@ function aRunBuilding(north: number, overrides: Partial<RunBuilding> = {}): RunB
     changedSince: false,
     rows: [],
     result: resultOfOutcome(found.outcome),
+    ...{ previous: null, next: null },
     ...overrides,
   }; // prettier-ignore
 }
 
-function show(building: RunBuilding, run: RunDetail = RUN) {
+function show(building: RunBuilding, run: RunDetail = RUN, others: readonly RunBuilding[] = []) {
   const scheme = aSchemeAnswer();
+  const path = `/api/schemes/${scheme.id}/runs/${run.id}/buildings`;
   fakeApi({
+    ...Object.fromEntries(others.map((one) => [`GET ${path}/${one.facts.id}`, one])),
     'GET /api/session': undefined,
     [`GET /api/schemes/${scheme.id}/runs/${run.id}/contours`]: [
       { level: 0.01, line: [[-50, 12], [50, 12]], isClosed: false },
     ],
     [`GET /api/schemes/${scheme.id}/building-outlines`]: [],
   }); // prettier-ignore
-  renderPage(
+  return renderPage(
     <SchemeContext value={scheme}>
+      <Address />
       <SheetDesk schemeId={anId(10)} run={run} building={building} />
     </SchemeContext>,
   );
@@ -86,4 +97,60 @@ it('says of a building that screening lets go why, and of a changed one that it 
   show(aRunBuilding(300, { changedSince: true }));
   expect(screen.getByText('Screening lets it go at stage 1.')).toBeDefined();
   expect(screen.getByText(/The register has changed since/)).toBeDefined();
+  const plan = screen.getByRole('img', { name: /in plan with its walls by letter/ });
+  expect(plan.querySelector('path.fill-sheet')).not.toBeNull();
+});
+
+it('goes to the sheets beside it by buttons and keys, of the same run, but not while writing', async () => {
+  const others = [6, 9].map((id) => {
+    const { facts, ...found } = aRunBuilding(2);
+    return { ...found, facts: { ...facts, id: String(id) } };
+  });
+  show(aRunBuilding(2, { previous: 6, next: 9 }), RUN, others);
+  const address = () => screen.getByRole('status', { name: 'Address' }).textContent;
+  const at = (id: number) => `/schemes/${anId(10)}/buildings/${id}/sheet?run=${RUN.id}`;
+  const previous = screen.getByRole('link', { name: /^Previous/ });
+  expect(previous.getAttribute('href')).toBe(at(6));
+  fireEvent.click(screen.getByRole('link', { name: /^Next/ }));
+  await waitFor(() => { expect(address()).toBe(at(9)); });
+  const field = document.body.appendChild(document.createElement('input'));
+  fireEvent.keyDown(field, { key: '[' });
+  expect(address()).toBe(at(9));
+  field.remove();
+  fireEvent.keyDown(document.body, { key: '[' });
+  await waitFor(() => { expect(address()).toBe(at(6)); });
+  expect(listsAtHand().flat().map(({ keys }) => keys)).toContainEqual(['[', ']']);
+}); // prettier-ignore
+
+it('has no sheet before the first', () => {
+  show(aRunBuilding(2));
+  expect(screen.queryByRole('link', { name: /^Previous/ })).toBeNull();
+  fireEvent.keyDown(document.body, { key: '[' });
+  expect(screen.getByRole('status', { name: 'Address' }).textContent).toBe('/');
+});
+
+it('leads to a page where other values are tried out on the wall that is opened', () => {
+  show(aRunBuilding(2));
+  const link = screen.getByRole('link', { name: 'Try other values on this wall' });
+  expect(link.getAttribute('href')).toMatch(/^\/method\/what-if\?v=2&vh=3&l=30/);
+});
+
+it('says of a building that screening lets go what would break it all the same', () => {
+  const { leadingCategory, ...rules } = RUN.rules;
+  show(aRunBuilding(19), {
+    ...RUN,
+    rules: { ...rules, leadingCategory: { ...leadingCategory, value: 1 } },
+  });
+  expect(screen.getByText('Screening lets it go at stage 1.')).toBeDefined();
+  expect(screen.getByText(/^Breaks at \d/)).toBeDefined();
+});
+
+it('names itself at the foot of each page of paper while it is shown', () => {
+  const { unmount } = show(aRunBuilding(2));
+  const foot = () => document.documentElement.style.getPropertyValue('--on-every-page');
+  expect(foot()).toMatch(
+    /^"Sheet B0197 · Port Dogger crossing · A · Run 1, 1 Dec 2026, .* · method 1\.0\.0"$/,
+  );
+  unmount();
+  expect(foot()).toBe('');
 });
