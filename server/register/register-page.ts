@@ -1,5 +1,6 @@
 import type { z } from 'zod';
 import type { registerQuerySchema } from '../../shared/schemas/register.ts';
+import { isResultColumn } from '../../shared/schemas/result-columns.ts';
 import { findFirstRows } from '../models/find-first-rows.ts';
 import { findRows } from '../models/find-register-rows.ts';
 import { registerCondition } from '../models/register-condition.ts';
@@ -20,7 +21,9 @@ export async function registerPage(
   const { database } = services;
   const { filter, sort, offset, limit } = query;
   const which = { filter, sort };
-  if (offset + limit > NEAR || isOrdered(services, register, which)) {
+  // results have no index: all in order once is quicker than looking for the ends of it
+  const isFar = offset + limit > NEAR || isResultColumn(sort.column);
+  if (isFar || isOrdered(services, register, which)) {
     const order = await registerOrder(services, register, which);
     const [rows, all] = await Promise.all([
       findRows(database, register, order.slice(offset, offset + limit)),
