@@ -3,6 +3,7 @@ import {
   type RegisterFilter,
   type RegisterSort,
 } from '../../shared/schemas/register.ts';
+import { isResultColumn } from '../../shared/schemas/result-columns.ts';
 import {
   findReferenceOrder,
   findRegisterGroups,
@@ -40,8 +41,16 @@ function unpacked(bytes: Buffer): PackedIds {
   };
 }
 
-function keyOf(what: string, { schemeId, version, runId }: Register, asked: unknown): string {
-  return `${what}/${schemeId}/${version}/${runId}/${JSON.stringify(asked)}`;
+/** Whether what is asked for hangs on what a run found. */
+function isOfResults({ filter: { any = {}, ranges = {}, unknown = [] }, sort }: Which): boolean {
+  return [sort.column, ...Object.keys(any), ...Object.keys(ranges), ...unknown].some(
+    isResultColumn,
+  );
+}
+
+function keyOf(what: string, { schemeId, version, runId }: Register, which: Which): string {
+  const run = isOfResults(which) ? runId : null;
+  return `${what}/${schemeId}/${version}/${run}/${JSON.stringify(which)}`;
 }
 
 /** Whether the buildings that a filter means have been put in order already. */
@@ -107,7 +116,7 @@ export async function registerCount(
   register: Register,
   filter: RegisterFilter,
 ): Promise<number> {
-  const key = keyOf('count', register, filter);
+  const key = keyOf('count', register, { filter, sort: REGISTER_ORDER });
   const count = await tiles.get(key, async () => {
     const bytes = Buffer.alloc(BYTES);
     bytes.writeInt32BE(await countRows(database, registerCondition(register, filter)));

@@ -11,11 +11,12 @@ import {
 } from '../../../shared/schemas/register.ts';
 import { runDetailSchema, type RunResult } from '../../../shared/schemas/runs.ts';
 import { findResult } from '../../../server/models/run-results.ts';
+import type { Alignment } from '../../../server/models/alignment.ts';
 import type { Run } from '../../../server/models/run.ts';
 import type { Scheme } from '../../../server/models/scheme.ts';
-import { aMember } from '../../support/factories.ts';
+import { aMember, anAlignment } from '../../support/factories.ts';
 import { change, drawn } from '../../support/register.ts';
-import { aRun, aTownToRun } from '../../support/runs.ts';
+import { aRun, aTownToRun, UNDER_TOWN } from '../../support/runs.ts';
 import { signIn } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
 
@@ -30,6 +31,8 @@ type Asked = {
 
 let scheme: Scheme;
 let first: Run;
+/** An option that hardly moves the ground. */
+let calm: Alignment;
 let agent: Awaited<ReturnType<typeof signIn>>;
 
 async function get(end: string, { filter, sort, ...others }: Asked = {}) {
@@ -65,6 +68,10 @@ beforeAll(async () => {
   agent = await signIn(app(), await aMember(scheme, 'witness'));
   expect((await page()).run).toBeNull();
   first = await aRun({ services, runQueue }, scheme, option);
+  calm = await anAlignment(scheme, {
+    name: 'Calm',
+    design: { ...UNDER_TOWN, volumeLoss: { low: 0.0001, central: 0.0001, high: 0.0001 } },
+  });
   // came after the run
   await change(scheme, { created: [drawn('later')] });
   await scheme.reload();
@@ -162,6 +169,18 @@ describe('the register after a run', () => {
         [row.reference, row.stage, row.category, row.settlement].map((one) => one ?? '').join(','),
       ),
     );
+  });
+
+  test('follows the next run as soon as it is complete', async () => {
+    const filter: RegisterFilter = { ranges: { settlement: { from: 10 } } };
+    const sort = { column: 'settlement', descending: true } as const;
+    const before = await page({ filter, sort });
+    const asked = await aRun({ services, runQueue }, scheme, calm);
+    const after = await page({ filter, sort });
+    expect(before.run).toBe(first.id);
+    expect(after.run).toBe(asked.id);
+    expect(before.found).toBeGreaterThan(0);
+    expect(after.found).toBe(0);
   });
 
   test('refuses ranges of what is no number, and columns that are none', async () => {
