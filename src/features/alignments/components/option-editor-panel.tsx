@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { useWatch } from 'react-hook-form';
 import { Button } from '../../../components/ui/button.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { KeyCap } from '../../../components/ui/key-cap.tsx';
@@ -8,6 +9,7 @@ import { FigureLine } from '../../drawing/components/figure-line.tsx';
 import { PanelFrame } from '../../drawing/components/panel-frame.tsx';
 import { addCorner } from '../../drawing/drafts/edit-corners.ts';
 import { figure } from '../design-words.ts';
+import { hasFirstValues } from '../drafts/option-draft.ts';
 import { finishLine, goOnWithLine, LEAST_POINTS } from '../drafts/line-draft.ts';
 import type { OptionEditor } from '../hooks/use-option-editor.ts';
 import { lengthOf } from '../option-changes.ts';
@@ -15,7 +17,7 @@ import { BoresFields } from './bores-fields.tsx';
 import { IntervalRows } from './interval-rows.tsx';
 import { LevelRows } from './level-rows.tsx';
 import { OptionClash } from './option-clash.tsx';
-import { FaultLine, RangeFields } from './range-fields.tsx';
+import { FaultLine, RangeFields, type OptionControl } from './range-fields.tsx';
 
 type EditorProps = { readonly editor: OptionEditor };
 
@@ -67,6 +69,17 @@ function LineActions({ editor: { drafting, points } }: EditorProps) {
   );
 }
 
+/** Says where the values come from that nobody has written. */
+function FirstValues({ control }: { readonly control: OptionControl }) {
+  const isFirst = useWatch({ control, compute: hasFirstValues });
+  if (!isFirst) return null;
+  return (
+    <p className="mt-1 text-cap text-clay-deep">
+      Common practice to begin with, no source. Write what this ground asks for.
+    </p>
+  );
+}
+
 function OptionFields({ editor }: EditorProps) {
   const { form, save } = editor;
   const { control, register, getValues } = form;
@@ -79,6 +92,7 @@ function OptionFields({ editor }: EditorProps) {
       <BoresFields {...fields} />
       <RangeFields {...fields} of="volumeLoss" />
       <RangeFields {...fields} of="troughWidth" />
+      <FirstValues control={control} />
       <IntervalRows {...fields} valuesOf={getValues} />
     </form>
   );

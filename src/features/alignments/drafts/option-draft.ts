@@ -1,4 +1,5 @@
 import { zodResolver } from '@hookform/resolvers/zod';
+import { FIRST_DRIVE_VALUES } from '../../../../shared/ground/first-drive-values.ts';
 import {
   alignmentDesignSchema,
   newAlignmentSchema,
@@ -47,9 +48,7 @@ function rangeDraft({ low, central, high }: Range, words: (value: number) => str
   return { low: words(low), central: words(central), high: words(high) };
 }
 
-const BLANK_RANGE: RangeDraft = { low: '', central: '', high: '' };
-
-/** An option of which nothing is known yet. */
+/** An option of which nothing is known yet but what is common practice. */
 export const BLANK_OPTION: OptionDraft = {
   name: '',
   design: {
@@ -58,11 +57,19 @@ export const BLANK_OPTION: OptionDraft = {
     bores: { kind: 'single', spacing: '', later: 'right', laterFactor: '1' },
     direction: 'forward',
     groundLevel: '',
-    volumeLoss: BLANK_RANGE,
-    troughWidth: BLANK_RANGE,
+    volumeLoss: rangeDraft(FIRST_DRIVE_VALUES.volumeLoss, inPercent),
+    troughWidth: rangeDraft(FIRST_DRIVE_VALUES.troughWidth, String),
     intervals: [],
   },
 };
+
+/** Whether nobody has written yet what the ground asks for. */
+export function hasFirstValues({ design: { volumeLoss, troughWidth } }: OptionDraft): boolean {
+  const first = BLANK_OPTION.design;
+  const isSame = (a: RangeDraft, b: RangeDraft) =>
+    a.low === b.low && a.central === b.central && a.high === b.high;
+  return isSame(volumeLoss, first.volumeLoss) && isSame(troughWidth, first.troughWidth);
+}
 
 /** A stretch with values of its own that begin as those of the whole line. */
 export function blankInterval({ volumeLoss, troughWidth }: OptionDraft['design']): IntervalDraft {

@@ -4,6 +4,7 @@ import {
   BLANK_OPTION,
   designIfWhole,
   draftOf,
+  hasFirstValues,
   rebasedLine,
   rebasedOption,
 } from '../../../../src/features/alignments/drafts/option-draft.ts';
@@ -29,6 +30,15 @@ describe('an option while it is written', () => {
     expect(designIfWhole(draft, DESIGN.line.slice(0, 1))).toBeNull();
     const odd = { ...draft, design: { ...draft.design, diameter: 'wide' } };
     expect(designIfWhole(odd, DESIGN.line)).toBeNull();
+  });
+
+  it('begins with what is common practice, until somebody writes otherwise', () => {
+    const { design } = BLANK_OPTION;
+    expect(design.volumeLoss).toEqual({ low: '0.5', central: '1', high: '1.5' });
+    expect(design.troughWidth).toEqual({ low: '0.4', central: '0.5', high: '0.6' });
+    expect(hasFirstValues(BLANK_OPTION)).toBe(true);
+    const written = { ...design, volumeLoss: { ...design.volumeLoss, high: '2' } };
+    expect(hasFirstValues({ ...BLANK_OPTION, design: written })).toBe(false);
   });
 
   it('begins like another without its intervals and further levels', () => {
