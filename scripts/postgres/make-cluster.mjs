@@ -17,6 +17,8 @@ const SETTINGS = [
   "unix_socket_directories = ''",
   'max_connections = 100',
   'shared_buffers = 256MB',
+  // a town that is brought in whole is not written twice because of checkpoints on the way
+  'max_wal_size = 2GB',
 ];
 const WITHOUT_CARE = ['fsync = off', 'synchronous_commit = off', 'full_page_writes = off'];
 
