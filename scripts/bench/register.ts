@@ -17,6 +17,7 @@ import { registerOrder } from '../../server/register/register-order.ts';
 import { buildingTile } from '../../server/tiles/building-tile.ts';
 import { tileBounds } from '../../server/tiles/tile-bounds.ts';
 import { createTileCache } from '../../server/tiles/tile-cache.ts';
+import { untilLookedAfter } from './looked-after.ts';
 import { percentiles, times } from './percentiles.ts';
 import { benchPages, type Bench, type NamedFilter } from './register-pages.ts';
 import { townOfBoxes } from './town-of-boxes.ts';
@@ -100,6 +101,7 @@ export async function benchRegister(url: string): Promise<void> {
     await benchTiles(database, await bringIn(database, TOWN));
     const scheme = await bringIn(database, BUILDINGS);
     await database.query('analyze buildings');
+    await untilLookedAfter(database, 'buildings');
     const register = await registerOf({ database }, scheme);
     const bench = { services: { database, tiles: createTileCache() }, register };
     const own = REGISTER_COLUMNS.filter((column) => !isResultColumn(column));

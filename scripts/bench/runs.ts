@@ -9,6 +9,7 @@ import { openServices } from '../../server/open-services.ts';
 import { registerOf } from '../../server/register/register-of.ts';
 import type { Services } from '../../server/services.ts';
 import { RESULT_COLUMN_NAMES } from '../../shared/schemas/result-columns.ts';
+import { untilLookedAfter } from './looked-after.ts';
 import { benchPages, type NamedFilter } from './register-pages.ts';
 import { townToRun } from './town-to-run.ts';
 
@@ -81,6 +82,7 @@ export async function benchRuns(url: string): Promise<void> {
   try {
     for (const count of SIZES) await benchSize(services, count);
     const scheme = await Scheme.findOne({ order: [['createdAt', 'desc']], rejectOnEmpty: true });
+    await untilLookedAfter(services.database, 'run_results');
     const bench = { services, register: await registerOf(services, scheme) };
     await benchPages(bench, RESULT_COLUMN_NAMES, FOUND);
   } finally {

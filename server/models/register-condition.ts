@@ -2,9 +2,11 @@ import { STIFF_CONSTRUCTIONS } from '../../shared/building/stiffness-of-construc
 import {
   REGISTER_COLUMNS,
   REGISTER_FIELDS,
+  type RegisterColumn,
   type RegisterField,
   type RegisterFilter,
 } from '../../shared/schemas/register.ts';
+import { isResultColumn } from '../../shared/schemas/result-columns.ts';
 import { AppError } from '../errors.ts';
 import { NUMBER_COLUMNS, registerColumn, registerField } from './register-columns.ts';
 import { buildingsWithResults } from './result-columns.ts';
@@ -86,13 +88,30 @@ function placeSql({ within, ids, except, importId }: RegisterFilter, bind: Bind)
   return conditions;
 }
 
-/** The buildings of a register that a filter means. */
+/** Whether a filter, or a column beside it, hangs on what a run found. */
+export function asksResults(filter: RegisterFilter, column?: RegisterColumn): boolean {
+  const { any = {}, ranges = {}, unknown = [] } = filter;
+  const asked = [
+    ...Object.keys(any),
+    ...Object.keys(ranges),
+    ...unknown,
+    ...(column ? [column] : []),
+  ];
+  return asked.some(isResultColumn);
+}
+
+/**
+ * The buildings of a register that a filter means; `column` is what else will be asked of them. Results are
+ * looked up only where they are asked for.
+ */
 export function registerCondition(
   { schemeId, runId }: RegisterOf,
   filter: RegisterFilter,
+  column?: RegisterColumn,
 ): Condition {
-  const values: unknown[] = [schemeId, runId];
+  const values: unknown[] = [schemeId];
   const bind: Bind = (value) => `$${values.push(value)}`;
+  const from = asksResults(filter, column) ? buildingsWithResults(bind(runId)) : 'buildings';
   const { search, any = {}, ranges = {}, unknown = [], assumed } = filter;
   const conditions = ['scheme_id = $1', 'removed_at is null'];
   if (search !== undefined && search !== '') {
@@ -108,5 +127,5 @@ export function registerCondition(
     conditions.push(assumed ? assumedSql(bind) : `not ${assumedSql(bind)}`);
   }
   conditions.push(...placeSql(filter, bind));
-  return { from: buildingsWithResults('$2'), where: conditions.join('\n and '), bind: values };
+  return { from, where: conditions.join('\n and '), bind: values };
 }

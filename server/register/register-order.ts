@@ -3,14 +3,13 @@ import {
   type RegisterFilter,
   type RegisterSort,
 } from '../../shared/schemas/register.ts';
-import { isResultColumn } from '../../shared/schemas/result-columns.ts';
 import {
   findReferenceOrder,
   findRegisterGroups,
   findRegisterIds,
 } from '../models/find-register-order.ts';
 import { countRows } from '../models/find-register-rows.ts';
-import { registerCondition } from '../models/register-condition.ts';
+import { asksResults, registerCondition } from '../models/register-condition.ts';
 import type { Services } from '../services.ts';
 import { orderGroups } from './order-groups.ts';
 import type { Register } from './register-of.ts';
@@ -41,15 +40,8 @@ function unpacked(bytes: Buffer): PackedIds {
   };
 }
 
-/** Whether what is asked for hangs on what a run found. */
-function isOfResults({ filter: { any = {}, ranges = {}, unknown = [] }, sort }: Which): boolean {
-  return [sort.column, ...Object.keys(any), ...Object.keys(ranges), ...unknown].some(
-    isResultColumn,
-  );
-}
-
 function keyOf(what: string, { schemeId, version, runId }: Register, which: Which): string {
-  const run = isOfResults(which) ? runId : null;
+  const run = asksResults(which.filter, which.sort.column) ? runId : null;
   return `${what}/${schemeId}/${version}/${run}/${JSON.stringify(which)}`;
 }
 
@@ -72,7 +64,7 @@ async function makeOrder(
 ): Promise<Buffer> {
   const { database } = services;
   const { column, descending } = sort;
-  const condition = registerCondition(register, filter);
+  const condition = registerCondition(register, filter, column);
   if (column === 'reference') return findReferenceOrder(database, condition, descending);
   const [groups, references] = await Promise.all([
     findRegisterGroups(database, condition, column),

@@ -1,7 +1,7 @@
 import type { z } from 'zod';
 import type { registerQuerySchema } from '../../shared/schemas/register.ts';
 import { isResultColumn } from '../../shared/schemas/result-columns.ts';
-import { findFirstRows } from '../models/find-first-rows.ts';
+import { findFirstIds } from '../models/find-first-ids.ts';
 import { findRows } from '../models/find-register-rows.ts';
 import { registerCondition } from '../models/register-condition.ts';
 import type { ListedBuilding } from '../presenters/building-values.ts';
@@ -31,8 +31,11 @@ export async function registerPage(
     ]);
     return { rows, found: order.count, all };
   }
+  const condition = registerCondition(register, filter);
   const [rows, found, all] = await Promise.all([
-    findFirstRows(database, registerCondition(register, filter), sort, { offset, limit }),
+    findFirstIds(database, condition, sort, { offset, limit }).then((ids) =>
+      findRows(database, register, ids),
+    ),
     registerCount(services, register, filter),
     registerCount(services, register, {}),
   ]);

@@ -52,7 +52,11 @@ export const registerRoutes = [
     params: registerChoicesParamsSchema,
     handle: async ({ services, scheme, params }) => {
       const register = await registerOf(services, scheme);
-      return findChoices(services.database, registerCondition(register, {}), params.field);
+      return findChoices(
+        services.database,
+        registerCondition(register, {}, params.field),
+        params.field,
+      );
     },
   }),
   defineRoute({

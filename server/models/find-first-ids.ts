@@ -1,8 +1,7 @@
 import { QueryTypes, type Sequelize } from 'sequelize';
 import type { RegisterSort } from '../../shared/schemas/register.ts';
-import type { ListedBuilding } from '../presenters/building-values.ts';
 import { collationSql, orderSql } from './find-register-order.ts';
-import { LISTED, registerColumn } from './register-columns.ts';
+import { registerColumn } from './register-columns.ts';
 import type { Condition } from './register-condition.ts';
 
 type Value = string | number;
@@ -48,27 +47,37 @@ function nearSql(
      order by reference collate natural_order, id limit ${most})`;
 }
 
-/** Rows near the beginning of an order, found without putting all of it in order. */
-export async function findFirstRows(
+async function ids(
+  database: Sequelize,
+  query: string,
+  bind: readonly unknown[],
+): Promise<number[]> {
+  const rows = await database.query<{ id: number }>(query, {
+    type: QueryTypes.SELECT,
+    bind: [...bind],
+  });
+  return rows.map(({ id }) => id);
+}
+
+/** Numbers of buildings near the beginning of an order, found without putting all of it in order. */
+export async function findFirstIds(
   database: Sequelize,
   condition: Condition,
   sort: RegisterSort,
   { offset, limit }: { readonly offset: number; readonly limit: number },
-): Promise<ListedBuilding[]> {
+): Promise<number[]> {
   const { from, where, bind } = condition;
   const most = offset + limit;
   const page = `order by ${orderSql(sort)} offset ${offset} limit ${limit}`;
   if (sort.column === 'reference') {
-    return database.query<ListedBuilding>(`select ${LISTED} from ${from} where ${where} ${page}`, {
-      type: QueryTypes.SELECT,
-      bind: [...bind],
-    });
+    return ids(database, `select id from ${from} where ${where} ${page}`, bind);
   }
   const value = await valueAt(database, condition, sort, most - 1);
   const { type } = registerColumn(sort.column);
   const last = value === undefined ? undefined : `$${bind.length + 1}::${type}`;
-  return database.query<ListedBuilding>(
-    `select ${LISTED} from (${nearSql(condition, sort, last, most)}) as near ${page}`,
-    { type: QueryTypes.SELECT, bind: value === undefined ? [...bind] : [...bind, value] },
+  return ids(
+    database,
+    `select id from (${nearSql(condition, sort, last, most)}) as near ${page}`,
+    value === undefined ? bind : [...bind, value],
   );
 }
