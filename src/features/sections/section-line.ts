@@ -5,4 +5,4 @@ import type { PlanLine } from '../alignments/hooks/use-plan-line.ts';
 export type SectionLine = Pick<
   PlanLine,
   'design' | 'preview' | 'thread' | 'isKnown' | 'options' | 'mayEdit' | 'mayBegin' | 'draw'
-> & { readonly editor: Pick<OptionEditor, 'isEditing'> };
+> & { readonly editor: Pick<OptionEditor, 'isEditing' | 'isDrawing'> };

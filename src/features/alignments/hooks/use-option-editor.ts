@@ -24,6 +24,8 @@ function useOptionDraft() {
   const isEditing = line !== null;
   return {
     ...{ drafting, form, base, setBase, points, isEditing },
+    /** Points are being pressed on the map one after the other. */
+    isDrawing: line !== null && !line.isSet,
     hasEdits: isEditing && (form.formState.isDirty || drafting.steps.past > 0),
     design: isEditing ? design : null,
     begin: (option: AlignmentAnswer | null, like: AlignmentAnswer | null) => {

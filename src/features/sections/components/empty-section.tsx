@@ -2,7 +2,8 @@ import { Button } from '../../../components/ui/button.tsx';
 import { EmptyState } from '../../../components/ui/empty-state.tsx';
 import type { SectionLine } from '../section-line.ts';
 
-function wordsOf({ editor, options, mayEdit }: SectionLine): string {
+function wordsOf({ editor, design, options, mayEdit }: SectionLine): string {
+  if (editor.isDrawing && design !== null) return 'End the line to see its section.';
   if (editor.isEditing) return 'Draw two points and give the level of the axis to see the section.';
   if (options.length > 0) return 'No option is shown. Choose one above the map to see its section.';
   return mayEdit

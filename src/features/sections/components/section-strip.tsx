@@ -46,6 +46,8 @@ function OpenSection({
 export function SectionStrip({ desk, selected, shown }: SectionStripProps) {
   const { line, strip } = desk;
   if (!line.isKnown) return null;
+  // a map that shrinks between two presses would take the second one elsewhere
+  const design = line.editor.isDrawing ? null : line.design;
   function open(isOpen: boolean): void {
     strip.open(isOpen);
   }
@@ -65,7 +67,7 @@ export function SectionStrip({ desk, selected, shown }: SectionStripProps) {
           </Button>
         </div>
       )}
-      {strip.isOpen && line.design === null && (
+      {strip.isOpen && design === null && (
         <EmptySection
           line={line}
           onHide={() => {
@@ -73,10 +75,10 @@ export function SectionStrip({ desk, selected, shown }: SectionStripProps) {
           }}
         />
       )}
-      {strip.isOpen && line.design !== null && (
+      {strip.isOpen && design !== null && (
         <>
           <StripEdge strip={strip} />
-          <OpenSection {...{ desk, selected, shown }} design={line.design} />
+          <OpenSection {...{ desk, selected, shown }} design={design} />
         </>
       )}
     </section>

@@ -54,7 +54,7 @@ function aLine(overrides: Partial<SectionLine> = {}): SectionLine {
     mayEdit: true,
     mayBegin: true,
     draw: vi.fn(),
-    editor: { isEditing: false },
+    editor: { isEditing: false, isDrawing: false },
     ...overrides,
   };
 }
@@ -232,4 +232,13 @@ describe('the strip', () => {
     expect(screen.getByText(/once a designer has drawn one/)).toBeTruthy();
     expect(screen.queryByRole('button', { name: 'Draw the line' })).toBeNull();
   });
+});
+
+it('stays low while points are pressed on the map, and is there once the line is ended', async () => {
+  const { unmount } = show(aLine({ editor: { isEditing: true, isDrawing: true } }));
+  await screen.findByText('End the line to see its section.');
+  expect(screen.queryByRole('img')).toBeNull();
+  unmount();
+  show(aLine({ editor: { isEditing: true, isDrawing: false } }));
+  expect(await screen.findByRole('img', { name: /^Section across the line/ })).toBeTruthy();
 });
