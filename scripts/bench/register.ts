@@ -6,7 +6,7 @@ import { isResultColumn } from '../../shared/schemas/result-columns.ts';
 import { changeRegister } from '../../server/commands/change-register.ts';
 import { connectDatabase } from '../../server/database/connect.ts';
 import { exportedBuildings } from '../../server/exports/exported-buildings.ts';
-import { registerColumn } from '../../server/exports/register-columns.ts';
+import { exportedColumn } from '../../server/exports/register-columns.ts';
 import { csvText } from '../../server/exports/write-csv.ts';
 import { geojsonText } from '../../server/exports/write-geojson.ts';
 import { writeXlsx } from '../../server/exports/write-xlsx.ts';
@@ -68,7 +68,7 @@ async function benchExports({ services, register }: Bench): Promise<void> {
     const start = performance.now();
     const order = await registerOrder(services, register, which);
     const rows = exportedBuildings(services, register, order, format === 'geojson');
-    const columns = REGISTER_COLUMNS.map(registerColumn);
+    const columns = REGISTER_COLUMNS.map(exportedColumn);
     const file = { title: 'Register', columns, rows, aboutTitle: 'About', about: [], beside: [] };
     if (format === 'xlsx') await writeXlsx(file, nowhere());
     else

@@ -1,12 +1,10 @@
 import { findLonLat } from '../models/footprints.ts';
 import { findRows } from '../models/find-register-rows.ts';
 import type { ListedBuilding } from '../presenters/building-values.ts';
+import { inThousands, type PackedIds } from '../register/packed-ids.ts';
 import type { Register } from '../register/register-of.ts';
-import type { PackedIds } from '../register/register-order.ts';
 import type { Services } from '../services.ts';
 import type { ExportedRow } from './export-file.ts';
-
-const AT_ONCE = 1000;
 
 /** The buildings of an order one after the other, read a thousand at a time. */
 export async function* exportedBuildings(
@@ -15,8 +13,7 @@ export async function* exportedBuildings(
   order: PackedIds,
   isDrawn: boolean,
 ): AsyncGenerator<ExportedRow<ListedBuilding>> {
-  for (let from = 0; from < order.count; from += AT_ONCE) {
-    const ids = order.slice(from, from + AT_ONCE);
+  for (const ids of inThousands(order)) {
     const [rows, drawn] = await Promise.all([
       findRows(database, register, ids),
       isDrawn ? findLonLat(database, ids) : undefined,

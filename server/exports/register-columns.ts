@@ -9,7 +9,7 @@ export function headingOf(column: RegisterColumn): string {
 }
 
 /** A column of the register in a file; an area to the square decimetre. */
-export function registerColumn(column: RegisterColumn): ExportColumn<ListedBuilding> {
+export function exportedColumn(column: RegisterColumn): ExportColumn<ListedBuilding> {
   const valueOf = (building: ListedBuilding): ExportValue =>
     column === 'area' ? Math.round(building.area * 100) / 100 : building[column];
   return {

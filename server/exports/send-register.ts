@@ -5,7 +5,7 @@ import { registerOrder } from '../register/register-order.ts';
 import type { ExportAbout } from './export-file.ts';
 import { exportedBuildings } from './exported-buildings.ts';
 import { filterInWords } from './filter-in-words.ts';
-import { headingOf, registerColumn } from './register-columns.ts';
+import { exportedColumn, headingOf } from './register-columns.ts';
 import { aboutFile, sendFile, type FileCall } from './send-file.ts';
 
 type RegisterCall = FileCall & { readonly query: z.infer<typeof registerExportQuerySchema> };
@@ -33,7 +33,7 @@ export async function sendRegister(call: RegisterCall): Promise<void> {
     { what: 'register', format },
     {
       title: 'Register',
-      columns: columns.map(registerColumn),
+      columns: columns.map(exportedColumn),
       rows: exportedBuildings(services, register, order, format === 'geojson'),
       aboutTitle: 'About',
       about: await about(call, order.count),

@@ -1,5 +1,6 @@
 import { QueryTypes, type Sequelize } from 'sequelize';
 import type { RegisterColumn, RegisterSort } from '../../shared/schemas/register.ts';
+import { findPackedIds } from './find-packed-ids.ts';
 import { registerColumn } from './register-columns.ts';
 import type { Condition } from './register-condition.ts';
 
@@ -17,18 +18,6 @@ export function orderSql({ column, descending }: RegisterSort): string {
   return `${name}${collation} ${direction} nulls last, reference collate natural_order, id`;
 }
 
-async function packed(
-  database: Sequelize,
-  query: string,
-  bind: Condition['bind'],
-): Promise<Buffer> {
-  const [row] = await database.query<{ ids: Buffer | null }>(
-    `select string_agg(int4send(id), '') as ids from (${query}) as ordered`,
-    { type: QueryTypes.SELECT, bind: [...bind] },
-  );
-  return row?.ids ?? Buffer.alloc(0);
-}
-
 /** The numbers of all buildings that are meant, by reference, four bytes each. */
 export function findReferenceOrder(
   database: Sequelize,
@@ -36,7 +25,7 @@ export function findReferenceOrder(
   descending: boolean,
 ): Promise<Buffer> {
   const order = orderSql({ column: 'reference', descending });
-  return packed(database, `select id from ${from} where ${where} order by ${order}`, bind);
+  return findPackedIds(database, `select id from ${from} where ${where} order by ${order}`, bind);
 }
 
 /** Buildings that are alike in a column, group after group. */
@@ -78,5 +67,5 @@ export function findRegisterIds(
   database: Sequelize,
   { from, where, bind }: Condition,
 ): Promise<Buffer> {
-  return packed(database, `select id from ${from} where ${where} order by id`, bind);
+  return findPackedIds(database, `select id from ${from} where ${where} order by id`, bind);
 }

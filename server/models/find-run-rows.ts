@@ -1,5 +1,6 @@
 import { QueryTypes, type Sequelize } from 'sequelize';
 import type { RunFacts, RunResult } from '../../shared/schemas/runs.ts';
+import { findPackedIds } from './find-packed-ids.ts';
 import { RESULT_RECORD } from './run-results.ts';
 
 /** A building as a run took it, with what was found of it; its footprint only where it is asked for. */
@@ -9,16 +10,16 @@ export type RunRow = {
   readonly result: RunResult;
 };
 
-/** The numbers of all buildings of a run, by the references that it took. */
-export async function findRunOrder(database: Sequelize, runId: string): Promise<number[]> {
-  const rows = await database.query<{ id: number }>(
+/** The numbers of all buildings of a run, by the references that it took, four bytes each. */
+export function findRunOrder(database: Sequelize, runId: string): Promise<Buffer> {
+  return findPackedIds(
+    database,
     `select r.building_id as id
      from run_buildings r join building_snapshots s using (building_id, version)
      where r.run_id = $1
      order by (s.facts ->> 'reference') collate natural_order, r.building_id`,
-    { type: QueryTypes.SELECT, bind: [runId] },
+    [runId],
   );
-  return rows.map(({ id }) => id);
 }
 
 /** Some buildings of a complete run in the order of their numbers here. */

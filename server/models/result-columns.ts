@@ -3,24 +3,29 @@ import {
   RESULT_COLUMNS,
   type ResultColumn,
 } from '../../shared/schemas/result-columns.ts';
-import { RESULT_VALUES, type ResultValueFacts } from '../../shared/schemas/result-values.ts';
+import {
+  isResultFigure,
+  RESULT_VALUES,
+  type ResultFigure,
+  type ResultValueFacts,
+} from '../../shared/schemas/result-values.ts';
 import type { BuildingColumn } from './building-columns.ts';
-import { RESULT_COLUMNS as RECORDED } from './run-results.ts';
+import { RECORDED_COLUMNS } from './run-results.ts';
 
-/** What the text columns are made of. */
-const TEXTS: Readonly<Record<Exclude<ResultColumn, keyof typeof RESULT_VALUES>, string>> = {
+/** What the columns are made of that hold no figure. */
+const TEXTS: Readonly<Record<Exclude<ResultColumn, ResultFigure>, string>> = {
   settled: `case when r.is_settled then 'settled' when not r.is_settled then 'sensitive' end`,
   heldBy: `nullif(array_to_string(r.held_by, ', '), '')`,
 };
 
 function nameOf(column: ResultColumn): string {
-  return column === 'settled' || column === 'heldBy' ? `result_${column}` : RECORDED[column][0];
+  return isResultFigure(column) ? RECORDED_COLUMNS[column][0] : `result_${column}`;
 }
 
 function valueSql(column: ResultColumn): string {
-  if (column === 'settled' || column === 'heldBy') return TEXTS[column];
+  if (!isResultFigure(column)) return TEXTS[column];
   const { scale }: ResultValueFacts = RESULT_VALUES[column];
-  const recorded = `r.${RECORDED[column][0]}`;
+  const recorded = `r.${RECORDED_COLUMNS[column][0]}`;
   const figure = scale === 1 ? recorded : `${recorded} * ${scale}`;
   // of what could not be worked out the record holds nought, which would read as a figure
   return column === 'stage' ? figure : `case when r.fault is null then ${figure} end`;

@@ -2,7 +2,7 @@ import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
 import { runCountsSchema, type RunCounts, type RunResult } from '../../shared/schemas/runs.ts';
 
 /** How each figure of a result is called in the record and in the table, and of what type it is. */
-export const RESULT_COLUMNS = {
+export const RECORDED_COLUMNS = {
   stage: ['stage', 'smallint'],
   settlement: ['settlement', 'double precision'],
   slope: ['slope', 'double precision'],
@@ -32,7 +32,7 @@ export const RESULT_COLUMNS = {
   fault: ['fault', 'text'],
 } as const;
 
-const ENTRIES = Object.entries(RESULT_COLUMNS);
+const ENTRIES = Object.entries(RECORDED_COLUMNS);
 const TABLE = ENTRIES.map(([, [column]]) => column).join(', ');
 const GIVEN = ENTRIES.map(([name]) => `"${name}"`).join(', ');
 const TYPED = ENTRIES.map(([name, [, type]]) => `"${name}" ${type}`).join(', ');

@@ -14,3 +14,33 @@ export function packIds(ids: Int32Array): Buffer {
   });
   return Buffer.from(view.buffer);
 }
+
+/** Numbers of buildings, packed. */
+export type PackedIds = {
+  readonly count: number;
+  readonly slice: (from: number, to: number) => number[];
+  readonly indexOf: (id: number) => number | null;
+};
+
+/** What the database packed, read where it is asked for. */
+export function packedIds(bytes: Buffer): PackedIds {
+  const count = bytes.byteLength / BYTES;
+  return {
+    count,
+    slice: (from, to) => {
+      const length = Math.max(0, Math.min(to, count) - from);
+      return Array.from({ length }, (_, k) => bytes.readInt32BE((from + k) * BYTES));
+    },
+    indexOf: (id) => {
+      for (let k = 0; k < count; k += 1) if (bytes.readInt32BE(k * BYTES) === id) return k;
+      return null;
+    },
+  };
+}
+
+const AT_ONCE = 1000;
+
+/** An order in lists of a thousand. */
+export function* inThousands({ count, slice }: PackedIds): Generator<number[]> {
+  for (let from = 0; from < count; from += AT_ONCE) yield slice(from, from + AT_ONCE);
+}

@@ -12,33 +12,10 @@ import { countRows } from '../models/find-register-rows.ts';
 import { asksResults, registerCondition } from '../models/register-condition.ts';
 import type { Services } from '../services.ts';
 import { orderGroups } from './order-groups.ts';
+import { packedIds, type PackedIds } from './packed-ids.ts';
 import type { Register } from './register-of.ts';
 
 type Which = { readonly filter: RegisterFilter; readonly sort: RegisterSort };
-
-/** Numbers of buildings, packed. */
-export type PackedIds = {
-  readonly count: number;
-  readonly slice: (from: number, to: number) => number[];
-  readonly indexOf: (id: number) => number | null;
-};
-
-const BYTES = 4;
-
-function unpacked(bytes: Buffer): PackedIds {
-  const count = bytes.byteLength / BYTES;
-  return {
-    count,
-    slice: (from, to) => {
-      const length = Math.max(0, Math.min(to, count) - from);
-      return Array.from({ length }, (_, k) => bytes.readInt32BE((from + k) * BYTES));
-    },
-    indexOf: (id) => {
-      for (let k = 0; k < count; k += 1) if (bytes.readInt32BE(k * BYTES) === id) return k;
-      return null;
-    },
-  };
-}
 
 function keyOf(what: string, { schemeId, version, runId }: Register, which: Which): string {
   const run = asksResults(which.filter, which.sort.column) ? runId : null;
@@ -53,6 +30,8 @@ export function isOrdered(
 ): boolean {
   return tiles.has(keyOf('order', register, which));
 }
+
+const BYTES = 4;
 
 type Kept = Pick<Services, 'database' | 'tiles'>;
 
@@ -88,7 +67,7 @@ export async function registerOrder(
   register: Register,
   which: Which,
 ): Promise<PackedIds> {
-  return unpacked(await packedOrder(services, register, which));
+  return packedIds(await packedOrder(services, register, which));
 }
 
 /** The numbers of the buildings that a filter means, ascending. */
@@ -98,7 +77,7 @@ export async function registerIds(
   filter: RegisterFilter,
 ): Promise<number[]> {
   const condition = registerCondition(register, filter);
-  const ids = unpacked(await findRegisterIds(database, condition));
+  const ids = packedIds(await findRegisterIds(database, condition));
   return ids.slice(0, ids.count);
 }
 

@@ -5,11 +5,12 @@ import { runInputs } from '../../shared/assessment/run-inputs.ts';
 import type { AssessCase } from '../../shared/schemas/assess-case.ts';
 import { runBuildingSchema, type RunBuilding } from '../../shared/schemas/runs.ts';
 import { AppError } from '../errors.ts';
-import { findBesideInRun } from '../models/find-beside-in-run.ts';
 import { findNeighboursText, findRunBuilding } from '../models/find-run-building.ts';
 import { findResult } from '../models/run-results.ts';
 import { Run } from '../models/run.ts';
+import type { PackedIds } from '../register/packed-ids.ts';
 import type { Services } from '../services.ts';
+import { runOrder } from './run-order.ts';
 
 type Place = { readonly runId: string; readonly buildingId: number };
 
@@ -37,22 +38,31 @@ async function buildingOf(
   return aloneSchema.parse({ ...found, result, rows: await runs.compute(asked) });
 }
 
+/** Who comes before and after a building in an order; null at either end. */
+function besideIn(order: PackedIds, id: number): Pick<RunBuilding, 'previous' | 'next'> {
+  const place = order.indexOf(id);
+  if (place === null) return { previous: null, next: null };
+  const [previous = null] = order.slice(Math.max(0, place - 1), place);
+  const [next = null] = order.slice(place + 1, place + 2);
+  return { previous, next };
+}
+
 /**
  * One building of a run with all that it takes to work it out again: what was known of it and the rows that
  * it stood in; and who comes before and after it.
  */
 export async function runBuilding(
-  services: Pick<Services, 'database' | 'runs'>,
+  services: Pick<Services, 'database' | 'runs' | 'tiles'>,
   schemeId: string,
   place: Place,
 ): Promise<RunBuilding> {
   const { runId, buildingId } = place;
   const run = await findOwnRun(schemeId, place);
-  const [building, beside] = await Promise.all([
+  const [building, order] = await Promise.all([
     buildingOf(services, run, buildingId),
-    findBesideInRun(services.database, runId, buildingId),
+    runOrder(services, runId),
   ]);
-  return runBuildingSchema.parse({ ...building, ...beside });
+  return runBuildingSchema.parse({ ...building, ...besideIn(order, buildingId) });
 }
 
 /** One building of a run as a case that anyone can work out again with the command for cases. */

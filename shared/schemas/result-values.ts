@@ -30,3 +30,19 @@ export const RESULT_VALUES = {
   breakpoint: { label: 'Breakpoint', kind: 'number', scale: 1, digits: 2 },
   reserve: { label: 'Reserve', kind: 'number', scale: 1, digits: 2 },
 } as const satisfies Readonly<Record<string, ResultValueFacts>>;
+
+/**
+ * The name of a figure that a run finds of a building.
+ *
+ * Units: none. Valid: a key of RESULT_VALUES. Source: [own].
+ */
+export type ResultFigure = keyof typeof RESULT_VALUES;
+
+/**
+ * Whether a name is that of a figure that a run finds of a building.
+ *
+ * Units: none. Valid: any text. Source: [own].
+ */
+export function isResultFigure(name: string): name is ResultFigure {
+  return Object.hasOwn(RESULT_VALUES, name);
+}

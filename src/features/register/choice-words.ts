@@ -7,5 +7,5 @@ export function choiceWords(field: RegisterField, value: string | null): string 
   if (value === null) return isResultColumn(field) ? 'none' : 'not known';
   if (!field.startsWith('category')) return value;
   const row = CATEGORIES.find(({ category }) => category === Number(value));
-  return row === undefined ? value : `${row.label} ${row.name.toLowerCase()}`;
+  return row === undefined ? value : `${row.label} ${row.name}`;
 }

@@ -1,9 +1,8 @@
-import { RESULT_VALUES } from '../../../shared/schemas/result-values.ts';
+import { isResultFigure, RESULT_VALUES } from '../../../shared/schemas/result-values.ts';
 import type { ResultColumn } from '../../../shared/schemas/result-columns.ts';
 
 /** A value of a column of results as people read it. */
 export function resultText(column: ResultColumn, value: string | number): string {
-  if (typeof value === 'string' || column === 'settled' || column === 'heldBy')
-    return String(value);
+  if (typeof value === 'string' || !isResultFigure(column)) return String(value);
   return value.toFixed(RESULT_VALUES[column].digits).replace('-', '\u2212');
 }

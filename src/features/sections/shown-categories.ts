@@ -1,4 +1,5 @@
 import { CATEGORIES, type Category } from '../../../shared/damage/categories.ts';
+import { categoryLabel } from '../assessment/bracket-words.ts';
 import { FIRST_SHADE } from '../map/shades.ts';
 import type { End, Shading } from '../runs/shades-of-run.ts';
 import type { CutBuilding } from './cut-buildings.ts';
@@ -24,5 +25,5 @@ export function withCategories(
 
 /** The number of a building's category, as it is written everywhere; null where it has none. */
 export function labelOf({ category }: ShownBuilding): string | null {
-  return category === null ? null : (CATEGORIES[category]?.label ?? null);
+  return category === null ? null : categoryLabel(category);
 }

@@ -1,9 +1,9 @@
 import Excel from 'exceljs';
 import { beforeAll, describe, expect, test } from 'vitest';
-import { z } from 'zod';
 import type { Scheme } from '../../../server/models/scheme.ts';
 import { aMember, aScheme } from '../../support/factories.ts';
 import { box, change, drawn } from '../../support/register.ts';
+import { areaSchema, collectionOf } from '../../support/feature-collection.ts';
 import { signIn } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
 
@@ -74,23 +74,7 @@ describe('the register as CSV', () => {
 });
 
 describe('the register as GeoJSON', () => {
-  const position = z.tuple([z.number(), z.number()]);
-  const schema = z.object({
-    type: z.literal('FeatureCollection'),
-    features: z.array(
-      z.object({
-        id: z.string(),
-        properties: z.record(z.string(), z.unknown()),
-        geometry: z.discriminatedUnion('type', [
-          z.object({ type: z.literal('Polygon'), coordinates: z.array(z.array(position)) }),
-          z.object({
-            type: z.literal('MultiPolygon'),
-            coordinates: z.array(z.array(z.array(position))),
-          }),
-        ]),
-      }),
-    ),
-  });
+  const schema = collectionOf(areaSchema);
 
   /** Twice the signed area. */
   function turn(ring: readonly (readonly [number, number])[] = []): number {

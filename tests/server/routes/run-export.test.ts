@@ -10,6 +10,7 @@ import type { Scheme } from '../../../server/models/scheme.ts';
 import { findLonLat } from '../../../server/models/footprints.ts';
 import { findRunBuilding } from '../../../server/models/find-run-building.ts';
 import { findResult } from '../../../server/models/run-results.ts';
+import { collectionOf, polygonSchema } from '../../support/feature-collection.ts';
 import { aMember, aScheme } from '../../support/factories.ts';
 import { box, change, drawn, registered } from '../../support/register.ts';
 import { aRun, aTownToRun, UNDER_TOWN } from '../../support/runs.ts';
@@ -207,18 +208,7 @@ describe('a run as a workbook', () => {
 });
 
 describe('a run as GeoJSON', () => {
-  const schema = z.object({
-    type: z.literal('FeatureCollection'),
-    features: z.array(
-      z.object({
-        id: z.string(),
-        properties: z.record(z.string(), z.unknown()),
-        geometry: z.object({
-          type: z.literal('Polygon'),
-          coordinates: z.array(z.array(z.tuple([z.number(), z.number()]))),
-        }),
-      }),
-    ),
+  const schema = collectionOf(polygonSchema).extend({
     about: z.record(z.string(), z.unknown()),
   });
 

@@ -1,5 +1,6 @@
 import type { RefObject } from 'react';
 import type { RegisterColumn, RegisterPage } from '../../../../shared/schemas/register.ts';
+import type { RunDetail } from '../../../../shared/schemas/runs.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { ButtonLink } from '../../../components/ui/button-link.tsx';
 import { importsPath, planPath } from '../../../config/paths.ts';
@@ -19,6 +20,8 @@ type RegisterHeadProps = {
   readonly mayEdit: boolean;
   /** Undefined until anything is known. */
   readonly page: RegisterPage | undefined;
+  /** The run whose results stand in the register. */
+  readonly results: RunDetail | undefined;
   readonly address: RegisterAddress;
   readonly columns: readonly RegisterColumn[];
   readonly onColumns: (columns: readonly RegisterColumn[]) => void;
@@ -57,10 +60,9 @@ function MapButton({ schemeId, mapPane }: Pick<RegisterHeadProps, 'schemeId' | '
 
 /** Over the table: how many, what is searched and filtered, and what can be done with all of it. */
 export function RegisterHead(props: RegisterHeadProps) {
-  const { schemeId, mayEdit, page, address, columns, onColumns, mapPane, view } = props;
+  const { schemeId, mayEdit, page, address, columns, onColumns, mapPane, view, results } = props;
   const { which, setFilter, setWhich } = address;
   const { filter, sort } = which;
-  const run = page?.run ?? null;
   return (
     <div className="grid flex-none gap-y-2 border-b border-ink px-4 py-2.5 print:hidden">
       <div className="flex flex-wrap items-center gap-x-3 gap-y-2">
@@ -96,7 +98,7 @@ export function RegisterHead(props: RegisterHeadProps) {
           {mayEdit && <ButtonLink to={importsPath(schemeId)}>Bring in…</ButtonLink>}
         </div>
       </div>
-      {run !== null && <ResultCounts {...{ schemeId, filter }} runId={run} />}
+      {results !== undefined && <ResultCounts {...{ schemeId, filter }} run={results} />}
       <FilterBar
         {...{ schemeId, filter, view }}
         onFilter={(next) => {

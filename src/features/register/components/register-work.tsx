@@ -57,7 +57,7 @@ export function RegisterWork() {
       <PlanBasis scheme={scheme} crs={plan.ready?.crs} results={results} />
       <RunProgressLine />
       <RegisterHead
-        {...{ mayEdit, address, columns, mapPane, searchField }}
+        {...{ mayEdit, address, columns, mapPane, searchField, results }}
         schemeId={scheme.id}
         page={rows.page}
         onColumns={chooseColumns}

@@ -1,17 +1,16 @@
-import { useQuery } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import type { RegisterFilter } from '../../../../shared/schemas/register.ts';
+import type { RunDetail } from '../../../../shared/schemas/runs.ts';
 import { DamageChip } from '../../../components/ui/damage-chip.tsx';
 import { formatCount } from '../../../lib/format-number.ts';
-import { runQuery } from '../../runs/api/get-run.ts';
 import { runName, staleWords } from '../../runs/run-words.ts';
 import { registerOfResults } from '../register-of-results.ts';
 
 type ResultCountsProps = {
   readonly schemeId: string;
-  readonly runId: string;
+  readonly run: RunDetail;
   readonly filter: RegisterFilter;
 };
 
@@ -25,10 +24,9 @@ type CountLink = {
 const STAGES = [1, 2, 3] as const;
 
 /** How many buildings the run that is shown found where; each number leads to them. */
-export function ResultCounts({ schemeId, runId, filter }: ResultCountsProps) {
-  const { data: run } = useQuery(runQuery(schemeId, runId));
-  const counts = run?.counts;
-  if (run === undefined || counts === undefined || counts === null) return null;
+export function ResultCounts({ schemeId, run, filter }: ResultCountsProps) {
+  const { counts } = run;
+  if (counts === null) return null;
   const stages = STAGES.map((stage): CountLink => ({
     key: `stage ${stage}`,
     found: { any: { stage: [String(stage)] } },
