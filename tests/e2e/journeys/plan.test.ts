@@ -95,7 +95,9 @@ describe('the plan', () => {
     expect(scripts.filter((path) => path.includes('plan-map'))).not.toEqual([]);
     await page.getByText('Some of the map did not come.').waitFor();
     await page.unroute('**/tiles/buildings/**');
+    const fetched = page.waitForResponse(/\/tiles\/buildings\//);
     await page.getByRole('button', { name: 'Fetch it again' }).click();
+    await fetched;
     await page.getByText('Some of the map did not come.').waitFor({ state: 'detached' });
     await mapIsStill(visitor);
     while (visitor.faults.length > 0) visitor.expectFault(/ERR_FAILED/);

@@ -11,8 +11,8 @@ import { useMapState } from '../hooks/use-map-state.ts';
 import { useMode } from '../hooks/use-mode.ts';
 import { handleOfMap } from '../map-handle.ts';
 import type { BuildingMarks, MapPlan } from '../map-plan.ts';
+import { createMissedTiles, type MissedTiles } from '../missed-tiles.ts';
 import { createGridProjection } from '../place/grid-projection.ts';
-import { sourcesOfPlan } from '../style/sources-of-plan.ts';
 import { BuildingTip } from './building-tip.tsx';
 import { CursorPlace } from './cursor-place.tsx';
 import { MapButtons } from './map-buttons.tsx';
@@ -22,8 +22,13 @@ import { ScaleBar } from './scale-bar.tsx';
 import { ZoomHint } from './zoom-hint.tsx';
 
 /** Keeps the map as the plan and the marks say. */
-function useController(map: MapLibreMap, plan: MapPlan, marks: BuildingMarks): MapController {
-  const controller = useMemo(() => createMapController(portOfMap(map)), [map]);
+function useController(
+  map: MapLibreMap,
+  missed: MissedTiles,
+  plan: MapPlan,
+  marks: BuildingMarks,
+): MapController {
+  const controller = useMemo(() => createMapController(portOfMap(map, missed)), [map, missed]);
   useLayoutEffect(() => {
     controller.show(plan);
   }, [controller, plan]);
@@ -33,10 +38,14 @@ function useController(map: MapLibreMap, plan: MapPlan, marks: BuildingMarks): M
   return controller;
 }
 
-function fetchAgain(map: MapLibreMap, plan: MapPlan): void {
-  for (const [name, { type }] of Object.entries(sourcesOfPlan(plan))) {
-    if (type === 'vector') map.refreshTiles(name);
-  }
+function useMissedTiles(map: MapLibreMap): MissedTiles {
+  return useMemo(
+    () =>
+      createMissedTiles((source, tiles) => {
+        if (map.getSource(source) !== undefined) map.refreshTiles(source, tiles);
+      }),
+    [map],
+  );
 }
 
 /** A map that is open, with what stands on it: scale, north, place and buttons. */
@@ -46,8 +55,9 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
   const [hovered, setHovered] = useState<number | null>(null);
   const marks = useMemo(() => ({ selected, hovered }), [selected, hovered]);
   const projection = useMemo(() => createGridProjection(gridDefinition), [gridDefinition]);
-  const controller = useController(map, plan, marks);
-  const { isBusy, hasGaps, forgetGaps } = useMapState(map);
+  const missed = useMissedTiles(map);
+  const controller = useController(map, missed, plan, marks);
+  const { isBusy, hasGaps, fetchAgain } = useMapState(map, missed);
   const handle = useMemo(() => handleOfMap(map), [map]);
   const giveHandle = useEffectEvent(props.onHandle);
   useGridCrosses(map, controller, projection);
@@ -86,12 +96,7 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
       <ZoomHint map={map} plan={plan} />
       {hasGaps && (
         <div className="absolute right-3 bottom-12 left-3 flex justify-center">
-          <MapGaps
-            onRetry={() => {
-              forgetGaps();
-              fetchAgain(map, plan);
-            }}
-          />
+          <MapGaps onRetry={fetchAgain} />
         </div>
       )}
     </div>

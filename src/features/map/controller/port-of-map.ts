@@ -1,8 +1,9 @@
 import { GeoJSONSource, VectorTileSource, type Map as MapLibreMap } from 'maplibre-gl';
+import type { MissedTiles } from '../missed-tiles.ts';
 import type { MapPort } from './map-port.ts';
 
 /** A real map, as the controller asks for it. */
-export function portOfMap(map: MapLibreMap): MapPort {
+export function portOfMap(map: MapLibreMap, missed: MissedTiles): MapPort {
   const plain: Omit<MapPort, 'setTiles' | 'setData'> = map;
   return {
     addSource: (name, source) => plain.addSource(name, source),
@@ -17,7 +18,10 @@ export function portOfMap(map: MapLibreMap): MapPort {
     setFeatureState: (building, state) => plain.setFeatureState(building, state),
     setTiles: (name, urls) => {
       const source = map.getSource(name);
-      if (source instanceof VectorTileSource) source.setTiles(urls);
+      if (!(source instanceof VectorTileSource)) return;
+      // what did not come from the old address would be waited for for ever
+      missed.fetchAgain(name);
+      source.setTiles(urls);
     },
     setData: (name, data) => {
       const source = map.getSource(name);

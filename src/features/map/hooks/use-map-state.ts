@@ -1,43 +1,46 @@
 import type { Map as MapLibreMap } from 'maplibre-gl';
-import { useEffect, useState } from 'react';
+import { useCallback, useEffect, useRef, useState } from 'react';
+import type { MissedTiles } from '../missed-tiles.ts';
 import { onceStill } from '../once-still.ts';
 
 /** Whether the map is still drawing, and whether some of it did not come. */
 export type MapState = { readonly isBusy: boolean; readonly hasGaps: boolean };
 
-/** How far the map is with what it was asked to show. */
-export function useMapState(map: MapLibreMap): MapState & { readonly forgetGaps: () => void } {
+/** How far the map is with what it was asked to show, and how to ask again for what did not come. */
+export function useMapState(
+  map: MapLibreMap,
+  missed: MissedTiles,
+): MapState & { readonly fetchAgain: () => void } {
   const [state, setState] = useState<MapState>({ isBusy: true, hasGaps: false });
+  const stopWaiting = useRef<(() => void) | null>(null);
+  const wait = useCallback(() => {
+    setState((now) => ({ ...now, isBusy: true }));
+    stopWaiting.current ??= onceStill(map, () => {
+      stopWaiting.current = null;
+      setState((now) => ({ ...now, isBusy: false }));
+    });
+  }, [map]);
   useEffect(() => {
-    function set(change: Partial<MapState>): void {
-      setState((now) => ({ ...now, ...change }));
-    }
-    let stopWaiting: (() => void) | null = null;
-    function waitUntilStill(): void {
-      stopWaiting ??= onceStill(map, () => {
-        stopWaiting = null;
-        set({ isBusy: false });
-      });
-    }
-    waitUntilStill();
+    wait();
     const subscriptions = [
-      map.on('dataloading', () => {
-        set({ isBusy: true });
-        waitUntilStill();
-      }),
-      map.on('error', () => {
-        set({ hasGaps: true });
+      map.on('dataloading', wait),
+      map.on('error', (fault) => {
+        missed.note(fault);
+        setState((now) => ({ ...now, hasGaps: true }));
       }),
     ];
     return () => {
-      stopWaiting?.();
+      stopWaiting.current?.();
+      stopWaiting.current = null;
       for (const subscription of subscriptions) subscription.unsubscribe();
     };
-  }, [map]);
+  }, [map, missed, wait]);
   return {
     ...state,
-    forgetGaps: () => {
+    fetchAgain: () => {
       setState((now) => ({ ...now, hasGaps: false }));
+      wait();
+      missed.fetchAgain();
     },
   };
 }
