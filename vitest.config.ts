@@ -73,6 +73,8 @@ export default defineConfig({
           globalSetup: ['tests/support/browser-setup.ts'],
           maxWorkers: Math.min(2, availableParallelism()),
           sequence: { groupOrder: 1 },
+          // a browser that stalls on a busy machine says nothing of the product; a second go is printed
+          retry: 1,
           testTimeout: 2 * PATIENCE,
           hookTimeout: 2 * PATIENCE,
         },
