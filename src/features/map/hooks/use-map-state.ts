@@ -13,17 +13,19 @@ export function useMapState(
 ): MapState & { readonly fetchAgain: () => void } {
   const [state, setState] = useState<MapState>({ isBusy: true, hasGaps: false });
   const stopWaiting = useRef<(() => void) | null>(null);
-  const wait = useCallback(() => {
-    setState((now) => ({ ...now, isBusy: true }));
+  const tellOnceStill = useCallback(() => {
     stopWaiting.current ??= onceStill(map, () => {
       stopWaiting.current = null;
       setState((now) => ({ ...now, isBusy: false }));
     });
   }, [map]);
   useEffect(() => {
-    wait();
+    tellOnceStill();
     const subscriptions = [
-      map.on('dataloading', wait),
+      map.on('dataloading', () => {
+        setState((now) => ({ ...now, isBusy: true }));
+        tellOnceStill();
+      }),
       map.on('error', (fault) => {
         missed.note(fault);
         setState((now) => ({ ...now, hasGaps: true }));
@@ -34,12 +36,12 @@ export function useMapState(
       stopWaiting.current = null;
       for (const subscription of subscriptions) subscription.unsubscribe();
     };
-  }, [map, missed, wait]);
+  }, [map, missed, tellOnceStill]);
   return {
     ...state,
     fetchAgain: () => {
-      setState((now) => ({ ...now, hasGaps: false }));
-      wait();
+      setState({ isBusy: true, hasGaps: false });
+      tellOnceStill();
       missed.fetchAgain();
     },
   };
