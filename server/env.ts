@@ -28,6 +28,8 @@ const schema = z.object({
   TRUST_PROXY: z.coerce.number().int().min(0).default(0),
   /** Where files that are sent wait until they are read. */
   UPLOADS_FOLDER: z.string().min(1).default(path.join(tmpdir(), 'groundsill-uploads')),
+  /** Where photographs of visits are kept, by what they hold. */
+  PHOTOGRAPHS_FOLDER: z.string().min(1).default(path.join(tmpdir(), 'groundsill-photographs')),
   LOG_LEVEL: z.enum(['silent', 'error', 'warn', 'info', 'debug']).default('info'),
 });
 

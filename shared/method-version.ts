@@ -4,4 +4,4 @@
  *
  * Units: none. Valid: semantic version. Source: [own].
  */
-export const METHOD_VERSION = '1.0.0';
+export const METHOD_VERSION = '1.1.0';

@@ -19,6 +19,7 @@ export function settings({ folder, port, serverUrl, publicUrl }) {
     PUBLIC_URL: publicUrl,
     SESSION_SECRET: secretsOf(folder).session,
     UPLOADS_FOLDER: path.join(folder, 'uploads'),
+    PHOTOGRAPHS_FOLDER: path.join(folder, 'photographs'),
     ...process.env,
     PORT: String(port),
     DATABASE_URL: serverUrl,

@@ -1,5 +1,6 @@
 import type { z } from 'zod';
 import type { newRulesSchema } from '../../shared/schemas/rules.ts';
+import { refreshMarks } from '../decisions/refresh-marks.ts';
 import { AppError } from '../errors.ts';
 import { SchemeRules } from '../models/scheme-rules.ts';
 import type { Scheme } from '../models/scheme.ts';
@@ -29,6 +30,7 @@ export async function addRules(
       { schemeId, version, rules, createdBy: actor.id },
       { transaction },
     );
+    await refreshMarks(database, scheme, null, transaction);
     const subject = { kind: 'rules', id: String(version) };
     const [before, after] = [{ rules: newest.rules }, { rules }];
     await recordChange(

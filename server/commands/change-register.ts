@@ -2,6 +2,7 @@ import { UniqueConstraintError, type Sequelize, type Transaction } from 'sequeli
 import type { RegisterChange as RegisterChangeAnswer } from '../../shared/schemas/register-changes.ts';
 import { crsOfScheme } from '../crs/crs-of-scheme.ts';
 import { toLonLat } from '../crs/to-lon-lat.ts';
+import { refreshMarks } from '../decisions/refresh-marks.ts';
 import { AppError } from '../errors.ts';
 import { groundUnder } from '../ground/ground-under.ts';
 import { RegisterChange } from '../models/register-change.ts';
@@ -78,7 +79,8 @@ function twice(error: unknown): unknown {
 /**
  * Changes a register in a transaction of the caller's, all of it or nothing: the only way in which a
  * register changes. Locks the scheme, refuses what was changed meanwhile, derives what follows from
- * footprints, keeps the history, moves the register on by one version and tells the audit trail.
+ * footprints, keeps the history, moves the register on by one version, marks decisions that rest on what was
+ * changed and tells the audit trail.
  */
 export async function changeRegister(
   database: Sequelize,
@@ -93,6 +95,7 @@ export async function changeRegister(
   });
   const version = scheme.registerVersion + 1;
   await scheme.update({ registerVersion: version }, { transaction });
+  await refreshMarks(database, scheme, ids, transaction);
   const { changeId } = editing;
   const { kind, source } = cause;
   const after = {

@@ -2,32 +2,19 @@ import type { Transaction } from 'sequelize';
 import type { z } from 'zod';
 import { runInputs } from '../../shared/assessment/run-inputs.ts';
 import { METHOD_VERSION } from '../../shared/method-version.ts';
-import { rulesSchema, type RuleSet } from '../../shared/schemas/rules.ts';
 import type { newRunSchema } from '../../shared/schemas/runs.ts';
 import { AppError } from '../errors.ts';
 import { Building } from '../models/building.ts';
+import { newestRules } from '../models/newest-rules.ts';
 import { snapshotRegister } from '../models/run-inputs.ts';
 import { RunState } from '../models/run-state.ts';
 import { Run } from '../models/run.ts';
-import { SchemeRules } from '../models/scheme-rules.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import { lockAlignment } from './lock-alignment.ts';
 import { recordChange } from './record-change.ts';
 import { refusingBadDesign } from './refuse-bad-design.ts';
-
-type NewestRules = { readonly version: number; readonly rules: RuleSet };
-
-async function newestRules(schemeId: string, transaction: Transaction): Promise<NewestRules> {
-  const newest = await SchemeRules.findOne({
-    where: { schemeId },
-    order: [['version', 'desc']],
-    transaction,
-    rejectOnEmpty: true,
-  });
-  return { version: newest.version, rules: rulesSchema.parse(newest.rules) };
-}
 
 async function countBuildings(schemeId: string, transaction: Transaction): Promise<number> {
   const buildings = await Building.count({ where: { schemeId, removedAt: null }, transaction });

@@ -22,6 +22,10 @@ import { migration as registerOrder } from './migrations/18-register-order.ts';
 import { migration as jobQueue } from './migrations/19-job-queue.ts';
 import { migration as runs } from './migrations/20-runs.ts';
 import { migration as importChoices } from './migrations/21-import-choices.ts';
+import { migration as decisions } from './migrations/22-decisions.ts';
+import { migration as visits } from './migrations/23-visits.ts';
+import { migration as scores } from './migrations/24-scores.ts';
+import { migration as measures } from './migrations/25-measures.ts';
 
 /** In the order in which they are applied; a new one goes to the end. */
 const MIGRATIONS: Readonly<Record<string, Migration>> = {
@@ -46,6 +50,10 @@ const MIGRATIONS: Readonly<Record<string, Migration>> = {
   '19-job-queue': jobQueue,
   '20-runs': runs,
   '21-import-choices': importChoices,
+  '22-decisions': decisions,
+  '23-visits': visits,
+  '24-scores': scores,
+  '25-measures': measures,
 };
 
 /** Opens the migrations of a database as its owner; `serverUrl` names the role that serves. */

@@ -9,7 +9,7 @@ import type { Scheme } from '../models/scheme.ts';
 import { aboutDesign } from './about-design.ts';
 import { aboutRules } from './about-rules.ts';
 import type { ExportAbout } from './export-file.ts';
-import { momentWords } from './send-file.ts';
+import { momentWords } from './moment-words.ts';
 
 const UNITS = {
   xlsx: 'As in the headings. Settlement and tension are positive.',

@@ -44,9 +44,12 @@ type FigureName = {
   [K in keyof RunResult]: RunResult[K] extends number | null ? K : never;
 }[keyof RunResult];
 
+/** Where a building stands is known whatever could not be worked out of it. */
+const KNOWN_ALWAYS: ReadonlySet<FigureName> = new Set(['stage', 'chainage', 'offset']);
+
 /** The record keeps noughts of what could not be worked out. */
 function recorded(result: RunResult, name: FigureName): number | null {
-  return result.fault !== null && name !== 'stage' ? null : result[name];
+  return result.fault !== null && !KNOWN_ALWAYS.has(name) ? null : result[name];
 }
 
 /** A figure in the unit of people on sheets, and as the record has it for programs. */
@@ -86,13 +89,15 @@ function yesOrNo(
   };
 }
 
-const { stage, strain, settlement, slope, breakpoint, reserve } = RESULT_VALUES;
+const { stage, chainage, offset, strain, settlement, slope, breakpoint, reserve } = RESULT_VALUES;
 
 /** What a file says of each building of a run: what the run took of it, then all that it found. */
 export const RUN_COLUMNS: readonly Column[] = [
   plain('reference', { label: 'Reference', kind: 'text' }, ({ facts }) => facts.reference),
   ...BUILDING_FIELD_NAMES.map(fact),
   figure('stage', stage),
+  figure('chainage', chainage),
+  figure('offset', offset),
   category('categoryLow'),
   category('category'),
   category('categoryHigh'),

@@ -7,6 +7,7 @@ import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import type { ExportAbout, ExportFile } from './export-file.ts';
+import { momentWords } from './moment-words.ts';
 import { csvText } from './write-csv.ts';
 import { geojsonText } from './write-geojson.ts';
 import { writeXlsx } from './write-xlsx.ts';
@@ -26,11 +27,6 @@ const TYPES = {
   csv: 'text/csv; charset=utf-8',
   geojson: 'application/geo+json; charset=utf-8',
 } as const;
-
-/** A moment to the minute, the same for everybody. */
-export function momentWords(moment: Date): string {
-  return `${moment.toISOString().slice(0, 16).replace('T', ' ')} UTC`;
-}
 
 /** What every file says of itself: of which scheme, when and by whom it was asked for. */
 export async function aboutFile({ actor, scheme }: FileCall): Promise<ExportAbout> {

@@ -27,4 +27,8 @@ export const COLUMN_WORDS: Readonly<Record<ImportField, readonly string[]>> = {
   listedGrade: ['listed grade', 'listing', 'listed', 'grade', 'listing grade', 'listed building grade', 'heritage', 'heritage grade', 'heritage status', 'protected', 'protection', 'denkmal', 'denkmalschutz', 'classement', 'proteccion', 'tutela', 'vincolo', 'monument', 'monumentstatus'],
   condition: ['condition', 'building condition', 'state', 'condition of construction', 'structural condition', 'zustand', 'bauzustand', 'etat', 'estado', 'estado conservacion', 'stato', 'stato conservazione', 'staat', 'conditie', 'conservation'],
   inspected: ['inspected', 'inspection', 'inspected inside', 'surveyed', 'begangen', 'besichtigt', 'inspecte', 'inspeccionado', 'ispezionato', 'geinspecteerd'],
+  structureScore: ['structure score', 'structural sensitivity score', 'score structure'],
+  structureReason: ['structure score because', 'structure reason', 'reason for structure score'],
+  featuresScore: ['features score', 'feature score', 'finishes score', 'score features'],
+  featuresReason: ['features score because', 'features reason', 'reason for features score'],
 }; // prettier-ignore

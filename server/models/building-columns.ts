@@ -25,6 +25,10 @@ export const BUILDING_COLUMNS: Readonly<Record<BuildingField, BuildingColumn>> =
   listedGrade: { name: 'listed_grade', type: 'text' },
   condition: { name: 'condition', type: 'text' },
   inspected: { name: 'inspected', type: 'text' },
+  structureScore: { name: 'structure_score', type: 'integer' },
+  structureReason: { name: 'structure_reason', type: 'text' },
+  featuresScore: { name: 'features_score', type: 'integer' },
+  featuresReason: { name: 'features_reason', type: 'text' },
 };
 
 /** Every field of a building with its value. */
@@ -47,6 +51,10 @@ export function eachField(valueOf: (field: BuildingField) => BuildingValue): Bui
     listedGrade: valueOf('listedGrade'),
     condition: valueOf('condition'),
     inspected: valueOf('inspected'),
+    structureScore: valueOf('structureScore'),
+    structureReason: valueOf('structureReason'),
+    featuresScore: valueOf('featuresScore'),
+    featuresReason: valueOf('featuresReason'),
   };
 }
 

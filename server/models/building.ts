@@ -30,6 +30,10 @@ export class Building extends Model<InferAttributes<Building>, InferCreationAttr
   declare eOverG: CreationOptional<number | null>;
   declare poisson: CreationOptional<number | null>;
   declare inspected: CreationOptional<string | null>;
+  declare structureScore: CreationOptional<number | null>;
+  declare structureReason: CreationOptional<string | null>;
+  declare featuresScore: CreationOptional<number | null>;
+  declare featuresReason: CreationOptional<string | null>;
   /** Of the footprint, in square metres. */
   declare area: number;
   declare groundLevelFrom: CreationOptional<GroundLevelFrom | null>;
@@ -65,6 +69,10 @@ export function initBuilding(sequelize: Sequelize): void {
       eOverG: { type: DataTypes.DOUBLE, field: 'e_over_g' },
       poisson: { type: DataTypes.DOUBLE },
       inspected: { type: DataTypes.TEXT },
+      structureScore: { type: DataTypes.INTEGER },
+      structureReason: { type: DataTypes.TEXT },
+      featuresScore: { type: DataTypes.INTEGER },
+      featuresReason: { type: DataTypes.TEXT },
       area: { type: DataTypes.DOUBLE, allowNull: false },
       groundLevelFrom: { type: DataTypes.TEXT },
       version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },

@@ -3,17 +3,18 @@ import type { RegisterField } from '../../shared/schemas/register.ts';
 import type { ListedBuilding } from '../presenters/building-values.ts';
 import { LISTED, registerField } from './register-columns.ts';
 import type { Condition, RegisterOf } from './register-condition.ts';
-import { buildingsWithResults } from './result-columns.ts';
+import { buildingsBeside } from './columns-beside.ts';
 
 /** Rows by their numbers, in the order of the numbers; one that was taken out meanwhile is left out. */
 export async function findRows(
   database: Sequelize,
-  { runId }: Pick<RegisterOf, 'runId'>,
+  { runId, optionId }: Pick<RegisterOf, 'runId' | 'optionId'>,
   ids: readonly number[],
 ): Promise<ListedBuilding[]> {
   const rows = await database.query<ListedBuilding>(
-    `select ${LISTED} from ${buildingsWithResults('$2')} where id = any($1) and removed_at is null`,
-    { type: QueryTypes.SELECT, bind: [ids, runId] },
+    `select ${LISTED} from ${buildingsBeside({ run: '$2', option: '$3' })}
+     where id = any($1) and removed_at is null`,
+    { type: QueryTypes.SELECT, bind: [ids, runId, optionId] },
   );
   const byId = new Map(rows.map((row) => [row.id, row]));
   return ids.flatMap((id) => byId.get(id) ?? []);

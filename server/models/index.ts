@@ -16,6 +16,9 @@ import { initSchemeGround } from './scheme-ground.ts';
 import { initScheme } from './scheme.ts';
 import { initSchemeRules } from './scheme-rules.ts';
 import { initSingleUseLink } from './single-use-link.ts';
+import { initVisit } from './visit.ts';
+import { initVisitPhotographFile } from './visit-photograph-file.ts';
+import { initVisitPhotograph } from './visit-photograph.ts';
 
 /** Binds every model to a database. */
 export function initModels(sequelize: Sequelize): void {
@@ -32,6 +35,9 @@ export function initModels(sequelize: Sequelize): void {
   initAlignment(sequelize);
   initRun(sequelize);
   initRunState(sequelize);
+  initVisit(sequelize);
+  initVisitPhotograph(sequelize);
+  initVisitPhotographFile(sequelize);
   initBackgroundFeature(sequelize);
   initRegisterImport(sequelize);
   initAuditEntry(sequelize);

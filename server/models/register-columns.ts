@@ -5,11 +5,13 @@ import {
   type RegisterField,
 } from '../../shared/schemas/register.ts';
 import { isResultColumn } from '../../shared/schemas/result-columns.ts';
+import { isStandingColumn } from '../../shared/schemas/standing-columns.ts';
 import { BUILDING_COLUMNS, type BuildingColumn } from './building-columns.ts';
-import { RESULT_SELECTION, resultColumn } from './result-columns.ts';
+import { BESIDE_SELECTION, resultColumn, standingColumn } from './columns-beside.ts';
 
 /** Where each field of the register is kept, of a building or of what was found of it. */
 export function registerField(field: RegisterField): BuildingColumn {
+  if (isStandingColumn(field)) return standingColumn(field);
   return isResultColumn(field) ? resultColumn(field) : BUILDING_COLUMNS[field];
 }
 
@@ -34,5 +36,5 @@ export const LISTED = [
   'ground_level_from as "groundLevelFrom"',
   ...['west', 'south', 'east', 'north'],
   ...BUILDING_FIELD_NAMES.map((field) => `${BUILDING_COLUMNS[field].name} as "${field}"`),
-  RESULT_SELECTION,
+  BESIDE_SELECTION,
 ].join(', ');

@@ -7,9 +7,10 @@ import {
   type RegisterFilter,
 } from '../../shared/schemas/register.ts';
 import { isResultColumn } from '../../shared/schemas/result-columns.ts';
+import { isStandingColumn } from '../../shared/schemas/standing-columns.ts';
 import { AppError } from '../errors.ts';
 import { NUMBER_COLUMNS, registerColumn, registerField } from './register-columns.ts';
-import { buildingsWithResults } from './result-columns.ts';
+import { buildingsBeside } from './columns-beside.ts';
 
 /** Buildings that are meant, in SQL: where they stand, a condition, and the values that it is asked with. */
 export type Condition = {
@@ -18,8 +19,12 @@ export type Condition = {
   readonly bind: readonly unknown[];
 };
 
-/** A register: that of a scheme, with the results of one of its runs or of none. */
-export type RegisterOf = { readonly schemeId: string; readonly runId: string | null };
+/** A register: that of a scheme, with the results of one of its runs, of one of its options, or of none. */
+export type RegisterOf = {
+  readonly schemeId: string;
+  readonly runId: string | null;
+  readonly optionId: string | null;
+};
 
 type Bind = (value: unknown) => string;
 
@@ -88,8 +93,11 @@ function placeSql({ within, ids, except, importId }: RegisterFilter, bind: Bind)
   return conditions;
 }
 
-/** Whether a filter, or a column beside it, hangs on what a run found. */
-export function asksResults(filter: RegisterFilter, column?: RegisterColumn): boolean {
+/** What a filter, and a column beside it, hang on besides the buildings themselves. */
+export type Asked = { readonly results: boolean; readonly standings: boolean };
+
+/** Whether a filter, or a column beside it, hangs on what a run found or on where buildings stand. */
+export function askedBeside(filter: RegisterFilter, column?: RegisterColumn): Asked {
   const { any = {}, ranges = {}, unknown = [] } = filter;
   const asked = [
     ...Object.keys(any),
@@ -97,21 +105,32 @@ export function asksResults(filter: RegisterFilter, column?: RegisterColumn): bo
     ...unknown,
     ...(column ? [column] : []),
   ];
-  return asked.some(isResultColumn);
+  const standings = asked.some(isStandingColumn);
+  return { results: standings || asked.some(isResultColumn), standings };
+}
+
+function fromSql(
+  { runId, optionId }: RegisterOf,
+  { results, standings }: Asked,
+  bind: Bind,
+): string {
+  if (!results) return 'buildings';
+  const run = bind(runId);
+  return buildingsBeside(standings ? { run, option: bind(optionId) } : { run });
 }
 
 /**
- * The buildings of a register that a filter means; `column` is what else will be asked of them. Results are
- * looked up only where they are asked for.
+ * The buildings of a register that a filter means; `column` is what else will be asked of them. Results and
+ * standings are looked up only where they are asked for.
  */
 export function registerCondition(
-  { schemeId, runId }: RegisterOf,
+  register: RegisterOf,
   filter: RegisterFilter,
   column?: RegisterColumn,
 ): Condition {
-  const values: unknown[] = [schemeId];
+  const values: unknown[] = [register.schemeId];
   const bind: Bind = (value) => `$${values.push(value)}`;
-  const from = asksResults(filter, column) ? buildingsWithResults(bind(runId)) : 'buildings';
+  const from = fromSql(register, askedBeside(filter, column), bind);
   const { search, any = {}, ranges = {}, unknown = [], assumed } = filter;
   const conditions = ['scheme_id = $1', 'removed_at is null'];
   if (search !== undefined && search !== '') {

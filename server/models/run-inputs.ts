@@ -7,7 +7,9 @@ const FACTS = `jsonb_build_object(
   'parts', f.footprint, 'storeys', b.storeys, 'eavesHeight', b.eaves_height,
   'groundLevel', b.ground_level, 'foundingLevel', b.founding_level, 'foundation', b.foundation,
   'construction', b.construction, 'eOverG', b.e_over_g, 'poisson', b.poisson,
-  'listedGrade', b.listed_grade, 'condition', b.condition, 'inspected', b.inspected
+  'listedGrade', b.listed_grade, 'condition', b.condition, 'inspected', b.inspected,
+  'structureScore', b.structure_score, 'structureReason', b.structure_reason,
+  'featuresScore', b.features_score, 'featuresReason', b.features_reason
 )`;
 
 /**

@@ -30,6 +30,8 @@ export const RECORDED_COLUMNS = {
   assumed: ['assumed', 'text[]'],
   warnings: ['warnings', 'text[]'],
   fault: ['fault', 'text'],
+  chainage: ['chainage', 'double precision'],
+  offset: ['line_offset', 'double precision'],
 } as const;
 
 const ENTRIES = Object.entries(RECORDED_COLUMNS);

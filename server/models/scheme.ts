@@ -19,6 +19,8 @@ export class Scheme extends Model<InferAttributes<Scheme>, InferCreationAttribut
   declare version: CreationOptional<number>;
   /** Grows with every change of the register; part of the address of its tiles. */
   declare registerVersion: CreationOptional<number>;
+  /** Grows with every decision, check, mark and assignment. */
+  declare decisionsVersion: CreationOptional<number>;
   /** Grows with every upload of streets, water, rail or parks. */
   declare backgroundVersion: CreationOptional<number>;
   declare createdAt: CreationOptional<Date>;
@@ -34,6 +36,7 @@ export function initScheme(sequelize: Sequelize): void {
       archivedAt: { type: DataTypes.DATE },
       version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
       registerVersion: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
+      decisionsVersion: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
       backgroundVersion: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
       createdAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
     },

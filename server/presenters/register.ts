@@ -1,12 +1,20 @@
 import type { RegisterPage, RegisterRow } from '../../shared/schemas/register.ts';
 import type { Register } from '../register/register-of.ts';
-import { presentResults, presentValues, type ListedBuilding } from './building-values.ts';
+import {
+  presentResults,
+  presentStandings,
+  presentValues,
+  type ListedBuilding,
+} from './building-values.ts';
 
 /** One row of the register. */
 export function presentRegisterRow(building: ListedBuilding): RegisterRow {
   const { id, reference, west, south, east, north } = building;
   const centre: RegisterRow['centre'] = [(west + east) / 2, (south + north) / 2];
-  return { id, reference, centre, ...presentValues(building), ...presentResults(building) };
+  return {
+    ...{ id, reference, centre, ...presentValues(building) },
+    ...{ ...presentResults(building), ...presentStandings(building) },
+  };
 }
 
 /** A page of a register, with its version and the run that its results are of. */

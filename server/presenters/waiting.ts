@@ -1,9 +1,11 @@
 import type { Role } from '../../shared/schemas/roles.ts';
 import type { WaitingAnswer, WaitingItem } from '../../shared/schemas/waiting.ts';
+import type { DecisionsWaiting } from '../models/find-decisions-waiting.ts';
 import type { OwnScheme } from '../models/find-schemes.ts';
 import type { SchemeState } from '../models/find-scheme-states.ts';
 import { holds } from '../policies/actor.ts';
 import { schemePolicy } from '../policies/scheme-policy.ts';
+import { presentDecisionsWaiting } from './waiting-decisions.ts';
 
 /** Without one of each a scheme cannot be carried through; owners come with their buildings. */
 const NEEDED: readonly Role[] = ['designer', 'assessor', 'witness'];
@@ -32,13 +34,20 @@ function waitingForAdministrator(page: string, since: string, state: SchemeState
   ];
 }
 
-function waitingIn({ scheme, actor }: OwnScheme, state: SchemeState): WaitingItem[] {
+function waitingIn(
+  { scheme, actor }: OwnScheme,
+  state: SchemeState,
+  decisions: DecisionsWaiting | undefined,
+): WaitingItem[] {
   const since = scheme.createdAt.toISOString();
   const page = `/schemes/${scheme.id}`;
   const one = { count: 1, since };
   const buildings = 'The register has no buildings yet.';
   const background = 'The map has no streets, water, rail or parks yet.';
   return [
+    ...(schemePolicy.checkDecisions(actor) && decisions !== undefined
+      ? presentDecisionsWaiting(page, decisions)
+      : []),
     ...(schemePolicy.manageMembers(actor) ? waitingForAdministrator(page, since, state) : []),
     ...(holds(actor, 'assessor') && !state.hasBuildings
       ? [{ ...one, kind: 'no-buildings' as const, text: buildings, link: `${page}/plan` }]
@@ -60,11 +69,14 @@ function waitingIn({ scheme, actor }: OwnScheme, state: SchemeState): WaitingIte
 export function presentWaitingSchemes(
   schemes: readonly OwnScheme[],
   states: readonly SchemeState[],
+  decisions: readonly DecisionsWaiting[],
 ): WaitingAnswer['schemes'] {
   return schemes.map((own) => {
     const { id, name, archivedAt } = own.scheme;
     const state = states.find((one) => one.id === id);
-    const waiting = state === undefined || archivedAt !== null ? [] : waitingIn(own, state);
+    const ofDecisions = decisions.find(({ schemeId }) => schemeId === id);
+    const waiting =
+      state === undefined || archivedAt !== null ? [] : waitingIn(own, state, ofDecisions);
     return {
       scheme: { id, name, archivedAt: archivedAt?.toISOString() ?? null },
       roles: [...own.actor.roles].sort(),

@@ -15,7 +15,7 @@ export async function meantBuildings(
   { filter, expected }: Meant,
   transaction: Transaction,
 ): Promise<VersionedBuilding[]> {
-  const register = { schemeId, runId: await findShownRun(database, schemeId, transaction) };
+  const register = { schemeId, ...(await findShownRun(database, schemeId, transaction)) };
   const found = await findVersions(database, registerCondition(register, filter), transaction);
   if (found.length === expected) return found;
   const message = `These are ${found.length} buildings now, not ${expected}. Look at them again.`;

@@ -9,7 +9,7 @@ import {
   findRegisterIds,
 } from '../models/find-register-order.ts';
 import { countRows } from '../models/find-register-rows.ts';
-import { asksResults, registerCondition } from '../models/register-condition.ts';
+import { askedBeside, registerCondition } from '../models/register-condition.ts';
 import type { Services } from '../services.ts';
 import { orderGroups } from './order-groups.ts';
 import { packedIds, type PackedIds } from './packed-ids.ts';
@@ -17,9 +17,11 @@ import type { Register } from './register-of.ts';
 
 type Which = { readonly filter: RegisterFilter; readonly sort: RegisterSort };
 
-function keyOf(what: string, { schemeId, version, runId }: Register, which: Which): string {
-  const run = asksResults(which.filter, which.sort.column) ? runId : null;
-  return `${what}/${schemeId}/${version}/${run}/${JSON.stringify(which)}`;
+function keyOf(what: string, register: Register, which: Which): string {
+  const { schemeId, version, runId, decisionsVersion } = register;
+  const asked = askedBeside(which.filter, which.sort.column);
+  const beside = `${asked.results ? runId : null}/${asked.standings ? decisionsVersion : null}`;
+  return `${what}/${schemeId}/${version}/${beside}/${JSON.stringify(which)}`;
 }
 
 /** Whether the buildings that a filter means have been put in order already. */

@@ -1,9 +1,8 @@
 import type { z } from 'zod';
 import type { registerQuerySchema } from '../../shared/schemas/register.ts';
-import { isResultColumn } from '../../shared/schemas/result-columns.ts';
 import { findFirstIds } from '../models/find-first-ids.ts';
 import { findRows } from '../models/find-register-rows.ts';
-import { registerCondition } from '../models/register-condition.ts';
+import { askedBeside, registerCondition } from '../models/register-condition.ts';
 import type { ListedBuilding } from '../presenters/building-values.ts';
 import type { Services } from '../services.ts';
 import type { Register } from './register-of.ts';
@@ -21,8 +20,8 @@ export async function registerPage(
   const { database } = services;
   const { filter, sort, offset, limit } = query;
   const which = { filter, sort };
-  // results have no index: all in order once is quicker than looking for the ends of it
-  const isFar = offset + limit > NEAR || isResultColumn(sort.column);
+  // what stands beside has no index: all in order once is quicker than looking for the ends of it
+  const isFar = offset + limit > NEAR || askedBeside({}, sort.column).results;
   if (isFar || isOrdered(services, register, which)) {
     const order = await registerOrder(services, register, which);
     const [rows, all] = await Promise.all([

@@ -4,11 +4,13 @@ import { backgroundRoutes } from './background.ts';
 import { buildingOutlineRoutes } from './building-outlines.ts';
 import { buildingRoutes } from './buildings.ts';
 import { crsRoutes } from './crs.ts';
+import { decisionRoutes } from './decisions.ts';
 import type { Route } from './define-route.ts';
 import { groundRoutes } from './ground.ts';
 import { importRoutes } from './imports.ts';
 import { linkRoutes } from './links.ts';
 import { mailboxRoutes } from './mailbox.ts';
+import { measureRoutes } from './measures.ts';
 import { memberRoutes } from './members.ts';
 import { peopleRoutes } from './people.ts';
 import { registerChangeRoutes } from './register-changes.ts';
@@ -19,6 +21,7 @@ import { runRoutes } from './runs.ts';
 import { schemeRoutes } from './schemes.ts';
 import { sessionRoutes } from './session.ts';
 import { tileRoutes } from './tiles.ts';
+import { visitRoutes } from './visits.ts';
 import { waitingRoutes } from './waiting.ts';
 
 /** Every route there is; a test walks this list for every role. */
@@ -41,7 +44,10 @@ export const ROUTES: readonly Route[] = [
   ...groundRoutes,
   ...alignmentRoutes,
   ...runRoutes,
+  ...decisionRoutes,
+  ...measureRoutes,
   ...importRoutes,
   ...tileRoutes,
+  ...visitRoutes,
   ...waitingRoutes,
 ];

@@ -7,6 +7,7 @@ import {
 import { cancelRun } from '../commands/cancel-run.ts';
 import { resumeRun } from '../commands/resume-run.ts';
 import { startRun } from '../commands/start-run.ts';
+import { sendSheet } from '../documents/sheet/send-sheet.ts';
 import { sendRun } from '../exports/send-run.ts';
 import { findRun, findRuns } from '../models/find-runs.ts';
 import { findContours } from '../models/run-contours.ts';
@@ -102,6 +103,13 @@ export const runRoutes = [
     access: { scheme: 'readRuns' },
     params: runBuildingParamsSchema,
     handle: ({ services, scheme, params }) => runBuilding(services, scheme.id, params),
+  }),
+  defineRoute({
+    method: 'get',
+    path: '/api/schemes/:schemeId/runs/:runId/buildings/:buildingId/sheet.pdf',
+    access: { scheme: 'readRuns' },
+    params: runBuildingParamsSchema,
+    handle: (call) => sendSheet(call, call.params),
   }),
   defineRoute({
     method: 'get',

@@ -12,6 +12,7 @@ import { CONTOUR_LEVELS, settlementContours } from '../../shared/ground/settleme
 import { alignmentDesignSchema } from '../../shared/schemas/alignments.ts';
 import { rulesSchema } from '../../shared/schemas/rules.ts';
 import { runFactsSchema, type RunResult } from '../../shared/schemas/runs.ts';
+import type { SheetMaterial } from '../documents/sheet/sheet-material.ts';
 import { boxesOnGrid, type BoxInDegrees } from './boxes-on-grid.ts';
 import { planChunks, type Chunk } from './plan-chunks.ts';
 import { reachOfDesign } from './reach-of-design.ts';
@@ -38,7 +39,8 @@ export type Asked =
       readonly rules: unknown;
       readonly id: string;
       readonly neighbours: string;
-    };
+    }
+  | { readonly kind: 'sheet'; readonly material: SheetMaterial };
 
 /** A result as the table keeps it. */
 export type ResultRow = RunResult & { readonly buildingId: number };
@@ -77,16 +79,27 @@ function rowsOf({ design, rules, id, neighbours }: Asked & { kind: 'rows' }): Bu
 
 type BuildingRows = { readonly wallIndex: number; readonly segment: Segment }[];
 
-/** What a thread answers: the parts of a run, a building's rows, or a text of JSON for the database. */
+/** Only where one is asked for: all that a document needs takes a while to load. */
+async function sheetOf({ material }: Asked & { kind: 'sheet' }): Promise<Uint8Array> {
+  const { sheetDocument } = await import('../documents/sheet/sheet-document.ts');
+  return sheetDocument(material);
+}
+
+/**
+ * What a thread answers: the parts of a run, a building's rows, the bytes of a document, or a text of JSON
+ * for the database.
+ */
 export type Computed<A extends Asked> = A extends { kind: 'plan' }
   ? Chunk[]
   : A extends { kind: 'rows' }
     ? BuildingRows
-    : string;
+    : A extends { kind: 'sheet' }
+      ? Uint8Array
+      : string;
 
 /** Does a piece of a run's arithmetic; knows nothing of the database. */
-export function compute<A extends Asked>(asked: A): Computed<A>;
-export function compute(asked: Asked): Chunk[] | BuildingRows | string {
+export function compute<A extends Asked>(asked: A): Computed<A> | Promise<Computed<A>>;
+export function compute(asked: Asked): Chunk[] | BuildingRows | string | Promise<Uint8Array> {
   switch (asked.kind) {
     case 'plan':
       return chunksOf(asked);
@@ -96,5 +109,7 @@ export function compute(asked: Asked): Chunk[] | BuildingRows | string {
       return JSON.stringify(chunkResults(asked));
     case 'rows':
       return rowsOf(asked);
+    case 'sheet':
+      return sheetOf(asked);
   }
 }

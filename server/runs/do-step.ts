@@ -1,6 +1,7 @@
 import type { Sequelize, Transaction } from 'sequelize';
 import { isUnderWay } from '../../shared/schemas/runs.ts';
 import { crsOfScheme } from '../crs/crs-of-scheme.ts';
+import { refreshMarks } from '../decisions/refresh-marks.ts';
 import { AppError } from '../errors.ts';
 import { closeChunk, findOpenChunk, findOpenChunks, insertChunks } from '../models/run-chunks.ts';
 import { hasContours, insertContours } from '../models/run-contours.ts';
@@ -30,7 +31,7 @@ async function lockState(runId: string, transaction: Transaction): Promise<RunSt
 }
 
 async function completeIfDone(
-  database: Sequelize,
+  { database, queue }: Pick<StepTools, 'database' | 'queue'>,
   state: RunState,
   transaction: Transaction,
 ): Promise<void> {
@@ -39,6 +40,7 @@ async function completeIfDone(
   if ((await findOpenChunks(database, runId, transaction)).length > 0) return;
   if (!(await hasContours(database, runId, transaction))) return;
   await state.update({ state: 'complete', endedAt: new Date() }, { transaction });
+  await queue.send([{ kind: 'marks', runId }], transaction);
 }
 
 async function plan(tools: StepTools, run: Run): Promise<void> {
@@ -55,17 +57,18 @@ async function plan(tools: StepTools, run: Run): Promise<void> {
     await state.update({ state: 'running' }, { transaction });
     const steps = chunks.map((_, chunk) => ({ kind: 'chunk', runId: run.id, chunk }) as const);
     await queue.send(steps, transaction);
-    await completeIfDone(database, state, transaction);
+    await completeIfDone(tools, state, transaction);
   });
 }
 
-async function drawContours({ database, threads }: StepTools, run: Run): Promise<void> {
+async function drawContours(tools: StepTools, run: Run): Promise<void> {
+  const { database, threads } = tools;
   const { design, rules } = run;
   const contours = await threads.compute({ kind: 'contours', design, rules });
   await database.transaction(async (transaction) => {
     const state = await lockState(run.id, transaction);
     await insertContours(database, run.id, contours, transaction);
-    await completeIfDone(database, state, transaction);
+    await completeIfDone(tools, state, transaction);
   });
 }
 
@@ -82,7 +85,16 @@ async function workOut(tools: StepTools, run: Run, step: StepOf<'chunk'>): Promi
     if (state.state !== 'running') return;
     if (!(await closeChunk(database, step, transaction))) return;
     await insertResults(database, run.id, results, transaction);
-    await completeIfDone(database, state, transaction);
+    await completeIfDone(tools, state, transaction);
+  });
+}
+
+/** Looks which decisions no longer rest on what they did; the run stands, whatever comes of it. */
+async function markDecisions({ database }: StepTools, { schemeId }: Run): Promise<void> {
+  await database.transaction(async (transaction) => {
+    const lock = transaction.LOCK.UPDATE;
+    const scheme = await Scheme.findByPk(schemeId, { transaction, lock, rejectOnEmpty: true });
+    await refreshMarks(database, scheme, null, transaction);
   });
 }
 
@@ -92,6 +104,10 @@ async function workOut(tools: StepTools, run: Run, step: StepOf<'chunk'>): Promi
  */
 export async function doStep(tools: StepTools, step: RunStep): Promise<void> {
   const run = await Run.findByPk(step.runId, { rejectOnEmpty: true });
+  if (step.kind === 'marks') {
+    await markDecisions(tools, run);
+    return;
+  }
   const { state } = await RunState.findByPk(run.id, { rejectOnEmpty: true });
   if (!isUnderWay(state)) return;
   if (step.kind === 'plan') await plan(tools, run);

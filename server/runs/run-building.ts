@@ -23,11 +23,13 @@ async function findOwnRun(schemeId: string, { runId }: Place): Promise<Run> {
 /** What it takes to work a building out again, whoever comes before and after it. */
 const aloneSchema = runBuildingSchema.omit({ previous: true, next: true });
 
+export type RunBuildingAlone = z.infer<typeof aloneSchema>;
+
 async function buildingOf(
   { database, runs }: Pick<Services, 'database' | 'runs'>,
   { id: runId, design, rules }: Run,
   buildingId: number,
-): Promise<z.infer<typeof aloneSchema>> {
+): Promise<RunBuildingAlone> {
   const [found, result, neighbours] = await Promise.all([
     findRunBuilding(database, runId, buildingId),
     findResult(database, runId, buildingId),
@@ -36,6 +38,15 @@ async function buildingOf(
   if (result === undefined) throw new AppError('not-found');
   const asked = { kind: 'rows', design, rules, id: String(buildingId), neighbours } as const;
   return aloneSchema.parse({ ...found, result, rows: await runs.compute(asked) });
+}
+
+/** A building of a run as it is on record, whoever comes before and after it. */
+export async function runBuildingAlone(
+  services: Pick<Services, 'database' | 'runs'>,
+  schemeId: string,
+  place: Place,
+): Promise<RunBuildingAlone> {
+  return buildingOf(services, await findOwnRun(schemeId, place), place.buildingId);
 }
 
 /** Who comes before and after a building in an order; null at either end. */

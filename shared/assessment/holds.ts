@@ -1,3 +1,4 @@
+import { sensitivityTotal } from '../damage/sensitivity-score.ts';
 import type { ReferenceKey } from '../references.ts';
 
 /**
@@ -108,4 +109,18 @@ export function holdsAt(
   holds: readonly Hold[],
 ): readonly Hold[] {
   return holds.filter(({ stages, condition }) => stages.includes(stage) && acts(condition, facts));
+}
+
+/**
+ * The same facts with the total that a category makes of a building's scores.
+ *
+ * Units: as HoldFacts. Valid: a category that is not known counts as 0. Source: [common].
+ */
+export function withSensitivity(
+  facts: HoldFacts,
+  scores: Parameters<typeof sensitivityTotal>[0],
+  category: number,
+): HoldFacts {
+  const total = sensitivityTotal(scores, category);
+  return total === undefined ? facts : { ...facts, sensitivityTotal: total };
 }

@@ -2,12 +2,15 @@ import { joinedWalls, type RowsByBuilding } from '../building/joined-walls.ts';
 import type { Category } from '../damage/categories.ts';
 import { categoryOfStrain } from '../damage/category-of-strain.ts';
 import type { RankinClass } from '../damage/rankin.ts';
+import { chainages } from '../geometry/chainages.ts';
+import type { PlanPoint } from '../geometry/point.ts';
+import { projectOntoPolyline } from '../geometry/project-onto-polyline.ts';
 import type { GroundModel } from '../ground/ground-model.ts';
 import { MethodError } from '../method-error.ts';
 import type { Warning } from '../warnings.ts';
 import { assessBuilding, type BuildingResult } from './assess-building.ts';
 import type { Breakpoint } from './breakpoint-of-wall.ts';
-import { holdsAt, type Hold } from './holds.ts';
+import { holdsAt, withSensitivity, type Hold } from './holds.ts';
 import { ALL_COMPLETE, type Moment } from './moment.ts';
 import type { Assumed, PreparedBuilding } from './prepared-building.ts';
 import type { AssessmentRules } from './rules.ts';
@@ -25,6 +28,8 @@ export type RunInputs = {
   readonly limits: ScreeningLimits;
   readonly holds: readonly Hold[];
   readonly moments?: readonly Moment[];
+  /** The drawn line, which chainage and offset are told by; null where there is none. */
+  readonly line: readonly PlanPoint[] | null;
 };
 
 /**
@@ -59,8 +64,9 @@ export type StrainOutcome = {
  * What a run finds of one building. `stage` is where it stands by the figures: let go at 1 or 2, or to be
  * looked at in detail at 3; nothing is decided by it.
  *
- * Units: settlement m and slope m/m, the largest over the whole bracket at founding level. Valid: strain
- * is null where screening lets the building go; fault says why nothing could be worked out.
+ * Units: settlement m and slope m/m, the largest over the whole bracket at founding level; place m. Valid:
+ * strain is null where screening lets the building go; fault says why nothing could be worked out; place is
+ * that of the footprint's middle beside the drawn line, offset positive to the left of growing chainage.
  * Source: mair-taylor-burland-1996.
  */
 export type BuildingOutcome = {
@@ -72,6 +78,7 @@ export type BuildingOutcome = {
   readonly assumed: readonly Assumed[];
   readonly warnings: readonly Warning[];
   readonly fault: string | null;
+  readonly place: { readonly chainage: number; readonly offset: number } | null;
 };
 
 /**
@@ -110,7 +117,18 @@ export function strainOutcome(result: BuildingResult): StrainOutcome {
   };
 }
 
-function notWorkedOut(prepared: PreparedBuilding, fault: string): BuildingOutcome {
+function placeBeside(
+  line: RunInputs['line'],
+  { middle }: PreparedBuilding,
+): BuildingOutcome['place'] {
+  return line === null ? null : projectOntoPolyline(middle, line, chainages(line));
+}
+
+function notWorkedOut(
+  { line }: RunInputs,
+  prepared: PreparedBuilding,
+  fault: string,
+): BuildingOutcome {
   const { assumed } = prepared;
   return {
     stage: 3,
@@ -121,6 +139,7 @@ function notWorkedOut(prepared: PreparedBuilding, fault: string): BuildingOutcom
     assumed,
     warnings: [],
     fault,
+    place: placeBeside(line, prepared),
   };
 }
 
@@ -135,7 +154,7 @@ export type WorkedBuilding = {
 };
 
 function worked(
-  { model, rules, limits, holds, moments = [ALL_COMPLETE] }: RunInputs,
+  { model, rules, limits, holds, line, moments = [ALL_COMPLETE] }: RunInputs,
   prepared: PreparedBuilding,
   rows: RowsByBuilding,
 ): WorkedBuilding {
@@ -143,13 +162,15 @@ function worked(
   const { settlementMax: settlement, slopeMax: slope, warnings } = screening;
   const { assumed } = prepared;
   const heldAtOne = holdsAt(1, prepared.holds, holds).map(({ name }) => name);
-  const screened = { settlement, slope, assumed, fault: null };
+  const place = placeBeside(line, prepared);
+  const screened = { settlement, slope, assumed, fault: null, place };
   if (screening.passes && heldAtOne.length === 0) {
     return { outcome: { ...screened, stage: 1, heldBy: [], strain: null, warnings }, strain: null };
   }
   const joined = joinedWalls(prepared.id, prepared.walls, rows);
   const result = assessBuilding(model, prepared.walls, joined, rules, moments);
-  const heldBy = holdsAt(2, prepared.holds, holds).map(({ name }) => name);
+  const facts = withSensitivity(prepared.holds, prepared.scores, result.category);
+  const heldBy = holdsAt(2, facts, holds).map(({ name }) => name);
   const passes = result.category < rules.leadingCategory && heldBy.length === 0;
   const outcome: BuildingOutcome = {
     ...screened,
@@ -176,7 +197,7 @@ export function workedBuilding(
     return worked(inputs, prepared, rows);
   } catch (error) {
     if (!(error instanceof MethodError)) throw error;
-    return { outcome: notWorkedOut(prepared, error.message), strain: null };
+    return { outcome: notWorkedOut(inputs, prepared, error.message), strain: null };
   }
 }
 

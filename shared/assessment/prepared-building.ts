@@ -20,6 +20,8 @@ export type RegisterFacts = RegisteredAttributes & {
   readonly foundation: string | null;
   readonly listedGrade: string | null;
   readonly condition: string | null;
+  readonly structureScore: number | null;
+  readonly featuresScore: number | null;
 };
 
 /**
@@ -37,13 +39,22 @@ export type Assumed = CompleteAttributes['assumed'][number] | 'groundLevel';
 export type PreparedBuilding = {
   readonly id: string;
   readonly rings: readonly (readonly PlanPoint[])[];
+  readonly middle: PlanPoint;
   readonly groundLevel: number;
   readonly foundingLevel: number;
   readonly attributes: CompleteAttributes;
   readonly walls: readonly Wall[];
   readonly holds: HoldFacts;
+  readonly scores: SensitivityScores;
   readonly assumed: readonly Assumed[];
 };
+
+/**
+ * What assessors scored of a building; null where nobody has.
+ *
+ * Units: none. Valid: 0 to 2 each. Source: [common].
+ */
+export type SensitivityScores = Pick<RegisterFacts, 'structureScore' | 'featuresScore'>;
 
 const LETTERS = 'abcdefghijklmnopqrstuvwxyz';
 
@@ -67,10 +78,19 @@ function says(words: string | null, yes: RegExp, no: RegExp): boolean | undefine
   return yes.test(said) && !no.test(said);
 }
 
+/**
+ * Whether a building is listed, at whatever grade; undefined where nobody knows.
+ *
+ * Units: none. Valid: any words of a register. Source: [own].
+ */
+export function isListed({ listedGrade }: Pick<RegisterFacts, 'listedGrade'>): boolean | undefined {
+  return says(listedGrade, /./, /^(not listed|unlisted|none|no)$/i);
+}
+
 /** What holds a building, as the words of its register have it; whatever grade is listed. */
 function holdFacts(facts: RegisterFacts, foundingDepth: number | undefined): HoldFacts {
   const piled = says(facts.foundation, /\bpile/i, /^(not |no |without )/i);
-  const listed = says(facts.listedGrade, /./, /^(not listed|unlisted|none|no)$/i);
+  const listed = isListed(facts);
   const poorCondition = says(facts.condition, /\b(poor|bad)\b/i, /^not /i);
   return {
     ...(foundingDepth !== undefined && { foundingDepth }),
@@ -78,6 +98,39 @@ function holdFacts(facts: RegisterFacts, foundingDepth: number | undefined): Hol
     ...(listed !== undefined && { listed }),
     ...(poorCondition !== undefined && { poorCondition }),
   };
+}
+
+/**
+ * The ground level of a building: its own, or that beside the nearest drive.
+ *
+ * Units: m above datum. Valid: `defaultGroundLevel` stands where no drive tells one. Source: [own].
+ */
+function groundLevelOf(
+  facts: RegisterFacts,
+  model: GroundModel,
+  defaultGroundLevel: number,
+): number {
+  return (
+    facts.groundLevel ??
+    groundLevelBeside(model, footprintMiddle(facts.parts)) ??
+    defaultGroundLevel
+  );
+}
+
+/**
+ * What of a building of the register may hold it, before any category is known.
+ *
+ * Units: founding depth m. Valid: as `preparedBuilding`; the footprint is asked for only where there is a
+ * founding level and no ground level. Source: [own].
+ */
+export function holdFactsOf(
+  facts: RegisterFacts,
+  model: GroundModel,
+  defaultGroundLevel: number,
+): HoldFacts {
+  if (facts.foundingLevel === null) return holdFacts(facts, undefined);
+  const groundLevel = groundLevelOf(facts, model, defaultGroundLevel);
+  return holdFacts(facts, knownOfBuilding({ ...facts, groundLevel }).foundingDepth);
 }
 
 /**
@@ -93,10 +146,7 @@ export function preparedBuilding(
   model: GroundModel,
   defaultGroundLevel: number,
 ): PreparedBuilding {
-  const groundLevel =
-    facts.groundLevel ??
-    groundLevelBeside(model, footprintMiddle(facts.parts)) ??
-    defaultGroundLevel;
+  const groundLevel = groundLevelOf(facts, model, defaultGroundLevel);
   const known = knownOfBuilding({ ...facts, groundLevel });
   const attributes = completeAttributes(known);
   const isFoundingGiven =
@@ -110,6 +160,7 @@ export function preparedBuilding(
   return {
     id: facts.id,
     rings: facts.parts.flat(),
+    middle: footprintMiddle(facts.parts),
     groundLevel,
     foundingLevel,
     attributes,
@@ -124,6 +175,7 @@ export function preparedBuilding(
       poisson: attributes.poisson,
     })),
     holds: holdFacts(facts, known.foundingDepth),
+    scores: { structureScore: facts.structureScore, featuresScore: facts.featuresScore },
     assumed: [...attributes.assumed, ...(isGroundAssumed ? (['groundLevel'] as const) : [])],
   };
 }

@@ -37,5 +37,7 @@ export function resultOfOutcome({ strain, ...outcome }: BuildingOutcome): RunRes
     assumed: [...outcome.assumed],
     warnings: [...outcome.warnings],
     fault: outcome.fault,
+    chainage: outcome.place?.chainage ?? null,
+    offset: outcome.place?.offset ?? null,
   };
 }

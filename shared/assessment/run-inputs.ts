@@ -33,5 +33,6 @@ export function runInputs(design: AlignmentDesign, rules: RuleSet): RunInputs {
     rules: ofMethod,
     limits: rules.screening.value,
     holds: rules.holds,
+    line: design.line,
   };
 }

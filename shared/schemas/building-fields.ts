@@ -21,6 +21,10 @@ export const BUILDING_FIELDS = {
   listedGrade: { label: 'Listing', kind: 'text' },
   condition: { label: 'Condition', kind: 'text' },
   inspected: { label: 'Inspected', kind: 'text' },
+  structureScore: { label: 'Structure score', kind: 'whole', least: 0, most: 2 },
+  structureReason: { label: 'Structure score because', kind: 'text' },
+  featuresScore: { label: 'Features score', kind: 'whole', least: 0, most: 2 },
+  featuresReason: { label: 'Features score because', kind: 'text' },
 } as const satisfies Readonly<Record<string, BuildingFieldFacts>>;
 
 /**

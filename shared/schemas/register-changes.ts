@@ -21,6 +21,7 @@ export const REGISTER_CHANGE_KINDS = [
   'join',
   'remove',
   'ground',
+  'visit',
   'undo',
 ] as const;
 

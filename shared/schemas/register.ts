@@ -2,15 +2,21 @@ import { z } from 'zod';
 import { BUILDING_FIELD_NAMES } from './building-fields.ts';
 import { jsonText } from './json-text.ts';
 import { RESULT_COLUMN_NAMES, resultColumnsShape } from './result-columns.ts';
+import { STANDING_COLUMN_NAMES, standingColumnsShape } from './standing-columns.ts';
 
 const text = z.string().max(300);
 
 /**
- * What can be known or not of a building in the register: what the newest complete run found, and its fields.
+ * What can be known or not of a building in the register: what the newest complete run found, where it
+ * stands on the assessors' list, and its fields.
  *
- * Units: of BUILDING_FIELDS and RESULT_COLUMNS. Valid: read only. Source: [own].
+ * Units: of BUILDING_FIELDS, RESULT_COLUMNS and STANDING_COLUMNS. Valid: read only. Source: [own].
  */
-export const REGISTER_FIELDS = [...RESULT_COLUMN_NAMES, ...BUILDING_FIELD_NAMES] as const;
+export const REGISTER_FIELDS = [
+  ...RESULT_COLUMN_NAMES,
+  ...STANDING_COLUMN_NAMES,
+  ...BUILDING_FIELD_NAMES,
+] as const;
 
 /**
  * One of what can be known or not of a building in the register.
@@ -208,6 +214,10 @@ export const buildingValuesShape = {
   listedGrade: value.text,
   condition: value.text,
   inspected: value.text,
+  structureScore: value.number,
+  structureReason: value.text,
+  featuresScore: value.number,
+  featuresReason: value.text,
   area: z.number(),
   groundLevelFrom: z.enum(GROUND_LEVEL_FROM).nullable(),
   assumed: z.array(z.enum(ASSUMABLE)),
@@ -215,9 +225,9 @@ export const buildingValuesShape = {
 };
 
 /**
- * One row of the register, with what the newest complete run found.
+ * One row of the register, with what the newest complete run found and where it stands.
  *
- * Units: as buildingValuesShape and resultColumnsShape; centre is longitude and latitude in degrees.
+ * Units: as buildingValuesShape, resultColumnsShape and standingColumnsShape; centre is longitude and latitude in degrees.
  * Valid: read only. Source: [own].
  */
 export const registerRowSchema = z.strictObject({
@@ -226,6 +236,7 @@ export const registerRowSchema = z.strictObject({
   centre: z.tuple([z.number(), z.number()]),
   ...buildingValuesShape,
   ...resultColumnsShape,
+  ...standingColumnsShape,
 });
 
 /**

@@ -61,6 +61,8 @@ const text = z.string().nullable();
  */
 export const resultColumnsShape = {
   stage: figure,
+  chainage: figure,
+  offset: figure,
   categoryLow: figure,
   category: figure,
   categoryHigh: figure,

@@ -14,13 +14,16 @@ export type ResultValueFacts = {
 
 /**
  * The figures that a run finds of a building, by their names in the record, in the order in which people
- * read them. Categories are numbers, 4 stands for 4 to 5; strain is the central one, settlement and slope
+ * read them. Chainage and offset are those of the footprint's middle beside the drawn line, offset positive to
+ * the left; categories are numbers, 4 stands for 4 to 5; strain is the central one, settlement and slope
  * are the largest over the bracket.
  *
  * Units: as ResultValueFacts. Valid: names of RunResult. Source: [own].
  */
 export const RESULT_VALUES = {
   stage: { label: 'Stage', kind: 'whole', scale: 1, digits: 0 },
+  chainage: { label: 'Chainage', kind: 'number', unit: 'm', scale: 1, digits: 0 },
+  offset: { label: 'Offset', kind: 'number', unit: 'm', scale: 1, digits: 1 },
   categoryLow: { label: 'Category low', kind: 'whole', scale: 1, digits: 0 },
   category: { label: 'Category central', kind: 'whole', scale: 1, digits: 0 },
   categoryHigh: { label: 'Category high', kind: 'whole', scale: 1, digits: 0 },

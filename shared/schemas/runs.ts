@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { alignmentDesignSchema } from './alignments.ts';
 import { rulesSchema } from './rules.ts';
 
+const planPoint = z.tuple([z.number(), z.number()]);
 /**
  * Where a run stands: planned into parts, worked out part by part, complete, or ended before that. A
  * cancelled or failed one keeps what it has and can go on.
@@ -153,40 +154,6 @@ export const runDetailSchema = runSchema.extend({
  */
 export type RunDetail = z.infer<typeof runDetailSchema>;
 
-/**
- * The figures of all buildings of a run that the map is coloured by, one list a figure in one order:
- * numbers of buildings, stage, category at low, central and high (−1 where there is none), and the largest
- * settlement at founding level over the bracket.
- *
- * Units: settlement m. Valid: lists of one length; complete runs only. Source: [own].
- */
-export const runMapSchema = z.strictObject({
-  ids: z.array(z.number()),
-  stage: z.array(z.number()),
-  low: z.array(z.number()),
-  central: z.array(z.number()),
-  high: z.array(z.number()),
-  settlement: z.array(z.number()),
-});
-
-/**
- * The figures of all buildings of a run that the map is coloured by.
- *
- * Units: as runMapSchema. Valid: parsed by it. Source: [own].
- */
-export type RunMap = z.infer<typeof runMapSchema>;
-
-const planPoint = z.tuple([z.number(), z.number()]);
-
-/**
- * The contours of a run: central settlement at the ground, in the scheme's grid.
- *
- * Units: m. Valid: as SettlementContour. Source: [own].
- */
-export const runContoursSchema = z.array(
-  z.strictObject({ level: z.number(), line: z.array(planPoint), isClosed: z.boolean() }),
-);
-
 const category = z.union([z.literal(0), z.literal(1), z.literal(2), z.literal(3), z.literal(4)]);
 
 /**
@@ -194,7 +161,8 @@ const category = z.union([z.literal(0), z.literal(1), z.literal(2), z.literal(3)
  * let the building go.
  *
  * Units: settlements m; slopes, strains and deflection ratios m/m; breakpoint a factor on the central
- * volume losses, breakpointVolumeLoss m/m; reserves are shares of the volume losses. Valid: settlement and slope are the largest over
+ * volume losses, breakpointVolumeLoss m/m; reserves are shares of the volume losses; chainage and offset m
+ * of the footprint's middle beside the drawn line. Valid: settlement and slope are the largest over
  * the bracket at founding level, wallSettlement and wallSlope the central ones along its walls.
  * Source: mair-taylor-burland-1996.
  */
@@ -226,6 +194,8 @@ export const runResultSchema = z.strictObject({
   assumed: z.array(z.string()),
   warnings: z.array(z.string()),
   fault: z.string().nullable(),
+  chainage: z.number().nullable(),
+  offset: z.number().nullable(),
 });
 
 /**
@@ -258,6 +228,10 @@ export const runFactsSchema = z.strictObject({
   listedGrade: z.string().nullable(),
   condition: z.string().nullable(),
   inspected: z.string().nullable(),
+  structureScore: z.number().nullable().default(null),
+  structureReason: z.string().nullable().default(null),
+  featuresScore: z.number().nullable().default(null),
+  featuresReason: z.string().nullable().default(null),
 });
 
 /**

@@ -11,6 +11,9 @@ export const WAITING_KINDS = [
   'invitations-not-accepted',
   'no-buildings',
   'no-background',
+  'decisions-to-check',
+  'decisions-returned',
+  'decisions-again',
 ] as const;
 
 /**

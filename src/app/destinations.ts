@@ -1,6 +1,13 @@
 import type { SchemeAnswer } from '../../shared/schemas/schemes.ts';
 import type { Destination } from '../components/layout/go-to.tsx';
-import { PATHS, planPath, registerPath, settingsPath } from '../config/paths.ts';
+import {
+  measuresPath,
+  PATHS,
+  planPath,
+  registerPath,
+  settingsPath,
+  visitsPath,
+} from '../config/paths.ts';
 import { can } from '../features/schemes/can.ts';
 import type { SignedInPerson } from '../features/session/person-context.ts';
 
@@ -25,6 +32,8 @@ export function schemeLinks(scheme: SchemeAnswer): readonly Link[] {
   ];
   return [
     ...(can(scheme, 'readRegister') ? ofRegister : []),
+    ...(can(scheme, 'readDecisions') ? [{ to: measuresPath(scheme.id), label: 'Measures' }] : []),
+    ...(can(scheme, 'recordVisits') ? [{ to: visitsPath(scheme.id), label: 'Visits' }] : []),
     { to: settingsPath(scheme.id), label: can(scheme, 'readRules') ? 'Settings' : 'Description' },
   ];
 }

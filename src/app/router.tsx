@@ -72,6 +72,15 @@ const settings: RouteObject[] = [
   },
 ];
 
+/** Both at once: from one of them the other may be opened where there is no network. */
+async function visitPages() {
+  const [{ VisitPage }, { VisitsPage }] = await Promise.all([
+    import('../features/visits/visit-page.tsx'),
+    import('../features/visits/visits-page.tsx'),
+  ]);
+  return { VisitPage, VisitsPage };
+}
+
 const ofScheme: RouteObject[] = [
   { index: true, Component: SchemeStart },
   {
@@ -82,6 +91,17 @@ const ofScheme: RouteObject[] = [
     path: 'buildings/:buildingId/sheet',
     lazy: async () => ({ Component: (await import('../features/sheet/sheet-page.tsx')).SheetPage }),
   },
+  {
+    path: 'buildings/:buildingId/visit',
+    lazy: async () => ({ Component: (await visitPages()).VisitPage }),
+  },
+  {
+    path: 'measures',
+    lazy: async () => ({
+      Component: (await import('../features/measures/measures-page.tsx')).MeasuresPage,
+    }),
+  },
+  { path: 'visits', lazy: async () => ({ Component: (await visitPages()).VisitsPage }) },
   {
     path: 'register/imports',
     lazy: async () => ({ Component: (await import('./routes/imports.tsx')).ImportsPage }),

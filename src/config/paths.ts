@@ -41,6 +41,21 @@ export function sheetPath(schemeId: string, buildingId: number, runId?: string):
   return runId === undefined ? path : `${path}?run=${runId}`;
 }
 
+/** What protects buildings. */
+export function measuresPath(schemeId: string): string {
+  return `${schemePath(schemeId)}/measures`;
+}
+
+/** Which buildings are to be visited, for the phone. */
+export function visitsPath(schemeId: string): string {
+  return `${schemePath(schemeId)}/visits`;
+}
+
+/** Recording a visit of one building. */
+export function visitPath(schemeId: string, buildingId: number): string {
+  return `${schemePath(schemeId)}/buildings/${buildingId}/visit`;
+}
+
 export function registerPath(schemeId: string): string {
   return `${schemePath(schemeId)}/register`;
 }

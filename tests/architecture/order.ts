@@ -15,6 +15,7 @@ const BEFORE: Readonly<Record<string, readonly string[]>> = {
   assessment: PARTS,
   monitoring: PARTS,
   schemas: PLANE,
+  presentation: [...PARTS, 'assessment', 'schemas'],
   checks: [...PARTS, 'assessment', 'monitoring', 'schemas'],
 };
 

@@ -41,6 +41,10 @@ function paramsOf(place: Place | undefined): Params {
     alignmentId: place?.alignment.id ?? UNKNOWN_ID,
     runId: place?.runId ?? UNKNOWN_ID,
     importId: place?.importId ?? UNKNOWN_ID,
+    decisionId: UNKNOWN_ID,
+    measureId: UNKNOWN_ID,
+    visitId: place?.visitId ?? UNKNOWN_ID,
+    photographId: UNKNOWN_ID,
     row: 1,
     field: 'use',
   };
@@ -54,9 +58,11 @@ function addressOf({ path }: Route, params: Params): string {
   });
 }
 
-/** Kept views are of one person each, and no row of an import here is mended: they answer like none. */
+/** Kept views are of one person each; nothing is mended, decided, protected or photographed here. */
 function taken({ path }: Route): readonly number[] {
-  return /:(viewId|row)\b/.test(path) ? [...TAKEN, 404] : TAKEN;
+  return /:(viewId|row|photographId|decisionId|measureId)\b|\/decisions$/.test(path)
+    ? [...TAKEN, 404]
+    : TAKEN;
 }
 
 /** Takes a step with an empty form, which changes nothing, and tells what came back. */

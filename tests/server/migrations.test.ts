@@ -139,6 +139,9 @@ describe.each([
   ['run_buildings', `version = 7`],
   ['run_contours', `contours = '[1]'`],
   ['run_results', `stage = 3`],
+  ['visits', `notes = 'other'`],
+  ['visit_photographs', `caption = 'other'`],
+  ['visit_photograph_files', `bytes = 7`],
 ])('rows of %s', (table, change) => {
   beforeAll(async () => {
     await owner.query(`
@@ -174,6 +177,17 @@ describe.each([
       ), result as (
         insert into run_results (run_id, building_id, stage, settlement, slope, held_by, assumed, warnings)
         select run_id, building_id, 1, 0, 0, '{}', '{}', '{}' from member
+      ), visit as (
+        insert into visits (id, scheme_id, building_id, visited_at, visited_by, part, notes, defects,
+          fingerprint)
+        select gen_random_uuid(), scheme.id, building.id, now(), person.id, 'outside', '', '[]', 'a'
+        from scheme, building, person returning id
+      ), photograph as (
+        insert into visit_photographs (id, visit_id, number, caption, keeps_place)
+        select gen_random_uuid(), id, 0, '', false from visit returning id
+      ), file as (
+        insert into visit_photograph_files (photograph_id, sha256, type, bytes)
+        select id, 'a', 'image/png', 1 from photograph
       )
       insert into scheme_rules (scheme_id, version, rules, created_by)
       select scheme.id, 1, '[]', person.id from scheme, person`);
@@ -209,5 +223,8 @@ test('tables of other migrations are not forgotten here', async () => {
     'run_results',
     'runs',
     'scheme_rules',
+    'visit_photograph_files',
+    'visit_photographs',
+    'visits',
   ]);
 });

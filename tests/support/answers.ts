@@ -98,6 +98,8 @@ export function aCrsAnswer() {
 
 const NO_RESULTS = {
   stage: null,
+  ...{ chainage: null, offset: null },
+  ...{ state: null, decision: null, assignedTo: null },
   categoryLow: null,
   category: null,
   categoryHigh: null,
@@ -130,6 +132,7 @@ function aKnownBuilding() {
     listedGrade: 'not listed',
     condition: 'good',
     inspected: 'outside',
+    ...{ structureScore: null, structureReason: null, featuresScore: null, featuresReason: null },
     area: 84.5,
     groundLevelFrom: 'file',
     assumed: [],

@@ -22,6 +22,8 @@ export function someFacts(overrides: Partial<RegisterFacts> = {}): RegisterFacts
     foundation: 'strip',
     listedGrade: 'not listed',
     condition: 'fair',
+    structureScore: null,
+    featuresScore: null,
     ...overrides,
   };
 }

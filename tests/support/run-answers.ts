@@ -1,4 +1,6 @@
-import type { RunAnswer, RunDetail, RunMap } from '../../shared/schemas/runs.ts';
+import type { Funnel } from '../../shared/schemas/decision-answers.ts';
+import type { RunAnswer, RunDetail } from '../../shared/schemas/runs.ts';
+import type { RunMap } from '../../shared/schemas/run-map.ts';
 import { defaultRules } from '../../server/commands/default-rules.ts';
 import { anId } from './answers.ts';
 import { aDesign } from './designs.ts';
@@ -16,7 +18,7 @@ export function aRunAnswer(overrides: Partial<RunAnswer> = {}): RunAnswer {
     startedAt: '2026-12-01T14:02:00.000Z',
     startedBy: 'Ada',
     endedAt: '2026-12-01T14:03:00.000Z',
-    methodVersion: '1.0.0',
+    methodVersion: '1.1.0',
     rulesVersion: 1,
     registerVersion: 1,
     since: { register: false, option: false, rules: false },
@@ -54,5 +56,28 @@ export function aRunMap(): RunMap {
     central: [-1, 0, 2, 3],
     high: [-1, 1, 2, 4],
     settlement: [0.0004, 0.004, 0.01, 0.06],
+  };
+}
+
+const NONE_IN_STATES = {
+  ...{ 'waiting for check': 0, returned: 0, 'to look at again': 0, decided: 0 },
+} as const;
+
+/** How many buildings of a run stand where on the assessors' list. */
+export function aFunnel(runId: string): Funnel {
+  return {
+    runId,
+    buildings: 200,
+    stages: [
+      {
+        buildings: 195,
+        standings: { ...NONE_IN_STATES, 'to decide': 190, 'waiting for check': 5 },
+      },
+      { buildings: 3, standings: { ...NONE_IN_STATES, 'to decide': 3 } },
+      { buildings: 2, standings: { ...NONE_IN_STATES, 'to decide': 2 } },
+    ],
+    heldBy: [{ name: 'listed', count: 2, texts: ['listed'] }],
+    kinds: [],
+    mine: 4,
   };
 }

@@ -47,6 +47,7 @@ export function testApp({
   beforeAll(async () => {
     const copy = await createTestDatabase();
     const uploads = await mkdtemp(path.join(tmpdir(), 'groundsill-uploads-'));
+    const photographs = await mkdtemp(path.join(tmpdir(), 'groundsill-photographs-'));
     const env = readEnv({
       NODE_ENV: 'test',
       DATABASE_URL: copy.serverUrl,
@@ -55,6 +56,7 @@ export function testApp({
       DEMO: 'true',
       LOG_LEVEL: 'silent',
       UPLOADS_FOLDER: uploads,
+      PHOTOGRAPHS_FOLDER: photographs,
       ...overrides,
     });
     const database = connectDatabase(env.DATABASE_URL);
@@ -85,6 +87,7 @@ export function testApp({
       await pool.end();
       await copy.drop();
       await rm(uploads, { recursive: true });
+      await rm(photographs, { recursive: true });
     };
   });
 

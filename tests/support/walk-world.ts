@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto';
 import type TestAgent from 'supertest/lib/agent.js';
 import { ROLES } from '../../shared/schemas/roles.ts';
 import { defaultRules } from '../../server/commands/default-rules.ts';
@@ -10,6 +11,7 @@ import { RegisterChange } from '../../server/models/register-change.ts';
 import { RegisterImport } from '../../server/models/register-import.ts';
 import { SchemeRules } from '../../server/models/scheme-rules.ts';
 import type { Scheme } from '../../server/models/scheme.ts';
+import { Visit } from '../../server/models/visit.ts';
 import { aBuilding, aMember, anAdministrator, anAlignment, aPerson, aScheme } from './factories.ts';
 import { aRun } from './runs.ts';
 import { signIn, visitor } from './sign-in.ts';
@@ -27,6 +29,7 @@ export type Place = {
   readonly alignment: Alignment;
   readonly runId: string;
   readonly change: RegisterChange;
+  readonly visitId: string;
   readonly mark: string;
 };
 
@@ -50,9 +53,14 @@ async function aPlace(app: TestApp, mark: string, author: Person): Promise<Place
     ...{ schemeId: scheme.id, personId: null, state: 'asking' },
     ...{ fileName: `${mark}.geojson`, options: NO_OPTIONS },
   });
+  const visit = await Visit.create({
+    ...{ id: randomUUID(), schemeId: scheme.id, buildingId: building.id, visitedAt: new Date() },
+    ...{ visitedBy: author.id, part: 'outside', condition: null, construction: null },
+    ...{ notes: `${mark} notes`, defects: [], changeId: null, fingerprint: mark },
+  });
   const alignment = await anAlignment(scheme, { name: `${mark} option` });
   const { id: runId } = await aRun(app, scheme, alignment);
-  return { scheme, building, importId: sent.id, alignment, runId, change, mark };
+  return { scheme, building, importId: sent.id, alignment, runId, change, visitId: visit.id, mark };
 }
 
 /** Two places, everybody who walks, and how to enter as each of them. */

@@ -9,7 +9,7 @@ import { Select } from '../../components/ui/select.tsx';
 import { auditQuery } from '../../features/audit/api/list-audit.ts';
 import { AuditTable } from '../../features/audit/components/audit-table.tsx';
 import { schemesQuery } from '../../features/schemes/api/list-schemes.ts';
-import { formatCount } from '../../lib/format-number.ts';
+import { formatCount } from '../../../shared/presentation/format-number.ts';
 
 type SchemeFilterProps = {
   readonly value: string;

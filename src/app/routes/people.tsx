@@ -6,7 +6,7 @@ import { QueryError } from '../../components/ui/query-error.tsx';
 import { peopleQuery } from '../../features/people/api/list-people.ts';
 import { InviteForm } from '../../features/people/components/invite-form.tsx';
 import { PeopleTable } from '../../features/people/components/people-table.tsx';
-import { formatCount } from '../../lib/format-number.ts';
+import { formatCount } from '../../../shared/presentation/format-number.ts';
 
 function inWords(count: number, waiting: number): string {
   const all = `${formatCount(count)} with an account`;

@@ -1,4 +1,4 @@
-import type { Scale } from './linear-scale.ts';
+import type { Scale } from '../../../shared/presentation/linear-scale.ts';
 
 type AxisProps = {
   readonly scale: Scale;

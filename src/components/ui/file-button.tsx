@@ -5,12 +5,14 @@ type FileButtonProps = {
   /** What the button is called where several stand on a page. */
   readonly label: string;
   readonly accept: string;
+  /** On a phone, opens the camera that looks away from the person. */
+  readonly camera?: boolean;
   readonly onFile: (file: File) => void;
   readonly children: ReactNode;
 };
 
 /** Asks for a file. */
-export function FileButton({ label, accept, onFile, children }: FileButtonProps) {
+export function FileButton({ label, accept, camera = false, onFile, children }: FileButtonProps) {
   const input = useRef<HTMLInputElement>(null);
   return (
     <>
@@ -18,6 +20,7 @@ export function FileButton({ label, accept, onFile, children }: FileButtonProps)
         ref={input}
         type="file"
         accept={accept}
+        {...(camera && { capture: 'environment' as const })}
         className="hidden"
         aria-label={label}
         onChange={({ target }) => {

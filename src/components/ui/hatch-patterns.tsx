@@ -1,5 +1,6 @@
 import { CATEGORIES, type Category } from '../../../shared/damage/categories.ts';
-import { DAMAGE, HATCH_TILE } from '../../theme/damage.ts';
+import { DAMAGE, HATCH_TILE } from '../../../shared/presentation/damage-style.ts';
+import { hatchPath } from '../../theme/damage.ts';
 
 /** What a shape in a chart is filled with; `prefix` is the one that its HatchPatterns has. */
 export function hatchFill(prefix: string, category: Category): string {
@@ -26,7 +27,7 @@ function HatchPattern({
     >
       <rect width={HATCH_TILE} height={HATCH_TILE} fill={fill} />
       {hatch !== null && (
-        <path d={hatch.path} fill="none" stroke={hatch.colour} strokeWidth={hatch.width} />
+        <path d={hatchPath(category)} fill="none" stroke={hatch.colour} strokeWidth={hatch.width} />
       )}
     </pattern>
   );

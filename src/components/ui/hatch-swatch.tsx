@@ -1,6 +1,7 @@
 import type { Category } from '../../../shared/damage/categories.ts';
 import { classNames } from '../../lib/class-names.ts';
-import { DAMAGE, hatchTileUrl } from '../../theme/damage.ts';
+import { DAMAGE } from '../../../shared/presentation/damage-style.ts';
+import { hatchTileUrl } from '../../theme/damage.ts';
 
 /** A patch of a damage category; a number stands beside it, always. */
 export function HatchSwatch({

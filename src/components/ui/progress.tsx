@@ -1,5 +1,5 @@
 import { useId } from 'react';
-import { formatCount } from '../../lib/format-number.ts';
+import { formatCount } from '../../../shared/presentation/format-number.ts';
 import { Button } from './button.tsx';
 
 type ProgressProps = {

@@ -1,7 +1,13 @@
 import { planDistance } from '../../../shared/geometry/plan-distance.ts';
 import type { AlignmentDesign } from '../../../shared/schemas/alignments.ts';
 import type { ValueChange } from '../../lib/changes-between.ts';
-import { boresWords, figure, laterWords, percent, rangeWords } from './design-words.ts';
+import {
+  boresWords,
+  figure,
+  laterWords,
+  percent,
+  rangeWords,
+} from '../../../shared/presentation/design-words.ts';
 
 type Option = { readonly name: string; readonly design: AlignmentDesign };
 

@@ -1,6 +1,6 @@
 import type { OpenedWall } from '../../../shared/assessment/open-wall.ts';
 import { millimetresFromMetres } from '../../../shared/units/millimetres-from-metres.ts';
-import { percentWords } from './bracket-words.ts';
+import { percentWords } from '../../../shared/presentation/bracket-words.ts';
 
 /** What the drawing of a section shows, for who cannot see it. */
 export function sectionWords({ result, section }: Pick<OpenedWall, 'result' | 'section'>): string {

@@ -10,7 +10,7 @@ import {
 } from '../../../shared/schemas/building-fields.ts';
 import { draftSchema } from '../../lib/draft-schema.ts';
 import { numberOf } from '../../lib/number-of.ts';
-import type { BuildingValues } from './shown-value.ts';
+import type { BuildingValues } from '../../../shared/presentation/shown-value.ts';
 
 /** Values as they stand in fields that are written in; empty is not known. */
 export type DraftValues = Readonly<Record<BuildingField, string>>;

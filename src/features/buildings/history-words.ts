@@ -2,7 +2,7 @@ import { BUILDING_FIELDS } from '../../../shared/schemas/building-fields.ts';
 import type { BuildingHistory } from '../../../shared/schemas/register-changes.ts';
 import type { ValueChange } from '../../lib/changes-between.ts';
 import { EDITED_NAMES } from './building-draft.ts';
-import { factsOf, formatFigure } from './field-words.ts';
+import { factsOf, formatFigure } from '../../../shared/presentation/field-words.ts';
 
 type Entry = BuildingHistory[number];
 
@@ -16,6 +16,7 @@ const DONE: Readonly<Record<Entry['kind'], string>> = {
   join: 'joined',
   remove: 'removed',
   ground: 'ground level sampled',
+  visit: 'found on a visit',
   undo: 'undone',
   redo: 'done again',
 };

@@ -1,5 +1,5 @@
 import { footprintArea } from '../../../shared/building/footprint-area.ts';
-import { formatFigure } from '../buildings/field-words.ts';
+import { formatFigure } from '../../../shared/presentation/field-words.ts';
 import type { Parts } from './drafts/draft.ts';
 
 /** A length between corners, to the centimetre. */

@@ -3,7 +3,7 @@ import { changeBuilding } from '../buildings/api/change-building.ts';
 import { drawBuilding } from '../buildings/api/draw-building.ts';
 import { joinBuildings } from '../buildings/api/join-buildings.ts';
 import { splitBuilding } from '../buildings/api/split-building.ts';
-import { formatFigure } from '../buildings/field-words.ts';
+import { formatFigure } from '../../../shared/presentation/field-words.ts';
 import { footprintOf, lineOf, type Draft } from './drafts/draft.ts';
 import { splitLine } from './drafts/split-line.ts';
 

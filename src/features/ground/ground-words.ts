@@ -1,5 +1,5 @@
 import type { GroundAnswer } from '../../../shared/schemas/ground.ts';
-import { formatCount } from '../../lib/format-number.ts';
+import { formatCount } from '../../../shared/presentation/format-number.ts';
 
 type Ground = NonNullable<GroundAnswer['ground']>;
 

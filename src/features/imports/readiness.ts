@@ -1,5 +1,5 @@
 import type { ImportAnswer } from '../../../shared/schemas/imports.ts';
-import { formatCount } from '../../lib/format-number.ts';
+import { formatCount } from '../../../shared/presentation/format-number.ts';
 import { countToWrite } from './outcomes.ts';
 
 type Asked = Pick<ImportAnswer, 'kind' | 'missing' | 'counts'>;

@@ -1,6 +1,6 @@
 import type { ImportOptions, ImportRow } from '../../../shared/schemas/imports.ts';
-import { formatCount } from '../../lib/format-number.ts';
-import { formatFigure } from '../buildings/field-words.ts';
+import { formatCount } from '../../../shared/presentation/format-number.ts';
+import { formatFigure } from '../../../shared/presentation/field-words.ts';
 import { fieldWords } from './field-words.ts';
 
 type RowChange = ImportRow['changes'][number];

@@ -4,8 +4,8 @@ import type {
   BuildingValue,
 } from '../../../shared/schemas/building-fields.ts';
 import { BUILDING_FIELD_NAMES } from '../../../shared/schemas/building-fields.ts';
-import { formatCount } from '../../lib/format-number.ts';
-import { factsOf, formatFigure, inSentence } from '../buildings/field-words.ts';
+import { formatCount } from '../../../shared/presentation/format-number.ts';
+import { factsOf, formatFigure, inSentence } from '../../../shared/presentation/field-words.ts';
 
 /** One value to be set, and how many buildings have what now. */
 export type BulkLine = {

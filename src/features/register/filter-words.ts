@@ -1,6 +1,6 @@
 import type { RegisterField, RegisterFilter } from '../../../shared/schemas/register.ts';
-import { formatCount } from '../../lib/format-number.ts';
-import { factsOf } from '../buildings/field-words.ts';
+import { formatCount } from '../../../shared/presentation/format-number.ts';
+import { factsOf } from '../../../shared/presentation/field-words.ts';
 import { choiceWords } from './choice-words.ts';
 import {
   columnFilter,

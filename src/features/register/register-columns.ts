@@ -12,9 +12,8 @@ export const USUAL_RESULTS: readonly RegisterColumn[] = [
   'strain',
   'reserve',
   'heldBy',
-  'storeys',
-  'foundation',
-  'listedGrade',
+  'state',
+  'assignedTo',
 ];
 
 /** What a desk shows before anybody chooses and before there is a run. */
@@ -32,7 +31,7 @@ export const USUAL_COLUMNS: readonly RegisterColumn[] = [
 ];
 
 /** What a phone shows before anybody chooses, with and without a run. */
-export const FEW_RESULTS: readonly RegisterColumn[] = ['stage', 'settlement', 'category'];
+export const FEW_RESULTS: readonly RegisterColumn[] = ['stage', 'category', 'state'];
 export const FEW_COLUMNS: readonly RegisterColumn[] = ['storeys', 'eavesHeight', 'condition'];
 
 /** Some columns in the order of the register. */
@@ -45,6 +44,8 @@ export const WIDTHS: Readonly<Record<RegisterColumn, number>> = {
   reference: 84,
   area: 84,
   stage: 56,
+  chainage: 84,
+  offset: 68,
   categoryLow: 80,
   category: 80,
   categoryHigh: 80,
@@ -55,6 +56,9 @@ export const WIDTHS: Readonly<Record<RegisterColumn, number>> = {
   reserve: 72,
   settled: 84,
   heldBy: 150,
+  state: 136,
+  decision: 140,
+  assignedTo: 120,
   name: 150,
   address: 170,
   use: 120,
@@ -69,6 +73,10 @@ export const WIDTHS: Readonly<Record<RegisterColumn, number>> = {
   listedGrade: 92,
   condition: 86,
   inspected: 100,
+  structureScore: 76,
+  structureReason: 170,
+  featuresScore: 76,
+  featuresReason: 170,
 };
 
 /** A letter of a reference, and the most that references may take of a desk and of a phone. */
@@ -95,6 +103,10 @@ export const SHORT_HEADINGS: Readonly<Partial<Record<RegisterColumn, string>>> =
   groundLevel: 'Ground',
   foundingLevel: 'Founding',
   poisson: 'Poisson',
+  structureScore: 'Structure',
+  structureReason: 'Structure because',
+  featuresScore: 'Features',
+  featuresReason: 'Features because',
 };
 
 /** What stands under a heading where the column has no unit. */
@@ -102,4 +114,6 @@ export const UNDER_HEADINGS: Readonly<Partial<Record<RegisterColumn, string>>> =
   categoryLow: 'low',
   category: 'central',
   categoryHigh: 'high',
+  structureScore: 'score',
+  featuresScore: 'score',
 };

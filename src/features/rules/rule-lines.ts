@@ -2,7 +2,7 @@ import type { RuleSet } from '../../../shared/schemas/rules.ts';
 import { formatShortDay } from '../../lib/format-date.ts';
 import type { ValueChange } from '../../lib/changes-between.ts';
 import { conditionInWords, RULES, ruleValue } from './rule-words.ts';
-import { sourceWords } from './source-words.ts';
+import { sourceWords } from '../../../shared/presentation/source-words.ts';
 
 /** A rule or hold as a line of a table. */
 export type RuleLine = {

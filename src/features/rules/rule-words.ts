@@ -1,6 +1,6 @@
 import { CATEGORIES } from '../../../shared/damage/categories.ts';
 import type { RuleSet } from '../../../shared/schemas/rules.ts';
-import { formatCount } from '../../lib/format-number.ts';
+import { formatCount } from '../../../shared/presentation/format-number.ts';
 import { fromMetres, fromSlope } from './display-units.ts';
 
 export type RuleName = Exclude<keyof RuleSet, 'holds'>;

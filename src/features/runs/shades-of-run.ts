@@ -1,5 +1,5 @@
 import { CONTOUR_LEVELS } from '../../../shared/ground/settlement-contours.ts';
-import type { RunMap } from '../../../shared/schemas/runs.ts';
+import type { RunMap } from '../../../shared/schemas/run-map.ts';
 import { FIRST_SHADE } from '../map/shades.ts';
 
 /** What buildings are coloured by. */

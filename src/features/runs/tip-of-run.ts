@@ -1,5 +1,5 @@
 import { CATEGORIES } from '../../../shared/damage/categories.ts';
-import type { RunMap } from '../../../shared/schemas/runs.ts';
+import type { RunMap } from '../../../shared/schemas/run-map.ts';
 
 function label(category: number | undefined): string {
   return CATEGORIES[category ?? 0]?.label ?? '';

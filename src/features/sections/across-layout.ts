@@ -1,7 +1,7 @@
 import { longSection } from '../../../shared/assessment/long-section.ts';
 import type { AlignmentDesign } from '../../../shared/schemas/alignments.ts';
-import { linearScale, type Scale } from '../../components/chart/linear-scale.ts';
-import { trueScale } from '../../components/chart/true-scale.ts';
+import { linearScale, type Scale } from '../../../shared/presentation/linear-scale.ts';
+import { trueScale } from '../../../shared/presentation/true-scale.ts';
 import { reachOfDesign } from './reach-of-design.ts';
 
 /** Room round a drawing for its ticks, in pixels. */

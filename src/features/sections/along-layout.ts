@@ -1,5 +1,5 @@
 import type { LongSectionRow } from '../../../shared/assessment/long-section.ts';
-import { linearScale, type Scale } from '../../components/chart/linear-scale.ts';
+import { linearScale, type Scale } from '../../../shared/presentation/linear-scale.ts';
 
 const ROOM = { left: 46, right: 20, top: 16, bottom: 22 };
 /** Between the levels and the settlement below them, and how much of the height the levels take. */

@@ -1,7 +1,7 @@
 import type { TroughOfSection } from '../../../shared/assessment/trough-of-section.ts';
 import type { SettlementOnLine } from '../../../shared/assessment/settlement-along.ts';
 import type { Range } from '../../../shared/numerics/range.ts';
-import { formatCount } from '../../lib/format-number.ts';
+import { formatCount } from '../../../shared/presentation/format-number.ts';
 import { chainageWords } from '../alignments/chainage-words.ts';
 
 const MILLIMETRES = 1000;

@@ -1,5 +1,5 @@
 import { CATEGORIES, type Category } from '../../../shared/damage/categories.ts';
-import { categoryLabel } from '../assessment/bracket-words.ts';
+import { categoryLabel } from '../../../shared/presentation/bracket-words.ts';
 import { FIRST_SHADE } from '../map/shades.ts';
 import type { End, Shading } from '../runs/shades-of-run.ts';
 import type { CutBuilding } from './cut-buildings.ts';

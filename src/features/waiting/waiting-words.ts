@@ -7,6 +7,9 @@ const BUTTONS: Readonly<Record<WaitingItem['kind'], string>> = {
   'invitations-not-accepted': 'See them',
   'no-buildings': 'Open the plan',
   'no-background': 'Bring it in',
+  'decisions-to-check': 'Check them',
+  'decisions-returned': 'See them',
+  'decisions-again': 'See them',
 };
 
 /** What the button of something that waits says. */
@@ -19,6 +22,9 @@ const THINGS: Readonly<Record<WaitingItem['kind'], readonly [one: string, severa
   'invitations-not-accepted': ['invitation still out', 'invitations still out'],
   'no-buildings': ['register to begin', 'registers to begin'],
   'no-background': ['background map to bring in', 'background maps to bring in'],
+  'decisions-to-check': ['decision to check', 'decisions to check'],
+  'decisions-returned': ['decision returned', 'decisions returned'],
+  'decisions-again': ['decision to look at again', 'decisions to look at again'],
 };
 
 /** What there are so many of. */

@@ -2,21 +2,9 @@
 import { describe, expect, it } from 'vitest';
 import { changesBetween } from '../../../src/lib/changes-between.ts';
 import { formatDaySince, formatMoment, formatWeekday } from '../../../src/lib/format-date.ts';
-import { formatCount } from '../../../src/lib/format-number.ts';
 import { countInWords } from '../../../src/lib/number-words.ts';
 
 const NOW = new Date(2026, 4, 21, 9, 30);
-
-describe('formatCount', () => {
-  it.each([
-    [0, '0'],
-    [2388, '2\u2009388'],
-    [1234567.25, '1\u2009234\u2009567.25'],
-    [-24.1, '\u221224.1'],
-  ])('writes %d as people read it', (value, words) => {
-    expect(formatCount(value)).toBe(words);
-  });
-});
 
 describe('countInWords', () => {
   it('has words for small counts', () => {

@@ -1,10 +1,6 @@
 import { assessCaseSchema, type AssessCase } from '../../../shared/schemas/assess-case.ts';
-import {
-  runBuildingSchema,
-  runMapSchema,
-  type RunBuilding,
-  type RunMap,
-} from '../../../shared/schemas/runs.ts';
+import { runBuildingSchema, type RunBuilding } from '../../../shared/schemas/runs.ts';
+import { runMapSchema, type RunMap } from '../../../shared/schemas/run-map.ts';
 import { answered } from './runs.ts';
 import type { Visitor } from './visitor.ts';
 

@@ -9,7 +9,7 @@ const PASSWORD = 'a lantern on the mole';
 
 for (const [role, screens] of [
   ['Designer', ['Plan', 'Register', 'Settings', 'Method']],
-  ['Assessor', ['Plan', 'Register', 'Settings', 'Method']],
+  ['Assessor', ['Plan', 'Register', 'Visits', 'Settings', 'Method']],
   ['Witness', ['Plan', 'Register', 'Settings', 'Method']],
   ['Owner', ['Description', 'Method']],
 ] as const) {

@@ -189,7 +189,7 @@ describe('a run as a workbook', () => {
       Scheme: 'Dögger crossing',
       Run: 1,
       Option: `${option.name}, version 1`,
-      'Method version': '1.0.0',
+      'Method version': '1.1.0',
       'Rules version': 1,
       'Register version': run.registerVersion,
       Buildings: 24,

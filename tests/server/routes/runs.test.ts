@@ -6,13 +6,12 @@ import { assessmentRules, runInputs } from '../../../shared/assessment/run-input
 import { FIELD } from '../../../shared/ground/kernel.ts';
 import {
   runBuildingSchema,
-  runContoursSchema,
   runDetailSchema,
-  runMapSchema,
   runProgressSchema,
   runSchema,
   runsSchema,
 } from '../../../shared/schemas/runs.ts';
+import { runContoursSchema, runMapSchema } from '../../../shared/schemas/run-map.ts';
 import { defaultRules } from '../../../server/commands/default-rules.ts';
 import { AuditEntry } from '../../../server/models/audit-entry.ts';
 import { Building } from '../../../server/models/building.ts';
@@ -55,7 +54,7 @@ describe('a run', () => {
     expect(answer.status).toBe(201);
     const started = runSchema.parse(answer.body);
     expect(started).toMatchObject({
-      ...{ number: 1, startedBy: person.name, buildings: 23, methodVersion: '1.0.0' },
+      ...{ number: 1, startedBy: person.name, buildings: 23, methodVersion: '1.1.0' },
       option: { id: option.id, name: option.name, version: 1 },
       since: { register: false, option: false, rules: false },
     });

@@ -28,6 +28,7 @@ function inputs(volumeLoss: Partial<(typeof RANGES)['volumeLoss']> = {}): RunInp
   return {
     ...{ model: aModel([drive]), rules: someRules() },
     ...{ limits: DEFAULT_SCREENING_LIMITS, holds: DEFAULT_HOLDS },
+    line: null,
   };
 }
 
@@ -48,7 +49,7 @@ describe('the outcome of a building', () => {
     const { settlementMax, slopeMax } = screening;
     expect(screening.passes).toBe(true);
     expect(outcomeOfBuilding(run, building, NO_ROWS)).toEqual({
-      ...{ stage: 1, heldBy: [], strain: null, fault: null, assumed: [] },
+      ...{ stage: 1, heldBy: [], strain: null, fault: null, assumed: [], place: null },
       ...{ settlement: settlementMax, slope: slopeMax, warnings: screening.warnings },
     });
   });

@@ -1,6 +1,6 @@
 import { useRef, type ReactNode } from 'react';
 import { classNames } from '../../../lib/class-names.ts';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import type { Column } from './column.ts';
 import type { Ordering } from './ordering.ts';
 import { MoreAtSides } from './more-at-sides.tsx';

@@ -8,7 +8,7 @@ import { CornerTable } from '../../drawing/components/corner-table.tsx';
 import { FigureLine } from '../../drawing/components/figure-line.tsx';
 import { PanelFrame } from '../../drawing/components/panel-frame.tsx';
 import { addCorner } from '../../drawing/drafts/edit-corners.ts';
-import { figure } from '../design-words.ts';
+import { figure } from '../../../../shared/presentation/design-words.ts';
 import { hasFirstValues } from '../drafts/option-draft.ts';
 import { finishLine, goOnWithLine, LEAST_POINTS } from '../drafts/line-draft.ts';
 import type { OptionEditor } from '../hooks/use-option-editor.ts';

@@ -14,7 +14,7 @@ import {
 import { percentFromRatio } from '../../../../shared/units/percent-from-ratio.ts';
 import { classNames } from '../../../lib/class-names.ts';
 import { hatchTileUrl } from '../../../theme/damage.ts';
-import { percentWords } from '../bracket-words.ts';
+import { percentWords } from '../../../../shared/presentation/bracket-words.ts';
 
 type BracketTableProps = {
   readonly bracket: Bracket;

@@ -5,10 +5,10 @@ import {
 import type { Range } from '../../../../shared/numerics/range.ts';
 import { percentFromRatio } from '../../../../shared/units/percent-from-ratio.ts';
 import { BottomAxis } from '../../../components/chart/axis.tsx';
-import { linearScale, type Scale } from '../../../components/chart/linear-scale.ts';
-import { niceTicks } from '../../../components/chart/nice-ticks.ts';
+import { linearScale, type Scale } from '../../../../shared/presentation/linear-scale.ts';
+import { niceTicks } from '../../../../shared/presentation/nice-ticks.ts';
 import { useWidth } from '../../../hooks/use-width.ts';
-import { breakpointWords, percentWords } from '../bracket-words.ts';
+import { breakpointWords, percentWords } from '../../../../shared/presentation/bracket-words.ts';
 
 type BreakpointBarProps = {
   /** Undefined where none is reached. */

@@ -5,14 +5,14 @@ import type { StrainedZone } from '../../../../shared/building/strained-zone.ts'
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { hatchFill, HatchPatterns } from '../../../components/ui/hatch-patterns.tsx';
 import { useWidth } from '../../../hooks/use-width.ts';
-import { percentWords } from '../bracket-words.ts';
+import { percentWords } from '../../../../shared/presentation/bracket-words.ts';
 import {
   INTERACTION,
   interactionFrame,
   numberPlaces,
   pointsBeside,
   type InteractionFrame,
-} from '../interaction-frame.ts';
+} from '../../../../shared/presentation/interaction-frame.ts';
 import { Axes, CategoryNumber, Regions } from './interaction-parts.tsx';
 
 type Opened = Pick<OpenedWall, 'result' | 'points' | 'wall'>;

@@ -4,10 +4,13 @@ import type { StrainedZone } from '../../../../shared/building/strained-zone.ts'
 import { CATEGORIES, type Category } from '../../../../shared/damage/categories.ts';
 import { percentFromRatio } from '../../../../shared/units/percent-from-ratio.ts';
 import { BottomAxis, LeftAxis } from '../../../components/chart/axis.tsx';
-import { niceTicks } from '../../../components/chart/nice-ticks.ts';
+import { niceTicks } from '../../../../shared/presentation/nice-ticks.ts';
 import { pathBetween, pathOf, type Place } from '../../../components/chart/path-of.ts';
 import { hatchFill } from '../../../components/ui/hatch-patterns.tsx';
-import { INTERACTION, type InteractionFrame } from '../interaction-frame.ts';
+import {
+  INTERACTION,
+  type InteractionFrame,
+} from '../../../../shared/presentation/interaction-frame.ts';
 
 type RegionsProps = {
   readonly zone: StrainedZone;

@@ -1,8 +1,8 @@
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import type { Range } from '../../../../shared/numerics/range.ts';
-import { linearScale } from '../../../components/chart/linear-scale.ts';
+import { linearScale } from '../../../../shared/presentation/linear-scale.ts';
 import { useWidth } from '../../../hooks/use-width.ts';
-import { percentWords } from '../bracket-words.ts';
+import { percentWords } from '../../../../shared/presentation/bracket-words.ts';
 
 type RangeBarProps = {
   readonly strain: Range;

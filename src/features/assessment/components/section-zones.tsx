@@ -1,8 +1,12 @@
 import type { AssessedZone } from '../../../../shared/assessment/assess-wall.ts';
 import type { WallSection } from '../../../../shared/assessment/section-of-wall.ts';
 import { millimetresFromMetres } from '../../../../shared/units/millimetres-from-metres.ts';
-import { percentWords } from '../bracket-words.ts';
-import { SECTION, STRIP_TOP, type SectionFrame } from '../section-frame.ts';
+import { percentWords } from '../../../../shared/presentation/bracket-words.ts';
+import {
+  SECTION,
+  STRIP_TOP,
+  type SectionFrame,
+} from '../../../../shared/presentation/section-frame.ts';
 import { zoneFill } from './zone-patterns.tsx';
 
 type ZoneProps = {

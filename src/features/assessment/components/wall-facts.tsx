@@ -1,7 +1,7 @@
 import type { OpenedWall } from '../../../../shared/assessment/open-wall.ts';
 import { millimetresFromMetres } from '../../../../shared/units/millimetres-from-metres.ts';
 import { Facts } from '../../../components/ui/facts.tsx';
-import { slopeWords } from '../../../lib/slope-words.ts';
+import { slopeWords } from '../../../../shared/presentation/slope-words.ts';
 import { WorkingPopover } from './working-popover.tsx';
 
 type Opened = Pick<OpenedWall, 'result' | 'working'>;

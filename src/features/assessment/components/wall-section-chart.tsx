@@ -11,7 +11,7 @@ import {
   SECTION_HEIGHT,
   sectionFrame,
   type SectionFrame,
-} from '../section-frame.ts';
+} from '../../../../shared/presentation/section-frame.ts';
 import { sectionWords } from '../section-words.ts';
 import { ZoneChord, ZoneGround, ZoneStrain } from './section-zones.tsx';
 import { ZonePatterns } from './zone-patterns.tsx';

@@ -1,8 +1,8 @@
 import type { WorkingLine } from '../../../../shared/working.ts';
 import { Formula, FiguresPutIn, SymbolName } from '../formula/formula.tsx';
-import { sourceInFull } from '../../rules/source-words.ts';
-import { sourceNote } from '../source-note.ts';
-import { peoplesFigure, resultWords } from '../working-words.ts';
+import { sourceInFull } from '../../../../shared/presentation/source-words.ts';
+import { sourceNote } from '../../../../shared/presentation/source-note.ts';
+import { peoplesFigure, resultWords } from '../../../../shared/presentation/working-words.ts';
 
 /** What came out of a line, and the same as people read it. */
 export function Result({ line }: { readonly line: WorkingLine }) {

@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import type { WorkingSection } from '../../../../shared/assessment/working-of-wall.ts';
-import { workingText } from '../working-words.ts';
+import { workingText } from '../../../../shared/presentation/working-words.ts';
 import { CopyButton } from './copy-button.tsx';
 import { WorkingLines } from './working-lines.tsx';
 

@@ -1,8 +1,8 @@
 import type { WorkingLine } from '../../../../shared/working.ts';
 import { Popover } from '../../../components/ui/popover.tsx';
-import { formatSignificant } from '../../../lib/significant.ts';
+import { formatSignificant } from '../../../../shared/presentation/significant.ts';
 import { Formula, SymbolName } from '../formula/formula.tsx';
-import { originOf, workingText } from '../working-words.ts';
+import { originOf, workingText } from '../../../../shared/presentation/working-words.ts';
 import { CopyButton } from './copy-button.tsx';
 import { Result, Source } from './working-lines.tsx';
 

@@ -1,7 +1,7 @@
 import { createElement, type ReactNode } from 'react';
 import { nameNode, nodeOf, type Figures } from './mathml.ts';
 import './formula.css';
-import { parseExpression } from './parse-expression.ts';
+import { parseExpression } from '../../../../shared/presentation/parse-expression.ts';
 
 function typeset(words: string, inner: ReactNode): ReactNode {
   const row = createElement('mrow', {}, inner);

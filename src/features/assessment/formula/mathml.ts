@@ -1,6 +1,7 @@
 import { createElement, type ReactNode } from 'react';
-import { formatSignificant } from '../../../lib/significant.ts';
-import { partsOf, type Expression } from './parse-expression.ts';
+import { symbolParts } from '../../../../shared/presentation/symbol-parts.ts';
+import { formatSignificant } from '../../../../shared/presentation/significant.ts';
+import { partsOf, type Expression } from '../../../../shared/presentation/parse-expression.ts';
 
 /** What stands in a formula in the place of names: their figures. */
 export type Figures = Readonly<Record<string, number>>;
@@ -37,31 +38,21 @@ function letters(text: string): ReactNode {
   return isWord ? element('mtext', {}, text) : element('mi', {}, text);
 }
 
-/** Names that are written otherwise than their letters say; the first two are quotients. */
-const QUOTIENTS: Readonly<Record<string, readonly [string, string]>> = {
-  DL: ['Δ', 'L'],
-  EG: ['E', 'G'],
-};
-const LETTERS: Readonly<Record<string, string>> = { pi: 'π' };
-
 /** A name with what follows its underscore, or the digit at its end, set below the line. */
 export function nameNode(name: string): ReactNode {
-  const quotient = QUOTIENTS[name];
-  if (quotient !== undefined) {
-    const [over, under] = quotient;
-    return row(letters(over), sign('/', { lspace: '0', rspace: '0' }), letters(under));
+  const parts = symbolParts(name);
+  if (parts.kind === 'quotient') {
+    return row(letters(parts.over), sign('/', { lspace: '0', rspace: '0' }), letters(parts.under));
   }
-  const [, base = name, under, digit] = /^([^_]+?)(?:_(.+)|(\d))$/.exec(name) ?? [];
-  const below = under ?? digit;
-  if (below === undefined) return letters(LETTERS[name] ?? name);
-  return element('msub', {}, letters(base), element('mtext', {}, below.replaceAll('_', ' ')));
+  if (parts.below === '') return letters(parts.letters);
+  return element('msub', {}, letters(parts.letters), element('mtext', {}, parts.below));
 }
 
 /** A sum among factors stands in brackets, and so does a quotient written in one line. */
 function isLoose(expression: Expression, figures: Figures | undefined): boolean {
   if (expression.kind === 'name') {
     const figure = figures?.[expression.name];
-    return figure === undefined ? expression.name in QUOTIENTS : figure < 0;
+    return figure === undefined ? symbolParts(expression.name).kind === 'quotient' : figure < 0;
   }
   return expression.kind === 'sum' || expression.kind === 'comparison';
 }

@@ -4,7 +4,7 @@ import { DoneNote } from '../../../components/ui/done-note.tsx';
 import { FileButton } from '../../../components/ui/file-button.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { StateMark } from '../../../components/ui/state-mark.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { useUploadBackground } from '../api/upload-background.ts';
 import { LAYER_WORDS } from '../layer-words.ts';
 import { RemoveLayer } from './remove-layer.tsx';

@@ -1,7 +1,7 @@
 import { useId, type ComponentProps } from 'react';
 import { BUILDING_WORDS, type BuildingField } from '../../../../shared/schemas/building-fields.ts';
 import { Field } from '../../../components/ui/field.tsx';
-import { factsOf } from '../field-words.ts';
+import { factsOf } from '../../../../shared/presentation/field-words.ts';
 
 type AttributeFieldProps = Omit<ComponentProps<typeof Field>, 'label' | 'unit' | 'list'> & {
   readonly field: BuildingField;

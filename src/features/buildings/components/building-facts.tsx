@@ -1,13 +1,7 @@
-import { BUILDING_FIELD_NAMES } from '../../../../shared/schemas/building-fields.ts';
-import { factsOf } from '../field-words.ts';
-import { shownValue, type BuildingValues, type OwnColumn } from '../shown-value.ts';
+import { LISTED_FACTS } from '../../../../shared/presentation/facts-of-run.ts';
+import { factsOf } from '../../../../shared/presentation/field-words.ts';
+import { shownValue, type BuildingValues } from '../../../../shared/presentation/shown-value.ts';
 import { Shown } from './shown.tsx';
-
-/** Name and address head the sheet already. */
-const LISTED: readonly OwnColumn[] = [
-  ...BUILDING_FIELD_NAMES.filter((field) => field !== 'name' && field !== 'address'),
-  'area',
-];
 
 /** What the register says of a building, line by line; what the method assumes is marked and counted. */
 export function BuildingFacts({ building }: { readonly building: BuildingValues }) {
@@ -15,7 +9,7 @@ export function BuildingFacts({ building }: { readonly building: BuildingValues 
   return (
     <>
       <dl className="mt-2.5 border-t-2 border-ink">
-        {LISTED.map((column) => {
+        {LISTED_FACTS.map((column) => {
           const { label, unit } = factsOf(column);
           const shown = shownValue(column, building);
           return (

@@ -1,5 +1,5 @@
 import type { BuildingWall } from '../../../../shared/schemas/buildings.ts';
-import { formatFigure } from '../field-words.ts';
+import { formatFigure } from '../../../../shared/presentation/field-words.ts';
 
 const HEADING = 'border-b border-rule px-0 pt-1 pb-[5px] text-cap font-semibold';
 const CELL = 'h-row border-b border-hairline py-0';

@@ -2,11 +2,13 @@ import { useState } from 'react';
 import type { BuildingValue } from '../../../../shared/schemas/building-fields.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import type { Clash, EditedName } from '../building-draft.ts';
-import { factsOf, formatFigure, inSentence } from '../field-words.ts';
+import { factsOf, formatFigure, inSentence } from '../../../../shared/presentation/field-words.ts';
 
 type ClashChoiceProps = {
   readonly clash: Clash;
   readonly busy: boolean;
+  /** What stood there before either changed it, where it is told too. */
+  readonly before?: (name: EditedName) => BuildingValue;
   /** Saves mine of these names; the rest stays as somebody else left it. */
   readonly onSave: (mine: readonly EditedName[]) => void;
   readonly onBack: () => void;
@@ -17,13 +19,13 @@ function words(name: EditedName, value: BuildingValue): string {
   return typeof value === 'number' ? formatFigure(name, value) : value;
 }
 
-type ChoiceProps = {
+type ChoiceProps = Pick<ClashChoiceProps, 'before'> & {
   readonly both: Clash['both'][number];
   readonly takesMine: boolean;
   readonly onTake: (mine: boolean) => void;
 };
 
-function Choice({ both: { name, mine, theirs }, takesMine, onTake }: ChoiceProps) {
+function Choice({ both: { name, mine, theirs }, before, takesMine, onTake }: ChoiceProps) {
   const options = [
     { isMine: true, label: 'Mine', value: mine },
     { isMine: false, label: 'Theirs', value: theirs },
@@ -34,8 +36,11 @@ function Choice({ both: { name, mine, theirs }, takesMine, onTake }: ChoiceProps
       aria-label={factsOf(name).label}
       className="grid grid-cols-[130px_minmax(0,1fr)] border-b border-hairline py-1.5 text-small"
     >
-      <span aria-hidden="true" className="row-span-2 py-1 text-ink-2">
+      <span className="row-span-2 py-1 text-ink-2">
         {factsOf(name).label}
+        {before !== undefined && (
+          <span className="block text-ink-3">was {words(name, before(name))}</span>
+        )}
       </span>
       {options.map(({ isMine, label, value }) => (
         <label key={label} className="flex min-h-7 items-center gap-2 max-sm:min-h-11">
@@ -57,7 +62,7 @@ function Choice({ both: { name, mine, theirs }, takesMine, onTake }: ChoiceProps
 }
 
 /** Somebody else changed the same building: theirs beside mine, and nothing lost until it is chosen. */
-export function ClashChoice({ clash, busy, onSave, onBack }: ClashChoiceProps) {
+export function ClashChoice({ clash, busy, before, onSave, onBack }: ClashChoiceProps) {
   const { both, mineOnly, theirsOnly } = clash;
   const [left, setLeft] = useState<readonly EditedName[]>([]);
   function take(name: EditedName, mine: boolean) {
@@ -77,6 +82,7 @@ export function ClashChoice({ clash, busy, onSave, onBack }: ClashChoiceProps) {
         <Choice
           key={one.name}
           both={one}
+          {...(before !== undefined && { before })}
           takesMine={!left.includes(one.name)}
           onTake={(mine) => {
             take(one.name, mine);

@@ -1,5 +1,5 @@
 import { classNames } from '../../../lib/class-names.ts';
-import type { ShownValue } from '../shown-value.ts';
+import type { ShownValue } from '../../../../shared/presentation/shown-value.ts';
 
 /** A value of a building: assumed ones over dotted clay, unknown ones a quiet dash, each saying why. */
 export function Shown({ shown }: { readonly shown: ShownValue }) {

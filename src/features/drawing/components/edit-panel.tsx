@@ -1,7 +1,7 @@
 import { footprintArea } from '../../../../shared/building/footprint-area.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
-import { formatFigure } from '../../buildings/field-words.ts';
+import { formatFigure } from '../../../../shared/presentation/field-words.ts';
 import { partsOf, type Parts, type ShapeDraft } from '../drafts/draft.ts';
 import type { PlanDrawing } from '../hooks/use-plan-drawing.ts';
 import { areaWords } from '../measure-words.ts';

@@ -2,7 +2,7 @@ import { useRef } from 'react';
 import { DoneNote } from '../../../components/ui/done-note.tsx';
 import { FileButton } from '../../../components/ui/file-button.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { UploadProgress } from '../../background/components/upload-progress.tsx';
 import { useUploadGround } from '../api/upload-ground.ts';
 

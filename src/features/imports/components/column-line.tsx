@@ -1,7 +1,7 @@
 import { useId } from 'react';
 import type { ImportAnswer } from '../../../../shared/schemas/imports.ts';
 import { INPUT_STYLE } from '../../../components/ui/field-frame.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { classNames } from '../../../lib/class-names.ts';
 import { fieldWords, type ImportField } from '../field-words.ts';
 

@@ -2,7 +2,7 @@ import type { ReactNode } from 'react';
 import { IMPORT_FIELDS, type ImportAnswer } from '../../../../shared/schemas/imports.ts';
 import { Facts } from '../../../components/ui/facts.tsx';
 import { Panel } from '../../../components/ui/panel.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { fieldWords } from '../field-words.ts';
 
 function systemWords({ options, place }: ImportAnswer): string {

@@ -3,7 +3,7 @@ import { ButtonLink } from '../../../components/ui/button-link.tsx';
 import { ErrorNote } from '../../../components/ui/error-note.tsx';
 import { StateMark } from '../../../components/ui/state-mark.tsx';
 import { importsPath, planPath, registerPath } from '../../../config/paths.ts';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { UndoImport } from './undo-import.tsx';
 

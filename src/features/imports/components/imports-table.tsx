@@ -6,7 +6,7 @@ import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
 import { importPath } from '../../../config/paths.ts';
 import { formatMoment } from '../../../lib/format-date.ts';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { IMPORT_STATE_WORDS } from '../import-states.ts';
 
 type ListedImport = z.infer<typeof importListSchema>[number];

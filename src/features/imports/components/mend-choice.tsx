@@ -1,6 +1,6 @@
 import { Button } from '../../../components/ui/button.tsx';
 import { Checkbox } from '../../../components/ui/checkbox.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import type { ImportDraft } from '../hooks/use-import-draft.ts';
 
 type MendChoiceProps = {

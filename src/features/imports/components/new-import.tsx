@@ -4,7 +4,7 @@ import { IMPORT_LIMITS } from '../../../../shared/schemas/imports.ts';
 import { ErrorNote } from '../../../components/ui/error-note.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { importPath } from '../../../config/paths.ts';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { UploadProgress } from '../../background/components/upload-progress.tsx';
 import { useUploadImport } from '../api/upload-import.ts';
 import { DropPlace } from './drop-place.tsx';

@@ -1,6 +1,6 @@
 import type { ImportAnswer } from '../../../../shared/schemas/imports.ts';
 import { classNames } from '../../../lib/class-names.ts';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { OUTCOMES_IN_ORDER, OUTCOME_WORDS, type RowFilter } from '../outcomes.ts';
 import { OutcomeSwatch } from './outcome-swatch.tsx';
 

@@ -1,5 +1,5 @@
 import type { ImportAnswer } from '../../../../shared/schemas/imports.ts';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { OUTCOMES_IN_ORDER, OUTCOME_WORDS } from '../outcomes.ts';
 import { OutcomeSwatch } from './outcome-swatch.tsx';
 

@@ -1,6 +1,6 @@
 import type { ImportAnswer } from '../../../../shared/schemas/imports.ts';
 import { Panel } from '../../../components/ui/panel.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import type { ImportDraft } from '../hooks/use-import-draft.ts';
 import type { CheckedImport } from '../hooks/use-last-checked.ts';
 import type { Report } from '../hooks/use-report.ts';

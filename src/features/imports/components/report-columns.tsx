@@ -1,6 +1,6 @@
 import type { ImportAnswer, ImportRow } from '../../../../shared/schemas/imports.ts';
 import type { Column } from '../../../components/ui/table/column.ts';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { OUTCOME_WORDS } from '../outcomes.ts';
 import { reasonOf } from '../row-words.ts';
 import { OutcomeSwatch } from './outcome-swatch.tsx';

@@ -1,5 +1,5 @@
 import { Button } from '../../../components/ui/button.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { ROWS_PER_PAGE } from '../api/list-rows.ts';
 
 type ReportPagesProps = {

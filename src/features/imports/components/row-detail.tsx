@@ -1,5 +1,5 @@
 import type { ImportAnswer, ImportRow } from '../../../../shared/schemas/imports.ts';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import type { ImportDraft } from '../hooks/use-import-draft.ts';
 import { isOpen } from '../import-states.ts';

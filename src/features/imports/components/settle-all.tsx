@@ -1,5 +1,5 @@
 import { Segments } from '../../../components/ui/segments.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import type { ImportDraft } from '../hooks/use-import-draft.ts';
 
 const WAYS = [

@@ -1,6 +1,6 @@
 import type { ImportAnswer } from '../../../../shared/schemas/imports.ts';
 import { Progress } from '../../../components/ui/progress.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { IMPORT_STATE_WORDS } from '../import-states.ts';
 
 /** How far the server is with an import. */

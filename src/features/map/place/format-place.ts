@@ -1,4 +1,4 @@
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import type { GridPlace } from './grid-projection.ts';
 
 function figure(value: number): string {

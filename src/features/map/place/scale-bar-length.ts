@@ -1,4 +1,4 @@
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { roundStep } from './round-step.ts';
 
 export type ScaleBarLength = {

@@ -1,5 +1,6 @@
 import { CATEGORIES, type Category } from '../../../../shared/damage/categories.ts';
-import { DAMAGE, HATCH_TILE } from '../../../theme/damage.ts';
+import { DAMAGE, HATCH_TILE } from '../../../../shared/presentation/damage-style.ts';
+import { hatchPath } from '../../../theme/damage.ts';
 import { channels, PIXEL_RATIO, type HatchImage, type ImageTaker } from './hatch-images.ts';
 
 /** Pixels of one tile: at double density five of the page, 0.62 of the size that charts draw it in. */
@@ -34,7 +35,7 @@ export function damageImage(category: Category): HatchImage {
   const { fill, hatch } = DAMAGE[category];
   const ground = channels(fill);
   const ink = channels(hatch?.colour ?? fill);
-  const strokes = strokesOf(hatch?.path ?? '');
+  const strokes = strokesOf(hatchPath(category));
   const data = new Uint8ClampedArray(SIZE * SIZE * 4);
   for (let row = 0; row < SIZE; row += 1) {
     for (let column = 0; column < SIZE; column += 1) {

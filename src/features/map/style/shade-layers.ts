@@ -1,6 +1,6 @@
 import type { ExpressionSpecification, LayerSpecification } from 'maplibre-gl';
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
-import { DAMAGE } from '../../../theme/damage.ts';
+import { DAMAGE } from '../../../../shared/presentation/damage-style.ts';
 import { SETTLEMENT_TINTS, STAGE_TINTS, type Tint } from '../../../theme/ground-movement.ts';
 import { FIRST_SHADE } from '../shades.ts';
 import { damageName } from './damage-images.ts';

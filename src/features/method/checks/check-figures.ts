@@ -1,6 +1,6 @@
 import type { CheckRow } from '../../../../shared/checks/check.ts';
-import { formatCount } from '../../../lib/format-number.ts';
-import { formatSignificant } from '../../../lib/significant.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
+import { formatSignificant } from '../../../../shared/presentation/significant.ts';
 
 const MOST_DECIMALS = 16;
 const TINY_DIGITS = 7;

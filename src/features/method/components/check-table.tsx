@@ -2,8 +2,8 @@ import type { CheckRow } from '../../../../shared/checks/check.ts';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
 import { NARROW, useMedia } from '../../../hooks/use-media.ts';
-import { sourceNote } from '../../assessment/source-note.ts';
-import { sourceInFull } from '../../rules/source-words.ts';
+import { sourceNote } from '../../../../shared/presentation/source-note.ts';
+import { sourceInFull } from '../../../../shared/presentation/source-words.ts';
 import {
   computedFigure,
   differenceFigure,

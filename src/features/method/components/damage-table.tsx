@@ -3,8 +3,8 @@ import { DamageChip } from '../../../components/ui/damage-chip.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
 import { percentFromRatio } from '../../../../shared/units/percent-from-ratio.ts';
-import { formatSignificant } from '../../../lib/significant.ts';
-import { sourceNote } from '../../assessment/source-note.ts';
+import { formatSignificant } from '../../../../shared/presentation/significant.ts';
+import { sourceNote } from '../../../../shared/presentation/source-note.ts';
 
 function inPercent(strain: number): string {
   return `${formatSignificant(percentFromRatio(strain), 3)}\u00a0%`;

@@ -1,6 +1,6 @@
 import { Formula, SymbolName } from '../../assessment/formula/formula.tsx';
-import { sourceNote } from '../../assessment/source-note.ts';
-import { sourceInFull } from '../../rules/source-words.ts';
+import { sourceNote } from '../../../../shared/presentation/source-note.ts';
+import { sourceInFull } from '../../../../shared/presentation/source-words.ts';
 import type { MethodFormula, MethodPart } from '../formulas/formula-parts.ts';
 import { symbolsOf } from '../formulas/method-parts.ts';
 

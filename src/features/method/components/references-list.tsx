@@ -1,5 +1,5 @@
 import { REFERENCES, type ReferenceKey } from '../../../../shared/references.ts';
-import { sourceInFull } from '../../rules/source-words.ts';
+import { sourceInFull } from '../../../../shared/presentation/source-words.ts';
 
 /** What is no printed work. */
 const NOT_CITED: readonly string[] = ['own', 'common-practice'] satisfies ReferenceKey[];

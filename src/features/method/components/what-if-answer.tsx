@@ -1,6 +1,6 @@
 import { METHOD_VERSION } from '../../../../shared/method-version.ts';
 import { Panel } from '../../../components/ui/panel.tsx';
-import { breakpointWords } from '../../assessment/bracket-words.ts';
+import { breakpointWords } from '../../../../shared/presentation/bracket-words.ts';
 import { BracketTable } from '../../assessment/components/bracket-table.tsx';
 import { BreakpointBar } from '../../assessment/components/breakpoint-bar.tsx';
 import { CopyButton } from '../../assessment/components/copy-button.tsx';
@@ -11,7 +11,7 @@ import { WallFacts } from '../../assessment/components/wall-facts.tsx';
 import { WallSectionChart } from '../../assessment/components/wall-section-chart.tsx';
 import { WorkingList } from '../../assessment/components/working-list.tsx';
 import { ZonesTable } from '../../assessment/components/zones-table.tsx';
-import { strainRange } from '../../assessment/strain-range.ts';
+import { strainRange } from '../../../../shared/presentation/strain-range.ts';
 import type { WorkedWhatIf } from '../what-if/work-what-if.ts';
 import { WhatIfVerdict } from './what-if-verdict.tsx';
 

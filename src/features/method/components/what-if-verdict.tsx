@@ -1,6 +1,10 @@
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { DamageChip } from '../../../components/ui/damage-chip.tsx';
-import { categoriesWords, percentWords, settledWords } from '../../assessment/bracket-words.ts';
+import {
+  categoriesWords,
+  percentWords,
+  settledWords,
+} from '../../../../shared/presentation/bracket-words.ts';
 import type { WorkedWhatIf } from '../what-if/work-what-if.ts';
 
 /** The category in a sentence, with what it rests on. */

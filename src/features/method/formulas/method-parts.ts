@@ -1,5 +1,5 @@
-import { namesIn, parseExpression } from '../../assessment/formula/parse-expression.ts';
-import { SYMBOL_WORDS, type SymbolWords } from '../../assessment/symbol-words.ts';
+import { namesIn, parseExpression } from '../../../../shared/presentation/parse-expression.ts';
+import { SYMBOL_WORDS, type SymbolWords } from '../../../../shared/presentation/symbol-words.ts';
 import { ANSWER_PARTS } from './answer-parts.ts';
 import { formulasOfWorkings } from './example-lines.ts';
 import type { MethodPart } from './formula-parts.ts';

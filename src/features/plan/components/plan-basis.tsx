@@ -4,14 +4,14 @@ import type { RunAnswer } from '../../../../shared/schemas/runs.ts';
 import type { SchemeAnswer } from '../../../../shared/schemas/schemes.ts';
 import { formatMoment } from '../../../lib/format-date.ts';
 import { OptionMenu } from '../../alignments/components/option-menu.tsx';
-import { designParts } from '../../alignments/design-words.ts';
+import { designParts } from '../../../../shared/presentation/design-words.ts';
 import type { PlanLine } from '../../alignments/hooks/use-plan-line.ts';
 import { RunExport } from '../../runs/components/run-export.tsx';
 import { RunInputs } from '../../runs/components/run-inputs.tsx';
 import { RunMenu } from '../../runs/components/run-menu.tsx';
 import type { RunView } from '../../runs/hooks/use-run-view.ts';
 import { completeOf } from '../../runs/run-states.ts';
-import { runName } from '../../runs/run-words.ts';
+import { runName } from '../../../../shared/presentation/run-words.ts';
 
 type PlanBasisProps = {
   readonly scheme: SchemeAnswer;

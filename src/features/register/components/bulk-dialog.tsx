@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import type { BuildingAttributes } from '../../../../shared/schemas/building-fields.ts';
 import { Dialog } from '../../../components/ui/dialog.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { doneWords } from '../bulk-summary.ts';
 import type { Marks } from '../hooks/use-marks.ts';
 import { BulkForm, NO_VALUES } from './bulk-form.tsx';

@@ -10,7 +10,7 @@ import { Checkbox } from '../../../components/ui/checkbox.tsx';
 import { draftSchema } from '../../../lib/draft-schema.ts';
 import { AttributeField } from '../../buildings/components/attribute-field.tsx';
 import { valueOfText, type DraftValues } from '../../buildings/building-draft.ts';
-import { factsOf } from '../../buildings/field-words.ts';
+import { factsOf } from '../../../../shared/presentation/field-words.ts';
 
 /** Which fields are set, and what is written in them. */
 export type BulkDraft = {

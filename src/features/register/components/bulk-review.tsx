@@ -4,7 +4,7 @@ import type { RegisterChange } from '../../../../shared/schemas/register-changes
 import { Button } from '../../../components/ui/button.tsx';
 import { LoadingRows } from '../../../components/ui/loading-rows.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { useChangeMany } from '../../buildings/api/change-many.ts';
 import { lineWords } from '../bulk-summary.ts';
 import { useBulkLines } from '../hooks/use-bulk-lines.ts';

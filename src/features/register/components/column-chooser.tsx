@@ -3,7 +3,7 @@ import { buttonStyle } from '../../../components/ui/button-style.ts';
 import { Checkbox } from '../../../components/ui/checkbox.tsx';
 import { Chevron } from '../../../components/ui/chevron.tsx';
 import { Popover } from '../../../components/ui/popover.tsx';
-import { factsOf } from '../../buildings/field-words.ts';
+import { factsOf } from '../../../../shared/presentation/field-words.ts';
 import { CHOOSABLE } from '../register-columns.ts';
 
 type ColumnChooserProps = {

@@ -2,7 +2,7 @@ import { Button } from '../../../components/ui/button.tsx';
 import { ApiError } from '../../../lib/api-error.ts';
 import { useUndoChanges } from '../../buildings/api/undo-changes.ts';
 
-/** What was done last or taken back, and the changes that it was. */
+/** What was done last or taken back, and the changes that it was; without any it is not undone here. */
 export type Done = {
   readonly words: string;
   readonly changeIds: readonly string[];
@@ -33,21 +33,23 @@ export function DoneLine({ schemeId, done, onDone }: DoneLineProps) {
           </span>
         )}
       </p>
-      <Button
-        kind="quiet"
-        className="h-6"
-        busy={turn.isPending}
-        onClick={() => {
-          turn.mutate(changeIds, {
-            onSuccess: (made) => {
-              const ids = made.map(({ changeId }) => changeId);
-              onDone({ words, changeIds: ids, isUndone: !isUndone });
-            },
-          });
-        }}
-      >
-        {isUndone ? 'Redo' : 'Undo'}
-      </Button>
+      {changeIds.length > 0 && (
+        <Button
+          kind="quiet"
+          className="h-6"
+          busy={turn.isPending}
+          onClick={() => {
+            turn.mutate(changeIds, {
+              onSuccess: (made) => {
+                const ids = made.map(({ changeId }) => changeId);
+                onDone({ words, changeIds: ids, isUndone: !isUndone });
+              },
+            });
+          }}
+        >
+          {isUndone ? 'Redo' : 'Undo'}
+        </Button>
+      )}
       <Button
         kind="quiet"
         className="h-6"

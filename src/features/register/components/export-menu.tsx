@@ -2,7 +2,7 @@ import type { RegisterColumn } from '../../../../shared/schemas/register.ts';
 import { buttonStyle } from '../../../components/ui/button-style.ts';
 import { Chevron } from '../../../components/ui/chevron.tsx';
 import { FormatMenu } from '../../../components/ui/format-menu.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { exportPath } from '../api/export-path.ts';
 import type { Which } from '../api/which-buildings.ts';
 

@@ -4,7 +4,7 @@ import { CLASS_COLUMNS } from '../../../../shared/schemas/result-columns.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { Menu, MENU_LINE } from '../../../components/ui/menu.tsx';
 import { importsQuery } from '../../imports/api/list-imports.ts';
-import { factsOf } from '../../buildings/field-words.ts';
+import { factsOf } from '../../../../shared/presentation/field-words.ts';
 import {
   columnFilter,
   FILTER_PARTS,

@@ -4,13 +4,15 @@ import type {
   RegisterSort,
 } from '../../../../shared/schemas/register.ts';
 import { isResultColumn } from '../../../../shared/schemas/result-columns.ts';
+import { isStandingColumn } from '../../../../shared/schemas/standing-columns.ts';
 import type { Column } from '../../../components/ui/table/column.ts';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { Shown } from '../../buildings/components/shown.tsx';
-import { factsOf } from '../../buildings/field-words.ts';
-import { shownValue } from '../../buildings/shown-value.ts';
+import { factsOf } from '../../../../shared/presentation/field-words.ts';
+import { shownValue } from '../../../../shared/presentation/shown-value.ts';
 import type { Marks } from '../hooks/use-marks.ts';
 import { SHORT_HEADINGS, UNDER_HEADINGS, WIDTHS } from '../register-columns.ts';
+import { StandingCell } from '../../decisions/components/standing-cell.tsx';
 import { ResultCell } from './result-cell.tsx';
 import { TickBox } from './tick-box.tsx';
 
@@ -83,6 +85,12 @@ function buildingColumn(sort: RegisterSort): Column<RegisterRow> {
   };
 }
 
+function cellOf(column: RegisterColumn): Column<RegisterRow>['cell'] {
+  if (isStandingColumn(column)) return (row) => <StandingCell column={column} row={row} />;
+  if (isResultColumn(column)) return (row) => <ResultCell column={column} row={row} />;
+  return (row) => <Shown shown={shownValue(column, row)} />;
+}
+
 function fieldColumn(column: RegisterColumn): Column<RegisterRow> {
   const { label, kind, unit = UNDER_HEADINGS[column] } = factsOf(column);
   return {
@@ -91,9 +99,7 @@ function fieldColumn(column: RegisterColumn): Column<RegisterRow> {
     width: WIDTHS[column],
     ...(kind !== 'text' && { holds: 'figure' }),
     ...(unit !== undefined && { unit }),
-    cell: isResultColumn(column)
-      ? (row) => <ResultCell column={column} row={row} />
-      : (row) => <Shown shown={shownValue(column, row)} />,
+    cell: cellOf(column),
   };
 }
 

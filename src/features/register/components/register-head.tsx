@@ -4,7 +4,8 @@ import type { RunDetail } from '../../../../shared/schemas/runs.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { ButtonLink } from '../../../components/ui/button-link.tsx';
 import { importsPath, planPath } from '../../../config/paths.ts';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
+import { Funnel } from '../../decisions/components/funnel.tsx';
 import { withBeside } from '../filter-parts.ts';
 import type { MapPane } from '../hooks/use-map-pane.ts';
 import type { RegisterAddress } from '../hooks/use-register-address.ts';
@@ -98,7 +99,12 @@ export function RegisterHead(props: RegisterHeadProps) {
           {mayEdit && <ButtonLink to={importsPath(schemeId)}>Bring in…</ButtonLink>}
         </div>
       </div>
-      {results !== undefined && <ResultCounts {...{ schemeId, filter }} run={results} />}
+      {results !== undefined && (
+        <>
+          <Funnel {...{ schemeId, filter }} runId={results.id} />
+          <ResultCounts {...{ schemeId, filter }} run={results} />
+        </>
+      )}
       <FilterBar
         {...{ schemeId, filter, view }}
         onFilter={(next) => {

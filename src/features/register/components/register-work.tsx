@@ -70,6 +70,7 @@ export function RegisterWork() {
       <RegisterFoot
         {...{ marks, mayEdit }}
         schemeId={scheme.id}
+        runId={shownRun}
         done={desk.done.inFoot}
         onDone={desk.setDone}
       />

@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import { ConfirmDialog } from '../../../components/ui/confirm-dialog.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { useRemoveMany } from '../../buildings/api/remove-many.ts';
 import type { Marks } from '../hooks/use-marks.ts';
 import type { Done } from './done-line.tsx';
@@ -17,10 +17,13 @@ type RemoveDialogProps = {
 export function RemoveDialog({ schemeId, marks, onClose, onDone }: RemoveDialogProps) {
   // what was marked when it was opened
   const [{ filter, count }] = useState(marks);
-  const remove = useRemoveMany(schemeId);
   const isOne = count === 1;
   const many = isOne ? 'this building' : `these ${formatCount(count)} buildings`;
   const removed = isOne ? 'One building removed.' : `${formatCount(count)} buildings removed.`;
+  const remove = useRemoveMany(schemeId, ({ changeId }) => {
+    onDone({ words: removed, changeIds: [changeId] });
+    onClose();
+  });
   return (
     <ConfirmDialog
       open
@@ -28,15 +31,7 @@ export function RemoveDialog({ schemeId, marks, onClose, onDone }: RemoveDialogP
       doIt={isOne ? 'Remove' : `Remove ${formatCount(count)}`}
       busy={remove.isPending}
       onConfirm={() => {
-        remove.mutate(
-          { filter, expected: count },
-          {
-            onSuccess: ({ changeId }) => {
-              onDone({ words: removed, changeIds: [changeId] });
-              onClose();
-            },
-          },
-        );
+        remove.mutate({ filter, expected: count });
       }}
       onClose={onClose}
     >

@@ -4,8 +4,9 @@ import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import type { RegisterFilter } from '../../../../shared/schemas/register.ts';
 import type { RunDetail } from '../../../../shared/schemas/runs.ts';
 import { DamageChip } from '../../../components/ui/damage-chip.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
-import { runName, staleWords } from '../../runs/run-words.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
+import { HeldCounts } from '../../decisions/components/held-counts.tsx';
+import { runName, staleWords } from '../../../../shared/presentation/run-words.ts';
 import { registerOfResults } from '../register-of-results.ts';
 
 type ResultCountsProps = {
@@ -21,18 +22,10 @@ type CountLink = {
   readonly children: ReactNode;
 };
 
-const STAGES = [1, 2, 3] as const;
-
 /** How many buildings the run that is shown found where; each number leads to them. */
 export function ResultCounts({ schemeId, run, filter }: ResultCountsProps) {
   const { counts } = run;
   if (counts === null) return null;
-  const stages = STAGES.map((stage): CountLink => ({
-    key: `stage ${stage}`,
-    found: { any: { stage: [String(stage)] } },
-    count: counts.stages[stage - 1] ?? 0,
-    children: `Stage ${stage}`,
-  }));
   const categories = CATEGORIES.map(({ category }): CountLink => ({
     key: `category ${category}`,
     found: { any: { category: [String(category)] } },
@@ -65,10 +58,10 @@ export function ResultCounts({ schemeId, run, filter }: ResultCountsProps) {
       <span className="mr-2 text-ink-2" title={stale ?? undefined}>
         {stale ?? `${runName(run)}, ${run.option.name}`}
       </span>
-      {stages.map(linkTo)}
-      <span className="ml-2 text-ink-2">Category, central</span>
+      <span className="text-ink-2">Category, central</span>
       {categories.map(linkTo)}
       {linkTo(sensitive)}
+      <HeldCounts schemeId={schemeId} runId={run.id} />
     </nav>
   );
 }

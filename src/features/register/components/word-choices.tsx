@@ -5,7 +5,7 @@ import { Checkbox } from '../../../components/ui/checkbox.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { LoadingRows } from '../../../components/ui/loading-rows.tsx';
 import { QueryError } from '../../../components/ui/query-error.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { registerChoicesQuery } from '../api/get-choices.ts';
 import { choiceWords } from '../choice-words.ts';
 

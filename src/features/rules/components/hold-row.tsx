@@ -4,7 +4,7 @@ import { Checkbox } from '../../../components/ui/checkbox.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { Select } from '../../../components/ui/select.tsx';
 import { CONDITION_WORDS } from '../rule-words.ts';
-import { SOURCE_OPTIONS } from '../source-words.ts';
+import { SOURCE_OPTIONS } from '../source-options.ts';
 import { optionsOf } from './options-of.ts';
 import type { RulesFormModel } from '../rules-form-model.ts';
 

@@ -2,7 +2,7 @@ import { Field } from '../../../components/ui/field.tsx';
 import { Select } from '../../../components/ui/select.tsx';
 import type { RuleName } from '../rule-words.ts';
 import type { RulesFormModel } from '../rules-form-model.ts';
-import { SOURCE_OPTIONS } from '../source-words.ts';
+import { SOURCE_OPTIONS } from '../source-options.ts';
 import { RuleValue } from './rule-value.tsx';
 
 type RuleRowProps = {

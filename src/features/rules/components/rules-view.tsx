@@ -6,7 +6,7 @@ import { Table } from '../../../components/ui/table/table.tsx';
 import { classNames } from '../../../lib/class-names.ts';
 import { formatShortDay } from '../../../lib/format-date.ts';
 import { holdLines, ruleLines, type RuleLine } from '../rule-lines.ts';
-import { sourceInFull, sourceWords } from '../source-words.ts';
+import { sourceInFull, sourceWords } from '../../../../shared/presentation/source-words.ts';
 
 const NAME_ROOM = 'min-w-[130px] sm:min-w-[190px]';
 

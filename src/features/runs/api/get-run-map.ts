@@ -1,5 +1,5 @@
 import { queryOptions } from '@tanstack/react-query';
-import { runMapSchema } from '../../../../shared/schemas/runs.ts';
+import { runMapSchema } from '../../../../shared/schemas/run-map.ts';
 import { apiGet } from '../../../lib/api-client.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 

@@ -3,7 +3,7 @@ import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { Progress } from '../../../components/ui/progress.tsx';
 import { useCancelRun } from '../api/cancel-run.ts';
 import { useTimeLeft } from '../hooks/use-time-left.ts';
-import { runName } from '../run-words.ts';
+import { runName } from '../../../../shared/presentation/run-words.ts';
 
 type ActiveRunProps = {
   readonly schemeId: string;

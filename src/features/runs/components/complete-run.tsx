@@ -2,7 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import type { RunAnswer } from '../../../../shared/schemas/runs.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { runQuery } from '../api/get-run.ts';
-import { countsWords, runName } from '../run-words.ts';
+import { countsWords, runName } from '../../../../shared/presentation/run-words.ts';
 
 type CompleteRunProps = {
   readonly schemeId: string;

@@ -2,7 +2,7 @@ import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import type { RunResult } from '../../../../shared/schemas/runs.ts';
 import { HatchSwatch } from '../../../components/ui/hatch-swatch.tsx';
 import { RangeBar } from '../../assessment/components/range-bar.tsx';
-import { reserveWords } from '../result-words.ts';
+import { reserveWords } from '../../../../shared/presentation/result-words.ts';
 import { rangeOfCategories } from '../tip-of-run.ts';
 
 type FoundCategoryProps = { readonly result: RunResult };

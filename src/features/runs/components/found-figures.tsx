@@ -1,8 +1,8 @@
 import type { ReactNode } from 'react';
 import type { RunResult } from '../../../../shared/schemas/runs.ts';
-import { percentWords } from '../../assessment/bracket-words.ts';
-import { slopeWords } from '../../../lib/slope-words.ts';
-import { stageWords } from '../result-words.ts';
+import { percentWords } from '../../../../shared/presentation/bracket-words.ts';
+import { slopeWords } from '../../../../shared/presentation/slope-words.ts';
+import { stageWords } from '../../../../shared/presentation/result-words.ts';
 import { settlementWords } from '../tip-of-run.ts';
 
 type Line = readonly [word: string, value: ReactNode];

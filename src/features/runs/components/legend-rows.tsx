@@ -2,7 +2,7 @@ import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { HatchSwatch } from '../../../components/ui/hatch-swatch.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { SETTLEMENT_TINTS, STAGE_TINTS } from '../../../theme/ground-movement.ts';
 import { FIRST_SHADE } from '../../map/shades.ts';
 import { bandWords, type Shading } from '../shades-of-run.ts';

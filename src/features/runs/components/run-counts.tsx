@@ -3,7 +3,7 @@ import type { RunCounts } from '../../../../shared/schemas/runs.ts';
 import { DamageChip } from '../../../components/ui/damage-chip.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { ENDS } from '../shades-of-run.ts';
 
 type Row = { readonly category: Category; readonly counts: RunCounts };

@@ -1,8 +1,8 @@
 import type { RunAnswer } from '../../../../shared/schemas/runs.ts';
 import { FormatMenu } from '../../../components/ui/format-menu.tsx';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { runExportPath } from '../api/export-path.ts';
-import { runName } from '../run-words.ts';
+import { runName } from '../../../../shared/presentation/run-words.ts';
 
 type RunExportProps = { readonly schemeId: string; readonly run: RunAnswer };
 

@@ -5,9 +5,9 @@ import { Facts } from '../../../components/ui/facts.tsx';
 import { Popover } from '../../../components/ui/popover.tsx';
 import { settingsPath } from '../../../config/paths.ts';
 import { formatMoment } from '../../../lib/format-date.ts';
-import { formatCount } from '../../../lib/format-number.ts';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { optionLines } from '../../alignments/option-changes.ts';
-import { runName } from '../run-words.ts';
+import { runName } from '../../../../shared/presentation/run-words.ts';
 import { RunCountsTable } from './run-counts.tsx';
 
 type RunInputsProps = { readonly schemeId: string; readonly run: RunDetail };

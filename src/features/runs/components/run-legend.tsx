@@ -1,5 +1,5 @@
 import { useMemo } from 'react';
-import type { RunMap } from '../../../../shared/schemas/runs.ts';
+import type { RunMap } from '../../../../shared/schemas/run-map.ts';
 import { QueryError } from '../../../components/ui/query-error.tsx';
 import { Segments } from '../../../components/ui/segments.tsx';
 import { classNames } from '../../../lib/class-names.ts';
@@ -7,7 +7,7 @@ import { registerOfResults } from '../../register/register-of-results.ts';
 import { foundAsShaded } from '../found-as-shaded.ts';
 import { useRunKeys } from '../hooks/use-run-keys.ts';
 import type { RunView } from '../hooks/use-run-view.ts';
-import { runName } from '../run-words.ts';
+import { runName } from '../../../../shared/presentation/run-words.ts';
 import { countsOfShades, type Colouring, type Shading } from '../shades-of-run.ts';
 import { LegendRows } from './legend-rows.tsx';
 import { LineLegend } from './line-legend.tsx';

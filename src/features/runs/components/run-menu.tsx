@@ -2,7 +2,7 @@ import type { RunAnswer } from '../../../../shared/schemas/runs.ts';
 import { Menu, MENU_LINE } from '../../../components/ui/menu.tsx';
 import { formatShortMoment } from '../../../lib/format-date.ts';
 import { completeOf } from '../run-states.ts';
-import { runName } from '../run-words.ts';
+import { runName } from '../../../../shared/presentation/run-words.ts';
 
 type RunMenuProps = {
   readonly runs: readonly RunAnswer[];

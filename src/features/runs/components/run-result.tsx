@@ -6,7 +6,7 @@ import { QueryError } from '../../../components/ui/query-error.tsx';
 import { sheetPath } from '../../../config/paths.ts';
 import { isRefusal } from '../../../lib/api-error.ts';
 import { runBuildingQuery } from '../api/get-run-building.ts';
-import { runName } from '../run-words.ts';
+import { runName } from '../../../../shared/presentation/run-words.ts';
 import { FoundCategory } from './found-category.tsx';
 import { FoundFigures } from './found-figures.tsx';
 

@@ -2,7 +2,7 @@ import type { RunAnswer } from '../../../../shared/schemas/runs.ts';
 import type { PlanLine } from '../../alignments/hooks/use-plan-line.ts';
 import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
-import { staleWords } from '../run-words.ts';
+import { staleWords } from '../../../../shared/presentation/run-words.ts';
 import { RunButton } from './run-button.tsx';
 import { RunStrip } from './run-strip.tsx';
 

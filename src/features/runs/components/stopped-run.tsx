@@ -2,7 +2,7 @@ import type { RunAnswer } from '../../../../shared/schemas/runs.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { useResumeRun } from '../api/resume-run.ts';
-import { percentDone, stoppedWords } from '../run-words.ts';
+import { percentDone, stoppedWords } from '../../../../shared/presentation/run-words.ts';
 
 type StoppedRunProps = {
   readonly schemeId: string;

@@ -1,7 +1,8 @@
 import { useQuery } from '@tanstack/react-query';
 import { useMemo } from 'react';
 import { useSearchParams } from 'react-router-dom';
-import type { RunAnswer, RunMap } from '../../../../shared/schemas/runs.ts';
+import type { RunAnswer } from '../../../../shared/schemas/runs.ts';
+import type { RunMap } from '../../../../shared/schemas/run-map.ts';
 import { runMapQuery } from '../api/get-run-map.ts';
 import {
   COLOURINGS,

@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import { timeLeftWords } from '../run-words.ts';
+import { timeLeftWords } from '../../../../shared/presentation/run-words.ts';
 
 type Seen = { readonly done: number; readonly at: number };
 

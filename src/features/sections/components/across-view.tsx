@@ -1,7 +1,7 @@
 import { useMemo } from 'react';
 import type { TroughOfSection } from '../../../../shared/assessment/trough-of-section.ts';
 import type { AlignmentDesign } from '../../../../shared/schemas/alignments.ts';
-import { exaggeration } from '../../../components/chart/true-scale.ts';
+import { exaggeration } from '../../../../shared/presentation/true-scale.ts';
 import { useWorked } from '../../alignments/hooks/use-worked.ts';
 import { acrossLayout } from '../across-layout.ts';
 import { useCutBuildings } from '../hooks/use-cut-buildings.ts';

@@ -3,10 +3,10 @@ import type { LongSectionRow } from '../../../../shared/assessment/long-section.
 import type { SettlementOnLine } from '../../../../shared/assessment/settlement-along.ts';
 import { BottomAxis, LeftAxis } from '../../../components/chart/axis.tsx';
 import { BracketLines } from '../../../components/chart/bracket-lines.tsx';
-import { niceTicks } from '../../../components/chart/nice-ticks.ts';
+import { niceTicks } from '../../../../shared/presentation/nice-ticks.ts';
 import { pathBetween, pathOf, type Place } from '../../../components/chart/path-of.ts';
 import { chainageWords } from '../../alignments/chainage-words.ts';
-import { figure } from '../../alignments/design-words.ts';
+import { figure } from '../../../../shared/presentation/design-words.ts';
 import type { AlongLayout } from '../along-layout.ts';
 import { AlongCursor } from './along-cursor.tsx';
 

@@ -1,7 +1,7 @@
 import { useId } from 'react';
 import { hatchFill, HatchPatterns } from '../../../components/ui/hatch-patterns.tsx';
 import { classNames } from '../../../lib/class-names.ts';
-import { DAMAGE } from '../../../theme/damage.ts';
+import { DAMAGE } from '../../../../shared/presentation/damage-style.ts';
 import type { AcrossLayout } from '../across-layout.ts';
 import { labelOf, type ShownBuilding } from '../shown-categories.ts';
 import { StandingWords } from './standing-words.tsx';

@@ -1,6 +1,6 @@
 import { useId } from 'react';
 import { HatchPatterns, hatchFill } from '../../../components/ui/hatch-patterns.tsx';
-import { DAMAGE } from '../../../theme/damage.ts';
+import { DAMAGE } from '../../../../shared/presentation/damage-style.ts';
 import { HOUSES, outlineOf, SECTION, troughPath, type House } from '../street-section.ts';
 
 function HouseInSection({ house, prefix }: { readonly house: House; readonly prefix: string }) {

@@ -11,7 +11,12 @@ import { useWidth } from '../../../hooks/use-width.ts';
 import { runContoursQuery } from '../../runs/api/get-run-contours.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { outlinesQuery } from '../../sections/api/list-outlines.ts';
-import { labelPlace, letterPlace, planFrame, type PlanFrame } from '../plan-frame.ts';
+import {
+  labelPlace,
+  letterPlace,
+  planFrame,
+  type PlanFrame,
+} from '../../../../shared/presentation/plan-frame.ts';
 
 type PlanExtractProps = {
   readonly schemeId: string;

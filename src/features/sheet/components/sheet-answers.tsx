@@ -2,19 +2,22 @@ import type { OpenedWall } from '../../../../shared/assessment/open-wall.ts';
 import type { BuildingSheet } from '../../../../shared/assessment/sheet-of-building.ts';
 import { pieceBesideWall } from '../../../../shared/assessment/piece-beside-wall.ts';
 import { resultOfOutcome } from '../../../../shared/assessment/result-of-outcome.ts';
+import { METHOD_VERSION } from '../../../../shared/method-version.ts';
 import { CAUTIONS } from '../../../../shared/cautions.ts';
 import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
 import { troughWidthMatters } from '../../../../shared/ground/trough-width-matters.ts';
+import { MeasuresPanel } from '../../measures/components/measures-panel.tsx';
+import { DecisionPanel } from '../../decisions/components/decision-panel.tsx';
 import { Panel } from '../../../components/ui/panel.tsx';
-import { breakpointWords, settledWords } from '../../assessment/bracket-words.ts';
+import { breakpointWords, settledWords } from '../../../../shared/presentation/bracket-words.ts';
 import { BracketTable } from '../../assessment/components/bracket-table.tsx';
 import { BreakpointBar } from '../../assessment/components/breakpoint-bar.tsx';
 import { RangeBar } from '../../assessment/components/range-bar.tsx';
 import { Warnings } from '../../assessment/components/warnings.tsx';
 import { WallFacts } from '../../assessment/components/wall-facts.tsx';
-import { strainRange } from '../../assessment/strain-range.ts';
-import { reserveWords, stageWords } from '../../runs/result-words.ts';
-import { assumedWords, plainWords } from '../plain-words.ts';
+import { strainRange } from '../../../../shared/presentation/strain-range.ts';
+import { reserveWords, stageWords } from '../../../../shared/presentation/result-words.ts';
+import { assumedWords, plainWords } from '../../../../shared/presentation/plain-words.ts';
 
 type SheetAnswersProps = {
   readonly run: RunDetail;
@@ -27,6 +30,13 @@ type SheetAnswersProps = {
 function Record({ run, building, sheet }: SheetAnswersProps) {
   const again = JSON.stringify(resultOfOutcome(sheet.outcome));
   const isSame = again === JSON.stringify(building.result);
+  if (!isSame && run.methodVersion !== METHOD_VERSION) {
+    return (
+      <p className="mt-2 text-small text-ink-2">
+        {`Recorded by version ${run.methodVersion} of the method. This page works with version ${METHOD_VERSION}, so figures may differ from the record.`}
+      </p>
+    );
+  }
   return (
     <p className={isSame ? 'mt-2 text-cap text-ink-2' : 'mt-2 text-small text-clay-deep'}>
       {isSame
@@ -101,6 +111,11 @@ export function SheetAnswers(props: SheetAnswersProps) {
         <p className="mt-2 text-small">{stageWords(result)}</p>
         <Warnings names={result.warnings} />
       </Panel>
+      <DecisionPanel
+        run={props.run}
+        building={{ id: Number(building.facts.id), reference: building.facts.reference }}
+      />
+      <MeasuresPanel run={props.run} building={building} />
       <Panel title="Cautions">
         <ul className="mt-2 list-disc pl-4 text-small text-ink-2">
           {CAUTIONS.map((caution) => (

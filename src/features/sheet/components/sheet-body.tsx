@@ -4,6 +4,9 @@ import type { BuildingSheet } from '../../../../shared/assessment/sheet-of-build
 import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
 import { Panel } from '../../../components/ui/panel.tsx';
 import { WorkingList } from '../../assessment/components/working-list.tsx';
+import { can } from '../../schemes/can.ts';
+import { useScheme } from '../../schemes/scheme-context.ts';
+import { VisitsOfBuilding } from '../../visits/components/visits-of-building.tsx';
 import { SheetAnswers } from './sheet-answers.tsx';
 import { SheetPlace } from './sheet-place.tsx';
 import { SheetSection } from './sheet-section.tsx';
@@ -17,6 +20,7 @@ type SheetBodyProps = {
 
 /** What a sheet shows of its building, with one wall opened: the one that governs, until another is chosen. */
 export function SheetBody({ schemeId, run, building, sheet }: SheetBodyProps) {
+  const scheme = useScheme();
   const [chosen, setChosen] = useState<number>();
   const { strain, inputs } = sheet;
   const index = chosen ?? Math.max(0, strain?.governing ?? 0);
@@ -30,6 +34,11 @@ export function SheetBody({ schemeId, run, building, sheet }: SheetBodyProps) {
       <SheetPlace {...{ schemeId, run, building, sheet, index }} onChoose={setChosen} />
       <SheetSection sheet={sheet} index={index} opened={opened} />
       <SheetAnswers {...{ run, building, sheet, opened }} />
+      {can(scheme, 'readVisits') && (
+        <div className="col-span-full mt-5">
+          <VisitsOfBuilding schemeId={schemeId} buildingId={Number(building.facts.id)} />
+        </div>
+      )}
       {opened !== null && (
         <Panel
           title={`Working of wall ${opened.wall.name}`}

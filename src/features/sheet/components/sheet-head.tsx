@@ -2,10 +2,12 @@ import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts'
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { ButtonLink } from '../../../components/ui/button-link.tsx';
+import { buttonStyle } from '../../../components/ui/button-style.ts';
 import { DamageChip } from '../../../components/ui/damage-chip.tsx';
-import { buildingPath, registerPath } from '../../../config/paths.ts';
-import { categoryLabel } from '../../assessment/bracket-words.ts';
-import { stageWords } from '../../runs/result-words.ts';
+import { buildingPath, registerPath, visitPath } from '../../../config/paths.ts';
+import { overBracketWords } from '../../../../shared/presentation/verdict-words.ts';
+import { stageWords } from '../../../../shared/presentation/result-words.ts';
+import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { SheetsBeside } from './sheets-beside.tsx';
 
@@ -16,9 +18,10 @@ type SheetHeadProps = {
 };
 
 function Verdict({ result }: Pick<RunBuilding, 'result'>) {
-  const { category, categoryLow, categoryHigh, fault } = result;
+  const { category, fault } = result;
+  const range = overBracketWords(result);
   if (fault !== null) return <p className="text-roomy font-semibold">Not worked out</p>;
-  if (category === null || categoryLow === null || categoryHigh === null) {
+  if (category === null || range === null) {
     return (
       <p className="text-roomy">
         <b className="font-semibold">{stageWords(result)}</b>
@@ -26,10 +29,6 @@ function Verdict({ result }: Pick<RunBuilding, 'result'>) {
       </p>
     );
   }
-  const range =
-    categoryLow === categoryHigh
-      ? `central; the same over the bracket`
-      : `central; ${categoryLabel(categoryLow)} to ${categoryLabel(categoryHigh)} over the bracket`;
   return (
     <p className="flex items-center gap-3">
       <span className="text-h2">
@@ -50,7 +49,7 @@ export function SheetHead({ schemeId, run, building }: SheetHeadProps) {
   const scheme = useScheme();
   const { facts, result } = building;
   const id = Number(facts.id);
-  const casePath = `/api/schemes/${schemeId}/runs/${run.id}/buildings/${id}/case`;
+  const buildingApi = `/api/schemes/${schemeId}/runs/${run.id}/buildings/${id}`;
   return (
     <header className="flex flex-wrap items-center gap-x-8 gap-y-3 border-b-2 border-ink px-8 py-3.5 max-sm:px-4 print:px-0">
       <div className="min-w-0 flex-1 max-sm:basis-full">
@@ -66,8 +65,16 @@ export function SheetHead({ schemeId, run, building }: SheetHeadProps) {
         <SheetsBeside schemeId={schemeId} runId={run.id} building={building} />
         <ButtonLink to={`${buildingPath(schemeId, id)}&run=${run.id}`}>Show on plan</ButtonLink>
         <ButtonLink to={`${registerPath(schemeId)}?building=${id}`}>Show in register</ButtonLink>
-        <a className="inline-flex items-center text-small underline" href={casePath} download>
+        {can(scheme, 'recordVisits') && <ButtonLink to={visitPath(schemeId, id)}>Visit</ButtonLink>}
+        <a
+          className="inline-flex items-center text-small underline"
+          href={`${buildingApi}/case`}
+          download
+        >
           The case for assess
+        </a>
+        <a className={buttonStyle('plain')} href={`${buildingApi}/sheet.pdf`} download>
+          PDF
         </a>
         <Button
           onClick={() => {

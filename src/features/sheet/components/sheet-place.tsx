@@ -1,9 +1,8 @@
-import { footprintArea } from '../../../../shared/building/footprint-area.ts';
 import type { BuildingSheet } from '../../../../shared/assessment/sheet-of-building.ts';
+import { factsOfRun } from '../../../../shared/presentation/facts-of-run.ts';
 import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
 import { Panel } from '../../../components/ui/panel.tsx';
 import { BuildingFacts } from '../../buildings/components/building-facts.tsx';
-import type { BuildingValues } from '../../buildings/shown-value.ts';
 import { PlanExtract } from './plan-extract.tsx';
 import { WallTable } from './wall-table.tsx';
 
@@ -16,18 +15,6 @@ type SheetPlaceProps = {
   readonly index: number;
   readonly onChoose: (index: number) => void;
 };
-
-/** The register's values as the run took them, in the shape in which they are shown. */
-function valuesOf({ facts, version }: RunBuilding, { prepared }: BuildingSheet): BuildingValues {
-  const { parts, ...values } = facts;
-  return {
-    ...values,
-    area: footprintArea(parts),
-    groundLevelFrom: null,
-    assumed: [...prepared.attributes.assumed],
-    version,
-  };
-}
 
 /** Where the building stands, its walls by letter, and what is known of it. */
 export function SheetPlace(props: SheetPlaceProps) {
@@ -45,7 +32,7 @@ export function SheetPlace(props: SheetPlaceProps) {
         {address !== null && <p className="mt-2 text-small">{address}</p>}
         {/* the heading has its rule already */}
         <div className="[&>dl]:mt-0 [&>dl]:border-t-0">
-          <BuildingFacts building={valuesOf(building, sheet)} />
+          <BuildingFacts building={factsOfRun(building, sheet)} />
         </div>
       </Panel>
     </div>

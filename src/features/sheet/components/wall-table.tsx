@@ -3,7 +3,7 @@ import type { BuildingResult } from '../../../../shared/assessment/assess-buildi
 import { percentFromRatio } from '../../../../shared/units/percent-from-ratio.ts';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
-import { categoryLabel } from '../../assessment/bracket-words.ts';
+import { categoryLabel } from '../../../../shared/presentation/bracket-words.ts';
 
 type Row = {
   readonly index: number;

@@ -1,11 +1,18 @@
 import type { WaitingItem } from '../../../../shared/schemas/waiting.ts';
 import { ButtonLink } from '../../../components/ui/button-link.tsx';
-import { StateShape } from '../../../components/ui/state-mark.tsx';
+import { StateShape, type State } from '../../../components/ui/state-mark.tsx';
 import { formatDaySince } from '../../../lib/format-date.ts';
 import { waitingButton, waitingThing } from '../waiting-words.ts';
 
+const SHAPES: Readonly<Partial<Record<WaitingItem['kind'], State>>> = {
+  'invitations-not-accepted': 'in-hand',
+  'decisions-to-check': 'waiting',
+  'decisions-returned': 'in-hand',
+  'decisions-again': 'visit',
+};
+
 function WaitingRow({ item }: { readonly item: WaitingItem }) {
-  const state = item.kind === 'invitations-not-accepted' ? 'in-hand' : 'not-started';
+  const state = SHAPES[item.kind] ?? 'not-started';
   return (
     <li className="grid min-h-[56px] grid-cols-[22px_44px_minmax(0,1fr)_132px_112px] items-center border-b border-hairline py-2 max-sm:grid-cols-[20px_32px_minmax(0,1fr)_auto] max-sm:gap-y-1.5">
       <StateShape state={state} />

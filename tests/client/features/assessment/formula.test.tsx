@@ -1,10 +1,7 @@
 import { render, screen } from '@testing-library/react';
 import { describe, expect, it } from 'vitest';
 import { FiguresPutIn, Formula } from '../../../../src/features/assessment/formula/formula.tsx';
-import {
-  namesIn,
-  parseExpression,
-} from '../../../../src/features/assessment/formula/parse-expression.ts';
+import { namesIn, parseExpression } from '../../../../shared/presentation/parse-expression.ts';
 
 function written(expression: string): string {
   render(<Formula symbol="r_b" expression={expression} />);

@@ -1,9 +1,6 @@
 import { expect, test } from 'vitest';
-import {
-  namesIn,
-  parseExpression,
-} from '../../../../src/features/assessment/formula/parse-expression.ts';
-import { SYMBOL_WORDS } from '../../../../src/features/assessment/symbol-words.ts';
+import { namesIn, parseExpression } from '../../../../shared/presentation/parse-expression.ts';
+import { SYMBOL_WORDS } from '../../../../shared/presentation/symbol-words.ts';
 import { methodParts, symbolsOf } from '../../../../src/features/method/formulas/method-parts.ts';
 
 const PARTS = methodParts();

@@ -8,7 +8,7 @@ import { aCrsAnswer, anId, aRegisterRow, aSchemeAnswer } from '../../../support/
 import { axeFaults } from '../../../support/axe-faults.ts';
 import { fakeApi } from '../../../support/fake-api.ts';
 import { renderPage } from '../../../support/render-page.tsx';
-import { aRunDetail } from '../../../support/run-answers.ts';
+import { aFunnel, aRunDetail } from '../../../support/run-answers.ts';
 
 const SCHEME = `/api/schemes/${anId(10)}`;
 const RUN = anId(60);
@@ -37,6 +37,7 @@ async function openRegister(path = '/'): Promise<void> {
     [`GET ${SCHEME}/register-views`]: [],
     [`GET ${SCHEME}/runs/${RUN}`]: aRunDetail(),
     [`GET ${SCHEME}/runs`]: [],
+    [`GET ${SCHEME}/funnel`]: aFunnel(RUN),
     [`GET ${SCHEME}/extent`]: {
       ...{ bounds: [0, 50, 1, 51], home: [0, 50, 1, 51], crs: 32631, from: 'buildings' },
     },
@@ -84,19 +85,36 @@ it('shows what the run found, what was let go before, and what was not in it', a
   expect(await axeFaults()).toEqual([]);
 });
 
-it('counts by stage and category, and each number leads to those buildings', async () => {
+it('counts by stage, state and category, and each number leads to those buildings', async () => {
   await openRegister('/?filter={"search":"quay"}');
   const counts = await screen.findByRole('navigation', { name: 'What run 1 found' });
-  const links = within(counts).getAllByRole('link');
-  expect(links.map(({ textContent }) => textContent)).toEqual([
-    ...['Stage 1 195', 'Stage 2 3', 'Stage 3 2'],
+  await within(counts).findByRole('link', { name: 'listed 2' });
+  expect(
+    within(counts)
+      .getAllByRole('link')
+      .map(({ textContent }) => textContent),
+  ).toEqual([
     ...['Category 0, negligible 2', 'Category 1, very slight 2', 'Category 2, slight 1'],
     ...['Category 3, moderate 0', 'Category 4–5, severe to very severe 0', 'Sensitive 3'],
+    ...['listed 2', 'Mine 4'],
   ]);
-  fireEvent.click(within(counts).getByRole('link', { name: 'Stage 3 2' }));
+  const funnel = await screen.findByRole('navigation', { name: 'Stages and states' });
+  expect(
+    within(funnel)
+      .getAllByRole('link')
+      .map(({ textContent }) => textContent),
+  ).toEqual([
+    ...['195Stage 1, screening', '190 to decide', '5 waiting for check'],
+    ...['3Stage 2, strain', '3 to decide', '2Stage 3, detailed', '2 to decide'],
+  ]);
+  fireEvent.click(within(funnel).getByRole('link', { name: '5 waiting for check' }));
+  expect(screen.getByTestId('address').textContent).toBe(
+    '?filter={"any":{"stage":["1"],"state":["waiting+for+check"]}}',
+  );
+  fireEvent.click(within(funnel).getByRole('link', { name: /Stage 3/ }));
   expect(screen.getByTestId('address').textContent).toBe('?filter={"any":{"stage":["3"]}}');
-  const link = await within(counts).findByRole('link', { current: true });
-  expect(link.textContent).toBe('Stage 3 2');
+  const link = await within(funnel).findByRole('link', { current: true });
+  expect(link.textContent).toBe('2Stage 3, detailed');
   expect(screen.getByRole('button', { name: 'Stage: 3' })).toBeTruthy();
 });
 

@@ -14,11 +14,8 @@ import { rebasedDraft } from '../../../../src/features/rules/rebased-draft.ts';
 import { ruleChanges } from '../../../../src/features/rules/rule-lines.ts';
 import { conditionInWords, RULES, ruleValue } from '../../../../src/features/rules/rule-words.ts';
 import { blankLayer, draftOf, rulesOf } from '../../../../src/features/rules/rules-draft.ts';
-import {
-  SOURCE_OPTIONS,
-  sourceInFull,
-  sourceWords,
-} from '../../../../src/features/rules/source-words.ts';
+import { sourceInFull, sourceWords } from '../../../../shared/presentation/source-words.ts';
+import { SOURCE_OPTIONS } from '../../../../src/features/rules/source-options.ts';
 
 const RULES_OF_TODAY = defaultRules('2026-05-01');
 

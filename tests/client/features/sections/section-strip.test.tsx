@@ -10,7 +10,7 @@ import {
 } from '../../../../src/features/sections/hooks/use-section-desk.ts';
 import type { ShownRun } from '../../../../src/features/sections/shown-categories.ts';
 import type { SectionLine } from '../../../../src/features/sections/section-line.ts';
-import { DAMAGE } from '../../../../src/theme/damage.ts';
+import { DAMAGE } from '../../../../shared/presentation/damage-style.ts';
 import { PersonContext } from '../../../../src/features/session/person-context.ts';
 import { anId, aSchemeAnswer } from '../../../support/answers.ts';
 import { axeFaults } from '../../../support/axe-faults.ts';

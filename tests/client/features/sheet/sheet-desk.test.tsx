@@ -36,7 +36,7 @@ function aRunBuilding(north: number, overrides: Partial<RunBuilding> = {}): RunB
   return {
     facts: {
       ...{ reference: 'B0197', name: 'Customs House', address: 'Sill Quay', use: 'offices' },
-      ...{ inspected: null, ...known, parts: [[aRing(-5, north, 10, 30).map(([e, n]) => [e, n])]] },
+      ...{ inspected: null, structureReason: null, featuresReason: null, ...known, parts: [[aRing(-5, north, 10, 30).map(([e, n]) => [e, n])]] },
     },
     version: 1,
     changedSince: false,
@@ -72,6 +72,7 @@ it('shows what a run found of a building, and that it comes out the same again',
   expect(screen.getByText(/the same figures as recorded, to the last digit/)).toBeDefined();
   expect(screen.getByText(/Over the whole range of volume loss and K/)).toBeDefined();
   expect(screen.getByText(/A visit would settle it/)).toBeDefined();
+  expect(screen.getByRole('link', { name: 'PDF' }).getAttribute('href')).toContain('/buildings/7/sheet.pdf'); // prettier-ignore
   expect(screen.getByRole('link', { name: 'The case for assess' }).getAttribute('href')).toContain('/buildings/7/case'); // prettier-ignore
   expect(screen.getByRole('img', { name: /in plan with its walls by letter/ })).toBeDefined();
   expect(await axeFaults()).toEqual([]);
@@ -149,7 +150,7 @@ it('names itself at the foot of each page of paper while it is shown', () => {
   const { unmount } = show(aRunBuilding(2));
   const foot = () => document.documentElement.style.getPropertyValue('--on-every-page');
   expect(foot()).toMatch(
-    /^"Sheet B0197 · Port Dogger crossing · A · Run 1, 1 Dec 2026, .* · method 1\.0\.0"$/,
+    /^"Sheet B0197 · Port Dogger crossing · A · Run 1, 1 Dec 2026, .* · method 1\.1\.0"$/,
   );
   unmount();
   expect(foot()).toBe('');

@@ -6,7 +6,7 @@ import { addHatches, hatchImage } from '../../../../../src/features/map/style/ha
 import { layersOfPlan } from '../../../../../src/features/map/style/layers-of-plan.ts';
 import { faintLayers, rowLayers } from '../../../../../src/features/map/style/row-layers.ts';
 import { ROW_LOOKS } from '../../../../../src/features/map/style/row-looks.ts';
-import { DAMAGE } from '../../../../../src/theme/damage.ts';
+import { DAMAGE } from '../../../../../shared/presentation/damage-style.ts';
 import { mapPlan, tileSet } from '../../../../support/map-plans.ts';
 import { notingMap } from '../../../../support/noting-map.ts';
 

@@ -1,0 +1,62 @@
+import type { Sequelize, Transaction } from 'sequelize';
+import { needsReason, whyNotDecided } from '../../shared/assessment/decision-kinds.ts';
+import type { DecisionKind } from '../../shared/schemas/decisions.ts';
+import type { DecisionBasis } from '../../shared/schemas/decision-answers.ts';
+import type { RegisterFilter } from '../../shared/schemas/register.ts';
+import { findConsidered, type Considered } from '../models/find-considered.ts';
+import { findWaitingAmong } from '../models/decisions.ts';
+import { findRegisterIds } from '../models/find-register-order.ts';
+import { newestRules } from '../models/newest-rules.ts';
+import { registerCondition } from '../models/register-condition.ts';
+import type { Run } from '../models/run.ts';
+import { inThousands, packedIds } from '../register/packed-ids.ts';
+import { concludeBy } from './conclude.ts';
+
+/** What is asked of the buildings that a filter means. */
+export type Proposed = {
+  readonly filter: RegisterFilter;
+  readonly kind: DecisionKind;
+  readonly reason: string;
+};
+
+/** A building that is meant: with what a decision rests on, or why it cannot have it. */
+export type Meant = { readonly building: Considered } & (
+  { readonly basis: DecisionBasis; readonly why: null } | { readonly why: string }
+);
+
+function whyNot(
+  { kind, reason }: Proposed,
+  basis: DecisionBasis | null,
+  isWaiting: boolean,
+): string | null {
+  if (basis === null) return 'It was not in the run.';
+  if (isWaiting) return 'A decision on it waits for a check already.';
+  const why = whyNotDecided(kind, basis);
+  if (why !== null) return why;
+  return needsReason(kind, basis) && reason === '' ? 'A reason has to be given.' : null;
+}
+
+/** The buildings that are meant, a thousand at a time, each with whether it can have the decision. */
+export async function* meantForDecision(
+  database: Sequelize,
+  run: Run,
+  proposed: Proposed,
+  transaction: Transaction | null,
+): AsyncGenerator<Meant[]> {
+  const { schemeId, id: runId, alignmentId: optionId } = run;
+  const { rules } = await newestRules(schemeId, transaction);
+  const conclude = concludeBy(run, rules);
+  const condition = registerCondition({ schemeId, runId, optionId }, proposed.filter);
+  for (const ids of inThousands(packedIds(await findRegisterIds(database, condition)))) {
+    const [considered, waiting] = await Promise.all([
+      findConsidered(database, runId, ids, transaction),
+      findWaitingAmong(database, optionId, ids, transaction),
+    ]);
+    yield considered.map((building): Meant => {
+      const basis = conclude(building);
+      const why = whyNot(proposed, basis, waiting.has(building.id));
+      if (basis === null || why !== null) return { building, why: why ?? '' };
+      return { building, basis, why: null };
+    });
+  }
+}

@@ -1,0 +1,47 @@
+import type { Sequelize, Transaction } from 'sequelize';
+import { DECISION_KINDS, type WaitingDecisions } from '../../shared/schemas/decisions.ts';
+import type { RegisterFilter } from '../../shared/schemas/register.ts';
+import { findWaiting, type WaitingDecision } from '../models/decisions.ts';
+import { findRegisterIds } from '../models/find-register-order.ts';
+import { findShownRun } from '../models/find-shown-run.ts';
+import { registerCondition } from '../models/register-condition.ts';
+import type { Actor } from '../policies/actor.ts';
+import { packedIds } from '../register/packed-ids.ts';
+
+/** The decisions that wait on the buildings that are meant, for the option that is shown. */
+export async function waitingForCheck(
+  database: Sequelize,
+  schemeId: string,
+  filter: RegisterFilter,
+  transaction: Transaction | null,
+): Promise<WaitingDecision[]> {
+  const shown = await findShownRun(database, schemeId, transaction);
+  if (shown.optionId === null) return [];
+  const condition = registerCondition({ schemeId, ...shown }, filter);
+  const ids = packedIds(await findRegisterIds(database, condition));
+  return findWaiting(database, shown.optionId, ids.slice(0, ids.count), transaction);
+}
+
+/** Whether somebody may check a decision: not their own, and not on a basis that has changed. */
+export function mayCheck(
+  { preparedBy, isChanged }: Pick<WaitingDecision, 'preparedBy' | 'isChanged'>,
+  { id }: Pick<Actor, 'id'>,
+): boolean {
+  return preparedBy !== id && !isChanged;
+}
+
+/** What waits, counted for whoever would check it. */
+export function countWaiting(waiting: readonly WaitingDecision[], by: Actor): WaitingDecisions {
+  const open = waiting.filter((decision) => mayCheck(decision, by));
+  const kinds = DECISION_KINDS.map((kind) => ({
+    kind,
+    count: open.filter((decision) => decision.kind === kind).length,
+  }));
+  return {
+    kinds: kinds.filter(({ count }) => count > 0),
+    may: open.length,
+    own: waiting.filter(({ preparedBy }) => preparedBy === by.id).length,
+    changed: waiting.filter(({ isChanged, preparedBy }) => isChanged && preparedBy !== by.id)
+      .length,
+  };
+}

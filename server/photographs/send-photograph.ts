@@ -1,0 +1,47 @@
+import type { Request, Response } from 'express';
+import { AppError } from '../errors.ts';
+import { VisitPhotographFile } from '../models/visit-photograph-file.ts';
+import type { VisitPhotograph } from '../models/visit-photograph.ts';
+import type { Services } from '../services.ts';
+import { placeOfPhotograph } from './photograph-folder.ts';
+
+const ENDINGS = { 'image/jpeg': 'jpg', 'image/png': 'png', 'image/webp': 'webp' } as const;
+
+type PhotographCall = {
+  readonly services: Services;
+  readonly req: Request;
+  readonly res: Response;
+};
+
+function sendFile(res: Response, root: string, sha256: string): Promise<void> {
+  const own = { root, dotfiles: 'allow', cacheControl: false, lastModified: false, etag: false } as const; // prettier-ignore
+  return new Promise((resolve, reject) => {
+    res.sendFile(placeOfPhotograph(sha256), own, (error?: Error) => {
+      // whoever has seen enough goes; what was sent cannot be taken back
+      if (error === undefined || res.headersSent) resolve();
+      else reject(new AppError('not-found', 'The file of this photograph is not on this server.'));
+    });
+  });
+}
+
+/**
+ * Sends a photograph as what our record says that it is. A browser may keep it for the person and asks each
+ * time whether they may still see it.
+ */
+export async function sendPhotograph(
+  { services, req, res }: PhotographCall,
+  photograph: VisitPhotograph,
+): Promise<void> {
+  const file = await VisitPhotographFile.findByPk(photograph.id);
+  if (file === null) throw new AppError('not-found', 'This photograph has not arrived yet.');
+  res.set({
+    'Content-Type': file.type,
+    'X-Content-Type-Options': 'nosniff',
+    'Content-Disposition': `inline; filename="photograph-${photograph.number + 1}.${ENDINGS[file.type]}"`,
+    'Content-Security-Policy': "default-src 'none'; sandbox",
+    'Cache-Control': 'private, no-cache',
+    ETag: `"${file.sha256}"`,
+  });
+  if (req.fresh) res.status(304).end();
+  else await sendFile(res, services.env.PHOTOGRAPHS_FOLDER, file.sha256);
+}

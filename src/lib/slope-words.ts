@@ -1,4 +1,0 @@
-/** A slope as it is said, `1 in 780`, whichever way it falls; level ground has none. */
-export function slopeWords(slope: number): string {
-  return slope === 0 ? 'none' : `1 in ${Math.round(1 / Math.abs(slope))}`;
-}
