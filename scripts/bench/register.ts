@@ -2,7 +2,7 @@ import { Readable, Writable } from 'node:stream';
 import { pipeline } from 'node:stream/promises';
 import type { Sequelize } from 'sequelize';
 import { REGISTER_COLUMNS, REGISTER_ORDER } from '../../shared/schemas/register.ts';
-import { isResultColumn } from '../../shared/schemas/result-columns.ts';
+import { isBesideColumn } from '../../shared/schemas/standing-columns.ts';
 import { changeRegister } from '../../server/commands/change-register.ts';
 import { connectDatabase } from '../../server/database/connect.ts';
 import { exportedBuildings } from '../../server/exports/exported-buildings.ts';
@@ -104,7 +104,7 @@ export async function benchRegister(url: string): Promise<void> {
     await untilLookedAfter(database, 'buildings');
     const register = await registerOf({ database }, scheme);
     const bench = { services: { database, tiles: createTileCache() }, register };
-    const own = REGISTER_COLUMNS.filter((column) => !isResultColumn(column));
+    const own = REGISTER_COLUMNS.filter((column) => !isBesideColumn(column));
     await benchPages(bench, own, FILTERS);
     await benchTiles(database, scheme);
     await benchExports(bench);

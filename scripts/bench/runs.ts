@@ -9,6 +9,7 @@ import { openServices } from '../../server/open-services.ts';
 import { registerOf } from '../../server/register/register-of.ts';
 import type { Services } from '../../server/services.ts';
 import { RESULT_COLUMN_NAMES } from '../../shared/schemas/result-columns.ts';
+import { benchDecisions } from './decisions.ts';
 import { untilLookedAfter } from './looked-after.ts';
 import { benchPages, type NamedFilter } from './register-pages.ts';
 import { townToRun } from './town-to-run.ts';
@@ -85,6 +86,7 @@ export async function benchRuns(url: string): Promise<void> {
     await untilLookedAfter(services.database, 'run_results');
     const bench = { services, register: await registerOf(services, scheme) };
     await benchPages(bench, RESULT_COLUMN_NAMES, FOUND);
+    await benchDecisions(services, scheme);
   } finally {
     await closeServices();
   }

@@ -4,7 +4,8 @@ import {
   measuresQuerySchema,
   measureValuesSchema,
 } from '../../shared/schemas/measures.ts';
-import { addMeasure, changeMeasure } from '../commands/keep-measure.ts';
+import { addMeasure } from '../commands/add-measure.ts';
+import { changeMeasure } from '../commands/change-measure.ts';
 import { findMeasures } from '../models/measures.ts';
 import { presentMeasure } from '../presenters/measure.ts';
 import { defineRoute } from './define-route.ts';

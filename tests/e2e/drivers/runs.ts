@@ -1,6 +1,12 @@
 import { z } from 'zod';
 import { alignmentsSchema } from '../../../shared/schemas/alignments.ts';
-import { runCountsSchema, runDetailSchema, runSchema, runsSchema, type RunDetail } from '../../../shared/schemas/runs.ts';
+import {
+  runCountsSchema,
+  runDetailSchema,
+  runSchema,
+  runsSchema,
+  type RunDetail,
+} from '../../../shared/schemas/runs.ts';
 import { sessionSchema } from '../../../shared/schemas/session.ts';
 import { mapIsStill } from './plan.ts';
 import type { Visitor } from './visitor.ts';
