@@ -1,6 +1,7 @@
 import { DEFAULT_HOLDS } from '../../shared/assessment/holds.ts';
 import { DEFAULT_RULES, type AssessmentRules } from '../../shared/assessment/rules.ts';
 import { DEFAULT_SCREENING_LIMITS } from '../../shared/assessment/screening.ts';
+import { DEFAULT_SENSITIVITY } from '../../shared/damage/sensitivity-score.ts';
 import type { ReferenceKey } from '../../shared/references.ts';
 import type { RuleSet } from '../../shared/schemas/rules.ts';
 
@@ -26,5 +27,6 @@ export function defaultRules(date: string): RuleSet {
     horizontalStrain: { value: horizontalStrain, source: SOURCES.horizontalStrain, date },
     compression: { value: compression, source: SOURCES.compression, date },
     leadingCategory: { value: leadingCategory, source: SOURCES.leadingCategory, date },
+    sensitivity: { value: DEFAULT_SENSITIVITY, source: 'common-practice', date },
   };
 }

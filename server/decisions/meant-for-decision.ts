@@ -5,11 +5,10 @@ import type { DecisionBasis } from '../../shared/schemas/decision-answers.ts';
 import type { RegisterFilter } from '../../shared/schemas/register.ts';
 import { findConsidered, type Considered } from '../models/find-considered.ts';
 import { findWaitingAmong } from '../models/decisions.ts';
-import { findRegisterIds } from '../models/find-register-order.ts';
 import { newestRules } from '../models/newest-rules.ts';
-import { registerCondition } from '../models/register-condition.ts';
 import type { Run } from '../models/run.ts';
-import { inThousands, packedIds } from '../register/packed-ids.ts';
+import { inBatches } from '../register/in-batches.ts';
+import { meantIds } from '../register/meant-ids.ts';
 import { concludeBy } from './conclude.ts';
 
 /** What is asked of the buildings that a filter means. */
@@ -36,7 +35,7 @@ function whyNot(
   return needsReason(kind, basis) && reason === '' ? 'A reason has to be given.' : null;
 }
 
-/** The buildings that are meant, a thousand at a time, each with whether it can have the decision. */
+/** The buildings that are meant, part by part, each with whether it can have the decision. */
 export async function* meantForDecision(
   database: Sequelize,
   run: Run,
@@ -46,8 +45,9 @@ export async function* meantForDecision(
   const { schemeId, id: runId, alignmentId: optionId } = run;
   const { rules } = await newestRules(schemeId, transaction);
   const conclude = concludeBy(run, rules);
-  const condition = registerCondition({ schemeId, runId, optionId }, proposed.filter);
-  for (const ids of inThousands(packedIds(await findRegisterIds(database, condition)))) {
+  const register = { schemeId, runId, optionId };
+  const meant = await meantIds({ database, transaction }, register, proposed.filter);
+  for await (const ids of inBatches(meant)) {
     const [considered, waiting] = await Promise.all([
       findConsidered(database, runId, ids, transaction),
       findWaitingAmong(database, optionId, ids, transaction),

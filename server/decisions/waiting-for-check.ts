@@ -2,11 +2,9 @@ import type { Sequelize, Transaction } from 'sequelize';
 import { DECISION_KINDS, type WaitingDecisions } from '../../shared/schemas/decisions.ts';
 import type { RegisterFilter } from '../../shared/schemas/register.ts';
 import { findWaiting, type WaitingDecision } from '../models/decisions.ts';
-import { findRegisterIds } from '../models/find-register-order.ts';
 import { findShownRun } from '../models/find-shown-run.ts';
-import { registerCondition } from '../models/register-condition.ts';
 import type { Actor } from '../policies/actor.ts';
-import { packedIds } from '../register/packed-ids.ts';
+import { meantIds } from '../register/meant-ids.ts';
 
 /** The decisions that wait on the buildings that are meant, for the option that is shown. */
 export async function waitingForCheck(
@@ -17,9 +15,8 @@ export async function waitingForCheck(
 ): Promise<WaitingDecision[]> {
   const shown = await findShownRun(database, schemeId, transaction);
   if (shown.optionId === null) return [];
-  const condition = registerCondition({ schemeId, ...shown }, filter);
-  const ids = packedIds(await findRegisterIds(database, condition));
-  return findWaiting(database, shown.optionId, ids.slice(0, ids.count), transaction);
+  const ids = await meantIds({ database, transaction }, { schemeId, ...shown }, filter);
+  return findWaiting(database, shown.optionId, ids, transaction);
 }
 
 /** Whether somebody may check a decision: not their own, and not on a basis that has changed. */

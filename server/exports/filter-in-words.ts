@@ -25,7 +25,7 @@ function rangesInWords({ ranges = {} }: RegisterFilter): string[] {
 
 /** A filter as people read it on a sheet. */
 export function filterInWords(filter: RegisterFilter): string {
-  const { search, assumed, importId, within, ids, except } = filter;
+  const { search, assumed, importId, within, inside, ids, except } = filter;
   const conditions = [
     ...(search !== undefined && search !== '' ? [`Words: ${search}`] : []),
     ...anyInWords(filter),
@@ -34,6 +34,7 @@ export function filterInWords(filter: RegisterFilter): string {
     ...(assumed === false ? ['Nothing has to be assumed'] : []),
     ...(importId === undefined ? [] : [`From import ${importId}`]),
     ...(within === undefined ? [] : [`In the box ${within.join(', ')} (degrees)`]),
+    ...(inside === undefined ? [] : [`Inside an outline of ${inside.length} corners on the map`]),
     ...(ids === undefined ? [] : [`${ids.length} chosen buildings`]),
     ...(except === undefined ? [] : [`All but ${except.length} of them`]),
   ];

@@ -1,4 +1,4 @@
-import { QueryTypes, type Sequelize } from 'sequelize';
+import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
 import type { RegisterColumn, RegisterSort } from '../../shared/schemas/register.ts';
 import { findPackedIds } from './find-packed-ids.ts';
 import { registerColumn } from './register-columns.ts';
@@ -66,6 +66,8 @@ export async function findRegisterGroups(
 export function findRegisterIds(
   database: Sequelize,
   { from, where, bind }: Condition,
+  transaction: Transaction | null,
 ): Promise<Buffer> {
-  return findPackedIds(database, `select id from ${from} where ${where} order by id`, bind);
+  const query = `select id from ${from} where ${where} order by id`;
+  return findPackedIds(database, query, bind, transaction);
 }

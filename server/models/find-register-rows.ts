@@ -47,14 +47,14 @@ export async function findChoices(
   );
 }
 
-/** The buildings that are meant, each with its version. */
+/** Some buildings, each with its version. */
 export async function findVersions(
   database: Sequelize,
-  { from, where, bind }: Condition,
+  ids: readonly number[],
   transaction: Transaction,
 ): Promise<{ id: number; version: number }[]> {
   return database.query<{ id: number; version: number }>(
-    `select id, version from ${from} where ${where} order by id`,
-    { type: QueryTypes.SELECT, bind: [...bind], transaction },
+    'select id, version from buildings where id = any($1::integer[]) order by id',
+    { type: QueryTypes.SELECT, bind: [ids], transaction },
   );
 }

@@ -7,7 +7,6 @@ import {
   type RegisterFilter,
 } from '../../shared/schemas/register.ts';
 import { isResultColumn } from '../../shared/schemas/result-columns.ts';
-import { isStandingColumn } from '../../shared/schemas/standing-columns.ts';
 import { AppError } from '../errors.ts';
 import { NUMBER_COLUMNS, registerColumn, registerField } from './register-columns.ts';
 import { buildingsBeside } from './columns-beside.ts';
@@ -74,16 +73,41 @@ function rangesSql(ranges: NonNullable<RegisterFilter['ranges']>, bind: Bind): s
   });
 }
 
-function placeSql({ within, ids, except, importId }: RegisterFilter, bind: Bind): string[] {
+type Box = readonly [west: string, south: string, east: string, north: string];
+
+function boxSql(degrees: readonly number[], bind: Bind): Box {
+  const [west = '', south = '', east = '', north = ''] = degrees.map(
+    (value) => `${bind(value)}::double precision`,
+  );
+  return [west, south, east, north];
+}
+
+function meetsSql([west, south, east, north]: Box): string {
+  return `box(point(west, south), point(east, north)) && box(point(${west}, ${south}), point(${east}, ${north}))`;
+}
+
+/** The database takes products of sides under a millionth for nothing, which in degrees swallows houses. */
+const FINE = 1e6;
+
+/** The box comes first, since it is what has an index. */
+function insideSql(outline: NonNullable<RegisterFilter['inside']>, bind: Bind): string[] {
+  const [longitudes, latitudes] = [
+    outline.map(([east]) => east),
+    outline.map(([, north]) => north),
+  ];
+  const [least, lowest] = [Math.min(...longitudes), Math.min(...latitudes)];
+  const box = boxSql([least, lowest, Math.max(...longitudes), Math.max(...latitudes)], bind);
+  const corners = outline.map(([east, north]) => {
+    return `(${(east - least) * FINE},${(north - lowest) * FINE})`;
+  });
+  const middle = `point(((west + east) / 2 - ${box[0]}) * ${FINE}, ((south + north) / 2 - ${box[1]}) * ${FINE})`;
+  return [meetsSql(box), `${bind(`(${corners.join(',')})`)}::polygon @> ${middle}`];
+}
+
+function placeSql({ within, inside, ids, except, importId }: RegisterFilter, bind: Bind): string[] {
   const conditions: string[] = [];
-  if (within !== undefined) {
-    const [west, south, east, north] = within.map(
-      (degrees) => `${bind(degrees)}::double precision`,
-    );
-    conditions.push(
-      `box(point(west, south), point(east, north)) && box(point(${west}, ${south}), point(${east}, ${north}))`,
-    );
-  }
+  if (within !== undefined) conditions.push(meetsSql(boxSql(within, bind)));
+  if (inside !== undefined) conditions.push(...insideSql(inside, bind));
   if (ids !== undefined) conditions.push(`id = any(${bind(ids)}::integer[])`);
   if (except !== undefined) conditions.push(`id <> all(${bind(except)}::integer[])`);
   if (importId !== undefined) {
@@ -93,11 +117,8 @@ function placeSql({ within, ids, except, importId }: RegisterFilter, bind: Bind)
   return conditions;
 }
 
-/** What a filter, and a column beside it, hang on besides the buildings themselves. */
-export type Asked = { readonly results: boolean; readonly standings: boolean };
-
-/** Whether a filter, or a column beside it, hangs on what a run found or on where buildings stand. */
-export function askedBeside(filter: RegisterFilter, column?: RegisterColumn): Asked {
+/** Whether a filter, or a column beside it, hangs on what a run found. */
+export function asksResults(filter: RegisterFilter, column?: RegisterColumn): boolean {
   const { any = {}, ranges = {}, unknown = [] } = filter;
   const asked = [
     ...Object.keys(any),
@@ -105,23 +126,12 @@ export function askedBeside(filter: RegisterFilter, column?: RegisterColumn): As
     ...unknown,
     ...(column ? [column] : []),
   ];
-  const standings = asked.some(isStandingColumn);
-  return { results: standings || asked.some(isResultColumn), standings };
-}
-
-function fromSql(
-  { runId, optionId }: RegisterOf,
-  { results, standings }: Asked,
-  bind: Bind,
-): string {
-  if (!results) return 'buildings';
-  const run = bind(runId);
-  return buildingsBeside(standings ? { run, option: bind(optionId) } : { run });
+  return asked.some(isResultColumn);
 }
 
 /**
- * The buildings of a register that a filter means; `column` is what else will be asked of them. Results and
- * standings are looked up only where they are asked for.
+ * The buildings of a register that a filter means; `column` is what else will be asked of them. Results are
+ * looked up only where they are asked for. What a filter asks of standings is split off before.
  */
 export function registerCondition(
   register: RegisterOf,
@@ -130,7 +140,9 @@ export function registerCondition(
 ): Condition {
   const values: unknown[] = [register.schemeId];
   const bind: Bind = (value) => `$${values.push(value)}`;
-  const from = fromSql(register, askedBeside(filter, column), bind);
+  const from = asksResults(filter, column)
+    ? buildingsBeside({ run: bind(register.runId) })
+    : 'buildings';
   const { search, any = {}, ranges = {}, unknown = [], assumed } = filter;
   const conditions = ['scheme_id = $1', 'removed_at is null'];
   if (search !== undefined && search !== '') {

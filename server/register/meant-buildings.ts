@@ -3,7 +3,7 @@ import type { RegisterFilter } from '../../shared/schemas/register.ts';
 import { AppError } from '../errors.ts';
 import { findShownRun } from '../models/find-shown-run.ts';
 import { findVersions } from '../models/find-register-rows.ts';
-import { registerCondition } from '../models/register-condition.ts';
+import { meantIds } from './meant-ids.ts';
 import type { VersionedBuilding } from './register-edits.ts';
 
 type Meant = { readonly filter: RegisterFilter; readonly expected: number };
@@ -16,7 +16,8 @@ export async function meantBuildings(
   transaction: Transaction,
 ): Promise<VersionedBuilding[]> {
   const register = { schemeId, ...(await findShownRun(database, schemeId, transaction)) };
-  const found = await findVersions(database, registerCondition(register, filter), transaction);
+  const ids = await meantIds({ database, transaction }, register, filter);
+  const found = await findVersions(database, ids, transaction);
   if (found.length === expected) return found;
   const message = `These are ${found.length} buildings now, not ${expected}. Look at them again.`;
   throw new AppError('conflict', message);

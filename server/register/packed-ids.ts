@@ -15,6 +15,18 @@ export function packIds(ids: Int32Array): Buffer {
   return Buffer.from(view.buffer);
 }
 
+/** Numbers as the database packs them, one after the other. */
+export function* unpackBigEndian(bytes: Buffer): Generator<number> {
+  for (let k = 0; k < bytes.byteLength; k += BYTES) yield bytes.readInt32BE(k);
+}
+
+/** The same the other way. */
+export function packBigEndian(ids: readonly number[]): Buffer {
+  const bytes = Buffer.alloc(BYTES * ids.length);
+  ids.forEach((id, k) => bytes.writeInt32BE(id, BYTES * k));
+  return bytes;
+}
+
 /** Numbers of buildings, packed. */
 export type PackedIds = {
   readonly count: number;

@@ -3,25 +3,30 @@ import {
   type RegisterFilter,
   type RegisterSort,
 } from '../../shared/schemas/register.ts';
-import {
-  findReferenceOrder,
-  findRegisterGroups,
-  findRegisterIds,
-} from '../models/find-register-order.ts';
+import { isStandingColumn } from '../../shared/schemas/standing-columns.ts';
+import { findReferenceOrder, findRegisterGroups } from '../models/find-register-order.ts';
+import { findRunIds } from '../models/find-standing-groups.ts';
 import { countRows } from '../models/find-register-rows.ts';
-import { askedBeside, registerCondition } from '../models/register-condition.ts';
+import { asksResults, registerCondition } from '../models/register-condition.ts';
 import type { Services } from '../services.ts';
 import { orderGroups } from './order-groups.ts';
-import { packedIds, type PackedIds } from './packed-ids.ts';
+import { meantIds } from './meant-ids.ts';
+import { packBigEndian, packedIds, unpackBigEndian, type PackedIds } from './packed-ids.ts';
 import type { Register } from './register-of.ts';
+import { inOrderOfStanding, splitFilter, standingAs, type Reading } from './standings.ts';
 
 type Which = { readonly filter: RegisterFilter; readonly sort: RegisterSort };
 
 function keyOf(what: string, register: Register, which: Which): string {
   const { schemeId, version, runId, decisionsVersion } = register;
-  const asked = askedBeside(which.filter, which.sort.column);
-  const beside = `${asked.results ? runId : null}/${asked.standings ? decisionsVersion : null}`;
-  return `${what}/${schemeId}/${version}/${beside}/${JSON.stringify(which)}`;
+  const { rest, standing } = splitFilter(which.filter);
+  const { column } = which.sort;
+  const stands = standing !== null || isStandingColumn(column);
+  const beside = [
+    stands || asksResults(rest, column) ? runId : null,
+    stands ? decisionsVersion : null,
+  ];
+  return `${what}/${schemeId}/${version}/${beside.join('/')}/${JSON.stringify(which)}`;
 }
 
 /** Whether the buildings that a filter means have been put in order already. */
@@ -36,6 +41,14 @@ export function isOrdered(
 const BYTES = 4;
 
 type Kept = Pick<Services, 'database' | 'tiles'>;
+
+/** Reads standings with what is kept: what a run has never changes. */
+function readingOf({ database, tiles }: Kept): Reading {
+  return {
+    ...{ database, transaction: null },
+    runIds: (runId) => tiles.get(`in run/${runId}`, () => findRunIds(database, runId, null)),
+  };
+}
 
 /** By one column, then by reference: the order by reference is that of the whole register, kept for all. */
 async function makeOrder(
@@ -55,9 +68,19 @@ async function makeOrder(
 }
 
 function packedOrder(services: Kept, register: Register, which: Which): Promise<Buffer> {
-  return services.tiles.get(keyOf('order', register, which), () =>
-    makeOrder(services, register, which),
-  );
+  const { rest, standing } = splitFilter(which.filter);
+  const { column, descending } = which.sort;
+  return services.tiles.get(keyOf('order', register, which), async () => {
+    const order = isStandingColumn(column) ? { column, descending } : null;
+    if (standing === null && order === null) return makeOrder(services, register, which);
+    const sort = order === null ? which.sort : REGISTER_ORDER;
+    const all = await packedOrder(services, register, { filter: rest, sort });
+    const reading = readingOf(services);
+    const found = await standingAs(reading, register, unpackBigEndian(all), standing ?? {});
+    return packBigEndian(
+      order === null ? found : await inOrderOfStanding(reading, register, found, order),
+    );
+  });
 }
 
 /**
@@ -74,13 +97,11 @@ export async function registerOrder(
 
 /** The numbers of the buildings that a filter means, ascending. */
 export async function registerIds(
-  { database }: Pick<Services, 'database'>,
+  services: Kept,
   register: Register,
   filter: RegisterFilter,
 ): Promise<number[]> {
-  const condition = registerCondition(register, filter);
-  const ids = packedIds(await findRegisterIds(database, condition));
-  return ids.slice(0, ids.count);
+  return meantIds(readingOf(services), register, filter);
 }
 
 /** How many buildings a filter means, kept as their order is. */
@@ -89,7 +110,11 @@ export async function registerCount(
   register: Register,
   filter: RegisterFilter,
 ): Promise<number> {
-  const key = keyOf('count', register, { filter, sort: REGISTER_ORDER });
+  const which = { filter, sort: REGISTER_ORDER };
+  if (splitFilter(filter).standing !== null) {
+    return (await registerOrder({ database, tiles }, register, which)).count;
+  }
+  const key = keyOf('count', register, which);
   const count = await tiles.get(key, async () => {
     const bytes = Buffer.alloc(BYTES);
     bytes.writeInt32BE(await countRows(database, registerCondition(register, filter)));

@@ -1,12 +1,14 @@
 import type { z } from 'zod';
 import type { registerQuerySchema } from '../../shared/schemas/register.ts';
+import { isBesideColumn } from '../../shared/schemas/standing-columns.ts';
 import { findFirstIds } from '../models/find-first-ids.ts';
 import { findRows } from '../models/find-register-rows.ts';
-import { askedBeside, registerCondition } from '../models/register-condition.ts';
+import { registerCondition } from '../models/register-condition.ts';
 import type { ListedBuilding } from '../presenters/building-values.ts';
 import type { Services } from '../services.ts';
 import type { Register } from './register-of.ts';
 import { isOrdered, registerCount, registerOrder } from './register-order.ts';
+import { splitFilter } from './standings.ts';
 
 /** So far the database looks by itself; further down all of it is put in order once and kept. */
 const NEAR = 400;
@@ -21,8 +23,9 @@ export async function registerPage(
   const { filter, sort, offset, limit } = query;
   const which = { filter, sort };
   // what stands beside has no index: all in order once is quicker than looking for the ends of it
-  const isFar = offset + limit > NEAR || askedBeside({}, sort.column).results;
-  if (isFar || isOrdered(services, register, which)) {
+  const isFar = offset + limit > NEAR || isBesideColumn(sort.column);
+  const stands = splitFilter(filter).standing !== null;
+  if (isFar || stands || isOrdered(services, register, which)) {
     const order = await registerOrder(services, register, which);
     const [rows, all] = await Promise.all([
       findRows(database, register, order.slice(offset, offset + limit)),

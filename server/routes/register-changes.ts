@@ -22,6 +22,7 @@ import { countValues } from '../models/count-values.ts';
 import { findBuilding, findBuildingEverKept } from '../models/find-building.ts';
 import { findHistory } from '../models/find-building-changes.ts';
 import { registerCondition } from '../models/register-condition.ts';
+import { registerIds } from '../register/register-order.ts';
 import { registerOf } from '../register/register-of.ts';
 import { schemeAbilities } from '../policies/scheme-policy.ts';
 import { presentHistory } from '../presenters/building-history.ts';
@@ -51,7 +52,8 @@ export const registerChangeRoutes = [
     body: previewManySchema,
     handle: async ({ services, scheme, body: { filter, attributes } }) => {
       const register = await registerOf(services, scheme);
-      return countValues(services.database, registerCondition(register, filter), attributes);
+      const ids = await registerIds(services, register, filter);
+      return countValues(services.database, registerCondition(register, { ids }), attributes);
     },
   }),
   defineRoute({

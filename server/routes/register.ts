@@ -5,9 +5,11 @@ import {
   registerPlaceQuerySchema,
   registerQuerySchema,
 } from '../../shared/schemas/register.ts';
+import { isStandingColumn } from '../../shared/schemas/standing-columns.ts';
 import { findChoices } from '../models/find-register-rows.ts';
 import { registerCondition } from '../models/register-condition.ts';
 import { presentRegisterPage } from '../presenters/register.ts';
+import { standingChoices } from '../register/standing-choices.ts';
 import { registerOf } from '../register/register-of.ts';
 import { registerIds, registerOrder } from '../register/register-order.ts';
 import { registerPage } from '../register/register-page.ts';
@@ -52,11 +54,9 @@ export const registerRoutes = [
     params: registerChoicesParamsSchema,
     handle: async ({ services, scheme, params }) => {
       const register = await registerOf(services, scheme);
-      return findChoices(
-        services.database,
-        registerCondition(register, {}, params.field),
-        params.field,
-      );
+      const { field } = params;
+      if (isStandingColumn(field)) return standingChoices(services, register, field);
+      return findChoices(services.database, registerCondition(register, {}, field), field);
     },
   }),
   defineRoute({

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { BUILDING_FIELD_NAMES } from './building-fields.ts';
 import { jsonText } from './json-text.ts';
+import { mapOutlineSchema } from './map-outline.ts';
 import { RESULT_COLUMN_NAMES, resultColumnsShape } from './result-columns.ts';
 import { STANDING_COLUMN_NAMES, standingColumnsShape } from './standing-columns.ts';
 
@@ -60,9 +61,10 @@ const named = z.array(z.number().int().positive()).max(MOST_NAMED_BUILDINGS);
 /**
  * Which buildings of a register are meant: all conditions together; an empty filter means all of them.
  *
- * Units: ranges in the unit of their column; within is west, south, east, north in degrees. Valid: `any`
+ * Units: ranges in the unit of their column; within is west, south, east, north in degrees,
+ * inside longitude and latitude of the corners of an outline. Valid: `any`
  * holds the wanted values of a field, null for unknown, those of results as text; `assumed` tells whether the method has to assume
- * something; `ids` are the only ones meant, `except` are left out. Source: [own].
+ * something; `inside` means by the middle of a building, and the outline closes itself; `ids` are the only ones meant, `except` are left out. Source: [own].
  */
 export const registerFilterSchema = z.strictObject({
   search: z
@@ -82,6 +84,7 @@ export const registerFilterSchema = z.strictObject({
   assumed: z.boolean().optional(),
   importId: z.uuid().optional(),
   within: z.tuple([z.number(), z.number(), z.number(), z.number()]).optional(),
+  inside: mapOutlineSchema.optional(),
   ids: named.optional(),
   except: named.optional(),
 });

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { DEFAULT_SENSITIVITY } from '../damage/sensitivity-score.ts';
 import { REFERENCES, type ReferenceKey } from '../references.ts';
 import { LIMITS } from './limits.ts';
 
@@ -7,7 +8,10 @@ import { LIMITS } from './limits.ts';
  *
  * Units: pieces, characters. Valid: read only. Source: [own].
  */
-export const RULE_LIMITS = { holds: 50, layers: 50, name: 200 } as const;
+export const RULE_LIMITS = { holds: 50, layers: 50, reasons: 30, name: 200 } as const;
+
+/** The day from which the default reasons hold in rules that were kept before there were any. */
+const REASONS_FROM = '2026-12-01';
 
 const source = z.custom<ReferenceKey>(
   (value) => typeof value === 'string' && Object.hasOwn(REFERENCES, value),
@@ -67,13 +71,17 @@ const condition = z.discriminatedUnion('kind', [
   }),
 ]);
 
-const hold = z.strictObject({
-  name: z
+function nameOf(missing: string, broken: string) {
+  return z
     .string()
     .trim()
-    .min(1, 'Give it a name.')
+    .min(1, missing)
     .max(RULE_LIMITS.name)
-    .regex(/^\P{Cc}*$/u, 'Write the name on one line.'),
+    .regex(/^\P{Cc}*$/u, broken);
+}
+
+const hold = z.strictObject({
+  name: nameOf('Give it a name.', 'Write the name on one line.'),
   condition,
   stages: z
     .array(z.union([z.literal(1), z.literal(2)]))
@@ -83,6 +91,22 @@ const hold = z.strictObject({
   source,
   date,
 });
+
+const reasons = z
+  .array(
+    z.strictObject({
+      score: z.union([z.literal(0), z.literal(1), z.literal(2)]),
+      reason: nameOf('Give the reason.', 'Write the reason on one line.'),
+    }),
+  )
+  .max(RULE_LIMITS.reasons, `At most ${RULE_LIMITS.reasons} reasons.`)
+  .refine(
+    (given) => new Set(given.map(({ reason }) => reason)).size === given.length,
+    'Give each reason once.',
+  )
+  .readonly();
+
+const sensitivity = ruled(z.strictObject({ structure: reasons, features: reasons }));
 
 const leadingCategory = z
   .union([z.literal(0), z.literal(1), z.literal(2), z.literal(3), z.literal(4)])
@@ -95,10 +119,11 @@ const limits = z.strictObject({
 
 /**
  * The rules and limits of a scheme, each with its source and the day from which it holds. It mirrors
- * AssessmentRules, ScreeningLimits and Hold of the method.
+ * AssessmentRules, ScreeningLimits and Hold of the method. The reasons of sensitivity are offered to who
+ * scores a building; rules that were kept without them have the default ones.
  *
- * Units: lengths m, slope m/m, K and total without unit. Valid: strict; settlement of cutOff 0 means
- * nothing is ignored; holds by different names. Source: [own] for the shape; each rule names its own.
+ * Units: lengths m, slope m/m, K, scores and total without unit. Valid: strict; settlement of cutOff 0
+ * means nothing is ignored; holds by different names; a reason once in its kind. Source: [own] for the shape; each rule names its own.
  */
 export const rulesSchema = z.strictObject({
   screening: ruled(limits),
@@ -116,6 +141,11 @@ export const rulesSchema = z.strictObject({
   horizontalStrain: ruled(z.enum(['average', 'peak'])),
   compression: ruled(z.enum(['counted', 'zero'])),
   leadingCategory: ruled(leadingCategory),
+  sensitivity: sensitivity.default({
+    value: DEFAULT_SENSITIVITY,
+    source: 'common-practice',
+    date: REASONS_FROM,
+  }),
 });
 
 /**

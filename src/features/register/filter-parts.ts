@@ -7,12 +7,18 @@ import {
 
 /** What a filter can ask for beside words: one chip each. */
 export type FilterPart =
-  Exclude<RegisterColumn, 'reference'> | 'assumed' | 'within' | 'importId' | 'ids' | 'except';
+  | Exclude<RegisterColumn, 'reference'>
+  | 'assumed'
+  | 'within'
+  | 'inside'
+  | 'importId'
+  | 'ids'
+  | 'except';
 
 /** The parts that always have a chip. */
 export const STANDING_PARTS = ['use', 'listedGrade', 'construction', 'condition'] as const;
 
-const BESIDE_FIELDS = ['assumed', 'within', 'importId', 'ids', 'except'] as const;
+const BESIDE_FIELDS = ['assumed', 'within', 'inside', 'importId', 'ids', 'except'] as const;
 
 /** The columns that can be filtered by. */
 export const FILTER_COLUMNS = REGISTER_COLUMNS.filter((column) => column !== 'reference');

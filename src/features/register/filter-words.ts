@@ -12,6 +12,7 @@ import {
 const LABELS = {
   assumed: 'Assumed values',
   within: 'On the map',
+  inside: 'Inside',
   importId: 'Import',
   ids: 'Chosen',
   except: 'Left out',
@@ -52,6 +53,8 @@ export function partWords(filter: RegisterFilter, part: FilterPart, importName =
       return filter.assumed === true ? 'some' : 'none';
     case 'within':
       return 'in view then';
+    case 'inside':
+      return 'the outline drawn';
     case 'importId':
       return importName;
     case 'ids':

@@ -7,5 +7,11 @@ export const REGISTER_KEYS: readonly KeyHelp[] = [
   { keys: ['Esc'], does: 'Close the building, then let go of the row' },
 ];
 
+/** The keys while an outline is drawn on the map. */
+export const LASSO_KEYS: readonly KeyHelp[] = [
+  { keys: ['Enter'], does: 'Close the outline' },
+  { keys: ['Esc'], does: 'Leave the lasso' },
+];
+
 /** The key for who may change the register. */
 export const MARK_KEYS: readonly KeyHelp[] = [{ keys: ['X'], does: 'Mark the row' }];

@@ -18,5 +18,6 @@ export function rebasedDraft(mine: RulesDraft, from: RulesDraft, onto: RulesDraf
     horizontalStrain: kept('horizontalStrain'),
     compression: kept('compression'),
     leadingCategory: kept('leadingCategory'),
+    sensitivity: kept('sensitivity'),
   };
 }

@@ -1,9 +1,10 @@
 import { CATEGORIES } from '../../../shared/damage/categories.ts';
+import type { SensitivityKind } from '../../../shared/damage/sensitivity-score.ts';
 import type { RuleSet } from '../../../shared/schemas/rules.ts';
 import { formatCount } from '../../../shared/presentation/format-number.ts';
 import { fromMetres, fromSlope } from './display-units.ts';
 
-export type RuleName = Exclude<keyof RuleSet, 'holds'>;
+export type RuleName = Exclude<keyof RuleSet, 'holds' | 'sensitivity'>;
 type Words = Readonly<Record<string, string>>;
 
 /** The rules in the order in which they act, by name and with what each settles. */
@@ -54,6 +55,12 @@ export const CONDITION_WORDS: Words = {
   'poor condition': 'in poor condition',
   'sensitivity total from': 'sensitivity and category together from',
 };
+export const SENSITIVITY_KINDS: readonly SensitivityKind[] = ['structure', 'features'];
+export const SENSITIVITY_WORDS: Readonly<Record<SensitivityKind, string>> = {
+  structure: 'Structure',
+  features: 'Features',
+};
+export const SCORE_WORDS: Words = { 0: '0', 1: '1', 2: '2' };
 export const CATEGORY_WORDS: Words = Object.fromEntries(
   CATEGORIES.filter(({ category }) => category > 0).map(({ category, label, name }) => [
     String(category),

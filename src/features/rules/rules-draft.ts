@@ -16,6 +16,10 @@ export type HoldDraft = {
   date: string;
 };
 
+export type ReasonDraft = { score: string; reason: string };
+
+export type ReasonsDraft = { structure: ReasonDraft[]; features: ReasonDraft[] };
+
 /** Rules while they are being written: the same shape, with figures as typed and in people's units. */
 export type RulesDraft = {
   screening: Ruled<{ settlement: string; slope: string }>;
@@ -26,9 +30,11 @@ export type RulesDraft = {
   horizontalStrain: Ruled<string>;
   compression: Ruled<string>;
   leadingCategory: Ruled<string>;
+  sensitivity: Ruled<ReasonsDraft>;
 };
 
 type Depth = RuleSet['depth']['value'];
+type Reasons = RuleSet['sensitivity']['value'];
 
 /** A layer that nothing is known of yet. */
 export function blankLayer(): LayerDraft {
@@ -55,9 +61,17 @@ function holdDraft({ condition, stages, ...hold }: RuleSet['holds'][number]): Ho
   };
 }
 
+function reasonDraft({ score, reason }: Reasons['structure'][number]): ReasonDraft {
+  return { score: String(score), reason };
+}
+
+function reasonsDraft({ structure, features }: Reasons): ReasonsDraft {
+  return { structure: structure.map(reasonDraft), features: features.map(reasonDraft) };
+}
+
 /** The rules of a scheme, ready to be written in. */
 export function draftOf(rules: RuleSet): RulesDraft {
-  const { screening, depth, cutOff, leadingCategory } = rules;
+  const { screening, depth, cutOff, leadingCategory, sensitivity } = rules;
   const { settlement, slope } = screening.value;
   const cut = cutOff.value;
   return {
@@ -77,6 +91,7 @@ export function draftOf(rules: RuleSet): RulesDraft {
       },
     },
     leadingCategory: { ...leadingCategory, value: String(leadingCategory.value) },
+    sensitivity: { ...sensitivity, value: reasonsDraft(sensitivity.value) },
   };
 }
 
@@ -101,9 +116,13 @@ function conditionOf({ kind, depth, total }: HoldDraft['condition']): unknown {
   return kind === 'sensitivity total from' ? { kind, total: toNumber(total) } : { kind };
 }
 
+function reasonsOf(reasons: readonly ReasonDraft[]): unknown {
+  return reasons.map(({ score, reason }) => ({ score: toNumber(score), reason }));
+}
+
 /** The draft as the rules it stands for, still to be checked by their schema. */
 export function rulesOf(draft: RulesDraft): unknown {
-  const { screening, depth, cutOff, leadingCategory, holds } = draft;
+  const { screening, depth, cutOff, leadingCategory, sensitivity, holds } = draft;
   const { settlement, slope } = screening.value;
   return {
     ...draft,
@@ -119,5 +138,12 @@ export function rulesOf(draft: RulesDraft): unknown {
     depth: { ...depth, value: depthOf(depth.value) },
     cutOff: { ...cutOff, value: cutOffOf(cutOff.value) },
     leadingCategory: { ...leadingCategory, value: toNumber(leadingCategory.value) },
+    sensitivity: {
+      ...sensitivity,
+      value: {
+        structure: reasonsOf(sensitivity.value.structure),
+        features: reasonsOf(sensitivity.value.features),
+      },
+    },
   };
 }

@@ -10,10 +10,10 @@ export function funnelOf({ page }: Visitor): Locator {
 /** Marks all that the register finds now; tells how many those are. */
 export async function markAllFound(visitor: Visitor): Promise<number> {
   const { page } = visitor;
-  const words = await countIs(visitor, /^[\d\u2009]+ of [\d\u2009]+ buildings$/);
+  const words = await countIs(visitor, /^[\d\s]+ of [\d\s]+ buildings$/);
   await page.getByRole('checkbox', { name: /all/i }).first().check();
   await page.getByRole('button', { name: 'Decide…' }).waitFor();
-  return Number(words.split(' of ')[0]?.replaceAll('\u2009', ''));
+  return Number(words.split(' of ')[0]?.replaceAll(/\s/g, ''));
 }
 
 /** The decision that stands first on a sheet. */

@@ -5,6 +5,7 @@ import {
   DEFAULT_SCREENING_LIMITS,
   type ScreeningLimits,
 } from '../../../shared/assessment/screening.ts';
+import { DEFAULT_SENSITIVITY } from '../../../shared/damage/sensitivity-score.ts';
 import { rulesSchema, type RuleSet } from '../../../shared/schemas/rules.ts';
 import { defaultRules } from '../../../server/commands/default-rules.ts';
 
@@ -50,6 +51,10 @@ function layered(...layers: readonly (readonly [base: number, K: number])[]): un
   };
 }
 
+function scored(...structure: readonly { score: number; reason: string }[]): unknown {
+  return withRule('sensitivity', { structure, features: [] });
+}
+
 describe('the default rules', () => {
   test('are those of the method, each with its source and the day', () => {
     const rules = rulesSchema.parse(JSON.parse(JSON.stringify(defaultRules(DATE))));
@@ -57,6 +62,11 @@ describe('the default rules', () => {
       rules: DEFAULT_RULES,
       limits: DEFAULT_SCREENING_LIMITS,
       holds: DEFAULT_HOLDS,
+    });
+    expect(rules.sensitivity).toEqual({
+      value: DEFAULT_SENSITIVITY,
+      source: 'common-practice',
+      date: DATE,
     });
     const { holds, ...others } = rules;
     for (const { source, date } of [...holds, ...Object.values(others)]) {
@@ -76,6 +86,7 @@ describe('the default rules', () => {
       ['compression', 'zero'],
       ['leadingCategory', 2],
       ['screening', { settlement: 0.005, slope: 0.001 }],
+      ['sensitivity', { structure: [{ score: 2, reason: 'Leaning' }], features: [] }],
     ];
     for (const [key, value] of others) {
       expect([key, rulesSchema.safeParse(withRule(key, value)).success]).toEqual([key, true]);
@@ -84,6 +95,17 @@ describe('the default rules', () => {
 });
 
 describe('rules', () => {
+  test('that were kept before there were reasons for scores have the default ones', () => {
+    const { sensitivity, ...before } = defaultRules(DATE);
+    expect(rulesSchema.parse(before)).toEqual({ ...before, sensitivity });
+  });
+
+  test('may have the same reason for structure and for features', () => {
+    const reasons = [{ score: 1, reason: 'Leaning' }];
+    const rules = withRule('sensitivity', { structure: reasons, features: reasons });
+    expect(rulesSchema.safeParse(rules).success).toBe(true);
+  });
+
   test.each<[string, unknown]>([
     ['layers from the bottom up', withRule('depth', layered([-20, 0.5], [0, 0.3]))],
     ['no layers', withRule('depth', { kind: 'layered', layers: [] })],
@@ -100,6 +122,13 @@ describe('rules', () => {
     ['a hold at no stage', { ...defaultRules(DATE), holds: [{ ...defaultRules(DATE).holds[0], stages: [] }] }], // prettier-ignore
     ['a hold at stage 3', { ...defaultRules(DATE), holds: [{ ...defaultRules(DATE).holds[0], stages: [3] }] }], // prettier-ignore
     ['two holds of one name', { ...defaultRules(DATE), holds: [defaultRules(DATE).holds[0], defaultRules(DATE).holds[0]] }], // prettier-ignore
+    ['a score of 3', scored({ score: 3, reason: 'Leaning' })],
+    ['half a score', scored({ score: 0.5, reason: 'Leaning' })],
+    ['a score without a reason', scored({ score: 1, reason: ' ' })],
+    ['a reason of two lines', scored({ score: 1, reason: 'Leaning\nand cracked' })],
+    ['a reason that is too long', scored({ score: 1, reason: 'x'.repeat(201) })],
+    ['a reason twice', scored({ score: 1, reason: 'Leaning' }, { score: 2, reason: ' Leaning' })],
+    ['more than 30 reasons', scored(...Array.from({ length: 31 }, (_, k) => ({ score: 1, reason: `Reason ${k}` })))], // prettier-ignore
   ])('are not taken with %s', (_, rules) => {
     expect(rulesSchema.safeParse(rules).success).toBe(false);
   });

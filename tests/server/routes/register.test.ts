@@ -174,6 +174,58 @@ describe('the register', () => {
     expect(ids).toHaveLength(wanted.length);
   });
 
+  describe('filtered by an outline', () => {
+    const DEGREE = { east: 64_100, north: 111_300 };
+    let houses: Scheme;
+    /** The middle of the house in the middle, in degrees. */
+    let middle: readonly [number, number];
+
+    /** An outline by metres east and north of the middle. */
+    function outline(...corners: readonly (readonly [number, number])[]): RegisterFilter {
+      const [longitude, latitude] = middle;
+      return {
+        inside: corners.map(([x, y]) => [longitude + x / DEGREE.east, latitude + y / DEGREE.north]),
+      };
+    }
+
+    beforeAll(async () => {
+      houses = await aScheme();
+      const rows = [0, 1, 2].flatMap((y) => [0, 1, 2].map((x) => [x, y] as const));
+      await change(houses, {
+        created: rows.map(([x, y]) =>
+          drawn(`${'SMN'[y]}${x}`, { footprint: box(10 * x, 10 * y, 4) }),
+        ),
+      });
+      const found = (await page(houses)).rows.find(({ reference }) => reference === 'M1');
+      middle = found?.centre ?? [0, 0];
+    });
+
+    test('has those with their middle inside, also where it is hollow', async () => {
+      const hollow = outline(
+        ...([[-13, -13], [13, -13], [13, 13], [7, 13], [7, -5], [-7, -5], [-7, 13], [-13, 13]] as const),
+      ); // prettier-ignore
+      const wanted = ['M0', 'M2', 'N0', 'N2', 'S0', 'S1', 'S2'];
+      expect(await references(houses, { filter: hollow })).toEqual(wanted);
+      const ids = registerIdsSchema.parse((await get(houses, '/ids', { filter: hollow })).body).ids;
+      expect(ids).toHaveLength(wanted.length);
+    });
+
+    test('leaves out what it only touches, and what lies near it', async () => {
+      const one = outline([-9, -9], [1, -9], [1, 9], [-9, 9]);
+      expect(await references(houses, { filter: one })).toEqual(['M1']);
+      const slanted = outline([-13, -8], [-13, -13], [-8, -13]);
+      expect(await references(houses, { filter: slanted })).toEqual(['S0']);
+      const between = outline([3, 3], [7, 3], [7, 7], [3, 7]);
+      expect(await references(houses, { filter: between })).toEqual([]);
+    });
+
+    test('goes with other conditions', async () => {
+      const all = outline([-20, -20], [20, -20], [20, 20], [-20, 20]);
+      expect(await references(houses, { filter: all })).toHaveLength(9);
+      expect(await references(houses, { filter: { ...all, search: 'S1' } })).toEqual(['S1']);
+    });
+  });
+
   test('is filtered by what an import brought or changed', async () => {
     const scheme = await aScheme();
     const importId = '3fa85f64-5717-4562-b3fc-2c963f66afa6';
@@ -207,6 +259,9 @@ describe('the register', () => {
     ['a filter that is no JSON', { filter: '{' }],
     ['an unknown condition', { filter: '{"where":"true"}' }],
     ['an unknown field', { filter: '{"any":{"password":["x"]}}' }],
+    ['an outline of two corners', { filter: '{"inside":[[3,54],[4,54]]}' }],
+    ['an outline of words', { filter: '{"inside":[["3)","54"],[4,54],[4,55]]}' }],
+    ['an outline off the globe', { filter: '{"inside":[[3,54],[4,54],[4,95]]}' }],
     ['a range of words', { filter: '{"ranges":{"name":{"from":1}}}' }],
     ['an order by nothing', { sort: '{"column":"imported","descending":false}' }],
     ['too many rows', { limit: '1000' }],

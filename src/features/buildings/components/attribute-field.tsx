@@ -7,13 +7,15 @@ type AttributeFieldProps = Omit<ComponentProps<typeof Field>, 'label' | 'unit' |
   readonly field: BuildingField;
   /** What the field is for is written beside it already. */
   readonly isNamed?: boolean;
+  /** Words to offer in place of the usual. */
+  readonly words?: readonly string[] | undefined;
 };
 
 /** The field that one value of a building is written in, with the words that are usual. */
-export function AttributeField({ field, isNamed = false, ...input }: AttributeFieldProps) {
+export function AttributeField(props: AttributeFieldProps) {
+  const { field, isNamed = false, words = BUILDING_WORDS[field], ...input } = props;
   const id = useId();
   const { label, kind, unit } = factsOf(field);
-  const words = BUILDING_WORDS[field];
   return (
     <>
       <Field

@@ -1,8 +1,10 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { useForm } from 'react-hook-form';
+import type { ChangeEvent } from 'react';
+import { useForm, type UseFormReturn } from 'react-hook-form';
 import {
   BUILDING_FIELD_NAMES,
   BUILDING_FIELDS,
+  type BuildingField,
 } from '../../../../shared/schemas/building-fields.ts';
 import type { BuildingAnswer } from '../../../../shared/schemas/buildings.ts';
 import type { RegisterChange } from '../../../../shared/schemas/register-changes.ts';
@@ -10,8 +12,16 @@ import { Button } from '../../../components/ui/button.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { UnsavedEdits } from '../../../components/ui/unsaved-edits.tsx';
-import { buildingDraftSchema, draftOf, draftOfWritten } from '../building-draft.ts';
+import { useSensitivityReasons } from '../../rules/hooks/use-sensitivity-reasons.ts';
+import {
+  buildingDraftSchema,
+  draftOf,
+  draftOfWritten,
+  type BuildingDraft,
+  type WrittenBuilding,
+} from '../building-draft.ts';
 import { useEditBuilding } from '../hooks/use-edit-building.ts';
+import { reasonsFor, scoreOfReason } from '../scored-reasons.ts';
 import { AttributeField } from './attribute-field.tsx';
 import { ClashChoice } from './clash-choice.tsx';
 
@@ -38,6 +48,52 @@ function FormFoot({ busy, onCancel }: { readonly busy: boolean; readonly onCance
   );
 }
 
+type FormFieldsProps = {
+  readonly form: UseFormReturn<BuildingDraft, unknown, WrittenBuilding>;
+};
+
+/** Every field; a reason of the scheme's table brings its score along. */
+function FormFields({ form }: FormFieldsProps) {
+  const reasons = useSensitivityReasons();
+  const { errors, isSubmitted } = form.formState;
+  function fillInScore(field: BuildingField, written: string) {
+    const scored = scoreOfReason(field, written, reasons);
+    if (scored === undefined) return;
+    form.setValue(`attributes.${scored.field}`, scored.score, {
+      shouldDirty: true,
+      shouldValidate: isSubmitted,
+    });
+  }
+  return (
+    <div className="grid grid-cols-2 gap-x-4 gap-y-2.5">
+      <Field
+        label="Reference"
+        autoFocus
+        autoComplete="off"
+        error={errors.reference?.message}
+        {...form.register('reference')}
+      />
+      {BUILDING_FIELD_NAMES.map((field) => {
+        const words = reasonsFor(field, reasons);
+        return (
+          <AttributeField
+            key={field}
+            {...{ field, words }}
+            hint={words && 'A reason of the scheme brings its score.'}
+            error={errors.attributes?.[field]?.message}
+            frameClassName={BUILDING_FIELDS[field].label === 'Address' ? 'col-span-2' : ''}
+            {...form.register(`attributes.${field}`, {
+              onChange: ({ target }: ChangeEvent<HTMLInputElement>) => {
+                fillInScore(field, target.value);
+              },
+            })}
+          />
+        );
+      })}
+    </div>
+  );
+}
+
 /** Changes the reference and the values of a building. What is left empty is not known. */
 export function BuildingForm({ schemeId, building, onSaved, onCancel }: BuildingFormProps) {
   const edit = useEditBuilding(schemeId, building, onSaved);
@@ -45,7 +101,7 @@ export function BuildingForm({ schemeId, building, onSaved, onCancel }: Building
     resolver: zodResolver(buildingDraftSchema),
     defaultValues: draftOf(building),
   });
-  const { errors, isDirty } = form.formState;
+  const { isDirty } = form.formState;
   const submit = form.handleSubmit(edit.save);
   if (edit.clash !== null) {
     const { clash, busy, settle, leaveClash } = edit;
@@ -73,24 +129,7 @@ export function BuildingForm({ schemeId, building, onSaved, onCancel }: Building
         className="mt-3 [&_input]:scroll-mb-24"
       >
         <MutationError failed="The building was not changed." error={edit.error} />
-        <div className="grid grid-cols-2 gap-x-4 gap-y-2.5">
-          <Field
-            label="Reference"
-            autoFocus
-            autoComplete="off"
-            error={errors.reference?.message}
-            {...form.register('reference')}
-          />
-          {BUILDING_FIELD_NAMES.map((field) => (
-            <AttributeField
-              key={field}
-              field={field}
-              error={errors.attributes?.[field]?.message}
-              frameClassName={BUILDING_FIELDS[field].label === 'Address' ? 'col-span-2' : ''}
-              {...form.register(`attributes.${field}`)}
-            />
-          ))}
-        </div>
+        <FormFields form={form} />
         <FormFoot busy={edit.busy} onCancel={onCancel} />
       </form>
     </>

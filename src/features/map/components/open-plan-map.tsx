@@ -7,6 +7,7 @@ import { useCursorPlace } from '../hooks/use-cursor-place.ts';
 import { useDrawing } from '../hooks/use-drawing.ts';
 import { useDrawnLine } from '../hooks/use-drawn-line.ts';
 import { useGridCrosses } from '../hooks/use-grid-crosses.ts';
+import { useLasso } from '../hooks/use-lasso.ts';
 import { useMapState } from '../hooks/use-map-state.ts';
 import { useMode } from '../hooks/use-mode.ts';
 import { handleOfMap } from '../map-handle.ts';
@@ -15,6 +16,7 @@ import { createMissedTiles, type MissedTiles } from '../missed-tiles.ts';
 import { createGridProjection } from '../place/grid-projection.ts';
 import { BuildingTip } from './building-tip.tsx';
 import { CursorPlace } from './cursor-place.tsx';
+import { LassoButton, LassoHint } from './lasso-button.tsx';
 import { MapButtons } from './map-buttons.tsx';
 import { MapGaps } from './map-gaps.tsx';
 import type { PlanMapProps } from './plan-map-props.ts';
@@ -50,8 +52,9 @@ function useMissedTiles(map: MapLibreMap): MissedTiles {
 
 /** A map that is open, with what stands on it: scale, north, place and buttons. */
 export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap }) {
-  const { map, plan, home, gridDefinition, selected, onSelect, drawing = null } = props;
-  const isSelecting = drawing === null || drawing.mode === 'none';
+  const { map, plan, home, gridDefinition, selected, onSelect, drawing = null, lasso } = props;
+  const isDrawing = drawing !== null && drawing.mode !== 'none';
+  const isSelecting = !isDrawing && lasso?.isDrawing !== true;
   const [hovered, setHovered] = useState<number | null>(null);
   const marks = useMemo(() => ({ selected, hovered }), [selected, hovered]);
   const projection = useMemo(() => createGridProjection(gridDefinition), [gridDefinition]);
@@ -64,6 +67,7 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
   useDrawnLine(controller, projection, props.line, props.section);
   useCursorPlace(map, projection, props.onCursor);
   useDrawing(map, controller, projection, drawing);
+  useLasso(map, controller, projection, lasso);
   useMode(map, isSelecting ? 'select' : null, { select: onSelect, hover: setHovered });
   useEffect(() => installArrowKeys(map), [map]);
   useEffect(() => {
@@ -78,13 +82,14 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
       aria-busy={isBusy}
       className="pointer-events-none absolute inset-0 [&>*]:pointer-events-auto"
     >
-      <div className="absolute top-3 left-3">
+      <div className="absolute top-3 left-3 flex items-start gap-2">
         <MapButtons
           onZoom={handle.zoomBy}
           onFit={() => {
             handle.fit(home);
           }}
         />
+        {lasso !== undefined && <LassoButton {...lasso} />}
       </div>
       <div className="absolute top-3 right-3">
         <ScaleBar map={map} projection={projection} />
@@ -93,6 +98,7 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
         <CursorPlace map={map} projection={projection} wordsAt={props.wordsAt} />
       </div>
       <BuildingTip map={map} lines={hovered === null ? null : (props.tipOf?.(hovered) ?? null)} />
+      {lasso?.isDrawing === true && <LassoHint />}
       <ZoomHint map={map} plan={plan} />
       {hasGaps && (
         <div className="absolute right-3 bottom-12 left-3 flex justify-center">

@@ -1,6 +1,7 @@
 import type { CameraBounds } from '../camera.ts';
 import type { MapDrawing } from '../map-drawing.ts';
 import type { MapHandle } from '../map-handle.ts';
+import type { MapLasso } from '../map-lasso.ts';
 import type { LineShape, SectionShape } from '../map-line.ts';
 import type { MapPlan } from '../map-plan.ts';
 import type { GridPlace } from '../place/grid-projection.ts';
@@ -20,6 +21,8 @@ export type PlanMapProps = {
   readonly selected: number | null;
   /** What is being drawn by hand; buildings can then not be selected, unless nothing has to be pointed at. */
   readonly drawing?: MapDrawing | null;
+  /** An outline round buildings; while it is drawn they cannot be selected. Never beside `drawing`. */
+  readonly lasso?: MapLasso;
   /** A designed line and its settlement. */
   readonly line?: readonly LineShape[];
   /** Where a section across the line is looked at. */

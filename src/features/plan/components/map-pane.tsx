@@ -11,6 +11,7 @@ export type MapPaneProps = ReturnType<typeof useSchemePlan> &
     PlanMapProps,
     | 'selected'
     | 'drawing'
+    | 'lasso'
     | 'line'
     | 'section'
     | 'wordsAt'

@@ -32,9 +32,9 @@ function isStanding(part: FilterPart): boolean {
   return STANDING_PARTS.some((one) => one === part);
 }
 
-/** Those are chosen at the buildings themselves. */
-function isByNumber(part: FilterPart): boolean {
-  return part === 'ids' || part === 'except';
+/** Those are chosen at the buildings themselves, or drawn on the map. */
+function isByHand(part: FilterPart): boolean {
+  return part === 'ids' || part === 'except' || part === 'inside';
 }
 
 type PartProps = FilterBarProps & { readonly part: FilterPart; readonly close: () => void };
@@ -45,6 +45,13 @@ function PartChoices({ part, close, ...props }: PartProps) {
   if (part === 'assumed') return <AssumedChoice {...props} />;
   if (part === 'importId') return <ImportChoice {...props} />;
   if (part === 'within') return <WithinChoice {...props} />;
+  if (part === 'inside') {
+    return (
+      <p className="text-small text-ink-2">
+        Buildings with their middle inside the outline. Lasso on the map draws another.
+      </p>
+    );
+  }
   if (isBesideFields(part)) {
     return <p className="text-small text-ink-2">Buildings that were chosen one by one.</p>;
   }
@@ -89,7 +96,7 @@ export function FilterBar(props: FilterBarProps) {
     ...STANDING_PARTS,
     ...FILTER_PARTS.filter((part) => !isStanding(part) && (isSet(filter, part) || part === added)),
   ];
-  const addable = FILTER_PARTS.filter((part) => !isByNumber(part) && !shown.includes(part));
+  const addable = FILTER_PARTS.filter((part) => !isByHand(part) && !shown.includes(part));
   const isFiltered = JSON.stringify(filter) !== '{}';
   return (
     <div role="group" aria-label="Filter" className="flex flex-wrap items-center gap-1.5">

@@ -2,6 +2,7 @@ import { useEffect, useRef } from 'react';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { MapPane } from '../../plan/components/map-pane.tsx';
 import { classNames } from '../../../lib/class-names.ts';
+import { useLassoFilter } from '../hooks/use-lasso-filter.ts';
 import type { RegisterDesk } from '../hooks/use-register-desk.ts';
 import type { useRegisterPlan } from '../hooks/use-register-plan.ts';
 import { BuildingSide } from './building-side.tsx';
@@ -30,6 +31,7 @@ export function RegisterAside({ desk, plan, mayEdit }: RegisterAsideProps) {
   const scheme = useScheme();
   const { mapPane, active, address } = desk;
   const { opened } = address;
+  const lasso = useLassoFilter(address);
   const frame = useRef<HTMLElement>(null);
   const liesOver = !mapPane.hasRoom;
   const isOpen = opened !== null;
@@ -50,7 +52,7 @@ export function RegisterAside({ desk, plan, mayEdit }: RegisterAsideProps) {
       {mapPane.isShown && (
         <div className={isOpen ? 'h-[34%] min-h-[180px] flex-none' : 'min-h-0 flex-1'}>
           <MapPane
-            {...plan}
+            {...{ ...plan, lasso }}
             selected={active.id}
             onSelect={desk.pressOnMap}
             onHandle={desk.setHandle}

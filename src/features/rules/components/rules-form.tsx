@@ -16,6 +16,7 @@ import { RULES } from '../rule-words.ts';
 import { draftOf, type RulesDraft } from '../rules-draft.ts';
 import { HoldFields } from './hold-fields.tsx';
 import { RuleRow } from './rule-row.tsx';
+import { SensitivityFields } from './sensitivity-fields.tsx';
 
 const FASTER = 'Somebody else saved a version meanwhile. What you wrote is still here.';
 
@@ -72,6 +73,9 @@ export function RulesForm({ schemeId, newest, onDone }: RulesFormProps) {
       ))}
       <Panel title="Holds" note="keep a building from being let go, whatever its figures">
         <HoldFields form={form} />
+      </Panel>
+      <Panel title="Sensitivity scores" note="offered to who scores a building">
+        <SensitivityFields form={form} />
       </Panel>
       <div className="mt-4 flex gap-2">
         <Button kind="main" type="submit" busy={save.isPending}>

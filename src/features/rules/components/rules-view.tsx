@@ -5,7 +5,7 @@ import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
 import { classNames } from '../../../lib/class-names.ts';
 import { formatShortDay } from '../../../lib/format-date.ts';
-import { holdLines, ruleLines, type RuleLine } from '../rule-lines.ts';
+import { holdLines, reasonLines, ruleLines, type RuleLine } from '../rule-lines.ts';
 import { sourceInFull, sourceWords } from '../../../../shared/presentation/source-words.ts';
 
 const NAME_ROOM = 'min-w-[130px] sm:min-w-[190px]';
@@ -61,7 +61,20 @@ const HOLD_COLUMNS: readonly Column<RuleLine>[] = [
   FROM,
 ];
 
-/** Rules and holds of one version, each with its source and the day from which it holds. */
+const REASON_COLUMNS: readonly Column<RuleLine>[] = [
+  { id: 'kind', heading: 'Of', cell: ({ what }) => what },
+  { id: 'value', heading: 'Score', holds: 'figure', cell: ({ value }) => value },
+  {
+    id: 'name',
+    heading: 'Because',
+    wide: true,
+    cell: ({ name }) => wrapped(name),
+  },
+  SOURCE,
+  FROM,
+];
+
+/** Rules, holds and reasons of one version, each with its source and the day from which it holds. */
 export function RulesView({ rules }: { readonly rules: RuleSet }) {
   return (
     <>
@@ -76,6 +89,14 @@ export function RulesView({ rules }: { readonly rules: RuleSet }) {
           label="What holds a building"
           columns={HOLD_COLUMNS}
           rows={holdLines(rules)}
+          idOf={({ id }) => id}
+        />
+      </Panel>
+      <Panel title="Sensitivity scores" note="offered to who scores a building">
+        <Table
+          label="Reasons for scores"
+          columns={REASON_COLUMNS}
+          rows={reasonLines(rules)}
           idOf={({ id }) => id}
         />
       </Panel>

@@ -1,7 +1,8 @@
 import { fireEvent, screen, waitFor } from '@testing-library/react';
 import { describe, expect, it, vi } from 'vitest';
 import { BuildingForm } from '../../../../src/features/buildings/components/building-form.tsx';
-import { aBuildingAnswer, anId, aSchemeAnswer } from '../../../support/answers.ts';
+import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
+import { aBuildingAnswer, anId, aRulesVersion, aSchemeAnswer } from '../../../support/answers.ts';
 import { axeFaults } from '../../../support/axe-faults.ts';
 import { fakeApi, Refusal } from '../../../support/fake-api.ts';
 import { renderPage } from '../../../support/render-page.tsx';
@@ -14,15 +15,17 @@ const AROUND = {
   'GET /api/waiting': [],
 };
 
-function openForm() {
+function openForm(abilities: Record<string, boolean> = {}) {
   const onSaved = vi.fn();
   renderPage(
-    <BuildingForm
-      schemeId={anId(10)}
-      building={aBuildingAnswer()}
-      onSaved={onSaved}
-      onCancel={() => undefined}
-    />,
+    <SchemeContext value={aSchemeAnswer({ abilities })}>
+      <BuildingForm
+        schemeId={anId(10)}
+        building={aBuildingAnswer()}
+        onSaved={onSaved}
+        onCancel={() => undefined}
+      />
+    </SchemeContext>,
   );
   return onSaved;
 }
@@ -34,6 +37,59 @@ function write(label: string, value: string): void {
 function save(): void {
   fireEvent.click(screen.getByRole('button', { name: 'Save' }));
 }
+
+/** The words that a field offers. */
+function offeredFor(label: string): string[] {
+  const { list } = screen.getByLabelText<HTMLInputElement>(label);
+  return [...(list?.options ?? [])].map(({ value }) => value);
+}
+
+const MOVED = 'Moved or repaired before';
+
+describe('the reasons for scores in the form of a building', () => {
+  const withRules = { ...AROUND, [`GET ${SCHEME}/rules`]: [aRulesVersion()] };
+
+  it('are those of the scheme, and bring their score along', async () => {
+    const { calls } = fakeApi({ ...withRules, [SAVE]: CHANGE });
+    const onSaved = openForm({ readRules: true });
+    await waitFor(() => {
+      expect(offeredFor('Structure score because')).toContain(MOVED);
+    });
+    expect(offeredFor('Features score because')).not.toContain(MOVED);
+    write('Structure score because', MOVED);
+    expect(screen.getByLabelText<HTMLInputElement>('Structure score').value).toBe('1');
+    expect(screen.getByLabelText<HTMLInputElement>('Features score').value).toBe('');
+    expect(await axeFaults()).toEqual([]);
+    save();
+    await waitFor(() => {
+      expect(onSaved).toHaveBeenCalled();
+    });
+    expect(calls.find(({ route }) => route === SAVE)?.body).toEqual({
+      version: 1,
+      attributes: { structureScore: 1, structureReason: MOVED },
+    });
+  });
+
+  it('may be other words, with a score of 0 to 2 of one’s own', async () => {
+    fakeApi(withRules);
+    openForm({ readRules: true });
+    await waitFor(() => {
+      expect(offeredFor('Structure score because')).not.toEqual([]);
+    });
+    write('Features score', '3');
+    write('Features score because', 'Organ loft');
+    expect(screen.getByLabelText<HTMLInputElement>('Features score').value).toBe('3');
+    save();
+    expect(await screen.findByText('From 0 to 2.')).toBeTruthy();
+  });
+
+  it('are not asked for by who may not read the rules', () => {
+    const { calls } = fakeApi(withRules);
+    openForm();
+    expect(offeredFor('Structure score because')).toEqual([]);
+    expect(calls).toEqual([]);
+  });
+});
 
 describe('the form of a building', () => {
   it('sends what was changed with the version that was seen', async () => {

@@ -7,6 +7,7 @@ import {
   BuildingSheet,
   type SheetView,
 } from '../../../../src/features/buildings/components/building-sheet.tsx';
+import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
 import { aBuildingAnswer, anId, aSchemeAnswer } from '../../../support/answers.ts';
 import { axeFaults } from '../../../support/axe-faults.ts';
 import { fakeApi } from '../../../support/fake-api.ts';
@@ -34,7 +35,9 @@ function Sheet({ building, mayEdit }: { building: BuildingAnswer; mayEdit: boole
   return (
     <main>
       <h1>Plan</h1>
-      <BuildingSheet schemeId={anId(10)} {...{ building, mayEdit, view, onView, onChanged }} />
+      <SchemeContext value={aSchemeAnswer()}>
+        <BuildingSheet schemeId={anId(10)} {...{ building, mayEdit, view, onView, onChanged }} />
+      </SchemeContext>
       <Link to="/elsewhere">Elsewhere</Link>
     </main>
   );

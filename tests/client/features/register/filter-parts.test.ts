@@ -1,12 +1,14 @@
 import { describe, expect, it } from 'vitest';
 import { doneWords, lineWords } from '../../../../src/features/register/bulk-summary.ts';
 import { withBeside, withColumn, without } from '../../../../src/features/register/filter-parts.ts';
-import { partWords } from '../../../../src/features/register/filter-words.ts';
+import { partLabel, partWords } from '../../../../src/features/register/filter-words.ts';
 import {
   readWhich,
   withFilter,
   withSort,
 } from '../../../../src/features/register/register-address.ts';
+
+const OUTLINE: [number, number][] = [[3, 54], [3.01, 54], [3.01, 54.01]]; // prettier-ignore
 
 describe('the parts of a filter', () => {
   it('come and go without leaving anything behind', () => {
@@ -18,6 +20,9 @@ describe('the parts of a filter', () => {
     });
     expect(JSON.stringify(without(without(two, 'use'), 'eavesHeight'))).toBe('{}');
     expect(withBeside(withBeside({}, { search: 'net' }), { search: undefined })).toEqual({});
+    expect(without(withBeside({ assumed: true }, { inside: OUTLINE }), 'inside')).toEqual({
+      assumed: true,
+    });
     expect(withColumn({}, 'storeys', { unknown: true })).toEqual({ unknown: ['storeys'] });
   });
 
@@ -31,12 +36,16 @@ describe('the parts of a filter', () => {
     expect(partWords({ unknown: ['storeys'] }, 'storeys')).toBe('not known');
     expect(partWords({ assumed: false }, 'assumed')).toBe('none');
     expect(partWords({}, 'condition')).toBe('any');
+    expect([partLabel('inside'), partWords({ inside: OUTLINE }, 'inside')]).toEqual([
+      'Inside',
+      'the outline drawn',
+    ]);
   });
 });
 
 describe('the address of the register', () => {
   it('says the filter and the order, and reads them again', () => {
-    const filter = { any: { use: ['church'] }, search: 'st & co' };
+    const filter = { any: { use: ['church'] }, search: 'st & co', inside: OUTLINE };
     const sort = { column: 'area', descending: true } as const;
     const search = withSort(withFilter(new URLSearchParams('building=3'), filter), sort);
     expect(readWhich(new URLSearchParams(search.toString()))).toEqual({ filter, sort });

@@ -114,6 +114,19 @@ describe('a draft of rules', () => {
     expect(errors.screening?.date?.message).toBe('Give a day.');
   });
 
+  it('asks for a reason for each score, once', async () => {
+    const draft = draftOf(RULES_OF_TODAY);
+    draft.sensitivity.value.structure = [{ score: '1', reason: '' }];
+    draft.sensitivity.value.features = [
+      { score: '1', reason: 'Organ' },
+      { score: '2', reason: 'Organ' },
+    ];
+    const faults = (await faultsOf(draft)).sensitivity?.value;
+    expect(faults?.structure?.[0]?.reason?.message).toBe('Give the reason.');
+    const { features } = faults ?? {};
+    expect(features?.message ?? features?.root?.message).toBe('Give each reason once.');
+  });
+
   it('asks for layers and for their order', async () => {
     const draft = draftOf(RULES_OF_TODAY);
     draft.depth.value = { kind: 'layered', layers: [] };
@@ -173,6 +186,30 @@ describe('rules in words', () => {
       undefined,
     ]);
     expect(ruleChanges(after, after)).toEqual([]);
+  });
+
+  it('say which reason scores otherwise, came or went, and the source of them all once', () => {
+    const { sensitivity } = RULES_OF_TODAY;
+    const [fair, irregular, ...others] = sensitivity.value.structure;
+    if (fair === undefined || irregular === undefined) throw new Error('No reasons.');
+    const structure = [fair, { ...irregular, score: 2 } as const, ...others.slice(1)];
+    const features = [{ score: 1, reason: 'Organ' } as const, ...sensitivity.value.features];
+    const value = { structure, features };
+    const after: RuleSet = {
+      ...RULES_OF_TODAY,
+      sensitivity: { value, source: 'own', date: '2026-06-01' },
+    };
+    const changes = ruleChanges(RULES_OF_TODAY, after);
+    expect(changes.map(({ path }) => path)).toEqual([
+      `Structure score: ${irregular.reason}`,
+      'Structure score: Moved or repaired before',
+      'Sensitivity scores: source',
+      'Sensitivity scores: holds from',
+      'Features score: Organ',
+    ]);
+    expect(changes[0]).toMatchObject({ before: 'score 1', after: 'score 2' });
+    expect(changes[1]).toMatchObject({ before: 'score 1', after: undefined });
+    expect(changes[4]).toMatchObject({ before: undefined, after: 'score 1' });
   });
 });
 

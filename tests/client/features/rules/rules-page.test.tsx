@@ -25,6 +25,41 @@ describe('the page of rules', () => {
     const table = await screen.findByRole('table', { name: 'Rules in force' });
     expect(within(table).getByText('Rankin 1988')).toBeTruthy();
     expect(screen.queryByRole('button', { name: 'Change the rules' })).toBeNull();
+    const reasons = within(screen.getByRole('table', { name: 'Reasons for scores' }));
+    const words = 'Structure 1 Moved or repaired before Common practice 1 May 2026';
+    expect(reasons.getByRole('row', { name: words })).toBeTruthy();
+  });
+
+  it('saves the reasons for scores with the rest', async () => {
+    const { calls } = fakeApi({
+      [`GET ${RULES}`]: [aRulesVersion()],
+      [`POST ${RULES}`]: aRulesVersion({ version: 2 }),
+    });
+    openRules({ updateRules: true });
+    fireEvent.click(await screen.findByRole('button', { name: 'Change the rules' }));
+    fireEvent.click(screen.getByRole('button', { name: 'Remove reason 1 for structure' }));
+    fireEvent.click(screen.getByRole('button', { name: 'Another reason for features' }));
+    const features = within(screen.getByRole('group', { name: 'Features' }));
+    fireEvent.change(features.getAllByLabelText('Because').at(-1) ?? document.body, {
+      target: { value: 'Organ' },
+    });
+    fireEvent.change(features.getAllByLabelText('Score').at(-1) ?? document.body, {
+      target: { value: '2' },
+    });
+    fireEvent.click(screen.getByRole('button', { name: 'Save as version 2' }));
+    const { value } = aRulesVersion().rules.sensitivity;
+    await waitFor(() => {
+      expect(calls.find(({ route }) => route.startsWith('POST'))?.body).toMatchObject({
+        rules: {
+          sensitivity: {
+            value: {
+              structure: value.structure.slice(1),
+              features: [...value.features, { score: 2, reason: 'Organ' }],
+            },
+          },
+        },
+      });
+    });
   });
 
   it('is not there for who may not', () => {
