@@ -3,7 +3,7 @@ import { findPackedIds } from './find-packed-ids.ts';
 import type { RegisterOf } from './register-condition.ts';
 
 /** Buildings that are alike, four bytes a number. */
-export type StandingGroup = { readonly value: string; readonly ids: Buffer };
+type StandingGroup = { readonly value: string; readonly ids: Buffer };
 
 type Columns = 'state' | 'kind';
 

@@ -1,7 +1,7 @@
 import type { RegisterFilter } from '../../shared/schemas/register.ts';
 import { findRegisterIds } from '../models/find-register-order.ts';
 import { registerCondition, type RegisterOf } from '../models/register-condition.ts';
-import { unpackBigEndian } from './packed-ids.ts';
+import { unpackIds } from './packed-ids.ts';
 import { splitFilter, standingAs, type Reading } from './standings.ts';
 
 /** The numbers of the buildings that a filter means, ascending, as they are read now. */
@@ -13,6 +13,6 @@ export async function meantIds(
   const { rest, standing } = splitFilter(filter);
   const { database, transaction } = reading;
   const condition = registerCondition(register, rest);
-  const ids = unpackBigEndian(await findRegisterIds(database, condition, transaction));
+  const ids = unpackIds(await findRegisterIds(database, condition, transaction));
   return standing === null ? [...ids] : standingAs(reading, register, ids, standing);
 }

@@ -2,8 +2,9 @@ const BYTES = 4;
 
 /** Whole numbers of four bytes each, as the database packs them. */
 export function unpackIds(bytes: Buffer): Int32Array {
-  const view = new DataView(bytes.buffer, bytes.byteOffset, bytes.byteLength);
-  return Int32Array.from({ length: bytes.byteLength / BYTES }, (_, k) => view.getInt32(k * BYTES));
+  const ids = new Int32Array(bytes.byteLength / BYTES);
+  for (let k = 0; k < ids.length; k += 1) ids[k] = bytes.readInt32BE(k * BYTES);
+  return ids;
 }
 
 /** The same the other way. */
@@ -13,18 +14,6 @@ export function packIds(ids: Int32Array): Buffer {
     view.setInt32(k * BYTES, id);
   });
   return Buffer.from(view.buffer);
-}
-
-/** Numbers as the database packs them, one after the other. */
-export function* unpackBigEndian(bytes: Buffer): Generator<number> {
-  for (let k = 0; k < bytes.byteLength; k += BYTES) yield bytes.readInt32BE(k);
-}
-
-/** The same the other way. */
-export function packBigEndian(ids: readonly number[]): Buffer {
-  const bytes = Buffer.alloc(BYTES * ids.length);
-  ids.forEach((id, k) => bytes.writeInt32BE(id, BYTES * k));
-  return bytes;
 }
 
 /** Numbers of buildings, packed. */

@@ -11,7 +11,7 @@ import { asksResults, registerCondition } from '../models/register-condition.ts'
 import type { Services } from '../services.ts';
 import { orderGroups } from './order-groups.ts';
 import { meantIds } from './meant-ids.ts';
-import { packBigEndian, packedIds, unpackBigEndian, type PackedIds } from './packed-ids.ts';
+import { packIds, packedIds, unpackIds, type PackedIds } from './packed-ids.ts';
 import type { Register } from './register-of.ts';
 import { inOrderOfStanding, splitFilter, standingAs, type Reading } from './standings.ts';
 
@@ -76,10 +76,10 @@ function packedOrder(services: Kept, register: Register, which: Which): Promise<
     const sort = order === null ? which.sort : REGISTER_ORDER;
     const all = await packedOrder(services, register, { filter: rest, sort });
     const reading = readingOf(services);
-    const found = await standingAs(reading, register, unpackBigEndian(all), standing ?? {});
-    return packBigEndian(
-      order === null ? found : await inOrderOfStanding(reading, register, found, order),
-    );
+    const found = await standingAs(reading, register, unpackIds(all), standing ?? {});
+    const ordered =
+      order === null ? found : await inOrderOfStanding(reading, register, found, order);
+    return packIds(Int32Array.from(ordered));
   });
 }
 

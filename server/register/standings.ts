@@ -9,10 +9,9 @@ import {
   findAssignedGroups,
   findRunIds,
   findStandingGroups,
-  type StandingGroup,
 } from '../models/find-standing-groups.ts';
 import type { RegisterOf } from '../models/register-condition.ts';
-import { unpackBigEndian } from './packed-ids.ts';
+import { valuesById } from './values-by-id.ts';
 
 /** What a filter asks of standings; null is for what stands nowhere. */
 export type StandingFilter = Readonly<Partial<Record<StandingColumn, readonly (string | null)[]>>>;
@@ -49,12 +48,6 @@ export function splitFilter(filter: RegisterFilter): {
   return { rest, standing: Object.fromEntries(wanted) };
 }
 
-function valuesOf(groups: readonly StandingGroup[]): Map<number, string> {
-  const values = new Map<number, string>();
-  for (const { value, ids } of groups) for (const id of unpackBigEndian(ids)) values.set(id, value);
-  return values;
-}
-
 async function stateOf(
   { database, transaction, runIds }: Reading,
   register: RegisterOf,
@@ -64,9 +57,9 @@ async function stateOf(
     findStandingGroups(database, register, 'state', transaction),
     runIds === undefined ? findRunIds(database, runId, transaction) : runIds(runId),
   ]);
-  const states = valuesOf(groups);
-  const inRun = new Set(unpackBigEndian(run));
-  return (id) => (inRun.has(id) ? (states.get(id) ?? 'to decide') : null);
+  const states = valuesById(groups);
+  const inRun = valuesById([{ value: true, ids: run }]);
+  return (id) => (inRun(id) === true ? (states(id) ?? 'to decide') : null);
 }
 
 /** Where buildings stand for the option that is shown, in one column. */
@@ -81,8 +74,8 @@ export async function standingOf(
     column === 'decision'
       ? await findStandingGroups(database, register, 'kind', transaction)
       : await findAssignedGroups(database, register, transaction);
-  const values = valuesOf(groups);
-  return (id) => values.get(id) ?? null;
+  const values = valuesById(groups);
+  return (id) => values(id) ?? null;
 }
 
 /** Those of some buildings, in their order, that stand where a filter asks. */

@@ -14,7 +14,7 @@ const BEFORE: Readonly<Record<string, readonly string[]>> = {
   damage: PLANE,
   assessment: PARTS,
   monitoring: PARTS,
-  schemas: PLANE,
+  schemas: [...PLANE, 'damage'],
   presentation: [...PARTS, 'assessment', 'schemas'],
   checks: [...PARTS, 'assessment', 'monitoring', 'schemas'],
 };

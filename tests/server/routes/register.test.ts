@@ -213,8 +213,8 @@ describe('the register', () => {
     test('leaves out what it only touches, and what lies near it', async () => {
       const one = outline([-9, -9], [1, -9], [1, 9], [-9, 9]);
       expect(await references(houses, { filter: one })).toEqual(['M1']);
-      const slanted = outline([-13, -8], [-13, -13], [-8, -13]);
-      expect(await references(houses, { filter: slanted })).toEqual(['S0']);
+      const slanted = outline([-13, 8], [-13, -13], [8, -13]);
+      expect(await references(houses, { filter: slanted })).toEqual(['M0', 'S0', 'S1']);
       const between = outline([3, 3], [7, 3], [7, 7], [3, 7]);
       expect(await references(houses, { filter: between })).toEqual([]);
     });

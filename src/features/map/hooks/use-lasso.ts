@@ -27,11 +27,12 @@ export function useLasso(
   const draw = useEffectEvent((under: GridPlace | null) => {
     controller.drawDraft(draftFeatures(projection, lassoShapes(places.current, under)));
   });
-  const close = useEffectEvent(() => {
+  function finish() {
     const slack = SLACK * (metresPerPixel(map, projection) ?? 1);
     const drawn = lassoOutline(places.current, slack, projection);
     if (drawn !== null) lasso?.onClose(drawn);
-  });
+  }
+  const close = useEffectEvent(finish);
   useEffect(() => {
     if (!isThere || isDrawing) return;
     controller.drawDraft(draftFeatures(projection, closedShapes(outline, projection)));
@@ -56,9 +57,7 @@ export function useLasso(
   }, [map, projection, isDrawing]);
   useHotkeys(
     {
-      Enter: () => {
-        close();
-      },
+      Enter: finish,
       Escape: () => lasso?.onLeave(),
     },
     isDrawing,
