@@ -62,8 +62,8 @@ const named = z.array(z.number().int().positive()).max(MOST_NAMED_BUILDINGS);
  * Which buildings of a register are meant: all conditions together; an empty filter means all of them.
  *
  * Units: ranges in the unit of their column; within is west, south, east, north in degrees. Valid: `any` holds
- * the wanted values of a field, null for unknown, those of results as text;
- * `assumed` tells whether the method has to assume something; `ids` are the only ones meant, `except` left out. Source: [own].
+ * the wanted values of a field, null for unknown, those of results as text; `assumed` tells whether the method
+ * has to assume something; `ids` are the only ones meant, `except` are left out. Source: [own].
  */
 export const registerFilterSchema = z.strictObject({
   search: z

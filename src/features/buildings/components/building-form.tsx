@@ -3,7 +3,6 @@ import type { ChangeEvent } from 'react';
 import { useForm, type UseFormReturn } from 'react-hook-form';
 import {
   BUILDING_FIELD_NAMES,
-  BUILDING_FIELDS,
   type BuildingField,
 } from '../../../../shared/schemas/building-fields.ts';
 import type { BuildingAnswer } from '../../../../shared/schemas/buildings.ts';
@@ -48,6 +47,9 @@ function FormFoot({ busy, onCancel }: { readonly busy: boolean; readonly onCance
   );
 }
 
+/** Their words are long. */
+const WIDE: ReadonlySet<BuildingField> = new Set(['address', 'structureReason', 'featuresReason']);
+
 type FormFieldsProps = {
   readonly form: UseFormReturn<BuildingDraft, unknown, WrittenBuilding>;
 };
@@ -81,7 +83,7 @@ function FormFields({ form }: FormFieldsProps) {
             {...{ field, words }}
             hint={words && 'A reason of the scheme brings its score.'}
             error={errors.attributes?.[field]?.message}
-            frameClassName={BUILDING_FIELDS[field].label === 'Address' ? 'col-span-2' : ''}
+            frameClassName={WIDE.has(field) ? 'col-span-2' : ''}
             {...form.register(`attributes.${field}`, {
               onChange: ({ target }: ChangeEvent<HTMLInputElement>) => {
                 fillInScore(field, target.value);
