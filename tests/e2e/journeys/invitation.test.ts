@@ -8,9 +8,9 @@ import { signInAs, signInWith, signOut } from '../drivers/sign-in.ts';
 const PASSWORD = 'a lantern on the mole';
 
 for (const [role, screens] of [
-  ['Designer', ['Plan', 'Register', 'Settings', 'Method']],
-  ['Assessor', ['Plan', 'Register', 'Visits', 'Settings', 'Method']],
-  ['Witness', ['Plan', 'Register', 'Settings', 'Method']],
+  ['Designer', ['Plan', 'Register', 'Measures', 'Settings', 'Method']],
+  ['Assessor', ['Plan', 'Register', 'Measures', 'Visits', 'Settings', 'Method']],
+  ['Witness', ['Plan', 'Register', 'Measures', 'Settings', 'Method']],
   ['Owner', ['Description', 'Method']],
 ] as const) {
   const email = `new-${role.toLowerCase()}@example.org`;

@@ -9,7 +9,7 @@ describe('signing in', () => {
     await signInAs(visitor, 'administrator');
     expect(await tabs(visitor)).toEqual(['Schemes', 'People', 'Audit', 'Mailbox', 'Method']);
     await openScheme(visitor);
-    expect(await tabs(visitor)).toEqual(['Plan', 'Register', 'Settings', 'Method']);
+    expect(await tabs(visitor)).toEqual(['Plan', 'Register', 'Measures', 'Settings', 'Method']);
   });
 
   for (const role of ['designer', 'assessor', 'second-assessor', 'witness'] as const) {
