@@ -1,13 +1,12 @@
 import type { z } from 'zod';
 import type { checkDecisionSchema } from '../../shared/schemas/decisions.ts';
 import { AppError } from '../errors.ts';
-import { closeDecisions, findDecision, refreshStandings } from '../models/decisions.ts';
-import { moveDecisionsOn } from '../models/move-decisions-on.ts';
+import { closeDecisions, findDecision } from '../models/decisions.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import { lockScheme } from './lock-scheme.ts';
-import { recordChange } from './record-change.ts';
+import { settleDecisions, VERDICT_ACTIONS } from './settle-decisions.ts';
 
 /** Checks or returns one decision that somebody else prepared. One on a changed basis can only be returned. */
 export async function checkDecision(
@@ -30,12 +29,9 @@ export async function checkDecision(
       throw new AppError('conflict', message);
     }
     await closeDecisions(database, [id], { state: verdict, by: by.id, comment }, transaction);
-    const { optionId, buildingId } = decision;
-    await refreshStandings(database, optionId, [buildingId], transaction);
-    await moveDecisionsOn(scheme, transaction);
-    const action = verdict === 'checked' ? 'check decisions' : 'return decisions';
-    const subject = { kind: 'decisions', id };
-    const after = { decisions: 1, comment };
-    await recordChange({ by, schemeId: scheme.id, action, subject, after }, transaction);
+    const { optionId } = decision;
+    const action = VERDICT_ACTIONS[verdict];
+    const settled = { by, scheme, optionId, decisions: [decision], action, after: { comment } };
+    await settleDecisions(database, settled, transaction);
   });
 }

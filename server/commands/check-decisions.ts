@@ -2,14 +2,12 @@ import type { z } from 'zod';
 import type { checkDecisionsSchema, decisionsDoneSchema } from '../../shared/schemas/decisions.ts';
 import { mayCheck, waitingForCheck } from '../decisions/waiting-for-check.ts';
 import { AppError } from '../errors.ts';
-import { closeDecisions, refreshStandings } from '../models/decisions.ts';
-import { findShownRun } from '../models/find-shown-run.ts';
-import { moveDecisionsOn } from '../models/move-decisions-on.ts';
+import { closeDecisions } from '../models/decisions.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import { lockScheme } from './lock-scheme.ts';
-import { recordChange } from './record-change.ts';
+import { settleDecisions, VERDICT_ACTIONS } from './settle-decisions.ts';
 
 /**
  * Checks or returns every decision that waits on the buildings that are meant and that somebody else
@@ -23,8 +21,7 @@ export async function checkDecisions(
 ): Promise<z.infer<typeof decisionsDoneSchema>> {
   return database.transaction(async (transaction) => {
     await lockScheme(scheme, transaction);
-    const { optionId } = await findShownRun(database, scheme.id, transaction);
-    const waiting = await waitingForCheck(database, scheme.id, filter, transaction);
+    const { optionId, waiting } = await waitingForCheck(database, scheme.id, filter, transaction);
     const open = waiting.filter((decision) => mayCheck(decision, by));
     if (open.length !== expected || optionId === null) {
       const message = `${open.length} decisions wait for you here now, not ${expected}. Look at them again.`;
@@ -32,13 +29,9 @@ export async function checkDecisions(
     }
     const ids = open.map(({ id }) => id);
     await closeDecisions(database, ids, { state: verdict, by: by.id, comment }, transaction);
-    const buildings = open.map(({ buildingId }) => buildingId);
-    await refreshStandings(database, optionId, buildings, transaction);
-    await moveDecisionsOn(scheme, transaction);
-    const action = verdict === 'checked' ? 'check decisions' : 'return decisions';
-    const subject = { kind: 'decisions', id: ids.length === 1 ? (ids[0] ?? '') : optionId };
-    const after = { decisions: ids.length, comment };
-    await recordChange({ by, schemeId: scheme.id, action, subject, after }, transaction);
-    return { batchId: null, count: ids.length };
+    const action = VERDICT_ACTIONS[verdict];
+    const settled = { by, scheme, optionId, decisions: open, action, after: { comment } };
+    await settleDecisions(database, settled, transaction);
+    return { batchId: null, count: open.length };
   });
 }

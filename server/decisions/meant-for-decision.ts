@@ -4,7 +4,7 @@ import type { DecisionKind } from '../../shared/schemas/decisions.ts';
 import type { DecisionBasis } from '../../shared/schemas/decision-answers.ts';
 import type { RegisterFilter } from '../../shared/schemas/register.ts';
 import { findConsidered, type Considered } from '../models/find-considered.ts';
-import { findWaitingAmong } from '../models/decisions.ts';
+import { findWaiting } from '../models/decisions.ts';
 import { newestRules } from '../models/newest-rules.ts';
 import type { Run } from '../models/run.ts';
 import { inBatches } from '../register/in-batches.ts';
@@ -50,11 +50,12 @@ export async function* meantForDecision(
   for await (const ids of inBatches(meant)) {
     const [considered, waiting] = await Promise.all([
       findConsidered(database, runId, ids, transaction),
-      findWaitingAmong(database, optionId, ids, transaction),
+      findWaiting(database, optionId, ids, transaction),
     ]);
+    const withDecision = new Set(waiting.map(({ buildingId }) => buildingId));
     yield considered.map((building): Meant => {
       const basis = conclude(building);
-      const why = whyNot(proposed, basis, waiting.has(building.id));
+      const why = whyNot(proposed, basis, withDecision.has(building.id));
       if (basis === null || why !== null) return { building, why: why ?? '' };
       return { building, basis, why: null };
     });

@@ -6,17 +6,24 @@ import { findShownRun } from '../models/find-shown-run.ts';
 import type { Actor } from '../policies/actor.ts';
 import { meantIds } from '../register/meant-ids.ts';
 
+/** What waits for a check, and for which option; null where no run is shown. */
+type WaitingOnOption = {
+  readonly optionId: string | null;
+  readonly waiting: readonly WaitingDecision[];
+};
+
 /** The decisions that wait on the buildings that are meant, for the option that is shown. */
 export async function waitingForCheck(
   database: Sequelize,
   schemeId: string,
   filter: RegisterFilter,
   transaction: Transaction | null,
-): Promise<WaitingDecision[]> {
+): Promise<WaitingOnOption> {
   const shown = await findShownRun(database, schemeId, transaction);
-  if (shown.optionId === null) return [];
+  const { optionId } = shown;
+  if (optionId === null) return { optionId, waiting: [] };
   const ids = await meantIds({ database, transaction }, { schemeId, ...shown }, filter);
-  return findWaiting(database, shown.optionId, ids, transaction);
+  return { optionId, waiting: await findWaiting(database, optionId, ids, transaction) };
 }
 
 /** Whether somebody may check a decision: not their own, and not on a basis that has changed. */

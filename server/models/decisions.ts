@@ -46,21 +46,6 @@ export async function insertDecisions(
   );
 }
 
-/** The buildings among some that have a decision waiting for a check. */
-export async function findWaitingAmong(
-  database: Sequelize,
-  optionId: string,
-  ids: readonly number[],
-  transaction: Transaction | null,
-): Promise<ReadonlySet<number>> {
-  const rows = await database.query<{ id: number }>(
-    `select building_id as id from decisions
-     where alignment_id = $1 and building_id = any($2) and state = 'waiting for check'`,
-    { type: QueryTypes.SELECT, bind: [optionId, ids], transaction },
-  );
-  return new Set(rows.map(({ id }) => id));
-}
-
 /** A decision that waits, as far as a check asks. */
 export type WaitingDecision = {
   readonly id: string;

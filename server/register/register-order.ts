@@ -17,16 +17,21 @@ import { inOrderOfStanding, splitFilter, standingAs, type Reading } from './stan
 
 type Which = { readonly filter: RegisterFilter; readonly sort: RegisterSort };
 
+/** What buildings and their order hang on besides the register: what a run found, and where they stand. */
+export function askedBeside({ filter, sort: { column } }: Which): {
+  readonly results: boolean;
+  readonly standings: boolean;
+} {
+  const { rest, standing } = splitFilter(filter);
+  const standings = standing !== null || isStandingColumn(column);
+  return { results: standings || asksResults(rest, column), standings };
+}
+
 function keyOf(what: string, register: Register, which: Which): string {
   const { schemeId, version, runId, decisionsVersion } = register;
-  const { rest, standing } = splitFilter(which.filter);
-  const { column } = which.sort;
-  const stands = standing !== null || isStandingColumn(column);
-  const beside = [
-    stands || asksResults(rest, column) ? runId : null,
-    stands ? decisionsVersion : null,
-  ];
-  return `${what}/${schemeId}/${version}/${beside.join('/')}/${JSON.stringify(which)}`;
+  const { results, standings } = askedBeside(which);
+  const beside = `${results ? runId : null}/${standings ? decisionsVersion : null}`;
+  return `${what}/${schemeId}/${version}/${beside}/${JSON.stringify(which)}`;
 }
 
 /** Whether the buildings that a filter means have been put in order already. */
@@ -104,17 +109,13 @@ export async function registerIds(
   return meantIds(readingOf(services), register, filter);
 }
 
-/** How many buildings a filter means, kept as their order is. */
+/** How many buildings a filter of the register alone means, kept as their order is. */
 export async function registerCount(
   { database, tiles }: Pick<Services, 'database' | 'tiles'>,
   register: Register,
   filter: RegisterFilter,
 ): Promise<number> {
-  const which = { filter, sort: REGISTER_ORDER };
-  if (splitFilter(filter).standing !== null) {
-    return (await registerOrder({ database, tiles }, register, which)).count;
-  }
-  const key = keyOf('count', register, which);
+  const key = keyOf('count', register, { filter, sort: REGISTER_ORDER });
   const count = await tiles.get(key, async () => {
     const bytes = Buffer.alloc(BYTES);
     bytes.writeInt32BE(await countRows(database, registerCondition(register, filter)));

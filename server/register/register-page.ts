@@ -1,14 +1,12 @@
 import type { z } from 'zod';
 import type { registerQuerySchema } from '../../shared/schemas/register.ts';
-import { isBesideColumn } from '../../shared/schemas/standing-columns.ts';
 import { findFirstIds } from '../models/find-first-ids.ts';
 import { findRows } from '../models/find-register-rows.ts';
-import { asksResults, registerCondition } from '../models/register-condition.ts';
+import { registerCondition } from '../models/register-condition.ts';
 import type { ListedBuilding } from '../presenters/building-values.ts';
 import type { Services } from '../services.ts';
 import type { Register } from './register-of.ts';
-import { isOrdered, registerCount, registerOrder } from './register-order.ts';
-import { splitFilter } from './standings.ts';
+import { askedBeside, isOrdered, registerCount, registerOrder } from './register-order.ts';
 
 /** So far the database looks by itself; further down all of it is put in order once and kept. */
 const NEAR = 400;
@@ -22,10 +20,9 @@ export async function registerPage(
   const { database } = services;
   const { filter, sort, offset, limit } = query;
   const which = { filter, sort };
-  // what stands beside has no index, in filters either: all in order once is quicker than looking for the ends of it
-  const isFar = offset + limit > NEAR || isBesideColumn(sort.column);
-  const asksBeside = splitFilter(filter).standing !== null || asksResults(filter);
-  if (isFar || asksBeside || isOrdered(services, register, which)) {
+  // what stands beside has no index: all in order once is quicker than looking for the ends of it
+  const isFar = offset + limit > NEAR || askedBeside(which).results;
+  if (isFar || isOrdered(services, register, which)) {
     const order = await registerOrder(services, register, which);
     const [rows, all] = await Promise.all([
       findRows(database, register, order.slice(offset, offset + limit)),

@@ -62,8 +62,10 @@ export const decisionRoutes = [
     path: '/api/schemes/:schemeId/decisions/waiting',
     access: { scheme: 'checkDecisions' },
     body: waitingDecisionsSchema,
-    handle: async ({ services: { database }, actor, scheme, body }) =>
-      countWaiting(await waitingForCheck(database, scheme.id, body.filter, null), actor),
+    handle: async ({ services: { database }, actor, scheme, body }) => {
+      const { waiting } = await waitingForCheck(database, scheme.id, body.filter, null);
+      return countWaiting(waiting, actor);
+    },
   }),
   defineRoute({
     method: 'post',

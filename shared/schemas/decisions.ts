@@ -70,6 +70,12 @@ const words = z
 const category = z.union([z.literal(0), z.literal(1), z.literal(2), z.literal(3), z.literal(4)]);
 const expected = z.number().int().min(1);
 
+function namesCategory(given: { kind: DecisionKind; category?: number | undefined }): boolean {
+  return (given.kind === 'adopt a category') === (given.category !== undefined);
+}
+
+const NO_CATEGORY = { path: ['category'], error: 'Say which category is adopted.' };
+
 /**
  * What is to be decided of the buildings that a filter means, on a run.
  *
@@ -85,10 +91,7 @@ export const proposedDecisionSchema = z
     reason: words.default(''),
     version: z.number().int().min(1).optional(),
   })
-  .refine(({ kind, category: given }) => (kind === 'adopt a category') === (given !== undefined), {
-    path: ['category'],
-    error: 'Say which category is adopted.',
-  });
+  .refine(namesCategory, NO_CATEGORY);
 
 /**
  * Prepares a decision of many buildings or of one. `expected` is how many can have it by the preview.
@@ -97,10 +100,7 @@ export const proposedDecisionSchema = z
  */
 export const newDecisionsSchema = z
   .strictObject({ ...proposedDecisionSchema.shape, expected })
-  .refine(({ kind, category: given }) => (kind === 'adopt a category') === (given !== undefined), {
-    path: ['category'],
-    error: 'Say which category is adopted.',
-  });
+  .refine(namesCategory, NO_CATEGORY);
 
 /**
  * What a decision of the buildings that are meant would come to, to be looked at before it is prepared.
@@ -129,6 +129,7 @@ export const decisionPreviewSchema = z.strictObject({
 export type DecisionPreview = z.infer<typeof decisionPreviewSchema>;
 
 const verdict = z.enum(['checked', 'returned']);
+
 function isCommented(given: { verdict: 'checked' | 'returned'; comment: string }): boolean {
   return given.verdict === 'checked' || given.comment !== '';
 }

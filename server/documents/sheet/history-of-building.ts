@@ -1,3 +1,4 @@
+import { capital } from '../../../shared/presentation/capital.ts';
 import type { Sequelize } from 'sequelize';
 import { CATEGORIES } from '../../../shared/damage/categories.ts';
 import { percentWords } from '../../../shared/presentation/bracket-words.ts';
@@ -8,10 +9,6 @@ import { findMeasures, type FoundMeasure } from '../../models/measures.ts';
 import type { HistoryLine } from './sheet-material.ts';
 
 type Dated = HistoryLine & { readonly at: Date };
-
-function capital(words: string): string {
-  return words.charAt(0).toUpperCase() + words.slice(1);
-}
 
 function sentences(parts: readonly (string | null | false)[]): string {
   return parts.filter((part) => part !== null && part !== false && part !== '').join(' ');

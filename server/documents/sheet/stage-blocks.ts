@@ -1,3 +1,4 @@
+import { capital } from '../../../shared/presentation/capital.ts';
 import type { OpenedWall } from '../../../shared/assessment/open-wall.ts';
 import { stageWords } from '../../../shared/presentation/result-words.ts';
 import { slopeWords } from '../../../shared/presentation/slope-words.ts';
@@ -51,10 +52,6 @@ function wholeWall({ paper }: SheetParts, { wall, result }: OpenedWall): Block {
 
 function isWarning(name: string): name is Warning {
   return name in WARNINGS;
-}
-
-function capital(words: string): string {
-  return words.charAt(0).toUpperCase() + words.slice(1);
 }
 
 /** What holds the building, with the stages at which it does and where the rule is from. */

@@ -1,3 +1,4 @@
+import { capital } from '../../../shared/presentation/capital.ts';
 import { CATEGORIES, type Category } from '../../../shared/damage/categories.ts';
 import { stageWords } from '../../../shared/presentation/result-words.ts';
 import { staleWords } from '../../../shared/presentation/run-words.ts';
@@ -8,10 +9,6 @@ import { wordsBlock } from '../pdf/words-block.ts';
 import { categorySwatch } from './category-swatch.ts';
 import type { SheetParts } from './sheet-parts.ts';
 import { SHEET_WIDTH } from './sheet-width.ts';
-
-function capital(words: string): string {
-  return words.charAt(0).toUpperCase() + words.slice(1);
-}
 
 function categoryVerdict({ paper }: SheetParts, category: Category, range: string): Block {
   const row = CATEGORIES[category];

@@ -1,15 +1,15 @@
 import type { BasisChange } from '../../../shared/assessment/conclusion.ts';
-import { CATEGORIES } from '../../../shared/damage/categories.ts';
+import type { Category } from '../../../shared/damage/categories.ts';
 import type { Decision, DecisionBasis } from '../../../shared/schemas/decision-answers.ts';
-import { percentWords } from '../../../shared/presentation/bracket-words.ts';
+import { categoryLabel, percentWords } from '../../../shared/presentation/bracket-words.ts';
 import { slopeWords } from '../../../shared/presentation/slope-words.ts';
 import { millimetresFromMetres } from '../../../shared/units/millimetres-from-metres.ts';
 import { KIND_WORDS } from './standing-words.ts';
 
 type Line = readonly [word: string, value: string];
 
-function labelOf(category: number | null): string {
-  return CATEGORIES.find((row) => row.category === category)?.label ?? '–';
+function labelOf(category: Category | null): string {
+  return category === null ? '–' : categoryLabel(category);
 }
 
 function strainLines(basis: DecisionBasis): Line[] {

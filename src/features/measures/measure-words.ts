@@ -16,8 +16,3 @@ export const MEASURE_SHAPES: Readonly<Record<Measure['state'], State>> = {
 export function limitWords({ volumeLoss, from, to }: NonNullable<Measure['limit']>): string {
   return `at most ${percentWords(volumeLoss, 2)} from ${chainageWords(from)} to ${chainageWords(to)}`;
 }
-
-/** A word as it begins a line. */
-export function capital(words: string): string {
-  return words.charAt(0).toUpperCase() + words.slice(1);
-}

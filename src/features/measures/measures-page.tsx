@@ -13,7 +13,8 @@ import { formatDay } from '../../lib/format-date.ts';
 import { can } from '../schemes/can.ts';
 import { useScheme } from '../schemes/scheme-context.ts';
 import { measuresQuery } from './api/list-measures.ts';
-import { capital, limitWords, MEASURE_SHAPES } from './measure-words.ts';
+import { limitWords, MEASURE_SHAPES } from './measure-words.ts';
+import { capital } from '../../../shared/presentation/capital.ts';
 
 /** So many are named; the others are counted. */
 const NAMED = 3;

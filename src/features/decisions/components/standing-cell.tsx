@@ -1,5 +1,6 @@
 import type { RegisterRow } from '../../../../shared/schemas/register.ts';
 import type { StandingColumn } from '../../../../shared/schemas/standing-columns.ts';
+import { capital } from '../../../../shared/presentation/capital.ts';
 import { StateMark } from '../../../components/ui/state-mark.tsx';
 import { isStanding, STANDING_MARKS } from '../standing-words.ts';
 
@@ -13,6 +14,6 @@ export function StandingCell({ column, row }: StandingCellProps) {
     const { shape, words } = STANDING_MARKS[value];
     return <StateMark state={shape}>{words}</StateMark>;
   }
-  const text = value.charAt(0).toUpperCase() + value.slice(1);
+  const text = capital(value);
   return <span title={text}>{text}</span>;
 }

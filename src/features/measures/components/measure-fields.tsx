@@ -8,7 +8,7 @@ import { Field } from '../../../components/ui/field.tsx';
 import { Select } from '../../../components/ui/select.tsx';
 import { TextArea } from '../../../components/ui/text-area.tsx';
 import type { MeasureDraft } from '../measure-draft.ts';
-import { capital } from '../measure-words.ts';
+import { capital } from '../../../../shared/presentation/capital.ts';
 import { LimitFields } from './limit-fields.tsx';
 
 type MeasureFieldsProps = {

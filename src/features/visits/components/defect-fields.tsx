@@ -1,3 +1,4 @@
+import { capital } from '../../../../shared/presentation/capital.ts';
 import { DEFECT_KINDS, VISIT_LIMITS } from '../../../../shared/schemas/visits.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { Field } from '../../../components/ui/field.tsx';
@@ -13,7 +14,7 @@ type DefectFieldsProps = {
 
 const KINDS = DEFECT_KINDS.map((kind) => ({
   value: kind,
-  label: kind.charAt(0).toUpperCase() + kind.slice(1),
+  label: capital(kind),
 }));
 
 /** One defect: where, of what kind, how wide. */
