@@ -19,6 +19,8 @@ const schema = z.object({
   FIRST_ADMINISTRATOR_NAME: z.string().trim().min(1).max(200).default('Administrator'),
   SMTP_URL: z.string().startsWith('smtp').optional(),
   MAIL_FROM: z.email().default('groundsill@example.org'),
+  /** How many letters to owners and answers go out in a minute at most. */
+  MAILS_PER_MINUTE: z.coerce.number().int().min(1).max(100_000).default(600),
   /**
    * Failed sign-ins, and letters asked for, in a quarter of an hour: so many for one e-mail address, ten
    * times as many from one IP address.

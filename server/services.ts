@@ -3,6 +3,7 @@ import type { Sequelize } from 'sequelize';
 import type { Env } from './env.ts';
 import type { Jobs } from './jobs/jobs.ts';
 import type { Mailer } from './mail/mailer.ts';
+import type { Outbox } from './mail/outbox.ts';
 import type { RunQueue } from './runs/run-queue.ts';
 import type { TileCache } from './tiles/tile-cache.ts';
 
@@ -12,6 +13,8 @@ export type Services = {
   readonly logger: Logger;
   readonly database: Sequelize;
   readonly mailer: Mailer;
+  /** Mails that must not be lost wait in it until the mail server has them. */
+  readonly outbox: Outbox;
   readonly tiles: TileCache;
   /** What is done of imports beside requests. */
   readonly jobs: Jobs;

@@ -1,6 +1,3 @@
-import { spawn, type ChildProcess } from 'node:child_process';
-import { once } from 'node:events';
-import path from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { QueryTypes, type Sequelize } from 'sequelize';
 import { startRun } from '../../server/commands/start-run.ts';
@@ -9,46 +6,11 @@ import { findProgress } from '../../server/models/run-chunks.ts';
 import { startBenchDatabase } from '../bench/bench-database.ts';
 import { seededRandom } from '../bench/seeded-random.ts';
 import { townToRun } from '../bench/town-to-run.ts';
+import { killableProcesses, type ProcessName } from './killable-processes.ts';
 
 const BUILDINGS = 20_000;
 const KILLS = 10;
 const SEED = Number(process.env.SEED ?? 1);
-const ROOT = path.resolve(import.meta.dirname, '../..');
-
-type Name = 'index' | 'worker';
-
-/** The server and a worker beside it, as they are in earnest, each of which can be killed and started again. */
-function processes(url: string) {
-  const running = new Map<Name, ChildProcess>();
-  const env = {
-    ...process.env,
-    NODE_ENV: 'production',
-    DATABASE_URL: url,
-    SESSION_SECRET: 'a secret of thirty-two letters or more',
-    PUBLIC_URL: 'http://127.0.0.1:4600',
-    DEMO: 'true',
-    PORT: '0',
-    LOG_LEVEL: 'error',
-  };
-  async function launch(name: Name): Promise<void> {
-    const child = spawn(process.execPath, [`dist/server/${name}.mjs`], {
-      cwd: ROOT,
-      env,
-      stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
-    });
-    running.set(name, child);
-    await once(child, 'message');
-  }
-  async function kill(name: Name, signal: NodeJS.Signals): Promise<void> {
-    const child = running.get(name);
-    running.delete(name);
-    if (child === undefined) return;
-    const ended = once(child, 'exit');
-    child.kill(signal);
-    await ended;
-  }
-  return { launch, kill };
-}
 
 /** Where two runs differ in any figure of any building: none, where both are whole and right. */
 async function differences(database: Sequelize, one: string, other: string): Promise<number> {
@@ -69,7 +31,7 @@ async function trial(database: Sequelize, url: string): Promise<boolean> {
   // whoever starts next finds it begun, and goes on
   const tools = { database, runs: { send: () => Promise.resolve() } as never };
   const random = seededRandom(SEED);
-  const { launch, kill } = processes(url);
+  const { launch, kill } = killableProcesses(url);
   const state = async (id: string) => (await findProgress(database, id))?.state;
 
   async function untilComplete(id: string): Promise<void> {
@@ -88,7 +50,7 @@ async function trial(database: Sequelize, url: string): Promise<boolean> {
       await Promise.all([launch('index'), launch('worker')]);
       while (kills < KILLS && (await state(id)) !== 'complete') {
         await sleep(200 + random() * 2500);
-        const name: Name = random() < 0.5 ? 'index' : 'worker';
+        const name: ProcessName = random() < 0.5 ? 'index' : 'worker';
         await kill(name, 'SIGKILL');
         kills += 1;
         const progress = await findProgress(database, id);

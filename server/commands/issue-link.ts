@@ -1,6 +1,7 @@
+import { randomUUID } from 'node:crypto';
 import type { Transaction } from 'sequelize';
 import type { LinkPurpose } from '../../shared/schemas/links.ts';
-import { linkTokenHash, newLinkToken } from '../authentication/link-token.ts';
+import { linkAddress } from '../authentication/link-token.ts';
 import type { Env } from '../env.ts';
 import { SingleUseLink } from '../models/single-use-link.ts';
 import { endLinks } from './end-links.ts';
@@ -16,22 +17,16 @@ export type IssuedLink = { readonly id: string; readonly url: string; readonly u
 
 /** Makes a link that sets a person's password once; older ones of the same purpose end. */
 export async function issueLink(
-  { PUBLIC_URL }: Pick<Env, 'PUBLIC_URL'>,
+  env: Pick<Env, 'PUBLIC_URL' | 'SESSION_SECRET'>,
   personId: string,
   purpose: LinkPurpose,
   transaction: Transaction,
+  lifetime = LIFETIMES[purpose],
 ): Promise<IssuedLink> {
   await endLinks(personId, transaction, purpose);
-  const token = newLinkToken();
-  const link = await SingleUseLink.create(
-    {
-      personId,
-      purpose,
-      tokenHash: linkTokenHash(token),
-      expiresAt: new Date(Date.now() + LIFETIMES[purpose]),
-    },
-    { transaction },
-  );
-  const url = new URL(`/links/${token}`, PUBLIC_URL).href;
-  return { id: link.id, url, until: link.expiresAt };
+  const id = randomUUID();
+  const { url, tokenHash } = linkAddress(env, id);
+  const expiresAt = new Date(Date.now() + lifetime);
+  await SingleUseLink.create({ id, personId, purpose, tokenHash, expiresAt }, { transaction });
+  return { id, url, until: expiresAt };
 }

@@ -26,6 +26,9 @@ import { migration as decisions } from './migrations/22-decisions.ts';
 import { migration as visits } from './migrations/23-visits.ts';
 import { migration as scores } from './migrations/24-scores.ts';
 import { migration as measures } from './migrations/25-measures.ts';
+import { migration as parties } from './migrations/26-parties.ts';
+import { migration as letters } from './migrations/27-letters.ts';
+import { migration as matters } from './migrations/28-matters.ts';
 
 /** In the order in which they are applied; a new one goes to the end. */
 const MIGRATIONS: Readonly<Record<string, Migration>> = {
@@ -54,6 +57,9 @@ const MIGRATIONS: Readonly<Record<string, Migration>> = {
   '23-visits': visits,
   '24-scores': scores,
   '25-measures': measures,
+  '26-parties': parties,
+  '27-letters': letters,
+  '28-matters': matters,
 };
 
 /** Opens the migrations of a database as its owner; `serverUrl` names the role that serves. */

@@ -4,6 +4,9 @@ import type { Letter } from './mailer.ts';
 export type LetterPart =
   string | { readonly list: readonly string[] } | { readonly label: string; readonly url: string };
 
+/** Stands for the address of a single-use link until the letter is sent: it is kept nowhere. */
+export const LINK_LEFT_OPEN = 'link:';
+
 /** Line breaks would make new headers and paragraphs, and marks of direction turn addresses round. */
 const NOT_IN_A_LINE = /[\p{Cc}\p{Zl}\p{Zp}\u202a-\u202e\u2066-\u2069]+/gu;
 

@@ -20,6 +20,10 @@ export class MailboxLetter extends Model<
   declare subject: string;
   declare text: string;
   declare html: string | null;
+  /** What came with it. */
+  declare attachments: CreationOptional<
+    readonly { readonly name: string; readonly type: string; readonly base64: string }[]
+  >;
 }
 
 export function initMailboxLetter(sequelize: Sequelize): void {
@@ -33,6 +37,7 @@ export function initMailboxLetter(sequelize: Sequelize): void {
       subject: { type: DataTypes.TEXT, allowNull: false },
       text: { type: DataTypes.TEXT, allowNull: false },
       html: { type: DataTypes.TEXT },
+      attachments: { type: DataTypes.JSONB, allowNull: false, defaultValue: [] },
     },
     { sequelize, tableName: 'mailbox_letters' },
   );

@@ -1,11 +1,16 @@
 import type { Request, Response } from 'express';
+import type { PhotographType } from '../../shared/schemas/visits.ts';
 import { AppError } from '../errors.ts';
-import { VisitPhotographFile } from '../models/visit-photograph-file.ts';
-import type { VisitPhotograph } from '../models/visit-photograph.ts';
 import type { Services } from '../services.ts';
 import { placeOfPhotograph } from './photograph-folder.ts';
 
 const ENDINGS = { 'image/jpeg': 'jpg', 'image/png': 'png', 'image/webp': 'webp' } as const;
+
+type SentPhotograph = {
+  /** Its place among those that came with it, from 0. */
+  readonly number: number;
+  readonly file: { readonly type: PhotographType; readonly sha256: string } | null;
+};
 
 type PhotographCall = {
   readonly services: Services;
@@ -30,14 +35,13 @@ function sendFile(res: Response, root: string, sha256: string): Promise<void> {
  */
 export async function sendPhotograph(
   { services, req, res }: PhotographCall,
-  photograph: VisitPhotograph,
+  { number, file }: SentPhotograph,
 ): Promise<void> {
-  const file = await VisitPhotographFile.findByPk(photograph.id);
   if (file === null) throw new AppError('not-found', 'This photograph has not arrived yet.');
   res.set({
     'Content-Type': file.type,
     'X-Content-Type-Options': 'nosniff',
-    'Content-Disposition': `inline; filename="photograph-${photograph.number + 1}.${ENDINGS[file.type]}"`,
+    'Content-Disposition': `inline; filename="photograph-${number + 1}.${ENDINGS[file.type]}"`,
     'Content-Security-Policy': "default-src 'none'; sandbox",
     'Cache-Control': 'private, no-cache',
     ETag: `"${file.sha256}"`,

@@ -1,11 +1,13 @@
 import type { Role } from '../../shared/schemas/roles.ts';
 import type { WaitingAnswer, WaitingItem } from '../../shared/schemas/waiting.ts';
 import type { DecisionsWaiting } from '../models/find-decisions-waiting.ts';
+import type { OwnersWaiting } from '../models/find-owners-waiting.ts';
 import type { OwnScheme } from '../models/find-schemes.ts';
 import type { SchemeState } from '../models/find-scheme-states.ts';
 import { holds } from '../policies/actor.ts';
 import { schemePolicy } from '../policies/scheme-policy.ts';
 import { presentDecisionsWaiting } from './waiting-decisions.ts';
+import { presentOwnersWaiting } from './waiting-owners.ts';
 
 /** Without one of each a scheme cannot be carried through; owners come with their buildings. */
 const NEEDED: readonly Role[] = ['designer', 'assessor', 'witness'];
@@ -38,6 +40,7 @@ function waitingIn(
   { scheme, actor }: OwnScheme,
   state: SchemeState,
   decisions: DecisionsWaiting | undefined,
+  owners: OwnersWaiting | undefined,
 ): WaitingItem[] {
   const since = scheme.createdAt.toISOString();
   const page = `/schemes/${scheme.id}`;
@@ -48,6 +51,7 @@ function waitingIn(
     ...(schemePolicy.checkDecisions(actor) && decisions !== undefined
       ? presentDecisionsWaiting(page, decisions)
       : []),
+    ...(owners === undefined ? [] : presentOwnersWaiting(page, actor, owners)),
     ...(schemePolicy.manageMembers(actor) ? waitingForAdministrator(page, since, state) : []),
     ...(holds(actor, 'assessor') && !state.hasBuildings
       ? [{ ...one, kind: 'no-buildings' as const, text: buildings, link: `${page}/plan` }]
@@ -70,13 +74,17 @@ export function presentWaitingSchemes(
   schemes: readonly OwnScheme[],
   states: readonly SchemeState[],
   decisions: readonly DecisionsWaiting[],
+  owners: readonly OwnersWaiting[],
 ): WaitingAnswer['schemes'] {
   return schemes.map((own) => {
     const { id, name, archivedAt } = own.scheme;
     const state = states.find((one) => one.id === id);
     const ofDecisions = decisions.find(({ schemeId }) => schemeId === id);
+    const ofOwners = owners.find(({ schemeId }) => schemeId === id);
     const waiting =
-      state === undefined || archivedAt !== null ? [] : waitingIn(own, state, ofDecisions);
+      state === undefined || archivedAt !== null
+        ? []
+        : waitingIn(own, state, ofDecisions, ofOwners);
     return {
       scheme: { id, name, archivedAt: archivedAt?.toISOString() ?? null },
       roles: [...own.actor.roles].sort(),

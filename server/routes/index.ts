@@ -1,4 +1,5 @@
 import { alignmentRoutes } from './alignments.ts';
+import { appointmentRoutes } from './appointments.ts';
 import { auditRoutes } from './audit.ts';
 import { backgroundRoutes } from './background.ts';
 import { buildingOutlineRoutes } from './building-outlines.ts';
@@ -8,10 +9,17 @@ import { decisionRoutes } from './decisions.ts';
 import type { Route } from './define-route.ts';
 import { groundRoutes } from './ground.ts';
 import { importRoutes } from './imports.ts';
+import { letterRoutes } from './letters.ts';
+import { letterTemplateRoutes } from './letter-templates.ts';
 import { linkRoutes } from './links.ts';
 import { mailboxRoutes } from './mailbox.ts';
+import { matterRoutes } from './matters.ts';
 import { measureRoutes } from './measures.ts';
 import { memberRoutes } from './members.ts';
+import { ownRoutes } from './own.ts';
+import { ownMatterRoutes } from './own-matters.ts';
+import { partyRoutes } from './parties.ts';
+import { partyImportRoutes } from './party-imports.ts';
 import { peopleRoutes } from './people.ts';
 import { registerChangeRoutes } from './register-changes.ts';
 import { registerViewRoutes } from './register-views.ts';
@@ -21,6 +29,7 @@ import { runRoutes } from './runs.ts';
 import { schemeRoutes } from './schemes.ts';
 import { sessionRoutes } from './session.ts';
 import { tileRoutes } from './tiles.ts';
+import { undertakingRoutes } from './undertakings.ts';
 import { visitRoutes } from './visits.ts';
 import { waitingRoutes } from './waiting.ts';
 
@@ -46,8 +55,17 @@ export const ROUTES: readonly Route[] = [
   ...runRoutes,
   ...decisionRoutes,
   ...measureRoutes,
+  ...letterTemplateRoutes,
+  ...letterRoutes,
+  ...matterRoutes,
+  ...ownMatterRoutes,
+  ...appointmentRoutes,
+  ...undertakingRoutes,
   ...importRoutes,
+  ...partyRoutes,
+  ...partyImportRoutes,
   ...tileRoutes,
   ...visitRoutes,
+  ...ownRoutes,
   ...waitingRoutes,
 ];

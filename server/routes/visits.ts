@@ -11,6 +11,7 @@ import { receiveFile } from '../middleware/receive-file.ts';
 import { findBuildingEverKept } from '../models/find-building.ts';
 import { findPhotograph } from '../models/find-photograph.ts';
 import { findVisitedBuildings, findVisits } from '../models/find-visits.ts';
+import { VisitPhotographFile } from '../models/visit-photograph-file.ts';
 import { sendPhotograph } from '../photographs/send-photograph.ts';
 import {
   presentPhotographFile,
@@ -71,7 +72,8 @@ export const visitRoutes = [
     params: photographParamsSchema,
     handle: async ({ scheme, params, ...call }) => {
       const { photograph } = await findPhotograph(scheme.id, params);
-      await sendPhotograph(call, photograph);
+      const file = await VisitPhotographFile.findByPk(photograph.id);
+      await sendPhotograph(call, { number: photograph.number, file });
     },
   }),
 ];

@@ -1,5 +1,6 @@
 import type { WaitingAnswer } from '../../shared/schemas/waiting.ts';
 import { findDecisionsWaiting } from '../models/find-decisions-waiting.ts';
+import { findOwnersWaiting } from '../models/find-owners-waiting.ts';
 import { findInvitedOutside, findSchemeStates } from '../models/find-scheme-states.ts';
 import { findSchemes } from '../models/find-schemes.ts';
 import type { Actor } from '../policies/actor.ts';
@@ -10,9 +11,10 @@ import { defineRoute } from './define-route.ts';
 async function answerWaiting({ database, env }: Services, actor: Actor): Promise<WaitingAnswer> {
   const schemes = await findSchemes(actor);
   const ids = schemes.map(({ scheme }) => scheme.id);
-  const [states, decisions] = await Promise.all([
+  const [states, decisions, owners] = await Promise.all([
     findSchemeStates(database, ids),
     findDecisionsWaiting(database, ids, actor.id),
+    findOwnersWaiting(database, ids, actor.id),
   ]);
   const none = { invited: 0, since: null };
   const { invited, since } = actor.isAdministrator ? await findInvitedOutside(database) : none;
@@ -26,6 +28,7 @@ async function answerWaiting({ database, env }: Services, actor: Actor): Promise
         hasBackground: state.hasBackground || (env.DEMO && state.hasBuildings),
       })),
       decisions,
+      owners,
     ),
   };
 }

@@ -12,6 +12,7 @@ import { CONTOUR_LEVELS, settlementContours } from '../../shared/ground/settleme
 import { alignmentDesignSchema } from '../../shared/schemas/alignments.ts';
 import { rulesSchema } from '../../shared/schemas/rules.ts';
 import { runFactsSchema, type RunResult } from '../../shared/schemas/runs.ts';
+import type { LettersMaterial } from '../documents/letter/letter-material.ts';
 import type { SheetMaterial } from '../documents/sheet/sheet-material.ts';
 import { boxesOnGrid, type BoxInDegrees } from './boxes-on-grid.ts';
 import { planChunks, type Chunk } from './plan-chunks.ts';
@@ -40,7 +41,8 @@ export type Asked =
       readonly id: string;
       readonly neighbours: string;
     }
-  | { readonly kind: 'sheet'; readonly material: SheetMaterial };
+  | { readonly kind: 'sheet'; readonly material: SheetMaterial }
+  | { readonly kind: 'letters'; readonly material: LettersMaterial };
 
 /** A result as the table keeps it. */
 export type ResultRow = RunResult & { readonly buildingId: number };
@@ -85,6 +87,11 @@ async function sheetOf({ material }: Asked & { kind: 'sheet' }): Promise<Uint8Ar
   return sheetDocument(material);
 }
 
+async function lettersOf({ material }: Asked & { kind: 'letters' }): Promise<Uint8Array> {
+  const { lettersDocument } = await import('../documents/letter/letters-document.ts');
+  return lettersDocument(material);
+}
+
 /**
  * What a thread answers: the parts of a run, a building's rows, the bytes of a document, or a text of JSON
  * for the database.
@@ -93,7 +100,7 @@ export type Computed<A extends Asked> = A extends { kind: 'plan' }
   ? Chunk[]
   : A extends { kind: 'rows' }
     ? BuildingRows
-    : A extends { kind: 'sheet' }
+    : A extends { kind: 'sheet' | 'letters' }
       ? Uint8Array
       : string;
 
@@ -111,5 +118,7 @@ export function compute(asked: Asked): Chunk[] | BuildingRows | string | Promise
       return rowsOf(asked);
     case 'sheet':
       return sheetOf(asked);
+    case 'letters':
+      return lettersOf(asked);
   }
 }

@@ -1,6 +1,5 @@
-import PgBoss from 'pg-boss';
-import type { Transaction } from 'sequelize';
-import { z } from 'zod';
+import type PgBoss from 'pg-boss';
+import type { Boss } from '../jobs/open-boss.ts';
 import type { Services } from '../services.ts';
 import { doStep, failRun, type StepTools } from './do-step.ts';
 import type { RunQueue } from './run-queue.ts';
@@ -10,34 +9,16 @@ import { openRunThreads } from './run-threads.ts';
 /** As the migration made it. */
 const QUEUE = 'run-steps';
 
-/** In seconds: how often is looked for steps, and for steps whose process died. */
+/** In seconds: how often is looked for steps. */
 const LOOK_EVERY = 0.5;
-const TIDY_EVERY = 5;
 
 /** A step that fails so often will not do better, whereas one whose process was killed has not failed. */
 const TRIES = 3;
 
-const STOP_WITHIN_MS = 5000;
-
-type Tools = Pick<Services, 'database' | 'logger'> & {
-  readonly env: Pick<Services['env'], 'DATABASE_URL'>;
-};
-
-/** The queue's statements in a transaction of the application's. */
-function within({ database }: Tools, transaction: Transaction): PgBoss.Db {
-  return {
-    executeSql: async (text: string, values: unknown[]) => {
-      // what is left out is null in SQL, and nothing at all to the binder
-      const bind = values.map((value) => value ?? null);
-      const [rows] = await database.query(text, { bind, transaction });
-      return { rows: z.array(z.unknown()).parse(rows) };
-    },
-  };
-}
+type Tools = Pick<Services, 'database' | 'logger'> & { readonly queues: Boss };
 
 /** Does steps, and ends a run of which one fails again and again; a step that was killed has not failed. */
-function stepWorker(tools: Tools, step: Omit<StepTools, 'database'>) {
-  const { database, logger } = tools;
+function stepWorker({ database, logger }: Tools, step: Omit<StepTools, 'database'>) {
   const failures = new Map<string, number>();
 
   async function fail(failed: RunStep, id: string, error: unknown): Promise<void> {
@@ -61,29 +42,12 @@ function stepWorker(tools: Tools, step: Omit<StepTools, 'database'>) {
   };
 }
 
-/** The queue as it lies in the database; nothing is made in it here. */
-function openBoss({ env, logger }: Tools): PgBoss {
-  const boss = new PgBoss({
-    connectionString: env.DATABASE_URL,
-    application_name: 'groundsill runs',
-    max: 4,
-    migrate: false,
-    schedule: false,
-    maintenanceIntervalSeconds: TIDY_EVERY,
-  });
-  boss.on('error', (error) => {
-    logger.error({ err: error }, 'the queue of runs');
-  });
-  return boss;
-}
-
 /**
  * The queue of the database, worked by as many at once as there are threads. Other processes may work it
  * too; a step that one of them was killed over comes back to it.
  */
 export async function openRunQueue(tools: Tools): Promise<RunQueue> {
-  const boss = openBoss(tools);
-  await boss.start();
+  const { boss, insert } = tools.queues;
   const threads = openRunThreads();
   const workers: string[] = [];
 
@@ -93,15 +57,14 @@ export async function openRunQueue(tools: Tools): Promise<RunQueue> {
 
   const queue: RunQueue = {
     send: async (steps, transaction) => {
-      const jobs = steps.map((data) => ({ name: QUEUE, data }));
-      await boss.insert(jobs, { db: within(tools, transaction) });
+      await insert(
+        steps.map((data) => ({ name: QUEUE, data })),
+        transaction,
+      );
       transaction.afterCommit(wake);
     },
     compute: threads.compute,
-    close: async () => {
-      await boss.stop({ timeout: STOP_WITHIN_MS });
-      await threads.close();
-    },
+    close: threads.close,
   };
 
   const work = stepWorker(tools, { threads, queue });

@@ -8,6 +8,6 @@ export type RunQueue = {
   readonly send: (steps: readonly RunStep[], transaction: Transaction) => Promise<void>;
   /** Arithmetic that a request waits for, beside that of runs. */
   readonly compute: RunThreads['compute'];
-  /** Stops doing steps; what is in hand goes back to the queue. */
+  /** Ends the threads, once the queues have stopped. */
   readonly close: () => Promise<void>;
 };

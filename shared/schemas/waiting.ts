@@ -14,6 +14,9 @@ export const WAITING_KINDS = [
   'decisions-to-check',
   'decisions-returned',
   'decisions-again',
+  'matters-waiting',
+  'appointments-asked',
+  'undertakings-overdue',
 ] as const;
 
 /**

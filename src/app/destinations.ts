@@ -1,7 +1,9 @@
 import type { SchemeAnswer } from '../../shared/schemas/schemes.ts';
 import type { Destination } from '../components/layout/go-to.tsx';
 import {
+  homePath,
   measuresPath,
+  ownersPath,
   PATHS,
   planPath,
   registerPath,
@@ -24,16 +26,25 @@ export function administratorLinks({ isAdministrator, demo }: SignedInPerson): r
   ];
 }
 
+/** Whether a person has nothing to do in a scheme but with their own buildings. */
+export function isOwnerOnly(scheme: SchemeAnswer): boolean {
+  return can(scheme, 'readOwnBuildings') && !can(scheme, 'readRegister');
+}
+
 /** The screens of a scheme that the person may see. */
 export function schemeLinks(scheme: SchemeAnswer): readonly Link[] {
+  const own = { to: homePath(scheme.id), label: 'My building' };
+  if (isOwnerOnly(scheme)) return [own];
   const ofRegister = [
     { to: planPath(scheme.id), label: 'Plan' },
     { to: registerPath(scheme.id), label: 'Register' },
   ];
   return [
+    ...(can(scheme, 'readOwnBuildings') ? [own] : []),
     ...(can(scheme, 'readRegister') ? ofRegister : []),
     ...(can(scheme, 'readDecisions') ? [{ to: measuresPath(scheme.id), label: 'Measures' }] : []),
     ...(can(scheme, 'recordVisits') ? [{ to: visitsPath(scheme.id), label: 'Visits' }] : []),
+    ...(can(scheme, 'readUndertakings') ? [{ to: ownersPath(scheme.id), label: 'Owners' }] : []),
     { to: settingsPath(scheme.id), label: can(scheme, 'readRules') ? 'Settings' : 'Description' },
   ];
 }

@@ -1,5 +1,5 @@
 import type { RouteObject } from 'react-router-dom';
-import { PATHS, SETTINGS } from '../config/paths.ts';
+import { OWNERS, PATHS, SETTINGS } from '../config/paths.ts';
 import { AdministratorsOnly } from './administrators-only.tsx';
 import { FramedPages } from './framed.tsx';
 import { PageError } from './page-error.tsx';
@@ -72,6 +72,85 @@ const settings: RouteObject[] = [
   },
 ];
 
+const owners: RouteObject[] = [
+  {
+    index: true,
+    lazy: async () => ({ Component: (await import('./routes/owners.tsx')).OwnersStart }),
+  },
+  {
+    path: OWNERS.parties,
+    lazy: async () => ({
+      Component: (await import('../features/parties/parties-page.tsx')).PartiesPage,
+    }),
+  },
+  {
+    path: `${OWNERS.parties}/imports`,
+    lazy: async () => ({
+      Component: (await import('../features/parties/party-imports-page.tsx')).PartyImportsPage,
+    }),
+  },
+  {
+    path: `${OWNERS.parties}/imports/:partyImportId`,
+    lazy: async () => ({
+      Component: (await import('../features/parties/party-import-page.tsx')).PartyImportPage,
+    }),
+  },
+  {
+    path: OWNERS.letters,
+    lazy: async () => ({
+      Component: (await import('../features/letters/letters-page.tsx')).LettersPage,
+    }),
+  },
+  {
+    path: `${OWNERS.letters}/new`,
+    lazy: async () => ({
+      Component: (await import('../features/letters/new-batch-page.tsx')).NewBatchPage,
+    }),
+  },
+  {
+    path: `${OWNERS.letters}/templates`,
+    lazy: async () => ({
+      Component: (await import('../features/letters/templates-page.tsx')).TemplatesPage,
+    }),
+  },
+  {
+    path: `${OWNERS.letters}/settings`,
+    lazy: async () => ({
+      Component: (await import('../features/letters/letter-settings-page.tsx')).LetterSettingsPage,
+    }),
+  },
+  {
+    path: `${OWNERS.letters}/:batchId`,
+    lazy: async () => ({
+      Component: (await import('../features/letters/batch-page.tsx')).BatchPage,
+    }),
+  },
+  {
+    path: OWNERS.inbox,
+    lazy: async () => ({
+      Component: (await import('../features/matters/inbox-page.tsx')).InboxPage,
+    }),
+  },
+  {
+    path: `${OWNERS.inbox}/:matterId`,
+    lazy: async () => ({
+      Component: (await import('../features/matters/matter-page.tsx')).MatterPage,
+    }),
+  },
+  {
+    path: OWNERS.appointments,
+    lazy: async () => ({
+      Component: (await import('../features/appointments/appointments-page.tsx')).AppointmentsPage,
+    }),
+  },
+  {
+    path: OWNERS.undertakings,
+    lazy: async () => ({
+      Component: (await import('../features/undertakings/undertakings-page.tsx')).UndertakingsPage,
+    }),
+  },
+];
+
 /** Both at once: from one of them the other may be opened where there is no network. */
 async function visitPages() {
   const [{ VisitPage }, { VisitsPage }] = await Promise.all([
@@ -83,6 +162,16 @@ async function visitPages() {
 
 const ofScheme: RouteObject[] = [
   { index: true, Component: SchemeStart },
+  {
+    path: 'home',
+    lazy: async () => ({ Component: (await import('../features/own/own-page.tsx')).OwnPage }),
+  },
+  {
+    path: 'home/letters/:ownLetterId',
+    lazy: async () => ({
+      Component: (await import('../features/own/own-letter-page.tsx')).OwnLetterPage,
+    }),
+  },
   {
     path: 'plan',
     lazy: async () => ({ Component: (await import('../features/plan/plan-page.tsx')).PlanPage }),
@@ -115,6 +204,11 @@ const ofScheme: RouteObject[] = [
     lazy: async () => ({
       Component: (await import('../features/register/register-page.tsx')).RegisterPage,
     }),
+  },
+  {
+    path: 'owners',
+    lazy: async () => ({ Component: (await import('./routes/owners.tsx')).OwnersPage }),
+    children: owners,
   },
   {
     path: 'settings',

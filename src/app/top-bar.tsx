@@ -13,12 +13,14 @@ import { useSignOut } from '../features/session/api/sign-out.ts';
 import { usePerson } from '../features/session/person-context.ts';
 import { useHotkeys } from '../hooks/use-hotkeys.ts';
 import { useKeysAtHand } from '../hooks/use-keys-at-hand.ts';
-import { administratorLinks, METHOD_LINK, schemeLinks } from './destinations.ts';
+import { administratorLinks, isOwnerOnly, METHOD_LINK, schemeLinks } from './destinations.ts';
 import { GoAnywhere } from './go-anywhere.tsx';
 import { KEYS } from './keys.ts';
 
 function tabsOf(scheme: SchemeAnswer | undefined, links: readonly Tab[]): readonly Tab[] {
-  if (scheme !== undefined) return [...schemeLinks(scheme), METHOD_LINK];
+  if (scheme !== undefined) {
+    return [...schemeLinks(scheme), ...(isOwnerOnly(scheme) ? [] : [METHOD_LINK])];
+  }
   return [{ to: PATHS.schemes, label: 'Schemes', end: true }, ...links, METHOD_LINK];
 }
 
@@ -32,6 +34,7 @@ export function TopBar({ scheme }: { readonly scheme?: SchemeAnswer | undefined 
   const person = usePerson();
   const { data: schemes = [] } = useQuery(schemesQuery);
   const signOut = useSignOut();
+  const isForOwner = scheme !== undefined && isOwnerOnly(scheme);
   const [showsKeys, setShowsKeys] = useState(false);
   const keysAtHand = useKeysAtHand();
   const links = administratorLinks(person);
@@ -46,7 +49,7 @@ export function TopBar({ scheme }: { readonly scheme?: SchemeAnswer | undefined 
       tabs={tabsOf(scheme, links)}
       scheme={scheme && <SchemeSwitcher current={scheme} others={others} pathOf={schemePath} />}
     >
-      <GoAnywhere scheme={scheme} schemes={schemes} />
+      {!isForOwner && <GoAnywhere scheme={scheme} schemes={schemes} />}
       <PersonMenu
         name={person.name}
         links={[...(scheme === undefined ? [] : links), { to: PATHS.account, label: 'Account' }]}

@@ -22,6 +22,15 @@ export const SETTINGS = {
   ground: 'ground',
 } as const;
 
+/** The screens about owners, by the end of their address. */
+export const OWNERS = {
+  parties: 'parties',
+  letters: 'letters',
+  inbox: 'inbox',
+  appointments: 'appointments',
+  undertakings: 'undertakings',
+} as const;
+
 export function schemePath(schemeId: string): string {
   return `/schemes/${schemeId}`;
 }
@@ -54,6 +63,46 @@ export function visitsPath(schemeId: string): string {
 /** Recording a visit of one building. */
 export function visitPath(schemeId: string, buildingId: number): string {
   return `${schemePath(schemeId)}/buildings/${buildingId}/visit`;
+}
+
+/** Who owns, rents and manages the buildings, and what goes between them and the team. */
+export function ownersPath(schemeId: string, part?: keyof typeof OWNERS): string {
+  const path = `${schemePath(schemeId)}/owners`;
+  return part === undefined ? path : `${path}/${OWNERS[part]}`;
+}
+
+/** What an owner is shown of their own buildings. */
+export function homePath(schemeId: string): string {
+  return `${schemePath(schemeId)}/home`;
+}
+
+/** A letter as its owner reads it. */
+export function ownLetterPath(schemeId: string, letterId: string): string {
+  return `${homePath(schemeId)}/letters/${letterId}`;
+}
+
+/** A party with all that is known of it. */
+export function partyPath(schemeId: string, partyId: string): string {
+  return `${ownersPath(schemeId, 'parties')}?party=${partyId}`;
+}
+
+/** Bringing parties in, and what was brought in before. */
+export function partyImportsPath(schemeId: string): string {
+  return `${ownersPath(schemeId, 'parties')}/imports`;
+}
+
+export function partyImportPath(schemeId: string, partyImportId: string): string {
+  return `${partyImportsPath(schemeId)}/${partyImportId}`;
+}
+
+/** A batch of letters, or one of the screens beside them. */
+export function letterPagePath(schemeId: string, page: string): string {
+  return `${ownersPath(schemeId, 'letters')}/${page}`;
+}
+
+/** One matter of the inbox. */
+export function matterPath(schemeId: string, matterId: string): string {
+  return `${ownersPath(schemeId, 'inbox')}/${matterId}`;
 }
 
 export function registerPath(schemeId: string): string {

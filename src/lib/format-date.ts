@@ -47,6 +47,12 @@ export function formatWeekday(at: string | Date): string {
   return WEEKDAY.format(new Date(at)).replace(',', '');
 }
 
+/** As "Tuesday 1 December 2026, 14:05", for whoever has to be there. */
+export function formatWeekdayMoment(at: string | Date): string {
+  const moment = new Date(at);
+  return `${DAY_OF_WEEK.format(moment)} ${DAY.format(moment)}, ${TIME.format(moment)}`;
+}
+
 /** As "1 Dec 2026, 14:05", for tables. */
 export function formatMoment(at: string | Date): string {
   const moment = new Date(at);

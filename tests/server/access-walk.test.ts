@@ -43,7 +43,17 @@ function paramsOf(place: Place | undefined): Params {
     importId: place?.importId ?? UNKNOWN_ID,
     decisionId: UNKNOWN_ID,
     measureId: UNKNOWN_ID,
+    matterId: UNKNOWN_ID,
+    matterPhotographId: UNKNOWN_ID,
+    appointmentId: UNKNOWN_ID,
+    undertakingId: UNKNOWN_ID,
+    batchId: UNKNOWN_ID,
+    writtenLetterId: UNKNOWN_ID,
+    letterKind: 'first information',
+    partyId: UNKNOWN_ID,
+    partyImportId: UNKNOWN_ID,
     visitId: place?.visitId ?? UNKNOWN_ID,
+    ownLetterId: UNKNOWN_ID,
     photographId: UNKNOWN_ID,
     row: 1,
     field: 'use',
@@ -60,7 +70,7 @@ function addressOf({ path }: Route, params: Params): string {
 
 /** Kept views are of one person each; nothing is mended, decided, protected or photographed here. */
 function taken({ path }: Route): readonly number[] {
-  return /:(viewId|row|photographId|decisionId|measureId)\b|\/decisions$/.test(path)
+  return /:(viewId|row|ownLetterId|photographId|decisionId|measureId|matterId|appointmentId|undertakingId|partyId|partyImportId)\b|\/decisions$/.test(path)
     ? [...TAKEN, 404]
     : TAKEN;
 }

@@ -11,6 +11,7 @@ import { readEnv } from '../../server/env.ts';
 import { openJobs, openJobsInline } from '../../server/jobs/open-jobs.ts';
 import { createLogger } from '../../server/logger.ts';
 import type { Letter } from '../../server/mail/mailer.ts';
+import { inlineOutbox, type InlineOutbox } from './inline-outbox.ts';
 import { inlineRunQueue, type InlineRunQueue } from './inline-run-queue.ts';
 import type { Services } from '../../server/services.ts';
 import { createTileCache } from '../../server/tiles/tile-cache.ts';
@@ -21,6 +22,8 @@ export type TestApp = {
   readonly services: () => Services;
   /** Steps of runs are done in it at once. */
   readonly runQueue: () => InlineRunQueue;
+  /** Mails that are put into it are sent at once. */
+  readonly outbox: () => InlineOutbox;
   /** What was sent, oldest first. */
   readonly letters: Letter[];
 };
@@ -41,7 +44,8 @@ export function testApp({
   readonly threads?: boolean;
 } = {}): TestApp {
   const letters: Letter[] = [];
-  let running: { app: Express; services: Services; queue: InlineRunQueue } | undefined;
+  let running:
+    { app: Express; services: Services; queue: InlineRunQueue; outbox: InlineOutbox } | undefined;
   let close: (() => Promise<void>) | undefined;
 
   beforeAll(async () => {
@@ -66,7 +70,7 @@ export function testApp({
     const mailer = {
       send: (letter: Letter) => {
         letters.push(letter);
-        return Promise.resolve();
+        return Promise.resolve('250 taken in');
       },
     };
     const tools = {
@@ -78,11 +82,13 @@ export function testApp({
     };
     const jobs = threads ? openJobs(tools) : openJobsInline(tools);
     const queue = inlineRunQueue(database);
-    const services = { ...tools, jobs, runs: queue };
-    running = { services, queue, app: createApp(services, pool, root) };
+    const outbox = inlineOutbox({ ...tools, runs: queue });
+    const services = { ...tools, jobs, runs: queue, outbox };
+    running = { services, queue, outbox, app: createApp(services, pool, root) };
     close = async () => {
       await jobs.close();
       await queue.close();
+      await outbox.idle();
       await database.close();
       await pool.end();
       await copy.drop();
@@ -103,6 +109,7 @@ export function testApp({
     app: () => started().app,
     services: () => started().services,
     runQueue: () => started().queue,
+    outbox: () => started().outbox,
     letters,
   };
 }

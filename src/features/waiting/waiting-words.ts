@@ -10,6 +10,9 @@ const BUTTONS: Readonly<Record<WaitingItem['kind'], string>> = {
   'decisions-to-check': 'Check them',
   'decisions-returned': 'See them',
   'decisions-again': 'See them',
+  'matters-waiting': 'Answer them',
+  'appointments-asked': 'See them',
+  'undertakings-overdue': 'See them',
 };
 
 /** What the button of something that waits says. */
@@ -25,6 +28,9 @@ const THINGS: Readonly<Record<WaitingItem['kind'], readonly [one: string, severa
   'decisions-to-check': ['decision to check', 'decisions to check'],
   'decisions-returned': ['decision returned', 'decisions returned'],
   'decisions-again': ['decision to look at again', 'decisions to look at again'],
+  'matters-waiting': ['message to answer', 'messages to answer'],
+  'appointments-asked': ['other day asked for', 'other days asked for'],
+  'undertakings-overdue': ['undertaking overdue', 'undertakings overdue'],
 };
 
 /** What there are so many of. */

@@ -12,10 +12,12 @@ import {
   aPerson,
   aScheme,
 } from '../../support/factories.ts';
+import { aMatter, aSignedInOwner } from '../../support/matters.ts';
 import { signIn } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
 
-const { app } = testApp();
+const running = testApp();
+const { app } = running;
 
 async function waitingFor(person: Person): Promise<WaitingAnswer> {
   const answer = await (await signIn(app(), person)).get('/api/waiting');
@@ -135,6 +137,32 @@ test('nothing waits in an archived scheme, and whoever holds several roles is to
   expect(await waitingIn(archived, person)).toEqual([]);
   const kinds = (await waitingIn(scheme, person))?.map(({ kind }) => kind);
   expect(kinds).toEqual(['no-buildings', 'no-background']);
+});
+
+test('an assessor waits for what owners brought up and for what is overdue, a witness does not', async () => {
+  const scheme = await aScheme();
+  await withBackground(scheme);
+  const owner = await aSignedInOwner(running, scheme);
+  const assessor = await aMember(scheme, 'assessor');
+  const other = await aMember(scheme, 'assessor');
+  const own = `/api/schemes/${scheme.id}/own/matters`;
+  await owner.agent.post(own).send(aMatter(owner.building.id));
+  const theirs = aMatter(owner.building.id);
+  await owner.agent.post(own).send(theirs);
+  const agent = await signIn(app(), other);
+  const given = { version: 1, assignedTo: other.id };
+  await agent.patch(`/api/schemes/${scheme.id}/matters/${theirs.id}`).send(given);
+  await agent.post(`/api/schemes/${scheme.id}/undertakings`).send({
+    ...{ promise: 'Quiet nights', madeTo: 'Council', partyId: null, source: 'Hearing' },
+    ...{ buildingId: owner.building.id, stretch: null, due: '2020-01-01' },
+    ...{ responsible: 'Site', doneOn: null, evidence: '' },
+  });
+  expect(await waitingIn(scheme, assessor)).toMatchObject([
+    { kind: 'matters-waiting', count: 1, link: `/schemes/${scheme.id}/owners/inbox` },
+    { kind: 'undertakings-overdue', count: 1, since: '2020-01-01T00:00:00.000Z' },
+  ]);
+  expect(await waitingIn(scheme, other)).toMatchObject([{ count: 2 }, { count: 1 }]);
+  expect(await waitingIn(scheme, await aMember(scheme, 'witness'))).toEqual([]);
 });
 
 test('is for people who are signed in', async () => {

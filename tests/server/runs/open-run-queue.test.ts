@@ -4,6 +4,7 @@ import type { Sequelize } from 'sequelize';
 import { recoverRuns } from '../../../server/commands/recover-runs.ts';
 import { startRun } from '../../../server/commands/start-run.ts';
 import { connectDatabase } from '../../../server/database/connect.ts';
+import { openBoss, type Boss } from '../../../server/jobs/open-boss.ts';
 import { createLogger } from '../../../server/logger.ts';
 import { findProgress } from '../../../server/models/run-chunks.ts';
 import { RunState } from '../../../server/models/run-state.ts';
@@ -16,15 +17,18 @@ import { createTestDatabase } from '../../support/test-database.ts';
 const logger = createLogger({ LOG_LEVEL: 'silent' });
 let copy: Awaited<ReturnType<typeof createTestDatabase>>;
 let database: Sequelize;
+let queues: Boss;
 let queue: RunQueue;
 
 beforeAll(async () => {
   copy = await createTestDatabase();
   database = connectDatabase(copy.serverUrl);
-  queue = await openRunQueue({ env: { DATABASE_URL: copy.serverUrl }, database, logger });
+  queues = await openBoss({ env: { DATABASE_URL: copy.serverUrl }, database, logger });
+  queue = await openRunQueue({ database, logger, queues });
 });
 
 afterAll(async () => {
+  await queues.close();
   await queue.close();
   await database.close();
   await copy.drop();

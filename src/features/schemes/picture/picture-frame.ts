@@ -60,6 +60,14 @@ export function pictureFrame([west, south, east, north]: LonLatBounds, size: Siz
   };
 }
 
+/** Where a place of the world lies in a picture, in pixels. */
+export function placeInPicture(
+  { left, top, world }: PictureFrame,
+  [longitude, latitude]: readonly [number, number],
+): [x: number, y: number] {
+  return [across(longitude) * world - left, down(latitude) * world - top];
+}
+
 function isWithin({ z, x, y }: PlacedTile, [west, south, east, north]: LonLatBounds): boolean {
   const count = 2 ** z;
   return (

@@ -7,6 +7,7 @@ import { CAUTIONS } from '../../../../shared/cautions.ts';
 import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
 import { troughWidthMatters } from '../../../../shared/ground/trough-width-matters.ts';
 import { MeasuresPanel } from '../../measures/components/measures-panel.tsx';
+import { PartiesOfBuilding } from '../../parties/components/parties-of-building.tsx';
 import { DecisionPanel } from '../../decisions/components/decision-panel.tsx';
 import { Panel } from '../../../components/ui/panel.tsx';
 import { breakpointWords, settledWords } from '../../../../shared/presentation/bracket-words.ts';
@@ -116,6 +117,7 @@ export function SheetAnswers(props: SheetAnswersProps) {
         building={{ id: Number(building.facts.id), reference: building.facts.reference }}
       />
       <MeasuresPanel run={props.run} building={building} />
+      <PartiesOfBuilding buildingId={Number(building.facts.id)} />
       <Panel title="Cautions">
         <ul className="mt-2 list-disc pl-4 text-small text-ink-2">
           {CAUTIONS.map((caution) => (

@@ -4,6 +4,7 @@ import type { BuildingSheet } from '../../../../shared/assessment/sheet-of-build
 import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
 import { Panel } from '../../../components/ui/panel.tsx';
 import { WorkingList } from '../../assessment/components/working-list.tsx';
+import { OwnersOfBuilding } from '../../matters/components/owners-of-building.tsx';
 import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { VisitsOfBuilding } from '../../visits/components/visits-of-building.tsx';
@@ -39,6 +40,15 @@ export function SheetBody({ schemeId, run, building, sheet }: SheetBodyProps) {
           <VisitsOfBuilding schemeId={schemeId} buildingId={Number(building.facts.id)} />
         </div>
       )}
+      <div className="col-span-full mt-5">
+        <OwnersOfBuilding
+          building={{
+            id: Number(building.facts.id),
+            reference: building.facts.reference,
+            name: building.facts.name,
+          }}
+        />
+      </div>
       {opened !== null && (
         <Panel
           title={`Working of wall ${opened.wall.name}`}

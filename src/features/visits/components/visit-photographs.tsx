@@ -1,4 +1,5 @@
 import type { VisitAnswer } from '../../../../shared/schemas/visits.ts';
+import { PhotographList } from '../../../components/ui/photograph-list.tsx';
 import { photographPath } from '../api/photograph-path.ts';
 import { countWords } from '../visit-words.ts';
 
@@ -11,26 +12,12 @@ export function VisitPhotographs({ schemeId, visit }: VisitPhotographsProps) {
   return (
     <>
       {there.length > 0 && (
-        <ul aria-label="Photographs" className="mt-1.5 flex flex-wrap gap-2">
-          {there.map(({ id, caption }, index) => (
-            <li key={id} className="w-24">
-              <a
-                href={photographPath(schemeId, visit.id, id)}
-                target="_blank"
-                rel="noreferrer"
-                className="block text-cap text-ink-2 no-underline"
-              >
-                <img
-                  src={photographPath(schemeId, visit.id, id)}
-                  alt={caption === '' ? `Photograph ${index + 1}` : ''}
-                  loading="lazy"
-                  className="size-24 border border-rule object-cover"
-                />
-                {caption}
-              </a>
-            </li>
-          ))}
-        </ul>
+        <PhotographList
+          photographs={there.map(({ id, caption }) => ({
+            ...{ id, caption },
+            href: photographPath(schemeId, visit.id, id),
+          }))}
+        />
       )}
       {missing > 0 && (
         <p className="mt-1 text-cap text-ink-3">

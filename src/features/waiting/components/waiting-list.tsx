@@ -9,6 +9,9 @@ const SHAPES: Readonly<Partial<Record<WaitingItem['kind'], State>>> = {
   'decisions-to-check': 'waiting',
   'decisions-returned': 'in-hand',
   'decisions-again': 'visit',
+  'matters-waiting': 'waiting',
+  'appointments-asked': 'in-hand',
+  'undertakings-overdue': 'visit',
 };
 
 function WaitingRow({ item }: { readonly item: WaitingItem }) {

@@ -1,0 +1,112 @@
+import {
+  batchSchema,
+  recipientsSchema,
+  type Batch,
+  type Recipients,
+} from '../../shared/schemas/letter-batches.ts';
+import {
+  heldLetterSettingsSchema,
+  type HeldLetterSettings,
+} from '../../shared/schemas/letter-settings.ts';
+import { templateSchema, type Template } from '../../shared/schemas/letter-templates.ts';
+import {
+  letterSchema,
+  listedLetterSchema,
+  type Letter,
+  type ListedLetter,
+} from '../../shared/schemas/letters.ts';
+import { addresseeOf } from '../letters/compose-letters.ts';
+import type { FoundRecipients } from '../letters/find-recipients.ts';
+import type { FoundBatch } from '../models/letter-batches.ts';
+import type { HeldSettings } from '../models/letter-settings.ts';
+import type { HeldTemplate } from '../models/letter-templates.ts';
+import type { FoundLetter } from '../models/letters.ts';
+import type { Actor } from '../policies/actor.ts';
+
+/** What leaves the server of the settings of letters. */
+export function presentLetterSettings(held: HeldSettings): HeldLetterSettings {
+  const { version, settings, by, at } = held;
+  return heldLetterSettingsSchema.parse({ version, settings, by, at: at?.toISOString() ?? null });
+}
+
+/** What leaves the server of a template. */
+export function presentTemplate({ kind, version, subject, body, by, at }: HeldTemplate): Template {
+  return templateSchema.parse({ kind, version, subject, body, by, at: at?.toISOString() ?? null });
+}
+
+/** Who would get a letter, and why. */
+export function presentRecipients(found: FoundRecipients, runNumber: number | null): Recipients {
+  const getting = found.recipients.filter(({ leftOut }) => leftOut === null);
+  const byPost = getting.filter(({ party }) => addresseeOf(party).channel === 'post').length;
+  return recipientsSchema.parse({
+    letters: getting.length,
+    byMail: getting.length - byPost,
+    byPost,
+    runNumber,
+    without: found.without,
+    recipients: found.recipients.map(({ party, reasons, leftOut }) => ({
+      partyId: party.partyId,
+      name: addresseeOf(party).name,
+      channel: addresseeOf(party).channel,
+      reasons,
+      leftOut,
+    })),
+  });
+}
+
+/** What leaves the server of a batch. */
+export function presentBatch(batch: FoundBatch): Batch {
+  const { preparedAt, checkedAt, sentAt, printedAt, deliveries, ...others } = batch;
+  return batchSchema.parse({
+    ...others,
+    preparedAt: preparedAt.toISOString(),
+    checkedAt: checkedAt?.toISOString() ?? null,
+    sentAt: sentAt?.toISOString() ?? null,
+    printedAt: printedAt?.toISOString() ?? null,
+    deliveries: sentAt === null ? null : deliveries,
+  });
+}
+
+/** Whom a letter went to is the administrator's alone to see once personal data have been erased. */
+function isHidden({ isErased }: FoundLetter, { isAdministrator }: Actor): boolean {
+  return isErased && !isAdministrator;
+}
+
+/** What leaves the server of a letter in a list. */
+export function presentListedLetter(letter: FoundLetter, actor: Actor): ListedLetter {
+  return listedLetterSchema.parse({
+    id: letter.id,
+    batchId: letter.batchId,
+    batchNumber: letter.batchNumber,
+    kind: letter.kind,
+    number: letter.number,
+    name: isHidden(letter, actor) ? '' : letter.name,
+    channel: letter.channel,
+    delivery: letter.delivery,
+    serverWords: letter.serverWords,
+    answerBy: letter.answerBy,
+    acknowledgedAt: letter.acknowledgedAt?.toISOString() ?? null,
+    remindedAt: letter.remindedAt?.toISOString() ?? null,
+  });
+}
+
+/** What leaves the server of a letter, whole; null where the caller may not see it any more. */
+export function presentLetter(letter: FoundLetter, actor: Actor): Letter | null {
+  if (isHidden(letter, actor)) return null;
+  return letterSchema.parse({
+    id: letter.id,
+    number: letter.number,
+    name: letter.name,
+    channel: letter.channel,
+    delivery: letter.delivery,
+    serverWords: letter.serverWords,
+    answerBy: letter.answerBy,
+    acknowledgedAt: letter.acknowledgedAt?.toISOString() ?? null,
+    remindedAt: letter.remindedAt?.toISOString() ?? null,
+    address: letter.address,
+    email: letter.email,
+    subject: letter.subject,
+    parts: letter.parts,
+    reasons: letter.reasons,
+  });
+}

@@ -1,0 +1,196 @@
+import {
+  batchParamsSchema,
+  batchPreviewSchema,
+  checkBatchSchema,
+  newBatchSchema,
+} from '../../shared/schemas/letter-batches.ts';
+import {
+  acknowledgementSchema,
+  lettersQuerySchema,
+  writtenLetterParamsSchema,
+} from '../../shared/schemas/letters.ts';
+import { checkLetters } from '../commands/check-letters.ts';
+import { readBatch } from '../commands/kept-batch.ts';
+import { prepareLetters } from '../commands/prepare-letters.ts';
+import { recordAcknowledgement } from '../commands/record-acknowledgement.ts';
+import { recordPrinting } from '../commands/record-printing.ts';
+import { sendLetters } from '../commands/send-letters.ts';
+import { withdrawLetters } from '../commands/withdraw-letters.ts';
+import { letterPdf, lettersPdf } from '../documents/letter/letter-pdf.ts';
+import { AppError } from '../errors.ts';
+import { findRecipients } from '../letters/find-recipients.ts';
+import { findBatches } from '../models/letter-batches.ts';
+import { heldSettings } from '../models/letter-settings.ts';
+import { findExceptions, findLetters } from '../models/letters.ts';
+import { Run } from '../models/run.ts';
+import {
+  presentBatch,
+  presentLetter,
+  presentListedLetter,
+  presentRecipients,
+} from '../presenters/letters.ts';
+import { defineRoute } from './define-route.ts';
+
+const BATCHES = '/api/schemes/:schemeId/letter-batches';
+const LETTERS = '/api/schemes/:schemeId/letters';
+
+export const letterRoutes = [
+  defineRoute({
+    method: 'get',
+    path: BATCHES,
+    access: { scheme: 'readLetters' },
+    handle: async ({ services, scheme }) =>
+      (await findBatches(services.database, scheme.id)).map(presentBatch),
+  }),
+  defineRoute({
+    method: 'post',
+    path: `${BATCHES}/preview`,
+    access: { scheme: 'prepareLetters' },
+    body: batchPreviewSchema,
+    bodyLimit: '1mb',
+    handle: async ({ services: { database }, scheme, body }) => {
+      const { settings } = await heldSettings(database, scheme);
+      const found = await findRecipients(database, scheme.id, settings, body, null);
+      const run = found.runId === null ? null : await Run.findByPk(found.runId);
+      return presentRecipients(found, run?.number ?? null);
+    },
+  }),
+  defineRoute({
+    method: 'post',
+    path: BATCHES,
+    access: { scheme: 'prepareLetters' },
+    body: newBatchSchema,
+    bodyLimit: '1mb',
+    status: 201,
+    handle: async ({ services, actor, scheme, body }) => {
+      const id = await prepareLetters(services, actor, scheme, body);
+      return presentBatch(await readBatch(services.database, scheme.id, id));
+    },
+  }),
+  defineRoute({
+    method: 'get',
+    path: `${BATCHES}/:batchId`,
+    access: { scheme: 'readLetters' },
+    params: batchParamsSchema,
+    handle: async ({ services: { database }, actor, scheme, params: { batchId } }) => {
+      const batch = await readBatch(database, scheme.id, batchId);
+      const [letters, leftOut] = await Promise.all([
+        findLetters(database, scheme.id, { batchId }),
+        findExceptions(database, batchId),
+      ]);
+      return {
+        batch: presentBatch(batch),
+        letters: letters.map((letter) => presentListedLetter(letter, actor)),
+        leftOut,
+      };
+    },
+  }),
+  defineRoute({
+    method: 'post',
+    path: `${BATCHES}/:batchId/check`,
+    access: { scheme: 'checkLetters' },
+    params: batchParamsSchema,
+    body: checkBatchSchema,
+    handle: async ({ services, actor, scheme, params: { batchId }, body }) => {
+      await checkLetters(services, actor, scheme, { batchId, ...body });
+      return presentBatch(await readBatch(services.database, scheme.id, batchId));
+    },
+  }),
+  defineRoute({
+    method: 'post',
+    path: `${BATCHES}/:batchId/withdraw`,
+    access: { scheme: 'prepareLetters' },
+    params: batchParamsSchema,
+    handle: async ({ services, actor, scheme, params: { batchId } }) => {
+      await withdrawLetters(services, actor, scheme, batchId);
+      return presentBatch(await readBatch(services.database, scheme.id, batchId));
+    },
+  }),
+  defineRoute({
+    method: 'post',
+    path: `${BATCHES}/:batchId/send`,
+    access: { scheme: 'checkLetters' },
+    params: batchParamsSchema,
+    handle: async ({ services, actor, scheme, params: { batchId } }) => {
+      await sendLetters(services, actor, scheme, batchId);
+      return presentBatch(await readBatch(services.database, scheme.id, batchId));
+    },
+  }),
+  defineRoute({
+    method: 'get',
+    path: `${BATCHES}/:batchId/print-file`,
+    access: { scheme: 'readLetters' },
+    params: batchParamsSchema,
+    handle: async ({ services, scheme, params: { batchId }, res }) => {
+      const { number } = await readBatch(services.database, scheme.id, batchId);
+      const which = { batchId, byPost: true };
+      const letters = await findLetters(services.database, scheme.id, which);
+      if (letters.length === 0) throw new AppError('not-found', 'No letter of these goes by post.');
+      const bytes = await lettersPdf(services, scheme.id, letters, true);
+      res.attachment(`letters-${number}-for-the-post.pdf`).type('application/pdf').end(bytes);
+    },
+  }),
+  defineRoute({
+    method: 'post',
+    path: `${BATCHES}/:batchId/printed`,
+    access: { scheme: 'prepareLetters' },
+    params: batchParamsSchema,
+    handle: async ({ services, actor, scheme, params: { batchId } }) => {
+      await recordPrinting(services, actor, scheme, batchId);
+      return presentBatch(await readBatch(services.database, scheme.id, batchId));
+    },
+  }),
+  defineRoute({
+    method: 'get',
+    path: LETTERS,
+    access: { scheme: 'readLetters' },
+    query: lettersQuerySchema,
+    handle: async ({ services: { database }, actor, scheme, query }) => {
+      const { settings } = await heldSettings(database, scheme);
+      const letters = await findLetters(database, scheme.id, {
+        buildingId: query.building,
+        partyId: query.party,
+        unansweredFor: query.overdue === true ? settings.answerWithin : undefined,
+      });
+      return letters.map((letter) => presentListedLetter(letter, actor));
+    },
+  }),
+  defineRoute({
+    method: 'get',
+    path: `${LETTERS}/:writtenLetterId`,
+    access: { scheme: 'readLetters' },
+    params: writtenLetterParamsSchema,
+    handle: async ({ services, actor, scheme, params: { writtenLetterId: letterId } }) => {
+      const [letter] = await findLetters(services.database, scheme.id, { letterId });
+      const presented = letter === undefined ? null : presentLetter(letter, actor);
+      if (presented === null) throw new AppError('not-found');
+      return presented;
+    },
+  }),
+  defineRoute({
+    method: 'get',
+    path: `${LETTERS}/:writtenLetterId/pdf`,
+    access: { scheme: 'readLetters' },
+    params: writtenLetterParamsSchema,
+    handle: async ({ services, actor, scheme, params: { writtenLetterId: letterId }, res }) => {
+      const [letter] = await findLetters(services.database, scheme.id, { letterId });
+      if (letter === undefined || presentLetter(letter, actor) === null) {
+        throw new AppError('not-found');
+      }
+      const bytes = await letterPdf(services, { schemeId: scheme.id, letterId });
+      const name = `letter-${letter.batchNumber}-${letter.number}.pdf`;
+      res.attachment(name).type('application/pdf').end(bytes);
+    },
+  }),
+  defineRoute({
+    method: 'post',
+    path: `${LETTERS}/:writtenLetterId/acknowledgement`,
+    access: { scheme: 'prepareLetters' },
+    params: writtenLetterParamsSchema,
+    body: acknowledgementSchema,
+    handle: async ({ services, actor, scheme, params: { writtenLetterId }, body }) => {
+      const asked = { letterId: writtenLetterId, how: body.how };
+      await recordAcknowledgement(services, actor, scheme, asked);
+    },
+  }),
+];

@@ -1,0 +1,176 @@
+import { z } from 'zod';
+import { LETTER_LIMITS, letterWords } from './letter-limits.ts';
+import { LETTER_KINDS } from './letter-settings.ts';
+import { letterReasonSchema, listedLetterSchema } from './letters.ts';
+
+const kind = z.enum(LETTER_KINDS);
+
+/**
+ * Who is left out although a rule names them, or gets a letter although none does, and why.
+ *
+ * Units: none. Valid: a reason always. Source: [own].
+ */
+const exceptionSchema = z.strictObject({
+  partyId: z.uuid(),
+  why: letterWords(LETTER_LIMITS.why).min(1, 'Say why.'),
+});
+
+const exceptions = z.array(exceptionSchema).max(LETTER_LIMITS.chosen);
+
+/**
+ * A batch of letters to be made: who is left out and who is chosen by hand; `expected` is how many letters
+ * were seen before.
+ *
+ * Units: none. Valid: refused where another number would be made by now. Source: [own].
+ */
+export const newBatchSchema = z.strictObject({
+  kind,
+  leftOut: exceptions,
+  chosen: exceptions,
+  expected: z.number().int().min(1),
+});
+
+/**
+ * A batch of letters to be made.
+ *
+ * Units: none. Valid: parsed by newBatchSchema. Source: [own].
+ */
+export type NewBatch = z.infer<typeof newBatchSchema>;
+
+/**
+ * Which letters would be made.
+ *
+ * Units: none. Valid: as newBatchSchema without the number. Source: [own].
+ */
+export const batchPreviewSchema = newBatchSchema.omit({ expected: true });
+
+/**
+ * Who gets a letter of a kind and why, and how many letters that makes; `short` lists at most so many.
+ *
+ * Units: pieces. Valid: `without` counts buildings that a rule names and that nobody has an interest in.
+ * Source: [own].
+ */
+export const recipientsSchema = z.strictObject({
+  letters: z.number().int(),
+  byMail: z.number().int(),
+  byPost: z.number().int(),
+  runNumber: z.number().int().nullable(),
+  without: z.number().int(),
+  recipients: z.array(
+    z.strictObject({
+      partyId: z.uuid(),
+      name: z.string(),
+      channel: z.enum(['e-mail', 'post']),
+      reasons: z.array(letterReasonSchema),
+      leftOut: z.string().nullable(),
+    }),
+  ),
+});
+
+/**
+ * Who gets a letter of a kind and why.
+ *
+ * Units: as recipientsSchema. Valid: parsed by it. Source: [own].
+ */
+export type Recipients = z.infer<typeof recipientsSchema>;
+
+/**
+ * Where a batch of letters stands.
+ *
+ * Units: none. Valid: closed list. Source: [own].
+ */
+export const BATCH_STATES = [
+  'waiting for check',
+  'returned',
+  'withdrawn',
+  'checked',
+  'sent',
+] as const;
+
+/**
+ * How many letters of a batch are where.
+ *
+ * Units: pieces. Valid: once it is sent. Source: [own].
+ */
+export const deliveriesSchema = z.strictObject({
+  waiting: z.number().int(),
+  sent: z.number().int(),
+  sentAgain: z.number().int(),
+  failed: z.number().int(),
+  post: z.number().int(),
+  acknowledged: z.number().int(),
+});
+
+/**
+ * A batch of letters: prepared by one person, checked by another, then sent.
+ *
+ * Units: none. Valid: moves on only. Source: [own].
+ */
+export const batchSchema = z.strictObject({
+  id: z.uuid(),
+  number: z.number().int(),
+  kind,
+  state: z.enum(BATCH_STATES),
+  templateVersion: z.number().int(),
+  settingsVersion: z.number().int(),
+  runNumber: z.number().int().nullable(),
+  letters: z.number().int(),
+  byPost: z.number().int(),
+  preparedBy: z.string(),
+  preparedById: z.uuid(),
+  preparedAt: z.iso.datetime(),
+  checkedBy: z.string().nullable(),
+  checkedAt: z.iso.datetime().nullable(),
+  comment: z.string().nullable(),
+  sentBy: z.string().nullable(),
+  sentAt: z.iso.datetime().nullable(),
+  printedAt: z.iso.datetime().nullable(),
+  deliveries: deliveriesSchema.nullable(),
+});
+
+/**
+ * A batch of letters.
+ *
+ * Units: none. Valid: parsed by batchSchema. Source: [own].
+ */
+export type Batch = z.infer<typeof batchSchema>;
+
+/**
+ * Batches, the newest first.
+ *
+ * Units: none. Valid: of one scheme. Source: [own].
+ */
+export const batchesSchema = z.array(batchSchema);
+
+/**
+ * A batch with its letters and who was left out.
+ *
+ * Units: as batchSchema. Valid: letters by number. Source: [own].
+ */
+export const batchDetailSchema = z.strictObject({
+  batch: batchSchema,
+  letters: z.array(listedLetterSchema),
+  leftOut: z.array(z.strictObject({ name: z.string(), why: z.string() })),
+});
+
+/**
+ * The check of a batch.
+ *
+ * Units: none. Valid: a returned one needs a comment. Source: [own].
+ */
+export const checkBatchSchema = z
+  .strictObject({
+    verdict: z.enum(['checked', 'returned']),
+    comment: letterWords(LETTER_LIMITS.comment),
+  })
+  .refine(({ verdict, comment }) => verdict === 'checked' || comment !== '', {
+    path: ['comment'],
+    error: 'Say what has to change.',
+  });
+
+/**
+ * The address of a batch and of a letter in it.
+ *
+ * Units: none. Valid: of the scheme. Source: [own].
+ */
+export const batchParamsSchema = z.object({ schemeId: z.string(), batchId: z.uuid() });

@@ -1,0 +1,28 @@
+import { z } from 'zod';
+
+/**
+ * The most that letters hold.
+ *
+ * Units: letters for texts, pieces. Valid: read only. Source: [own].
+ */
+export const LETTER_LIMITS = {
+  subject: 200,
+  body: 10_000,
+  why: 500,
+  comment: 2000,
+  chosen: 1000,
+  letters: 20_000,
+} as const;
+
+/**
+ * Words of several lines.
+ *
+ * Units: letters. Valid: any letters but the one that databases refuse. Source: [own].
+ */
+export function letterWords(longest: number) {
+  return z
+    .string()
+    .trim()
+    .max(longest, `At most ${longest} letters.`)
+    .regex(/^[^\0]*$/, 'Write letters only.');
+}

@@ -1,0 +1,87 @@
+import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import {
+  heldLetterSettingsSchema,
+  type LetterKind,
+  type LetterSettings,
+} from '../../../../shared/schemas/letter-settings.ts';
+import {
+  previewedTemplateSchema,
+  templateSchema,
+  templatesSchema,
+  type Template,
+} from '../../../../shared/schemas/letter-templates.ts';
+import { apiGet, apiSend } from '../../../lib/api-client.ts';
+import { apiPath } from '../../../lib/api-path.ts';
+import { lettersKey } from './letters-key.ts';
+
+/** What letters say, kind by kind. */
+export function templatesQuery(schemeId: string) {
+  return queryOptions({
+    queryKey: [...lettersKey(schemeId), 'templates'],
+    queryFn: ({ signal }) =>
+      apiGet(apiPath`/api/schemes/${schemeId}/letter-templates`, templatesSchema, signal),
+  });
+}
+
+type Written = Pick<Template, 'kind' | 'subject' | 'body'>;
+
+/** A template as a real party would read it. */
+export function previewQuery(
+  schemeId: string,
+  { kind, subject, body }: Written,
+  partyId: string | null,
+) {
+  const asked = { subject, body, partyId };
+  return queryOptions({
+    queryKey: [...lettersKey(schemeId), 'look', kind, asked],
+    queryFn: () =>
+      apiSend(
+        'POST',
+        apiPath`/api/schemes/${schemeId}/letter-templates/${kind}/preview`,
+        previewedTemplateSchema,
+        asked,
+      ),
+    placeholderData: (before) => before,
+  });
+}
+
+/** Keeps the next version of a template. */
+export function useKeepTemplate(schemeId: string, kind: LetterKind, onDone: () => void) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (written: { basedOn: number; subject: string; body: string }) =>
+      apiSend(
+        'PUT',
+        apiPath`/api/schemes/${schemeId}/letter-templates/${kind}`,
+        templateSchema,
+        written,
+      ),
+    onSuccess: onDone,
+    onSettled: () => client.invalidateQueries({ queryKey: lettersKey(schemeId) }),
+  });
+}
+
+/** What letters go by. */
+export function letterSettingsQuery(schemeId: string) {
+  return queryOptions({
+    queryKey: [...lettersKey(schemeId), 'settings'],
+    queryFn: ({ signal }) =>
+      apiGet(apiPath`/api/schemes/${schemeId}/letter-settings`, heldLetterSettingsSchema, signal),
+  });
+}
+
+/** Keeps the next version of what letters go by. */
+export function useKeepLetterSettings(schemeId: string, onDone: () => void) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (asked: { basedOn: number; settings: LetterSettings }) =>
+      apiSend(
+        'POST',
+        apiPath`/api/schemes/${schemeId}/letter-settings`,
+        heldLetterSettingsSchema,
+        asked,
+      ),
+    onSuccess: onDone,
+    onSettled: () => client.invalidateQueries({ queryKey: lettersKey(schemeId) }),
+  });
+}

@@ -1,0 +1,109 @@
+import { useQuery } from '@tanstack/react-query';
+import { useParams } from 'react-router-dom';
+import type { z } from 'zod';
+import type { batchDetailSchema } from '../../../shared/schemas/letter-batches.ts';
+import { capital } from '../../../shared/presentation/capital.ts';
+import { NotFoundPage } from '../../app/routes/not-found.tsx';
+import { Page } from '../../components/layout/page.tsx';
+import { Facts } from '../../components/ui/facts.tsx';
+import { LoadingRows } from '../../components/ui/loading-rows.tsx';
+import { Panel } from '../../components/ui/panel.tsx';
+import { QueryError } from '../../components/ui/query-error.tsx';
+import { StateMark } from '../../components/ui/state-mark.tsx';
+import { formatMoment } from '../../lib/format-date.ts';
+import { can } from '../schemes/can.ts';
+import { useScheme } from '../schemes/scheme-context.ts';
+import { batchQuery } from './api/letter-batches.ts';
+import { BatchSteps } from './components/batch-steps.tsx';
+import { LettersTable } from './components/letters-table.tsx';
+import { BATCH_SHAPES, deliveryWords, KIND_LABELS, lettersWords } from './letter-words.ts';
+
+type Detail = z.infer<typeof batchDetailSchema>;
+
+function who(at: string | null, by: string | null): string {
+  return at === null || by === null ? '' : `${formatMoment(at)}, ${by}`;
+}
+
+function BatchFacts({ batch }: Pick<Detail, 'batch'>) {
+  const { state, preparedAt, preparedBy, checkedAt, checkedBy, sentAt, sentBy, comment } = batch;
+  const { templateVersion, settingsVersion, runNumber, printedAt } = batch;
+  const basis = [
+    runNumber === null ? 'no run' : `run ${runNumber}`,
+    templateVersion === 0 ? 'first template' : `template version ${templateVersion}`,
+    settingsVersion === 0 ? 'first settings' : `settings version ${settingsVersion}`,
+  ];
+  const lines: (readonly [string, string])[] = [
+    ['Written from', basis.join(', ')],
+    ['Prepared', who(preparedAt, preparedBy)],
+    [state === 'returned' ? 'Returned' : 'Checked', who(checkedAt, checkedBy)],
+    ['Comment', comment ?? ''],
+    ['Sent', who(sentAt, sentBy)],
+    ['Printed', printedAt === null ? '' : formatMoment(printedAt)],
+    ['How far', deliveryWords(batch)],
+  ];
+  return (
+    <div className="max-w-[720px]">
+      <Facts
+        facts={[
+          [
+            'Stands',
+            <StateMark key="state" state={BATCH_SHAPES[state]}>
+              {capital(state)}
+            </StateMark>,
+          ],
+          ...lines.filter(([, value]) => value !== ''),
+        ]}
+      />
+    </div>
+  );
+}
+
+function LeftOut({ leftOut }: Pick<Detail, 'leftOut'>) {
+  if (leftOut.length === 0) return null;
+  return (
+    <Panel title="Left out" note="although a rule names them">
+      <ul className="text-small">
+        {leftOut.map(({ name, why }) => (
+          <li key={name} className="border-b border-hairline py-1 break-words last:border-0">
+            <b className="font-semibold">{name}</b> {why}
+          </li>
+        ))}
+      </ul>
+    </Panel>
+  );
+}
+
+function WholeBatch({ batchId }: { readonly batchId: string }) {
+  const scheme = useScheme();
+  const { data, error, refetch } = useQuery(batchQuery(scheme.id, batchId));
+  if (data === undefined) {
+    return (
+      <Page title="Letters">
+        {error === null ? (
+          <LoadingRows what="the letters" />
+        ) : (
+          <QueryError what="The letters" error={error} onRetry={() => void refetch()} />
+        )}
+      </Page>
+    );
+  }
+  const { batch, letters, leftOut } = data;
+  return (
+    <Page
+      title={`${KIND_LABELS[batch.kind]}: ${lettersWords(batch.letters)}, batch ${batch.number}`}
+    >
+      <BatchFacts batch={batch} />
+      <BatchSteps batch={batch} />
+      <Panel title="Letters" note="each opens as it will be read">
+        <LettersTable label="Letters of the batch" letters={letters} />
+      </Panel>
+      <LeftOut leftOut={leftOut} />
+    </Page>
+  );
+}
+
+/** One batch of letters, from its check to its last acknowledgement. */
+export function BatchPage() {
+  const { batchId = '' } = useParams();
+  return can(useScheme(), 'readLetters') ? <WholeBatch batchId={batchId} /> : <NotFoundPage />;
+}

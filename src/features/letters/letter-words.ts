@@ -1,0 +1,57 @@
+import type { Batch } from '../../../shared/schemas/letter-batches.ts';
+import type { LetterKind } from '../../../shared/schemas/letter-settings.ts';
+import type { ListedLetter } from '../../../shared/schemas/letters.ts';
+import type { State } from '../../components/ui/state-mark.tsx';
+
+/** What each kind of letter is for. */
+export const KIND_LABELS: Readonly<Record<LetterKind, string>> = {
+  'first information': 'First information',
+  'condition survey': 'Offer of a condition survey',
+  'access request': 'Request for access',
+  'when the tunnel passes': 'When the tunnel passes',
+  'decision and measures': 'Decision and measures',
+  'free text': 'Free text',
+};
+
+/** The shape that goes with where a batch stands. */
+export const BATCH_SHAPES: Readonly<Record<Batch['state'], State>> = {
+  'waiting for check': 'waiting',
+  returned: 'not-started',
+  withdrawn: 'not-started',
+  checked: 'in-hand',
+  sent: 'done',
+};
+
+/** The shape that goes with where a letter stands. */
+export const DELIVERY_SHAPES: Readonly<Record<ListedLetter['delivery'], State>> = {
+  'not sent': 'not-started',
+  waiting: 'in-hand',
+  sent: 'done',
+  'sent again after a stop': 'done',
+  failed: 'waiting',
+  'to be printed': 'in-hand',
+  printed: 'done',
+};
+
+/** A number of letters, as "1 letter" or "1,204 letters". */
+export function lettersWords(count: number): string {
+  return count === 1 ? '1 letter' : `${count.toLocaleString('en-GB')} letters`;
+}
+
+/** How far the letters of a batch that was sent are. */
+export function deliveryWords({ deliveries }: Pick<Batch, 'deliveries'>): string {
+  if (deliveries === null) return '';
+  const { waiting, sent, sentAgain, failed, post, acknowledged } = deliveries;
+  const counts: readonly (readonly [number, string])[] = [
+    [waiting, 'on the way'],
+    [sent, 'sent by e-mail'],
+    [sentAgain, 'of them sent again after a stop'],
+    [post, 'by post'],
+    [failed, 'failed'],
+    [acknowledged, 'acknowledged'],
+  ];
+  return counts
+    .filter(([count]) => count !== 0)
+    .map(([count, words]) => `${count.toLocaleString('en-GB')} ${words}`)
+    .join(', ');
+}

@@ -1,0 +1,81 @@
+import { Link, useNavigate } from 'react-router-dom';
+import type { MatterLine } from '../../../../shared/schemas/matter-answers.ts';
+import { capital } from '../../../../shared/presentation/capital.ts';
+import { StateMark } from '../../../components/ui/state-mark.tsx';
+import type { Column } from '../../../components/ui/table/column.ts';
+import { Table } from '../../../components/ui/table/table.tsx';
+import { matterPath, sheetPath } from '../../../config/paths.ts';
+import { PartyName } from '../../parties/components/party-name.tsx';
+import { MATTER_SHAPES } from '../matter-words.ts';
+import { DueDay } from './due-day.tsx';
+
+function columnsOf(schemeId: string): readonly Column<MatterLine>[] {
+  return [
+    {
+      id: 'title',
+      heading: 'Matter',
+      wide: true,
+      cell: ({ id, title }) => (
+        <Link to={matterPath(schemeId, id)} className="font-semibold">
+          {title}
+        </Link>
+      ),
+    },
+    { id: 'kind', heading: 'Kind', spare: true, cell: ({ kind }) => capital(kind) },
+    {
+      id: 'party',
+      heading: 'From',
+      spare: true,
+      cell: ({ party }) => <PartyName name={party.name} />,
+    },
+    {
+      id: 'building',
+      heading: 'Building',
+      spare: true,
+      cell: ({ building }) => (
+        <Link
+          to={sheetPath(schemeId, building.id)}
+          title={building.name ?? building.address ?? undefined}
+        >
+          {building.reference}
+        </Link>
+      ),
+    },
+    {
+      id: 'due',
+      heading: 'Answer by',
+      sortBy: ({ due }) => due,
+      cell: ({ due, state, isOverdue }) =>
+        state === 'open' ? <DueDay {...{ due, isOverdue }} /> : '',
+    },
+    {
+      id: 'assignedTo',
+      heading: 'Given to',
+      spare: true,
+      cell: ({ assignedTo }) => assignedTo?.name ?? <span className="text-ink-3">Nobody</span>,
+    },
+    {
+      id: 'state',
+      heading: 'State',
+      spare: true,
+      cell: ({ state }) => <StateMark state={MATTER_SHAPES[state]}>{capital(state)}</StateMark>,
+    },
+  ];
+}
+
+type InboxTableProps = { readonly schemeId: string; readonly matters: readonly MatterLine[] };
+
+/** Matters line by line, what is due first at the top; a line opens what was written. */
+export function InboxTable({ schemeId, matters }: InboxTableProps) {
+  const navigate = useNavigate();
+  return (
+    <Table
+      label="Matters"
+      wide
+      columns={columnsOf(schemeId)}
+      rows={matters}
+      idOf={({ id }) => id}
+      onOpen={({ id }) => void navigate(matterPath(schemeId, id))}
+    />
+  );
+}
