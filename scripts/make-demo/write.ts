@@ -5,6 +5,7 @@ import type { Feature } from './features.ts';
 import {
   crossingFeatures, gardenFeatures, landFeatures, openFeatures, quayFeatures, streetFeatures, treeFeatures, wallFeatures, waterFeatures,
 } from './map-features.ts'; // prettier-ignore
+import { partiesText } from './parties.ts';
 import { spotHeights } from './spot-heights.ts';
 import type { Town } from './town.ts';
 
@@ -34,6 +35,7 @@ export function townFiles(town: Town, seed: number): Map<string, () => string> {
   for (const [name, features] of layers)
     files.set(`${name}.geojson`, () => geojsonText(name, features()));
   files.set('ground.csv', () => spotHeights(town, seed));
+  files.set('parties.csv', () => partiesText(buildingFeatures(town, seed), seed));
   return files;
 }
 

@@ -1,5 +1,6 @@
 import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
-import type { ListedParty, Party } from '../../shared/schemas/parties.ts';
+import type { Party } from '../../shared/schemas/parties.ts';
+import type { ListedParty } from '../../shared/schemas/party-answers.ts';
 
 /** A party as its presenter wants it, the lines of its address in one text. */
 export type FoundParty = Omit<Party, 'address' | 'erasedAt'> & {

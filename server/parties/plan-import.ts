@@ -28,6 +28,28 @@ export type PartyPlan = {
 
 type Line = Pick<PartyImportRow, 'outcome' | 'remarks'>;
 
+/** Says who represents a party, where that can be told and nobody does yet; what stands in the way. */
+function representedSo(
+  party: KnownParty,
+  called: readonly KnownParty[],
+  represents: Set<string | null>,
+): string[] {
+  const [who, ...others] = called;
+  if (who === undefined || others.length > 0 || who === party) {
+    return ['Who represents them could not be told: one other party has to go by that name.'];
+  }
+  if (party.representedBy === who.id) return [];
+  if (party.representedBy !== null) {
+    return ['Somebody else represents them already, which stays.'];
+  }
+  if (who.representedBy !== null || represents.has(party.id)) {
+    return ['Who represents others is represented by nobody, so this was left out.'];
+  }
+  party.representedBy = who.id;
+  represents.add(who.id);
+  return [];
+}
+
 /** The parties of a table, one after the other as its rows name them. */
 function planner(known: KnownBefore) {
   const index = partyIndex(known.parties);
@@ -79,22 +101,10 @@ function planner(known: KnownBefore) {
     return { outcome: isFirst ? 'new party' : 'new interest', remarks: [] };
   }
   function represent(party: KnownParty, words: string): string[] {
-    const [who, ...others] = index.called(words);
-    const isSound = who !== undefined && others.length === 0;
-    if (!isSound || who === party) {
-      return ['Who represents them could not be told: one other party has to go by that name.'];
-    }
-    if (party.representedBy === who.id) return [];
-    if (party.representedBy !== null) {
-      return ['Somebody else represents them already, which stays.'];
-    }
-    if (who.representedBy !== null || represents.has(party.id)) {
-      return ['Who represents others is represented by nobody, so this was left out.'];
-    }
-    party.representedBy = who.id;
-    represents.add(who.id);
-    if (!party.isNew) completed.add(party);
-    return [];
+    const before = party.representedBy;
+    const remarks = representedSo(party, index.called(words), represents);
+    if (party.representedBy !== before && !party.isNew) completed.add(party);
+    return remarks;
   }
   return { partyOf, hold, represent, fresh, interests, completed };
 }

@@ -1,12 +1,11 @@
+import { partySchema, type Party } from '../../shared/schemas/parties.ts';
 import {
   likelySameSchema,
   partiesSchema,
   partyDetailSchema,
-  partySchema,
   type LikelySame,
-  type Party,
   type PartyDetail,
-} from '../../shared/schemas/parties.ts';
+} from '../../shared/schemas/party-answers.ts';
 import type { z } from 'zod';
 import type { FoundListedParty, FoundParty, LikelyPair } from '../models/parties.ts';
 import type { FoundPartyChange } from '../models/party-changes.ts';

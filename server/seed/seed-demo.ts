@@ -16,6 +16,7 @@ import {
   DEMO_PEOPLE,
   type DemoPerson,
 } from './demo-people.ts';
+import { giveOwnerAHouse } from './owner-of-house.ts';
 import { readTown } from './read-town.ts';
 
 /** Any number; who holds its lock looks whether the demo is there, and fills it in. */
@@ -80,13 +81,16 @@ async function createScheme(createdBy: string, transaction: Transaction): Promis
 async function fill(townFolder: string, transaction: Transaction): Promise<void> {
   const administrator = await createPerson(DEMO_ADMINISTRATOR, transaction);
   const scheme = await createScheme(administrator.id, transaction);
+  const owners: Person[] = [];
   for (const one of DEMO_MEMBERS) {
     const person = await createPerson(one, transaction);
     await giveRoles(scheme.id, person, one.roles, transaction);
+    if (one.roles.includes('owner')) owners.push(person);
   }
   const cause = { kind: 'import', by: null, source: 'The demo town' } as const;
   const created = readTown(townFolder);
   await changeRegister(scheme.sequelize, scheme, cause, { created }, transaction);
+  for (const owner of owners) await giveOwnerAHouse(scheme, owner, created, transaction);
   for (const option of DEMO_ALIGNMENTS) {
     await insertAlignment(scheme, null, option, 'create alignment', transaction);
   }

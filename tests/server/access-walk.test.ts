@@ -68,11 +68,16 @@ function addressOf({ path }: Route, params: Params): string {
   });
 }
 
-/** Kept views are of one person each; nothing is mended, decided, protected or photographed here. */
+/** Parts of an address that stand for things which are not there in the walk. */
+const NOT_THERE = [
+  ...['viewId', 'row', 'photographId', 'decisionId', 'measureId', 'ownLetterId', 'batchId'],
+  ...['writtenLetterId', 'matterId', 'appointmentId', 'undertakingId', 'partyId', 'partyImportId'],
+];
+const OF_NOTHING = new RegExp(`:(${NOT_THERE.join('|')})\\b|/decisions$`);
+
+/** Kept views are of one person each; nothing is mended, decided, written or photographed here. */
 function taken({ path }: Route): readonly number[] {
-  return /:(viewId|row|ownLetterId|photographId|decisionId|measureId|matterId|appointmentId|undertakingId|partyId|partyImportId)\b|\/decisions$/.test(path)
-    ? [...TAKEN, 404]
-    : TAKEN;
+  return OF_NOTHING.test(path) ? [...TAKEN, 404] : TAKEN;
 }
 
 /** Takes a step with an empty form, which changes nothing, and tells what came back. */

@@ -6,4 +6,4 @@ export const OWNER_PAGE =
   'mx-auto max-w-[1168px] px-6 pt-7 pb-8 text-owner leading-owner max-sm:px-[18px] max-sm:pt-5 ' +
   '[&_button]:min-h-touch [&_button]:text-h3 [&_button.border]:px-5 [&_input]:min-h-touch [&_input]:text-h3 ' +
   '[&_select]:min-h-touch [&_select]:text-h3 [&_textarea]:text-h3 [&_label]:text-h3 ' +
-  '[&_label+*+div>p]:text-h3 [&_div>p[id]]:text-lead print:p-0 print:text-roomy';
+  '[&_[role=alert]]:text-h3 [&_p[id]]:text-lead print:p-0 print:text-roomy';

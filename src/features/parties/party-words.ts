@@ -1,5 +1,6 @@
 import { capital } from '../../../shared/presentation/capital.ts';
-import type { Party, PartyDetail } from '../../../shared/schemas/parties.ts';
+import type { Party } from '../../../shared/schemas/parties.ts';
+import type { PartyDetail } from '../../../shared/schemas/party-answers.ts';
 import { formatShortDay } from '../../lib/format-date.ts';
 
 type Interest = Party['interests'][number];

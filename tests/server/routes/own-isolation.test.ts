@@ -131,7 +131,9 @@ const OF_SCHEMES = ROUTES.filter((route) => actionOf(route) !== undefined);
 const OTHERS = ROUTES.filter(
   (route) => actionOf(route) === undefined && !(route.method === 'delete' && route.path.includes('session')), // prettier-ignore
 );
-const named = (route: Route) => ({ name: `${route.method} ${route.path}`, route });
+function named(route: Route) {
+  return { name: `${route.method} ${route.path}`, route };
+}
 const OWN = OF_SCHEMES.filter(({ path }) => path.includes('/own'));
 
 function isOwners(route: Route): boolean {

@@ -2,12 +2,12 @@ import { randomUUID } from 'node:crypto';
 import { QueryTypes } from 'sequelize';
 import { describe, expect, test } from 'vitest';
 import { z } from 'zod';
+import { partySchema } from '../../../shared/schemas/parties.ts';
 import {
   likelySameSchema,
   partiesSchema,
   partyDetailSchema,
-  partySchema,
-} from '../../../shared/schemas/parties.ts';
+} from '../../../shared/schemas/party-answers.ts';
 import { AuditEntry } from '../../../server/models/audit-entry.ts';
 import { Membership } from '../../../server/models/membership.ts';
 import { aBuilding, aMember, anAdministrator, aPerson, aScheme } from '../../support/factories.ts';

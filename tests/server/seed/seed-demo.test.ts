@@ -1,5 +1,6 @@
 import { mkdirSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
+import { QueryTypes } from 'sequelize';
 import { afterAll, beforeEach, describe, expect, it } from 'vitest';
 import { isRightPassword } from '../../../server/authentication/password-hash.ts';
 import { drivesOfDesign } from '../../../shared/assessment/drives-of-design.ts';
@@ -34,7 +35,7 @@ function writeTown(...references: string[]): void {
     ...{ listed: 'not listed', condition: 'fair' },
   };
   const features = references.map((reference, index) => ({
-    properties: { reference, ...properties },
+    properties: { reference, ...properties, ...(index === 1 && { listed: 'listed, special' }) },
     geometry: { type: 'Polygon', coordinates: [square(10 * index)] },
   }));
   mkdirSync(folder, { recursive: true });
@@ -97,9 +98,24 @@ describe('seedDemo', () => {
     expect(new Set(actions)).toEqual(
       new Set([
         ...['create person', 'create scheme', 'change roles', 'change register'],
-        'create alignment',
+        ...['create alignment', 'add party'],
       ]),
     );
+  });
+
+  it('has an owner who signs in, freeholder of the listed dwelling closest to the line', async () => {
+    const parties = await services().database.query(
+      `select p.name, p.address, p.channel, s.email, b.reference, i.kind
+       from parties p join people s on s.id = p.person_id
+       join interests i on i.party_id = p.id join buildings b on b.id = i.building_id`,
+      { type: QueryTypes.SELECT },
+    );
+    expect(parties).toEqual([
+      {
+        ...{ name: 'Owner', address: '1 Rope Wharf\nPort Dogger', channel: 'e-mail' },
+        ...{ email: 'owner@example.org', reference: 'B0002', kind: 'freeholder' },
+      },
+    ]);
   });
 
   it('has three options for the line that the method takes, crossing harbour and old town', async () => {

@@ -6,6 +6,7 @@ import { useScheme } from '../../schemes/scheme-context.ts';
 import { OwnMap } from '../map/own-map.tsx';
 import { nextStep } from '../next-step.ts';
 import { timelineOf } from '../timeline-of.ts';
+import { Certainty } from './certainty.tsx';
 import { Contact } from './contact.tsx';
 import { Forecast } from './forecast.tsx';
 import { NextStepBox } from './next-step-box.tsx';
@@ -38,6 +39,12 @@ export function BuildingView({ own, building, appointments, matters }: BuildingV
         <OwnMap building={building} />
         <Timeline steps={timelineOf(letters, visits, own.milestones, now)} />
       </div>
+      {building.figures !== null && (
+        <section className="mt-5 hidden print:block">
+          <h2 className="mb-1 text-h2">How sure we are</h2>
+          <Certainty figures={building.figures} />
+        </section>
+      )}
       <div className="col-span-2">
         <OwnMatters
           matters={matters.filter((one) => one.building.id === building.id)}

@@ -60,18 +60,22 @@ function Fields({ kind, draft }: { readonly kind: MatterKind; readonly draft: Ma
 /** Something that an owner brings up. It says what happens next before it is sent. */
 export function MatterForm({ buildingId, kind, onDone, onClose }: MatterFormProps) {
   const id = useId();
+  const form = useRef<HTMLFormElement>(null);
   const heading = useRef<HTMLHeadingElement>(null);
   const draft = useMatterForm(buildingId, kind, onDone);
   const words = FORM_WORDS[kind];
+  const { refusals } = draft;
   useEffect(() => {
-    heading.current?.focus();
-  }, []);
+    const missing = form.current?.querySelector<HTMLElement>('[aria-invalid]');
+    if (refusals === 0) heading.current?.focus();
+    else missing?.focus();
+  }, [refusals]);
   function send(event: SubmitEvent) {
     event.preventDefault();
     draft.send();
   }
   return (
-    <form noValidate aria-labelledby={id} onSubmit={send}>
+    <form ref={form} noValidate aria-labelledby={id} onSubmit={send}>
       <h2 ref={heading} id={id} tabIndex={-1} className="mb-2 text-h2">
         {words.title}
       </h2>

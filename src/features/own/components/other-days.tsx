@@ -74,6 +74,7 @@ export function OtherDays({ busy, onSend, onBack }: OtherDaysProps) {
           draft={draft}
           min={min}
           onChange={(changed) => {
+            setFault(null);
             setDrafts(drafts.map((one, at) => (at === k ? changed : one)));
           }}
         />

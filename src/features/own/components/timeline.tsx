@@ -29,7 +29,10 @@ export function Timeline({ steps }: { readonly steps: readonly Step[] }) {
           >
             <i
               aria-hidden="true"
-              className={classNames('z-1 mt-1 size-[13px] rounded-[50%] border-2', DOTS[state])}
+              className={classNames(
+                'z-1 mt-1 size-[13px] rounded-[50%] border-2 [print-color-adjust:exact]',
+                DOTS[state],
+              )}
             />
             <span className="pr-2 text-ink-2">{when}</span>
             <span>

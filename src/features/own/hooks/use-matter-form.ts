@@ -29,6 +29,7 @@ export function useMatterForm(
   const [text, setText] = useState('');
   const [correction, setCorrection] = useState(NO_CORRECTION);
   const [own, setOwn] = useState<Faults>({});
+  const [refusals, setRefusals] = useState(0);
   const photographs = usePhotographs();
   const sending = useSendMatter(scheme.id, onDone);
   const isCorrection = kind === 'correction';
@@ -48,7 +49,8 @@ export function useMatterForm(
             parsed.error.issues.map(({ path, message }) => ({ path: path.join('.'), message })),
           ),
     );
-    if (parsed.success) {
+    if (!parsed.success) setRefusals(refusals + 1);
+    else {
       sending.mutate({ matter: parsed.data, photographs: photographs.added });
     }
   }
@@ -58,6 +60,8 @@ export function useMatterForm(
     faults: { ...refused, ...own },
     error: sending.error,
     isSending: sending.isPending,
+    /** How often it was sent with something missing. */
+    refusals,
   };
 }
 

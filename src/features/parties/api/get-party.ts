@@ -1,5 +1,5 @@
 import { queryOptions } from '@tanstack/react-query';
-import { partyDetailSchema } from '../../../../shared/schemas/parties.ts';
+import { partyDetailSchema } from '../../../../shared/schemas/party-answers.ts';
 import { apiGet } from '../../../lib/api-client.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 import { partiesKey } from './list-parties.ts';

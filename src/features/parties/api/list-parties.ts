@@ -1,5 +1,5 @@
 import { keepPreviousData, queryOptions } from '@tanstack/react-query';
-import { likelySameSchema, partiesSchema } from '../../../../shared/schemas/parties.ts';
+import { likelySameSchema, partiesSchema } from '../../../../shared/schemas/party-answers.ts';
 import { apiGet } from '../../../lib/api-client.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 import { schemeQuery } from '../../schemes/api/get-scheme.ts';

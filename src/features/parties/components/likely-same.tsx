@@ -1,7 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { capital } from '../../../../shared/presentation/capital.ts';
-import type { LikelySame as Groups } from '../../../../shared/schemas/parties.ts';
+import type { LikelySame as Groups } from '../../../../shared/schemas/party-answers.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { LoadingRows } from '../../../components/ui/loading-rows.tsx';
 import { QueryError } from '../../../components/ui/query-error.tsx';

@@ -1,5 +1,4 @@
 import { useQuery } from '@tanstack/react-query';
-import { useEffect, useState } from 'react';
 import { Field } from '../../../components/ui/field.tsx';
 import { LoadingRows } from '../../../components/ui/loading-rows.tsx';
 import { QueryError } from '../../../components/ui/query-error.tsx';
@@ -15,24 +14,11 @@ const WAIT = 250;
 
 type PartiesListProps = { readonly address: ReturnType<typeof usePartiesAddress> };
 
-/** What is written into the search goes into the address once it rests. */
-function useSearchWords({ address }: PartiesListProps) {
-  const [words, setWords] = useState(address.search);
-  const settled = useDelayedValue(words.trim(), WAIT);
-  const { search, setSearch } = address;
-  useEffect(() => {
-    if (settled !== search) setSearch(settled);
-    // only what is written changes the address, not the other way round
-    // eslint-disable-next-line react-hooks/exhaustive-deps
-  }, [settled]);
-  return { words, setWords };
-}
-
 /** Everybody who owns, rents or manages a building, by name. */
 export function PartiesList({ address }: PartiesListProps) {
   const scheme = useScheme();
-  const { words, setWords } = useSearchWords({ address });
-  const { search, offset } = address;
+  const { search: words, setSearch, offset } = address;
+  const search = useDelayedValue(words.trim(), WAIT);
   const { data, error, refetch } = useQuery(partiesQuery(scheme.id, { search, offset }));
   if (data?.found === 0 && search === '') return <NoParties />;
   return (
@@ -44,7 +30,7 @@ export function PartiesList({ address }: PartiesListProps) {
         frameClassName="mb-3 max-w-[360px]"
         value={words}
         onChange={({ target }) => {
-          setWords(target.value);
+          setSearch(target.value);
         }}
       />
       {error !== null && (

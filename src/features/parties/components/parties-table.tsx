@@ -1,5 +1,5 @@
 import { capital } from '../../../../shared/presentation/capital.ts';
-import type { ListedParty } from '../../../../shared/schemas/parties.ts';
+import type { ListedParty } from '../../../../shared/schemas/party-answers.ts';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
 import { CHANNEL_WORDS } from '../party-words.ts';

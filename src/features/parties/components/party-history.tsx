@@ -1,4 +1,4 @@
-import type { PartyDetail } from '../../../../shared/schemas/parties.ts';
+import type { PartyDetail } from '../../../../shared/schemas/party-answers.ts';
 import { ValueChanges } from '../../../components/ui/value-changes.tsx';
 import { changesBetween } from '../../../lib/changes-between.ts';
 import { formatMoment } from '../../../lib/format-date.ts';

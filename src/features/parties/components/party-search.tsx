@@ -1,6 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState, type ReactNode } from 'react';
-import type { ListedParty } from '../../../../shared/schemas/parties.ts';
+import type { ListedParty } from '../../../../shared/schemas/party-answers.ts';
 import { QueryError } from '../../../components/ui/query-error.tsx';
 import { SearchList } from '../../../components/ui/search-list.tsx';
 import { useDelayedValue } from '../../../hooks/use-delayed-value.ts';

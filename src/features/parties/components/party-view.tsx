@@ -1,7 +1,8 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState, type ReactNode } from 'react';
 import { capital } from '../../../../shared/presentation/capital.ts';
-import type { Party, PartyDetail } from '../../../../shared/schemas/parties.ts';
+import type { Party } from '../../../../shared/schemas/parties.ts';
+import type { PartyDetail } from '../../../../shared/schemas/party-answers.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { buttonStyle } from '../../../components/ui/button-style.ts';
 import { Facts } from '../../../components/ui/facts.tsx';

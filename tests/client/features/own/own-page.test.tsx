@@ -1,0 +1,241 @@
+import { fireEvent, screen, waitFor } from '@testing-library/react';
+import { beforeEach, expect, test, vi } from 'vitest';
+import type { OwnAppointment } from '../../../../shared/schemas/appointments.ts';
+import type { OwnMatter } from '../../../../shared/schemas/matter-answers.ts';
+import { newMatterSchema } from '../../../../shared/schemas/matters.ts';
+import type { Own, OwnBuilding } from '../../../../shared/schemas/own.ts';
+import { OwnPage } from '../../../../src/features/own/own-page.tsx';
+import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
+import { PersonContext } from '../../../../src/features/session/person-context.ts';
+import { anId, aSchemeAnswer } from '../../../support/answers.ts';
+import { axeFaults } from '../../../support/axe-faults.ts';
+import { fakeApi, Refusal } from '../../../support/fake-api.ts';
+import { renderPage } from '../../../support/render-page.tsx';
+
+const OWN = `/api/schemes/${anId(10)}/own`;
+const PERSON = {
+  ...{ id: anId(), name: 'Owner', email: 'o@example.org', isAdministrator: false, demo: false },
+};
+
+beforeEach(() => {
+  // the ground of the map is asked for as tiles, which are not there
+  vi.stubGlobal('ResizeObserver', undefined);
+});
+
+function aBuilding(overrides: Partial<OwnBuilding> = {}): OwnBuilding {
+  return {
+    ...{ id: 7, name: null, address: '9 Fishgate', use: 'dwelling', decision: null, measures: [] },
+    outline: [[[[1.64, 54.75], [1.6402, 54.75], [1.6402, 54.7501], [1.64, 54.75]]]],
+    figures: {
+      ...{ settlement: 0.044, most: 0.06, categoryLow: 0, category: 1, categoryHigh: 1 },
+      ...{ tunnels: 2, depth: 20, distance: 0, diameter: 6.6 },
+      lines: [[[1.63, 54.75], [1.65, 54.7502]]],
+    },
+    ...overrides,
+  }; // prettier-ignore
+}
+
+function aLetter(acknowledgedAt: string | null = null): Own['letters'][number] {
+  return {
+    ...{ id: anId(30), subject: 'A new tunnel', sentAt: '2026-11-20T09:00:00.000Z' },
+    ...{ answerBy: '2026-12-23', acknowledgedAt, buildings: [7] },
+  };
+}
+
+function anAppointment(overrides: Partial<OwnAppointment> = {}): OwnAppointment {
+  return {
+    ...{ id: anId(40), purpose: 'condition survey', minutes: 60, place: 'At the door' },
+    building: { id: 7, reference: 'B7', name: null, address: '9 Fishgate' },
+    ...{ startsAt: '2090-06-09T10:00:00.000Z', state: 'offered', askedFor: null, version: 3 },
+    ...{ changedAt: '2026-11-20T09:00:00.000Z' },
+    ...overrides,
+  };
+}
+
+function aMatter(overrides: Partial<OwnMatter> = {}): OwnMatter {
+  return {
+    ...{ id: anId(50), number: 1, kind: 'question', title: 'The day', suggestion: null },
+    building: { id: 7, reference: 'B7', name: null, address: '9 Fishgate' },
+    ...{ state: 'open', due: '2026-12-11', openedAt: '2026-12-04T09:00:00.000Z' },
+    ...{ changedAt: '2026-12-04T09:00:00.000Z', messages: [] },
+    ...overrides,
+  };
+}
+
+function anOwn(overrides: Partial<Own> = {}): Own {
+  return {
+    scheme: { id: anId(10), name: 'Port Dogger crossing' },
+    contact: { name: 'The owners’ line', email: 'owners@example.org', phone: '', hours: '' },
+    milestones: [{ when: 'Spring 2028', title: 'We visit again', words: 'New cracks are put right.' }], // prettier-ignore
+    letters: [aLetter()],
+    buildings: [aBuilding()],
+    ...overrides,
+  };
+}
+
+type Told = {
+  readonly own?: Own;
+  readonly appointments?: readonly OwnAppointment[];
+  readonly matters?: readonly OwnMatter[];
+};
+
+function show({ own = anOwn(), appointments = [], matters = [] }: Told = {}, more = {}) {
+  const abilities = { readScheme: true, readOwnBuildings: true, answerAsOwner: true };
+  const scheme = aSchemeAnswer({ abilities, roles: ['owner'] });
+  const api = fakeApi({
+    [`GET ${OWN}`]: own,
+    [`GET ${OWN}/appointments`]: appointments,
+    [`GET ${OWN}/matters`]: matters,
+    ...more,
+  });
+  renderPage(
+    <PersonContext value={PERSON}>
+      <SchemeContext value={scheme}>
+        <OwnPage />
+      </SchemeContext>
+    </PersonContext>,
+  );
+  return api;
+}
+
+test('one sentence, one paragraph, one picture, one thing to do, then dates', async () => {
+  const { calls } = show(
+    {},
+    { [`POST ${OWN}/letters/${anId(30)}/acknowledge`]: aLetter('2026-12-02T09:00:00.000Z') },
+  );
+  await screen.findByRole('heading', {
+    level: 1,
+    name: 'Your home is expected to stay sound, with hairline cracks at most',
+  });
+  screen.getByText(/about 44 millimetres, slowly/);
+  screen.getByText('About as thin as the edge of a fingernail');
+  screen.getByRole('img', { name: 'Map: your home and the two tunnels. North is at the top.' });
+  screen.getByText('We visit again');
+  expect(document.body.textContent).not.toMatch(/categor/i);
+  expect(await axeFaults(document.body)).toEqual([]);
+  fireEvent.click(screen.getByRole('button', { name: 'I have the letter' }));
+  const thanks = await screen.findByText(/We know that our letter has reached you/);
+  expect(thanks.parentElement).toBe(document.activeElement);
+  expect(calls.map(({ route }) => route)).toContain(`POST ${OWN}/letters/${anId(30)}/acknowledge`);
+});
+
+test('before a letter with figures it says calmly that the work is under way', async () => {
+  show({ own: anOwn({ letters: [], buildings: [aBuilding({ figures: null })] }) });
+  await screen.findByRole('heading', { name: 'We are looking at what the tunnel means for you' });
+  screen.getByRole('heading', { name: 'You need do nothing now' });
+  expect(screen.queryByText(/millimetre/)).toBeNull();
+  expect(screen.queryByRole('button', { name: 'How sure are you?' })).toBeNull();
+});
+
+test('of several buildings one is chosen', async () => {
+  const shop = aBuilding({ id: 8, address: '2 Quay', use: 'shop', figures: null });
+  show({ own: anOwn({ buildings: [aBuilding(), shop] }) });
+  const choice = await screen.findByLabelText('Which of your buildings?');
+  fireEvent.change(choice, { target: { value: '8' } });
+  await screen.findByText(/near your building/);
+  expect(screen.queryByText('A new tunnel')).toBeNull();
+});
+
+test('who has no building yet is told whom to ask', async () => {
+  show({ own: anOwn({ letters: [], buildings: [] }) });
+  await screen.findByRole('heading', { name: 'No building is linked to you yet' });
+});
+
+test('a survey that is offered is agreed to, or other days are asked for', async () => {
+  const letters = [aLetter('2026-12-02T09:00:00.000Z')];
+  const asked = anAppointment({
+    state: 'another day asked for',
+    askedFor: { days: [{ day: '2090-06-14', part: 'afternoon' }], note: '' },
+  });
+  const { calls } = show(
+    { own: anOwn({ letters }), appointments: [anAppointment()] },
+    { [`POST ${OWN}/appointments/${anId(40)}/answer`]: asked },
+  );
+  await screen.findByRole('heading', { name: 'Please choose a day for the survey' });
+  screen.getByRole('button', { name: 'That suits me' });
+  fireEvent.click(screen.getByRole('button', { name: 'Pick another day' }));
+  fireEvent.click(screen.getByRole('button', { name: 'Send the days' }));
+  await screen.findByText('Please choose at least one day.');
+  fireEvent.change(screen.getByLabelText('First day'), { target: { value: '2090-06-14' } });
+  const [part] = screen.getAllByLabelText('Time of day');
+  if (part !== undefined) fireEvent.change(part, { target: { value: 'afternoon' } });
+  expect(await axeFaults(document.body)).toEqual([]);
+  fireEvent.click(screen.getByRole('button', { name: 'Send the days' }));
+  await screen.findByText(/We look for a time that suits you, and write to you/);
+  const sent = calls.find(({ route }) => route.startsWith('POST'));
+  expect(sent?.body).toEqual({
+    ...{ version: 3, answer: 'another day', note: '' },
+    days: [{ day: '2090-06-14', part: 'afternoon' }],
+  });
+});
+
+test('a question says what is missing, keeps what was typed when it fails, and thanks', async () => {
+  let isDown = true;
+  const { calls } = show(
+    {},
+    {
+      [`POST ${OWN}/matters`]: () =>
+        isDown ? new Refusal(500, 'internal', 'Something failed on our side.') : aMatter(),
+    },
+  );
+  fireEvent.click(await screen.findByRole('button', { name: 'Ask a question' }));
+  await waitFor(() => {
+    expect(document.activeElement?.textContent).toBe('Ask a question');
+  });
+  fireEvent.change(screen.getByLabelText('What is it about?'), { target: { value: 'The day' } });
+  fireEvent.click(screen.getByRole('button', { name: 'Send the question' }));
+  await screen.findByText('Write something.');
+  expect(document.activeElement).toBe(screen.getByLabelText('Your question'));
+  fireEvent.change(screen.getByLabelText('Your question'), { target: { value: 'When?' } });
+  fireEvent.click(screen.getByRole('button', { name: 'Send the question' }));
+  await screen.findByText('It has not been sent.');
+  expect(screen.getByLabelText<HTMLTextAreaElement>('Your question').value).toBe('When?');
+  isDown = false;
+  fireEvent.click(screen.getByRole('button', { name: 'Send the question' }));
+  await screen.findByText('Thank you. Someone will answer by Friday 11 December.');
+  const sent = calls.filter(({ route }) => route === `POST ${OWN}/matters`);
+  const ids = sent.map(({ body }) => newMatterSchema.parse(body).id);
+  expect(ids).toHaveLength(2);
+  expect(new Set(ids).size).toBe(1);
+});
+
+test('a fact is put right by its name in plain words', async () => {
+  const { calls } = show({}, { [`POST ${OWN}/matters`]: aMatter({ kind: 'question' }) });
+  fireEvent.click(
+    await screen.findByRole('button', { name: 'Something about my building is wrong' }),
+  );
+  fireEvent.change(screen.getByLabelText('What should it say?'), { target: { value: '3' } });
+  fireEvent.change(screen.getByLabelText(/How do you know/), { target: { value: 'I live here.' } });
+  fireEvent.click(screen.getByRole('button', { name: 'Send the correction' }));
+  await screen.findByText(/Someone will answer/);
+  expect(calls.find(({ route }) => route.startsWith('POST'))?.body).toMatchObject({
+    ...{ kind: 'correction', title: 'How many floors it has' },
+    suggestion: { field: 'storeys', value: 3 },
+  });
+});
+
+test('what was asked stands there with its answer, and can be written to again', async () => {
+  const message = { photographs: [], writtenAt: '2026-12-04T09:00:00.000Z' };
+  const answered = aMatter({
+    state: 'answered',
+    messages: [
+      { ...message, id: anId(60), side: 'owner', text: 'When do you come?' },
+      { ...message, id: anId(61), side: 'team', text: 'In June.' },
+    ],
+  });
+  const { calls } = show(
+    { matters: [answered] },
+    { [`POST ${OWN}/matters/${anId(50)}/messages`]: aMatter() },
+  );
+  fireEvent.click(await screen.findByText('The day'));
+  screen.getByText('Your question. Answered.');
+  screen.getByText('In June.');
+  fireEvent.change(screen.getByLabelText('Write again about this'), {
+    target: { value: 'Early?' },
+  });
+  fireEvent.click(screen.getByRole('button', { name: 'Send' }));
+  await screen.findByText('Thank you. It is with us.');
+  expect(calls.find(({ route }) => route.startsWith('POST'))?.body).toMatchObject({
+    text: 'Early?',
+  });
+});
