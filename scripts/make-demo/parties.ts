@@ -65,21 +65,29 @@ function line(row: Row): string {
   return `${COLUMNS.map((name) => csvCell(row[name] ?? '')).join(',')}\n`;
 }
 
+/** The demo's owner has it already: the listed dwelling that stands closest to the line. */
+function withoutOwnersHouse<Near extends { readonly isListedDwelling: boolean }>(
+  near: readonly Near[],
+): Near[] {
+  const taken = near.find(({ isListedDwelling }) => isListedDwelling);
+  return near.filter((house) => house !== taken);
+}
+
 /** Invented parties for the buildings nearest to the demo's first line, to be brought in by hand. */
 export function partiesText(buildings: readonly Feature[], seed: number): string {
   const random = createRandom(seed).fork('parties');
-  const near = buildings
-    .flatMap(({ geometry, properties: { reference, address } }) => {
+  const sorted = buildings
+    .map(({ geometry, properties: { reference, address, use, listed } }) => {
       const ring = geometry.type === 'Polygon' ? (geometry.coordinates[0] ?? []) : [];
       const house = { reference: String(reference), address: String(address) };
-      return [{ ...house, random: random.fork(house.reference), off: metresFromDemoLine(ring) }];
+      const isListedDwelling = use === 'dwelling' && listed !== 'not listed';
+      const off = metresFromDemoLine(ring);
+      return { ...house, random: random.fork(house.reference), off, isListedDwelling };
     })
-    .sort((a, b) => a.off - b.off)
-    .slice(0, BUILDINGS);
-  const rows = near.flatMap(partiesOf);
+    .sort((a, b) => a.off - b.off);
+  const near = withoutOwnersHouse(sorted).slice(0, BUILDINGS);
   const [first] = near;
-  const all = first === undefined ? rows : [...rows, ...faultyRows(first)];
-  return [`${COLUMNS.map((name) => PARTY_COLUMN_WORDS[name]).join(',')}\n`, ...all.map(line)].join(
-    '',
-  );
+  const rows = [...near.flatMap(partiesOf), ...(first === undefined ? [] : faultyRows(first))];
+  const heading = COLUMNS.map((name) => PARTY_COLUMN_WORDS[name]).join(',');
+  return [`${heading}\n`, ...rows.map(line)].join('');
 }

@@ -69,7 +69,7 @@ export async function findPartyReport(
     `select line, count(*) over ()::integer as found
      from party_imports i, jsonb_array_elements(i.rows->'report') with ordinality as told(line, place)
      where i.id = $1 and ($2::text is null or line->>'outcome' = $2
-       or ($2 = 'noted' and line->'remarks' <> '[]'))
+       or ($2 = 'noted' and line->'remarks' <> '[]' and line->>'outcome' <> 'problem'))
      order by place offset $3 limit $4`,
     { type: QueryTypes.SELECT, bind: [id, only, offset, limit] },
   );

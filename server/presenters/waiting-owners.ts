@@ -21,9 +21,22 @@ function mattersInWords(late: number): string {
 export function presentOwnersWaiting(
   page: string,
   actor: SchemeActor,
-  { matters, appointments, undertakings }: OwnersWaiting,
+  { toCheck, toSend, returned, matters, appointments, undertakings }: OwnersWaiting,
 ): WaitingItem[] {
+  const letters = `${page}/owners/letters`;
   return [
+    ...(schemePolicy.checkLetters(actor)
+      ? [
+          ...item('letters-to-check', toCheck, {
+            text: 'Prepared by somebody else.',
+            link: letters,
+          }),
+          ...item('letters-to-send', toSend, { text: 'Checked, and not sent yet.', link: letters }),
+        ]
+      : []),
+    ...(schemePolicy.prepareLetters(actor)
+      ? item('letters-returned', returned, { text: 'Returned with a comment.', link: letters })
+      : []),
     ...(schemePolicy.answerMatters(actor)
       ? [
           ...item('matters-waiting', matters, {

@@ -40,6 +40,8 @@ describe('axe finds nothing', () => {
     const visitor = await visit();
     await signInAs(visitor, 'owner');
     const scheme = await openScheme(visitor);
-    expect(await faultsOn(visitor, ['/', '/account', `${scheme}/settings`])).toEqual([]);
+    expect(
+      await faultsOn(visitor, ['/', '/account', `${scheme}/home`, `${scheme}/settings`]),
+    ).toEqual([]);
   });
 });

@@ -8,10 +8,10 @@ import { signInAs, signInWith, signOut } from '../drivers/sign-in.ts';
 const PASSWORD = 'a lantern on the mole';
 
 for (const [role, screens] of [
-  ['Designer', ['Plan', 'Register', 'Measures', 'Settings', 'Method']],
-  ['Assessor', ['Plan', 'Register', 'Measures', 'Visits', 'Settings', 'Method']],
-  ['Witness', ['Plan', 'Register', 'Measures', 'Settings', 'Method']],
-  ['Owner', ['Description', 'Method']],
+  ['Designer', ['Plan', 'Register', 'Measures', 'Owners', 'Settings', 'Method']],
+  ['Assessor', ['Plan', 'Register', 'Measures', 'Visits', 'Owners', 'Settings', 'Method']],
+  ['Witness', ['Plan', 'Register', 'Measures', 'Owners', 'Settings', 'Method']],
+  ['Owner', ['My building']],
 ] as const) {
   const email = `new-${role.toLowerCase()}@example.org`;
   journey(

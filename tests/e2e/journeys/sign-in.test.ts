@@ -9,7 +9,9 @@ describe('signing in', () => {
     await signInAs(visitor, 'administrator');
     expect(await tabs(visitor)).toEqual(['Schemes', 'People', 'Audit', 'Mailbox', 'Method']);
     await openScheme(visitor);
-    expect(await tabs(visitor)).toEqual(['Plan', 'Register', 'Measures', 'Settings', 'Method']);
+    expect(await tabs(visitor)).toEqual([
+      ...['Plan', 'Register', 'Measures', 'Owners', 'Settings', 'Method'],
+    ]);
   });
 
   for (const role of ['designer', 'assessor', 'second-assessor', 'witness'] as const) {
@@ -23,14 +25,17 @@ describe('signing in', () => {
     });
   }
 
-  journey('as the owner shows the scheme and neither plan nor register', async ({ visit }) => {
-    const visitor = await visit();
-    await signInAs(visitor, 'owner');
-    const scheme = await openScheme(visitor);
-    expect(await tabs(visitor)).toEqual(['Description', 'Method']);
-    const answer = await visitor.page.request.get(`/api${scheme}/buildings?search=B0001`);
-    expect(answer.status()).toBe(403);
-  });
+  journey(
+    'as the owner opens their own building, and neither plan nor register',
+    async ({ visit }) => {
+      const visitor = await visit();
+      await signInAs(visitor, 'owner');
+      const scheme = await openScheme(visitor);
+      expect(await tabs(visitor)).toEqual(['My building']);
+      const answer = await visitor.page.request.get(`/api${scheme}/buildings?search=B0001`);
+      expect(answer.status()).toBe(403);
+    },
+  );
 
   journey(
     'with a wrong password is refused, and which was wrong is not told',

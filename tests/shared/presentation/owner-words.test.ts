@@ -104,10 +104,6 @@ describe.each(CATEGORIES)('what is read where the category is %i', (category) =>
       const ease = readingEase(words.join(' '));
       process.stdout.write(`Flesch ${ease.toFixed(0)}: ${place}, category ${category}\n`);
       expect(ease).toBeGreaterThanOrEqual(60);
-      const hardest = words.reduce((one, other) =>
-        readingEase(other) < readingEase(one) ? other : one,
-      );
-      expect([hardest, readingEase(hardest)]).toEqual([hardest, expect.any(Number)]);
     }
   });
 

@@ -58,7 +58,7 @@ export function OwnersOfBuilding({ building }: { readonly building: ChosenBuildi
       <MutationError failed="What owners wrote could not be fetched." error={error} />
       {isThere && lines.length === 0 && (
         <p className="mt-2 text-small text-ink-2">
-          Nothing yet. What owners bring up, appointments and undertakings stand here.
+          Nothing yet. Letters, what owners bring up, appointments and undertakings stand here.
         </p>
       )}
       <ul>

@@ -1,3 +1,5 @@
+import { useState } from 'react';
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { capital } from '../../../../shared/presentation/capital.ts';
 import { INTEREST_KINDS } from '../../../../shared/schemas/parties.ts';
 import { Button } from '../../../components/ui/button.tsx';
@@ -22,6 +24,8 @@ type OneProps = {
   readonly onRemove: () => void;
 };
 
+/** So many are written at once; a body may hold hundreds. */
+const FIRST = 10;
 const KINDS = INTEREST_KINDS.map((kind) => ({ value: kind, label: capital(kind) }));
 
 function OneInterest({ interest, faultOf, onChange, onRemove }: OneProps) {
@@ -73,6 +77,7 @@ function OneInterest({ interest, faultOf, onChange, onRemove }: OneProps) {
 
 /** What a party has to do with which buildings. */
 export function InterestFields({ schemeId, interests, faults, onChange }: InterestFieldsProps) {
+  const [shown, setShown] = useState(FIRST);
   return (
     <fieldset className="min-w-0 border-t border-rule pt-2">
       <legend className="sr-only">Interests in buildings</legend>
@@ -85,7 +90,7 @@ export function InterestFields({ schemeId, interests, faults, onChange }: Intere
         </p>
       )}
       <ul>
-        {interests.map((interest, index) => (
+        {interests.slice(0, shown).map((interest, index) => (
           <OneInterest
             key={interest.key}
             interest={interest}
@@ -99,13 +104,24 @@ export function InterestFields({ schemeId, interests, faults, onChange }: Intere
           />
         ))}
       </ul>
+      {interests.length > shown && (
+        <Button
+          kind="quiet"
+          className="-ml-1.5"
+          onClick={() => {
+            setShown(interests.length);
+          }}
+        >
+          Show {formatCount(interests.length - shown)} more
+        </Button>
+      )}
       <BuildingSearch
         schemeId={schemeId}
         onChoose={(building) => {
           const { id, reference, address } = building;
           const key = `${id} ${interests.length} ${Date.now()}`;
           const added = { key, building: { id, reference, address }, from: '', to: '' };
-          onChange([...interests, { ...added, kind: 'freeholder' }]);
+          onChange([{ ...added, kind: 'freeholder' }, ...interests]);
         }}
       />
     </fieldset>

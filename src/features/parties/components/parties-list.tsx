@@ -42,7 +42,8 @@ export function PartiesList({ address }: PartiesListProps) {
       )}
       {data !== undefined && (
         <Pages
-          what="parties"
+          one="party"
+          many="parties"
           offset={offset}
           perPage={PARTIES_PER_PAGE}
           found={data.found}

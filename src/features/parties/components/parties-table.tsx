@@ -1,3 +1,4 @@
+import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import { capital } from '../../../../shared/presentation/capital.ts';
 import type { ListedParty } from '../../../../shared/schemas/party-answers.ts';
 import type { Column } from '../../../components/ui/table/column.ts';
@@ -5,12 +6,18 @@ import { Table } from '../../../components/ui/table/table.tsx';
 import { CHANNEL_WORDS } from '../party-words.ts';
 import { PartyName } from './party-name.tsx';
 
+/** Buildings by interest, each kind said once. */
 function Interests({ interests, interestCount }: ListedParty) {
   const more = interestCount - interests.length;
+  const kinds = [...new Set(interests.map(({ kind }) => kind))];
+  const words = kinds.map((kind) => {
+    const held = interests.filter((one) => one.kind === kind);
+    return `${kind} of ${held.map(({ building }) => building.reference).join(', ')}`;
+  });
   return (
     <>
-      {interests.map(({ building, kind }) => `${kind} of ${building.reference}`).join(', ')}
-      {more > 0 && <span className="text-ink-2"> and {more} more</span>}
+      {words.join('; ')}
+      {more > 0 && <span className="text-ink-2"> and {formatCount(more)} more</span>}
     </>
   );
 }

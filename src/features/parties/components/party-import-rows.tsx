@@ -36,6 +36,9 @@ const COLUMNS: readonly Column<PartyImportRow>[] = [
   },
 ];
 
+/** Once an import has ended, names stand with the parties alone. */
+const COLUMNS_WITHOUT_NAMES = COLUMNS.filter(({ id }) => id !== 'name');
+
 type PartyImportRowsProps = {
   readonly answer: PartyImport;
   readonly only: RowsOnly | null;
@@ -69,7 +72,7 @@ export function PartyImportRows({ answer, only }: PartyImportRowsProps) {
         <>
           <Table
             label="Report by row"
-            columns={COLUMNS}
+            columns={answer.state === 'checked' ? COLUMNS : COLUMNS_WITHOUT_NAMES}
             rows={data.rows}
             idOf={({ row }) => String(row)}
             detailOf={({ remarks }) =>
@@ -81,7 +84,8 @@ export function PartyImportRows({ answer, only }: PartyImportRowsProps) {
             }
           />
           <Pages
-            what="rows"
+            one="row"
+          many="rows"
             offset={offset}
             perPage={PARTY_IMPORT_LIMITS.page}
             found={data.found}

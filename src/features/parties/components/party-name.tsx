@@ -1,4 +1,4 @@
 /** A name in its own direction of writing, which turns nothing beside it round. */
 export function PartyName({ name }: { readonly name: string }) {
-  return <bdi className="break-words">{name === '' ? 'Erased' : name}</bdi>;
+  return <bdi className="wrap-anywhere">{name === '' ? 'Erased' : name}</bdi>;
 }

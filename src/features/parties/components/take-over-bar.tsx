@@ -18,14 +18,11 @@ function sentence({ counts }: PartyImport): string {
   if (rows === 0) return 'No row names anybody. Say which column is what, and check again.';
   if (partiesAdded + partiesCompleted === 0) return 'Nothing in this file can be taken over.';
   const parts = [
-    counted(partiesAdded, 'party is added', 'parties are added'),
-    counted(
-      partiesCompleted,
-      'that is there gets what it lacks',
-      'that are there get what they lack',
-    ),
-    ...(problem === 0 ? [] : [counted(problem, 'row is left out', 'rows are left out')]),
-  ];
+    partiesAdded > 0 && counted(partiesAdded, 'party is added', 'parties are added'),
+    partiesCompleted > 0 &&
+      counted(partiesCompleted, 'that is there gets what it lacks', 'that are there get what they lack'),
+    problem > 0 && counted(problem, 'row is left out', 'rows are left out'),
+  ].filter((part) => part !== false);
   return `${parts.join(', ')}. Nothing that is there is overwritten.`;
 }
 

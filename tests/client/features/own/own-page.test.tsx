@@ -10,6 +10,7 @@ import { PersonContext } from '../../../../src/features/session/person-context.t
 import { anId, aSchemeAnswer } from '../../../support/answers.ts';
 import { axeFaults } from '../../../support/axe-faults.ts';
 import { fakeApi, Refusal } from '../../../support/fake-api.ts';
+import { readingEase } from '../../../support/reading-ease.ts';
 import { renderPage } from '../../../support/render-page.tsx';
 
 const OWN = `/api/schemes/${anId(10)}/own`;
@@ -238,4 +239,32 @@ test('what was asked stands there with its answer, and can be written to again',
   expect(calls.find(({ route }) => route.startsWith('POST'))?.body).toMatchObject({
     text: 'Early?',
   });
+});
+
+/** What is on the page as sentences, each ended. */
+function pageWords(): string {
+  return [...document.querySelectorAll('h1, h2, p, li, label, figcaption, button')]
+    .map(({ textContent }) => textContent.trim())
+    .filter((words) => words !== '')
+    .map((words) => (/[.?!]$/.test(words) ? words : `${words}.`))
+    .join(' ');
+}
+
+test('all of the page with each of its forms is plain English', async () => {
+  const measures = [{ title: 'Props in the cellar', state: 'agreed' } as const];
+  const decision = 'It will be protected before the tunnel comes near.';
+  const letters = [aLetter('2026-12-02T09:00:00.000Z')];
+  show({
+    own: anOwn({ letters, buildings: [aBuilding({ measures, decision })] }),
+    appointments: [anAppointment()],
+    matters: [aMatter()],
+  });
+  fireEvent.click(await screen.findByRole('button', { name: 'Pick another day' }));
+  const links = ['Ask a question', 'Report a crack or a worry', 'How sure are you?', 'Something about my building is wrong', 'Make a claim']; // prettier-ignore
+  for (const name of links) {
+    fireEvent.click(screen.getByRole('button', { name }));
+    const ease = readingEase(pageWords());
+    process.stdout.write(`Flesch ${ease.toFixed(0)}: the page with “${name}”\n`);
+    expect(ease).toBeGreaterThanOrEqual(60);
+  }
 });
