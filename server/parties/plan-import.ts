@@ -150,7 +150,8 @@ function countsOf(
     'new interest': count('new interest'),
     'there already': count('there already'),
     problem: count('problem'),
-    noted: lines.filter(({ outcome, remarks }) => outcome !== 'problem' && remarks.length > 0).length,
+    noted: lines.filter(({ outcome, remarks }) => outcome !== 'problem' && remarks.length > 0)
+      .length,
     partiesAdded: plan.fresh.size,
     partiesCompleted: [...plan.completed].filter(({ isNew }) => !isNew).length,
   };

@@ -11,17 +11,17 @@ import type { FoundMatter, FoundMatterLine } from '../models/matters.ts';
 type Person = { readonly id: string; readonly name: string };
 
 function presentHead(matter: FoundMatter | FoundMatterLine) {
-  const { id, number, kind, title, suggestion, state, due, openedAt, changedAt } = matter;
+  const { id, kind, title, suggestion, state, due, openedAt, changedAt } = matter;
   return {
-    ...{ id, number, kind, title, suggestion, state, due },
+    ...{ id, kind, title, suggestion, state, due },
     openedAt: openedAt.toISOString(),
     changedAt: changedAt.toISOString(),
   };
 }
 
 function presentForTeam(matter: FoundMatter | FoundMatterLine) {
-  const { party, assignedTo, isOverdue, version } = matter;
-  return { ...presentHead(matter), party, assignedTo, isOverdue, version };
+  const { number, party, assignedTo, isOverdue, version } = matter;
+  return { ...presentHead(matter), number, party, assignedTo, isOverdue, version };
 }
 
 function presentMessage(message: Matter['messages'][number]) {

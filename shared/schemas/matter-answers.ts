@@ -34,7 +34,6 @@ export type KeptSuggestion = z.infer<typeof suggestionAnswer>;
 
 const matterShape = {
   id: z.uuid(),
-  number: z.number(),
   kind: z.enum(MATTER_KINDS),
   building,
   title: z.string(),
@@ -47,7 +46,7 @@ const matterShape = {
 
 /**
  * A matter as its owner reads it, with what was written on both sides, the oldest first. Who of the team wrote
- * is not told, and notes are not there.
+ * is not told, and notes are not there; nor is its number, which would tell how many there are.
  *
  * Units: none. Valid: `due` is when an answer was promised. Source: [own].
  */
@@ -82,6 +81,7 @@ const person = z.strictObject({ id: z.uuid(), name: z.string() });
 
 const teamShape = {
   ...matterShape,
+  number: z.number(),
   party: person,
   assignedTo: person.nullable(),
   isOverdue: z.boolean(),

@@ -1,6 +1,6 @@
 import type { Batch } from '../../../shared/schemas/letter-batches.ts';
 import type { LetterKind } from '../../../shared/schemas/letter-settings.ts';
-import type { ListedLetter } from '../../../shared/schemas/letters.ts';
+import type { LetterReason, ListedLetter } from '../../../shared/schemas/letters.ts';
 import type { State } from '../../components/ui/state-mark.tsx';
 
 /** What each kind of letter is for. */
@@ -32,6 +32,25 @@ export const DELIVERY_SHAPES: Readonly<Record<ListedLetter['delivery'], State>> 
   'to be printed': 'in-hand',
   printed: 'done',
 };
+
+const MOST_NAMED = 4;
+
+/** Why somebody gets a letter: what each rule says, and of which buildings. */
+export function reasonWords(reasons: readonly LetterReason[]): string {
+  const buildings = new Map<string, string[]>();
+  for (const { why, building } of reasons) {
+    const named = buildings.get(why) ?? [];
+    buildings.set(why, building === null ? named : [...named, building]);
+  }
+  return [...buildings]
+    .map(([why, named]) => {
+      const more = named.length - MOST_NAMED;
+      const listed = named.slice(0, MOST_NAMED).join(', ');
+      if (named.length === 0) return why;
+      return `${why}: ${listed}${more > 0 ? ` and ${more} more` : ''}`;
+    })
+    .join('; ');
+}
 
 /** A number of letters, as "1 letter" or "1,204 letters". */
 export function lettersWords(count: number): string {

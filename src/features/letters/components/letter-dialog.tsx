@@ -14,6 +14,7 @@ import { formatDay } from '../../../lib/format-date.ts';
 import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { letterQuery, useAcknowledge } from '../api/letters.ts';
+import { reasonWords } from '../letter-words.ts';
 import { LetterParts } from './letter-parts.tsx';
 
 function standing({ delivery, serverWords, acknowledgedAt, remindedAt }: Letter): string {
@@ -55,9 +56,6 @@ function Acknowledge({ letterId, onDone }: { readonly letterId: string; onDone: 
 function WholeLetter({ letter, onDone }: { readonly letter: Letter; readonly onDone: () => void }) {
   const scheme = useScheme();
   const { id, name, address, email, channel, subject, parts, reasons } = letter;
-  const why = reasons.map((one) =>
-    one.building === null ? one.why : `${one.building}: ${one.why}`,
-  );
   const isSent = letter.delivery !== 'not sent';
   const mayRecord = can(scheme, 'prepareLetters') && isSent && letter.acknowledgedAt === null;
   return (
@@ -65,7 +63,7 @@ function WholeLetter({ letter, onDone }: { readonly letter: Letter; readonly onD
       <Facts
         facts={[
           ['To', `${name}, ${channel === 'post' ? address.split('\n').join(', ') : (email ?? '')}`],
-          ['Because', why.join('; ')],
+          ['Because', reasonWords(reasons)],
           ['Stands', standing(letter)],
         ]}
       />

@@ -6,6 +6,7 @@ import { Dialog } from '../../../components/ui/dialog.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
+import { reasonWords } from '../letter-words.ts';
 
 type Recipient = Recipients['recipients'][number];
 type Asked = Omit<NewBatch, 'expected'>;
@@ -16,11 +17,8 @@ type RecipientsTableProps = {
   readonly onChange: (asked: Asked) => void;
 };
 
-function reasonWords({ reasons, leftOut }: Recipient): string {
-  if (leftOut !== null) return `Left out: ${leftOut}`;
-  return reasons
-    .map(({ why, building }) => (building === null ? why : `${building}: ${why}`))
-    .join('; ');
+function becauseWords({ reasons, leftOut }: Recipient): string {
+  return leftOut === null ? reasonWords(reasons) : `Left out: ${leftOut}`;
 }
 
 function columnsOf(onLeaveOut: (one: Recipient) => void, onTakeIn: (one: Recipient) => void) {
@@ -43,7 +41,7 @@ function columnsOf(onLeaveOut: (one: Recipient) => void, onTakeIn: (one: Recipie
       id: 'why',
       heading: 'Because',
       wide: true,
-      cell: (one) => <span title={reasonWords(one)}>{reasonWords(one)}</span>,
+      cell: (one) => <span title={becauseWords(one)}>{becauseWords(one)}</span>,
     },
     {
       id: 'act',

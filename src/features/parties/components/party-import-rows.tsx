@@ -85,7 +85,7 @@ export function PartyImportRows({ answer, only }: PartyImportRowsProps) {
           />
           <Pages
             one="row"
-          many="rows"
+            many="rows"
             offset={offset}
             perPage={PARTY_IMPORT_LIMITS.page}
             found={data.found}

@@ -20,7 +20,11 @@ function sentence({ counts }: PartyImport): string {
   const parts = [
     partiesAdded > 0 && counted(partiesAdded, 'party is added', 'parties are added'),
     partiesCompleted > 0 &&
-      counted(partiesCompleted, 'that is there gets what it lacks', 'that are there get what they lack'),
+      counted(
+        partiesCompleted,
+        'that is there gets what it lacks',
+        'that are there get what they lack',
+      ),
     problem > 0 && counted(problem, 'row is left out', 'rows are left out'),
   ].filter((part) => part !== false);
   return `${parts.join(', ')}. Nothing that is there is overwritten.`;

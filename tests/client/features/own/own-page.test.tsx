@@ -55,7 +55,7 @@ function anAppointment(overrides: Partial<OwnAppointment> = {}): OwnAppointment 
 
 function aMatter(overrides: Partial<OwnMatter> = {}): OwnMatter {
   return {
-    ...{ id: anId(50), number: 1, kind: 'question', title: 'The day', suggestion: null },
+    ...{ id: anId(50), kind: 'question', title: 'The day', suggestion: null },
     building: { id: 7, reference: 'B7', name: null, address: '9 Fishgate' },
     ...{ state: 'open', due: '2026-12-11', openedAt: '2026-12-04T09:00:00.000Z' },
     ...{ changedAt: '2026-12-04T09:00:00.000Z', messages: [] },
