@@ -53,7 +53,7 @@ async function check(
   transaction: Transaction,
 ) {
   const known = await findKnownParties(database, schemeId, transaction);
-  const { lines, counts } = planImport(table, columns, known);
+  const { lines, counts } = await planImport(table, columns, known);
   return { columns, counts, kept: { table, report: lines } };
 }
 

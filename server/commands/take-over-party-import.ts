@@ -71,7 +71,7 @@ export async function takeOverPartyImport(
     const table = await takeStagedTable(database, scheme.id, id, transaction);
     const { columns } = await readPartyImport(database, scheme.id, id, transaction);
     const known = await findKnownParties(database, scheme.id, transaction);
-    const plan = planImport(table, columns, known);
+    const plan = await planImport(table, columns, known);
     requireSeen(plan.counts, seen);
     const old = plan.completed.map((one) => one.id);
     const before = await toldOf(database, scheme.id, old, transaction);

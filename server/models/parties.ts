@@ -33,37 +33,56 @@ function columns(order: string, limit: number | 'all'): string {
 }
 
 /** Every word that is searched has to begin a word of the party or of one of its buildings. */
-const LISTED = `p.scheme_id = $1 and p.merged_into is null and p.erased_at is null
-  and ($2::integer is null or exists (
-    select from interests o where o.party_id = p.id and o.building_id = $2))
-  and not exists (
-    select from unnest(tsvector_to_array(folded_words($3))) as word
-    cross join lateral (select ('''' || word || ''':*')::tsquery as one) as wanted
-    where not p.words @@ one and not exists (
-      select from interests o join buildings b on b.id = o.building_id
-      where o.party_id = p.id and b.words @@ one))`;
+const LISTED = `
+  with asked as (
+    select ('''' || word || ''':*')::tsquery as word from unnest(tsvector_to_array(folded_words($3))) as word
+  ), hits as (
+    select word, p.id from asked join parties p on p.scheme_id = $1 and p.words @@ word
+    union
+    select word, i.party_id from asked join buildings b on b.scheme_id = $1 and b.words @@ word
+    join interests i on i.building_id = b.id
+  ), named as (
+    select id from hits group by id having count(*) = (select count(*) from asked)
+  ), listed as materialized (
+    select id, name from parties p
+    where scheme_id = $1 and merged_into is null and erased_at is null
+      and (not exists (select from asked) or id in (select id from named))
+      and ($2::integer is null or id in (select party_id from interests where building_id = $2))
+  )`;
 
 export type WhichParties = { readonly search: string; readonly building?: number | undefined };
+
+/** Which parties of a scheme are asked for, by name; and how many there are. Null for no limit. */
+export async function findPartyIds(
+  database: Sequelize,
+  schemeId: string,
+  which: WhichParties & { readonly offset: number; readonly limit: number | null },
+): Promise<{ found: number; ids: string[] }> {
+  const { search, building = null, offset, limit } = which;
+  const [page] = await database.query<{ found: number; ids: string[] }>(
+    `${LISTED}
+     select (select count(*)::integer from listed) as found,
+       array(select id from listed order by name collate natural_order, id offset $4 limit $5) as ids`,
+    { type: QueryTypes.SELECT, bind: [schemeId, building, search, offset, limit] },
+  );
+  return page ?? { found: 0, ids: [] };
+}
 
 /** A page of the parties of a scheme that are neither merged nor erased, by name; and how many there are. */
 export async function findParties(
   database: Sequelize,
   schemeId: string,
-  { search, building, offset, limit }: WhichParties & { offset: number; limit: number },
+  which: WhichParties & { readonly offset: number; readonly limit: number },
 ): Promise<{ found: number; parties: FoundListedParty[] }> {
-  const which = [schemeId, building ?? null, search];
-  const [counted] = await database.query<{ found: number }>(
-    `select count(*)::integer as found from parties p where ${LISTED}`,
-    { type: QueryTypes.SELECT, bind: which },
-  );
+  const { found, ids } = await findPartyIds(database, schemeId, which);
   const parties = await database.query<FoundListedParty>(
-    `select ${columns('(b.id = $2) is true desc, ', NAMED)},
+    `select ${columns('(b.id = $2::integer) is true desc, ', NAMED)},
        (select count(*)::integer from interests i where i.party_id = p.id) as "interestCount"
-     from parties p where ${LISTED}
-     order by p.name collate natural_order, p.id offset $4 limit $5`,
-    { type: QueryTypes.SELECT, bind: [...which, offset, limit] },
+     from unnest($1::uuid[]) with ordinality as page(id, place) join parties p on p.id = page.id
+     order by page.place`,
+    { type: QueryTypes.SELECT, bind: [ids, which.building ?? null] },
   );
-  return { found: counted?.found ?? 0, parties };
+  return { found, parties };
 }
 
 /** Parties of a scheme by id with all of their interests, also merged and erased ones. */

@@ -23,7 +23,7 @@ export type FoundPartyImport = {
 
 const MOST = 50;
 
-/** The imports of parties of a scheme, the newest first; or one of them. */
+/** The imports of parties of a scheme, the newest first; or one of them, with the columns of its file. */
 export function findPartyImports(
   database: Sequelize,
   schemeId: string,
@@ -32,7 +32,8 @@ export function findPartyImports(
 ): Promise<FoundPartyImport[]> {
   return database.query<FoundPartyImport>(
     `select i.id, i.file_name as "fileName", i.state, i.columns, i.counts, p.name as by,
-       coalesce(nullif(i.rows->'table', 'null')->'columns', '[]') as "fileColumns",
+       case when $2::uuid is null then '[]'
+         else coalesce(nullif(i.rows->'table', 'null')->'columns', '[]') end as "fileColumns",
        i.sent_at as "sentAt", i.ended_at as "endedAt"
      from party_imports i join people p on p.id = i.sent_by
      where i.scheme_id = $1 and ($2::uuid is null or i.id = $2)

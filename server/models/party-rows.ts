@@ -1,5 +1,6 @@
 import { QueryTypes, type Sequelize } from 'sequelize';
-import { findParties, type WhichParties } from './parties.ts';
+import { inBatches } from '../register/in-batches.ts';
+import { findPartyIds, type WhichParties } from './parties.ts';
 
 /** An interest with its party, as a table has it; a party without interests has a line too. */
 export type PartyRow = Readonly<
@@ -18,10 +19,8 @@ export async function* findPartyRows(
   schemeId: string,
   which: WhichParties,
 ): AsyncGenerator<PartyRow> {
-  for (let offset = 0; ; offset += AT_ONCE) {
-    const page = { ...which, offset, limit: AT_ONCE };
-    const { parties } = await findParties(database, schemeId, page);
-    if (parties.length === 0) return;
+  const { ids } = await findPartyIds(database, schemeId, { ...which, offset: 0, limit: null });
+  for await (const some of inBatches(ids, AT_ONCE)) {
     yield* await database.query<PartyRow>(
       `select b.reference, b.address as "buildingAddress", i.kind as interest, p.name, p.kind, p.address,
          p.email, p.channel, r.name as "representedBy", i.from_day::text as "from", i.to_day::text as "to"
@@ -29,7 +28,7 @@ export async function* findPartyRows(
        join parties p on p.id = wanted.id left join parties r on r.id = p.represented_by
        left join interests i on i.party_id = p.id left join buildings b on b.id = i.building_id
        order by wanted.place, b.reference collate natural_order, i.from_day, i.id`,
-      { type: QueryTypes.SELECT, bind: [parties.map(({ id }) => id)] },
+      { type: QueryTypes.SELECT, bind: [some] },
     );
   }
 }

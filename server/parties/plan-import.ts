@@ -1,4 +1,5 @@
 import { randomUUID } from 'node:crypto';
+import { setImmediate } from 'node:timers/promises';
 import type {
   PartyColumns,
   PartyImportCounts,
@@ -109,6 +110,9 @@ function planner(known: KnownBefore) {
   return { partyOf, hold, represent, fresh, interests, completed };
 }
 
+/** Others are served between so many rows. */
+const AT_ONCE = 1000;
+
 type Judged = {
   readonly read: ReadRow;
   readonly line: PartyImportRow;
@@ -158,16 +162,20 @@ function countsOf(
 }
 
 /** What a table comes to with the register and the parties of now. Nothing is written here. */
-export function planImport(
+export async function planImport(
   table: StagedTable,
   columns: PartyColumns,
   known: KnownBefore,
-): PartyPlan {
+): Promise<PartyPlan> {
   const [read, find] = [rowReader(table, columns), buildingFinder(known.buildings)];
   const plan = planner(known);
-  // lines of the form that nobody filled in are passed over
-  const named = table.rows.map(read).filter(({ isFilled }) => isFilled);
-  const judged = named.map((row) => judge(row, find, plan));
+  const judged: Judged[] = [];
+  for (const [index, staged] of table.rows.entries()) {
+    if (index % AT_ONCE === 0) await setImmediate();
+    const row = read(staged);
+    // lines of the form that nobody filled in are passed over
+    if (row.isFilled) judged.push(judge(row, find, plan));
+  }
   // whoever represents others may stand further down
   const lines = judged.map(({ read: { representedBy }, line, party }) => {
     if (party === undefined || representedBy === '') return line;

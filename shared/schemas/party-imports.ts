@@ -177,7 +177,8 @@ export const partyImportRowsSchema = z.strictObject({
 /**
  * An import of parties. Nothing is written to the list of parties before it is taken over.
  *
- * Units: pieces. Valid: the columns of the file are named while it is checked only. Source: [own].
+ * Units: pieces. Valid: the columns of the file are named while it is checked only, and not in lists.
+ * Source: [own].
  */
 export const partyImportSchema = z.strictObject({
   id: z.uuid(),

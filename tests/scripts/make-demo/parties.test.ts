@@ -5,7 +5,7 @@ import { makeTown } from '../../../scripts/make-demo/town.ts';
 import { planImport } from '../../../server/parties/plan-import.ts';
 import { guessPartyColumns } from '../../../server/parties/read-table.ts';
 
-it('writes parties for the houses nearest to the line; all but three rows can be taken over', () => {
+it('writes parties for the houses nearest to the line; all but three rows can be taken over', async () => {
   const features = buildingFeatures(makeTown(2000, 7), 7);
   const text = partiesText(features, 7);
   const [columns = [], ...lines] = text.trimEnd().split('\n').map((line) => line.split(',')); // prettier-ignore
@@ -14,7 +14,7 @@ it('writes parties for the houses nearest to the line; all but three rows can be
   const buildings = features.map(({ properties: { reference, address } }, index) => {
     return { id: index + 1, reference: String(reference), address: String(address) };
   });
-  const plan = planImport(table, guessPartyColumns(table), { buildings, parties: [] });
+  const plan = await planImport(table, guessPartyColumns(table), { buildings, parties: [] });
   expect(plan.counts).toMatchObject({ problem: 3, noted: 0, 'there already': 0 });
   const problems = plan.lines.filter(({ outcome }) => outcome === 'problem');
   expect(problems.map(({ remarks }) => remarks.length)).toEqual([1, 1, 1]);

@@ -38,7 +38,7 @@ function valuesAt(category: Category): LetterValues {
     sure: certaintyWords(facts).join(' '),
     'answer by': 'Friday 11 December',
     contact: 'the owners’ line',
-    decision: ownerDecisionWords(DECISION_KINDS[category] ?? null),
+    decision: ownerDecisionWords(DECISION_KINDS[category]),
     buildings: ['9 Fishgate'],
     measures: ['We prop the wall.'],
     dates: ['November 2027: The first tunnel passes.'],
@@ -61,9 +61,8 @@ test.each(LETTER_KINDS)(
       const text = letterText(body, valuesAt(category)).map(asWords).join(' ');
       return readingEase(text);
     });
-    console.log(
-      `reading ease of the letter "${kind}": ${eases.map((ease) => ease.toFixed(0)).join(', ')}`,
-    );
+    const found = eases.map((ease) => ease.toFixed(0)).join(', ');
+    process.stdout.write(`Flesch ${found}: the letter “${kind}”\n`);
     for (const ease of eases) expect(ease).toBeGreaterThanOrEqual(PLAIN);
   },
 );
@@ -88,11 +87,8 @@ test('what a value holds is never taken for a mark', () => {
 test('empty lines part paragraphs, dashes make lists, and what is empty leaves nothing', () => {
   const values = { ...valuesAt(1), measures: [], looks: '' };
   const body = 'One\nline.\n\n\n- a\n- b {place}\n\n{measures}\n\n{looks}\n\n{link}';
-  expect(letterText(body, values)).toEqual([
-    'One line.',
-    { list: ['a', 'b your home'] },
-    { link: 'Open your page' },
-  ]);
+  const link: Exclude<LetterTextPart, string> = { link: 'Open your page' };
+  expect(letterText(body, values)).toEqual(['One line.', { list: ['a', 'b your home'] }, link]);
 });
 
 test('marks that are not known, stand where they may not or are not closed are told by line', () => {
