@@ -76,6 +76,14 @@ function decisionWords(buildings: readonly ToldBuilding[]): string {
     .join(' ');
 }
 
+/** Until dates are known, what is known all the same. */
+const NO_DATES = ['We write to you again before each step, in good time.'];
+
+function datesOf({ milestones }: LetterSettings): readonly string[] {
+  if (milestones.length === 0) return NO_DATES;
+  return milestones.map(({ when, title, words }) => `${when}: ${title}. ${words}`.trim());
+}
+
 /** What every mark of a template says in a letter. */
 export function valuesOfLetter({
   name,
@@ -95,9 +103,7 @@ export function valuesOfLetter({
     decision: decisionWords(buildings),
     buildings: buildings.map(({ building }) => where(building)),
     measures: measures.length > 0 ? measures : ['Nothing has to be done to protect it.'],
-    dates: settings.milestones.map(({ when, title, words }) =>
-      `${when}: ${title}. ${words}`.trim(),
-    ),
+    dates: datesOf(settings),
     cautions: OWNER_CAUTIONS,
     link: 'Open your page',
   };

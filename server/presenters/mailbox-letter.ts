@@ -14,5 +14,7 @@ export function presentMailboxEntry(letter: MailboxLetter): MailboxEntryAnswer {
 
 /** A letter with what it says. */
 export function presentMailboxLetter(letter: MailboxLetter): MailboxLetterAnswer {
-  return { ...presentMailboxEntry(letter), text: letter.text, html: letter.html };
+  const { text, html, attachments } = letter;
+  const names = attachments.map(({ name }) => name);
+  return { ...presentMailboxEntry(letter), text, html, attachments: names };
 }

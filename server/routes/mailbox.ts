@@ -20,7 +20,12 @@ export const mailboxRoutes = [
     access: 'administrator',
     handle: async ({ services }) => {
       requireDemo(services);
-      const letters = await MailboxLetter.findAll({ order: [['id', 'desc']], limit: MOST });
+      const letters = await MailboxLetter.findAll({
+        // what came with them is large
+        attributes: { exclude: ['attachments', 'text', 'html'] },
+        order: [['id', 'desc']],
+        limit: MOST,
+      });
       return letters.map(presentMailboxEntry);
     },
   }),

@@ -16,6 +16,7 @@ import {
   DEMO_PEOPLE,
   type DemoPerson,
 } from './demo-people.ts';
+import { writeLetterSettings } from './demo-letter-settings.ts';
 import { giveOwnerAHouse } from './owner-of-house.ts';
 import { readTown } from './read-town.ts';
 
@@ -90,6 +91,7 @@ async function fill(townFolder: string, transaction: Transaction): Promise<void>
   const cause = { kind: 'import', by: null, source: 'The demo town' } as const;
   const created = readTown(townFolder);
   await changeRegister(scheme.sequelize, scheme, cause, { created }, transaction);
+  await writeLetterSettings(scheme, administrator, transaction);
   for (const owner of owners) await giveOwnerAHouse(scheme, owner, created, transaction);
   for (const option of DEMO_ALIGNMENTS) {
     await insertAlignment(scheme, null, option, 'create alignment', transaction);

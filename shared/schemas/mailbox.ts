@@ -18,12 +18,13 @@ export const mailboxEntrySchema = z.strictObject(envelope);
 /**
  * A letter of the demo's mailbox. Its html comes from outside: show it in a frame without scripts.
  *
- * Units: none. Valid: in the demo only; html null where the letter had none. Source: [own].
+ * Units: none. Valid: in the demo only; html null where the letter had none; attachments by name. Source: [own].
  */
 export const mailboxLetterSchema = z.strictObject({
   ...envelope,
   text: z.string(),
   html: z.string().nullable(),
+  attachments: z.array(z.string()),
 });
 
 /**

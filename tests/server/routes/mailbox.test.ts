@@ -45,6 +45,7 @@ describe('in the demo', () => {
       subject: 'Letter <2>',
       text: 'Words with a token',
       html: '<p>Words with a token</p>',
+      attachments: [],
     });
   });
 

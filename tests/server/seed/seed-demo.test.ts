@@ -98,7 +98,7 @@ describe('seedDemo', () => {
     expect(new Set(actions)).toEqual(
       new Set([
         ...['create person', 'create scheme', 'change roles', 'change register'],
-        ...['create alignment', 'add party'],
+        ...['create alignment', 'add party', 'change letter settings'],
       ]),
     );
   });

@@ -40,6 +40,9 @@ export function Letter({ letterId }: { readonly letterId: string }) {
             ['To', letter.to],
             ['From', letter.from],
             ['Sent', formatMoment(letter.receivedAt)],
+            ...(letter.attachments.length === 0
+              ? []
+              : [['With it', letter.attachments.join(', ')] as const]),
           ]}
         />
       </div>

@@ -67,12 +67,13 @@ describe('the mailbox', () => {
     const html = '<p>Choose a password</p>';
     fakeApi({
       'GET /api/mailbox': [ENVELOPE],
-      'GET /api/mailbox/7': { ...ENVELOPE, text, html },
+      'GET /api/mailbox/7': { ...ENVELOPE, text, html, attachments: ['letter.pdf'] },
     });
     openMailbox('/mailbox');
     fireEvent.click(await screen.findByText(ENVELOPE.subject));
     const words = await screen.findByRole('region', { name: 'The letter as text' });
     expect(words.textContent).toBe(text);
+    expect(screen.getByText('letter.pdf')).toBeTruthy();
     expect(words.querySelector('a')?.getAttribute('href')).toBe('https://example.org/links/token');
     expect(await axeFaults()).toEqual([]);
     fireEvent.click(screen.getByRole('button', { name: 'As it looks' }));
@@ -84,7 +85,7 @@ describe('the mailbox', () => {
   it('shows a letter without html as text alone', async () => {
     fakeApi({
       'GET /api/mailbox': [ENVELOPE],
-      'GET /api/mailbox/7': { ...ENVELOPE, text: 'Bye', html: null },
+      'GET /api/mailbox/7': { ...ENVELOPE, text: 'Bye', html: null, attachments: [] },
     });
     openMailbox('/mailbox/7');
     expect(await screen.findByText('Bye')).toBeTruthy();

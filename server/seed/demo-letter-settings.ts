@@ -1,0 +1,45 @@
+import type { Transaction } from 'sequelize';
+import { defaultLetterSettings } from '../../shared/schemas/letter-settings.ts';
+import { recordChange } from '../commands/record-change.ts';
+import { insertSettings } from '../models/letter-settings.ts';
+import type { Person } from '../models/person.ts';
+import type { Scheme } from '../models/scheme.ts';
+
+const MILESTONES = [
+  {
+    when: 'Spring 2027',
+    title: 'A surveyor visits you',
+    words: 'About an hour. They take a picture of every room, and you get a copy.',
+  },
+  {
+    when: 'November 2027',
+    title: 'The first tunnel passes',
+    words: 'We measure the street twice a day.',
+  },
+  { when: 'December 2027', title: 'The second tunnel passes', words: 'We measure as before.' },
+  {
+    when: 'Spring 2028',
+    title: 'We visit again',
+    words: 'Any crack that is new is put right. You have two years to tell us.',
+  },
+];
+
+/** What the letters of the demo go by: what every scheme starts with, whom to ask, and what happens when. */
+export async function writeLetterSettings(
+  scheme: Scheme,
+  by: Person,
+  transaction: Transaction,
+): Promise<void> {
+  const settings = defaultLetterSettings(scheme.createdAt.toISOString().slice(0, 10));
+  const contact = {
+    ...settings.contact,
+    hours: 'Monday to Friday, 9:00 to 17:00',
+    address: ['Harbour Crossing Office', '1 Custom House Quay', 'Port Dogger'],
+  };
+  const row = { schemeId: scheme.id, version: 1, by: by.id };
+  const written = { ...settings, contact, milestones: MILESTONES };
+  await insertSettings(scheme.sequelize, row, written, transaction);
+  const subject = { kind: 'letter settings', id: '1' };
+  const change = { by: null, schemeId: scheme.id, action: 'change letter settings', subject };
+  await recordChange({ ...change, after: { settings: written } }, transaction);
+}
