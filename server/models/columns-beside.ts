@@ -80,6 +80,12 @@ export function buildingsBeside({ run, option }: Beside): string {
     left join people p on p.id = g.person_id) as buildings`;
 }
 
+/** What a run found, in the units of the register, by the buildings' numbers alone; its number in SQL. */
+export function foundAlone(run: string): string {
+  return `(select r.building_id as id, ${RESULTS.join(', ')} from run_results r
+    where r.run_id = ${run}::uuid) as found`;
+}
+
 /** The columns beside buildings as a list, each called by its name in what is read. */
 export const BESIDE_SELECTION = [
   ...RESULT_COLUMN_NAMES.map((column) => `${nameOf(column)} as "${column}"`),

@@ -9,7 +9,7 @@ import {
 import { isResultColumn } from '../../shared/schemas/result-columns.ts';
 import { AppError } from '../errors.ts';
 import { NUMBER_COLUMNS, registerColumn, registerField } from './register-columns.ts';
-import { buildingsBeside } from './columns-beside.ts';
+import { buildingsBeside, foundAlone } from './columns-beside.ts';
 
 /** Buildings that are meant, in SQL: where they stand, a condition, and the values that it is asked with. */
 export type Condition = {
@@ -115,6 +115,11 @@ function placeSql({ within, inside, ids, except, importId }: RegisterFilter, bin
       join register_changes r on r.id = c.change_id where r.import_id = ${bind(importId)}::uuid)`);
   }
   return conditions;
+}
+
+/** What a run found, of all its buildings: also of those that are no longer in the register. */
+export function resultsAlone(runId: string | null): Condition {
+  return { from: foundAlone('$1'), where: 'true', bind: [runId] };
 }
 
 /** Whether a filter, or a column beside it, hangs on what a run found. */

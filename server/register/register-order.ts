@@ -3,12 +3,23 @@ import {
   type RegisterFilter,
   type RegisterSort,
 } from '../../shared/schemas/register.ts';
+import { isResultColumn } from '../../shared/schemas/result-columns.ts';
 import { isStandingColumn } from '../../shared/schemas/standing-columns.ts';
-import { findReferenceOrder, findRegisterGroups } from '../models/find-register-order.ts';
+import {
+  findReferenceOrder,
+  findRegisterGroups,
+  findRegisterIds,
+} from '../models/find-register-order.ts';
 import { findRunIds } from '../models/find-standing-groups.ts';
 import { countRows } from '../models/find-register-rows.ts';
-import { asksResults, registerCondition } from '../models/register-condition.ts';
+import {
+  asksResults,
+  registerCondition,
+  resultsAlone,
+  type Condition,
+} from '../models/register-condition.ts';
 import type { Services } from '../services.ts';
+import { ofRegister, oneGroup } from './of-register.ts';
 import { orderGroups } from './order-groups.ts';
 import { meantIds } from './meant-ids.ts';
 import { packIds, packedIds, unpackIds, type PackedIds } from './packed-ids.ts';
@@ -16,6 +27,9 @@ import type { Register } from './register-of.ts';
 import { inOrderOfStanding, splitFilter, standingAs, type Reading } from './standings.ts';
 
 type Which = { readonly filter: RegisterFilter; readonly sort: RegisterSort };
+
+/** The whole register as it is read first. */
+const WHOLE: Which = { filter: {}, sort: REGISTER_ORDER };
 
 /** What buildings and their order hang on besides the register: what a run found, and where they stand. */
 export function askedBeside({ filter, sort: { column } }: Which): {
@@ -55,7 +69,25 @@ function readingOf({ database, tiles }: Kept): Reading {
   };
 }
 
-/** By one column, then by reference: the order by reference is that of the whole register, kept for all. */
+/** Some buildings by reference, put in order by that of the whole register. */
+async function byReference(
+  services: Kept,
+  register: Register,
+  condition: Condition,
+  descending: boolean,
+): Promise<Buffer> {
+  const [ids, references] = await Promise.all([
+    findRegisterIds(services.database, condition, null),
+    packedOrder(services, register, WHOLE),
+  ]);
+  const ordered = orderGroups(oneGroup(ids), references, false);
+  return descending ? packIds(unpackIds(ordered).reverse()) : ordered;
+}
+
+/**
+ * By one column, then by reference: the order by reference is that of the whole register, kept for all. What
+ * a run found of all buildings is put in order without looking at these.
+ */
 async function makeOrder(
   services: Kept,
   register: Register,
@@ -63,13 +95,20 @@ async function makeOrder(
 ): Promise<Buffer> {
   const { database } = services;
   const { column, descending } = sort;
+  const isWhole = Object.keys(filter).length === 0;
   const condition = registerCondition(register, filter, column);
-  if (column === 'reference') return findReferenceOrder(database, condition, descending);
+  if (column === 'reference') {
+    return isWhole
+      ? findReferenceOrder(database, condition, descending)
+      : byReference(services, register, condition, descending);
+  }
+  const isOfRun = isWhole && isResultColumn(column);
+  const asked = isOfRun ? resultsAlone(register.runId) : condition;
   const [groups, references] = await Promise.all([
-    findRegisterGroups(database, condition, column),
-    packedOrder(services, register, { filter: {}, sort: REGISTER_ORDER }),
+    findRegisterGroups(database, asked, column),
+    packedOrder(services, register, WHOLE),
   ]);
-  return orderGroups(groups, references, descending);
+  return orderGroups(isOfRun ? ofRegister(groups, references) : groups, references, descending);
 }
 
 function packedOrder(services: Kept, register: Register, which: Which): Promise<Buffer> {
