@@ -14,7 +14,7 @@ import { aBatch, aSentBatch, aTownOfOwners } from '../../support/letters.ts';
 import { signIn, visitor } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
 import { tokenOf } from '../../support/token-of.ts';
-import { aParty } from '../../support/parties.ts';
+import { aParty, partyValues } from '../../support/parties.ts';
 
 const tested = testApp();
 const { app, services, letters } = tested;
@@ -231,6 +231,20 @@ describe('a letter', () => {
     expect(letter.parts).toContainEqual({ link: 'Open your page' });
     const pdf = await town.firstAgent.get(`${town.address}/letters/${first?.id ?? ''}/pdf`);
     expect(pdf.headers['content-type']).toBe('application/pdf');
+  });
+
+  test('says a hostile name as it is written, in a mail of one recipient', async () => {
+    const name = `<img src=x> {cautions} =cmd() ${'مالك 🏠 '.repeat(20)}`.trim();
+    const town = await aTownOfOwners(tested, { name, email: 'hostile@example.org' });
+    await aSentBatch(tested, town);
+    const mail = letters.find(({ to }) => to === 'hostile@example.org');
+    expect(mail?.text).toContain(`Dear ${name},`);
+    expect(mail?.html).toContain('Dear &lt;img src=x&gt; {cautions} =cmd() مالك 🏠');
+    expect(mail?.html).not.toContain('<img');
+    expect(mail?.subject).toBe('A new tunnel near your building');
+    const broken = { ...partyValues({ name: 'Ada\r\nBcc: eve@example.org' }) };
+    const refused = await town.firstAgent.post(`${town.address}/parties`).send(broken);
+    expect(refused.status).toBe(422);
   });
 
   test('is found by its building and its party, and by a stranger not at all', async () => {
