@@ -4,6 +4,7 @@ import {
   checkBatchSchema,
   newBatchSchema,
 } from '../../shared/schemas/letter-batches.ts';
+import type { LetterSettings } from '../../shared/schemas/letter-settings.ts';
 import {
   acknowledgementSchema,
   lettersQuerySchema,
@@ -33,6 +34,12 @@ import { defineRoute } from './define-route.ts';
 
 const BATCHES = '/api/schemes/:schemeId/letter-batches';
 const LETTERS = '/api/schemes/:schemeId/letters';
+
+/** After how many days without an answer a letter is late in which way. */
+const DAYS_WITHOUT = {
+  answer: ({ answerWithin }: LetterSettings) => answerWithin,
+  call: ({ escalateAfter }: LetterSettings) => escalateAfter,
+};
 
 export const letterRoutes = [
   defineRoute({
@@ -121,10 +128,11 @@ export const letterRoutes = [
     path: `${BATCHES}/:batchId/print-file`,
     access: { scheme: 'readLetters' },
     params: batchParamsSchema,
-    handle: async ({ services, scheme, params: { batchId }, res }) => {
+    handle: async ({ services, actor, scheme, params: { batchId }, res }) => {
       const { number } = await readBatch(services.database, scheme.id, batchId);
       const which = { batchId, byPost: true };
-      const letters = await findLetters(services.database, scheme.id, which);
+      const found = await findLetters(services.database, scheme.id, which);
+      const letters = found.filter((letter) => presentLetter(letter, actor) !== null);
       if (letters.length === 0) throw new AppError('not-found', 'No letter of these goes by post.');
       const bytes = await lettersPdf(services, scheme.id, letters, true);
       res.attachment(`letters-${number}-for-the-post.pdf`).type('application/pdf').end(bytes);
@@ -150,7 +158,7 @@ export const letterRoutes = [
       const letters = await findLetters(database, scheme.id, {
         buildingId: query.building,
         partyId: query.party,
-        unansweredFor: query.overdue === true ? settings.answerWithin : undefined,
+        unansweredFor: query.overdue && DAYS_WITHOUT[query.overdue](settings),
       });
       return letters.map((letter) => presentListedLetter(letter, actor));
     },

@@ -111,6 +111,14 @@ export const writtenLetterParamsSchema = z.object({
 });
 
 /**
+ * How long letters have not been answered: past the day that was asked for, or so long that somebody has to
+ * call or go.
+ *
+ * Units: none. Valid: closed list. Source: [own].
+ */
+const OVERDUE = ['answer', 'call'] as const;
+
+/**
  * Which letters are asked for: of a building, of a party, or those that have not been answered in time.
  *
  * Units: none. Valid: one of them or none. Source: [own].
@@ -118,7 +126,7 @@ export const writtenLetterParamsSchema = z.object({
 export const lettersQuerySchema = z.object({
   building: z.coerce.number().int().min(1).max(2_147_483_647).optional(),
   party: z.uuid().optional(),
-  overdue: z.stringbool().optional(),
+  overdue: z.enum(OVERDUE).optional(),
 });
 
 /**

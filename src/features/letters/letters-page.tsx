@@ -76,15 +76,24 @@ function Batches() {
 
 /** Who should have answered by now. */
 function Late() {
-  const { data } = useQuery(lateLettersQuery(useScheme().id));
-  if (data === undefined || data.length === 0) return null;
+  const { id } = useScheme();
+  const { data: late = [] } = useQuery(lateLettersQuery(id, 'answer'));
+  const { data: toCall = [] } = useQuery(lateLettersQuery(id, 'call'));
+  const escalated = new Set(toCall.map((letter) => letter.id));
+  const waiting = late.filter((letter) => !escalated.has(letter.id));
   return (
-    <Panel
-      title="Without an answer"
-      note="past their day; by e-mail they are reminded once, then somebody has to call or go"
-    >
-      <LettersTable label="Letters without an answer" letters={data} />
-    </Panel>
+    <>
+      {toCall.length > 0 && (
+        <Panel title="Call or go" note="no answer for so long that a letter will not do">
+          <LettersTable label="Letters to call about" letters={toCall} />
+        </Panel>
+      )}
+      {waiting.length > 0 && (
+        <Panel title="Without an answer" note="past their day; by e-mail they are reminded once">
+          <LettersTable label="Letters without an answer" letters={waiting} />
+        </Panel>
+      )}
+    </>
   );
 }
 

@@ -257,7 +257,7 @@ describe('a letter', () => {
     const found = await of(`building=${town.house('T1-2')}`);
     expect(found).toMatchObject([{ name: 'Ada of the second house', kind: 'first information' }]);
     expect(await of(`party=${town.byPost.id}`)).toMatchObject([{ channel: 'post' }]);
-    expect(await of('overdue=true')).toEqual([]);
+    expect(await of('overdue=answer')).toEqual([]);
     const stranger = await signIn(app(), await aPerson());
     const at = `${town.address}/letters/${found[0]?.id ?? ''}`;
     expect((await stranger.get(at)).status).toBe(404);
@@ -277,7 +277,9 @@ describe('a letter', () => {
     const [reminder] = of('late@example.org').slice(before);
     expect(reminder?.subject).toBe('A reminder: A new tunnel near your building');
     expect(await remindLate(services())).toBe(0);
-    const overdue = await town.firstAgent.get(`${town.address}/letters?overdue=true`);
+    const overdue = await town.firstAgent.get(`${town.address}/letters?overdue=answer`);
+    const escalated = await town.firstAgent.get(`${town.address}/letters?overdue=call`);
+    expect(listedLettersSchema.parse(escalated.body)).toEqual([]);
     const found = listedLettersSchema.parse(overdue.body);
     expect(found.map(({ name }) => name)).toEqual([town.byMail.name, town.byPost.name]);
     expect(found[0]?.remindedAt).not.toBeNull();

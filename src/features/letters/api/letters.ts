@@ -4,13 +4,13 @@ import { apiGet, apiSend, noAnswer } from '../../../lib/api-client.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 import { lettersKey } from './letters-key.ts';
 
-/** Letters that nobody has answered in the days they had. */
-export function lateLettersQuery(schemeId: string) {
+/** Letters that nobody has answered in the days they had, or for so long that somebody has to call or go. */
+export function lateLettersQuery(schemeId: string, overdue: 'answer' | 'call') {
   return queryOptions({
-    queryKey: [...lettersKey(schemeId), 'late'],
+    queryKey: [...lettersKey(schemeId), 'late', overdue],
     queryFn: ({ signal }) =>
       apiGet(
-        `${apiPath`/api/schemes/${schemeId}/letters`}?overdue=true`,
+        `${apiPath`/api/schemes/${schemeId}/letters`}?overdue=${overdue}`,
         listedLettersSchema,
         signal,
       ),
