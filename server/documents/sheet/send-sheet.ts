@@ -34,8 +34,9 @@ async function neighboursOf(
 async function materialOf(call: SheetCall, place: Place): Promise<SheetMaterial> {
   const { services, scheme } = call;
   const { runId, buildingId } = place;
-  const [found, run, building, contours] = await Promise.all([
-    findRun(services.database, scheme.id, runId),
+  // whether it is there, before anything else of it is asked for
+  const found = await findRun(services.database, scheme.id, runId);
+  const [run, building, contours] = await Promise.all([
     Run.findByPk(runId, { rejectOnEmpty: true }),
     runBuildingAlone(services, scheme.id, place),
     findContours(services.database, runId),
