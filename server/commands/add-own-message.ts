@@ -1,4 +1,4 @@
-import { UniqueConstraintError, type Transaction } from 'sequelize';
+import type { Transaction } from 'sequelize';
 import type { OwnMessage } from '../../shared/schemas/matters.ts';
 import { matterReceivedMail } from '../mail/letters/matter-mails.ts';
 import { findOwn } from '../models/find-own.ts';
@@ -11,7 +11,7 @@ import type { Services } from '../services.ts';
 import { answerBy } from './answer-by.ts';
 import { readMatter, recordMatter, standingOf } from './kept-matter.ts';
 import { lockScheme } from './lock-scheme.ts';
-import { isSameMessage, otherMessage } from './same-message.ts';
+import { isSameMessage, numberedByOthers, otherMessage } from './same-message.ts';
 
 type Sent = OwnMessage & { readonly matterId: string };
 
@@ -48,23 +48,18 @@ export async function addOwnMessage(
   message: Sent,
 ): Promise<{ matter: FoundMatter; isNew: boolean }> {
   const { database } = services;
-  try {
-    return await database.transaction(async (transaction) => {
-      await lockScheme(scheme, transaction);
-      const { parties } = await findOwn(database, scheme.id, by.id, transaction);
-      const which = { id: message.matterId, parties };
-      const matter = await readMatter(database, scheme.id, which, transaction);
-      const kept = matter.messages.find(({ id }) => id === message.id);
-      if (kept !== undefined) {
-        if (kept.side !== 'owner' || !isSameMessage(kept, message)) throw otherMessage();
-        return { matter, isNew: false };
-      }
-      await write(services, by, scheme, { matter, message }, transaction);
-      const written = await readMatter(database, scheme.id, which, transaction);
-      return { matter: written, isNew: true };
-    });
-  } catch (error) {
-    if (error instanceof UniqueConstraintError) throw otherMessage();
-    throw error;
-  }
+  return numberedByOthers(database, async (transaction) => {
+    await lockScheme(scheme, transaction);
+    const { parties } = await findOwn(database, scheme.id, by.id, transaction);
+    const which = { id: message.matterId, parties };
+    const matter = await readMatter(database, scheme.id, which, transaction);
+    const kept = matter.messages.find(({ id }) => id === message.id);
+    if (kept !== undefined) {
+      if (kept.side !== 'owner' || !isSameMessage(kept, message)) throw otherMessage();
+      return { matter, isNew: false };
+    }
+    await write(services, by, scheme, { matter, message }, transaction);
+    const written = await readMatter(database, scheme.id, which, transaction);
+    return { matter: written, isNew: true };
+  });
 }

@@ -8,11 +8,12 @@ import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import { readAppointment, requireCurrent, tellOfAppointment } from './kept-appointment.ts';
 import { lockScheme } from './lock-scheme.ts';
+import { dayOf } from '../days.ts';
 
 /** The days that are asked for; refused where one is not to come. */
 function askedForBy(answer: AnswerAppointment): AskedFor | null {
   if (answer.answer === 'agree') return null;
-  const today = new Date().toISOString().slice(0, 10);
+  const today = dayOf(new Date());
   if (answer.days.some(({ day }) => day <= today)) {
     const message = 'Choose days that are still to come.';
     throw new AppError('invalid-input', undefined, [{ path: 'days', message }]);

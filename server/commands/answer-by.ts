@@ -1,17 +1,13 @@
 import { ANSWER_DAYS, type MatterKind } from '../../shared/schemas/matters.ts';
+import { daysAfter, dayOf } from '../days.ts';
 
-const ONE_DAY = 86_400_000;
 const [SUNDAY, SATURDAY] = [0, 6];
-
-function dayOf(moment: Date): string {
-  return moment.toISOString().slice(0, 10);
-}
 
 /** The day so many working days after another; public holidays count as working days. */
 export function workingDaysAfter(day: string, count: number): string {
   let moment = new Date(`${day}T00:00:00Z`);
   for (let left = count; left > 0;) {
-    moment = new Date(moment.getTime() + ONE_DAY);
+    moment = daysAfter(moment, 1);
     const weekday = moment.getUTCDay();
     if (weekday !== SUNDAY && weekday !== SATURDAY) left -= 1;
   }

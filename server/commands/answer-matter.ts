@@ -1,4 +1,4 @@
-import { UniqueConstraintError, type Transaction } from 'sequelize';
+import type { Transaction } from 'sequelize';
 import type { TeamMessage } from '../../shared/schemas/matters.ts';
 import { AppError } from '../errors.ts';
 import { matterAnsweredMail } from '../mail/letters/matter-mails.ts';
@@ -9,7 +9,7 @@ import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import { readerOf, readMatter, recordMatter, standingOf } from './kept-matter.ts';
 import { lockScheme } from './lock-scheme.ts';
-import { isSameMessage, otherMessage } from './same-message.ts';
+import { isSameMessage, numberedByOthers, otherMessage } from './same-message.ts';
 
 type Answer = Pick<TeamMessage, 'id' | 'text'>;
 
@@ -65,21 +65,16 @@ export async function answerMatter(
 ): Promise<{ matter: FoundMatter; isNew: boolean }> {
   const { database } = services;
   const which = { id: message.matterId };
-  try {
-    return await database.transaction(async (transaction) => {
-      await lockScheme(scheme, transaction);
-      const matter = await readMatter(database, scheme.id, which, transaction);
-      const kept = matter.messages.find(({ id }) => id === message.id);
-      if (kept !== undefined) {
-        if (kept.side !== message.side || !isSameMessage(kept, message)) throw otherMessage();
-        return { matter, isNew: false };
-      }
-      await write(services, by, scheme, { matter, message }, transaction);
-      const written = await readMatter(database, scheme.id, which, transaction);
-      return { matter: written, isNew: true };
-    });
-  } catch (error) {
-    if (error instanceof UniqueConstraintError) throw otherMessage();
-    throw error;
-  }
+  return numberedByOthers(database, async (transaction) => {
+    await lockScheme(scheme, transaction);
+    const matter = await readMatter(database, scheme.id, which, transaction);
+    const kept = matter.messages.find(({ id }) => id === message.id);
+    if (kept !== undefined) {
+      if (kept.side !== message.side || !isSameMessage(kept, message)) throw otherMessage();
+      return { matter, isNew: false };
+    }
+    await write(services, by, scheme, { matter, message }, transaction);
+    const written = await readMatter(database, scheme.id, which, transaction);
+    return { matter: written, isNew: true };
+  });
 }

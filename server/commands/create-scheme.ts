@@ -9,6 +9,7 @@ import type { Services } from '../services.ts';
 import { defaultRules } from './default-rules.ts';
 import { recordChange } from './record-change.ts';
 import { withOwnName } from './with-own-name.ts';
+import { dayOf } from '../days.ts';
 
 /** Creates a scheme on a projected system in metres, with the default rules as their version 1. */
 export async function createScheme(
@@ -24,7 +25,7 @@ export async function createScheme(
     const scheme = await withOwnName(() =>
       Scheme.create({ name, description, crs }, { transaction }),
     );
-    const rules = defaultRules(scheme.createdAt.toISOString().slice(0, 10));
+    const rules = defaultRules(dayOf(scheme.createdAt));
     await SchemeRules.create(
       { schemeId: scheme.id, version: 1, rules, createdBy: actor.id },
       { transaction },

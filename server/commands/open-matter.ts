@@ -1,4 +1,4 @@
-import { UniqueConstraintError, type Sequelize, type Transaction } from 'sequelize';
+import type { Sequelize, Transaction } from 'sequelize';
 import type { KeptSuggestion } from '../../shared/schemas/matter-answers.ts';
 import { MATTER_LIMITS, type NewMatter } from '../../shared/schemas/matters.ts';
 import { AppError } from '../errors.ts';
@@ -14,7 +14,7 @@ import type { Services } from '../services.ts';
 import { answerBy } from './answer-by.ts';
 import { readMatter, recordMatter } from './kept-matter.ts';
 import { lockScheme } from './lock-scheme.ts';
-import { isSameMessage, otherMessage } from './same-message.ts';
+import { isSameMessage, numberedByOthers, otherMessage } from './same-message.ts';
 
 /** The matter where it is there already; another one under its number is refused. */
 async function findSame(
@@ -77,24 +77,19 @@ export async function openMatter(
   matter: NewMatter,
 ): Promise<{ matter: FoundMatter; isNew: boolean }> {
   const { database } = services;
-  try {
-    return await database.transaction(async (transaction) => {
-      await lockScheme(scheme, transaction);
-      const own = await findOwn(database, scheme.id, by.id, transaction);
-      const same = await findSame(database, scheme, own, matter, transaction);
-      if (same !== undefined) return { matter: same, isNew: false };
-      const place = own.buildings.find(({ id }) => id === matter.buildingId);
-      if (place === undefined) throw new AppError('not-found');
-      if ((await countOpenOf(database, by.id, transaction)) >= MATTER_LIMITS.openOfOneOwner) {
-        const message = 'So much is open already. Wait for answers, or add to what is there.';
-        throw new AppError('too-many-requests', message);
-      }
-      await write(services, by, scheme, { ...matter, partyId: place.partyId }, transaction);
-      const written = await readMatter(database, scheme.id, { id: matter.id }, transaction);
-      return { matter: written, isNew: true };
-    });
-  } catch (error) {
-    if (error instanceof UniqueConstraintError) throw otherMessage();
-    throw error;
-  }
+  return numberedByOthers(database, async (transaction) => {
+    await lockScheme(scheme, transaction);
+    const own = await findOwn(database, scheme.id, by.id, transaction);
+    const same = await findSame(database, scheme, own, matter, transaction);
+    if (same !== undefined) return { matter: same, isNew: false };
+    const place = own.buildings.find(({ id }) => id === matter.buildingId);
+    if (place === undefined) throw new AppError('not-found');
+    if ((await countOpenOf(database, by.id, transaction)) >= MATTER_LIMITS.openOfOneOwner) {
+      const message = 'So much is open already. Wait for answers, or add to what is there.';
+      throw new AppError('too-many-requests', message);
+    }
+    await write(services, by, scheme, { ...matter, partyId: place.partyId }, transaction);
+    const written = await readMatter(database, scheme.id, { id: matter.id }, transaction);
+    return { matter: written, isNew: true };
+  });
 }

@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { NewBatch } from '../../shared/schemas/letter-batches.ts';
 import { LETTER_LIMITS } from '../../shared/schemas/letter-limits.ts';
 import { alignmentDesignSchema } from '../../shared/schemas/alignments.ts';
+import { daysAfter, dayOf } from '../days.ts';
 import { AppError } from '../errors.ts';
 import { composeLetter } from '../letters/compose-letters.ts';
 import { findRecipients } from '../letters/find-recipients.ts';
@@ -15,13 +16,6 @@ import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import { lockScheme } from './lock-scheme.ts';
 import { recordChange } from './record-change.ts';
-
-const DAY_MS = 24 * 60 * 60 * 1000;
-
-/** The day so many days from now. */
-export function dayAfter(days: number, now = new Date()): string {
-  return new Date(now.getTime() + days * DAY_MS).toISOString().slice(0, 10);
-}
 
 /**
  * Writes the letters of a batch to everybody whom the rules name or who was chosen, but those left out.
@@ -50,7 +44,7 @@ export async function prepareLetters(
     const material = {
       ...{ schemeName: scheme.name, template, settings: held.settings, told: found.told },
       design: run === null ? null : alignmentDesignSchema.parse(run.design),
-      answerBy: dayAfter(held.settings.answerWithin),
+      answerBy: dayOf(daysAfter(new Date(), held.settings.answerWithin)),
     };
     const letters = getting.map((recipient) => composeLetter(material, recipient));
     const batch = { id: randomUUID(), schemeId: scheme.id, kind: asked.kind };

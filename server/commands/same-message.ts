@@ -1,4 +1,5 @@
 import { isDeepStrictEqual } from 'node:util';
+import { UniqueConstraintError, type Sequelize, type Transaction } from 'sequelize';
 import type { Matter } from '../../shared/schemas/matter-answers.ts';
 import { AppError } from '../errors.ts';
 
@@ -22,4 +23,16 @@ export function isSameMessage(
 /** The refusal of something else under a number that is there. */
 export function otherMessage(): AppError {
   return new AppError('already-exists', 'Something else is kept under this number already.');
+}
+
+/** A transaction that keeps something under a number that a browser made: refused where that is taken. */
+export async function numberedByOthers<T>(
+  database: Sequelize,
+  work: (transaction: Transaction) => Promise<T>,
+): Promise<T> {
+  try {
+    return await database.transaction(work);
+  } catch (error) {
+    throw error instanceof UniqueConstraintError ? otherMessage() : error;
+  }
 }

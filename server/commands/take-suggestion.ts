@@ -1,4 +1,3 @@
-import { UniqueConstraintError } from 'sequelize';
 import type { z } from 'zod';
 import type { takeSuggestionSchema } from '../../shared/schemas/matters.ts';
 import { AppError } from '../errors.ts';
@@ -11,7 +10,7 @@ import { sendAnswer } from './answer-matter.ts';
 import { changeRegister } from './change-register.ts';
 import { readMatter, readSeenMatter, recordMatter, standingOf } from './kept-matter.ts';
 import { lockScheme } from './lock-scheme.ts';
-import { otherMessage } from './same-message.ts';
+import { numberedByOthers } from './same-message.ts';
 
 type Asked = z.infer<typeof takeSuggestionSchema> & { readonly id: string };
 
@@ -38,29 +37,22 @@ export async function takeSuggestion(
   { id, version, buildingVersion, message }: Asked,
 ): Promise<FoundMatter> {
   const { database } = services;
-  try {
-    return await database.transaction(async (transaction) => {
-      await lockScheme(scheme, transaction);
-      const matter = await readSeenMatter(database, scheme.id, { id, version }, transaction);
-      const suggestion = openSuggestion(matter);
-      const { field, value } = suggestion;
-      const { number, building } = matter;
-      const cause = { kind: 'edit', by, source: `Owner’s correction, matter ${number}` } as const;
-      const changed = [
-        { id: building.id, version: buildingVersion, attributes: { [field]: value } },
-      ];
-      const edits = { changed };
-      const { changeId } = await changeRegister(database, scheme, cause, edits, transaction);
-      await sendAnswer(services, by, scheme, { matter, message }, transaction);
-      const standing = { ...standingOf(matter), state: 'closed' } as const;
-      const taken = { ...suggestion, isTakenOver: true };
-      await updateMatter(database, id, { ...standing, suggestion: taken }, transaction);
-      const after = { number, field, registerChange: changeId };
-      await recordMatter(by, scheme, { id, action: 'take suggestion over', after }, transaction);
-      return readMatter(database, scheme.id, { id }, transaction);
-    });
-  } catch (error) {
-    if (error instanceof UniqueConstraintError) throw otherMessage();
-    throw error;
-  }
+  return numberedByOthers(database, async (transaction) => {
+    await lockScheme(scheme, transaction);
+    const matter = await readSeenMatter(database, scheme.id, { id, version }, transaction);
+    const suggestion = openSuggestion(matter);
+    const { field, value } = suggestion;
+    const { number, building } = matter;
+    const cause = { kind: 'edit', by, source: `Owner’s correction, matter ${number}` } as const;
+    const changed = [{ id: building.id, version: buildingVersion, attributes: { [field]: value } }];
+    const edits = { changed };
+    const { changeId } = await changeRegister(database, scheme, cause, edits, transaction);
+    await sendAnswer(services, by, scheme, { matter, message }, transaction);
+    const standing = { ...standingOf(matter), state: 'closed' } as const;
+    const taken = { ...suggestion, isTakenOver: true };
+    await updateMatter(database, id, { ...standing, suggestion: taken }, transaction);
+    const after = { number, field, registerChange: changeId };
+    await recordMatter(by, scheme, { id, action: 'take suggestion over', after }, transaction);
+    return readMatter(database, scheme.id, { id }, transaction);
+  });
 }

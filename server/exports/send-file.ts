@@ -11,6 +11,7 @@ import { momentWords } from './moment-words.ts';
 import { csvText } from './write-csv.ts';
 import { geojsonText } from './write-geojson.ts';
 import { writeXlsx } from './write-xlsx.ts';
+import { dayOf } from '../days.ts';
 
 type Format = (typeof EXPORT_FORMATS)[number];
 
@@ -44,7 +45,7 @@ function fileName({ scheme }: FileCall, what: string, format: Format): string {
     .replaceAll(/\p{M}/gu, '')
     .replace(/[^a-z0-9]+/gi, '-')
     .toLowerCase();
-  const day = new Date().toISOString().slice(0, 10);
+  const day = dayOf(new Date());
   return `${name.replace(/^-+|-+$/g, '').slice(0, 60) || 'scheme'}-${what}-${day}.${format}`;
 }
 

@@ -69,7 +69,10 @@ export function composeLetter(
 ): Composed {
   const buildings = party.buildings.flatMap((id): ToldBuilding[] => {
     const building = told.get(id);
-    return building === undefined ? [] : [{ building, facts: toldOfBuilding(building, design) }];
+    if (building === undefined) return [];
+    const { found } = building;
+    const isKnown = found !== null && design !== null;
+    return [{ building, facts: isKnown ? toldOfBuilding(found, design).facts : null }];
   });
   const { name, address, email, channel } = addresseeOf(party);
   const about = { name, scheme: schemeName, answerBy, settings, buildings };

@@ -5,7 +5,7 @@ import {
   previewedTemplateSchema,
   type PreviewedTemplate,
 } from '../../shared/schemas/letter-templates.ts';
-import { dayAfter } from '../commands/prepare-letters.ts';
+import { daysAfter, dayOf } from '../days.ts';
 import { heldSettings } from '../models/letter-settings.ts';
 import { Run } from '../models/run.ts';
 import type { Scheme } from '../models/scheme.ts';
@@ -48,7 +48,7 @@ export async function previewTemplate(
     {
       ...{ schemeName: scheme.name, template: { subject, body }, settings, told: found.told },
       design: run === null ? null : alignmentDesignSchema.parse(run.design),
-      answerBy: dayAfter(settings.answerWithin),
+      answerBy: dayOf(daysAfter(new Date(), settings.answerWithin)),
     },
     recipient,
   );

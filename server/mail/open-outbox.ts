@@ -25,6 +25,8 @@ function jobsOf(mails: readonly Due[]) {
   return mails.map(({ id, nextTryAt }) => ({
     name: QUEUE,
     data: { mailId: id },
+    // one that waits is not called for twice
+    singletonKey: id,
     ...(nextTryAt !== undefined && { startAfter: nextTryAt }),
   }));
 }

@@ -1,20 +1,13 @@
 import { QueryTypes, type Sequelize } from 'sequelize';
 import type { AlignmentDesign } from '../../shared/schemas/alignments.ts';
 import type { DecisionKind } from '../../shared/schemas/decisions.ts';
-import type { RunFacts } from '../../shared/schemas/runs.ts';
 import type { WhoseLetters } from './find-own-letters.ts';
+import type { FoundOfBuilding } from './find-told.ts';
 
 /** What the newest letter to an owner rested on, for one building. */
-export type FoundOwnFigures = {
+export type FoundOwnFigures = FoundOfBuilding & {
   readonly buildingId: number;
-  readonly settlement: number | null;
-  readonly most: number;
-  readonly categoryLow: number | null;
-  readonly category: number | null;
-  readonly categoryHigh: number | null;
   readonly design: AlignmentDesign;
-  readonly parts: RunFacts['parts'];
-  readonly groundLevel: number | null;
   /** What was decided of it for that line last, and has been checked by now. */
   readonly decision: DecisionKind | null;
 };

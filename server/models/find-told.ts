@@ -2,6 +2,17 @@ import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
 import type { DecisionKind } from '../../shared/schemas/decisions.ts';
 import type { RunFacts } from '../../shared/schemas/runs.ts';
 
+/** What a run found of a building, as far as its owner is told of it, and the building as the run had it. */
+export type FoundOfBuilding = {
+  readonly settlement: number | null;
+  readonly most: number;
+  readonly categoryLow: number | null;
+  readonly category: number | null;
+  readonly categoryHigh: number | null;
+  readonly parts: RunFacts['parts'];
+  readonly groundLevel: number | null;
+};
+
 /** What a letter can tell of a building. */
 export type Told = {
   readonly id: number;
@@ -11,15 +22,7 @@ export type Told = {
   readonly use: string | null;
   readonly listedGrade: string | null;
   /** What the run found; null where it was not in the run, or could not be worked out. */
-  readonly found: {
-    readonly settlement: number | null;
-    readonly most: number;
-    readonly categoryLow: number | null;
-    readonly category: number | null;
-    readonly categoryHigh: number | null;
-    readonly parts: RunFacts['parts'];
-    readonly groundLevel: number | null;
-  } | null;
+  readonly found: FoundOfBuilding | null;
   /** What has been decided for the line of the run, and checked. */
   readonly decision: DecisionKind | null;
   /** Protective measures that are agreed or further on. */

@@ -5,6 +5,7 @@ import {
   type LetterSettings,
 } from '../../shared/schemas/letter-settings.ts';
 import type { Scheme } from './scheme.ts';
+import { dayOf } from '../days.ts';
 
 /** The settings of letters that hold for a scheme; version 0 are those that it starts with. */
 export type HeldSettings = {
@@ -29,7 +30,7 @@ export async function heldSettings(
     { type: QueryTypes.SELECT, bind: [id], transaction },
   );
   if (row === undefined) {
-    const settings = defaultLetterSettings(createdAt.toISOString().slice(0, 10));
+    const settings = defaultLetterSettings(dayOf(createdAt));
     return { version: 0, settings, by: null, at: null };
   }
   return { ...row, settings: letterSettingsSchema.parse(row.settings) };

@@ -72,41 +72,28 @@ function isHidden({ isErased }: FoundLetter, { isAdministrator }: Actor): boolea
   return isErased && !isAdministrator;
 }
 
-/** What leaves the server of a letter in a list. */
-export function presentListedLetter(letter: FoundLetter, actor: Actor): ListedLetter {
-  return listedLetterSchema.parse({
-    id: letter.id,
-    batchId: letter.batchId,
-    batchNumber: letter.batchNumber,
-    kind: letter.kind,
-    number: letter.number,
-    name: isHidden(letter, actor) ? '' : letter.name,
-    channel: letter.channel,
-    delivery: letter.delivery,
-    serverWords: letter.serverWords,
-    answerBy: letter.answerBy,
+/** Where a letter stands, as lists and the whole letter tell it. */
+function standingOf(letter: FoundLetter) {
+  const { id, number, name, channel, delivery, serverWords, answerBy } = letter;
+  return {
+    ...{ id, number, name, channel, delivery, serverWords, answerBy },
     acknowledgedAt: letter.acknowledgedAt?.toISOString() ?? null,
     remindedAt: letter.remindedAt?.toISOString() ?? null,
-  });
+  };
+}
+
+/** What leaves the server of a letter in a list. */
+export function presentListedLetter(letter: FoundLetter, actor: Actor): ListedLetter {
+  const { batchId, batchNumber, kind } = letter;
+  const standing = standingOf(letter);
+  const name = isHidden(letter, actor) ? '' : standing.name;
+  return listedLetterSchema.parse({ ...standing, name, batchId, batchNumber, kind });
 }
 
 /** What leaves the server of a letter, whole; null where the caller may not see it any more. */
 export function presentLetter(letter: FoundLetter, actor: Actor): Letter | null {
   if (isHidden(letter, actor)) return null;
-  return letterSchema.parse({
-    id: letter.id,
-    number: letter.number,
-    name: letter.name,
-    channel: letter.channel,
-    delivery: letter.delivery,
-    serverWords: letter.serverWords,
-    answerBy: letter.answerBy,
-    acknowledgedAt: letter.acknowledgedAt?.toISOString() ?? null,
-    remindedAt: letter.remindedAt?.toISOString() ?? null,
-    address: letter.address,
-    email: letter.email,
-    subject: letter.subject,
-    parts: letter.parts,
-    reasons: letter.reasons,
-  });
+  const { address, email, subject, parts, reasons } = letter;
+  const written = { address, email, subject, parts, reasons };
+  return letterSchema.parse({ ...standingOf(letter), ...written });
 }

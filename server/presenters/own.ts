@@ -1,4 +1,3 @@
-import { tunnelsBeside } from '../../shared/assessment/tunnels-beside.ts';
 import { boundingBox, type Box } from '../../shared/geometry/bounding-box.ts';
 import { ownerDecisionWords } from '../../shared/presentation/owner-decision.ts';
 import type { PlanPoint } from '../../shared/geometry/point.ts';
@@ -6,6 +5,7 @@ import type { LetterSettings } from '../../shared/schemas/letter-settings.ts';
 import { ownSchema, type Own } from '../../shared/schemas/own.ts';
 import { toLonLat } from '../crs/to-lon-lat.ts';
 import { linesWithin } from '../documents/sheet/lines-within.ts';
+import { toldOfBuilding } from '../letters/told-of-building.ts';
 import type { FoundOwnBuilding } from '../models/find-own-buildings.ts';
 import type { FoundOwnFigures } from '../models/find-own-figures.ts';
 import type { FoundOwnLetter } from '../models/find-own-letters.ts';
@@ -20,28 +20,17 @@ function widened({ west, south, east, north }: Box): Box {
 }
 
 function presentFigures(found: FoundOwnFigures, definition: string) {
-  const { design, parts, groundLevel } = found;
-  const beside = tunnelsBeside(design, parts, groundLevel ?? design.groundLevel);
+  const { design, parts } = found;
+  const { facts, axes } = toldOfBuilding(found, design);
   const box = widened(boundingBox(parts.flat(2)));
   const place = toLonLat(definition);
-  const lines = beside.axes.flatMap((axis) =>
+  const lines = axes.flatMap((axis) =>
     linesWithin(
       axis.map(([east, north]): PlanPoint => [east, north]),
       box,
     ),
   );
-  return {
-    settlement: found.settlement,
-    most: found.most,
-    categoryLow: found.categoryLow,
-    category: found.category,
-    categoryHigh: found.categoryHigh,
-    tunnels: beside.axes.length,
-    depth: beside.depth,
-    distance: beside.distance,
-    diameter: design.diameter,
-    lines: lines.map((line) => line.map(place)),
-  };
+  return { ...facts, diameter: design.diameter, lines: lines.map((line) => line.map(place)) };
 }
 
 function presentOwnBuilding(

@@ -17,23 +17,39 @@ import { recordAcknowledgement } from '../commands/record-acknowledgement.ts';
 import { recordPrinting } from '../commands/record-printing.ts';
 import { sendLetters } from '../commands/send-letters.ts';
 import { withdrawLetters } from '../commands/withdraw-letters.ts';
-import { letterPdf, lettersPdf } from '../documents/letter/letter-pdf.ts';
+import { lettersPdf } from '../documents/letter/letter-pdf.ts';
 import { AppError } from '../errors.ts';
 import { findRecipients } from '../letters/find-recipients.ts';
 import { findBatches } from '../models/letter-batches.ts';
 import { heldSettings } from '../models/letter-settings.ts';
 import { findExceptions, findLetters } from '../models/letters.ts';
 import { Run } from '../models/run.ts';
+import type { Scheme } from '../models/scheme.ts';
+import type { Actor } from '../policies/actor.ts';
 import {
   presentBatch,
   presentLetter,
   presentListedLetter,
   presentRecipients,
 } from '../presenters/letters.ts';
+import type { Services } from '../services.ts';
 import { defineRoute } from './define-route.ts';
 
 const BATCHES = '/api/schemes/:schemeId/letter-batches';
 const LETTERS = '/api/schemes/:schemeId/letters';
+
+/** A batch as it stands after a step. */
+async function answerBatch({ database }: Services, { id }: Scheme, batchId: string) {
+  return presentBatch(await readBatch(database, id, batchId));
+}
+
+/** The letter that may still be seen; an erased one is there for the administrator alone. */
+async function letterToSee({ database }: Services, scheme: Scheme, actor: Actor, letterId: string) {
+  const [letter] = await findLetters(database, scheme.id, { letterId });
+  const presented = letter === undefined ? null : presentLetter(letter, actor);
+  if (letter === undefined || presented === null) throw new AppError('not-found');
+  return { letter, presented };
+}
 
 /** After how many days without an answer a letter is late in which way. */
 const DAYS_WITHOUT = {
@@ -71,7 +87,7 @@ export const letterRoutes = [
     status: 201,
     handle: async ({ services, actor, scheme, body }) => {
       const id = await prepareLetters(services, actor, scheme, body);
-      return presentBatch(await readBatch(services.database, scheme.id, id));
+      return answerBatch(services, scheme, id);
     },
   }),
   defineRoute({
@@ -100,7 +116,7 @@ export const letterRoutes = [
     body: checkBatchSchema,
     handle: async ({ services, actor, scheme, params: { batchId }, body }) => {
       await checkLetters(services, actor, scheme, { batchId, ...body });
-      return presentBatch(await readBatch(services.database, scheme.id, batchId));
+      return answerBatch(services, scheme, batchId);
     },
   }),
   defineRoute({
@@ -110,7 +126,7 @@ export const letterRoutes = [
     params: batchParamsSchema,
     handle: async ({ services, actor, scheme, params: { batchId } }) => {
       await withdrawLetters(services, actor, scheme, batchId);
-      return presentBatch(await readBatch(services.database, scheme.id, batchId));
+      return answerBatch(services, scheme, batchId);
     },
   }),
   defineRoute({
@@ -120,7 +136,7 @@ export const letterRoutes = [
     params: batchParamsSchema,
     handle: async ({ services, actor, scheme, params: { batchId } }) => {
       await sendLetters(services, actor, scheme, batchId);
-      return presentBatch(await readBatch(services.database, scheme.id, batchId));
+      return answerBatch(services, scheme, batchId);
     },
   }),
   defineRoute({
@@ -145,7 +161,7 @@ export const letterRoutes = [
     params: batchParamsSchema,
     handle: async ({ services, actor, scheme, params: { batchId } }) => {
       await recordPrinting(services, actor, scheme, batchId);
-      return presentBatch(await readBatch(services.database, scheme.id, batchId));
+      return answerBatch(services, scheme, batchId);
     },
   }),
   defineRoute({
@@ -168,24 +184,17 @@ export const letterRoutes = [
     path: `${LETTERS}/:writtenLetterId`,
     access: { scheme: 'readLetters' },
     params: writtenLetterParamsSchema,
-    handle: async ({ services, actor, scheme, params: { writtenLetterId: letterId } }) => {
-      const [letter] = await findLetters(services.database, scheme.id, { letterId });
-      const presented = letter === undefined ? null : presentLetter(letter, actor);
-      if (presented === null) throw new AppError('not-found');
-      return presented;
-    },
+    handle: async ({ services, actor, scheme, params }) =>
+      (await letterToSee(services, scheme, actor, params.writtenLetterId)).presented,
   }),
   defineRoute({
     method: 'get',
     path: `${LETTERS}/:writtenLetterId/pdf`,
     access: { scheme: 'readLetters' },
     params: writtenLetterParamsSchema,
-    handle: async ({ services, actor, scheme, params: { writtenLetterId: letterId }, res }) => {
-      const [letter] = await findLetters(services.database, scheme.id, { letterId });
-      if (letter === undefined || presentLetter(letter, actor) === null) {
-        throw new AppError('not-found');
-      }
-      const bytes = await letterPdf(services, { schemeId: scheme.id, letterId });
+    handle: async ({ services, actor, scheme, params, res }) => {
+      const { letter } = await letterToSee(services, scheme, actor, params.writtenLetterId);
+      const bytes = await lettersPdf(services, scheme.id, [letter], false);
       const name = `letter-${letter.batchNumber}-${letter.number}.pdf`;
       res.attachment(name).type('application/pdf').end(bytes);
     },

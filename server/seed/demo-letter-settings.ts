@@ -4,6 +4,7 @@ import { recordChange } from '../commands/record-change.ts';
 import { insertSettings } from '../models/letter-settings.ts';
 import type { Person } from '../models/person.ts';
 import type { Scheme } from '../models/scheme.ts';
+import { dayOf } from '../days.ts';
 
 const MILESTONES = [
   {
@@ -30,7 +31,7 @@ export async function writeLetterSettings(
   by: Person,
   transaction: Transaction,
 ): Promise<void> {
-  const settings = defaultLetterSettings(scheme.createdAt.toISOString().slice(0, 10));
+  const settings = defaultLetterSettings(dayOf(scheme.createdAt));
   const contact = {
     ...settings.contact,
     hours: 'Monday to Friday, 9:00 to 17:00',

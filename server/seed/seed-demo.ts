@@ -19,6 +19,7 @@ import {
 import { writeLetterSettings } from './demo-letter-settings.ts';
 import { giveOwnerAHouse } from './owner-of-house.ts';
 import { readTown } from './read-town.ts';
+import { dayOf } from '../days.ts';
 
 /** Any number; who holds its lock looks whether the demo is there, and fills it in. */
 const LOCK = 20_260_102;
@@ -71,7 +72,7 @@ async function giveRoles(
 
 async function createScheme(createdBy: string, transaction: Transaction): Promise<Scheme> {
   const scheme = await Scheme.create(DEMO_SCHEME, { transaction });
-  const rules = defaultRules(scheme.createdAt.toISOString().slice(0, 10));
+  const rules = defaultRules(dayOf(scheme.createdAt));
   await SchemeRules.create({ schemeId: scheme.id, version: 1, rules, createdBy }, { transaction });
   const subject = { kind: 'scheme', id: scheme.id };
   const change = { by: null, schemeId: scheme.id, action: 'create scheme', subject };

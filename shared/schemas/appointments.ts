@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { writtenLine } from './written.ts';
 
 /**
  * What an appointment at a building is for.
@@ -40,14 +41,6 @@ export const APPOINTMENT_LIMITS = {
   days: 3,
 } as const;
 
-function line(longest: number) {
-  return z
-    .string()
-    .trim()
-    .max(longest, `At most ${longest} letters.`)
-    .regex(/^\P{Cc}*$/u, 'Leave out line breaks and other control characters.');
-}
-
 const when = {
   startsAt: z.iso.datetime({ offset: true, error: 'Give a day and a time.' }),
   minutes: z
@@ -55,7 +48,7 @@ const when = {
     .int('Write a whole number.')
     .min(APPOINTMENT_LIMITS.least, `At least ${APPOINTMENT_LIMITS.least} minutes.`)
     .max(APPOINTMENT_LIMITS.most, `At most ${APPOINTMENT_LIMITS.most} minutes.`),
-  place: line(APPOINTMENT_LIMITS.place).min(1, 'Say where it is.'),
+  place: writtenLine(APPOINTMENT_LIMITS.place).min(1, 'Say where it is.'),
 };
 
 /**
@@ -122,7 +115,7 @@ export const answerAppointmentSchema = z.discriminatedUnion('answer', [
         (days) => new Set(days.map(({ day, part }) => `${day} ${part}`)).size === days.length,
         'One is there twice.',
       ),
-    note: line(APPOINTMENT_LIMITS.note),
+    note: writtenLine(APPOINTMENT_LIMITS.note),
   }),
 ]);
 

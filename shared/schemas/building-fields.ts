@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { writtenLine } from './written.ts';
 
 /**
  * What is kept of a building beside its reference and footprint, in the order in which people read it.
@@ -81,14 +82,6 @@ export const BUILDING_WORDS: Readonly<Partial<Record<BuildingField, readonly str
   inspected: ['inside', 'outside', 'not inspected'],
 };
 
-function textSchema(longest: number) {
-  return z
-    .string()
-    .trim()
-    .max(longest, `At most ${longest} letters.`)
-    .regex(/^\P{Cc}*$/u, 'Leave out line breaks and other control characters.');
-}
-
 function isEmpty(value: unknown): boolean {
   return typeof value === 'string' && value.trim() === '';
 }
@@ -97,7 +90,7 @@ function valueSchema({ kind, least = -1e9, most = 1e9, unit }: BuildingFieldFact
   if (kind === 'text') {
     return z.preprocess(
       (value) => (isEmpty(value) ? null : value),
-      textSchema(BUILDING_TEXT.text).nullable(),
+      writtenLine(BUILDING_TEXT.text).nullable(),
     );
   }
   const bounds = `${least} to ${most}${unit === undefined ? '' : ` ${unit}`}`;
@@ -139,7 +132,7 @@ export type BuildingAttributes = z.infer<typeof buildingAttributesSchema>;
  *
  * Units: none. Valid: not empty, of one line. Source: [own].
  */
-export const buildingReferenceSchema = textSchema(BUILDING_TEXT.reference).min(
+export const buildingReferenceSchema = writtenLine(BUILDING_TEXT.reference).min(
   1,
   'Give the building a reference.',
 );

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { registerFilterSchema } from './register.ts';
+import { writtenText } from './written.ts';
 
 /**
  * What can be decided of a building.
@@ -62,11 +63,7 @@ export type Standing = (typeof STANDINGS)[number];
  */
 export const DECISION_TEXT = 2000;
 
-const words = z
-  .string()
-  .trim()
-  .max(DECISION_TEXT, `At most ${DECISION_TEXT} letters.`)
-  .regex(/^[^\0]*$/, 'Write letters only.');
+const words = writtenText(DECISION_TEXT);
 const category = z.union([z.literal(0), z.literal(1), z.literal(2), z.literal(3), z.literal(4)]);
 const expected = z.number().int().min(1);
 

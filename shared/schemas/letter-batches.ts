@@ -1,7 +1,8 @@
 import { z } from 'zod';
-import { LETTER_LIMITS, letterWords } from './letter-limits.ts';
+import { LETTER_LIMITS } from './letter-limits.ts';
 import { LETTER_KINDS } from './letter-settings.ts';
 import { letterReasonSchema, listedLetterSchema } from './letters.ts';
+import { writtenText } from './written.ts';
 
 const kind = z.enum(LETTER_KINDS);
 
@@ -12,7 +13,7 @@ const kind = z.enum(LETTER_KINDS);
  */
 const exceptionSchema = z.strictObject({
   partyId: z.uuid(),
-  why: letterWords(LETTER_LIMITS.why).min(1, 'Say why.'),
+  why: writtenText(LETTER_LIMITS.why).min(1, 'Say why.'),
 });
 
 const exceptions = z.array(exceptionSchema).max(LETTER_LIMITS.chosen);
@@ -161,7 +162,7 @@ export const batchDetailSchema = z.strictObject({
 export const checkBatchSchema = z
   .strictObject({
     verdict: z.enum(['checked', 'returned']),
-    comment: letterWords(LETTER_LIMITS.comment),
+    comment: writtenText(LETTER_LIMITS.comment),
   })
   .refine(({ verdict, comment }) => verdict === 'checked' || comment !== '', {
     path: ['comment'],

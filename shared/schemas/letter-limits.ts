@@ -1,5 +1,3 @@
-import { z } from 'zod';
-
 /**
  * The most that letters hold.
  *
@@ -13,16 +11,3 @@ export const LETTER_LIMITS = {
   chosen: 1000,
   letters: 20_000,
 } as const;
-
-/**
- * Words of several lines.
- *
- * Units: letters. Valid: any letters but the one that databases refuse. Source: [own].
- */
-export function letterWords(longest: number) {
-  return z
-    .string()
-    .trim()
-    .max(longest, `At most ${longest} letters.`)
-    .regex(/^[^\0]*$/, 'Write letters only.');
-}

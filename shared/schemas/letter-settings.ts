@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { LIMITS } from './limits.ts';
 import { registerFilterSchema } from './register.ts';
+import { writtenLine } from './written.ts';
 
 /**
  * What letters to owners are for, in the order in which a scheme sends them.
@@ -39,14 +40,6 @@ export const SETTINGS_LIMITS = {
   near: 1000,
 } as const;
 
-function line(longest: number) {
-  return z
-    .string()
-    .trim()
-    .max(longest, `At most ${longest} letters.`)
-    .regex(/^\P{Cc}*$/u, 'Leave out line breaks and other control characters.');
-}
-
 const days = z.number('Write a number.').int().min(1).max(SETTINGS_LIMITS.days);
 const coordinate = z.number('Write a number.').min(-LIMITS.coordinate).max(LIMITS.coordinate);
 
@@ -56,7 +49,7 @@ const coordinate = z.number('Write a number.').min(-LIMITS.coordinate).max(LIMIT
  * Units: m in the scheme's grid. Valid: up to 1 km away. Source: [own].
  */
 export const nearPlaceSchema = z.strictObject({
-  name: line(SETTINGS_LIMITS.title).min(1, 'Name the place.'),
+  name: writtenLine(SETTINGS_LIMITS.title).min(1, 'Name the place.'),
   east: coordinate,
   north: coordinate,
   metres: z.number('Write a number.').positive().max(SETTINGS_LIMITS.near),
@@ -70,11 +63,11 @@ export const nearPlaceSchema = z.strictObject({
  */
 export const letterRuleSchema = z.strictObject({
   kind: z.enum(LETTER_KINDS),
-  why: line(SETTINGS_LIMITS.title).min(1, 'Say why they get it.'),
+  why: writtenLine(SETTINGS_LIMITS.title).min(1, 'Say why they get it.'),
   filter: registerFilterSchema,
   near: nearPlaceSchema.nullable(),
   listedOnly: z.boolean(),
-  source: line(SETTINGS_LIMITS.title).min(1, 'Say where this comes from.'),
+  source: writtenLine(SETTINGS_LIMITS.title).min(1, 'Say where this comes from.'),
   date: z.iso.date('Write a day.'),
   isOn: z.boolean(),
 });
@@ -100,22 +93,22 @@ export const letterSettingsSchema = z
     remindAfter: days,
     escalateAfter: days,
     contact: z.strictObject({
-      name: line(SETTINGS_LIMITS.title).min(1, 'Say who answers.'),
+      name: writtenLine(SETTINGS_LIMITS.title).min(1, 'Say who answers.'),
       email: z.email('Write an e-mail address.'),
-      phone: line(60),
-      hours: line(SETTINGS_LIMITS.title),
-      address: z.array(line(SETTINGS_LIMITS.title).min(1)).max(SETTINGS_LIMITS.address),
+      phone: writtenLine(60),
+      hours: writtenLine(SETTINGS_LIMITS.title),
+      address: z.array(writtenLine(SETTINGS_LIMITS.title).min(1)).max(SETTINGS_LIMITS.address),
     }),
     milestones: z
       .array(
         z.strictObject({
-          when: line(60).min(1, 'Say when.'),
-          title: line(SETTINGS_LIMITS.title).min(1, 'Say what.'),
-          words: line(SETTINGS_LIMITS.words),
+          when: writtenLine(60).min(1, 'Say when.'),
+          title: writtenLine(SETTINGS_LIMITS.title).min(1, 'Say what.'),
+          words: writtenLine(SETTINGS_LIMITS.words),
         }),
       )
       .max(SETTINGS_LIMITS.milestones),
-    keepGround: line(SETTINGS_LIMITS.words).min(1, 'Say on what ground letters are kept.'),
+    keepGround: writtenLine(SETTINGS_LIMITS.words).min(1, 'Say on what ground letters are kept.'),
     keepYears: z.number('Write a number.').int().min(1).max(SETTINGS_LIMITS.years),
   })
   .refine(({ answerWithin, remindAfter }) => remindAfter >= answerWithin, {

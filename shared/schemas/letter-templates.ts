@@ -1,11 +1,12 @@
 import { z } from 'zod';
-import { LETTER_LIMITS, letterWords } from './letter-limits.ts';
+import { LETTER_LIMITS } from './letter-limits.ts';
 import { LETTER_KINDS } from './letter-settings.ts';
 import { letterPartSchema } from './letters.ts';
+import { writtenText } from './written.ts';
 
 const kind = z.enum(LETTER_KINDS);
 
-const subject = letterWords(LETTER_LIMITS.subject)
+const subject = writtenText(LETTER_LIMITS.subject)
   .min(1, 'Write a subject.')
   .regex(/^\P{Cc}*$/u, 'The subject is one line.');
 
@@ -17,7 +18,7 @@ const subject = letterWords(LETTER_LIMITS.subject)
 export const newTemplateSchema = z.strictObject({
   basedOn: z.number().int().min(0),
   subject,
-  body: letterWords(LETTER_LIMITS.body).min(1, 'Write the letter.'),
+  body: writtenText(LETTER_LIMITS.body).min(1, 'Write the letter.'),
 });
 
 /**

@@ -1,6 +1,7 @@
 import { z } from 'zod';
-import { LETTER_LIMITS, letterWords } from './letter-limits.ts';
+import { LETTER_LIMITS } from './letter-limits.ts';
 import { LETTER_KINDS } from './letter-settings.ts';
+import { writtenText } from './written.ts';
 
 const kind = z.enum(LETTER_KINDS);
 
@@ -142,5 +143,5 @@ export const listedLettersSchema = z.array(listedLetterSchema);
  * Units: none. Valid: how, in a few words. Source: [own].
  */
 export const acknowledgementSchema = z.strictObject({
-  how: letterWords(LETTER_LIMITS.why).min(1, 'Say how.'),
+  how: writtenText(LETTER_LIMITS.why).min(1, 'Say how.'),
 });

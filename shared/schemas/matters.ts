@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { BUILDING_FIELDS, buildingAttributesSchema } from './building-fields.ts';
+import { writtenLine, writtenText } from './written.ts';
 
 /**
  * What an owner can bring up: a question, something that worries them, a claim for damage or cost, a fact of
@@ -105,29 +106,15 @@ export const suggestionSchema = z
       : suggestion,
   );
 
-const title = z
-  .string()
-  .trim()
-  .min(1, 'Say in a few words what it is about.')
-  .max(MATTER_LIMITS.title, `At most ${MATTER_LIMITS.title} letters.`)
-  .regex(/^\P{Cc}*$/u, 'Leave out line breaks and other control characters.');
+const title = writtenLine(MATTER_LIMITS.title).min(1, 'Say in a few words what it is about.');
 
-const text = z
-  .string()
-  .trim()
-  .min(1, 'Write something.')
-  .max(MATTER_LIMITS.text, `At most ${MATTER_LIMITS.text} letters.`)
-  .regex(/^[^\0]*$/, 'Write letters only.');
+const text = writtenText(MATTER_LIMITS.text).min(1, 'Write something.');
 
 const photographs = z
   .array(
     z.strictObject({
       id: z.uuid(),
-      caption: z
-        .string()
-        .trim()
-        .max(MATTER_LIMITS.caption, `At most ${MATTER_LIMITS.caption} letters.`)
-        .regex(/^\P{Cc}*$/u, 'Leave out line breaks and other control characters.'),
+      caption: writtenLine(MATTER_LIMITS.caption),
     }),
   )
   .max(MATTER_LIMITS.photographs, `At most ${MATTER_LIMITS.photographs} photographs.`)

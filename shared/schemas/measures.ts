@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { LIMITS } from './limits.ts';
+import { writtenText } from './written.ts';
 
 /**
  * Where a protective measure acts, in the order in which it is sought.
@@ -47,14 +48,6 @@ export const MEASURE_LIMITS = {
   buildings: 500,
 } as const;
 
-function words(longest: number) {
-  return z
-    .string()
-    .trim()
-    .max(longest, `At most ${longest} letters.`)
-    .regex(/^[^\0]*$/, 'Write letters only.');
-}
-
 const chainage = z.number().min(0).max(LIMITS.coordinate);
 
 /**
@@ -83,10 +76,10 @@ export const lossLimitSchema = z
 export const measureValuesSchema = z
   .strictObject({
     kind: z.enum(MEASURE_KINDS),
-    title: words(MEASURE_LIMITS.title).min(1, 'Say what is done.'),
-    detail: words(MEASURE_LIMITS.detail),
+    title: writtenText(MEASURE_LIMITS.title).min(1, 'Say what is done.'),
+    detail: writtenText(MEASURE_LIMITS.detail),
     state: z.enum(MEASURE_STATES),
-    responsible: words(MEASURE_LIMITS.responsible),
+    responsible: writtenText(MEASURE_LIMITS.responsible),
     due: z.iso.date().nullable(),
     limit: lossLimitSchema.nullable(),
     buildings: z

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { LIMITS } from './limits.ts';
+import { writtenText } from './written.ts';
 
 /**
  * How long what is written of an undertaking may be.
@@ -13,14 +14,6 @@ export const UNDERTAKING_LIMITS = {
   responsible: 200,
   evidence: 2000,
 } as const;
-
-function words(longest: number) {
-  return z
-    .string()
-    .trim()
-    .max(longest, `At most ${longest} letters.`)
-    .regex(/^[^\0]*$/, 'Write letters only.');
-}
 
 const chainage = z
   .number('Write a number.')
@@ -36,10 +29,10 @@ const chainage = z
  */
 export const undertakingValuesSchema = z
   .strictObject({
-    promise: words(UNDERTAKING_LIMITS.promise).min(1, 'Say what was promised.'),
-    madeTo: words(UNDERTAKING_LIMITS.madeTo).min(1, 'Say to whom.'),
+    promise: writtenText(UNDERTAKING_LIMITS.promise).min(1, 'Say what was promised.'),
+    madeTo: writtenText(UNDERTAKING_LIMITS.madeTo).min(1, 'Say to whom.'),
     partyId: z.uuid().nullable(),
-    source: words(UNDERTAKING_LIMITS.source).min(1, 'Say where it is written.'),
+    source: writtenText(UNDERTAKING_LIMITS.source).min(1, 'Say where it is written.'),
     buildingId: z.number().int().min(1).max(2_147_483_647).nullable(),
     stretch: z
       .strictObject({ from: chainage, to: chainage })
@@ -49,9 +42,9 @@ export const undertakingValuesSchema = z
       })
       .nullable(),
     due: z.iso.date('Give a day.').nullable(),
-    responsible: words(UNDERTAKING_LIMITS.responsible).min(1, 'Say who sees to it.'),
+    responsible: writtenText(UNDERTAKING_LIMITS.responsible).min(1, 'Say who sees to it.'),
     doneOn: z.iso.date('Give a day.').nullable(),
-    evidence: words(UNDERTAKING_LIMITS.evidence),
+    evidence: writtenText(UNDERTAKING_LIMITS.evidence),
   })
   .refine(({ buildingId, stretch }) => buildingId !== null || stretch !== null, {
     path: ['buildingId'],

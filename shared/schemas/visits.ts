@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { buildingAttributesSchema } from './building-fields.ts';
+import { writtenLine, writtenText } from './written.ts';
 
 /**
  * Where somebody was who visited a building.
@@ -81,15 +82,7 @@ export const VISITED_FIELDS = [
  */
 export type VisitedField = (typeof VISITED_FIELDS)[number];
 
-function line(longest: number) {
-  return z
-    .string()
-    .trim()
-    .max(longest, `At most ${longest} letters.`)
-    .regex(/^\P{Cc}*$/u, 'Leave out line breaks and other control characters.');
-}
-
-const words = line(VISIT_LIMITS.words).min(1).nullable();
+const words = writtenLine(VISIT_LIMITS.words).min(1).nullable();
 
 /**
  * Something that is not as it should be: where, of what kind, how wide.
@@ -97,14 +90,14 @@ const words = line(VISIT_LIMITS.words).min(1).nullable();
  * Units: width mm. Valid: null is not measured. Source: [own].
  */
 export const defectSchema = z.strictObject({
-  place: line(VISIT_LIMITS.place).min(1, 'Say where it is.'),
+  place: writtenLine(VISIT_LIMITS.place).min(1, 'Say where it is.'),
   kind: z.enum(DEFECT_KINDS),
   width: z
     .number('Write a number.')
     .min(0, `From 0 to ${VISIT_LIMITS.width} mm.`)
     .max(VISIT_LIMITS.width, `From 0 to ${VISIT_LIMITS.width} mm.`)
     .nullable(),
-  note: line(VISIT_LIMITS.note),
+  note: writtenLine(VISIT_LIMITS.note),
 });
 
 /**
@@ -119,7 +112,7 @@ const position = z.tuple([z.number().min(-180).max(180), z.number().min(-90).max
 
 const photographShape = {
   id: z.uuid(),
-  caption: line(VISIT_LIMITS.caption),
+  caption: writtenLine(VISIT_LIMITS.caption),
   takenAt: z.iso.datetime({ offset: true }).nullable(),
   width: pixels,
   height: pixels,
@@ -165,11 +158,7 @@ export const newVisitSchema = z.strictObject({
   part: z.enum(VISIT_PARTS),
   condition: words,
   construction: words,
-  notes: z
-    .string()
-    .trim()
-    .max(VISIT_LIMITS.notes, `At most ${VISIT_LIMITS.notes} letters.`)
-    .regex(/^[^\0]*$/, 'Write letters only.'),
+  notes: writtenText(VISIT_LIMITS.notes),
   defects: z.array(defectSchema).max(VISIT_LIMITS.defects),
   photographs: z
     .array(announcedSchema)

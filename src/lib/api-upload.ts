@@ -5,7 +5,7 @@ import { withCsrfToken } from './with-csrf-token.ts';
 
 export type UploadProgress = { readonly sent: number; readonly total: number };
 
-type Upload<T> = {
+export type Upload<T> = {
   readonly path: string;
   readonly method?: 'POST' | 'PUT';
   readonly file: File;

@@ -171,8 +171,9 @@ export const migration: Migration = {
         .map((table) => immutable(table, server))
         .join('\n')}
       alter table mailbox_letters add column attachments jsonb not null default '[]';
+      -- a mail is called for once at most, however often somebody calls for it
       select pgboss.create_queue('outbox', json_build_object(
-        'policy', 'standard',
+        'policy', 'short',
         'retryLimit', 20,
         'expireInSeconds', 120
       ));

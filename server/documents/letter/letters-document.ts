@@ -1,5 +1,6 @@
 import type { LetterTextPart } from '../../../shared/presentation/letter-text.ts';
-import { beside, gap, stack, type Block } from '../pdf/block.ts';
+import { gap, stack, type Block } from '../pdf/block.ts';
+import { bullets } from '../pdf/bullets.ts';
 import { Flow } from '../pdf/flow.ts';
 import { INKS } from '../pdf/inks.ts';
 import { label } from '../pdf/label.ts';
@@ -22,22 +23,13 @@ const WINDOW = { left: mm(25), top: mm(50), width: mm(80), height: mm(32) };
 
 const AREA = { left: LEFT, top: mm(24), bottom: PAGE_HEIGHT - mm(24) };
 const LOOK = { size: 10.5 };
+const LIST_LOOK = { ...LOOK, indent: 12, between: 2 };
 const SMALL = { size: 8, ink: INKS.second };
 const BETWEEN = 7;
 
-function listBlock(paper: Paper, items: readonly string[]): Block {
-  const rows = items.map((item) =>
-    beside([
-      { at: 0, block: wordsBlock(paper, '•', 10, LOOK) },
-      { at: 12, block: wordsBlock(paper, item, WIDTH - 12, LOOK) },
-    ]),
-  );
-  return stack(rows, 2);
-}
-
 function partBlock(paper: Paper, part: LetterTextPart, page: string): Block {
   if (typeof part === 'string') return wordsBlock(paper, part, WIDTH, LOOK);
-  if ('list' in part) return listBlock(paper, part.list);
+  if ('list' in part) return bullets(paper, part.list, WIDTH, LIST_LOOK);
   return wordsBlock(paper, page, WIDTH, { ...LOOK, weight: 'strong' });
 }
 

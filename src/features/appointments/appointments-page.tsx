@@ -1,6 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { Link } from 'react-router-dom';
 import type { Appointment } from '../../../shared/schemas/appointments.ts';
 import { capital } from '../../../shared/presentation/capital.ts';
 import { PageTitle } from '../../components/layout/page-title.tsx';
@@ -11,7 +10,6 @@ import { QueryError } from '../../components/ui/query-error.tsx';
 import { StateMark } from '../../components/ui/state-mark.tsx';
 import type { Column } from '../../components/ui/table/column.ts';
 import { Table } from '../../components/ui/table/table.tsx';
-import { sheetPath } from '../../config/paths.ts';
 import { formatMoment } from '../../lib/format-date.ts';
 import { PartyName } from '../parties/components/party-name.tsx';
 import { can } from '../schemes/can.ts';
@@ -20,6 +18,7 @@ import { appointmentsQuery } from './api/list-appointments.ts';
 import { APPOINTMENT_SHAPES } from './appointment-words.ts';
 import { AppointmentDialog } from './components/appointment-dialog.tsx';
 import { OfferDialog } from './components/offer-dialog.tsx';
+import { BuildingLink } from '../buildings/components/building-link.tsx';
 
 function columnsOf(schemeId: string): readonly Column<Appointment>[] {
   return [
@@ -40,14 +39,7 @@ function columnsOf(schemeId: string): readonly Column<Appointment>[] {
     {
       id: 'building',
       heading: 'Building',
-      cell: ({ building }) => (
-        <Link
-          to={sheetPath(schemeId, building.id)}
-          title={building.name ?? building.address ?? undefined}
-        >
-          {building.reference}
-        </Link>
-      ),
+      cell: ({ building }) => <BuildingLink {...{ schemeId, building }} />,
     },
     {
       id: 'party',

@@ -1,5 +1,5 @@
 import type { Batch } from '../../../shared/schemas/letter-batches.ts';
-import type { LetterKind } from '../../../shared/schemas/letter-settings.ts';
+import { LETTER_KINDS, type LetterKind } from '../../../shared/schemas/letter-settings.ts';
 import type { LetterReason, ListedLetter } from '../../../shared/schemas/letters.ts';
 import type { State } from '../../components/ui/state-mark.tsx';
 
@@ -12,6 +12,12 @@ export const KIND_LABELS: Readonly<Record<LetterKind, string>> = {
   'decision and measures': 'Decision and measures',
   'free text': 'Free text',
 };
+
+/** The kinds of letters to choose from. */
+export const KIND_OPTIONS = LETTER_KINDS.map((kind) => ({
+  value: kind,
+  label: KIND_LABELS[kind],
+}));
 
 /** The shape that goes with where a batch stands. */
 export const BATCH_SHAPES: Readonly<Record<Batch['state'], State>> = {

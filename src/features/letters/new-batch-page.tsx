@@ -1,7 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { useNavigate } from 'react-router-dom';
-import { LETTER_KINDS, type LetterKind } from '../../../shared/schemas/letter-settings.ts';
+import type { LetterKind } from '../../../shared/schemas/letter-settings.ts';
 import type { NewBatch, Recipients } from '../../../shared/schemas/letter-batches.ts';
 import { NotFoundPage } from '../../app/routes/not-found.tsx';
 import { Page } from '../../components/layout/page.tsx';
@@ -17,11 +17,9 @@ import { useScheme } from '../schemes/scheme-context.ts';
 import { recipientsQuery, usePrepareBatch } from './api/letter-batches.ts';
 import { ChooseParty } from './components/choose-party.tsx';
 import { RecipientsTable } from './components/recipients-table.tsx';
-import { KIND_LABELS, lettersWords } from './letter-words.ts';
+import { KIND_OPTIONS, lettersWords } from './letter-words.ts';
 
 type Asked = Omit<NewBatch, 'expected'>;
-
-const KINDS = LETTER_KINDS.map((kind) => ({ value: kind, label: KIND_LABELS[kind] }));
 
 function countsWords({ letters, byMail, byPost, without, runNumber }: Recipients): string {
   const run = runNumber === null ? 'No run is complete yet' : `By run ${runNumber}`;
@@ -87,7 +85,7 @@ function NewBatchForm() {
       <div className="grid max-w-[640px] grid-cols-2 items-end gap-3 max-sm:grid-cols-1">
         <Select
           label="Kind of letter"
-          options={KINDS}
+          options={KIND_OPTIONS}
           value={asked.kind}
           onChange={(event) => {
             setAsked({ ...asked, kind: event.target.value as LetterKind, leftOut: [] });

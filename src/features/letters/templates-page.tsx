@@ -1,6 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { LETTER_KINDS, type LetterKind } from '../../../shared/schemas/letter-settings.ts';
+import type { LetterKind } from '../../../shared/schemas/letter-settings.ts';
 import { NotFoundPage } from '../../app/routes/not-found.tsx';
 import { Page } from '../../components/layout/page.tsx';
 import { LoadingRows } from '../../components/ui/loading-rows.tsx';
@@ -10,9 +10,7 @@ import { can } from '../schemes/can.ts';
 import { useScheme } from '../schemes/scheme-context.ts';
 import { templatesQuery } from './api/letter-templates.ts';
 import { TemplateEditor } from './components/template-editor.tsx';
-import { KIND_LABELS } from './letter-words.ts';
-
-const KINDS = LETTER_KINDS.map((kind) => ({ value: kind, label: KIND_LABELS[kind] }));
+import { KIND_OPTIONS } from './letter-words.ts';
 
 function Templates() {
   const scheme = useScheme();
@@ -27,7 +25,7 @@ function Templates() {
       <div className="mb-4 max-w-[320px]">
         <Select
           label="Kind of letter"
-          options={KINDS}
+          options={KIND_OPTIONS}
           value={kind}
           onChange={(event) => {
             setKind(event.target.value as LetterKind);

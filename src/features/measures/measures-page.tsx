@@ -1,5 +1,4 @@
 import { useQuery } from '@tanstack/react-query';
-import { Link } from 'react-router-dom';
 import type { Measure } from '../../../shared/schemas/measures.ts';
 import { Content } from '../../components/layout/content.tsx';
 import { PageTitle } from '../../components/layout/page-title.tsx';
@@ -8,8 +7,8 @@ import { MutationError } from '../../components/ui/mutation-error.tsx';
 import { StateMark } from '../../components/ui/state-mark.tsx';
 import { Table } from '../../components/ui/table/table.tsx';
 import type { Column } from '../../components/ui/table/column.ts';
-import { sheetPath } from '../../config/paths.ts';
 import { formatDay } from '../../lib/format-date.ts';
+import { BuildingLink } from '../buildings/components/building-link.tsx';
 import { can } from '../schemes/can.ts';
 import { useScheme } from '../schemes/scheme-context.ts';
 import { measuresQuery } from './api/list-measures.ts';
@@ -23,10 +22,8 @@ function Buildings({ schemeId, buildings }: Pick<Measure, 'buildings'> & { schem
   const more = buildings.length - NAMED;
   return (
     <span className="flex flex-wrap gap-x-2">
-      {buildings.slice(0, NAMED).map(({ id, reference, name }) => (
-        <Link key={id} to={sheetPath(schemeId, id)} title={name ?? undefined}>
-          {reference}
-        </Link>
+      {buildings.slice(0, NAMED).map((building) => (
+        <BuildingLink key={building.id} {...{ schemeId, building }} />
       ))}
       {more > 0 && <span className="text-ink-2">and {more} more</span>}
     </span>

@@ -3,21 +3,18 @@ import { Link, useParams } from 'react-router-dom';
 import type { OwnLetterText } from '../../../shared/schemas/own.ts';
 import { Content } from '../../components/layout/content.tsx';
 import { PageTitle } from '../../components/layout/page-title.tsx';
-import { Button } from '../../components/ui/button.tsx';
 import { LoadingRows } from '../../components/ui/loading-rows.tsx';
-import { MutationError } from '../../components/ui/mutation-error.tsx';
 import { QueryError } from '../../components/ui/query-error.tsx';
 import { homePath } from '../../config/paths.ts';
 import { formatDay } from '../../lib/format-date.ts';
 import { can } from '../schemes/can.ts';
 import { useScheme } from '../schemes/scheme-context.ts';
-import { useAcknowledgeLetter } from './api/acknowledge-letter.ts';
 import { ownLetterQuery } from './api/get-own-letter.ts';
+import { HaveTheLetter } from './components/have-the-letter.tsx';
 import { OWNER_PAGE } from './owner-page-style.ts';
 
 function Acknowledge({ letter }: { readonly letter: OwnLetterText }) {
   const scheme = useScheme();
-  const acknowledge = useAcknowledgeLetter(scheme.id, () => undefined);
   const isOpen = letter.acknowledgedAt === null && can(scheme, 'answerAsOwner');
   return (
     <div className="mt-6 print:hidden">
@@ -25,18 +22,7 @@ function Acknowledge({ letter }: { readonly letter: OwnLetterText }) {
         {letter.acknowledgedAt !== null &&
           `Thank you. You told us on ${formatDay(letter.acknowledgedAt)} that you have this letter.`}
       </p>
-      <MutationError failed="That did not reach us. Please try again." error={acknowledge.error} />
-      {isOpen && (
-        <Button
-          kind="main"
-          busy={acknowledge.isPending}
-          onClick={() => {
-            acknowledge.mutate(letter.id);
-          }}
-        >
-          I have the letter
-        </Button>
-      )}
+      {isOpen && <HaveTheLetter letterId={letter.id} onDone={() => undefined} />}
     </div>
   );
 }

@@ -1,16 +1,14 @@
 import { useQuery } from '@tanstack/react-query';
-import { LETTER_KINDS, type LetterKind } from '../../../../shared/schemas/letter-settings.ts';
+import type { LetterKind } from '../../../../shared/schemas/letter-settings.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { Checkbox } from '../../../components/ui/checkbox.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { Select } from '../../../components/ui/select.tsx';
 import { registerViewsQuery } from '../../register/api/list-views.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
-import { KIND_LABELS } from '../letter-words.ts';
+import { KIND_OPTIONS } from '../letter-words.ts';
 import { ruleWords } from '../rule-words.ts';
 import type { RuleDraft } from '../settings-draft.ts';
-
-const KINDS = LETTER_KINDS.map((kind) => ({ value: kind, label: KIND_LABELS[kind] }));
 
 const NO_PLACE = { name: '', east: '', north: '', metres: '30' };
 
@@ -99,7 +97,7 @@ export function RuleFields(props: RuleFieldsProps) {
     <li className="grid grid-cols-2 gap-3 border-b border-rule py-3 max-sm:grid-cols-1">
       <Select
         label="Letter"
-        options={KINDS}
+        options={KIND_OPTIONS}
         value={rule.kind}
         onChange={(event) => {
           onChange({ ...rule, kind: event.target.value as LetterKind });

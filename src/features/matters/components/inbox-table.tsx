@@ -4,10 +4,11 @@ import { capital } from '../../../../shared/presentation/capital.ts';
 import { StateMark } from '../../../components/ui/state-mark.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
-import { matterPath, sheetPath } from '../../../config/paths.ts';
+import { matterPath } from '../../../config/paths.ts';
 import { PartyName } from '../../parties/components/party-name.tsx';
 import { MATTER_SHAPES } from '../matter-words.ts';
 import { DueDay } from './due-day.tsx';
+import { BuildingLink } from '../../buildings/components/building-link.tsx';
 
 function columnsOf(schemeId: string): readonly Column<MatterLine>[] {
   return [
@@ -32,14 +33,7 @@ function columnsOf(schemeId: string): readonly Column<MatterLine>[] {
       id: 'building',
       heading: 'Building',
       spare: true,
-      cell: ({ building }) => (
-        <Link
-          to={sheetPath(schemeId, building.id)}
-          title={building.name ?? building.address ?? undefined}
-        >
-          {building.reference}
-        </Link>
-      ),
+      cell: ({ building }) => <BuildingLink {...{ schemeId, building }} />,
     },
     {
       id: 'due',

@@ -1,15 +1,13 @@
 import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import type { OwnLetter } from '../../../../shared/schemas/own.ts';
-import { Button } from '../../../components/ui/button.tsx';
-import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { ownLetterPath } from '../../../config/paths.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 import { formatDay, formatWeekdayMoment } from '../../../lib/format-date.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
-import { useAcknowledgeLetter } from '../api/acknowledge-letter.ts';
 import type { NextStep } from '../next-step.ts';
 import { AskedBox } from './asked-box.tsx';
+import { HaveTheLetter } from './have-the-letter.tsx';
 import { ChooseDay } from './choose-day.tsx';
 import { ThanksNote } from './thanks-note.tsx';
 
@@ -17,9 +15,6 @@ type Done = { readonly onDone: (thanks: string) => void };
 
 function ReadLetter({ letter, onDone }: Done & { readonly letter: OwnLetter }) {
   const scheme = useScheme();
-  const acknowledge = useAcknowledgeLetter(scheme.id, () => {
-    onDone('Thank you. We know that our letter has reached you. A mail confirms it.');
-  });
   const by = letter.answerBy === null ? '' : ` by ${formatDay(letter.answerBy)}`;
   return (
     <AskedBox title="Please tell us that you have our letter">
@@ -28,16 +23,12 @@ function ReadLetter({ letter, onDone }: Done & { readonly letter: OwnLetter }) {
         <Link to={ownLetterPath(scheme.id, letter.id)}>{letter.subject}</Link>
         {`. Please tell us${by} that it has reached you. You do not have to agree with it.`}
       </p>
-      <MutationError failed="That did not reach us. Please try again." error={acknowledge.error} />
-      <Button
-        kind="main"
-        busy={acknowledge.isPending}
-        onClick={() => {
-          acknowledge.mutate(letter.id);
+      <HaveTheLetter
+        letterId={letter.id}
+        onDone={() => {
+          onDone('Thank you. We know that our letter has reached you. A mail confirms it.');
         }}
-      >
-        I have the letter
-      </Button>
+      />
     </AskedBox>
   );
 }

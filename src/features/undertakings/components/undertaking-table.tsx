@@ -1,25 +1,20 @@
 import { useState } from 'react';
-import { Link } from 'react-router-dom';
 import type { Undertaking } from '../../../../shared/schemas/undertakings.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { Facts } from '../../../components/ui/facts.tsx';
 import { StateMark } from '../../../components/ui/state-mark.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
-import { sheetPath } from '../../../config/paths.ts';
 import { formatDay } from '../../../lib/format-date.ts';
 import { DueDay } from '../../matters/components/due-day.tsx';
 import { madeToWords, stretchWords, undertakingState } from '../undertaking-words.ts';
+import { BuildingLink } from '../../buildings/components/building-link.tsx';
 
 function For({ schemeId, undertaking }: { schemeId: string; undertaking: Undertaking }) {
   const { building, stretch } = undertaking;
   return (
     <>
-      {building !== null && (
-        <Link to={sheetPath(schemeId, building.id)} title={building.name ?? undefined}>
-          {building.reference}
-        </Link>
-      )}
+      {building !== null && <BuildingLink {...{ schemeId, building }} />}
       {building !== null && stretch !== null && ', '}
       {stretch !== null && stretchWords(stretch)}
     </>
