@@ -74,7 +74,7 @@ async function sendAll(database: Sequelize, scheme: Scheme): Promise<void> {
     why: 'Trial',
   }));
   const kind = 'first information';
-  const asked: NewBatch = { kind, leftOut: [], chosen, expected: chosen.length };
+  const asked: NewBatch = { kind, leftOut: [], chosen, text: null, expected: chosen.length };
   const batchId = await prepareLetters({ database }, by(first), scheme, asked);
   const check = { batchId, verdict: 'checked', comment: '' } as const;
   await checkLetters({ database }, by(second), scheme, check);

@@ -27,6 +27,7 @@ export async function acknowledgeLetter(
     const person = await Person.findByPk(actor.id, { rejectOnEmpty: true, transaction });
     const page = ownerHomeUrl(env.PUBLIC_URL, scheme.id);
     const mail = acknowledgedMail(person, letter, page);
-    await outbox.put([{ schemeId: scheme.id, recipient: person.email, ...mail }], transaction);
+    const to = { schemeId: scheme.id, partyId: letter.partyId, recipient: person.email };
+    await outbox.put([{ ...to, ...mail }], transaction);
   });
 }

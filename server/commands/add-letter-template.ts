@@ -1,8 +1,8 @@
 import type { z } from 'zod';
-import { faultsOfMarks } from '../../shared/presentation/letter-text.ts';
 import type { LetterKind } from '../../shared/schemas/letter-settings.ts';
 import type { newTemplateSchema } from '../../shared/schemas/letter-templates.ts';
 import { AppError } from '../errors.ts';
+import { refuseBadMarks } from '../letters/refuse-bad-marks.ts';
 import { heldTemplate, insertTemplate, type HeldTemplate } from '../models/letter-templates.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
@@ -11,14 +11,6 @@ import { lockScheme } from './lock-scheme.ts';
 import { recordChange } from './record-change.ts';
 
 type NewTemplate = z.infer<typeof newTemplateSchema> & { readonly kind: LetterKind };
-
-function refuseBadMarks({ subject, body }: NewTemplate): void {
-  const fields = [
-    ...faultsOfMarks(subject).map((message) => ({ path: 'subject', message })),
-    ...faultsOfMarks(body).map((message) => ({ path: 'body', message })),
-  ];
-  if (fields.length > 0) throw new AppError('invalid-input', undefined, fields);
-}
 
 /** Adds the next version of a template, unless somebody else has added one since it was begun. */
 export async function addLetterTemplate(

@@ -4,6 +4,7 @@ import { matterReceivedMail } from '../mail/letters/matter-mails.ts';
 import { findOwn } from '../models/find-own.ts';
 import { insertMessage, updateMatter } from '../models/matter-changes.ts';
 import type { FoundMatter } from '../models/matters.ts';
+import { heldSettings } from '../models/letter-settings.ts';
 import { Person } from '../models/person.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
@@ -24,14 +25,21 @@ async function write(
 ): Promise<void> {
   const { id, kind, title, number } = matter;
   const standing = standingOf(matter);
+  const { settings } = await heldSettings(database, scheme, transaction);
   // what waits keeps the day that was promised; what is opened again gets a new one
-  const due = matter.state === 'open' ? matter.due : answerBy(kind, new Date());
+  const due = matter.state === 'open' ? matter.due : answerBy(kind, new Date(), settings);
   await insertMessage(database, { ...message, by: by.id, side: 'owner' }, transaction);
   await updateMatter(database, id, { ...standing, state: 'open', due }, transaction);
   const after = { number, photographs: message.photographs.length };
   await recordMatter(by, scheme, { id, action: 'add to matter', after }, transaction);
   const to = await Person.findByPk(by.id, { transaction, rejectOnEmpty: true });
-  const facts = { publicUrl: env.PUBLIC_URL, schemeId: scheme.id, to, title };
+  const facts = {
+    publicUrl: env.PUBLIC_URL,
+    schemeId: scheme.id,
+    partyId: matter.party.id,
+    to,
+    title,
+  };
   const isLate = matter.isOverdue;
   const mail = { ...facts, isConcern: kind === 'concern', due: isLate ? null : due };
   await outbox.put([matterReceivedMail(mail)], transaction);

@@ -2,18 +2,18 @@ import type { AnswerAppointment, AskedFor } from '../../shared/schemas/appointme
 import { AppError } from '../errors.ts';
 import { updateAppointment, type FoundAppointment } from '../models/appointments.ts';
 import { findOwn } from '../models/find-own.ts';
+import { heldSettings } from '../models/letter-settings.ts';
 import { Person } from '../models/person.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import { readAppointment, requireCurrent, tellOfAppointment } from './kept-appointment.ts';
 import { lockScheme } from './lock-scheme.ts';
-import { dayOf } from '../days.ts';
+import { dayIn } from '../days.ts';
 
 /** The days that are asked for; refused where one is not to come. */
-function askedForBy(answer: AnswerAppointment): AskedFor | null {
+function askedForBy(answer: AnswerAppointment, today: string): AskedFor | null {
   if (answer.answer === 'agree') return null;
-  const today = dayOf(new Date());
   if (answer.days.some(({ day }) => day <= today)) {
     const message = 'Choose days that are still to come.';
     throw new AppError('invalid-input', undefined, [{ path: 'days', message }]);
@@ -34,9 +34,10 @@ export async function answerAppointment(
   answer: AnswerAppointment & { readonly id: string },
 ): Promise<FoundAppointment> {
   const { database } = services;
-  const askedFor = askedForBy(answer);
   return database.transaction(async (transaction) => {
     await lockScheme(scheme, transaction);
+    const { settings } = await heldSettings(database, scheme, transaction);
+    const askedFor = askedForBy(answer, dayIn(new Date(), settings.timeZone));
     const { parties } = await findOwn(database, scheme.id, by.id, transaction);
     const which = { id: answer.id, parties };
     const before = await readAppointment(database, scheme.id, which, transaction);

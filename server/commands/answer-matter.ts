@@ -21,12 +21,12 @@ export async function sendAnswer(
   { matter, message }: { readonly matter: FoundMatter; readonly message: Answer },
   transaction: Transaction,
 ): Promise<void> {
-  const { id: matterId, title } = matter;
+  const { id: matterId, title, party } = matter;
   const written = { ...message, matterId, by: by.id, side: 'team' as const, photographs: [] };
   await insertMessage(database, written, transaction);
   const to = await readerOf(matter, transaction);
   if (to === null) return;
-  const facts = { publicUrl: env.PUBLIC_URL, schemeId: scheme.id, to, title };
+  const facts = { publicUrl: env.PUBLIC_URL, schemeId: scheme.id, partyId: party.id, to, title };
   await outbox.put([matterAnsweredMail({ ...facts, text: message.text })], transaction);
 }
 

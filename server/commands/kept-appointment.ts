@@ -2,6 +2,7 @@ import type { Sequelize, Transaction } from 'sequelize';
 import { AppError } from '../errors.ts';
 import { appointmentMails, type AppointmentNews } from '../mail/letters/appointment-mails.ts';
 import { findAppointments, type FoundAppointment } from '../models/appointments.ts';
+import { heldSettings } from '../models/letter-settings.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
@@ -49,7 +50,7 @@ function toldOf({ building, party, purpose, startsAt, minutes, place, state }: F
 
 /** Tells the trail of an appointment, and the party by mail. */
 export async function tellOfAppointment(
-  { env, outbox }: Services,
+  { database, env, outbox }: Services,
   by: Actor,
   scheme: Scheme,
   { action, before, after, news }: Told,
@@ -63,6 +64,7 @@ export async function tellOfAppointment(
   await recordChange(change, transaction);
   if (news === null) return;
   const { PUBLIC_URL: publicUrl, MAIL_FROM: mailFrom } = env;
-  const sender = { schemeId: scheme.id, publicUrl, mailFrom, now: new Date() };
+  const { timeZone } = (await heldSettings(database, scheme, transaction)).settings;
+  const sender = { schemeId: scheme.id, publicUrl, mailFrom, timeZone, now: new Date() };
   await outbox.put(appointmentMails(news, after, sender), transaction);
 }

@@ -7,6 +7,7 @@ import { Building } from '../models/building.ts';
 import { findOwn, type Own } from '../models/find-own.ts';
 import { countOpenOf, insertMatter, insertMessage } from '../models/matter-changes.ts';
 import { findMatterThreads, type FoundMatter } from '../models/matters.ts';
+import { heldSettings } from '../models/letter-settings.ts';
 import { Person } from '../models/person.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
@@ -52,7 +53,8 @@ async function write(
 ): Promise<void> {
   const { database, env, outbox } = services;
   const { id, kind, title, buildingId } = matter;
-  const due = answerBy(kind, new Date());
+  const { settings } = await heldSettings(database, scheme, transaction);
+  const due = answerBy(kind, new Date(), settings);
   const suggestion = await suggestionOf(matter, transaction);
   const opened = { ...matter, partyId, suggestion, due, schemeId: scheme.id, openedBy: by.id };
   const number = await insertMatter(database, opened, transaction);
@@ -61,7 +63,7 @@ async function write(
   const after = { number, kind, building: buildingId, photographs: matter.photographs.length };
   await recordMatter(by, scheme, { id, action: 'bring up matter', after }, transaction);
   const to = await Person.findByPk(by.id, { transaction, rejectOnEmpty: true });
-  const facts = { publicUrl: env.PUBLIC_URL, schemeId: scheme.id, to, title };
+  const facts = { publicUrl: env.PUBLIC_URL, schemeId: scheme.id, partyId, to, title };
   const mail = matterReceivedMail({ ...facts, isConcern: kind === 'concern', due });
   await outbox.put([mail], transaction);
 }

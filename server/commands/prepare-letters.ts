@@ -2,10 +2,11 @@ import { randomUUID } from 'node:crypto';
 import type { NewBatch } from '../../shared/schemas/letter-batches.ts';
 import { LETTER_LIMITS } from '../../shared/schemas/letter-limits.ts';
 import { alignmentDesignSchema } from '../../shared/schemas/alignments.ts';
-import { daysAfter, dayOf } from '../days.ts';
+import { daysAfter, dayIn } from '../days.ts';
 import { AppError } from '../errors.ts';
 import { composeLetter } from '../letters/compose-letters.ts';
 import { findRecipients } from '../letters/find-recipients.ts';
+import { refuseBadMarks } from '../letters/refuse-bad-marks.ts';
 import { insertBatch } from '../models/letter-batches.ts';
 import { heldSettings } from '../models/letter-settings.ts';
 import { heldTemplate } from '../models/letter-templates.ts';
@@ -27,10 +28,12 @@ export async function prepareLetters(
   scheme: Scheme,
   asked: NewBatch,
 ): Promise<string> {
+  if (asked.text !== null) refuseBadMarks(asked.text, 'text.');
   return database.transaction(async (transaction) => {
     await lockScheme(scheme, transaction);
     const held = await heldSettings(database, scheme, transaction);
     const template = await heldTemplate(database, scheme.id, asked.kind, transaction);
+    const words = asked.text ?? template;
     const found = await findRecipients(database, scheme.id, held.settings, asked, transaction);
     const getting = found.recipients.filter(({ leftOut }) => leftOut === null);
     if (getting.length !== asked.expected) {
@@ -42,15 +45,15 @@ export async function prepareLetters(
     }
     const run = found.runId === null ? null : await Run.findByPk(found.runId, { transaction });
     const material = {
-      ...{ schemeName: scheme.name, template, settings: held.settings, told: found.told },
+      ...{ schemeName: scheme.name, template: words, settings: held.settings, told: found.told },
       design: run === null ? null : alignmentDesignSchema.parse(run.design),
-      answerBy: dayOf(daysAfter(new Date(), held.settings.answerWithin)),
+      answerBy: dayIn(daysAfter(new Date(), held.settings.answerWithin), held.settings.timeZone),
     };
     const letters = getting.map((recipient) => composeLetter(material, recipient));
     const batch = { id: randomUUID(), schemeId: scheme.id, kind: asked.kind };
     const versions = { templateVersion: template.version, settingsVersion: held.version };
     const about = { ...batch, ...versions, runId: found.runId, letters: letters.length };
-    await insertBatch(database, { ...about, by: by.id }, transaction);
+    await insertBatch(database, { ...about, text: asked.text, by: by.id }, transaction);
     await insertLetters(database, batch, letters, transaction);
     const leftOut = found.recipients.flatMap(({ party, reasons, leftOut: why }) =>
       why === null ? [] : [{ partyId: party.partyId, reasons, why }],

@@ -30,7 +30,9 @@ export async function sendLetters(
     await lockScheme(scheme, transaction);
     await readBatchAs(database, scheme.id, batchId, 'checked', transaction);
     const letters = await findLetters(database, scheme.id, { batchId }, transaction);
-    const mailed = letters.filter(({ channel, email }) => channel === 'e-mail' && email !== null);
+    const mailed = letters.filter(
+      ({ channel, email, isErased }) => channel === 'e-mail' && email !== null && !isErased,
+    );
     const ids = [...new Set(mailed.map(({ partyId }) => partyId))];
     const parties = await findParties(database, scheme.id, ids, transaction);
     const readers = new Map(parties.map((one) => [one.partyId, addresseeOf(one).partyId]));

@@ -3,6 +3,7 @@ import {
   letterSubject,
   letterText,
   type LetterTextPart,
+  type LetterWords,
 } from '../../shared/presentation/letter-text.ts';
 import type { AlignmentDesign } from '../../shared/schemas/alignments.ts';
 import type { LetterSettings } from '../../shared/schemas/letter-settings.ts';
@@ -32,7 +33,7 @@ export type Composed = {
 /** What all letters of a batch are written from. */
 export type Material = {
   readonly schemeName: string;
-  readonly template: { readonly subject: string; readonly body: string };
+  readonly template: LetterWords;
   readonly settings: LetterSettings;
   readonly design: AlignmentDesign | null;
   readonly told: ReadonlyMap<number, Told>;

@@ -1,43 +1,52 @@
+import type { Sequelize } from 'sequelize';
+import type { z } from 'zod';
 import { faultsOfMarks } from '../../shared/presentation/letter-text.ts';
 import { alignmentDesignSchema } from '../../shared/schemas/alignments.ts';
-import type { LetterKind } from '../../shared/schemas/letter-settings.ts';
+import type { LetterKind, LetterSettings } from '../../shared/schemas/letter-settings.ts';
 import {
   previewedTemplateSchema,
   type PreviewedTemplate,
+  type templatePreviewSchema,
 } from '../../shared/schemas/letter-templates.ts';
-import { daysAfter, dayOf } from '../days.ts';
+import { daysAfter, dayIn } from '../days.ts';
 import { heldSettings } from '../models/letter-settings.ts';
 import { Run } from '../models/run.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Services } from '../services.ts';
 import { composeLetter } from './compose-letters.ts';
-import { findRecipients } from './find-recipients.ts';
+import { findRecipients, type FoundRecipients } from './find-recipients.ts';
 
-type Asked = {
-  readonly kind: LetterKind;
-  readonly subject: string;
-  readonly body: string;
-  readonly partyId: string | null;
-};
+type Asked = z.infer<typeof templatePreviewSchema> & { readonly kind: LetterKind };
 
 /** So many parties are offered to look at a template with. */
 const MOST = 50;
 
-/** A template as a party whom the rules name would read it; nothing is kept. */
+/** Free text mostly has no rules of its own: while it has no readers, it is looked at with whoever is told first. */
+async function findReaders(
+  database: Sequelize,
+  schemeId: string,
+  settings: LetterSettings,
+  asked: Pick<Asked, 'kind' | 'leftOut' | 'chosen'>,
+): Promise<FoundRecipients> {
+  const found = await findRecipients(database, schemeId, settings, asked, null);
+  if (asked.kind !== 'free text' || found.recipients.length > 0) return found;
+  const first = { ...asked, kind: 'first information' } as const;
+  return findRecipients(database, schemeId, settings, first, null);
+}
+
+/** A letter as a party who gets it would read it; nothing is kept. */
 export async function previewTemplate(
   { database }: Pick<Services, 'database'>,
   scheme: Scheme,
-  { kind, subject, body, partyId }: Asked,
+  { kind, leftOut, chosen, subject, body, partyId }: Asked,
 ): Promise<PreviewedTemplate> {
   const faults = [...faultsOfMarks(subject), ...faultsOfMarks(body)];
   const { settings } = await heldSettings(database, scheme);
-  // free text has no rule of its own: it is looked at with whoever is told first
-  const rules = kind === 'free text' ? 'first information' : kind;
-  const asked = { kind: rules, leftOut: [], chosen: [] };
-  const found = await findRecipients(database, scheme.id, settings, asked, null);
-  const recipient =
-    found.recipients.find(({ party }) => party.partyId === partyId) ?? found.recipients[0];
-  const parties = found.recipients
+  const asked = { kind, leftOut, chosen };
+  const found = await findReaders(database, scheme.id, settings, asked);
+  const readers = found.recipients.filter((one) => one.leftOut === null);
+  const recipient = readers.find(({ party }) => party.partyId === partyId) ?? readers[0];
+  const parties = readers
     .slice(0, MOST)
     .map(({ party }) => ({ id: party.partyId, name: party.name }));
   if (recipient === undefined || faults.length > 0) {
@@ -48,7 +57,7 @@ export async function previewTemplate(
     {
       ...{ schemeName: scheme.name, template: { subject, body }, settings, told: found.told },
       design: run === null ? null : alignmentDesignSchema.parse(run.design),
-      answerBy: dayOf(daysAfter(new Date(), settings.answerWithin)),
+      answerBy: dayIn(daysAfter(new Date(), settings.answerWithin), settings.timeZone),
     },
     recipient,
   );

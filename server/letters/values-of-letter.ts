@@ -76,8 +76,8 @@ function decisionWords(buildings: readonly ToldBuilding[]): string {
     .join(' ');
 }
 
-/** Until dates are known, what is known all the same. */
-const NO_DATES = ['We write to you again before each step, in good time.'];
+/** Until dates are known, none is promised. */
+const NO_DATES = ['No days are set yet. We write to you when they are.'];
 
 function datesOf({ milestones }: LetterSettings): readonly string[] {
   if (milestones.length === 0) return NO_DATES;
@@ -98,6 +98,7 @@ export function valuesOfLetter({
     scheme,
     place: placeWords(buildings),
     ...foundWords(buildings),
+    repairs: settings.repairs.words,
     'answer by': nearDayInWords(answerBy),
     contact: contactWords(settings),
     decision: decisionWords(buildings),

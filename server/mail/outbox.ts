@@ -12,6 +12,8 @@ export type OutgoingMail = {
   /** The letter that it carries or, in a reminder, speaks of. */
   readonly letterId?: string;
   readonly isReminder?: boolean;
+  /** The party whom it concerns, where it carries no letter. */
+  readonly partyId?: string;
   /** The single-use link whose address its parts leave open. */
   readonly linkId?: string;
   /** An appointment that comes with it, as a calendar takes it in. */

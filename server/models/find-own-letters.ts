@@ -4,6 +4,7 @@ import type { LetterTextPart } from '../../shared/presentation/letter-text.ts';
 /** A letter that was sent to a party, with those of some buildings that it names. */
 export type FoundOwnLetter = {
   readonly id: string;
+  readonly partyId: string;
   readonly subject: string;
   /** Whom it was written to. */
   readonly name: string;
@@ -30,7 +31,8 @@ export function findOwnLetters(
   letterId: string | null = null,
 ): Promise<FoundOwnLetter[]> {
   return database.query<FoundOwnLetter>(
-    `select l.id, l.subject, l.name, l.facts->'parts' as parts, b.sent_at as "sentAt", l.answer_by::text as "answerBy",
+    `select l.id, l.party_id as "partyId", l.subject, l.name, l.facts->'parts' as parts,
+       b.sent_at as "sentAt", l.answer_by::text as "answerBy",
        a.acknowledged_at as "acknowledgedAt",
        array(
          select n.building_id from letter_buildings n

@@ -1,5 +1,6 @@
 import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
 import type { BATCH_STATES } from '../../shared/schemas/letter-batches.ts';
+import type { LetterWords } from '../../shared/presentation/letter-text.ts';
 import type { LetterKind } from '../../shared/schemas/letter-settings.ts';
 
 /** A batch of letters with who did what, and how far its letters are. */
@@ -75,6 +76,16 @@ export function findBatches(
   );
 }
 
+/** What was written for a batch, with its marks; null where it went by its template. */
+export async function findBatchText(database: Sequelize, id: string): Promise<LetterWords | null> {
+  const [row] = await database.query<LetterWords>(
+    `select own_subject as subject, own_body as body from letter_batches
+     where id = $1 and own_body is not null`,
+    { type: QueryTypes.SELECT, bind: [id] },
+  );
+  return row ?? null;
+}
+
 /** Keeps a batch with the next number. */
 export async function insertBatch(
   database: Sequelize,
@@ -86,19 +97,21 @@ export async function insertBatch(
     readonly settingsVersion: number;
     readonly runId: string | null;
     readonly letters: number;
+    readonly text: LetterWords | null;
     readonly by: string;
   },
   transaction: Transaction,
 ): Promise<void> {
   await database.query(
     `insert into letter_batches (id, scheme_id, number, kind, template_version, settings_version,
-       run_id, letters, prepared_by)
-     select $1, $2, coalesce(max(number), 0) + 1, $3, $4, $5, $6::uuid, $7, $8
+       run_id, letters, prepared_by, own_subject, own_body)
+     select $1, $2, coalesce(max(number), 0) + 1, $3, $4, $5, $6::uuid, $7, $8, $9, $10
      from letter_batches where scheme_id = $2`,
     {
       bind: [
         ...[batch.id, batch.schemeId, batch.kind, batch.templateVersion],
         ...[batch.settingsVersion, batch.runId, batch.letters, batch.by],
+        ...[batch.text?.subject ?? null, batch.text?.body ?? null],
       ],
       transaction,
     },

@@ -55,15 +55,17 @@ export async function insertExceptions(
   );
 }
 
-/** Who was left out of a batch, and why. */
+/** Who was left out of a batch, and why; of erased parties the administrator alone reads why. */
 export function findExceptions(
   database: Sequelize,
   batchId: string,
+  isAdministrator: boolean,
 ): Promise<{ name: string; why: string }[]> {
   return database.query<{ name: string; why: string }>(
-    `select p.name, e.why from letter_exceptions e join parties p on p.id = e.party_id
+    `select p.name, case when p.erased_at is null or $2 then e.why else '' end as why
+     from letter_exceptions e join parties p on p.id = e.party_id
      where e.batch_id = $1 order by p.name collate natural_order`,
-    { type: QueryTypes.SELECT, bind: [batchId] },
+    { type: QueryTypes.SELECT, bind: [batchId, isAdministrator] },
   );
 }
 
@@ -119,6 +121,8 @@ export function findLetters(
        l.party_id as "partyId", l.channel, l.name, l.address, l.email, l.subject,
        l.facts->'parts' as parts, l.reasons, l.answer_by::text as "answerBy", b.sent_at as "sentAt",
        case when b.state <> 'sent' then 'not sent'
+         when p.erased_at is not null and o.id is null and coalesce(x.printed_at > p.erased_at, true)
+           then 'not sent'
          when l.channel = 'post' and x.batch_id is null then 'to be printed'
          when l.channel = 'post' then 'printed'
          when o.state = 'sent' and o.was_sent_again then 'sent again after a stop'

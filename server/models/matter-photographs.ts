@@ -1,5 +1,6 @@
 import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
 import type { PhotographType } from '../../shared/schemas/visits.ts';
+import { standingParty } from './standing-party.ts';
 
 /** The file of a photograph that has arrived: its hash, type and length. */
 export type PhotographFile = {
@@ -14,6 +15,8 @@ export type MatterPhotograph = {
   /** Its place among those of its message, from 0. */
   readonly number: number;
   readonly file: PhotographFile | null;
+  /** Whether the personal data of whoever sent it have been erased. */
+  readonly isErased: boolean;
 };
 
 type Place = { readonly matterId: string; readonly matterPhotographId: string };
@@ -28,10 +31,12 @@ export async function findMatterPhotograph(
   const [found] = await database.query<MatterPhotograph>(
     `select p.id, p.number,
        case when f.photograph_id is null then null
-         else json_build_object('sha256', f.sha256, 'type', f.type, 'bytes', f.bytes) end as file
+         else json_build_object('sha256', f.sha256, 'type', f.type, 'bytes', f.bytes) end as file,
+       party.erased_at is not null as "isErased"
      from matter_photographs p
      join matter_messages g on g.id = p.message_id
      join matters m on m.id = g.matter_id
+     cross join lateral (${standingParty('m.party_id')}) party
      left join matter_photograph_files f on f.photograph_id = p.id
      where m.scheme_id = $1 and m.id = $2 and p.id = $3
        and ($4::uuid[] is null or (m.party_id = any($4) and g.side <> 'note'))`,

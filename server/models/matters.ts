@@ -1,6 +1,7 @@
 import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
 import type { Matter, MatterLine } from '../../shared/schemas/matter-answers.ts';
 import type { MattersQuery } from '../../shared/schemas/matters.ts';
+import type { Actor } from '../policies/actor.ts';
 import { standingParty } from './standing-party.ts';
 
 type Dated = { readonly openedAt: Date; readonly changedAt: Date };
@@ -19,7 +20,8 @@ const LINE = `m.id, m.number, m.kind, m.title, m.suggestion, m.state, m.due::tex
   json_build_object('id', party.id, 'name', party.name) as party,
   case when a.id is null then null else json_build_object('id', a.id, 'name', a.name) end
     as "assignedTo",
-  (m.state = 'open' and m.due < current_date) as "isOverdue"`;
+  (m.state = 'open' and m.due < current_date) as "isOverdue",
+  party.erased_at is not null as "isErased"`;
 
 const FROM = `from matters m
   join buildings b on b.id = m.building_id
@@ -28,17 +30,19 @@ const FROM = `from matters m
 
 const SEARCHED = `
   $7::text is null
-  or position(lower($7) in lower(concat_ws(' ', '#' || m.number, m.title, party.name, b.reference,
-    b.name, b.address))) > 0
-  or exists (
-    select from matter_messages s where s.matter_id = m.id and position(lower($7) in lower(s.text)) > 0)`;
+  or position(lower($7) in lower(concat_ws(' ', '#' || m.number, b.reference, b.name, b.address))) > 0
+  or ($8 or party.erased_at is null) and (position(lower($7) in lower(m.title || ' ' || party.name)) > 0 or exists (
+    select from matter_messages s where s.matter_id = m.id and position(lower($7) in lower(s.text)) > 0))`;
 
-/** The matters of a scheme that a filter means: what is due first, then the others, the newest first. */
+/**
+ * The matters of a scheme that a filter means: what is due first, then the others, the newest first. What
+ * erased parties wrote is found by the administrator alone.
+ */
 export function findMatters(
   database: Sequelize,
   schemeId: string,
   query: MattersQuery,
-  personId: string,
+  reader: Actor,
 ): Promise<FoundMatterLine[]> {
   const { state, kind, mine, overdue, building, text } = query;
   return database.query<FoundMatterLine>(
@@ -63,10 +67,11 @@ export function findMatters(
         schemeId,
         state ?? null,
         kind ?? null,
-        mine === true ? personId : null,
+        mine === true ? reader.id : null,
         overdue === true,
         building ?? null,
         text === undefined || text === '' ? null : text,
+        reader.isAdministrator,
       ],
     },
   );

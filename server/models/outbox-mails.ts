@@ -31,11 +31,13 @@ export async function insertMails(
 ): Promise<void> {
   for (let from = 0; from < mails.length; from += AT_ONCE) {
     await database.query(
-      `insert into outbox (id, scheme_id, letter_id, recipient, subject, parts, link_id, calendar, is_reminder)
+      `insert into outbox (id, scheme_id, letter_id, recipient, subject, parts, link_id, calendar, is_reminder,
+         party_id)
        select id, "schemeId", "letterId", recipient, subject, parts, "linkId", calendar,
-         coalesce("isReminder", false)
+         coalesce("isReminder", false), "partyId"
        from jsonb_to_recordset($1::jsonb) as mail (id uuid, "schemeId" uuid, "letterId" uuid,
-         recipient text, subject text, parts jsonb, "linkId" uuid, calendar text, "isReminder" boolean)`,
+         recipient text, subject text, parts jsonb, "linkId" uuid, calendar text, "isReminder" boolean,
+         "partyId" uuid)`,
       { bind: [JSON.stringify(mails.slice(from, from + AT_ONCE))], transaction },
     );
   }
@@ -114,6 +116,23 @@ export async function putOffMail(
     `update outbox set refusals = refusals + 1, next_try_at = $2, server_words = $3 where id = $1`,
     { bind: [id, until, words], transaction },
   );
+}
+
+/** Ends what waits to go to or for parties whose personal data are erased; gives how much that was. */
+export async function endMailsOfParties(
+  database: Sequelize,
+  partyIds: readonly string[],
+  transaction: Transaction,
+): Promise<number> {
+  const ended = await database.query(
+    `update outbox set state = 'failed', ended_at = now(),
+       server_words = 'Personal data were erased before it was sent.'
+     where state = 'waiting' and (party_id = any($1::uuid[])
+       or letter_id in (select id from letters where party_id = any($1::uuid[])))
+     returning id`,
+    { type: QueryTypes.SELECT, bind: [partyIds], transaction },
+  );
+  return ended.length;
 }
 
 /** What waits, with the time from which on it may be tried. */

@@ -114,6 +114,15 @@ export async function findMergedInto(
   return rows.map(({ id }) => id);
 }
 
+/** The last day on which letters to an erased party are kept; null where it is not erased. */
+export async function findKeptUntil(database: Sequelize, partyId: string): Promise<string | null> {
+  const [erasure] = await database.query<{ keepUntil: string }>(
+    'select keep_until::text as "keepUntil" from party_erasures where party_id = $1',
+    { type: QueryTypes.SELECT, bind: [partyId] },
+  );
+  return erasure?.keepUntil ?? null;
+}
+
 /** How many parties one represents. */
 export async function countRepresented(
   database: Sequelize,

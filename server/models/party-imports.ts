@@ -111,6 +111,20 @@ export async function updatePartyImport(
   );
 }
 
+/** Gives up every import of a scheme that is not taken over yet; what their files held is forgotten. */
+export async function giveUpOpenImports(
+  database: Sequelize,
+  schemeId: string,
+  transaction: Transaction,
+): Promise<number> {
+  const ended = await database.query(
+    `update party_imports set state = 'given up', rows = null, ended_at = now()
+     where scheme_id = $1 and state = 'checked' returning id`,
+    { type: QueryTypes.SELECT, bind: [schemeId], transaction },
+  );
+  return ended.length;
+}
+
 /** Ends an import; of what was taken over the report stays without names, else nothing stays. */
 export async function endPartyImport(
   database: Sequelize,

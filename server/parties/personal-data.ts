@@ -1,18 +1,25 @@
 import { readParty } from '../commands/kept-party.ts';
+import { AppError } from '../errors.ts';
 import { findMergedInto, findPartiesById } from '../models/parties.ts';
 import { findPartyChanges } from '../models/party-changes.ts';
 import { findPersonalData } from '../models/personal-data.ts';
 import type { Scheme } from '../models/scheme.ts';
+import type { Actor } from '../policies/actor.ts';
 import { presentParty } from '../presenters/party.ts';
 import type { Services } from '../services.ts';
 
-/** All that is held of a party and of those merged into it, to be handed over to them. */
+/**
+ * All that is held of a party and of those merged into it, to be handed over to them. What is kept of an
+ * erased one is there for the administrator alone.
+ */
 export async function personalData(
   { database }: Pick<Services, 'database'>,
+  actor: Actor,
   scheme: Scheme,
   partyId: string,
 ): Promise<object> {
   const party = await readParty(database, scheme.id, partyId);
+  if (party.erasedAt !== null && !actor.isAdministrator) throw new AppError('not-found');
   const merged = await findMergedInto(database, party.id);
   const ids = [party.id, ...merged];
   const [others, history, beside] = await Promise.all([

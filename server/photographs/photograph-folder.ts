@@ -44,3 +44,8 @@ export async function keepInFolder(folder: string, bytes: Buffer): Promise<strin
   await writeWhole(file, bytes);
   return sha256;
 }
+
+/** Removes a photograph from the folder; one that is not there is no fault. */
+export async function removeFromFolder(folder: string, sha256: string): Promise<void> {
+  await rm(path.join(folder, placeOfPhotograph(sha256)), { force: true });
+}

@@ -85,9 +85,13 @@ function standingOf(letter: FoundLetter) {
 /** What leaves the server of a letter in a list. */
 export function presentListedLetter(letter: FoundLetter, actor: Actor): ListedLetter {
   const { batchId, batchNumber, kind } = letter;
-  const standing = standingOf(letter);
-  const name = isHidden(letter, actor) ? '' : standing.name;
-  return listedLetterSchema.parse({ ...standing, name, batchId, batchNumber, kind });
+  // words of a mail server name the address
+  const hidden = isHidden(letter, actor) ? { name: '', serverWords: null } : {};
+  return listedLetterSchema.parse({
+    ...standingOf(letter),
+    ...hidden,
+    ...{ batchId, batchNumber, kind },
+  });
 }
 
 /** What leaves the server of a letter, whole; null where the caller may not see it any more. */

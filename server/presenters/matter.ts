@@ -7,6 +7,7 @@ import {
   type OwnMatter,
 } from '../../shared/schemas/matter-answers.ts';
 import type { FoundMatter, FoundMatterLine } from '../models/matters.ts';
+import type { Actor } from '../policies/actor.ts';
 
 type Person = { readonly id: string; readonly name: string };
 
@@ -19,9 +20,21 @@ function presentHead(matter: FoundMatter | FoundMatterLine) {
   };
 }
 
-function presentForTeam(matter: FoundMatter | FoundMatterLine) {
-  const { number, party, assignedTo, isOverdue, version } = matter;
-  return { ...presentHead(matter), number, party, assignedTo, isOverdue, version };
+/** What was written is the administrator's alone to see once personal data have been erased. */
+function isHidden(
+  { isErased }: FoundMatter | FoundMatterLine,
+  { isAdministrator }: Actor,
+): boolean {
+  return isErased && !isAdministrator;
+}
+
+function presentForTeam(matter: FoundMatter | FoundMatterLine, actor: Actor) {
+  const { number, party, assignedTo, isOverdue, isErased, version } = matter;
+  return {
+    ...presentHead(matter),
+    ...(isHidden(matter, actor) && { title: '', suggestion: null }),
+    ...{ number, party, assignedTo, isOverdue, isErased, version },
+  };
 }
 
 function presentMessage(message: Matter['messages'][number]) {
@@ -30,16 +43,21 @@ function presentMessage(message: Matter['messages'][number]) {
 }
 
 /** What leaves the server of a matter to the inbox. */
-export function presentMatterLine(matter: FoundMatterLine): MatterLine {
+export function presentMatterLine(matter: FoundMatterLine, actor: Actor): MatterLine {
   const { building, messages } = matter;
-  return matterLineSchema.parse({ ...presentForTeam(matter), building, messages });
+  return matterLineSchema.parse({ ...presentForTeam(matter, actor), building, messages });
 }
 
 /** What leaves the server of a matter to the team. */
-export function presentMatter(matter: FoundMatter, assessors: readonly Person[]): Matter {
-  const { building, isMailed, messages } = matter;
+export function presentMatter(
+  matter: FoundMatter,
+  assessors: readonly Person[],
+  actor: Actor,
+): Matter {
+  const { building, isMailed } = matter;
+  const messages = isHidden(matter, actor) ? [] : matter.messages;
   return matterSchema.parse({
-    ...presentForTeam(matter),
+    ...presentForTeam(matter, actor),
     ...{ building, isMailed, assessors },
     messages: messages.map((message) => ({
       ...presentMessage(message),

@@ -61,12 +61,13 @@ export function presentOwn(
     readonly figures: readonly FoundOwnFigures[];
   },
 ): Own {
-  const { contact, milestones } = found.settings;
+  const { contact, milestones, repairs, answerDays, timeZone } = found.settings;
   const { name, email, phone, hours } = contact;
   return ownSchema.parse({
     scheme: { id: scheme.id, name: scheme.name },
     contact: { name, email, phone, hours },
-    milestones,
+    ...{ milestones, answerDays, timeZone },
+    repairs: repairs.words,
     letters: found.letters.map(presentOwnLetter),
     buildings: found.buildings.map((building) => {
       const figures = found.figures.find(({ buildingId }) => buildingId === building.id);

@@ -43,15 +43,16 @@ export function presentParties(page: {
   });
 }
 
-/** What leaves the server of a party and its history. */
+/** What leaves the server of a party and its history, and until when letters to an erased one are kept. */
 export function presentPartyDetail(
   party: FoundParty,
   changes: readonly FoundPartyChange[],
+  lettersKeptUntil: string | null,
 ): PartyDetail {
   const history = changes.map(({ at, by, action, before, after }) => {
     return { at: at.toISOString(), by, action, before, after };
   });
-  return partyDetailSchema.parse({ party: told(party), history });
+  return partyDetailSchema.parse({ party: told(party), lettersKeptUntil, history });
 }
 
 /** What leaves the server of parties that are likely the same. */

@@ -20,7 +20,7 @@ import { withdrawLetters } from '../commands/withdraw-letters.ts';
 import { lettersPdf } from '../documents/letter/letter-pdf.ts';
 import { AppError } from '../errors.ts';
 import { findRecipients } from '../letters/find-recipients.ts';
-import { findBatches } from '../models/letter-batches.ts';
+import { findBatches, findBatchText } from '../models/letter-batches.ts';
 import { heldSettings } from '../models/letter-settings.ts';
 import { findExceptions, findLetters } from '../models/letters.ts';
 import { Run } from '../models/run.ts';
@@ -97,12 +97,14 @@ export const letterRoutes = [
     params: batchParamsSchema,
     handle: async ({ services: { database }, actor, scheme, params: { batchId } }) => {
       const batch = await readBatch(database, scheme.id, batchId);
-      const [letters, leftOut] = await Promise.all([
+      const [letters, leftOut, text] = await Promise.all([
         findLetters(database, scheme.id, { batchId }),
-        findExceptions(database, batchId),
+        findExceptions(database, batchId, actor.isAdministrator),
+        findBatchText(database, batchId),
       ]);
       return {
         batch: presentBatch(batch),
+        text,
         letters: letters.map((letter) => presentListedLetter(letter, actor)),
         leftOut,
       };
@@ -144,11 +146,11 @@ export const letterRoutes = [
     path: `${BATCHES}/:batchId/print-file`,
     access: { scheme: 'readLetters' },
     params: batchParamsSchema,
-    handle: async ({ services, actor, scheme, params: { batchId }, res }) => {
+    handle: async ({ services, scheme, params: { batchId }, res }) => {
       const { number } = await readBatch(services.database, scheme.id, batchId);
       const which = { batchId, byPost: true };
       const found = await findLetters(services.database, scheme.id, which);
-      const letters = found.filter((letter) => presentLetter(letter, actor) !== null);
+      const letters = found.filter(({ isErased }) => !isErased);
       if (letters.length === 0) throw new AppError('not-found', 'No letter of these goes by post.');
       const bytes = await lettersPdf(services, scheme.id, letters, true);
       res.attachment(`letters-${number}-for-the-post.pdf`).type('application/pdf').end(bytes);

@@ -15,13 +15,16 @@ import { findAssessors } from '../models/find-assessors.ts';
 import { findMatterPhotograph } from '../models/matter-photographs.ts';
 import { findMatters, type FoundMatter } from '../models/matters.ts';
 import type { Scheme } from '../models/scheme.ts';
+import type { Actor } from '../policies/actor.ts';
 import { sendPhotograph } from '../photographs/send-photograph.ts';
 import { presentMatter, presentMatterLine } from '../presenters/matter.ts';
 import type { Services } from '../services.ts';
 import { defineRoute } from './define-route.ts';
 
-async function answerWith({ database }: Services, scheme: Scheme, matter: FoundMatter) {
-  return presentMatter(matter, await findAssessors(database, scheme.id));
+type Asked = { readonly services: Services; readonly scheme: Scheme; readonly actor: Actor };
+
+async function answerWith({ services, scheme, actor }: Asked, matter: FoundMatter) {
+  return presentMatter(matter, await findAssessors(services.database, scheme.id), actor);
 }
 
 export const matterRoutes = [
@@ -32,11 +35,12 @@ export const matterRoutes = [
     query: mattersQuerySchema,
     handle: async ({ services: { database }, actor, scheme, query }) => {
       const [matters, assessors] = await Promise.all([
-        findMatters(database, scheme.id, query, actor.id),
+        findMatters(database, scheme.id, query, actor),
         findAssessors(database, scheme.id),
       ]);
       const total = matters[0]?.total ?? 0;
-      return { total, matters: matters.map(presentMatterLine), assessors };
+      const lines = matters.map((matter) => presentMatterLine(matter, actor));
+      return { total, matters: lines, assessors };
     },
   }),
   defineRoute({
@@ -44,9 +48,9 @@ export const matterRoutes = [
     path: '/api/schemes/:schemeId/matters/:matterId',
     access: { scheme: 'readMatters' },
     params: matterParamsSchema,
-    handle: async ({ services, scheme, params }) => {
-      const which = { id: params.matterId };
-      return answerWith(services, scheme, await readMatter(services.database, scheme.id, which));
+    handle: async ({ services, actor, scheme, params }) => {
+      const found = await readMatter(services.database, scheme.id, { id: params.matterId });
+      return answerWith({ services, scheme, actor }, found);
     },
   }),
   defineRoute({
@@ -58,7 +62,7 @@ export const matterRoutes = [
     handle: async ({ services, actor, scheme, params, body, res }) => {
       const message = { ...body, matterId: params.matterId };
       const { matter, isNew } = await answerMatter(services, actor, scheme, message);
-      res.status(isNew ? 201 : 200).json(await answerWith(services, scheme, matter));
+      res.status(isNew ? 201 : 200).json(await answerWith({ services, scheme, actor }, matter));
     },
   }),
   defineRoute({
@@ -69,7 +73,8 @@ export const matterRoutes = [
     body: changeMatterSchema,
     handle: async ({ services, actor, scheme, params, body }) => {
       const asked = { ...body, id: params.matterId };
-      return answerWith(services, scheme, await changeMatter(services, actor, scheme, asked));
+      const changed = await changeMatter(services, actor, scheme, asked);
+      return answerWith({ services, scheme, actor }, changed);
     },
   }),
   defineRoute({
@@ -80,7 +85,8 @@ export const matterRoutes = [
     body: takeSuggestionSchema,
     handle: async ({ services, actor, scheme, params, body }) => {
       const asked = { ...body, id: params.matterId };
-      return answerWith(services, scheme, await takeSuggestion(services, actor, scheme, asked));
+      const taken = await takeSuggestion(services, actor, scheme, asked);
+      return answerWith({ services, scheme, actor }, taken);
     },
   }),
   defineRoute({
@@ -88,9 +94,11 @@ export const matterRoutes = [
     path: '/api/schemes/:schemeId/matters/:matterId/photographs/:matterPhotographId',
     access: { scheme: 'readMatters' },
     params: matterPhotographParamsSchema,
-    handle: async ({ scheme, params, ...call }) => {
+    handle: async ({ actor, scheme, params, ...call }) => {
       const found = await findMatterPhotograph(call.services.database, scheme.id, params);
-      if (found === undefined) throw new AppError('not-found');
+      if (found === undefined || (found.isErased && !actor.isAdministrator)) {
+        throw new AppError('not-found');
+      }
       await sendPhotograph(call, found);
     },
   }),

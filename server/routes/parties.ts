@@ -15,7 +15,7 @@ import { readParty } from '../commands/kept-party.ts';
 import { mergeParties } from '../commands/merge-parties.ts';
 import { sendParties } from '../exports/send-parties.ts';
 import { sendPartyForm } from '../exports/send-party-form.ts';
-import { findLikelySame, findParties, findPartiesById } from '../models/parties.ts';
+import { findKeptUntil, findLikelySame, findParties, findPartiesById } from '../models/parties.ts';
 import { findPartyChanges } from '../models/party-changes.ts';
 import { personalData } from '../parties/personal-data.ts';
 import {
@@ -76,7 +76,8 @@ export const partyRoutes = [
     params: partyParamsSchema,
     handle: async ({ services: { database }, scheme, params }) => {
       const party = await readParty(database, scheme.id, params.partyId);
-      return presentPartyDetail(party, await findPartyChanges(database, [party.id]));
+      const changes = await findPartyChanges(database, [party.id]);
+      return presentPartyDetail(party, changes, await findKeptUntil(database, party.id));
     },
   }),
   defineRoute({
@@ -105,8 +106,8 @@ export const partyRoutes = [
     path: '/api/schemes/:schemeId/parties/:partyId/personal-data',
     access: { scheme: 'readParties' },
     params: partyParamsSchema,
-    handle: async ({ services, scheme, params, res }) => {
-      const data = await personalData(services, scheme, params.partyId);
+    handle: async ({ services, actor, scheme, params, res }) => {
+      const data = await personalData(services, actor, scheme, params.partyId);
       res.set('Cache-Control', 'no-store');
       res.attachment('personal-data.json').type('application/json');
       res.send(JSON.stringify(data, null, 2));

@@ -1,11 +1,5 @@
 import type { LetterKind } from '../schemas/letter-settings.ts';
-
-/**
- * What a letter says, with marks.
- *
- * Units: none. Valid: marks of LETTER_MARKS. Source: [own].
- */
-export type LetterTemplate = { readonly subject: string; readonly body: string };
+import type { LetterWords } from './letter-text.ts';
 
 const END = `{cautions}
 
@@ -20,7 +14,7 @@ const PAGE = `On your own page you can read all of this at any time, choose a da
  *
  * Units: none. Valid: read only; an administrator writes later versions. Source: [own].
  */
-export const DEFAULT_TEMPLATES: Readonly<Record<LetterKind, LetterTemplate>> = {
+export const DEFAULT_TEMPLATES: Readonly<Record<LetterKind, LetterWords>> = {
   'first information': {
     subject: 'A new tunnel near {place}',
     body: `Dear {name},
@@ -29,7 +23,7 @@ A new tunnel is planned near {place}. This letter tells you what that means for 
 
 {buildings}
 
-{movement} {looks}
+{movement} {looks} {repairs}
 
 {stays}
 
@@ -49,7 +43,7 @@ ${END}`,
     subject: 'We would like to look at {place} before we tunnel',
     body: `Dear {name},
 
-Before we tunnel, we would like to look at {place}. We take a picture of each room and note each crack. You get a copy. It costs you nothing. It helps us both: if a new crack shows later, we can all see that it is new.
+Before we tunnel, we would like to look at {place}. We take a picture of each room and note each crack. You get a copy. It helps us both: if a new crack shows later, we can all see that it is new.
 
 It is about:
 
@@ -59,7 +53,7 @@ The visit takes about an hour. Please choose a day with us by {answer by}. You c
 
 ${PAGE}
 
-{movement} {looks}
+{movement} {looks} {repairs}
 
 {sure}
 
@@ -73,7 +67,7 @@ We have looked at what the tunnel could do here. To be sure, an engineer has to 
 
 {buildings}
 
-{movement} {looks}
+{movement} {looks} {repairs}
 
 {sure}
 
@@ -91,7 +85,7 @@ The tunnel will soon pass near {place}. This is what you can expect. It is about
 
 {buildings}
 
-You may hear a low hum for some days, most of all at night. {movement} {looks}
+You may hear a low hum for some days, most of all at night. {movement} {looks} {repairs}
 
 {stays}
 
@@ -101,7 +95,7 @@ What happens, and when:
 
 {dates}
 
-We measure the ground all the time. If you see a new crack, or a door sticks, tell us at once. Somebody will come and look.
+We measure the ground all the time. If you see a new crack, or a door sticks, tell us at once.
 
 Please tell us by {answer by} that this letter has reached you.
 
@@ -122,6 +116,8 @@ We have looked closely at {place}, and an engineer has checked what we found. It
 This is what we will do:
 
 {measures}
+
+{repairs}
 
 {movement} {looks}
 

@@ -1,4 +1,11 @@
 /**
+ * What a letter says, with marks.
+ *
+ * Units: none. Valid: marks of LETTER_MARKS. Source: [own].
+ */
+export type LetterWords = { readonly subject: string; readonly body: string };
+
+/**
  * What a letter says with the marks put in: a paragraph, a list, or the link to the owner's page.
  *
  * Units: none. Valid: in the order of the text. Source: [own].
@@ -19,6 +26,7 @@ export const LETTER_MARKS = {
   movement: 'How much the ground sinks, in millimetres and beside something from everyday life',
   looks: 'What that could look like, in everyday words',
   stays: 'What stays usable',
+  repairs: 'What you promise of repairs and who pays, as the settings have it',
   sure: 'How sure the forecast is',
   'answer by': 'The day by which an answer is asked for',
   contact: 'Whom to ask: name, e-mail, telephone, hours',

@@ -5,7 +5,7 @@ const WORDS: Readonly<Record<DecisionKind, string>> = {
   'let go at stage 2': 'What moves here is so little that nothing has to be done to protect it.',
   'go to stage 3': 'We want to look more closely before we decide. We will write to you again.',
   'adopt a category': 'We have looked at it closely, and know what to expect.',
-  'protective measures': 'It will be protected before the tunnel comes near.',
+  'protective measures': 'We have looked at it closely. It is to be protected.',
   'no measures': 'We have looked at it closely. It need not be protected.',
 };
 

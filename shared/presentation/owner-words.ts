@@ -70,14 +70,14 @@ export function ownerHeadline(
 
 const LOOKS: readonly [string, string, string, string, string] = [
   'You are not likely to notice anything.',
-  'You may see hairline cracks in plaster. They are put right when you next decorate, and we pay.',
-  'You may see cracks in plaster, and a few in outside walls. They are easy to fill. A door or a window may need easing. We put this right, and we pay.',
-  'We expect cracks that a builder has to mend. Doors and windows may stick, and a pipe may need work. We plan how to keep this small. We put right what is left, and we pay.',
-  'We expect damage that must be repaired and will protect the building first. An engineer will visit you and show you how. No tunnel comes near before that is done.',
+  'You may see hairline cracks in plaster. They can be filled when you next decorate.',
+  'You may see cracks in plaster, and a few in outside walls. They are easy to fill. A door or a window may need easing.',
+  'We expect cracks that a builder has to mend. Doors and windows may stick, and a pipe may need work. We plan how to keep this small.',
+  'We expect damage that must be repaired. The building has to be protected first. We talk with you about how that can be done.',
 ];
 
 /**
- * What the damage could look like, and what is done about it.
+ * What the damage could look like. Who repairs it and who pays is the promoter's to say.
  *
  * Units: none. Valid: null where too little moves for a category. Source: [own], after the ease of repair in
  * burland-broms-de-mello-1977.
@@ -115,8 +115,8 @@ export function staysUsable(category: Category | null, place: OwnerPlace): strin
   if (central <= 1) return `Doors and windows go on opening. ${stay}`;
   if (central === 2) return `A door or a window may stick a little. ${stay}`;
   if (central === 3)
-    return 'We agree with you beforehand when repairs are made, and how you get on meanwhile.';
-  return 'We agree with you beforehand what you can use, and when. If you need another place for a time, we find it with you.';
+    return 'You may have to leave a room free while repairs are made. We talk with you beforehand about when that suits you.';
+  return 'We agree with you beforehand what you can use, and when. If you need another place for a time, please talk to us.';
 }
 
 /**

@@ -1,35 +1,39 @@
 import { z } from 'zod';
+import { letterExceptions } from './letter-exceptions.ts';
 import { LETTER_LIMITS } from './letter-limits.ts';
 import { LETTER_KINDS } from './letter-settings.ts';
+import { letterWordsSchema } from './letter-templates.ts';
 import { letterReasonSchema, listedLetterSchema } from './letters.ts';
 import { writtenText } from './written.ts';
 
 const kind = z.enum(LETTER_KINDS);
 
 /**
- * Who is left out although a rule names them, or gets a letter although none does, and why.
+ * Which letters would be made: who is left out and who is chosen by hand.
  *
- * Units: none. Valid: a reason always. Source: [own].
+ * Units: none. Valid: a reason for each of them. Source: [own].
  */
-const exceptionSchema = z.strictObject({
-  partyId: z.uuid(),
-  why: writtenText(LETTER_LIMITS.why).min(1, 'Say why.'),
-});
-
-const exceptions = z.array(exceptionSchema).max(LETTER_LIMITS.chosen);
+export const batchPreviewSchema = z.strictObject({ kind, ...letterExceptions });
 
 /**
- * A batch of letters to be made: who is left out and who is chosen by hand; `expected` is how many letters
- * were seen before.
+ * Which letters would be made.
+ *
+ * Units: none. Valid: parsed by batchPreviewSchema. Source: [own].
+ */
+export type BatchPreview = z.infer<typeof batchPreviewSchema>;
+
+/**
+ * A batch of letters to be made; `expected` is how many letters were seen before. Free text is written for the
+ * batch, all other kinds go by their template.
  *
  * Units: none. Valid: refused where another number would be made by now. Source: [own].
  */
-export const newBatchSchema = z.strictObject({
-  kind,
-  leftOut: exceptions,
-  chosen: exceptions,
-  expected: z.number().int().min(1),
-});
+export const newBatchSchema = batchPreviewSchema
+  .extend({ text: letterWordsSchema.nullable(), expected: z.number().int().min(1) })
+  .refine((asked) => (asked.kind === 'free text') === (asked.text !== null), {
+    path: ['text'],
+    error: 'Free text is written with its letters, and nothing else is.',
+  });
 
 /**
  * A batch of letters to be made.
@@ -37,13 +41,6 @@ export const newBatchSchema = z.strictObject({
  * Units: none. Valid: parsed by newBatchSchema. Source: [own].
  */
 export type NewBatch = z.infer<typeof newBatchSchema>;
-
-/**
- * Which letters would be made.
- *
- * Units: none. Valid: as newBatchSchema without the number. Source: [own].
- */
-export const batchPreviewSchema = newBatchSchema.omit({ expected: true });
 
 /**
  * Who gets a letter of a kind and why, and how many letters that makes; `short` lists at most so many.
@@ -144,12 +141,13 @@ export type Batch = z.infer<typeof batchSchema>;
 export const batchesSchema = z.array(batchSchema);
 
 /**
- * A batch with its letters and who was left out.
+ * A batch with its letters and who was left out; `text` is what was written for it, with its marks.
  *
- * Units: as batchSchema. Valid: letters by number. Source: [own].
+ * Units: as batchSchema. Valid: letters by number; text of free text only. Source: [own].
  */
 export const batchDetailSchema = z.strictObject({
   batch: batchSchema,
+  text: letterWordsSchema.nullable(),
   letters: z.array(listedLetterSchema),
   leftOut: z.array(z.strictObject({ name: z.string(), why: z.string() })),
 });

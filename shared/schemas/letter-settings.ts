@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { LIMITS } from './limits.ts';
+import { answerDaysSchema, holidaysSchema, repairsSchema, timeZoneSchema } from './owner-terms.ts';
 import { registerFilterSchema } from './register.ts';
 import { writtenLine } from './written.ts';
 
@@ -81,10 +82,11 @@ export type LetterRule = z.infer<typeof letterRuleSchema>;
 
 /**
  * What letters of a scheme go by: who gets which, how long owners have, whom they may ask, what happens
- * when, and on what ground and for how long letters are kept once personal data are erased.
+ * when, on what ground and for how long letters are kept once personal data are erased, what is said of
+ * repairs, by when owners are answered, and in which time zone and round which holidays that is.
  *
- * Units: days; keepYears years. Valid: a reminder goes out after the answer was due, the escalation list
- * follows it. Source: [own]; default days [common].
+ * Units: days; answerDays working days; keepYears years. Valid: a reminder goes out after the answer was due,
+ * the escalation list follows it; what older versions do not say is as by default. Source: [own]; default days [common].
  */
 export const letterSettingsSchema = z
   .strictObject({
@@ -110,6 +112,10 @@ export const letterSettingsSchema = z
       .max(SETTINGS_LIMITS.milestones),
     keepGround: writtenLine(SETTINGS_LIMITS.words).min(1, 'Say on what ground letters are kept.'),
     keepYears: z.number('Write a number.').int().min(1).max(SETTINGS_LIMITS.years),
+    repairs: repairsSchema,
+    answerDays: answerDaysSchema,
+    timeZone: timeZoneSchema,
+    holidays: holidaysSchema,
   })
   .refine(({ answerWithin, remindAfter }) => remindAfter >= answerWithin, {
     path: ['remindAfter'],
@@ -205,7 +211,7 @@ function defaultRules(date: string): LetterRule[] {
  * Source: 1 mm and 30 m [common]; days [common].
  */
 export function defaultLetterSettings(date: string): LetterSettings {
-  return {
+  return letterSettingsSchema.parse({
     rules: defaultRules(date),
     answerWithin: 21,
     remindAfter: 28,
@@ -221,5 +227,5 @@ export function defaultLetterSettings(date: string): LetterSettings {
     keepGround:
       'Letters are evidence of what owners were told, until claims can no longer be made.',
     keepYears: 12,
-  };
+  } satisfies z.input<typeof letterSettingsSchema>);
 }

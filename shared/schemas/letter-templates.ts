@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { letterExceptions } from './letter-exceptions.ts';
 import { LETTER_LIMITS } from './letter-limits.ts';
 import { LETTER_KINDS } from './letter-settings.ts';
 import { letterPartSchema } from './letters.ts';
@@ -11,15 +12,21 @@ const subject = writtenText(LETTER_LIMITS.subject)
   .regex(/^\P{Cc}*$/u, 'The subject is one line.');
 
 /**
+ * What a letter says, with marks.
+ *
+ * Units: none. Valid: unknown marks are refused when it is kept. Source: [own].
+ */
+export const letterWordsSchema = z.strictObject({
+  subject,
+  body: writtenText(LETTER_LIMITS.body).min(1, 'Write the letter.'),
+});
+
+/**
  * A new version of a template, on top of the one that was seen; 0 is the one that a scheme starts with.
  *
  * Units: none. Valid: an older version is refused, so are unknown marks. Source: [own].
  */
-export const newTemplateSchema = z.strictObject({
-  basedOn: z.number().int().min(0),
-  subject,
-  body: writtenText(LETTER_LIMITS.body).min(1, 'Write the letter.'),
-});
+export const newTemplateSchema = letterWordsSchema.extend({ basedOn: z.number().int().min(0) });
 
 /**
  * A template as it holds.
@@ -57,14 +64,15 @@ export const templatesSchema = z.array(templateSchema);
 export const templateParamsSchema = z.object({ schemeId: z.string(), letterKind: kind });
 
 /**
- * A template that is being written, to be looked at as a real party would read it; without one, as the first
- * whom the rules name.
+ * A letter that is being written, to be looked at as a real party would read it; without one, as the first who
+ * gets it. `leftOut` and `chosen` are those of a batch.
  *
  * Units: none. Valid: any text. Source: [own].
  */
-export const templatePreviewSchema = newTemplateSchema
-  .omit({ basedOn: true })
-  .extend({ partyId: z.uuid().nullable() });
+export const templatePreviewSchema = letterWordsSchema.extend({
+  ...letterExceptions,
+  partyId: z.uuid().nullable(),
+});
 
 /**
  * A template as a party would read it, and whom it can be looked at with.

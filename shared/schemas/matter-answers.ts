@@ -85,13 +85,15 @@ const teamShape = {
   party: person,
   assignedTo: person.nullable(),
   isOverdue: z.boolean(),
+  isErased: z.boolean(),
   version: z.number(),
 };
 
 /**
  * A matter as a line of the team's inbox.
  *
- * Units: messages in pieces. Valid: overdue is open after the day that was promised. Source: [own].
+ * Units: messages in pieces. Valid: overdue is open after the day that was promised; title and
+ * suggestion of an erased party are empty but for the administrator. Source: [own].
  */
 export const matterLineSchema = z.strictObject({ ...teamShape, messages: z.number() });
 
@@ -118,7 +120,8 @@ export const mattersSchema = z.strictObject({
  * A matter with everything that was written, the oldest first.
  *
  * Units: none. Valid: building.version is what a taken over suggestion goes on top of; isMailed tells whether
- * an answer reaches the owner by e-mail. Source: [own].
+ * an answer reaches the owner by e-mail. Of an erased party what was written is there for the administrator
+ * alone. Source: [own].
  */
 export const matterSchema = z.strictObject({
   ...teamShape,

@@ -32,19 +32,6 @@ export const MATTER_STATES = ['open', 'answered', 'closed'] as const;
 export type MatterState = (typeof MATTER_STATES)[number];
 
 /**
- * By when a matter is answered.
- *
- * Units: working days, Monday to Friday, public holidays not left out. Valid: read only. Source: [own], as
- * common practice has no single figure; cracks are looked at first.
- */
-export const ANSWER_DAYS: Readonly<Record<MatterKind, number>> = {
-  question: 5,
-  concern: 2,
-  claim: 10,
-  correction: 10,
-};
-
-/**
  * The most that a matter and a message hold.
  *
  * Units: letters for texts, bytes for photographBytes, else pieces. Valid: read only. Source: [own].

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { answerDaysSchema, timeZoneSchema } from './owner-terms.ts';
 
 const point = z.tuple([z.number(), z.number()]);
 const category = z.union([z.literal(0), z.literal(1), z.literal(2), z.literal(3), z.literal(4)]);
@@ -104,7 +105,8 @@ export type OwnBuilding = z.infer<typeof ownBuildingSchema>;
 /**
  * Everything that an owner's page begins with.
  *
- * Units: as the parts. Valid: milestones are none until an administrator has written them. Source: [own].
+ * Units: as the parts; `answerDays` working days. Valid: milestones are none until an administrator has written
+ * them; `repairs` is what the promoter says of them. Source: [own].
  */
 export const ownSchema = z.strictObject({
   scheme: z.strictObject({ id: z.uuid(), name: z.string() }),
@@ -115,6 +117,9 @@ export const ownSchema = z.strictObject({
     hours: z.string(),
   }),
   milestones: z.array(z.strictObject({ when: z.string(), title: z.string(), words: z.string() })),
+  repairs: z.string(),
+  answerDays: answerDaysSchema,
+  timeZone: timeZoneSchema,
   letters: ownLettersSchema,
   buildings: z.array(ownBuildingSchema),
 });

@@ -22,12 +22,14 @@ export type ListedParty = z.infer<typeof partiesSchema>['parties'][number];
 const told = z.record(z.string(), z.unknown()).nullable();
 
 /**
- * A party with what it was before, the newest change first.
+ * A party with what it was before, the newest change first, and the last day on which its letters are kept
+ * once it is erased.
  *
  * Units: none. Valid: once erased, the changes say neither before nor after. Source: [own].
  */
 export const partyDetailSchema = z.strictObject({
   party: partySchema,
+  lettersKeptUntil: z.iso.date().nullable(),
   history: z.array(
     z.strictObject({
       at: z.iso.datetime(),

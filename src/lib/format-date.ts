@@ -1,10 +1,6 @@
-const DAY = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'long', year: 'numeric' });
-const WEEKDAY = new Intl.DateTimeFormat('en-GB', {
-  weekday: 'long',
-  day: 'numeric',
-  month: 'long',
-});
-const TIME = new Intl.DateTimeFormat('en-GB', { hour: '2-digit', minute: '2-digit' });
+const DATE = { day: 'numeric', month: 'long', year: 'numeric' } as const;
+const CLOCK = { hour: '2-digit', minute: '2-digit' } as const;
+const TIME = new Intl.DateTimeFormat('en-GB', CLOCK);
 const SHORT_DAY = new Intl.DateTimeFormat('en-GB', {
   day: 'numeric',
   month: 'short',
@@ -37,20 +33,28 @@ export function formatShortDay(at: string | Date): string {
   return SHORT_DAY.format(new Date(at));
 }
 
+/** A day of the calendar is the same everywhere; a moment is told by a zone's clocks, or by those here. */
+function inZone(at: string | Date, options: Intl.DateTimeFormatOptions, timeZone?: string): string {
+  const zone = typeof at === 'string' && at.length === '2026-12-01'.length ? 'UTC' : timeZone;
+  return new Intl.DateTimeFormat('en-GB', { ...options, timeZone: zone })
+    .format(new Date(at))
+    .replace(',', '');
+}
+
 /** As "1 December 2026". */
-export function formatDay(at: string | Date): string {
-  return DAY.format(new Date(at));
+export function formatDay(at: string | Date, timeZone?: string): string {
+  return inZone(at, DATE, timeZone);
 }
 
 /** As "Tuesday 1 December". */
 export function formatWeekday(at: string | Date): string {
-  return WEEKDAY.format(new Date(at)).replace(',', '');
+  return inZone(at, { weekday: 'long', day: 'numeric', month: 'long' });
 }
 
 /** As "Tuesday 1 December 2026, 14:05", for whoever has to be there. */
-export function formatWeekdayMoment(at: string | Date): string {
-  const moment = new Date(at);
-  return `${DAY_OF_WEEK.format(moment)} ${DAY.format(moment)}, ${TIME.format(moment)}`;
+export function formatWeekdayMoment(at: string | Date, timeZone?: string): string {
+  const day = inZone(at, { weekday: 'long', ...DATE }, timeZone);
+  return `${day}, ${inZone(at, CLOCK, timeZone)}`;
 }
 
 /** As "1 Dec 2026, 14:05", for tables. */

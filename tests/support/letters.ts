@@ -1,6 +1,11 @@
 import type TestAgent from 'supertest/lib/agent.js';
-import { batchSchema, type Batch } from '../../shared/schemas/letter-batches.ts';
-import type { LetterKind } from '../../shared/schemas/letter-settings.ts';
+import { batchSchema, type Batch, type NewBatch } from '../../shared/schemas/letter-batches.ts';
+import {
+  heldLetterSettingsSchema,
+  type HeldLetterSettings,
+  type LetterKind,
+  type LetterSettings,
+} from '../../shared/schemas/letter-settings.ts';
 import type { PartyValues } from '../../shared/schemas/parties.ts';
 import { rowsOf, twoAssessors } from './decisions.ts';
 import { aParty } from './parties.ts';
@@ -36,8 +41,9 @@ export async function aBatch(
   { firstAgent, address }: Pick<Town, 'firstAgent' | 'address'>,
   kind: LetterKind = 'first information',
   expected = 2,
+  some: Partial<NewBatch> = {},
 ): Promise<Batch> {
-  const asked = { kind, leftOut: [], chosen: [], expected };
+  const asked = { kind, leftOut: [], chosen: [], text: null, expected, ...some };
   const answer = await firstAgent.post(`${address}/letter-batches`).send(asked);
   if (answer.status !== 201) throw new Error(`${answer.status}: ${answer.text}`);
   return batchSchema.parse(answer.body);
@@ -60,4 +66,18 @@ export async function aSentBatch(
 async function checked(agent: TestAgent, address: string, batchId: string): Promise<void> {
   const check = { verdict: 'checked', comment: '' };
   await agent.post(`${address}/letter-batches/${batchId}/check`).send(check).expect(200);
+}
+
+/** The next version of a scheme's settings of letters, with some of it changed. */
+export async function keepSettings(
+  administrator: TestAgent,
+  { id }: { readonly id: string },
+  some: Partial<LetterSettings>,
+): Promise<HeldLetterSettings> {
+  const at = `/api/schemes/${id}/letter-settings`;
+  const { version, settings } = heldLetterSettingsSchema.parse((await administrator.get(at)).body);
+  const next = { basedOn: version, settings: { ...settings, ...some } };
+  const answer = await administrator.post(at).send(next);
+  if (answer.status !== 201) throw new Error(`${answer.status}: ${answer.text}`);
+  return heldLetterSettingsSchema.parse(answer.body);
 }

@@ -22,7 +22,7 @@ export async function lettersPdf(
   const material: LettersMaterial = {
     schemeName: scheme.name,
     sender: [name, ...address, email, phone].filter((line) => line !== ''),
-    day: dayInWords(letters[0]?.sentAt ?? new Date()),
+    day: dayInWords(letters[0]?.sentAt ?? new Date(), settings.timeZone),
     page: ownerHomeUrl(env.PUBLIC_URL, schemeId),
     letters: letters.map((letter) => ({
       mark: `${letter.batchNumber}-${letter.number}`,

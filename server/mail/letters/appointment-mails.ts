@@ -13,6 +13,7 @@ type Sender = {
   readonly publicUrl: string;
   readonly mailFrom: string;
   readonly now: Date;
+  readonly timeZone: string;
 };
 
 const WORDS: Readonly<Record<Appointment['purpose'], { visit: string; why: string }>> = {
@@ -48,20 +49,24 @@ function placeOf({ building, place }: FoundAppointment): string {
   return place === at ? place : `${at}, ${place}`;
 }
 
-function whenAndWhere(appointment: FoundAppointment) {
+function whenAndWhere(appointment: FoundAppointment, timeZone: string) {
   const { startsAt, minutes } = appointment;
   return {
     list: [
-      `When: ${momentInWords(startsAt)}`,
+      `When: ${momentInWords(startsAt, timeZone)}`,
       `For about ${minutes} minutes`,
       `Where: ${placeOf(appointment)}`,
     ],
   };
 }
 
-function bodyOf(news: AppointmentNews, appointment: FoundAppointment): OutgoingMail['parts'] {
+function bodyOf(
+  news: AppointmentNews,
+  appointment: FoundAppointment,
+  { timeZone }: Sender,
+): OutgoingMail['parts'] {
   const { visit, why } = WORDS[appointment.purpose];
-  const facts = whenAndWhere(appointment);
+  const facts = whenAndWhere(appointment, timeZone);
   const days = (appointment.askedFor?.days ?? []).map(
     ({ day, part }) => `${nearDayInWords(day)}, in the ${part}`,
   );
@@ -84,7 +89,10 @@ function bodyOf(news: AppointmentNews, appointment: FoundAppointment): OutgoingM
 }
 
 /** An appointment as calendars take it in; the party is the one who attends. */
-export function appointmentCalendar(appointment: FoundAppointment, sender: Sender): string {
+export function appointmentCalendar(
+  appointment: FoundAppointment,
+  sender: Omit<Sender, 'timeZone'>,
+): string {
   const { id, version, state, startsAt, minutes, purpose, reader } = appointment;
   const { publicUrl, mailFrom, schemeId, now } = sender;
   const { visit, why } = WORDS[purpose];
@@ -114,10 +122,13 @@ export function appointmentMails(
   const url = ownerHomeUrl(sender.publicUrl, sender.schemeId);
   return [
     {
-      schemeId: sender.schemeId,
-      recipient: reader.email,
+      ...{ schemeId: sender.schemeId, partyId: appointment.party.id, recipient: reader.email },
       subject: SUBJECTS[news],
-      parts: [`${reader.name},`, ...bodyOf(news, appointment), { label: 'Open your page', url }],
+      parts: [
+        `${reader.name},`,
+        ...bodyOf(news, appointment, sender),
+        { label: 'Open your page', url },
+      ],
       ...(news !== 'asked for' && { calendar: appointmentCalendar(appointment, sender) }),
     },
   ];

@@ -7,6 +7,7 @@ type Reader = { readonly name: string; readonly email: string };
 type MatterFacts = {
   readonly publicUrl: string;
   readonly schemeId: string;
+  readonly partyId: string;
   readonly to: Reader;
   readonly title: string;
 };
@@ -24,12 +25,11 @@ export function matterReceivedMail(
     readonly due: string | null;
   },
 ): OutgoingMail {
-  const { publicUrl, schemeId, to, title, isConcern, due } = facts;
+  const { publicUrl, schemeId, partyId, to, title, isConcern, due } = facts;
   const danger =
     'If you think that somebody could get hurt, leave the building and call the emergency number first.';
   return {
-    schemeId,
-    recipient: to.email,
+    ...{ schemeId, partyId, recipient: to.email },
     subject: `We have your message: ${title}`,
     parts: [
       `${to.name},`,
@@ -44,10 +44,9 @@ export function matterReceivedMail(
 
 /** Carries an answer of the team to an owner. */
 export function matterAnsweredMail(facts: MatterFacts & { readonly text: string }): OutgoingMail {
-  const { publicUrl, schemeId, to, title, text } = facts;
+  const { publicUrl, schemeId, partyId, to, title, text } = facts;
   return {
-    schemeId,
-    recipient: to.email,
+    ...{ schemeId, partyId, recipient: to.email },
     subject: `Our answer: ${title}`,
     parts: [
       `${to.name},`,

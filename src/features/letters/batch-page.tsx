@@ -24,12 +24,16 @@ function who(at: string | null, by: string | null): string {
   return at === null || by === null ? '' : `${formatMoment(at)}, ${by}`;
 }
 
-function BatchFacts({ batch }: Pick<Detail, 'batch'>) {
+function templateWords({ templateVersion }: Detail['batch']): string {
+  return templateVersion === 0 ? 'first template' : `template version ${templateVersion}`;
+}
+
+function BatchFacts({ batch, text }: Pick<Detail, 'batch' | 'text'>) {
   const { state, preparedAt, preparedBy, checkedAt, checkedBy, sentAt, sentBy, comment } = batch;
-  const { templateVersion, settingsVersion, runNumber, printedAt } = batch;
+  const { settingsVersion, runNumber, printedAt } = batch;
   const basis = [
     runNumber === null ? 'no run' : `run ${runNumber}`,
-    templateVersion === 0 ? 'first template' : `template version ${templateVersion}`,
+    text !== null ? 'a text of its own' : templateWords(batch),
     settingsVersion === 0 ? 'first settings' : `settings version ${settingsVersion}`,
   ];
   const lines: (readonly [string, string])[] = [
@@ -87,13 +91,19 @@ function WholeBatch({ batchId }: { readonly batchId: string }) {
       </Page>
     );
   }
-  const { batch, letters, leftOut } = data;
+  const { batch, text, letters, leftOut } = data;
   return (
     <Page
       title={`${KIND_LABELS[batch.kind]}: ${lettersWords(batch.letters)}, batch ${batch.number}`}
     >
-      <BatchFacts batch={batch} />
+      <BatchFacts batch={batch} text={text} />
       <BatchSteps batch={batch} />
+      {text !== null && (
+        <Panel title="Written for these letters" note="with its marks">
+          <p className="mt-2 max-w-[62ch] text-body font-semibold break-words">{text.subject}</p>
+          <p className="mt-2 max-w-[62ch] text-body break-words whitespace-pre-line">{text.body}</p>
+        </Panel>
+      )}
       <Panel title="Letters" note="each opens as it will be read">
         <LettersTable label="Letters of the batch" letters={letters} />
       </Panel>

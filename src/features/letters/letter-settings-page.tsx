@@ -18,7 +18,7 @@ function Settings() {
   return (
     <Page
       title="Who gets which letter"
-      lead="Rules with their source, days, whom owners may ask, and what happens when. A change makes a new version."
+      lead="Rules with their source, days, what owners are promised, whom they may ask, and what happens when. A change makes a new version."
     >
       {error !== null && data === undefined && (
         <QueryError what="The settings" error={error} onRetry={() => void refetch()} />

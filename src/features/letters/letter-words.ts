@@ -1,5 +1,6 @@
 import type { Batch } from '../../../shared/schemas/letter-batches.ts';
 import { LETTER_KINDS, type LetterKind } from '../../../shared/schemas/letter-settings.ts';
+import type { MatterKind } from '../../../shared/schemas/matters.ts';
 import type { LetterReason, ListedLetter } from '../../../shared/schemas/letters.ts';
 import type { State } from '../../components/ui/state-mark.tsx';
 
@@ -18,6 +19,14 @@ export const KIND_OPTIONS = LETTER_KINDS.map((kind) => ({
   value: kind,
   label: KIND_LABELS[kind],
 }));
+
+/** What owners bring up and are answered, as lists of it are headed. */
+export const ANSWERED: readonly (readonly [MatterKind, string])[] = [
+  ['concern', 'worries'],
+  ['question', 'questions'],
+  ['claim', 'claims'],
+  ['correction', 'corrections'],
+];
 
 /** The shape that goes with where a batch stands. */
 export const BATCH_SHAPES: Readonly<Record<Batch['state'], State>> = {

@@ -1,85 +1,68 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { useNavigate } from 'react-router-dom';
+import type { BatchPreview } from '../../../shared/schemas/letter-batches.ts';
 import type { LetterKind } from '../../../shared/schemas/letter-settings.ts';
-import type { NewBatch, Recipients } from '../../../shared/schemas/letter-batches.ts';
+import type { Template } from '../../../shared/schemas/letter-templates.ts';
 import { NotFoundPage } from '../../app/routes/not-found.tsx';
 import { Page } from '../../components/layout/page.tsx';
-import { Button } from '../../components/ui/button.tsx';
-import { EmptyState } from '../../components/ui/empty-state.tsx';
 import { LoadingRows } from '../../components/ui/loading-rows.tsx';
-import { MutationError } from '../../components/ui/mutation-error.tsx';
 import { QueryError } from '../../components/ui/query-error.tsx';
 import { Select } from '../../components/ui/select.tsx';
-import { letterPagePath } from '../../config/paths.ts';
 import { can } from '../schemes/can.ts';
 import { useScheme } from '../schemes/scheme-context.ts';
-import { recipientsQuery, usePrepareBatch } from './api/letter-batches.ts';
+import { recipientsQuery } from './api/letter-batches.ts';
+import { templatesQuery } from './api/letter-templates.ts';
 import { ChooseParty } from './components/choose-party.tsx';
-import { RecipientsTable } from './components/recipients-table.tsx';
-import { KIND_OPTIONS, lettersWords } from './letter-words.ts';
+import { LetterLook } from './components/letter-look.tsx';
+import { LetterWordsFields } from './components/letter-words-fields.tsx';
+import { PrepareFound } from './components/prepare-found.tsx';
+import { KIND_OPTIONS } from './letter-words.ts';
 
-type Asked = Omit<NewBatch, 'expected'>;
+type Written = Pick<Template, 'subject' | 'body'>;
 
-function countsWords({ letters, byMail, byPost, without, runNumber }: Recipients): string {
-  const run = runNumber === null ? 'No run is complete yet' : `By run ${runNumber}`;
-  const nobody =
-    without === 0
-      ? ''
-      : ` ${without.toLocaleString('en-GB')} buildings are named in which nobody has an interest: bring their parties in.`;
-  return `${run}: ${lettersWords(letters)}, ${byMail} by e-mail and ${byPost} by post.${nobody}`;
+type OwnTextProps = {
+  readonly asked: BatchPreview;
+  readonly written: Written;
+  readonly onChange: (written: Written) => void;
+};
+
+/** Free text is written for the batch, beside how those who get it will read it. */
+function OwnText({ asked, written, onChange }: OwnTextProps) {
+  return (
+    <div className="mt-5 grid grid-cols-2 gap-8 max-lg:grid-cols-1">
+      <div className="grid content-start gap-3">
+        <LetterWordsFields written={written} rows={16} onChange={onChange} />
+      </div>
+      <LetterLook written={written} asked={asked} />
+    </div>
+  );
 }
 
-function Found({
-  found,
-  asked,
-  onChange,
-}: {
-  readonly found: Recipients;
-  readonly asked: Asked;
-  readonly onChange: (asked: Asked) => void;
-}) {
+/** What is written for a batch of free text: what somebody typed, or what its template begins with. */
+function useOwnText(kind: LetterKind) {
   const scheme = useScheme();
-  const navigate = useNavigate();
-  const prepare = usePrepareBatch(scheme.id);
-  function write() {
-    prepare.mutate(
-      { ...asked, expected: found.letters },
-      { onSuccess: ({ id }) => void navigate(letterPagePath(scheme.id, id)) },
-    );
-  }
-  return (
-    <>
-      <p className="mt-4 text-body">{countsWords(found)}</p>
-      <MutationError failed="No letter was written." error={prepare.error} />
-      {found.letters > 0 && (
-        <Button kind="main" className="mt-3" busy={prepare.isPending} onClick={write}>
-          {`Write ${lettersWords(found.letters)}`}
-        </Button>
-      )}
-      <p className="mt-2 mb-3 text-small text-ink-2">
-        Nothing is sent yet: you can read each letter, and a second person checks them.
-      </p>
-      {found.recipients.length === 0 ? (
-        <EmptyState>
-          The rules name nobody who has an interest today. Choose somebody by hand, or look at the
-          rules.
-        </EmptyState>
-      ) : (
-        <RecipientsTable found={found} asked={asked} onChange={onChange} />
-      )}
-    </>
-  );
+  const [typed, setTyped] = useState<Written | null>(null);
+  const { data, error, refetch } = useQuery(templatesQuery(scheme.id));
+  const template = data?.find((one) => one.kind === 'free text');
+  const isFree = kind === 'free text';
+  const begun = template && { subject: template.subject, body: template.body };
+  return {
+    ...{ isFree, setTyped, error: isFree ? error : null, refetch },
+    text: isFree ? (typed ?? begun ?? null) : null,
+    hasWritten: isFree && typed !== null,
+  };
 }
 
 function NewBatchForm() {
   const scheme = useScheme();
-  const [asked, setAsked] = useState<Asked>({
+  const [asked, setAsked] = useState<BatchPreview>({
     kind: 'first information',
     leftOut: [],
     chosen: [],
   });
+  const { isFree, text, setTyped, hasWritten, ...template } = useOwnText(asked.kind);
   const { data, error, refetch } = useQuery(recipientsQuery(scheme.id, asked));
+  const isReady = !isFree || text !== null;
   return (
     <Page title="Prepare letters" lead="The rules say who gets which letter; each reason is kept.">
       <div className="grid max-w-[640px] grid-cols-2 items-end gap-3 max-sm:grid-cols-1">
@@ -98,11 +81,21 @@ function NewBatchForm() {
           }}
         />
       </div>
+      {template.error !== null && (
+        <QueryError
+          what="The letter"
+          error={template.error}
+          onRetry={() => void template.refetch()}
+        />
+      )}
+      {text !== null && <OwnText asked={asked} written={text} onChange={setTyped} />}
       {error !== null && (
         <QueryError what="Who gets it" error={error} onRetry={() => void refetch()} />
       )}
       {data === undefined && error === null && <LoadingRows what="who gets it" />}
-      {data !== undefined && <Found found={data} asked={asked} onChange={setAsked} />}
+      {data !== undefined && isReady && (
+        <PrepareFound found={data} {...{ asked, text, hasWritten }} onChange={setAsked} />
+      )}
     </Page>
   );
 }

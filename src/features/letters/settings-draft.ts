@@ -3,7 +3,9 @@ import {
   type LetterRule,
   type LetterSettings,
 } from '../../../shared/schemas/letter-settings.ts';
+import type { MatterKind } from '../../../shared/schemas/matters.ts';
 import type { RegisterFilter } from '../../../shared/schemas/register.ts';
+import { holidaysOfLines, linesOfHolidays } from './holiday-lines.ts';
 
 type NearDraft = { readonly name: string; readonly east: string; readonly north: string; readonly metres: string }; // prettier-ignore
 
@@ -13,7 +15,14 @@ export type RuleDraft = Omit<LetterRule, 'near'> & { readonly near: NearDraft | 
 /** The settings while they are being written. */
 export type SettingsDraft = Omit<
   LetterSettings,
-  'rules' | 'answerWithin' | 'remindAfter' | 'escalateAfter' | 'keepYears' | 'contact'
+  | 'rules'
+  | 'answerWithin'
+  | 'remindAfter'
+  | 'escalateAfter'
+  | 'keepYears'
+  | 'contact'
+  | 'answerDays'
+  | 'holidays'
 > & {
   readonly rules: readonly RuleDraft[];
   readonly answerWithin: string;
@@ -21,6 +30,8 @@ export type SettingsDraft = Omit<
   readonly escalateAfter: string;
   readonly keepYears: string;
   readonly contact: Omit<LetterSettings['contact'], 'address'> & { readonly address: string };
+  readonly answerDays: Readonly<Record<MatterKind, string>>;
+  readonly holidays: string;
 };
 
 /** What is wrong, by place, as `rules.0.why`. */
@@ -33,9 +44,20 @@ export type PartProps = {
   readonly onChange: (some: Partial<SettingsDraft>) => void;
 };
 
+function mapDays<A, B>(days: Record<MatterKind, A>, to: (day: A) => B): Record<MatterKind, B> {
+  const { question, concern, claim, correction } = days;
+  return {
+    question: to(question),
+    concern: to(concern),
+    claim: to(claim),
+    correction: to(correction),
+  };
+}
+
 /** What is written, from what holds. */
 export function draftOfSettings(settings: LetterSettings): SettingsDraft {
   const { rules, contact, answerWithin, remindAfter, escalateAfter, keepYears } = settings;
+  const { answerDays, holidays } = settings;
   return {
     ...settings,
     rules: rules.map(({ near, ...rule }) => ({
@@ -52,6 +74,8 @@ export function draftOfSettings(settings: LetterSettings): SettingsDraft {
     escalateAfter: String(escalateAfter),
     keepYears: String(keepYears),
     contact: { ...contact, address: contact.address.join('\n') },
+    answerDays: mapDays(answerDays, String),
+    holidays: linesOfHolidays(holidays),
   };
 }
 
@@ -63,6 +87,7 @@ function numberOf(text: string): number {
 export function readSettings(
   draft: SettingsDraft,
 ): { readonly settings: LetterSettings } | { readonly faults: SettingsFaults } {
+  const read = holidaysOfLines(draft.holidays);
   const parsed = letterSettingsSchema.safeParse({
     ...draft,
     rules: draft.rules.map(({ near, ...rule }) => ({
@@ -85,10 +110,15 @@ export function readSettings(
         .map((line) => line.trim())
         .filter((line) => line !== ''),
     },
+    answerDays: mapDays(draft.answerDays, numberOf),
+    timeZone: draft.timeZone.trim(),
+    holidays: 'holidays' in read ? read.holidays : [],
   });
-  if (parsed.success) return { settings: parsed.data };
-  const faults = parsed.error.issues.map(({ path, message }) => [path.join('.'), message] as const);
-  return { faults: Object.fromEntries(faults.reverse()) };
+  const ofLines = 'fault' in read ? { holidays: read.fault } : {};
+  if (parsed.success && !('fault' in read)) return { settings: parsed.data };
+  const issues = parsed.error?.issues ?? [];
+  const faults = issues.map(({ path, message }) => [path.join('.'), message] as const);
+  return { faults: { ...Object.fromEntries(faults.reverse()), ...ofLines } };
 }
 
 /** A rule to begin with. */

@@ -12,6 +12,18 @@ import { MessageList } from './components/message-list.tsx';
 import { SuggestionPanel } from './components/suggestion-panel.tsx';
 import { WriteForm } from './components/write-form.tsx';
 
+/** Why nothing can be read, or who else can. */
+function Erased({ mayRead }: { readonly mayRead: boolean }) {
+  return (
+    <p className="mb-3 max-w-[60ch] text-roomy">
+      The personal data of this party have been erased.{' '}
+      {mayRead
+        ? 'What was written is kept for a time, for the administrator alone.'
+        : 'What was written can be read by the administrator alone.'}
+    </p>
+  );
+}
+
 function Thread({ schemeId, matterId }: { readonly schemeId: string; readonly matterId: string }) {
   const scheme = useScheme();
   const { data: matter, error, refetch } = useQuery(matterQuery(schemeId, matterId));
@@ -24,10 +36,11 @@ function Thread({ schemeId, matterId }: { readonly schemeId: string; readonly ma
     <>
       <PageTitle>{`Matter ${matter.number} of ${scheme.name}`}</PageTitle>
       <h1 className="mb-4 text-h3 break-words" dir="auto">
-        {matter.title}
+        {matter.title === '' ? `Matter ${matter.number}` : matter.title}
       </h1>
       <div className="grid gap-x-8 gap-y-6 lg:grid-cols-[minmax(0,1fr)_300px]">
         <div className="min-w-0">
+          {matter.isErased && <Erased mayRead={matter.messages.length > 0} />}
           <MessageList {...{ schemeId, matter }} />
           {mayChange && <WriteForm {...{ schemeId, matter, onReload }} />}
         </div>

@@ -11,16 +11,18 @@ import { can } from '../schemes/can.ts';
 import { useScheme } from '../schemes/scheme-context.ts';
 import { ownLetterQuery } from './api/get-own-letter.ts';
 import { HaveTheLetter } from './components/have-the-letter.tsx';
+import { useOwnZone } from './hooks/use-own-zone.ts';
 import { OWNER_PAGE } from './owner-page-style.ts';
 
 function Acknowledge({ letter }: { readonly letter: OwnLetterText }) {
+  const zone = useOwnZone();
   const scheme = useScheme();
   const isOpen = letter.acknowledgedAt === null && can(scheme, 'answerAsOwner');
   return (
     <div className="mt-6 print:hidden">
       <p role="status" className="mb-2">
         {letter.acknowledgedAt !== null &&
-          `Thank you. You told us on ${formatDay(letter.acknowledgedAt)} that you have this letter.`}
+          `Thank you. You told us on ${formatDay(letter.acknowledgedAt, zone)} that you have this letter.`}
       </p>
       {isOpen && <HaveTheLetter letterId={letter.id} onDone={() => undefined} />}
     </div>
@@ -30,7 +32,7 @@ function Acknowledge({ letter }: { readonly letter: OwnLetterText }) {
 function LetterText({ letter }: { readonly letter: OwnLetterText }) {
   return (
     <article className="max-w-[38em] [&_p]:mb-3 [&_p]:break-words">
-      <p className="text-lead text-ink-2">{formatDay(letter.sentAt)}</p>
+      <p className="text-lead text-ink-2">{formatDay(letter.sentAt, useOwnZone())}</p>
       <h1 className="mb-4 text-h1 leading-tight">{letter.subject}</h1>
       {letter.parts.map((part, k) =>
         typeof part === 'string' ? (

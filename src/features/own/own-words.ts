@@ -19,7 +19,7 @@ type FormWords = {
   readonly about: string;
   readonly aboutHint: string;
   readonly text: string;
-  readonly next: string;
+  readonly next: (days: string) => string;
   readonly send: string;
 };
 
@@ -31,7 +31,8 @@ export const FORM_WORDS: Readonly<Record<MatterKind, FormWords>> = {
     about: 'What is it about?',
     aboutHint: 'A few words, as “The day of the survey”.',
     text: 'Your question',
-    next: 'Someone will answer within five working days. You get the answer by mail, and it stays on this page.',
+    next: (days) =>
+      `Someone will answer within ${days}. You get the answer by mail, and it stays on this page.`,
     send: 'Send the question',
   },
   concern: {
@@ -40,7 +41,8 @@ export const FORM_WORDS: Readonly<Record<MatterKind, FormWords>> = {
     about: 'What is it?',
     aboutHint: 'A few words, as “Crack over the kitchen door”.',
     text: 'What do you see, where, and since when?',
-    next: 'An engineer looks at it within two working days and answers you. If somebody could get hurt, leave the building and call the emergency number first.',
+    next: (days) =>
+      `Someone looks at it within ${days} and answers you. If somebody could get hurt, leave the building and call the emergency number first.`,
     send: 'Send the report',
   },
   claim: {
@@ -49,7 +51,8 @@ export const FORM_WORDS: Readonly<Record<MatterKind, FormWords>> = {
     about: 'What is it for?',
     aboutHint: 'A few words, as “Repair of the garden wall”.',
     text: 'What happened, when, and what does it cost?',
-    next: 'Someone will answer within ten working days and tell you how it is settled. Keep your bills, please.',
+    next: (days) =>
+      `Someone will answer within ${days} and tell you what happens next. Keep your bills, please.`,
     send: 'Send the claim',
   },
   correction: {
@@ -58,10 +61,16 @@ export const FORM_WORDS: Readonly<Record<MatterKind, FormWords>> = {
     about: 'What is wrong?',
     aboutHint: 'A few words, as “It has three floors”.',
     text: 'How do you know? Anything that helps us.',
-    next: 'An engineer looks at it within ten working days and answers you. If it changes what we expect, we write to you.',
+    next: (days) =>
+      `Someone looks at it within ${days} and answers you. If it changes what we expect, we write to you.`,
     send: 'Send the correction',
   },
 };
+
+/** As "5 working days". */
+export function workingDays(count: number): string {
+  return count === 1 ? '1 working day' : `${count} working days`;
+}
 
 /** How an owner calls what the register keeps of a building. */
 export const FIELD_WORDS: Readonly<Record<CorrectedField, string>> = {

@@ -10,6 +10,9 @@ export type Step = {
   readonly state: 'done' | 'now' | 'next';
 };
 
+/** When the page is read, and by the clocks of which time zone times are told. */
+type Here = { readonly now: Date; readonly zone: string };
+
 type Dated = Step & { readonly at: string };
 
 const VISITS: Readonly<Record<OwnAppointment['purpose'], readonly [string, string, string]>> = {
@@ -25,14 +28,14 @@ const VISITS: Readonly<Record<OwnAppointment['purpose'], readonly [string, strin
   ],
 };
 
-function ofLetter({ sentAt, acknowledgedAt, answerBy }: OwnLetter): Dated {
+function ofLetter({ sentAt, acknowledgedAt, answerBy }: OwnLetter, zone: string): Dated {
   const asked =
     answerBy === null ? '' : `Please tell us by ${formatDay(answerBy)} that you have it.`;
   return {
     at: sentAt,
-    when: formatDay(sentAt),
+    when: formatDay(sentAt, zone),
     title: 'We wrote to you',
-    words: acknowledgedAt === null ? asked : `You confirmed on ${formatDay(acknowledgedAt)}.`,
+    words: acknowledgedAt === null ? asked : `You confirmed on ${formatDay(acknowledgedAt, zone)}.`,
     state: 'done',
   };
 }
@@ -43,17 +46,20 @@ function lengthWords(minutes: number): string {
   return hours === 1 ? 'About an hour.' : `About ${hours} hours.`;
 }
 
-function ofAppointment({ purpose, startsAt, minutes, state }: OwnAppointment, now: Date): Dated {
+function ofAppointment(
+  { purpose, startsAt, minutes, state }: OwnAppointment,
+  { now, zone }: Here,
+): Dated {
   const [title, past, words] = VISITS[purpose];
   const isDone = state === 'done';
   if (isDone) {
-    return { at: startsAt, when: formatDay(startsAt), title: past, words: '', state: 'done' };
+    return { at: startsAt, when: formatDay(startsAt, zone), title: past, words: '', state: 'done' };
   }
   const isAsked = state === 'another day asked for';
   const isToCome = new Date(startsAt) > now;
   return {
     at: startsAt,
-    when: isAsked ? 'Another day' : formatWeekdayMoment(startsAt),
+    when: isAsked ? 'Another day' : formatWeekdayMoment(startsAt, zone),
     title,
     words: isAsked
       ? 'You asked for another day. We will write to you.'
@@ -67,12 +73,14 @@ export function timelineOf(
   letters: readonly OwnLetter[],
   appointments: readonly OwnAppointment[],
   milestones: Own['milestones'],
-  now: Date,
+  here: Here,
 ): Step[] {
   const visits = appointments
     .filter(({ state }) => state !== 'cancelled')
-    .map((appointment) => ofAppointment(appointment, now));
-  const dated = [...letters.map(ofLetter), ...visits].sort((a, b) => a.at.localeCompare(b.at));
+    .map((appointment) => ofAppointment(appointment, here));
+  const dated = [...letters.map((letter) => ofLetter(letter, here.zone)), ...visits].sort((a, b) =>
+    a.at.localeCompare(b.at),
+  );
   const next = dated.find(({ state }) => state === 'next');
   return [
     ...dated.map(({ when, title, words, state }): Step => ({ when, title, words, state })),

@@ -9,7 +9,8 @@ import {
 } from '../../../shared/schemas/appointments.ts';
 import { AuditEntry } from '../../../server/models/audit-entry.ts';
 import type { Scheme } from '../../../server/models/scheme.ts';
-import { aBuilding, aMember, aScheme } from '../../support/factories.ts';
+import { aBuilding, aMember, aPerson, aScheme } from '../../support/factories.ts';
+import { keepSettings } from '../../support/letters.ts';
 import { aSignedInOwner } from '../../support/matters.ts';
 import { aParty } from '../../support/parties.ts';
 import { signIn, visitor } from '../../support/sign-in.ts';
@@ -61,6 +62,15 @@ function calendarOf(letter: Awaited<ReturnType<typeof mails>>[number] | undefine
   const [attachment] = letter?.attachments ?? [];
   return String(attachment?.content);
 }
+
+test('times are told by the clocks of the scheme, and a calendar gets the instant', async () => {
+  const administrator = await signIn(app(), await aPerson({ isAdministrator: true }));
+  await keepSettings(administrator, scheme, { timeZone: 'Pacific/Auckland' });
+  await offered();
+  const [mail] = await mails();
+  expect(mail?.text).toContain('When: Tuesday 11 June 2999, 20:00');
+  expect(calendarOf(mail)).toContain('DTSTART:29990611T080000Z');
+});
 
 describe('an offer', () => {
   test('reaches the party by mail with what their calendar needs, once', async () => {

@@ -5,6 +5,7 @@ import {
   batchSchema,
   recipientsSchema,
 } from '../../../shared/schemas/letter-batches.ts';
+import { previewedTemplateSchema } from '../../../shared/schemas/letter-templates.ts';
 import { letterSchema, listedLettersSchema } from '../../../shared/schemas/letters.ts';
 import { Membership } from '../../../server/models/membership.ts';
 import { Person } from '../../../server/models/person.ts';
@@ -74,6 +75,7 @@ describe('who gets a letter', () => {
       kind: 'first information',
       leftOut: [{ partyId: town.byPost.id, why: 'Was told in person.' }],
       chosen: [{ partyId: far.id, why: 'Asked for it.' }],
+      text: null,
       expected: 2,
     };
     const answer = await town.firstAgent.post(`${town.address}/letter-batches`).send(asked);
@@ -110,7 +112,7 @@ describe('who gets a letter', () => {
 
   test('is refused where the list has changed since it was seen', async () => {
     const town = await aTownOfOwners(tested);
-    const asked = { kind: 'first information', leftOut: [], chosen: [], expected: 3 };
+    const asked = { kind: 'first information', leftOut: [], chosen: [], text: null, expected: 3 };
     const answer = await town.firstAgent.post(`${town.address}/letter-batches`).send(asked);
     expect(answer.status).toBe(409);
     expect(answer.text).toContain('By now 2 would get the letter, not 3.');
@@ -212,6 +214,70 @@ describe('a batch', () => {
   });
 });
 
+describe('free text', () => {
+  const TEXT = {
+    subject: 'The lift at {place}',
+    body: 'Dear {name},\n\nThe lift is mended.\n\n{link}',
+  };
+
+  test('is written for its batch, kept with its marks, and said with them put in', async () => {
+    const town = await aTownOfOwners(tested, { email: 'lift@example.org' });
+    const chosen = [{ partyId: town.byMail.id, why: 'Asked about the lift.' }];
+    const { id } = await aBatch(town, 'free text', 1, { chosen, text: TEXT });
+    const detail = batchDetailSchema.parse(
+      (await town.secondAgent.get(`${town.address}/letter-batches/${id}`)).body,
+    );
+    expect(detail.text).toEqual(TEXT);
+    const whole = await town.firstAgent.get(
+      `${town.address}/letters/${detail.letters[0]?.id ?? ''}`,
+    );
+    const { subject, parts } = letterSchema.parse(whole.body);
+    expect(subject).toBe('The lift at your building');
+    expect(parts.slice(0, 2)).toEqual(['Dear Ada of the second house,', 'The lift is mended.']);
+    expect(parts).toContainEqual({ link: 'Open your page' });
+    expect(await rowsIn('select version from letter_templates where scheme_id = $1', [town.scheme.id])).toEqual([]); // prettier-ignore
+    await expect(
+      services().database.query(`update letter_batches set own_body = 'Other' where id = $1`, {
+        bind: [id],
+      }),
+    ).rejects.toThrow('what was prepared never changes');
+  });
+
+  test('is looked at as those who were chosen will read it', async () => {
+    const town = await aTownOfOwners(tested);
+    const at = `${town.address}/letter-templates/free text/preview`;
+    const of = async (asked: object) => {
+      const body = { ...TEXT, leftOut: [], chosen: [], partyId: null, ...asked };
+      return previewedTemplateSchema.parse((await town.firstAgent.post(at).send(body)).body);
+    };
+    const chosen = [{ partyId: town.byPost.id, why: 'Asked about the lift.' }];
+    expect(await of({ chosen })).toMatchObject({
+      parties: [{ id: town.byPost.id }],
+      letter: { name: 'Bea of the third house', subject: 'The lift at your building' },
+    });
+    expect((await of({})).parties).toHaveLength(2);
+    expect(await of({ body: '{nmae}' })).toMatchObject({
+      faults: ['Line 1: there is no mark {nmae}.'],
+      letter: null,
+    });
+  });
+
+  test('is refused with marks that are not known, without a text, and other kinds with one', async () => {
+    const town = await aTownOfOwners(tested);
+    const at = `${town.address}/letter-batches`;
+    const chosen = [{ partyId: town.byMail.id, why: 'Asked.' }];
+    const asked = { kind: 'free text', leftOut: [], chosen, expected: 1 };
+    const bad = { ...TEXT, body: 'Dear {nmae},' };
+    const refused = await town.firstAgent.post(at).send({ ...asked, text: bad });
+    expect(refused.status).toBe(422);
+    expect(refused.text).toContain('"text.body"');
+    expect((await town.firstAgent.post(at).send({ ...asked, text: null })).status).toBe(422);
+    const other = { ...asked, kind: 'first information', chosen: [], expected: 2, text: TEXT };
+    expect((await town.firstAgent.post(at).send(other)).status).toBe(422);
+    expect(await rowsIn('select id from letter_batches where scheme_id = $1', [town.scheme.id])).toEqual([]); // prettier-ignore
+  });
+});
+
 describe('a letter', () => {
   test('never changes, whatever becomes of the party, and is read whole', async () => {
     const town = await aTownOfOwners(tested);
@@ -303,7 +369,7 @@ describe('a letter', () => {
 test('who may not is refused', async () => {
   const town = await aTownOfOwners(tested);
   const at = `${town.address}/letter-batches`;
-  const asked = { kind: 'first information', leftOut: [], chosen: [], expected: 2 };
+  const asked = { kind: 'first information', leftOut: [], chosen: [], text: null, expected: 2 };
   const designer = await signIn(app(), await aMember(town.scheme, 'designer'));
   expect((await designer.get(at)).status).toBe(403);
   expect((await designer.post(at).send(asked)).status).toBe(403);

@@ -17,7 +17,7 @@ import {
   type OwnerFacts,
 } from '../../../shared/presentation/owner-words.ts';
 import { DECISION_KINDS } from '../../../shared/schemas/decisions.ts';
-import { LETTER_KINDS } from '../../../shared/schemas/letter-settings.ts';
+import { defaultLetterSettings, LETTER_KINDS } from '../../../shared/schemas/letter-settings.ts';
 import { readingEase } from '../../support/reading-ease.ts';
 
 const CATEGORIES: readonly Category[] = [0, 1, 2, 3, 4];
@@ -35,6 +35,7 @@ function valuesAt(category: Category): LetterValues {
     movement: movementWords(facts),
     looks: ownerLooks(category),
     stays: staysUsable(category, 'home'),
+    repairs: defaultLetterSettings('2026-12-01').repairs.words,
     sure: certaintyWords(facts).join(' '),
     'answer by': 'Friday 11 December',
     contact: 'the owners’ line',

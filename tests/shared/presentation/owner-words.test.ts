@@ -9,6 +9,7 @@ import {
   staysUsable,
   type OwnerFacts,
 } from '../../../shared/presentation/owner-words.ts';
+import { defaultLetterSettings } from '../../../shared/schemas/letter-settings.ts';
 import type { Category } from '../../../shared/damage/categories.ts';
 import { readingEase } from '../../support/reading-ease.ts';
 
@@ -29,6 +30,7 @@ function allWords(of: OwnerFacts, place: 'home' | 'building'): string[] {
     ownerParagraph(of, place),
     `${crackCaption(of.category) ?? 'Nothing'}.`,
     staysUsable(of.category, place),
+    defaultLetterSettings('2026-12-01').repairs.words,
     ...certaintyWords(of),
     ...OWNER_CAUTIONS,
   ];
@@ -39,7 +41,7 @@ test('a home above two tunnels is told of in one sentence and one paragraph', ()
     'Your home is expected to stay sound, with hairline cracks at most',
   );
   expect(ownerParagraph(facts(), 'home')).toBe(
-    'Two tunnels will pass under or beside your home, about 20 metres down. The ground will sink by about 44 millimetres, slowly, over a few weeks. That is about as long as a match. You may see hairline cracks in plaster. They are put right when you next decorate, and we pay.',
+    'Two tunnels will pass under or beside your home, about 20 metres down. The ground will sink by about 44 millimetres, slowly, over a few weeks. That is about as long as a match. You may see hairline cracks in plaster. They can be filled when you next decorate.',
   );
 });
 
@@ -105,6 +107,11 @@ describe.each(CATEGORIES)('what is read where the category is %i', (category) =>
       process.stdout.write(`Flesch ${ease.toFixed(0)}: ${place}, category ${category}\n`);
       expect(ease).toBeGreaterThanOrEqual(60);
     }
+  });
+
+  test('promises no money, which is for whoever builds the tunnel to promise', () => {
+    const words = allWords(facts({ category, categoryHigh: category }), 'home').join(' ');
+    expect(words).not.toMatch(/\bwe pay|\bpay for|free of charge|costs? you|put right/i);
   });
 
   test('no number of a category and no word of the trade', () => {

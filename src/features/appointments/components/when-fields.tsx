@@ -1,13 +1,32 @@
+import { useQuery } from '@tanstack/react-query';
 import { APPOINTMENT_LIMITS } from '../../../../shared/schemas/appointments.ts';
 import { Field } from '../../../components/ui/field.tsx';
 import type { Faults } from '../../../lib/faults-by-path.ts';
-import type { WhenDraft } from '../appointment-draft.ts';
+import { formatWeekdayMoment } from '../../../lib/format-date.ts';
+import { letterSettingsQuery } from '../../letters/api/letter-templates.ts';
+import { useScheme } from '../../schemes/scheme-context.ts';
+import { whenOf, type WhenDraft } from '../appointment-draft.ts';
 
 type WhenFieldsProps = {
   readonly draft: WhenDraft;
   readonly faults: Faults;
   readonly onChange: (change: Partial<WhenDraft>) => void;
 };
+
+/** What owners read, where the clocks that they go by differ from those here. */
+function OwnersTime({ draft }: Pick<WhenFieldsProps, 'draft'>) {
+  const { data } = useQuery(letterSettingsQuery(useScheme().id));
+  const { startsAt } = whenOf(draft);
+  if (data === undefined || startsAt === '') return null;
+  const { timeZone } = data.settings;
+  const told = formatWeekdayMoment(startsAt, timeZone);
+  if (told === formatWeekdayMoment(startsAt)) return null;
+  return (
+    <p className="text-small text-ink-2">
+      {`This is the time of your own clock. The owner reads ${told}, as it is in ${timeZone}.`}
+    </p>
+  );
+}
 
 /** When and where an appointment is. */
 export function WhenFields({ draft, faults, onChange: set }: WhenFieldsProps) {
@@ -41,6 +60,7 @@ export function WhenFields({ draft, faults, onChange: set }: WhenFieldsProps) {
           }}
         />
       </div>
+      <OwnersTime draft={draft} />
       <Field
         label="Where"
         maxLength={APPOINTMENT_LIMITS.place}

@@ -4,6 +4,7 @@ import {
   batchesSchema,
   batchSchema,
   recipientsSchema,
+  type BatchPreview,
   type NewBatch,
 } from '../../../../shared/schemas/letter-batches.ts';
 import { apiGet, apiSend } from '../../../lib/api-client.ts';
@@ -37,7 +38,7 @@ export function batchQuery(schemeId: string, batchId: string) {
 }
 
 /** Who would get a letter, and why. */
-export function recipientsQuery(schemeId: string, asked: Omit<NewBatch, 'expected'>) {
+export function recipientsQuery(schemeId: string, asked: BatchPreview) {
   return queryOptions({
     queryKey: [...lettersKey(schemeId), 'preview', asked],
     queryFn: () =>

@@ -1,4 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import type { BatchPreview } from '../../../../shared/schemas/letter-batches.ts';
 import {
   heldLetterSettingsSchema,
   type LetterKind,
@@ -23,15 +24,15 @@ export function templatesQuery(schemeId: string) {
   });
 }
 
-type Written = Pick<Template, 'kind' | 'subject' | 'body'>;
+type Written = Pick<Template, 'subject' | 'body'> & { readonly partyId: string | null };
 
-/** A template as a real party would read it. */
+/** What is being written, as one of those who get it would read it. */
 export function previewQuery(
   schemeId: string,
-  { kind, subject, body }: Written,
-  partyId: string | null,
+  { kind, leftOut, chosen }: BatchPreview,
+  written: Written,
 ) {
-  const asked = { subject, body, partyId };
+  const asked = { ...written, leftOut, chosen };
   return queryOptions({
     queryKey: [...lettersKey(schemeId), 'look', kind, asked],
     queryFn: () =>

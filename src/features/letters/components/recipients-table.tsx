@@ -1,6 +1,6 @@
 import { useState, type SubmitEvent } from 'react';
 import { capital } from '../../../../shared/presentation/capital.ts';
-import type { NewBatch, Recipients } from '../../../../shared/schemas/letter-batches.ts';
+import type { BatchPreview, Recipients } from '../../../../shared/schemas/letter-batches.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { Dialog } from '../../../components/ui/dialog.tsx';
 import { Field } from '../../../components/ui/field.tsx';
@@ -9,12 +9,11 @@ import { Table } from '../../../components/ui/table/table.tsx';
 import { reasonWords } from '../letter-words.ts';
 
 type Recipient = Recipients['recipients'][number];
-type Asked = Omit<NewBatch, 'expected'>;
 
 type RecipientsTableProps = {
   readonly found: Recipients;
-  readonly asked: Asked;
-  readonly onChange: (asked: Asked) => void;
+  readonly asked: BatchPreview;
+  readonly onChange: (asked: BatchPreview) => void;
 };
 
 function becauseWords({ reasons, leftOut }: Recipient): string {
@@ -45,7 +44,7 @@ function columnsOf(onLeaveOut: (one: Recipient) => void, onTakeIn: (one: Recipie
     },
     {
       id: 'act',
-      heading: '',
+      heading: 'Change',
       width: 110,
       cell: (one) => (
         <Button
@@ -99,7 +98,7 @@ function LeaveOut({
 /** Who gets a letter, each with the reason; any of them can be left out with another. */
 export function RecipientsTable({ found, asked, onChange }: RecipientsTableProps) {
   const [leaving, setLeaving] = useState<Recipient>();
-  function without(list: Asked['leftOut'], { partyId }: Recipient) {
+  function without(list: BatchPreview['leftOut'], { partyId }: Recipient) {
     return list.filter((one) => one.partyId !== partyId);
   }
   const isChosen = (one: Recipient) => asked.chosen.some(({ partyId }) => partyId === one.partyId);

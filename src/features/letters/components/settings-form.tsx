@@ -17,6 +17,7 @@ import { ContactFields } from './contact-fields.tsx';
 import { MilestoneFields } from './milestone-fields.tsx';
 import { RuleFields } from './rule-fields.tsx';
 import { SettingsDays } from './settings-days.tsx';
+import { TermsFields } from './terms-fields.tsx';
 
 function RulesPart({ draft, faults, onChange }: PartProps) {
   const { rules } = draft;
@@ -78,6 +79,7 @@ export function SettingsForm({
   return (
     <form onSubmit={save} noValidate className="max-w-[820px]">
       <ContactFields {...part} />
+      <TermsFields {...part} />
       <SettingsDays {...part} />
       <MilestoneFields {...part} />
       <RulesPart {...part} />

@@ -7,6 +7,7 @@ import { Table } from '../../../components/ui/table/table.tsx';
 import { formatDay, formatShortDay } from '../../../lib/format-date.ts';
 import { KIND_LABELS } from '../letter-words.ts';
 import { ruleWords } from '../rule-words.ts';
+import { TermsView } from './terms-view.tsx';
 
 type Rule = HeldLetterSettings['settings']['rules'][number] & { readonly id: string };
 
@@ -65,7 +66,7 @@ export function SettingsView({ held }: { readonly held: HeldLetterSettings }) {
             ]}
           />
         </Panel>
-        <Panel title="Whom owners ask" className="mt-0">
+        <Panel title="Whom owners ask" className="mt-0!">
           <Facts
             facts={[
               ['Name', contact.name],
@@ -76,7 +77,8 @@ export function SettingsView({ held }: { readonly held: HeldLetterSettings }) {
             ]}
           />
         </Panel>
-        <Panel title="What happens when" className="mt-0">
+        <TermsView settings={settings} />
+        <Panel title="What happens when" className="mt-0!">
           {milestones.length === 0 ? (
             <p className="py-2 text-small text-ink-2">
               Nothing yet. What is written here stands in letters and on the pages of owners.

@@ -16,9 +16,9 @@ function columnsOf(schemeId: string): readonly Column<MatterLine>[] {
       id: 'title',
       heading: 'Matter',
       wide: true,
-      cell: ({ id, title }) => (
+      cell: ({ id, number, title }) => (
         <Link to={matterPath(schemeId, id)} className="font-semibold">
-          {title}
+          {title === '' ? `Matter ${number}, erased` : title}
         </Link>
       ),
     },

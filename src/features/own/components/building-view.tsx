@@ -31,13 +31,15 @@ export function BuildingView({ own, building, appointments, matters }: BuildingV
   return (
     <div className="grid grid-cols-[minmax(0,1fr)_452px] items-start gap-x-12 max-lg:block print:block">
       <div className="min-w-0">
-        <Forecast building={building} />
+        <Forecast building={building} repairs={own.repairs} />
         {mayAnswer && <NextStepBox step={nextStep(letters, visits, now)} />}
-        <SpeakUp building={building} mayAnswer={mayAnswer} />
+        <SpeakUp building={building} answerDays={own.answerDays} mayAnswer={mayAnswer} />
       </div>
       <div className="min-w-0 max-lg:mt-5 print:mt-4 print:max-w-[452px]">
         <OwnMap building={building} />
-        <Timeline steps={timelineOf(letters, visits, own.milestones, now)} />
+        <Timeline
+          steps={timelineOf(letters, visits, own.milestones, { now, zone: own.timeZone })}
+        />
       </div>
       {building.figures !== null && (
         <section className="mt-5 hidden print:block">

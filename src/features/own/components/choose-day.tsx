@@ -3,6 +3,7 @@ import type { OwnAppointment } from '../../../../shared/schemas/appointments.ts'
 import { Button } from '../../../components/ui/button.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { formatWeekdayMoment } from '../../../lib/format-date.ts';
+import { useOwnZone } from '../hooks/use-own-zone.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { useAnswerAppointment } from '../api/answer-appointment.ts';
 import { AskedBox } from './asked-box.tsx';
@@ -23,7 +24,7 @@ export function ChooseDay({ appointment, onDone }: ChooseDayProps) {
   const scheme = useScheme();
   const [isOther, setOther] = useState(false);
   const { id, version, purpose, startsAt, place } = appointment;
-  const when = formatWeekdayMoment(startsAt);
+  const when = formatWeekdayMoment(startsAt, useOwnZone());
   const answer = useAnswerAppointment(scheme.id, id, ({ state }) => {
     onDone(
       state === 'agreed'

@@ -19,12 +19,11 @@ function NothingYet({ building }: { readonly building: OwnBuilding }) {
   );
 }
 
-/** What has been decided and what is done about it, where there is anything. */
-function WhatWeDo({ decision, measures }: OwnBuilding) {
-  if (decision === null && measures.length === 0) return null;
+/** What has been decided, what is done about it, and what the promoter says of repairs. */
+function WhatWeDo({ decision, measures, repairs }: OwnBuilding & { readonly repairs: string }) {
   return (
     <section className="mt-5">
-      <h2 className="mb-1 text-h2">What we do</h2>
+      <h2 className="mb-1 text-h2">What we will do</h2>
       {decision !== null && <p className="max-w-[34em]">{decision}</p>}
       {measures.length > 0 && (
         <ul className="mt-1 list-disc pl-5">
@@ -33,12 +32,19 @@ function WhatWeDo({ decision, measures }: OwnBuilding) {
           ))}
         </ul>
       )}
+      <p className="mt-1 max-w-[34em]">{repairs}</p>
     </section>
   );
 }
 
 /** What an owner is told: one sentence, one paragraph, one picture, and what is done. */
-export function Forecast({ building }: { readonly building: OwnBuilding }) {
+export function Forecast({
+  building,
+  repairs,
+}: {
+  readonly building: OwnBuilding;
+  readonly repairs: string;
+}) {
   const { figures } = building;
   if (figures === null) return <NothingYet building={building} />;
   const place = placeOf(building);
@@ -49,7 +55,7 @@ export function Forecast({ building }: { readonly building: OwnBuilding }) {
       <p className="mb-3 max-w-[34em]">{ownerParagraph(figures, place)}</p>
       <CrackPicture category={figures.category} />
       <p className="max-w-[34em] text-h3 text-ink-2">{staysUsable(figures.category, place)}</p>
-      <WhatWeDo {...building} />
+      <WhatWeDo {...building} repairs={repairs} />
     </>
   );
 }

@@ -6,13 +6,15 @@ import { Field } from '../../../components/ui/field.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { TextArea } from '../../../components/ui/text-area.tsx';
 import { useMatterForm, type MatterDraft } from '../hooks/use-matter-form.ts';
-import { FORM_WORDS } from '../own-words.ts';
+import { FORM_WORDS, workingDays } from '../own-words.ts';
 import { CorrectionFields } from './correction-fields.tsx';
 import { PhotographList } from './photograph-list.tsx';
 
 type MatterFormProps = {
   readonly buildingId: number;
   readonly kind: MatterKind;
+  /** In how many working days an answer comes. */
+  readonly answerDays: number;
   readonly onDone: (matter: OwnMatter) => void;
   readonly onClose: () => void;
 };
@@ -58,7 +60,7 @@ function Fields({ kind, draft }: { readonly kind: MatterKind; readonly draft: Ma
 }
 
 /** Something that an owner brings up. It says what happens next before it is sent. */
-export function MatterForm({ buildingId, kind, onDone, onClose }: MatterFormProps) {
+export function MatterForm({ buildingId, kind, answerDays, onDone, onClose }: MatterFormProps) {
   const id = useId();
   const form = useRef<HTMLFormElement>(null);
   const heading = useRef<HTMLHeadingElement>(null);
@@ -79,7 +81,7 @@ export function MatterForm({ buildingId, kind, onDone, onClose }: MatterFormProp
       <h2 ref={heading} id={id} tabIndex={-1} className="mb-2 text-h2">
         {words.title}
       </h2>
-      <p className="mb-3 max-w-[34em] text-h3 text-ink-2">{words.next}</p>
+      <p className="mb-3 max-w-[34em] text-h3 text-ink-2">{words.next(workingDays(answerDays))}</p>
       <Fields kind={kind} draft={draft} />
       <div className="mt-3">
         <MutationError

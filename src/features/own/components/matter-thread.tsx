@@ -1,56 +1,10 @@
-import { useState, type SubmitEvent } from 'react';
 import type { OwnMatter } from '../../../../shared/schemas/matter-answers.ts';
-import { MATTER_LIMITS, ownMessageSchema } from '../../../../shared/schemas/matters.ts';
-import { Button } from '../../../components/ui/button.tsx';
-import { MutationError } from '../../../components/ui/mutation-error.tsx';
-import { TextArea } from '../../../components/ui/text-area.tsx';
 import { formatDay, formatWeekday } from '../../../lib/format-date.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
-import { matterPhotographPath, useSendMatter } from '../api/send-matter.ts';
+import { useOwnZone } from '../hooks/use-own-zone.ts';
+import { matterPhotographPath } from '../api/send-matter.ts';
 import { kindWords, STATE_WORDS } from '../own-words.ts';
-
-function Reply({ matter }: { readonly matter: OwnMatter }) {
-  const scheme = useScheme();
-  const [id, setId] = useState(() => crypto.randomUUID());
-  const [text, setText] = useState('');
-  const [fault, setFault] = useState<string>();
-  const sending = useSendMatter(scheme.id, () => {
-    setId(crypto.randomUUID());
-    setText('');
-  });
-  function send(event: SubmitEvent) {
-    event.preventDefault();
-    const parsed = ownMessageSchema.safeParse({ id, text, photographs: [] });
-    setFault(parsed.error?.issues[0]?.message);
-    if (!parsed.success || sending.isPending) return;
-    sending.mutate({ matter: { ...parsed.data, matterId: matter.id }, photographs: [] });
-  }
-  return (
-    <form noValidate onSubmit={send} className="mt-3 print:hidden">
-      <TextArea
-        label="Write again about this"
-        rows={3}
-        maxLength={MATTER_LIMITS.text}
-        value={text}
-        error={fault}
-        onChange={({ target }) => {
-          setText(target.value);
-        }}
-      />
-      <MutationError
-        failed="It has not been sent."
-        stands="What you wrote is still here. Please try again."
-        error={sending.error}
-      />
-      <Button type="submit" className="mt-2" busy={sending.isPending}>
-        Send
-      </Button>
-      <p role="status" className="text-lead text-ink-2">
-        {sending.isSuccess && text === '' && 'Thank you. It is with us.'}
-      </p>
-    </form>
-  );
-}
+import { ReplyForm } from './reply-form.tsx';
 
 type Message = OwnMatter['messages'][number];
 
@@ -62,11 +16,12 @@ function MessageItem({
   readonly message: Message;
 }) {
   const scheme = useScheme();
+  const zone = useOwnZone();
   const { side, text, writtenAt, photographs } = message;
   return (
     <li className={side === 'team' ? 'mt-2 border-l-4 border-ink pl-3' : 'mt-2'}>
       <b className="block text-lead font-semibold">
-        {`${side === 'team' ? 'We answered' : 'You wrote'} on ${formatDay(writtenAt)}`}
+        {`${side === 'team' ? 'We answered' : 'You wrote'} on ${formatDay(writtenAt, zone)}`}
       </b>
       <p className="max-w-[34em] break-words whitespace-pre-line">{text}</p>
       {photographs
@@ -103,7 +58,7 @@ export function MatterThread({ matter, mayAnswer }: MatterThreadProps) {
             <MessageItem key={message.id} matter={matter} message={message} />
           ))}
         </ol>
-        {mayAnswer && state !== 'closed' && <Reply matter={matter} />}
+        {mayAnswer && state !== 'closed' && <ReplyForm matter={matter} />}
       </div>
     </details>
   );

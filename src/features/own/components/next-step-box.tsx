@@ -5,6 +5,7 @@ import { ownLetterPath } from '../../../config/paths.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 import { formatDay, formatWeekdayMoment } from '../../../lib/format-date.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
+import { useOwnZone } from '../hooks/use-own-zone.ts';
 import type { NextStep } from '../next-step.ts';
 import { AskedBox } from './asked-box.tsx';
 import { HaveTheLetter } from './have-the-letter.tsx';
@@ -15,11 +16,12 @@ type Done = { readonly onDone: (thanks: string) => void };
 
 function ReadLetter({ letter, onDone }: Done & { readonly letter: OwnLetter }) {
   const scheme = useScheme();
+  const zone = useOwnZone();
   const by = letter.answerBy === null ? '' : ` by ${formatDay(letter.answerBy)}`;
   return (
     <AskedBox title="Please tell us that you have our letter">
       <p className="mb-3">
-        {`We wrote to you on ${formatDay(letter.sentAt)}: `}
+        {`We wrote to you on ${formatDay(letter.sentAt, zone)}: `}
         <Link to={ownLetterPath(scheme.id, letter.id)}>{letter.subject}</Link>
         {`. Please tell us${by} that it has reached you. You do not have to agree with it.`}
       </p>
@@ -35,6 +37,7 @@ function ReadLetter({ letter, onDone }: Done & { readonly letter: OwnLetter }) {
 
 function Waiting({ step }: { readonly step: NextStep }) {
   const scheme = useScheme();
+  const zone = useOwnZone();
   if (step.kind === 'days are with us') {
     return (
       <AskedBox title="We have your days">
@@ -47,7 +50,7 @@ function Waiting({ step }: { readonly step: NextStep }) {
     return (
       <AskedBox title="Our visit is settled">
         <p>
-          We come on <b className="font-semibold">{formatWeekdayMoment(startsAt)}</b>
+          We come on <b className="font-semibold">{formatWeekdayMoment(startsAt, zone)}</b>
           {`. Where: ${place}. If that no longer suits you, ask us.`}
         </p>
         <a

@@ -3,10 +3,12 @@ import type { OwnLetter } from '../../../../shared/schemas/own.ts';
 import { ownLetterPath } from '../../../config/paths.ts';
 import { formatDay } from '../../../lib/format-date.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
+import { useOwnZone } from '../hooks/use-own-zone.ts';
 
 /** The letters that were sent to an owner, the newest first. */
 export function OwnLetters({ letters }: { readonly letters: readonly OwnLetter[] }) {
   const scheme = useScheme();
+  const zone = useOwnZone();
   return (
     <section className="mt-7">
       <h2 className="mb-1 text-h2">My letters</h2>
@@ -21,10 +23,10 @@ export function OwnLetters({ letters }: { readonly letters: readonly OwnLetter[]
               {subject}
             </Link>
             <span className="block text-lead text-ink-2">
-              {`${formatDay(sentAt)}. `}
+              {`${formatDay(sentAt, zone)}. `}
               {acknowledgedAt === null
                 ? 'You have not told us yet that you have it.'
-                : `You confirmed on ${formatDay(acknowledgedAt)}.`}
+                : `You confirmed on ${formatDay(acknowledgedAt, zone)}.`}
             </span>
           </li>
         ))}

@@ -1,5 +1,6 @@
 import { useId, useState } from 'react';
 import type { MatterKind } from '../../../../shared/schemas/matters.ts';
+import type { AnswerDays } from '../../../../shared/schemas/owner-terms.ts';
 import type { OwnBuilding } from '../../../../shared/schemas/own.ts';
 import { formatWeekday } from '../../../lib/format-date.ts';
 import { FORM_WORDS } from '../own-words.ts';
@@ -22,12 +23,13 @@ const ORDER: readonly (MatterKind | 'sure')[] = [
 
 type SpeakUpProps = {
   readonly building: OwnBuilding;
+  readonly answerDays: AnswerDays;
   /** Whether anything may be sent: an archived scheme is only read. */
   readonly mayAnswer: boolean;
 };
 
 /** Ways to ask, to tell and to understand, one open at a time. */
-export function SpeakUp({ building, mayAnswer }: SpeakUpProps) {
+export function SpeakUp({ building, answerDays, mayAnswer }: SpeakUpProps) {
   const id = useId();
   const [opened, setOpened] = useState<Opened>(null);
   const [thanks, setThanks] = useState<string | null>(null);
@@ -67,6 +69,7 @@ export function SpeakUp({ building, mayAnswer }: SpeakUpProps) {
             key={opened}
             buildingId={building.id}
             kind={opened}
+            answerDays={answerDays[opened]}
             onDone={({ due }) => {
               setOpened(null);
               setThanks(`Thank you. Someone will answer by ${formatWeekday(due)}.`);

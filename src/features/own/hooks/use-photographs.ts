@@ -48,6 +48,9 @@ export function usePhotographs() {
     remove: (id: string) => {
       setAdded((all) => all.filter((one) => one.id !== id));
     },
+    clear: () => {
+      setAdded([]);
+    },
   };
 }
 

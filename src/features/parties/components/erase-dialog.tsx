@@ -32,8 +32,9 @@ export function EraseDialog({ schemeId, party, onClose }: EraseDialogProps) {
         <MutationError failed="Nothing was erased." error={erase.error} />
         <p className="min-w-0 text-small break-words">
           Name, address, e-mail and interests of <PartyName name={party.name} /> go for good, with
-          what they were before and the sign-in as an owner. Letters that were sent and the trail
-          stay.
+          what they were before and the sign-in as an owner. Mails that wait do not go out, and an
+          import that is still open is given up. Letters that were sent and what they wrote stay for
+          the time that the letter settings state, for the administrator alone. The trail stays.
         </p>
         <TextArea
           label="On which ground"

@@ -23,6 +23,7 @@ import { PartyInterests } from './party-interests.tsx';
 import { PartyName } from './party-name.tsx';
 
 type PartyViewProps = { readonly partyId: string; readonly onOpen: (id: string | null) => void };
+type Detailed = { readonly detail: PartyDetail };
 type Asks = 'change' | 'merge' | 'erase' | null;
 
 function factsOf(party: Party, onOpen: PartyViewProps['onOpen']) {
@@ -54,11 +55,16 @@ function factsOf(party: Party, onOpen: PartyViewProps['onOpen']) {
 }
 
 /** Why a party is no longer one of the list. */
-function Ended({ party, onOpen }: { readonly party: Party } & Pick<PartyViewProps, 'onOpen'>) {
-  const { erasedAt, mergedInto } = party;
+function Ended({ detail, onOpen }: Pick<PartyViewProps, 'onOpen'> & Detailed) {
+  const { erasedAt, mergedInto } = detail.party;
+  const keptUntil = detail.lettersKeptUntil;
   if (erasedAt !== null) {
     return (
-      <p className="text-roomy">{`What was known of this party was erased on ${formatDay(erasedAt)}.`}</p>
+      <p className="text-roomy">
+        {`What was known of this party was erased on ${formatDay(erasedAt)}.`}
+        {keptUntil !== null &&
+          ` Letters and what they wrote are kept until ${formatDay(keptUntil)}, for the administrator alone.`}
+      </p>
     );
   }
   return (
@@ -108,10 +114,7 @@ function Actions({
   );
 }
 
-function Whole({
-  detail,
-  onOpen,
-}: { readonly detail: PartyDetail } & Pick<PartyViewProps, 'onOpen'>) {
+function Whole({ detail, onOpen }: Pick<PartyViewProps, 'onOpen'> & Detailed) {
   const scheme = useScheme();
   const [asks, setAsks] = useState<Asks>(null);
   const { party, history } = detail;
@@ -124,7 +127,7 @@ function Whole({
       <h1 className="mb-3 max-w-[60ch] min-w-0 text-h3 break-words">
         <PartyName name={party.name} />
       </h1>
-      {isLive ? <Actions party={party} onAsk={setAsks} /> : <Ended {...{ party, onOpen }} />}
+      {isLive ? <Actions party={party} onAsk={setAsks} /> : <Ended {...{ detail, onOpen }} />}
       {isLive && (
         <div className="grid grid-cols-[minmax(0,320px)_minmax(0,1fr)] gap-x-8 max-lg:block">
           <Panel title="Who">

@@ -19,7 +19,7 @@ function aLine(overrides: Partial<MatterLine> = {}): MatterLine {
     building: { id: 1, reference: 'B0001', name: null, address: null },
     ...{ state: 'open', due: '2026-12-04', openedAt: AT, changedAt: AT },
     party: { id: anId(30), name: 'Owner' },
-    ...{ assignedTo: null, isOverdue: false, version: 1, messages: 1 },
+    ...{ assignedTo: null, isOverdue: false, isErased: false, version: 1, messages: 1 },
     ...overrides,
   };
 }

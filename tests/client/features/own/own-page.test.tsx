@@ -2,16 +2,23 @@ import { fireEvent, screen, waitFor } from '@testing-library/react';
 import { beforeEach, expect, test, vi } from 'vitest';
 import type { OwnAppointment } from '../../../../shared/schemas/appointments.ts';
 import type { OwnMatter } from '../../../../shared/schemas/matter-answers.ts';
-import { newMatterSchema } from '../../../../shared/schemas/matters.ts';
+import { newMatterSchema, ownMessageSchema } from '../../../../shared/schemas/matters.ts';
+import { answerDaysSchema } from '../../../../shared/schemas/owner-terms.ts';
 import type { Own, OwnBuilding } from '../../../../shared/schemas/own.ts';
 import { OwnPage } from '../../../../src/features/own/own-page.tsx';
 import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
 import { PersonContext } from '../../../../src/features/session/person-context.ts';
+import { apiUpload } from '../../../../src/lib/api-upload.ts';
 import { anId, aSchemeAnswer } from '../../../support/answers.ts';
 import { axeFaults } from '../../../support/axe-faults.ts';
 import { fakeApi, Refusal } from '../../../support/fake-api.ts';
 import { readingEase } from '../../../support/reading-ease.ts';
 import { renderPage } from '../../../support/render-page.tsx';
+
+vi.mock('../../../../src/lib/api-upload.ts', () => ({ apiUpload: vi.fn() }));
+vi.mock('../../../../src/features/visits/photographs/shrunk-photograph.ts', () => ({
+  shrunkPhotograph: (file: Blob) => Promise.resolve({ file, width: 3, height: 2 }),
+}));
 
 const OWN = `/api/schemes/${anId(10)}/own`;
 const PERSON = {
@@ -21,6 +28,7 @@ const PERSON = {
 beforeEach(() => {
   // the ground of the map is asked for as tiles, which are not there
   vi.stubGlobal('ResizeObserver', undefined);
+  vi.stubGlobal('URL', Object.assign(URL, { createObjectURL: () => 'blob:seen', revokeObjectURL: () => undefined })); // prettier-ignore
 });
 
 function aBuilding(overrides: Partial<OwnBuilding> = {}): OwnBuilding {
@@ -68,6 +76,8 @@ function anOwn(overrides: Partial<Own> = {}): Own {
     scheme: { id: anId(10), name: 'Port Dogger crossing' },
     contact: { name: 'The owners’ line', email: 'owners@example.org', phone: '', hours: '' },
     milestones: [{ when: 'Spring 2028', title: 'We visit again', words: 'New cracks are put right.' }], // prettier-ignore
+    ...{ repairs: 'Whatever cracks we mend.', timeZone: 'Europe/London' },
+    answerDays: answerDaysSchema.parse({ question: 3, concern: 1, claim: 10, correction: 10 }),
     letters: [aLetter()],
     buildings: [aBuilding()],
     ...overrides,
@@ -112,6 +122,8 @@ test('one sentence, one paragraph, one picture, one thing to do, then dates', as
   screen.getByText('About as thin as the edge of a fingernail');
   screen.getByRole('img', { name: 'Map: your home and the two tunnels. North is at the top.' });
   screen.getByText('We visit again');
+  const promised = screen.getByText('Whatever cracks we mend.');
+  expect(promised.closest('section')?.textContent).toContain('What we will do');
   expect(document.body.textContent).not.toMatch(/categor/i);
   expect(await axeFaults(document.body)).toEqual([]);
   fireEvent.click(screen.getByRole('button', { name: 'I have the letter' }));
@@ -200,6 +212,20 @@ test('a question says what is missing, keeps what was typed when it fails, and t
   expect(new Set(ids).size).toBe(1);
 });
 
+test('times are told by the clocks of the scheme, and answers in the days it promises', async () => {
+  const letters = [aLetter('2026-12-02T09:00:00.000Z')];
+  const appointments = [anAppointment({ startsAt: '2090-06-09T10:00:00.000Z' })];
+  const own = anOwn({ letters, timeZone: 'Pacific/Auckland' });
+  show({ own, appointments });
+  const box = await screen.findByRole('region', { name: 'Please choose a day for the survey' });
+  expect(box.textContent).toContain('Friday 9 June 2090, 22:00');
+  expect(screen.getAllByText('Friday 9 June 2090, 22:00')).toHaveLength(2);
+  fireEvent.click(screen.getByRole('button', { name: 'Report a crack or a worry' }));
+  await screen.findByText(/Someone looks at it within 1 working day and answers you/);
+  fireEvent.click(screen.getByRole('button', { name: 'Ask a question' }));
+  await screen.findByText(/Someone will answer within 3 working days/);
+});
+
 test('a fact is put right by its name in plain words', async () => {
   const { calls } = show({}, { [`POST ${OWN}/matters`]: aMatter({ kind: 'question' }) });
   fireEvent.click(
@@ -241,6 +267,36 @@ test('what was asked stands there with its answer, and can be written to again',
   });
 });
 
+test('a further message takes photographs: announced with it, then sent one by one', async () => {
+  const upload = vi.mocked(apiUpload).mockResolvedValue({ id: anId(70) });
+  const { calls } = show(
+    { matters: [aMatter({ kind: 'concern', title: 'A crack' })] },
+    { [`POST ${OWN}/matters/${anId(50)}/messages`]: aMatter({ kind: 'concern' }) },
+  );
+  fireEvent.click(await screen.findByText('A crack'));
+  const photo = new File(['seen'], 'crack.jpg', { type: 'image/jpeg' });
+  fireEvent.change(
+    screen.getByLabelText('Add a photograph from this device', { selector: 'input' }),
+    {
+      target: { files: [photo] },
+    },
+  );
+  fireEvent.change(await screen.findByLabelText('What it shows'), {
+    target: { value: 'Above the door' },
+  });
+  fireEvent.change(screen.getByLabelText('Write again about this'), {
+    target: { value: 'It has grown.' },
+  });
+  expect(await axeFaults()).toEqual([]);
+  fireEvent.click(screen.getByRole('button', { name: 'Send' }));
+  await screen.findByText('Thank you. It is with us.');
+  const sent = ownMessageSchema.parse(calls.find(({ route }) => route.startsWith('POST'))?.body);
+  expect(sent.photographs).toMatchObject([{ caption: 'Above the door' }]);
+  const place = `${OWN}/matters/${anId(50)}/photographs/${sent.photographs[0]?.id ?? ''}`;
+  expect(upload.mock.calls.map(([{ path }]) => path)).toEqual([place]);
+  expect(screen.queryByLabelText('What it shows')).toBeNull();
+});
+
 /** What is on the page as sentences, each ended. */
 function pageWords(): string {
   return [...document.querySelectorAll('h1, h2, p, li, label, figcaption, button')]
@@ -252,7 +308,7 @@ function pageWords(): string {
 
 test('all of the page with each of its forms is plain English', async () => {
   const measures = [{ title: 'Props in the cellar', state: 'agreed' } as const];
-  const decision = 'It will be protected before the tunnel comes near.';
+  const decision = 'We have looked at it closely. It is to be protected.';
   const letters = [aLetter('2026-12-02T09:00:00.000Z')];
   show({
     own: anOwn({ letters, buildings: [aBuilding({ measures, decision })] }),

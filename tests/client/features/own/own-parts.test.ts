@@ -46,7 +46,7 @@ test('the timeline is in order, and only the first that is to come is next', () 
   const visits = [aVisit('agreed', '2027-07-01T10:00:00.000Z'), aVisit('agreed', LATER)];
   const gone = [aVisit('done', EARLIER), aVisit('cancelled', LATER)];
   const milestones = [{ when: 'Spring 2028', title: 'We visit again', words: '' }];
-  const steps = timelineOf([READ], [...visits, ...gone], milestones, NOW);
+  const steps = timelineOf([READ], [...visits, ...gone], milestones, { now: NOW, zone: 'UTC' });
   expect(steps.map(({ title, state }) => [title, state])).toEqual([
     ['We wrote to you', 'done'],
     ['A surveyor visited you', 'done'],

@@ -27,7 +27,7 @@ function listed(...parties: readonly Party[]) {
 }
 
 function detail(party: Party) {
-  return { party, history: [] };
+  return { party, lettersKeptUntil: null, history: [] };
 }
 
 function openParties(abilities: Readonly<Record<string, boolean>> = {}, path = '/') {

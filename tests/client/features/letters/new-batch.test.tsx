@@ -1,0 +1,76 @@
+import { fireEvent, screen, waitFor } from '@testing-library/react';
+import { expect, test } from 'vitest';
+import { DEFAULT_TEMPLATES } from '../../../../shared/presentation/letter-templates.ts';
+import { newBatchSchema } from '../../../../shared/schemas/letter-batches.ts';
+import { LETTER_KINDS } from '../../../../shared/schemas/letter-settings.ts';
+import { templatePreviewSchema } from '../../../../shared/schemas/letter-templates.ts';
+import { NewBatchPage } from '../../../../src/features/letters/new-batch-page.tsx';
+import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
+import { anId, aSchemeAnswer } from '../../../support/answers.ts';
+import { axeFaults } from '../../../support/axe-faults.ts';
+import { fakeApi, Refusal } from '../../../support/fake-api.ts';
+import { renderPage } from '../../../support/render-page.tsx';
+
+const SCHEME = `/api/schemes/${anId(10)}`;
+const ADA = { partyId: anId(70), name: 'Ada', channel: 'e-mail', reasons: [], leftOut: null };
+const PREPARE = `POST ${SCHEME}/letter-batches`;
+
+function show() {
+  const abilities = { readScheme: true, readLetters: true, prepareLetters: true };
+  const api = fakeApi({
+    [`${PREPARE}/preview`]: {
+      ...{ letters: 1, byMail: 1, byPost: 0, runNumber: 1, without: 0, recipients: [ADA] },
+    },
+    [`GET ${SCHEME}/letter-templates`]: LETTER_KINDS.map((kind) => ({
+      ...{ kind, version: 0, ...DEFAULT_TEMPLATES[kind], by: null, at: null },
+    })),
+    [`POST ${SCHEME}/letter-templates/free%20text/preview`]: (body: unknown) => {
+      const { subject, body: words } = templatePreviewSchema.parse(body);
+      const letter = { name: 'Ada', subject: `As read: ${subject}`, parts: [words] };
+      return { faults: [], parties: [{ id: ADA.partyId, name: 'Ada' }], letter };
+    },
+    [PREPARE]: () => new Refusal(409, 'conflict', 'By now 2 would get the letter, not 1.'),
+    [`GET ${SCHEME}`]: aSchemeAnswer({ abilities }),
+  });
+  renderPage(
+    <SchemeContext value={aSchemeAnswer({ abilities })}>
+      <NewBatchPage />
+    </SchemeContext>,
+  );
+  return api;
+}
+
+async function sent(calls: ReturnType<typeof show>['calls']) {
+  return waitFor(() => {
+    const call = calls.find(({ route }) => route === PREPARE);
+    expect(call).toBeDefined();
+    return newBatchSchema.parse(call?.body);
+  });
+}
+
+test('free text is written with its batch, looked at as it is read, and kept when it is refused', async () => {
+  const { calls } = show();
+  fireEvent.change(await screen.findByLabelText('Kind of letter'), {
+    target: { value: 'free text' },
+  });
+  const subject = await screen.findByLabelText<HTMLInputElement>('Subject');
+  expect(subject.value).toBe(DEFAULT_TEMPLATES['free text'].subject);
+  fireEvent.change(subject, { target: { value: 'The lift at {place}' } });
+  fireEvent.change(screen.getByLabelText(/^Letter/), { target: { value: 'It is mended.' } });
+  await screen.findByText('As read: The lift at {place}');
+  expect(await axeFaults(document.body)).toEqual([]);
+  fireEvent.click(await screen.findByRole('button', { name: 'Write 1 letter' }));
+  expect(await sent(calls)).toMatchObject({
+    kind: 'free text',
+    text: { subject: 'The lift at {place}', body: 'It is mended.' },
+  });
+  await screen.findByText('No letter was written.');
+  expect(subject.value).toBe('The lift at {place}');
+});
+
+test('other kinds go by their template and are not written here', async () => {
+  const { calls } = show();
+  fireEvent.click(await screen.findByRole('button', { name: 'Write 1 letter' }));
+  expect(await sent(calls)).toMatchObject({ kind: 'first information', text: null });
+  expect(screen.queryByLabelText('Subject')).toBeNull();
+});
