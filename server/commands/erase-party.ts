@@ -65,7 +65,8 @@ async function clearBeside(
 
 /**
  * Erases what is known of a party and of those merged into it. That it was done stays, with its ground;
- * the trail stays too, and letters and what was written until the day that the scheme states. An archived scheme does not stand in the way.
+ * the trail stays too, and letters and what was written until the day that the scheme states. An archived
+ * scheme does not stand in the way.
  */
 export async function eraseParty(
   { database }: Pick<Services, 'database'>,

@@ -1,17 +1,15 @@
 import { randomUUID } from 'node:crypto';
 import type { NewBatch } from '../../shared/schemas/letter-batches.ts';
 import { LETTER_LIMITS } from '../../shared/schemas/letter-limits.ts';
-import { alignmentDesignSchema } from '../../shared/schemas/alignments.ts';
-import { daysAfter, dayIn } from '../days.ts';
 import { AppError } from '../errors.ts';
 import { composeLetter } from '../letters/compose-letters.ts';
+import { findMaterial } from '../letters/find-material.ts';
 import { findRecipients } from '../letters/find-recipients.ts';
 import { refuseBadMarks } from '../letters/refuse-bad-marks.ts';
 import { insertBatch } from '../models/letter-batches.ts';
 import { heldSettings } from '../models/letter-settings.ts';
 import { heldTemplate } from '../models/letter-templates.ts';
 import { insertExceptions, insertLetters } from '../models/letters.ts';
-import { Run } from '../models/run.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
@@ -33,7 +31,6 @@ export async function prepareLetters(
     await lockScheme(scheme, transaction);
     const held = await heldSettings(database, scheme, transaction);
     const template = await heldTemplate(database, scheme.id, asked.kind, transaction);
-    const words = asked.text ?? template;
     const found = await findRecipients(database, scheme.id, held.settings, asked, transaction);
     const getting = found.recipients.filter(({ leftOut }) => leftOut === null);
     if (getting.length !== asked.expected) {
@@ -43,12 +40,8 @@ export async function prepareLetters(
     if (getting.length > LETTER_LIMITS.letters) {
       throw new AppError('invalid-input', `At most ${LETTER_LIMITS.letters} letters at once.`);
     }
-    const run = found.runId === null ? null : await Run.findByPk(found.runId, { transaction });
-    const material = {
-      ...{ schemeName: scheme.name, template: words, settings: held.settings, told: found.told },
-      design: run === null ? null : alignmentDesignSchema.parse(run.design),
-      answerBy: dayIn(daysAfter(new Date(), held.settings.answerWithin), held.settings.timeZone),
-    };
+    const words = asked.text ?? template;
+    const material = await findMaterial(scheme, held.settings, words, found, transaction);
     const letters = getting.map((recipient) => composeLetter(material, recipient));
     const batch = { id: randomUUID(), schemeId: scheme.id, kind: asked.kind };
     const versions = { templateVersion: template.version, settingsVersion: held.version };

@@ -1,19 +1,17 @@
 import type { Sequelize } from 'sequelize';
 import type { z } from 'zod';
 import { faultsOfMarks } from '../../shared/presentation/letter-text.ts';
-import { alignmentDesignSchema } from '../../shared/schemas/alignments.ts';
 import type { LetterKind, LetterSettings } from '../../shared/schemas/letter-settings.ts';
 import {
   previewedTemplateSchema,
   type PreviewedTemplate,
   type templatePreviewSchema,
 } from '../../shared/schemas/letter-templates.ts';
-import { daysAfter, dayIn } from '../days.ts';
 import { heldSettings } from '../models/letter-settings.ts';
-import { Run } from '../models/run.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Services } from '../services.ts';
 import { composeLetter } from './compose-letters.ts';
+import { findMaterial } from './find-material.ts';
 import { findRecipients, type FoundRecipients } from './find-recipients.ts';
 
 type Asked = z.infer<typeof templatePreviewSchema> & { readonly kind: LetterKind };
@@ -52,15 +50,8 @@ export async function previewTemplate(
   if (recipient === undefined || faults.length > 0) {
     return previewedTemplateSchema.parse({ faults, parties, letter: null });
   }
-  const run = found.runId === null ? null : await Run.findByPk(found.runId);
-  const letter = composeLetter(
-    {
-      ...{ schemeName: scheme.name, template: { subject, body }, settings, told: found.told },
-      design: run === null ? null : alignmentDesignSchema.parse(run.design),
-      answerBy: dayIn(daysAfter(new Date(), settings.answerWithin), settings.timeZone),
-    },
-    recipient,
-  );
+  const material = await findMaterial(scheme, settings, { subject, body }, found);
+  const letter = composeLetter(material, recipient);
   const { name, subject: title, facts } = letter;
   return previewedTemplateSchema.parse({
     ...{ faults, parties },

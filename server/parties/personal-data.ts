@@ -5,6 +5,7 @@ import { findPartyChanges } from '../models/party-changes.ts';
 import { findPersonalData } from '../models/personal-data.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
+import { isHiddenFrom } from '../policies/is-hidden-from.ts';
 import { presentParty } from '../presenters/party.ts';
 import type { Services } from '../services.ts';
 
@@ -19,7 +20,7 @@ export async function personalData(
   partyId: string,
 ): Promise<object> {
   const party = await readParty(database, scheme.id, partyId);
-  if (party.erasedAt !== null && !actor.isAdministrator) throw new AppError('not-found');
+  if (isHiddenFrom(actor, party.erasedAt !== null)) throw new AppError('not-found');
   const merged = await findMergedInto(database, party.id);
   const ids = [party.id, ...merged];
   const [others, history, beside] = await Promise.all([

@@ -22,6 +22,7 @@ import type { HeldSettings } from '../models/letter-settings.ts';
 import type { HeldTemplate } from '../models/letter-templates.ts';
 import type { FoundLetter } from '../models/letters.ts';
 import type { Actor } from '../policies/actor.ts';
+import { isHiddenFrom } from '../policies/is-hidden-from.ts';
 
 /** What leaves the server of the settings of letters. */
 export function presentLetterSettings(held: HeldSettings): HeldLetterSettings {
@@ -67,11 +68,6 @@ export function presentBatch(batch: FoundBatch): Batch {
   });
 }
 
-/** Whom a letter went to is the administrator's alone to see once personal data have been erased. */
-function isHidden({ isErased }: FoundLetter, { isAdministrator }: Actor): boolean {
-  return isErased && !isAdministrator;
-}
-
 /** Where a letter stands, as lists and the whole letter tell it. */
 function standingOf(letter: FoundLetter) {
   const { id, number, name, channel, delivery, serverWords, answerBy } = letter;
@@ -86,7 +82,7 @@ function standingOf(letter: FoundLetter) {
 export function presentListedLetter(letter: FoundLetter, actor: Actor): ListedLetter {
   const { batchId, batchNumber, kind } = letter;
   // words of a mail server name the address
-  const hidden = isHidden(letter, actor) ? { name: '', serverWords: null } : {};
+  const hidden = isHiddenFrom(actor, letter.isErased) ? { name: '', serverWords: null } : {};
   return listedLetterSchema.parse({
     ...standingOf(letter),
     ...hidden,
@@ -96,7 +92,7 @@ export function presentListedLetter(letter: FoundLetter, actor: Actor): ListedLe
 
 /** What leaves the server of a letter, whole; null where the caller may not see it any more. */
 export function presentLetter(letter: FoundLetter, actor: Actor): Letter | null {
-  if (isHidden(letter, actor)) return null;
+  if (isHiddenFrom(actor, letter.isErased)) return null;
   const { address, email, subject, parts, reasons } = letter;
   const written = { address, email, subject, parts, reasons };
   return letterSchema.parse({ ...standingOf(letter), ...written });

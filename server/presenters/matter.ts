@@ -8,6 +8,7 @@ import {
 } from '../../shared/schemas/matter-answers.ts';
 import type { FoundMatter, FoundMatterLine } from '../models/matters.ts';
 import type { Actor } from '../policies/actor.ts';
+import { isHiddenFrom } from '../policies/is-hidden-from.ts';
 
 type Person = { readonly id: string; readonly name: string };
 
@@ -20,19 +21,11 @@ function presentHead(matter: FoundMatter | FoundMatterLine) {
   };
 }
 
-/** What was written is the administrator's alone to see once personal data have been erased. */
-function isHidden(
-  { isErased }: FoundMatter | FoundMatterLine,
-  { isAdministrator }: Actor,
-): boolean {
-  return isErased && !isAdministrator;
-}
-
 function presentForTeam(matter: FoundMatter | FoundMatterLine, actor: Actor) {
   const { number, party, assignedTo, isOverdue, isErased, version } = matter;
   return {
     ...presentHead(matter),
-    ...(isHidden(matter, actor) && { title: '', suggestion: null }),
+    ...(isHiddenFrom(actor, matter.isErased) && { title: '', suggestion: null }),
     ...{ number, party, assignedTo, isOverdue, isErased, version },
   };
 }
@@ -55,7 +48,7 @@ export function presentMatter(
   actor: Actor,
 ): Matter {
   const { building, isMailed } = matter;
-  const messages = isHidden(matter, actor) ? [] : matter.messages;
+  const messages = isHiddenFrom(actor, matter.isErased) ? [] : matter.messages;
   return matterSchema.parse({
     ...presentForTeam(matter, actor),
     ...{ building, isMailed, assessors },

@@ -16,6 +16,7 @@ import { findMatterPhotograph } from '../models/matter-photographs.ts';
 import { findMatters, type FoundMatter } from '../models/matters.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
+import { isHiddenFrom } from '../policies/is-hidden-from.ts';
 import { sendPhotograph } from '../photographs/send-photograph.ts';
 import { presentMatter, presentMatterLine } from '../presenters/matter.ts';
 import type { Services } from '../services.ts';
@@ -96,7 +97,7 @@ export const matterRoutes = [
     params: matterPhotographParamsSchema,
     handle: async ({ actor, scheme, params, ...call }) => {
       const found = await findMatterPhotograph(call.services.database, scheme.id, params);
-      if (found === undefined || (found.isErased && !actor.isAdministrator)) {
+      if (found === undefined || isHiddenFrom(actor, found.isErased)) {
         throw new AppError('not-found');
       }
       await sendPhotograph(call, found);

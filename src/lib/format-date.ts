@@ -1,6 +1,11 @@
 const DATE = { day: 'numeric', month: 'long', year: 'numeric' } as const;
-const CLOCK = { hour: '2-digit', minute: '2-digit' } as const;
-const TIME = new Intl.DateTimeFormat('en-GB', CLOCK);
+const STYLES = {
+  date: DATE,
+  weekday: { weekday: 'long', day: 'numeric', month: 'long' },
+  'weekday and date': { weekday: 'long', ...DATE },
+  clock: { hour: '2-digit', minute: '2-digit' },
+} as const;
+const TIME = new Intl.DateTimeFormat('en-GB', STYLES.clock);
 const SHORT_DAY = new Intl.DateTimeFormat('en-GB', {
   day: 'numeric',
   month: 'short',
@@ -33,28 +38,38 @@ export function formatShortDay(at: string | Date): string {
   return SHORT_DAY.format(new Date(at));
 }
 
+type Style = keyof typeof STYLES;
+
+/** To make a format takes hundreds of times as long as to use it. */
+const kept = new Map<string, Intl.DateTimeFormat>();
+
+function formatOf(style: Style, timeZone: string | undefined): Intl.DateTimeFormat {
+  const key = `${style} ${timeZone ?? ''}`;
+  const format = kept.get(key) ?? new Intl.DateTimeFormat('en-GB', { ...STYLES[style], timeZone });
+  kept.set(key, format);
+  return format;
+}
+
 /** A day of the calendar is the same everywhere; a moment is told by a zone's clocks, or by those here. */
-function inZone(at: string | Date, options: Intl.DateTimeFormatOptions, timeZone?: string): string {
+function inZone(at: string | Date, style: Style, timeZone?: string): string {
   const zone = typeof at === 'string' && at.length === '2026-12-01'.length ? 'UTC' : timeZone;
-  return new Intl.DateTimeFormat('en-GB', { ...options, timeZone: zone })
-    .format(new Date(at))
-    .replace(',', '');
+  return formatOf(style, zone).format(new Date(at)).replace(',', '');
 }
 
 /** As "1 December 2026". */
 export function formatDay(at: string | Date, timeZone?: string): string {
-  return inZone(at, DATE, timeZone);
+  return inZone(at, 'date', timeZone);
 }
 
 /** As "Tuesday 1 December". */
 export function formatWeekday(at: string | Date): string {
-  return inZone(at, { weekday: 'long', day: 'numeric', month: 'long' });
+  return inZone(at, 'weekday');
 }
 
 /** As "Tuesday 1 December 2026, 14:05", for whoever has to be there. */
 export function formatWeekdayMoment(at: string | Date, timeZone?: string): string {
-  const day = inZone(at, { weekday: 'long', ...DATE }, timeZone);
-  return `${day}, ${inZone(at, CLOCK, timeZone)}`;
+  const day = inZone(at, 'weekday and date', timeZone);
+  return `${day}, ${inZone(at, 'clock', timeZone)}`;
 }
 
 /** As "1 Dec 2026, 14:05", for tables. */

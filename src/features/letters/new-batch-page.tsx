@@ -1,8 +1,8 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
+import type { LetterWords } from '../../../shared/presentation/letter-text.ts';
 import type { BatchPreview } from '../../../shared/schemas/letter-batches.ts';
 import type { LetterKind } from '../../../shared/schemas/letter-settings.ts';
-import type { Template } from '../../../shared/schemas/letter-templates.ts';
 import { NotFoundPage } from '../../app/routes/not-found.tsx';
 import { Page } from '../../components/layout/page.tsx';
 import { LoadingRows } from '../../components/ui/loading-rows.tsx';
@@ -18,12 +18,10 @@ import { LetterWordsFields } from './components/letter-words-fields.tsx';
 import { PrepareFound } from './components/prepare-found.tsx';
 import { KIND_OPTIONS } from './letter-words.ts';
 
-type Written = Pick<Template, 'subject' | 'body'>;
-
 type OwnTextProps = {
   readonly asked: BatchPreview;
-  readonly written: Written;
-  readonly onChange: (written: Written) => void;
+  readonly written: LetterWords;
+  readonly onChange: (written: LetterWords) => void;
 };
 
 /** Free text is written for the batch, beside how those who get it will read it. */
@@ -41,7 +39,7 @@ function OwnText({ asked, written, onChange }: OwnTextProps) {
 /** What is written for a batch of free text: what somebody typed, or what its template begins with. */
 function useOwnText(kind: LetterKind) {
   const scheme = useScheme();
-  const [typed, setTyped] = useState<Written | null>(null);
+  const [typed, setTyped] = useState<LetterWords | null>(null);
   const { data, error, refetch } = useQuery(templatesQuery(scheme.id));
   const template = data?.find((one) => one.kind === 'free text');
   const isFree = kind === 'free text';

@@ -1,4 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import type { LetterWords } from '../../../../shared/presentation/letter-text.ts';
 import type { BatchPreview } from '../../../../shared/schemas/letter-batches.ts';
 import {
   heldLetterSettingsSchema,
@@ -9,7 +10,6 @@ import {
   previewedTemplateSchema,
   templateSchema,
   templatesSchema,
-  type Template,
 } from '../../../../shared/schemas/letter-templates.ts';
 import { apiGet, apiSend } from '../../../lib/api-client.ts';
 import { apiPath } from '../../../lib/api-path.ts';
@@ -24,7 +24,7 @@ export function templatesQuery(schemeId: string) {
   });
 }
 
-type Written = Pick<Template, 'subject' | 'body'> & { readonly partyId: string | null };
+type Written = LetterWords & { readonly partyId: string | null };
 
 /** What is being written, as one of those who get it would read it. */
 export function previewQuery(

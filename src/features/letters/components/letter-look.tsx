@@ -1,7 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
+import type { LetterWords } from '../../../../shared/presentation/letter-text.ts';
 import type { BatchPreview } from '../../../../shared/schemas/letter-batches.ts';
-import type { Template } from '../../../../shared/schemas/letter-templates.ts';
 import { Select } from '../../../components/ui/select.tsx';
 import { useDelayedValue } from '../../../hooks/use-delayed-value.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
@@ -15,7 +15,7 @@ export function LetterLook({
   written,
   asked,
 }: {
-  readonly written: Pick<Template, 'subject' | 'body'>;
+  readonly written: LetterWords;
   readonly asked: BatchPreview;
 }) {
   const scheme = useScheme();

@@ -1,18 +1,15 @@
-import { LETTER_MARKS } from '../../../../shared/presentation/letter-text.ts';
-import type { Template } from '../../../../shared/schemas/letter-templates.ts';
+import { LETTER_MARKS, type LetterWords } from '../../../../shared/presentation/letter-text.ts';
 import { Facts } from '../../../components/ui/facts.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { TextArea } from '../../../components/ui/text-area.tsx';
 
 const MARKS = Object.entries(LETTER_MARKS).map(([name, words]) => [`{${name}}`, words] as const);
 
-type Written = Pick<Template, 'subject' | 'body'>;
-
 type LetterWordsFieldsProps = {
-  readonly written: Written;
+  readonly written: LetterWords;
   readonly rows: number;
   readonly readOnly?: boolean;
-  readonly onChange: (written: Written) => void;
+  readonly onChange: (written: LetterWords) => void;
 };
 
 /** What a letter says, with marks, and which marks there are. */

@@ -1,6 +1,6 @@
 import { useNavigate } from 'react-router-dom';
+import type { LetterWords } from '../../../../shared/presentation/letter-text.ts';
 import type { BatchPreview, Recipients } from '../../../../shared/schemas/letter-batches.ts';
-import type { Template } from '../../../../shared/schemas/letter-templates.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { EmptyState } from '../../../components/ui/empty-state.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
@@ -24,7 +24,7 @@ type PrepareFoundProps = {
   readonly found: Recipients;
   readonly asked: BatchPreview;
   /** What is written for this batch, where it is free text. */
-  readonly text: Pick<Template, 'subject' | 'body'> | null;
+  readonly text: LetterWords | null;
   /** Whether anything was written that leaving would throw away. */
   readonly hasWritten: boolean;
   readonly onChange: (asked: BatchPreview) => void;

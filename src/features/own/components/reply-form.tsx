@@ -16,7 +16,6 @@ export function ReplyForm({ matter }: { readonly matter: OwnMatter }) {
   const [text, setText] = useState('');
   const [fault, setFault] = useState<string>();
   const photographs = usePhotographs();
-  const { added } = photographs;
   const sending = useSendMatter(scheme.id, () => {
     setId(crypto.randomUUID());
     setText('');
@@ -24,11 +23,13 @@ export function ReplyForm({ matter }: { readonly matter: OwnMatter }) {
   });
   function send(event: SubmitEvent) {
     event.preventDefault();
-    const announced = added.map(({ id: number, caption }) => ({ id: number, caption }));
-    const parsed = ownMessageSchema.safeParse({ id, text, photographs: announced });
+    const parsed = ownMessageSchema.safeParse({ id, text, photographs: photographs.announced });
     setFault(parsed.error?.issues[0]?.message);
     if (!parsed.success || sending.isPending) return;
-    sending.mutate({ matter: { ...parsed.data, matterId: matter.id }, photographs: added });
+    sending.mutate({
+      matter: { ...parsed.data, matterId: matter.id },
+      photographs: photographs.added,
+    });
   }
   return (
     <form noValidate onSubmit={send} className="mt-3 print:hidden">

@@ -40,7 +40,7 @@ export function useMatterForm(
       ...{ id, buildingId, kind, text },
       title: isCorrection ? FIELD_WORDS[correction.field] : title,
       suggestion: isCorrection ? suggestionOf(correction) : null,
-      photographs: photographs.added.map(({ id: number, caption }) => ({ id: number, caption })),
+      photographs: photographs.announced,
     });
     setOwn(
       parsed.success

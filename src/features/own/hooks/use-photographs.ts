@@ -39,6 +39,8 @@ export function usePhotographs() {
   }
   return {
     added,
+    /** What is told of them before they are sent. */
+    announced: added.map(({ id, caption }) => ({ id, caption })),
     fault,
     hasRoom: added.length < MATTER_LIMITS.photographs,
     add: (taken: File) => void add(taken),
