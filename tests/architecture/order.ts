@@ -16,6 +16,7 @@ const BEFORE: Readonly<Record<string, readonly string[]>> = {
   monitoring: PARTS,
   schemas: [...PLANE, 'damage'],
   presentation: [...PARTS, 'assessment', 'schemas'],
+  evidence: [...PARTS, 'assessment', 'schemas', 'presentation'],
   checks: [...PARTS, 'assessment', 'monitoring', 'schemas'],
 };
 

@@ -3,7 +3,7 @@ import { Link } from 'react-router-dom';
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { HatchSwatch } from '../../../components/ui/hatch-swatch.tsx';
 import { formatCount } from '../../../../shared/presentation/format-number.ts';
-import { SETTLEMENT_TINTS, STAGE_TINTS } from '../../../theme/ground-movement.ts';
+import { SETTLEMENT_TINTS, STAGE_TINTS } from '../../../../shared/presentation/ground-tints.ts';
 import { FIRST_SHADE } from '../../map/shades.ts';
 import { bandWords, type Shading } from '../shades-of-run.ts';
 

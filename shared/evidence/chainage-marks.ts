@@ -1,0 +1,87 @@
+import { chainages } from '../geometry/chainages.ts';
+import { planDistance } from '../geometry/plan-distance.ts';
+import { pointAtChainage } from '../geometry/point-at-chainage.ts';
+import type { PlanPoint, SpacePoint } from '../geometry/point.ts';
+import { polylineParts } from '../geometry/polyline-parts.ts';
+import { at } from '../numerics/at.ts';
+import { intervalIndex } from '../numerics/interval-index.ts';
+import type { GroundFrame } from './ground-frame.ts';
+import type { Measure, Spot } from './marks.ts';
+import type { Wanted } from './place-labels.ts';
+import { steps } from './steps.ts';
+
+/**
+ * A chainage of a line on paper: where it is, which way the line runs there, and how it is written.
+ *
+ * Units: mm. Valid: `along` of length 1. Source: [own].
+ */
+export type ChainageTick = { readonly words: string; readonly at: Spot; readonly along: Spot };
+
+/**
+ * The size of chainages.
+ *
+ * Units: points of print. Valid: a constant. Source: [own].
+ */
+export const CHAINAGE_SIZE = 8;
+
+const STEPS = [10, 20, 50, 100, 200, 500, 1000];
+const APART = 35;
+/** From the line to the near end of a label, in mm. */
+const ASIDE = [7, 10, 14, 19, 25, 32];
+
+/**
+ * A chainage as drawings write it: kilometres, a plus and metres.
+ *
+ * Units: m. Valid: ≥ 0. Source: [common].
+ */
+export function chainageWords(chainage: number): string {
+  const metres = Math.round(chainage);
+  return `${Math.floor(metres / 1000)}+${String(metres % 1000).padStart(3, '0')}`;
+}
+
+/**
+ * The round chainages of a line that lie in a frame.
+ *
+ * Units: m and mm. Valid: a line of two points or more. Source: [own].
+ */
+export function chainageTicks(frame: GroundFrame, line: readonly PlanPoint[]): ChainageTick[] {
+  const flat = line.map(([e, n]): SpacePoint => [e, n, 0]);
+  const [stations, parts] = [chainages(flat), polylineParts(flat)];
+  const step = STEPS.find((one) => (one * 1000) / frame.denominator >= APART) ?? 1000;
+  const { left, top, right, bottom } = frame.window;
+  return steps(0, at(stations, stations.length - 1), step).flatMap((chainage) => {
+    const [e, n] = pointAtChainage(flat, stations, chainage);
+    const [x, y] = frame.place([e, n]);
+    if (x < left || x > right || y < top || y > bottom) return [];
+    const [dx, dy] = parts[intervalIndex(stations, chainage)]?.direction ?? [1, 0];
+    const ahead = frame.place([e + dx, n + dy]);
+    const long = planDistance([x, y], ahead);
+    const along: Spot = [(ahead[0] - x) / long, (ahead[1] - y) / long];
+    return [{ words: chainageWords(chainage), at: [x, y], along }];
+  });
+}
+
+/**
+ * The labels that chainages want: upright, at the end of a fine line across, on either side.
+ *
+ * Units: mm. Valid: any ticks. Source: [own].
+ */
+export function chainageLabels(
+  ticks: readonly ChainageTick[],
+  measure: Measure,
+): Wanted<ChainageTick>[] {
+  return ticks.map((tick) => {
+    const halfWide = measure(tick.words, CHAINAGE_SIZE, true) / 2 + 0.8;
+    const halfTall = 1.9;
+    const [c, s] = tick.along;
+    const spots = ASIDE.flatMap((aside) =>
+      [1, -1].map((side) => {
+        // far enough for the whole box to lie beyond the end of the fine line
+        const far = side * (aside + Math.abs(s) * halfWide + Math.abs(c) * halfTall);
+        const middle: Spot = [tick.at[0] - s * far, tick.at[1] + c * far];
+        return { middle, halfWide, halfTall, along: [1, 0] as const };
+      }),
+    );
+    return { what: tick, spots };
+  });
+}
