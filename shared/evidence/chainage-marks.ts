@@ -5,6 +5,7 @@ import type { PlanPoint, SpacePoint } from '../geometry/point.ts';
 import { polylineParts } from '../geometry/polyline-parts.ts';
 import { at } from '../numerics/at.ts';
 import { intervalIndex } from '../numerics/interval-index.ts';
+import { chainageWords } from '../presentation/chainage-words.ts';
 import type { GroundFrame } from './ground-frame.ts';
 import type { Measure, Spot } from './marks.ts';
 import type { Wanted } from './place-labels.ts';
@@ -28,16 +29,6 @@ const STEPS = [10, 20, 50, 100, 200, 500, 1000];
 const APART = 35;
 /** From the line to the near end of a label, in mm. */
 const ASIDE = [7, 10, 14, 19, 25, 32];
-
-/**
- * A chainage as drawings write it: kilometres, a plus and metres.
- *
- * Units: m. Valid: ≥ 0. Source: [common].
- */
-export function chainageWords(chainage: number): string {
-  const metres = Math.round(chainage);
-  return `${Math.floor(metres / 1000)}+${String(metres % 1000).padStart(3, '0')}`;
-}
 
 /**
  * The round chainages of a line that lie in a frame.

@@ -33,6 +33,18 @@ export function lineHeight(size: number): number {
   return size * LEADING * MM_PER_POINT;
 }
 
+/** The least size of words on paper, in points of print. */
+const LEAST = 6.5;
+
+/**
+ * A size of words on a sheet: that of A3 times the sheet's scale, never too small to read.
+ *
+ * Units: points of print. Valid: any size. Source: [own].
+ */
+export function printSize(asked: number, scale: number): number {
+  return Math.max(LEAST, asked * scale);
+}
+
 type Look = {
   readonly size: number;
   readonly isStrong?: boolean;
@@ -50,7 +62,7 @@ export function wordsPart(
   words: string,
   { size: asked, isStrong = false, ink = 'ink', indent = 0 }: Look,
 ): ColumnPart {
-  const size = asked * scale;
+  const size = printSize(asked, scale);
   const lines = wrapped(words, width - indent, measure, { size, isStrong });
   const each = lineHeight(size);
   return {

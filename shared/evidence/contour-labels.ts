@@ -22,6 +22,17 @@ function onBuildings(box: LabelBox, outlines: readonly (readonly (readonly Spot[
   return points.filter((point) => outlines.some((rings) => pointInPolygon(point, rings))).length;
 }
 
+/**
+ * What a contour says, and a place of it.
+ *
+ * Units: mm. Valid: on the sheet. Source: [own].
+ */
+export type ContourLabel = { readonly words: string; readonly at: Spot };
+
+function placeOn(stretch: readonly Spot[]): Spot {
+  return stretch[Math.floor(stretch.length / 2)] ?? [0, 0];
+}
+
 type Drawn = {
   readonly window: Rectangle;
   readonly measure: Measure;
@@ -38,11 +49,11 @@ type Drawn = {
 export function contourLabels(
   contours: readonly { readonly level: number; readonly line: readonly Spot[] }[],
   { window, measure, outlines }: Drawn,
-): Wanted<string>[] {
+): Wanted<ContourLabel>[] {
   return contours.flatMap(({ level, line }) => {
     const words = `${millimetresFromMetres(level)} mm`;
     const size = { wide: measure(words, CONTOUR_SIZE, false) + 1.6, tall: 3 };
-    return stretchesIn(window, line).flatMap((stretch): Wanted<string>[] => {
+    return stretchesIn(window, line).flatMap((stretch): Wanted<ContourLabel>[] => {
       const spots = spotsAlong(stretch, size);
       const last = spots.at(-1)?.distance ?? 0;
       const count = Math.max(1, Math.round(last / EVERY));
@@ -54,7 +65,7 @@ export function contourLabels(
           rank: onBuildings(box, outlines) * 1000 + Math.abs(distance - middle),
         }));
         ranked.sort((a, b) => a.rank - b.rank);
-        return { what: words, spots: ranked.map(({ box }) => box) };
+        return { what: { words, at: placeOn(stretch) }, spots: ranked.map(({ box }) => box) };
       });
     });
   });

@@ -1,6 +1,8 @@
 import type { Measure } from './marks.ts';
 import type { PlanMaterial } from './plan-material.ts';
 import type { PlannedSheet } from './planned-sheets.ts';
+import { planSheets } from './plan-sheets.ts';
+import { sectionSheet } from './section-sheet.ts';
 import type { AboutSheets, Sheet } from './sheet.ts';
 
 /**
@@ -15,7 +17,8 @@ export function drawnSheets(
   about: AboutSheets,
   measure: Measure,
 ): Sheet[] {
-  const { layout, number } = planned;
-  void [all, material, measure];
-  return [{ name: `${about.fields.title}, sheet ${number}`, ...{ width: layout.width, height: layout.height }, marks: [] }];
+  const { what } = planned;
+  return what.kind === 'plan'
+    ? planSheets({ planned, plan: what, all, material, about, measure })
+    : [sectionSheet({ planned, section: what, all, material, about, measure })];
 }

@@ -6,7 +6,7 @@
 export type Spot = readonly [x: number, y: number];
 
 /**
- * What a mark is drawn with, by name; whoever draws it knows the colour.
+ * What a mark is drawn with, by name.
  *
  * Units: none. Valid: closed list. Source: [own].
  */
@@ -17,11 +17,14 @@ export type Ink =
   | 'hairline'
   | 'rule'
   | 'contour'
+  | 'band'
   | 'buildingEdge'
   | 'paper'
   | 'street'
+  | 'streetEdge'
   | 'park'
-  | 'water';
+  | 'water'
+  | 'waterEdge';
 
 /**
  * A line: its ink, its width, and the lengths of dashes and gaps in turn.

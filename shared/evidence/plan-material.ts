@@ -1,6 +1,4 @@
-import type { Category } from '../damage/categories.ts';
 import type { PlanPoint } from '../geometry/point.ts';
-import type { AlignmentDesign } from '../schemas/alignments.ts';
 import type { RunResult } from '../schemas/runs.ts';
 
 /**
@@ -38,9 +36,9 @@ export type PlanBackground = {
 };
 
 /**
- * All that plans of a run are drawn from, within some ground.
+ * All that sheets of a run are drawn from, within some ground.
  *
- * Units: as the parts. Valid: plain data. Source: [own].
+ * Units: as the parts; contours as SettlementContour. Valid: plain data. Source: [own].
  */
 export type PlanMaterial = {
   readonly buildings: readonly PlanBuilding[];
@@ -50,27 +48,4 @@ export type PlanMaterial = {
     readonly line: readonly PlanPoint[];
     readonly isClosed: boolean;
   }[];
-  readonly design: AlignmentDesign;
 };
-
-/**
- * The end of the bracket that a plan shows.
- *
- * Units: none. Valid: closed list. Source: [own].
- */
-export type ShownEnd = 'low' | 'central' | 'high';
-
-const CATEGORY_AT = { low: 'categoryLow', central: 'category', high: 'categoryHigh' } as const;
-
-/**
- * The category that a plan shows of a building; null where screening let it go or it could not be worked
- * out.
- *
- * Units: none. Valid: any building. Source: as RunResult.
- */
-export function categoryShown(
-  { result }: Pick<PlanBuilding, 'result'>,
-  end: ShownEnd,
-): Category | null {
-  return result[CATEGORY_AT[end]];
-}

@@ -1,7 +1,7 @@
 import type { GroundSurface } from '../../../shared/ground/ground-surface.ts';
 import { FIELD } from '../../../shared/ground/kernel.ts';
 import type { GridPlace } from '../map/place/grid-projection.ts';
-import { chainageWords } from './chainage-words.ts';
+import { chainageWords } from '../../../shared/presentation/chainage-words.ts';
 import type { PlaceOnLine } from './place-on-line.ts';
 
 /** Farther off than this a place has nothing to do with the line, in m. */

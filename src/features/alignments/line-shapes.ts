@@ -12,7 +12,7 @@ import { MethodError } from '../../../shared/method-error.ts';
 import type { AlignmentDesign } from '../../../shared/schemas/alignments.ts';
 import type { LineShape } from '../map/map-line.ts';
 import type { GridPlace } from '../map/place/grid-projection.ts';
-import { chainageWords } from './chainage-words.ts';
+import { chainageWords } from '../../../shared/presentation/chainage-words.ts';
 
 type GridRing = readonly GridPlace[];
 

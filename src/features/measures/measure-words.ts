@@ -1,7 +1,7 @@
 import type { Measure } from '../../../shared/schemas/measures.ts';
 import { percentWords } from '../../../shared/presentation/bracket-words.ts';
 import type { State } from '../../components/ui/state-mark.tsx';
-import { chainageWords } from '../alignments/chainage-words.ts';
+import { chainageWords } from '../../../shared/presentation/chainage-words.ts';
 
 /** The shape of each state of a measure. */
 export const MEASURE_SHAPES: Readonly<Record<Measure['state'], State>> = {

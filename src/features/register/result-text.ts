@@ -1,6 +1,6 @@
 import { isResultFigure, RESULT_VALUES } from '../../../shared/schemas/result-values.ts';
 import type { ResultColumn } from '../../../shared/schemas/result-columns.ts';
-import { chainageWords } from '../alignments/chainage-words.ts';
+import { chainageWords } from '../../../shared/presentation/chainage-words.ts';
 
 /** A value of a column of results as people read it. */
 export function resultText(column: ResultColumn, value: string | number): string {

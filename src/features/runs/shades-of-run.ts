@@ -1,4 +1,4 @@
-import { CONTOUR_LEVELS } from '../../../shared/ground/settlement-contours.ts';
+import { bandOf } from '../../../shared/presentation/settlement-bands.ts';
 import type { RunMap } from '../../../shared/schemas/run-map.ts';
 import { FIRST_SHADE } from '../map/shades.ts';
 
@@ -15,11 +15,6 @@ export type Shading = {
   readonly by: keyof typeof FIRST_SHADE;
   readonly shades: ReadonlyMap<number, number>;
 };
-
-/** The number of the band of a settlement among the levels that contours are drawn for; −1 below the least. */
-export function bandOf(settlement: number): number {
-  return CONTOUR_LEVELS.findLastIndex((level) => settlement >= level);
-}
 
 /** Among its like, the number of the colour of a building; −1 where it takes none, as most of a town do. */
 function numberOf(figures: RunMap, by: Shading['by'], end: End, k: number): number {
@@ -44,14 +39,4 @@ export function countsOfShades(shades: ReadonlyMap<number, number>): ReadonlyMap
   const counts = new Map<number, number>();
   for (const shade of shades.values()) counts.set(shade, (counts.get(shade) ?? 0) + 1);
   return counts;
-}
-
-const MILLIMETRES = 1000;
-
-/** A band of settlement in words, as `5 to 10 mm`. */
-export function bandWords(band: number): string {
-  const [from = 0, to] = [CONTOUR_LEVELS[band], CONTOUR_LEVELS[band + 1]].map((level) =>
-    level === undefined ? undefined : Math.round(level * MILLIMETRES),
-  );
-  return to === undefined ? `${from} mm and more` : `${from} to ${to} mm`;
 }

@@ -2,7 +2,7 @@ import { chainages } from '../../../shared/geometry/chainages.ts';
 import type { SpacePoint } from '../../../shared/geometry/point.ts';
 import { MethodError } from '../../../shared/method-error.ts';
 import type { AlignmentDesign } from '../../../shared/schemas/alignments.ts';
-import { chainageWords } from '../alignments/chainage-words.ts';
+import { chainageWords } from '../../../shared/presentation/chainage-words.ts';
 import { placeBeside } from '../alignments/line-shapes.ts';
 import type { SectionShape } from '../map/map-line.ts';
 

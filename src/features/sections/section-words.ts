@@ -2,7 +2,7 @@ import type { TroughOfSection } from '../../../shared/assessment/trough-of-secti
 import type { SettlementOnLine } from '../../../shared/assessment/settlement-along.ts';
 import type { Range } from '../../../shared/numerics/range.ts';
 import { formatCount } from '../../../shared/presentation/format-number.ts';
-import { chainageWords } from '../alignments/chainage-words.ts';
+import { chainageWords } from '../../../shared/presentation/chainage-words.ts';
 
 const MILLIMETRES = 1000;
 

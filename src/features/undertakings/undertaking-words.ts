@@ -1,7 +1,7 @@
 import type { Undertaking } from '../../../shared/schemas/undertakings.ts';
 import type { State } from '../../components/ui/state-mark.tsx';
 import { formatShortDay } from '../../lib/format-date.ts';
-import { chainageWords } from '../alignments/chainage-words.ts';
+import { chainageWords } from '../../../shared/presentation/chainage-words.ts';
 
 /** To whom it was made; the name of a party is not told to everybody. */
 export function madeToWords({ madeTo }: Pick<Undertaking, 'madeTo'>): string {

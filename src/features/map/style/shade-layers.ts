@@ -1,7 +1,11 @@
 import type { ExpressionSpecification, LayerSpecification } from 'maplibre-gl';
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { DAMAGE } from '../../../../shared/presentation/damage-style.ts';
-import { SETTLEMENT_TINTS, STAGE_TINTS, type Tint } from '../../../../shared/presentation/ground-tints.ts';
+import {
+  SETTLEMENT_TINTS,
+  STAGE_TINTS,
+  type Tint,
+} from '../../../../shared/presentation/ground-tints.ts';
 import { FIRST_SHADE } from '../shades.ts';
 import { damageName } from './damage-images.ts';
 import { LABEL_FONTS } from './label-fonts.ts';

@@ -3,9 +3,10 @@ import { Link } from 'react-router-dom';
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { HatchSwatch } from '../../../components/ui/hatch-swatch.tsx';
 import { formatCount } from '../../../../shared/presentation/format-number.ts';
+import { bandWords } from '../../../../shared/presentation/settlement-bands.ts';
 import { SETTLEMENT_TINTS, STAGE_TINTS } from '../../../../shared/presentation/ground-tints.ts';
 import { FIRST_SHADE } from '../../map/shades.ts';
-import { bandWords, type Shading } from '../shades-of-run.ts';
+import type { Shading } from '../shades-of-run.ts';
 
 type LegendRow = {
   readonly shade: number;

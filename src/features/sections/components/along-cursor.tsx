@@ -1,5 +1,5 @@
 import type { SettlementOnLine } from '../../../../shared/assessment/settlement-along.ts';
-import { chainageWords } from '../../alignments/chainage-words.ts';
+import { chainageWords } from '../../../../shared/presentation/chainage-words.ts';
 import type { AlongLayout } from '../along-layout.ts';
 import { metres, millimetres } from '../section-words.ts';
 

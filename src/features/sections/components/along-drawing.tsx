@@ -5,7 +5,7 @@ import { BottomAxis, LeftAxis } from '../../../components/chart/axis.tsx';
 import { BracketLines } from '../../../components/chart/bracket-lines.tsx';
 import { niceTicks } from '../../../../shared/presentation/nice-ticks.ts';
 import { pathBetween, pathOf, type Place } from '../../../components/chart/path-of.ts';
-import { chainageWords } from '../../alignments/chainage-words.ts';
+import { chainageWords } from '../../../../shared/presentation/chainage-words.ts';
 import { figure } from '../../../../shared/presentation/design-words.ts';
 import type { AlongLayout } from '../along-layout.ts';
 import { AlongCursor } from './along-cursor.tsx';

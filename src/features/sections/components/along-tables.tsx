@@ -2,7 +2,7 @@ import type { LongSectionRow } from '../../../../shared/assessment/long-section.
 import type { SettlementOnLine } from '../../../../shared/assessment/settlement-along.ts';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
-import { chainageWords } from '../../alignments/chainage-words.ts';
+import { chainageWords } from '../../../../shared/presentation/chainage-words.ts';
 import { metres } from '../section-words.ts';
 import { SETTLEMENT_COLUMNS, thinned } from './settlement-columns.tsx';
 

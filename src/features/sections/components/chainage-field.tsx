@@ -1,7 +1,7 @@
 import { useState, type KeyboardEvent } from 'react';
 import { INPUT_STYLE } from '../../../components/ui/field-frame.tsx';
 import { classNames } from '../../../lib/class-names.ts';
-import { chainageWords } from '../../alignments/chainage-words.ts';
+import { chainageWords } from '../../../../shared/presentation/chainage-words.ts';
 import { chainageOfText } from '../chainage-of-text.ts';
 
 type ChainageFieldProps = {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { centralSurface } from '../../../../shared/assessment/central-surface.ts';
-import { chainageWords } from '../../../../src/features/alignments/chainage-words.ts';
+import { chainageWords } from '../../../../shared/presentation/chainage-words.ts';
 import { cursorWords } from '../../../../src/features/alignments/cursor-words.ts';
 import {
   shapesOfContours,

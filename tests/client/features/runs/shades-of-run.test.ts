@@ -1,12 +1,7 @@
 // @vitest-environment node
 import { describe, expect, it } from 'vitest';
 import { FIRST_SHADE } from '../../../../src/features/map/shades.ts';
-import {
-  bandOf,
-  bandWords,
-  countsOfShades,
-  shadesOfRun,
-} from '../../../../src/features/runs/shades-of-run.ts';
+import { countsOfShades, shadesOfRun } from '../../../../src/features/runs/shades-of-run.ts';
 import { tipOfRun } from '../../../../src/features/runs/tip-of-run.ts';
 import { aRunMap } from '../../../support/run-answers.ts';
 
@@ -41,19 +36,6 @@ describe('the colours of a run', () => {
       [stage + 2, 1],
       [stage + 3, 2],
     ]);
-  });
-
-  it.each([
-    [0.00099, -1],
-    [0.001, 0],
-    [0.0099, 2],
-    [0.05, 6],
-  ])('put %d m into band %d', (metres, band) => {
-    expect(bandOf(metres)).toBe(band);
-  });
-
-  it('have bands in words', () => {
-    expect([bandWords(0), bandWords(6)]).toEqual(['1 to 2 mm', '50 mm and more']);
   });
 });
 

@@ -1,0 +1,116 @@
+import { assessmentRules } from '../assessment/run-inputs.ts';
+import {
+  sectionsOfDesign,
+  type SectionAcross,
+  type SectionsOfDesign,
+} from '../assessment/sections-of-design.ts';
+import { chainageWords } from '../presentation/chainage-words.ts';
+import { formatCount } from '../presentation/format-number.ts';
+import { niceTicks } from '../presentation/nice-ticks.ts';
+import { sine } from '../numerics/sine.ts';
+import { millimetresFromMetres } from '../units/millimetres-from-metres.ts';
+import type { Mark, Measure, Spot } from './marks.ts';
+import type { PlanMaterial } from './plan-material.ts';
+import { ABOVE, BELOW, type PlannedSection } from './planned-sections.ts';
+import {
+  lengthAxis,
+  levelAxis,
+  sectionPanel,
+  troughMarks,
+  type SectionPanel,
+} from './section-panel.ts';
+import type { AboutSheets } from './sheet.ts';
+import { standingMarks, standingOn } from './standing-marks.ts';
+
+type Planned = Extract<PlannedSection, { kind: 'cross sections' }>;
+
+const [AROUND, HALF_TURN] = [48, 3.141592653589793];
+
+/** A bore, round where levels are drawn as large as lengths and upright where they are larger. */
+function boreMark(
+  { x, y }: SectionPanel,
+  { offset, axis, diameter }: SectionAcross['bores'][number],
+): Mark {
+  const ring = Array.from({ length: AROUND }, (_, k): Spot => {
+    const turn = (2 * HALF_TURN * k) / AROUND;
+    // the section looks along increasing chainage, so that left is at the left
+    return [
+      x(-offset + (diameter / 2) * sine(turn + HALF_TURN / 2)),
+      y(axis + (diameter / 2) * sine(turn)),
+    ];
+  });
+  return {
+    ...{ kind: 'shape', rings: [ring], isClosed: true, fill: 'paper' },
+    stroke: { ink: 'ink', width: 0.4 },
+  };
+}
+
+function largestWords({ points }: SectionAcross): string {
+  const largest = (end: 'low' | 'central' | 'high') =>
+    millimetresFromMetres(
+      Math.max(...points.map(({ settlement }) => settlement?.[end] ?? 0)),
+    ).toFixed(1);
+  return `largest settlement ${largest('low')} / ${largest('central')} / ${largest('high')} mm low / central / high`;
+}
+
+function sectionMarks(
+  panel: SectionPanel,
+  section: SectionAcross,
+  { depth, halfWidth, material, measure }: Room,
+): Mark[] {
+  const { chainage, middle, left, groundLevel, points, bores } = section;
+  const start = [middle[0] + halfWidth * left[0], middle[1] + halfWidth * left[1]] as const;
+  const cut = { start, direction: [-left[0], -left[1]] as const, length: 2 * halfWidth };
+  const ticks = niceTicks(-halfWidth, halfWidth, 8);
+  const trough = points
+    .map(({ offset, settlement }) => ({ distance: -offset, settlement }))
+    .reverse();
+  const words = `Section at ${chainageWords(chainage)}, looking along the line; ${largestWords(section)}`;
+  return [
+    { kind: 'words', words, at: [panel.left, panel.ground - ABOVE + 5], size: 9, isStrong: true },
+    ...levelAxis(panel, groundLevel, depth),
+    ...lengthAxis(
+      panel,
+      ticks,
+      (offset) => `${formatCount(Math.abs(offset))}${offset === 0 ? '' : ' m'}`,
+    ),
+    ...troughMarks(panel, trough),
+    ...standingMarks(panel, standingOn(material.buildings, cut, -halfWidth), measure),
+    ...bores.map((bore) => boreMark(panel, bore)),
+  ];
+}
+
+type Room = {
+  readonly depth: number;
+  readonly halfWidth: number;
+  readonly material: PlanMaterial;
+  readonly measure: Measure;
+};
+
+/**
+ * Sections across the line, one under the other: ground, bores, the trough with its range, and the buildings
+ * that the cut goes through.
+ *
+ * Units: mm. Valid: chainages of that line. Source: as SectionAcross.
+ */
+export function crossSectionMarks(
+  { left, top }: { readonly left: number; readonly top: number },
+  planned: Planned,
+  { about, ...room }: Omit<Room, 'halfWidth'> & { readonly about: AboutSheets },
+): Mark[] {
+  const { design, rules } = about.run;
+  const { halfWidth, denominator, exaggeration } = planned;
+  const sections: SectionsOfDesign = sectionsOfDesign(design, assessmentRules(rules));
+  const each = (room.depth * exaggeration * 1000) / denominator + ABOVE + BELOW;
+  return planned.chainages.flatMap((chainage, k) => {
+    const section = sections(chainage, halfWidth);
+    const span = {
+      from: -halfWidth,
+      to: halfWidth,
+      groundLevel: section.groundLevel,
+      depth: room.depth,
+    };
+    const panel = sectionPanel({ left, top: top + k * each }, planned, span);
+    return sectionMarks(panel, section, { ...room, halfWidth });
+  });
+}

@@ -1,0 +1,128 @@
+import { longSection } from '../assessment/long-section.ts';
+import { assessmentRules } from '../assessment/run-inputs.ts';
+import { settlementBracket } from '../assessment/settlement-bracket.ts';
+import { planDistance } from '../geometry/plan-distance.ts';
+import { chainageWords } from '../presentation/chainage-words.ts';
+import { niceTicks } from '../presentation/nice-ticks.ts';
+import type { LineOnGround } from './line-on-ground.ts';
+import { lineMark, type Mark, type Measure, type Spot, type Stroke } from './marks.ts';
+import type { PlanMaterial } from './plan-material.ts';
+import type { PlannedSection } from './planned-sections.ts';
+import {
+  lengthAxis,
+  levelAxis,
+  sectionPanel,
+  troughMarks,
+  type SectionPanel,
+} from './section-panel.ts';
+import type { AboutSheets } from './sheet.ts';
+import { standingMarks, standingOn, type Standing } from './standing-marks.ts';
+
+type Planned = Extract<PlannedSection, { kind: 'long section' }>;
+
+const LINES: readonly (readonly ['crown' | 'axis' | 'invert', string, Stroke])[] = [
+  ['crown', 'Crown', { ink: 'ink', width: 0.3 }],
+  ['axis', 'Axis', { ink: 'ink', width: 0.25, dash: [4, 1, 0.8, 1] }],
+  ['invert', 'Invert', { ink: 'ink', width: 0.3 }],
+];
+
+function levelAt(
+  rows: ReturnType<typeof longSection>,
+  name: 'crown' | 'axis' | 'invert',
+  chainage: number,
+): number {
+  const after = rows.findIndex((row) => row.chainage >= chainage);
+  const [before, next] = [
+    rows[Math.max(0, after - 1)],
+    rows[after === -1 ? rows.length - 1 : after],
+  ];
+  if (before === undefined || next === undefined) return 0;
+  const long = next.chainage - before.chainage;
+  const share = long > 0 ? (chainage - before.chainage) / long : 0;
+  return before[name] + share * (next[name] - before[name]);
+}
+
+function driveLines(panel: SectionPanel, { from, to }: Planned, about: AboutSheets): Mark[] {
+  const rows = longSection(about.run.design);
+  const stations = [
+    from,
+    ...rows.map(({ chainage }) => chainage).filter((one) => one > from && one < to),
+    to,
+  ];
+  return LINES.flatMap(([name, words, stroke]): Mark[] => {
+    const line = stations.map((one): Spot => [panel.x(one), panel.y(levelAt(rows, name, one))]);
+    const [x, y] = line[0] ?? [0, 0];
+    return [lineMark(line, stroke), { kind: 'words', words, at: [x + 2, y - 1], size: 7 }];
+  });
+}
+
+/** What stands right over the line, part by part of it. */
+function standingAlong(
+  line: LineOnGround,
+  { from, to }: Planned,
+  { buildings }: PlanMaterial,
+): Standing[] {
+  const points = line.between(from, to);
+  let passed = from;
+  return points.slice(1).flatMap((end, k) => {
+    const start = points[k] ?? end;
+    const length = planDistance(start, end);
+    const direction = [(end[0] - start[0]) / length, (end[1] - start[1]) / length] as const;
+    const found = length > 0 ? standingOn(buildings, { start, direction, length }, passed) : [];
+    passed += length;
+    return found;
+  });
+}
+
+/** Points of the trough along a stretch on paper lie so far apart, in mm. */
+const APART = 1.5;
+
+function settlements(
+  panel: SectionPanel,
+  line: LineOnGround,
+  { from, to }: Planned,
+  { run }: AboutSheets,
+) {
+  const bracket = settlementBracket(run.design, assessmentRules(run.rules));
+  const count = Math.max(2, Math.ceil((panel.right - panel.left) / APART));
+  return Array.from({ length: count + 1 }, (_, k) => {
+    const distance = from + (k * (to - from)) / count;
+    return { distance, settlement: bracket.at(line.pointAt(distance)) };
+  });
+}
+
+/**
+ * A stretch of the long section: ground, drives with their levels, settlement of the surface over the line,
+ * and what stands right over it.
+ *
+ * Units: mm. Valid: a stretch of that line. Source: as `settlementBracket`.
+ */
+export function longSectionMarks(
+  at: { readonly left: number; readonly top: number },
+  planned: Planned,
+  {
+    line,
+    depth,
+    material,
+    about,
+    measure,
+  }: {
+    readonly line: LineOnGround;
+    readonly depth: number;
+    readonly material: PlanMaterial;
+    readonly about: AboutSheets;
+    readonly measure: Measure;
+  },
+): Mark[] {
+  const { groundLevel } = about.run.design;
+  const { from, to } = planned;
+  const panel = sectionPanel(at, planned, { from, to, groundLevel, depth });
+  const ticks = niceTicks(from, to, Math.max(2, Math.floor((panel.right - panel.left) / 40)));
+  return [
+    ...levelAxis(panel, groundLevel, depth),
+    ...lengthAxis(panel, ticks, chainageWords),
+    ...troughMarks(panel, settlements(panel, line, planned, about)),
+    ...standingMarks(panel, standingAlong(line, planned, material), measure),
+    ...driveLines(panel, planned, about),
+  ];
+}

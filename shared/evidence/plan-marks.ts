@@ -1,0 +1,87 @@
+import type { AlignmentDesign } from '../schemas/alignments.ts';
+import { backgroundMarks } from './background-marks.ts';
+import { gridMarks } from './grid-marks.ts';
+import type { GroundFrame } from './ground-frame.ts';
+import { labelMarks } from './label-marks.ts';
+import { driveMarks, tickMarks } from './line-marks.ts';
+import { lineMark, type Mark, type Spot, type Stroke } from './marks.ts';
+import type { PlanLabels } from './plan-labels.ts';
+import type { PlanBuilding, PlanMaterial } from './plan-material.ts';
+import type { PlannedPlan } from './planned-sheets.ts';
+import { northMarks, scaleBarMarks } from './plan-signs.ts';
+import { toneOfBuilding } from './tone-of-building.ts';
+
+const OUTLINE: Stroke = { ink: 'buildingEdge', width: 0.15 };
+/** The line that everything is read by, and the one that is only where settlement is no longer drawn. */
+const [EMPHASISED, LEAST] = [0.01, 0.001];
+
+function ringsOf({ place }: GroundFrame, { parts }: PlanBuilding): Spot[][] {
+  return parts.flatMap((part) => part.map((ring) => ring.map(place)));
+}
+
+function buildingMark(frame: GroundFrame, building: PlanBuilding, { content }: PlannedPlan): Mark {
+  const tone = toneOfBuilding(building, content.shows);
+  const rings = ringsOf(frame, building);
+  return tone === null
+    ? { kind: 'shape', rings, isClosed: true, fill: 'paper', stroke: OUTLINE }
+    : { kind: 'toned', tone, rings };
+}
+
+/** Those without a colour first, so that edges of those that have one are whole. */
+function buildingMarks(
+  frame: GroundFrame,
+  buildings: readonly PlanBuilding[],
+  plan: PlannedPlan,
+): Mark[] {
+  const marks = buildings.map((building) => buildingMark(frame, building, plan));
+  return [
+    ...marks.filter(({ kind }) => kind === 'shape'),
+    ...marks.filter(({ kind }) => kind === 'toned'),
+  ];
+}
+
+/**
+ * How the contour of a level is drawn.
+ *
+ * Units: level m, widths mm. Valid: any level. Source: [own].
+ */
+export function contourStroke(level: number): Stroke {
+  const width = level === EMPHASISED ? 0.5 : 0.22;
+  return { ink: 'contour', width, ...(level === LEAST && { dash: [1.6, 1] }) };
+}
+
+function contourMarks({ place }: GroundFrame, { contours }: PlanMaterial): Mark[] {
+  return contours.map(({ level, line }) => lineMark(line.map(place), contourStroke(level)));
+}
+
+/**
+ * All that stands inside the neat line of a plan but the signs over it.
+ *
+ * Units: mm. Valid: labels of the same plan. Source: [own].
+ */
+export function groundMarks(
+  plan: PlannedPlan,
+  material: PlanMaterial,
+  design: AlignmentDesign,
+  { placed, ticks }: Pick<PlanLabels, 'placed' | 'ticks'>,
+): Mark[] {
+  const { frame, content } = plan;
+  return [
+    ...(content.background ? backgroundMarks(frame, material.background) : []),
+    ...buildingMarks(frame, material.buildings, plan),
+    ...gridMarks(frame).crosses,
+    ...(content.contours ? contourMarks(frame, material) : []),
+    ...(content.line ? driveMarks(frame, design) : []),
+    ...tickMarks(ticks),
+    ...placed.flatMap(({ what, box }) => labelMarks(what, box)),
+  ];
+}
+
+/**
+ * The grid outside the neat line, the north point and the scale bar of a plan.
+ *
+ * Units: mm. Valid: any plan. Source: [own].
+ */
+export function signMarks({ frame }: PlannedPlan, paper: string): Mark[] {
+  return [...gridMarks(frame).ticks, ...northMarks(frame), ...scaleBarMarks(frame, paper)];
+}

@@ -1,0 +1,174 @@
+import { footprintMiddle } from '../building/footprint-middle.ts';
+import { figure, percent } from '../presentation/design-words.ts';
+import { formatCount } from '../presentation/format-number.ts';
+import { percentFromRatio } from '../units/percent-from-ratio.ts';
+import { stacked, wordsPart, type ColumnPart, type ColumnPen } from './column-part.ts';
+import { continuedSheets } from './continued-sheets.ts';
+import { keyPart } from './key-plan.ts';
+import { labelList, numberMarks, type ListedLine } from './label-list.ts';
+import { legendPart } from './legend-part.ts';
+import { lineOnGround } from './line-on-ground.ts';
+import type { Mark, Measure } from './marks.ts';
+import { matchMarks } from './match-marks.ts';
+import { planLabels } from './plan-labels.ts';
+import { groundMarks, signMarks } from './plan-marks.ts';
+import type { PlanBuilding, PlanMaterial } from './plan-material.ts';
+import { frameMarks } from './plan-signs.ts';
+import type { PlannedPlan, PlannedSheet } from './planned-sheets.ts';
+import { noteParts, tableParts } from './rows-part.ts';
+import { columnMarks, columnPen, revisionPart } from './sheet-column.ts';
+import type { AboutSheets, Sheet } from './sheet.ts';
+import { planNotes } from './sheet-notes.ts';
+import { titleOfSheet } from './title-of-sheet.ts';
+import { toneOfBuilding } from './tone-of-building.ts';
+
+const FIGURES = { category: 'category', stage: 'stage', settlement: 'settlement in mm' } as const;
+
+/** What figures in buildings of a plan are. */
+function figureWords({ shows }: PlannedPlan['content']): string {
+  return shows === 'stage' || shows === 'settlement' ? FIGURES[shows] : FIGURES.category;
+}
+
+/** The buildings whose middle is on the sheet. */
+function buildingsOn({ frame }: PlannedPlan, { buildings }: PlanMaterial): PlanBuilding[] {
+  const { left, top, right, bottom } = frame.window;
+  return buildings.filter(({ parts }) => {
+    const [x, y] = frame.place(footprintMiddle(parts));
+    return x >= left && x <= right && y >= top && y <= bottom;
+  });
+}
+
+function countsOf(
+  { content }: PlannedPlan,
+  buildings: readonly PlanBuilding[],
+): Map<number, number> {
+  const counts = new Map<number, number>();
+  for (const building of buildings) {
+    const tone = toneOfBuilding(building, content.shows);
+    if (tone !== null) counts.set(tone.number, (counts.get(tone.number) ?? 0) + 1);
+  }
+  return counts;
+}
+
+/** How many of the most strained buildings a sheet names. */
+const MOST = 8;
+
+function mostStrained(
+  pen: ColumnPen,
+  buildings: readonly PlanBuilding[],
+  line: number,
+): ColumnPart[] {
+  const strained = buildings.filter(({ result }) => (result.category ?? -1) >= line);
+  if (strained.length === 0) return [];
+  strained.sort((a, b) => (b.result.strain ?? 0) - (a.result.strain ?? 0));
+  const rows = strained
+    .slice(0, MOST)
+    .map(({ reference, address, result }) => [
+      reference,
+      address ?? '',
+      result.strain === null ? '' : figure(percentFromRatio(result.strain), 3),
+      result.breakpointVolumeLoss === null ? '' : percent(result.breakpointVolumeLoss),
+    ]);
+  const more = strained.length > MOST ? `, the first ${MOST} of ${strained.length}` : '';
+  const columns = [
+    { heading: 'Reference', share: 0.2 },
+    { heading: 'Address', share: 0.38 },
+    { heading: 'Strain, %', share: 0.18, isFigure: true },
+    { heading: 'Breaks at V_L, %', share: 0.24, isFigure: true },
+  ];
+  return [
+    stacked(
+      tableParts(pen, `Category ${line} or more at the central values${more}`, columns, rows),
+    ),
+  ];
+}
+
+function listParts(pen: ColumnPen, lines: readonly ListedLine[]): ColumnPart[] {
+  const columns = [
+    { heading: 'No.', share: 0.1 },
+    { heading: 'Label', share: 0.46 },
+    { heading: 'Easting', share: 0.2, isFigure: true },
+    { heading: 'Northing', share: 0.24, isFigure: true },
+  ];
+  const rows = lines.map(({ number, words, place: [e, n] }) => [
+    ...[String(number), words],
+    ...[e, n].map((value) => formatCount(Math.round(value))),
+  ]);
+  return lines.length === 0
+    ? []
+    : tableParts(pen, `Labels without room on the plan: ${lines.length}`, columns, rows);
+}
+
+type Drawn = {
+  readonly planned: PlannedSheet;
+  readonly plan: PlannedPlan;
+  readonly all: readonly PlannedSheet[];
+  readonly material: PlanMaterial;
+  readonly about: AboutSheets;
+  readonly measure: Measure;
+};
+
+function mapMarks({ planned, plan, material, about, measure }: Drawn): {
+  marks: Mark[];
+  lines: ListedLine[];
+} {
+  const { design } = about.run;
+  const { frame, content, matches } = plan;
+  const labels = planLabels(frame, material, { content, design, measure });
+  const lines = labelList(frame, labels.listed, figureWords(content));
+  const marks = [
+    ...groundMarks(plan, material, design, labels),
+    ...numberMarks(frame, labels, lines, measure),
+    ...matchMarks(frame, lineOnGround(design.line), matches),
+  ];
+  return {
+    lines,
+    marks: [
+      { kind: 'within', window: frame.window, marks },
+      ...signMarks(plan, planned.layout.paper),
+    ],
+  };
+}
+
+/** How high a list in the column may be, as a share of it. */
+const LIST_SHARE = 0.25;
+const BEHIND = 'Labels without room on the plan are listed on the sheet behind this one.';
+
+/**
+ * A plan with the sheets behind it that hold the list of labels without room, and notes that found none in
+ * the column.
+ *
+ * Units: mm. Valid: as `drawnSheets`. Source: [own].
+ */
+export function planSheets(drawn: Drawn): Sheet[] {
+  const { planned, plan, all, material, about, measure } = drawn;
+  const { layout, number } = planned;
+  const pen = columnPen(layout, measure);
+  const on = buildingsOn(plan, material);
+  const { marks, lines } = mapMarks(drawn);
+  const { design, rules } = about.run;
+  const list = listParts(pen, lines);
+  const isShort = stacked(list).height <= LIST_SHARE * (layout.column.bottom - layout.column.top);
+  const pointer = wordsPart(pen, BEHIND, { size: 7.5 });
+  const key = { line: design.line, all, number, ground: about.keyGround };
+  const column = columnMarks(layout, pen, {
+    always: [legendPart(pen, plan.content, countsOf(plan, on)), keyPart(pen, key)],
+    asRoom: [
+      stacked(noteParts(pen, planNotes(plan.content, on, about))),
+      ...(lines.length === 0 ? [] : [isShort ? stacked(list) : pointer]),
+      ...revisionPart(pen, about.fields),
+      ...mostStrained(pen, on, rules.leadingCategory.value),
+    ],
+    title: titleOfSheet(planned, about, ''),
+  });
+  const behind = [...column.left.filter((part) => part !== pointer), ...(isShort ? [] : list)];
+  const size = { width: layout.width, height: layout.height };
+  const name = `${about.fields.title || 'Plan'}, sheet ${number}`;
+  const frame = frameMarks(layout.frame, layout.window, layout.column);
+  const lists = continuedSheets(layout.window, pen, behind).map((more, k, { length }): Sheet => {
+    const title = titleOfSheet(planned, about, `, list ${k + 1} of ${length}`);
+    const foot = columnMarks(layout, pen, { always: [], asRoom: [], title });
+    return { name: `${name}, list ${k + 1}`, ...size, marks: [...frame, ...more, ...foot.marks] };
+  });
+  return [{ name, ...size, marks: [...marks, ...frame, ...column.marks] }, ...lists];
+}

@@ -1,0 +1,127 @@
+import type { Range } from '../numerics/range.ts';
+import { formatCount } from '../presentation/format-number.ts';
+import { niceTicks } from '../presentation/nice-ticks.ts';
+import { lineMark, type Mark, type Spot, type Stroke } from './marks.ts';
+import { ABOVE, type SectionScales } from './planned-sections.ts';
+
+/**
+ * Where a section is drawn: its ground line on paper, and where distances, levels and settlements lie.
+ *
+ * Units: mm of paper from m. Valid: made by `sectionPanel`; settlement is drawn down from the ground line.
+ * Source: [own].
+ */
+export type SectionPanel = {
+  readonly left: number;
+  readonly right: number;
+  readonly ground: number;
+  readonly bottom: number;
+  readonly x: (distance: number) => number;
+  readonly y: (level: number) => number;
+  readonly sunk: (settlement: number) => number;
+};
+
+/**
+ * Lays out a section under a line of the paper: the ground at `groundLevel`, drawn `depth` down.
+ *
+ * Units: m, paper mm. Valid: from before to. Source: [own].
+ */
+export function sectionPanel(
+  { left, top }: { readonly left: number; readonly top: number },
+  { denominator, exaggeration, settlementExaggeration }: SectionScales,
+  {
+    from,
+    to,
+    groundLevel,
+    depth,
+  }: {
+    readonly from: number;
+    readonly to: number;
+    readonly groundLevel: number;
+    readonly depth: number;
+  },
+): SectionPanel {
+  const scale = 1000 / denominator;
+  const ground = top + ABOVE;
+  return {
+    ...{ left, ground },
+    right: left + (to - from) * scale,
+    bottom: ground + depth * exaggeration * scale,
+    x: (distance) => left + (distance - from) * scale,
+    y: (level) => ground + (groundLevel - level) * exaggeration * scale,
+    sunk: (settlement) => ground + settlement * settlementExaggeration * scale,
+  };
+}
+
+const THIN: Stroke = { ink: 'ink', width: 0.2 };
+const FAINT: Stroke = { ink: 'hairline', width: 0.15 };
+const [SIZE, TICK] = [7, 1.4];
+
+/**
+ * The axis of levels at the left of a section.
+ *
+ * Units: levels m. Valid: the panel of that ground. Source: [own].
+ */
+export function levelAxis(panel: SectionPanel, groundLevel: number, depth: number): Mark[] {
+  const { left, ground, bottom, right, y } = panel;
+  const count = Math.max(2, Math.floor((bottom - ground) / 14));
+  const ticks = niceTicks(groundLevel - depth, groundLevel, count);
+  return [
+    lineMark([[left, ground], [left, bottom]], THIN), // prettier-ignore
+    ...ticks.flatMap((level): Mark[] => [
+      lineMark([[left, y(level)], [right, y(level)]], FAINT), // prettier-ignore
+      lineMark([[left - TICK, y(level)], [left, y(level)]], THIN), // prettier-ignore
+      {
+        ...{ kind: 'words', words: formatCount(level), size: SIZE, anchor: 'end' },
+        at: [left - TICK - 1, y(level) + 0.9],
+      },
+    ]),
+  ];
+}
+
+/**
+ * The axis under a section, with words at some distances.
+ *
+ * Units: m. Valid: distances of the panel. Source: [own].
+ */
+export function lengthAxis(
+  { left, right, bottom, x }: SectionPanel,
+  distances: readonly number[],
+  words: (distance: number) => string,
+): Mark[] {
+  const ticks = distances.flatMap((distance): Mark[] => [
+    lineMark([[x(distance), bottom], [x(distance), bottom + TICK]], THIN), // prettier-ignore
+    {
+      ...{ kind: 'words', words: words(distance), size: SIZE, anchor: 'middle' },
+      at: [x(distance), bottom + TICK + 3],
+    },
+  ]);
+  return [lineMark([[left, bottom], [right, bottom]], THIN), ...ticks]; // prettier-ignore
+}
+
+/**
+ * The trough under the ground line: its range as a band, its central values as a line.
+ *
+ * Units: m. Valid: where the method refuses nothing is drawn. Source: as `settlementBracket`.
+ */
+export function troughMarks(
+  { x, sunk, left, right, ground }: SectionPanel,
+  points: readonly { readonly distance: number; readonly settlement: Range | null }[],
+): Mark[] {
+  const known = points.flatMap(({ distance, settlement }) =>
+    settlement === null ? [] : [{ distance, ...settlement }],
+  );
+  if (known.length < 2) return [];
+  const of = (end: keyof Range) => known.map((one): Spot => [x(one.distance), sunk(one[end])]);
+  return [
+    {
+      kind: 'shape',
+      rings: [[...of('low'), ...of('high').reverse()]],
+      isClosed: true,
+      fill: 'band',
+    },
+    lineMark(of('low'), { ink: 'contour', width: 0.18, dash: [0.5, 0.8] }),
+    lineMark(of('high'), { ink: 'contour', width: 0.18, dash: [1.6, 0.9] }),
+    lineMark(of('central'), { ink: 'contour', width: 0.4 }),
+    lineMark([[left, ground], [right, ground]], { ink: 'ink', width: 0.4 }), // prettier-ignore
+  ];
+}

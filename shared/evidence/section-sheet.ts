@@ -1,0 +1,118 @@
+import { CAUTIONS } from '../cautions.ts';
+import { chainageWords } from '../presentation/chainage-words.ts';
+import { formatCount } from '../presentation/format-number.ts';
+import { CATEGORIES } from '../damage/categories.ts';
+import { capital } from '../presentation/capital.ts';
+import { stacked, wordsPart, type ColumnPart, type ColumnPen } from './column-part.ts';
+import { crossSectionMarks } from './cross-section-marks.ts';
+import { keyPart } from './key-plan.ts';
+import { toneParts } from './legend-part.ts';
+import { lineOnGround } from './line-on-ground.ts';
+import { longSectionMarks } from './long-section-marks.ts';
+import type { Mark, Measure } from './marks.ts';
+import type { PlanMaterial } from './plan-material.ts';
+import { frameMarks } from './plan-signs.ts';
+import { ASIDE, depthAt, type PlannedSection } from './planned-sections.ts';
+import type { PlannedSheet } from './planned-sheets.ts';
+import { noteParts } from './rows-part.ts';
+import { columnMarks, columnPen, revisionPart } from './sheet-column.ts';
+import { runNotes } from './sheet-notes.ts';
+import type { AboutSheets, Sheet } from './sheet.ts';
+import { titleOfSheet } from './title-of-sheet.ts';
+
+type Drawn = {
+  readonly planned: PlannedSheet;
+  readonly section: PlannedSection;
+  readonly all: readonly PlannedSheet[];
+  readonly material: PlanMaterial;
+  readonly about: AboutSheets;
+  readonly measure: Measure;
+};
+
+function scaleWords({
+  denominator,
+  exaggeration,
+  settlementExaggeration,
+}: PlannedSection): string[] {
+  const one = (times: number) => `1 : ${formatCount(Number((denominator / times).toPrecision(4)))}`;
+  const up =
+    exaggeration === 1
+      ? 'Levels as lengths'
+      : `Levels ${exaggeration} times as large, ${one(exaggeration)}`;
+  return [
+    `Lengths ${one(1)}. ${up}. Settlement ${formatCount(settlementExaggeration)} times as large as lengths, ${one(settlementExaggeration)}.`,
+    'Buildings stand at true width and are drawn at one height; their colour is the category at the central values.',
+    'The band is settlement of the surface over the whole range, its dotted edge low and its dashed edge high; the line is at the central values.',
+  ];
+}
+
+function sectionNotes(section: PlannedSection, about: AboutSheets): string[] {
+  return [...scaleWords(section), ...runNotes(about), ...CAUTIONS];
+}
+
+function drawingOf({ planned, section, material, about, measure }: Drawn): Mark[] {
+  const { design } = about.run;
+  const { window } = planned.layout;
+  const at = { left: window.left + ASIDE, top: window.top };
+  const line = lineOnGround(design.line);
+  if (section.kind === 'cross sections') {
+    const depth = depthAt(design, section.chainages);
+    return crossSectionMarks(at, section, { depth, material, about, measure });
+  }
+  const stations = [0, line.length, ...design.levels.map(({ chainage }) => chainage)];
+  const words = `Long section from ${chainageWords(section.from)} to ${chainageWords(section.to)}`;
+  return [
+    { kind: 'words', words, at: [at.left, at.top + 5], size: 9, isStrong: true },
+    ...longSectionMarks(at, section, {
+      line,
+      depth: depthAt(design, stations),
+      material,
+      about,
+      measure,
+    }),
+  ];
+}
+
+function legend(pen: ColumnPen): ColumnPart {
+  return stacked([
+    wordsPart(pen, 'Damage category, central values', { size: 9.5, isStrong: true }),
+    { height: 0.8, marks: () => [] },
+    ...CATEGORIES.map(({ category, label, name }) =>
+      toneParts(
+        pen,
+        { tone: { by: 'category', number: category }, label, words: capital(name) },
+        '',
+      ),
+    ),
+  ]);
+}
+
+/**
+ * A sheet of sections.
+ *
+ * Units: mm. Valid: as `drawnSheets`. Source: [own].
+ */
+export function sectionSheet(drawn: Drawn): Sheet {
+  const { planned, section, all, about, measure } = drawn;
+  const { layout, number } = planned;
+  const pen = columnPen(layout, measure);
+  const key = { line: about.run.design.line, all, number, ground: about.keyGround };
+  const column = columnMarks(layout, pen, {
+    always: [legend(pen)],
+    asRoom: [
+      stacked(noteParts(pen, sectionNotes(section, about))),
+      keyPart(pen, key),
+      ...revisionPart(pen, about.fields),
+    ],
+    title: titleOfSheet(planned, about, ''),
+  });
+  return {
+    name: `${about.fields.title || 'Sections'}, sheet ${number}`,
+    ...{ width: layout.width, height: layout.height },
+    marks: [
+      { kind: 'within', window: layout.window, marks: drawingOf(drawn) },
+      ...frameMarks(layout.frame, layout.window, layout.column),
+      ...column.marks,
+    ],
+  };
+}

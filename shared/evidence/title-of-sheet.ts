@@ -1,0 +1,40 @@
+import { formatCount } from '../presentation/format-number.ts';
+import type { PlannedSheet } from './planned-sheets.ts';
+import type { AboutSheets } from './sheet.ts';
+import type { TitleBlock } from './title-part.ts';
+
+const KINDS = {
+  plan: 'Plan',
+  'long section': 'Long section',
+  'cross sections': 'Cross sections',
+} as const;
+
+function denominatorOf({ what }: PlannedSheet): number {
+  return what.kind === 'plan' ? what.frame.denominator : what.denominator;
+}
+
+/**
+ * The title block of a sheet, its fields as they were written and the rest from the run and the sheet.
+ *
+ * Units: none. Valid: any sheet; `part` names a sheet of the list behind it. Source: iso-7200.
+ */
+export function titleOfSheet(
+  planned: PlannedSheet,
+  { scheme, run, fields }: AboutSheets,
+  part: string,
+): TitleBlock {
+  const { number, of, layout, what } = planned;
+  return {
+    owner: scheme.name,
+    title: fields.title,
+    subtitle: fields.subtitle,
+    number: fields.number,
+    revision: fields.revisions[0]?.revision ?? '',
+    sheet: `${number} of ${of}${part}`,
+    scale: `1 : ${formatCount(denominatorOf(planned))} on ${layout.paper}`,
+    kind: KINDS[what.kind],
+    ...{ prepared: fields.prepared, checked: fields.checked, approved: fields.approved },
+    issued: fields.issued,
+    run: String(run.number),
+  };
+}
