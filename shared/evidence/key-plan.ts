@@ -8,7 +8,7 @@ import type { PlanBackground } from './plan-material.ts';
 import type { PlannedSheet } from './planned-sheets.ts';
 
 /** How high a key plan is on A3, and what stays free round what it shows, in mm. */
-const [TALL, MARGIN] = [34, 3];
+const [TALL, MARGIN] = [27, 2.5];
 const NUMBER = 6.5;
 
 /** The frames of the plans among some sheets, by number. */

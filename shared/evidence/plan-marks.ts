@@ -73,7 +73,8 @@ export function groundMarks(
     ...(content.contours ? contourMarks(frame, material) : []),
     ...(content.line ? driveMarks(frame, design) : []),
     ...tickMarks(ticks),
-    ...placed.flatMap(({ what, box }) => labelMarks(what, box)),
+    // what was placed last lies lowest: lines that lead from names end under the figures
+    ...placed.toReversed().flatMap(({ what, box }) => labelMarks(what, box)),
   ];
 }
 

@@ -47,7 +47,7 @@ function scaleWords({
 }
 
 function sectionNotes(section: PlannedSection, about: AboutSheets): string[] {
-  return [...scaleWords(section), ...runNotes(about), ...CAUTIONS];
+  return [...scaleWords(section), ...runNotes(about), CAUTIONS.join(' ')];
 }
 
 function drawingOf({ planned, section, material, about, measure }: Drawn): Mark[] {

@@ -59,11 +59,5 @@ export function planNotes(
   buildings: readonly PlanBuilding[],
   about: AboutSheets,
 ): string[] {
-  return [
-    MEANING[shows],
-    ...runNotes(about),
-    ...bracketNote(buildings, about),
-    'The number that stands for the scale holds on this size of paper; the scale bar holds on any copy.',
-    ...CAUTIONS,
-  ];
+  return [MEANING[shows], ...runNotes(about), ...bracketNote(buildings, about), CAUTIONS.join(' ')];
 }

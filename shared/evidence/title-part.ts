@@ -17,6 +17,7 @@ export type TitleBlock = {
   readonly revision: string;
   readonly sheet: string;
   readonly scale: string;
+  readonly paper: string;
   readonly kind: string;
   readonly prepared: string;
   readonly checked: string;
@@ -69,7 +70,7 @@ function cellRow(
  */
 export function titlePart(pen: ColumnPen, block: TitleBlock, pad: number): ColumnPart {
   const rows = [
-    [['Drawing', block.number], ['Revision', block.revision], ['Scale', block.scale], ['Sheet', block.sheet]],
+    [['Drawing', block.number], ['Revision', block.revision], [`Scale, ${block.paper}`, block.scale], ['Sheet', block.sheet]],
     [['Prepared', block.prepared], ['Checked', block.checked], ['Approved', block.approved], ['Issued', block.issued]],
     [['Kind', block.kind], ['Run', block.run], ['Language', 'en'], ['', '']],
   ] as const; // prettier-ignore
