@@ -32,6 +32,8 @@ const schema = z.object({
   UPLOADS_FOLDER: z.string().min(1).default(path.join(tmpdir(), 'groundsill-uploads')),
   /** Where photographs of visits are kept, by what they hold. */
   PHOTOGRAPHS_FOLDER: z.string().min(1).default(path.join(tmpdir(), 'groundsill-photographs')),
+  /** Where prints of evidence are kept, each by its id. */
+  PRINTS_FOLDER: z.string().min(1).default(path.join(tmpdir(), 'groundsill-prints')),
   LOG_LEVEL: z.enum(['silent', 'error', 'warn', 'info', 'debug']).default('info'),
 });
 

@@ -1,6 +1,7 @@
 import { createServer, type Server } from 'node:http';
 import { createApp } from './app.ts';
 import { recoverImports } from './commands/recover-imports.ts';
+import { recoverPrints } from './commands/recover-prints.ts';
 import { recoverRuns } from './commands/recover-runs.ts';
 import { readEnv } from './env.ts';
 import { seeToLetters } from './letters/see-to-letters.ts';
@@ -36,6 +37,7 @@ async function serve(): Promise<void> {
   const stop = toldToStop();
   const { services, pool, closeServices } = await openServices(env);
   await recoverImports(services);
+  await recoverPrints(services);
   await recoverRuns(services);
   await services.outbox.recover();
   const stopSeeingToLetters = seeToLetters(services);

@@ -16,7 +16,7 @@ export type Services = {
   /** Mails that must not be lost wait in it until the mail server has them. */
   readonly outbox: Outbox;
   readonly tiles: TileCache;
-  /** What is done of imports beside requests. */
+  /** What is done of imports and prints beside requests. */
   readonly jobs: Jobs;
   /** Where runs are worked out, here or on another machine. */
   readonly runs: RunQueue;

@@ -20,6 +20,7 @@ export function settings({ folder, port, serverUrl, publicUrl }) {
     SESSION_SECRET: secretsOf(folder).session,
     UPLOADS_FOLDER: path.join(folder, 'uploads'),
     PHOTOGRAPHS_FOLDER: path.join(folder, 'photographs'),
+    PRINTS_FOLDER: path.join(folder, 'prints'),
     ...process.env,
     PORT: String(port),
     DATABASE_URL: serverUrl,

@@ -4,7 +4,7 @@ import { AppError } from '../errors.ts';
 /** Saves something whose name is its own; one that another has, archived schemes aside, is refused. */
 export async function withOwnName<T>(
   save: () => Promise<T>,
-  thing: 'a scheme' | 'an option' = 'a scheme',
+  thing: 'a scheme' | 'an option' | 'a layout' = 'a scheme',
 ): Promise<T> {
   try {
     return await save();

@@ -29,6 +29,7 @@ import { migration as measures } from './migrations/25-measures.ts';
 import { migration as parties } from './migrations/26-parties.ts';
 import { migration as letters } from './migrations/27-letters.ts';
 import { migration as matters } from './migrations/28-matters.ts';
+import { migration as evidence } from './migrations/29-evidence.ts';
 import { migration as ownTextOfLetters } from './migrations/30-own-text-of-letters.ts';
 import { migration as lettersKept } from './migrations/31-letters-kept.ts';
 
@@ -62,6 +63,7 @@ const MIGRATIONS: Readonly<Record<string, Migration>> = {
   '26-parties': parties,
   '27-letters': letters,
   '28-matters': matters,
+  '29-evidence': evidence,
   '30-own-text-of-letters': ownTextOfLetters,
   '31-letters-kept': lettersKept,
 };

@@ -1,7 +1,7 @@
 import type { Sequelize } from 'sequelize';
 
 /** What is done of an import beside answering requests. */
-export type Job = { readonly importId: string; readonly schemeId: string } & (
+export type ImportJob = { readonly importId: string; readonly schemeId: string } & (
   | {
       readonly kind: 'read';
       /** On disk; removed when it is read, unless another of its layers may be wanted. */
@@ -16,6 +16,30 @@ export type Job = { readonly importId: string; readonly schemeId: string } & (
       readonly personId: string;
     }
 );
+
+/** A print that is to be drawn. */
+export type PrintJob = {
+  readonly kind: 'print';
+  readonly printId: string;
+  readonly schemeId: string;
+  /** Where it is kept once it is whole. */
+  readonly file: string;
+};
+
+/** What is done beside answering requests. */
+export type Job = ImportJob | PrintJob;
+
+/** Jobs of a trade wait for each other, and not for those of another. */
+export type Trade = 'import' | 'print';
+
+export function tradeOf({ kind }: Job): Trade {
+  return kind === 'print' ? 'print' : 'import';
+}
+
+/** The import or the print that a job is of. */
+export function subjectOf(job: Job): string {
+  return job.kind === 'print' ? job.printId : job.importId;
+}
 
 /** What a job works with, in a thread of its own or beside others. */
 export type JobTools = {

@@ -1,10 +1,10 @@
-import type { Job } from './job.ts';
+import { subjectOf, tradeOf, type Job, type Trade } from './job.ts';
 
-/** Work that goes on beside requests: one job at a time for a scheme, few at a time in all. */
+/** Work that goes on beside requests: of a trade one job at a time for a scheme, few at a time in all. */
 export type Jobs = {
   readonly start: (job: Job) => void;
-  /** Stops what is done or is to be done of an import; resolves when nothing is. */
-  readonly stop: (importId: string) => Promise<void>;
+  /** Stops what is done or is to be done of an import or a print; resolves when nothing is. */
+  readonly stop: (subject: string) => Promise<void>;
   /** Resolves when there is nothing to do. */
   readonly idle: () => Promise<void>;
   /** Stops everything. */
@@ -23,13 +23,13 @@ export type JobsSetting = {
   readonly onFailed: (job: Job, error: unknown) => Promise<Job | undefined>;
   /** Cleans up after every job, done or not. */
   readonly onEnded: (job: Job) => Promise<void>;
-  readonly atOnce: number;
+  readonly atOnce: Readonly<Record<Trade, number>>;
 };
 
-/** Whether nothing is done of a job's scheme. */
-function isFree({ schemeId, importId }: Job, running: ReadonlyMap<string, Running>): boolean {
-  const jobs = [...running.values()].map(({ job }) => job);
-  return jobs.every((job) => job.schemeId !== schemeId && job.importId !== importId);
+/** Whether a job's trade has room for it, and nothing of that trade is done for its scheme. */
+function isFree(job: Job, running: ReadonlyMap<string, Running>, most: number): boolean {
+  const others = [...running.values()].filter((one) => tradeOf(one.job) === tradeOf(job));
+  return others.length < most && others.every((one) => one.job.schemeId !== job.schemeId);
 }
 
 /** A queue of jobs. */
@@ -46,19 +46,19 @@ export function createJobs({ run, onFailed, onEnded, atOnce }: JobsSetting): Job
       if (next !== undefined) waiting.push(next);
     } finally {
       await onEnded(job);
-      running.delete(job.importId);
+      running.delete(subjectOf(job));
       startNext();
     }
   }
 
   function startNext(): void {
     for (const job of waiting) {
-      if (running.size >= atOnce || !isFree(job, running)) continue;
+      if (!isFree(job, running, atOnce[tradeOf(job)])) continue;
       waiting = waiting.filter((one) => one !== job);
       const stopping = new AbortController();
       // begins after it is entered, so that it can leave
       const ended = Promise.resolve().then(() => work(job, stopping.signal));
-      running.set(job.importId, { job, stopping, ended });
+      running.set(subjectOf(job), { job, stopping, ended });
     }
   }
 
@@ -68,9 +68,9 @@ export function createJobs({ run, onFailed, onEnded, atOnce }: JobsSetting): Job
     await Promise.all(dropped.map(onEnded));
   }
 
-  async function stop(importId: string): Promise<void> {
-    await drop((job) => job.importId === importId);
-    const one = running.get(importId);
+  async function stop(subject: string): Promise<void> {
+    await drop((job) => subjectOf(job) === subject);
+    const one = running.get(subject);
     one?.stopping.abort();
     await one?.ended;
   }

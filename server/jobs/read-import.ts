@@ -9,7 +9,7 @@ import { RegisterImport } from '../models/register-import.ts';
 import { insertStagedRows } from '../models/staged-rows.ts';
 import { ahead } from '../register/ahead.ts';
 import { inBatches } from '../register/in-batches.ts';
-import type { Job, JobTools } from './job.ts';
+import type { ImportJob, JobTools } from './job.ts';
 import { createProgress } from './progress.ts';
 import { removeReadFile } from './remove-file.ts';
 
@@ -52,7 +52,7 @@ async function stageRows(
 
 async function stage(
   tools: JobTools,
-  { importId, schemeId, file, layer: wanted }: Extract<Job, { kind: 'read' }>,
+  { importId, schemeId, file, layer: wanted }: Extract<ImportJob, { kind: 'read' }>,
 ): Promise<void> {
   const upload = await openUpload(file, wanted);
   const { format, kind, layer } = upload;
@@ -69,7 +69,7 @@ async function stage(
 /** Reads a file that was sent into rows that can be checked; it goes unless another layer may be wanted. */
 export async function readImport(
   tools: JobTools,
-  job: Extract<Job, { kind: 'read' }>,
+  job: Extract<ImportJob, { kind: 'read' }>,
 ): Promise<void> {
   try {
     await stage(tools, job);

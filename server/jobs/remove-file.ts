@@ -1,6 +1,6 @@
 import { rm } from 'node:fs/promises';
 import { RegisterImport } from '../models/register-import.ts';
-import type { Job } from './job.ts';
+import type { ImportJob } from './job.ts';
 
 /** Removes the file of an import that was kept so that another of its layers could be chosen. */
 export async function removeKeptFile({ id, file }: RegisterImport): Promise<void> {
@@ -10,7 +10,7 @@ export async function removeKeptFile({ id, file }: RegisterImport): Promise<void
 }
 
 /** Removes the file that a job has read, unless its import was read and keeps it. */
-export async function removeReadFile(job: Job): Promise<void> {
+export async function removeReadFile(job: ImportJob): Promise<void> {
   if (job.kind !== 'read') return;
   const { importId: id, file } = job;
   const kept = await RegisterImport.count({ where: { id, file, state: ['checking', 'asking'] } });

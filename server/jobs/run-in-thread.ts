@@ -1,6 +1,6 @@
 import { Worker } from 'node:worker_threads';
 import { AppError } from '../errors.ts';
-import type { Job } from './job.ts';
+import { tradeOf, type Job } from './job.ts';
 import { threadMessageSchema } from './thread-messages.ts';
 
 /** How long a thread may take, in milliseconds, and what people read when it takes longer. */
@@ -8,10 +8,14 @@ const PATIENCE = {
   read: [120_000, 'Reading the file took more than two minutes. Send it in smaller parts.'],
   check: [300_000, 'Checking the file took more than five minutes. Send it in smaller parts.'],
   'take over': [300_000, 'Taking the file over took more than five minutes. Send it in smaller parts.'],
+  print: [900_000, 'Printing took more than a quarter of an hour. Print fewer sheets at a time.'],
 } as const; // prettier-ignore
 
 const MOST_MEGABYTES = 700;
-const NO_MEMORY = 'The file needs more memory than there is for one. Send it in smaller parts.';
+const NO_MEMORY = {
+  import: 'The file needs more memory than there is for one. Send it in smaller parts.',
+  print: 'The print needs more memory than there is for one. Print fewer sheets at a time.',
+} as const;
 
 /** Beside the sources while they are read as they are, beside the built server otherwise. */
 function entry(): URL {
@@ -59,7 +63,9 @@ export function runInThread(databaseUrl: string, job: Job, signal: AbortSignal):
       if (threadMessageSchema.parse(message).kind === 'checking') waitFor('check');
     });
     worker.on('error', (error) => {
-      found ??= isOutOfMemory(error) ? new AppError('too-large', NO_MEMORY) : asError(error);
+      found ??= isOutOfMemory(error)
+        ? new AppError('too-large', NO_MEMORY[tradeOf(job)])
+        : asError(error);
     });
     worker.on('exit', (code) => {
       clearTimeout(patience);

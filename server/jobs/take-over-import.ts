@@ -7,7 +7,7 @@ import { rowRanges } from '../models/row-ranges.ts';
 import { Scheme } from '../models/scheme.ts';
 import { deleteStagedRows } from '../models/staged-rows.ts';
 import type { ChangedBuilding, CreatedBuilding } from '../register/register-edits.ts';
-import type { Job, JobTools } from './job.ts';
+import type { ImportJob, JobTools } from './job.ts';
 import { createProgress } from './progress.ts';
 import { removeKeptFile } from './remove-file.ts';
 
@@ -62,7 +62,7 @@ function walkOf({ database, signal }: JobTools, importId: string): Walk {
 /** Takes a checked import over into the register, in one transaction with its own end. */
 export async function takeOverImport(
   tools: JobTools,
-  { importId, personId }: Extract<Job, { kind: 'take over' }>,
+  { importId, personId }: Extract<ImportJob, { kind: 'take over' }>,
 ): Promise<void> {
   const { database, signal } = tools;
   const row = await RegisterImport.findByPk(importId);

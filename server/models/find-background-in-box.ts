@@ -9,23 +9,36 @@ export type DrawnBackground = {
   readonly geometry: Geometry;
 };
 
+/** What of a background is wanted: all that is as large as `least` degrees, of one layer or of all. */
+type Wanted = {
+  readonly least: number;
+  readonly layer?: BackgroundLayer;
+  /** How many at most, the largest. */
+  readonly most?: number;
+};
+
 /**
- * The background of a scheme that may reach into a box, but for what is smaller than `least` degrees. The
- * box is written as in the index, or it is not used.
+ * The background of a scheme that may reach into a box, but for what is too small. The box is written as in
+ * the index, or it is not used.
  */
 export async function findBackgroundInBox(
   database: Sequelize,
   schemeId: string,
   [west, south, east, north]: LonLatBox,
-  least: number,
+  { least, layer, most }: Wanted,
 ): Promise<DrawnBackground[]> {
+  const order = most === undefined ? 'id' : 'greatest(east - west, north - south) desc, id';
   return database.query<DrawnBackground>(
     `select layer, name, geometry
      from background_features
      where scheme_id = $1
        and box(point(west, south), point(east, north)) && box(point($2, $3), point($4, $5))
        and greatest(east - west, north - south) >= $6
-     order by id`,
-    { type: QueryTypes.SELECT, bind: [schemeId, west, south, east, north, least] },
+       and ($7::text is null or layer = $7)
+     order by ${order} limit $8`,
+    {
+      type: QueryTypes.SELECT,
+      bind: [schemeId, west, south, east, north, least, layer ?? null, most ?? null],
+    },
   );
 }

@@ -16,6 +16,10 @@ export const schemePolicy = {
   readRuns: (actor: SchemeActor) =>
     actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness'),
   startRuns: (actor: SchemeActor) => holds(actor, 'designer', 'assessor'),
+  readEvidence: (actor: SchemeActor) =>
+    actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness'),
+  prepareEvidence: (actor: SchemeActor) =>
+    actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness'),
   readVisits: (actor: SchemeActor) =>
     actor.isAdministrator || holds(actor, 'designer', 'assessor', 'witness'),
   recordVisits: (actor: SchemeActor) => holds(actor, 'assessor'),
@@ -57,6 +61,7 @@ const CHANGES: ReadonlySet<SchemeAction> = new Set([
   'updateRegister',
   'updateAlignments',
   'startRuns',
+  'prepareEvidence',
   'prepareDecisions',
   'checkDecisions',
   'assignBuildings',
@@ -94,6 +99,8 @@ export function schemeAbilities(
     updateAlignments: can('updateAlignments'),
     readRuns: can('readRuns'),
     startRuns: can('startRuns'),
+    readEvidence: can('readEvidence'),
+    prepareEvidence: can('prepareEvidence'),
     readVisits: can('readVisits'),
     recordVisits: can('recordVisits'),
     readDecisions: can('readDecisions'),

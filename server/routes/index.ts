@@ -7,6 +7,7 @@ import { buildingRoutes } from './buildings.ts';
 import { crsRoutes } from './crs.ts';
 import { decisionRoutes } from './decisions.ts';
 import type { Route } from './define-route.ts';
+import { evidenceRoutes } from './evidence.ts';
 import { groundRoutes } from './ground.ts';
 import { importRoutes } from './imports.ts';
 import { letterRoutes } from './letters.ts';
@@ -53,6 +54,7 @@ export const ROUTES: readonly Route[] = [
   ...groundRoutes,
   ...alignmentRoutes,
   ...runRoutes,
+  ...evidenceRoutes,
   ...decisionRoutes,
   ...measureRoutes,
   ...letterTemplateRoutes,

@@ -1,6 +1,5 @@
-import proj4 from 'proj4';
 import { boundingBox } from '../../shared/geometry/bounding-box.ts';
-import type { PlanPoint } from '../../shared/geometry/point.ts';
+import { fromLonLat } from '../crs/from-lon-lat.ts';
 import type { PlacedBuilding } from './plan-chunks.ts';
 
 /** A building with the box in degrees that its register keeps. */
@@ -14,13 +13,10 @@ export type BoxInDegrees = {
 
 /** The boxes on a grid that hold boxes in degrees, whose sides may stand askew on it. */
 export function boxesOnGrid(boxes: readonly BoxInDegrees[], definition: string): PlacedBuilding[] {
-  const { forward } = proj4(definition);
+  const place = fromLonLat(definition);
   return boxes.map(({ id, west, south, east, north }) => {
     const corners = [west, east].flatMap((longitude) =>
-      [south, north].map((latitude): PlanPoint => {
-        const [easting = NaN, northing = NaN] = forward([longitude, latitude]);
-        return [easting, northing];
-      }),
+      [south, north].map((latitude) => place([longitude, latitude])),
     );
     return { id, ...boundingBox(corners) };
   });

@@ -23,7 +23,7 @@ export async function backgroundTile(
 ): Promise<Buffer> {
   const isClosest = place.z === BACKGROUND_ZOOMS.most;
   const least = isClosest ? 0 : 360 / 2 ** place.z / PIXELS;
-  const drawn = await findBackgroundInBox(database, schemeId, tileBounds(place), least);
+  const drawn = await findBackgroundInBox(database, schemeId, tileBounds(place), { least });
   const layers = BACKGROUND_LAYERS.map((layer) => {
     return [layer, drawn.filter((one) => one.layer === layer).map(featureOf)] as const;
   });

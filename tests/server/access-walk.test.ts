@@ -55,6 +55,8 @@ function paramsOf(place: Place | undefined): Params {
     visitId: place?.visitId ?? UNKNOWN_ID,
     ownLetterId: UNKNOWN_ID,
     photographId: UNKNOWN_ID,
+    layoutId: UNKNOWN_ID,
+    printId: UNKNOWN_ID,
     row: 1,
     field: 'use',
   };
@@ -72,6 +74,7 @@ function addressOf({ path }: Route, params: Params): string {
 const NOT_THERE = [
   ...['viewId', 'row', 'photographId', 'decisionId', 'measureId', 'ownLetterId', 'batchId'],
   ...['writtenLetterId', 'matterId', 'appointmentId', 'undertakingId', 'partyId', 'partyImportId'],
+  ...['layoutId', 'printId'],
 ];
 const OF_NOTHING = new RegExp(`:(${NOT_THERE.join('|')})\\b|/decisions$`);
 

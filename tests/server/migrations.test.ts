@@ -139,6 +139,7 @@ describe.each([
   ['run_buildings', `version = 7`],
   ['run_contours', `contours = '[1]'`],
   ['run_results', `stage = 3`],
+  ['prints', `name = 'other'`],
   ['visits', `notes = 'other'`],
   ['visit_photographs', `caption = 'other'`],
   ['visit_photograph_files', `bytes = 7`],
@@ -177,6 +178,9 @@ describe.each([
       ), result as (
         insert into run_results (run_id, building_id, stage, settlement, slope, held_by, assumed, warnings)
         select run_id, building_id, 1, 0, 0, '{}', '{}', '{}' from member
+      ), print as (
+        insert into prints (id, scheme_id, run_id, number, name, layout)
+        select gen_random_uuid(), scheme.id, run.id, 1, 'A', '{}' from scheme, run
       ), visit as (
         insert into visits (id, scheme_id, building_id, visited_at, visited_by, part, notes, defects,
           fingerprint)
@@ -230,6 +234,7 @@ test('tables of other migrations are not forgotten here', async () => {
     'outbox_answers',
     'outbox_tries',
     'party_erasures',
+    'prints',
     'register_changes',
     'run_buildings',
     'run_contours',

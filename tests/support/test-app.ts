@@ -52,6 +52,7 @@ export function testApp({
     const copy = await createTestDatabase();
     const uploads = await mkdtemp(path.join(tmpdir(), 'groundsill-uploads-'));
     const photographs = await mkdtemp(path.join(tmpdir(), 'groundsill-photographs-'));
+    const prints = await mkdtemp(path.join(tmpdir(), 'groundsill-prints-'));
     const env = readEnv({
       NODE_ENV: 'test',
       DATABASE_URL: copy.serverUrl,
@@ -61,6 +62,7 @@ export function testApp({
       LOG_LEVEL: 'silent',
       UPLOADS_FOLDER: uploads,
       PHOTOGRAPHS_FOLDER: photographs,
+      PRINTS_FOLDER: prints,
       ...overrides,
     });
     const database = connectDatabase(env.DATABASE_URL);
@@ -94,6 +96,7 @@ export function testApp({
       await copy.drop();
       await rm(uploads, { recursive: true });
       await rm(photographs, { recursive: true });
+      await rm(prints, { recursive: true });
     };
   });
 

@@ -52,15 +52,24 @@ export function hatchStrokes(paper: Paper, shape: () => void, bounds: Bounds, ha
   doc.stroke().restore();
 }
 
-/** Fills the shape that `shape` puts into the document's path as a category is drawn everywhere. */
+/**
+ * Fills the shape that `shape` puts into the document's path as a category is drawn everywhere; `pixel` is
+ * how long a pixel of its hatch is.
+ */
 export function fillCategory(
   paper: Paper,
   category: Category,
   shape: () => void,
   bounds: Bounds,
+  pixel = 1,
 ): void {
   const { fill, hatch } = DAMAGE[category];
   shape();
   paper.doc.fill(fill, 'even-odd');
-  if (hatch !== null) hatchStrokes(paper, shape, bounds, hatch);
+  if (hatch === null) return;
+  hatchStrokes(paper, shape, bounds, {
+    colour: hatch.colour,
+    width: hatch.width * pixel,
+    strokes: hatch.strokes.map(({ lean, pitch }) => ({ lean, pitch: pitch * pixel })),
+  });
 }

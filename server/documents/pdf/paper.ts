@@ -5,22 +5,30 @@ import { PAGE_SIZES } from './page-sizes.ts';
 /** What is drawn and written on: a document with its fonts. */
 export type Paper = { readonly doc: PDFKit.PDFDocument; readonly faces: Faces };
 
-type PaperOptions = {
-  readonly size: keyof typeof PAGE_SIZES;
+/** What a document says of itself. */
+export type PaperFacts = {
   readonly title: string;
   readonly author: string;
   readonly subject: string;
   readonly at: Date;
 };
 
-/** An empty document. Its pages stay open until it ends, so that each can say how many there are. */
-export function openPaper({ size, title, author, subject, at }: PaperOptions): Paper {
+type PaperOptions = PaperFacts & {
+  /** Of pages that do not say how large they are. */
+  readonly size?: keyof typeof PAGE_SIZES;
+  /** Whether pages stay open until the document ends, so that each can say how many there are. */
+  readonly isKept?: boolean;
+};
+
+/** An empty document. */
+export function openPaper(options: PaperOptions): Paper {
+  const { size = 'A4', isKept = true, title, author, subject, at } = options;
   const { width, height } = PAGE_SIZES[size];
   const doc = new PDFDocument({
     size: [width, height],
     margin: 0,
     autoFirstPage: false,
-    bufferPages: true,
+    bufferPages: isKept,
     pdfVersion: '1.7',
     lang: 'en-GB',
     displayTitle: true,

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import type { Job } from '../../../server/jobs/job.ts';
+import { subjectOf, type Job } from '../../../server/jobs/job.ts';
 import { createJobs } from '../../../server/jobs/jobs.ts';
 
 function job(importId: string, schemeId = importId): Job {
@@ -7,15 +7,15 @@ function job(importId: string, schemeId = importId): Job {
 }
 
 /** Jobs that end when they are told to, and what was done. */
-function stage(atOnce = 2) {
+function stage(most = 2) {
   const log: string[] = [];
   const ends = new Map<string, (error?: Error) => void>();
   const jobs = createJobs({
-    atOnce,
-    run: ({ importId }, signal) =>
+    atOnce: { import: most, print: 1 },
+    run: (job, signal) =>
       new Promise((resolve, reject) => {
-        log.push(`start ${importId}`);
-        ends.set(importId, (error) => {
+        log.push(`start ${subjectOf(job)}`);
+        ends.set(subjectOf(job), (error) => {
           if (error) reject(error);
           else resolve();
         });
@@ -23,12 +23,12 @@ function stage(atOnce = 2) {
           reject(new Error('stopped'));
         });
       }),
-    onFailed: ({ importId }, error) => {
-      log.push(`failed ${importId}: ${String(error)}`);
-      return Promise.resolve(importId === 'again' ? job('more') : undefined);
+    onFailed: (failed, error) => {
+      log.push(`failed ${subjectOf(failed)}: ${String(error)}`);
+      return Promise.resolve(subjectOf(failed) === 'again' ? job('more') : undefined);
     },
-    onEnded: ({ importId }) => {
-      log.push(`end ${importId}`);
+    onEnded: (ended) => {
+      log.push(`end ${subjectOf(ended)}`);
       return Promise.resolve();
     },
   });
@@ -50,6 +50,21 @@ describe('jobs', () => {
     expect(log.slice(4)).toEqual(['end a', 'start b']);
     end('b');
     end('d');
+    await jobs.idle();
+  });
+
+  test('of printing wait for each other, and for no import', async () => {
+    const { jobs, log, turn, end } = stage(1);
+    jobs.start(job('a', 's'));
+    for (const printId of ['p', 'q'])
+      jobs.start({ kind: 'print', printId, schemeId: 's', file: '' });
+    await turn();
+    expect(log).toEqual(['start a', 'start p']);
+    end('p');
+    await turn();
+    expect(log.slice(2)).toEqual(['end p', 'start q']);
+    end('a');
+    end('q');
     await jobs.idle();
   });
 

@@ -1,0 +1,53 @@
+import { once } from 'node:events';
+import { createWriteStream } from 'node:fs';
+import { finished } from 'node:stream/promises';
+import { setImmediate } from 'node:timers/promises';
+import type { Measure } from '../../../shared/evidence/marks.ts';
+import type { Sheet } from '../../../shared/evidence/sheet.ts';
+import { POINTS_PER_MM } from '../pdf/page-sizes.ts';
+import { openPaper, type PaperFacts } from '../pdf/paper.ts';
+import { drawMarks } from './draw-marks.ts';
+import { openMeasure } from './measure.ts';
+
+/** A document that grows sheet by sheet. */
+export type OpenSheets = {
+  readonly measure: Measure;
+  readonly add: (sheet: Sheet) => Promise<void>;
+  /** Ends the document once all of it is on the disk; how many sheets it has. */
+  readonly close: () => Promise<number>;
+  readonly giveUp: () => void;
+};
+
+/** Opens a document of sheets in a new file; each sheet leaves memory when the next one comes. */
+export function openSheets(file: string, facts: PaperFacts): OpenSheets {
+  const paper = openPaper({ ...facts, isKept: false });
+  const { doc } = paper;
+  const stream = createWriteStream(file, { flags: 'wx', mode: 0o600, flush: true });
+  const whole = finished(stream);
+  // a fault is told to whoever waits for the end; until then nobody may be waiting
+  whole.catch(() => undefined);
+  doc.pipe(stream);
+  let count = 0;
+  return {
+    measure: openMeasure(paper),
+    add: async ({ name, width, height, marks }) => {
+      const [across, down] = [width * POINTS_PER_MM, height * POINTS_PER_MM];
+      doc.addPage({ size: [across, down], margin: 0 });
+      doc.outline.addItem(name);
+      drawMarks(paper, { left: 0, top: 0, right: width, bottom: height }, marks);
+      count += 1;
+      if (stream.writableNeedDrain) await Promise.race([once(stream, 'drain'), whole]);
+      // what the document holds goes on to the file between the turns
+      await setImmediate();
+    },
+    close: async () => {
+      doc.end();
+      await whole;
+      return count;
+    },
+    giveUp: () => {
+      doc.unpipe(stream);
+      stream.destroy();
+    },
+  };
+}
