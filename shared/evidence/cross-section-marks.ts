@@ -11,7 +11,7 @@ import { sine } from '../numerics/sine.ts';
 import { millimetresFromMetres } from '../units/millimetres-from-metres.ts';
 import type { Mark, Measure, Spot } from './marks.ts';
 import type { PlanMaterial } from './plan-material.ts';
-import { ABOVE, BELOW, type PlannedSection } from './planned-sections.ts';
+import { ABOVE, sectionHeight, type PlannedSection } from './planned-sections.ts';
 import {
   lengthAxis,
   levelAxis,
@@ -99,9 +99,9 @@ export function crossSectionMarks(
   { about, ...room }: Omit<Room, 'halfWidth'> & { readonly about: AboutSheets },
 ): Mark[] {
   const { design, rules } = about.run;
-  const { halfWidth, denominator, exaggeration } = planned;
+  const { halfWidth } = planned;
   const sections: SectionsOfDesign = sectionsOfDesign(design, assessmentRules(rules));
-  const each = (room.depth * exaggeration * 1000) / denominator + ABOVE + BELOW;
+  const each = sectionHeight(planned, room.depth);
   return planned.chainages.flatMap((chainage, k) => {
     const section = sections(chainage, halfWidth);
     const span = {

@@ -1,6 +1,7 @@
-import { steps } from './steps.ts';
+import { planDistance } from '../geometry/plan-distance.ts';
 import type { PlanPoint } from '../geometry/point.ts';
 import { formatCount } from '../presentation/format-number.ts';
+import { steps } from './steps.ts';
 import { cornersOf, type GroundFrame } from './ground-frame.ts';
 import { lineMark, type Mark, type Spot } from './marks.ts';
 
@@ -55,21 +56,33 @@ export function gridTicks(frame: GroundFrame): GridTick[] {
 }
 
 const [TICK, CROSS, SIZE] = [2.4, 1.5, 7];
+/** Words along one side keep so far from each other, from middle to middle, in mm. */
+const WORDS_APART = 26;
 const LINE = { ink: 'ink', width: 0.25 } as const;
 const FINE = { ink: 'rule', width: 0.13 } as const;
 
-function tickMarks({ axis, value, at: [x, y], out: [dx, dy] }: GridTick): Mark[] {
-  const words = `${axis} ${formatCount(value)}`;
+function wordsOfTick({ axis, value, at: [x, y], out: [dx, dy] }: GridTick): Mark {
   const isLevel = dx === 0;
-  return [
-    lineMark([[x, y], [x + dx * TICK, y + dy * TICK]], LINE), // prettier-ignore
-    {
-      ...{ kind: 'words', words, size: SIZE, anchor: 'middle' },
-      // at the sides the words run up the sheet
-      at: isLevel ? [x, y + (dy < 0 ? -3 : 5.3)] : [x + (dx < 0 ? -3 : 5), y],
-      ...(!isLevel && { along: [0, -1] as const }),
-    },
-  ];
+  return {
+    ...{ kind: 'words', words: `${axis} ${formatCount(value)}`, size: SIZE, anchor: 'middle' },
+    // at the sides the words run up the sheet
+    at: isLevel ? [x, y + (dy < 0 ? -3 : 5.3)] : [x + (dx < 0 ? -3 : 5), y],
+    ...(!isLevel && { along: [0, -1] as const }),
+  };
+}
+
+/** Every line of the grid has its tick; on a turned sheet words that would meet are left out. */
+function tickMarks(ticks: readonly GridTick[]): Mark[] {
+  const written: GridTick[] = [];
+  const isFree = ({ at, out }: GridTick) =>
+    written.every((one) => one.out !== out || planDistance(one.at, at) >= WORDS_APART);
+  return ticks.flatMap((tick): Mark[] => {
+    const { at: [x, y], out: [dx, dy] } = tick; // prettier-ignore
+    const stroke = lineMark([[x, y], [x + dx * TICK, y + dy * TICK]], LINE); // prettier-ignore
+    if (!isFree(tick)) return [stroke];
+    written.push(tick);
+    return [stroke, wordsOfTick(tick)];
+  });
 }
 
 function crossMarks(frame: GroundFrame, [e, n]: PlanPoint): Mark[] {
@@ -96,7 +109,7 @@ export function gridMarks(frame: GroundFrame): {
   const { west, south, east, north } = frame.box;
   const [eastings, northings] = [steps(west, east, step), steps(south, north, step)];
   return {
-    ticks: gridTicks(frame).flatMap(tickMarks),
+    ticks: tickMarks(gridTicks(frame)),
     crosses: eastings.flatMap((e) => northings.flatMap((n) => crossMarks(frame, [e, n]))),
   };
 }

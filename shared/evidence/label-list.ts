@@ -18,17 +18,19 @@ export type ListedLine = {
   readonly labels: readonly PlanLabel[];
 };
 
+type FigureWords = (figure: string) => string;
+
 const BEFORE = { contour: 'Contour', chainage: 'Chainage' } as const;
 
 /** What a line says of its labels, which all belong to one place. */
-function wordsOf(labels: readonly PlanLabel[], figure: string): string {
+function wordsOf(labels: readonly PlanLabel[], figure: FigureWords): string {
   const [first] = labels;
   if (first === undefined) return '';
   if (first.kind === 'contour' || first.kind === 'chainage')
     return `${BEFORE[first.kind]} ${first.words}`;
   const name = labels.find(({ kind }) => kind === 'name')?.words ?? first.building?.reference ?? '';
   const number = labels.find(({ kind }) => kind === 'figure')?.words;
-  return number === undefined ? name : `${name}, ${figure} ${number}`;
+  return number === undefined ? name : `${name}, ${figure(number)}`;
 }
 
 /**
@@ -39,7 +41,7 @@ function wordsOf(labels: readonly PlanLabel[], figure: string): string {
 export function labelList(
   frame: GroundFrame,
   listed: readonly PlanLabel[],
-  figure: string,
+  figure: FigureWords,
 ): ListedLine[] {
   const groups = new Map<string, PlanLabel[]>();
   for (const label of listed) {

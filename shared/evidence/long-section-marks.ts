@@ -7,7 +7,7 @@ import { niceTicks } from '../presentation/nice-ticks.ts';
 import type { LineOnGround } from './line-on-ground.ts';
 import { lineMark, type Mark, type Measure, type Spot, type Stroke } from './marks.ts';
 import type { PlanMaterial } from './plan-material.ts';
-import type { PlannedSection } from './planned-sections.ts';
+import type { SectionScales, Stretch } from './planned-sections.ts';
 import {
   lengthAxis,
   levelAxis,
@@ -17,8 +17,6 @@ import {
 } from './section-panel.ts';
 import type { AboutSheets } from './sheet.ts';
 import { standingMarks, standingOn, type Standing } from './standing-marks.ts';
-
-type Planned = Extract<PlannedSection, { kind: 'long section' }>;
 
 const LINES: readonly (readonly ['crown' | 'axis' | 'invert', string, Stroke])[] = [
   ['crown', 'Crown', { ink: 'ink', width: 0.3 }],
@@ -42,7 +40,7 @@ function levelAt(
   return before[name] + share * (next[name] - before[name]);
 }
 
-function driveLines(panel: SectionPanel, { from, to }: Planned, about: AboutSheets): Mark[] {
+function driveLines(panel: SectionPanel, { from, to }: Stretch, about: AboutSheets): Mark[] {
   const rows = longSection(about.run.design);
   const stations = [
     from,
@@ -59,7 +57,7 @@ function driveLines(panel: SectionPanel, { from, to }: Planned, about: AboutShee
 /** What stands right over the line, part by part of it. */
 function standingAlong(
   line: LineOnGround,
-  { from, to }: Planned,
+  { from, to }: Stretch,
   { buildings }: PlanMaterial,
 ): Standing[] {
   const points = line.between(from, to);
@@ -80,7 +78,7 @@ const APART = 1.5;
 function settlements(
   panel: SectionPanel,
   line: LineOnGround,
-  { from, to }: Planned,
+  { from, to }: Stretch,
   { run }: AboutSheets,
 ) {
   const bracket = settlementBracket(run.design, assessmentRules(run.rules));
@@ -99,7 +97,7 @@ function settlements(
  */
 export function longSectionMarks(
   at: { readonly left: number; readonly top: number },
-  planned: Planned,
+  stretch: Stretch & SectionScales,
   {
     line,
     depth,
@@ -115,14 +113,16 @@ export function longSectionMarks(
   },
 ): Mark[] {
   const { groundLevel } = about.run.design;
-  const { from, to } = planned;
-  const panel = sectionPanel(at, planned, { from, to, groundLevel, depth });
+  const { from, to } = stretch;
+  const panel = sectionPanel(at, stretch, { from, to, groundLevel, depth });
   const ticks = niceTicks(from, to, Math.max(2, Math.floor((panel.right - panel.left) / 40)));
+  const words = `Long section from ${chainageWords(from)} to ${chainageWords(to)}`;
   return [
+    { kind: 'words', words, at: [at.left, at.top + 5], size: 9, isStrong: true },
     ...levelAxis(panel, groundLevel, depth),
     ...lengthAxis(panel, ticks, chainageWords),
-    ...troughMarks(panel, settlements(panel, line, planned, about)),
-    ...standingMarks(panel, standingAlong(line, planned, material), measure),
-    ...driveLines(panel, planned, about),
+    ...troughMarks(panel, settlements(panel, line, stretch, about)),
+    ...standingMarks(panel, standingAlong(line, stretch, material), measure),
+    ...driveLines(panel, stretch, about),
   ];
 }

@@ -22,11 +22,10 @@ import { planNotes } from './sheet-notes.ts';
 import { titleOfSheet } from './title-of-sheet.ts';
 import { toneOfBuilding } from './tone-of-building.ts';
 
-const FIGURES = { category: 'category', stage: 'stage', settlement: 'settlement in mm' } as const;
-
-/** What figures in buildings of a plan are. */
-function figureWords({ shows }: PlannedPlan['content']): string {
-  return shows === 'stage' || shows === 'settlement' ? FIGURES[shows] : FIGURES.category;
+/** What a figure in a building of a plan means. */
+function figureWords({ shows }: PlannedPlan['content']): (figure: string) => string {
+  if (shows === 'settlement') return (words) => `${words} mm`;
+  return (words) => `${shows === 'stage' ? 'stage' : 'category'} ${words}`;
 }
 
 /** The buildings whose middle is on the sheet. */
@@ -85,10 +84,10 @@ function mostStrained(
 
 function listParts(pen: ColumnPen, lines: readonly ListedLine[]): ColumnPart[] {
   const columns = [
-    { heading: 'No.', share: 0.1 },
-    { heading: 'Label', share: 0.46 },
-    { heading: 'Easting', share: 0.2, isFigure: true },
-    { heading: 'Northing', share: 0.24, isFigure: true },
+    { heading: 'No.', share: 0.09 },
+    { heading: 'Label', share: 0.51 },
+    { heading: 'Easting', share: 0.19, isFigure: true },
+    { heading: 'Northing', share: 0.21, isFigure: true },
   ];
   const rows = lines.map(({ number, words, place: [e, n] }) => [
     ...[String(number), words],

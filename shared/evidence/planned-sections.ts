@@ -20,13 +20,20 @@ export type SectionScales = {
 };
 
 /**
- * Sections that are to be drawn: a stretch along the line, or some across it, one under the other.
+ * A stretch of the long section.
+ *
+ * Units: m of chainage. Valid: from before to. Source: [own].
+ */
+export type Stretch = { readonly from: number; readonly to: number };
+
+/**
+ * Sections that are to be drawn, one under the other: stretches along the line, or some across it.
  *
  * Units: m. Valid: made by `plannedSections`. Source: [own].
  */
 export type PlannedSection = SectionScales &
   (
-    | { readonly kind: 'long section'; readonly from: number; readonly to: number }
+    | { readonly kind: 'long section'; readonly stretches: readonly Stretch[] }
     | {
         readonly kind: 'cross sections';
         readonly chainages: readonly number[];
@@ -36,15 +43,40 @@ export type PlannedSection = SectionScales &
 
 type Asked = Extract<DrawnLayout, { kind: 'sections' }>;
 
-/** In mm: what a section has over the ground and under its lowest level, and to the left for its levels. */
+/**
+ * What a section has over the ground, under its lowest level, and to the left for its levels.
+ *
+ * Units: mm. Valid: read only. Source: [own].
+ */
 export const [ABOVE, BELOW, ASIDE] = [26, 24, 22] as const;
 
-/** How high a section is that goes from the ground down to the lowest level it shows. */
-function heightOf({ exaggeration, denominator }: Asked, depth: number): number {
+/**
+ * How high a section is that shows so much of the ground.
+ *
+ * Units: depth m, height mm. Valid: any scales. Source: [own].
+ */
+export function sectionHeight({ exaggeration, denominator }: SectionScales, depth: number): number {
   return (depth * exaggeration * 1000) / denominator + ABOVE + BELOW;
 }
 
-/** From the ground to a little below the invert, the deepest along a stretch. */
+/** As many at a time as fit one under the other on a sheet. */
+function bySheet<T>(
+  asked: Asked,
+  depth: number,
+  { window }: SheetLayout,
+  all: readonly T[],
+): T[][] {
+  const each = Math.floor((window.bottom - window.top) / sectionHeight(asked, depth));
+  return Array.from({ length: Math.ceil(all.length / each) }, (_, k) =>
+    all.slice(k * each, (k + 1) * each),
+  );
+}
+
+/**
+ * From the ground to a little below the invert, the deepest at some chainages.
+ *
+ * Units: m. Valid: at least one chainage. Source: [own].
+ */
 export function depthAt(
   { groundLevel, levels, diameter }: AlignmentDesign,
   chainages: readonly number[],
@@ -54,7 +86,7 @@ export function depthAt(
 }
 
 function refuseHigh(asked: Asked, depth: number, { window }: SheetLayout): void {
-  if (heightOf(asked, depth) <= window.bottom - window.top) return;
+  if (sectionHeight(asked, depth) <= window.bottom - window.top) return;
   const message =
     'The section is higher than the sheet. Take a smaller exaggeration, scale or a larger paper.';
   throw new MethodError('outside-range', message, 'exaggeration');
@@ -68,13 +100,15 @@ function longSections(
 ): PlannedSection[] {
   const { denominator, exaggeration, settlementExaggeration } = asked;
   const stations = [0, line.length, ...design.levels.map(({ chainage }) => chainage)];
-  refuseHigh(asked, depthAt(design, stations), layout);
+  const depth = depthAt(design, stations);
+  refuseHigh(asked, depth, layout);
   const { left, right } = layout.window;
   const each = ((right - left - ASIDE - 8) * denominator) / 1000;
-  const count = Math.ceil(line.length / each);
-  return Array.from({ length: count }, (_, k) => ({
-    ...{ kind: 'long section', denominator, exaggeration, settlementExaggeration },
+  const stretches = Array.from({ length: Math.ceil(line.length / each) }, (_, k) => ({
     ...{ from: k * each, to: Math.min(line.length, (k + 1) * each) },
+  }));
+  return bySheet(asked, depth, layout, stretches).map((some) => ({
+    ...{ kind: 'long section', denominator, exaggeration, settlementExaggeration, stretches: some },
   }));
 }
 
@@ -85,7 +119,7 @@ function crossSections(
   design: AlignmentDesign,
 ): PlannedSection[] {
   const { denominator, exaggeration, settlementExaggeration, halfWidth, across } = asked;
-  const { left, right, top, bottom } = layout.window;
+  const { left, right } = layout.window;
   if ((2 * halfWidth * 1000) / denominator > right - left - ASIDE - 8) {
     const message =
       'The sections are wider than the sheet. Look less far to either side, or take a smaller scale.';
@@ -96,21 +130,12 @@ function crossSections(
     const message = `The line ends before chainage ${beyond} m.`;
     throw new MethodError('outside-range', message, 'across');
   }
-  const depth = across.length === 0 ? 0 : depthAt(design, across);
-  if (across.length > 0) refuseHigh(asked, depth, layout);
-  const each = Math.max(1, Math.floor((bottom - top) / heightOf(asked, depth)));
-  const sheets = Array.from({ length: Math.ceil(across.length / each) }, (_, k) =>
-    across.slice(k * each, (k + 1) * each),
-  );
-  return sheets.map((chainages) => ({
-    ...{
-      kind: 'cross sections',
-      denominator,
-      exaggeration,
-      settlementExaggeration,
-      chainages,
-      halfWidth,
-    },
+  if (across.length === 0) return [];
+  const depth = depthAt(design, across);
+  refuseHigh(asked, depth, layout);
+  return bySheet(asked, depth, layout, across).map((chainages) => ({
+    ...{ kind: 'cross sections', denominator, exaggeration, settlementExaggeration },
+    ...{ chainages, halfWidth },
   }));
 }
 
@@ -145,7 +170,9 @@ export function plannedSections(
  * Units: m. Valid: any section of the line. Source: [own].
  */
 export function boxOfSection(planned: PlannedSection, line: LineOnGround): Box {
-  if (planned.kind === 'long section') return boundingBox(line.between(planned.from, planned.to));
+  if (planned.kind === 'long section') {
+    return boundingBox(planned.stretches.flatMap(({ from, to }) => line.between(from, to)));
+  }
   const { chainages, halfWidth } = planned;
   return boundingBox(
     chainages.flatMap((chainage): PlanPoint[] => {

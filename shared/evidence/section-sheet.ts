@@ -1,5 +1,4 @@
 import { CAUTIONS } from '../cautions.ts';
-import { chainageWords } from '../presentation/chainage-words.ts';
 import { formatCount } from '../presentation/format-number.ts';
 import { CATEGORIES } from '../damage/categories.ts';
 import { capital } from '../presentation/capital.ts';
@@ -12,7 +11,7 @@ import { longSectionMarks } from './long-section-marks.ts';
 import type { Mark, Measure } from './marks.ts';
 import type { PlanMaterial } from './plan-material.ts';
 import { frameMarks } from './plan-signs.ts';
-import { ASIDE, depthAt, type PlannedSection } from './planned-sections.ts';
+import { ASIDE, depthAt, sectionHeight, type PlannedSection } from './planned-sections.ts';
 import type { PlannedSheet } from './planned-sheets.ts';
 import { noteParts } from './rows-part.ts';
 import { columnMarks, columnPen, revisionPart } from './sheet-column.ts';
@@ -60,17 +59,15 @@ function drawingOf({ planned, section, material, about, measure }: Drawn): Mark[
     return crossSectionMarks(at, section, { depth, material, about, measure });
   }
   const stations = [0, line.length, ...design.levels.map(({ chainage }) => chainage)];
-  const words = `Long section from ${chainageWords(section.from)} to ${chainageWords(section.to)}`;
-  return [
-    { kind: 'words', words, at: [at.left, at.top + 5], size: 9, isStrong: true },
-    ...longSectionMarks(at, section, {
-      line,
-      depth: depthAt(design, stations),
-      material,
-      about,
-      measure,
-    }),
-  ];
+  const depth = depthAt(design, stations);
+  const each = sectionHeight(section, depth);
+  return section.stretches.flatMap((stretch, k) =>
+    longSectionMarks(
+      { ...at, top: at.top + k * each },
+      { ...section, ...stretch },
+      { line, depth, material, about, measure },
+    ),
+  );
 }
 
 function legend(pen: ColumnPen): ColumnPart {

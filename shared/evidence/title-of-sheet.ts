@@ -6,7 +6,7 @@ import type { TitleBlock } from './title-part.ts';
 const KINDS = {
   plan: 'Plan',
   'long section': 'Long section',
-  'cross sections': 'Cross sections',
+  'cross sections': 'Sections',
 } as const;
 
 function denominatorOf({ what }: PlannedSheet): number {
