@@ -1,5 +1,4 @@
 import { z } from 'zod';
-import { alignmentDesignSchema } from './alignments.ts';
 import { backgroundLayerSchema } from './background.ts';
 import { LIMITS } from './limits.ts';
 import { runDetailSchema, runFactsSchema, runResultSchema } from './runs.ts';
@@ -69,7 +68,6 @@ export const planMaterialSchema = z.strictObject({
     contours: z.array(
       z.strictObject({ level: z.number(), line: z.array(planPoint), isClosed: z.boolean() }),
     ),
-    design: alignmentDesignSchema,
   }),
 });
 
