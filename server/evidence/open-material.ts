@@ -55,7 +55,7 @@ export async function openMaterial(
     const degrees = boxToLonLat(definition, box);
     const near = contours.flatMap((one) => (meets(one.box, box) ? [one.contour] : []));
     // nothing can stand where the grid does not reach
-    if (degrees === null) return { buildings: [], background: [], contours: near, design };
+    if (degrees === null) return { buildings: [], background: [], contours: near };
     const least = UNSEEN * (degrees[3] - degrees[1]);
     const { background: most } = MATERIAL_LIMITS;
     const [buildings, background] = await Promise.all([
@@ -66,7 +66,6 @@ export async function openMaterial(
       buildings,
       background: background.map((one) => planBackground(one, toGrid)),
       contours: near,
-      design,
     };
   };
 }
