@@ -15,7 +15,7 @@ export async function invite({ page, open }: Visitor, invitation: Invitation): P
   await page.getByLabel('Scheme', { exact: true }).selectOption(invitation.scheme);
   await page.getByLabel('Role', { exact: true }).selectOption(invitation.role);
   await page.getByRole('button', { name: 'Send the invitation' }).click();
-  await page.getByText(`The invitation to ${invitation.email} went out.`).waitFor();
+  await page.getByText(`The invitation to ${invitation.email} is on its way.`).waitFor();
 }
 
 /** Chooses a password on the page that a link has opened, and goes in. */
