@@ -6,7 +6,7 @@ They get a link to choose a password, which is shown here too.`;
 
 /** Sees to an administrator who can sign in, or can choose a password by the link that is given. */
 export async function askInFirstAdministrator(run) {
-  const { state, email, url, letterSent } = await run('first-administrator');
+  const { state, email, url } = await run('first-administrator');
   switch (state) {
     case 'missing':
       throw new Refusal(NOBODY);
@@ -18,7 +18,7 @@ export async function askInFirstAdministrator(run) {
       return { said: `${email} is administrator now` };
     case 'invited':
       return {
-        said: letterSent ? `${email} is asked in by letter` : `the letter to ${email} failed`,
+        said: `${email} is asked in by letter`,
         invitation: { email, url },
       };
     default:

@@ -36,8 +36,8 @@ export async function answerAppointment(
   const { database } = services;
   return database.transaction(async (transaction) => {
     await lockScheme(scheme, transaction);
-    const { settings } = await heldSettings(database, scheme, transaction);
-    const askedFor = askedForBy(answer, dayIn(new Date(), settings.timeZone));
+    const { timeZone } = (await heldSettings(database, scheme, transaction)).settings;
+    const askedFor = askedForBy(answer, dayIn(new Date(), timeZone));
     const { parties } = await findOwn(database, scheme.id, by.id, transaction);
     const which = { id: answer.id, parties };
     const before = await readAppointment(database, scheme.id, which, transaction);
@@ -50,7 +50,7 @@ export async function answerAppointment(
     const { name, email } = await Person.findByPk(by.id, { transaction, rejectOnEmpty: true });
     const after = { ...written, reader: { name, email } };
     const news = askedFor === null ? 'agreed' : 'asked for';
-    const told = { action: 'answer appointment', before, after, news } as const;
+    const told = { action: 'answer appointment', before, after, news, timeZone } as const;
     await tellOfAppointment(services, by, scheme, told, transaction);
     return after;
   });

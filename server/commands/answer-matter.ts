@@ -7,7 +7,7 @@ import type { FoundMatter } from '../models/matters.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
-import { readerOf, readMatter, recordMatter, standingOf } from './kept-matter.ts';
+import { readerOf, readMatter, recordMatter, requireReader, standingOf } from './kept-matter.ts';
 import { lockScheme } from './lock-scheme.ts';
 import { isSameMessage, numberedByOthers, otherMessage } from './same-message.ts';
 
@@ -39,6 +39,7 @@ async function write(
 ): Promise<void> {
   const { database } = services;
   const { id, number } = matter;
+  requireReader(matter);
   if (message.side === 'note') {
     const note = { ...message, matterId: id, by: by.id, photographs: [] };
     await insertMessage(database, note, transaction);
@@ -55,7 +56,7 @@ async function write(
 
 /**
  * Answers a matter, by mail too, or notes something inside the team. An answer is refused where the owner or
- * somebody else has written meanwhile. The same message sent again is kept once.
+ * somebody else has written meanwhile, both where the party was erased. The same message sent again is kept once.
  */
 export async function answerMatter(
   services: Services,

@@ -5,6 +5,7 @@ import {
   type FoundAppointment,
   type MovedAppointment,
 } from '../models/appointments.ts';
+import { heldSettings } from '../models/letter-settings.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
@@ -48,7 +49,9 @@ export async function changeAppointment(
     if (asked.change === 'offer anew') requireToCome(asked.startsAt);
     await updateAppointment(database, asked.id, moved(before, asked), transaction);
     const after = await readAppointment(database, scheme.id, which, transaction);
-    const told = { action: 'change appointment', before, after, news: NEWS[asked.change] };
+    const { timeZone } = (await heldSettings(database, scheme, transaction)).settings;
+    const news = NEWS[asked.change];
+    const told = { action: 'change appointment', before, after, news, timeZone };
     await tellOfAppointment(services, by, scheme, told, transaction);
     return after;
   });

@@ -1,11 +1,10 @@
 import { QueryTypes, type Transaction } from 'sequelize';
-import { firstAdministratorLetter } from '../mail/letters/first-administrator.ts';
+import { firstAdministratorMail } from '../mail/letters/first-administrator.ts';
 import { findPersonByEmail } from '../models/find-person-by-email.ts';
 import { Person } from '../models/person.ts';
 import type { Services } from '../services.ts';
-import { issueLink, type IssuedLink } from './issue-link.ts';
+import { issueLink } from './issue-link.ts';
 import { recordChange } from './record-change.ts';
-import { sendLetter } from './send-letter.ts';
 
 /** Any number; who holds its lock looks for administrators, and makes the first. */
 const LOCK = 20_260_103;
@@ -21,12 +20,7 @@ export type FirstAdministrator =
   | { readonly state: 'awaited'; readonly email: string }
   /** Somebody who has a password was made administrator. */
   | { readonly state: 'promoted'; readonly email: string }
-  | {
-      readonly state: 'invited';
-      readonly email: string;
-      readonly url: string;
-      readonly letterSent: boolean;
-    };
+  | { readonly state: 'invited'; readonly email: string; readonly url: string };
 
 async function createAdministrator(
   { email, name }: Wanted,
@@ -55,11 +49,14 @@ async function administratorOf(wanted: Wanted, transaction: Transaction): Promis
   return known;
 }
 
-/** Who is to be asked in, with their link; or how things stand where nobody is. */
-function decide(
-  { env, database }: Services,
-  wanted: Wanted | undefined,
-): Promise<FirstAdministrator | { readonly person: Person; readonly link: IssuedLink }> {
+/**
+ * Asks the first administrator in while no administrator has a password. Asked again, they get a new link:
+ * the old one may be lost.
+ */
+export function inviteFirstAdministrator(
+  { env, database, outbox }: Services,
+  wanted?: Wanted,
+): Promise<FirstAdministrator> {
   return database.transaction(async (transaction) => {
     await database.query('select pg_advisory_xact_lock(:lock)', {
       replacements: { lock: LOCK },
@@ -78,21 +75,8 @@ function decide(
     }
     const person = await administratorOf(wanted, transaction);
     if (person.passwordHash !== null) return { state: 'promoted', email: person.email };
-    return { person, link: await issueLink(env, person.id, 'invitation', transaction) };
+    const link = await issueLink(env, person.id, 'invitation', transaction);
+    await outbox.put([firstAdministratorMail({ person, link })], transaction);
+    return { state: 'invited', email: person.email, url: link.url };
   });
-}
-
-/**
- * Asks the first administrator in while no administrator has a password. Asked again, they get a new link:
- * the old one may be lost.
- */
-export async function inviteFirstAdministrator(
-  services: Services,
-  wanted?: Wanted,
-): Promise<FirstAdministrator> {
-  const decided = await decide(services, wanted);
-  if ('state' in decided) return decided;
-  const { person, link } = decided;
-  const letterSent = await sendLetter(services, firstAdministratorLetter({ person, link }));
-  return { state: 'invited', email: person.email, url: link.url, letterSent };
 }

@@ -69,8 +69,8 @@ export async function invitePerson(
   services: Services,
   by: Actor,
   wanted: NewPerson,
-): Promise<{ personId: string; letterSent: boolean }> {
-  const { person, link } = await services.database.transaction(async (transaction) => {
+): Promise<string> {
+  return services.database.transaction(async (transaction) => {
     await lockSchemes(wanted.memberships, transaction);
     const made = await createPerson(wanted, transaction);
     const { name, email, isAdministrator } = made;
@@ -78,8 +78,8 @@ export async function invitePerson(
     const after = { name, email, isAdministrator };
     await recordChange({ by, action: 'invite person', subject, after }, transaction);
     await giveRoles(by, made, wanted.memberships, transaction);
-    const issued = await issueLink(services.env, made.id, 'invitation', transaction);
-    return { person: made, link: issued };
+    const link = await issueLink(services.env, made.id, 'invitation', transaction);
+    await sendInvitation(services, by, { personId: made.id, link }, transaction);
+    return made.id;
   });
-  return { personId: person.id, letterSent: await sendInvitation(services, by, person.id, link) };
 }

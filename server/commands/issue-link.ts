@@ -12,7 +12,7 @@ const LIFETIMES: Readonly<Record<LinkPurpose, number>> = {
   'password-reset': HOUR,
 };
 
-/** A link as it goes into a letter; its address is kept nowhere else. */
+/** A link as it is given out; its address is kept nowhere. */
 export type IssuedLink = { readonly id: string; readonly url: string; readonly until: Date };
 
 /** Makes a link that sets a person's password once; older ones of the same purpose end. */

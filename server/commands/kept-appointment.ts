@@ -2,7 +2,6 @@ import type { Sequelize, Transaction } from 'sequelize';
 import { AppError } from '../errors.ts';
 import { appointmentMails, type AppointmentNews } from '../mail/letters/appointment-mails.ts';
 import { findAppointments, type FoundAppointment } from '../models/appointments.ts';
-import { heldSettings } from '../models/letter-settings.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
@@ -42,6 +41,8 @@ type Told = {
   readonly after: FoundAppointment;
   /** What the party is told; nothing where it does not concern them. */
   readonly news: AppointmentNews | null;
+  /** By whose clocks they are told. */
+  readonly timeZone: string;
 };
 
 function toldOf({ building, party, purpose, startsAt, minutes, place, state }: FoundAppointment) {
@@ -50,10 +51,10 @@ function toldOf({ building, party, purpose, startsAt, minutes, place, state }: F
 
 /** Tells the trail of an appointment, and the party by mail. */
 export async function tellOfAppointment(
-  { database, env, outbox }: Services,
+  { env, outbox }: Pick<Services, 'env' | 'outbox'>,
   by: Actor,
   scheme: Scheme,
-  { action, before, after, news }: Told,
+  { action, before, after, news, timeZone }: Told,
   transaction: Transaction,
 ): Promise<void> {
   const change = {
@@ -64,7 +65,6 @@ export async function tellOfAppointment(
   await recordChange(change, transaction);
   if (news === null) return;
   const { PUBLIC_URL: publicUrl, MAIL_FROM: mailFrom } = env;
-  const { timeZone } = (await heldSettings(database, scheme, transaction)).settings;
   const sender = { schemeId: scheme.id, publicUrl, mailFrom, timeZone, now: new Date() };
   await outbox.put(appointmentMails(news, after, sender), transaction);
 }

@@ -31,6 +31,13 @@ export async function readSeenMatter(
   return found;
 }
 
+/** Refuses to write where the party was erased: the owner no longer looks in, and the team cannot read it. */
+export function requireReader({ isErased }: FoundMatter): void {
+  if (!isErased) return;
+  const message = 'The personal data of this party have been erased. Nobody would read it.';
+  throw new AppError('conflict', message);
+}
+
 /** Where a matter stands now, to be changed in part. */
 export function standingOf({ state, due, assignedTo, suggestion }: FoundMatter): MovedMatter {
   return { state, due, assignedTo: assignedTo?.id ?? null, suggestion };

@@ -7,6 +7,7 @@ import {
   insertAppointment,
   type FoundAppointment,
 } from '../models/appointments.ts';
+import { heldSettings } from '../models/letter-settings.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
@@ -57,7 +58,8 @@ export async function offerAppointment(
       const offered = { ...asked, schemeId: scheme.id, by: by.id };
       await insertAppointment(database, offered, transaction);
       const after = await readAppointment(database, scheme.id, which, transaction);
-      const told = { action: 'offer appointment', after, news: 'offered' } as const;
+      const { timeZone } = (await heldSettings(database, scheme, transaction)).settings;
+      const told = { action: 'offer appointment', after, news: 'offered', timeZone } as const;
       await tellOfAppointment(services, by, scheme, told, transaction);
       return { appointment: after, isNew: true };
     });

@@ -6,13 +6,13 @@ import { issueLink } from './issue-link.ts';
 import { recordChange } from './record-change.ts';
 import { sendInvitation } from './send-invitation.ts';
 
-/** Sends somebody who has no password yet a new link; the old one ends. Whether the letter went out. */
+/** Sends somebody who has no password yet a new link; the old one ends. */
 export async function renewInvitation(
   services: Services,
   by: Actor,
   personId: string,
-): Promise<boolean> {
-  const link = await services.database.transaction(async (transaction) => {
+): Promise<void> {
+  await services.database.transaction(async (transaction) => {
     const person = await Person.findByPk(personId, {
       transaction,
       lock: transaction.LOCK.NO_KEY_UPDATE,
@@ -22,11 +22,10 @@ export async function renewInvitation(
     if (person.passwordHash !== null) {
       throw new AppError('conflict', 'They have a password already. It can be reset at sign-in.');
     }
-    const issued = await issueLink(services.env, person.id, 'invitation', transaction);
+    const link = await issueLink(services.env, person.id, 'invitation', transaction);
     const subject = { kind: 'person', id: person.id };
-    const after = { invitedUntil: issued.until };
+    const after = { invitedUntil: link.until };
     await recordChange({ by, action: 'renew invitation', subject, after }, transaction);
-    return issued;
+    await sendInvitation(services, by, { personId, link }, transaction);
   });
-  return sendInvitation(services, by, personId, link);
 }

@@ -8,14 +8,22 @@ import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
 import { sendAnswer } from './answer-matter.ts';
 import { changeRegister } from './change-register.ts';
-import { readMatter, readSeenMatter, recordMatter, standingOf } from './kept-matter.ts';
+import {
+  readMatter,
+  readSeenMatter,
+  recordMatter,
+  requireReader,
+  standingOf,
+} from './kept-matter.ts';
 import { lockScheme } from './lock-scheme.ts';
 import { numberedByOthers } from './same-message.ts';
 
 type Asked = z.infer<typeof takeSuggestionSchema> & { readonly id: string };
 
 /** What a matter suggests and has not been taken over yet. */
-function openSuggestion({ suggestion, building }: FoundMatter) {
+function openSuggestion(matter: FoundMatter) {
+  requireReader(matter);
+  const { suggestion, building } = matter;
   if (suggestion === null) throw new AppError('not-found');
   if (suggestion.isTakenOver) {
     throw new AppError('already-exists', 'The register has taken this over already.');

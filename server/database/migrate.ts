@@ -32,6 +32,7 @@ import { migration as matters } from './migrations/28-matters.ts';
 import { migration as evidence } from './migrations/29-evidence.ts';
 import { migration as ownTextOfLetters } from './migrations/30-own-text-of-letters.ts';
 import { migration as lettersKept } from './migrations/31-letters-kept.ts';
+import { migration as accountMails } from './migrations/32-account-mails.ts';
 
 /** In the order in which they are applied; a new one goes to the end. */
 const MIGRATIONS: Readonly<Record<string, Migration>> = {
@@ -66,6 +67,7 @@ const MIGRATIONS: Readonly<Record<string, Migration>> = {
   '29-evidence': evidence,
   '30-own-text-of-letters': ownTextOfLetters,
   '31-letters-kept': lettersKept,
+  '32-account-mails': accountMails,
 };
 
 /** Opens the migrations of a database as its owner; `serverUrl` names the role that serves. */

@@ -19,14 +19,18 @@ const MINUTE_MS = 60_000;
 
 const jobSchema = z.object({ mailId: z.uuid() });
 
-type Due = { readonly id: string; readonly nextTryAt?: Date };
+/** Somebody waits for a letter of their account, which must not stand behind thousands to owners. */
+const FIRST = 1;
+
+type Due = { readonly id: string; readonly schemeId: string | null; readonly nextTryAt?: Date };
 
 function jobsOf(mails: readonly Due[]) {
-  return mails.map(({ id, nextTryAt }) => ({
+  return mails.map(({ id, schemeId, nextTryAt }) => ({
     name: QUEUE,
     data: { mailId: id },
     // one that waits is not called for twice
     singletonKey: id,
+    ...(schemeId === null && { priority: FIRST }),
     ...(nextTryAt !== undefined && { startAfter: nextTryAt }),
   }));
 }
@@ -48,7 +52,7 @@ export async function openOutbox(tools: Sending & { readonly queues: Boss }): Pr
   async function send(mailId: string): Promise<void> {
     const start = performance.now();
     const again = await sendWaiting(tools, mailId);
-    if (again !== null) await boss.insert(jobsOf([{ id: mailId, nextTryAt: again }]));
+    if (again !== null) await boss.insert(jobsOf([{ id: mailId, ...again }]));
     await sleep(Math.max(0, pause - (performance.now() - start)));
   }
 

@@ -3,8 +3,8 @@ import type { LetterPart } from './render-letter.ts';
 
 /** A mail as it is put into the outbox. */
 export type OutgoingMail = {
-  /** Where it is kept for a scheme. */
-  readonly schemeId: string;
+  /** The scheme that it is of; none where it is of somebody’s account. */
+  readonly schemeId: string | null;
   /** The address that it goes to. */
   readonly recipient: string;
   readonly subject: string;

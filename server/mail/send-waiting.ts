@@ -21,6 +21,11 @@ const MINUTE = 60_000;
 /** After each refusal the next try is put off so long; after the last one it is given up. */
 const WAITS = [1, 2, 5, 15, 60, 240, 720].map((minutes) => minutes * MINUTE);
 
+/** What is said of a letter that was not sent since nothing could be done with it. */
+const POINTLESS = 'Its link ended before it was sent.';
+
+type Again = { readonly schemeId: string | null; readonly nextTryAt: Date };
+
 type Outcome =
   | { readonly kind: 'accepted' | 'refused for now' | 'refused for good'; readonly words: string }
   /** The server may have it: it was spoken to, and no answer came. */
@@ -54,7 +59,7 @@ function withLink({ env }: Sending, { linkId, parts }: WaitingMail): readonly Le
 async function attachmentsOf(tools: Sending, mail: WaitingMail): Promise<Attachment[]> {
   const { schemeId, letterId, isReminder, calendar } = mail;
   const attachments: Attachment[] = [];
-  if (letterId !== null && !isReminder) {
+  if (schemeId !== null && letterId !== null && !isReminder) {
     const content = Buffer.from(await letterPdf(tools, { schemeId, letterId }));
     attachments.push({ filename: 'letter.pdf', contentType: 'application/pdf', content });
   }
@@ -111,11 +116,18 @@ async function writeDown(
  * down for good before the server is spoken to; a try without an answer may be with the server already, so
  * the mail goes again under its own Message-ID only, and the record says so. Gives when to try again.
  */
-export function sendWaiting(tools: Sending, id: string): Promise<Date | null> {
+export function sendWaiting(tools: Sending, id: string): Promise<Again | null> {
   const { database } = tools;
   return database.transaction(async (transaction) => {
     const mail = await lockWaitingMail(database, id, transaction);
+    if (mail?.isPointless === true) {
+      const end = { state: 'failed', wasSentAgain: false, words: POINTLESS } as const;
+      await endMail(database, id, end, transaction);
+      return null;
+    }
     if (mail?.isDue !== true) return null;
-    return writeDown(tools, mail, await handOver(tools, mail), transaction);
+    const { schemeId } = mail;
+    const nextTryAt = await writeDown(tools, mail, await handOver(tools, mail), transaction);
+    return nextTryAt && { schemeId, nextTryAt };
   });
 }

@@ -102,7 +102,7 @@ export type WhichLetters = {
   readonly partyId?: string | undefined;
   /** By post only. */
   readonly byPost?: boolean;
-  /** Sent so many days ago or more, and not acknowledged. */
+  /** Sent so many days ago or more, with the day to answer by over, and not acknowledged. */
   readonly unansweredFor?: number | undefined;
 };
 
@@ -145,7 +145,8 @@ export function findLetters(
          or p.merged_into = $5)
        and (not $6::boolean or l.channel = 'post')
        and ($7::integer is null or (b.state = 'sent' and a.letter_id is null
-         and b.sent_at < now() - make_interval(days => $7)))
+         and b.sent_at < now() - make_interval(days => $7)
+         and coalesce(l.answer_by < current_date, true)))
      order by b.number desc, l.number limit ${MOST}`,
     {
       type: QueryTypes.SELECT,

@@ -5,7 +5,7 @@ import type { LetterPart } from '../mail/render-letter.ts';
 /** A mail that waits, as it is sent. */
 export type WaitingMail = {
   readonly id: string;
-  readonly schemeId: string;
+  readonly schemeId: string | null;
   readonly letterId: string | null;
   readonly linkId: string | null;
   readonly recipient: string;
@@ -15,6 +15,8 @@ export type WaitingMail = {
   readonly isReminder: boolean;
   readonly refusals: number;
   readonly isDue: boolean;
+  /** It is of an account, and its link can no longer be used. */
+  readonly isPointless: boolean;
   /** How often it has been handed to the mail server. */
   readonly tries: number;
   /** How many of these had no answer that is known. */
@@ -55,6 +57,10 @@ export async function lockWaitingMail(
   const [mail] = await database.query<WaitingMail>(
     `select id, scheme_id as "schemeId", letter_id as "letterId", link_id as "linkId", recipient, subject, parts, calendar,
        is_reminder as "isReminder", refusals, next_try_at <= now() as "isDue",
+       (scheme_id is null and not exists (
+         select from single_use_links l
+         where l.id = o.link_id and l.used_at is null and l.expires_at > now()
+       )) as "isPointless",
        (select count(*)::integer from outbox_tries t where t.mail_id = o.id) as tries,
        (select count(*)::integer from outbox_tries t where t.mail_id = o.id and not exists (
          select from outbox_answers a where a.mail_id = t.mail_id and a.number = t.number
@@ -87,7 +93,10 @@ export async function insertAnswer(
   );
 }
 
-/** A mail that will not be handed over again: the server has it, or never will. */
+/**
+ * A mail that will not be handed over again: the server has it, or never will. What was said of an account,
+ * and to whom, is then forgotten.
+ */
 export async function endMail(
   database: Sequelize,
   id: string,
@@ -99,7 +108,9 @@ export async function endMail(
   transaction: Transaction,
 ): Promise<void> {
   await database.query(
-    `update outbox set state = $2, was_sent_again = $3, server_words = $4, ended_at = now()
+    `update outbox set state = $2, was_sent_again = $3, server_words = $4, ended_at = now(),
+       recipient = case when scheme_id is null then '' else recipient end,
+       parts = case when scheme_id is null then '[]' else parts end
      where id = $1`,
     { bind: [id, end.state, end.wasSentAgain, end.words], transaction },
   );
@@ -135,10 +146,12 @@ export async function endMailsOfParties(
   return ended.length;
 }
 
+type DueMail = Pick<WaitingMail, 'id' | 'schemeId'> & { readonly nextTryAt: Date };
+
 /** What waits, with the time from which on it may be tried. */
-export function findWaitingMails(database: Sequelize): Promise<{ id: string; nextTryAt: Date }[]> {
-  return database.query<{ id: string; nextTryAt: Date }>(
-    `select id, next_try_at as "nextTryAt" from outbox where state = 'waiting' order by put_in_at`,
+export function findWaitingMails(database: Sequelize): Promise<DueMail[]> {
+  return database.query<DueMail>(
+    `select id, scheme_id as "schemeId", next_try_at as "nextTryAt" from outbox where state = 'waiting' order by put_in_at`,
     { type: QueryTypes.SELECT },
   );
 }

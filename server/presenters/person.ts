@@ -4,7 +4,7 @@ import type { Actor } from '../policies/actor.ts';
 
 /** What leaves the server of a person, for the administrator who asks. */
 export function presentPerson(
-  { person, memberships, invitedUntil }: PersonRecord,
+  { person, memberships, invitedUntil, letter }: PersonRecord,
   actor: Actor,
 ): PersonAnswer {
   const hasPassword = person.passwordHash !== null;
@@ -16,6 +16,7 @@ export function presentPerson(
     isAdministrator: person.isAdministrator,
     hasPassword,
     invitedUntil: invitedUntil?.toISOString() ?? null,
+    letter: letter && { state: letter.state, serverWords: letter.serverWords },
     shutOutAt: person.shutOutAt?.toISOString() ?? null,
     createdAt: person.createdAt.toISOString(),
     memberships: memberships.map(({ schemeId, schemeName, role }) => ({

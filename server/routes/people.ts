@@ -3,7 +3,6 @@ import {
   changePersonSchema,
   newPersonSchema,
   shutOutSchema,
-  type InvitedAnswer,
   type PersonAnswer,
 } from '../../shared/schemas/people.ts';
 import { changePerson } from '../commands/change-person.ts';
@@ -22,14 +21,6 @@ async function personAnswer(actor: Actor, personId: string): Promise<PersonAnswe
   return presentPerson(await findPersonRecord(personId), actor);
 }
 
-async function invitedAnswer(
-  actor: Actor,
-  personId: string,
-  letterSent: boolean,
-): Promise<InvitedAnswer> {
-  return { person: await personAnswer(actor, personId), letterSent };
-}
-
 export const peopleRoutes = [
   defineRoute({
     method: 'get',
@@ -45,8 +36,7 @@ export const peopleRoutes = [
     status: 201,
     body: newPersonSchema,
     handle: async ({ services, actor, body }) => {
-      const { personId, letterSent } = await invitePerson(services, actor, body);
-      return invitedAnswer(actor, personId, letterSent);
+      return personAnswer(actor, await invitePerson(services, actor, body));
     },
   }),
   defineRoute({
@@ -74,8 +64,8 @@ export const peopleRoutes = [
     status: 201,
     params: personParams,
     handle: async ({ services, actor, params }) => {
-      const letterSent = await renewInvitation(services, actor, params.personId);
-      return invitedAnswer(actor, params.personId, letterSent);
+      await renewInvitation(services, actor, params.personId);
+      return personAnswer(actor, params.personId);
     },
   }),
   defineRoute({

@@ -9,8 +9,8 @@ import { dayOf } from '../days.ts';
 const MILESTONES = [
   {
     when: 'Spring 2027',
-    title: 'A surveyor visits you',
-    words: 'About an hour. They take a picture of every room, and you get a copy.',
+    title: 'Surveyors visit the homes near the line',
+    words: 'They take a picture of every room, and you get a copy.',
   },
   {
     when: 'November 2027',

@@ -1,11 +1,13 @@
 import type { LetterKind } from '../schemas/letter-settings.ts';
 import type { LetterWords } from './letter-text.ts';
 
-const END = `{cautions}
+const END = `Please keep in mind:
+
+{cautions}
 
 If anything is not clear, please ask us: {contact}.`;
 
-const PAGE = `On your own page you can read all of this at any time, choose a day, ask us, and tell us what worries you:
+const PAGE = `On your own page you can read all of this at any time, choose a day, ask us, and tell us what worries you.
 
 {link}`;
 
@@ -33,7 +35,7 @@ What happens, and when:
 
 {dates}
 
-You need do nothing now. Please tell us by {answer by} that this letter has reached you.
+We ask you for one thing now. Please tell us by {answer by} that this letter has reached you.
 
 ${PAGE}
 

@@ -49,8 +49,9 @@ export const shutOutSchema = z.strictObject({ shutOut: z.boolean() });
 /**
  * A person as the administrator sees them.
  *
- * Units: none. Valid: `invitedUntil` is when the open invitation ends, null without one; `shutOutAt` since
- * when they may not sign in; abilities are the server's answers. Source: [own].
+ * Units: none. Valid: `invitedUntil` is when the open invitation ends, null without one; `letter` is how its
+ * letter fares, with what the mail server last said to it; `shutOutAt` since when they may not sign in;
+ * abilities are the server's answers. Source: [own].
  */
 export const personSchema = z.strictObject({
   id: z.uuid(),
@@ -59,6 +60,12 @@ export const personSchema = z.strictObject({
   isAdministrator: z.boolean(),
   hasPassword: z.boolean(),
   invitedUntil: z.iso.datetime().nullable(),
+  letter: z
+    .strictObject({
+      state: z.enum(['waiting', 'sent', 'failed']),
+      serverWords: z.string().nullable(),
+    })
+    .nullable(),
   shutOutAt: z.iso.datetime().nullable(),
   createdAt: z.iso.datetime(),
   memberships: z.array(
@@ -79,17 +86,3 @@ export const personSchema = z.strictObject({
  * Units: as personSchema. Valid: parsed by it. Source: [own].
  */
 export type PersonAnswer = z.infer<typeof personSchema>;
-
-/**
- * What an invitation is answered with. The person stands even where the letter could not be sent.
- *
- * Units: none. Valid: where letterSent is false, the invitation can be sent again. Source: [own].
- */
-export const invitedSchema = z.strictObject({ person: personSchema, letterSent: z.boolean() });
-
-/**
- * What an invitation is answered with.
- *
- * Units: as invitedSchema. Valid: parsed by it. Source: [own].
- */
-export type InvitedAnswer = z.infer<typeof invitedSchema>;

@@ -95,6 +95,11 @@ export function partyImportPath(schemeId: string, partyImportId: string): string
   return `${partyImportsPath(schemeId)}/${partyImportId}`;
 }
 
+/** Where a batch is prepared that begins with the text of another. */
+export function batchFromTextPath(schemeId: string, batchId: string): string {
+  return `${letterPagePath(schemeId, 'new')}?text=${batchId}`;
+}
+
 /** A batch of letters, or one of the screens beside them. */
 export function letterPagePath(schemeId: string, page: string): string {
   return `${ownersPath(schemeId, 'letters')}/${page}`;

@@ -50,6 +50,7 @@ export function aPersonAnswer(overrides: Partial<PersonAnswer> = {}): PersonAnsw
     isAdministrator: false,
     hasPassword: true,
     invitedUntil: null,
+    letter: null,
     shutOutAt: null,
     createdAt: '2026-05-01T09:00:00.000Z',
     memberships: [],

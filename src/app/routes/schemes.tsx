@@ -1,11 +1,13 @@
 import { useQuery } from '@tanstack/react-query';
+import { Navigate } from 'react-router-dom';
+import type { WaitingAnswer } from '../../../shared/schemas/waiting.ts';
 import { Page } from '../../components/layout/page.tsx';
 import { ButtonLink } from '../../components/ui/button-link.tsx';
 import { EmptyState } from '../../components/ui/empty-state.tsx';
 import { LoadingRows } from '../../components/ui/loading-rows.tsx';
 import { Panel } from '../../components/ui/panel.tsx';
 import { QueryError } from '../../components/ui/query-error.tsx';
-import { PATHS } from '../../config/paths.ts';
+import { homePath, PATHS } from '../../config/paths.ts';
 import { schemesQuery } from '../../features/schemes/api/list-schemes.ts';
 import { SchemeList } from '../../features/schemes/components/scheme-list.tsx';
 import { usePerson } from '../../features/session/person-context.ts';
@@ -44,8 +46,19 @@ function Schemes() {
   );
 }
 
+/** The scheme of somebody who has a building in it, and no other part anywhere. */
+function onlyAsOwner({ general, schemes }: WaitingAnswer): string | undefined {
+  const [only, ...others] = schemes;
+  const isOwner = only?.roles.length === 1 && only.roles[0] === 'owner';
+  return isOwner && others.length === 0 && general.length === 0 ? only.scheme.id : undefined;
+}
+
+/** What waits for whom. An owner has no desk: what is asked of them stands on their own page. */
 export function SchemesPage() {
+  const { isAdministrator } = usePerson();
   const { data: waiting, error, refetch } = useQuery(waitingQuery);
+  const ownScheme = waiting === undefined || isAdministrator ? undefined : onlyAsOwner(waiting);
+  if (ownScheme !== undefined) return <Navigate replace to={homePath(ownScheme)} />;
   return (
     <Page
       title="Waiting for you"

@@ -1,7 +1,8 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
+import { useSearchParams } from 'react-router-dom';
 import type { LetterWords } from '../../../shared/presentation/letter-text.ts';
-import type { BatchPreview } from '../../../shared/schemas/letter-batches.ts';
+import type { Batch, BatchPreview } from '../../../shared/schemas/letter-batches.ts';
 import type { LetterKind } from '../../../shared/schemas/letter-settings.ts';
 import { NotFoundPage } from '../../app/routes/not-found.tsx';
 import { Page } from '../../components/layout/page.tsx';
@@ -11,12 +12,12 @@ import { Select } from '../../components/ui/select.tsx';
 import { can } from '../schemes/can.ts';
 import { useScheme } from '../schemes/scheme-context.ts';
 import { recipientsQuery } from './api/letter-batches.ts';
-import { templatesQuery } from './api/letter-templates.ts';
 import { ChooseParty } from './components/choose-party.tsx';
 import { LetterLook } from './components/letter-look.tsx';
 import { LetterWordsFields } from './components/letter-words-fields.tsx';
 import { PrepareFound } from './components/prepare-found.tsx';
 import { KIND_OPTIONS } from './letter-words.ts';
+import { useOwnText } from './use-own-text.ts';
 
 type OwnTextProps = {
   readonly asked: BatchPreview;
@@ -36,29 +37,29 @@ function OwnText({ asked, written, onChange }: OwnTextProps) {
   );
 }
 
-/** What is written for a batch of free text: what somebody typed, or what its template begins with. */
-function useOwnText(kind: LetterKind) {
-  const scheme = useScheme();
-  const [typed, setTyped] = useState<LetterWords | null>(null);
-  const { data, error, refetch } = useQuery(templatesQuery(scheme.id));
-  const template = data?.find((one) => one.kind === 'free text');
-  const isFree = kind === 'free text';
-  const begun = template && { subject: template.subject, body: template.body };
-  return {
-    ...{ isFree, setTyped, error: isFree ? error : null, refetch },
-    text: isFree ? (typed ?? begun ?? null) : null,
-    hasWritten: isFree && typed !== null,
-  };
+/** Which batch the text comes from, and why that one was returned. */
+function Earlier({ batch }: { readonly batch: Batch }) {
+  const { number, comment } = batch;
+  return (
+    <p className="mt-4 max-w-[72ch] text-body break-words">
+      The text is that of batch {number}.{comment !== null && ` Its check said: “${comment}”`}
+    </p>
+  );
 }
 
 function NewBatchForm() {
   const scheme = useScheme();
+  const [search] = useSearchParams();
+  const earlierId = search.get('text');
   const [asked, setAsked] = useState<BatchPreview>({
-    kind: 'first information',
+    kind: earlierId === null ? 'first information' : 'free text',
     leftOut: [],
     chosen: [],
   });
-  const { isFree, text, setTyped, hasWritten, ...template } = useOwnText(asked.kind);
+  const { isFree, text, setTyped, hasWritten, earlier, ...begun } = useOwnText(
+    asked.kind,
+    earlierId,
+  );
   const { data, error, refetch } = useQuery(recipientsQuery(scheme.id, asked));
   const isReady = !isFree || text !== null;
   return (
@@ -79,13 +80,10 @@ function NewBatchForm() {
           }}
         />
       </div>
-      {template.error !== null && (
-        <QueryError
-          what="The letter"
-          error={template.error}
-          onRetry={() => void template.refetch()}
-        />
+      {begun.error !== null && (
+        <QueryError what="The letter" error={begun.error} onRetry={begun.refetch} />
       )}
+      {earlier !== undefined && <Earlier batch={earlier} />}
       {text !== null && <OwnText asked={asked} written={text} onChange={setTyped} />}
       {error !== null && (
         <QueryError what="Who gets it" error={error} onRetry={() => void refetch()} />

@@ -5,7 +5,7 @@ import {
 } from '../../../shared/schemas/letter-settings.ts';
 import type { MatterKind } from '../../../shared/schemas/matters.ts';
 import type { RegisterFilter } from '../../../shared/schemas/register.ts';
-import { holidaysOfLines, linesOfHolidays } from './holiday-lines.ts';
+import { faultOfHolidays, holidaysOfLines, linesOfHolidays } from './holiday-lines.ts';
 
 type NearDraft = { readonly name: string; readonly east: string; readonly north: string; readonly metres: string }; // prettier-ignore
 
@@ -87,7 +87,7 @@ function numberOf(text: string): number {
 export function readSettings(
   draft: SettingsDraft,
 ): { readonly settings: LetterSettings } | { readonly faults: SettingsFaults } {
-  const read = holidaysOfLines(draft.holidays);
+  const holidays = holidaysOfLines(draft.holidays);
   const parsed = letterSettingsSchema.safeParse({
     ...draft,
     rules: draft.rules.map(({ near, ...rule }) => ({
@@ -112,13 +112,15 @@ export function readSettings(
     },
     answerDays: mapDays(draft.answerDays, numberOf),
     timeZone: draft.timeZone.trim(),
-    holidays: 'holidays' in read ? read.holidays : [],
+    holidays,
   });
-  const ofLines = 'fault' in read ? { holidays: read.fault } : {};
-  if (parsed.success && !('fault' in read)) return { settings: parsed.data };
-  const issues = parsed.error?.issues ?? [];
-  const faults = issues.map(({ path, message }) => [path.join('.'), message] as const);
-  return { faults: { ...Object.fromEntries(faults.reverse()), ...ofLines } };
+  if (parsed.success) return { settings: parsed.data };
+  const faults = parsed.error.issues.map(({ path, message }) =>
+    path[0] === 'holidays'
+      ? (['holidays', faultOfHolidays(holidays, { path, message })] as const)
+      : ([path.join('.'), message] as const),
+  );
+  return { faults: Object.fromEntries(faults.reverse()) };
 }
 
 /** A rule to begin with. */

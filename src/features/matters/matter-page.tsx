@@ -19,7 +19,8 @@ function Erased({ mayRead }: { readonly mayRead: boolean }) {
       The personal data of this party have been erased.{' '}
       {mayRead
         ? 'What was written is kept for a time, for the administrator alone.'
-        : 'What was written can be read by the administrator alone.'}
+        : 'What was written can be read by the administrator alone.'}{' '}
+      Nothing more can be written: nobody would read it.
     </p>
   );
 }
@@ -42,14 +43,14 @@ function Thread({ schemeId, matterId }: { readonly schemeId: string; readonly ma
         <div className="min-w-0">
           {matter.isErased && <Erased mayRead={matter.messages.length > 0} />}
           <MessageList {...{ schemeId, matter }} />
-          {mayChange && <WriteForm {...{ schemeId, matter, onReload }} />}
+          {mayChange && !matter.isErased && <WriteForm {...{ schemeId, matter, onReload }} />}
         </div>
         <div className="min-w-0">
           <MatterStanding {...{ schemeId, matter, mayChange, onReload }} />
           {suggestion !== null && (
             <SuggestionPanel
               {...{ schemeId, matter, suggestion, onReload }}
-              mayTake={mayChange && can(scheme, 'updateRegister')}
+              mayTake={mayChange && !matter.isErased && can(scheme, 'updateRegister')}
             />
           )}
         </div>

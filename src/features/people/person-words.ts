@@ -8,15 +8,32 @@ export function signInState(
   {
     hasPassword,
     invitedUntil,
+    letter,
     shutOutAt,
-  }: Pick<PersonAnswer, 'hasPassword' | 'invitedUntil' | 'shutOutAt'>,
+  }: Pick<PersonAnswer, 'hasPassword' | 'invitedUntil' | 'letter' | 'shutOutAt'>,
   now: Date,
 ): { readonly state: State; readonly words: string } {
   if (shutOutAt !== null) return { state: 'not-started', words: 'Shut out' };
   if (hasPassword) return { state: 'done', words: 'Can sign in' };
   if (invitedUntil === null) return { state: 'not-started', words: 'Not invited' };
   if (new Date(invitedUntil) < now) return { state: 'not-started', words: 'Invitation too old' };
+  if (letter?.state === 'failed') return { state: 'waiting', words: 'Letter not sent' };
   return { state: 'in-hand', words: `Invited until ${formatShortDay(invitedUntil)}` };
+}
+
+/** What keeps the letter of an invitation from going out, if anything does. */
+export function letterTrouble({
+  letter,
+  email,
+}: Pick<PersonAnswer, 'letter' | 'email'>): { failed: string; stands: string } | null {
+  if (letter === null || letter.state === 'sent' || letter.serverWords === null) return null;
+  const said = `The mail server said: “${letter.serverWords}”`;
+  return letter.state === 'waiting'
+    ? {
+        failed: `The letter to ${email} has not gone out yet.`,
+        stands: `It is tried again. ${said}`,
+      }
+    : { failed: `The letter to ${email} was not sent.`, stands: `The account is made. ${said}` };
 }
 
 export type Part = {

@@ -15,11 +15,20 @@ export async function signInWith(
   await page.getByRole('button', { name: 'Sign in' }).click();
 }
 
+/** Waits for the first page: what waits for somebody, or the building of an owner. */
+export async function isIn({ page }: Visitor, asOwner: boolean): Promise<void> {
+  await (
+    asOwner
+      ? page.getByRole('link', { name: 'My building' })
+      : page.getByRole('heading', { name: 'Waiting for you' })
+  ).waitFor();
+}
+
 /** Signs a person of the demo in and waits for their first page. */
 export async function signInAs(visitor: Visitor, role: DemoRole): Promise<void> {
   await visitor.open('/');
   await signInWith(visitor, `${role}@example.org`, inject('demo').password);
-  await visitor.page.getByRole('heading', { name: 'Waiting for you' }).waitFor();
+  await isIn(visitor, role === 'owner');
 }
 
 export async function signOut({ page }: Visitor): Promise<void> {

@@ -25,7 +25,7 @@ for (const [role, screens] of [
 
       const invited = await visit();
       await invited.open(link);
-      await choosePassword(invited, PASSWORD);
+      await choosePassword(invited, PASSWORD, role === 'Owner');
       await openScheme(invited);
       expect(await tabs(invited)).toEqual(screens);
 

@@ -8,7 +8,7 @@ describe('the method', () => {
     const visitor = await visit();
     await signInAs(visitor, 'owner');
     const { page } = visitor;
-    await page.getByRole('link', { name: 'Method', exact: true }).click();
+    await page.getByRole('link', { name: 'How we work it out' }).click();
     await page.getByRole('heading', { name: 'Method', level: 1 }).waitFor();
     await page
       .getByText(/^(\d+) of \1 agree$/)

@@ -4,7 +4,8 @@ import { afterEach, beforeEach, expect, test } from 'vitest';
 import { openBoss, type Boss } from '../../../server/jobs/open-boss.ts';
 import { openOutbox } from '../../../server/mail/open-outbox.ts';
 import type { Outbox } from '../../../server/mail/outbox.ts';
-import { aScheme } from '../../support/factories.ts';
+import { issueLink } from '../../../server/commands/issue-link.ts';
+import { aPerson, aScheme } from '../../support/factories.ts';
 import { testApp } from '../../support/test-app.ts';
 
 const { services, letters } = testApp();
@@ -72,4 +73,20 @@ test('a mail that waits is called for once, however many starts call again for a
   const waiting = `from pgboss.job j join outbox o on o.id::text = j.data->>'mailId'
     where o.recipient = 'later@example.org' and j.state = 'created'`;
   expect(await count(waiting)).toBe(1);
+});
+
+test('a letter of an account goes before those to owners that wait', async () => {
+  const person = await aPerson();
+  const { database, env } = services();
+  const mail = { recipient: 'account@example.org', subject: 'A new password', parts: ['Ada,'] };
+  await database.transaction(async (transaction) => {
+    const { id: linkId } = await issueLink(env, person.id, 'password-reset', transaction);
+    await outbox.put([{ ...mail, schemeId: null, linkId }], transaction);
+    const [first] = await database.query<{ priority: number }>(
+      `select priority from pgboss.job where name = 'outbox' and state = 'created'
+       order by priority desc limit 1`,
+      { type: QueryTypes.SELECT, transaction },
+    );
+    expect(first?.priority).toBe(1);
+  });
 });

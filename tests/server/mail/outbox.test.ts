@@ -6,7 +6,8 @@ import { startSink, type Behaviour, type Sink } from '../../../server/mail/sink.
 import { MailboxLetter } from '../../../server/models/mailbox-letter.ts';
 import { insertMails, insertTry } from '../../../server/models/outbox-mails.ts';
 import type { Services } from '../../../server/services.ts';
-import { aScheme } from '../../support/factories.ts';
+import { SingleUseLink } from '../../../server/models/single-use-link.ts';
+import { aPerson, aScheme } from '../../support/factories.ts';
 import { testApp } from '../../support/test-app.ts';
 
 const { services } = testApp();
@@ -101,7 +102,7 @@ test('a try that a stop left without an answer is made again under its own numbe
 test('what the server took in before it hung up goes again and shows once', async () => {
   const id = await aMail('dropped@example.org');
   behaviour = 'drop';
-  expect(await sendWaiting(tools(), id)).toBeInstanceOf(Date);
+  expect(await sendWaiting(tools(), id)).toHaveProperty('nextTryAt', expect.any(Date));
   expect(await stateOf(id)).toMatchObject({ state: 'waiting', later: true });
   behaviour = 'keep';
   await due(id);
@@ -113,7 +114,7 @@ test('what the server took in before it hung up goes again and shows once', asyn
 test('a refusal for now is tried again later, not sooner, and at last given up with the server’s words', async () => {
   const id = await aMail('later@example.org');
   behaviour = { refuse: 451, words: 'Mailbox is busy' };
-  expect(await sendWaiting(tools(), id)).toBeInstanceOf(Date);
+  expect(await sendWaiting(tools(), id)).toHaveProperty('nextTryAt', expect.any(Date));
   expect(await sendWaiting(tools(), id)).toBeNull();
   expect(await stateOf(id)).toMatchObject({ state: 'waiting', refusals: 1, later: true });
   for (let k = 0; k < 7; k += 1) {
@@ -147,4 +148,32 @@ test('tries and answers stay as they were written', async () => {
   for (const table of ['outbox_tries', 'outbox_answers']) {
     await expect(database.query(`delete from ${table}`)).rejects.toThrow();
   }
+});
+
+test('a letter of an account whose link has ended is not sent any more', async () => {
+  const { database } = services();
+  for (const over of [{ usedAt: new Date() }, { expiresAt: new Date(Date.now() - 1000) }]) {
+    const { id: personId } = await aPerson();
+    const expiresAt = new Date(Date.now() + 60_000);
+    const ofLink = { personId, purpose: 'password-reset', expiresAt } as const;
+    const link = await SingleUseLink.create({ ...ofLink, tokenHash: personId, ...over });
+    const id = crypto.randomUUID();
+    const mail = { id, schemeId: null, recipient: 'ended@example.org', linkId: link.id };
+    await database.transaction((transaction) =>
+      insertMails(database, [{ ...mail, subject: 'A new password', parts: ['Ada,'] }], transaction),
+    );
+    expect(await sendWaiting(tools(), id)).toBeNull();
+    const words = 'Its link ended before it was sent.';
+    expect(await stateOf(id)).toMatchObject({ state: 'failed', words });
+  }
+  expect(await inMailbox('ended@example.org')).toBe(0);
+});
+
+test('a mail of no scheme is of a link, and neither carries a letter nor concerns a party', async () => {
+  const { database } = services();
+  const mail = { id: crypto.randomUUID(), schemeId: null, recipient: 'none@example.org' };
+  const put = database.transaction((transaction) =>
+    insertMails(database, [{ ...mail, subject: 'No', parts: ['No.'] }], transaction),
+  );
+  await expect(put).rejects.toThrow();
 });

@@ -65,10 +65,8 @@ describe('what an erased party wrote', () => {
     const texts = [
       await assessor.get(`${address}/matters`),
       await assessor.get(`${address}/matters/${matter.id}`),
-      await assessor.post(`${address}/matters/${matter.id}/messages`)
-        .send({ id: randomUUID(), version: 1, side: 'note', text: 'Done.' }),
       await assessor.patch(`${address}/matters/${matter.id}`).send({ version: 1, state: 'closed' }),
-    ]; // prettier-ignore
+    ];
     for (const { text } of texts) {
       expect(text).toContain('"isErased":true');
       expect(text).not.toContain('Pepperells');
@@ -79,12 +77,36 @@ describe('what an erased party wrote', () => {
     await assessor.get(`${address}/parties/${owner.party.id}/personal-data`).expect(404);
 
     const whole = matterSchema.parse((await administrator.get(`${address}/matters/${matter.id}`)).body); // prettier-ignore
-    expect(whole).toMatchObject({ title: matter.title, messages: [{ text: matter.text }, {}] });
+    expect(whole).toMatchObject({ title: matter.title, messages: [{ text: matter.text }] });
     const found = await administrator.get(`${address}/matters`).query(search);
     expect(mattersSchema.parse(found.body).total).toBe(1);
     await administrator.get(file).expect(200);
     const held = await administrator.get(`${address}/parties/${owner.party.id}/personal-data`);
     expect(held.text).toContain('Call the Pepperells.');
+  });
+
+  test('is answered no more, nor noted on, nor taken over; it can be closed', async () => {
+    const { owner, matter, address, assessor } = await aMatterWithPhotograph(await aScheme());
+    const correction = aMatter(owner.building.id, {
+      ...{ kind: 'correction', suggestion: { field: 'storeys', value: 4 } },
+    });
+    await owner.agent.post(`${address}/own/matters`).send(correction).expect(201);
+    await erase(address, owner.party.id);
+    const at = `${address}/matters/${matter.id}`;
+    const sent = letters.length;
+    for (const side of ['team', 'note']) {
+      const message = { id: randomUUID(), version: 1, side, text: 'We come on Friday.' };
+      const { text } = await assessor.post(`${at}/messages`).send(message).expect(409);
+      expect(text).toContain('Nobody would read it.');
+    }
+    const message = { id: randomUUID(), text: 'Thank you.' };
+    const taking = { version: 1, buildingVersion: 1, message };
+    await assessor.post(`${address}/matters/${correction.id}/taking-over`).send(taking).expect(409);
+    const written = 'select id from matter_messages where matter_id = any($1)';
+    expect(await rowsIn(written, [[matter.id, correction.id]])).toHaveLength(2);
+    await outbox().idle();
+    expect(letters).toHaveLength(sent);
+    await assessor.patch(at).send({ version: 1, state: 'closed' }).expect(200);
   });
 
   test('loses the days that were asked for', async () => {

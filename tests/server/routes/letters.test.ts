@@ -10,8 +10,8 @@ import { letterSchema, listedLettersSchema } from '../../../shared/schemas/lette
 import { Membership } from '../../../server/models/membership.ts';
 import { Person } from '../../../server/models/person.ts';
 import { remindLate } from '../../../server/letters/remind-late.ts';
-import { aMember, aPerson } from '../../support/factories.ts';
-import { aBatch, aSentBatch, aTownOfOwners } from '../../support/letters.ts';
+import { aMember, anAdministrator, aPerson } from '../../support/factories.ts';
+import { aBatch, aSentBatch, aTownOfOwners, keepSettings } from '../../support/letters.ts';
 import { signIn, visitor } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
 import { tokenOf } from '../../support/token-of.ts';
@@ -24,8 +24,8 @@ function rowsIn<T extends object>(query: string, bind: unknown[]): Promise<T[]> 
   return services().database.query<T>(query, { type: QueryTypes.SELECT, bind });
 }
 
-/** A batch like another, sent forty days ago; the first of its letters. */
-async function sentLongAgo(batchId: string): Promise<{ letterId: string }> {
+/** A batch like another, sent forty days ago, to be answered so many days earlier; the first of its letters. */
+async function sentLongAgo(batchId: string, earlier = 40): Promise<{ letterId: string }> {
   const [row] = await rowsIn<{ letterId: string }>(
     `with batch as (
        insert into letter_batches (id, scheme_id, number, kind, template_version, settings_version,
@@ -38,11 +38,11 @@ async function sentLongAgo(batchId: string): Promise<{ letterId: string }> {
        insert into letters (id, scheme_id, batch_id, number, party_id, channel, name, address, email,
          subject, body, facts, reasons, answer_by)
        select gen_random_uuid(), scheme_id, batch.id, number, party_id, channel, name, address,
-         email, subject, body, facts, reasons, answer_by
+         email, subject, body, facts, reasons, answer_by - $2::integer
        from letters, batch where batch_id = $1 returning id, number
      )
      select id as "letterId" from copies order by number limit 1`,
-    [batchId],
+    [batchId, earlier],
   );
   if (row === undefined) throw new Error('There is no such batch.');
   return row;
@@ -349,6 +349,37 @@ describe('a letter', () => {
     const found = listedLettersSchema.parse(overdue.body);
     expect(found.map(({ name }) => name)).toEqual([town.byMail.name, town.byPost.name]);
     expect(found[0]?.remindedAt).not.toBeNull();
+  });
+
+  test('is not late before the day that it gives', async () => {
+    const town = await aTownOfOwners(tested);
+    const { id } = await aSentBatch(tested, town);
+    await sentLongAgo(id, 0);
+    expect(await remindLate(services())).toBe(0);
+    const overdue = await town.firstAgent.get(`${town.address}/letters?overdue=answer`);
+    expect(listedLettersSchema.parse(overdue.body)).toEqual([]);
+  });
+
+  test('gives a working day to answer by, round the holidays of the scheme', async () => {
+    const town = await aTownOfOwners(tested);
+    const dayIn = (days: number) => new Date(Date.now() + days * 86_400_000);
+    const isoOf = (moment: Date) => moment.toISOString().slice(0, 10);
+    // from the day on which three weeks end there are ten holidays
+    const holidays = Array.from({ length: 10 }, (_, k) => ({
+      ...{ date: isoOf(dayIn(21 + k)), name: 'Harbour days' },
+    }));
+    await keepSettings(await signIn(app(), await anAdministrator()), town.scheme, { holidays });
+    const { id } = await aBatch(town);
+    const weekend = [0, 6];
+    const days = Array.from({ length: 4 }, (_, k) => dayIn(31 + k));
+    const then = days.find((day) => !weekend.includes(day.getUTCDay()));
+    const [row] = await rowsIn<{ day: string; body: string }>(
+      'select answer_by::text as day, body from letters where batch_id = $1 limit 1',
+      [id],
+    );
+    expect(row?.day).toBe(then === undefined ? undefined : isoOf(then));
+    const spoken = then?.toLocaleDateString('en-GB', { day: 'numeric', month: 'long', timeZone: 'UTC' }); // prettier-ignore
+    expect(row?.body).toContain(spoken);
   });
 
   test('is acknowledged by telephone once, and never reminded of', async () => {

@@ -1,7 +1,7 @@
 import { QueryTypes } from 'sequelize';
 import { beforeAll, describe, expect, test, vi } from 'vitest';
 import { z } from 'zod';
-import { invitedSchema, personSchema } from '../../../shared/schemas/people.ts';
+import { personSchema } from '../../../shared/schemas/people.ts';
 import { linkTokenHash } from '../../../server/authentication/link-token.ts';
 import { AuditEntry } from '../../../server/models/audit-entry.ts';
 import { Membership } from '../../../server/models/membership.ts';
@@ -13,7 +13,7 @@ import { signIn, visitor } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
 import { tokenOf } from '../../support/token-of.ts';
 
-const { app, services, letters } = testApp();
+const { app, services, letters, outbox } = testApp();
 const NOBODY = '3fa85f64-5717-4562-b3fc-2c963f66afa6';
 let administrator: Person;
 
@@ -84,8 +84,12 @@ describe('inviting a person', () => {
       ],
     });
     expect(answer.status).toBe(201);
-    const { person, letterSent } = invitedSchema.parse(answer.body);
-    expect(letterSent).toBe(true);
+    const person = personSchema.parse(answer.body);
+    await outbox().idle();
+    const { letter: fares } = personSchema.parse(
+      (await agent.get(`/api/people/${person.id}`)).body,
+    );
+    expect(fares).toEqual({ state: 'sent', serverWords: '250 taken in' });
     const kept = await Person.findByPk(person.id);
     expect(kept).toMatchObject({
       name: 'Ada Lind',
@@ -126,6 +130,7 @@ describe('inviting a person', () => {
     const agent = await asAdministrator();
     const email = 'newcomer@example.org';
     await agent.post('/api/people').send({ name: 'New', email, isAdministrator: true });
+    await outbox().idle();
     const token = tokenOf(letters.find(({ to }) => to === email));
     const newcomer = await visitor(app());
     await newcomer.post(`/api/links/${token}`).send({ password: 'a wall of my own choice' });
@@ -188,17 +193,48 @@ describe('inviting a person', () => {
 
   test('stands where the letter cannot be sent, and says so', async () => {
     const { mailer } = services();
-    vi.spyOn(mailer, 'send').mockRejectedValueOnce(new Error('no mail server'));
-    const answer = await (
-      await asAdministrator()
-    )
-      .post('/api/people')
-      .send({ name: 'Unsent', email: 'unsent@example.org' });
+    const refusal = Object.assign(new Error('refused'), {
+      ...{ responseCode: 550, response: '550 No such mailbox' },
+    });
+    vi.spyOn(mailer, 'send').mockRejectedValueOnce(refusal);
+    const agent = await asAdministrator();
+    const form = { name: 'Unsent', email: 'unsent@example.org' };
+    const answer = await agent.post('/api/people').send(form);
     expect(answer.status).toBe(201);
-    const { person, letterSent } = invitedSchema.parse(answer.body);
-    expect(letterSent).toBe(false);
-    expect(person.abilities.invite).toBe(true);
-    expect(await Person.count({ where: { name: 'Unsent' } })).toBe(1);
+    const { id } = personSchema.parse(answer.body);
+    await outbox().idle();
+    const { abilities, letter } = personSchema.parse((await agent.get(`/api/people/${id}`)).body);
+    expect(letter).toEqual({ state: 'failed', serverWords: '550 No such mailbox' });
+    expect(abilities.invite).toBe(true);
+    expect(await Person.count({ where: form })).toBe(1);
+  });
+
+  test('holds neither the link nor, once it is sent, the person in the outbox', async () => {
+    const agent = await asAdministrator();
+    const form = { name: 'Held Somebody', email: 'held@example.org' };
+    const { mailer, database } = services();
+    const rowOf = async (token: string) => {
+      const [found] = await database.query<{ row: string }>(
+        `select row_to_json(o)::text as row from outbox o
+         where link_id = (select id from single_use_links where token_hash = $1)`,
+        { type: QueryTypes.SELECT, bind: [linkTokenHash(token)] },
+      );
+      return found?.row;
+    };
+    const seen: { token: string; waiting: string | undefined }[] = [];
+    vi.spyOn(mailer, 'send').mockImplementationOnce(async (letter) => {
+      const token = tokenOf(letter);
+      seen.push({ token, waiting: await rowOf(token) });
+      return '250 taken in';
+    });
+    await agent.post('/api/people').send(form).expect(201);
+    await outbox().idle();
+    const [{ token, waiting } = { token: '', waiting: '' }] = seen;
+    expect(waiting).toContain(form.email);
+    expect(waiting).not.toContain(token);
+    const sent = await rowOf(token);
+    expect(sent).toContain('"state":"sent"');
+    expect(sent).not.toMatch(/held@example.org|Held Somebody/);
   });
 
   test('does not take an address twice, whatever its capitals', async () => {
@@ -219,7 +255,8 @@ describe('inviting again', () => {
     const agent = await asAdministrator();
     const answer = await agent.post(`/api/people/${person.id}/invitations`);
     expect(answer.status).toBe(201);
-    expect(invitedSchema.parse(answer.body).person.invitedUntil).not.toBeNull();
+    expect(personSchema.parse(answer.body).invitedUntil).not.toBeNull();
+    await outbox().idle();
     const token = tokenOf(letters.find(({ to }) => to === person.email));
     expect((await agent.get(`/api/links/${old}`)).status).toBe(410);
     expect((await agent.get(`/api/links/${token}`)).status).toBe(200);

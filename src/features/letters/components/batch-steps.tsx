@@ -1,10 +1,12 @@
 import { useState } from 'react';
 import type { Batch } from '../../../../shared/schemas/letter-batches.ts';
 import { Button } from '../../../components/ui/button.tsx';
+import { ButtonLink } from '../../../components/ui/button-link.tsx';
 import { buttonStyle } from '../../../components/ui/button-style.ts';
 import { ConfirmDialog } from '../../../components/ui/confirm-dialog.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { TextArea } from '../../../components/ui/text-area.tsx';
+import { batchFromTextPath } from '../../../config/paths.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
@@ -138,6 +140,19 @@ function Print({ batch, busy, onStep }: StepsProps) {
   );
 }
 
+/** What was written for letters that are not sent need not be written again. */
+function CarryOver({ batch }: { readonly batch: Batch }) {
+  const scheme = useScheme();
+  if (batch.kind !== 'free text' || !can(scheme, 'prepareLetters')) return null;
+  return (
+    <div>
+      <ButtonLink to={batchFromTextPath(scheme.id, batch.id)}>
+        Prepare letters from this text
+      </ButtonLink>
+    </div>
+  );
+}
+
 /** What can be done with a batch next. */
 export function BatchSteps({ batch }: { readonly batch: Batch }) {
   const move = useMoveBatch(useScheme().id, batch.id);
@@ -153,6 +168,7 @@ export function BatchSteps({ batch }: { readonly batch: Batch }) {
       <MutationError failed="Nothing was changed." error={move.error} />
       {batch.state === 'waiting for check' && <WhileWaiting {...steps} />}
       {batch.state === 'checked' && <Send {...steps} />}
+      {(batch.state === 'returned' || batch.state === 'withdrawn') && <CarryOver batch={batch} />}
       {batch.state === 'sent' && <Print {...steps} />}
     </div>
   );

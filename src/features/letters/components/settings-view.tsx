@@ -59,7 +59,7 @@ export function SettingsView({ held }: { readonly held: HeldLetterSettings }) {
         <Panel title="Days">
           <Facts
             facts={[
-              ['Answer within', `${answerWithin} days of the letter`],
+              ['Answer within', `${answerWithin} days of the letter, or by the next working day`],
               ['Reminded after', `${remindAfter} days, by e-mail, once`],
               ['Escalated after', `${escalateAfter} days: somebody calls or goes`],
               ['Letters kept', `${settings.keepYears} years. ${settings.keepGround}`],

@@ -8,4 +8,6 @@ export const lettersQuery = queryOptions({
   queryKey: ['mailbox'],
   queryFn: ({ signal }) => apiGet('/api/mailbox', z.array(mailboxEntrySchema), signal),
   staleTime: 0,
+  // what was sent a moment ago may still wait its turn
+  refetchInterval: 3000,
 });

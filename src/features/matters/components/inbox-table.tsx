@@ -3,9 +3,9 @@ import type { MatterLine } from '../../../../shared/schemas/matter-answers.ts';
 import { capital } from '../../../../shared/presentation/capital.ts';
 import { StateMark } from '../../../components/ui/state-mark.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
+import { ShortWords } from '../../../components/ui/table/short-words.tsx';
 import { Table } from '../../../components/ui/table/table.tsx';
 import { matterPath } from '../../../config/paths.ts';
-import { PartyName } from '../../parties/components/party-name.tsx';
 import { MATTER_SHAPES } from '../matter-words.ts';
 import { DueDay } from './due-day.tsx';
 import { BuildingLink } from '../../buildings/components/building-link.tsx';
@@ -27,7 +27,7 @@ function columnsOf(schemeId: string): readonly Column<MatterLine>[] {
       id: 'party',
       heading: 'From',
       spare: true,
-      cell: ({ party }) => <PartyName name={party.name} />,
+      cell: ({ party }) => <ShortWords words={party.name === '' ? 'Erased' : party.name} />,
     },
     {
       id: 'building',

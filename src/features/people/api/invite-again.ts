@@ -1,5 +1,5 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { invitedSchema } from '../../../../shared/schemas/people.ts';
+import { personSchema } from '../../../../shared/schemas/people.ts';
 import { apiSend } from '../../../lib/api-client.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 import { peopleQuery } from './list-people.ts';
@@ -9,7 +9,7 @@ export function useInviteAgain() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (personId: string) =>
-      apiSend('POST', apiPath`/api/people/${personId}/invitations`, invitedSchema),
+      apiSend('POST', apiPath`/api/people/${personId}/invitations`, personSchema),
     onSuccess: () => client.invalidateQueries({ queryKey: peopleQuery.queryKey }),
   });
 }

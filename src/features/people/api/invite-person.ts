@@ -1,6 +1,6 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import type { z } from 'zod';
-import { invitedSchema, type newPersonSchema } from '../../../../shared/schemas/people.ts';
+import { personSchema, type newPersonSchema } from '../../../../shared/schemas/people.ts';
 import { apiSend } from '../../../lib/api-client.ts';
 import { membersQuery } from '../../members/api/list-members.ts';
 import { waitingQuery } from '../../waiting/api/get-waiting.ts';
@@ -11,7 +11,7 @@ export function useInvitePerson() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (person: z.input<typeof newPersonSchema>) =>
-      apiSend('POST', '/api/people', invitedSchema, person),
+      apiSend('POST', '/api/people', personSchema, person),
     onSuccess: async (_, { memberships = [] }) => {
       for (const { schemeId } of memberships) {
         void client.invalidateQueries({ queryKey: membersQuery(schemeId).queryKey });

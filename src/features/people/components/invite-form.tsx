@@ -102,7 +102,7 @@ export function InviteForm() {
           setAsked(undefined);
         }}
       />
-      {invite.data !== undefined && <LetterNote invited={invite.data} />}
+      {invite.data !== undefined && <LetterNote person={invite.data} />}
     </form>
   );
 }

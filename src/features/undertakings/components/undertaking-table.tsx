@@ -4,6 +4,7 @@ import { Button } from '../../../components/ui/button.tsx';
 import { Facts } from '../../../components/ui/facts.tsx';
 import { StateMark } from '../../../components/ui/state-mark.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
+import { ShortWords } from '../../../components/ui/table/short-words.tsx';
 import { Table } from '../../../components/ui/table/table.tsx';
 import { formatDay } from '../../../lib/format-date.ts';
 import { DueDay } from '../../matters/components/due-day.tsx';
@@ -29,7 +30,12 @@ function columnsOf(schemeId: string): readonly Column<Undertaking>[] {
       wide: true,
       cell: ({ promise }) => <b className="font-semibold">{promise}</b>,
     },
-    { id: 'madeTo', heading: 'Made to', spare: true, cell: madeToWords },
+    {
+      id: 'madeTo',
+      heading: 'Made to',
+      spare: true,
+      cell: (undertaking) => <ShortWords words={madeToWords(undertaking)} />,
+    },
     {
       id: 'for',
       heading: 'For',
@@ -40,7 +46,7 @@ function columnsOf(schemeId: string): readonly Column<Undertaking>[] {
       id: 'responsible',
       heading: 'Who sees to it',
       spare: true,
-      cell: ({ responsible }) => responsible,
+      cell: ({ responsible }) => <ShortWords words={responsible} />,
     },
     { id: 'due', heading: 'Due', cell: DueDay },
     {

@@ -5,7 +5,10 @@ import {
   newLetterSettingsSchema,
   type HeldLetterSettings,
 } from '../../../../shared/schemas/letter-settings.ts';
-import { holidaysOfLines } from '../../../../src/features/letters/holiday-lines.ts';
+import {
+  faultOfHolidays,
+  holidaysOfLines,
+} from '../../../../src/features/letters/holiday-lines.ts';
 import { LetterSettingsPage } from '../../../../src/features/letters/letter-settings-page.tsx';
 import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
 import { anId, aSchemeAnswer } from '../../../support/answers.ts';
@@ -82,7 +85,12 @@ test('it is written anew: a promise, days, a zone and holidays one a line', asyn
   });
 });
 
-test('a line without a name is told by its words', () => {
-  expect(holidaysOfLines('2027-05-03')).toEqual({ fault: '“2027-05-03”: Name the holiday.' });
-  expect(holidaysOfLines(' \n')).toEqual({ holidays: [] });
+test('a line without a name is told by its words, and too many lines by none', () => {
+  const holidays = holidaysOfLines('2027-05-31 Spring\n2027-05-03');
+  expect(holidays[0]).toEqual({ date: '2027-05-03', name: '' });
+  const issue = { path: ['holidays', 0, 'name'], message: 'Name the holiday.' };
+  expect(faultOfHolidays(holidays, issue)).toBe('“2027-05-03”: Name the holiday.');
+  const many = { path: ['holidays'], message: 'At most 200 holidays.' };
+  expect(faultOfHolidays(holidays, many)).toBe('At most 200 holidays.');
+  expect(holidaysOfLines(' \n')).toEqual([]);
 });

@@ -1,9 +1,12 @@
 import { fireEvent, screen, waitFor } from '@testing-library/react';
+import type { ReactNode } from 'react';
+import { Route, Routes } from 'react-router-dom';
 import { expect, test } from 'vitest';
 import { DEFAULT_TEMPLATES } from '../../../../shared/presentation/letter-templates.ts';
-import { newBatchSchema } from '../../../../shared/schemas/letter-batches.ts';
+import { newBatchSchema, type Batch } from '../../../../shared/schemas/letter-batches.ts';
 import { LETTER_KINDS } from '../../../../shared/schemas/letter-settings.ts';
 import { templatePreviewSchema } from '../../../../shared/schemas/letter-templates.ts';
+import { BatchPage } from '../../../../src/features/letters/batch-page.tsx';
 import { NewBatchPage } from '../../../../src/features/letters/new-batch-page.tsx';
 import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
 import { anId, aSchemeAnswer } from '../../../support/answers.ts';
@@ -15,7 +18,15 @@ const SCHEME = `/api/schemes/${anId(10)}`;
 const ADA = { partyId: anId(70), name: 'Ada', channel: 'e-mail', reasons: [], leftOut: null };
 const PREPARE = `POST ${SCHEME}/letter-batches`;
 
-function show() {
+const RETURNED: Batch = {
+  ...{ id: anId(80), number: 4, kind: 'free text', state: 'returned', letters: 1, byPost: 0 },
+  ...{ templateVersion: 0, settingsVersion: 0, runNumber: 1, deliveries: null },
+  ...{ preparedBy: 'Bo', preparedById: anId(1), preparedAt: '2026-12-01T09:00:00.000Z' },
+  ...{ checkedBy: 'Cy', checkedAt: '2026-12-01T10:00:00.000Z', comment: 'Mended with a d.' },
+  ...{ sentBy: null, sentAt: null, printedAt: null },
+};
+
+function show(page: ReactNode = <NewBatchPage />, path = '/') {
   const abilities = { readScheme: true, readLetters: true, prepareLetters: true };
   const api = fakeApi({
     [`${PREPARE}/preview`]: {
@@ -30,13 +41,13 @@ function show() {
       return { faults: [], parties: [{ id: ADA.partyId, name: 'Ada' }], letter };
     },
     [PREPARE]: () => new Refusal(409, 'conflict', 'By now 2 would get the letter, not 1.'),
+    [`GET ${SCHEME}/letter-batches/${RETURNED.id}`]: {
+      ...{ batch: RETURNED, text: { subject: 'The lift', body: 'It is mendet.' } },
+      ...{ letters: [], leftOut: [] },
+    },
     [`GET ${SCHEME}`]: aSchemeAnswer({ abilities }),
   });
-  renderPage(
-    <SchemeContext value={aSchemeAnswer({ abilities })}>
-      <NewBatchPage />
-    </SchemeContext>,
-  );
+  renderPage(<SchemeContext value={aSchemeAnswer({ abilities })}>{page}</SchemeContext>, path);
   return api;
 }
 
@@ -73,4 +84,23 @@ test('other kinds go by their template and are not written here', async () => {
   fireEvent.click(await screen.findByRole('button', { name: 'Write 1 letter' }));
   expect(await sent(calls)).toMatchObject({ kind: 'first information', text: null });
   expect(screen.queryByLabelText('Subject')).toBeNull();
+});
+
+test('the text of a returned batch begins another, with what its check said', async () => {
+  const { calls } = show(
+    <Routes>
+      <Route path="/schemes/:schemeId/owners/letters/new" element={<NewBatchPage />} />
+      <Route path="/schemes/:schemeId/owners/letters/:batchId" element={<BatchPage />} />
+    </Routes>,
+    `/schemes/${anId(10)}/owners/letters/${RETURNED.id}`,
+  );
+  fireEvent.click(await screen.findByRole('link', { name: 'Prepare letters from this text' }));
+  const body = await screen.findByDisplayValue('It is mendet.');
+  expect(screen.getByText(/batch 4\. Its check said: “Mended with a d\.”/)).toBeTruthy();
+  fireEvent.change(body, { target: { value: 'It is mended.' } });
+  fireEvent.click(await screen.findByRole('button', { name: 'Write 1 letter' }));
+  expect(await sent(calls)).toMatchObject({
+    kind: 'free text',
+    text: { subject: 'The lift', body: 'It is mended.' },
+  });
 });

@@ -1,8 +1,10 @@
 import { fireEvent, screen, waitFor } from '@testing-library/react';
 import type { ReactNode } from 'react';
+import { Route, Routes } from 'react-router-dom';
 import { expect, test } from 'vitest';
 import type { Matter, MatterLine } from '../../../../shared/schemas/matter-answers.ts';
 import { InboxPage } from '../../../../src/features/matters/inbox-page.tsx';
+import { MatterPage } from '../../../../src/features/matters/matter-page.tsx';
 import { WriteForm } from '../../../../src/features/matters/components/write-form.tsx';
 import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
 import { anId, aSchemeAnswer } from '../../../support/answers.ts';
@@ -80,4 +82,17 @@ test('an answer that clashes keeps what was written, under the same number', asy
   });
   expect(posts()[0]?.body).toEqual(posts()[1]?.body);
   expect(posts()[0]?.body).toMatchObject({ version: 1, side: 'team', text: 'We come.' });
+});
+
+test('a matter of an erased party offers no answer, and says why', async () => {
+  fakeApi({ [`GET ${SCHEME}/matters/${anId(20)}`]: { ...aThread(), isErased: true } });
+  show(
+    <Routes>
+      <Route path="/inbox/:matterId" element={<MatterPage />} />
+    </Routes>,
+    `/inbox/${anId(20)}`,
+  );
+  expect(await screen.findByText(/Nothing more can be written: nobody would read it/)).toBeTruthy();
+  expect(screen.queryByRole('button', { name: 'Send the answer' })).toBeNull();
+  expect(screen.getByRole('combobox', { name: 'State' })).toBeTruthy();
 });

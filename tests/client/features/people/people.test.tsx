@@ -31,6 +31,8 @@ const LISTS = {
   ],
 };
 
+const REFUSED = { state: 'failed', serverWords: '550 No such mailbox' } as const;
+
 function type(label: string, value: string): void {
   fireEvent.change(screen.getByLabelText(label), { target: { value } });
 }
@@ -43,9 +45,13 @@ describe('signInState', () => {
     [{ hasPassword: false, invitedUntil: '2026-05-28T09:00:00.000Z' }, 'Invited until 28 May 2026'],
     [{ hasPassword: false, invitedUntil: '2026-05-20T09:00:00.000Z' }, 'Invitation too old'],
     [{ hasPassword: false, invitedUntil: null }, 'Not invited'],
+    [
+      { hasPassword: false, invitedUntil: '2026-05-28T09:00:00.000Z', letter: REFUSED },
+      'Letter not sent',
+    ],
     [{ hasPassword: true, invitedUntil: null, shutOutAt: '2026-05-20T09:00:00.000Z' }, 'Shut out'],
   ])('of %j is "%s"', (person, words) => {
-    expect(signInState({ shutOutAt: null, ...person }, now).words).toBe(words);
+    expect(signInState({ shutOutAt: null, letter: null, ...person }, now).words).toBe(words);
   });
 });
 
@@ -75,7 +81,7 @@ describe('the page of people', () => {
   it('invites with a scheme and a role, and leaves out a line with no scheme', async () => {
     const { calls } = fakeApi({
       ...LISTS,
-      'POST /api/people': { person: INVITED, letterSent: true },
+      'POST /api/people': INVITED,
     });
     renderPage(<PeoplePage />);
     await screen.findByRole('option', { name: 'Port Dogger crossing' });
@@ -86,7 +92,7 @@ describe('the page of people', () => {
     fireEvent.change(screen.getByLabelText('Role'), { target: { value: 'witness' } });
     fireEvent.click(screen.getByRole('button', { name: 'Another scheme or role' }));
     fireEvent.click(screen.getByRole('button', { name: 'Send the invitation' }));
-    expect(await screen.findByText(/went out/)).toBeTruthy();
+    expect(await screen.findByText(/is on its way/)).toBeTruthy();
     expect(calls.find(({ route }) => route === 'POST /api/people')?.body).toEqual({
       name: 'Clerk of works',
       email: 'clerk@example.org',
@@ -96,14 +102,15 @@ describe('the page of people', () => {
     expect(screen.getByLabelText<HTMLInputElement>('Name').value).toBe('');
   });
 
-  it('says so when the letter did not go out', async () => {
-    fakeApi({ ...LISTS, 'POST /api/people': { person: INVITED, letterSent: false } });
+  it.each([
+    [REFUSED, 'was not sent. The account is made. The mail server said: “550 No such mailbox”'],
+    [{ ...REFUSED, state: 'waiting' }, 'has not gone out yet. It is tried again.'],
+  ])('says in their row why a letter did not go out', async (letter, words) => {
+    fakeApi({ ...LISTS, 'GET /api/people': [{ ...INVITED, letter }] });
     renderPage(<PeoplePage />);
-    type('Name', 'Clerk of works');
-    type('E-mail', 'clerk@example.org');
-    fireEvent.click(screen.getByLabelText('Administrator'));
-    fireEvent.click(screen.getByRole('button', { name: 'Send the invitation' }));
-    expect((await screen.findByRole('alert')).textContent).toContain('The account is made.');
+    fireEvent.click(await screen.findByText('Clerk of works'));
+    expect((await screen.findByRole('alert')).textContent).toContain(words);
+    expect(screen.getByRole('button', { name: 'Send the invitation again' })).toBeTruthy();
   });
 
   it('keeps what was typed when somebody has the address already', async () => {
@@ -128,7 +135,7 @@ describe('the page of people', () => {
   it('asks before somebody is invited who will see nothing', async () => {
     const { calls } = fakeApi({
       ...LISTS,
-      'POST /api/people': { person: INVITED, letterSent: true },
+      'POST /api/people': INVITED,
     });
     renderPage(<PeoplePage />);
     type('Name', 'Clerk of works');
@@ -137,7 +144,7 @@ describe('the page of people', () => {
     const question = await screen.findByRole('dialog', { name: 'Invite without a scheme?' });
     expect(calls.map(({ route }) => route)).not.toContain('POST /api/people');
     fireEvent.click(within(question).getByRole('button', { name: 'Send the invitation' }));
-    expect(await screen.findByText(/went out/)).toBeTruthy();
+    expect(await screen.findByText(/is on its way/)).toBeTruthy();
   });
 
   it('withdraws an invitation', async () => {
@@ -182,14 +189,14 @@ describe('the page of people', () => {
 
   it('opens a row on what can be changed, and sends an invitation again', async () => {
     const again = `POST /api/people/${INVITED.id}/invitations`;
-    const { calls } = fakeApi({ ...LISTS, [again]: { person: INVITED, letterSent: true } });
+    const { calls } = fakeApi({ ...LISTS, [again]: INVITED });
     renderPage(<PeoplePage />);
     fireEvent.click(await screen.findByText('Clerk of works'));
     fireEvent.click(screen.getByRole('button', { name: 'Send the invitation again' }));
     await waitFor(() => {
       expect(calls.map(({ route }) => route)).toContain(again);
     });
-    expect(await screen.findByText(/went out/)).toBeTruthy();
+    expect(await screen.findByText(/is on its way/)).toBeTruthy();
     fireEvent.click(screen.getAllByText('Clerk of works')[0] ?? document.body);
     expect(screen.queryByRole('button', { name: 'Send the invitation again' })).toBeNull();
   });

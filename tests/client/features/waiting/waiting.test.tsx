@@ -1,10 +1,14 @@
-import { screen } from '@testing-library/react';
+import { screen, waitFor } from '@testing-library/react';
+import { Route, Routes } from 'react-router-dom';
 import { describe, expect, it } from 'vitest';
 import type { WaitingAnswer, WaitingItem } from '../../../../shared/schemas/waiting.ts';
+import { SchemesPage } from '../../../../src/app/routes/schemes.tsx';
 import { WaitingForYou } from '../../../../src/features/waiting/components/waiting-for-you.tsx';
+import { PersonContext } from '../../../../src/features/session/person-context.ts';
 import { waitingSentence, waitingThing } from '../../../../src/features/waiting/waiting-words.ts';
-import { anId } from '../../../support/answers.ts';
+import { anId, aPersonAnswer, aSchemeAnswer } from '../../../support/answers.ts';
 import { axeFaults } from '../../../support/axe-faults.ts';
+import { fakeApi } from '../../../support/fake-api.ts';
 import { renderPage } from '../../../support/render-page.tsx';
 
 const NOW = new Date(2026, 4, 21, 9, 30);
@@ -67,5 +71,42 @@ describe('WaitingForYou', () => {
     renderPage(<WaitingForYou waiting={{ ...waiting, schemes: [open, { ...open, scheme }] }} />);
     expect(screen.getByText('Nothing waits here.')).toBeTruthy();
     expect(screen.queryByText('Siding')).toBeNull();
+  });
+});
+
+describe('the first page', () => {
+  function open(roles: WaitingAnswer['schemes'][number]['roles'], isAdministrator = false) {
+    const [scheme] = waitingIn().schemes;
+    fakeApi({
+      'GET /api/waiting': {
+        general: [],
+        schemes: scheme === undefined ? [] : [{ ...scheme, roles }],
+      },
+      'GET /api/schemes': [aSchemeAnswer()],
+    });
+    renderPage(
+      <PersonContext value={{ ...aPersonAnswer({ isAdministrator }), demo: false }}>
+        <Routes>
+          <Route path="/" element={<SchemesPage />} />
+          <Route path="/schemes/:schemeId/home" element={<p>My own page</p>} />
+        </Routes>
+      </PersonContext>,
+    );
+  }
+
+  it('of an owner is the page of their building, where what is asked of them stands', async () => {
+    open(['owner']);
+    expect(await screen.findByText('My own page')).toBeTruthy();
+  });
+
+  it.each([
+    [['assessor', 'owner'] as const, false],
+    [['owner'] as const, true],
+  ])('of who has another part too (%j) says what waits', async (roles, isAdministrator) => {
+    open([...roles], isAdministrator);
+    await waitFor(() => {
+      expect(screen.getByText(/Nothing waits for you\.$/)).toBeTruthy();
+    });
+    expect(screen.queryByText('My own page')).toBeNull();
   });
 });
