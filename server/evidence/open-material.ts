@@ -43,7 +43,7 @@ async function buildingsIn(database: Sequelize, runId: string, box: LonLatBox) {
 export async function openMaterial(
   database: Sequelize,
   scheme: Scheme,
-  { id: runId, design }: Pick<RunDetail, 'id' | 'design'>,
+  { id: runId }: Pick<RunDetail, 'id'>,
 ): Promise<(box: Box) => Promise<PlanMaterial>> {
   const { definition } = await crsOfScheme(scheme);
   const toGrid = fromLonLat(definition);
