@@ -1,6 +1,6 @@
 import { cornersOf } from '../../../shared/evidence/ground-frame.ts';
+import { INK_COLOURS } from '../../../shared/evidence/ink-colours.ts';
 import type { Mark, Rectangle, Spot, Stroke } from '../../../shared/evidence/marks.ts';
-import { INKS } from '../pdf/inks.ts';
 import { POINTS_PER_MM } from '../pdf/page-sizes.ts';
 import type { Paper } from '../pdf/paper.ts';
 import { trace } from '../pdf/trace.ts';
@@ -17,7 +17,7 @@ function traceRings(paper: Paper, rings: Rings, isClosed: boolean): void {
 }
 
 function setStroke({ doc }: Paper, { ink, width, dash = [] }: Stroke): void {
-  doc.lineWidth(width).lineJoin('round').strokeColor(INKS[ink]);
+  doc.lineWidth(width).lineJoin('round').strokeColor(INK_COLOURS[ink]);
   if (dash.length > 0) doc.addContent(`[${dash.join(' ')}] 0 d`);
 }
 
@@ -28,9 +28,9 @@ function drawShape(paper: Paper, { rings, isClosed, fill, stroke }: Of<'shape'>)
   if (stroke !== undefined) setStroke(paper, stroke);
   traceRings(paper, rings, isClosed);
   if (fill === undefined) doc.stroke();
-  else if (stroke === undefined) doc.fill(INKS[fill], 'even-odd');
+  else if (stroke === undefined) doc.fill(INK_COLOURS[fill], 'even-odd');
   else {
-    doc.fill(INKS[fill], 'even-odd');
+    doc.fill(INK_COLOURS[fill], 'even-odd');
     traceRings(paper, rings, isClosed);
     doc.stroke();
   }
@@ -40,7 +40,7 @@ function drawShape(paper: Paper, { rings, isClosed, fill, stroke }: Of<'shape'>)
 function drawWords(paper: Paper, mark: Of<'words'>): void {
   const { at, size, isStrong = false, ink = 'ink', anchor = 'start', along } = mark;
   const weight = isStrong ? 'strong' : 'regular';
-  const look = { size: size / POINTS_PER_MM, weight, ink: INKS[ink] } as const;
+  const look = { size: size / POINTS_PER_MM, weight, ink: INK_COLOURS[ink] } as const;
   const line = lineOf(paper, mark.words, look);
   const from = -SHARES[anchor] * line.width;
   const [x, y] = at;

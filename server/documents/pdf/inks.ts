@@ -16,7 +16,4 @@ export const INKS = {
   bandLine: '#53677c',
   buildingEdge: '#a2977f',
   paper: '#ffffff',
-  street: '#d9d0bd',
-  park: '#d9e2c2',
-  water: '#d3e0e1',
 } as const;
