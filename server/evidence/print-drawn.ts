@@ -48,7 +48,7 @@ export async function printDrawn(printing: Printing): Promise<number> {
     await onSheet(all.length, all.length);
     return await sheets.close();
   } catch (error) {
-    sheets.giveUp();
+    await sheets.giveUp();
     throw error;
   }
 }

@@ -15,7 +15,8 @@ export type OpenSheets = {
   readonly add: (sheet: Sheet) => Promise<void>;
   /** Ends the document once all of it is on the disk; how many sheets it has. */
   readonly close: () => Promise<number>;
-  readonly giveUp: () => void;
+  /** Leaves what there is; resolves when the file is closed and may be removed. */
+  readonly giveUp: () => Promise<void>;
 };
 
 /** Opens a document of sheets in a new file; each sheet leaves memory when the next one comes. */
@@ -45,9 +46,10 @@ export function openSheets(file: string, facts: PaperFacts): OpenSheets {
       await whole;
       return count;
     },
-    giveUp: () => {
+    giveUp: async () => {
       doc.unpipe(stream);
       stream.destroy();
+      await whole.catch(() => undefined);
     },
   };
 }
