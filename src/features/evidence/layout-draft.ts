@@ -36,9 +36,21 @@ export function newDraft([east, north]: readonly [number, number]): LayoutDraft 
   return {
     ...{ kind: 'plan', paper: 'A3', denominator: '1250' },
     ...{ east: String(Math.round(east)), north: String(Math.round(north)) },
-    content: { shows: 'central', names: 'references', contours: true, line: true, background: true },
+    content: {
+      shows: 'central',
+      names: 'references',
+      contours: true,
+      line: true,
+      background: true,
+    },
     ...{ from: '0', to: '', overlap: '20' },
-    ...{ exaggeration: '1', settlementExaggeration: '100', isLong: true, across: '', halfWidth: '60' },
+    ...{
+      exaggeration: '1',
+      settlementExaggeration: '100',
+      isLong: true,
+      across: '',
+      halfWidth: '60',
+    },
     ...{ rows: 'affected', fields: NO_FIELDS },
   };
 }

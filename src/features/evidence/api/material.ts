@@ -1,6 +1,9 @@
 import { keepPreviousData, queryOptions } from '@tanstack/react-query';
 import type { Box } from '../../../../shared/geometry/bounding-box.ts';
-import { aboutSheetsSchema, planMaterialSchema } from '../../../../shared/schemas/evidence-material.ts';
+import {
+  aboutSheetsSchema,
+  planMaterialSchema,
+} from '../../../../shared/schemas/evidence-material.ts';
 import { apiGet } from '../../../lib/api-client.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 import { runQuery } from '../../runs/api/get-run.ts';
@@ -10,7 +13,11 @@ export function aboutQuery(schemeId: string, runId: string) {
   return queryOptions({
     queryKey: [...runQuery(schemeId, runId).queryKey, 'evidence'],
     queryFn: ({ signal }) =>
-      apiGet(apiPath`/api/schemes/${schemeId}/runs/${runId}/evidence/about`, aboutSheetsSchema, signal),
+      apiGet(
+        apiPath`/api/schemes/${schemeId}/runs/${runId}/evidence/about`,
+        aboutSheetsSchema,
+        signal,
+      ),
     staleTime: Infinity,
   });
 }

@@ -1,0 +1,74 @@
+import { PAPER_NAMES } from '../../../../shared/schemas/evidence.ts';
+import { Segments } from '../../../components/ui/segments.tsx';
+import { Select } from '../../../components/ui/select.tsx';
+import { chosen, KINDS, ROWS, SCALES } from '../evidence-words.ts';
+import { DraftField, type DraftProps } from './draft-field.tsx';
+
+const PAPERS = PAPER_NAMES.map((value) => ({ value, label: value }));
+
+function Scale({ draft, faults, onChange }: DraftProps) {
+  return (
+    <div>
+      <DraftField {...{ draft, faults, onChange }} name="denominator" label="Scale 1 :" />
+      <div className="mt-1 flex flex-wrap gap-x-3 text-small">
+        {SCALES.map((scale) => (
+          <button
+            key={scale}
+            type="button"
+            className="min-h-6 underline max-sm:min-h-11"
+            onClick={() => {
+              onChange({ denominator: scale });
+            }}
+          >
+            1 : {scale}
+          </button>
+        ))}
+      </div>
+    </div>
+  );
+}
+
+/** What is printed, on which paper and to which scale. */
+export function SheetFields(props: DraftProps) {
+  const { draft, faults, onChange } = props;
+  const isSchedule = draft.kind === 'schedule';
+  return (
+    <div className="grid gap-3">
+      <Segments
+        label="What is printed"
+        segments={KINDS}
+        value={draft.kind}
+        onChange={(kind) => {
+          // a table of A1 is nobody's
+          const isLarge = draft.paper === 'A1' || draft.paper === 'A0';
+          onChange(kind === 'schedule' && isLarge ? { kind, paper: 'A3' } : { kind });
+        }}
+      />
+      <div className="grid grid-cols-2 items-start gap-3">
+        <Select
+          label="Paper"
+          options={isSchedule ? PAPERS.slice(0, 2) : PAPERS}
+          value={draft.paper}
+          error={faults.paper}
+          onChange={({ target }) => {
+            const paper = chosen(PAPERS, target.value);
+            if (paper !== undefined) onChange({ paper });
+          }}
+        />
+        {isSchedule ? (
+          <Select
+            label="Buildings"
+            options={ROWS}
+            value={draft.rows}
+            onChange={({ target }) => {
+              const rows = chosen(ROWS, target.value);
+              if (rows !== undefined) onChange({ rows });
+            }}
+          />
+        ) : (
+          <Scale {...props} />
+        )}
+      </div>
+    </div>
+  );
+}

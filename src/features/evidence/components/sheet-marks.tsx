@@ -1,0 +1,129 @@
+import { memo, useId } from 'react';
+import { INK_COLOURS } from '../../../../shared/evidence/ink-colours.ts';
+import type { Mark, Spot, Tone } from '../../../../shared/evidence/marks.ts';
+import { DAMAGE, HATCH_TILE } from '../../../../shared/presentation/damage-style.ts';
+import {
+  SETTLEMENT_TINTS,
+  STAGE_TINTS,
+  type Tint,
+} from '../../../../shared/presentation/ground-tints.ts';
+import { CATEGORIES } from '../../../../shared/damage/categories.ts';
+import { HatchPatterns, hatchFill } from '../../../components/ui/hatch-patterns.tsx';
+
+const MM_PER_POINT = 25.4 / 72;
+/** The side of a hatch tile on paper, in mm. */
+const HATCH_MM = 2.1;
+const EDGE_OF_TINT = '#53677c';
+
+type Of<Kind extends Mark['kind']> = Extract<Mark, { kind: Kind }>;
+
+function ringPath(ring: readonly Spot[], isClosed: boolean): string {
+  const points = ring.map(([x, y]) => `${x.toFixed(2)} ${y.toFixed(2)}`);
+  return points.length === 0 ? '' : `M${points.join('L')}${isClosed ? 'Z' : ''}`;
+}
+
+function pathOf(rings: readonly (readonly Spot[])[], isClosed: boolean): string {
+  return rings.map((ring) => ringPath(ring, isClosed)).join('');
+}
+
+function tintOf(tints: readonly Tint[], number: number): string {
+  return tints.find(([one]) => one === number)?.[1] ?? INK_COLOURS.paper;
+}
+
+function lookOf({ by, number }: Tone, prefix: string): { fill: string; edge: string } {
+  if (by === 'stage') return { fill: tintOf(STAGE_TINTS, number), edge: EDGE_OF_TINT };
+  if (by === 'settlement') return { fill: tintOf(SETTLEMENT_TINTS, number), edge: EDGE_OF_TINT };
+  const category = CATEGORIES[number]?.category ?? 0;
+  return { fill: hatchFill(prefix, category), edge: DAMAGE[category].edge };
+}
+
+function Toned({ mark: { tone, rings }, prefix }: { mark: Of<'toned'>; prefix: string }) {
+  const { fill, edge } = lookOf(tone, prefix);
+  return (
+    <path d={pathOf(rings, true)} fillRule="evenodd" fill={fill} stroke={edge} strokeWidth={0.2} />
+  );
+}
+
+function Shape({ mark: { rings, isClosed, fill, stroke } }: { mark: Of<'shape'> }) {
+  return (
+    <path
+      d={pathOf(rings, isClosed)}
+      fillRule="evenodd"
+      fill={fill === undefined ? 'none' : INK_COLOURS[fill]}
+      stroke={stroke === undefined ? 'none' : INK_COLOURS[stroke.ink]}
+      strokeWidth={stroke?.width}
+      strokeDasharray={stroke?.dash?.join(' ')}
+      strokeLinejoin="round"
+    />
+  );
+}
+
+function Words({ mark }: { mark: Of<'words'> }) {
+  const [x, y] = mark.at;
+  const [c, s] = mark.along ?? [1, 0];
+  return (
+    <text
+      transform={`matrix(${c} ${s} ${-s} ${c} ${x} ${y})`}
+      fontSize={mark.size * MM_PER_POINT}
+      fontWeight={mark.isStrong === true ? 600 : 400}
+      textAnchor={mark.anchor ?? 'start'}
+      fill={INK_COLOURS[mark.ink ?? 'ink']}
+    >
+      {mark.words}
+    </text>
+  );
+}
+
+type WithinProps = { readonly mark: Of<'within'>; readonly prefix: string; readonly shift: Spot };
+
+function Within({ mark: { window, marks }, prefix, shift: [dx, dy] }: WithinProps) {
+  const id = useId();
+  const { left, top, right, bottom } = window;
+  return (
+    <g clipPath={`url(#${id})`}>
+      <clipPath id={id}>
+        <rect x={left} y={top} width={right - left} height={bottom - top} />
+      </clipPath>
+      <g transform={dx === 0 && dy === 0 ? undefined : `translate(${dx} ${dy})`}>
+        <Marks marks={marks} prefix={prefix} />
+      </g>
+    </g>
+  );
+}
+
+const NOT_MOVED: Spot = [0, 0];
+
+const Marks = memo(function Marks({
+  marks,
+  prefix,
+  shift = NOT_MOVED,
+}: {
+  readonly marks: readonly Mark[];
+  readonly prefix: string;
+  readonly shift?: Spot;
+}) {
+  return marks.map((mark, k) => {
+    if (mark.kind === 'toned') return <Toned key={k} {...{ mark, prefix }} />;
+    if (mark.kind === 'words') return <Words key={k} mark={mark} />;
+    if (mark.kind === 'shape') return <Shape key={k} mark={mark} />;
+    // what the frame of a plan shows comes first
+    return <Within key={k} {...{ mark, prefix }} shift={k === 0 ? shift : NOT_MOVED} />;
+  });
+});
+
+/** The marks of a sheet inside an SVG whose units are mm; the map of a plan may be moved in its frame. */
+export function SheetMarks({
+  marks,
+  shift,
+}: {
+  readonly marks: readonly Mark[];
+  readonly shift: Spot;
+}) {
+  const prefix = `sheet${useId()}`;
+  return (
+    <>
+      <HatchPatterns prefix={prefix} scale={HATCH_MM / HATCH_TILE} />
+      <Marks {...{ marks, prefix, shift }} />
+    </>
+  );
+}
