@@ -10,11 +10,14 @@ import { registerOf } from '../../server/register/register-of.ts';
 import type { Services } from '../../server/services.ts';
 import { RESULT_COLUMN_NAMES } from '../../shared/schemas/result-columns.ts';
 import { benchDecisions } from './decisions.ts';
+import { benchPrint } from './evidence.ts';
 import { untilLookedAfter } from './looked-after.ts';
 import { benchPages, type NamedFilter } from './register-pages.ts';
 import { townToRun } from './town-to-run.ts';
 
 const SIZES = [2000, 20_000, 100_000] as const;
+/** The size of town that plans are printed of. */
+const PRINTED = 20_000;
 
 const FOUND: readonly NamedFilter[] = [
   ['stage 3', { any: { stage: ['3'] } }],
@@ -61,6 +64,7 @@ async function benchSize(services: Services, count: number): Promise<void> {
     const megabytes = (peak / 1e6).toFixed(0);
     say(count, `${name} ${whole.toFixed(1)} s, ${toStart.toFixed(1)} s of it taking the register down; process ${megabytes} MB`); // prettier-ignore
     if (name === 'second') continue;
+    if (count === PRINTED) await benchPrint(services, scheme, id);
     say(count, await wallsWorkedOut(services, id));
     const reading = performance.now();
     const text = await findMapText(services.database, id);

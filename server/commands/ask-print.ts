@@ -25,7 +25,7 @@ async function refuseBadLayout(layout: EvidenceLayout, runId: string): Promise<v
 /** Asks for a print of a complete run: it is drawn beside requests. */
 export async function askPrint(
   { database, env, jobs }: Pick<Services, 'database' | 'env' | 'jobs'>,
-  by: Actor,
+  by: Pick<Actor, 'id'> | null,
   scheme: Scheme,
   { runId, name, layout }: z.infer<typeof newPrintSchema> & { readonly runId: string },
 ): Promise<string> {
@@ -35,7 +35,11 @@ export async function askPrint(
   const id = randomUUID();
   await database.transaction(async (transaction) => {
     await lockScheme(scheme, transaction);
-    await insertPrint(database, { id, schemeId, runId, name, layout, by: by.id }, transaction);
+    await insertPrint(
+      database,
+      { id, schemeId, runId, name, layout, by: by?.id ?? null },
+      transaction,
+    );
     const subject = { kind: 'print', id };
     const change = { by, schemeId, action: 'ask for print', subject };
     await recordChange({ ...change, after: { name, run: number, layout } }, transaction);

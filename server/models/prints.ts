@@ -37,7 +37,7 @@ export async function insertPrint(
     readonly runId: string;
     readonly name: string;
     readonly layout: EvidenceLayout;
-    readonly by: string;
+    readonly by: string | null;
   },
   transaction: Transaction,
 ): Promise<void> {

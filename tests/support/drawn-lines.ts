@@ -13,7 +13,7 @@ function contentsOf(pdf: Uint8Array): string[] {
       const from = index + head.length;
       return inflateSync(bytes.subarray(from, from + length)).toString('latin1');
     })
-    .filter((content) => / cm\n/.test(content));
+    .filter((content) => content.includes(' cm\n'));
 }
 
 function product(m: Matrix, n: Matrix): Matrix {

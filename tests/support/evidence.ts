@@ -19,6 +19,17 @@ export function aPlan(centre: [number, number]): Extract<EvidenceLayout, { kind:
   };
 }
 
+type Strip = Extract<EvidenceLayout, { kind: 'strip' }>;
+
+/** Plans at 1 : 500 on A3 along the whole of the line. */
+export function aStrip(overrides: Partial<Strip> = {}): Strip {
+  const { content } = aPlan([0, 0]);
+  return {
+    ...{ kind: 'strip', paper: 'A3', denominator: 500, fields: FIELDS, content },
+    ...{ from: 0, to: null, overlap: 10, ...overrides },
+  };
+}
+
 /** A schedule of all buildings. */
 export function aSchedule(): EvidenceLayout {
   return { kind: 'schedule', paper: 'A4', fields: FIELDS, rows: 'all' };

@@ -1,14 +1,20 @@
 import { readdirSync } from 'node:fs';
 import { expect, test } from 'vitest';
+import { askPrint } from '../../../server/commands/ask-print.ts';
+import { keptPrint } from '../../../server/commands/kept-print.ts';
 import { Building } from '../../../server/models/building.ts';
 import { RegisterImport } from '../../../server/models/register-import.ts';
+import { aPlan } from '../../support/evidence.ts';
 import { aMember, aScheme } from '../../support/factories.ts';
 import { geojson, houses } from '../../support/import-files.ts';
 import { importSession } from '../../support/import-session.ts';
+import { E, N } from '../../support/register.ts';
+import { aRun, aTownToRun } from '../../support/runs.ts';
 import { signIn } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
 
-const { app, services } = testApp({ threads: true });
+const started = testApp({ threads: true });
+const { app, services } = started;
 
 async function begin() {
   const scheme = await aScheme();
@@ -42,4 +48,13 @@ test('cancelling ends the thread, wherever it is, and leaves nothing', async () 
   expect((await RegisterImport.findByPk(again.id))?.state).toBe('cancelled');
   expect(await Building.count({ where: { schemeId: scheme.id } })).toBe(0);
   expect(readdirSync(services().env.UPLOADS_FOLDER)).toEqual([]);
+});
+
+test('a print is drawn in a thread', async () => {
+  const { scheme, option } = await aTownToRun();
+  const { id: runId } = await aRun(started, scheme, option);
+  const asked = { runId, name: 'Quay', layout: aPlan([E, N]) };
+  const id = await askPrint(services(), null, scheme, asked);
+  await services().jobs.idle();
+  expect(await keptPrint(services().database, scheme.id, id)).toMatchObject({ state: 'done' });
 });

@@ -20,7 +20,7 @@ import type { Scheme } from '../../../server/models/scheme.ts';
 import { RunState } from '../../../server/models/run-state.ts';
 import { toLonLat } from '../../../server/crs/to-lon-lat.ts';
 import { crsOfScheme } from '../../../server/crs/crs-of-scheme.ts';
-import { aPlan, aSchedule } from '../../support/evidence.ts';
+import { aPlan, aSchedule, aStrip } from '../../support/evidence.ts';
 import { aMember, anAdministrator, aPerson, aScheme } from '../../support/factories.ts';
 import { bookmarksOfPdf, factsOfPdf } from '../../support/pdf-tools.ts';
 import { E, N } from '../../support/register.ts';
@@ -165,8 +165,7 @@ describe('a print', () => {
 
   test('is refused where its layout makes no sheets, and a schedule for now', async () => {
     const { agent, prints, base } = await begin();
-    const { centre: _, ...plan } = PLAN;
-    const strip = { ...plan, kind: 'strip', from: 5000, to: null, overlap: 10 };
+    const strip = aStrip({ from: 5000 });
     for (const [layout, path] of [
       [strip, 'layout.from'],
       [aSchedule(), 'layout.kind'],
@@ -206,8 +205,7 @@ describe('a print', () => {
 
   test('that is being drawn is stopped', async () => {
     const { agent, base, prints } = await begin();
-    const { centre: _, ...plan } = PLAN;
-    const long = { ...plan, kind: 'strip', denominator: 50, from: 0, to: null, overlap: 1 };
+    const long = aStrip({ denominator: 50, overlap: 1 });
     const asked = await agent.post(prints).send({ name: 'A', layout: long });
     const { id } = printSchema.parse(asked.body);
     const answer = await agent.post(`${base}/prints/${id}/cancel`).send({});
