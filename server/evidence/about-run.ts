@@ -11,7 +11,7 @@ export async function aboutRun(
   { database }: Pick<Services, 'database'>,
   scheme: Scheme,
   runId: string,
-): Promise<Omit<AboutSheets, 'fields' | 'printedAt'>> {
+): Promise<Omit<AboutSheets, 'fields'>> {
   await findCompleteRun(database, scheme.id, runId);
   const run = await runDetail({ database }, scheme.id, runId);
   const { code, name, definition } = await crsOfScheme(scheme);

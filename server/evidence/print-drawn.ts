@@ -13,8 +13,6 @@ async function aboutPrint({ database, scheme, print }: Printing): Promise<AboutS
   return {
     ...(await aboutRun({ database }, scheme, print.runId)),
     fields: print.layout.fields,
-    // not when it is drawn: done again after a stop it is the same to the byte
-    printedAt: print.askedAt.toISOString(),
   };
 }
 

@@ -17,9 +17,9 @@ export type Sheet = {
 
 /**
  * What every sheet of a print says of itself: the scheme, the run behind it, the fields of its title block,
- * when it was printed, and the water that its key plan stands on.
+ * and the water that its key plan stands on.
  *
- * Units: as the parts; `printedAt` in ISO 8601. Valid: a complete run. Source: [own].
+ * Units: as the parts. Valid: a complete run. Source: [own].
  */
 export type AboutSheets = {
   readonly scheme: {
@@ -28,6 +28,5 @@ export type AboutSheets = {
   };
   readonly run: RunDetail;
   readonly fields: TitleFields;
-  readonly printedAt: string;
   readonly keyGround: readonly PlanBackground[];
 };

@@ -1,6 +1,7 @@
 import type { SchemeAnswer } from '../../shared/schemas/schemes.ts';
 import type { Destination } from '../components/layout/go-to.tsx';
 import {
+  evidencePath,
   homePath,
   measuresPath,
   ownersPath,
@@ -45,6 +46,7 @@ export function schemeLinks(scheme: SchemeAnswer): readonly Link[] {
     ...(can(scheme, 'readDecisions') ? [{ to: measuresPath(scheme.id), label: 'Measures' }] : []),
     ...(can(scheme, 'recordVisits') ? [{ to: visitsPath(scheme.id), label: 'Visits' }] : []),
     ...(can(scheme, 'readUndertakings') ? [{ to: ownersPath(scheme.id), label: 'Owners' }] : []),
+    ...(can(scheme, 'readEvidence') ? [{ to: evidencePath(scheme.id), label: 'Evidence' }] : []),
     { to: settingsPath(scheme.id), label: can(scheme, 'readRules') ? 'Settings' : 'Description' },
   ];
 }

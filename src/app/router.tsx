@@ -190,6 +190,12 @@ const ofScheme: RouteObject[] = [
       Component: (await import('../features/measures/measures-page.tsx')).MeasuresPage,
     }),
   },
+  {
+    path: 'evidence',
+    lazy: async () => ({
+      Component: (await import('../features/evidence/evidence-page.tsx')).EvidencePage,
+    }),
+  },
   { path: 'visits', lazy: async () => ({ Component: (await visitPages()).VisitsPage }) },
   {
     path: 'register/imports',

@@ -50,6 +50,11 @@ export function sheetPath(schemeId: string, buildingId: number, runId?: string):
   return runId === undefined ? path : `${path}?run=${runId}`;
 }
 
+/** Plans, sections and schedules on paper. */
+export function evidencePath(schemeId: string): string {
+  return `${schemePath(schemeId)}/evidence`;
+}
+
 /** What protects buildings. */
 export function measuresPath(schemeId: string): string {
   return `${schemePath(schemeId)}/measures`;

@@ -47,5 +47,7 @@ export function shortFingerprint(fingerprint: string): string {
 
 /** How large a file is. */
 export function sizeWords(bytes: number): string {
-  return bytes < 1e6 ? `${Math.max(1, Math.round(bytes / 1e3))} kB` : `${(bytes / 1e6).toFixed(1)} MB`;
+  return bytes < 1e6
+    ? `${Math.max(1, Math.round(bytes / 1e3))} kB`
+    : `${(bytes / 1e6).toFixed(1)} MB`;
 }

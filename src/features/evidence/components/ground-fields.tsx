@@ -25,10 +25,20 @@ function Sections(props: DraftProps) {
         }}
       />
       <div className={PAIR}>
-        <DraftField {...props} name="across" label="Sections across at chainages" hint="In m, with commas between." />
+        <DraftField
+          {...props}
+          name="across"
+          label="Sections across at chainages"
+          hint="In m, with commas between."
+        />
         <DraftField {...props} name="halfWidth" label="To either side" unit="m" />
         <DraftField {...props} name="exaggeration" label="Levels drawn" unit="times" />
-        <DraftField {...props} name="settlementExaggeration" label="Settlement drawn" unit="times" />
+        <DraftField
+          {...props}
+          name="settlementExaggeration"
+          label="Settlement drawn"
+          unit="times"
+        />
       </div>
     </>
   );

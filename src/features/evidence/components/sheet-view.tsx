@@ -25,9 +25,9 @@ export function SheetView({ sheet, isTrueSize, onMove }: SheetViewProps) {
       viewBox={`0 0 ${width} ${height}`}
       style={isTrueSize ? { width: `${width}mm` } : undefined}
       className={classNames(
-        'block border border-rule bg-paper-print shadow-lift',
+        'block border border-rule bg-sheet shadow-lift',
         isTrueSize ? 'max-w-none' : 'w-full',
-        onMove !== null && 'cursor-grab touch-none active:cursor-grabbing',
+        onMove !== null && 'cursor-grab active:cursor-grabbing sm:touch-none',
       )}
     >
       <SheetMarks marks={marks} shift={shift} />

@@ -45,7 +45,7 @@ function RevisionRow({ revision, index, faults, onChange }: RevisionRowProps) {
           label={label}
           type={name === 'date' ? 'date' : 'text'}
           maxLength={EVIDENCE_LIMITS.words}
-          frameClassName={name === 'change' ? 'col-span-2' : undefined}
+          frameClassName={name === 'change' ? 'col-span-2' : ''}
           value={revision[name]}
           error={faults[`fields.revisions.${index}.${name}`]}
           onChange={({ target }) => {
@@ -81,7 +81,7 @@ export function TitleFields({ draft: { fields }, faults, onChange }: DraftProps)
             label={label}
             type={name === 'issued' ? 'date' : 'text'}
             maxLength={EVIDENCE_LIMITS.words}
-            frameClassName={name === 'title' || name === 'subtitle' ? 'col-span-2' : undefined}
+            frameClassName={name === 'title' || name === 'subtitle' ? 'col-span-2' : ''}
             value={fields[name]}
             error={faults[`fields.${name}`]}
             onChange={({ target }) => {

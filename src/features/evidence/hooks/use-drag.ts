@@ -45,7 +45,7 @@ export function useDrag(width: number, onMove: ((by: Spot) => void) | null) {
       },
       onKeyDown: (event: KeyboardEvent) => {
         const by = ARROWS[event.key];
-        if (by === undefined) return;
+        if (by === undefined || event.altKey || event.ctrlKey || event.metaKey) return;
         event.preventDefault();
         onMove(by);
       },

@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { useDeferredValue, useMemo, useState } from 'react';
+import { useDeferredValue, useMemo } from 'react';
 import { boxOfSheet } from '../../../../shared/evidence/box-of-sheet.ts';
 import { drawnSheets } from '../../../../shared/evidence/drawn-sheets.ts';
 import { lineOnGround } from '../../../../shared/evidence/line-on-ground.ts';
@@ -9,9 +9,9 @@ import { MethodError } from '../../../../shared/method-error.ts';
 import type { DrawnLayout, EvidenceLayout } from '../../../../shared/schemas/evidence.ts';
 import { materialQuery } from '../api/material.ts';
 import type { Faults } from '../layout-draft.ts';
-import { screenMeasure } from '../measure.ts';
+import { screenMeasure, sheetFonts } from '../measure.ts';
 
-type About = Omit<AboutSheets, 'fields' | 'printedAt'>;
+type About = Omit<AboutSheets, 'fields'>;
 type Planned = { readonly sheets: readonly PlannedSheet[]; readonly faults: Faults };
 
 const NOTHING: Planned = { sheets: [], faults: {} };
@@ -42,7 +42,9 @@ export function useSheets(
     () => (about === undefined || !isDrawn(layout) ? NOTHING : plan(layout, about)),
     [about, layout],
   );
-  const [measure] = useState(screenMeasure);
+  const fonts = useQuery({ queryKey: ['sheet fonts'], queryFn: sheetFonts, staleTime: Infinity });
+  const hasFonts = fonts.isFetched;
+  const measure = useMemo(() => (hasFonts ? screenMeasure() : null), [hasFonts]);
   const one = planned.sheets[Math.min(wanted, planned.sheets.length) - 1];
   const box = useMemo(
     () =>
@@ -58,9 +60,9 @@ export function useSheets(
   });
   const material = found.data?.material;
   const drawn = useMemo((): readonly Sheet[] => {
-    if (about === undefined || one === undefined || material === undefined || layout === null)
-      return [];
-    const words = { ...about, fields: layout.fields, printedAt: new Date().toISOString() };
+    if (about === undefined || one === undefined || material === undefined) return [];
+    if (layout === null || measure === null) return [];
+    const words = { ...about, fields: layout.fields };
     return drawnSheets(one, planned.sheets, material, words, measure);
   }, [about, one, material, layout, planned, measure]);
   return {

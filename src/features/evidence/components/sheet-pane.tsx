@@ -1,0 +1,89 @@
+import { useState } from 'react';
+import { Button } from '../../../components/ui/button.tsx';
+import { EmptyState } from '../../../components/ui/empty-state.tsx';
+import { QueryError } from '../../../components/ui/query-error.tsx';
+import { Segments } from '../../../components/ui/segments.tsx';
+import type { EvidenceDesk } from '../hooks/use-evidence-desk.ts';
+import { SheetView } from './sheet-view.tsx';
+
+const SIZES = [
+  { value: 'whole', label: 'Whole sheet' },
+  { value: 'true', label: 'True size' },
+] as const;
+
+type Size = (typeof SIZES)[number]['value'];
+
+function Turning({ number, setNumber, sheets: { count } }: EvidenceDesk) {
+  if (count < 2) return null;
+  return (
+    <div role="group" aria-label="Sheet" className="flex items-center gap-2 text-small">
+      <Button
+        kind="quiet"
+        disabled={number === 1}
+        onClick={() => {
+          setNumber(number - 1);
+        }}
+      >
+        Previous
+      </Button>
+      <span aria-live="polite">
+        Sheet <b>{number}</b> of {count}
+      </span>
+      <Button
+        kind="quiet"
+        disabled={number === count}
+        onClick={() => {
+          setNumber(number + 1);
+        }}
+      >
+        Next
+      </Button>
+    </div>
+  );
+}
+
+/** Why there is nothing to see; null where there is. */
+function absence({ layout, faults, sheets }: EvidenceDesk): string | null {
+  if (layout?.kind === 'schedule') {
+    return 'A schedule is a table over as many pages as it needs. Print it to see it.';
+  }
+  if (Object.keys(faults).length > 0) return 'Mend what is marked to see the sheet.';
+  return sheets.drawn.length === 0 ? 'The sheet is being drawn.' : null;
+}
+
+/** One sheet as it will be printed, with the lists behind it. */
+export function SheetPane({ desk }: { readonly desk: EvidenceDesk }) {
+  const [size, setSize] = useState<Size>('whole');
+  const { sheets, move } = desk;
+  if (sheets.error !== null) {
+    return (
+      <QueryError what="What stands on the sheet" error={sheets.error} onRetry={sheets.retry} />
+    );
+  }
+  const words = absence(desk);
+  if (words !== null) return <EmptyState>{words}</EmptyState>;
+  return (
+    <div className="grid gap-2">
+      <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
+        <Segments label="How large" segments={SIZES} value={size} onChange={setSize} />
+        <Turning {...desk} />
+        {move !== null && (
+          <span className="text-cap text-ink-3">Drag the sheet to move its frame.</span>
+        )}
+        {sheets.isStale && (
+          <span className="appear-late text-cap text-ink-3">Drawing it anew.</span>
+        )}
+      </div>
+      <div className="grid gap-4 overflow-auto">
+        {sheets.drawn.map((sheet, k) => (
+          <SheetView
+            key={k}
+            sheet={sheet}
+            isTrueSize={size === 'true'}
+            onMove={k === 0 ? move : null}
+          />
+        ))}
+      </div>
+    </div>
+  );
+}
