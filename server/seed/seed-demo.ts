@@ -19,6 +19,7 @@ import {
 import { writeLetterSettings } from './demo-letter-settings.ts';
 import { giveOwnerAHouse } from './owner-of-house.ts';
 import { readTown } from './read-town.ts';
+import { writeBackground } from './write-background.ts';
 import { dayOf } from '../days.ts';
 
 /** Any number; who holds its lock looks whether the demo is there, and fills it in. */
@@ -92,6 +93,7 @@ async function fill(townFolder: string, transaction: Transaction): Promise<void>
   const cause = { kind: 'import', by: null, source: 'The demo town' } as const;
   const created = readTown(townFolder);
   await changeRegister(scheme.sequelize, scheme, cause, { created }, transaction);
+  await writeBackground(scheme, townFolder, transaction);
   await writeLetterSettings(scheme, administrator, transaction);
   for (const owner of owners) await giveOwnerAHouse(scheme, owner, created, transaction);
   for (const option of DEMO_ALIGNMENTS) {

@@ -47,11 +47,15 @@ function schemeTiles(
 
 /** What the map shows of a scheme as it stands. */
 export function planOfScheme(sources: PlanSources): MapPlan {
-  const { extent, hasBackground } = sources;
+  const { extent, scheme } = sources;
+  const basemap = basemapTiles(sources);
+  // the demo's ground came with it and is under its map already; what somebody brought in lies over it
+  const isBroughtIn = basemap === null || scheme.backgroundVersion > 0;
+  const hasBackground = sources.hasBackground && isBroughtIn;
   const [, south, , north] = extent.bounds;
   return {
     latitude: (south + north) / 2,
-    basemap: basemapTiles(sources),
+    basemap,
     background: hasBackground ? schemeTiles(sources, 'background', null) : null,
     buildings:
       extent.from === 'buildings' ? schemeTiles(sources, 'buildings', extent.bounds) : null,
