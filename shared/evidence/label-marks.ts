@@ -1,3 +1,4 @@
+import { planDistance } from '../geometry/plan-distance.ts';
 import { CATEGORY_SIZE, NAME_SIZE } from './building-labels.ts';
 import { CHAINAGE_SIZE } from './chainage-marks.ts';
 import { CONTOUR_SIZE } from './contour-labels.ts';
@@ -32,6 +33,9 @@ function ground(box: LabelBox, isFramed: boolean): Mark {
   };
 }
 
+/** A place so near to the words that no line has to lead to it, in mm. */
+const NEAR = 2.5;
+
 /** Where a straight line from a place to the middle of an upright box meets its side; null from inside. */
 function meets({ middle, halfWide, halfTall }: LabelBox, [x, y]: Spot): Spot | null {
   const [dx, dy] = [x - middle[0], y - middle[1]];
@@ -49,8 +53,9 @@ function meets({ middle, halfWide, halfTall }: LabelBox, [x, y]: Spot): Spot | n
  */
 export function leadMarks(box: LabelBox, words: string, to: Spot, size: number): Mark[] {
   const from = box.along[0] === 1 ? meets(box, to) : null;
-  const lead = from === null ? [] : [lineMark([from, to], LEADER)];
-  return [...lead, ground(box, from !== null), wordsIn(box, words, { size })];
+  const isLed = from !== null && planDistance(from, to) > NEAR;
+  const lead = isLed ? [lineMark([from, to], LEADER)] : [];
+  return [...lead, ground(box, isLed), wordsIn(box, words, { size })];
 }
 
 /**

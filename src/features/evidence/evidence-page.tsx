@@ -1,9 +1,7 @@
 import { Link } from 'react-router-dom';
 import { Content } from '../../components/layout/content.tsx';
 import { PageTitle } from '../../components/layout/page-title.tsx';
-import { Button } from '../../components/ui/button.tsx';
 import { EmptyState } from '../../components/ui/empty-state.tsx';
-import { MutationError } from '../../components/ui/mutation-error.tsx';
 import { Panel } from '../../components/ui/panel.tsx';
 import { QueryError } from '../../components/ui/query-error.tsx';
 import { Select } from '../../components/ui/select.tsx';
@@ -13,10 +11,10 @@ import { runName } from '../../../shared/presentation/run-words.ts';
 import { formatMoment } from '../../lib/format-date.ts';
 import { can } from '../schemes/can.ts';
 import { useScheme } from '../schemes/scheme-context.ts';
-import { useAskPrint } from './api/prints.ts';
 import { ContentFields } from './components/content-fields.tsx';
 import { GroundFields } from './components/ground-fields.tsx';
 import { LayoutBar } from './components/layout-bar.tsx';
+import { PrintButton } from './components/print-button.tsx';
 import { PrintList } from './components/print-list.tsx';
 import { SheetFields } from './components/sheet-fields.tsx';
 import { SheetPane } from './components/sheet-pane.tsx';
@@ -36,30 +34,6 @@ function RunChoice({ runs: { runs = [], run, chooseRun } }: EvidenceDesk) {
         chooseRun(target.value);
       }}
     />
-  );
-}
-
-function PrintButton({ desk }: { readonly desk: EvidenceDesk }) {
-  const { schemeId, layout, faults, runs, writing } = desk;
-  const ask = useAskPrint(schemeId);
-  const { run } = runs;
-  if (layout === null || run === null || Object.keys(faults).length > 0) return null;
-  const { title, subtitle } = layout.fields;
-  const name = [writing.kept?.name ?? title, subtitle].filter((one) => one !== '').join(', ');
-  return (
-    <div className="grid gap-2">
-      <Button
-        kind="main"
-        className="justify-self-start"
-        busy={ask.isPending}
-        onClick={() => {
-          ask.mutate({ runId: run.id, name: name.slice(0, 80) || 'Evidence', layout });
-        }}
-      >
-        Print
-      </Button>
-      <MutationError failed="Nothing is printed." error={ask.error} />
-    </div>
   );
 }
 

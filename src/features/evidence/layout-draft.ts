@@ -26,8 +26,29 @@ export type LayoutDraft = {
   readonly fields: TitleFields;
 };
 
+/** What layouts are called until somebody says otherwise. */
+const TITLES: Readonly<Record<EvidenceLayout['kind'], string>> = {
+  plan: 'Buildings by damage category',
+  strip: 'Buildings by damage category',
+  sections: 'Sections',
+  schedule: 'Building schedule',
+};
+
+/** The same layout of another kind; a title that nobody wrote goes with it. */
+export function ofKind(draft: LayoutDraft, kind: EvidenceLayout['kind']): Partial<LayoutDraft> {
+  const { fields, paper } = draft;
+  const isOurs = fields.title === TITLES[draft.kind];
+  // a table of A1 is nobody's
+  const isTooLarge = kind === 'schedule' && (paper === 'A1' || paper === 'A0');
+  return {
+    kind,
+    ...(isOurs && { fields: { ...fields, title: TITLES[kind] } }),
+    ...(isTooLarge && { paper: 'A3' }),
+  };
+}
+
 const NO_FIELDS: TitleFields = {
-  ...{ title: 'Buildings by damage category', subtitle: '', number: '' },
+  ...{ title: TITLES.plan, subtitle: '', number: '' },
   ...{ prepared: '', checked: '', approved: '', issued: '', revisions: [] },
 };
 

@@ -2,6 +2,7 @@ import { PAPER_NAMES } from '../../../../shared/schemas/evidence.ts';
 import { Segments } from '../../../components/ui/segments.tsx';
 import { Select } from '../../../components/ui/select.tsx';
 import { chosen, KINDS, ROWS, SCALES } from '../evidence-words.ts';
+import { ofKind } from '../layout-draft.ts';
 import { DraftField, type DraftProps } from './draft-field.tsx';
 
 const PAPERS = PAPER_NAMES.map((value) => ({ value, label: value }));
@@ -34,16 +35,16 @@ export function SheetFields(props: DraftProps) {
   const isSchedule = draft.kind === 'schedule';
   return (
     <div className="grid gap-3">
-      <Segments
-        label="What is printed"
-        segments={KINDS}
-        value={draft.kind}
-        onChange={(kind) => {
-          // a table of A1 is nobody's
-          const isLarge = draft.paper === 'A1' || draft.paper === 'A0';
-          onChange(kind === 'schedule' && isLarge ? { kind, paper: 'A3' } : { kind });
-        }}
-      />
+      <div>
+        <Segments
+          label="What is printed"
+          segments={KINDS}
+          value={draft.kind}
+          onChange={(kind) => {
+            onChange(ofKind(draft, kind));
+          }}
+        />
+      </div>
       <div className="grid grid-cols-2 items-start gap-3">
         <Select
           label="Paper"
