@@ -86,13 +86,13 @@ export const REFERENCES = {
     title: 'Monotone piecewise cubic interpolation',
     where: 'SIAM Journal on Numerical Analysis 17(2), 238–246',
   },
-  'iso-216-2007': {
+  'iso-paper-2007': {
     authors: 'International Organization for Standardization',
     year: 2007,
     title: 'Writing paper and certain classes of printed matter: trimmed sizes, A and B series',
     where: 'ISO 216',
   },
-  'iso-7200-2004': {
+  'iso-title-blocks-2004': {
     authors: 'International Organization for Standardization',
     year: 2004,
     title: 'Technical product documentation: data fields in title blocks and document headers',

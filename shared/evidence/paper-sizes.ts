@@ -4,7 +4,7 @@ import type { Rectangle } from './marks.ts';
 /**
  * The papers that sheets are made for, lying.
  *
- * Units: mm. Valid: read only. Source: iso-216-2007.
+ * Units: mm. Valid: read only. Source: iso-paper-2007.
  */
 export const PAPERS = {
   A4: { width: 297, height: 210 },
@@ -16,7 +16,7 @@ export const PAPERS = {
 /**
  * A paper by its name.
  *
- * Units: none. Valid: of PAPERS. Source: iso-216-2007.
+ * Units: none. Valid: of PAPERS. Source: iso-paper-2007.
  */
 export type PaperName = (typeof PAPER_NAMES)[number];
 

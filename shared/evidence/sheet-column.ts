@@ -20,7 +20,7 @@ export function columnPen({ column, scale }: SheetLayout, measure: Measure): Col
 /**
  * The revision table.
  *
- * Units: mm. Valid: none where there is no revision. Source: iso-7200-2004.
+ * Units: mm. Valid: none where there is no revision. Source: iso-title-blocks-2004.
  */
 export function revisionPart(pen: ColumnPen, { revisions }: TitleFields): ColumnPart[] {
   if (revisions.length === 0) return [];

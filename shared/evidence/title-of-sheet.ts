@@ -16,7 +16,7 @@ function denominatorOf({ what }: PlannedSheet): number {
 /**
  * The title block of a sheet, its fields as they were written and the rest from the run and the sheet.
  *
- * Units: none. Valid: any sheet; `part` names a sheet of the list behind it. Source: iso-7200-2004.
+ * Units: none. Valid: any sheet; `part` names a sheet of the list behind it. Source: iso-title-blocks-2004.
  */
 export function titleOfSheet(
   planned: PlannedSheet,

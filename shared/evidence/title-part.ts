@@ -7,7 +7,7 @@ import { fitted } from './wrapped.ts';
  * checked and approved it, when it was issued, its kind and scale. What is not known yet is empty, and
  * stays to be filled in.
  *
- * Units: none. Valid: plain words. Source: iso-7200-2004, from memory.
+ * Units: none. Valid: plain words. Source: iso-title-blocks-2004, from memory.
  */
 export type TitleBlock = {
   readonly owner: string;

@@ -20,7 +20,7 @@ export const EVIDENCE_LIMITS = {
 /**
  * The papers of sheets, by name.
  *
- * Units: none. Valid: closed list. Source: iso-216-2007.
+ * Units: none. Valid: closed list. Source: iso-paper-2007.
  */
 export const PAPER_NAMES = ['A4', 'A3', 'A1', 'A0'] as const;
 
@@ -54,7 +54,7 @@ export const revisionSchema = z.strictObject({
 /**
  * The fields of a title block that people write; what is empty stays to be filled in by hand.
  *
- * Units: none. Valid: plain words of one line. Source: iso-7200-2004.
+ * Units: none. Valid: plain words of one line. Source: iso-title-blocks-2004.
  */
 export const titleFieldsSchema = z.strictObject({
   title: words,
@@ -70,7 +70,7 @@ export const titleFieldsSchema = z.strictObject({
 /**
  * The fields of a title block.
  *
- * Units: none. Valid: parsed by titleFieldsSchema. Source: iso-7200-2004.
+ * Units: none. Valid: parsed by titleFieldsSchema. Source: iso-title-blocks-2004.
  */
 export type TitleFields = z.infer<typeof titleFieldsSchema>;
 
