@@ -16,9 +16,9 @@ export const INK_COLOURS: Readonly<Record<Ink, string>> = {
   band: '#b9c4cf',
   buildingEdge: '#a2977f',
   paper: '#ffffff',
-  street: '#f1eee5',
+  street: '#f7f5ee',
   streetEdge: '#dcd6c8',
-  park: '#eff2e6',
-  water: '#e6eef0',
+  park: '#f5f7ef',
+  water: '#f1f6f7',
   waterEdge: '#a9bfc4',
 };

@@ -1,4 +1,5 @@
 import { boundingBox, type Box } from '../geometry/bounding-box.ts';
+import { planDistance } from '../geometry/plan-distance.ts';
 import type { PlanPoint } from '../geometry/point.ts';
 import type { ColumnPart, ColumnPen } from './column-part.ts';
 import { backgroundMarks } from './background-marks.ts';
@@ -10,6 +11,8 @@ import type { PlannedSheet } from './planned-sheets.ts';
 /** How high a key plan is on A3, and what stays free round what it shows, in mm. */
 const [TALL, MARGIN] = [27, 2.5];
 const NUMBER = 6.5;
+/** A neighbour has its number where its frame is so wide on the key plan, in mm. */
+const WIDE = 7;
 
 /** The frames of the plans among some sheets, by number. */
 function framesOf(all: readonly PlannedSheet[]): { number: number; frame: GroundFrame }[] {
@@ -38,17 +41,17 @@ function sheetMarks(
     (frame.window.left + frame.window.right) / 2,
     (frame.window.top + frame.window.bottom) / 2,
   ])); // prettier-ignore
-  return [
-    {
-      ...{ kind: 'shape', rings: [ring], isClosed: true },
-      ...(isThis && { fill: 'band' }),
-      stroke: { ink: 'ink', width: isThis ? 0.5 : 0.2 },
-    },
-    {
-      ...{ kind: 'words', words: String(number), at: [x, y + 0.8], size: NUMBER, anchor: 'middle' },
-      isStrong: isThis,
-    },
-  ];
+  const [first, second] = ring;
+  const isWide = first !== undefined && second !== undefined && planDistance(first, second) >= WIDE;
+  const outline: Mark = {
+    ...{ kind: 'shape', rings: [ring], isClosed: true },
+    ...(isThis && { fill: 'band' }),
+    stroke: { ink: 'ink', width: isThis ? 0.5 : 0.2 },
+  };
+  if (!isThis && !isWide) return [outline];
+  const words = String(number);
+  const look = { size: NUMBER, isStrong: isThis, anchor: 'middle' } as const;
+  return [outline, { kind: 'words', words, at: [x, y + 0.8], ...look }];
 }
 
 type Key = {
