@@ -3,7 +3,6 @@ import type { z } from 'zod';
 import { plannedSheets } from '../../shared/evidence/planned-sheets.ts';
 import type { EvidenceLayout, newPrintSchema } from '../../shared/schemas/evidence.ts';
 import { printFile } from '../evidence/print-file.ts';
-import { refuseUnprintable } from '../evidence/printers.ts';
 import { insertPrint } from '../models/prints.ts';
 import { Run } from '../models/run.ts';
 import type { Scheme } from '../models/scheme.ts';
@@ -16,7 +15,6 @@ import { refusingBadValues } from './refuse-bad-design.ts';
 
 /** Refuses a layout that makes no sheets of the run's line. */
 async function refuseBadLayout(layout: EvidenceLayout, runId: string): Promise<void> {
-  refuseUnprintable(layout);
   if (layout.kind === 'schedule') return;
   const { design } = await Run.findByPk(runId, { rejectOnEmpty: true });
   refusingBadValues('layout', () => plannedSheets(layout, design));

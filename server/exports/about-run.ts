@@ -28,6 +28,7 @@ const MEANINGS: ExportAbout = [
     'Breakpoint',
     `The factor on all central volume losses at which the category that leads on is reached; empty where it is not up to a volume loss of ${percentFromRatio(LARGEST_VOLUME_LOSS)} %. The reserve is what it is over 1.`,
   ],
+  ['Decision', 'For the option, as it stood when this was exported; later than the run.'],
   [
     'Assumed',
     `What nobody gave: founded ${ASSUMED.foundingDepth} m below ground, ${ASSUMED.storeys} storeys, ${ASSUMED.storeyHeight} m a storey to the eaves, E/G ${ASSUMED.eOverG}, Poisson’s ratio ${ASSUMED.poisson}, the ground level beside the nearest drive. Where only the construction is known, E/G and Poisson’s ratio follow from it.`,

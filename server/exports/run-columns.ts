@@ -1,5 +1,6 @@
 import { BRACKET_INPUTS } from '../../shared/assessment/sensitivity.ts';
 import { CATEGORIES } from '../../shared/damage/categories.ts';
+import { standingWords } from '../../shared/presentation/decision-words.ts';
 import {
   BUILDING_FIELD_NAMES,
   BUILDING_FIELDS,
@@ -40,15 +41,15 @@ function list(words: readonly string[]): string | null {
   return words.length === 0 ? null : words.join('; ');
 }
 
-type FigureName = {
+export type FigureName = {
   [K in keyof RunResult]: RunResult[K] extends number | null ? K : never;
 }[keyof RunResult];
 
 /** Where a building stands is known whatever could not be worked out of it. */
 const KNOWN_ALWAYS: ReadonlySet<FigureName> = new Set(['stage', 'chainage', 'offset']);
 
-/** The record keeps noughts of what could not be worked out. */
-function recorded(result: RunResult, name: FigureName): number | null {
+/** A figure of the record, which keeps noughts of what could not be worked out. */
+export function recorded(result: RunResult, name: FigureName): number | null {
   return result.fault !== null && !KNOWN_ALWAYS.has(name) ? null : result[name];
 }
 
@@ -91,7 +92,7 @@ function yesOrNo(
 
 const { stage, chainage, offset, strain, settlement, slope, breakpoint, reserve } = RESULT_VALUES;
 
-/** What a file says of each building of a run: what the run took of it, then all that it found. */
+/** What a file says of each building of a run: what the run took of it, all that it found, and what is decided now. */
 export const RUN_COLUMNS: readonly Column[] = [
   plain('reference', { label: 'Reference', kind: 'text' }, ({ facts }) => facts.reference),
   ...BUILDING_FIELD_NAMES.map(fact),
@@ -128,4 +129,5 @@ export const RUN_COLUMNS: readonly Column[] = [
   ),
   text('Warnings', 'warnings', ({ warnings }) => list(warnings)),
   text('Not worked out', 'fault', ({ fault }) => fault),
+  plain('decision', { label: 'Decision', kind: 'text' }, ({ now }) => standingWords(now)),
 ];

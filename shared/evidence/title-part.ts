@@ -1,4 +1,11 @@
-import { lineHeight, stacked, wordsPart, type ColumnPart, type ColumnPen } from './column-part.ts';
+import {
+  lineHeight,
+  printSize,
+  stacked,
+  wordsPart,
+  type ColumnPart,
+  type ColumnPen,
+} from './column-part.ts';
 import { lineMark, type Mark } from './marks.ts';
 import { fitted } from './wrapped.ts';
 
@@ -28,7 +35,9 @@ export type TitleBlock = {
 
 const RULE = { ink: 'rule', width: 0.18 } as const;
 const HEAVY = { ink: 'ink', width: 0.25 } as const;
-const COLUMNS = 4;
+
+/** How much of a lying title block is titles, and round them in mm. */
+const [TITLES, STRIP_PAD, STRIP_GAP] = [0.42, 3, 1];
 
 /** One row of cells, each with what it holds over the words. */
 function cellRow(
@@ -36,7 +45,7 @@ function cellRow(
   cells: readonly (readonly [name: string, words: string])[],
   pad: number,
 ): ColumnPart {
-  const wide = (width + 2 * pad) / COLUMNS;
+  const wide = (width + 2 * pad) / cells.length;
   const height = 8.6 * scale;
   const look = { size: 8.5 * scale, isStrong: true };
   return {
@@ -59,6 +68,42 @@ function cellRow(
       });
       return [lineMark([[left, y], [left + width + 2 * pad, y]], HEAVY), ...sides, ...words]; // prettier-ignore
     },
+  };
+}
+
+/**
+ * A title block that lies at the foot of a sheet of a list: titles at the left, fields at the right. It has no
+ * scale, and its rules begin at its own sides.
+ *
+ * Units: mm. Valid: any fields. Source: as TitleBlock.
+ */
+export function titleStrip(pen: ColumnPen, block: TitleBlock): ColumnPart {
+  const left = TITLES * pen.width;
+  const right = { ...pen, width: pen.width - left };
+  const line = (words: string, size: number, isStrong: boolean) => {
+    const narrow = { ...pen, width: left - 2 * STRIP_PAD };
+    const look = { size: printSize(size, pen.scale), isStrong };
+    return wordsPart(narrow, fitted(words, narrow.width, pen.measure, look), { size, isStrong });
+  };
+  const names = stacked([
+    line(block.owner, 8.5, true),
+    line(block.title, 11, true),
+    line(block.subtitle, 7.5, false),
+  ]);
+  const rows = [
+    [['Drawing', block.number], ['Revision', block.revision], [`Sheet, ${block.paper}`, block.sheet], ['Kind', block.kind], ['Run', block.run]],
+    [['Prepared', block.prepared], ['Checked', block.checked], ['Approved', block.approved], ['Issued', block.issued], ['Language', 'en']],
+  ] as const; // prettier-ignore
+  const fields = stacked(rows.map((row) => cellRow(right, row, 0)));
+  const height = Math.max(names.height + 2 * STRIP_GAP, fields.height);
+  return {
+    height,
+    marks: ([x, y]) => [
+      lineMark([[x, y], [x + pen.width, y]], HEAVY), // prettier-ignore
+      lineMark([[x + left, y], [x + left, y + height]], RULE), // prettier-ignore
+      ...names.marks([x + STRIP_PAD, y + STRIP_GAP]),
+      ...fields.marks([x + left, y]),
+    ],
   };
 }
 

@@ -30,7 +30,9 @@ export function aStrip(overrides: Partial<Strip> = {}): Strip {
   };
 }
 
-/** A schedule of all buildings. */
-export function aSchedule(): EvidenceLayout {
-  return { kind: 'schedule', paper: 'A4', fields: FIELDS, rows: 'all' };
+type Schedule = Extract<EvidenceLayout, { kind: 'schedule' }>;
+
+/** A schedule of all buildings on A4. */
+export function aSchedule(overrides: Partial<Schedule> = {}): Schedule {
+  return { kind: 'schedule', paper: 'A4', fields: FIELDS, rows: 'all', ...overrides };
 }

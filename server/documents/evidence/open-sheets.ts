@@ -1,11 +1,8 @@
-import { once } from 'node:events';
-import { createWriteStream } from 'node:fs';
-import { finished } from 'node:stream/promises';
-import { setImmediate } from 'node:timers/promises';
 import type { Measure } from '../../../shared/evidence/marks.ts';
 import type { Sheet } from '../../../shared/evidence/sheet.ts';
 import { POINTS_PER_MM } from '../pdf/page-sizes.ts';
-import { openPaper, type PaperFacts } from '../pdf/paper.ts';
+import { openPaperFile } from '../pdf/paper-file.ts';
+import type { PaperFacts } from '../pdf/paper.ts';
 import { drawMarks } from './draw-marks.ts';
 import { openMeasure } from './measure.ts';
 
@@ -21,15 +18,11 @@ export type OpenSheets = {
 
 /** Opens a document of sheets in a new file; each sheet leaves memory when the next one comes. */
 export function openSheets(file: string, facts: PaperFacts): OpenSheets {
-  const paper = openPaper({ ...facts, isKept: false });
+  const { paper, settle, close, giveUp } = openPaperFile(file, facts);
   const { doc } = paper;
-  const stream = createWriteStream(file, { flags: 'wx', mode: 0o600, flush: true });
-  const whole = finished(stream);
-  // a fault is told to whoever waits for the end; until then nobody may be waiting
-  whole.catch(() => undefined);
-  doc.pipe(stream);
   let count = 0;
   return {
+    giveUp,
     measure: openMeasure(paper),
     add: async ({ name, width, height, marks }) => {
       const [across, down] = [width * POINTS_PER_MM, height * POINTS_PER_MM];
@@ -37,19 +30,11 @@ export function openSheets(file: string, facts: PaperFacts): OpenSheets {
       doc.outline.addItem(name);
       drawMarks(paper, { left: 0, top: 0, right: width, bottom: height }, marks);
       count += 1;
-      if (stream.writableNeedDrain) await Promise.race([once(stream, 'drain'), whole]);
-      // what the document holds goes on to the file between the turns
-      await setImmediate();
+      await settle();
     },
     close: async () => {
-      doc.end();
-      await whole;
+      await close();
       return count;
-    },
-    giveUp: async () => {
-      doc.unpipe(stream);
-      stream.destroy();
-      await whole.catch(() => undefined);
     },
   };
 }

@@ -6,11 +6,14 @@ type Area = { readonly left: number; readonly top: number; readonly bottom: numb
 export class Flow {
   readonly #area: Area;
   readonly #addPage: () => void;
+  readonly #isDrawn: boolean;
   #y: number;
 
-  constructor(area: Area, addPage: () => void) {
+  /** What is not drawn only takes its room, so that pages can be counted before there are any. */
+  constructor(area: Area, addPage: () => void, isDrawn = true) {
     this.#area = area;
     this.#addPage = addPage;
+    this.#isDrawn = isDrawn;
     this.#y = area.top;
     addPage();
   }
@@ -32,7 +35,7 @@ export class Flow {
 
   put(block: Block): void {
     if (!this.hasRoom(block.height)) this.turn();
-    block.draw(this.#area.left, this.#y);
+    if (this.#isDrawn) block.draw(this.#area.left, this.#y);
     this.#y += block.height;
   }
 

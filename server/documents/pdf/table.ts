@@ -19,10 +19,12 @@ export type TableRow = { readonly cells: readonly Words[]; readonly isMarked?: b
 type TableOptions = { readonly size?: number };
 
 const [SIZE, HEADING_SIZE] = [8, 7];
-const [PAD, BETWEEN] = [2.2, 8];
+const PAD = 2.2;
+/** Between columns. */
+export const BETWEEN_COLUMNS = 8;
 
 function widthOf(columns: readonly TableColumn[]): number {
-  return columns.reduce((sum, { width }) => sum + width + BETWEEN, -BETWEEN);
+  return columns.reduce((sum, { width }) => sum + width + BETWEEN_COLUMNS, -BETWEEN_COLUMNS);
 }
 
 function cells(
@@ -35,7 +37,7 @@ function cells(
   const blocks = columns.map(({ width, align = 'left' }, k) => {
     const block = wordsBlock(paper, words[k] ?? '', width, { ...look, align });
     const placed = { at, block };
-    at += width + BETWEEN;
+    at += width + BETWEEN_COLUMNS;
     return placed;
   });
   return beside(blocks);
@@ -87,17 +89,19 @@ export function tableBlock(
   return stack([headOf(paper, columns), ...rows.map((row) => rowOf(paper, columns, row, options))]);
 }
 
-/** A table that may go on over pages, with its heads on each; a row is never cut. */
-export function flowTable(
+/**
+ * Begins a table that may go on over pages, with its heads on each; a row is never cut. What it gives puts
+ * the next row.
+ */
+export function beginTable(
   flow: Flow,
   paper: Paper,
   columns: readonly TableColumn[],
-  rows: readonly TableRow[],
   options: TableOptions = {},
-): void {
+): (row: TableRow) => void {
   const head = headOf(paper, columns);
   let isHeaded = false;
-  for (const row of rows) {
+  return (row) => {
     const block = rowOf(paper, columns, row, options);
     const needed = block.height + (isHeaded ? 0 : head.height);
     if (!flow.hasRoom(needed)) {
@@ -107,5 +111,16 @@ export function flowTable(
     if (!isHeaded) flow.put(head);
     isHeaded = true;
     flow.put(block);
-  }
+  };
+}
+
+/** A table that may go on over pages, with all its rows. */
+export function flowTable(
+  flow: Flow,
+  paper: Paper,
+  columns: readonly TableColumn[],
+  rows: readonly TableRow[],
+  options: TableOptions = {},
+): void {
+  rows.forEach(beginTable(flow, paper, columns, options));
 }

@@ -1,10 +1,9 @@
 import type { BasisChange } from '../../../shared/assessment/conclusion.ts';
 import type { Category } from '../../../shared/damage/categories.ts';
-import type { Decision, DecisionBasis } from '../../../shared/schemas/decision-answers.ts';
+import type { DecisionBasis } from '../../../shared/schemas/decision-answers.ts';
 import { categoryLabel, percentWords } from '../../../shared/presentation/bracket-words.ts';
 import { slopeWords } from '../../../shared/presentation/slope-words.ts';
 import { millimetresFromMetres } from '../../../shared/units/millimetres-from-metres.ts';
-import { KIND_WORDS } from './standing-words.ts';
 
 type Line = readonly [word: string, value: string];
 
@@ -57,12 +56,6 @@ export function basisLines(basis: DecisionBasis): Line[] {
       : [['Sensitivity', `${sensitivityTotal} with its category`] as const]),
     ['Assumed', assumed.length === 0 ? 'nothing' : countWords(assumed.length)],
   ];
-}
-
-/** What was decided, in a few words. */
-export function decisionTitle({ kind, category }: Pick<Decision, 'kind' | 'category'>): string {
-  if (kind !== 'adopt a category') return KIND_WORDS[kind];
-  return `Category ${labelOf(category)} adopted`;
 }
 
 const CHANGED: Readonly<Record<BasisChange['what'], string>> = {

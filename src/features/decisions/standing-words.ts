@@ -1,4 +1,4 @@
-import { STANDINGS, type DecisionKind, type Standing } from '../../../shared/schemas/decisions.ts';
+import { STANDINGS, type Standing } from '../../../shared/schemas/decisions.ts';
 import type { State } from '../../components/ui/state-mark.tsx';
 
 /** The shape and the word of each state of the assessors' list. */
@@ -15,13 +15,3 @@ export const STANDING_MARKS: Readonly<
 export function isStanding(text: string): text is Standing {
   return STANDINGS.some((standing) => standing === text);
 }
-
-/** What a decision is, as a heading or a cell says it. */
-export const KIND_WORDS: Readonly<Record<DecisionKind, string>> = {
-  'let go at stage 1': 'Let go at stage 1',
-  'let go at stage 2': 'Let go at stage 2',
-  'go to stage 3': 'Go to stage 3',
-  'adopt a category': 'Adopt a category',
-  'protective measures': 'Protective measures',
-  'no measures': 'No measures',
-};

@@ -8,7 +8,7 @@ import {
 import { Button } from '../../../components/ui/button.tsx';
 import { Select } from '../../../components/ui/select.tsx';
 import { TextArea } from '../../../components/ui/text-area.tsx';
-import { KIND_WORDS } from '../standing-words.ts';
+import { KIND_WORDS } from '../../../../shared/presentation/decision-words.ts';
 
 /** What is to be decided, as it is written in the form. */
 export type Proposal = {

@@ -11,7 +11,7 @@ import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { usePrepareDecisions } from '../api/prepare-decisions.ts';
 import { decisionPreviewQuery } from '../api/preview-decisions.ts';
-import { KIND_WORDS } from '../standing-words.ts';
+import { KIND_WORDS } from '../../../../shared/presentation/decision-words.ts';
 import type { Proposal } from './decide-form.tsx';
 
 type DecideReviewProps = {

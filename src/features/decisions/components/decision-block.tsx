@@ -5,7 +5,8 @@ import { StateMark, type State } from '../../../components/ui/state-mark.tsx';
 import { ValueChanges } from '../../../components/ui/value-changes.tsx';
 import { classNames } from '../../../lib/class-names.ts';
 import { formatMoment } from '../../../lib/format-date.ts';
-import { basisLines, changeLines, decisionTitle } from '../basis-words.ts';
+import { decisionTitle } from '../../../../shared/presentation/decision-words.ts';
+import { basisLines, changeLines } from '../basis-words.ts';
 
 const MARKS: Readonly<Record<Decision['state'], { shape: State; words: string }>> = {
   'waiting for check': { shape: 'waiting', words: 'Waiting for check' },

@@ -1,7 +1,7 @@
 import { formatCount } from '../../../../shared/presentation/format-number.ts';
 import type { WaitingDecisions } from '../../../../shared/schemas/decisions.ts';
 import { Facts } from '../../../components/ui/facts.tsx';
-import { KIND_WORDS } from '../standing-words.ts';
+import { KIND_WORDS } from '../../../../shared/presentation/decision-words.ts';
 
 /** What waits for a check, line by line. */
 export function WaitingFacts({ waiting }: { readonly waiting: WaitingDecisions }) {

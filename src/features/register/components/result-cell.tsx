@@ -2,7 +2,7 @@ import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import type { RegisterRow } from '../../../../shared/schemas/register.ts';
 import type { ResultColumn } from '../../../../shared/schemas/result-columns.ts';
 import { DamageChip } from '../../../components/ui/damage-chip.tsx';
-import { resultText } from '../result-text.ts';
+import { resultText } from '../../../../shared/presentation/result-text.ts';
 
 /** Why there is no figure. */
 function noneWords({ stage }: RegisterRow): string {
