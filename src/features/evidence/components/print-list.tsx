@@ -83,10 +83,11 @@ export function PrintList({ schemeId }: { readonly schemeId: string }) {
   if (error !== null && data === undefined) {
     return <QueryError what="The prints" error={error} onRetry={() => void refetch()} />;
   }
-  if (data?.length === 0) return <EmptyState>Nothing has been printed yet.</EmptyState>;
+  if (data === undefined) return null;
+  if (data.length === 0) return <EmptyState>Nothing has been printed yet.</EmptyState>;
   return (
     <ol aria-label="Prints">
-      {data?.map((print) => (
+      {data.map((print) => (
         <li key={print.id} className="grid gap-1 border-b border-hairline py-2">
           <p className="flex flex-wrap items-baseline gap-x-2 text-small">
             <b className="min-w-0 font-semibold break-words">{print.name}</b>
