@@ -34,3 +34,14 @@ export function aStrip(overrides: Partial<Strip> = {}): Strip {
 export function aSchedule(): EvidenceLayout {
   return { kind: 'schedule', paper: 'A4', fields: FIELDS, rows: 'all' };
 }
+
+type Sections = Extract<EvidenceLayout, { kind: 'sections' }>;
+
+/** Sections at 1 : 500 on A3, levels as lengths: unless said otherwise one across the line, 60 m to either side. */
+export function someSections(overrides: Partial<Sections> = {}): Sections {
+  return {
+    ...{ kind: 'sections', paper: 'A3', denominator: 500, fields: FIELDS },
+    ...{ exaggeration: 1, settlementExaggeration: 500 },
+    ...{ isLong: false, across: [500], halfWidth: 60, ...overrides },
+  };
+}
