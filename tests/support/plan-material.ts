@@ -1,4 +1,3 @@
-import type { Measure } from '../../shared/evidence/marks.ts';
 import type { PlanBuilding, PlanMaterial } from '../../shared/evidence/plan-material.ts';
 import type { AboutSheets } from '../../shared/evidence/sheet.ts';
 import type { TitleFields } from '../../shared/schemas/evidence.ts';
@@ -7,8 +6,9 @@ import { aRing } from './register-facts.ts';
 import { aRunDetail } from './run-answers.ts';
 
 /** Words as wide as if all letters were alike: a little wider than those of print. */
-export const evenMeasure: Measure = (words, size, isStrong) =>
-  Array.from(words).length * size * (isStrong ? 0.2 : 0.19);
+export function evenMeasure(words: string, size: number, isStrong: boolean): number {
+  return Array.from(words).length * size * (isStrong ? 0.2 : 0.19);
+}
 
 /** A building of a plan: unless said otherwise 10 by 8 m beside the line, of category 1. */
 export function aPlanBuilding({

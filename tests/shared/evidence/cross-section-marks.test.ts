@@ -41,8 +41,11 @@ function sizeOf(ring: readonly Spot[]) {
   return { wide: right - left, tall: bottom - top, x: (left + right) / 2, y: (top + bottom) / 2 };
 }
 
-const boresIn = (marks: ReturnType<typeof drawn>) =>
-  ringMarks(marks, 0.4).filter((ring) => ring.length === 48).map(sizeOf); // prettier-ignore
+function boresIn(marks: ReturnType<typeof drawn>) {
+  return ringMarks(marks, 0.4)
+    .filter((ring) => ring.length === 48)
+    .map(sizeOf);
+}
 
 describe('crossSectionMarks', () => {
   it('draws a bore at its true size, under the line at its level', () => {

@@ -33,8 +33,9 @@ function drawn(layout: DrawnLayout, material: PlanMaterial = MATERIAL): Sheet[] 
   return all.flatMap((one) => drawnSheets(one, all, material, about, evenMeasure));
 }
 
-const textOf = (sheets: readonly Sheet[]) =>
-  sheets.flatMap(({ marks }) => wordMarks(marks).map(({ words }) => words)).join(' '); // prettier-ignore
+function textOf(sheets: readonly Sheet[]): string {
+  return sheets.flatMap(({ marks }) => wordMarks(marks).map(({ words }) => words)).join(' ');
+}
 
 const LAYOUTS: readonly (readonly [string, DrawnLayout])[] = [
   ...(['A4', 'A3', 'A1', 'A0'] as const).map((paper) => [`a plan on ${paper}`, { ...aPlan([0, 0]), paper }] as const),

@@ -32,7 +32,9 @@ function labelsOf(buildings: PlanBuilding[], more: Partial<typeof content> = {})
   return planLabels(FRAME, aPlanMaterial({ buildings }), about);
 }
 
-const keyOf = ({ kind, words, building }: PlanLabel) => `${kind} ${building?.id ?? ''} ${words}`;
+function keyOf({ kind, words, building }: PlanLabel): string {
+  return `${kind} ${building?.id ?? ''} ${words}`;
+}
 
 describe('planLabels', () => {
   const labels = labelsOf(NARROW);
