@@ -53,21 +53,29 @@ function largestWords({ points }: SectionAcross): string {
   return `largest settlement ${largest('low')} / ${largest('central')} / ${largest('high')} mm low / central / high`;
 }
 
+function titleMarks([x, y]: Spot, section: SectionAcross, measure: Measure): Mark[] {
+  const title = `Section at ${chainageWords(section.chainage)}`;
+  const words = `looking along the line; ${largestWords(section)}`;
+  return [
+    { kind: 'words', words: title, at: [x, y], size: 9, isStrong: true },
+    { kind: 'words', words, at: [x + measure(title, 9, true) + 2, y], size: 7.5 },
+  ];
+}
+
 function sectionMarks(
   panel: SectionPanel,
   section: SectionAcross,
   { depth, halfWidth, material, measure }: Room,
 ): Mark[] {
-  const { chainage, middle, left, groundLevel, points, bores } = section;
+  const { middle, left, groundLevel, points, bores } = section;
   const start = [middle[0] + halfWidth * left[0], middle[1] + halfWidth * left[1]] as const;
   const cut = { start, direction: [-left[0], -left[1]] as const, length: 2 * halfWidth };
   const ticks = niceTicks(-halfWidth, halfWidth, 8);
   const trough = points
     .map(({ offset, settlement }) => ({ distance: -offset, settlement }))
     .reverse();
-  const words = `Section at ${chainageWords(chainage)}, looking along the line; ${largestWords(section)}`;
   return [
-    { kind: 'words', words, at: [panel.left, panel.ground - ABOVE + 5], size: 9, isStrong: true },
+    ...titleMarks([panel.left, panel.ground - ABOVE + 5], section, measure),
     ...levelAxis(panel, groundLevel, depth),
     ...lengthAxis(
       panel,

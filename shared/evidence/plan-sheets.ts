@@ -3,7 +3,6 @@ import { figure, percent } from '../presentation/design-words.ts';
 import { formatCount } from '../presentation/format-number.ts';
 import { percentFromRatio } from '../units/percent-from-ratio.ts';
 import { stacked, wordsPart, type ColumnPart, type ColumnPen } from './column-part.ts';
-import { continuedSheets } from './continued-sheets.ts';
 import { keyPart } from './key-plan.ts';
 import { labelList, numberMarks, type ListedLine } from './label-list.ts';
 import { legendPart } from './legend-part.ts';
@@ -17,6 +16,7 @@ import { frameMarks } from './plan-signs.ts';
 import type { PlannedPlan, PlannedSheet } from './planned-sheets.ts';
 import { noteParts, tableParts } from './rows-part.ts';
 import { columnMarks, columnPen, revisionPart } from './sheet-column.ts';
+import { sheetsBehind } from './sheets-behind.ts';
 import type { AboutSheets, Sheet } from './sheet.ts';
 import { planNotes } from './sheet-notes.ts';
 import { titleOfSheet } from './title-of-sheet.ts';
@@ -161,13 +161,10 @@ export function planSheets(drawn: Drawn): Sheet[] {
     title: titleOfSheet(planned, about, ''),
   });
   const behind = [...column.left.filter((part) => part !== pointer), ...(isShort ? [] : list)];
-  const size = { width: layout.width, height: layout.height };
-  const name = `${about.fields.title || 'Plan'}, sheet ${number}`;
-  const frame = frameMarks(layout.frame, layout.window, layout.column);
-  const lists = continuedSheets(layout.window, pen, behind).map((more, k, { length }): Sheet => {
-    const title = titleOfSheet(planned, about, `, list ${k + 1} of ${length}`);
-    const foot = columnMarks(layout, pen, { always: [], asRoom: [], title });
-    return { name: `${name}, list ${k + 1}`, ...size, marks: [...frame, ...more, ...foot.marks] };
-  });
-  return [{ name, ...size, marks: [...marks, ...frame, ...column.marks] }, ...lists];
+  const sheet = {
+    name: `${about.fields.title || 'Plan'}, sheet ${number}`,
+    ...{ width: layout.width, height: layout.height },
+    marks: [...marks, ...frameMarks(layout.frame, layout.window, layout.column), ...column.marks],
+  };
+  return [sheet, ...sheetsBehind(sheet, { planned, about, pen }, behind)];
 }

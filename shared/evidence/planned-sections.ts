@@ -48,7 +48,7 @@ type Asked = Extract<DrawnLayout, { kind: 'sections' }>;
  *
  * Units: mm. Valid: read only. Source: [own].
  */
-export const [ABOVE, BELOW, ASIDE] = [26, 24, 22] as const;
+export const [ABOVE, BELOW, ASIDE] = [31, 24, 22] as const;
 
 /**
  * How high a section is that shows so much of the ground.

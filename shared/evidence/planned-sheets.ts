@@ -83,6 +83,7 @@ function stripPlans(
     from,
     to: end,
     overlap,
+    most: EVIDENCE_LIMITS.sheets,
   });
   return stretches.map((stretch, k) => ({
     kind: 'plan',
@@ -117,7 +118,7 @@ export function plannedSheets(asked: DrawnLayout, design: AlignmentDesign): Plan
   const layout = sheetLayout(asked.paper);
   const found = whatOf(asked, lineOnGround(design.line), layout, design);
   if (found.length > EVIDENCE_LIMITS.sheets) {
-    const message = `This would take ${found.length} sheets. Print at most ${EVIDENCE_LIMITS.sheets} at a time.`;
+    const message = `This would take more than ${EVIDENCE_LIMITS.sheets} sheets. Print at most so many at a time.`;
     throw new MethodError('outside-range', message, 'denominator');
   }
   return found.map((what, k) => ({ number: k + 1, of: found.length, layout, what }));

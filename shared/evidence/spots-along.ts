@@ -1,34 +1,20 @@
 import { planDistance } from '../geometry/plan-distance.ts';
 import type { LabelBox } from './label-box.ts';
+import { lineOnGround } from './line-on-ground.ts';
 import type { Spot } from './marks.ts';
 
 /** In mm: from one spot to the next, and how far a line may be from straight under a label. */
 const [STEP, SAG] = [4, 0.7];
 
-type Station = { readonly at: Spot; readonly distance: number };
-
-/** Places on a line at even distances. */
-function stationsOf(line: readonly Spot[], step: number): Station[] {
-  const found: Station[] = [];
-  let [passed, next] = [0, step / 2];
-  for (const [k, to] of line.entries()) {
-    const from = line[k - 1];
-    if (from === undefined) continue;
-    const [dx, dy] = [to[0] - from[0], to[1] - from[1]];
-    const long = planDistance(from, to);
-    for (; next <= passed + long; next += step) {
-      const share = (next - passed) / long;
-      found.push({ at: [from[0] + share * dx, from[1] + share * dy], distance: next });
-    }
-    passed += long;
-  }
-  return found;
-}
-
 /** A direction that words can be read in: never from right to left. */
 function readable([x, y]: Spot): Spot {
   const turned = x < -1e-9 || (Math.abs(x) <= 1e-9 && y > 0);
   return turned ? [-x, -y] : [x, y];
+}
+
+/** Whether a piece of a line stays beside words that stand on its middle. */
+function isStraight(piece: readonly Spot[], [x, y]: Spot, [c, s]: Spot): boolean {
+  return piece.every((spot) => Math.abs(c * (spot[1] - y) - s * (spot[0] - x)) <= SAG);
 }
 
 /**
@@ -41,16 +27,19 @@ export function spotsAlong(
   line: readonly Spot[],
   { wide, tall }: { readonly wide: number; readonly tall: number },
 ): { readonly box: LabelBox; readonly distance: number }[] {
-  const stations = stationsOf(line, STEP);
-  const reach = Math.max(1, Math.round(wide / 2 / STEP));
-  return stations.flatMap(({ at, distance }, k) => {
-    const [from, to] = [stations[k - reach], stations[k + reach]];
-    if (from === undefined || to === undefined) return [];
-    const [dx, dy] = [to.at[0] - from.at[0], to.at[1] - from.at[1]];
-    const long = planDistance(from.at, to.at);
-    const sag = Math.abs(dx * (at[1] - from.at[1]) - dy * (at[0] - from.at[0])) / long;
-    if (!(sag <= SAG) || long < 2 * reach * STEP * 0.9) return [];
-    const along = readable([dx / long, dy / long]);
-    return [{ distance, box: { middle: at, halfWide: wide / 2, halfTall: tall / 2, along } }];
+  const apart = line.filter((spot, k) => k === 0 || planDistance(spot, line[k - 1] ?? spot) > 0);
+  if (apart.length < 2) return [];
+  const { length, pointAt, between } = lineOnGround(apart);
+  const count = Math.max(0, Math.floor((length - wide) / STEP) + 1);
+  const first = (length - (count - 1) * STEP) / 2;
+  return Array.from({ length: count }, (_, k) => first + k * STEP).flatMap((distance) => {
+    const middle = pointAt(distance);
+    const piece = between(distance - wide / 2, distance + wide / 2);
+    const [from, to] = [piece[0] ?? middle, piece.at(-1) ?? middle];
+    const long = planDistance(from, to);
+    if (long < 0.9 * wide) return [];
+    const along = readable([(to[0] - from[0]) / long, (to[1] - from[1]) / long]);
+    if (!isStraight(piece, middle, along)) return [];
+    return [{ distance, box: { middle, halfWide: wide / 2, halfTall: tall / 2, along } }];
   });
 }

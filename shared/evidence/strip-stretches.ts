@@ -67,7 +67,7 @@ function longest(line: LineOnGround, from: number, end: number, ground: Ground):
 
 /**
  * Lays a line out on sheets that are turned to it: each shows as much of it as fits, from where the sheet
- * before ends less the overlap.
+ * before ends less the overlap. It stops at one more than the most sheets that may be.
  *
  * Units: m; `wide` and `tall` are the ground that a sheet's window shows. Valid: throws `outside-range` with
  * the field to change where the overlap leaves nothing of a sheet, or the line bends too sharply.
@@ -79,11 +79,12 @@ export function stripStretches(
     from,
     to,
     overlap,
+    most,
     ...ground
-  }: Ground & { readonly from: number; readonly to: number; readonly overlap: number },
+  }: Ground & Readonly<Record<'from' | 'to' | 'overlap' | 'most', number>>,
 ): StripStretch[] {
   const found: StripStretch[] = [];
-  for (let start = from; ;) {
+  for (let start = from; found.length <= most;) {
     const stretch = longest(line, start, to, ground);
     found.push(stretch);
     if (stretch.to >= to) return found;
@@ -96,4 +97,5 @@ export function stripStretches(
     }
     start = stretch.to - overlap;
   }
+  return found;
 }

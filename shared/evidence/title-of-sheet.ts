@@ -16,12 +16,13 @@ function denominatorOf({ what }: PlannedSheet): number {
 /**
  * The title block of a sheet, its fields as they were written and the rest from the run and the sheet.
  *
- * Units: none. Valid: any sheet; `part` names a sheet of the list behind it. Source: iso-title-blocks-2004.
+ * Units: none. Valid: any sheet; `list` says which of the sheets behind it one is.
+ * Source: iso-title-blocks-2004.
  */
 export function titleOfSheet(
   planned: PlannedSheet,
   { scheme, run, fields }: AboutSheets,
-  part: string,
+  list: string,
 ): TitleBlock {
   const { number, of, layout, what } = planned;
   return {
@@ -30,12 +31,13 @@ export function titleOfSheet(
     subtitle: fields.subtitle,
     number: fields.number,
     revision: fields.revisions[0]?.revision ?? '',
-    sheet: `${number} of ${of}${part}`,
+    sheet: `${number} of ${of}`,
     scale: `1 : ${formatCount(denominatorOf(planned))}`,
     paper: layout.paper,
     kind: KINDS[what.kind],
     ...{ prepared: fields.prepared, checked: fields.checked, approved: fields.approved },
     issued: fields.issued,
     run: String(run.number),
+    list,
   };
 }

@@ -11,8 +11,8 @@ import { fitted } from './wrapped.ts';
 
 /**
  * The fields of a title block: whose drawing it is, its number, revision and sheet, titles, who prepared,
- * checked and approved it, when it was issued, its kind and scale. What is not known yet is empty, and
- * stays to be filled in.
+ * checked and approved it, when it was issued, its kind and scale, and which of the lists behind a sheet it
+ * is. What is not known yet is empty, and stays to be filled in.
  *
  * Units: none. Valid: plain words. Source: iso-title-blocks-2004, from memory.
  */
@@ -31,6 +31,7 @@ export type TitleBlock = {
   readonly approved: string;
   readonly issued: string;
   readonly run: string;
+  readonly list: string;
 };
 
 const RULE = { ink: 'rule', width: 0.18 } as const;
@@ -47,7 +48,8 @@ function cellRow(
 ): ColumnPart {
   const wide = (width + 2 * pad) / cells.length;
   const height = 8.6 * scale;
-  const look = { size: 8.5 * scale, isStrong: true };
+  const look = { size: printSize(8.5, scale), isStrong: true };
+  const small = printSize(6.5, scale);
   return {
     height,
     marks: ([x, y]) => {
@@ -55,7 +57,7 @@ function cellRow(
       const words = cells.flatMap(([name, value], k): Mark[] => {
         const at = left + k * wide + 2;
         return [
-          { kind: 'words', words: name, at: [at, y + 3 * scale], size: 6.5 * scale, ink: 'second' },
+          { kind: 'words', words: name, at: [at, y + 3 * scale], size: small, ink: 'second' },
           {
             ...{ kind: 'words', ...look, at: [at, y + 6.9 * scale] },
             words: fitted(value, wide - 3, measure, look),
@@ -117,7 +119,7 @@ export function titlePart(pen: ColumnPen, block: TitleBlock, pad: number): Colum
   const rows = [
     [['Drawing', block.number], ['Revision', block.revision], [`Scale, ${block.paper}`, block.scale], ['Sheet', block.sheet]],
     [['Prepared', block.prepared], ['Checked', block.checked], ['Approved', block.approved], ['Issued', block.issued]],
-    [['Kind', block.kind], ['Run', block.run], ['Language', 'en'], ['', '']],
+    [['Kind', block.kind], ['Run', block.run], ['Language', 'en'], [block.list === '' ? '' : 'List', block.list]],
   ] as const; // prettier-ignore
   const names = stacked(
     [

@@ -36,3 +36,14 @@ type Schedule = Extract<EvidenceLayout, { kind: 'schedule' }>;
 export function aSchedule(overrides: Partial<Schedule> = {}): Schedule {
   return { kind: 'schedule', paper: 'A4', fields: FIELDS, rows: 'all', ...overrides };
 }
+
+type Sections = Extract<EvidenceLayout, { kind: 'sections' }>;
+
+/** Sections at 1 : 500 on A3, levels as lengths: unless said otherwise one across the line, 60 m to either side. */
+export function someSections(overrides: Partial<Sections> = {}): Sections {
+  return {
+    ...{ kind: 'sections', paper: 'A3', denominator: 500, fields: FIELDS },
+    ...{ exaggeration: 1, settlementExaggeration: 500 },
+    ...{ isLong: false, across: [500], halfWidth: 60, ...overrides },
+  };
+}

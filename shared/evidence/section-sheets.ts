@@ -15,6 +15,7 @@ import { ASIDE, depthAt, sectionHeight, type PlannedSection } from './planned-se
 import type { PlannedSheet } from './planned-sheets.ts';
 import { noteParts } from './rows-part.ts';
 import { columnMarks, columnPen, revisionPart } from './sheet-column.ts';
+import { sheetsBehind } from './sheets-behind.ts';
 import { runNotes } from './sheet-notes.ts';
 import type { AboutSheets, Sheet } from './sheet.ts';
 import { titleOfSheet } from './title-of-sheet.ts';
@@ -85,11 +86,11 @@ function legend(pen: ColumnPen): ColumnPart {
 }
 
 /**
- * A sheet of sections.
+ * A sheet of sections, with sheets behind it for notes that found no room in the column.
  *
  * Units: mm. Valid: as `drawnSheets`. Source: [own].
  */
-export function sectionSheet(drawn: Drawn): Sheet {
+export function sectionSheets(drawn: Drawn): Sheet[] {
   const { planned, section, all, about, measure } = drawn;
   const { layout, number } = planned;
   const pen = columnPen(layout, measure);
@@ -103,13 +104,14 @@ export function sectionSheet(drawn: Drawn): Sheet {
     ],
     title: titleOfSheet(planned, about, ''),
   });
-  return {
+  const sheet = {
     name: `${about.fields.title || 'Sections'}, sheet ${number}`,
     ...{ width: layout.width, height: layout.height },
     marks: [
-      { kind: 'within', window: layout.window, marks: drawingOf(drawn) },
+      { kind: 'within' as const, window: layout.window, marks: drawingOf(drawn) },
       ...frameMarks(layout.frame, layout.window, layout.column),
       ...column.marks,
     ],
   };
+  return [sheet, ...sheetsBehind(sheet, { planned, about, pen }, column.left)];
 }
