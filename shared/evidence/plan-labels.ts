@@ -109,10 +109,13 @@ export function planLabels(
     content,
     design,
     measure,
+    kept = [],
   }: {
     readonly content: PlanContent;
     readonly design: AlignmentDesign;
     readonly measure: Measure;
+    /** What else stands on the plan, and is not written over. */
+    readonly kept?: readonly LabelBox[];
   },
 ): PlanLabels {
   const toned = tonedOf(frame, material.buildings, content);
@@ -131,7 +134,7 @@ export function planLabels(
     })),
     ...meant(nameLabels(namesOf(toned, content.names), measure), buildingLabel('name', toned)),
   ];
-  const signs = [northBox(frame), scaleBarBox(frame)].map(labelBoxOf);
+  const signs = [...[northBox(frame), scaleBarBox(frame)].map(labelBoxOf), ...kept];
   const { placed, listed } = placeLabels(frame.window, signs, wanted);
   return { placed, listed, ticks, taken: [...signs, ...placed.map(({ box }) => box)] };
 }

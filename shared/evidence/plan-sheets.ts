@@ -8,7 +8,7 @@ import { labelList, numberMarks, type ListedLine } from './label-list.ts';
 import { legendPart } from './legend-part.ts';
 import { lineOnGround } from './line-on-ground.ts';
 import type { Mark, Measure } from './marks.ts';
-import { matchMarks } from './match-marks.ts';
+import { matchesOnPaper, matchMarks } from './match-marks.ts';
 import { planLabels } from './plan-labels.ts';
 import { groundMarks, signMarks } from './plan-marks.ts';
 import type { PlanBuilding, PlanMaterial } from './plan-material.ts';
@@ -112,13 +112,16 @@ function mapMarks({ planned, plan, material, about, measure }: Drawn): {
   lines: ListedLine[];
 } {
   const { design } = about.run;
-  const { frame, content, matches } = plan;
-  const labels = planLabels(frame, material, { content, design, measure });
+  const { frame, content } = plan;
+  const line = lineOnGround(design.line);
+  const matches = matchesOnPaper(frame, { line, matches: plan.matches, measure });
+  const kept = matches.map(({ box }) => box);
+  const labels = planLabels(frame, material, { content, design, measure, kept });
   const lines = labelList(frame, labels.listed, figureWords(content));
   const marks = [
     ...groundMarks(plan, material, design, labels),
     ...numberMarks(frame, labels, lines, measure),
-    ...matchMarks(frame, lineOnGround(design.line), matches),
+    ...matchMarks(matches),
   ];
   return {
     lines,

@@ -32,7 +32,17 @@ const PAD = 3;
 function stripOf(pen: ColumnPen, { scheme, run, fields, paper }: ScheduleAbout, sheet: string) {
   const { title, subtitle, number, revisions, prepared, checked, approved, issued } = fields;
   return titleStrip(pen, {
-    ...{ owner: scheme.name, title, subtitle, number, sheet, paper, scale: '', kind: 'Schedule' },
+    ...{
+      owner: scheme.name,
+      title,
+      subtitle,
+      number,
+      sheet,
+      paper,
+      scale: '',
+      kind: 'Schedule',
+      list: '',
+    },
     revision: revisions[0]?.revision ?? '',
     ...{ prepared, checked, approved, issued, run: String(run.number) },
   });

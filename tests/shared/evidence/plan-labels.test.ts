@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { groundFrame } from '../../../shared/evidence/ground-frame.ts';
-import { labelsMeet } from '../../../shared/evidence/label-box.ts';
+import { labelBoxOf, labelsMeet, type LabelBox } from '../../../shared/evidence/label-box.ts';
 import { labelList } from '../../../shared/evidence/label-list.ts';
 import { planLabels, type PlanLabel } from '../../../shared/evidence/plan-labels.ts';
 import type { PlanBuilding } from '../../../shared/evidence/plan-material.ts';
@@ -27,9 +27,13 @@ const NARROW: PlanBuilding[] = Array.from({ length: 12 }, (_, row) =>
   })),
 ).flat();
 
-function labelsOf(buildings: PlanBuilding[], more: Partial<typeof content> = {}) {
+function labelsOf(
+  buildings: PlanBuilding[],
+  more: Partial<typeof content> = {},
+  kept: readonly LabelBox[] = [],
+) {
   const about = { content: { ...content, ...more }, design: aDesign(), measure: evenMeasure };
-  return planLabels(FRAME, aPlanMaterial({ buildings }), about);
+  return planLabels(FRAME, aPlanMaterial({ buildings }), { ...about, kept });
 }
 
 function keyOf({ kind, words, building }: PlanLabel): string {
@@ -54,6 +58,13 @@ describe('planLabels', () => {
   it('has the round chainages on the sheet', () => {
     const words = all.flatMap((one) => (one.kind === 'chainage' ? [one.words] : []));
     expect(words).toEqual(['0+350', '0+400', '0+450', '0+500', '0+550', '0+600', '0+650']);
+  });
+
+  it('keeps clear of what else stands on the plan', () => {
+    const kept = labelBoxOf({ left: 100, top: 100, right: 180, bottom: 180 });
+    const { placed } = labelsOf(NARROW, {}, [kept]);
+    expect(labels.placed.some(({ box }) => labelsMeet(box, kept))).toBe(true);
+    expect(placed.some(({ box }) => labelsMeet(box, kept))).toBe(false);
   });
 
   it('lets none lie over another', () => {
