@@ -13,7 +13,10 @@ import { aRunAnswer } from '../../../support/run-answers.ts';
 const ASK = `POST ${EVIDENCE_SCHEME}/runs/${anId(60)}/prints`;
 const PRINTS = `GET ${EVIDENCE_SCHEME}/prints`;
 const DONE = {
-  ...{ state: 'done', done: 1, sheets: 1, bytes: 90_000 },
+  state: 'done',
+  done: 1,
+  sheets: 1,
+  bytes: 90_000,
   fingerprint: '0123456789abcdef'.repeat(4),
 } as const;
 
