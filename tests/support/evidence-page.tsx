@@ -6,7 +6,7 @@ import { anId, aSchemeAnswer } from './answers.ts';
 import { aPlan } from './evidence.ts';
 import { fakeApi } from './fake-api.ts';
 import { renderPage } from './render-page.tsx';
-import { aRunDetail } from './run-answers.ts';
+import { aRunAnswer, aRunDetail } from './run-answers.ts';
 
 export const EVIDENCE_SCHEME = `/api/schemes/${anId(10)}`;
 const RUN = `${EVIDENCE_SCHEME}/runs/${anId(60)}`;
@@ -61,14 +61,12 @@ type Shown = {
 /** The page of evidence of a scheme with one run, for who may prepare it unless said otherwise. */
 export function showEvidence({ answers = {}, abilities = { prepareEvidence: true } }: Shown = {}) {
   withoutFonts();
-  const run = aRunDetail();
-  const { design: _design, rules: _rules, counts: _counts, ...listed } = run;
   const api = fakeApi({
     'GET /api/session': undefined,
-    [`GET ${EVIDENCE_SCHEME}/runs`]: [listed],
+    [`GET ${EVIDENCE_SCHEME}/runs`]: [aRunAnswer()],
     [`GET ${RUN}/evidence/about`]: {
       scheme: { name: 'Port Dogger crossing', crs: { code: 32631, name: 'UTM zone 31N' } },
-      ...{ run, keyGround: [] },
+      ...{ run: aRunDetail(), keyGround: [] },
     },
     [`GET ${RUN}/evidence`]: { material: MATERIAL },
     [`GET ${EVIDENCE_SCHEME}/layouts`]: [],

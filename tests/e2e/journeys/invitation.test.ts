@@ -8,9 +8,12 @@ import { signInAs, signInWith, signOut } from '../drivers/sign-in.ts';
 const PASSWORD = 'a lantern on the mole';
 
 for (const [role, screens] of [
-  ['Designer', ['Plan', 'Register', 'Measures', 'Owners', 'Settings', 'Method']],
-  ['Assessor', ['Plan', 'Register', 'Measures', 'Visits', 'Owners', 'Settings', 'Method']],
-  ['Witness', ['Plan', 'Register', 'Measures', 'Owners', 'Settings', 'Method']],
+  ['Designer', ['Plan', 'Register', 'Measures', 'Owners', 'Evidence', 'Settings', 'Method']],
+  [
+    'Assessor',
+    ['Plan', 'Register', 'Measures', 'Visits', 'Owners', 'Evidence', 'Settings', 'Method'],
+  ],
+  ['Witness', ['Plan', 'Register', 'Measures', 'Owners', 'Evidence', 'Settings', 'Method']],
   ['Owner', ['My building']],
 ] as const) {
   const email = `new-${role.toLowerCase()}@example.org`;

@@ -10,7 +10,7 @@ describe('signing in', () => {
     expect(await tabs(visitor)).toEqual(['Schemes', 'People', 'Audit', 'Mailbox', 'Method']);
     await openScheme(visitor);
     expect(await tabs(visitor)).toEqual([
-      ...['Plan', 'Register', 'Measures', 'Owners', 'Settings', 'Method'],
+      ...['Plan', 'Register', 'Measures', 'Owners', 'Evidence', 'Settings', 'Method'],
     ]);
   });
 

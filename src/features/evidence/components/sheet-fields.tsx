@@ -7,7 +7,8 @@ import { DraftField, type DraftProps } from './draft-field.tsx';
 
 const PAPERS = PAPER_NAMES.map((value) => ({ value, label: value }));
 
-function Scale({ draft, faults, onChange }: DraftProps) {
+/** The scale of what is printed: those in use, or any other. */
+export function ScaleField({ draft, faults, onChange }: DraftProps) {
   return (
     <div>
       <DraftField {...{ draft, faults, onChange }} name="denominator" label="Scale 1 :" />
@@ -67,7 +68,7 @@ export function SheetFields(props: DraftProps) {
             }}
           />
         ) : (
-          <Scale {...props} />
+          <ScaleField {...props} />
         )}
       </div>
     </div>

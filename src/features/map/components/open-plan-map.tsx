@@ -61,7 +61,7 @@ export function OpenPlanMap(props: PlanMapProps & { readonly map: MapLibreMap })
   const missed = useMissedTiles(map);
   const controller = useController(map, missed, plan, marks);
   const { isBusy, hasGaps, fetchAgain } = useMapState(map, missed);
-  const handle = useMemo(() => handleOfMap(map), [map]);
+  const handle = useMemo(() => handleOfMap(map, projection), [map, projection]);
   const giveHandle = useEffectEvent(props.onHandle);
   useGridCrosses(map, controller, projection);
   useDrawnLine(controller, projection, props.line, props.section);

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { BasisLine } from '../../../components/layout/basis-line.tsx';
 import type { CrsAnswer } from '../../../../shared/schemas/crs.ts';
 import type { RunAnswer } from '../../../../shared/schemas/runs.ts';
@@ -20,11 +21,13 @@ type PlanBasisProps = {
   readonly line?: PlanLine;
   /** What of its run is shown. */
   readonly view?: RunView;
+  /** A way to print what is shown of its run. */
+  readonly print?: ReactNode;
   /** Whose results stand in the register. */
   readonly results?: RunAnswer | undefined;
 };
 
-function lineParts(line: PlanLine) {
+function lineParts(line: PlanLine, print: ReactNode) {
   const { editor, options, design } = line;
   const name = editor.isEditing && (
     <b key="option">{editor.base?.name ?? 'New option'}, being changed</b>
@@ -33,12 +36,15 @@ function lineParts(line: PlanLine) {
   const first = name === false ? menu : name;
   return [
     ...(first === false ? [] : [first]),
-    ...runParts(line),
+    ...runParts(line, print),
     ...(design === null ? [] : designParts(design)),
   ];
 }
 
-function runParts({ runs, run, recorded, chooseRun, option, schemeId }: PlanLine) {
+function runParts(
+  { runs, run, recorded, chooseRun, option, schemeId }: PlanLine,
+  print: ReactNode,
+) {
   if (completeOf(runs).length === 0 || (run === null && option === null)) return [];
   const menu = <RunMenu key="run" runs={runs} shown={run} onChoose={chooseRun} />;
   const { detail } = recorded;
@@ -48,6 +54,7 @@ function runParts({ runs, run, recorded, chooseRun, option, schemeId }: PlanLine
         menu,
         <RunInputs key="inputs" {...{ schemeId }} run={detail} />,
         <RunExport key="export" {...{ schemeId }} run={detail} />,
+        ...(print === undefined ? [] : [print]),
       ];
 }
 
@@ -80,7 +87,7 @@ function resultsWords(run: RunAnswer): string {
 }
 
 /** What the plan rests on: the option of the line and its values, its run or the register, and the grid. */
-export function PlanBasis({ scheme, crs, line, view, results }: PlanBasisProps) {
+export function PlanBasis({ scheme, crs, line, view, print, results }: PlanBasisProps) {
   const grid = crs === undefined ? `EPSG:${scheme.crs}` : `${crs.name}, EPSG:${crs.code}`;
   const isPreview = line?.isPreview === true;
   const isRecorded = line !== undefined && line.recorded.record !== null;
@@ -88,7 +95,7 @@ export function PlanBasis({ scheme, crs, line, view, results }: PlanBasisProps) 
     <BasisLine
       preview={isPreview || line?.editor.isEditing === true}
       parts={[
-        ...(line === undefined ? [] : lineParts(line)),
+        ...(line === undefined ? [] : lineParts(line, print)),
         ...(isRecorded ? [] : [<b key="register">Register as it stands</b>]),
         ...(results === undefined ? [] : [`Results of ${resultsWords(results)}`]),
         ...(isPreview || isRecorded ? [] : [`Grid ${grid}`]),

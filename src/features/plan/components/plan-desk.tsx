@@ -4,7 +4,9 @@ import { LineSide } from '../../alignments/components/line-side.tsx';
 import { LineTools } from '../../alignments/components/line-tools.tsx';
 import { DrawingSide } from '../../drawing/components/drawing-side.tsx';
 import { DrawingTools } from '../../drawing/components/drawing-tools.tsx';
+import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
+import { PrintPlan } from '../../evidence/components/print-plan.tsx';
 import { RunLegend } from '../../runs/components/run-legend.tsx';
 import { RunNotes } from '../../runs/components/run-notes.tsx';
 import { RunProgressLine } from '../../runs/components/run-progress-line.tsx';
@@ -25,9 +27,13 @@ export function PlanDesk() {
   const view = useRunView(scheme.id, line.run);
   const sections = useSectionDesk(line);
   const chosen = useRef<HTMLDivElement>(null);
+  const print =
+    view.run !== null && desk.handle !== null && can(scheme, 'prepareEvidence') ? (
+      <PrintPlan key="print" {...view} run={view.run} middle={desk.handle.middle} />
+    ) : undefined;
   return (
     <>
-      <PlanBasis scheme={scheme} crs={ready?.crs} line={line} view={view} />
+      <PlanBasis scheme={scheme} crs={ready?.crs} line={line} view={view} print={print} />
       <RunProgressLine>
         <RunNotes line={line} />
       </RunProgressLine>

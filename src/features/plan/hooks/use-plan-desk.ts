@@ -60,6 +60,7 @@ export function usePlanDesk() {
     schemePlan,
     selected,
     select,
+    handle,
     setHandle,
     building,
     sheet,

@@ -10,7 +10,9 @@ const PRINTS = `${EVIDENCE_SCHEME}/prints`;
 const ASK = `POST ${EVIDENCE_SCHEME}/runs/${anId(60)}/prints`;
 const DONE = {
   state: 'done',
-  ...{ done: 2, sheets: 2, bytes: 1_240_000 },
+  done: 2,
+  sheets: 2,
+  bytes: 1_240_000,
   fingerprint: '0123456789abcdef'.repeat(4),
 } as const;
 
