@@ -1,4 +1,3 @@
-import Excel from 'exceljs';
 import { beforeAll, describe, expect, test } from 'vitest';
 import { z } from 'zod';
 import { CATEGORIES } from '../../../shared/damage/categories.ts';
@@ -17,6 +16,7 @@ import { aRun, aTownToRun, UNDER_TOWN } from '../../support/runs.ts';
 import { signIn, visitor } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
 import { UNKNOWN_ID } from '../../support/unknown-ids.ts';
+import { bookOf, bytesOf, tableOf } from '../../support/workbook.ts';
 
 const tested = testApp();
 const { app, runQueue, services } = tested;
@@ -68,38 +68,6 @@ async function exported(format: string) {
   return asked.buffer(true).responseType('blob');
 }
 
-function bytesOf(body: unknown): Buffer {
-  if (!Buffer.isBuffer(body)) throw new Error('A file is bytes.');
-  return body;
-}
-
-async function bookOf(body: unknown): Promise<Excel.Workbook> {
-  const book = new Excel.Workbook();
-  const { buffer, byteOffset, byteLength } = bytesOf(body);
-  await book.xlsx.load(new Uint8Array(buffer, byteOffset, byteLength).slice().buffer);
-  return book;
-}
-
-type Cells = Readonly<Record<string, Excel.CellValue>>;
-
-/** The rows of a sheet by what stands over them. */
-function tableOf(book: Excel.Workbook, name: string): Cells[] {
-  const sheet = book.getWorksheet(name);
-  const heads = (sheet?.getRow(1).values ?? []) as (string | undefined)[];
-  const found: Cells[] = [];
-  sheet?.eachRow((row, k) => {
-    if (k === 1) return;
-    found.push(
-      Object.fromEntries(
-        heads.flatMap((head, column) =>
-          head === undefined ? [] : [[head, row.getCell(column).value]],
-        ),
-      ),
-    );
-  });
-  return found;
-}
-
 function inOrder(): typeof rows {
   const order = new Intl.Collator('en', { numeric: true });
   return [...rows].sort((a, b) => order.compare(a.facts.reference, b.facts.reference));
@@ -145,6 +113,7 @@ describe('a run as a workbook', () => {
         'Strain high (%)': times(result.strainHigh, 100),
         'Settlement (mm)': isFaulty ? null : result.settlement * 1000,
         'Slope (mm/m)': isFaulty ? null : result.slope * 1000,
+        Decision: 'To decide',
         Breakpoint: result.breakpoint,
         'Volume loss at breakpoint (%)': times(result.breakpointVolumeLoss, 100),
         Reserve: result.reserve,

@@ -63,6 +63,7 @@ describe('what a run found in words', () => {
 
   it('is a slope, and how far the building came', () => {
     expect([slopeWords(1 / 780), slopeWords(0)]).toEqual(['1 in 780', 'none']);
+    expect([slopeWords(-1e-6), slopeWords(9e-7)]).toEqual(['1 in 1000000', 'none']);
     expect(stageWords({ stage: 2, heldBy: [] })).toBe('Let go at stage 2');
     expect(stageWords({ stage: 3, heldBy: ['listed'] })).toBe('Stage 3, held by listed');
   });

@@ -4,6 +4,7 @@ import { EmptyState } from '../../../components/ui/empty-state.tsx';
 import { QueryError } from '../../../components/ui/query-error.tsx';
 import { Segments } from '../../../components/ui/segments.tsx';
 import type { EvidenceDesk } from '../hooks/use-evidence-desk.ts';
+import { ScheduleNote } from './schedule-note.tsx';
 import { SheetView } from './sheet-view.tsx';
 
 const SIZES = [
@@ -43,10 +44,7 @@ function Turning({ number, setNumber, sheets: { count } }: EvidenceDesk) {
 }
 
 /** Why there is nothing to see; null where there is. */
-function absence({ layout, faults, sheets }: EvidenceDesk): string | null {
-  if (layout?.kind === 'schedule') {
-    return 'A schedule is a table over as many pages as it needs. Print it to see it.';
-  }
+function absence({ faults, sheets }: EvidenceDesk): string | null {
   if (Object.keys(faults).length > 0) return 'Mend what is marked to see the sheet.';
   return sheets.drawn.length === 0 ? 'The sheet is being drawn.' : null;
 }
@@ -54,7 +52,8 @@ function absence({ layout, faults, sheets }: EvidenceDesk): string | null {
 /** One sheet as it will be printed, with the lists behind it. */
 export function SheetPane({ desk }: { readonly desk: EvidenceDesk }) {
   const [size, setSize] = useState<Size>('whole');
-  const { sheets, move } = desk;
+  const { sheets, move, schemeId, layout, runs } = desk;
+  if (layout?.kind === 'schedule') return <ScheduleNote {...{ schemeId }} run={runs.run} />;
   if (sheets.error !== null) {
     return (
       <QueryError what="What stands on the sheet" error={sheets.error} onRetry={sheets.retry} />
