@@ -48,7 +48,7 @@ describe('prints', () => {
     expect(prints[0]?.layout).toMatchObject({ kind: 'plan', denominator: 1250 });
     prints[0] = aPrintAnswer(DONE);
     // it is asked for again on its own
-    const link = await screen.findByRole('link', { name: 'Download PDF' });
+    const link = await shown.findByRole('link', { name: 'Download PDF' });
     expect(link.getAttribute('href')).toBe(`${PRINTS}/${anId(95)}/file`);
     shown.getByText('2 sheets, 1.2 MB');
     const fingerprint = shown.getByText('Fingerprint 0123 4567 89ab cdef');
