@@ -45,7 +45,7 @@ function bracketNote(buildings: readonly PlanBuilding[], about: AboutSheets): st
   const reaching = (end: 'category' | 'categoryHigh') =>
     buildings.filter(({ result }) => (result[end] ?? -1) >= line).length;
   return [
-    `Over the whole range ${reaching('categoryHigh')} buildings of this sheet come to category ${line} or more, ${reaching('category')} at the central values.`,
+    `Buildings of this sheet that come to category ${line} or more: ${reaching('categoryHigh')} over the whole range, ${reaching('category')} at the central values.`,
   ];
 }
 

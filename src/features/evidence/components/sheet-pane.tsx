@@ -18,27 +18,29 @@ function Turning({ number, setNumber, sheets: { count } }: EvidenceDesk) {
   if (count < 2) return null;
   return (
     <div role="group" aria-label="Sheet" className="flex items-center gap-2 text-small">
-      <Button
-        kind="quiet"
-        disabled={number === 1}
-        onClick={() => {
-          setNumber(number - 1);
-        }}
-      >
-        Previous
-      </Button>
+      {number > 1 && (
+        <Button
+          kind="quiet"
+          onClick={() => {
+            setNumber(number - 1);
+          }}
+        >
+          Previous
+        </Button>
+      )}
       <span aria-live="polite">
         Sheet <b>{number}</b> of {count}
       </span>
-      <Button
-        kind="quiet"
-        disabled={number === count}
-        onClick={() => {
-          setNumber(number + 1);
-        }}
-      >
-        Next
-      </Button>
+      {number < count && (
+        <Button
+          kind="quiet"
+          onClick={() => {
+            setNumber(number + 1);
+          }}
+        >
+          Next
+        </Button>
+      )}
     </div>
   );
 }
