@@ -1,3 +1,4 @@
+import { boundingBox } from '../geometry/bounding-box.ts';
 import { pointInPolygon } from '../geometry/point-in-polygon.ts';
 import { millimetresFromMetres } from '../units/millimetres-from-metres.ts';
 import { labelCorners, type LabelBox } from './label-box.ts';
@@ -16,10 +17,17 @@ export const CONTOUR_SIZE = 7;
 /** A contour is labelled once in so many mm of it. */
 const EVERY = 130;
 
-/** How many corners of a label, and its middle, lie on buildings. */
-function onBuildings(box: LabelBox, outlines: readonly (readonly (readonly Spot[])[])[]): number {
-  const points = [box.middle, ...labelCorners(box)];
-  return points.filter((point) => outlines.some((rings) => pointInPolygon(point, rings))).length;
+type Outline = readonly (readonly Spot[])[];
+
+/** Tells how many corners of a label, and its middle, lie on buildings. */
+function buildingsUnder(outlines: readonly Outline[]): (box: LabelBox) => number {
+  const boxed = outlines.map((rings) => ({ rings, box: boundingBox(rings.flat()) }));
+  const isOn = ([x, y]: Spot) =>
+    boxed.some(
+      ({ rings, box: { west, east, south, north } }) =>
+        x >= west && x <= east && y >= south && y <= north && pointInPolygon([x, y], rings),
+    );
+  return (box) => [box.middle, ...labelCorners(box)].filter(isOn).length;
 }
 
 /**
@@ -29,15 +37,27 @@ function onBuildings(box: LabelBox, outlines: readonly (readonly (readonly Spot[
  */
 export type ContourLabel = { readonly words: string; readonly at: Spot };
 
-function placeOn(stretch: readonly Spot[]): Spot {
-  return stretch[Math.floor(stretch.length / 2)] ?? [0, 0];
+/** The place of a label that is wanted at a distance along a stretch. */
+function placeAt(
+  stretch: readonly Spot[],
+  spots: ReturnType<typeof spotsAlong>,
+  wanted: number,
+): Spot {
+  const nearest = spots.reduce<(typeof spots)[number] | undefined>(
+    (best, spot) =>
+      best === undefined || Math.abs(spot.distance - wanted) < Math.abs(best.distance - wanted)
+        ? spot
+        : best,
+    undefined,
+  );
+  return nearest?.box.middle ?? stretch[Math.floor(stretch.length / 2)] ?? [0, 0];
 }
 
 type Drawn = {
   readonly window: Rectangle;
   readonly measure: Measure;
   /** Outlines of the buildings that labels keep clear of, on paper. */
-  readonly outlines: readonly (readonly (readonly Spot[])[])[];
+  readonly outlines: readonly Outline[];
 };
 
 /**
@@ -50,6 +70,7 @@ export function contourLabels(
   contours: readonly { readonly level: number; readonly line: readonly Spot[] }[],
   { window, measure, outlines }: Drawn,
 ): Wanted<ContourLabel>[] {
+  const under = buildingsUnder(outlines);
   return contours.flatMap(({ level, line }) => {
     const words = `${millimetresFromMetres(level)} mm`;
     const size = { wide: measure(words, CONTOUR_SIZE, false) + 1.6, tall: 3 };
@@ -62,10 +83,13 @@ export function contourLabels(
         const own = spots.filter(({ distance }) => Math.abs(distance - middle) <= last / count / 2);
         const ranked = own.map(({ box, distance }) => ({
           box,
-          rank: onBuildings(box, outlines) * 1000 + Math.abs(distance - middle),
+          rank: under(box) * 1000 + Math.abs(distance - middle),
         }));
         ranked.sort((a, b) => a.rank - b.rank);
-        return { what: { words, at: placeOn(stretch) }, spots: ranked.map(({ box }) => box) };
+        return {
+          what: { words, at: placeAt(stretch, spots, middle) },
+          spots: ranked.map(({ box }) => box),
+        };
       });
     });
   });

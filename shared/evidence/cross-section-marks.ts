@@ -45,12 +45,19 @@ function boreMark(
   };
 }
 
+/** The largest settlement that is drawn; nothing is said where a point of it could not be worked out. */
 function largestWords({ points }: SectionAcross): string {
+  const known = points.flatMap(({ settlement }) => settlement ?? []);
+  if (known.length < points.length) return 'settlement not worked out everywhere';
   const largest = (end: 'low' | 'central' | 'high') =>
-    millimetresFromMetres(
-      Math.max(...points.map(({ settlement }) => settlement?.[end] ?? 0)),
-    ).toFixed(1);
-  return `largest settlement ${largest('low')} / ${largest('central')} / ${largest('high')} mm low / central / high`;
+    millimetresFromMetres(Math.max(...known.map((one) => one[end]))).toFixed(1);
+  return `largest settlement drawn ${largest('low')} / ${largest('central')} / ${largest('high')} mm low / central / high`;
+}
+
+/** How far to the left or right of the line, as one looks along it. */
+function asideWords(offset: number): string {
+  if (offset === 0) return '0';
+  return `${formatCount(Math.abs(offset))} m ${offset < 0 ? 'left' : 'right'}`;
 }
 
 function titleMarks([x, y]: Spot, section: SectionAcross, measure: Measure): Mark[] {
@@ -77,11 +84,7 @@ function sectionMarks(
   return [
     ...titleMarks([panel.left, panel.ground - ABOVE + 5], section, measure),
     ...levelAxis(panel, groundLevel, depth),
-    ...lengthAxis(
-      panel,
-      ticks,
-      (offset) => `${formatCount(Math.abs(offset))}${offset === 0 ? '' : ' m'}`,
-    ),
+    ...lengthAxis(panel, ticks, asideWords),
     ...troughMarks(panel, trough),
     ...standingMarks(panel, standingOn(material.buildings, cut, -halfWidth), measure),
     ...bores.map((bore) => boreMark(panel, bore)),

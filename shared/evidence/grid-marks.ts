@@ -91,8 +91,8 @@ function crossMarks(frame: GroundFrame, [e, n]: PlanPoint): Mark[] {
   if (x < left + CROSS || x > right - CROSS || y < top + CROSS || y > bottom - CROSS) return [];
   const [a, b] = [frame.right[0] * CROSS, frame.right[1] * CROSS];
   return [
-    lineMark([[x - a, y + b], [x + a, y - b]], FINE), // prettier-ignore
-    lineMark([[x - b, y - a], [x + b, y + a]], FINE), // prettier-ignore
+    lineMark([[x - a, y - b], [x + a, y + b]], FINE), // prettier-ignore
+    lineMark([[x + b, y - a], [x - b, y + a]], FINE), // prettier-ignore
   ];
 }
 

@@ -13,6 +13,7 @@ import {
   type ColumnPen,
 } from './column-part.ts';
 import { boxMark, lineMark, type Mark, type Spot, type Stroke, type Tone } from './marks.ts';
+import { DRIVE_AXIS, DRIVE_EDGE } from './line-marks.ts';
 import { contourStroke } from './plan-marks.ts';
 
 const [SWATCH, TALL, ROW] = [14, 5.6, 7];
@@ -95,17 +96,26 @@ function driveSign(wide: number): Sign {
   return {
     words: 'Drive: axis and edges',
     marks: ([x, y]) => [
-      lineMark([[x, y], [x + wide, y]], { ink: 'ink', width: 0.42, dash: [4, 1, 0.8, 1] }), // prettier-ignore
-      lineMark([[x, y - 1.1], [x + wide, y - 1.1]], { ink: 'ink', width: 0.22, dash: [0.4, 0.7] }), // prettier-ignore
-      lineMark([[x, y + 1.1], [x + wide, y + 1.1]], { ink: 'ink', width: 0.22, dash: [0.4, 0.7] }), // prettier-ignore
+      lineMark([[x, y], [x + wide, y]], DRIVE_AXIS), // prettier-ignore
+      lineMark([[x, y - 1.1], [x + wide, y - 1.1]], DRIVE_EDGE), // prettier-ignore
+      lineMark([[x, y + 1.1], [x + wide, y + 1.1]], DRIVE_EDGE), // prettier-ignore
     ],
   };
 }
 
+/** What a building without a colour is. */
+const PLAIN: Readonly<Record<PlanContent['shows'], string>> = {
+  low: 'Let go at stage 1, or not worked out',
+  central: 'Let go at stage 1, or not worked out',
+  high: 'Let go at stage 1, or not worked out',
+  settlement: 'Less than 1 mm',
+  stage: 'Let go at stage 1',
+};
+
 function plainSign(shows: PlanContent['shows'], wide: number): Sign {
   const stroke = { ink: 'buildingEdge', width: 0.2 } as const;
   return {
-    words: shows === 'settlement' ? 'Less than 1 mm' : 'Let go at stage 1, or not worked out',
+    words: PLAIN[shows],
     marks: ([x, y]) => [
       boxMark({ left: x, right: x + wide, top: y - 1.3, bottom: y + 1.3 }, { stroke }),
     ],
@@ -154,7 +164,10 @@ export function legendPart(
   ];
   return stacked([
     wordsPart(pen, TITLES[content.shows], { size: 9.5, isStrong: true }),
-    wordsPart(pen, 'At the right, how many buildings of this sheet.', { size: 7, ink: 'second' }),
+    wordsPart(pen, 'At the right, how many buildings have their middle on this sheet.', {
+      size: 7,
+      ink: 'second',
+    }),
     { height: 0.8, marks: () => [] },
     ...rowsOf(content.shows).map((row) =>
       toneParts(pen, row, formatCount(counts.get(row.tone.number) ?? 0)),

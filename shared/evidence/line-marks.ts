@@ -7,8 +7,20 @@ import type { ChainageTick } from './chainage-marks.ts';
 import type { GroundFrame } from './ground-frame.ts';
 import { lineMark, type Mark, type Spot, type Stroke } from './marks.ts';
 
-const AXIS: Stroke = { ink: 'ink', width: 0.42, dash: [4, 1, 0.8, 1] };
-const EDGE: Stroke = { ink: 'ink', width: 0.22, dash: [0.4, 0.7] };
+/**
+ * How the axis of a drive is drawn.
+ *
+ * Units: mm. Valid: read only. Source: [own].
+ */
+export const DRIVE_AXIS: Stroke = { ink: 'ink', width: 0.42, dash: [4, 1, 0.8, 1] };
+
+/**
+ * How the edges of a drive are drawn.
+ *
+ * Units: mm. Valid: read only. Source: [own].
+ */
+export const DRIVE_EDGE: Stroke = { ink: 'ink', width: 0.22, dash: [0.4, 0.7] };
+
 const TICK: Stroke = { ink: 'ink', width: 0.25 };
 /** How far a tick reaches to either side of the line, in mm. */
 const REACH = 3.2;
@@ -36,9 +48,9 @@ export function driveMarks(frame: GroundFrame, design: AlignmentDesign): Mark[] 
   return drivesOfDesign(design).flatMap(({ axis, diameter }): Mark[] => [
     ...[diameter / 2, -diameter / 2].flatMap((offset) => {
       const edge = edgeOf(axis, offset);
-      return edge.length === 0 ? [] : [lineMark(onPaper(frame, edge), EDGE)];
+      return edge.length === 0 ? [] : [lineMark(onPaper(frame, edge), DRIVE_EDGE)];
     }),
-    lineMark(onPaper(frame, axis), AXIS),
+    lineMark(onPaper(frame, axis), DRIVE_AXIS),
   ]);
 }
 

@@ -164,23 +164,29 @@ export function plannedSections(
   ];
 }
 
+/** So far round a section the ground is sought: one along the grid has a box of no width. */
+const AROUND = 1;
+
+function pointsOf(planned: PlannedSection, line: LineOnGround): PlanPoint[] {
+  if (planned.kind === 'long section') {
+    return planned.stretches.flatMap(({ from, to }) => line.between(from, to));
+  }
+  const { chainages, halfWidth } = planned;
+  return chainages.flatMap((chainage): PlanPoint[] => {
+    const [[e, n], [dx, dy]] = [line.pointAt(chainage), line.directionAt(chainage)];
+    return [
+      [e - halfWidth * dy, n + halfWidth * dx],
+      [e + halfWidth * dy, n - halfWidth * dx],
+    ];
+  });
+}
+
 /**
  * The ground that sections show, so that the buildings on it can be sought.
  *
  * Units: m. Valid: any section of the line. Source: [own].
  */
 export function boxOfSection(planned: PlannedSection, line: LineOnGround): Box {
-  if (planned.kind === 'long section') {
-    return boundingBox(planned.stretches.flatMap(({ from, to }) => line.between(from, to)));
-  }
-  const { chainages, halfWidth } = planned;
-  return boundingBox(
-    chainages.flatMap((chainage): PlanPoint[] => {
-      const [[e, n], [dx, dy]] = [line.pointAt(chainage), line.directionAt(chainage)];
-      return [
-        [e - halfWidth * dy, n + halfWidth * dx],
-        [e + halfWidth * dy, n - halfWidth * dx],
-      ];
-    }),
-  );
+  const { west, south, east, north } = boundingBox(pointsOf(planned, line));
+  return { west: west - AROUND, south: south - AROUND, east: east + AROUND, north: north + AROUND };
 }

@@ -98,30 +98,59 @@ export function lengthAxis(
   return [lineMark([[left, bottom], [right, bottom]], THIN), ...ticks]; // prettier-ignore
 }
 
-/**
- * The trough under the ground line: its range as a band, its central values as a line.
- *
- * Units: m. Valid: where the method refuses nothing is drawn. Source: as `settlementBracket`.
- */
-export function troughMarks(
-  { x, sunk, left, right, ground }: SectionPanel,
-  points: readonly { readonly distance: number; readonly settlement: Range | null }[],
-): Mark[] {
-  const known = points.flatMap(({ distance, settlement }) =>
-    settlement === null ? [] : [{ distance, ...settlement }],
-  );
-  if (known.length < 2) return [];
-  const of = (end: keyof Range) => known.map((one): Spot => [x(one.distance), sunk(one[end])]);
+/** A point of a trough, and the same where settlement is known. */
+type TroughPoint = { readonly distance: number; readonly settlement: Range | null };
+type KnownPoint = { readonly distance: number; readonly settlement: Range };
+
+/** The stretches over which settlement is known from point to point. */
+function knownRuns(points: readonly TroughPoint[]): KnownPoint[][] {
+  const runs: KnownPoint[][] = [[]];
+  for (const { distance, settlement } of points) {
+    if (settlement === null) runs.push([]);
+    else runs.at(-1)?.push({ distance, settlement });
+  }
+  return runs.filter(({ length }) => length > 1);
+}
+
+function runMarks({ x, sunk }: SectionPanel, run: readonly KnownPoint[]): Mark[] {
+  const of = (end: keyof Range) =>
+    run.map(({ distance, settlement }): Spot => [x(distance), sunk(settlement[end])]);
+  const band = [...of('low'), ...of('high').reverse()];
   return [
-    {
-      kind: 'shape',
-      rings: [[...of('low'), ...of('high').reverse()]],
-      isClosed: true,
-      fill: 'band',
-    },
+    { kind: 'shape', rings: [band], isClosed: true, fill: 'band' },
     lineMark(of('low'), { ink: 'contour', width: 0.18, dash: [0.5, 0.8] }),
     lineMark(of('high'), { ink: 'contour', width: 0.18, dash: [1.6, 0.9] }),
     lineMark(of('central'), { ink: 'contour', width: 0.4 }),
+  ];
+}
+
+const CUT_OFF =
+  'Settlement reaches below this drawing. Draw it fewer times as large to see all of it.';
+
+/**
+ * The ground line, and under it the trough: its range as a band, its central values as a line.
+ *
+ * Units: m. Valid: where the method refuses nothing is drawn; what reaches below the panel is cut off there
+ * and said to be. Source: as `settlementBracket`.
+ */
+export function troughMarks(panel: SectionPanel, points: readonly TroughPoint[]): Mark[] {
+  const { left, right, ground, bottom, sunk } = panel;
+  const runs = knownRuns(points);
+  const deepest = Math.max(0, ...runs.flat().map(({ settlement }) => settlement.high));
+  const isCut = sunk(deepest) > bottom;
+  const window = { left, top: ground - 1, right, bottom };
+  return [
+    { kind: 'within', window, marks: runs.flatMap((run) => runMarks(panel, run)) },
+    ...(isCut
+      ? [
+          {
+            kind: 'words' as const,
+            words: CUT_OFF,
+            at: [left + 2, bottom - 1.5] as const,
+            size: SIZE,
+          },
+        ]
+      : []),
     lineMark([[left, ground], [right, ground]], { ink: 'ink', width: 0.4 }), // prettier-ignore
   ];
 }

@@ -32,7 +32,7 @@ export function runNotes(about: AboutSheets): string[] {
   const { run, scheme } = about;
   const { option } = run;
   return [
-    `Run ${run.number} of ${option.name}, version ${option.version}; method ${run.methodVersion}, rules version ${run.rulesVersion}, register version ${run.registerVersion}, started ${run.startedAt.slice(0, 10)}.`,
+    `Run ${run.number} of ${option.name}, version ${option.version}; method ${run.methodVersion}, rules version ${run.rulesVersion}, register version ${run.registerVersion}, started ${run.startedAt.slice(0, 10)} UTC.`,
     `Low / central / high: ${designParts(run.design).join('. ')}.`,
     ...intervalsNote(about),
     'Ground movement is greenfield: as if no building stood there. Walls follow the ground; no stiffness of buildings is counted on.',
@@ -45,7 +45,7 @@ function bracketNote(buildings: readonly PlanBuilding[], about: AboutSheets): st
   const reaching = (end: 'category' | 'categoryHigh') =>
     buildings.filter(({ result }) => (result[end] ?? -1) >= line).length;
   return [
-    `Buildings of this sheet that come to category ${line} or more: ${reaching('categoryHigh')} over the whole range, ${reaching('category')} at the central values.`,
+    `Buildings with their middle on this sheet that come to category ${line} or more: ${reaching('categoryHigh')} over the whole range, ${reaching('category')} at the central values.`,
   ];
 }
 

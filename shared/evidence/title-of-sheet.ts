@@ -9,8 +9,10 @@ const KINDS = {
   'cross sections': 'Sections',
 } as const;
 
-function denominatorOf({ what }: PlannedSheet): number {
-  return what.kind === 'plan' ? what.frame.denominator : what.denominator;
+/** The scale of a sheet; one of several scales says them in its notes. */
+function scaleOf({ what }: PlannedSheet): string {
+  if (what.kind !== 'plan' && what.exaggeration !== 1) return 'As noted';
+  return `1 : ${formatCount(what.kind === 'plan' ? what.frame.denominator : what.denominator)}`;
 }
 
 /**
@@ -32,7 +34,7 @@ export function titleOfSheet(
     number: fields.number,
     revision: fields.revisions[0]?.revision ?? '',
     sheet: `${number} of ${of}`,
-    scale: `1 : ${formatCount(denominatorOf(planned))}`,
+    scale: scaleOf(planned),
     paper: layout.paper,
     kind: KINDS[what.kind],
     ...{ prepared: fields.prepared, checked: fields.checked, approved: fields.approved },

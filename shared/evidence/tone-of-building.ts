@@ -29,11 +29,14 @@ export function toneOfBuilding(
 /**
  * What is written in a building that takes a colour: its category, its stage, or its settlement in mm.
  *
- * Units: mm in whole numbers. Valid: the tone of that building. Source: [own].
+ * Units: mm in whole numbers, tenths where a whole one would be of another band. Valid: the tone of that building. Source: [own].
  */
 export function wordsOfTone(tone: Tone, { result }: Pick<PlanBuilding, 'result'>): string {
   if (tone.by === 'category') return CATEGORIES[tone.number]?.label ?? '';
-  return tone.by === 'stage'
-    ? String(tone.number)
-    : String(Math.round(millimetresFromMetres(result.settlement)));
+  if (tone.by === 'stage') return String(tone.number);
+  const millimetres = millimetresFromMetres(result.settlement);
+  const whole = Math.round(millimetres);
+  // a figure that rounds up into the next band would not agree with its colour
+  const agrees = bandOf(whole / 1000) === tone.number;
+  return agrees ? String(whole) : (Math.floor(10 * millimetres) / 10).toFixed(1);
 }

@@ -78,7 +78,7 @@ describe('drawnSheets', () => {
   });
 
   it('says of which run it is, on which grid, and its scale', () => {
-    expect(words).toContain('Run 4 of A, version 1; method 1.1.0, rules version 1, register version 1, started 2026-12-01.'); // prettier-ignore
+    expect(words).toContain('Run 4 of A, version 1; method 1.1.0, rules version 1, register version 1, started 2026-12-01 UTC.'); // prettier-ignore
     expect(words).toContain('EPSG:32632');
     expect(words).toContain('Scale 1 : 500 on A3');
   });

@@ -123,3 +123,17 @@ describe('gridMarks', () => {
     });
   });
 });
+
+describe('the crosses of a turned sheet', () => {
+  it('have arms along the grid', () => {
+    const right: PlanPoint = [Math.cos(0.4), Math.sin(0.4)];
+    const frame = groundFrame(WINDOW, { centre: [500_000, 6_000_000], denominator: 1250, right });
+    const alongGrid = ringMarks(gridMarks(frame).crosses).map((arm) => {
+      const [from, to] = arm.map((spot) => frame.ground(spot));
+      const [e, n] = [(to?.[0] ?? 0) - (from?.[0] ?? 0), (to?.[1] ?? 0) - (from?.[1] ?? 0)];
+      return Math.min(Math.abs(e), Math.abs(n));
+    });
+    expect(alongGrid.length).toBeGreaterThan(10);
+    expect(Math.max(...alongGrid)).toBeLessThan(1e-6);
+  });
+});

@@ -77,12 +77,12 @@ describe('boxOfSection', () => {
   it('is the ground that cuts run over', () => {
     const [section] = planned({ across: [200, 260], halfWidth: 40 });
     if (section === undefined) throw new Error('There is none.');
-    expect(boxOfSection(section, LINE)).toEqual({ west: -300, south: -40, east: -240, north: 40 });
+    expect(boxOfSection(section, LINE)).toEqual({ west: -301, south: -41, east: -239, north: 41 });
   });
 
   it('is the ground that a long section runs over', () => {
     const [section] = planned({ isLong: true, across: [], denominator: 5000 });
     if (section === undefined) throw new Error('There is none.');
-    expect(boxOfSection(section, LINE)).toEqual({ west: -500, south: 0, east: 500, north: 0 });
+    expect(boxOfSection(section, LINE)).toEqual({ west: -501, south: -1, east: 501, north: 1 });
   });
 });

@@ -69,7 +69,9 @@ export function SheetPane({ desk }: { readonly desk: EvidenceDesk }) {
         <Segments label="How large" segments={SIZES} value={size} onChange={setSize} />
         <Turning {...desk} />
         {move !== null && (
-          <span className="text-cap text-ink-3">Drag the sheet to move its frame.</span>
+          <span className="text-cap text-ink-3">
+            Drag the sheet, or press arrow keys on it, to move its frame.
+          </span>
         )}
         {sheets.isStale && (
           <span className="appear-late text-cap text-ink-3">Drawing it anew.</span>
