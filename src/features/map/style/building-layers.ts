@@ -1,8 +1,5 @@
-import type {
-  ExpressionSpecification,
-  LayerSpecification,
-  SymbolLayerSpecification,
-} from 'maplibre-gl';
+import type { LayerSpecification, SymbolLayerSpecification } from 'maplibre-gl';
+import { HOVERED, SELECTED, solidity } from './building-states.ts';
 import { LABEL_FONTS } from './label-fonts.ts';
 import { MAP_COLOURS } from './map-colours.ts';
 import {
@@ -15,13 +12,6 @@ import {
 const LABELS = { source: SOURCES.buildings, 'source-layer': LABELS_TILE_LAYER } as const;
 const BUILDINGS = { source: SOURCES.buildings, 'source-layer': BUILDINGS_TILE_LAYER } as const;
 
-function whileMarked(mark: 'selected' | 'hovered'): ExpressionSpecification {
-  return ['boolean', ['feature-state', mark], false];
-}
-
-const SELECTED = whileMarked('selected');
-const HOVERED = whileMarked('hovered');
-
 /** Buildings with a darker edge; a blue outline round the selected one. */
 export function buildingLayers(): LayerSpecification[] {
   return [
@@ -31,6 +21,7 @@ export function buildingLayers(): LayerSpecification[] {
       ...BUILDINGS,
       paint: {
         'fill-color': ['case', SELECTED, MAP_COLOURS.selectWash, MAP_COLOURS.bldg],
+        'fill-opacity': solidity(1, 1),
         'fill-antialias': false,
       },
     },
@@ -41,6 +32,7 @@ export function buildingLayers(): LayerSpecification[] {
       layout: { 'line-join': 'round' },
       paint: {
         'line-color': MAP_COLOURS.bldgEdge,
+        'line-opacity': solidity(1, 1),
         'line-width': ['interpolate', ['linear'], ['zoom'], 13, 0.25, 16, 0.7, 19, 1.2],
       },
     },
@@ -51,6 +43,7 @@ export function buildingLayers(): LayerSpecification[] {
       layout: { 'line-join': 'miter' },
       paint: {
         'line-color': ['case', SELECTED, MAP_COLOURS.select, MAP_COLOURS.ink],
+        'line-opacity': solidity(1, 1),
         'line-width': ['case', SELECTED, 3, HOVERED, 1.5, 0],
       },
     },

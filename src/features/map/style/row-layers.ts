@@ -1,4 +1,5 @@
 import type { ExpressionSpecification, LayerSpecification } from 'maplibre-gl';
+import { HOVERED, SELECTED, solidity } from './building-states.ts';
 import { hatchName } from './hatch-images.ts';
 import { MAP_COLOURS } from './map-colours.ts';
 import { ROW_LOOKS, type RowLook } from './row-looks.ts';
@@ -6,8 +7,6 @@ import { ROWS_LAYER, ROWS_TILE_LAYER, SOURCES } from './source-names.ts';
 
 const ROWS = { source: SOURCES.rows, 'source-layer': ROWS_TILE_LAYER } as const;
 const LOOKS: readonly (readonly [string, RowLook])[] = Object.entries(ROW_LOOKS);
-const SELECTED: ExpressionSpecification = ['boolean', ['feature-state', 'selected'], false];
-const HOVERED: ExpressionSpecification = ['boolean', ['feature-state', 'hovered'], false];
 
 function byOutcome(value: (look: RowLook) => string | number): ExpressionSpecification {
   const { same, new: fresh, changed, refused, conflict } = ROW_LOOKS;
@@ -77,8 +76,10 @@ export function rowLayers(): LayerSpecification[] {
 /** Layers that stay in the background of others. */
 export function faintLayers(layers: readonly LayerSpecification[]): LayerSpecification[] {
   return layers.map((layer) => {
-    if (layer.type === 'fill') return { ...layer, paint: { ...layer.paint, 'fill-opacity': 0.4 } };
-    if (layer.type === 'line') return { ...layer, paint: { ...layer.paint, 'line-opacity': 0.5 } };
-    return layer;
+    if (layer.type === 'fill') {
+      return { ...layer, paint: { ...layer.paint, 'fill-opacity': solidity(0.4, 0.4) } };
+    }
+    if (layer.type !== 'line') return layer;
+    return { ...layer, paint: { ...layer.paint, 'line-opacity': solidity(0.5, 0.5) } };
   });
 }

@@ -7,6 +7,7 @@ import {
   type Tint,
 } from '../../../../shared/presentation/ground-tints.ts';
 import { FIRST_SHADE } from '../shades.ts';
+import { SELECTED } from './building-states.ts';
 import { damageName } from './damage-images.ts';
 import { LABEL_FONTS } from './label-fonts.ts';
 import { MAP_COLOURS } from './map-colours.ts';
@@ -70,7 +71,6 @@ function hatches(): LayerSpecification[] {
 }
 
 const EDGE_COLOUR = byShade(shifted(EDGES, FIRST_SHADE.category), MAP_COLOURS.bldgEdge);
-const SELECTED: ExpressionSpecification = ['boolean', ['feature-state', 'selected'], false];
 const PLAIN: ExpressionSpecification = ['case', SELECTED, MAP_COLOURS.selectWash, MAP_COLOURS.bldg];
 
 /** The layers of buildings with the colours of what was found of them. */

@@ -78,6 +78,31 @@ describe('layersOfPlan', () => {
   });
 });
 
+describe('what is drawn of a building by its state', () => {
+  const byState = (plan: MapPlan): string[] =>
+    layersOfPlan(plan).flatMap(({ id, paint = {} }) =>
+      Object.entries(paint)
+        .filter(([, value]) => JSON.stringify(value).includes('feature-state'))
+        .map(([property]) => `${id} ${property}`),
+    );
+
+  it('is so in every plan that draws it: tiles on their way come from the plan before', () => {
+    const plans = [
+      DEMO,
+      { ...DEMO, meant: new Set([1]) },
+      { ...DEMO, shades: new Map([[1, 1]]) },
+      { ...DEMO, rows: tileSet() },
+    ];
+    for (const plan of plans) {
+      const all = new Set(plans.flatMap(byState));
+      const drawn = layersOfPlan(plan).map(({ id }) => id);
+      const expected = [...all].filter((one) => drawn.includes(one.split(' ')[0] ?? ''));
+      expect(byState(plan).toSorted()).toEqual(expected.toSorted());
+    }
+    expect(byState(DEMO)).toContain('buildings fill-opacity');
+  });
+});
+
 describe('sourcesOfPlan', () => {
   it('tells the map how far tiles go, so that it asks for none that are missing', () => {
     const { buildings } = sourcesOfPlan(DEMO);
