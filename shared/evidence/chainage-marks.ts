@@ -1,15 +1,10 @@
-import { chainages } from '../geometry/chainages.ts';
-import { planDistance } from '../geometry/plan-distance.ts';
-import { pointAtChainage } from '../geometry/point-at-chainage.ts';
-import type { PlanPoint, SpacePoint } from '../geometry/point.ts';
-import { polylineParts } from '../geometry/polyline-parts.ts';
-import { at } from '../numerics/at.ts';
-import { intervalIndex } from '../numerics/interval-index.ts';
+import type { PlanPoint } from '../geometry/point.ts';
+import { steps } from '../numerics/steps.ts';
 import { chainageWords } from '../presentation/chainage-words.ts';
 import type { GroundFrame } from './ground-frame.ts';
-import type { Measure, Spot } from './marks.ts';
+import { lineOnGround } from './line-on-ground.ts';
+import { isInside, type Measure, type Spot } from './marks.ts';
 import type { Wanted } from './place-labels.ts';
-import { steps } from './steps.ts';
 
 /**
  * A chainage of a line on paper: where it is, which way the line runs there, and how it is written.
@@ -36,19 +31,12 @@ const ASIDE = [7, 10, 14, 19, 25, 32];
  * Units: m and mm. Valid: a line of two points or more. Source: [own].
  */
 export function chainageTicks(frame: GroundFrame, line: readonly PlanPoint[]): ChainageTick[] {
-  const flat = line.map(([e, n]): SpacePoint => [e, n, 0]);
-  const [stations, parts] = [chainages(flat), polylineParts(flat)];
+  const { length, pointAt, directionAt } = lineOnGround(line);
   const step = STEPS.find((one) => (one * 1000) / frame.denominator >= APART) ?? 1000;
-  const { left, top, right, bottom } = frame.window;
-  return steps(0, at(stations, stations.length - 1), step).flatMap((chainage) => {
-    const [e, n] = pointAtChainage(flat, stations, chainage);
-    const [x, y] = frame.place([e, n]);
-    if (x < left || x > right || y < top || y > bottom) return [];
-    const [dx, dy] = parts[intervalIndex(stations, chainage)]?.direction ?? [1, 0];
-    const ahead = frame.place([e + dx, n + dy]);
-    const long = planDistance([x, y], ahead);
-    const along: Spot = [(ahead[0] - x) / long, (ahead[1] - y) / long];
-    return [{ words: chainageWords(chainage), at: [x, y], along }];
+  return steps(0, length, step).flatMap((chainage) => {
+    const at = frame.place(pointAt(chainage));
+    if (!isInside(frame.window, at)) return [];
+    return [{ words: chainageWords(chainage), at, along: frame.turned(directionAt(chainage)) }];
   });
 }
 

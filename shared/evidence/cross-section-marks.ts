@@ -10,7 +10,7 @@ import { niceTicks } from '../presentation/nice-ticks.ts';
 import { sine } from '../numerics/sine.ts';
 import { millimetresFromMetres } from '../units/millimetres-from-metres.ts';
 import type { Mark, Measure, Spot } from './marks.ts';
-import type { PlanMaterial } from './plan-material.ts';
+import { oneUnderTheOther, type DrawnSections, type SectionRoom } from './drawn-sections.ts';
 import { ABOVE, sectionHeight, type PlannedSection } from './planned-sections.ts';
 import {
   lengthAxis,
@@ -19,8 +19,7 @@ import {
   troughMarks,
   type SectionPanel,
 } from './section-panel.ts';
-import type { AboutSheets } from './sheet.ts';
-import { standingMarks, standingOn } from './standing-marks.ts';
+import { standingMarks, standingOn, type Standing } from './standing-marks.ts';
 
 type Planned = Extract<PlannedSection, { kind: 'cross sections' }>;
 
@@ -69,11 +68,17 @@ function titleMarks([x, y]: Spot, section: SectionAcross, measure: Measure): Mar
   ];
 }
 
+/** From the left of a building to its right, as one looks along the line. */
+function spanWords({ from, to }: Standing): string {
+  return `${asideWords(Math.round(from))} to ${asideWords(Math.round(to))}`;
+}
+
 function sectionMarks(
   panel: SectionPanel,
   section: SectionAcross,
-  { depth, halfWidth, material, measure }: Room,
-): Mark[] {
+  { depth, halfWidth }: Planned,
+  { material, measure }: SectionRoom,
+): DrawnSections {
   const { middle, left, groundLevel, points, bores } = section;
   const start = [middle[0] + halfWidth * left[0], middle[1] + halfWidth * left[1]] as const;
   const cut = { start, direction: [-left[0], -left[1]] as const, length: 2 * halfWidth };
@@ -81,22 +86,22 @@ function sectionMarks(
   const trough = points
     .map(({ offset, settlement }) => ({ distance: -offset, settlement }))
     .reverse();
-  return [
-    ...titleMarks([panel.left, panel.ground - ABOVE + 5], section, measure),
-    ...levelAxis(panel, groundLevel, depth),
-    ...lengthAxis(panel, ticks, asideWords),
-    ...troughMarks(panel, trough),
-    ...standingMarks(panel, standingOn(material.buildings, cut, -halfWidth), measure),
-    ...bores.map((bore) => boreMark(panel, bore)),
-  ];
+  const standing = standingMarks(panel, standingOn(material.buildings, cut, -halfWidth), measure);
+  return {
+    marks: [
+      ...titleMarks([panel.left, panel.ground - ABOVE + 5], section, measure),
+      ...levelAxis(panel, groundLevel, depth),
+      ...lengthAxis(panel, ticks, asideWords),
+      ...troughMarks(panel, trough),
+      ...standing.marks,
+      ...bores.map((bore) => boreMark(panel, bore)),
+    ],
+    unnamed: standing.unnamed.map((one) => ({
+      reference: one.building.reference,
+      where: `${chainageWords(section.chainage)}, ${spanWords(one)}`,
+    })),
+  };
 }
-
-type Room = {
-  readonly depth: number;
-  readonly halfWidth: number;
-  readonly material: PlanMaterial;
-  readonly measure: Measure;
-};
 
 /**
  * Sections across the line, one under the other: ground, bores, the trough with its range, and the buildings
@@ -107,21 +112,17 @@ type Room = {
 export function crossSectionMarks(
   { left, top }: { readonly left: number; readonly top: number },
   planned: Planned,
-  { about, ...room }: Omit<Room, 'halfWidth'> & { readonly about: AboutSheets },
-): Mark[] {
-  const { design, rules } = about.run;
-  const { halfWidth } = planned;
+  room: SectionRoom,
+): DrawnSections {
+  const { design, rules } = room.about.run;
+  const { halfWidth, depth } = planned;
   const sections: SectionsOfDesign = sectionsOfDesign(design, assessmentRules(rules));
-  const each = sectionHeight(planned, room.depth);
-  return planned.chainages.flatMap((chainage, k) => {
+  const each = sectionHeight(planned);
+  const drawn = planned.chainages.map((chainage, k) => {
     const section = sections(chainage, halfWidth);
-    const span = {
-      from: -halfWidth,
-      to: halfWidth,
-      groundLevel: section.groundLevel,
-      depth: room.depth,
-    };
+    const span = { from: -halfWidth, to: halfWidth, groundLevel: section.groundLevel, depth };
     const panel = sectionPanel({ left, top: top + k * each }, planned, span);
-    return sectionMarks(panel, section, { ...room, halfWidth });
+    return sectionMarks(panel, section, planned, room);
   });
+  return oneUnderTheOther(drawn);
 }

@@ -1,9 +1,9 @@
 import { planDistance } from '../geometry/plan-distance.ts';
 import type { PlanPoint } from '../geometry/point.ts';
 import { formatCount } from '../presentation/format-number.ts';
-import { steps } from './steps.ts';
-import { cornersOf, type GroundFrame } from './ground-frame.ts';
-import { lineMark, type Mark, type Spot } from './marks.ts';
+import { steps } from '../numerics/steps.ts';
+import type { GroundFrame } from './ground-frame.ts';
+import { cornersOf, lineMark, type Mark, type Spot } from './marks.ts';
 
 /** Distances between lines of the grid, and the least that two of them lie apart on paper, in mm. */
 const STEPS = [5, 10, 20, 50, 100, 200, 500, 1000, 2000, 5000, 10_000];
@@ -71,12 +71,17 @@ function wordsOfTick({ axis, value, at: [x, y], out: [dx, dy] }: GridTick): Mark
   };
 }
 
-/** Every line of the grid has its tick; on a turned sheet words that would meet are left out. */
-function tickMarks(ticks: readonly GridTick[]): Mark[] {
+/**
+ * The ticks of the grid with their values, outside of the neat line. Every line of the grid has its tick; on a
+ * turned sheet words that would meet are left out.
+ *
+ * Units: mm. Valid: any frame. Source: [own].
+ */
+export function gridTickMarks(frame: GroundFrame): Mark[] {
   const written: GridTick[] = [];
   const isFree = ({ at, out }: GridTick) =>
     written.every((one) => one.out !== out || planDistance(one.at, at) >= WORDS_APART);
-  return ticks.flatMap((tick): Mark[] => {
+  return gridTicks(frame).flatMap((tick): Mark[] => {
     const { at: [x, y], out: [dx, dy] } = tick; // prettier-ignore
     const stroke = lineMark([[x, y], [x + dx * TICK, y + dy * TICK]], LINE); // prettier-ignore
     if (!isFree(tick)) return [stroke];
@@ -97,19 +102,13 @@ function crossMarks(frame: GroundFrame, [e, n]: PlanPoint): Mark[] {
 }
 
 /**
- * The grid of a sheet: ticks with their values outside of the neat line, crosses inside.
+ * The crosses of the grid inside of the neat line.
  *
  * Units: mm. Valid: any frame. Source: [own].
  */
-export function gridMarks(frame: GroundFrame): {
-  readonly ticks: Mark[];
-  readonly crosses: Mark[];
-} {
+export function gridCrosses(frame: GroundFrame): Mark[] {
   const step = gridStep(frame.denominator);
   const { west, south, east, north } = frame.box;
   const [eastings, northings] = [steps(west, east, step), steps(south, north, step)];
-  return {
-    ticks: tickMarks(gridTicks(frame)),
-    crosses: eastings.flatMap((e) => northings.flatMap((n) => crossMarks(frame, [e, n]))),
-  };
+  return eastings.flatMap((e) => northings.flatMap((n) => crossMarks(frame, [e, n])));
 }

@@ -1,10 +1,10 @@
 import { boundingBox, type Box } from '../geometry/bounding-box.ts';
 import type { PlanPoint } from '../geometry/point.ts';
-import type { Rectangle, Spot } from './marks.ts';
+import { cornersOf, type Rectangle, type Spot } from './marks.ts';
 
 /**
- * A piece of ground on paper: where a point of the grid lies, and what lies at a place of the paper.
- * `right` is the direction of the grid that runs to the right of the sheet.
+ * A piece of ground on paper: where a point of the grid lies, which way a direction of the grid runs, and what
+ * lies at a place of the paper. `right` is the direction of the grid that runs to the right of the sheet.
  *
  * Units: grid m, paper mm. Valid: made by `groundFrame`; box holds all of the window. Source: [own].
  */
@@ -14,6 +14,7 @@ export type GroundFrame = {
   readonly window: Rectangle;
   readonly box: Box;
   readonly place: (point: PlanPoint) => Spot;
+  readonly turned: (direction: PlanPoint) => Spot;
   readonly ground: (spot: Spot) => PlanPoint;
 };
 
@@ -34,12 +35,13 @@ export function groundFrame(
 ): GroundFrame {
   const scale = MM_PER_METRE / denominator;
   const middle: Spot = [(window.left + window.right) / 2, (window.top + window.bottom) / 2];
+  const turned = ([x, y]: PlanPoint): Spot => [
+    x * right[0] + y * right[1],
+    x * right[1] - y * right[0],
+  ];
   const place = ([e, n]: PlanPoint): Spot => {
-    const [x, y] = [e - centre[0], n - centre[1]];
-    return [
-      middle[0] + (x * right[0] + y * right[1]) * scale,
-      middle[1] - (y * right[0] - x * right[1]) * scale,
-    ];
+    const [x, y] = turned([e - centre[0], n - centre[1]]);
+    return [middle[0] + x * scale, middle[1] + y * scale];
   };
   const ground = ([x, y]: Spot): PlanPoint => {
     const [along, up] = [(x - middle[0]) / scale, (middle[1] - y) / scale];
@@ -49,19 +51,5 @@ export function groundFrame(
     ];
   };
   const corners = cornersOf(window).map(ground);
-  return { denominator, right, window, box: boundingBox(corners), place, ground };
-}
-
-/**
- * The corners of a rectangle, clockwise from the top left.
- *
- * Units: mm. Valid: any rectangle. Source: [own].
- */
-export function cornersOf({
-  left,
-  top,
-  right,
-  bottom,
-}: Rectangle): readonly [Spot, Spot, Spot, Spot] {
-  return [[left, top], [right, top], [right, bottom], [left, bottom]]; // prettier-ignore
+  return { denominator, right, window, box: boundingBox(corners), place, turned, ground };
 }

@@ -3,8 +3,8 @@ import { planDistance } from '../geometry/plan-distance.ts';
 import type { PlanPoint } from '../geometry/point.ts';
 import type { ColumnPart, ColumnPen } from './column-part.ts';
 import { backgroundMarks } from './background-marks.ts';
-import { cornersOf, groundFrame, type GroundFrame } from './ground-frame.ts';
-import { boxMark, lineMark, type Mark, type Rectangle, type Spot } from './marks.ts';
+import { groundFrame, type GroundFrame } from './ground-frame.ts';
+import { boxMark, cornersOf, lineMark, type Mark, type Rectangle, type Spot } from './marks.ts';
 import type { PlanBackground } from './plan-material.ts';
 import type { PlannedSheet } from './planned-sheets.ts';
 

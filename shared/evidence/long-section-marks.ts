@@ -4,10 +4,11 @@ import { settlementBracket } from '../assessment/settlement-bracket.ts';
 import { planDistance } from '../geometry/plan-distance.ts';
 import { chainageWords } from '../presentation/chainage-words.ts';
 import { niceTicks } from '../presentation/nice-ticks.ts';
+import { oneUnderTheOther, type DrawnSections, type SectionRoom } from './drawn-sections.ts';
 import type { LineOnGround } from './line-on-ground.ts';
-import { lineMark, type Mark, type Measure, type Spot, type Stroke } from './marks.ts';
+import { lineMark, type Mark, type Spot, type Stroke } from './marks.ts';
 import type { PlanMaterial } from './plan-material.ts';
-import type { SectionScales, Stretch } from './planned-sections.ts';
+import { ABOVE, sectionHeight, type PlannedSection, type Stretch } from './planned-sections.ts';
 import {
   lengthAxis,
   levelAxis,
@@ -75,13 +76,14 @@ function standingAlong(
 /** Points of the trough along a stretch on paper lie so far apart, in mm. */
 const APART = 1.5;
 
+type SettlementAt = ReturnType<typeof settlementBracket>;
+
 function settlements(
   panel: SectionPanel,
   line: LineOnGround,
   { from, to }: Stretch,
-  { run }: AboutSheets,
+  bracket: SettlementAt,
 ) {
-  const bracket = settlementBracket(run.design, assessmentRules(run.rules));
   const count = Math.max(2, Math.ceil((panel.right - panel.left) / APART));
   return Array.from({ length: count + 1 }, (_, k) => {
     const distance = from + (k * (to - from)) / count;
@@ -89,40 +91,52 @@ function settlements(
   });
 }
 
-/**
- * A stretch of the long section: ground, drives with their levels, settlement of the surface over the line,
- * and what stands right over it.
- *
- * Units: mm. Valid: a stretch of that line. Source: as `settlementBracket`.
- */
-export function longSectionMarks(
-  at: { readonly left: number; readonly top: number },
-  stretch: Stretch & SectionScales,
-  {
-    line,
-    depth,
-    material,
-    about,
-    measure,
-  }: {
-    readonly line: LineOnGround;
-    readonly depth: number;
-    readonly material: PlanMaterial;
-    readonly about: AboutSheets;
-    readonly measure: Measure;
-  },
-): Mark[] {
-  const { groundLevel } = about.run.design;
+function stretchMarks(
+  { panel, stretch, depth }: { panel: SectionPanel; stretch: Stretch; depth: number },
+  { line, about, material, measure }: SectionRoom,
+  bracket: SettlementAt,
+): DrawnSections {
   const { from, to } = stretch;
-  const panel = sectionPanel(at, stretch, { from, to, groundLevel, depth });
   const ticks = niceTicks(from, to, Math.max(2, Math.floor((panel.right - panel.left) / 40)));
   const words = `Long section from ${chainageWords(from)} to ${chainageWords(to)}`;
-  return [
-    { kind: 'words', words, at: [at.left, at.top + 5], size: 9, isStrong: true },
-    ...levelAxis(panel, groundLevel, depth),
-    ...lengthAxis(panel, ticks, chainageWords),
-    ...troughMarks(panel, settlements(panel, line, stretch, about)),
-    ...standingMarks(panel, standingAlong(line, stretch, material), measure),
-    ...driveLines(panel, stretch, about),
-  ];
+  const title: Spot = [panel.left, panel.ground - ABOVE + 5];
+  const standing = standingMarks(panel, standingAlong(line, stretch, material), measure);
+  return {
+    marks: [
+      { kind: 'words', words, at: title, size: 9, isStrong: true },
+      ...levelAxis(panel, about.run.design.groundLevel, depth),
+      ...lengthAxis(panel, ticks, chainageWords),
+      ...troughMarks(panel, settlements(panel, line, stretch, bracket)),
+      ...standing.marks,
+      ...driveLines(panel, stretch, about),
+    ],
+    unnamed: standing.unnamed.map((one) => ({
+      reference: one.building.reference,
+      where: `${chainageWords(one.from)} to ${chainageWords(one.to)}`,
+    })),
+  };
+}
+
+/**
+ * Stretches of the long section, one under the other: ground, drives with their levels, settlement of the surface
+ * over the line, and what stands right over it.
+ *
+ * Units: mm. Valid: stretches of that line. Source: as `settlementBracket`.
+ */
+export function longSectionMarks(
+  { left, top }: { readonly left: number; readonly top: number },
+  planned: Extract<PlannedSection, { kind: 'long section' }>,
+  room: SectionRoom,
+): DrawnSections {
+  const { design, rules } = room.about.run;
+  const { groundLevel } = design;
+  const bracket = settlementBracket(design, assessmentRules(rules));
+  const { depth } = planned;
+  const each = sectionHeight(planned);
+  const drawn = planned.stretches.map((stretch, k) => {
+    const at = { left, top: top + k * each };
+    const panel = sectionPanel(at, planned, { ...stretch, groundLevel, depth });
+    return stretchMarks({ panel, stretch, depth }, room, bracket);
+  });
+  return oneUnderTheOther(drawn);
 }

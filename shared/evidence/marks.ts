@@ -107,14 +107,36 @@ export function lineMark(places: readonly Spot[], stroke: Stroke): Mark {
 }
 
 /**
+ * The corners of a rectangle, clockwise from the top left.
+ *
+ * Units: mm. Valid: any rectangle. Source: [own].
+ */
+export function cornersOf({
+  left,
+  top,
+  right,
+  bottom,
+}: Rectangle): readonly [Spot, Spot, Spot, Spot] {
+  return [[left, top], [right, top], [right, bottom], [left, bottom]]; // prettier-ignore
+}
+
+/**
+ * Whether a place lies in a rectangle or on its edge.
+ *
+ * Units: mm. Valid: any rectangle. Source: [own].
+ */
+export function isInside({ left, top, right, bottom }: Rectangle, [x, y]: Spot): boolean {
+  return x >= left && x <= right && y >= top && y <= bottom;
+}
+
+/**
  * A rectangle, filled or with its outline drawn.
  *
  * Units: mm. Valid: any rectangle. Source: [own].
  */
 export function boxMark(
-  { left, top, right, bottom }: Rectangle,
+  box: Rectangle,
   look: { readonly fill?: Ink; readonly stroke?: Stroke },
 ): Mark {
-  const ring: Spot[] = [[left, top], [right, top], [right, bottom], [left, bottom]]; // prettier-ignore
-  return { kind: 'shape', rings: [ring], isClosed: true, ...look };
+  return { kind: 'shape', rings: [cornersOf(box)], isClosed: true, ...look };
 }

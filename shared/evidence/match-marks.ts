@@ -49,12 +49,8 @@ export function matchesOnPaper(
   },
 ): MatchOnPaper[] {
   return matches.flatMap(({ chainage, sheet, isAhead }): MatchOnPaper[] => {
-    const [e, n] = line.pointAt(chainage);
-    const [dx, dy] = line.directionAt(chainage);
-    const [at, ahead] = [frame.place([e, n]), frame.place([e + dx, n + dy])];
-    const scale = 1000 / frame.denominator;
-    const along: Spot = [(ahead[0] - at[0]) / scale, (ahead[1] - at[1]) / scale];
-    const cut = across(frame, at, along);
+    const along = frame.turned(line.directionAt(chainage));
+    const cut = across(frame, frame.place(line.pointAt(chainage)), along);
     const [start, end] = [cut[0], cut.at(-1)];
     if (start === undefined || end === undefined) return [];
     // up the sheet, beside the cut, on the side that goes on

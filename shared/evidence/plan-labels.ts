@@ -2,6 +2,7 @@ import { footprintMiddle } from '../building/footprint-middle.ts';
 import type { PlanPoint } from '../geometry/point.ts';
 import type { AlignmentDesign } from '../schemas/alignments.ts';
 import type { PlanContent } from '../schemas/evidence.ts';
+import { buildingsOn } from './buildings-on.ts';
 import { categoryLabels, nameLabels, type LabelledBuilding } from './building-labels.ts';
 import { chainageLabels, chainageTicks, type ChainageTick } from './chainage-marks.ts';
 import { contourLabels } from './contour-labels.ts';
@@ -46,22 +47,18 @@ function meant<T>(
   return wanted.map(({ what, spots }) => ({ what: label(what), spots }));
 }
 
-function isIn({ window }: GroundFrame, [x, y]: Spot): boolean {
-  return x >= window.left && x <= window.right && y >= window.top && y <= window.bottom;
-}
-
 type Toned = LabelledBuilding & { readonly building: PlanBuilding };
 
-/** The buildings that take a colour and whose middle is on the sheet. */
+/** The buildings on the sheet that take a colour. */
 function tonedOf(
   frame: GroundFrame,
   buildings: readonly PlanBuilding[],
   { shows }: PlanContent,
 ): Toned[] {
-  return buildings.flatMap((building) => {
+  return buildingsOn(frame, buildings).flatMap((building) => {
     const tone = toneOfBuilding(building, shows);
+    if (tone === null) return [];
     const middle = frame.place(footprintMiddle(building.parts));
-    if (tone === null || !isIn(frame, middle)) return [];
     const rings = building.parts.flatMap((part) => part.map((ring) => ring.map(frame.place)));
     return [{ id: building.id, rings, middle, words: wordsOfTone(tone, building), building }];
   });

@@ -1,6 +1,6 @@
 import type { AlignmentDesign } from '../schemas/alignments.ts';
 import { backgroundMarks } from './background-marks.ts';
-import { gridMarks } from './grid-marks.ts';
+import { gridCrosses, gridTickMarks } from './grid-marks.ts';
 import type { GroundFrame } from './ground-frame.ts';
 import { labelMarks } from './label-marks.ts';
 import { driveMarks, tickMarks } from './line-marks.ts';
@@ -69,7 +69,7 @@ export function groundMarks(
   return [
     ...(content.background ? backgroundMarks(frame, material.background) : []),
     ...buildingMarks(frame, material.buildings, plan),
-    ...gridMarks(frame).crosses,
+    ...gridCrosses(frame),
     ...(content.contours ? contourMarks(frame, material) : []),
     ...(content.line ? driveMarks(frame, design) : []),
     ...tickMarks(ticks),
@@ -84,5 +84,5 @@ export function groundMarks(
  * Units: mm. Valid: any plan. Source: [own].
  */
 export function signMarks({ frame }: PlannedPlan, paper: string): Mark[] {
-  return [...gridMarks(frame).ticks, ...northMarks(frame), ...scaleBarMarks(frame, paper)];
+  return [...gridTickMarks(frame), ...northMarks(frame), ...scaleBarMarks(frame, paper)];
 }

@@ -1,11 +1,12 @@
-import { footprintMiddle } from '../building/footprint-middle.ts';
 import { figure, percent } from '../presentation/design-words.ts';
 import { formatCount } from '../presentation/format-number.ts';
 import { percentFromRatio } from '../units/percent-from-ratio.ts';
-import { stacked, wordsPart, type ColumnPart, type ColumnPen } from './column-part.ts';
+import { buildingsOn } from './buildings-on.ts';
+import { stacked, type ColumnPart, type ColumnPen } from './column-part.ts';
 import { keyPart } from './key-plan.ts';
 import { labelList, numberMarks, type ListedLine } from './label-list.ts';
 import { legendPart } from './legend-part.ts';
+import { listInColumn } from './list-in-column.ts';
 import { lineOnGround } from './line-on-ground.ts';
 import type { Mark, Measure } from './marks.ts';
 import { matchesOnPaper, matchMarks } from './match-marks.ts';
@@ -26,15 +27,6 @@ import { toneOfBuilding } from './tone-of-building.ts';
 function figureWords({ shows }: PlannedPlan['content']): (figure: string) => string {
   if (shows === 'settlement') return (words) => `${words} mm`;
   return (words) => `${shows === 'stage' ? 'stage' : 'category'} ${words}`;
-}
-
-/** The buildings whose middle is on the sheet. */
-function buildingsOn({ frame }: PlannedPlan, { buildings }: PlanMaterial): PlanBuilding[] {
-  const { left, top, right, bottom } = frame.window;
-  return buildings.filter(({ parts }) => {
-    const [x, y] = frame.place(footprintMiddle(parts));
-    return x >= left && x <= right && y >= top && y <= bottom;
-  });
 }
 
 function countsOf(
@@ -132,8 +124,6 @@ function mapMarks({ planned, plan, material, about, measure }: Drawn): {
   };
 }
 
-/** How high a list in the column may be, as a share of it. */
-const LIST_SHARE = 0.25;
 const BEHIND = 'Labels without room on the plan are listed on the sheet behind this one.';
 
 /**
@@ -146,28 +136,25 @@ export function planSheets(drawn: Drawn): Sheet[] {
   const { planned, plan, all, material, about, measure } = drawn;
   const { layout, number } = planned;
   const pen = columnPen(layout, measure);
-  const on = buildingsOn(plan, material);
+  const on = buildingsOn(plan.frame, material.buildings);
   const { marks, lines } = mapMarks(drawn);
   const { design, rules } = about.run;
-  const list = listParts(pen, lines);
-  const isShort = stacked(list).height <= LIST_SHARE * (layout.column.bottom - layout.column.top);
-  const pointer = wordsPart(pen, BEHIND, { size: 7.5 });
+  const list = listInColumn(pen, layout, listParts(pen, lines), BEHIND);
   const key = { line: design.line, all, number, ground: about.keyGround };
   const column = columnMarks(layout, pen, {
     always: [legendPart(pen, plan.content, countsOf(plan, on)), keyPart(pen, key)],
     asRoom: [
       stacked(noteParts(pen, planNotes(plan.content, on, about))),
-      ...(lines.length === 0 ? [] : [isShort ? stacked(list) : pointer]),
+      ...list.inColumn,
       ...revisionPart(pen, about.fields),
       ...mostStrained(pen, on, rules.leadingCategory.value),
     ],
     title: titleOfSheet(planned, about, ''),
   });
-  const behind = [...column.left.filter((part) => part !== pointer), ...(isShort ? [] : list)];
   const sheet = {
     name: `${about.fields.title || 'Plan'}, sheet ${number}`,
     ...{ width: layout.width, height: layout.height },
     marks: [...marks, ...frameMarks(layout.frame, layout.window, layout.column), ...column.marks],
   };
-  return [sheet, ...sheetsBehind(sheet, { planned, about, pen }, behind)];
+  return [sheet, ...sheetsBehind(sheet, { planned, about, pen }, list.behind(column.left))];
 }

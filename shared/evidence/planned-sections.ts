@@ -27,12 +27,12 @@ export type SectionScales = {
 export type Stretch = { readonly from: number; readonly to: number };
 
 /**
- * Sections that are to be drawn, one under the other: stretches along the line, or some across it.
+ * Sections that are to be drawn, one under the other and each `depth` of ground deep: stretches along the line,
+ * or some across it.
  *
  * Units: m. Valid: made by `plannedSections`. Source: [own].
  */
-export type PlannedSection = SectionScales &
-  (
+export type PlannedSection = SectionScales & { readonly depth: number } & (
     | { readonly kind: 'long section'; readonly stretches: readonly Stretch[] }
     | {
         readonly kind: 'cross sections';
@@ -55,7 +55,11 @@ export const [ABOVE, BELOW, ASIDE] = [31, 24, 22] as const;
  *
  * Units: depth m, height mm. Valid: any scales. Source: [own].
  */
-export function sectionHeight({ exaggeration, denominator }: SectionScales, depth: number): number {
+export function sectionHeight({
+  exaggeration,
+  denominator,
+  depth,
+}: Pick<PlannedSection, 'exaggeration' | 'denominator' | 'depth'>): number {
   return (depth * exaggeration * 1000) / denominator + ABOVE + BELOW;
 }
 
@@ -66,18 +70,14 @@ function bySheet<T>(
   { window }: SheetLayout,
   all: readonly T[],
 ): T[][] {
-  const each = Math.floor((window.bottom - window.top) / sectionHeight(asked, depth));
+  const each = Math.floor((window.bottom - window.top) / sectionHeight({ ...asked, depth }));
   return Array.from({ length: Math.ceil(all.length / each) }, (_, k) =>
     all.slice(k * each, (k + 1) * each),
   );
 }
 
-/**
- * From the ground to a little below the invert, the deepest at some chainages.
- *
- * Units: m. Valid: at least one chainage. Source: [own].
- */
-export function depthAt(
+/** From the ground to a little below the invert, the deepest at some chainages. */
+function depthAt(
   { groundLevel, levels, diameter }: AlignmentDesign,
   chainages: readonly number[],
 ): number {
@@ -86,7 +86,7 @@ export function depthAt(
 }
 
 function refuseHigh(asked: Asked, depth: number, { window }: SheetLayout): void {
-  if (sectionHeight(asked, depth) <= window.bottom - window.top) return;
+  if (sectionHeight({ ...asked, depth }) <= window.bottom - window.top) return;
   const message =
     'The section is higher than the sheet. Take a smaller exaggeration, scale or a larger paper.';
   throw new MethodError('outside-range', message, 'exaggeration');
@@ -108,7 +108,8 @@ function longSections(
     ...{ from: k * each, to: Math.min(line.length, (k + 1) * each) },
   }));
   return bySheet(asked, depth, layout, stretches).map((some) => ({
-    ...{ kind: 'long section', denominator, exaggeration, settlementExaggeration, stretches: some },
+    ...{ kind: 'long section', denominator, exaggeration, settlementExaggeration },
+    ...{ depth, stretches: some },
   }));
 }
 
@@ -135,7 +136,7 @@ function crossSections(
   refuseHigh(asked, depth, layout);
   return bySheet(asked, depth, layout, across).map((chainages) => ({
     ...{ kind: 'cross sections', denominator, exaggeration, settlementExaggeration },
-    ...{ chainages, halfWidth },
+    ...{ depth, chainages, halfWidth },
   }));
 }
 

@@ -4,16 +4,18 @@ import { CATEGORIES } from '../damage/categories.ts';
 import { capital } from '../presentation/capital.ts';
 import { stacked, wordsPart, type ColumnPart, type ColumnPen } from './column-part.ts';
 import { crossSectionMarks } from './cross-section-marks.ts';
+import type { DrawnSections } from './drawn-sections.ts';
 import { keyPart } from './key-plan.ts';
 import { toneParts } from './legend-part.ts';
+import { listInColumn } from './list-in-column.ts';
 import { lineOnGround } from './line-on-ground.ts';
 import { longSectionMarks } from './long-section-marks.ts';
-import type { Mark, Measure } from './marks.ts';
+import type { Measure } from './marks.ts';
 import type { PlanMaterial } from './plan-material.ts';
 import { frameMarks } from './plan-signs.ts';
-import { ASIDE, depthAt, sectionHeight, type PlannedSection } from './planned-sections.ts';
+import { ASIDE, type PlannedSection } from './planned-sections.ts';
 import type { PlannedSheet } from './planned-sheets.ts';
-import { noteParts } from './rows-part.ts';
+import { noteParts, tableParts } from './rows-part.ts';
 import { columnMarks, columnPen, revisionPart } from './sheet-column.ts';
 import { sheetsBehind } from './sheets-behind.ts';
 import { runNotes } from './sheet-notes.ts';
@@ -50,26 +52,27 @@ function sectionNotes(section: PlannedSection, about: AboutSheets): string[] {
   return [...scaleWords(section), ...runNotes(about), CAUTIONS.join(' ')];
 }
 
-function drawingOf({ planned, section, material, about, measure }: Drawn): Mark[] {
-  const { design } = about.run;
+function drawingOf({ planned, section, material, about, measure }: Drawn): DrawnSections {
   const { window } = planned.layout;
   const at = { left: window.left + ASIDE, top: window.top };
-  const line = lineOnGround(design.line);
-  if (section.kind === 'cross sections') {
-    const depth = depthAt(design, section.chainages);
-    return crossSectionMarks(at, section, { depth, material, about, measure });
-  }
-  const stations = [0, line.length, ...design.levels.map(({ chainage }) => chainage)];
-  const depth = depthAt(design, stations);
-  const each = sectionHeight(section, depth);
-  return section.stretches.flatMap((stretch, k) =>
-    longSectionMarks(
-      { ...at, top: at.top + k * each },
-      { ...section, ...stretch },
-      { line, depth, material, about, measure },
-    ),
-  );
+  const room = { line: lineOnGround(about.run.design.line), material, about, measure };
+  return section.kind === 'cross sections'
+    ? crossSectionMarks(at, section, room)
+    : longSectionMarks(at, section, room);
 }
+
+function listParts(pen: ColumnPen, unnamed: DrawnSections['unnamed']): ColumnPart[] {
+  if (unnamed.length === 0) return [];
+  const columns = [
+    { heading: 'No.', share: 0.09 },
+    { heading: 'Reference', share: 0.4 },
+    { heading: 'Where', share: 0.51 },
+  ];
+  const rows = unnamed.map(({ reference, where }, k) => [String(k + 1), reference, where]);
+  return tableParts(pen, `Buildings without room for a name: ${unnamed.length}`, columns, rows);
+}
+
+const BEHIND = 'Buildings without room for a name are listed on the sheet behind this one.';
 
 function legend(pen: ColumnPen): ColumnPart {
   return stacked([
@@ -95,10 +98,13 @@ export function sectionSheets(drawn: Drawn): Sheet[] {
   const { layout, number } = planned;
   const pen = columnPen(layout, measure);
   const key = { line: about.run.design.line, all, number, ground: about.keyGround };
+  const { marks, unnamed } = drawingOf(drawn);
+  const list = listInColumn(pen, layout, listParts(pen, unnamed), BEHIND);
   const column = columnMarks(layout, pen, {
     always: [legend(pen)],
     asRoom: [
       stacked(noteParts(pen, sectionNotes(section, about))),
+      ...list.inColumn,
       keyPart(pen, key),
       ...revisionPart(pen, about.fields),
     ],
@@ -108,10 +114,10 @@ export function sectionSheets(drawn: Drawn): Sheet[] {
     name: `${about.fields.title || 'Sections'}, sheet ${number}`,
     ...{ width: layout.width, height: layout.height },
     marks: [
-      { kind: 'within' as const, window: layout.window, marks: drawingOf(drawn) },
+      { kind: 'within' as const, window: layout.window, marks },
       ...frameMarks(layout.frame, layout.window, layout.column),
       ...column.marks,
     ],
   };
-  return [sheet, ...sheetsBehind(sheet, { planned, about, pen }, column.left)];
+  return [sheet, ...sheetsBehind(sheet, { planned, about, pen }, list.behind(column.left))];
 }

@@ -1,13 +1,14 @@
 import type { PlanPoint } from '../geometry/point.ts';
 import { stretchesInPolygon } from '../geometry/stretches-in-polygon.ts';
-import type { Mark, Measure } from './marks.ts';
-import { lineMark, type Spot } from './marks.ts';
+import { boxMark, cornersOf, lineMark, type Mark, type Measure } from './marks.ts';
 import type { PlanBuilding } from './plan-material.ts';
 import type { SectionPanel } from './section-panel.ts';
 import { toneOfBuilding } from './tone-of-building.ts';
 
 /** How high a building is drawn, whatever its height, and the size of its reference. */
 const [TALL, SIZE] = [6, 6.5];
+/** References keep so far apart, and are at most so long between a building and the title, in mm. */
+const [APART, LONGEST] = [2.6, 17];
 
 /**
  * A stretch of a section that stands on a building.
@@ -41,40 +42,48 @@ export function standingOn(
   );
 }
 
+const EDGE = { ink: 'buildingEdge', width: 0.2 } as const;
+
+function shapeOf({ x, ground }: SectionPanel, { building, from, to }: Standing): Mark {
+  const box = { left: x(from), top: ground - TALL, right: x(to), bottom: ground };
+  const tone = toneOfBuilding(building, 'central');
+  return tone === null
+    ? boxMark(box, { fill: 'paper', stroke: EDGE })
+    : { kind: 'toned', tone, rings: [cornersOf(box)] };
+}
+
+function nameMarks({ ground }: SectionPanel, words: string, middle: number): Mark[] {
+  const top = ground - TALL;
+  return [
+    lineMark([[middle, top], [middle, top - 1.2]], { ink: 'ink', width: 0.15 }), // prettier-ignore
+    { kind: 'words', words, size: SIZE, along: [0, -1], at: [middle + 0.8, top - 1.8] },
+  ];
+}
+
 /**
  * Buildings on the ground line of a section, at true width, with their category at the central values; their
- * references where there is room.
+ * references where there is room, and those whose reference has none.
  *
  * Units: mm. Valid: in the panel. Source: [own].
  */
 export function standingMarks(
-  { x, ground }: SectionPanel,
+  panel: SectionPanel,
   standing: readonly Standing[],
   measure: Measure,
-): Mark[] {
+): { readonly marks: Mark[]; readonly unnamed: readonly Standing[] } {
   const ordered = [...standing].sort((a, b) => a.from - b.from);
-  let free = -Infinity;
-  return ordered.flatMap(({ building, from, to }): Mark[] => {
-    const [left, right, top] = [x(from), x(to), ground - TALL];
-    const ring: Spot[] = [[left, ground], [left, top], [right, top], [right, ground]]; // prettier-ignore
-    const tone = toneOfBuilding(building, 'central');
-    const stroke = { ink: 'buildingEdge', width: 0.2 } as const;
-    const shape: Mark =
-      tone === null
-        ? { kind: 'shape', rings: [ring], isClosed: true, fill: 'paper', stroke }
-        : { kind: 'toned', tone, rings: [ring] };
-    const middle = (left + right) / 2;
-    const tall = measure(building.reference, SIZE, false);
+  const unnamed: Standing[] = [];
+  let last = -Infinity;
+  const names = ordered.flatMap((one): Mark[] => {
+    const { reference } = one.building;
+    const middle = (panel.x(one.from) + panel.x(one.to)) / 2;
     // words run up the sheet, each needs its own height of print
-    if (middle - free < 2.6 || tall > 17) return [shape];
-    free = middle;
-    return [
-      shape,
-      lineMark([[middle, top], [middle, top - 1.2]], { ink: 'ink', width: 0.15 }), // prettier-ignore
-      {
-        ...{ kind: 'words', words: building.reference, size: SIZE, along: [0, -1] },
-        at: [middle + 0.8, top - 1.8],
-      },
-    ];
+    if (middle - last < APART || measure(reference, SIZE, false) > LONGEST) {
+      unnamed.push(one);
+      return [];
+    }
+    last = middle;
+    return nameMarks(panel, reference, middle);
   });
+  return { marks: [...ordered.map((one) => shapeOf(panel, one)), ...names], unnamed };
 }

@@ -1,6 +1,11 @@
-import { cornersOf } from '../../../shared/evidence/ground-frame.ts';
 import { INK_COLOURS } from '../../../shared/evidence/ink-colours.ts';
-import type { Mark, Rectangle, Spot, Stroke } from '../../../shared/evidence/marks.ts';
+import {
+  cornersOf,
+  type Mark,
+  type Rectangle,
+  type Spot,
+  type Stroke,
+} from '../../../shared/evidence/marks.ts';
 import { POINTS_PER_MM } from '../pdf/page-sizes.ts';
 import type { Paper } from '../pdf/paper.ts';
 import { trace } from '../pdf/trace.ts';

@@ -1,4 +1,5 @@
 import type { Category } from '../../../shared/damage/categories.ts';
+import { steps } from '../../../shared/numerics/steps.ts';
 import { DAMAGE } from '../../../shared/presentation/damage-style.ts';
 import type { Paper } from './paper.ts';
 
@@ -12,14 +13,6 @@ export type Bounds = {
 
 /** Level, upright or at 45°, fixed to the drawing and not to the shape, so that what touches reads as one tone. */
 type Lean = 'rising' | 'falling' | 'level' | 'upright';
-
-function steps(from: number, to: number, pitch: number): readonly number[] {
-  const first = Math.ceil(from / pitch);
-  return Array.from(
-    { length: Math.max(0, Math.floor(to / pitch) - first + 1) },
-    (_, k) => (first + k) * pitch,
-  );
-}
 
 function strokes({ doc }: Paper, lean: Lean, pitch: number, bounds: Bounds): void {
   const { left, top, right, bottom } = bounds;

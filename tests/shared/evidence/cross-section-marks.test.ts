@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { assessmentRules } from '../../../shared/assessment/run-inputs.ts';
 import { sectionsOfDesign } from '../../../shared/assessment/sections-of-design.ts';
 import { crossSectionMarks } from '../../../shared/evidence/cross-section-marks.ts';
+import { lineOnGround } from '../../../shared/evidence/line-on-ground.ts';
 import type { Spot } from '../../../shared/evidence/marks.ts';
 import {
   ABOVE,
@@ -27,12 +28,13 @@ type Planned = Extract<PlannedSection, { kind: 'cross sections' }>;
 const PLANNED: Planned = {
   kind: 'cross sections',
   ...{ denominator: 500, exaggeration: 1, settlementExaggeration: 400 },
-  ...{ chainages: [500], halfWidth: 60 },
+  ...{ depth: 26, chainages: [500], halfWidth: 60 },
 };
 
 function drawn(design: AlignmentDesign = aDesign(), asked: Partial<Planned> = {}, material = aPlanMaterial()) {
   const about = someSheets({}, { design });
-  return crossSectionMarks(AT, { ...PLANNED, ...asked }, { depth: 26, material, about, measure: evenMeasure });
+  const room = { line: lineOnGround(design.line), material, about, measure: evenMeasure };
+  return crossSectionMarks(AT, { ...PLANNED, ...asked }, room);
 } // prettier-ignore
 
 function sizeOf(ring: readonly Spot[]) {
@@ -41,7 +43,7 @@ function sizeOf(ring: readonly Spot[]) {
   return { wide: right - left, tall: bottom - top, x: (left + right) / 2, y: (top + bottom) / 2 };
 }
 
-function boresIn(marks: ReturnType<typeof drawn>) {
+function boresIn({ marks }: ReturnType<typeof drawn>) {
   return ringMarks(marks, 0.4)
     .filter((ring) => ring.length === 48)
     .map(sizeOf);
@@ -76,7 +78,7 @@ describe('crossSectionMarks', () => {
     const about = someSheets({}, { design });
     const section = sectionsOfDesign(design, assessmentRules(about.run.rules))(500, 60);
     const { settlement } = section.points.find(({ offset }) => offset === 0) ?? {};
-    const lines = flatMarks(drawn(design)).flatMap((mark) =>
+    const lines = flatMarks(drawn(design).marks).flatMap((mark) =>
       mark.kind === 'shape' && mark.stroke?.ink === 'contour' ? [mark] : [],
     );
     expect(lines).toHaveLength(3);
@@ -91,7 +93,7 @@ describe('crossSectionMarks', () => {
   it('stands a building at its true width on its side of the line', () => {
     const left = aPlanBuilding({ parts: [[aRing(-5, 12, 10, 8)]] });
     const aside = aPlanBuilding({ id: '8', parts: [[aRing(30, 12, 10, 8)]] });
-    const marks = drawn(aDesign(), {}, aPlanMaterial({ buildings: [left, aside] }));
+    const { marks } = drawn(aDesign(), {}, aPlanMaterial({ buildings: [left, aside] }));
     const standing = flatMarks(marks).flatMap((mark) => (mark.kind === 'toned' ? [mark] : []));
     expect(standing.map(({ tone }) => tone)).toEqual([{ by: 'category', number: 1 }]);
     const { wide, x } = sizeOf(standing[0]?.rings[0] ?? []);
@@ -101,9 +103,26 @@ describe('crossSectionMarks', () => {
     expect(wordMarks(marks).some(({ words }) => words === 'B0007')).toBe(true);
   });
 
+  it('writes the reference of every building that it meets, or tells which have no room', () => {
+    const long = 'R'.repeat(20);
+    const buildings = [
+      aPlanBuilding({ id: '1', reference: 'first', parts: [[aRing(-5, 12, 10, 1)]] }),
+      aPlanBuilding({ id: '2', reference: 'close', parts: [[aRing(-5, 11, 10, 1)]] }),
+      aPlanBuilding({ id: '3', reference: long, parts: [[aRing(-5, -30, 10, 8)]] }),
+    ];
+    const { marks, unnamed } = drawn(aDesign(), {}, aPlanMaterial({ buildings }));
+    const written = wordMarks(marks).map(({ words }) => words);
+    expect(written).toContain('first');
+    expect(unnamed).toEqual([
+      { reference: 'close', where: '0+500, 12 m left to 11 m left' },
+      { reference: long, where: '0+500, 22 m right to 30 m right' },
+    ]);
+    expect(flatMarks(marks).filter(({ kind }) => kind === 'toned')).toHaveLength(3);
+  });
+
   it('keeps each section to its own height', () => {
     const asked = { chainages: [300, 500, 700] };
-    const each = sectionHeight(PLANNED, 26);
+    const each = sectionHeight(PLANNED);
     const tops = boresIn(drawn(aDesign(), asked)).map(({ y }) => y);
     expect(tops).toEqual([0, 1, 2].map((k) => expect.closeTo(GROUND + 40 + k * each, 6) as number)); // prettier-ignore
   });

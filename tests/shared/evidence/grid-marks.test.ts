@@ -1,7 +1,13 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { gridMarks, gridStep, gridTicks } from '../../../shared/evidence/grid-marks.ts';
-import { cornersOf, groundFrame, type GroundFrame } from '../../../shared/evidence/ground-frame.ts';
+import {
+  gridCrosses,
+  gridStep,
+  gridTickMarks,
+  gridTicks,
+} from '../../../shared/evidence/grid-marks.ts';
+import { groundFrame, type GroundFrame } from '../../../shared/evidence/ground-frame.ts';
+import { cornersOf } from '../../../shared/evidence/marks.ts';
 import { planDistance } from '../../../shared/geometry/plan-distance.ts';
 import type { PlanPoint } from '../../../shared/geometry/point.ts';
 import { ringMarks, wordMarks } from '../../support/marks.ts';
@@ -80,10 +86,10 @@ describe('gridTicks', () => {
   });
 });
 
-describe('gridMarks', () => {
+describe('the grid of a sheet', () => {
   it('draws every stroke, and keeps words of one side 26 mm apart', () => {
     holds(frames, (frame) => {
-      const { ticks } = gridMarks(frame);
+      const ticks = gridTickMarks(frame);
       expect(ringMarks(ticks)).toHaveLength(gridTicks(frame).length);
       const words = wordMarks(ticks);
       const { left, top, right, bottom } = WINDOW;
@@ -104,7 +110,7 @@ describe('gridMarks', () => {
 
   it('writes a value at every tick of a sheet along the grid', () => {
     const frame = groundFrame(WINDOW, { centre: [500_000, 60], denominator: 500 });
-    const words = wordMarks(gridMarks(frame).ticks).map((mark) => mark.words);
+    const words = wordMarks(gridTickMarks(frame)).map((mark) => mark.words);
     expect(words).toHaveLength(gridTicks(frame).length);
     expect(words.filter((one) => /^E 500\s000$/.test(one))).toHaveLength(2);
     expect(words).toContain('N 100');
@@ -113,7 +119,7 @@ describe('gridMarks', () => {
 
   it('crosses where lines of the grid cross', () => {
     holds(frames, (frame) => {
-      const { crosses } = gridMarks(frame);
+      const crosses = gridCrosses(frame);
       const step = gridStep(frame.denominator);
       for (const [[ax, ay] = [0, 0], [bx, by] = [0, 0]] of ringMarks(crosses)) {
         const [e, n] = frame.ground([(ax + bx) / 2, (ay + by) / 2]);
@@ -128,7 +134,7 @@ describe('the crosses of a turned sheet', () => {
   it('have arms along the grid', () => {
     const right: PlanPoint = [Math.cos(0.4), Math.sin(0.4)];
     const frame = groundFrame(WINDOW, { centre: [500_000, 6_000_000], denominator: 1250, right });
-    const alongGrid = ringMarks(gridMarks(frame).crosses).map((arm) => {
+    const alongGrid = ringMarks(gridCrosses(frame)).map((arm) => {
       const [from, to] = arm.map((spot) => frame.ground(spot));
       const [e, n] = [(to?.[0] ?? 0) - (from?.[0] ?? 0), (to?.[1] ?? 0) - (from?.[1] ?? 0)];
       return Math.min(Math.abs(e), Math.abs(n));

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { cornersOf, groundFrame } from '../../../shared/evidence/ground-frame.ts';
+import { groundFrame } from '../../../shared/evidence/ground-frame.ts';
+import { cornersOf } from '../../../shared/evidence/marks.ts';
 import { boundingBox, boxDistance } from '../../../shared/geometry/bounding-box.ts';
 import { planDistance } from '../../../shared/geometry/plan-distance.ts';
 import type { PlanPoint } from '../../../shared/geometry/point.ts';

@@ -16,7 +16,11 @@ import { aRing } from '../../support/register-facts.ts';
 
 const AT = { left: 39, top: 17 };
 const GROUND = AT.top + ABOVE;
-const STRETCH = { from: 400, to: 520, denominator: 500, exaggeration: 2, settlementExaggeration: 300 }; // prettier-ignore
+const PLANNED = {
+  kind: 'long section',
+  ...{ denominator: 500, exaggeration: 2, settlementExaggeration: 300 },
+  ...{ depth: 40, stretches: [{ from: 400, to: 520 }] },
+} as const;
 const DESIGN = aDesign({
   levels: [
     { chainage: 0, level: -20 },
@@ -26,8 +30,8 @@ const DESIGN = aDesign({
 
 function drawn(buildings = [aPlanBuilding()]) {
   const about = someSheets({}, { design: DESIGN });
-  const room = { line: lineOnGround(DESIGN.line), depth: 40, about, measure: evenMeasure };
-  return longSectionMarks(AT, STRETCH, { ...room, material: aPlanMaterial({ buildings }) });
+  const room = { line: lineOnGround(DESIGN.line), about, measure: evenMeasure };
+  return longSectionMarks(AT, PLANNED, { ...room, material: aPlanMaterial({ buildings }) });
 }
 
 describe('longSectionMarks', () => {
@@ -40,14 +44,14 @@ describe('longSectionMarks', () => {
         [ends[1], ys(-25.2 + above)],
       ];
       const close = line.map((spot) => spot.map((value) => expect.closeTo(value ?? NaN, 6) as number)); // prettier-ignore
-      expect(ringMarks(drawn())).toContainEqual(close);
+      expect(ringMarks(drawn().marks)).toContainEqual(close);
     }
   });
 
   it('draws settlement over the line as the section across has it, times the exaggeration', () => {
     const { run } = someSheets({}, { design: DESIGN });
     const sections = sectionsOfDesign(DESIGN, assessmentRules(run.rules));
-    const [line = []] = ringMarks(drawn(), 0.4);
+    const [line = []] = ringMarks(drawn().marks, 0.4);
     for (const end of [line[0], line.at(-1)]) {
       const [x, y] = end ?? [NaN, NaN];
       const chainage = 400 + (x - AT.left) / 2;
@@ -58,7 +62,7 @@ describe('longSectionMarks', () => {
 
   it('stands a building over the line at its true width', () => {
     const over = aPlanBuilding({ parts: [[aRing(-80, -4, 12, 8)]] });
-    const marks = flatMarks(drawn([over, aPlanBuilding({ id: '8' })]));
+    const marks = flatMarks(drawn([over, aPlanBuilding({ id: '8' })]).marks);
     const standing = marks.flatMap((mark) => (mark.kind === 'toned' ? mark.rings : []));
     expect(standing).toHaveLength(1);
     const xs = standing[0]?.map(([x]) => x) ?? [];
@@ -68,9 +72,8 @@ describe('longSectionMarks', () => {
 
   it('keeps the references of buildings clear of its title', () => {
     const reference = 'R'.repeat(13);
-    const words = wordMarks(
-      drawn([aPlanBuilding({ reference, parts: [[aRing(-80, -4, 12, 8)]] })]),
-    );
+    const over = aPlanBuilding({ reference, parts: [[aRing(-80, -4, 12, 8)]] });
+    const words = wordMarks(drawn([over]).marks);
     const [name] = words.filter((one) => one.words === reference);
     const [title] = words.filter((one) => one.words.startsWith('Long section'));
     const top = (name?.at[1] ?? NaN) - evenMeasure(reference, name?.size ?? NaN, false);
@@ -79,7 +82,7 @@ describe('longSectionMarks', () => {
   });
 
   it('says from where to where it runs', () => {
-    const words = wordMarks(drawn()).map((one) => one.words);
+    const words = wordMarks(drawn().marks).map((one) => one.words);
     expect(words).toContain('Long section from 0+400 to 0+520');
   });
 });

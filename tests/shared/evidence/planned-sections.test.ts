@@ -3,7 +3,6 @@ import { lineOnGround } from '../../../shared/evidence/line-on-ground.ts';
 import { sheetLayout } from '../../../shared/evidence/paper-sizes.ts';
 import {
   boxOfSection,
-  depthAt,
   plannedSections,
   sectionHeight,
 } from '../../../shared/evidence/planned-sections.ts';
@@ -34,12 +33,13 @@ describe('plannedSections', () => {
 
   it('puts no more sections on a sheet than its window is high', () => {
     const sheets = planned({ across: [100, 300, 500, 700, 900] });
-    const found = sheets.flatMap((one) => (one.kind === 'cross sections' ? [one.chainages] : []));
-    expect(found.flat()).toEqual([100, 300, 500, 700, 900]);
+    const found = sheets.flatMap((one) => (one.kind === 'cross sections' ? [one] : []));
+    expect(found.flatMap(({ chainages }) => chainages)).toEqual([100, 300, 500, 700, 900]);
     const { window } = sheetLayout('A3');
-    for (const chainages of found) {
-      const tall = sectionHeight(someSections(), depthAt(DESIGN, chainages));
-      expect(tall * chainages.length).toBeLessThanOrEqual(window.bottom - window.top);
+    for (const one of found) {
+      expect(sectionHeight(one) * one.chainages.length).toBeLessThanOrEqual(
+        window.bottom - window.top,
+      );
     }
   });
 
@@ -61,15 +61,15 @@ describe('plannedSections', () => {
   });
 });
 
-describe('depthAt', () => {
+describe('the depth of sections', () => {
   it('is from the ground to half a diameter under the invert, the deepest', () => {
     const levels = [
       { chainage: 0, level: -20 },
       { chainage: 1000, level: -30 },
     ];
     const design = aDesign({ levels, groundLevel: 2 });
-    expect(depthAt(design, [0])).toBe(28);
-    expect(depthAt(design, [0, 500])).toBe(33);
+    expect(planned({ across: [0] }, design)[0]?.depth).toBe(28);
+    expect(planned({ across: [0, 500] }, design)[0]?.depth).toBe(33);
   });
 });
 
