@@ -1,9 +1,11 @@
 import { randomUUID } from 'node:crypto';
+import type { Transaction } from 'sequelize';
 import type { z } from 'zod';
 import { plannedSheets } from '../../shared/evidence/planned-sheets.ts';
 import type { EvidenceLayout, newPrintSchema } from '../../shared/schemas/evidence.ts';
+import { AppError } from '../errors.ts';
 import { printFile } from '../evidence/print-file.ts';
-import { insertPrint } from '../models/prints.ts';
+import { countWaitingPrints, insertPrint } from '../models/prints.ts';
 import { Run } from '../models/run.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
@@ -20,6 +22,19 @@ async function refuseBadLayout(layout: EvidenceLayout, runId: string): Promise<v
   refusingBadValues('layout', () => plannedSheets(layout, design));
 }
 
+/** So many prints of a scheme wait at the most: each keeps the machine busy for a while. */
+const MOST_WAITING = 10;
+
+async function refuseMany(
+  database: Services['database'],
+  schemeId: string,
+  transaction: Transaction,
+): Promise<void> {
+  if ((await countWaitingPrints(database, schemeId, transaction)) < MOST_WAITING) return;
+  const message = `${MOST_WAITING} prints of this scheme are waiting already. Wait until one of them is done, or cancel one.`;
+  throw new AppError('conflict', message);
+}
+
 /** Asks for a print of a complete run: it is drawn beside requests. */
 export async function askPrint(
   { database, env, jobs }: Pick<Services, 'database' | 'env' | 'jobs'>,
@@ -33,6 +48,7 @@ export async function askPrint(
   const id = randomUUID();
   await database.transaction(async (transaction) => {
     await lockScheme(scheme, transaction);
+    await refuseMany(database, schemeId, transaction);
     await insertPrint(
       database,
       { id, schemeId, runId, name, layout, by: by?.id ?? null },

@@ -1,6 +1,4 @@
-import { rm } from 'node:fs/promises';
 import { AppError } from '../errors.ts';
-import { printFile } from '../evidence/print-file.ts';
 import { stopPrint } from '../models/prints.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
@@ -10,7 +8,7 @@ import { recordChange } from './record-change.ts';
 
 /** Stops a print for good, whether it waits or is being drawn; nothing of it stays on the disk. */
 export async function cancelPrint(
-  { database, env, jobs }: Pick<Services, 'database' | 'env' | 'jobs'>,
+  { database, jobs }: Pick<Services, 'database' | 'jobs'>,
   by: Actor,
   scheme: Scheme,
   id: string,
@@ -24,5 +22,4 @@ export async function cancelPrint(
     const subject = { kind: 'print', id };
     await recordChange({ by, schemeId: scheme.id, action: 'cancel print', subject }, transaction);
   });
-  await rm(printFile(env, id), { force: true });
 }

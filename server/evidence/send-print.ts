@@ -3,7 +3,7 @@ import type { Response } from 'express';
 import type { Env } from '../env.ts';
 import { AppError } from '../errors.ts';
 import type { FoundPrint } from '../models/prints.ts';
-import { printFile } from './print-file.ts';
+import { fingerprintOf, printFile } from './print-file.ts';
 
 function fileName({ number, name, runNumber }: FoundPrint): string {
   const words = name
@@ -15,8 +15,19 @@ function fileName({ number, name, runNumber }: FoundPrint): string {
   return [`print-${number}`, words, `run-${runNumber}.pdf`].filter((one) => one !== '').join('-');
 }
 
-/** Sends the file of a print that is whole. */
-export function sendPrint(
+const GONE = 'The file of this print is not on this server. Print it again.';
+const CHANGED =
+  'The file of this print is not what was printed, so it is not sent. Print it again.';
+
+/** Refuses a file that is not there or no longer what was printed. */
+async function refuseOther(file: string, { fingerprint }: FoundPrint): Promise<void> {
+  const found = await fingerprintOf(file).catch(() => null);
+  if (found === null) throw new AppError('not-found', GONE);
+  if (found !== fingerprint) throw new AppError('conflict', CHANGED);
+}
+
+/** Sends the file of a print that is whole, as it was printed. */
+export async function sendPrint(
   res: Response,
   env: Pick<Env, 'PRINTS_FOLDER'>,
   print: FoundPrint,
@@ -25,14 +36,15 @@ export function sendPrint(
     throw new AppError('conflict', 'This print is not done, so there is no file of it.');
   }
   const file = printFile(env, print.id);
+  await refuseOther(file, print);
   const own = { root: path.dirname(file), dotfiles: 'allow', cacheControl: false, lastModified: false, etag: false } as const; // prettier-ignore
   res.attachment(fileName(print)).type('application/pdf');
   res.set({ 'X-Content-Type-Options': 'nosniff', 'Cache-Control': 'private, no-cache' });
-  return new Promise((resolve, reject) => {
+  await new Promise<void>((resolve, reject) => {
     res.sendFile(path.basename(file), own, (error?: Error) => {
       // whoever has seen enough goes; what was sent cannot be taken back
       if (error === undefined || res.headersSent) resolve();
-      else reject(new AppError('not-found', 'The file of this print is not on this server.'));
+      else reject(new AppError('not-found', GONE));
     });
   });
 }

@@ -14,7 +14,7 @@ export function openJobs(tools: Tools): Jobs {
   return createJobs({
     run: (job, signal) => runInThread(tools.env.DATABASE_URL, job, signal),
     onFailed: (job, error) => failJob(tools, job, error),
-    onEnded: tidyJob,
+    onEnded: (job) => tidyJob(tools.database, job),
     atOnce: AT_ONCE,
   });
 }
@@ -25,7 +25,7 @@ export function openJobsInline(tools: Tools): Jobs {
   return createJobs({
     run: (job, signal) => runJob({ database, signal, onChecking: () => undefined }, job),
     onFailed: (job, error) => failJob(tools, job, error),
-    onEnded: tidyJob,
+    onEnded: (job) => tidyJob(tools.database, job),
     atOnce: AT_ONCE,
   });
 }

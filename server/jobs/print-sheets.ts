@@ -1,21 +1,12 @@
-import { createHash } from 'node:crypto';
-import { createReadStream } from 'node:fs';
 import { mkdir, rename, rm, stat } from 'node:fs/promises';
 import path from 'node:path';
-import { pipeline } from 'node:stream/promises';
 import { recordChange } from '../commands/record-change.ts';
 import { AppError } from '../errors.ts';
-import { unfinishedFile } from '../evidence/print-file.ts';
+import { fingerprintOf, unfinishedFile } from '../evidence/print-file.ts';
 import { PRINTERS } from '../evidence/printers.ts';
 import { beginPrint, finishPrint, writePrintProgress, type FoundPrint } from '../models/prints.ts';
 import { Scheme } from '../models/scheme.ts';
 import type { JobTools, PrintJob } from './job.ts';
-
-async function fingerprintOf(file: string): Promise<string> {
-  const hash = createHash('sha256');
-  await pipeline(createReadStream(file), hash);
-  return hash.digest('hex');
-}
 
 /** Draws a print into a file that is not whole yet; how many sheets it has. */
 async function draw(tools: JobTools, print: FoundPrint, file: string): Promise<number> {

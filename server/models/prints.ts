@@ -28,6 +28,32 @@ export function findPrints(
   );
 }
 
+/** How many prints of a scheme are not drawn yet. */
+export async function countWaitingPrints(
+  database: Sequelize,
+  schemeId: string,
+  transaction: Transaction,
+): Promise<number> {
+  const [row] = await database.query<{ count: number }>(
+    `select count(*)::integer as count from prints
+     where scheme_id = $1 and state in ('waiting', 'printing')`,
+    { type: QueryTypes.SELECT, bind: [schemeId], transaction },
+  );
+  return row?.count ?? 0;
+}
+
+/** Which of some prints are done. */
+export async function printsThatAreDone(
+  database: Sequelize,
+  ids: readonly string[],
+): Promise<string[]> {
+  const rows = await database.query<{ id: string }>(
+    `select id from prints where id = any($1::uuid[]) and state = 'done'`,
+    { type: QueryTypes.SELECT, bind: [ids] },
+  );
+  return rows.map(({ id }) => id);
+}
+
 /** Keeps what was asked for, with the next number of the scheme. */
 export async function insertPrint(
   database: Sequelize,

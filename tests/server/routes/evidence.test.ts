@@ -1,5 +1,5 @@
 import { createHash, randomUUID } from 'node:crypto';
-import { existsSync, readdirSync, writeFileSync } from 'node:fs';
+import { appendFileSync, existsSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
 import {
   aboutSheetsSchema,
@@ -209,6 +209,47 @@ describe('a print', () => {
     expect(readdirSync(services().env.PRINTS_FOLDER).filter((name) => name.includes(id))).toEqual(
       [],
     );
+  });
+
+  test('is refused where ten of the scheme wait already', async () => {
+    const { scheme, agent, base, prints, run } = await begin();
+    for (let k = 0; k < 10; k += 1) await aWaitingPrint(scheme, run.id);
+    const asked = { name: 'One more', layout: PLAN };
+    const answer = await agent.post(prints).send(asked);
+    expect(answer.status).toBe(409);
+    expect(answer.body).toMatchObject({ error: { message: expect.stringContaining('10 prints') as string } }); // prettier-ignore
+    const [first] = printsSchema.parse((await agent.get(`${base}/prints`)).body);
+    await agent.post(`${base}/prints/${first?.id}/cancel`).send({});
+    expect((await agent.post(prints).send(asked)).status).toBe(201);
+    await services().jobs.idle();
+  });
+
+  test('is not sent where its file is gone or another', async () => {
+    const { agent, base, prints } = await begin();
+    const asked = await agent.post(prints).send({ name: 'A', layout: PLAN });
+    const { id } = printSchema.parse(asked.body);
+    await services().jobs.idle();
+    const [file, address] = [printFile(services().env, id), `${base}/prints/${id}/file`];
+    appendFileSync(file, ' ');
+    const changed = await agent.get(address);
+    expect([changed.status, changed.body]).toMatchObject([
+      409,
+      { error: { message: expect.stringContaining('not what was printed') as string } },
+    ]);
+    rmSync(file);
+    expect((await agent.get(address)).status).toBe(404);
+  });
+
+  test('that was stopped when its file was whole leaves none behind', async () => {
+    const { scheme, agent, base, prints, run } = await begin();
+    const [done, stopped] = [await agent.post(prints).send({ name: 'A', layout: PLAN }), await aWaitingPrint(scheme, run.id)]; // prettier-ignore
+    await services().jobs.idle();
+    await agent.post(`${base}/prints/${stopped}/cancel`).send({});
+    const { env } = services();
+    writeFileSync(printFile(env, stopped), 'whole');
+    await recoverPrints(services());
+    expect(existsSync(printFile(env, stopped))).toBe(false);
+    expect(existsSync(printFile(env, printSchema.parse(done.body).id))).toBe(true);
   });
 
   test('that a server left half done is done again at the next start', async () => {
