@@ -1,13 +1,16 @@
 import { mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
-import { afterAll, expect, test } from 'vitest';
+import { afterAll, describe, expect, test } from 'vitest';
+import { CATEGORIES } from '../../../../shared/damage/categories.ts';
 import { groundFrame } from '../../../../shared/evidence/ground-frame.ts';
-import { lineMark, type Mark } from '../../../../shared/evidence/marks.ts';
+import { cornersOf, lineMark, type Mark, type Tone } from '../../../../shared/evidence/marks.ts';
 import { sheetLayout } from '../../../../shared/evidence/paper-sizes.ts';
 import type { Sheet } from '../../../../shared/evidence/sheet.ts';
+import { SETTLEMENT_TINTS, STAGE_TINTS } from '../../../../shared/presentation/ground-tints.ts';
 import { openSheets } from '../../../../server/documents/evidence/open-sheets.ts';
 import { linesOfPage } from '../../../support/drawn-lines.ts';
+import { greyCopy, textureOf, type Texture } from '../../../support/grey-copy.ts';
 import { bookmarksOfPdf, factsOfPdf, fontsOfPdf, textOfPdf, wordBoxesOfPdf } from '../../../support/pdf-tools.ts'; // prettier-ignore
 
 const folder = mkdtempSync(path.join(tmpdir(), 'groundsill-sheets-'));
@@ -99,4 +102,51 @@ test('hatches are fixed to the sheet: what touches reads as one tone', async () 
     const along = start[0] / POINTS_PER_MM + (297 - start[1] / POINTS_PER_MM);
     expect(Math.abs(along / 2.1 - Math.round(along / 2.1))).toBeLessThan(0.01);
   }
+});
+
+describe('a copy without colours', () => {
+  /** A house of 10 m at 1 : 2500, apart from its edge. */
+  const [HOUSE, EDGE] = [4, 0.3];
+
+  async function texturesOf(tones: readonly Tone[], dotsPerInch: number): Promise<Texture[]> {
+    const boxes = tones.map((_, k) => ({ left: 20 + 10 * k, top: 50, right: 20 + 10 * k + HOUSE, bottom: 50 + HOUSE })); // prettier-ignore
+    const marks = tones.map((tone, k): Mark => ({ kind: 'toned', tone, rings: boxes.slice(k, k + 1).map(cornersOf) })); // prettier-ignore
+    const copy = greyCopy(await drawn(aSheet(marks)), dotsPerInch);
+    return boxes.map(
+      ({ left, top, right, bottom }) =>
+      textureOf(copy, { left: left + EDGE, top: top + EDGE, right: right - EDGE, bottom: bottom - EDGE }), // prettier-ignore
+    );
+  }
+
+  /** By how much a patch is darker than the one before it, of 255. */
+  function darkening(textures: readonly Texture[]): number[] {
+    return textures.slice(1).map(({ light }, k) => (textures[k]?.light ?? NaN) - light);
+  }
+
+  // 141 dots an inch show what 200 do of A3 copied down to A4
+  test.each([200, 141])(
+    'at %i dots an inch tells categories by grey and by hatch',
+    async (dots) => {
+      const tones = CATEGORIES.map(({ category }): Tone => ({ by: 'category', number: category }));
+      const textures = await texturesOf(tones, dots);
+      for (const step of darkening(textures)) expect(step).toBeGreaterThan(20);
+      // whether grey changes up to the right, and down to the right: strokes run where it does not
+      const changes = textures.map(({ rising, falling }) => [rising > 10, falling > 10]);
+      expect(changes).toEqual([
+        [false, false],
+        [false, true],
+        [false, true],
+        [true, true],
+        [true, false],
+      ]);
+    },
+  );
+
+  test.each([
+    ['stage', STAGE_TINTS],
+    ['settlement', SETTLEMENT_TINTS],
+  ] as const)('tells one %s from the next', async (by, tints) => {
+    const textures = await texturesOf(tints.map(([number]) => ({ by, number })), 200); // prettier-ignore
+    for (const step of darkening(textures)) expect(step).toBeGreaterThan(20);
+  });
 });
