@@ -130,6 +130,20 @@ export function isInside({ left, top, right, bottom }: Rectangle, [x, y]: Spot):
 }
 
 /**
+ * What two rectangles have in common.
+ *
+ * Units: mm. Valid: rectangles that meet; of others it is none. Source: [own].
+ */
+export function overlap(a: Rectangle, b: Rectangle): Rectangle {
+  return {
+    left: Math.max(a.left, b.left),
+    top: Math.max(a.top, b.top),
+    right: Math.min(a.right, b.right),
+    bottom: Math.min(a.bottom, b.bottom),
+  };
+}
+
+/**
  * A rectangle, filled or with its outline drawn.
  *
  * Units: mm. Valid: any rectangle. Source: [own].

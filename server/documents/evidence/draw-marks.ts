@@ -1,6 +1,7 @@
 import { INK_COLOURS } from '../../../shared/evidence/ink-colours.ts';
 import {
   cornersOf,
+  overlap,
   type Mark,
   type Rectangle,
   type Spot,
@@ -57,15 +58,6 @@ function drawWords(paper: Paper, mark: Of<'words'>): void {
   paper.doc.save().transform(right, down, -down, right, x, y);
   writeLine(paper, line, from, 0);
   paper.doc.restore();
-}
-
-function overlap(a: Rectangle, b: Rectangle): Rectangle {
-  return {
-    left: Math.max(a.left, b.left),
-    top: Math.max(a.top, b.top),
-    right: Math.min(a.right, b.right),
-    bottom: Math.min(a.bottom, b.bottom),
-  };
 }
 
 /** Whether some of a mark may be seen in a window; words are taken to be. */

@@ -1,18 +1,11 @@
-import { CATEGORIES, type Category } from '../../../shared/damage/categories.ts';
-import type { Mark, Rectangle, Spot, Tone } from '../../../shared/evidence/marks.ts';
-import { DAMAGE, HATCH_TILE } from '../../../shared/presentation/damage-style.ts';
-import { SETTLEMENT_TINTS, STAGE_TINTS } from '../../../shared/presentation/ground-tints.ts';
+import { lookOfTone, TONE_EDGE, TONE_TILE } from '../../../shared/evidence/look-of-tone.ts';
+import { overlap, type Mark, type Rectangle, type Spot } from '../../../shared/evidence/marks.ts';
+import { HATCH_TILE } from '../../../shared/presentation/damage-style.ts';
 import { fillCategory } from '../pdf/hatch.ts';
-import { INKS } from '../pdf/inks.ts';
 import type { Paper } from '../pdf/paper.ts';
 import { trace } from '../pdf/trace.ts';
 
 type Toned = Extract<Mark, { kind: 'toned' }>;
-
-/** The side of a tile of hatch on paper, in millimetres, and of a pixel of it. */
-const TILE = 2.1;
-const PIXEL = TILE / HATCH_TILE;
-const EDGE = 0.18;
 
 /** The least rectangle round rings. */
 export function boundsOf(rings: readonly (readonly Spot[])[]): Rectangle {
@@ -28,35 +21,20 @@ export function boundsOf(rings: readonly (readonly Spot[])[]): Rectangle {
   return { left, top, right, bottom };
 }
 
-function categoryOf({ by, number }: Tone): Category | undefined {
-  if (by !== 'category') return undefined;
-  return CATEGORIES.find(({ category }) => category === number)?.category;
-}
-
-function tintOf({ by, number }: Tone): string {
-  const tints = by === 'stage' ? STAGE_TINTS : SETTLEMENT_TINTS;
-  return tints.find(([of]) => of === number)?.[1] ?? INKS.paper;
-}
-
 /** Fills rings as their tone is drawn everywhere, and draws their edge; hatched no further than is seen. */
 export function drawToned(paper: Paper, { tone, rings }: Toned, seen: Rectangle): void {
   const { doc } = paper;
   const shape = () => {
     for (const ring of rings) trace(paper, ring, true);
   };
-  const category = categoryOf(tone);
-  const own = boundsOf(rings);
-  const bounds = {
-    left: Math.max(own.left, seen.left),
-    top: Math.max(own.top, seen.top),
-    right: Math.min(own.right, seen.right),
-    bottom: Math.min(own.bottom, seen.bottom),
-  };
-  if (category === undefined) {
+  const { category, fill, edge } = lookOfTone(tone);
+  if (category === null) {
     shape();
-    doc.fill(tintOf(tone), 'even-odd');
-  } else fillCategory(paper, category, shape, bounds, PIXEL);
+    doc.fill(fill, 'even-odd');
+  } else {
+    const bounds = overlap(boundsOf(rings), seen);
+    fillCategory(paper, category, shape, bounds, TONE_TILE / HATCH_TILE);
+  }
   shape();
-  const edge = category === undefined ? INKS.bandLine : DAMAGE[category].edge;
-  doc.lineWidth(EDGE).lineJoin('round').strokeColor(edge).stroke();
+  doc.lineWidth(TONE_EDGE).lineJoin('round').strokeColor(edge).stroke();
 }

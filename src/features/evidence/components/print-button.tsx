@@ -1,16 +1,13 @@
-import { useQuery } from '@tanstack/react-query';
 import { Button } from '../../../components/ui/button.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
-import { printsQuery, useAskPrint } from '../api/prints.ts';
+import { useAskPrint } from '../api/prints.ts';
 import type { EvidenceDesk } from '../hooks/use-evidence-desk.ts';
-import { PrintState } from './print-list.tsx';
+import { AskedPrint } from './print-list.tsx';
 
 /** Asks for what is laid out, and shows how it fares. */
 export function PrintButton({ desk }: { readonly desk: EvidenceDesk }) {
   const { schemeId, layout, faults, runs, writing } = desk;
   const ask = useAskPrint(schemeId);
-  const prints = useQuery(printsQuery(schemeId));
-  const asked = prints.data?.find(({ id }) => id === ask.data?.id);
   const { run } = runs;
   if (layout === null || run === null || Object.keys(faults).length > 0) return null;
   const { title, subtitle } = layout.fields;
@@ -28,7 +25,7 @@ export function PrintButton({ desk }: { readonly desk: EvidenceDesk }) {
         Print
       </Button>
       <MutationError failed="Nothing is printed." error={ask.error} />
-      {asked !== undefined && <PrintState {...{ schemeId }} print={asked} />}
+      {ask.data !== undefined && <AskedPrint {...{ schemeId }} print={ask.data} />}
     </div>
   );
 }

@@ -70,11 +70,22 @@ function BeingMade({ schemeId, print }: PrintProps) {
 }
 
 /** How a print fares: it is waited for, can be fetched, or says why there is nothing. */
-export function PrintState({ schemeId, print }: PrintProps) {
+function PrintState({ schemeId, print }: PrintProps) {
   if (print.state === 'done') return <Done {...{ schemeId, print }} />;
   if (isBeingMade(print)) return <BeingMade {...{ schemeId, print }} />;
   if (print.state === 'cancelled') return <p className="text-small text-ink-2">Stopped.</p>;
   return <p className="text-small text-clay-deep">{print.fault ?? 'It could not be printed.'}</p>;
+}
+
+/** A print that was asked for here, as it fares. */
+export function AskedPrint({ schemeId, print }: PrintProps) {
+  const { data } = useQuery(printsQuery(schemeId));
+  const now = data?.find(({ id }) => id === print.id) ?? print;
+  return (
+    <div aria-live="polite">
+      <PrintState {...{ schemeId }} print={now} />
+    </div>
+  );
 }
 
 /** The prints of a scheme, the newest first. */

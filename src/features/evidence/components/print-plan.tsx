@@ -1,22 +1,16 @@
-import { useQuery } from '@tanstack/react-query';
 import { useState, type SubmitEvent } from 'react';
 import { Link } from 'react-router-dom';
 import { runName } from '../../../../shared/presentation/run-words.ts';
-import { PAPER_NAMES, type PrintAnswer } from '../../../../shared/schemas/evidence.ts';
 import type { RunAnswer } from '../../../../shared/schemas/runs.ts';
 import { Button } from '../../../components/ui/button.tsx';
 import { Dialog } from '../../../components/ui/dialog.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
-import { Select } from '../../../components/ui/select.tsx';
 import { evidencePath } from '../../../config/paths.ts';
-import { printsQuery, useAskPrint } from '../api/prints.ts';
-import { chosen } from '../evidence-words.ts';
+import { useAskPrint } from '../api/prints.ts';
 import { readDraft, type LayoutDraft } from '../layout-draft.ts';
 import { planAsShown, type PlanShown } from '../plan-as-shown.ts';
-import { PrintState } from './print-list.tsx';
-import { ScaleField } from './sheet-fields.tsx';
-
-const PAPERS = PAPER_NAMES.map((value) => ({ value, label: value }));
+import { AskedPrint } from './print-list.tsx';
+import { PaperField, ScaleField } from './sheet-fields.tsx';
 
 type PrintPlanProps = PlanShown & {
   readonly schemeId: string;
@@ -24,17 +18,6 @@ type PrintPlanProps = PlanShown & {
   /** The grid in the middle of the map; null where the grid does not reach. */
   readonly middle: () => readonly [number, number] | null;
 };
-
-/** The print that was asked for, as it fares. */
-function Asked({ schemeId, print }: { readonly schemeId: string; readonly print: PrintAnswer }) {
-  const { data } = useQuery(printsQuery(schemeId));
-  const now = data?.find(({ id }) => id === print.id) ?? print;
-  return (
-    <div aria-live="polite">
-      <PrintState {...{ schemeId }} print={now} />
-    </div>
-  );
-}
 
 type FormProps = Pick<PrintPlanProps, 'schemeId' | 'run'> & { readonly begin: LayoutDraft };
 
@@ -51,19 +34,11 @@ function PrintForm({ schemeId, run, begin }: FormProps) {
     if ('faults' in read || ask.isPending) return;
     ask.mutate({ runId: run.id, name: draft.fields.title, layout: read.layout });
   }
-  if (ask.data !== undefined) return <Asked {...{ schemeId }} print={ask.data} />;
+  if (ask.data !== undefined) return <AskedPrint {...{ schemeId }} print={ask.data} />;
   return (
     <form onSubmit={print} className="grid gap-3">
       <div className="grid grid-cols-2 items-start gap-3">
-        <Select
-          label="Paper"
-          options={PAPERS}
-          value={draft.paper}
-          onChange={({ target }) => {
-            const paper = chosen(PAPERS, target.value);
-            if (paper !== undefined) change({ paper });
-          }}
-        />
+        <PaperField {...{ draft, faults }} onChange={change} />
         <ScaleField {...{ draft, faults }} onChange={change} />
       </div>
       <MutationError failed="Nothing is printed." error={ask.error} />

@@ -30,10 +30,26 @@ export function ScaleField({ draft, faults, onChange }: DraftProps) {
   );
 }
 
+/** The paper that is printed on: what the kind allows. */
+export function PaperField({ draft, faults, onChange }: DraftProps) {
+  const papers = draft.kind === 'schedule' ? PAPERS.slice(0, 2) : PAPERS;
+  return (
+    <Select
+      label="Paper"
+      options={papers}
+      value={draft.paper}
+      error={faults.paper}
+      onChange={({ target }) => {
+        const paper = chosen(papers, target.value);
+        if (paper !== undefined) onChange({ paper });
+      }}
+    />
+  );
+}
+
 /** What is printed, on which paper and to which scale. */
 export function SheetFields(props: DraftProps) {
-  const { draft, faults, onChange } = props;
-  const isSchedule = draft.kind === 'schedule';
+  const { draft, onChange } = props;
   return (
     <div className="grid gap-3">
       <div>
@@ -47,17 +63,8 @@ export function SheetFields(props: DraftProps) {
         />
       </div>
       <div className="grid grid-cols-2 items-start gap-3">
-        <Select
-          label="Paper"
-          options={isSchedule ? PAPERS.slice(0, 2) : PAPERS}
-          value={draft.paper}
-          error={faults.paper}
-          onChange={({ target }) => {
-            const paper = chosen(PAPERS, target.value);
-            if (paper !== undefined) onChange({ paper });
-          }}
-        />
-        {isSchedule ? (
+        <PaperField {...props} />
+        {draft.kind === 'schedule' ? (
           <Select
             label="Buildings"
             options={ROWS}

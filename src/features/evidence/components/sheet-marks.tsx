@@ -1,19 +1,11 @@
 import { memo, useId } from 'react';
 import { INK_COLOURS } from '../../../../shared/evidence/ink-colours.ts';
-import type { Mark, Spot, Tone } from '../../../../shared/evidence/marks.ts';
-import { DAMAGE, HATCH_TILE } from '../../../../shared/presentation/damage-style.ts';
-import {
-  SETTLEMENT_TINTS,
-  STAGE_TINTS,
-  type Tint,
-} from '../../../../shared/presentation/ground-tints.ts';
-import { CATEGORIES } from '../../../../shared/damage/categories.ts';
+import { lookOfTone, TONE_EDGE, TONE_TILE } from '../../../../shared/evidence/look-of-tone.ts';
+import type { Mark, Spot } from '../../../../shared/evidence/marks.ts';
+import { HATCH_TILE } from '../../../../shared/presentation/damage-style.ts';
 import { HatchPatterns, hatchFill } from '../../../components/ui/hatch-patterns.tsx';
 
 const MM_PER_POINT = 25.4 / 72;
-/** The side of a hatch tile on paper, in mm. */
-const HATCH_MM = 2.1;
-const EDGE_OF_TINT = '#53677c';
 
 type Of<Kind extends Mark['kind']> = Extract<Mark, { kind: Kind }>;
 
@@ -26,21 +18,16 @@ function pathOf(rings: readonly (readonly Spot[])[], isClosed: boolean): string 
   return rings.map((ring) => ringPath(ring, isClosed)).join('');
 }
 
-function tintOf(tints: readonly Tint[], number: number): string {
-  return tints.find(([one]) => one === number)?.[1] ?? INK_COLOURS.paper;
-}
-
-function lookOf({ by, number }: Tone, prefix: string): { fill: string; edge: string } {
-  if (by === 'stage') return { fill: tintOf(STAGE_TINTS, number), edge: EDGE_OF_TINT };
-  if (by === 'settlement') return { fill: tintOf(SETTLEMENT_TINTS, number), edge: EDGE_OF_TINT };
-  const category = CATEGORIES[number]?.category ?? 0;
-  return { fill: hatchFill(prefix, category), edge: DAMAGE[category].edge };
-}
-
 function Toned({ mark: { tone, rings }, prefix }: { mark: Of<'toned'>; prefix: string }) {
-  const { fill, edge } = lookOf(tone, prefix);
+  const { category, fill, edge } = lookOfTone(tone);
   return (
-    <path d={pathOf(rings, true)} fillRule="evenodd" fill={fill} stroke={edge} strokeWidth={0.2} />
+    <path
+      d={pathOf(rings, true)}
+      fillRule="evenodd"
+      fill={category === null ? fill : hatchFill(prefix, category)}
+      stroke={edge}
+      strokeWidth={TONE_EDGE}
+    />
   );
 }
 
@@ -122,7 +109,7 @@ export function SheetMarks({
   const prefix = `sheet${useId()}`;
   return (
     <>
-      <HatchPatterns prefix={prefix} scale={HATCH_MM / HATCH_TILE} />
+      <HatchPatterns prefix={prefix} scale={TONE_TILE / HATCH_TILE} />
       <Marks {...{ marks, prefix, shift }} />
     </>
   );

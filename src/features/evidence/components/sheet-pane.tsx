@@ -69,7 +69,7 @@ export function SheetPane({ desk }: { readonly desk: EvidenceDesk }) {
         <Segments label="How large" segments={SIZES} value={size} onChange={setSize} />
         <Turning {...desk} />
         {move !== null && (
-          <span className="text-cap text-ink-3">
+          <span className="text-cap text-ink-3 max-sm:hidden">
             Drag the sheet, or press arrow keys on it, to move its frame.
           </span>
         )}

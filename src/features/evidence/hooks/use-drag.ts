@@ -13,7 +13,7 @@ const ARROWS: Readonly<Record<string, Spot>> = {
 
 type Drag = { readonly from: Spot; readonly shift: Spot };
 
-/** Moves what a sheet shows under its frame, by hand or with the arrow keys; told in mm at the end. */
+/** Moves what a sheet shows under its frame, by hand or with the arrow keys; told in mm at the end. Escape gives a drag up. */
 export function useDrag(width: number, onMove: ((by: Spot) => void) | null) {
   const [drag, setDrag] = useState<Drag | null>(null);
   const perPixel = (target: Element) => width / Math.max(1, target.getBoundingClientRect().width);
@@ -44,6 +44,11 @@ export function useDrag(width: number, onMove: ((by: Spot) => void) | null) {
         setDrag(null);
       },
       onKeyDown: (event: KeyboardEvent) => {
+        if (event.key === 'Escape' && drag !== null) {
+          event.stopPropagation();
+          setDrag(null);
+          return;
+        }
         const by = ARROWS[event.key];
         if (by === undefined || event.altKey || event.ctrlKey || event.metaKey) return;
         event.preventDefault();

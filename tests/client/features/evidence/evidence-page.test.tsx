@@ -113,6 +113,24 @@ describe('the page of evidence', () => {
     });
   });
 
+  it('moves what a plan shows by hand, unless Escape gives it up', async () => {
+    showEvidence();
+    const sheet = await screen.findByRole('application', { name: BUSY });
+    sheet.setPointerCapture = () => undefined;
+    const drag = () => {
+      fireEvent.pointerDown(sheet, { button: 0, clientX: 10, clientY: 10 });
+      fireEvent.pointerMove(sheet, { clientX: 12, clientY: 10 });
+    };
+    drag();
+    fireEvent.keyDown(sheet, { key: 'Escape' });
+    fireEvent.pointerUp(sheet, { clientX: 12, clientY: 10 });
+    expect(field('Easting of the middle').value).toBe('0');
+    drag();
+    fireEvent.pointerUp(sheet, { clientX: 12, clientY: 10 });
+    // pulled to the right: the middle of the frame goes west
+    expect(Number(field('Easting of the middle').value)).toBeLessThan(0);
+  });
+
   it('says where what stands on the sheet does not come', async () => {
     showEvidence({
       answers: {
