@@ -145,8 +145,8 @@ export function planSheets(drawn: Drawn): Sheet[] {
     always: [legendPart(pen, plan.content, countsOf(plan, on)), keyPart(pen, key)],
     asRoom: [
       stacked(noteParts(pen, planNotes(plan.content, on, about))),
-      ...list.inColumn,
       ...revisionPart(pen, about.fields),
+      ...list.inColumn,
       ...mostStrained(pen, on, rules.leadingCategory.value),
     ],
     title: titleOfSheet(planned, about, ''),

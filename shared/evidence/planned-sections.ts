@@ -44,11 +44,12 @@ export type PlannedSection = SectionScales & { readonly depth: number } & (
 type Asked = Extract<DrawnLayout, { kind: 'sections' }>;
 
 /**
- * What a section has over the ground, under its lowest level, and to the left for its levels.
+ * What a section has over the ground, under its lowest level, to the left for its levels, and to the right for
+ * settlement.
  *
  * Units: mm. Valid: read only. Source: [own].
  */
-export const [ABOVE, BELOW, ASIDE] = [31, 24, 22] as const;
+export const [ABOVE, BELOW, ASIDE, AFTER] = [31, 24, 22, 14] as const;
 
 /**
  * How high a section is that shows so much of the ground.
@@ -103,7 +104,7 @@ function longSections(
   const depth = depthAt(design, stations);
   refuseHigh(asked, depth, layout);
   const { left, right } = layout.window;
-  const each = ((right - left - ASIDE - 8) * denominator) / 1000;
+  const each = ((right - left - ASIDE - AFTER) * denominator) / 1000;
   const stretches = Array.from({ length: Math.ceil(line.length / each) }, (_, k) => ({
     ...{ from: k * each, to: Math.min(line.length, (k + 1) * each) },
   }));
@@ -121,7 +122,7 @@ function crossSections(
 ): PlannedSection[] {
   const { denominator, exaggeration, settlementExaggeration, halfWidth, across } = asked;
   const { left, right } = layout.window;
-  if ((2 * halfWidth * 1000) / denominator > right - left - ASIDE - 8) {
+  if ((2 * halfWidth * 1000) / denominator > right - left - ASIDE - AFTER) {
     const message =
       'The sections are wider than the sheet. Look less far to either side, or take a smaller scale.';
     throw new MethodError('outside-range', message, 'halfWidth');

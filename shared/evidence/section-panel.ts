@@ -1,6 +1,7 @@
 import type { Range } from '../numerics/range.ts';
 import { formatCount } from '../presentation/format-number.ts';
 import { niceTicks } from '../presentation/nice-ticks.ts';
+import { millimetresFromMetres } from '../units/millimetres-from-metres.ts';
 import { lineMark, type Mark, type Spot, type Stroke } from './marks.ts';
 import { ABOVE, type SectionScales } from './planned-sections.ts';
 
@@ -66,6 +67,13 @@ export function levelAxis(panel: SectionPanel, groundLevel: number, depth: numbe
   const count = Math.max(2, Math.floor((bottom - ground) / 14));
   const ticks = niceTicks(groundLevel - depth, groundLevel, count);
   return [
+    {
+      kind: 'words',
+      words: 'Level, m',
+      at: [left - TICK - 1, ground - 2],
+      size: SIZE,
+      anchor: 'end',
+    },
     lineMark([[left, ground], [left, bottom]], THIN), // prettier-ignore
     ...ticks.flatMap((level): Mark[] => [
       lineMark([[left, y(level)], [right, y(level)]], FAINT), // prettier-ignore
@@ -98,6 +106,24 @@ export function lengthAxis(
   return [lineMark([[left, bottom], [right, bottom]], THIN), ...ticks]; // prettier-ignore
 }
 
+/** The axis of settlement at the right of a section, from the ground down to its deepest. */
+function settlementAxis({ right, ground, bottom, sunk }: SectionPanel, deepest: number): Mark[] {
+  const lowest = Math.min(sunk(deepest), bottom);
+  const most = (deepest * (lowest - ground)) / (sunk(deepest) - ground);
+  const count = Math.max(2, Math.floor((lowest - ground) / 5));
+  return [
+    lineMark([[right, ground], [right, lowest]], THIN), // prettier-ignore
+    ...niceTicks(0, most, count).flatMap((settlement): Mark[] => {
+      const y = sunk(settlement);
+      const words = formatCount(Number(millimetresFromMetres(settlement).toPrecision(4)));
+      return [
+        lineMark([[right, y], [right + TICK, y]], THIN), // prettier-ignore
+        { kind: 'words', words: `${words} mm`, size: SIZE, at: [right + TICK + 1, y + 0.9] },
+      ];
+    }),
+  ];
+}
+
 /** A point of a trough, and the same where settlement is known. */
 type TroughPoint = { readonly distance: number; readonly settlement: Range | null };
 type KnownPoint = { readonly distance: number; readonly settlement: Range };
@@ -128,7 +154,8 @@ const CUT_OFF =
   'Settlement reaches below this drawing. Draw it fewer times as large to see all of it.';
 
 /**
- * The ground line, and under it the trough: its range as a band, its central values as a line.
+ * The ground line, and under it the trough: its range as a band, its central values as a line, and how deep that
+ * is at the right.
  *
  * Units: m. Valid: where the method refuses nothing is drawn; what reaches below the panel is cut off there
  * and said to be. Source: as `settlementBracket`.
@@ -141,6 +168,7 @@ export function troughMarks(panel: SectionPanel, points: readonly TroughPoint[])
   const window = { left, top: ground - 1, right, bottom };
   return [
     { kind: 'within', window, marks: runs.flatMap((run) => runMarks(panel, run)) },
+    ...(deepest > 0 ? settlementAxis(panel, deepest) : []),
     ...(isCut
       ? [
           {

@@ -104,9 +104,9 @@ export function sectionSheets(drawn: Drawn): Sheet[] {
     always: [legend(pen)],
     asRoom: [
       stacked(noteParts(pen, sectionNotes(section, about))),
+      ...revisionPart(pen, about.fields),
       ...list.inColumn,
       keyPart(pen, key),
-      ...revisionPart(pen, about.fields),
     ],
     title: titleOfSheet(planned, about, ''),
   });

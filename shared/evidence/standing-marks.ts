@@ -62,7 +62,7 @@ function nameMarks({ ground }: SectionPanel, words: string, middle: number): Mar
 
 /**
  * Buildings on the ground line of a section, at true width, with their category at the central values; their
- * references where there is room, and those whose reference has none.
+ * references where there is room, and once each those whose reference found room nowhere.
  *
  * Units: mm. Valid: in the panel. Source: [own].
  */
@@ -72,18 +72,23 @@ export function standingMarks(
   measure: Measure,
 ): { readonly marks: Mark[]; readonly unnamed: readonly Standing[] } {
   const ordered = [...standing].sort((a, b) => a.from - b.from);
-  const unnamed: Standing[] = [];
+  const named = new Set<string>();
+  const unnamed = new Map<string, Standing>();
   let last = -Infinity;
   const names = ordered.flatMap((one): Mark[] => {
-    const { reference } = one.building;
+    const { id, reference } = one.building;
     const middle = (panel.x(one.from) + panel.x(one.to)) / 2;
     // words run up the sheet, each needs its own height of print
     if (middle - last < APART || measure(reference, SIZE, false) > LONGEST) {
-      unnamed.push(one);
+      if (!unnamed.has(id)) unnamed.set(id, one);
       return [];
     }
     last = middle;
+    named.add(id);
     return nameMarks(panel, reference, middle);
   });
-  return { marks: [...ordered.map((one) => shapeOf(panel, one)), ...names], unnamed };
+  return {
+    marks: [...ordered.map((one) => shapeOf(panel, one)), ...names],
+    unnamed: [...unnamed.values()].filter(({ building }) => !named.has(building.id)),
+  };
 }

@@ -109,6 +109,11 @@ describe('crossSectionMarks', () => {
       aPlanBuilding({ id: '1', reference: 'first', parts: [[aRing(-5, 12, 10, 1)]] }),
       aPlanBuilding({ id: '2', reference: 'close', parts: [[aRing(-5, 11, 10, 1)]] }),
       aPlanBuilding({ id: '3', reference: long, parts: [[aRing(-5, -30, 10, 8)]] }),
+      aPlanBuilding({
+        id: '4',
+        reference: 'both',
+        parts: [[aRing(-5, -50, 10, 8)], [aRing(-5, -41.9, 10, 0.2)]],
+      }),
     ];
     const { marks, unnamed } = drawn(aDesign(), {}, aPlanMaterial({ buildings }));
     const written = wordMarks(marks).map(({ words }) => words);
@@ -117,7 +122,20 @@ describe('crossSectionMarks', () => {
       { reference: 'close', where: '0+500, 12 m left to 11 m left' },
       { reference: long, where: '0+500, 22 m right to 30 m right' },
     ]);
-    expect(flatMarks(marks).filter(({ kind }) => kind === 'toned')).toHaveLength(3);
+    expect(flatMarks(marks).filter(({ kind }) => kind === 'toned')).toHaveLength(5);
+    expect(written).toContain('both');
+  });
+
+  it('has settlement and levels to be read off at its sides', () => {
+    const design = aDesign({ volumeLoss: { low: 0.01, central: 0.02, high: 0.03 } });
+    const words = wordMarks(drawn(design).marks);
+    const ticks = words.filter((one) => one.words.endsWith(' mm') && one.at[0] > AT.left + 240);
+    expect(ticks.length).toBeGreaterThan(2);
+    for (const { words: text, at } of ticks) {
+      // drawn 400 times as large as lengths at 1 : 500, words a little under their tick
+      expect(at[1] - 0.9 - GROUND).toBeCloseTo((parseFloat(text) / 1000) * 400 * 2, 6);
+    }
+    expect(words.map((one) => one.words)).toContain('Level, m');
   });
 
   it('keeps each section to its own height', () => {

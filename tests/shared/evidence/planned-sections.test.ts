@@ -55,7 +55,7 @@ describe('plannedSections', () => {
 
   it('takes sections just as wide as the sheet', () => {
     const { window } = sheetLayout('A3');
-    const widest = (window.right - window.left - 30) / 4;
+    const widest = (window.right - window.left - 36) / 4;
     expect(planned({ halfWidth: widest })).toHaveLength(1);
     expect(() => planned({ halfWidth: widest + 0.1 })).toThrow();
   });
