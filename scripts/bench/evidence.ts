@@ -2,21 +2,25 @@ import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
+import { setFlagsFromString } from 'node:v8';
+import { runInNewContext } from 'node:vm';
 import { askPrint } from '../../server/commands/ask-print.ts';
 import { keptPrint } from '../../server/commands/kept-print.ts';
+import { PRINTERS } from '../../server/evidence/printers.ts';
+import type { Printing } from '../../server/evidence/printing.ts';
 import type { FoundPrint } from '../../server/models/prints.ts';
 import { Run } from '../../server/models/run.ts';
 import type { Scheme } from '../../server/models/scheme.ts';
 import type { Services } from '../../server/services.ts';
 import { plannedSheets } from '../../shared/evidence/planned-sheets.ts';
-import type { DrawnLayout } from '../../shared/schemas/evidence.ts';
+import type { DrawnLayout, EvidenceLayout } from '../../shared/schemas/evidence.ts';
 
 const SHEETS = 60;
 
 const STRIP: Extract<DrawnLayout, { kind: 'strip' }> = {
   kind: 'strip',
   paper: 'A3',
-  denominator: 500,
+  denominator: 200,
   fields: {
     ...{ title: 'Strip', subtitle: '', number: '', prepared: '', checked: '', approved: '' },
     ...{ issued: '', revisions: [] },
@@ -32,34 +36,73 @@ function stripOf({ design }: Run): DrawnLayout {
   return { ...STRIP, to };
 }
 
+const SCHEDULE: EvidenceLayout = {
+  ...{ kind: 'schedule', paper: 'A3', rows: 'all' },
+  fields: { ...STRIP.fields, title: 'Schedule' },
+};
+
 async function untilPrinted(
   { database }: Services,
   scheme: Scheme,
   id: string,
-): Promise<{ readonly print: FoundPrint; readonly peak: number }> {
-  let peak = 0;
+): Promise<FoundPrint> {
   for (;;) {
     const print = await keptPrint(database, scheme.id, id);
-    peak = Math.max(peak, process.memoryUsage().rss);
-    if (print.state === 'done') return { print, peak };
+    if (print.state === 'done') return print;
     if (print.state === 'failed') throw new Error(print.fault ?? print.state);
     await sleep(50);
   }
 }
 
-/** Prints what a series of plans along the line takes; the peak of memory is of the whole process. */
-export async function benchPrint(services: Services, scheme: Scheme, runId: string): Promise<void> {
+setFlagsFromString('--expose-gc');
+const sweep = runInNewContext('gc') as () => void;
+
+/** What is held on the heap while a print is drawn, swept at each tenth of it, in MB. */
+async function heldWhileDrawn(printing: Omit<Printing, 'onSheet'>): Promise<number[]> {
+  const held: number[] = [];
+  await PRINTERS[printing.print.layout.kind]({
+    ...printing,
+    onSheet: (done, sheets) => {
+      if (done >= ((held.length + 1) * sheets) / 10) {
+        sweep();
+        held.push(process.memoryUsage().heapUsed / 1e6);
+      }
+      return Promise.resolve();
+    },
+  });
+  return held;
+}
+
+async function benchLayout(
+  services: Services,
+  { scheme, runId, folder }: { scheme: Scheme; runId: string; folder: string },
+  layout: EvidenceLayout,
+): Promise<void> {
+  const start = performance.now();
+  const tools = { ...services, env: { ...services.env, PRINTS_FOLDER: folder } };
+  const id = await askPrint(tools, null, scheme, { runId, name: 'A', layout });
+  const print = await untilPrinted(services, scheme, id);
+  const seconds = ((performance.now() - start) / 1000).toFixed(1);
+  const megabytes = ((print.bytes ?? 0) / 1e6).toFixed(1);
+  const file = path.join(folder, 'held.pdf');
+  const held = await heldWhileDrawn({ database: services.database, scheme, print, file });
+  rmSync(file);
+  const words = held.map((one) => one.toFixed(0)).join(', ');
+  console.log(`print: ${layout.kind}, ${print.sheets ?? 0} A3 sheets in ${seconds} s, ${megabytes} MB; holds at each tenth ${words} MB`); // prettier-ignore
+}
+
+/** Prints what a series of plans along the line and a schedule of the whole town take. */
+export async function benchPrints(
+  services: Services,
+  scheme: Scheme,
+  runId: string,
+): Promise<void> {
   const folder = mkdtempSync(path.join(tmpdir(), 'groundsill-bench-prints-'));
   try {
     const run = await Run.findByPk(runId, { rejectOnEmpty: true });
-    const [before, start] = [process.memoryUsage().rss, performance.now()];
-    const tools = { ...services, env: { ...services.env, PRINTS_FOLDER: folder } };
-    const asked = { runId, name: 'Strip', layout: stripOf(run) };
-    const id = await askPrint(tools, null, scheme, asked);
-    const { print, peak } = await untilPrinted(services, scheme, id);
-    const seconds = (performance.now() - start) / 1000;
-    const [size, memory, rest] = [print.bytes ?? 0, peak, before].map((one) => (one / 1e6).toFixed(0)); // prettier-ignore
-    console.log(`print: ${print.sheets ?? 0} A3 sheets in ${seconds.toFixed(1)} s, ${size ?? ''} MB; process ${memory ?? ''} MB at most, ${rest ?? ''} MB before`); // prettier-ignore
+    for (const layout of [stripOf(run), SCHEDULE]) {
+      await benchLayout(services, { scheme, runId, folder }, layout);
+    }
   } finally {
     rmSync(folder, { recursive: true });
   }

@@ -10,7 +10,7 @@ import { registerOf } from '../../server/register/register-of.ts';
 import type { Services } from '../../server/services.ts';
 import { RESULT_COLUMN_NAMES } from '../../shared/schemas/result-columns.ts';
 import { benchDecisions } from './decisions.ts';
-import { benchPrint } from './evidence.ts';
+import { benchPrints } from './evidence.ts';
 import { untilLookedAfter } from './looked-after.ts';
 import { benchPages, type NamedFilter } from './register-pages.ts';
 import { townToRun } from './town-to-run.ts';
@@ -64,7 +64,7 @@ async function benchSize(services: Services, count: number): Promise<void> {
     const megabytes = (peak / 1e6).toFixed(0);
     say(count, `${name} ${whole.toFixed(1)} s, ${toStart.toFixed(1)} s of it taking the register down; process ${megabytes} MB`); // prettier-ignore
     if (name === 'second') continue;
-    if (count === PRINTED) await benchPrint(services, scheme, id);
+    if (count === PRINTED) await benchPrints(services, scheme, id);
     say(count, await wallsWorkedOut(services, id));
     const reading = performance.now();
     const text = await findMapText(services.database, id);
