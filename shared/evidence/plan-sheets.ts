@@ -144,7 +144,7 @@ export function planSheets(drawn: Drawn): Sheet[] {
   const column = columnMarks(layout, pen, {
     always: [legendPart(pen, plan.content, countsOf(plan, on)), keyPart(pen, key)],
     asRoom: [
-      stacked(noteParts(pen, planNotes(plan.content, on, about))),
+      stacked(noteParts(pen, planNotes(plan.content, { buildings: on, material }, about))),
       ...revisionPart(pen, about.fields),
       ...list.inColumn,
       ...mostStrained(pen, on, rules.leadingCategory.value),

@@ -1,8 +1,10 @@
 import { CAUTIONS } from '../cautions.ts';
 import { designParts, figure, percent, rangeWords } from '../presentation/design-words.ts';
 import { chainageWords } from '../presentation/chainage-words.ts';
+import { formatCount } from '../presentation/format-number.ts';
 import type { PlanContent } from '../schemas/evidence.ts';
-import type { PlanBuilding } from './plan-material.ts';
+import { MATERIAL_LIMITS } from '../schemas/evidence-material.ts';
+import type { PlanBuilding, PlanMaterial } from './plan-material.ts';
 import type { AboutSheets } from './sheet.ts';
 
 const MEANING: Readonly<Record<PlanContent['shows'], string>> = {
@@ -49,15 +51,28 @@ function bracketNote(buildings: readonly PlanBuilding[], about: AboutSheets): st
   ];
 }
 
+/** What is fetched for a sheet is bounded, and whoever misses a street is told. */
+function backgroundNote(isShown: boolean, { background }: PlanMaterial): string[] {
+  const most = MATERIAL_LIMITS.background;
+  if (!isShown || background.length < most) return [];
+  return [`Of the background the ${formatCount(most)} largest shapes are drawn.`];
+}
+
 /**
  * The notes of a plan.
  *
- * Units: none. Valid: the buildings of the sheet. Source: [own].
+ * Units: none. Valid: the buildings of the sheet, and all that it was drawn from. Source: [own].
  */
 export function planNotes(
-  { shows }: PlanContent,
-  buildings: readonly PlanBuilding[],
+  { shows, background }: PlanContent,
+  { buildings, material }: { buildings: readonly PlanBuilding[]; material: PlanMaterial },
   about: AboutSheets,
 ): string[] {
-  return [MEANING[shows], ...runNotes(about), ...bracketNote(buildings, about), CAUTIONS.join(' ')];
+  return [
+    MEANING[shows],
+    ...runNotes(about),
+    ...bracketNote(buildings, about),
+    ...backgroundNote(background, material),
+    CAUTIONS.join(' '),
+  ];
 }

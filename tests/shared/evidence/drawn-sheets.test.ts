@@ -6,6 +6,7 @@ import type { Mark, Rectangle } from '../../../shared/evidence/marks.ts';
 import { plannedSheets } from '../../../shared/evidence/planned-sheets.ts';
 import type { PlanMaterial } from '../../../shared/evidence/plan-material.ts';
 import type { Sheet } from '../../../shared/evidence/sheet.ts';
+import { MATERIAL_LIMITS } from '../../../shared/schemas/evidence-material.ts';
 import type { DrawnLayout, TitleFields } from '../../../shared/schemas/evidence.ts';
 import { aDesign, aRange } from '../../support/designs.ts';
 import { aPlan, aStrip, someSections } from '../../support/evidence.ts';
@@ -87,6 +88,14 @@ describe('drawnSheets', () => {
     const texts = wordMarks(sheets[0]?.marks ?? []).map((mark) => mark.words.toLowerCase());
     const counts = CATEGORIES.map(({ name }) => texts[texts.indexOf(name.toLowerCase()) + 1]);
     expect(counts).toEqual(['3', '3', '2', '2', '2']);
+  });
+
+  it('says when there is more background than it draws', () => {
+    const street = { layer: 'streets', name: null, isArea: false, lines: [] } as const;
+    const full = Array.from({ length: MATERIAL_LIMITS.background }, () => street);
+    const told = /largest shapes/;
+    expect(textOf(drawn(aPlan([0, 0]), { ...MATERIAL, background: full }))).toMatch(told);
+    expect(textOf(drawn(aPlan([0, 0]), { ...MATERIAL, background: full.slice(1) }))).not.toMatch(told); // prettier-ignore
   });
 
   it('counts no building whose middle is beyond the sheet', () => {
