@@ -1,7 +1,5 @@
-import { boundingBox } from '../geometry/bounding-box.ts';
-import { pointInPolygon } from '../geometry/point-in-polygon.ts';
 import { millimetresFromMetres } from '../units/millimetres-from-metres.ts';
-import { labelCorners, type LabelBox } from './label-box.ts';
+import { cornersOnBuildings, type Outline } from './corners-on-buildings.ts';
 import type { Measure, Rectangle, Spot } from './marks.ts';
 import type { Wanted } from './place-labels.ts';
 import { spotsAlong } from './spots-along.ts';
@@ -16,19 +14,6 @@ export const CONTOUR_SIZE = 7;
 
 /** A contour is labelled once in so many mm of it. */
 const EVERY = 130;
-
-type Outline = readonly (readonly Spot[])[];
-
-/** Tells how many corners of a label, and its middle, lie on buildings. */
-function buildingsUnder(outlines: readonly Outline[]): (box: LabelBox) => number {
-  const boxed = outlines.map((rings) => ({ rings, box: boundingBox(rings.flat()) }));
-  const isOn = ([x, y]: Spot) =>
-    boxed.some(
-      ({ rings, box: { west, east, south, north } }) =>
-        x >= west && x <= east && y >= south && y <= north && pointInPolygon([x, y], rings),
-    );
-  return (box) => [box.middle, ...labelCorners(box)].filter(isOn).length;
-}
 
 /**
  * What a contour says, and a place of it.
@@ -70,7 +55,7 @@ export function contourLabels(
   contours: readonly { readonly level: number; readonly line: readonly Spot[] }[],
   { window, measure, outlines }: Drawn,
 ): Wanted<ContourLabel>[] {
-  const under = buildingsUnder(outlines);
+  const under = cornersOnBuildings(outlines);
   return contours.flatMap(({ level, line }) => {
     const words = `${millimetresFromMetres(level)} mm`;
     const size = { wide: measure(words, CONTOUR_SIZE, false) + 1.6, tall: 3 };

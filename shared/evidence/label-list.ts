@@ -1,6 +1,7 @@
 import type { PlanPoint } from '../geometry/point.ts';
 import { nameLabels, type LabelledBuilding } from './building-labels.ts';
 import type { GroundFrame } from './ground-frame.ts';
+import type { LabelBox } from './label-box.ts';
 import { leadMarks } from './label-marks.ts';
 import type { Mark, Measure } from './marks.ts';
 import { placeLabels } from './place-labels.ts';
@@ -61,7 +62,8 @@ export function labelList(
 const SIZE = 6.5;
 
 /**
- * The numbers of the list where there is still room for them; a line is found by its grid reference as well.
+ * The numbers of the list where there is still room for them, and what is taken on the sheet afterwards; a line is
+ * found by its grid reference as well.
  *
  * Units: mm. Valid: any list. Source: [own].
  */
@@ -70,11 +72,14 @@ export function numberMarks(
   { taken }: Pick<PlanLabels, 'taken'>,
   lines: readonly ListedLine[],
   measure: Measure,
-): Mark[] {
+): { readonly marks: Mark[]; readonly taken: readonly LabelBox[] } {
   const wanted = lines.map(({ number, place }): LabelledBuilding => ({
     ...{ id: String(number), words: String(number), rings: [], middle: frame.place(place) },
   }));
   const spots = nameLabels(wanted, (words) => measure(words, SIZE, false));
   const { placed } = placeLabels(frame.window, taken, spots);
-  return placed.flatMap(({ what, box }) => leadMarks(box, what.words, what.middle, SIZE));
+  return {
+    marks: placed.flatMap(({ what, box }) => leadMarks(box, what.words, what.middle, SIZE)),
+    taken: [...taken, ...placed.map(({ box }) => box)],
+  };
 }

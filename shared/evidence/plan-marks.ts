@@ -15,7 +15,12 @@ const OUTLINE: Stroke = { ink: 'buildingEdge', width: 0.15 };
 /** The line that everything is read by, and the one that is only where settlement is no longer drawn. */
 const [EMPHASISED, LEAST] = [0.01, 0.001];
 
-function ringsOf({ place }: GroundFrame, { parts }: PlanBuilding): Spot[][] {
+/**
+ * The outline of a building on paper.
+ *
+ * Units: mm. Valid: any building. Source: [own].
+ */
+export function ringsOf({ place }: GroundFrame, { parts }: PlanBuilding): Spot[][] {
   return parts.flatMap((part) => part.map((ring) => ring.map(place)));
 }
 
@@ -57,19 +62,27 @@ function contourMarks({ place }: GroundFrame, { contours }: PlanMaterial): Mark[
 /**
  * All that stands inside the neat line of a plan but the signs over it.
  *
- * Units: mm. Valid: labels of the same plan. Source: [own].
+ * Units: mm. Valid: labels and names of streets of the same plan. Source: [own].
  */
 export function groundMarks(
   plan: PlannedPlan,
   material: PlanMaterial,
-  design: AlignmentDesign,
-  { placed, ticks }: Pick<PlanLabels, 'placed' | 'ticks'>,
+  {
+    design,
+    labels: { placed, ticks },
+    streets,
+  }: {
+    readonly design: AlignmentDesign;
+    readonly labels: Pick<PlanLabels, 'placed' | 'ticks'>;
+    readonly streets: readonly Mark[];
+  },
 ): Mark[] {
   const { frame, content } = plan;
   return [
     ...(content.background ? backgroundMarks(frame, material.background) : []),
     ...buildingMarks(frame, material.buildings, plan),
     ...gridCrosses(frame),
+    ...streets,
     ...(content.contours ? contourMarks(frame, material) : []),
     ...(content.line ? driveMarks(frame, design) : []),
     ...tickMarks(ticks),

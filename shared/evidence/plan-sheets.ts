@@ -11,7 +11,7 @@ import { lineOnGround } from './line-on-ground.ts';
 import type { Mark, Measure } from './marks.ts';
 import { matchesOnPaper, matchMarks } from './match-marks.ts';
 import { planLabels } from './plan-labels.ts';
-import { groundMarks, signMarks } from './plan-marks.ts';
+import { groundMarks, ringsOf, signMarks } from './plan-marks.ts';
 import type { PlanBuilding, PlanMaterial } from './plan-material.ts';
 import { frameMarks } from './plan-signs.ts';
 import type { PlannedPlan, PlannedSheet } from './planned-sheets.ts';
@@ -20,6 +20,7 @@ import { columnMarks, columnPen, revisionPart } from './sheet-column.ts';
 import { sheetsBehind } from './sheets-behind.ts';
 import type { AboutSheets, Sheet } from './sheet.ts';
 import { planNotes } from './sheet-notes.ts';
+import { streetNameMarks } from './street-names.ts';
 import { titleOfSheet } from './title-of-sheet.ts';
 import { toneOfBuilding } from './tone-of-building.ts';
 
@@ -110,9 +111,14 @@ function mapMarks({ planned, plan, material, about, measure }: Drawn): {
   const kept = matches.map(({ box }) => box);
   const labels = planLabels(frame, material, { content, design, measure, kept });
   const lines = labelList(frame, labels.listed, figureWords(content));
+  const numbers = numberMarks(frame, labels, lines, measure);
+  const outlines = material.buildings.map((building) => ringsOf(frame, building));
+  const streets = content.background
+    ? streetNameMarks(frame, material.background, { taken: numbers.taken, outlines, measure })
+    : [];
   const marks = [
-    ...groundMarks(plan, material, design, labels),
-    ...numberMarks(frame, labels, lines, measure),
+    ...groundMarks(plan, material, { design, labels, streets }),
+    ...numbers.marks,
     ...matchMarks(matches),
   ];
   return {
