@@ -8,7 +8,7 @@ import type { Actor } from '../policies/actor.ts';
 import { countsOf, meantBy, type RankedValues } from '../register/ranked.ts';
 import { registerOf, type Register } from '../register/register-of.ts';
 import { registerOrder } from '../register/register-order.ts';
-import { valuesBeside } from '../register/values-beside.ts';
+import { readingOf, valuesBeside } from '../register/values-beside.ts';
 import type { Services } from '../services.ts';
 
 type Kept = Pick<Services, 'database' | 'tiles'>;
@@ -34,7 +34,7 @@ function counted<T extends string>(
 }
 
 async function count(services: Kept, register: Register): Promise<Omit<Funnel, 'mine' | 'heldBy'>> {
-  const reading = { database: services.database, transaction: null };
+  const reading = readingOf(services);
   const [stateOf, kindOf, ...byStage] = await Promise.all([
     valuesBeside(reading, register, 'state'),
     valuesBeside(reading, register, 'decision'),

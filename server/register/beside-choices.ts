@@ -3,7 +3,7 @@ import type { Services } from '../services.ts';
 import { countsOf } from './ranked.ts';
 import type { Register } from './register-of.ts';
 import { registerIds } from './register-order.ts';
-import { valuesBeside } from './values-beside.ts';
+import { readingOf, valuesBeside } from './values-beside.ts';
 
 const MOST = 50;
 
@@ -13,10 +13,9 @@ export async function besideChoices(
   register: Register,
   column: BesideColumn,
 ): Promise<{ value: string | null; count: number }[]> {
-  const { database } = services;
   const [ids, ranked] = await Promise.all([
     registerIds(services, register, {}),
-    valuesBeside({ database, transaction: null }, register, column),
+    valuesBeside(readingOf(services), register, column),
   ]);
   return countsOf(ranked, ids)
     .map(({ value, count }) => ({ value: value === null ? null : String(value), count }))

@@ -18,7 +18,7 @@ import { placesById } from './places-by-id.ts';
 import { inOrderOf, rankedFigures, rankedGroups, rankedSizes, type Ranked } from './ranked.ts';
 import type { Register } from './register-of.ts';
 import { columnsBeside, splitFilter, type Which } from './split-filter.ts';
-import { meantBeside, valuesBeside } from './values-beside.ts';
+import { meantBeside, readingOf, valuesBeside } from './values-beside.ts';
 
 /** The whole register as it is read first. */
 const WHOLE: Which = { filter: {}, sort: REGISTER_ORDER };
@@ -61,15 +61,15 @@ async function byReference(
 }
 
 async function rankedColumn(
-  { database }: Kept,
+  services: Kept,
   register: Register,
   filter: RegisterFilter,
   column: RegisterColumn,
 ): Promise<Ranked> {
   if (isBesideColumn(column)) {
-    return valuesBeside({ database, transaction: null }, register, column);
+    return valuesBeside(readingOf(services), register, column);
   }
-  const found = await findOwnOrder(database, registerCondition(register, filter), column);
+  const found = await findOwnOrder(services.database, registerCondition(register, filter), column);
   if (found === undefined) return rankedGroups([]);
   const { ids, figures, sizes } = found;
   return figures === null ? rankedSizes(ids, sizes) : rankedFigures(ids, figures);
@@ -101,10 +101,9 @@ async function makeOrder(services: Kept, register: Register, which: Which): Prom
     : isResultColumn;
   const { rest, asked } = splitFilter(filter, isLaidOver);
   if (asked.length > 0) {
-    const { database } = services;
     const [under, isMeant] = await Promise.all([
       packedOrder(services, register, { filter: rest, sort }),
-      meantBeside({ database, transaction: null }, register, asked),
+      meantBeside(readingOf(services), register, asked),
     ]);
     return packIds(unpackIds(under).filter(isMeant));
   }

@@ -4,6 +4,9 @@ import type { BesideColumn, StandingColumn } from '../../shared/schemas/standing
 import { findAssignedGroups, findStandingGroups } from '../models/find-standing-groups.ts';
 import type { RegisterOf } from '../models/register-condition.ts';
 import { findRunOrders } from '../models/run-orders.ts';
+import type { Services } from '../services.ts';
+import { unpackIds } from './packed-ids.ts';
+import { placesById } from './places-by-id.ts';
 import {
   meantBy,
   rankedFigures,
@@ -17,7 +20,14 @@ import type { AskedBeside } from './split-filter.ts';
 export type Reading = {
   readonly database: Sequelize;
   readonly transaction: Transaction | null;
+  /** Keeps what never changes, where that is wanted. */
+  readonly kept?: (key: string, make: () => Promise<Buffer>) => Promise<Buffer>;
 };
+
+/** Reads what is shown, with what is kept. */
+export function readingOf({ database, tiles }: Pick<Services, 'database' | 'tiles'>): Reading {
+  return { database, transaction: null, kept: (key, make) => tiles.get(key, make) };
+}
 
 async function foundOf(
   { database, transaction }: Reading,
@@ -38,20 +48,32 @@ function ascending(groups: readonly AlikeIds[]): AlikeIds[] {
 
 const TO_DECIDE = 'to decide';
 
-/** Only what the run has stands anywhere, and of all that it has it says the stage. */
+/** The buildings of a run: of all that it has it says the stage. */
+function runIds(
+  { database, transaction, kept = (_key, make) => make() }: Reading,
+  { runId }: RegisterOf,
+): Promise<Buffer> {
+  return kept(`in run/${runId}`, async () => {
+    const [stages] = await findRunOrders(database, runId, 'stage', transaction);
+    return stages?.ids ?? Buffer.alloc(0);
+  });
+}
+
+/** Only what the run has stands anywhere. */
 async function stateOf(reading: Reading, register: RegisterOf): Promise<RankedValues> {
   const { database, transaction } = reading;
-  const [groups, stages] = await Promise.all([
+  const [groups, run] = await Promise.all([
     findStandingGroups(database, register, 'state', transaction),
-    foundOf(reading, register, 'stage'),
+    runIds(reading, register),
   ]);
   const all = ascending([...groups, { value: TO_DECIDE, ids: Buffer.alloc(0) }]);
+  const placeOf = placesById(unpackIds(run));
   const { rankOf, ...column } = rankedGroups(all);
   const toDecide = all.findIndex(({ value }) => value === TO_DECIDE);
   return {
     ...column,
     rankOf: (id) => {
-      if (stages.rankOf(id) === -1) return -1;
+      if (placeOf(id) === -1) return -1;
       const rank = rankOf(id);
       return rank === -1 ? toDecide : rank;
     },
