@@ -5,9 +5,10 @@ import { countAssigned } from '../models/count-assigned.ts';
 import { countHeld } from '../models/count-held.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
+import { countsOf, meantBy, type RankedValues } from '../register/ranked.ts';
 import { registerOf, type Register } from '../register/register-of.ts';
 import { registerOrder } from '../register/register-order.ts';
-import { standingOf } from '../register/standings.ts';
+import { readingOf, valuesBeside } from '../register/values-beside.ts';
 import type { Services } from '../services.ts';
 
 type Kept = Pick<Services, 'database' | 'tiles'>;
@@ -19,12 +20,13 @@ async function idsAt(services: Kept, register: Register, stage: number): Promise
   return order.slice(0, order.count);
 }
 
+/** How many of some buildings have each of some names in a column. */
 function counted<T extends string>(
   names: readonly T[],
-  values: readonly (string | null)[],
+  column: RankedValues,
+  ids: Iterable<number>,
 ): Record<T, number> {
-  const counts = new Map<string | null, number>();
-  for (const value of values) counts.set(value, (counts.get(value) ?? 0) + 1);
+  const counts = new Map(countsOf(column, ids).map(({ value, count }) => [value, count]));
   return Object.fromEntries(names.map((name) => [name, counts.get(name) ?? 0])) as Record<
     T,
     number
@@ -32,21 +34,21 @@ function counted<T extends string>(
 }
 
 async function count(services: Kept, register: Register): Promise<Omit<Funnel, 'mine' | 'heldBy'>> {
-  const reading = { database: services.database, transaction: null };
+  const reading = readingOf(services);
   const [stateOf, kindOf, ...byStage] = await Promise.all([
-    standingOf(reading, register, 'state'),
-    standingOf(reading, register, 'decision'),
+    valuesBeside(reading, register, 'state'),
+    valuesBeside(reading, register, 'decision'),
     ...[1, 2, 3].map((stage) => idsAt(services, register, stage)),
   ]);
-  const decided = byStage.flat().filter((id) => stateOf(id) === 'decided');
-  const kinds = counted(DECISION_KINDS, decided.map(kindOf));
+  const isDecided = meantBy(stateOf, (state) => state === 'decided');
+  const kinds = counted(DECISION_KINDS, kindOf, byStage.flat().filter(isDecided));
   const stages = byStage.map((ids) => ({
     buildings: ids.length,
-    standings: counted(STANDINGS, ids.map(stateOf)),
+    standings: counted(STANDINGS, stateOf, ids),
   }));
   return {
     runId: register.runId,
-    buildings: byStage.reduce((all, ids) => all + ids.length, 0),
+    buildings: stages.reduce((all, { buildings }) => all + buildings, 0),
     stages: stages as unknown as Funnel['stages'],
     kinds: DECISION_KINDS.flatMap((kind) =>
       kinds[kind] === 0 ? [] : [{ kind, count: kinds[kind] }],

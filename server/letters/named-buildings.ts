@@ -5,7 +5,7 @@ import { findFootprints } from '../models/footprints.ts';
 import { inBatches } from '../register/in-batches.ts';
 import { meantIds } from '../register/meant-ids.ts';
 import type { RegisterOf } from '../models/register-condition.ts';
-import type { Reading } from '../register/standings.ts';
+import type { Reading } from '../register/values-beside.ts';
 import { isNear } from './near-place.ts';
 
 /** Buildings that rules name, each with what they say of it. */

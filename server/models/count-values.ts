@@ -10,7 +10,7 @@ import type { Condition } from './register-condition.ts';
 /** How many of the buildings that are meant have each of some values, and how many have none there. */
 export async function countValues(
   database: Sequelize,
-  { from, where, bind }: Condition,
+  { where, bind }: Condition,
   attributes: BuildingAttributes,
 ): Promise<ManyPreview> {
   const values: unknown[] = [...bind];
@@ -24,7 +24,7 @@ export async function countValues(
     ];
   });
   const [row = {}] = await database.query<Record<string, number>>(
-    `select ${counts.join(', ')} from ${from} where ${where}`,
+    `select ${counts.join(', ')} from buildings where ${where}`,
     { type: QueryTypes.SELECT, bind: values },
   );
   return fields.map((field) => ({

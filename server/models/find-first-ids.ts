@@ -1,7 +1,6 @@
 import { QueryTypes, type Sequelize } from 'sequelize';
-import type { RegisterSort } from '../../shared/schemas/register.ts';
 import { collationSql, orderSql } from './find-register-order.ts';
-import { registerColumn } from './register-columns.ts';
+import { ownColumn, type OwnSort } from './register-columns.ts';
 import type { Condition } from './register-condition.ts';
 
 type Value = string | number;
@@ -9,14 +8,14 @@ type Value = string | number;
 /** The value of a column that stands at a place of its order; undefined where fewer are known. */
 async function valueAt(
   database: Sequelize,
-  { from, where, bind }: Condition,
-  { column, descending }: RegisterSort,
+  { where, bind }: Condition,
+  { column, descending }: OwnSort,
   place: number,
 ): Promise<Value | undefined> {
-  const { name } = registerColumn(column);
+  const { name } = ownColumn(column);
   const direction = descending ? 'desc' : 'asc';
   const [found] = await database.query<{ value: Value }>(
-    `select ${name} as value from ${from} where ${where} and ${name} is not null
+    `select ${name} as value from buildings where ${where} and ${name} is not null
      order by ${name}${collationSql(column)} ${direction} offset ${place} limit 1`,
     { type: QueryTypes.SELECT, bind: [...bind] },
   );
@@ -28,22 +27,17 @@ async function valueAt(
  * many as are wanted of those that have it. Only what is alike has to be ordered by reference, which the
  * index of references does.
  */
-function nearSql(
-  { from, where }: Condition,
-  sort: RegisterSort,
-  last: string | undefined,
-  most: number,
-) {
-  const { name } = registerColumn(sort.column);
+function nearSql({ where }: Condition, sort: OwnSort, last: string | undefined, most: number) {
+  const { name } = ownColumn(sort.column);
   const collation = collationSql(sort.column);
   const isBefore =
     last === undefined
       ? `${name} is not null`
       : `${name}${collation} ${sort.descending ? '>' : '<'} ${last}`;
   const isAtEnd = last === undefined ? `${name} is null` : `${name}${collation} = ${last}`;
-  return `(select * from ${from} where ${where} and ${isBefore})
+  return `(select * from buildings where ${where} and ${isBefore})
     union all
-    (select * from ${from} where ${where} and ${isAtEnd}
+    (select * from buildings where ${where} and ${isAtEnd}
      order by reference collate natural_order, id limit ${most})`;
 }
 
@@ -63,17 +57,17 @@ async function ids(
 export async function findFirstIds(
   database: Sequelize,
   condition: Condition,
-  sort: RegisterSort,
+  sort: OwnSort,
   { offset, limit }: { readonly offset: number; readonly limit: number },
 ): Promise<number[]> {
-  const { from, where, bind } = condition;
+  const { where, bind } = condition;
   const most = offset + limit;
   const page = `order by ${orderSql(sort)} offset ${offset} limit ${limit}`;
   if (sort.column === 'reference') {
-    return ids(database, `select id from ${from} where ${where} ${page}`, bind);
+    return ids(database, `select id from buildings where ${where} ${page}`, bind);
   }
   const value = await valueAt(database, condition, sort, most - 1);
-  const { type } = registerColumn(sort.column);
+  const { type } = ownColumn(sort.column);
   const last = value === undefined ? undefined : `$${bind.length + 1}::${type}`;
   return ids(
     database,

@@ -1,18 +1,16 @@
 import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
-import type { RegisterColumn, RegisterSort } from '../../shared/schemas/register.ts';
 import { findPackedIds } from './find-packed-ids.ts';
-import { packIds } from '../register/packed-ids.ts';
-import { registerColumn } from './register-columns.ts';
+import { ownColumn, type OwnColumn, type OwnSort } from './register-columns.ts';
 import type { Condition } from './register-condition.ts';
 
 /** The collation of a column, as its index has it. */
-export function collationSql(column: RegisterColumn): string {
-  return registerColumn(column).type === 'text' ? ' collate natural_order' : '';
+export function collationSql(column: OwnColumn): string {
+  return ownColumn(column).type === 'text' ? ' collate natural_order' : '';
 }
 
 /** The order of a register in SQL: unknown last, then by reference, as people count. */
-export function orderSql({ column, descending }: RegisterSort): string {
-  const { name } = registerColumn(column);
+export function orderSql({ column, descending }: OwnSort): string {
+  const { name } = ownColumn(column);
   const collation = collationSql(column);
   const direction = descending ? 'desc' : 'asc';
   if (column === 'reference') return `reference${collation} ${direction}, id ${direction}`;
@@ -22,97 +20,60 @@ export function orderSql({ column, descending }: RegisterSort): string {
 /** The numbers of all buildings that are meant, by reference, four bytes each. */
 export function findReferenceOrder(
   database: Sequelize,
-  { from, where, bind }: Condition,
-  descending: boolean,
+  { where, bind }: Condition,
 ): Promise<Buffer> {
-  const order = orderSql({ column: 'reference', descending });
-  return findPackedIds(database, `select id from ${from} where ${where} order by ${order}`, bind);
+  const order = orderSql({ column: 'reference', descending: false });
+  return findPackedIds(database, `select id from buildings where ${where} order by ${order}`, bind);
 }
 
-/** Buildings that are alike in a column, group after group. */
-export type RegisterGroups = {
-  /** Their numbers in no order within a group, four bytes each. */
-  readonly ids: Buffer;
-  /** How many each group has, four bytes each. */
-  readonly sizes: Buffer;
-  /** How many are in the last group, whose value is not known. */
-  readonly unknown: number;
-};
-
-const NONE = Buffer.alloc(0);
-
-/** How many come one after the other with the same figure, eight bytes a figure. */
-function sizesOf(values: Buffer): number[] {
-  const sizes: number[] = [];
-  let last = NaN;
-  for (let k = 0; k < values.byteLength; k += 8) {
-    const value = values.readDoubleBE(k);
-    if (value === last) sizes[sizes.length - 1] = (sizes.at(-1) ?? 0) + 1;
-    else sizes.push(1);
-    last = value;
-  }
-  return sizes;
-}
+/** The buildings of which a column is known, ascending by it, four bytes a number. */
+export type OwnOrder = { readonly ids: Buffer } & (
+  | { readonly figures: Buffer; readonly sizes: null }
+  | { readonly figures: null; readonly sizes: Buffer }
+);
 
 /** Figures hardly ever agree: putting them in order takes half of what finding those that do would. */
-async function findFigureGroups(
-  database: Sequelize,
-  { from, where, bind }: Condition,
-  name: string,
-): Promise<RegisterGroups> {
-  const [row] = await database.query<{ ids: Buffer | null; values: Buffer | null; all: number }>(
-    `select string_agg(int4send(id), '') as ids,
-       string_agg(float8send(value), '') filter (where value is not null) as values,
-       count(*)::integer as all
-     from (
-       select id, ${name}::double precision as value from ${from} where ${where}
-       order by value nulls last
-     ) as ordered`,
-    { type: QueryTypes.SELECT, bind: [...bind] },
-  );
-  const sizes = sizesOf(row?.values ?? NONE);
-  const unknown = (row?.all ?? 0) - sizes.reduce((sum, size) => sum + size, 0);
-  const all = unknown === 0 ? sizes : [...sizes, unknown];
-  return { ids: row?.ids ?? NONE, sizes: packIds(Int32Array.from(all)), unknown };
+function figuresSql(where: string, name: string): string {
+  return `select string_agg(int4send(id), '') as ids,
+      string_agg(float8send(value), '') as figures, null as sizes
+    from (
+      select id, ${name}::double precision as value
+      from buildings where ${where} and ${name} is not null order by value
+    ) as ordered`;
 }
 
 /** Texts are often alike: nothing but values is compared, for text by text would take several times as long. */
-async function findTextGroups(
-  database: Sequelize,
-  { from, where, bind }: Condition,
-  value: string,
-): Promise<RegisterGroups> {
-  const [row] = await database.query<{ ids: Buffer | null; sizes: Buffer | null; unknown: number }>(
-    `select string_agg(ids, '') as ids, string_agg(int4send(size), '') as sizes,
-       coalesce(sum(size) filter (where value is null), 0)::integer as unknown
-     from (
-       select value, count(*)::integer as size, string_agg(int4send(id), '') as ids
-       from (select id, ${value} as value from ${from} where ${where}) as meant
-       group by value order by value nulls last
-     ) as grouped`,
-    { type: QueryTypes.SELECT, bind: [...bind] },
-  );
-  return { ids: row?.ids ?? NONE, sizes: row?.sizes ?? NONE, unknown: row?.unknown ?? 0 };
+function textsSql(where: string, value: string): string {
+  return `select string_agg(ids, '') as ids, null as figures,
+      string_agg(int4send(size), '') as sizes
+    from (
+      select value, count(*)::integer as size, string_agg(int4send(id), '') as ids
+      from (select id, ${value} as value from buildings where ${where}) as meant
+      where value is not null group by value order by value
+    ) as grouped`;
 }
 
-/** The buildings that are meant, by the value of a column ascending, those alike in groups. */
-export function findRegisterGroups(
+/** The buildings that are meant by one of their own columns: with a figure each, or how many are alike. */
+export async function findOwnOrder(
   database: Sequelize,
-  condition: Condition,
-  column: RegisterColumn,
-): Promise<RegisterGroups> {
-  const { name, type } = registerColumn(column);
-  return type === 'double precision'
-    ? findFigureGroups(database, condition, name)
-    : findTextGroups(database, condition, `${name}${collationSql(column)}`);
+  { where, bind }: Condition,
+  column: OwnColumn,
+): Promise<OwnOrder | undefined> {
+  const { name, type } = ownColumn(column);
+  const query =
+    type === 'text' ? textsSql(where, `${name}${collationSql(column)}`) : figuresSql(where, name);
+  const [found] = await database.query<OwnOrder | { ids: null }>(query, {
+    type: QueryTypes.SELECT,
+    bind: [...bind],
+  });
+  return found?.ids ? found : undefined;
 }
 
-/** The numbers of all buildings that are meant, ascending, four bytes each. */
+/** The numbers of all buildings that are meant in no order, which takes as long again; four bytes each. */
 export function findRegisterIds(
   database: Sequelize,
-  { from, where, bind }: Condition,
+  { where, bind }: Condition,
   transaction: Transaction | null,
 ): Promise<Buffer> {
-  const query = `select id from ${from} where ${where} order by id`;
-  return findPackedIds(database, query, bind, transaction);
+  return findPackedIds(database, `select id from buildings where ${where}`, bind, transaction);
 }

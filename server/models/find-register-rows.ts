@@ -1,7 +1,8 @@
 import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
-import type { RegisterField } from '../../shared/schemas/register.ts';
+import type { BuildingField } from '../../shared/schemas/building-fields.ts';
 import type { ListedBuilding } from '../presenters/building-values.ts';
-import { LISTED, registerField } from './register-columns.ts';
+import { BUILDING_COLUMNS } from './building-columns.ts';
+import { LISTED } from './register-columns.ts';
 import type { Condition, RegisterOf } from './register-condition.ts';
 import { buildingsBeside } from './columns-beside.ts';
 
@@ -12,8 +13,8 @@ export async function findRows(
   ids: readonly number[],
 ): Promise<ListedBuilding[]> {
   const rows = await database.query<ListedBuilding>(
-    `select ${LISTED} from ${buildingsBeside({ run: '$2', option: '$3' })}
-     where id = any($1) and removed_at is null`,
+    `select ${LISTED} from ${buildingsBeside('$2', '$3')}
+     where b.id = any($1) and b.removed_at is null`,
     { type: QueryTypes.SELECT, bind: [ids, runId, optionId] },
   );
   const byId = new Map(rows.map((row) => [row.id, row]));
@@ -21,12 +22,9 @@ export async function findRows(
 }
 
 /** How many buildings are meant. */
-export async function countRows(
-  database: Sequelize,
-  { from, where, bind }: Condition,
-): Promise<number> {
+export async function countRows(database: Sequelize, { where, bind }: Condition): Promise<number> {
   const [row] = await database.query<{ found: number }>(
-    `select count(*)::integer as found from ${from} where ${where}`,
+    `select count(*)::integer as found from buildings where ${where}`,
     { type: QueryTypes.SELECT, bind: [...bind] },
   );
   return row?.found ?? 0;
@@ -35,13 +33,13 @@ export async function countRows(
 /** Which values a field has, the commonest first. */
 export async function findChoices(
   database: Sequelize,
-  { from, where, bind }: Condition,
-  field: RegisterField,
+  { where, bind }: Condition,
+  field: BuildingField,
 ): Promise<{ value: string | null; count: number }[]> {
-  const { name } = registerField(field);
+  const { name } = BUILDING_COLUMNS[field];
   return database.query<{ value: string | null; count: number }>(
     `select ${name}::text as value, count(*)::integer as count
-     from ${from} where ${where}
+     from buildings where ${where}
      group by ${name} order by count desc, ${name} nulls last limit 50`,
     { type: QueryTypes.SELECT, bind: [...bind] },
   );

@@ -1,5 +1,4 @@
 import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
-import { findPackedIds } from './find-packed-ids.ts';
 import type { RegisterOf } from './register-condition.ts';
 
 /** Buildings that are alike, four bytes a number. */
@@ -52,14 +51,4 @@ export function findAssignedGroups(
     schemeId,
     transaction,
   );
-}
-
-/** The buildings of a run, four bytes a number. */
-export function findRunIds(
-  database: Sequelize,
-  runId: string | null,
-  transaction: Transaction | null,
-): Promise<Buffer> {
-  const query = 'select building_id as id from run_results where run_id = $1::uuid';
-  return findPackedIds(database, query, [runId], transaction);
 }

@@ -1,19 +1,13 @@
 import { STIFF_CONSTRUCTIONS } from '../../shared/building/stiffness-of-construction.ts';
-import {
-  REGISTER_COLUMNS,
-  REGISTER_FIELDS,
-  type RegisterColumn,
-  type RegisterField,
-  type RegisterFilter,
-} from '../../shared/schemas/register.ts';
-import { isResultColumn } from '../../shared/schemas/result-columns.ts';
+import { BUILDING_FIELD_NAMES, type BuildingField } from '../../shared/schemas/building-fields.ts';
+import type { RegisterColumn, RegisterFilter } from '../../shared/schemas/register.ts';
+import { isBesideColumn } from '../../shared/schemas/standing-columns.ts';
 import { AppError } from '../errors.ts';
-import { NUMBER_COLUMNS, registerColumn, registerField } from './register-columns.ts';
-import { buildingsBeside, foundAlone } from './columns-beside.ts';
+import { BUILDING_COLUMNS } from './building-columns.ts';
+import { NUMBER_COLUMNS, OWN_COLUMNS, ownColumn } from './register-columns.ts';
 
-/** Buildings that are meant, in SQL: where they stand, a condition, and the values that it is asked with. */
+/** Buildings that are meant, in SQL: a condition, and the values that it is asked with. */
 export type Condition = {
-  readonly from: string;
   readonly where: string;
   readonly bind: readonly unknown[];
 };
@@ -40,35 +34,40 @@ function assumedSql(bind: Bind): string {
     or ((e_over_g is null or poisson is null) and not ${stiff}))`;
 }
 
-function anySql(field: RegisterField, values: readonly (string | null)[], bind: Bind): string {
-  const { name, type } = registerField(field);
-  const texts = values.filter((value) => value !== null);
-  const known =
-    type === 'text'
-      ? texts
-      : texts
-          .filter((text) => text.trim() !== '')
-          .map(Number)
-          .filter(Number.isFinite);
+/** The numbers that are among some texts, as filters write them. */
+export function numbersAmong(texts: readonly (string | null)[]): number[] {
+  return texts
+    .filter((text) => text !== null && text.trim() !== '')
+    .map(Number)
+    .filter(Number.isFinite);
+}
+
+function anySql(field: BuildingField, values: readonly (string | null)[], bind: Bind): string {
+  const { name, type } = BUILDING_COLUMNS[field];
+  const known = type === 'text' ? values.filter((value) => value !== null) : numbersAmong(values);
   const kind = type === 'text' ? 'text' : 'double precision';
   const among = `${name} = any(${bind(known)}::${kind}[])`;
   return values.includes(null) ? `(${among} or ${name} is null)` : among;
 }
 
-function rangesSql(ranges: NonNullable<RegisterFilter['ranges']>, bind: Bind): string[] {
-  return REGISTER_COLUMNS.flatMap((column) => {
-    const range = ranges[column];
-    if (range === undefined) return [];
-    if (!NUMBER_COLUMNS.has(column)) {
-      const message = 'Only numbers have a range.';
-      throw new AppError('invalid-input', undefined, [
-        { path: `filter.ranges.${column}`, message },
-      ]);
-    }
-    const { name } = registerColumn(column);
+/** The range that a filter asks of a column; only numbers have one. */
+export function rangeOf(
+  { ranges = {} }: RegisterFilter,
+  column: RegisterColumn,
+): { readonly from?: number | undefined; readonly to?: number | undefined } | undefined {
+  const range = ranges[column];
+  if (range === undefined || NUMBER_COLUMNS.has(column)) return range;
+  const message = 'Only numbers have a range.';
+  throw new AppError('invalid-input', undefined, [{ path: `filter.ranges.${column}`, message }]);
+}
+
+function rangesSql(filter: RegisterFilter, bind: Bind): string[] {
+  return OWN_COLUMNS.flatMap((column) => {
+    const { from, to } = rangeOf(filter, column) ?? {};
+    const { name } = ownColumn(column);
     return [
-      ...(range.from === undefined ? [] : [`${name} >= ${bind(range.from)}::double precision`]),
-      ...(range.to === undefined ? [] : [`${name} <= ${bind(range.to)}::double precision`]),
+      ...(from === undefined ? [] : [`${name} >= ${bind(from)}::double precision`]),
+      ...(to === undefined ? [] : [`${name} <= ${bind(to)}::double precision`]),
     ];
   });
 }
@@ -117,51 +116,28 @@ function placeSql({ within, inside, ids, except, importId }: RegisterFilter, bin
   return conditions;
 }
 
-/** What a run found, of all its buildings: also of those that are no longer in the register. */
-export function resultsAlone(runId: string | null): Condition {
-  return { from: foundAlone('$1'), where: 'true', bind: [runId] };
-}
-
-/** Whether a filter, or a column beside it, hangs on what a run found. */
-export function asksResults(filter: RegisterFilter, column?: RegisterColumn): boolean {
-  const { any = {}, ranges = {}, unknown = [] } = filter;
-  const asked = [
-    ...Object.keys(any),
-    ...Object.keys(ranges),
-    ...unknown,
-    ...(column ? [column] : []),
-  ];
-  return asked.some(isResultColumn);
-}
-
-/**
- * The buildings of a register that a filter means; `column` is what else will be asked of them. Results are
- * looked up only where they are asked for. What a filter asks of standings is split off before.
- */
+/** The buildings of a register that a filter means. What it asks beside them is split off before. */
 export function registerCondition(
-  register: RegisterOf,
+  { schemeId }: Pick<RegisterOf, 'schemeId'>,
   filter: RegisterFilter,
-  column?: RegisterColumn,
 ): Condition {
-  const values: unknown[] = [register.schemeId];
+  const values: unknown[] = [schemeId];
   const bind: Bind = (value) => `$${values.push(value)}`;
-  const from = asksResults(filter, column)
-    ? buildingsBeside({ run: bind(register.runId) })
-    : 'buildings';
-  const { search, any = {}, ranges = {}, unknown = [], assumed } = filter;
+  const { search, any = {}, unknown = [], assumed } = filter;
   const conditions = ['scheme_id = $1', 'removed_at is null'];
   if (search !== undefined && search !== '') {
     conditions.push(`words @@ ${wantedWords(bind(search))}`);
   }
-  for (const field of REGISTER_FIELDS) {
+  for (const field of BUILDING_FIELD_NAMES) {
     const wanted = any[field];
     if (wanted !== undefined) conditions.push(anySql(field, wanted, bind));
   }
-  conditions.push(...rangesSql(ranges, bind));
-  conditions.push(...unknown.map((field) => `${registerField(field).name} is null`));
+  conditions.push(...rangesSql(filter, bind));
+  const unknownOwn = unknown.filter((field) => !isBesideColumn(field));
+  conditions.push(...unknownOwn.map((field) => `${BUILDING_COLUMNS[field].name} is null`));
   if (assumed !== undefined) {
     conditions.push(assumed ? assumedSql(bind) : `not ${assumedSql(bind)}`);
   }
   conditions.push(...placeSql(filter, bind));
-  return { from, where: conditions.join('\n and '), bind: values };
+  return { where: conditions.join('\n and '), bind: values };
 }

@@ -1,8 +1,10 @@
 import type { RegisterFilter } from '../../shared/schemas/register.ts';
+import { isBesideColumn } from '../../shared/schemas/standing-columns.ts';
 import { findRegisterIds } from '../models/find-register-order.ts';
 import { registerCondition, type RegisterOf } from '../models/register-condition.ts';
 import { unpackIds } from './packed-ids.ts';
-import { splitFilter, standingAs, type Reading } from './standings.ts';
+import { splitFilter } from './split-filter.ts';
+import { meantBeside, type Reading } from './values-beside.ts';
 
 /** The numbers of the buildings that a filter means, ascending, as they are read now. */
 export async function meantIds(
@@ -10,9 +12,11 @@ export async function meantIds(
   register: RegisterOf,
   filter: RegisterFilter,
 ): Promise<number[]> {
-  const { rest, standing } = splitFilter(filter);
+  const { rest, asked } = splitFilter(filter, isBesideColumn);
   const { database, transaction } = reading;
-  const condition = registerCondition(register, rest);
-  const ids = unpackIds(await findRegisterIds(database, condition, transaction));
-  return standing === null ? [...ids] : standingAs(reading, register, ids, standing);
+  const [ids, isMeant] = await Promise.all([
+    findRegisterIds(database, registerCondition(register, rest), transaction),
+    meantBeside(reading, register, asked),
+  ]);
+  return [...unpackIds(ids).sort().filter(isMeant)];
 }

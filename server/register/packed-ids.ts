@@ -16,6 +16,16 @@ export function packIds(ids: Int32Array): Buffer {
   return Buffer.from(view.buffer);
 }
 
+const FIGURE_BYTES = 8;
+
+/** Figures of eight bytes each, as the database packs them. */
+export function unpackFigures(bytes: Buffer): Float64Array {
+  const figures = new Float64Array(bytes.byteLength / FIGURE_BYTES);
+  const view = new DataView(bytes.buffer, bytes.byteOffset, bytes.byteLength);
+  for (let k = 0; k < figures.length; k += 1) figures[k] = view.getFloat64(k * FIGURE_BYTES);
+  return figures;
+}
+
 /** Numbers of buildings, packed. */
 export type PackedIds = {
   readonly count: number;

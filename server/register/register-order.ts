@@ -1,50 +1,32 @@
 import {
   REGISTER_ORDER,
+  type RegisterColumn,
   type RegisterFilter,
-  type RegisterSort,
 } from '../../shared/schemas/register.ts';
 import { isResultColumn } from '../../shared/schemas/result-columns.ts';
-import { isStandingColumn } from '../../shared/schemas/standing-columns.ts';
+import { isBesideColumn, isStandingColumn } from '../../shared/schemas/standing-columns.ts';
 import {
+  findOwnOrder,
   findReferenceOrder,
-  findRegisterGroups,
   findRegisterIds,
 } from '../models/find-register-order.ts';
-import { findRunIds } from '../models/find-standing-groups.ts';
 import { countRows } from '../models/find-register-rows.ts';
-import {
-  asksResults,
-  registerCondition,
-  resultsAlone,
-  type Condition,
-} from '../models/register-condition.ts';
+import { registerCondition } from '../models/register-condition.ts';
 import type { Services } from '../services.ts';
-import { ofRegister, oneGroup } from './of-register.ts';
-import { orderGroups } from './order-groups.ts';
-import { meantIds } from './meant-ids.ts';
 import { packIds, packedIds, unpackIds, type PackedIds } from './packed-ids.ts';
+import { placesById } from './places-by-id.ts';
+import { inOrderOf, rankedFigures, rankedGroups, rankedSizes, type Ranked } from './ranked.ts';
 import type { Register } from './register-of.ts';
-import { inOrderOfStanding, splitFilter, standingAs, type Reading } from './standings.ts';
-
-type Which = { readonly filter: RegisterFilter; readonly sort: RegisterSort };
+import { columnsBeside, splitFilter, type Which } from './split-filter.ts';
+import { meantBeside, readingOf, valuesBeside } from './values-beside.ts';
 
 /** The whole register as it is read first. */
 const WHOLE: Which = { filter: {}, sort: REGISTER_ORDER };
 
-/** What buildings and their order hang on besides the register: what a run found, and where they stand. */
-export function askedBeside({ filter, sort: { column } }: Which): {
-  readonly results: boolean;
-  readonly standings: boolean;
-} {
-  const { rest, standing } = splitFilter(filter);
-  const standings = standing !== null || isStandingColumn(column);
-  return { results: standings || asksResults(rest, column), standings };
-}
-
 function keyOf(what: string, register: Register, which: Which): string {
   const { schemeId, version, runId, decisionsVersion } = register;
-  const { results, standings } = askedBeside(which);
-  const beside = `${results ? runId : null}/${standings ? decisionsVersion : null}`;
+  const columns = columnsBeside(which);
+  const beside = `${columns.length > 0 ? runId : null}/${columns.some(isStandingColumn) ? decisionsVersion : null}`;
   return `${what}/${schemeId}/${version}/${beside}/${JSON.stringify(which)}`;
 }
 
@@ -61,70 +43,80 @@ const BYTES = 4;
 
 type Kept = Pick<Services, 'database' | 'tiles'>;
 
-/** Reads standings with what is kept: what a run has never changes. */
-function readingOf({ database, tiles }: Kept): Reading {
-  return {
-    ...{ database, transaction: null },
-    runIds: (runId) => tiles.get(`in run/${runId}`, () => findRunIds(database, runId, null)),
-  };
-}
-
-/** Some buildings by reference, put in order by that of the whole register. */
+/** By reference, as the whole register stands, which is put in order once for all. */
 async function byReference(
   services: Kept,
   register: Register,
-  condition: Condition,
-  descending: boolean,
+  filter: RegisterFilter,
 ): Promise<Buffer> {
-  const [ids, references] = await Promise.all([
-    findRegisterIds(services.database, condition, null),
+  const { database } = services;
+  const condition = registerCondition(register, filter);
+  if (Object.keys(filter).length === 0) return findReferenceOrder(database, condition);
+  const [ids, whole] = await Promise.all([
+    findRegisterIds(database, condition, null),
     packedOrder(services, register, WHOLE),
   ]);
-  const ordered = orderGroups(oneGroup(ids), references, false);
-  return descending ? packIds(unpackIds(ordered).reverse()) : ordered;
+  const placeOf = placesById(unpackIds(ids));
+  return packIds(unpackIds(whole).filter((id) => placeOf(id) !== -1));
+}
+
+async function rankedColumn(
+  services: Kept,
+  register: Register,
+  filter: RegisterFilter,
+  column: RegisterColumn,
+): Promise<Ranked> {
+  if (isBesideColumn(column)) {
+    return valuesBeside(readingOf(services), register, column);
+  }
+  const found = await findOwnOrder(services.database, registerCondition(register, filter), column);
+  if (found === undefined) return rankedGroups([]);
+  const { ids, figures, sizes } = found;
+  return figures === null ? rankedSizes(ids, sizes) : rankedFigures(ids, figures);
+}
+
+/** By one column, then by reference. */
+async function byColumn(
+  services: Kept,
+  register: Register,
+  { filter, sort: { column, descending } }: Which,
+): Promise<Buffer> {
+  const [alike, ranked] = await Promise.all([
+    packedOrder(services, register, { filter, sort: REGISTER_ORDER }),
+    column === 'reference' ? null : rankedColumn(services, register, filter, column),
+  ]);
+  const ids = unpackIds(alike);
+  return packIds(ranked === null ? ids.reverse() : inOrderOf(ranked, ids, descending));
 }
 
 /**
- * By one column, then by reference: the order by reference is that of the whole register, kept for all. What
- * a run found of all buildings is put in order without looking at these.
+ * What stands beside buildings is looked up in memory and laid over an order that is kept: where they stand,
+ * which every decision changes, over what the run found, and that over what they have themselves.
  */
-async function makeOrder(
-  services: Kept,
-  register: Register,
-  { filter, sort }: Which,
-): Promise<Buffer> {
-  const { database } = services;
-  const { column, descending } = sort;
-  const isWhole = Object.keys(filter).length === 0;
-  const condition = registerCondition(register, filter, column);
-  if (column === 'reference') {
-    return isWhole
-      ? findReferenceOrder(database, condition, descending)
-      : byReference(services, register, condition, descending);
+async function makeOrder(services: Kept, register: Register, which: Which): Promise<Buffer> {
+  const { filter, sort } = which;
+  if (isStandingColumn(sort.column)) return byColumn(services, register, which);
+  const isLaidOver = columnsBeside(which).some(isStandingColumn)
+    ? isStandingColumn
+    : isResultColumn;
+  const { rest, asked } = splitFilter(filter, isLaidOver);
+  if (asked.length > 0) {
+    const [under, isMeant] = await Promise.all([
+      packedOrder(services, register, { filter: rest, sort }),
+      meantBeside(readingOf(services), register, asked),
+    ]);
+    return packIds(unpackIds(under).filter(isMeant));
   }
-  const isOfRun = isWhole && isResultColumn(column);
-  const asked = isOfRun ? resultsAlone(register.runId) : condition;
-  const [groups, references] = await Promise.all([
-    findRegisterGroups(database, asked, column),
-    packedOrder(services, register, WHOLE),
-  ]);
-  return orderGroups(isOfRun ? ofRegister(groups, references) : groups, references, descending);
+  const isByReference = sort.column === 'reference' && !sort.descending;
+  return isByReference
+    ? byReference(services, register, filter)
+    : byColumn(services, register, which);
 }
 
 function packedOrder(services: Kept, register: Register, which: Which): Promise<Buffer> {
-  const { rest, standing } = splitFilter(which.filter);
-  const { column, descending } = which.sort;
-  return services.tiles.get(keyOf('order', register, which), async () => {
-    const order = isStandingColumn(column) ? { column, descending } : null;
-    if (standing === null && order === null) return makeOrder(services, register, which);
-    const sort = order === null ? which.sort : REGISTER_ORDER;
-    const all = await packedOrder(services, register, { filter: rest, sort });
-    const reading = readingOf(services);
-    const found = await standingAs(reading, register, unpackIds(all), standing ?? {});
-    const ordered =
-      order === null ? found : await inOrderOfStanding(reading, register, found, order);
-    return packIds(Int32Array.from(ordered));
-  });
+  return services.tiles.get(keyOf('order', register, which), () =>
+    makeOrder(services, register, which),
+  );
 }
 
 /**
@@ -144,8 +136,8 @@ export async function registerIds(
   services: Kept,
   register: Register,
   filter: RegisterFilter,
-): Promise<number[]> {
-  return meantIds(readingOf(services), register, filter);
+): Promise<Int32Array> {
+  return unpackIds(await packedOrder(services, register, { ...WHOLE, filter })).sort();
 }
 
 /** How many buildings a filter of the register alone means, kept as their order is. */

@@ -52,7 +52,7 @@ export const registerChangeRoutes = [
     body: previewManySchema,
     handle: async ({ services, scheme, body: { filter, attributes } }) => {
       const register = await registerOf(services, scheme);
-      const ids = await registerIds(services, register, filter);
+      const ids = [...(await registerIds(services, register, filter))];
       return countValues(services.database, registerCondition(register, { ids }), attributes);
     },
   }),

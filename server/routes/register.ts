@@ -5,11 +5,11 @@ import {
   registerPlaceQuerySchema,
   registerQuerySchema,
 } from '../../shared/schemas/register.ts';
-import { isStandingColumn } from '../../shared/schemas/standing-columns.ts';
+import { isBesideColumn } from '../../shared/schemas/standing-columns.ts';
 import { findChoices } from '../models/find-register-rows.ts';
 import { registerCondition } from '../models/register-condition.ts';
 import { presentRegisterPage } from '../presenters/register.ts';
-import { standingChoices } from '../register/standing-choices.ts';
+import { besideChoices } from '../register/beside-choices.ts';
 import { registerOf } from '../register/register-of.ts';
 import { registerIds, registerOrder } from '../register/register-order.ts';
 import { registerPage } from '../register/register-page.ts';
@@ -44,7 +44,7 @@ export const registerRoutes = [
     access: { scheme: 'readRegister' },
     query: registerIdsQuerySchema,
     handle: async ({ services, scheme, query }) => ({
-      ids: await registerIds(services, await registerOf(services, scheme), query.filter),
+      ids: [...(await registerIds(services, await registerOf(services, scheme), query.filter))],
     }),
   }),
   defineRoute({
@@ -55,8 +55,8 @@ export const registerRoutes = [
     handle: async ({ services, scheme, params }) => {
       const register = await registerOf(services, scheme);
       const { field } = params;
-      if (isStandingColumn(field)) return standingChoices(services, register, field);
-      return findChoices(services.database, registerCondition(register, {}, field), field);
+      if (isBesideColumn(field)) return besideChoices(services, register, field);
+      return findChoices(services.database, registerCondition(register, {}), field);
     },
   }),
   defineRoute({

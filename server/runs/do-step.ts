@@ -6,6 +6,7 @@ import { AppError } from '../errors.ts';
 import { closeChunk, findOpenChunk, findOpenChunks, insertChunks } from '../models/run-chunks.ts';
 import { hasContours, insertContours } from '../models/run-contours.ts';
 import { findFactsText, findRunBoxes } from '../models/run-inputs.ts';
+import { insertRunOrders } from '../models/run-orders.ts';
 import { insertResults } from '../models/run-results.ts';
 import { RunState } from '../models/run-state.ts';
 import { Run } from '../models/run.ts';
@@ -39,6 +40,7 @@ async function completeIfDone(
   if (state.state !== 'running') return;
   if ((await findOpenChunks(database, runId, transaction)).length > 0) return;
   if (!(await hasContours(database, runId, transaction))) return;
+  await insertRunOrders(database, runId, transaction);
   await state.update({ state: 'complete', endedAt: new Date() }, { transaction });
   await queue.send([{ kind: 'marks', runId }], transaction);
 }

@@ -139,6 +139,7 @@ describe.each([
   ['run_buildings', `version = 7`],
   ['run_contours', `contours = '[1]'`],
   ['run_results', `stage = 3`],
+  ['run_orders', `place = 7`],
   ['prints', `name = 'other'`],
   ['visits', `notes = 'other'`],
   ['visit_photographs', `caption = 'other'`],
@@ -175,6 +176,8 @@ describe.each([
         select run.id, building_id, 1 from run, snapshot returning run_id, building_id
       ), contours as (
         insert into run_contours (run_id, contours) select id, '[]' from run
+      ), ordered as (
+        insert into run_orders (run_id, result_column, place, ids, words) select id, 'a', 0, '', 'b' from run
       ), result as (
         insert into run_results (run_id, building_id, stage, settlement, slope, held_by, assumed, warnings)
         select run_id, building_id, 1, 0, 0, '{}', '{}', '{}' from member
@@ -238,6 +241,7 @@ test('tables of other migrations are not forgotten here', async () => {
     'register_changes',
     'run_buildings',
     'run_contours',
+    'run_orders',
     'run_results',
     'runs',
     'scheme_rules',
