@@ -21,8 +21,9 @@ import { lettersPdf } from '../documents/letter/letter-pdf.ts';
 import { AppError } from '../errors.ts';
 import { findRecipients } from '../letters/find-recipients.ts';
 import { findBatches, findBatchText } from '../models/letter-batches.ts';
+import { findChosen, findExceptions } from '../models/letter-exceptions.ts';
 import { heldSettings } from '../models/letter-settings.ts';
-import { findExceptions, findLetters } from '../models/letters.ts';
+import { findLetters } from '../models/letters.ts';
 import { Run } from '../models/run.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
@@ -97,9 +98,10 @@ export const letterRoutes = [
     params: batchParamsSchema,
     handle: async ({ services: { database }, actor, scheme, params: { batchId } }) => {
       const batch = await readBatch(database, scheme.id, batchId);
-      const [letters, leftOut, text] = await Promise.all([
+      const [letters, leftOut, chosen, text] = await Promise.all([
         findLetters(database, scheme.id, { batchId }),
         findExceptions(database, batchId, actor.isAdministrator),
+        findChosen(database, batchId, actor.isAdministrator),
         findBatchText(database, batchId),
       ]);
       return {
@@ -107,6 +109,7 @@ export const letterRoutes = [
         text,
         letters: letters.map((letter) => presentListedLetter(letter, actor)),
         leftOut,
+        chosen,
       };
     },
   }),

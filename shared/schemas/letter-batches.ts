@@ -140,17 +140,33 @@ export type Batch = z.infer<typeof batchSchema>;
  */
 export const batchesSchema = z.array(batchSchema);
 
+const keptException = z.strictObject({
+  partyId: z.uuid().nullable(),
+  name: z.string(),
+  why: z.string(),
+});
+
 /**
- * A batch with its letters and who was left out; `text` is what was written for it, with its marks.
+ * A batch with its letters, who was left out and who was chosen by hand; `text` is what was written for it,
+ * with its marks.
  *
- * Units: as batchSchema. Valid: letters by number; text of free text only. Source: [own].
+ * Units: as batchSchema. Valid: letters by number; text of free text only; exceptions under the party that
+ * stands today, null where no letter can go to them any more. Source: [own].
  */
 export const batchDetailSchema = z.strictObject({
   batch: batchSchema,
   text: letterWordsSchema.nullable(),
   letters: z.array(listedLetterSchema),
-  leftOut: z.array(z.strictObject({ name: z.string(), why: z.string() })),
+  leftOut: z.array(keptException),
+  chosen: z.array(keptException),
 });
+
+/**
+ * A batch with its letters and exceptions.
+ *
+ * Units: as batchDetailSchema. Valid: parsed by it. Source: [own].
+ */
+export type BatchDetail = z.infer<typeof batchDetailSchema>;
 
 /**
  * The check of a batch.

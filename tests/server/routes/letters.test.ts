@@ -85,7 +85,35 @@ describe('who gets a letter', () => {
       (await town.firstAgent.get(`${town.address}/letter-batches/${id}`)).body,
     );
     expect(detail.letters.map(({ name }) => name)).toEqual(['Ada of the second house', far.name]);
-    expect(detail.leftOut).toEqual([{ name: town.byPost.name, why: 'Was told in person.' }]);
+    expect(detail.leftOut).toEqual([
+      { partyId: town.byPost.id, name: town.byPost.name, why: 'Was told in person.' },
+    ]);
+    expect(detail.chosen).toEqual([{ partyId: far.id, name: far.name, why: 'Asked for it.' }]);
+  });
+
+  test('that a batch made an exception of is known under the party that stands, while letters can go there', async () => {
+    const town = await aTownOfOwners(tested);
+    const { firstAgent, scheme, address } = town;
+    const tenant = { kind: 'tenant', buildingId: town.house('far'), from: null, to: null } as const;
+    const [cay, dee] = [
+      await aParty(firstAgent, scheme, { name: 'Cay', email: null, channel: 'post', interests: [tenant] }), // prettier-ignore
+      await aParty(firstAgent, scheme, { name: 'Dee', email: null, channel: 'post', interests: [tenant] }), // prettier-ignore
+    ];
+    const chosen = [cay, dee].map(({ id }) => ({ partyId: id, why: 'Asked for it.' }));
+    const { id } = await aBatch(town, 'first information', 4, { chosen });
+    const why = 'Asked for it.';
+    const chosenNow = async () =>
+      batchDetailSchema.parse((await firstAgent.get(`${address}/letter-batches/${id}`)).body)
+        .chosen;
+    const merge = { version: dee.version, other: { id: cay.id, version: cay.version } };
+    await firstAgent.post(`${address}/parties/${dee.id}/merge`).send(merge).expect(200);
+    const merged = { partyId: dee.id, name: 'Dee', why };
+    expect(await chosenNow()).toEqual([merged]);
+    await services().database.query(
+      `update interests set to_day = current_date - 1 where party_id = $1`,
+      { bind: [dee.id] },
+    );
+    expect(await chosenNow()).toEqual([{ ...merged, partyId: null }]);
   });
 
   test('goes to a representative in somebody’s stead', async () => {

@@ -26,6 +26,12 @@ const RETURNED: Batch = {
   ...{ sentBy: null, sentAt: null, printedAt: null },
 };
 
+const LEFT_OUT = [{ partyId: anId(71), name: 'Bo', why: 'Was told in person.' }];
+const CHOSEN = [
+  { partyId: ADA.partyId, name: 'Ada', why: 'Asked for it.' },
+  { partyId: null, name: 'Cy', why: 'Lived there.' },
+];
+
 function show(page: ReactNode = <NewBatchPage />, path = '/') {
   const abilities = { readScheme: true, readLetters: true, prepareLetters: true };
   const api = fakeApi({
@@ -43,7 +49,7 @@ function show(page: ReactNode = <NewBatchPage />, path = '/') {
     [PREPARE]: () => new Refusal(409, 'conflict', 'By now 2 would get the letter, not 1.'),
     [`GET ${SCHEME}/letter-batches/${RETURNED.id}`]: {
       ...{ batch: RETURNED, text: { subject: 'The lift', body: 'It is mendet.' } },
-      ...{ letters: [], leftOut: [] },
+      ...{ letters: [], leftOut: LEFT_OUT, chosen: CHOSEN },
     },
     [`GET ${SCHEME}`]: aSchemeAnswer({ abilities }),
   });
@@ -86,7 +92,7 @@ test('other kinds go by their template and are not written here', async () => {
   expect(screen.queryByLabelText('Subject')).toBeNull();
 });
 
-test('the text of a returned batch begins another, with what its check said', async () => {
+test('a returned batch is prepared again with its text, who was chosen and left out, and what its check said', async () => {
   const { calls } = show(
     <Routes>
       <Route path="/schemes/:schemeId/owners/letters/new" element={<NewBatchPage />} />
@@ -94,13 +100,21 @@ test('the text of a returned batch begins another, with what its check said', as
     </Routes>,
     `/schemes/${anId(10)}/owners/letters/${RETURNED.id}`,
   );
-  fireEvent.click(await screen.findByRole('link', { name: 'Prepare letters from this text' }));
+  fireEvent.click(await screen.findByRole('link', { name: 'Prepare these letters again' }));
   const body = await screen.findByDisplayValue('It is mendet.');
-  expect(screen.getByText(/batch 4\. Its check said: “Mended with a d\.”/)).toBeTruthy();
+  expect(
+    screen.getByText(
+      'Batch 4 is prepared again, with its text and 1 party chosen by hand and 1 party left out. ' +
+        '1 who had been chosen by hand cannot get a letter any more. ' +
+        'Its check said: “Mended with a d.”',
+    ),
+  ).toBeTruthy();
   fireEvent.change(body, { target: { value: 'It is mended.' } });
   fireEvent.click(await screen.findByRole('button', { name: 'Write 1 letter' }));
   expect(await sent(calls)).toMatchObject({
     kind: 'free text',
     text: { subject: 'The lift', body: 'It is mended.' },
+    leftOut: [{ partyId: anId(71), why: 'Was told in person.' }],
+    chosen: [{ partyId: ADA.partyId, why: 'Asked for it.' }],
   });
 });
