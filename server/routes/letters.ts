@@ -20,6 +20,7 @@ import { withdrawLetters } from '../commands/withdraw-letters.ts';
 import { lettersPdf } from '../documents/letter/letter-pdf.ts';
 import { AppError } from '../errors.ts';
 import { findRecipients } from '../letters/find-recipients.ts';
+import { findEarlierOf, findEarlierOfBatch } from '../models/earlier-letters.ts';
 import { findBatches, findBatchText } from '../models/letter-batches.ts';
 import { findChosen, findExceptions } from '../models/letter-exceptions.ts';
 import { heldSettings } from '../models/letter-settings.ts';
@@ -29,6 +30,7 @@ import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import {
   presentBatch,
+  presentEarlier,
   presentLetter,
   presentListedLetter,
   presentRecipients,
@@ -76,7 +78,10 @@ export const letterRoutes = [
       const { settings } = await heldSettings(database, scheme);
       const found = await findRecipients(database, scheme.id, settings, body, null);
       const run = found.runId === null ? null : await Run.findByPk(found.runId);
-      return presentRecipients(found, run?.number ?? null);
+      const of = { schemeId: scheme.id, kind: body.kind };
+      const parties = found.recipients.map(({ party }) => party);
+      const earlier = await findEarlierOf(database, of, parties);
+      return presentRecipients(found, run?.number ?? null, earlier);
     },
   }),
   defineRoute({
@@ -98,8 +103,9 @@ export const letterRoutes = [
     params: batchParamsSchema,
     handle: async ({ services: { database }, actor, scheme, params: { batchId } }) => {
       const batch = await readBatch(database, scheme.id, batchId);
-      const [letters, leftOut, chosen, text] = await Promise.all([
+      const [letters, earlier, leftOut, chosen, text] = await Promise.all([
         findLetters(database, scheme.id, { batchId }),
+        findEarlierOfBatch(database, scheme.id, batch),
         findExceptions(database, batchId, actor.isAdministrator),
         findChosen(database, batchId, actor.isAdministrator),
         findBatchText(database, batchId),
@@ -108,6 +114,7 @@ export const letterRoutes = [
         batch: presentBatch(batch),
         text,
         letters: letters.map((letter) => presentListedLetter(letter, actor)),
+        earlier: presentEarlier(letters, earlier),
         leftOut,
         chosen,
       };

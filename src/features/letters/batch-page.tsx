@@ -59,6 +59,13 @@ function BatchFacts({ batch, text }: Pick<BatchDetail, 'batch' | 'text'>) {
   );
 }
 
+/** How many letters go to somebody who had one like it. */
+function hadWords({ sentAt }: BatchDetail['batch'], count: number): string {
+  const had = 'had a letter of this kind for the same building before';
+  const waits = sentAt === null ? ', or have it waiting in another batch' : '';
+  return `${lettersWords(count)} of these ${count === 1 ? 'goes' : 'go'} to owners who ${had}${waits}.`;
+}
+
 type ExceptionsProps = {
   readonly title: string;
   readonly note: string;
@@ -98,7 +105,7 @@ function WholeBatch({ batchId }: { readonly batchId: string }) {
       </Page>
     );
   }
-  const { batch, text, letters, leftOut, chosen } = data;
+  const { batch, text, letters, earlier, leftOut, chosen } = data;
   return (
     <Page
       title={`${KIND_LABELS[batch.kind]}: ${lettersWords(batch.letters)}, batch ${batch.number}`}
@@ -112,7 +119,8 @@ function WholeBatch({ batchId }: { readonly batchId: string }) {
         </Panel>
       )}
       <Panel title="Letters" note="each opens as it will be read">
-        <LettersTable label="Letters of the batch" letters={letters} />
+        {earlier.length > 0 && <p className="mb-2 text-body">{hadWords(batch, earlier.length)}</p>}
+        <LettersTable label="Letters of the batch" {...{ letters, earlier }} />
       </Panel>
       <Exceptions title="Left out" note="although a rule names them" exceptions={leftOut} />
       <Exceptions title="Chosen by hand" note="although no rule names them" exceptions={chosen} />

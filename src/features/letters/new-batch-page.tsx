@@ -17,7 +17,7 @@ import { LetterLook } from './components/letter-look.tsx';
 import { LetterWordsFields } from './components/letter-words-fields.tsx';
 import { PrepareFound } from './components/prepare-found.tsx';
 import { KIND_OPTIONS } from './letter-words.ts';
-import { earlierWords, preparedAgain } from './prepared-again.ts';
+import { preparedAgainWords, preparedAgain } from './prepared-again.ts';
 import { useOwnText } from './use-own-text.ts';
 
 type OwnTextProps = {
@@ -48,7 +48,7 @@ function NewBatchForm({ earlier }: { readonly earlier: BatchDetail | null }) {
   return (
     <>
       {earlier !== null && (
-        <p className="mb-4 max-w-[72ch] text-body break-words">{earlierWords(earlier)}</p>
+        <p className="mb-4 max-w-[72ch] text-body break-words">{preparedAgainWords(earlier)}</p>
       )}
       <div className="grid max-w-[640px] grid-cols-2 items-end gap-3 max-sm:grid-cols-1">
         <Select

@@ -20,7 +20,7 @@ function people(count: number, one: string, many: string): string[] {
 }
 
 /** What a batch that is prepared again has from the earlier one, and who is not in it any more. */
-export function earlierWords(earlier: BatchDetail): string {
+export function preparedAgainWords(earlier: BatchDetail): string {
   const { batch, text } = earlier;
   const { chosen, leftOut } = preparedAgain(earlier);
   const taken = [

@@ -138,6 +138,57 @@ describe('who gets a letter', () => {
     expect(sent[0]?.text).toContain('Dear Agents and sons, for Ada of the second house,');
   });
 
+  test('says who had a letter of the kind for the building, or has it waiting, and the checker reads it too', async () => {
+    const town = await aTownOfOwners(tested);
+    const { firstAgent, address } = town;
+    const earlier = async (kind = 'first information') => {
+      const asked = { kind, leftOut: [], chosen: [] };
+      const answer = await firstAgent.post(`${address}/letter-batches/preview`).send(asked);
+      return recipientsSchema.parse(answer.body).recipients.map((one) => one.earlier);
+    };
+    const detail = async (id: string) =>
+      batchDetailSchema.parse((await firstAgent.get(`${address}/letter-batches/${id}`)).body);
+    expect(await earlier()).toEqual([[], []]);
+    const sent = await aSentBatch(tested, town);
+    const leftOut = [{ partyId: town.byPost.id, why: 'Had it.' }];
+    const waiting = await aBatch(town, 'first information', 1, { leftOut });
+    const one = { batchNumber: 1, sentAt: sent.sentAt };
+    const two = { batchNumber: 2, sentAt: null, buildings: ['T1-2'] };
+    expect(await earlier()).toMatchObject([[two, one], [one]]);
+    expect((await earlier('condition survey')).flat()).toEqual([]);
+    const read = await detail(waiting.id);
+    expect(read.earlier).toMatchObject([{ letterId: read.letters[0]?.id, had: [one] }]);
+    expect((await detail(sent.id)).earlier).toEqual([]);
+    // taken back, it waits for nobody; and what failed was had by nobody
+    await firstAgent.post(`${address}/letter-batches/${waiting.id}/withdraw`).expect(200);
+    await services().database.query(
+      `update outbox set state = 'failed' where letter_id in (select id from letters where batch_id = $1)`,
+      { bind: [sent.id] },
+    );
+    expect(await earlier()).toMatchObject([[], [one]]);
+  });
+
+  test('knows what a party had before it was merged', async () => {
+    const town = await aTownOfOwners(tested);
+    const { firstAgent, scheme, address, byMail } = town;
+    await aSentBatch(tested, town);
+    const same = await aParty(firstAgent, scheme, {
+      ...{ name: 'Ada again', email: 'ada-again@example.org' },
+      interests: [{ kind: 'manager', buildingId: town.house('T1-2'), from: null, to: null }],
+    });
+    const merge = { version: same.version, other: { id: byMail.id, version: byMail.version } };
+    await firstAgent.post(`${address}/parties/${same.id}/merge`).send(merge).expect(200);
+    const asked = { kind: 'first information', leftOut: [], chosen: [] };
+    const answer = await firstAgent.post(`${address}/letter-batches/preview`).send(asked);
+    const found = recipientsSchema.parse(answer.body).recipients;
+    expect(found.find(({ partyId }) => partyId === same.id)?.earlier).toMatchObject([
+      { batchNumber: 1 },
+    ]);
+    const { id } = await aBatch(town);
+    const detail = await firstAgent.get(`${address}/letter-batches/${id}`);
+    expect(batchDetailSchema.parse(detail.body).earlier).toHaveLength(2);
+  });
+
   test('is refused where the list has changed since it was seen', async () => {
     const town = await aTownOfOwners(tested);
     const asked = { kind: 'first information', leftOut: [], chosen: [], text: null, expected: 3 };
