@@ -33,6 +33,7 @@ import { migration as evidence } from './migrations/29-evidence.ts';
 import { migration as ownTextOfLetters } from './migrations/30-own-text-of-letters.ts';
 import { migration as lettersKept } from './migrations/31-letters-kept.ts';
 import { migration as accountMails } from './migrations/32-account-mails.ts';
+import { migration as shafts } from './migrations/33-shafts.ts';
 
 /** In the order in which they are applied; a new one goes to the end. */
 const MIGRATIONS: Readonly<Record<string, Migration>> = {
@@ -68,6 +69,7 @@ const MIGRATIONS: Readonly<Record<string, Migration>> = {
   '30-own-text-of-letters': ownTextOfLetters,
   '31-letters-kept': lettersKept,
   '32-account-mails': accountMails,
+  '33-shafts': shafts,
 };
 
 /** Opens the migrations of a database as its owner; `serverUrl` names the role that serves. */

@@ -5,13 +5,15 @@ import {
   batchSchema,
   recipientsSchema,
 } from '../../../shared/schemas/letter-batches.ts';
+import { heldLetterSettingsSchema } from '../../../shared/schemas/letter-settings.ts';
 import { previewedTemplateSchema } from '../../../shared/schemas/letter-templates.ts';
 import { letterSchema, listedLettersSchema } from '../../../shared/schemas/letters.ts';
 import { Membership } from '../../../server/models/membership.ts';
 import { Person } from '../../../server/models/person.ts';
 import { remindLate } from '../../../server/letters/remind-late.ts';
-import { aMember, anAdministrator, aPerson } from '../../support/factories.ts';
+import { aMember, anAdministrator, anAlignment, aPerson } from '../../support/factories.ts';
 import { aBatch, aSentBatch, aTownOfOwners, keepSettings } from '../../support/letters.ts';
+import { E, N } from '../../support/register.ts';
 import { signIn, visitor } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
 import { tokenOf } from '../../support/token-of.ts';
@@ -63,6 +65,37 @@ describe('who gets a letter', () => {
       },
       { name: 'Bea of the third house', channel: 'post' },
     ]);
+  });
+
+  test('is also who is near to a shaft of the line that the register shows, as long as it stands there', async () => {
+    const town = await aTownOfOwners(tested);
+    const { firstAgent, address, scheme, option } = town;
+    const far = await aParty(firstAgent, scheme, {
+      ...{ name: 'Cay, far away', email: 'cay@example.org' },
+      interests: [{ kind: 'tenant', buildingId: town.house('far'), from: null, to: null }],
+    });
+    const reasonsOf = async () => {
+      const asked = { kind: 'first information', leftOut: [], chosen: [] };
+      const answer = await firstAgent.post(`${address}/letter-batches/preview`).send(asked);
+      const { recipients } = recipientsSchema.parse(answer.body);
+      return recipients.find(({ partyId }) => partyId === far.id)?.reasons;
+    };
+    // the house stands from 200 m to 210 m north
+    const shaftAt = (north: number) => [
+      { name: 'North shaft', east: E + 5, north: N + north, source: 'Drawing 12' },
+    ];
+    expect(await reasonsOf()).toBeUndefined();
+    await option.update({ shafts: shaftAt(240) });
+    expect(await reasonsOf()).toEqual([{ why: 'Within 30 m of a shaft', building: 'far' }]);
+    await option.update({ shafts: shaftAt(240.5) });
+    expect(await reasonsOf()).toBeUndefined();
+    await anAlignment(scheme, { shafts: shaftAt(240) });
+    expect(await reasonsOf()).toBeUndefined();
+    const administrator = await signIn(app(), await anAdministrator());
+    const { settings } = heldLetterSettingsSchema.parse((await administrator.get(`${address}/letter-settings`)).body); // prettier-ignore
+    const wider = settings.rules.map((rule) => (rule.shaftWithin === null ? rule : { ...rule, shaftWithin: 31 })); // prettier-ignore
+    await keepSettings(administrator, scheme, { rules: wider });
+    expect(await reasonsOf()).toHaveLength(1);
   });
 
   test('leaves out with a reason, and takes in whom somebody chose', async () => {
