@@ -132,8 +132,7 @@ export function RuleFields(props: RuleFieldsProps) {
           }}
         />
         <Checkbox
-          label="Near a shaft only"
-          hint="Shafts are kept with the line, on the plan"
+          label="Near a shaft of the line only"
           checked={rule.shaftWithin !== null}
           onChange={(event) => {
             onChange({ ...rule, shaftWithin: event.target.checked ? SHAFT_WITHIN : null });
