@@ -119,7 +119,7 @@ function WholeBatch({ batchId }: { readonly batchId: string }) {
         </Panel>
       )}
       <Panel title="Letters" note="each opens as it will be read">
-        {earlier.length > 0 && <p className="mb-2 text-body">{hadWords(batch, earlier.length)}</p>}
+        {earlier.length > 0 && <p className="my-2 text-body">{hadWords(batch, earlier.length)}</p>}
         <LettersTable label="Letters of the batch" {...{ letters, earlier }} />
       </Panel>
       <Exceptions title="Left out" note="although a rule names them" exceptions={leftOut} />
