@@ -1,5 +1,6 @@
 import type { Holiday } from '../shared/schemas/owner-terms.ts';
 import { daysAfter, dayOf } from './days.ts';
+import { nearDayInWords } from './mail/letters/day-in-words.ts';
 
 type Holidays = readonly Pick<Holiday, 'date'>[];
 
@@ -21,4 +22,13 @@ export function workingDaysAfter(day: string, count: number, holidays: Holidays)
 export function workingDayFrom(day: string, holidays: Holidays): string {
   const before = dayOf(daysAfter(new Date(`${day}T00:00:00Z`), -1));
   return workingDaysAfter(before, 1, holidays);
+}
+
+/** What is to be said of a day that is no working day: which it is, and the next that is one; null of others. */
+export function freeDayWords(day: string, holidays: readonly Holiday[]): string | null {
+  const next = workingDayFrom(day, holidays);
+  if (next === day) return null;
+  const holiday = holidays.find(({ date }) => date === day);
+  const what = holiday === undefined ? 'no working day' : `a holiday, ${holiday.name}`;
+  return `${nearDayInWords(day)} is ${what}. The next working day is ${nearDayInWords(next)}.`;
 }

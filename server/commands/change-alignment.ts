@@ -21,8 +21,13 @@ export async function changeAlignment(
   return database.transaction(async (transaction) => {
     const alignment = await lockAlignment(scheme, id, transaction);
     if (alignment.version !== version) throw new AppError('conflict');
-    const before = { name: alignment.name, design: alignment.design };
-    const after = { name: given.name ?? before.name, design: given.design ?? before.design };
+    const { name, design, shafts } = alignment;
+    const before = { name, design, shafts };
+    const after = {
+      name: given.name ?? name,
+      design: given.design ?? design,
+      shafts: given.shafts ?? shafts,
+    };
     const stamp = { version: version + 1, changedAt: new Date(), changedBy: actor.id };
     await withOwnName(() => alignment.update({ ...after, ...stamp }, { transaction }), 'an option');
     const subject = { kind: 'alignment', id };

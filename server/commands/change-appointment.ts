@@ -13,6 +13,7 @@ import {
   readAppointment,
   requireCurrent,
   requireToCome,
+  requireWorkingDay,
   tellOfAppointment,
 } from './kept-appointment.ts';
 import { lockScheme } from './lock-scheme.ts';
@@ -46,10 +47,14 @@ export async function changeAppointment(
     const which = { id: asked.id };
     const before = await readAppointment(database, scheme.id, which, transaction);
     requireCurrent(before, asked.version);
-    if (asked.change === 'offer anew') requireToCome(asked.startsAt);
+    const { settings } = await heldSettings(database, scheme, transaction);
+    if (asked.change === 'offer anew') {
+      requireToCome(asked.startsAt);
+      requireWorkingDay(asked, settings);
+    }
     await updateAppointment(database, asked.id, moved(before, asked), transaction);
     const after = await readAppointment(database, scheme.id, which, transaction);
-    const { timeZone } = (await heldSettings(database, scheme, transaction)).settings;
+    const { timeZone } = settings;
     const news = NEWS[asked.change];
     const told = { action: 'change appointment', before, after, news, timeZone };
     await tellOfAppointment(services, by, scheme, told, transaction);

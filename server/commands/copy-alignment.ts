@@ -15,7 +15,7 @@ export async function copyAlignment(
   { id, name }: z.infer<typeof copyAlignmentSchema> & { readonly id: string },
 ): Promise<Alignment> {
   return database.transaction(async (transaction) => {
-    const { design } = await lockAlignment(scheme, id, transaction);
-    return insertAlignment(scheme, actor, { name, design }, 'copy alignment', transaction);
+    const { design, shafts } = await lockAlignment(scheme, id, transaction);
+    return insertAlignment(scheme, actor, { name, design, shafts }, 'copy alignment', transaction);
   });
 }

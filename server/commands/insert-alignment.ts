@@ -14,7 +14,7 @@ const MOST = 60;
 export async function insertAlignment(
   scheme: Scheme,
   by: Pick<Actor, 'id'> | null,
-  { name, design }: z.infer<typeof newAlignmentSchema>,
+  { name, design, shafts }: z.infer<typeof newAlignmentSchema>,
   action: 'create alignment' | 'copy alignment',
   transaction: Transaction,
 ): Promise<Alignment> {
@@ -23,9 +23,12 @@ export async function insertAlignment(
     const message = `A scheme has ${MOST} options at most. Remove one before you add another.`;
     throw new AppError('invalid-input', message, [{ path: 'name', message }]);
   }
-  const row = { schemeId, name, design, changedBy: by?.id ?? null };
+  const row = { schemeId, name, design, shafts, changedBy: by?.id ?? null };
   const created = await withOwnName(() => Alignment.create(row, { transaction }), 'an option');
   const subject = { kind: 'alignment', id: created.id };
-  await recordChange({ by, schemeId, action, subject, after: { name, design } }, transaction);
+  await recordChange(
+    { by, schemeId, action, subject, after: { name, design, shafts } },
+    transaction,
+  );
   return created;
 }

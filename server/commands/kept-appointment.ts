@@ -1,10 +1,13 @@
 import type { Sequelize, Transaction } from 'sequelize';
+import type { LetterSettings } from '../../shared/schemas/letter-settings.ts';
+import { dayIn } from '../days.ts';
 import { AppError } from '../errors.ts';
 import { appointmentMails, type AppointmentNews } from '../mail/letters/appointment-mails.ts';
 import { findAppointments, type FoundAppointment } from '../models/appointments.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
+import { freeDayWords } from '../working-days.ts';
 import { recordChange } from './record-change.ts';
 
 /** An appointment of a scheme; of another scheme, or of none of these parties, it is not there. */
@@ -32,6 +35,17 @@ export function requireCurrent(appointment: FoundAppointment, version: number): 
 export function requireToCome(startsAt: string): void {
   if (new Date(startsAt).getTime() > Date.now()) return;
   const message = 'This time has passed.';
+  throw new AppError('invalid-input', undefined, [{ path: 'startsAt', message }]);
+}
+
+/** Refuses a weekend or a holiday, as the scheme's owners have it, unless it is said to be meant. */
+export function requireWorkingDay(
+  { startsAt, isFreeDayMeant }: { readonly startsAt: string; readonly isFreeDayMeant: boolean },
+  { timeZone, holidays }: Pick<LetterSettings, 'timeZone' | 'holidays'>,
+): void {
+  const words = freeDayWords(dayIn(new Date(startsAt), timeZone), holidays);
+  if (words === null || isFreeDayMeant) return;
+  const message = `${words} Choose a working day, or say below that this day is meant.`;
   throw new AppError('invalid-input', undefined, [{ path: 'startsAt', message }]);
 }
 

@@ -11,7 +11,12 @@ import { heldSettings } from '../models/letter-settings.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services.ts';
-import { readAppointment, requireToCome, tellOfAppointment } from './kept-appointment.ts';
+import {
+  readAppointment,
+  requireToCome,
+  requireWorkingDay,
+  tellOfAppointment,
+} from './kept-appointment.ts';
 import { lockScheme } from './lock-scheme.ts';
 
 function taken(): AppError {
@@ -51,6 +56,8 @@ export async function offerAppointment(
         return { appointment: same, isNew: false };
       }
       requireToCome(asked.startsAt);
+      const { settings } = await heldSettings(database, scheme, transaction);
+      requireWorkingDay(asked, settings);
       if (!(await hasInterest(database, scheme.id, asked, transaction))) {
         const message = 'Choose somebody who has a part in this building.';
         throw new AppError('invalid-input', undefined, [{ path: 'partyId', message }]);
@@ -58,7 +65,7 @@ export async function offerAppointment(
       const offered = { ...asked, schemeId: scheme.id, by: by.id };
       await insertAppointment(database, offered, transaction);
       const after = await readAppointment(database, scheme.id, which, transaction);
-      const { timeZone } = (await heldSettings(database, scheme, transaction)).settings;
+      const { timeZone } = settings;
       const told = { action: 'offer appointment', after, news: 'offered', timeZone } as const;
       await tellOfAppointment(services, by, scheme, told, transaction);
       return { appointment: after, isNew: true };

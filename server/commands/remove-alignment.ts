@@ -13,10 +13,10 @@ export async function removeAlignment(
 ): Promise<void> {
   await database.transaction(async (transaction) => {
     const alignment = await lockAlignment(scheme, id, transaction);
-    const { name, design } = alignment;
+    const { name, design, shafts } = alignment;
     await alignment.destroy({ transaction });
     const subject = { kind: 'alignment', id };
     const change = { by: actor, schemeId: scheme.id, action: 'remove alignment', subject };
-    await recordChange({ ...change, before: { name, design } }, transaction);
+    await recordChange({ ...change, before: { name, design, shafts } }, transaction);
   });
 }

@@ -1,5 +1,6 @@
 import { isListed } from '../../shared/assessment/prepared-building.ts';
 import type { LetterKind, LetterRule } from '../../shared/schemas/letter-settings.ts';
+import { findShafts } from '../models/find-alignments.ts';
 import { findTold, type Told } from '../models/find-told.ts';
 import { findFootprints } from '../models/footprints.ts';
 import { inBatches } from '../register/in-batches.ts';
@@ -11,18 +12,38 @@ import { isNear } from './near-place.ts';
 /** Buildings that rules name, each with what they say of it. */
 export type Named = ReadonlyMap<number, readonly string[]>;
 
+type Place = Parameters<typeof isNear>[1];
+
+/** Those of some buildings that are near to one of some places. */
 async function near(
   { database, transaction }: Reading,
-  { near: place }: LetterRule,
+  places: readonly Place[] | null,
   ids: readonly number[],
 ): Promise<readonly number[]> {
-  if (place === null) return ids;
+  if (places === null) return ids;
   const found: number[] = [];
   for await (const some of inBatches(ids)) {
     const footprints = await findFootprints(database, some, transaction ?? undefined);
-    found.push(...some.filter((id) => isNear(footprints.get(id) ?? [], place)));
+    const isThere = (id: number) => places.some((place) => isNear(footprints.get(id) ?? [], place));
+    found.push(...some.filter(isThere));
   }
   return found;
+}
+
+/** The buildings that a rule means by their values and by where they stand. */
+async function meant(
+  reading: Reading,
+  register: RegisterOf,
+  { filter, near: place, shaftWithin }: LetterRule,
+): Promise<readonly number[]> {
+  const { database, transaction } = reading;
+  const shafts =
+    shaftWithin === null ? null : await findShafts(database, register, transaction ?? null);
+  // no shaft, nobody near one: the register need not be asked
+  if (shafts?.length === 0) return [];
+  const besideShafts = shafts?.map((shaft) => ({ ...shaft, metres: shaftWithin ?? 0 })) ?? null;
+  const ids = await near(reading, besideShafts, await meantIds(reading, register, filter));
+  return near(reading, place === null ? null : [place], ids);
 }
 
 async function listed(
@@ -45,8 +66,7 @@ export async function namedBuildings(
 ): Promise<Named> {
   const named = new Map<number, string[]>();
   for (const rule of rules.filter((one) => one.kind === kind && one.isOn)) {
-    const meant = await meantIds(reading, register, rule.filter);
-    for (const id of await listed(reading, rule, await near(reading, rule, meant))) {
+    for (const id of await listed(reading, rule, await meant(reading, register, rule))) {
       named.set(id, [...(named.get(id) ?? []), rule.why]);
     }
   }

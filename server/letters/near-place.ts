@@ -9,7 +9,7 @@ import type { FootprintRings } from '../models/building-footprint.ts';
 /** Whether any of a footprint is so near to a place. */
 export function isNear(
   footprint: FootprintRings,
-  { east, north, metres }: z.infer<typeof nearPlaceSchema>,
+  { east, north, metres }: Omit<z.infer<typeof nearPlaceSchema>, 'name'>,
 ): boolean {
   const place: PlanPoint = [east, north];
   return footprint.some(

@@ -6,7 +6,7 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize';
-import type { AlignmentDesign } from '../../shared/schemas/alignments.ts';
+import type { AlignmentDesign, Shafts } from '../../shared/schemas/alignments.ts';
 
 /** An option for the line of a scheme. */
 export class Alignment extends Model<
@@ -18,6 +18,7 @@ export class Alignment extends Model<
   declare name: string;
   declare version: CreationOptional<number>;
   declare design: AlignmentDesign;
+  declare shafts: CreationOptional<Shafts>;
   declare changedAt: CreationOptional<Date>;
   declare changedBy: string | null;
 }
@@ -30,6 +31,7 @@ export function initAlignment(sequelize: Sequelize): void {
       name: { type: DataTypes.TEXT, allowNull: false },
       version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
       design: { type: DataTypes.JSONB, allowNull: false },
+      shafts: { type: DataTypes.JSONB, allowNull: false, defaultValue: [] },
       changedAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
       changedBy: { type: DataTypes.UUID },
     },

@@ -1,4 +1,5 @@
-import { literal } from 'sequelize';
+import { literal, QueryTypes, type Sequelize, type Transaction } from 'sequelize';
+import type { Shafts } from '../../shared/schemas/alignments.ts';
 import { AppError } from '../errors.ts';
 import { Alignment } from './alignment.ts';
 import { Person } from './person.ts';
@@ -26,4 +27,17 @@ export async function findAlignment(schemeId: string, id: string): Promise<Align
   const [found] = alignment === null ? [] : await withPeople([alignment]);
   if (found === undefined) throw new AppError('not-found');
   return found;
+}
+
+/** The shafts of an option; of every option of a scheme where no run tells which is meant. */
+export async function findShafts(
+  database: Sequelize,
+  { schemeId, optionId }: { readonly schemeId: string; readonly optionId: string | null },
+  transaction: Transaction | null,
+): Promise<Shafts> {
+  const rows = await database.query<{ shafts: Shafts }>(
+    'select shafts from alignments where scheme_id = $1 and ($2::uuid is null or id = $2)',
+    { type: QueryTypes.SELECT, bind: [schemeId, optionId], transaction },
+  );
+  return rows.flatMap(({ shafts }) => shafts);
 }

@@ -30,7 +30,8 @@ const FROM = `parties p
 
 const LIVE = 'p.scheme_id = $1 and p.merged_into is null and p.erased_at is null';
 
-const TODAY = `coalesce(i.from_day <= current_date, true) and coalesce(i.to_day >= current_date, true)`;
+/** Whether an interest `i` is one today. */
+export const INTEREST_TODAY = `coalesce(i.from_day <= current_date, true) and coalesce(i.to_day >= current_date, true)`;
 
 /** Everybody with an interest in one of some buildings today, by name. */
 export function findInterested(
@@ -44,7 +45,7 @@ export function findInterested(
      from ${FROM}
      join lateral (
        select array_agg(distinct i.building_id order by i.building_id) as buildings
-       from interests i where i.party_id = p.id and i.building_id = any($2::integer[]) and ${TODAY}
+       from interests i where i.party_id = p.id and i.building_id = any($2::integer[]) and ${INTEREST_TODAY}
      ) as found on found.buildings is not null
      where ${LIVE}
      order by p.name collate natural_order, p.id`,
@@ -62,7 +63,7 @@ export function findParties(
   return database.query<Interested>(
     `select ${SELECTION}, array(
        select distinct i.building_id from interests i join buildings b on b.id = i.building_id
-       where i.party_id = p.id and b.removed_at is null and ${TODAY} order by 1
+       where i.party_id = p.id and b.removed_at is null and ${INTEREST_TODAY} order by 1
      ) as buildings
      from ${FROM} where ${LIVE} and p.id = any($2::uuid[])
      order by p.name collate natural_order, p.id`,

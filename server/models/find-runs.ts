@@ -37,7 +37,7 @@ const RUNS = `
       where c.run_id = r.id and c.done_at is not null
     ), 0)::integer as done,
     scheme.register_version <> r.register_version as "registerChanged",
-    a.version is distinct from r.alignment_version as "optionChanged",
+    a.design is distinct from r.design as "optionChanged",
     (select max(version) from scheme_rules where scheme_id = r.scheme_id) <> r.rules_version
       as "rulesChanged",
     coalesce(r.id = (${SHOWN_RUN}), false) as "isShown"

@@ -36,39 +36,6 @@ export async function insertLetters(
   }
 }
 
-/** Keeps who was left out of a batch although a rule names them. */
-export async function insertExceptions(
-  database: Sequelize,
-  batchId: string,
-  exceptions: readonly {
-    readonly partyId: string;
-    readonly reasons: readonly LetterReason[];
-    readonly why: string;
-  }[],
-  transaction: Transaction,
-): Promise<void> {
-  await database.query(
-    `insert into letter_exceptions (batch_id, party_id, reasons, why)
-     select $2, "partyId", reasons, why
-     from jsonb_to_recordset($1::jsonb) as left_out ("partyId" uuid, reasons jsonb, why text)`,
-    { bind: [JSON.stringify(exceptions), batchId], transaction },
-  );
-}
-
-/** Who was left out of a batch, and why; of erased parties the administrator alone reads why. */
-export function findExceptions(
-  database: Sequelize,
-  batchId: string,
-  isAdministrator: boolean,
-): Promise<{ name: string; why: string }[]> {
-  return database.query<{ name: string; why: string }>(
-    `select p.name, case when p.erased_at is null or $2 then e.why else '' end as why
-     from letter_exceptions e join parties p on p.id = e.party_id
-     where e.batch_id = $1 order by p.name collate natural_order`,
-    { type: QueryTypes.SELECT, bind: [batchId, isAdministrator] },
-  );
-}
-
 /** A letter with where it stands on its way. */
 export type FoundLetter = {
   readonly id: string;

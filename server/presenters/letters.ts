@@ -2,6 +2,7 @@ import {
   batchSchema,
   recipientsSchema,
   type Batch,
+  type BatchDetail,
   type Recipients,
 } from '../../shared/schemas/letter-batches.ts';
 import {
@@ -12,11 +13,14 @@ import { templateSchema, type Template } from '../../shared/schemas/letter-templ
 import {
   letterSchema,
   listedLetterSchema,
+  type EarlierLetter,
   type Letter,
   type ListedLetter,
 } from '../../shared/schemas/letters.ts';
 import { addresseeOf } from '../letters/compose-letters.ts';
 import type { FoundRecipients } from '../letters/find-recipients.ts';
+import type { FoundEarlier } from '../models/earlier-letters.ts';
+import { groupBy } from '../models/group-by.ts';
 import type { FoundBatch } from '../models/letter-batches.ts';
 import type { HeldSettings } from '../models/letter-settings.ts';
 import type { HeldTemplate } from '../models/letter-templates.ts';
@@ -35,8 +39,19 @@ export function presentTemplate({ kind, version, subject, body, by, at }: HeldTe
   return templateSchema.parse({ kind, version, subject, body, by, at: at?.toISOString() ?? null });
 }
 
-/** Who would get a letter, and why. */
-export function presentRecipients(found: FoundRecipients, runNumber: number | null): Recipients {
+function presentHad(earlier: readonly FoundEarlier[] = []): EarlierLetter[] {
+  return earlier.map(({ batchNumber, sentAt, buildings }) => ({
+    ...{ batchNumber, sentAt: sentAt?.toISOString() ?? null, buildings: [...buildings] },
+  }));
+}
+
+/** Who would get a letter, and why, and who had it already. */
+export function presentRecipients(
+  found: FoundRecipients,
+  runNumber: number | null,
+  earlier: readonly FoundEarlier[],
+): Recipients {
+  const had = groupBy(earlier, ({ partyId }) => partyId);
   const getting = found.recipients.filter(({ leftOut }) => leftOut === null);
   const byPost = getting.filter(({ party }) => addresseeOf(party).channel === 'post').length;
   return recipientsSchema.parse({
@@ -51,6 +66,7 @@ export function presentRecipients(found: FoundRecipients, runNumber: number | nu
       channel: addresseeOf(party).channel,
       reasons,
       leftOut,
+      earlier: presentHad(had.get(party.partyId)),
     })),
   });
 }
@@ -88,6 +104,17 @@ export function presentListedLetter(letter: FoundLetter, actor: Actor): ListedLe
     ...hidden,
     ...{ batchId, batchNumber, kind },
   });
+}
+
+/** Which letters of a batch go to somebody who had one like it. */
+export function presentEarlier(
+  letters: readonly FoundLetter[],
+  earlier: readonly FoundEarlier[],
+): BatchDetail['earlier'] {
+  const had = groupBy(earlier, ({ partyId }) => partyId);
+  return letters
+    .filter(({ partyId }) => had.has(partyId))
+    .map(({ id, partyId }) => ({ letterId: id, had: presentHad(had.get(partyId)) }));
 }
 
 /** What leaves the server of a letter, whole; null where the caller may not see it any more. */

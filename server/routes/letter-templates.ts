@@ -53,6 +53,7 @@ export const letterTemplateRoutes = [
     access: { scheme: 'readLetters' },
     params: templateParamsSchema,
     body: templatePreviewSchema,
+    bodyLimit: '1mb',
     handle: ({ services, scheme, params, body }) =>
       previewTemplate(services, scheme, { ...body, kind: params.letterKind }),
   }),

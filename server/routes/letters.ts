@@ -20,14 +20,17 @@ import { withdrawLetters } from '../commands/withdraw-letters.ts';
 import { lettersPdf } from '../documents/letter/letter-pdf.ts';
 import { AppError } from '../errors.ts';
 import { findRecipients } from '../letters/find-recipients.ts';
+import { findEarlierOf, findEarlierOfBatch } from '../models/earlier-letters.ts';
 import { findBatches, findBatchText } from '../models/letter-batches.ts';
+import { findChosen, findExceptions } from '../models/letter-exceptions.ts';
 import { heldSettings } from '../models/letter-settings.ts';
-import { findExceptions, findLetters } from '../models/letters.ts';
+import { findLetters } from '../models/letters.ts';
 import { Run } from '../models/run.ts';
 import type { Scheme } from '../models/scheme.ts';
 import type { Actor } from '../policies/actor.ts';
 import {
   presentBatch,
+  presentEarlier,
   presentLetter,
   presentListedLetter,
   presentRecipients,
@@ -75,7 +78,10 @@ export const letterRoutes = [
       const { settings } = await heldSettings(database, scheme);
       const found = await findRecipients(database, scheme.id, settings, body, null);
       const run = found.runId === null ? null : await Run.findByPk(found.runId);
-      return presentRecipients(found, run?.number ?? null);
+      const of = { schemeId: scheme.id, kind: body.kind };
+      const parties = found.recipients.map(({ party }) => party);
+      const earlier = await findEarlierOf(database, of, parties);
+      return presentRecipients(found, run?.number ?? null, earlier);
     },
   }),
   defineRoute({
@@ -97,16 +103,20 @@ export const letterRoutes = [
     params: batchParamsSchema,
     handle: async ({ services: { database }, actor, scheme, params: { batchId } }) => {
       const batch = await readBatch(database, scheme.id, batchId);
-      const [letters, leftOut, text] = await Promise.all([
+      const [letters, earlier, leftOut, chosen, text] = await Promise.all([
         findLetters(database, scheme.id, { batchId }),
+        findEarlierOfBatch(database, scheme.id, batch),
         findExceptions(database, batchId, actor.isAdministrator),
+        findChosen(database, batchId, actor.isAdministrator),
         findBatchText(database, batchId),
       ]);
       return {
         batch: presentBatch(batch),
         text,
         letters: letters.map((letter) => presentListedLetter(letter, actor)),
+        earlier: presentEarlier(letters, earlier),
         leftOut,
+        chosen,
       };
     },
   }),

@@ -53,6 +53,7 @@ function option(
       intervals: [],
       ...more,
     },
+    shafts: [],
   };
 }
 

@@ -1,12 +1,20 @@
 import { z } from 'zod';
 import { LIMITS } from './limits.ts';
+import { writtenLine } from './written.ts';
 
 /**
  * How long an alignment and its lists may be.
  *
  * Units: pieces, letters. Valid: read only. Source: [own].
  */
-export const ALIGNMENT_LIMITS = { points: 5000, intervals: 200, levels: 500, name: 80 } as const;
+export const ALIGNMENT_LIMITS = {
+  points: 5000,
+  intervals: 200,
+  levels: 500,
+  shafts: 100,
+  name: 80,
+  source: 200,
+} as const;
 
 const coordinate = z.number().min(-LIMITS.coordinate).max(LIMITS.coordinate);
 const level = z.number('Write a number.').min(-LIMITS.level).max(LIMITS.level);
@@ -92,6 +100,36 @@ export const alignmentDesignSchema = z
  */
 export type AlignmentDesign = z.infer<typeof alignmentDesignSchema>;
 
+const coordinateGiven = z.number('Write a number.').min(-LIMITS.coordinate).max(LIMITS.coordinate);
+
+/**
+ * The shafts of an option: named places beside what is driven, each with where it comes from. No run takes
+ * them; rules of letters do.
+ *
+ * Units: m in the scheme's grid, at the middle of the shaft. Valid: names that differ. Source: [own].
+ */
+export const shaftsSchema = z
+  .array(
+    z.strictObject({
+      name: writtenLine(ALIGNMENT_LIMITS.name).min(1, 'Name the shaft.'),
+      east: coordinateGiven,
+      north: coordinateGiven,
+      source: writtenLine(ALIGNMENT_LIMITS.source).min(1, 'Say where this comes from.'),
+    }),
+  )
+  .max(ALIGNMENT_LIMITS.shafts)
+  .refine(
+    (given) => new Set(given.map((one) => one.name)).size === given.length,
+    'Give each shaft a name of its own.',
+  );
+
+/**
+ * The shafts of an option.
+ *
+ * Units: as shaftsSchema. Valid: parsed by it. Source: [own].
+ */
+export type Shafts = z.infer<typeof shaftsSchema>;
+
 const name = z
   .string()
   .trim()
@@ -104,7 +142,11 @@ const name = z
  *
  * Units: as alignmentDesignSchema. Valid: a name that no other option of the scheme has. Source: [own].
  */
-export const newAlignmentSchema = z.strictObject({ name, design: alignmentDesignSchema });
+export const newAlignmentSchema = z.strictObject({
+  name,
+  design: alignmentDesignSchema,
+  shafts: shaftsSchema.default([]),
+});
 
 /**
  * A change of an option, on top of the version that was seen.
@@ -116,6 +158,7 @@ export const changeAlignmentSchema = z.strictObject({
   version: z.number().int().min(1),
   name: name.optional(),
   design: alignmentDesignSchema.optional(),
+  shafts: shaftsSchema.optional(),
 });
 
 /**
@@ -142,6 +185,7 @@ export const alignmentSchema = z.strictObject({
   name: z.string(),
   version: z.number(),
   design: alignmentDesignSchema,
+  shafts: shaftsSchema,
   length: z.number(),
   changedAt: z.string(),
   changedBy: z.string().nullable(),

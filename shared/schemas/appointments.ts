@@ -49,6 +49,7 @@ const when = {
     .min(APPOINTMENT_LIMITS.least, `At least ${APPOINTMENT_LIMITS.least} minutes.`)
     .max(APPOINTMENT_LIMITS.most, `At most ${APPOINTMENT_LIMITS.most} minutes.`),
   place: writtenLine(APPOINTMENT_LIMITS.place).min(1, 'Say where it is.'),
+  isFreeDayMeant: z.boolean(),
 };
 
 /**
@@ -56,7 +57,7 @@ const when = {
  * twice offers it once.
  *
  * Units: minutes; startsAt with an offset. Valid: the party has an interest in the building; the time is to
- * come. Source: [own].
+ * come, on a working day of the scheme unless `isFreeDayMeant`. Source: [own].
  */
 export const newAppointmentSchema = z.strictObject({
   id: z.uuid(),

@@ -3,7 +3,7 @@ import { letterExceptions } from './letter-exceptions.ts';
 import { LETTER_LIMITS } from './letter-limits.ts';
 import { LETTER_KINDS } from './letter-settings.ts';
 import { letterWordsSchema } from './letter-templates.ts';
-import { letterReasonSchema, listedLetterSchema } from './letters.ts';
+import { earlierLetterSchema, letterReasonSchema, listedLetterSchema } from './letters.ts';
 import { writtenText } from './written.ts';
 
 const kind = z.enum(LETTER_KINDS);
@@ -45,7 +45,8 @@ export type NewBatch = z.infer<typeof newBatchSchema>;
 /**
  * Who gets a letter of a kind and why, and how many letters that makes; `short` lists at most so many.
  *
- * Units: pieces. Valid: `without` counts buildings that a rule names and that nobody has an interest in.
+ * Units: pieces. Valid: `without` counts buildings that a rule names and that nobody has an interest in;
+ * `earlier` of a party is the newest first.
  * Source: [own].
  */
 export const recipientsSchema = z.strictObject({
@@ -61,6 +62,7 @@ export const recipientsSchema = z.strictObject({
       channel: z.enum(['e-mail', 'post']),
       reasons: z.array(letterReasonSchema),
       leftOut: z.string().nullable(),
+      earlier: z.array(earlierLetterSchema),
     }),
   ),
 });
@@ -140,17 +142,34 @@ export type Batch = z.infer<typeof batchSchema>;
  */
 export const batchesSchema = z.array(batchSchema);
 
+const keptException = z.strictObject({
+  partyId: z.uuid().nullable(),
+  name: z.string(),
+  why: z.string(),
+});
+
 /**
- * A batch with its letters and who was left out; `text` is what was written for it, with its marks.
+ * A batch with its letters, who was left out and who was chosen by hand; `text` is what was written for it,
+ * with its marks, `earlier` which of its letters go to somebody who had one like it.
  *
- * Units: as batchSchema. Valid: letters by number; text of free text only. Source: [own].
+ * Units: as batchSchema. Valid: letters by number; text of free text only; exceptions under the party that
+ * stands today, null where no letter can go to them any more. Source: [own].
  */
 export const batchDetailSchema = z.strictObject({
   batch: batchSchema,
   text: letterWordsSchema.nullable(),
   letters: z.array(listedLetterSchema),
-  leftOut: z.array(z.strictObject({ name: z.string(), why: z.string() })),
+  earlier: z.array(z.strictObject({ letterId: z.uuid(), had: z.array(earlierLetterSchema) })),
+  leftOut: z.array(keptException),
+  chosen: z.array(keptException),
 });
+
+/**
+ * A batch with its letters and exceptions.
+ *
+ * Units: as batchDetailSchema. Valid: parsed by it. Source: [own].
+ */
+export type BatchDetail = z.infer<typeof batchDetailSchema>;
 
 /**
  * The check of a batch.

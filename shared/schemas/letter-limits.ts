@@ -8,6 +8,6 @@ export const LETTER_LIMITS = {
   body: 10_000,
   why: 500,
   comment: 2000,
-  chosen: 1000,
+  chosen: 5000,
   letters: 20_000,
 } as const;

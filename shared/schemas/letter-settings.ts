@@ -42,10 +42,11 @@ export const SETTINGS_LIMITS = {
 } as const;
 
 const days = z.number('Write a number.').int().min(1).max(SETTINGS_LIMITS.days);
+const metres = z.number('Write a number.').positive().max(SETTINGS_LIMITS.near);
 const coordinate = z.number('Write a number.').min(-LIMITS.coordinate).max(LIMITS.coordinate);
 
 /**
- * A place that buildings may be near to, as a shaft.
+ * A place that buildings may be near to, as a work site.
  *
  * Units: m in the scheme's grid. Valid: up to 1 km away. Source: [own].
  */
@@ -53,20 +54,23 @@ export const nearPlaceSchema = z.strictObject({
   name: writtenLine(SETTINGS_LIMITS.title).min(1, 'Name the place.'),
   east: coordinate,
   north: coordinate,
-  metres: z.number('Write a number.').positive().max(SETTINGS_LIMITS.near),
+  metres,
 });
 
 /**
  * Who gets a letter and why: everybody with an interest in a building of the register that the filter means,
- * that is near the place, where there is one, and that is listed, where only such are meant. `why` is what the record says of each building.
+ * that is near the place, where there is one, that is so near to a shaft of the line, where that is meant,
+ * and that is listed, where only such are meant. `why` is what the record says of each building.
  *
- * Units: as registerFilterSchema and nearPlaceSchema. Valid: a source and a day always. Source: [own].
+ * Units: as registerFilterSchema and nearPlaceSchema; shaftWithin m. Valid: a source and a day always; older
+ * versions know no shafts. Source: [own].
  */
 export const letterRuleSchema = z.strictObject({
   kind: z.enum(LETTER_KINDS),
   why: writtenLine(SETTINGS_LIMITS.title).min(1, 'Say why they get it.'),
   filter: registerFilterSchema,
   near: nearPlaceSchema.nullable(),
+  shaftWithin: metres.nullable().default(null),
   listedOnly: z.boolean(),
   source: writtenLine(SETTINGS_LIMITS.title).min(1, 'Say where this comes from.'),
   date: z.iso.date('Write a day.'),
@@ -165,6 +169,7 @@ export type HeldLetterSettings = z.infer<typeof heldLetterSettingsSchema>;
 function defaultRules(date: string): LetterRule[] {
   const rule = {
     near: null,
+    shaftWithin: null,
     listedOnly: false,
     source: 'common practice, no source',
     date,
@@ -185,6 +190,13 @@ function defaultRules(date: string): LetterRule[] {
       kind: 'first information',
       why: 'A listed building, and the ground may move at all',
       filter: { ranges: { settlement: { from: 0.1 } } },
+    },
+    {
+      ...rule,
+      kind: 'first information',
+      why: 'Within 30 m of a shaft',
+      filter: {},
+      shaftWithin: 30,
     },
     {
       ...rule,

@@ -34,6 +34,25 @@ export const letterReasonSchema = z.strictObject({
 export type LetterReason = z.infer<typeof letterReasonSchema>;
 
 /**
+ * A letter of the same kind that somebody had for the same building already, or that waits for them in
+ * another batch; `buildings` by address, name or reference.
+ *
+ * Units: none. Valid: sentAt null while it waits; not where its mail failed. Source: [own].
+ */
+export const earlierLetterSchema = z.strictObject({
+  batchNumber: z.number().int(),
+  sentAt: z.iso.datetime().nullable(),
+  buildings: z.array(z.string()),
+});
+
+/**
+ * A letter of the same kind that somebody had already.
+ *
+ * Units: none. Valid: parsed by earlierLetterSchema. Source: [own].
+ */
+export type EarlierLetter = z.infer<typeof earlierLetterSchema>;
+
+/**
  * Where a letter stands on its way.
  *
  * Units: none. Valid: closed list; post is on the record once its batch is printed. Source: [own].

@@ -100,9 +100,9 @@ export function partyImportPath(schemeId: string, partyImportId: string): string
   return `${partyImportsPath(schemeId)}/${partyImportId}`;
 }
 
-/** Where a batch is prepared that begins with the text of another. */
-export function batchFromTextPath(schemeId: string, batchId: string): string {
-  return `${letterPagePath(schemeId, 'new')}?text=${batchId}`;
+/** Where a batch is prepared that begins with the kind, the exceptions and the text of another. */
+export function batchAgainPath(schemeId: string, batchId: string): string {
+  return `${letterPagePath(schemeId, 'new')}?again=${batchId}`;
 }
 
 /** A batch of letters, or one of the screens beside them. */

@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import { workingDayFrom, workingDaysAfter } from '../../server/working-days.ts';
+import { freeDayWords, workingDayFrom, workingDaysAfter } from '../../server/working-days.ts';
 
 const EASTER = [{ date: '2027-03-26' }, { date: '2027-03-29' }];
 
@@ -22,4 +22,16 @@ test.each([
   ['2027-04-03', '2027-04-05', 'a weekend'],
 ])('the working day from %s on is %s: %s', (day, then) => {
   expect(workingDayFrom(day, EASTER)).toBe(then);
+});
+
+test.each([
+  ['2027-03-25', null],
+  ['2027-04-03', 'Saturday 3 April is no working day. The next working day is Monday 5 April.'],
+  ['2027-04-04', 'Sunday 4 April is no working day. The next working day is Monday 5 April.'],
+  [
+    '2027-03-26',
+    'Friday 26 March is a holiday, Good Friday. The next working day is Monday 29 March.',
+  ],
+])('of %s is said: %s', (day, words) => {
+  expect(freeDayWords(day, [{ date: '2027-03-26', name: 'Good Friday' }])).toBe(words);
 });

@@ -1,5 +1,5 @@
 import { hash } from '@node-rs/argon2';
-import type { AlignmentDesign } from '../../shared/schemas/alignments.ts';
+import type { AlignmentDesign, Shafts } from '../../shared/schemas/alignments.ts';
 import type { LinkPurpose } from '../../shared/schemas/links.ts';
 import type { Role } from '../../shared/schemas/roles.ts';
 import { linkTokenHash } from '../../server/authentication/link-token.ts';
@@ -152,7 +152,12 @@ export async function aBuilding(
 /** An option for the line of a scheme, changed by nobody yet. */
 export function anAlignment(
   scheme: Scheme,
-  overrides: Partial<{ name: string; design: AlignmentDesign; changedBy: string }> = {},
+  overrides: Partial<{
+    name: string;
+    design: AlignmentDesign;
+    shafts: Shafts;
+    changedBy: string;
+  }> = {},
 ): Promise<Alignment> {
   made += 1;
   return Alignment.create({

@@ -9,7 +9,7 @@ import {
   type SettlementContour,
 } from '../../../shared/ground/settlement-contours.ts';
 import { MethodError } from '../../../shared/method-error.ts';
-import type { AlignmentDesign } from '../../../shared/schemas/alignments.ts';
+import type { AlignmentDesign, Shafts } from '../../../shared/schemas/alignments.ts';
 import type { LineShape } from '../map/map-line.ts';
 import type { GridPlace } from '../map/place/grid-projection.ts';
 import { chainageWords } from '../../../shared/presentation/chainage-words.ts';
@@ -81,6 +81,15 @@ export function shapesOfDesign(design: AlignmentDesign): LineShape[] {
     if (error instanceof MethodError) return [];
     throw error;
   }
+}
+
+/** The middle of each shaft, with its name. */
+export function shapesOfShafts(shafts: Shafts): LineShape[] {
+  return shafts.map(({ name, east, north }) => ({
+    kind: 'shaft',
+    place: [east, north],
+    text: name,
+  }));
 }
 
 const MILLIMETRES = 1000;

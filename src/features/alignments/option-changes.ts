@@ -1,5 +1,5 @@
 import { planDistance } from '../../../shared/geometry/plan-distance.ts';
-import type { AlignmentDesign } from '../../../shared/schemas/alignments.ts';
+import type { AlignmentDesign, Shafts } from '../../../shared/schemas/alignments.ts';
 import type { ValueChange } from '../../lib/changes-between.ts';
 import {
   boresWords,
@@ -9,7 +9,11 @@ import {
   rangeWords,
 } from '../../../shared/presentation/design-words.ts';
 
-type Option = { readonly name: string; readonly design: AlignmentDesign };
+type Option = {
+  readonly name: string;
+  readonly design: AlignmentDesign;
+  readonly shafts: Shafts;
+};
 
 const PLACES = 3;
 
@@ -39,10 +43,16 @@ function lineWords({ line }: AlignmentDesign): string {
   return `${line.length} points, ${figure(lengthOf(line), 1)} m, from ${plain(east)}, ${plain(north)}`;
 }
 
-/** What people know of an option, by the names that the form has for it. */
-export function optionLines({ name, design }: Option): readonly (readonly [string, string])[] {
+function shaftsWords({ shafts }: Option): string {
+  const words = shafts.map(({ name, east, north, source }) => {
+    return `${name} at ${plain(east)}, ${plain(north)} (${source})`;
+  });
+  return words.length === 0 ? 'none' : words.join('; ');
+}
+
+/** What people know of a design, by the names that the form has for it. */
+export function designLines(design: AlignmentDesign): readonly (readonly [string, string])[] {
   return [
-    ['Name', name],
     ['Line', lineWords(design)],
     ['Levels of the axis', levelsWords(design)],
     ['Diameter', `${plain(design.diameter)} m`],
@@ -53,6 +63,11 @@ export function optionLines({ name, design }: Option): readonly (readonly [strin
     ['Trough width K', rangeWords(design.troughWidth, plain)],
     ['Intervals', intervalsWords(design)],
   ];
+}
+
+/** The same of an option, with what no run takes of it. */
+export function optionLines(option: Option): readonly (readonly [string, string])[] {
+  return [['Name', option.name], ...designLines(option.design), ['Shafts', shaftsWords(option)]];
 }
 
 /** What somebody changed of an option, value by value. */

@@ -6,6 +6,8 @@ export type WhenDraft = {
   readonly time: string;
   readonly minutes: string;
   readonly place: string;
+  /** That it is on a weekend or a holiday on purpose. */
+  readonly isFreeDayMeant: boolean;
 };
 
 /** Times that a part of a day is begun with. */
@@ -16,6 +18,7 @@ export const NO_TIME: WhenDraft = {
   time: '10:00',
   minutes: '60',
   place: 'At the building',
+  isFreeDayMeant: false,
 };
 
 function twoDigits(value: number): string {
@@ -30,20 +33,22 @@ export function draftOfAppointment({ startsAt, minutes, place }: Appointment): W
     time: `${twoDigits(at.getHours())}:${twoDigits(at.getMinutes())}`,
     minutes: String(minutes),
     place,
+    isFreeDayMeant: false,
   };
 }
 
 /** A draft with a day that an owner asked for. */
 export function onAskedDay(draft: WhenDraft, asked: AskedFor['days'][number]): WhenDraft {
-  return { ...draft, day: asked.day, time: BEGINS[asked.part] };
+  return { ...draft, day: asked.day, time: BEGINS[asked.part], isFreeDayMeant: false };
 }
 
 /** What a draft comes to, as it is sent; what is missing is left for the schema to find. */
-export function whenOf({ day, time, minutes, place }: WhenDraft) {
+export function whenOf({ day, time, minutes, place, isFreeDayMeant }: WhenDraft) {
   const at = new Date(`${day}T${time}`);
   return {
     startsAt: Number.isNaN(at.getTime()) ? '' : at.toISOString(),
     minutes: minutes.trim() === '' ? NaN : Number(minutes),
     place,
+    isFreeDayMeant,
   };
 }

@@ -1,7 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { useParams } from 'react-router-dom';
-import type { z } from 'zod';
-import type { batchDetailSchema } from '../../../shared/schemas/letter-batches.ts';
+import type { BatchDetail } from '../../../shared/schemas/letter-batches.ts';
 import { capital } from '../../../shared/presentation/capital.ts';
 import { NotFoundPage } from '../../app/routes/not-found.tsx';
 import { Page } from '../../components/layout/page.tsx';
@@ -18,17 +17,15 @@ import { BatchSteps } from './components/batch-steps.tsx';
 import { LettersTable } from './components/letters-table.tsx';
 import { BATCH_SHAPES, deliveryWords, KIND_LABELS, lettersWords } from './letter-words.ts';
 
-type Detail = z.infer<typeof batchDetailSchema>;
-
 function who(at: string | null, by: string | null): string {
   return at === null || by === null ? '' : `${formatMoment(at)}, ${by}`;
 }
 
-function templateWords({ templateVersion }: Detail['batch']): string {
+function templateWords({ templateVersion }: BatchDetail['batch']): string {
   return templateVersion === 0 ? 'first template' : `template version ${templateVersion}`;
 }
 
-function BatchFacts({ batch, text }: Pick<Detail, 'batch' | 'text'>) {
+function BatchFacts({ batch, text }: Pick<BatchDetail, 'batch' | 'text'>) {
   const { state, preparedAt, preparedBy, checkedAt, checkedBy, sentAt, sentBy, comment } = batch;
   const { settingsVersion, runNumber, printedAt } = batch;
   const basis = [
@@ -62,13 +59,30 @@ function BatchFacts({ batch, text }: Pick<Detail, 'batch' | 'text'>) {
   );
 }
 
-function LeftOut({ leftOut }: Pick<Detail, 'leftOut'>) {
-  if (leftOut.length === 0) return null;
+/** How many letters go to somebody who had one like it. */
+function hadWords({ sentAt }: BatchDetail['batch'], count: number): string {
+  const had = 'had a letter of this kind for the same building before';
+  const waits = sentAt === null ? ', or have it waiting in another batch' : '';
+  return `${lettersWords(count)} of these ${count === 1 ? 'goes' : 'go'} to owners who ${had}${waits}.`;
+}
+
+type ExceptionsProps = {
+  readonly title: string;
+  readonly note: string;
+  readonly exceptions: BatchDetail['chosen'];
+};
+
+/** Who gets a letter, or none, by somebody's hand, each with the reason. */
+function Exceptions({ title, note, exceptions }: ExceptionsProps) {
+  if (exceptions.length === 0) return null;
   return (
-    <Panel title="Left out" note="although a rule names them">
+    <Panel title={title} note={note}>
       <ul className="text-small">
-        {leftOut.map(({ name, why }) => (
-          <li key={name} className="border-b border-hairline py-1 break-words last:border-0">
+        {exceptions.map(({ name, why }) => (
+          <li
+            key={`${name} ${why}`}
+            className="border-b border-hairline py-1 break-words last:border-0"
+          >
             <b className="font-semibold">{name}</b> {why}
           </li>
         ))}
@@ -91,7 +105,7 @@ function WholeBatch({ batchId }: { readonly batchId: string }) {
       </Page>
     );
   }
-  const { batch, text, letters, leftOut } = data;
+  const { batch, text, letters, earlier, leftOut, chosen } = data;
   return (
     <Page
       title={`${KIND_LABELS[batch.kind]}: ${lettersWords(batch.letters)}, batch ${batch.number}`}
@@ -105,9 +119,11 @@ function WholeBatch({ batchId }: { readonly batchId: string }) {
         </Panel>
       )}
       <Panel title="Letters" note="each opens as it will be read">
-        <LettersTable label="Letters of the batch" letters={letters} />
+        {earlier.length > 0 && <p className="my-2 text-body">{hadWords(batch, earlier.length)}</p>}
+        <LettersTable label="Letters of the batch" {...{ letters, earlier }} />
       </Panel>
-      <LeftOut leftOut={leftOut} />
+      <Exceptions title="Left out" note="although a rule names them" exceptions={leftOut} />
+      <Exceptions title="Chosen by hand" note="although no rule names them" exceptions={chosen} />
     </Page>
   );
 }

@@ -1,7 +1,8 @@
 import type { Batch } from '../../../shared/schemas/letter-batches.ts';
 import { LETTER_KINDS, type LetterKind } from '../../../shared/schemas/letter-settings.ts';
 import type { MatterKind } from '../../../shared/schemas/matters.ts';
-import type { LetterReason, ListedLetter } from '../../../shared/schemas/letters.ts';
+import type { EarlierLetter, LetterReason, ListedLetter } from '../../../shared/schemas/letters.ts';
+import { formatShortDay } from '../../lib/format-date.ts';
 import type { State } from '../../components/ui/state-mark.tsx';
 
 /** What each kind of letter is for. */
@@ -63,6 +64,16 @@ export function reasonWords(reasons: readonly LetterReason[]): string {
       const listed = named.slice(0, MOST_NAMED).join(', ');
       if (named.length === 0) return why;
       return `${why}: ${listed}${more > 0 ? ` and ${more} more` : ''}`;
+    })
+    .join('; ');
+}
+
+/** What somebody had already, or has waiting: as "on 2 Dec 2026 in batch 3, for 3 Middle Row". */
+export function earlierWords(earlier: readonly EarlierLetter[]): string {
+  return earlier
+    .map(({ batchNumber, sentAt, buildings }) => {
+      const how = sentAt === null ? 'waits' : `on ${formatShortDay(sentAt)}`;
+      return `${how} in batch ${batchNumber}, for ${buildings.join(', ')}`;
     })
     .join('; ');
 }

@@ -2,7 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import type { LetterWords } from '../../../shared/presentation/letter-text.ts';
-import type { Batch, BatchPreview } from '../../../shared/schemas/letter-batches.ts';
+import type { BatchDetail, BatchPreview } from '../../../shared/schemas/letter-batches.ts';
 import type { LetterKind } from '../../../shared/schemas/letter-settings.ts';
 import { NotFoundPage } from '../../app/routes/not-found.tsx';
 import { Page } from '../../components/layout/page.tsx';
@@ -11,12 +11,13 @@ import { QueryError } from '../../components/ui/query-error.tsx';
 import { Select } from '../../components/ui/select.tsx';
 import { can } from '../schemes/can.ts';
 import { useScheme } from '../schemes/scheme-context.ts';
-import { recipientsQuery } from './api/letter-batches.ts';
+import { batchQuery, recipientsQuery } from './api/letter-batches.ts';
 import { ChooseParty } from './components/choose-party.tsx';
 import { LetterLook } from './components/letter-look.tsx';
 import { LetterWordsFields } from './components/letter-words-fields.tsx';
 import { PrepareFound } from './components/prepare-found.tsx';
 import { KIND_OPTIONS } from './letter-words.ts';
+import { preparedAgainWords, preparedAgain } from './prepared-again.ts';
 import { useOwnText } from './use-own-text.ts';
 
 type OwnTextProps = {
@@ -37,33 +38,18 @@ function OwnText({ asked, written, onChange }: OwnTextProps) {
   );
 }
 
-/** Which batch the text comes from, and why that one was returned. */
-function Earlier({ batch }: { readonly batch: Batch }) {
-  const { number, comment } = batch;
-  return (
-    <p className="mt-4 max-w-[72ch] text-body break-words">
-      The text is that of batch {number}.{comment !== null && ` Its check said: “${comment}”`}
-    </p>
-  );
-}
-
-function NewBatchForm() {
+function NewBatchForm({ earlier }: { readonly earlier: BatchDetail | null }) {
   const scheme = useScheme();
-  const [search] = useSearchParams();
-  const earlierId = search.get('text');
-  const [asked, setAsked] = useState<BatchPreview>({
-    kind: earlierId === null ? 'first information' : 'free text',
-    leftOut: [],
-    chosen: [],
-  });
-  const { isFree, text, setTyped, hasWritten, earlier, ...begun } = useOwnText(
-    asked.kind,
-    earlierId,
-  );
+  const [asked, setAsked] = useState(() => preparedAgain(earlier));
+  const own = useOwnText(asked.kind, earlier?.text ?? null);
+  const { isFree, text, setTyped, hasWritten } = own;
   const { data, error, refetch } = useQuery(recipientsQuery(scheme.id, asked));
   const isReady = !isFree || text !== null;
   return (
-    <Page title="Prepare letters" lead="The rules say who gets which letter; each reason is kept.">
+    <>
+      {earlier !== null && (
+        <p className="mb-4 max-w-[72ch] text-body break-words">{preparedAgainWords(earlier)}</p>
+      )}
       <div className="grid max-w-[640px] grid-cols-2 items-end gap-3 max-sm:grid-cols-1">
         <Select
           label="Kind of letter"
@@ -80,10 +66,9 @@ function NewBatchForm() {
           }}
         />
       </div>
-      {begun.error !== null && (
-        <QueryError what="The letter" error={begun.error} onRetry={begun.refetch} />
+      {own.error !== null && (
+        <QueryError what="The letter" error={own.error} onRetry={own.refetch} />
       )}
-      {earlier !== undefined && <Earlier batch={earlier} />}
       {text !== null && <OwnText asked={asked} written={text} onChange={setTyped} />}
       {error !== null && (
         <QueryError what="Who gets it" error={error} onRetry={() => void refetch()} />
@@ -92,11 +77,34 @@ function NewBatchForm() {
       {data !== undefined && isReady && (
         <PrepareFound found={data} {...{ asked, text, hasWritten }} onChange={setAsked} />
       )}
+    </>
+  );
+}
+
+/** A batch that was not sent, prepared again. */
+function PrepareAgain({ batchId }: { readonly batchId: string }) {
+  const { data, error, refetch } = useQuery(batchQuery(useScheme().id, batchId));
+  if (error !== null) {
+    return <QueryError what="The earlier batch" error={error} onRetry={() => void refetch()} />;
+  }
+  return data === undefined ? (
+    <LoadingRows what="the earlier batch" />
+  ) : (
+    <NewBatchForm earlier={data} />
+  );
+}
+
+function Preparation() {
+  const [search] = useSearchParams();
+  const earlierId = search.get('again');
+  return (
+    <Page title="Prepare letters" lead="The rules say who gets which letter; each reason is kept.">
+      {earlierId === null ? <NewBatchForm earlier={null} /> : <PrepareAgain batchId={earlierId} />}
     </Page>
   );
 }
 
 /** Who gets a letter of a kind and why; then the letters are written. */
 export function NewBatchPage() {
-  return can(useScheme(), 'prepareLetters') ? <NewBatchForm /> : <NotFoundPage />;
+  return can(useScheme(), 'prepareLetters') ? <Preparation /> : <NotFoundPage />;
 }

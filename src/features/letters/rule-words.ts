@@ -11,10 +11,13 @@ function filterWords(filter: RegisterFilter): string[] {
 }
 
 /** Which buildings a rule means, in one line. */
-export function ruleWords({ filter, near, listedOnly }: LetterRule): string {
+export function ruleWords({ filter, near, shaftWithin, listedOnly }: LetterRule): string {
   const words = [
     ...filterWords(filter),
     ...(listedOnly ? ['listed'] : []),
+    ...(shaftWithin === null
+      ? []
+      : [`within ${formatCount(shaftWithin)} m of a shaft of the line`]),
     ...(near === null ? [] : [`within ${formatCount(near.metres)} m of ${near.name}`]),
   ];
   return words.length === 0 ? 'every building' : words.join(', ');

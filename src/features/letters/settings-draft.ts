@@ -10,7 +10,10 @@ import { faultOfHolidays, holidaysOfLines, linesOfHolidays } from './holiday-lin
 type NearDraft = { readonly name: string; readonly east: string; readonly north: string; readonly metres: string }; // prettier-ignore
 
 /** A rule while it is being written; figures as they were typed. */
-export type RuleDraft = Omit<LetterRule, 'near'> & { readonly near: NearDraft | null };
+export type RuleDraft = Omit<LetterRule, 'near' | 'shaftWithin'> & {
+  readonly near: NearDraft | null;
+  readonly shaftWithin: string | null;
+};
 
 /** The settings while they are being written. */
 export type SettingsDraft = Omit<
@@ -60,8 +63,9 @@ export function draftOfSettings(settings: LetterSettings): SettingsDraft {
   const { answerDays, holidays } = settings;
   return {
     ...settings,
-    rules: rules.map(({ near, ...rule }) => ({
+    rules: rules.map(({ near, shaftWithin, ...rule }) => ({
       ...rule,
+      shaftWithin: shaftWithin === null ? null : String(shaftWithin),
       near: near && {
         name: near.name,
         east: String(near.east),
@@ -90,8 +94,9 @@ export function readSettings(
   const holidays = holidaysOfLines(draft.holidays);
   const parsed = letterSettingsSchema.safeParse({
     ...draft,
-    rules: draft.rules.map(({ near, ...rule }) => ({
+    rules: draft.rules.map(({ near, shaftWithin, ...rule }) => ({
       ...rule,
+      shaftWithin: shaftWithin === null ? null : numberOf(shaftWithin),
       near: near && {
         name: near.name,
         east: numberOf(near.east),
@@ -128,6 +133,7 @@ export function newRule(date: string): RuleDraft {
   const filter: RegisterFilter = { ranges: { settlement: { from: 1 } } };
   return {
     ...{ kind: 'first information', why: '', filter, near: null, listedOnly: false },
+    shaftWithin: null,
     ...{ source: '', date, isOn: true },
   };
 }

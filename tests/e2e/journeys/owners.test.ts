@@ -37,6 +37,7 @@ async function offerSurvey(visitor: Visitor, scheme: string): Promise<void> {
       startsAt: new Date(Date.now() + 10 * 24 * 60 * 60 * 1000).toISOString(),
       minutes: 60,
       place: 'At the front door',
+      isFreeDayMeant: true,
     },
   });
   expect(offered.status()).toBe(201);

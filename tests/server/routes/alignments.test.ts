@@ -67,6 +67,46 @@ describe('an option', () => {
     expect(await actionsOf(scheme)).toEqual(['create alignment', 'create alignment']);
   });
 
+  test('has shafts, which its copies have too, a change leaves and the trail tells', async () => {
+    const { scheme, address, agent } = await aDesigner();
+    const shafts = [{ name: 'East shaft', east: 600, north: 5.5, source: 'Drawing 12' }];
+    const answer = await agent.post(address).send({ name: 'A', design: DESIGN, shafts });
+    const made = alignmentSchema.parse(answer.body);
+    expect(made.shafts).toEqual(shafts);
+    const copied = await agent.post(`${address}/${made.id}/copies`).send({ name: 'B' });
+    expect(alignmentSchema.parse(copied.body).shafts).toEqual(shafts);
+    const at = `${address}/${made.id}`;
+    const named = await agent.patch(at).send({ version: 1, name: 'C' });
+    expect(alignmentSchema.parse(named.body).shafts).toEqual(shafts);
+    const none = await agent.patch(at).send({ version: 2, shafts: [] });
+    expect(alignmentSchema.parse(none.body)).toMatchObject({
+      version: 3,
+      shafts: [],
+      design: DESIGN,
+    });
+    const entries = await AuditEntry.findAll({ where: { schemeId: scheme.id }, order: ['id'] });
+    expect(entries.at(-1)).toMatchObject({ before: { shafts }, after: { shafts: [] } });
+  });
+
+  test.each([
+    ['without a name', { name: ' ' }, 'shafts.0.name'],
+    ['without a source', { source: '' }, 'shafts.0.source'],
+    ['nowhere', { east: null }, 'shafts.0.east'],
+  ])('is refused with a shaft %s', async (_, bad, path) => {
+    const { address, agent } = await aDesigner();
+    const shaft = { name: 'East shaft', east: 600, north: 5.5, source: 'Drawing 12', ...bad };
+    const answer = await agent.post(address).send({ name: 'A', design: DESIGN, shafts: [shaft] });
+    expect(answer.status).toBe(422);
+    expect(answer.body).toMatchObject({ error: { fields: [{ path }] } });
+  });
+
+  test('is refused with two shafts of one name', async () => {
+    const { address, agent } = await aDesigner();
+    const shaft = { name: 'East shaft', east: 600, north: 5.5, source: 'Drawing 12' };
+    const asked = { name: 'A', design: DESIGN, shafts: [shaft, { ...shaft, east: 9 }] };
+    expect((await agent.post(address).send(asked)).body).toMatchObject({ error: { fields: [{ path: 'shafts' }] } }); // prettier-ignore
+  });
+
   test.each(FAULTY)('is refused with %j at %s', async (bad, path) => {
     const { scheme, address, agent } = await aDesigner();
     const design = { ...DESIGN, ...bad };

@@ -9,7 +9,7 @@ import {
 } from '../../../shared/schemas/appointments.ts';
 import { AuditEntry } from '../../../server/models/audit-entry.ts';
 import type { Scheme } from '../../../server/models/scheme.ts';
-import { aBuilding, aMember, aPerson, aScheme } from '../../support/factories.ts';
+import { aBuilding, aMember, anAdministrator, aPerson, aScheme } from '../../support/factories.ts';
 import { keepSettings } from '../../support/letters.ts';
 import { aSignedInOwner } from '../../support/matters.ts';
 import { aParty } from '../../support/parties.ts';
@@ -43,6 +43,7 @@ function anAppointment(overrides: object = {}) {
     startsAt: '2999-06-11T10:00:00+02:00',
     minutes: 90,
     place: 'Front door',
+    isFreeDayMeant: false,
     ...overrides,
   };
 }
@@ -119,6 +120,27 @@ describe('an offer', () => {
     expect(answer.body).toMatchObject({ error: { fields: [{ path }] } });
   });
 
+  test.each([
+    ['a Saturday', '2999-06-15T10:00:00Z'],
+    ['a Sunday', '2999-06-16T10:00:00Z'],
+    ['a day that is a Saturday where the owners are', '2999-06-14T23:30:00Z'],
+    ['a holiday', '2999-06-12T10:00:00Z'],
+  ])('is refused on %s unless that is meant, and so is another time', async (_, startsAt) => {
+    const holidays = [{ date: '2999-06-12', name: 'Founders’ Day' }];
+    await keepSettings(await signIn(app(), await anAdministrator()), scheme, { timeZone: 'Europe/Paris', holidays }); // prettier-ignore
+    const answer = await assessor.post(address).send(anAppointment({ startsAt }));
+    expect(answer.status).toBe(422);
+    expect(answer.body).toMatchObject({ error: { fields: [{ path: 'startsAt' }] } });
+    expect(answer.text).toContain('Choose a working day, or say below that this day is meant.');
+    const { id } = await offered();
+    const anew = { change: 'offer anew', version: 1, startsAt, minutes: 60, place: 'Yard' };
+    const change = (isFreeDayMeant: boolean) =>
+      assessor.patch(`${address}/${id}`).send({ ...anew, isFreeDayMeant });
+    expect((await change(false)).status).toBe(422);
+    expect((await change(true)).body).toMatchObject({ state: 'offered', version: 2 });
+    expect((await offered({ startsAt, isFreeDayMeant: true })).state).toBe('offered');
+  });
+
   test('is made to those who have a part in the building', async () => {
     const { id } = await aBuilding(scheme);
     const answer = await assessor.post(address).send(anAppointment({ buildingId: id }));
@@ -152,7 +174,7 @@ describe('the owner', () => {
     await outbox().idle();
     const mail = letters.find(({ to }) => to === owner.person.email);
     expect(mail?.text).toContain('Monday 1 July, in the morning');
-    const anew = { change: 'offer anew', startsAt: '2999-07-01T09:00:00Z', minutes: 60, place: 'Yard' }; // prettier-ignore
+    const anew = { change: 'offer anew', startsAt: '2999-07-01T09:00:00Z', minutes: 60, place: 'Yard', isFreeDayMeant: false }; // prettier-ignore
     const changed = await assessor.patch(`${address}/${id}`).send({ ...anew, version: 2 });
     expect(changed.body).toMatchObject({ state: 'offered', askedFor: null, version: 3 });
     expect((await assessor.patch(`${address}/${id}`).send({ ...anew, version: 2 })).status).toBe(409); // prettier-ignore

@@ -50,6 +50,27 @@ describe('what letters go by', () => {
     expect(entry).toMatchObject({ after: { settings: { repairs: PROMISE } } });
   });
 
+  test('a rule may mean buildings near a shaft, and older rules know of none', async () => {
+    const { scheme, administrator } = await anOffice();
+    const { settings } = await heldSettings(services().database, scheme);
+    expect(settings.rules.filter(({ shaftWithin }) => shaftWithin !== null)).toMatchObject([
+      { kind: 'first information', why: 'Within 30 m of a shaft', shaftWithin: 30 },
+    ]);
+    const older = settings.rules.map((rule) => ({ ...rule, shaftWithin: undefined }));
+    await services().database.query(
+      'insert into letter_settings (scheme_id, version, settings) values ($1, 1, $2::jsonb)',
+      { bind: [scheme.id, JSON.stringify({ ...settings, rules: older })] },
+    );
+    const read = await heldSettings(services().database, scheme);
+    expect(read.settings.rules.every(({ shaftWithin }) => shaftWithin === null)).toBe(true);
+    const rules = read.settings.rules.map((rule) => ({ ...rule, shaftWithin: 12.5 }));
+    expect((await keepSettings(administrator, scheme, { rules })).settings.rules).toEqual(rules);
+    const bad = rules.map((rule) => ({ ...rule, shaftWithin: 0 }));
+    await expect(keepSettings(administrator, scheme, { rules: bad })).rejects.toThrow(
+      'shaftWithin',
+    );
+  });
+
   test('an older version, which says nothing of promises, is read with the first ones', async () => {
     const { scheme, administrator, address } = await anOffice();
     const { repairs, answerDays, timeZone, holidays, ...older } = defaultLetterSettings('2026-12-01'); // prettier-ignore

@@ -5,13 +5,15 @@ import {
   batchSchema,
   recipientsSchema,
 } from '../../../shared/schemas/letter-batches.ts';
+import { heldLetterSettingsSchema } from '../../../shared/schemas/letter-settings.ts';
 import { previewedTemplateSchema } from '../../../shared/schemas/letter-templates.ts';
 import { letterSchema, listedLettersSchema } from '../../../shared/schemas/letters.ts';
 import { Membership } from '../../../server/models/membership.ts';
 import { Person } from '../../../server/models/person.ts';
 import { remindLate } from '../../../server/letters/remind-late.ts';
-import { aMember, anAdministrator, aPerson } from '../../support/factories.ts';
+import { aMember, anAdministrator, anAlignment, aPerson } from '../../support/factories.ts';
 import { aBatch, aSentBatch, aTownOfOwners, keepSettings } from '../../support/letters.ts';
+import { E, N } from '../../support/register.ts';
 import { signIn, visitor } from '../../support/sign-in.ts';
 import { testApp } from '../../support/test-app.ts';
 import { tokenOf } from '../../support/token-of.ts';
@@ -65,6 +67,37 @@ describe('who gets a letter', () => {
     ]);
   });
 
+  test('is also who is near to a shaft of the line that the register shows, as long as it stands there', async () => {
+    const town = await aTownOfOwners(tested);
+    const { firstAgent, address, scheme, option } = town;
+    const far = await aParty(firstAgent, scheme, {
+      ...{ name: 'Cay, far away', email: 'cay@example.org' },
+      interests: [{ kind: 'tenant', buildingId: town.house('far'), from: null, to: null }],
+    });
+    const reasonsOf = async () => {
+      const asked = { kind: 'first information', leftOut: [], chosen: [] };
+      const answer = await firstAgent.post(`${address}/letter-batches/preview`).send(asked);
+      const { recipients } = recipientsSchema.parse(answer.body);
+      return recipients.find(({ partyId }) => partyId === far.id)?.reasons;
+    };
+    // the house stands from 200 m to 210 m north
+    const shaftAt = (north: number) => [
+      { name: 'North shaft', east: E + 5, north: N + north, source: 'Drawing 12' },
+    ];
+    expect(await reasonsOf()).toBeUndefined();
+    await option.update({ shafts: shaftAt(240) });
+    expect(await reasonsOf()).toEqual([{ why: 'Within 30 m of a shaft', building: 'far' }]);
+    await option.update({ shafts: shaftAt(240.5) });
+    expect(await reasonsOf()).toBeUndefined();
+    await anAlignment(scheme, { shafts: shaftAt(240) });
+    expect(await reasonsOf()).toBeUndefined();
+    const administrator = await signIn(app(), await anAdministrator());
+    const { settings } = heldLetterSettingsSchema.parse((await administrator.get(`${address}/letter-settings`)).body); // prettier-ignore
+    const wider = settings.rules.map((rule) => (rule.shaftWithin === null ? rule : { ...rule, shaftWithin: 31 })); // prettier-ignore
+    await keepSettings(administrator, scheme, { rules: wider });
+    expect(await reasonsOf()).toHaveLength(1);
+  });
+
   test('leaves out with a reason, and takes in whom somebody chose', async () => {
     const town = await aTownOfOwners(tested);
     const far = await aParty(town.firstAgent, town.scheme, {
@@ -85,7 +118,35 @@ describe('who gets a letter', () => {
       (await town.firstAgent.get(`${town.address}/letter-batches/${id}`)).body,
     );
     expect(detail.letters.map(({ name }) => name)).toEqual(['Ada of the second house', far.name]);
-    expect(detail.leftOut).toEqual([{ name: town.byPost.name, why: 'Was told in person.' }]);
+    expect(detail.leftOut).toEqual([
+      { partyId: town.byPost.id, name: town.byPost.name, why: 'Was told in person.' },
+    ]);
+    expect(detail.chosen).toEqual([{ partyId: far.id, name: far.name, why: 'Asked for it.' }]);
+  });
+
+  test('that a batch made an exception of is known under the party that stands, while letters can go there', async () => {
+    const town = await aTownOfOwners(tested);
+    const { firstAgent, scheme, address } = town;
+    const tenant = { kind: 'tenant', buildingId: town.house('far'), from: null, to: null } as const;
+    const [cay, dee] = [
+      await aParty(firstAgent, scheme, { name: 'Cay', email: null, channel: 'post', interests: [tenant] }), // prettier-ignore
+      await aParty(firstAgent, scheme, { name: 'Dee', email: null, channel: 'post', interests: [tenant] }), // prettier-ignore
+    ];
+    const chosen = [cay, dee].map(({ id }) => ({ partyId: id, why: 'Asked for it.' }));
+    const { id } = await aBatch(town, 'first information', 4, { chosen });
+    const why = 'Asked for it.';
+    const chosenNow = async () =>
+      batchDetailSchema.parse((await firstAgent.get(`${address}/letter-batches/${id}`)).body)
+        .chosen;
+    const merge = { version: dee.version, other: { id: cay.id, version: cay.version } };
+    await firstAgent.post(`${address}/parties/${dee.id}/merge`).send(merge).expect(200);
+    const merged = { partyId: dee.id, name: 'Dee', why };
+    expect(await chosenNow()).toEqual([merged]);
+    await services().database.query(
+      `update interests set to_day = current_date - 1 where party_id = $1`,
+      { bind: [dee.id] },
+    );
+    expect(await chosenNow()).toEqual([{ ...merged, partyId: null }]);
   });
 
   test('goes to a representative in somebody’s stead', async () => {
@@ -108,6 +169,57 @@ describe('who gets a letter', () => {
     await aSentBatch(tested, town);
     const sent = letters.filter(({ to }) => to === 'agents@example.org');
     expect(sent[0]?.text).toContain('Dear Agents and sons, for Ada of the second house,');
+  });
+
+  test('says who had a letter of the kind for the building, or has it waiting, and the checker reads it too', async () => {
+    const town = await aTownOfOwners(tested);
+    const { firstAgent, address } = town;
+    const earlier = async (kind = 'first information') => {
+      const asked = { kind, leftOut: [], chosen: [] };
+      const answer = await firstAgent.post(`${address}/letter-batches/preview`).send(asked);
+      return recipientsSchema.parse(answer.body).recipients.map((one) => one.earlier);
+    };
+    const detail = async (id: string) =>
+      batchDetailSchema.parse((await firstAgent.get(`${address}/letter-batches/${id}`)).body);
+    expect(await earlier()).toEqual([[], []]);
+    const sent = await aSentBatch(tested, town);
+    const leftOut = [{ partyId: town.byPost.id, why: 'Had it.' }];
+    const waiting = await aBatch(town, 'first information', 1, { leftOut });
+    const one = { batchNumber: 1, sentAt: sent.sentAt };
+    const two = { batchNumber: 2, sentAt: null, buildings: ['T1-2'] };
+    expect(await earlier()).toMatchObject([[two, one], [one]]);
+    expect((await earlier('condition survey')).flat()).toEqual([]);
+    const read = await detail(waiting.id);
+    expect(read.earlier).toMatchObject([{ letterId: read.letters[0]?.id, had: [one] }]);
+    expect((await detail(sent.id)).earlier).toEqual([]);
+    // taken back, it waits for nobody; and what failed was had by nobody
+    await firstAgent.post(`${address}/letter-batches/${waiting.id}/withdraw`).expect(200);
+    await services().database.query(
+      `update outbox set state = 'failed' where letter_id in (select id from letters where batch_id = $1)`,
+      { bind: [sent.id] },
+    );
+    expect(await earlier()).toMatchObject([[], [one]]);
+  });
+
+  test('knows what a party had before it was merged', async () => {
+    const town = await aTownOfOwners(tested);
+    const { firstAgent, scheme, address, byMail } = town;
+    await aSentBatch(tested, town);
+    const same = await aParty(firstAgent, scheme, {
+      ...{ name: 'Ada again', email: 'ada-again@example.org' },
+      interests: [{ kind: 'manager', buildingId: town.house('T1-2'), from: null, to: null }],
+    });
+    const merge = { version: same.version, other: { id: byMail.id, version: byMail.version } };
+    await firstAgent.post(`${address}/parties/${same.id}/merge`).send(merge).expect(200);
+    const asked = { kind: 'first information', leftOut: [], chosen: [] };
+    const answer = await firstAgent.post(`${address}/letter-batches/preview`).send(asked);
+    const found = recipientsSchema.parse(answer.body).recipients;
+    expect(found.find(({ partyId }) => partyId === same.id)?.earlier).toMatchObject([
+      { batchNumber: 1 },
+    ]);
+    const { id } = await aBatch(town);
+    const detail = await firstAgent.get(`${address}/letter-batches/${id}`);
+    expect(batchDetailSchema.parse(detail.body).earlier).toHaveLength(2);
   });
 
   test('is refused where the list has changed since it was seen', async () => {

@@ -45,7 +45,7 @@ async function anAppointment(
 ) {
   const id = randomUUID();
   const answer = await agent.post(`/api/schemes/${schemeId}/appointments`).send({
-    ...{ id, ...at, purpose: 'condition survey', minutes: 60 },
+    ...{ id, ...at, purpose: 'condition survey', minutes: 60, isFreeDayMeant: true },
     startsAt: new Date(Date.now() + 30 * 86_400_000).toISOString(),
   });
   if (answer.status !== 201) throw new Error(`An appointment was answered by ${answer.text}.`);

@@ -116,7 +116,12 @@ describe('a run', () => {
     expect(before).toMatchObject({ changedSince: false, facts: { storeys: null } });
     const edit = { id: one?.id ?? 0, version: 1, attributes: { storeys: 9 } };
     await change(scheme, { changed: [edit] });
-    await option.update({ version: 2 });
+    // a name and shafts are nothing that a run takes
+    const shafts = [{ name: 'East shaft', east: 600, north: 5, source: 'Drawing 12' }];
+    await option.update({ version: 2, name: 'Another name', shafts });
+    const [named] = runsSchema.parse((await agent.get(address)).body);
+    expect(named?.since).toEqual({ register: true, option: false, rules: false });
+    await option.update({ version: 3, design: { ...option.design, groundLevel: 4.5 } });
     const after = runBuildingSchema.parse((await agent.get(at)).body);
     expect(after).toEqual({ ...before, changedSince: true });
     const [listed] = runsSchema.parse((await agent.get(address)).body);

@@ -17,6 +17,7 @@ import { BoresFields } from './bores-fields.tsx';
 import { IntervalRows } from './interval-rows.tsx';
 import { LevelRows } from './level-rows.tsx';
 import { OptionClash } from './option-clash.tsx';
+import { ShaftRows } from './shaft-rows.tsx';
 import { FaultLine, RangeFields, type OptionControl } from './range-fields.tsx';
 
 type EditorProps = { readonly editor: OptionEditor };
@@ -94,6 +95,7 @@ function OptionFields({ editor }: EditorProps) {
       <RangeFields {...fields} of="troughWidth" />
       <FirstValues control={control} />
       <IntervalRows {...fields} valuesOf={getValues} />
+      <ShaftRows {...fields} />
     </form>
   );
 }

@@ -3,7 +3,9 @@ import { FIRST_DRIVE_VALUES } from '../../../../shared/ground/first-drive-values
 import {
   alignmentDesignSchema,
   newAlignmentSchema,
+  shaftsSchema,
   type AlignmentDesign,
+  type Shafts,
 } from '../../../../shared/schemas/alignments.ts';
 import { draftSchema } from '../../../lib/draft-schema.ts';
 import { numberOf } from '../../../lib/number-of.ts';
@@ -19,6 +21,8 @@ export type IntervalDraft = {
   troughWidth: RangeDraft;
 };
 
+export type ShaftDraft = { name: string; east: string; north: string; source: string };
+
 /** An option while it is written, with figures as typed and volume losses in %; its line is drawn. */
 export type OptionDraft = {
   name: string;
@@ -32,6 +36,7 @@ export type OptionDraft = {
     troughWidth: RangeDraft;
     intervals: IntervalDraft[];
   };
+  shafts: ShaftDraft[];
 };
 
 type Line = AlignmentDesign['line'];
@@ -61,6 +66,7 @@ export const BLANK_OPTION: OptionDraft = {
     troughWidth: rangeDraft(FIRST_DRIVE_VALUES.troughWidth, String),
     intervals: [],
   },
+  shafts: [],
 };
 
 /** Whether nobody has written yet what the ground asks for. */
@@ -83,9 +89,14 @@ function boresDraft(bores: AlignmentDesign['bores']): OptionDraft['design']['bor
 }
 
 /** An option, ready to be written in. */
-export function draftOf(name: string, design: AlignmentDesign): OptionDraft {
+export function draftOf(name: string, design: AlignmentDesign, shafts: Shafts): OptionDraft {
   return {
     name,
+    shafts: shafts.map(({ east, north, ...shaft }) => ({
+      ...shaft,
+      east: String(east),
+      north: String(north),
+    })),
     design: {
       levels: design.levels.map(({ chainage, level }) => ({
         chainage: String(chainage),
@@ -110,7 +121,7 @@ export function draftOf(name: string, design: AlignmentDesign): OptionDraft {
 /** A new option begins with the bores and the ground of another and the first of its levels. */
 export function beginningLike({ levels, ...design }: AlignmentDesign): OptionDraft {
   const given = levels.slice(0, 1).map(({ level }) => ({ chainage: 0, level }));
-  return draftOf('', { ...design, intervals: [], levels: given });
+  return draftOf('', { ...design, intervals: [], levels: given }, []);
 }
 
 function toNumber(text: string): number {
@@ -153,6 +164,19 @@ function designOf({ design }: OptionDraft, line: Line): unknown {
   };
 }
 
+function shaftsOf({ shafts }: OptionDraft) {
+  return shafts.map(({ east, north, ...shaft }) => ({
+    ...shaft,
+    east: toNumber(east),
+    north: toNumber(north),
+  }));
+}
+
+/** The shafts that are written; null while something of them is missing or wrong. */
+export function shaftsIfWhole(draft: OptionDraft): Shafts | null {
+  return shaftsSchema.safeParse(shaftsOf(draft)).data ?? null;
+}
+
 /** The design that is written and drawn; null while something of it is missing or wrong. */
 export function designIfWhole(draft: OptionDraft, line: Line): AlignmentDesign | null {
   return alignmentDesignSchema.safeParse(designOf(draft, line)).data ?? null;
@@ -166,9 +190,13 @@ function faultWords({ message }: { readonly message: string }): string {
 /** Checks what is written together with the line that is drawn. */
 export function checkWith(line: Line) {
   return zodResolver(
-    draftSchema<OptionDraft, { name: string; design: AlignmentDesign }>(
+    draftSchema<OptionDraft, { name: string; design: AlignmentDesign; shafts: Shafts }>(
       newAlignmentSchema,
-      (draft) => ({ name: draft.name, design: designOf(draft, line) }),
+      (draft) => ({
+        name: draft.name,
+        design: designOf(draft, line),
+        shafts: shaftsOf(draft),
+      }),
       faultWords,
     ),
   );
@@ -194,6 +222,7 @@ export function rebasedOption(
   }
   return {
     name: kept(mine.name, from.name, onto.name),
+    shafts: kept(mine.shafts, from.shafts, onto.shafts),
     design: {
       levels: of('levels'),
       diameter: of('diameter'),

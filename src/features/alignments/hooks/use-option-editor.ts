@@ -20,7 +20,7 @@ function useOptionDraft() {
   const { line } = drafting;
   const [base, setBase] = useState<AlignmentAnswer | null>(null);
   const points = useMemo(() => (line === null ? [] : pointsOf(line)), [line]);
-  const { form, design, begin } = useWrittenOption(points);
+  const { form, design, shafts, begin } = useWrittenOption(points);
   const isEditing = line !== null;
   return {
     ...{ drafting, form, base, setBase, points, isEditing },
@@ -28,16 +28,20 @@ function useOptionDraft() {
     isDrawing: line !== null && !line.isSet,
     hasEdits: isEditing && (form.formState.isDirty || drafting.steps.past > 0),
     design: isEditing ? design : null,
+    shafts,
     begin: (option: AlignmentAnswer | null, like: AlignmentAnswer | null) => {
       setBase(option);
-      if (option !== null) begin(draftOf(option.name, option.design));
+      if (option !== null) begin(draftOf(option.name, option.design, option.shafts));
       else begin(like === null ? BLANK_OPTION : beginningLike(like.design));
       drafting.set(option === null ? newLine() : lineDraftOf(option.design.line));
     },
     /** Lays what was written and drawn on what somebody else left. */
     rebase: (theirs: AlignmentAnswer) => {
       if (base === null) return;
-      const [from, onto] = [draftOf(base.name, base.design), draftOf(theirs.name, theirs.design)];
+      const [from, onto] = [
+        draftOf(base.name, base.design, base.shafts),
+        draftOf(theirs.name, theirs.design, theirs.shafts),
+      ];
       const mine = rebasedOption(form.getValues(), from, onto);
       const merged = rebasedLine(points, base.design.line, theirs.design.line);
       form.reset(onto);

@@ -7,6 +7,7 @@ import type { WordsAt } from '../../map/components/plan-map-props.ts';
 import type { LineShape } from '../../map/map-line.ts';
 import { can } from '../../schemes/can.ts';
 import { cursorWords } from '../cursor-words.ts';
+import { shapesOfShafts } from '../line-shapes.ts';
 import { mapDrawingOfLine } from '../map-drawing-of-line.ts';
 import { placeOnLine } from '../place-on-line.ts';
 import type { Case } from '../preview/preview-work.ts';
@@ -58,7 +59,11 @@ export function usePlanLine(scheme: SchemeAnswer, isBusyElsewhere: boolean) {
   const estimated = usePreview(design, record === null && !isPending ? preview : null);
   const { drives, fault } = estimated;
   const contours = record === null ? estimated.contours : recorded.contours;
-  const shapes = useMemo<readonly LineShape[]>(() => [...contours, ...drives], [contours, drives]);
+  const shafts = editor.isEditing ? editor.shafts : option?.shafts;
+  const shapes = useMemo<readonly LineShape[]>(
+    () => [...contours, ...drives, ...shapesOfShafts(shafts ?? [])],
+    [contours, drives, shafts],
+  );
   const surface = useMemo(() => surfaceOf(preview), [preview]);
   const mayBegin = mayEdit && chosen.isKnown && !editor.isEditing && !isBusyElsewhere;
 

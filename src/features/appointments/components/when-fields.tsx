@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { APPOINTMENT_LIMITS } from '../../../../shared/schemas/appointments.ts';
+import { Checkbox } from '../../../components/ui/checkbox.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import type { Faults } from '../../../lib/faults-by-path.ts';
 import { formatWeekdayMoment } from '../../../lib/format-date.ts';
@@ -39,7 +40,7 @@ export function WhenFields({ draft, faults, onChange: set }: WhenFieldsProps) {
           value={draft.day}
           error={faults.startsAt}
           onChange={({ target }) => {
-            set({ day: target.value });
+            set({ day: target.value, isFreeDayMeant: false });
           }}
         />
         <Field
@@ -61,6 +62,14 @@ export function WhenFields({ draft, faults, onChange: set }: WhenFieldsProps) {
         />
       </div>
       <OwnersTime draft={draft} />
+      <Checkbox
+        label="On a weekend or a holiday on purpose"
+        hint="As when the owner asked for that day"
+        checked={draft.isFreeDayMeant}
+        onChange={({ target }) => {
+          set({ isFreeDayMeant: target.checked });
+        }}
+      />
       <Field
         label="Where"
         maxLength={APPOINTMENT_LIMITS.place}

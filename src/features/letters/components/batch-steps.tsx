@@ -6,7 +6,7 @@ import { buttonStyle } from '../../../components/ui/button-style.ts';
 import { ConfirmDialog } from '../../../components/ui/confirm-dialog.tsx';
 import { MutationError } from '../../../components/ui/mutation-error.tsx';
 import { TextArea } from '../../../components/ui/text-area.tsx';
-import { batchFromTextPath } from '../../../config/paths.ts';
+import { batchAgainPath } from '../../../config/paths.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
@@ -140,15 +140,13 @@ function Print({ batch, busy, onStep }: StepsProps) {
   );
 }
 
-/** What was written for letters that are not sent need not be written again. */
-function CarryOver({ batch }: { readonly batch: Batch }) {
+/** What was written for letters that are not sent, and whom somebody took in or left out, is not lost. */
+function PrepareAgain({ batch }: { readonly batch: Batch }) {
   const scheme = useScheme();
-  if (batch.kind !== 'free text' || !can(scheme, 'prepareLetters')) return null;
+  if (!can(scheme, 'prepareLetters')) return null;
   return (
     <div>
-      <ButtonLink to={batchFromTextPath(scheme.id, batch.id)}>
-        Prepare letters from this text
-      </ButtonLink>
+      <ButtonLink to={batchAgainPath(scheme.id, batch.id)}>Prepare these letters again</ButtonLink>
     </div>
   );
 }
@@ -168,7 +166,9 @@ export function BatchSteps({ batch }: { readonly batch: Batch }) {
       <MutationError failed="Nothing was changed." error={move.error} />
       {batch.state === 'waiting for check' && <WhileWaiting {...steps} />}
       {batch.state === 'checked' && <Send {...steps} />}
-      {(batch.state === 'returned' || batch.state === 'withdrawn') && <CarryOver batch={batch} />}
+      {(batch.state === 'returned' || batch.state === 'withdrawn') && (
+        <PrepareAgain batch={batch} />
+      )}
       {batch.state === 'sent' && <Print {...steps} />}
     </div>
   );

@@ -9,6 +9,7 @@ import { letterPagePath } from '../../../config/paths.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { usePrepareBatch } from '../api/letter-batches.ts';
 import { lettersWords } from '../letter-words.ts';
+import { HadAlready } from './had-already.tsx';
 import { RecipientsTable } from './recipients-table.tsx';
 
 function countsWords({ letters, byMail, byPost, without, runNumber }: Recipients): string {
@@ -44,6 +45,7 @@ export function PrepareFound({ found, asked, text, hasWritten, onChange }: Prepa
   return (
     <>
       <p className="mt-4 text-body">{countsWords(found)}</p>
+      <HadAlready {...{ found, asked, onChange }} />
       <MutationError failed="No letter was written." error={prepare.error} />
       {found.letters > 0 && (
         <Button kind="main" className="mt-3" busy={prepare.isPending} onClick={write}>

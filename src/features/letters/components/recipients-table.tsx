@@ -1,12 +1,11 @@
-import { useState, type SubmitEvent } from 'react';
+import { useState } from 'react';
 import { capital } from '../../../../shared/presentation/capital.ts';
 import type { BatchPreview, Recipients } from '../../../../shared/schemas/letter-batches.ts';
 import { Button } from '../../../components/ui/button.tsx';
-import { Dialog } from '../../../components/ui/dialog.tsx';
-import { Field } from '../../../components/ui/field.tsx';
 import type { Column } from '../../../components/ui/table/column.ts';
 import { Table } from '../../../components/ui/table/table.tsx';
-import { reasonWords } from '../letter-words.ts';
+import { earlierWords, reasonWords } from '../letter-words.ts';
+import { LeaveOutDialog } from './leave-out-dialog.tsx';
 
 type Recipient = Recipients['recipients'][number];
 
@@ -20,7 +19,19 @@ function becauseWords({ reasons, leftOut }: Recipient): string {
   return leftOut === null ? reasonWords(reasons) : `Left out: ${leftOut}`;
 }
 
-function columnsOf(onLeaveOut: (one: Recipient) => void, onTakeIn: (one: Recipient) => void) {
+const HAD: Column<Recipient> = {
+  id: 'had',
+  heading: 'Had this letter',
+  width: 250,
+  sortBy: ({ earlier }) => earlierWords(earlier),
+  cell: ({ earlier }) => <span title={earlierWords(earlier)}>{earlierWords(earlier)}</span>,
+};
+
+function columnsOf(
+  hadAny: boolean,
+  onLeaveOut: (one: Recipient) => void,
+  onTakeIn: (one: Recipient) => void,
+): readonly Column<Recipient>[] {
   return [
     {
       id: 'name',
@@ -42,6 +53,7 @@ function columnsOf(onLeaveOut: (one: Recipient) => void, onTakeIn: (one: Recipie
       wide: true,
       cell: (one) => <span title={becauseWords(one)}>{becauseWords(one)}</span>,
     },
+    ...(hadAny ? [HAD] : []),
     {
       id: 'act',
       heading: 'Change',
@@ -58,41 +70,7 @@ function columnsOf(onLeaveOut: (one: Recipient) => void, onTakeIn: (one: Recipie
         </Button>
       ),
     },
-  ] satisfies readonly Column<Recipient>[];
-}
-
-function LeaveOut({
-  name,
-  onKeep,
-}: {
-  readonly name: string;
-  readonly onKeep: (why: string) => void;
-}) {
-  const [why, setWhy] = useState('');
-  function keep(event: SubmitEvent) {
-    event.preventDefault();
-    if (why.trim() !== '') onKeep(why.trim());
-  }
-  return (
-    <form onSubmit={keep} className="grid gap-3">
-      <p className="text-body break-words">{name} gets no letter of this batch.</p>
-      <Field
-        required
-        data-first-in-focus
-        label="Why"
-        hint="Kept with the batch"
-        value={why}
-        onChange={(event) => {
-          setWhy(event.target.value);
-        }}
-      />
-      <div>
-        <Button kind="main" type="submit">
-          Leave them out
-        </Button>
-      </div>
-    </form>
-  );
+  ];
 }
 
 /** Who gets a letter, each with the reason; any of them can be left out with another. */
@@ -103,6 +81,7 @@ export function RecipientsTable({ found, asked, onChange }: RecipientsTableProps
   }
   const isChosen = (one: Recipient) => asked.chosen.some(({ partyId }) => partyId === one.partyId);
   const columns = columnsOf(
+    found.recipients.some(({ earlier }) => earlier.length > 0),
     (one) => {
       if (isChosen(one)) onChange({ ...asked, chosen: without(asked.chosen, one) });
       else setLeaving(one);
@@ -122,20 +101,18 @@ export function RecipientsTable({ found, asked, onChange }: RecipientsTableProps
         rows={found.recipients}
         idOf={({ partyId }) => partyId}
       />
-      <Dialog open={leaving !== undefined} title="Leave somebody out" onClose={close}>
-        {leaving !== undefined && (
-          <LeaveOut
-            name={leaving.name}
-            onKeep={(why) => {
-              onChange({
-                ...asked,
-                leftOut: [...asked.leftOut, { partyId: leaving.partyId, why }],
-              });
-              close();
-            }}
-          />
-        )}
-      </Dialog>
+      <LeaveOutDialog
+        whom={leaving === undefined ? null : leaving.name}
+        onKeep={(why) => {
+          if (leaving === undefined) return;
+          onChange({
+            ...asked,
+            leftOut: [...asked.leftOut, { partyId: leaving.partyId, why }],
+          });
+          close();
+        }}
+        onClose={close}
+      />
     </>
   );
 }

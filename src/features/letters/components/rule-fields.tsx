@@ -10,6 +10,8 @@ import { KIND_OPTIONS } from '../letter-words.ts';
 import { ruleWords } from '../rule-words.ts';
 import type { RuleDraft } from '../settings-draft.ts';
 
+/** In metres, as is common. */
+const SHAFT_WITHIN = '30';
 const NO_PLACE = { name: '', east: '', north: '', metres: '30' };
 
 type RuleFieldsProps = {
@@ -20,7 +22,7 @@ type RuleFieldsProps = {
   readonly onRemove: () => void;
 };
 
-/** A place in the grid, as a shaft, that buildings have to be near to. */
+/** A place in the grid, as a work site, that buildings have to be near to. */
 function NearFields({ rule, place, faults, onChange }: Omit<RuleFieldsProps, 'onRemove'>) {
   const { near } = rule;
   if (near === null) return null;
@@ -51,7 +53,7 @@ function NearFields({ rule, place, faults, onChange }: Omit<RuleFieldsProps, 'on
 /** Which buildings a rule means is taken from a kept view of the register, an outline on its map too. */
 function Which({ rule, onChange }: Pick<RuleFieldsProps, 'rule' | 'onChange'>) {
   const { data: views = [] } = useQuery(registerViewsQuery(useScheme().id));
-  const words = ruleWords({ ...rule, near: null });
+  const words = ruleWords({ ...rule, near: null, shaftWithin: null });
   return (
     <div className="col-span-full text-small">
       <p>
@@ -108,6 +110,19 @@ export function RuleFields(props: RuleFieldsProps) {
       {text('date', 'Since', 'date')}
       <Which {...{ rule, onChange }} />
       <NearFields {...props} />
+      {rule.shaftWithin !== null && (
+        <div className="col-span-full grid grid-cols-4 gap-3 max-sm:grid-cols-2">
+          <Field
+            label="Within, of a shaft"
+            unit="m"
+            value={rule.shaftWithin}
+            error={faults[`${place}.shaftWithin`]}
+            onChange={(event) => {
+              onChange({ ...rule, shaftWithin: event.target.value });
+            }}
+          />
+        </div>
+      )}
       <div className="col-span-full flex flex-wrap items-center gap-x-5 gap-y-1">
         <Checkbox
           label="Listed buildings only"
@@ -117,7 +132,14 @@ export function RuleFields(props: RuleFieldsProps) {
           }}
         />
         <Checkbox
-          label="Near a place only, as a shaft"
+          label="Near a shaft of the line only"
+          checked={rule.shaftWithin !== null}
+          onChange={(event) => {
+            onChange({ ...rule, shaftWithin: event.target.checked ? SHAFT_WITHIN : null });
+          }}
+        />
+        <Checkbox
+          label="Near a place only, as a work site"
           checked={rule.near !== null}
           onChange={(event) => {
             onChange({ ...rule, near: event.target.checked ? NO_PLACE : null });

@@ -27,7 +27,7 @@ function featureOf(
   shape: LineShape | SectionShape,
 ): GeoJSON.Feature | null {
   const { kind } = shape;
-  if (kind === 'chainage' || kind === 'name') {
+  if (kind === 'chainage' || kind === 'shaft' || kind === 'name') {
     const [coordinates] = positions(projection, [shape.place]);
     if (coordinates === undefined) return null;
     const properties = { kind, text: shape.text };

@@ -62,6 +62,18 @@ function drives(): LayerSpecification[] {
       filter: kind('tick'),
       paint: { 'line-color': ink, 'line-width': 1.3 },
     },
+    {
+      id: 'line-shafts',
+      type: 'circle',
+      ...LINE,
+      filter: kind('shaft'),
+      paint: {
+        'circle-radius': 6,
+        'circle-color': paperRaised,
+        'circle-stroke-color': ink,
+        'circle-stroke-width': 2,
+      },
+    },
   ];
 }
 
@@ -121,6 +133,21 @@ export function lineLabelLayers(): LayerSpecification[] {
         'text-field': ['get', 'text'],
         'text-font': LABEL_FONTS.semibold,
         'text-size': 11,
+        'text-padding': 3,
+      },
+      paint: { 'text-color': ink, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
+    },
+    {
+      id: 'line-shaft-names',
+      type: 'symbol',
+      ...LINE,
+      filter: kind('shaft'),
+      layout: {
+        'text-field': ['get', 'text'],
+        'text-font': LABEL_FONTS.semibold,
+        'text-size': 11.5,
+        'text-anchor': 'top',
+        'text-offset': [0, 0.8],
         'text-padding': 3,
       },
       paint: { 'text-color': ink, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },

@@ -6,18 +6,13 @@ import { Popover } from '../../../components/ui/popover.tsx';
 import { settingsPath } from '../../../config/paths.ts';
 import { formatMoment } from '../../../lib/format-date.ts';
 import { formatCount } from '../../../../shared/presentation/format-number.ts';
-import { optionLines } from '../../alignments/option-changes.ts';
+import { designLines } from '../../alignments/option-changes.ts';
 import { runName } from '../../../../shared/presentation/run-words.ts';
 import { RunCountsTable } from './run-counts.tsx';
 
 type RunInputsProps = { readonly schemeId: string; readonly run: RunDetail };
 
 type Fact = readonly [word: string, value: ReactNode];
-
-/** Name first, as in the form; here the option is named already. */
-function designFacts({ option, design }: RunDetail): readonly Fact[] {
-  return optionLines({ name: option.name, design }).slice(1);
-}
 
 function inputs(schemeId: string, run: RunDetail): readonly Fact[] {
   const by = run.startedBy === null ? '' : ` by ${run.startedBy}`;
@@ -56,7 +51,7 @@ function Inputs({ schemeId, run }: RunInputsProps) {
           <RunCountsTable counts={counts} />
         </div>
       )}
-      <Facts facts={[...found(run), ...designFacts(run), ...inputs(schemeId, run)]} />
+      <Facts facts={[...found(run), ...designLines(run.design), ...inputs(schemeId, run)]} />
     </div>
   );
 }

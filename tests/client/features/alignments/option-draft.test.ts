@@ -7,6 +7,7 @@ import {
   hasFirstValues,
   rebasedLine,
   rebasedOption,
+  shaftsIfWhole,
 } from '../../../../src/features/alignments/drafts/option-draft.ts';
 import { optionChanges } from '../../../../src/features/alignments/option-changes.ts';
 import type { AlignmentDesign } from '../../../../shared/schemas/alignments.ts';
@@ -19,17 +20,30 @@ const DESIGN = aDesign({
   intervals: [{ from: 100, to: 200, volumeLoss: aRange(0.007), troughWidth: aRange(0.4) }],
 });
 
+const SHAFTS = [{ name: 'East shaft', east: 600, north: 5.5, source: 'Drawing 12' }];
+const A = { name: 'A', shafts: [] };
+
 describe('an option while it is written', () => {
   it('is the same design again, to the last bit', () => {
-    expect(designIfWhole(draftOf('A', DESIGN), DESIGN.line)).toEqual(DESIGN);
+    expect(designIfWhole(draftOf('A', DESIGN, []), DESIGN.line)).toEqual(DESIGN);
   });
 
   it('is no design while something is missing or wrong', () => {
-    const draft = draftOf('A', DESIGN);
+    const draft = draftOf('A', DESIGN, []);
     expect(designIfWhole(BLANK_OPTION, DESIGN.line)).toBeNull();
     expect(designIfWhole(draft, DESIGN.line.slice(0, 1))).toBeNull();
     const odd = { ...draft, design: { ...draft.design, diameter: 'wide' } };
     expect(designIfWhole(odd, DESIGN.line)).toBeNull();
+  });
+
+  it('has the shafts that are written, once they are whole', () => {
+    const draft = draftOf('A', DESIGN, SHAFTS);
+    expect(shaftsIfWhole(draft)).toEqual(SHAFTS);
+    const [shaft] = draft.shafts;
+    const odd = { ...draft, shafts: draft.shafts.map((one) => ({ ...one, east: 'there' })) };
+    expect(shaftsIfWhole(odd)).toBeNull();
+    const twice = { ...draft, shafts: [...draft.shafts, ...draft.shafts] };
+    expect([shaft?.east, shaftsIfWhole(twice)]).toEqual(['600', null]);
   });
 
   it('begins with what is common practice, until somebody writes otherwise', () => {
@@ -53,12 +67,15 @@ describe('an option while it is written', () => {
 
 describe('an option on top of what somebody else left', () => {
   it('keeps what was written and takes theirs for the rest', () => {
-    const from = draftOf('A', DESIGN);
-    const onto = draftOf('A, deep', { ...DESIGN, diameter: 7, groundLevel: 3 });
+    const from = draftOf('A', DESIGN, []);
+    const onto = draftOf('A, deep', { ...DESIGN, diameter: 7, groundLevel: 3 }, SHAFTS);
     const mine = { ...from, design: { ...from.design, diameter: '6.6' } };
     const merged = rebasedOption(mine, from, onto);
     expect(merged.name).toBe('A, deep');
     expect(merged.design).toEqual({ ...onto.design, diameter: '6.6' });
+    expect(merged.shafts).toEqual(onto.shafts);
+    const written = { ...from, shafts: [{ name: 'B', east: '1', north: '2', source: 'C' }] };
+    expect(rebasedOption(written, from, onto).shafts).toEqual(written.shafts);
   });
 
   it('keeps a line that was drawn on, and else takes theirs', () => {
@@ -75,10 +92,11 @@ describe('an option on top of what somebody else left', () => {
 describe('what somebody changed of an option', () => {
   it('is said value by value', () => {
     const design = { ...DESIGN, diameter: 7, direction: 'backward' as const };
-    expect(optionChanges({ name: 'A', design: DESIGN }, { name: 'B', design })).toEqual([
+    expect(optionChanges({ ...A, design: DESIGN }, { name: 'B', design, shafts: SHAFTS })).toEqual([
       { path: 'Name', before: 'A', after: 'B' },
       { path: 'Diameter', before: '6 m', after: '7 m' },
       { path: 'Direction', before: 'as drawn', after: 'against the line' },
+      { path: 'Shafts', before: 'none', after: 'East shaft at 600, 5.5 (Drawing 12)' },
     ]);
   });
 
@@ -87,7 +105,7 @@ describe('what somebody changed of an option', () => {
       ...DESIGN,
       line: [[0, 0], [50, north], [100, 0]],
     }); // prettier-ignore
-    const [change] = optionChanges({ name: 'A', design: bent(9) }, { name: 'A', design: bent(-9) });
+    const [change] = optionChanges({ ...A, design: bent(9) }, { ...A, design: bent(-9) });
     expect(change?.after).toMatch(/points moved$/);
   });
 });

@@ -19,6 +19,7 @@ const OPTION: AlignmentAnswer = {
   name: 'A',
   version: 1,
   design: aDesign(),
+  shafts: [],
   length: 1000,
   changedAt: '2026-12-01T10:00:00.000Z',
   changedBy: 'Ada',
@@ -103,6 +104,31 @@ describe('a new option', () => {
 });
 
 describe('an option that is there', () => {
+  it('is given shafts, each with its source, which are sent beside its design', async () => {
+    const { calls, onSaved } = await openEditor([OPTION], {
+      [`PATCH ${LIST}/${OPTION.id}`]: { ...OPTION, version: 2 },
+    });
+    fireEvent.click(await screen.findByRole('button', { name: 'Add a shaft' }));
+    write('Name of shaft 1', 'East shaft');
+    write('Easting of shaft 1, m', '600');
+    save();
+    await screen.findByText('Say where this comes from.');
+    expect(screen.getByLabelText('Northing of shaft 1, m').getAttribute('aria-invalid')).toBe(
+      'true',
+    );
+    expect(await axeFaults()).toEqual([]);
+    write('Northing of shaft 1, m', '5.5');
+    write('Source of shaft 1', 'Drawing 12');
+    save();
+    await waitFor(() => {
+      expect(onSaved).toHaveBeenCalled();
+    });
+    expect(calls.find(({ route }) => route.startsWith('PATCH'))?.body).toMatchObject({
+      ...{ version: 1, design: OPTION.design },
+      shafts: [{ name: 'East shaft', east: 600, north: 5.5, source: 'Drawing 12' }],
+    });
+  });
+
   it('is changed on top of the version that was seen, volume losses in %', async () => {
     const { calls, onSaved } = await openEditor([OPTION], {
       [`PATCH ${LIST}/${OPTION.id}`]: { ...OPTION, version: 2 },
@@ -116,7 +142,12 @@ describe('an option that is there', () => {
     });
     const sent = calls.find(({ route }) => route.startsWith('PATCH'));
     const volumeLoss = { low: 0.015, central: 0.015, high: 0.021 };
-    expect(sent?.body).toEqual({ version: 1, name: 'A', design: { ...OPTION.design, volumeLoss } });
+    expect(sent?.body).toEqual({
+      version: 1,
+      name: 'A',
+      design: { ...OPTION.design, volumeLoss },
+      shafts: [],
+    });
   });
 
   it('is told a name that is taken at its field', async () => {
@@ -160,6 +191,7 @@ describe('an option that is there', () => {
       version: 2,
       name: 'A',
       design: { ...theirs.design, groundLevel: 4 },
+      shafts: [],
     });
   });
 

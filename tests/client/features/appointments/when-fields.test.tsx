@@ -1,7 +1,11 @@
-import { screen, waitFor } from '@testing-library/react';
+import { fireEvent, screen, waitFor } from '@testing-library/react';
+import { useState } from 'react';
 import { expect, test } from 'vitest';
 import { defaultLetterSettings } from '../../../../shared/schemas/letter-settings.ts';
-import { NO_TIME } from '../../../../src/features/appointments/appointment-draft.ts';
+import {
+  NO_TIME,
+  type WhenDraft,
+} from '../../../../src/features/appointments/appointment-draft.ts';
 import { WhenFields } from '../../../../src/features/appointments/components/when-fields.tsx';
 import { SchemeContext } from '../../../../src/features/schemes/scheme-context.ts';
 import { anId, aSchemeAnswer } from '../../../support/answers.ts';
@@ -10,18 +14,21 @@ import { renderPage } from '../../../support/render-page.tsx';
 
 const HERE = Intl.DateTimeFormat().resolvedOptions().timeZone;
 
-function show(timeZone: string) {
+function show(timeZone: string, day = '2027-06-09') {
   const settings = { ...defaultLetterSettings('2026-12-01'), timeZone };
   const api = fakeApi({
     [`GET /api/schemes/${anId(10)}/letter-settings`]: { version: 0, settings, by: null, at: null },
   });
+  function Form() {
+    const [draft, setDraft] = useState({ ...NO_TIME, day });
+    const onChange = (some: Partial<WhenDraft>) => {
+      setDraft({ ...draft, ...some });
+    };
+    return <WhenFields draft={draft} faults={{}} onChange={onChange} />;
+  }
   renderPage(
     <SchemeContext value={aSchemeAnswer()}>
-      <WhenFields
-        draft={{ ...NO_TIME, day: '2027-06-09' }}
-        faults={{}}
-        onChange={() => undefined}
-      />
+      <Form />
     </SchemeContext>,
   );
   return api;
@@ -42,4 +49,13 @@ test('where they go by the same, nothing is said', async () => {
     expect(calls).toHaveLength(1);
   });
   expect(screen.queryByText(/The owner reads/)).toBeNull();
+});
+
+test('that a free day is meant is said of that day alone', async () => {
+  show(HERE, '2027-06-12');
+  const meant = await screen.findByRole<HTMLInputElement>('checkbox');
+  fireEvent.click(meant);
+  expect(meant.checked).toBe(true);
+  fireEvent.change(screen.getByLabelText('Day'), { target: { value: '2027-06-13' } });
+  expect(meant.checked).toBe(false);
 });

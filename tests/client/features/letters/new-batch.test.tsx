@@ -15,7 +15,10 @@ import { fakeApi, Refusal } from '../../../support/fake-api.ts';
 import { renderPage } from '../../../support/render-page.tsx';
 
 const SCHEME = `/api/schemes/${anId(10)}`;
-const ADA = { partyId: anId(70), name: 'Ada', channel: 'e-mail', reasons: [], leftOut: null };
+const ADA = {
+  ...{ partyId: anId(70), name: 'Ada', channel: 'e-mail', reasons: [], leftOut: null },
+  earlier: [],
+};
 const PREPARE = `POST ${SCHEME}/letter-batches`;
 
 const RETURNED: Batch = {
@@ -26,11 +29,23 @@ const RETURNED: Batch = {
   ...{ sentBy: null, sentAt: null, printedAt: null },
 };
 
-function show(page: ReactNode = <NewBatchPage />, path = '/') {
+const LEFT_OUT = [{ partyId: anId(71), name: 'Bo', why: 'Was told in person.' }];
+const CHOSEN = [
+  { partyId: ADA.partyId, name: 'Ada', why: 'Asked for it.' },
+  { partyId: null, name: 'Cy', why: 'Lived there.' },
+];
+
+const EARLIER = [
+  { batchNumber: 6, sentAt: null, buildings: ['3 Middle Row'] },
+  { batchNumber: 2, sentAt: '2026-11-20T09:00:00.000Z', buildings: ['3 Middle Row'] },
+];
+const HAD = 'waits in batch 6, for 3 Middle Row; on 20 Nov 2026 in batch 2, for 3 Middle Row';
+
+function show(page: ReactNode = <NewBatchPage />, path = '/', recipients: object[] = [ADA]) {
   const abilities = { readScheme: true, readLetters: true, prepareLetters: true };
   const api = fakeApi({
     [`${PREPARE}/preview`]: {
-      ...{ letters: 1, byMail: 1, byPost: 0, runNumber: 1, without: 0, recipients: [ADA] },
+      ...{ letters: 1, byMail: 1, byPost: 0, runNumber: 1, without: 0, recipients },
     },
     [`GET ${SCHEME}/letter-templates`]: LETTER_KINDS.map((kind) => ({
       ...{ kind, version: 0, ...DEFAULT_TEMPLATES[kind], by: null, at: null },
@@ -43,7 +58,7 @@ function show(page: ReactNode = <NewBatchPage />, path = '/') {
     [PREPARE]: () => new Refusal(409, 'conflict', 'By now 2 would get the letter, not 1.'),
     [`GET ${SCHEME}/letter-batches/${RETURNED.id}`]: {
       ...{ batch: RETURNED, text: { subject: 'The lift', body: 'It is mendet.' } },
-      ...{ letters: [], leftOut: [] },
+      ...{ letters: [], earlier: [], leftOut: LEFT_OUT, chosen: CHOSEN },
     },
     [`GET ${SCHEME}`]: aSchemeAnswer({ abilities }),
   });
@@ -86,7 +101,7 @@ test('other kinds go by their template and are not written here', async () => {
   expect(screen.queryByLabelText('Subject')).toBeNull();
 });
 
-test('the text of a returned batch begins another, with what its check said', async () => {
+test('a returned batch is prepared again with its text, who was chosen and left out, and what its check said', async () => {
   const { calls } = show(
     <Routes>
       <Route path="/schemes/:schemeId/owners/letters/new" element={<NewBatchPage />} />
@@ -94,13 +109,65 @@ test('the text of a returned batch begins another, with what its check said', as
     </Routes>,
     `/schemes/${anId(10)}/owners/letters/${RETURNED.id}`,
   );
-  fireEvent.click(await screen.findByRole('link', { name: 'Prepare letters from this text' }));
+  fireEvent.click(await screen.findByRole('link', { name: 'Prepare these letters again' }));
   const body = await screen.findByDisplayValue('It is mendet.');
-  expect(screen.getByText(/batch 4\. Its check said: “Mended with a d\.”/)).toBeTruthy();
+  expect(
+    screen.getByText(
+      'Batch 4 is prepared again, with its text and 1 party chosen by hand and 1 party left out. ' +
+        '1 who had been chosen by hand cannot get a letter any more. ' +
+        'Its check said: “Mended with a d.”',
+    ),
+  ).toBeTruthy();
   fireEvent.change(body, { target: { value: 'It is mended.' } });
   fireEvent.click(await screen.findByRole('button', { name: 'Write 1 letter' }));
   expect(await sent(calls)).toMatchObject({
     kind: 'free text',
     text: { subject: 'The lift', body: 'It is mended.' },
+    leftOut: [{ partyId: anId(71), why: 'Was told in person.' }],
+    chosen: [{ partyId: ADA.partyId, why: 'Asked for it.' }],
   });
+});
+
+test('who had the letter already is marked and counted, and is left out at once with a reason', async () => {
+  const dee = { ...ADA, partyId: anId(72), name: 'Dee', earlier: EARLIER };
+  const { calls } = show(<NewBatchPage />, '/', [ADA, dee]);
+  await screen.findByText(/^1 of them had a letter of this kind for the same building/);
+  expect(screen.getByText(HAD)).toBeTruthy();
+  expect(await axeFaults(document.body)).toEqual([]);
+  fireEvent.click(screen.getByRole('button', { name: 'Leave this one out…' }));
+  expect(await screen.findByText('No letter of this batch: Dee')).toBeTruthy();
+  fireEvent.click(screen.getByRole('button', { name: 'Leave them out' }));
+  await waitFor(() => {
+    const leftOut = [{ partyId: dee.partyId, why: 'Had this letter already.' }];
+    expect(calls.at(-1)?.body).toMatchObject({ leftOut, chosen: [] });
+  });
+});
+
+test('whoever checks a batch sees which of its letters somebody had already', async () => {
+  const letter = {
+    ...{ id: anId(90), number: 1, name: 'Dee', channel: 'post', delivery: 'not sent' },
+    ...{ serverWords: null, answerBy: null, acknowledgedAt: null, remindedAt: null },
+    ...{ batchNumber: 4, kind: 'free text', batchId: RETURNED.id },
+  };
+  fakeApi({
+    [`GET ${SCHEME}/letter-batches/${RETURNED.id}`]: {
+      ...{ batch: RETURNED, text: null, letters: [letter], leftOut: LEFT_OUT, chosen: CHOSEN },
+      earlier: [{ letterId: letter.id, had: EARLIER }],
+    },
+  });
+  renderPage(
+    <SchemeContext value={aSchemeAnswer({ abilities: { readLetters: true } })}>
+      <Routes>
+        <Route path="/:batchId" element={<BatchPage />} />
+      </Routes>
+    </SchemeContext>,
+    `/${RETURNED.id}`,
+  );
+  expect(await screen.findByText(HAD)).toBeTruthy();
+  expect(
+    screen.getByText(
+      '1 letter of these goes to owners who had a letter of this kind for the same building before, or have it waiting in another batch.',
+    ),
+  ).toBeTruthy();
+  expect(screen.getByText('although no rule names them')).toBeTruthy();
 });

@@ -8,7 +8,7 @@ import { aRunAnswer } from '../../../support/run-answers.ts';
 
 function option(n: number, name: string): AlignmentAnswer {
   const changed = { changedAt: '2026-12-01T10:00:00.000Z', changedBy: null };
-  return { id: anId(n), name, version: 1, design: aDesign(), length: 1000, ...changed };
+  return { id: anId(n), name, version: 1, design: aDesign(), shafts: [], length: 1000, ...changed };
 }
 
 const [A, B] = [option(50, 'A'), option(51, 'B')];

@@ -125,13 +125,44 @@ test('is done only with what shows it, on top of the version that was seen', asy
   });
 });
 
-test('keeps what was written where somebody else was first', async () => {
+test('keeps what was written where somebody else was first, and goes on from what stands now', async () => {
   const clash = new Refusal(409, 'conflict', 'Somebody has changed this meanwhile.');
-  fakeApi({ [`GET ${ALL}`]: [LATE], [`PUT ${ALL}/${LATE.id}`]: clash });
+  const theirs = { ...LATE, version: 2, responsible: 'Night office', due: '2026-12-24' };
+  const sent: unknown[] = [];
+  fakeApi({
+    [`GET ${ALL}`]: () => (sent.length === 0 ? [LATE] : [theirs]),
+    [`PUT ${ALL}/${LATE.id}`]: (body: unknown) => {
+      sent.push(body);
+      return sent.length === 1 ? clash : theirs;
+    },
+  });
   show();
   await openLate();
+  fill('Done on', '2026-12-02');
   fill('Evidence', 'Survey 14, page 3');
   fireEvent.click(screen.getByRole('button', { name: 'Keep it' }));
   expect((await screen.findByRole('alert')).textContent).toContain('Nothing was kept.');
   expect(screen.getByDisplayValue('Survey 14, page 3')).toBeTruthy();
+  fireEvent.click(await screen.findByRole('button', { name: 'See their change' }));
+  const table = screen.getByRole('table', { name: 'Their change' });
+  expect(within(table).getByRole('row', { name: 'Who sees to it Site office Night office' })).toBeTruthy(); // prettier-ignore
+  expect(within(table).getAllByRole('row')).toHaveLength(3);
+  expect(await axeFaults()).toEqual([]);
+  fireEvent.click(screen.getByRole('button', { name: 'Keep mine on top of it' }));
+  expect(screen.queryByRole('alert')).toBeNull();
+  expect(screen.getByDisplayValue('Survey 14, page 3')).toBeTruthy();
+  fireEvent.click(screen.getByRole('button', { name: 'Keep it' }));
+  await waitFor(() => {
+    expect(screen.queryByRole('dialog')).toBeNull();
+  });
+  expect(sent).toMatchObject([
+    { version: 1 },
+    {
+      version: 2,
+      values: {
+        ...{ responsible: 'Night office', due: '2026-12-24' },
+        ...{ doneOn: '2026-12-02', evidence: 'Survey 14, page 3' },
+      },
+    },
+  ]);
 });
