@@ -33,8 +33,8 @@ import { migration as evidence } from './migrations/29-evidence.ts';
 import { migration as ownTextOfLetters } from './migrations/30-own-text-of-letters.ts';
 import { migration as lettersKept } from './migrations/31-letters-kept.ts';
 import { migration as accountMails } from './migrations/32-account-mails.ts';
-import { migration as runOrders } from './migrations/34-run-orders.ts';
 import { migration as shafts } from './migrations/33-shafts.ts';
+import { migration as runOrders } from './migrations/34-run-orders.ts';
 
 /** In the order in which they are applied; a new one goes to the end. */
 const MIGRATIONS: Readonly<Record<string, Migration>> = {
@@ -70,8 +70,8 @@ const MIGRATIONS: Readonly<Record<string, Migration>> = {
   '30-own-text-of-letters': ownTextOfLetters,
   '31-letters-kept': lettersKept,
   '32-account-mails': accountMails,
-  '34-run-orders': runOrders,
   '33-shafts': shafts,
+  '34-run-orders': runOrders,
 };
 
 /** Opens the migrations of a database as its owner; `serverUrl` names the role that serves. */
