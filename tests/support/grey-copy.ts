@@ -1,5 +1,5 @@
-import { execFileSync } from 'node:child_process';
 import type { Rectangle } from '../../shared/evidence/marks.ts';
+import { greyPictureOfPdf } from './pdf-tools.ts';
 
 /** A page as a copier without colours sees it: `at` is the grey of a pixel, from 0 black to 255 white. */
 export type GreyCopy = {
@@ -9,8 +9,7 @@ export type GreyCopy = {
 
 /** Renders the first page of a document in greys. */
 export function greyCopy(pdf: Uint8Array, dotsPerInch: number): GreyCopy {
-  const args = ['-gray', '-r', String(dotsPerInch), '-singlefile', '-'];
-  const picture = execFileSync('pdftoppm', args, { input: pdf, maxBuffer: 256 << 20 });
+  const picture = greyPictureOfPdf(pdf, dotsPerInch);
   const head = /^P5\s(\d+)\s(\d+)\s255\s/.exec(picture.subarray(0, 40).toString('latin1'));
   if (head === null) throw new Error('This is no picture in greys.');
   const [{ length: begin }, wide] = [head[0], Number(head[1])];

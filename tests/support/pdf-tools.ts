@@ -1,7 +1,16 @@
 import { execFileSync } from 'node:child_process';
 
+function outputOf(program: string, args: readonly string[], pdf: Uint8Array): Buffer {
+  return execFileSync(program, [...args], { input: pdf, maxBuffer: 256 << 20 });
+}
+
 function run(program: string, args: readonly string[], pdf: Uint8Array): string {
-  return execFileSync(program, [...args], { input: pdf, encoding: 'utf8', maxBuffer: 64 << 20 });
+  return outputOf(program, args, pdf).toString('utf8');
+}
+
+/** The first page of a document as a picture in greys, a portable grey map. */
+export function greyPictureOfPdf(pdf: Uint8Array, dotsPerInch: number): Buffer {
+  return outputOf('pdftoppm', ['-gray', '-r', String(dotsPerInch), '-singlefile', '-'], pdf);
 }
 
 /** The words of a document as anyone can copy them out of it, page by page. */
