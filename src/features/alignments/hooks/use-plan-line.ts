@@ -1,7 +1,7 @@
 import { useMemo } from 'react';
 import { centralSurface } from '../../../../shared/assessment/central-surface.ts';
 import { MethodError } from '../../../../shared/method-error.ts';
-import type { AlignmentDesign } from '../../../../shared/schemas/alignments.ts';
+import type { AlignmentDesign, Shafts } from '../../../../shared/schemas/alignments.ts';
 import type { SchemeAnswer } from '../../../../shared/schemas/schemes.ts';
 import type { WordsAt } from '../../map/components/plan-map-props.ts';
 import type { LineShape } from '../../map/map-line.ts';
@@ -39,6 +39,18 @@ function designOf(
   return isPending && isNamed ? null : (option?.design ?? null);
 }
 
+/** All that is drawn of a line; the same as long as its parts are. */
+function useShapes(
+  contours: readonly LineShape[],
+  drives: readonly LineShape[],
+  shafts: Shafts | undefined,
+): readonly LineShape[] {
+  return useMemo(
+    () => [...contours, ...drives, ...shapesOfShafts(shafts ?? [])],
+    [contours, drives, shafts],
+  );
+}
+
 /** The line on the plan: the option that is chosen or edited, what is seen of it, and its tools. */
 export function usePlanLine(scheme: SchemeAnswer, isBusyElsewhere: boolean) {
   const mayEdit = can(scheme, 'updateAlignments');
@@ -59,11 +71,7 @@ export function usePlanLine(scheme: SchemeAnswer, isBusyElsewhere: boolean) {
   const estimated = usePreview(design, record === null && !isPending ? preview : null);
   const { drives, fault } = estimated;
   const contours = record === null ? estimated.contours : recorded.contours;
-  const shafts = editor.isEditing ? editor.shafts : option?.shafts;
-  const shapes = useMemo<readonly LineShape[]>(
-    () => [...contours, ...drives, ...shapesOfShafts(shafts ?? [])],
-    [contours, drives, shafts],
-  );
+  const shapes = useShapes(contours, drives, editor.isEditing ? editor.shafts : option?.shafts);
   const surface = useMemo(() => surfaceOf(preview), [preview]);
   const mayBegin = mayEdit && chosen.isKnown && !editor.isEditing && !isBusyElsewhere;
 

@@ -50,6 +50,54 @@ function NearFields({ rule, place, faults, onChange }: Omit<RuleFieldsProps, 'on
   );
 }
 
+/** How near a building has to be to a shaft; shafts are kept with the line. */
+function ShaftField({ rule, place, faults, onChange }: Omit<RuleFieldsProps, 'onRemove'>) {
+  if (rule.shaftWithin === null) return null;
+  return (
+    <div className="col-span-full grid grid-cols-4 gap-3 max-sm:grid-cols-2">
+      <Field
+        label="Within, of a shaft"
+        unit="m"
+        hint="Shafts are kept with the line, on the plan"
+        value={rule.shaftWithin}
+        error={faults[`${place}.shaftWithin`]}
+        onChange={(event) => {
+          onChange({ ...rule, shaftWithin: event.target.value });
+        }}
+      />
+    </div>
+  );
+}
+
+/** What narrows a rule. */
+function Only({ rule, onChange }: Pick<RuleFieldsProps, 'rule' | 'onChange'>) {
+  return (
+    <>
+      <Checkbox
+        label="Listed buildings only"
+        checked={rule.listedOnly}
+        onChange={(event) => {
+          onChange({ ...rule, listedOnly: event.target.checked });
+        }}
+      />
+      <Checkbox
+        label="Near a shaft of the line only"
+        checked={rule.shaftWithin !== null}
+        onChange={(event) => {
+          onChange({ ...rule, shaftWithin: event.target.checked ? SHAFT_WITHIN : null });
+        }}
+      />
+      <Checkbox
+        label="Near a place only, as a work site"
+        checked={rule.near !== null}
+        onChange={(event) => {
+          onChange({ ...rule, near: event.target.checked ? NO_PLACE : null });
+        }}
+      />
+    </>
+  );
+}
+
 /** Which buildings a rule means is taken from a kept view of the register, an outline on its map too. */
 function Which({ rule, onChange }: Pick<RuleFieldsProps, 'rule' | 'onChange'>) {
   const { data: views = [] } = useQuery(registerViewsQuery(useScheme().id));
@@ -110,41 +158,9 @@ export function RuleFields(props: RuleFieldsProps) {
       {text('date', 'Since', 'date')}
       <Which {...{ rule, onChange }} />
       <NearFields {...props} />
-      {rule.shaftWithin !== null && (
-        <div className="col-span-full grid grid-cols-4 gap-3 max-sm:grid-cols-2">
-          <Field
-            label="Within, of a shaft"
-            unit="m"
-            value={rule.shaftWithin}
-            error={faults[`${place}.shaftWithin`]}
-            onChange={(event) => {
-              onChange({ ...rule, shaftWithin: event.target.value });
-            }}
-          />
-        </div>
-      )}
+      <ShaftField {...props} />
       <div className="col-span-full flex flex-wrap items-center gap-x-5 gap-y-1">
-        <Checkbox
-          label="Listed buildings only"
-          checked={rule.listedOnly}
-          onChange={(event) => {
-            onChange({ ...rule, listedOnly: event.target.checked });
-          }}
-        />
-        <Checkbox
-          label="Near a shaft of the line only"
-          checked={rule.shaftWithin !== null}
-          onChange={(event) => {
-            onChange({ ...rule, shaftWithin: event.target.checked ? SHAFT_WITHIN : null });
-          }}
-        />
-        <Checkbox
-          label="Near a place only, as a work site"
-          checked={rule.near !== null}
-          onChange={(event) => {
-            onChange({ ...rule, near: event.target.checked ? NO_PLACE : null });
-          }}
-        />
+        <Only {...{ rule, onChange }} />
         <Checkbox
           label="Holds"
           checked={rule.isOn}

@@ -105,6 +105,24 @@ export function lineLayers(): LayerSpecification[] {
   ];
 }
 
+function shaftNames(): LayerSpecification {
+  return {
+    id: 'line-shaft-names',
+    type: 'symbol',
+    ...LINE,
+    filter: kind('shaft'),
+    layout: {
+      'text-field': ['get', 'text'],
+      'text-font': LABEL_FONTS.semibold,
+      'text-size': 11.5,
+      'text-anchor': 'top',
+      'text-offset': [0, 0.8],
+      'text-padding': 3,
+    },
+    paint: { 'text-color': ink, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
+  };
+}
+
 /** What is written on them; what meets something else is left out. */
 export function lineLabelLayers(): LayerSpecification[] {
   return [
@@ -137,21 +155,7 @@ export function lineLabelLayers(): LayerSpecification[] {
       },
       paint: { 'text-color': ink, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
     },
-    {
-      id: 'line-shaft-names',
-      type: 'symbol',
-      ...LINE,
-      filter: kind('shaft'),
-      layout: {
-        'text-field': ['get', 'text'],
-        'text-font': LABEL_FONTS.semibold,
-        'text-size': 11.5,
-        'text-anchor': 'top',
-        'text-offset': [0, 0.8],
-        'text-padding': 3,
-      },
-      paint: { 'text-color': ink, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
-    },
+    shaftNames(),
     {
       id: 'section-name',
       type: 'symbol',
