@@ -6,6 +6,7 @@ import type { BatchDetail, BatchPreview } from '../../../shared/schemas/letter-b
 import type { LetterKind } from '../../../shared/schemas/letter-settings.ts';
 import { NotFoundPage } from '../../app/routes/not-found.tsx';
 import { Page } from '../../components/layout/page.tsx';
+import { Button } from '../../components/ui/button.tsx';
 import { LoadingRows } from '../../components/ui/loading-rows.tsx';
 import { QueryError } from '../../components/ui/query-error.tsx';
 import { Select } from '../../components/ui/select.tsx';
@@ -34,6 +35,31 @@ function OwnText({ asked, written, onChange }: OwnTextProps) {
         <LetterWordsFields written={written} rows={16} onChange={onChange} />
       </div>
       <LetterLook written={written} asked={asked} />
+    </div>
+  );
+}
+
+type NotFoundProps = {
+  readonly asked: BatchPreview;
+  readonly error: Error;
+  readonly onChange: (asked: BatchPreview) => void;
+  readonly onRetry: () => void;
+};
+
+/** Why nobody is listed; somebody who was chosen by hand and cannot get a letter can be taken back. */
+function NotFound({ asked, error, onChange, onRetry }: NotFoundProps) {
+  return (
+    <div className="grid justify-items-start gap-3">
+      <QueryError what="Who gets it" error={error} onRetry={onRetry} />
+      {asked.chosen.length > 0 && (
+        <Button
+          onClick={() => {
+            onChange({ ...asked, chosen: asked.chosen.slice(0, -1) });
+          }}
+        >
+          Take back who was chosen last
+        </Button>
+      )}
     </div>
   );
 }
@@ -71,7 +97,7 @@ function NewBatchForm({ earlier }: { readonly earlier: BatchDetail | null }) {
       )}
       {text !== null && <OwnText asked={asked} written={text} onChange={setTyped} />}
       {error !== null && (
-        <QueryError what="Who gets it" error={error} onRetry={() => void refetch()} />
+        <NotFound {...{ asked, error }} onChange={setAsked} onRetry={() => void refetch()} />
       )}
       {data === undefined && error === null && <LoadingRows what="who gets it" />}
       {data !== undefined && isReady && (

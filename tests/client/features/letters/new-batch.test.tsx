@@ -3,7 +3,11 @@ import type { ReactNode } from 'react';
 import { Route, Routes } from 'react-router-dom';
 import { expect, test } from 'vitest';
 import { DEFAULT_TEMPLATES } from '../../../../shared/presentation/letter-templates.ts';
-import { newBatchSchema, type Batch } from '../../../../shared/schemas/letter-batches.ts';
+import {
+  batchPreviewSchema,
+  newBatchSchema,
+  type Batch,
+} from '../../../../shared/schemas/letter-batches.ts';
 import { LETTER_KINDS } from '../../../../shared/schemas/letter-settings.ts';
 import { templatePreviewSchema } from '../../../../shared/schemas/letter-templates.ts';
 import { BatchPage } from '../../../../src/features/letters/batch-page.tsx';
@@ -41,12 +45,18 @@ const EARLIER = [
 ];
 const HAD = 'waits in batch 6, for 3 Middle Row; on 20 Nov 2026 in batch 2, for 3 Middle Row';
 
-function show(page: ReactNode = <NewBatchPage />, path = '/', recipients: object[] = [ADA]) {
+function found(recipients: object[] = [ADA]) {
+  return { letters: 1, byMail: 1, byPost: 0, runNumber: 1, without: 0, recipients };
+}
+
+function show(
+  page: ReactNode = <NewBatchPage />,
+  path = '/',
+  preview: object | ((body: unknown) => unknown) = found(),
+) {
   const abilities = { readScheme: true, readLetters: true, prepareLetters: true };
   const api = fakeApi({
-    [`${PREPARE}/preview`]: {
-      ...{ letters: 1, byMail: 1, byPost: 0, runNumber: 1, without: 0, recipients },
-    },
+    [`${PREPARE}/preview`]: preview,
     [`GET ${SCHEME}/letter-templates`]: LETTER_KINDS.map((kind) => ({
       ...{ kind, version: 0, ...DEFAULT_TEMPLATES[kind], by: null, at: null },
     })),
@@ -101,14 +111,31 @@ test('other kinds go by their template and are not written here', async () => {
   expect(screen.queryByLabelText('Subject')).toBeNull();
 });
 
-test('a returned batch is prepared again with its text, who was chosen and left out, and what its check said', async () => {
-  const { calls } = show(
-    <Routes>
-      <Route path="/schemes/:schemeId/owners/letters/new" element={<NewBatchPage />} />
-      <Route path="/schemes/:schemeId/owners/letters/:batchId" element={<BatchPage />} />
-    </Routes>,
-    `/schemes/${anId(10)}/owners/letters/${RETURNED.id}`,
+const BATCHES = (
+  <Routes>
+    <Route path="/schemes/:schemeId/owners/letters/new" element={<NewBatchPage />} />
+    <Route path="/schemes/:schemeId/owners/letters/:batchId" element={<BatchPage />} />
+  </Routes>
+);
+const OF_RETURNED = `/schemes/${anId(10)}/owners/letters/${RETURNED.id}`;
+
+test('somebody chosen by hand who cannot get a letter is told of and taken back', async () => {
+  const fault = 'Ada has no interest in a building today.';
+  show(BATCHES, OF_RETURNED, (body) =>
+    batchPreviewSchema.parse(body).chosen.length > 0
+      ? new Refusal(422, 'invalid-input', fault)
+      : found([]),
   );
+  fireEvent.click(await screen.findByRole('link', { name: 'Prepare these letters again' }));
+  await screen.findByText((words) => words.includes(fault));
+  fireEvent.click(screen.getByRole('button', { name: 'Take back who was chosen last' }));
+  await waitFor(() => {
+    expect(screen.queryByText((words) => words.includes(fault))).toBeNull();
+  });
+});
+
+test('a returned batch is prepared again with its text, who was chosen and left out, and what its check said', async () => {
+  const { calls } = show(BATCHES, OF_RETURNED);
   fireEvent.click(await screen.findByRole('link', { name: 'Prepare these letters again' }));
   const body = await screen.findByDisplayValue('It is mendet.');
   expect(
@@ -130,7 +157,7 @@ test('a returned batch is prepared again with its text, who was chosen and left 
 
 test('who had the letter already is marked and counted, and is left out at once with a reason', async () => {
   const dee = { ...ADA, partyId: anId(72), name: 'Dee', earlier: EARLIER };
-  const { calls } = show(<NewBatchPage />, '/', [ADA, dee]);
+  const { calls } = show(<NewBatchPage />, '/', found([ADA, dee]));
   await screen.findByText(/^1 of them had a letter of this kind for the same building/);
   expect(screen.getByText(HAD)).toBeTruthy();
   expect(await axeFaults(document.body)).toEqual([]);
