@@ -14,7 +14,12 @@ function pidOf({ process: child }: RunningApp): number {
 
 function clusterOf({ output }: RunningApp): number[] {
   const [, port = ''] = /on port (\d+)/.exec(output()) ?? [];
-  return processesWith('postgres', '-D').filter((pid) => processesWith('-p', port).includes(pid));
+  const found = processesWith('postgres', '-D').filter((pid) =>
+    processesWith('-p', port).includes(pid),
+  );
+  // a process that the database has just made is called like itself for a moment
+  const made = found.flatMap(childrenOf);
+  return found.filter((pid) => !made.includes(pid));
 }
 
 async function answers({ address }: RunningApp): Promise<boolean> {

@@ -52,7 +52,12 @@ function Step({
 }) {
   return (
     <div className="border-t border-hairline py-2">
-      <div className="overflow-x-auto pb-1">
+      <div
+        role="group"
+        aria-label={`Formula: ${line.meaning}`}
+        tabIndex={0}
+        className="overflow-x-auto pb-1"
+      >
         <Formula symbol={line.symbol} expression={line.expression} />
       </div>
       <PutIn line={line} before={before} />
