@@ -1,12 +1,16 @@
 import { readdirSync, readFileSync } from 'node:fs';
 
-function commandLine(pid: string): string[] {
+/** What stands in a file about a process; nothing where the process has ended since it was listed. */
+function fileOf(pid: string | number, name: string): string {
   try {
-    return readFileSync(`/proc/${pid}/cmdline`, 'utf8').split('\0');
+    return readFileSync(`/proc/${pid}/${name}`, 'utf8');
   } catch {
-    // it has ended since it was listed
-    return [];
+    return '';
   }
+}
+
+function commandLine(pid: string): string[] {
+  return fileOf(pid, 'cmdline').split('\0');
 }
 
 /** The numbers of the processes whose command line holds some words, one after the other. */
@@ -19,6 +23,5 @@ export function processesWith(...words: readonly string[]): number[] {
 
 /** The processes that another one has started. */
 export function childrenOf(pid: number): number[] {
-  const children = readFileSync(`/proc/${pid}/task/${pid}/children`, 'utf8');
-  return children.split(' ').filter(Boolean).map(Number);
+  return fileOf(pid, `task/${pid}/children`).split(' ').filter(Boolean).map(Number);
 }
