@@ -118,6 +118,13 @@ export const REFERENCES = {
       'Prediction of ground movements and assessment of risk of building damage due to bored tunnelling',
     where: 'Geotechnical Aspects of Underground Construction in Soft Ground, London, 713–718',
   },
+  'mckay-beckman-conover-1979': {
+    authors: 'McKay, M. D., Beckman, R. J. and Conover, W. J.',
+    year: 1979,
+    title:
+      'A comparison of three methods for selecting values of input variables in the analysis of output from a computer code',
+    where: 'Technometrics 21(2), 239–245',
+  },
   'neumaier-1974': {
     authors: 'Neumaier, A.',
     year: 1974,
@@ -129,6 +136,13 @@ export const REFERENCES = {
     year: 1991,
     title: 'Tunnelling induced ground movements: predicting their magnitude and effects',
     where: 'Fourth International Conference on Ground Movements and Structures, Cardiff, 671–697',
+  },
+  'oneill-2014': {
+    authors: "O'Neill, M. E.",
+    year: 2014,
+    title:
+      'PCG: a family of simple fast space-efficient statistically good algorithms for random number generation',
+    where: 'Harvey Mudd College, Computer Science Department, HMC-CS-2014-0905',
   },
   'oreilly-new-1982': {
     authors: "O'Reilly, M. P. and New, B. M.",
@@ -153,6 +167,12 @@ export const REFERENCES = {
     year: 1995,
     title: 'Tunnelling in soft ground in the UK',
     where: 'Underground Construction in Soft Ground, New Delhi, 123–126',
+  },
+  'trefethen-2013': {
+    authors: 'Trefethen, L. N.',
+    year: 2013,
+    title: 'Approximation theory and approximation practice',
+    where: 'Society for Industrial and Applied Mathematics, Philadelphia',
   },
 } as const satisfies Record<string, Reference>;
 

@@ -1,4 +1,4 @@
-import { atPosition, type FivePosition } from '../numerics/range.ts';
+import { atPosition } from '../numerics/range.ts';
 import { MethodError } from '../method-error.ts';
 import type { Warning } from '../warnings.ts';
 import type { Block } from './block.ts';
@@ -19,11 +19,12 @@ import { depthToFocus, focusWarning } from './vector-focus.ts';
  * Which state of the ground: the position of K in its range, the face of each drive (undefined:
  * complete), and, where the movement of some pieces alone is wanted, which.
  *
- * Units: face chainages m. Valid: faces in the order of the drives; a missing one is complete.
+ * Units: face chainages m. Valid: position 0 to 4; faces in the order of the drives; a missing one is
+ * complete.
  * Source: [own].
  */
 export type GroundState = {
-  readonly position: FivePosition;
+  readonly position: number;
   readonly faces: readonly (number | undefined)[];
   readonly only?: (piece: Piece) => boolean;
 };

@@ -1,4 +1,4 @@
-import { atPosition, type FivePosition, type Range } from '../numerics/range.ts';
+import { atPosition, type Range } from '../numerics/range.ts';
 
 /**
  * A layer of the ground, from the base of the one above it down to its own base level.
@@ -22,9 +22,9 @@ export type TroughWidthRule<K = Range> =
 /**
  * A rule with the K of every layer at one position of its range.
  *
- * Units: none. Valid: any rule. Source: [own].
+ * Units: none. Valid: any rule; position 0 to 4. Source: [own].
  */
-export function ruleAt(rule: TroughWidthRule, position: FivePosition): TroughWidthRule<number> {
+export function ruleAt(rule: TroughWidthRule, position: number): TroughWidthRule<number> {
   if (rule.kind !== 'layered') return rule;
   const layers = rule.layers.map((layer) => ({
     baseLevel: layer.baseLevel,

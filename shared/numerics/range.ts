@@ -62,21 +62,22 @@ export function isRange(range: Range): boolean {
 }
 
 /**
- * The value of a range at one of its five positions.
+ * The value of a range at a position in it: one of the five, or anywhere between them.
  *
- * Units: those of the input. Valid: any ordered range. Source: [own].
+ * Units: those of the input. Valid: any ordered range; position 0 to 4. Source: [own].
  */
-export function atPosition(range: Range, position: FivePosition): number {
-  switch (position) {
-    case 0:
-      return range.low;
-    case 1:
-      return (range.low + range.central) / 2;
-    case 2:
-      return range.central;
-    case 3:
-      return (range.central + range.high) / 2;
-    case 4:
-      return range.high;
-  }
+export function atPosition({ low, central, high }: Range, position: number): number {
+  return position < 2
+    ? ((2 - position) * low + position * central) / 2
+    : ((4 - position) * central + (position - 2) * high) / 2;
+}
+
+/**
+ * The position in a range at which it has a value, the inverse of `atPosition`.
+ *
+ * Units: none. Valid: low ≤ value ≤ high; the middle of a range without width. Source: [own].
+ */
+export function positionOf({ low, central, high }: Range, value: number): number {
+  if (value < central) return (2 * (value - low)) / (central - low);
+  return value > central ? 2 + (2 * (value - central)) / (high - central) : 2;
 }

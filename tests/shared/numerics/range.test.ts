@@ -7,6 +7,7 @@ import {
   certain,
   FIVE_POSITIONS,
   isRange,
+  positionOf,
   rangeOf,
 } from '../../../shared/numerics/range.ts';
 import { holds, numbers } from '../../support/property.ts';
@@ -59,7 +60,41 @@ describe('atPosition', () => {
     });
   });
 
+  it('is straight between low and central and between central and high', () => {
+    const range = rangeOf([0, 4, 10]);
+    expect([0.5, 1.5, 2.5, 3.75].map((position) => atPosition(range, position))).toEqual([
+      1, 3, 5.5, 9.25,
+    ]);
+  });
+
+  it('has the mean of two values half-way, to the last digit', () => {
+    holds(fc.tuple(numbers(-1e3, 1e3), numbers(0, 10), numbers(0, 10)), ([low, a, b]) => {
+      const range = rangeOf([low, low + a, low + a + b]);
+      const { central, high } = range;
+      expect(FIVE_POSITIONS.map((position) => atPosition(range, position) + 0)).toEqual([
+        low + 0,
+        (low + central) / 2 + 0,
+        central + 0,
+        (central + high) / 2 + 0,
+        high + 0,
+      ]);
+    });
+  });
+
   it('is the same everywhere where the value is certain', () => {
     for (const position of FIVE_POSITIONS) expect(atPosition(certain(0.7), position)).toBe(0.7);
+  });
+});
+
+describe('positionOf', () => {
+  it('finds the position of a value', () => {
+    const range = rangeOf([0, 4, 10]);
+    for (const position of [0, 0.5, 1.5, 2, 2.5, 4]) {
+      expect(positionOf(range, atPosition(range, position))).toBeCloseTo(position, 12);
+    }
+  });
+
+  it('takes the middle of a range without width', () => {
+    expect(positionOf(certain(0.5), 0.5)).toBe(CENTRAL);
   });
 });
