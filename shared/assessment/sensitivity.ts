@@ -34,12 +34,14 @@ function spread(strains: readonly number[]): { categories: number; strain: numbe
 
 /**
  * Settled or sensitive, and to what: each input is varied alone about the central values of the
- * others; the largest change of category counts, and among equals the largest change of strain.
+ * others; the largest change of category counts, and among equals the largest change of strain. It is
+ * settled only where the samples of a sampled run, if there is one, are of the same category too.
  *
- * Units: none. Valid: any bracket; central stands in the middle of each list. Source: [own].
+ * Units: strains of the samples m/m. Valid: any bracket; central stands in the middle of each list.
+ * Source: [own].
  */
-export function sensitivityOf(bracket: Bracket): Sensitivity {
-  const all = bracket.strains.flat(2);
+export function sensitivityOf(bracket: Bracket, sampled: readonly number[] = []): Sensitivity {
+  const all = [...bracket.strains.flat(2), ...sampled];
   if (spread(all).categories === 0) return { settled: true, input: null };
   const centre = bracket.strains[bracket.strains.length >> 1] ?? [];
   const alone: [BracketInput, number[]][] = [

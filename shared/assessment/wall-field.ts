@@ -28,7 +28,12 @@ export type WallField = {
 const NODES_PER_WIDTH = 4;
 const MOST_INTERVALS = 2000;
 
-function nodesAlong(length: number, smallestWidth: number): Float64Array {
+/**
+ * The places along a wall at which the kernel is asked.
+ *
+ * Units: m. Valid: `smallestWidth` is the least trough width that the wall meets. Source: [own].
+ */
+export function nodesAlong(length: number, smallestWidth: number): Float64Array {
   const wanted = Math.ceil((length * NODES_PER_WIDTH) / smallestWidth);
   const intervals = Math.min(MOST_INTERVALS, Math.max(2, wanted));
   return Float64Array.from({ length: intervals + 1 }, (_, k) => (k * length) / intervals);
@@ -50,16 +55,21 @@ function resolve(one: Float64Array, tx: number, ty: number, into: Float64Array, 
     at(one, FIELD.strainNorthNorth) * ty * ty;
 }
 
-function profileOfPack(
-  pack: Float64Array,
-  count: number,
-  start: PlanPoint,
-  direction: PlanPoint,
+/**
+ * The movement along a wall that one pack of pieces gives.
+ *
+ * Units: nodes m along the wall. Valid: packed for the wall's place. Source: attewell-woodman-1982; the
+ * profile is [own].
+ */
+export function profileOfPack(
+  { pack, count }: LevelField['packs'][number],
+  wall: Wall,
   nodes: Float64Array,
 ): Profile {
+  const { start } = wall.segment;
   const values = new Float64Array(nodes.length * NODE_STRIDE);
   const one = new Float64Array(FIELD_SIZE);
-  const [tx, ty] = direction;
+  const [tx, ty] = directionOf(wall);
   for (let k = 0; k < nodes.length; k++) {
     const x = at(nodes, k);
     sumPieces(pack, count, start[0] + x * tx, start[1] + x * ty, one);
@@ -93,6 +103,30 @@ export function siteOfWall(model: GroundModel, wall: Wall): Site {
 }
 
 /**
+ * The length of a wall for computing, which is never quite nothing.
+ *
+ * Units: m. Valid: any wall. Source: [own].
+ */
+export function computedLength(wall: Wall): number {
+  return Math.max(LEAST_LENGTH, wallLength(wall));
+}
+
+/**
+ * What of a wall a rule ignores under given drives.
+ *
+ * Units: m. Valid: `fields` packed for the wall's place, together all that reaches it. Source: as CutOff.
+ */
+export function cutOffOfWall(rule: CutOffRule, wall: Wall, fields: readonly LevelField[]): CutOff {
+  if (rule.kind === 'settlement') return rule;
+  const direction = directionOf(wall);
+  const line = { start: wall.segment.start, direction, length: computedLength(wall) };
+  return {
+    kind: 'stretches',
+    stretches: fields.flatMap((field) => stretchesWithinReach(field, line, rule.widths)),
+  };
+}
+
+/**
  * The movement of the ground along a wall in one state.
  *
  * Units: m. Valid: `site` is the wall's; throws as `levelField`.
@@ -105,22 +139,9 @@ export function wallField(
   cutOff: CutOffRule,
   state: GroundState,
 ): WallField {
-  const { segment } = wall;
   const field = levelField(model, site, state);
-  const length = Math.max(LEAST_LENGTH, wallLength(wall));
-  const direction = directionOf(wall);
+  const length = computedLength(wall);
   const nodes = nodesAlong(length, field.smallestWidth);
-  const profiles = field.packs.map(({ pack, count }) =>
-    profileOfPack(pack, count, segment.start, direction, nodes),
-  );
-  const line = { start: segment.start, direction, length };
-  return {
-    length,
-    profiles,
-    field,
-    cutOff:
-      cutOff.kind === 'settlement'
-        ? cutOff
-        : { kind: 'stretches', stretches: stretchesWithinReach(field, line, cutOff.widths) },
-  };
+  const profiles = field.packs.map((pack) => profileOfPack(pack, wall, nodes));
+  return { length, profiles, field, cutOff: cutOffOfWall(cutOff, wall, [field]) };
 }

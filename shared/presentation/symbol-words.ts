@@ -101,4 +101,13 @@ export const SYMBOL_WORDS: Readonly<Record<string, SymbolWords>> = {
   λ: words('factor on all central volume losses together'),
   V_central: words('central volume loss', 'm/m'),
   V_high: words('high volume loss', 'm/m'),
+  q: words('share of the distribution below the drawn value'),
+  part: words('which of the n parts of the distribution the sample takes, counted from 0'),
+  rest: words('how far into that part, drawn by lot'),
+  n: words('number of samples'),
+  low: words('low end of the range of the input'),
+  central: words('central value of the input'),
+  high: words('high end of the range of the input'),
+  V_u: words('volume loss for which the unit fields are worked out', 'm/m'),
+  r: words('factor on the unit fields of a ground'),
 };

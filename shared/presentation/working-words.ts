@@ -8,7 +8,7 @@ import { SYMBOL_WORDS } from './symbol-words.ts';
 const DIGITS = 5;
 /** Under it, in metres, a length is a movement, which people read in millimetres. */
 const SMALL_LENGTH = 0.2;
-const STRAINS = /^(ε|DL$)/;
+const IN_PER_CENT = /^(ε|DL$|V_L$)/;
 
 /**
  * A figure as people read it, where that is another unit; null where it is the same.
@@ -21,7 +21,7 @@ export function peoplesFigure({ symbol, value, unit }: WorkingLine): string | nu
     return `${formatSignificant(millimetresFromMetres(value), DIGITS)}\u00a0mm`;
   }
   if (unit !== 'm/m') return null;
-  if (STRAINS.test(symbol)) return `${formatSignificant(percentFromRatio(value), DIGITS)}\u00a0%`;
+  if (IN_PER_CENT.test(symbol)) return `${formatSignificant(percentFromRatio(value), DIGITS)}\u00a0%`;
   return `1 in ${formatSignificant(1 / Math.abs(value), 3)}`;
 }
 
