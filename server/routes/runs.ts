@@ -3,6 +3,7 @@ import {
   newRunSchema,
   runBuildingParamsSchema,
   runParamsSchema,
+  sheetQuerySchema,
 } from '../../shared/schemas/runs.ts';
 import { cancelRun } from '../commands/cancel-run.ts';
 import { resumeRun } from '../commands/resume-run.ts';
@@ -109,7 +110,8 @@ export const runRoutes = [
     path: '/api/schemes/:schemeId/runs/:runId/buildings/:buildingId/sheet.pdf',
     access: { scheme: 'readRuns' },
     params: runBuildingParamsSchema,
-    handle: (call) => sendSheet(call, call.params),
+    query: sheetQuerySchema,
+    handle: (call) => sendSheet(call, call.params, call.query.samples ?? null),
   }),
   defineRoute({
     method: 'get',

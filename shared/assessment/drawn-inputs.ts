@@ -33,19 +33,19 @@ export type DrawnInputs = { readonly eOverG: number; readonly grounds: readonly 
  * Units: as DrawnGround. Valid: shares 0 to 1. Source: [common] for the triangular distributions.
  */
 export function drawnGround(
-  { volumeLoss: losses, troughWidth: widths }: SampledGround,
+  { number, volumeLoss: losses, troughWidth: widths }: SampledGround,
   shares: { readonly volumeLoss: number; readonly troughWidth: number },
   record?: Recorder,
 ): DrawnGround {
-  const ofLoss = { symbol: 'V_L', meaning: 'volume loss drawn for this ground', unit: 'm/m' };
-  const ofWidth = { symbol: 'K', meaning: 'K drawn for this ground', unit: '' };
+  const ofLoss = { symbol: 'V_L', meaning: `volume loss drawn for ground ${number}`, unit: 'm/m' };
+  const ofWidth = { symbol: 'K', meaning: `K drawn for ground ${number}`, unit: '' };
   const volumeLoss = triangularQuantile(losses, shares.volumeLoss, ofLoss, record);
   const troughWidth = triangularQuantile(widths, shares.troughWidth, ofWidth, record);
   const unit = unitVolumeLoss(losses);
   const factor = unit === 0 ? 0 : volumeLoss / unit;
   record?.({
     symbol: 'r',
-    meaning: 'factor on the unit fields of this ground',
+    meaning: `factor on the unit fields of ground ${number}`,
     expression: unit === 0 ? '0' : 'V_L / V_u',
     inputs: unit === 0 ? {} : { V_L: volumeLoss, V_u: unit },
     value: factor,

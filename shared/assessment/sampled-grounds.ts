@@ -8,12 +8,13 @@ import { certain, type Range } from '../numerics/range.ts';
  * of K. Under a rule by layers the layers are the ground: their K are drawn once for all drives, each at the
  * same position in its range as in the bracket, and `troughWidth` is the mean of their ranges, so that
  * the K of each layer is triangular as long as the ranges are alike in shape. `lossInput` and
- * `widthInput` say which of the drawn inputs is whose.
+ * `widthInput` say which of the drawn inputs is whose; grounds are numbered from 1.
  *
  * Units: volumeLoss m/m, troughWidth none. Valid: made by `sampledGrounds`; where K plays no part its
  * range has no width. Source: [own].
  */
 export type SampledGround = {
+  readonly number: number;
   readonly volumeLoss: Range;
   readonly troughWidth: Range;
   readonly lossInput: number;
@@ -62,6 +63,7 @@ export function sampledGrounds(model: GroundModel): SampledGround[] {
     if (grounds.some((ground) => isOfGround(model, ground, piece))) continue;
     const lossInput = 1 + 2 * grounds.length;
     grounds.push({
+      number: grounds.length + 1,
       volumeLoss: piece.volumeLoss,
       troughWidth: troughWidthOf(model.rules.depth, piece),
       lossInput,

@@ -33,25 +33,36 @@ function weightsAt({ widths }: FieldsOverHalf, troughWidth: number): number[] {
  * Units: none. Valid: as `sampledProfile`. Source: [own], Lagrange interpolation in 1/K.
  */
 export function recordInterpolation(
-  { halves }: FieldsOverGrounds['grounds'][number],
+  { ground, halves }: FieldsOverGrounds['grounds'][number],
   { factor, troughWidth }: DrawnGround,
   record: Recorder,
 ): void {
   const half = halfAt(halves, troughWidth);
   if (half === undefined) return;
   const { widths } = half;
-  const weights = weightsAt(half, troughWidth);
-  for (const [own, width] of widths.entries()) {
-    const others = widths.map((_, k) => k + 1).filter((k) => k !== own + 1);
-    const over = others.map((k) => `(1 / K - 1 / K_${k})`);
-    const under = others.map((k) => `(1 / K_${own + 1} - 1 / K_${k})`);
-    const all = Object.fromEntries(widths.map((one, k) => [`K_${k + 1}`, one]));
+  const k = 1 / troughWidth;
+  if (widths.length > 1)
     record({
-      symbol: `w_${own + 1}`,
-      meaning: `factor on the unit field that was worked out at K ${width.toFixed(4)}`,
-      expression: others.length === 0 ? 'r' : `r * ${over.join(' * ')} / (${under.join(' * ')})`,
-      inputs: others.length === 0 ? { r: factor } : { r: factor, K: troughWidth, ...all },
-      value: factor * (weights[own] ?? 0),
+      symbol: 'k',
+      meaning: `1/K of ground ${ground.number}, over which the unit fields are interpolated`,
+      expression: '1 / K',
+      inputs: { K: troughWidth },
+      value: k,
+      unit: '',
+      reference: 'own',
+    });
+  const places = Object.fromEntries(widths.map((width, index) => [`k_${index + 1}`, 1 / width]));
+  for (const [index, weight] of weightsAt(half, troughWidth).entries()) {
+    const own = `k_${index + 1}`;
+    const others = Object.keys(places).filter((name) => name !== own);
+    const over = others.map((name) => `(k - ${name})`).join(' * ');
+    const under = others.map((name) => `(${own} - ${name})`).join(' * ');
+    record({
+      symbol: `w_${index + 1}`,
+      meaning: `factor on the unit field of ground ${ground.number} at K ${(widths[index] ?? 0).toFixed(4)}`,
+      expression: others.length === 0 ? 'r' : `r * ${over} / (${under})`,
+      inputs: others.length === 0 ? { r: factor } : { r: factor, k, ...places },
+      value: factor * weight,
       unit: '',
       reference: 'own',
     });

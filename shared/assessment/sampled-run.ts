@@ -1,8 +1,9 @@
 import type { Wall } from '../building/wall.ts';
-import { CATEGORIES } from '../damage/categories.ts';
+import { CATEGORIES, type Category } from '../damage/categories.ts';
 import { categoryOfStrain } from '../damage/category-of-strain.ts';
 import type { GroundModel } from '../ground/ground-model.ts';
 import type { GroundState } from '../ground/level-field.ts';
+import type { Recorder } from '../working.ts';
 import { drawnEOverG, drawnInputs, drawnShares, type DrawnInputs } from './drawn-inputs.ts';
 import { fieldsOverGrounds, type FieldsOverGrounds } from './fields-over-grounds.ts';
 import type { AssessmentRules } from './rules.ts';
@@ -85,6 +86,30 @@ export function sampledRun(
     counts: CATEGORIES.map(({ category }) => categories.filter((one) => one === category).length),
     worst,
   };
+}
+
+/**
+ * The share of the samples that come into a category.
+ *
+ * Units: none. Valid: at least one sample. Source: mckay-beckman-conover-1979, for the samples standing for
+ * the distribution in equal parts.
+ */
+export function shareInCategory(
+  { counts, strains }: Pick<SampledRun, 'counts' | 'strains'>,
+  category: Category,
+  record?: Recorder,
+): number {
+  const [n_c, n] = [counts[category] ?? 0, strains.length];
+  record?.({
+    symbol: 'share',
+    meaning: `share of the samples in category ${CATEGORIES[category]?.label ?? ''}`,
+    expression: 'n_c / n',
+    inputs: { n_c, n },
+    value: n_c / n,
+    unit: '',
+    reference: 'mckay-beckman-conover-1979',
+  });
+  return n_c / n;
 }
 
 /**

@@ -115,14 +115,15 @@ export function workingOfSample(
   const drawn = drawnInputs(grounds, shares)[k];
   if (drawn === undefined) return [];
   const fields = fieldsOverGrounds(model, wall, grounds, rules.cutOff, faces);
-  const ofGrounds = fields.grounds.flatMap((one, index) => {
-    const ofGround = drawn.grounds[index];
+  const ofGrounds = fields.grounds.flatMap((one) => {
+    const { number } = one.ground;
+    const ofGround = drawn.grounds[number - 1];
     if (one.halves.length === 0 || ofGround === undefined) return [];
     const interpolate = (record: Recorder) => {
       recordInterpolation(one, ofGround, record);
     };
     const lines = linesOfGround(one.ground, { shares, n, k }, interpolate);
-    return [{ title: `Sample ${k + 1}, ground ${index + 1}`, lines }];
+    return [{ title: `Sample ${k + 1}, ground ${number}`, lines }];
   });
   const lines = linesOfWall(model, fields, drawn, rules, faces, n);
   return [...ofGrounds, { title: `Sample ${k + 1}, wall ${wall.name}`, lines }];

@@ -105,9 +105,12 @@ export const SYMBOL_WORDS: Readonly<Record<string, SymbolWords>> = {
   part: words('which of the n parts of the distribution the sample takes, counted from 0'),
   rest: words('how far into that part, drawn by lot'),
   n: words('number of samples'),
+  n_c: words('samples whose strain comes into the category'),
+  share: words('share of the samples'),
   low: words('low end of the range of the input'),
   central: words('central value of the input'),
   high: words('high end of the range of the input'),
   V_u: words('volume loss for which the unit fields are worked out', 'm/m'),
   r: words('factor on the unit fields of a ground'),
+  k: words('1/K, over which unit fields are interpolated'),
 };

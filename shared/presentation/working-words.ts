@@ -21,7 +21,8 @@ export function peoplesFigure({ symbol, value, unit }: WorkingLine): string | nu
     return `${formatSignificant(millimetresFromMetres(value), DIGITS)}\u00a0mm`;
   }
   if (unit !== 'm/m') return null;
-  if (IN_PER_CENT.test(symbol)) return `${formatSignificant(percentFromRatio(value), DIGITS)}\u00a0%`;
+  if (IN_PER_CENT.test(symbol))
+    return `${formatSignificant(percentFromRatio(value), DIGITS)}\u00a0%`;
   return `1 in ${formatSignificant(1 / Math.abs(value), 3)}`;
 }
 

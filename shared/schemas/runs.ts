@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { LARGEST_SEED } from '../numerics/random-numbers.ts';
 import { alignmentDesignSchema } from './alignments.ts';
 import { rulesSchema } from './rules.ts';
 
@@ -53,6 +54,20 @@ export const runBuildingParamsSchema = z.object({
   schemeId: z.string(),
   runId: z.uuid(),
   buildingId: z.coerce.number().int().min(1).max(2_147_483_647),
+});
+
+/**
+ * What a sheet is to show beside what was recorded: the samples that a seed draws.
+ *
+ * Units: none. Valid: a whole number from 0 to LARGEST_SEED, written in figures. Source: [own].
+ */
+export const sheetQuerySchema = z.object({
+  samples: z
+    .string()
+    .regex(/^\d{1,10}$/, 'Give a whole number as the seed.')
+    .transform(Number)
+    .pipe(z.number().max(LARGEST_SEED))
+    .optional(),
 });
 
 /**

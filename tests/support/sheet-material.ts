@@ -54,6 +54,7 @@ export function aSheetMaterial(
     neighbours: [[[aRing(5, 2, 10, 8)]]],
     contours: JSON.stringify([{ level: 0.01, line: [[-60, 6], [60, 6]], isClosed: false }]), // prettier-ignore
     history: [],
+    samples: null,
     printedAt: '2026-12-02T09:30:00.000Z',
     ...overrides,
   };

@@ -41,7 +41,7 @@ function bracketPart(
   parts: SheetParts,
   beside: NonNullable<ReturnType<typeof pieceBesideWall>>,
 ): Block {
-  const { paper, sheet, strain } = parts;
+  const { paper, sheet, strain, samples } = parts;
   const width = BRACKET * POINTS_PER_PIXEL;
   const { volumeLoss, troughWidth } = beside.piece;
   if (strain?.bracket === undefined) return gap(0);
@@ -51,7 +51,8 @@ function bracketPart(
     bracketBlock(paper, { bracket, volumeLoss, troughWidth: ofK, width: BRACKET }),
     gap(6),
     rangeBar(paper, strainRange(bracket), BRACKET),
-    ...(sensitivity === undefined
+    // with samples the verdict is theirs and the bracket's together
+    ...(sensitivity === undefined || samples !== null
       ? []
       : [
           gap(3),

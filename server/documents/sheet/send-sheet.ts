@@ -31,7 +31,11 @@ async function neighboursOf(
   return found.filter(({ id }) => id !== buildingId).map((one) => one.parts);
 }
 
-async function materialOf(call: SheetCall, place: Place): Promise<SheetMaterial> {
+async function materialOf(
+  call: SheetCall,
+  place: Place,
+  samples: number | null,
+): Promise<SheetMaterial> {
   const { services, scheme } = call;
   const { runId, buildingId } = place;
   // whether it is there, before anything else of it is asked for
@@ -48,6 +52,7 @@ async function materialOf(call: SheetCall, place: Place): Promise<SheetMaterial>
     building,
     neighbours: await neighboursOf(call, place, building.facts),
     contours,
+    samples,
     history: await historyOfBuilding(services.database, option, buildingId),
     printedAt: new Date().toISOString(),
   };
@@ -63,10 +68,17 @@ function fileName({ run, building }: SheetMaterial): string {
   return `sheet-${reference || building.facts.id}-run-${run.number}.pdf`;
 }
 
-/** Sends the sheet of one building in one run; it is drawn beside the event loop. */
-export async function sendSheet(call: SheetCall, place: Place): Promise<void> {
+/**
+ * Sends the sheet of one building in one run, with a sampled run where its seed is given; it is worked out
+ * and drawn beside the event loop.
+ */
+export async function sendSheet(
+  call: SheetCall,
+  place: Place,
+  samples: number | null,
+): Promise<void> {
   const { services, res } = call;
-  const material = await materialOf(call, place);
+  const material = await materialOf(call, place, samples);
   const bytes = await services.runs.compute({ kind: 'sheet', material });
   res.attachment(fileName(material)).type('application/pdf');
   res.end(bytes);

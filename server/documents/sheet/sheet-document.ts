@@ -1,3 +1,4 @@
+import type { OpenedWall } from '../../../shared/assessment/open-wall.ts';
 import { beside, gap, stack, type Block } from '../pdf/block.ts';
 import { Flow } from '../pdf/flow.ts';
 import { INKS } from '../pdf/inks.ts';
@@ -14,6 +15,7 @@ import { interactionBlock, interactionWords } from './interaction-block.ts';
 import { buildingName, drawFrames, sheetArea } from './page-frame.ts';
 import { planBlock } from './plan-block.ts';
 import { sectionBlock } from './section-block.ts';
+import { samplesBlock, samplesWorking } from './samples-block.ts';
 import type { SheetMaterial } from './sheet-material.ts';
 import { sheetParts, type SheetParts } from './sheet-parts.ts';
 import { SHEET_WIDTH } from './sheet-width.ts';
@@ -21,7 +23,7 @@ import { stageBlocks } from './stage-blocks.ts';
 import { titled, heading } from './titled.ts';
 import { verdictBlock } from './verdict-block.ts';
 import { WALL_COLUMNS, wallRows } from './walls-table.ts';
-import { putWorking } from './working-part.ts';
+import { putWorkings, type WorkingPart } from './working-part.ts';
 import { ZONE_COLUMNS, zoneRows } from './zones-table.ts';
 
 const BETWEEN = 14;
@@ -119,19 +121,29 @@ function putWalls(flow: Flow, { paper, strain }: SheetParts): void {
   flowTable(flow, paper, WALL_COLUMNS, wallRows(strain));
 }
 
+function wallWorking({ wall, working }: OpenedWall): WorkingPart {
+  return {
+    title: `Working of wall ${wall.name}`,
+    note: 'at the central values; each formula, the numbers put in, what came out, and where the formula is from',
+    sections: working,
+  };
+}
+
 function putAnswers(flow: Flow, parts: SheetParts): void {
   const { paper, opened } = parts;
   putPart(flow, paper, 'In plain words', plainWordsBlock(parts));
   putPart(flow, paper, 'Bracket and breakpoint', bracketBlocks(parts));
+  putPart(flow, paper, 'Sampled run', samplesBlock(parts));
   putPart(flow, paper, 'Stage and holds', stageBlocks(parts));
   putPart(flow, paper, 'Cautions', cautionsBlock(paper));
   flow.space(BETWEEN);
   mark(paper, 'Decisions, visits and measures');
   putHistory(flow, parts);
-  if (opened === null) return;
+  const workings = [...(opened === null ? [] : [wallWorking(opened)]), ...samplesWorking(parts)];
+  if (workings.length === 0) return;
   flow.space(BETWEEN);
   mark(paper, 'Working');
-  putWorking(flow, parts, opened.working);
+  putWorkings(flow, parts, workings);
 }
 
 /** The sheet of one building in one run as a PDF, upright A4. */

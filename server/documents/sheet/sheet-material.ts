@@ -22,5 +22,7 @@ export type SheetMaterial = {
   /** The contours of the run, as the text of a list. */
   readonly contours: string;
   readonly history: readonly HistoryLine[];
+  /** The seed of the sampled run that is asked for; null where none is. */
+  readonly samples: number | null;
   readonly printedAt: string;
 };

@@ -1,4 +1,5 @@
 import type { BuildingResult } from '../../../shared/assessment/assess-building.ts';
+import { openSamples, type OpenedSamples } from '../../../shared/assessment/opened-samples.ts';
 import { openWall, type OpenedWall } from '../../../shared/assessment/open-wall.ts';
 import { resultOfOutcome } from '../../../shared/assessment/result-of-outcome.ts';
 import {
@@ -17,6 +18,8 @@ export type SheetParts = {
   readonly strain: BuildingResult | null;
   /** The governing wall opened up; null where there is none. */
   readonly opened: OpenedWall | null;
+  /** The sampled run that was asked for; null where none was, or nothing could be worked out. */
+  readonly samples: OpenedSamples | null;
   /** Whether the figures that were worked out for the sheet are those on record. */
   readonly isAsRecorded: boolean;
 };
@@ -35,6 +38,7 @@ export function sheetParts(paper: Paper, material: SheetMaterial): SheetParts {
     sheet,
     strain,
     opened: wall === undefined ? null : openWall(inputs.model, wall, inputs.rules, []),
+    samples: material.samples === null ? null : openSamples(sheet, material.samples),
     isAsRecorded: JSON.stringify(resultOfOutcome(sheet.outcome)) === JSON.stringify(result),
   };
 }

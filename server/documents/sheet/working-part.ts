@@ -76,25 +76,23 @@ function worksBlock({ paper }: SheetParts, lines: readonly WorkingLine[]): Block
   return titled(paper, { title: 'Works cited' }, SHEET_WIDTH, stack(rows, 2));
 }
 
-/** The whole working of the governing wall, line by line, and the works that it cites. */
-export function putWorking(
-  flow: Flow,
-  parts: SheetParts,
-  sections: readonly WorkingSection[],
-): void {
-  const { paper, opened } = parts;
-  const title = `Working of wall ${opened?.wall.name ?? ''}`;
-  const note =
-    'at the central values; each formula, the numbers put in, what came out, and where the formula is from';
-  const head = heading(paper, { title, note }, SHEET_WIDTH);
-  if (!flow.hasRoom(head.height + LEAST)) flow.turn();
-  flow.put(head);
-  for (const section of sections) putSection(flow, parts, section);
+/** A working as a whole: whose it is, and its sections. */
+export type WorkingPart = {
+  readonly title: string;
+  readonly note: string;
+  readonly sections: readonly WorkingSection[];
+};
+
+/** Whole workings, line by line, and the works that they cite; nothing where there are none. */
+export function putWorkings(flow: Flow, parts: SheetParts, workings: readonly WorkingPart[]): void {
+  for (const [k, { title, note, sections }] of workings.entries()) {
+    const head = heading(parts.paper, { title, note }, SHEET_WIDTH);
+    if (k > 0) flow.space(14);
+    if (!flow.hasRoom(head.height + LEAST)) flow.turn();
+    flow.put(head);
+    for (const section of sections) putSection(flow, parts, section);
+  }
+  const lines = workings.flatMap(({ sections }) => sections).flatMap((section) => section.lines);
   flow.space(12);
-  flow.put(
-    worksBlock(
-      parts,
-      sections.flatMap(({ lines }) => lines),
-    ),
-  );
+  flow.put(worksBlock(parts, lines));
 }

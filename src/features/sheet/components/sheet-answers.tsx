@@ -17,6 +17,9 @@ import { RangeBar } from '../../assessment/components/range-bar.tsx';
 import { Warnings } from '../../assessment/components/warnings.tsx';
 import { WallFacts } from '../../assessment/components/wall-facts.tsx';
 import { strainRange } from '../../../../shared/presentation/strain-range.ts';
+import { useSamples } from '../samples/use-samples.ts';
+import { useSeed } from '../samples/use-seed.ts';
+import { SamplesPanel } from './samples-panel.tsx';
 import { reserveWords, stageWords } from '../../../../shared/presentation/result-words.ts';
 import { assumedWords, plainWords } from '../../../../shared/presentation/plain-words.ts';
 
@@ -47,7 +50,9 @@ function Record({ run, building, sheet }: SheetAnswersProps) {
   );
 }
 
-function BracketPanels({ building, sheet, opened }: SheetAnswersProps) {
+function BracketPanels({ run, building, sheet, opened }: SheetAnswersProps) {
+  const { seed, draw } = useSeed(run.id);
+  const drawn = useSamples(run, building, seed);
   const { bracket } = sheet.strain ?? {};
   const { model } = sheet.inputs;
   const beside = opened === null ? undefined : pieceBesideWall(model, opened.wall)?.piece;
@@ -65,7 +70,8 @@ function BracketPanels({ building, sheet, opened }: SheetAnswersProps) {
         <div className="mt-2">
           <RangeBar strain={strainRange(bracket)} />
         </div>
-        {sheet.strain?.sensitivity !== undefined && (
+        {/* with samples the verdict is theirs and the bracket's together */}
+        {sheet.strain?.sensitivity !== undefined && drawn.samples === null && (
           <p className="mt-1 text-small">{settledWords(sheet.strain.sensitivity)}</p>
         )}
       </Panel>
@@ -80,6 +86,7 @@ function BracketPanels({ building, sheet, opened }: SheetAnswersProps) {
           </p>
         </div>
       </Panel>
+      <SamplesPanel seed={seed} onDraw={draw} {...drawn} />
     </>
   );
 }

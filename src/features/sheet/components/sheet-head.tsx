@@ -7,6 +7,7 @@ import { DamageChip } from '../../../components/ui/damage-chip.tsx';
 import { buildingPath, registerPath, visitPath } from '../../../config/paths.ts';
 import { overBracketWords } from '../../../../shared/presentation/verdict-words.ts';
 import { stageWords } from '../../../../shared/presentation/result-words.ts';
+import { useSeed } from '../samples/use-seed.ts';
 import { can } from '../../schemes/can.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import { SheetsBeside } from './sheets-beside.tsx';
@@ -49,6 +50,7 @@ export function SheetHead({ schemeId, run, building }: SheetHeadProps) {
   const scheme = useScheme();
   const { facts, result } = building;
   const id = Number(facts.id);
+  const { seed } = useSeed(run.id);
   const buildingApi = `/api/schemes/${schemeId}/runs/${run.id}/buildings/${id}`;
   return (
     <header className="flex flex-wrap items-center gap-x-8 gap-y-3 border-b-2 border-ink px-8 py-3.5 max-sm:px-4 print:px-0">
@@ -73,7 +75,11 @@ export function SheetHead({ schemeId, run, building }: SheetHeadProps) {
         >
           The case for assess
         </a>
-        <a className={buttonStyle('plain')} href={`${buildingApi}/sheet.pdf`} download>
+        <a
+          className={buttonStyle('plain')}
+          href={`${buildingApi}/sheet.pdf${seed === null ? '' : `?samples=${seed}`}`}
+          download
+        >
           PDF
         </a>
         <Button

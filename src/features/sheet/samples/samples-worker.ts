@@ -1,0 +1,5 @@
+import { workSamples, type SamplesAsked } from './work-samples.ts';
+
+self.addEventListener('message', ({ data }: MessageEvent<SamplesAsked>) => {
+  self.postMessage(workSamples(data));
+});
