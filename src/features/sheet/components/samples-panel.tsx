@@ -128,7 +128,11 @@ function Drawn({ samples }: { readonly samples: OpenedSamples }) {
 export function SamplesPanel({ seed, onDraw, samples, isDrawing, hasFailed }: SamplesPanelProps) {
   const isShown = samples !== null;
   return (
-    <Panel title="Sampled run" note={isShown ? seedWords(samples) : 'on demand'}>
+    <Panel
+      title="Sampled run"
+      note={isShown ? seedWords(samples) : 'on demand'}
+      className={isShown ? '' : 'print:hidden'}
+    >
       <p className="mt-2 text-small text-ink-2">{SAMPLES_PURPOSE}</p>
       {isShown && <Drawn samples={samples} />}
       <p role="status" className="text-small text-ink-2">

@@ -1,27 +1,18 @@
 import type { OpenedWall } from '../../../../shared/assessment/open-wall.ts';
 import type { BuildingSheet } from '../../../../shared/assessment/sheet-of-building.ts';
-import { pieceBesideWall } from '../../../../shared/assessment/piece-beside-wall.ts';
 import { resultOfOutcome } from '../../../../shared/assessment/result-of-outcome.ts';
 import { METHOD_VERSION } from '../../../../shared/method-version.ts';
 import { CAUTIONS } from '../../../../shared/cautions.ts';
 import type { RunBuilding, RunDetail } from '../../../../shared/schemas/runs.ts';
-import { troughWidthMatters } from '../../../../shared/ground/trough-width-matters.ts';
 import { MeasuresPanel } from '../../measures/components/measures-panel.tsx';
 import { PartiesOfBuilding } from '../../parties/components/parties-of-building.tsx';
 import { DecisionPanel } from '../../decisions/components/decision-panel.tsx';
 import { Panel } from '../../../components/ui/panel.tsx';
-import { breakpointWords, settledWords } from '../../../../shared/presentation/bracket-words.ts';
-import { BracketTable } from '../../assessment/components/bracket-table.tsx';
-import { BreakpointBar } from '../../assessment/components/breakpoint-bar.tsx';
-import { RangeBar } from '../../assessment/components/range-bar.tsx';
 import { Warnings } from '../../assessment/components/warnings.tsx';
 import { WallFacts } from '../../assessment/components/wall-facts.tsx';
-import { strainRange } from '../../../../shared/presentation/strain-range.ts';
-import { useSamples } from '../samples/use-samples.ts';
-import { useSeed } from '../samples/use-seed.ts';
-import { SamplesPanel } from './samples-panel.tsx';
-import { reserveWords, stageWords } from '../../../../shared/presentation/result-words.ts';
+import { stageWords } from '../../../../shared/presentation/result-words.ts';
 import { assumedWords, plainWords } from '../../../../shared/presentation/plain-words.ts';
+import { RangePanels } from './range-panels.tsx';
 
 type SheetAnswersProps = {
   readonly run: RunDetail;
@@ -50,47 +41,6 @@ function Record({ run, building, sheet }: SheetAnswersProps) {
   );
 }
 
-function BracketPanels({ run, building, sheet, opened }: SheetAnswersProps) {
-  const { seed, draw } = useSeed(run.id);
-  const drawn = useSamples(run, building, seed);
-  const { bracket } = sheet.strain ?? {};
-  const { model } = sheet.inputs;
-  const beside = opened === null ? undefined : pieceBesideWall(model, opened.wall)?.piece;
-  if (bracket === undefined || beside === undefined) return null;
-  return (
-    <>
-      <Panel title="Bracket" note="volume loss down, K across; the worst of all walls, strain %">
-        <div className="mt-2">
-          <BracketTable
-            bracket={bracket}
-            volumeLoss={beside.volumeLoss}
-            troughWidth={troughWidthMatters(model) ? beside.troughWidth : null}
-          />
-        </div>
-        <div className="mt-2">
-          <RangeBar strain={strainRange(bracket)} />
-        </div>
-        {/* with samples the verdict is theirs and the bracket's together */}
-        {sheet.strain?.sensitivity !== undefined && drawn.samples === null && (
-          <p className="mt-1 text-small">{settledWords(sheet.strain.sensitivity)}</p>
-        )}
-      </Panel>
-      <Panel title="Breakpoint" note="volume loss that makes it the category that leads on">
-        <div className="mt-2">
-          <BreakpointBar breakpoint={sheet.strain?.breakpoint} volumeLoss={beside.volumeLoss} />
-          <p className="mt-1 text-small">
-            {/* of a building that screening lets go the run records none */}
-            {building.result.strain === null
-              ? breakpointWords(sheet.strain?.breakpoint, beside.volumeLoss)
-              : reserveWords(building.result)}
-          </p>
-        </div>
-      </Panel>
-      <SamplesPanel seed={seed} onDraw={draw} {...drawn} />
-    </>
-  );
-}
-
 /** What the figures mean: in plain words, the bracket, the breakpoint, the stage, and the cautions. */
 export function SheetAnswers(props: SheetAnswersProps) {
   const { building, opened } = props;
@@ -109,7 +59,7 @@ export function SheetAnswers(props: SheetAnswersProps) {
         </div>
         <Record {...props} />
       </Panel>
-      <BracketPanels {...props} />
+      <RangePanels {...props} />
       {opened !== null && (
         <Panel title="The wall as a whole" note={`wall ${opened.wall.name}`}>
           <WallFacts opened={opened} />
