@@ -91,8 +91,8 @@ export function sampledRun(
 /**
  * The share of the samples that come into a category.
  *
- * Units: none. Valid: at least one sample. Source: mckay-beckman-conover-1979, for the samples standing for
- * the distribution in equal parts.
+ * Units: none. Valid: at least one sample. Source: [own]; that every sample stands for an equal part is
+ * mckay-beckman-conover-1979.
  */
 export function shareInCategory(
   { counts, strains }: Pick<SampledRun, 'counts' | 'strains'>,
@@ -107,7 +107,7 @@ export function shareInCategory(
     inputs: { n_c, n },
     value: n_c / n,
     unit: '',
-    reference: 'mckay-beckman-conover-1979',
+    reference: 'own',
   });
   return n_c / n;
 }

@@ -54,6 +54,25 @@ describe('the sheet of a building as a file', () => {
     expect(text).toContain('the same figures as recorded, to the last digit');
   });
 
+  test('has a sampled run where its seed is given, the same each time, and none otherwise', async () => {
+    const { agent, address, idOf } = await aTown();
+    const path = `${address}/${idOf('near')}/sheet.pdf`;
+    const asked = textOfPdf(await sheetOf(agent, `${path}?samples=7`));
+    expect(asked).toContain('500 samples, seed 7');
+    expect(textOfPdf(await sheetOf(agent, `${path}?samples=7`))).toBe(asked);
+    expect(textOfPdf(await sheetOf(agent, path))).not.toContain('Sampled run');
+  });
+
+  test.each(['x', '', '-1', '1.5', '4294967296', '99999999999999999999'])(
+    'is refused with the seed “%s”, by name',
+    async (seed) => {
+      const { agent, address, idOf } = await aTown();
+      const answer = await agent.get(`${address}/${idOf('near')}/sheet.pdf?samples=${seed}`);
+      expect(answer.status).toBe(422);
+      expect(answer.body).toMatchObject({ error: { fields: [{ path: 'samples' }] } });
+    },
+  );
+
   test('is short for a building that screening lets go', async () => {
     const { agent, address, idOf } = await aTown();
     const pdf = await sheetOf(agent, `${address}/${idOf('far')}/sheet.pdf`);

@@ -1,4 +1,5 @@
 import { DEFAULT_HOLDS } from '../../../../shared/assessment/holds.ts';
+import { SAMPLES_CAUTION, SAMPLES_PURPOSE } from '../../../../shared/presentation/sample-words.ts';
 import type { MethodPart } from './formula-parts.ts';
 import { formula } from './formula.ts';
 
@@ -56,5 +57,43 @@ const BRACKET: MethodPart = {
   ],
 };
 
+const SAMPLES_PART: MethodPart = {
+  id: 'samples',
+  title: 'Sampled run',
+  words: `On demand on a sheet, never in a run. ${SAMPLES_PURPOSE} A category is settled when the bracket and all samples agree on it.`,
+  formulas: [
+    formula(
+      'q',
+      '(part + rest) / n',
+      'share of an input’s distribution below the value that a sample draws; each of the n parts is drawn once, in an order of its own for each input',
+      '',
+      'mckay-beckman-conover-1979',
+    ),
+    formula(
+      'V_L',
+      'low + sqrt(q * (high - low) * (central - low))',
+      'drawn from a triangular distribution, below its central value; K likewise',
+      'm/m',
+      'own',
+    ),
+    formula(
+      'V_L',
+      'high - sqrt((1 - q) * (high - low) * (high - central))',
+      'the same above its central value',
+      'm/m',
+      'own',
+    ),
+    formula('EG', 'low + q * (high - low)', 'drawn evenly', '', 'common-practice'),
+    formula('share', 'n_c / n', 'share of the samples in a category', '', 'own'),
+  ],
+  limits: [
+    SAMPLES_CAUTION,
+    'That volume loss and K are triangular and E/G even is common practice, no source.',
+    'Each sample is put together from unit fields at several K on either side of the central one, interpolated in 1/K. Tests keep the strain within 1 % of working out the same inputs alone.',
+    'Under a rule by layers the K of all layers are drawn together, each at the same place in its range.',
+    'The same seed draws the same samples everywhere; the next seed is another draw of the same ranges.',
+  ],
+};
+
 /** What is answered, in the order of the work. */
-export const ANSWER_PARTS: readonly MethodPart[] = [STAGES, BRACKET];
+export const ANSWER_PARTS: readonly MethodPart[] = [STAGES, BRACKET, SAMPLES_PART];

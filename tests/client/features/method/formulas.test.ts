@@ -18,6 +18,7 @@ test('the parts stand in the order of the work', () => {
     'rankin',
     'stages',
     'bracket',
+    'samples',
   ]);
 });
 

@@ -1,9 +1,12 @@
 import { describe, expect, test } from 'vitest';
 import { sheetDocument } from '../../../../server/documents/sheet/sheet-document.ts';
 import { percentFigure } from '../../../../server/documents/sheet/figures.ts';
+import { openSamples } from '../../../../shared/assessment/opened-samples.ts';
+import { sheetOfBuilding } from '../../../../shared/assessment/sheet-of-building.ts';
 import { CAUTIONS } from '../../../../shared/cautions.ts';
 import { plainWords } from '../../../../shared/presentation/plain-words.ts';
 import { reserveWords } from '../../../../shared/presentation/result-words.ts';
+import { SAMPLES_CAUTION } from '../../../../shared/presentation/sample-words.ts';
 import {
   bookmarksOfPdf,
   factsOfPdf,
@@ -12,6 +15,7 @@ import {
   textOfPdf,
   wordBoxesOfPdf,
 } from '../../../support/pdf-tools.ts';
+import { aRing } from '../../../support/register-facts.ts';
 import { aSheetMaterial, FAR_AWAY } from '../../../support/sheet-material.ts';
 
 const MATERIAL = aSheetMaterial();
@@ -109,6 +113,50 @@ describe('the sheet of a building as a document', () => {
     for (const { what } of history) expect(text).toContain(what);
     expect(text).not.toContain('Nothing has been decided yet.');
     expect(pages.filter((page) => /What\s+By\s+Detail/.test(page)).length).toBeGreaterThan(1);
+  });
+});
+
+describe('a sheet with a sampled run', () => {
+  const LONG_WALLS = { parts: [[aRing(-5, 2, 10, 30).map(([e, n]): [number, number] => [e, n])]] };
+  const asked = aSheetMaterial(LONG_WALLS, { samples: 3 });
+  const { run, building } = asked;
+  const sheet = sheetOfBuilding(run.design, run.rules, building.facts, new Map());
+  const samples = openSamples(sheet, 3);
+
+  test('has the share in each category, the strains and where they are from, as the screen has them', async () => {
+    const pdf = await sheetDocument(asked);
+    const text = textOfPdf(pdf);
+    expect(bookmarksOfPdf(pdf)).toContain('Sampled run');
+    expect(text).toContain('500 samples, seed 3');
+    expect(text).toContain(SAMPLES_CAUTION);
+    for (const { share, count } of samples?.categories ?? []) {
+      expect(text).toMatch(new RegExp(`${percentFigure(share, 1)} %\\s+${count}\\b`));
+    }
+    for (const { strain } of samples?.strains ?? [])
+      expect(text).toContain(percentFigure(strain, 3));
+    expect(text).toContain('volume loss 1 / 2 / 3 %; K 0.4 / 0.5 / 0.6');
+    expect(text.match(/Sensitive, most of all to|Settled: the category/g)).toHaveLength(1);
+    expectInside(pdf);
+    expectEverySign(text);
+  });
+
+  test('has the working of the sample in the middle, and names the works that it cites', async () => {
+    const text = textOfPdf(await sheetDocument(asked));
+    expect(text).toContain('Working of the sampled run');
+    expect(text).toContain('volume loss drawn for ground 1');
+    expect(text).toContain('Technometrics 21(2)');
+    expect(text.match(/Works cited/g)).toHaveLength(1);
+  });
+
+  test('says nothing of samples where nobody asked', () => {
+    expect(TEXT).not.toContain('Sampled run');
+  });
+
+  test('has them of a building that screening lets go, and none where nothing could be worked out', async () => {
+    const far = textOfPdf(await sheetDocument(aSheetMaterial({ parts: FAR_AWAY }, { samples: 3 })));
+    expect(far).toContain('500 samples, seed 3');
+    const fault = aSheetMaterial({ foundingLevel: -19 }, { samples: 3 });
+    expect(textOfPdf(await sheetDocument(fault))).not.toContain('Sampled run');
   });
 });
 
