@@ -28,8 +28,10 @@ export function seedWords({ n, seed }: Pick<OpenedSamples, 'n' | 'seed'>): strin
   return `${n} samples, seed ${seed}`;
 }
 
+/** A range that stays in one line. */
 function ofRange(range: Range, words: (value: number) => string): string {
-  return isRange(range) ? rangeWords(range, words) : words(range.central);
+  const text = isRange(range) ? rangeWords(range, words) : words(range.central);
+  return text.replaceAll(' ', '\u00a0');
 }
 
 /**
@@ -48,8 +50,8 @@ export function drawnFromWords({
 ][] {
   const plain = (value: number) => figure(value, 3);
   const ofGrounds = grounds.map(({ number, volumeLoss, troughWidth }): [string, string] => {
-    const ofLoss = `volume loss ${ofRange(volumeLoss, percent)} %`;
-    const ofWidth = drawsTroughWidth ? `; K ${ofRange(troughWidth, plain)}` : '';
+    const ofLoss = `volume loss ${ofRange(volumeLoss, percent)}\u00a0%`;
+    const ofWidth = drawsTroughWidth ? `; K\u00a0${ofRange(troughWidth, plain)}` : '';
     return [`Ground ${number}`, `${ofLoss}${ofWidth}`];
   });
   const { low, high } = eOverG;

@@ -134,7 +134,7 @@ describe('a sheet with a sampled run', () => {
     }
     for (const { strain } of samples?.strains ?? [])
       expect(text).toContain(percentFigure(strain, 3));
-    expect(text).toContain('volume loss 1 / 2 / 3 %; K 0.4 / 0.5 / 0.6');
+    expect(text).toMatch(/volume loss 1\s\/\s2\s\/\s3\s%; K\s0\.4\s\/\s0\.5\s\/\s0\.6/);
     expect(text.match(/Sensitive, most of all to|Settled: the category/g)).toHaveLength(1);
     expectInside(pdf);
     expectEverySign(text);
