@@ -21,8 +21,8 @@ const ROUNDS = 3;
 /** What is pressed in turn; each changes what buildings are coloured by. */
 const PRESSED = ['High', 'Low', 'Stage', 'Category', 'Settlement', 'Category'];
 
-/** A frame of the map: when its last command was given, and when all were carried out. */
-type Frame = { readonly told: number; readonly seen: number };
+/** A frame of the map: when its last command was given, when all were carried out, and a sum of its pixels. */
+type Frame = { readonly told: number; readonly seen: number; readonly picture: number };
 
 /** The page with the frames that its map has drawn since somebody last forgot them. */
 type Watched = Window & { drawnFrames: Frame[] };
@@ -33,7 +33,6 @@ function watchFrames(): void {
   watched.drawnFrames = [];
   const { prototype } = WebGL2RenderingContext;
   const draw = Reflect.get(prototype, 'drawElements') as (...command: unknown[]) => void;
-  const pixel = new Uint8Array(4);
   let isNoted = false;
   Reflect.set(
     prototype,
@@ -45,8 +44,14 @@ function watchFrames(): void {
       // runs once the whole frame has been told; to read from it is to wait until it is drawn
       queueMicrotask(() => {
         const told = performance.now();
-        this.readPixels(0, 0, 1, 1, this.RGBA, this.UNSIGNED_BYTE, pixel);
-        watched.drawnFrames.push({ told, seen: performance.now() });
+        const [wide, high] = [this.drawingBufferWidth, this.drawingBufferHeight];
+        const pixels = new Uint8Array(4 * wide * high);
+        this.readPixels(0, 0, wide, high, this.RGBA, this.UNSIGNED_BYTE, pixels);
+        const picture = new Uint32Array(pixels.buffer).reduce(
+          (sum, one) => (31 * sum + one) | 0,
+          0,
+        );
+        watched.drawnFrames.push({ told, seen: performance.now(), picture });
         isNoted = false;
       });
     },
@@ -64,29 +69,40 @@ async function untilStill(page: Page): Promise<void> {
 }
 
 type Recoloured = {
-  /** From the press to the last command, without what the machine took to draw frames on the way. */
+  /** From the press to the last command of the frame that shows it, less what others took to be drawn. */
   readonly told: number;
-  /** From the press to the last frame, drawn. */
+  /** From the press until that frame is drawn. */
   readonly seen: number;
 };
 
-/** Presses one of the ways to colour buildings. */
-async function recoloured(page: Page, name: string): Promise<Recoloured> {
+/** Presses one of the ways to colour buildings: the frames since, with the one before. */
+async function framesAfter(page: Page, name: string): Promise<{ start: number; frames: Frame[] }> {
   const start = await page.evaluate((label) => {
     const buttons = [...document.querySelectorAll<HTMLElement>('button[aria-pressed]')];
     const button = buttons.find(({ textContent }) => textContent === label);
     if (button === undefined) throw new Error(`There is nothing to press that is called ${label}.`);
-    (window as unknown as Watched).drawnFrames = [];
+    const watched = window as unknown as Watched;
+    watched.drawnFrames = watched.drawnFrames.slice(-1);
     const pressed = performance.now();
     button.click();
     return pressed;
   }, name);
-  await page.waitForFunction(() => (window as unknown as Watched).drawnFrames.length > 0);
+  await page.waitForFunction(() => (window as unknown as Watched).drawnFrames.length > 1);
   await untilStill(page);
   const frames = await page.evaluate(() => (window as unknown as Watched).drawnFrames);
-  const last = frames.at(-1) ?? { told: NaN, seen: NaN };
-  const before = frames.slice(0, -1).reduce((sum, { told, seen }) => sum + seen - told, 0);
-  return { told: last.told - start - before, seen: last.seen - start };
+  return { start, frames };
+}
+
+/** What a change of colour takes until nothing that is seen changes any more; null where nothing does. */
+async function recoloured(page: Page, name: string): Promise<Recoloured | null> {
+  const { start, frames } = await framesAfter(page, name);
+  const last = frames.findLastIndex(
+    ({ picture }, k) => k > 0 && picture !== frames[k - 1]?.picture,
+  );
+  const shown = frames[last];
+  if (shown === undefined) return null;
+  const others = frames.slice(1, last).reduce((sum, { told, seen }) => sum + seen - told, 0);
+  return { told: shown.told - start - others, seen: shown.seen - start };
 }
 
 /** Prints what changes of colour take in what the map shows. */
@@ -94,10 +110,13 @@ async function benchView(page: Page, name: string): Promise<void> {
   await untilStill(page);
   const all: Recoloured[] = [];
   for (let round = 0; round < ROUNDS; round += 1) {
-    for (const pressed of PRESSED) all.push(await recoloured(page, pressed));
+    for (const pressed of PRESSED) {
+      const found = await recoloured(page, pressed);
+      if (found !== null) all.push(found);
+    }
   }
   const of = (part: keyof Recoloured) => percentiles(all.map((one) => one[part]));
-  console.log(`map, ${name}: other colours, all told to the machine's drawing ${of('told')}; drawn without a graphics processor ${of('seen')}`); // prettier-ignore
+  console.log(`map, ${name}: ${all.length} times other colours, told to whoever draws ${of('told')}; drawn without a graphics processor ${of('seen')}`); // prettier-ignore
 }
 
 async function openTown(page: Page, scheme: Scheme): Promise<void> {
