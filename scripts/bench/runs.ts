@@ -12,6 +12,7 @@ import { RESULT_COLUMN_NAMES } from '../../shared/schemas/result-columns.ts';
 import { benchDecisions } from './decisions.ts';
 import { benchPrints } from './evidence.ts';
 import { untilLookedAfter } from './looked-after.ts';
+import { benchRecolouring } from './recolouring.ts';
 import { benchPages, type NamedFilter } from './register-pages.ts';
 import { townToRun } from './town-to-run.ts';
 
@@ -74,7 +75,7 @@ async function benchSize(services: Services, count: number): Promise<void> {
 
 /** Prints what runs take from the press of the button to the last building, over the queue. */
 export async function benchRuns(url: string): Promise<void> {
-  const { services, closeServices } = await openServices(
+  const { services, pool, closeServices } = await openServices(
     readEnv({
       NODE_ENV: 'test',
       DATABASE_URL: url,
@@ -90,6 +91,7 @@ export async function benchRuns(url: string): Promise<void> {
     await untilLookedAfter(services.database, 'run_results');
     const bench = { services, register: await registerOf(services, scheme) };
     await benchPages(bench, RESULT_COLUMN_NAMES, FOUND);
+    await benchRecolouring({ services, pool }, scheme);
     await benchDecisions(services, scheme);
   } finally {
     await closeServices();

@@ -1,5 +1,5 @@
 import { millimetresFromMetres } from '../units/millimetres-from-metres.ts';
-import { cornersOnBuildings, type Outline } from './corners-on-buildings.ts';
+import { cornersOnBuildings, type Outline } from './building-outlines.ts';
 import type { Measure, Rectangle, Spot } from './marks.ts';
 import type { Wanted } from './place-labels.ts';
 import { spotsAlong } from './spots-along.ts';

@@ -1,5 +1,5 @@
 import { labelCorners, labelsMeet, type LabelBox } from './label-box.ts';
-import type { Rectangle } from './marks.ts';
+import { isInside, type Rectangle } from './marks.ts';
 
 /**
  * Something that wants a label, with the places where it may stand, the best first.
@@ -49,10 +49,6 @@ function takenOn(boxes: readonly LabelBox[]) {
   return { take, isFree };
 }
 
-function isInside({ left, top, right, bottom }: Rectangle, box: LabelBox): boolean {
-  return labelCorners(box).every(([x, y]) => x >= left && x <= right && y >= top && y <= bottom);
-}
-
 /**
  * Places labels so that none lies over another or over what is taken already, nor outside of the window;
  * what comes first chooses first.
@@ -65,10 +61,11 @@ export function placeLabels<T>(
   wanted: readonly Wanted<T>[],
 ): Placement<T> {
   const sheet = takenOn(taken);
+  const isWithin = (box: LabelBox) => labelCorners(box).every((spot) => isInside(window, spot));
   const placed: { what: T; box: LabelBox }[] = [];
   const listed: T[] = [];
   for (const { what, spots } of wanted) {
-    const box = spots.find((spot) => isInside(window, spot) && sheet.isFree(spot));
+    const box = spots.find((spot) => isWithin(spot) && sheet.isFree(spot));
     if (box === undefined) {
       listed.push(what);
       continue;

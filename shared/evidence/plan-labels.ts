@@ -2,8 +2,9 @@ import { footprintMiddle } from '../building/footprint-middle.ts';
 import type { PlanPoint } from '../geometry/point.ts';
 import type { AlignmentDesign } from '../schemas/alignments.ts';
 import type { PlanContent } from '../schemas/evidence.ts';
-import { buildingsOn } from './buildings-on.ts';
 import { categoryLabels, nameLabels, type LabelledBuilding } from './building-labels.ts';
+import { outlineOf } from './building-outlines.ts';
+import { buildingsOn } from './buildings-on.ts';
 import { chainageLabels, chainageTicks, type ChainageTick } from './chainage-marks.ts';
 import { contourLabels } from './contour-labels.ts';
 import type { GroundFrame } from './ground-frame.ts';
@@ -59,7 +60,7 @@ function tonedOf(
     const tone = toneOfBuilding(building, shows);
     if (tone === null) return [];
     const middle = frame.place(footprintMiddle(building.parts));
-    const rings = building.parts.flatMap((part) => part.map((ring) => ring.map(frame.place)));
+    const rings = outlineOf(frame, building);
     return [{ id: building.id, rings, middle, words: wordsOfTone(tone, building), building }];
   });
 }

@@ -1,10 +1,11 @@
 import type { AlignmentDesign } from '../schemas/alignments.ts';
 import { backgroundMarks } from './background-marks.ts';
+import { outlineOf } from './building-outlines.ts';
 import { gridCrosses, gridTickMarks } from './grid-marks.ts';
 import type { GroundFrame } from './ground-frame.ts';
 import { labelMarks } from './label-marks.ts';
 import { driveMarks, tickMarks } from './line-marks.ts';
-import { lineMark, type Mark, type Spot, type Stroke } from './marks.ts';
+import { lineMark, type Mark, type Stroke } from './marks.ts';
 import type { PlanLabels } from './plan-labels.ts';
 import type { PlanBuilding, PlanMaterial } from './plan-material.ts';
 import type { PlannedPlan } from './planned-sheets.ts';
@@ -15,18 +16,9 @@ const OUTLINE: Stroke = { ink: 'buildingEdge', width: 0.15 };
 /** The line that everything is read by, and the one that is only where settlement is no longer drawn. */
 const [EMPHASISED, LEAST] = [0.01, 0.001];
 
-/**
- * The outline of a building on paper.
- *
- * Units: mm. Valid: any building. Source: [own].
- */
-export function ringsOf({ place }: GroundFrame, { parts }: PlanBuilding): Spot[][] {
-  return parts.flatMap((part) => part.map((ring) => ring.map(place)));
-}
-
 function buildingMark(frame: GroundFrame, building: PlanBuilding, { content }: PlannedPlan): Mark {
   const tone = toneOfBuilding(building, content.shows);
-  const rings = ringsOf(frame, building);
+  const rings = outlineOf(frame, building);
   return tone === null
     ? { kind: 'shape', rings, isClosed: true, fill: 'paper', stroke: OUTLINE }
     : { kind: 'toned', tone, rings };

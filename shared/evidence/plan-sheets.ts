@@ -1,3 +1,4 @@
+import { outlineOf } from './building-outlines.ts';
 import { buildingsOn } from './buildings-on.ts';
 import { stacked } from './column-part.ts';
 import { keyPart } from './key-plan.ts';
@@ -8,7 +9,7 @@ import { lineOnGround } from './line-on-ground.ts';
 import type { Mark, Measure } from './marks.ts';
 import { matchesOnPaper, matchMarks } from './match-marks.ts';
 import { planLabels } from './plan-labels.ts';
-import { groundMarks, ringsOf, signMarks } from './plan-marks.ts';
+import { groundMarks, signMarks } from './plan-marks.ts';
 import type { PlanBuilding, PlanMaterial } from './plan-material.ts';
 import { frameMarks } from './plan-signs.ts';
 import { listParts, mostStrained } from './plan-tables.ts';
@@ -61,9 +62,12 @@ function mapMarks({ planned, plan, material, about, measure }: Drawn): {
   const labels = planLabels(frame, material, { content, design, measure, kept });
   const lines = labelList(frame, labels.listed, figureWords(content));
   const numbers = numberMarks(frame, labels, lines, measure);
-  const outlines = material.buildings.map((building) => ringsOf(frame, building));
   const streets = content.background
-    ? streetNameMarks(frame, material.background, { taken: numbers.taken, outlines, measure })
+    ? streetNameMarks(frame, material.background, {
+        taken: numbers.taken,
+        outlines: material.buildings.map((building) => outlineOf(frame, building)),
+        measure,
+      })
     : [];
   const marks = [
     ...groundMarks(plan, material, { design, labels, streets }),

@@ -1,9 +1,8 @@
-import { boundingBox } from '../geometry/bounding-box.ts';
-import { cornersOnBuildings, type Outline } from './corners-on-buildings.ts';
+import { cornersOnBuildings, type Outline } from './building-outlines.ts';
 import type { GroundFrame } from './ground-frame.ts';
 import type { LabelBox } from './label-box.ts';
 import { wordsIn } from './label-marks.ts';
-import type { Mark, Measure, Rectangle, Spot } from './marks.ts';
+import type { Mark, Measure, Spot } from './marks.ts';
 import { placeLabels, type Wanted } from './place-labels.ts';
 import type { PlanBackground } from './plan-material.ts';
 import { spotsAlong } from './spots-along.ts';
@@ -26,11 +25,6 @@ function stretchesByName(
     found.set(name, [...(found.get(name) ?? []), ...stretches]);
   }
   return found;
-}
-
-function isNear({ left, top, right, bottom }: Rectangle, outline: Outline): boolean {
-  const { west, south, east, north } = boundingBox(outline.flat());
-  return west <= right && east >= left && south <= bottom && north >= top;
 }
 
 /** The places of a name on its stretches, the middle of the one with the most room first. */
@@ -66,7 +60,7 @@ export function streetNameMarks(
     readonly measure: Measure;
   },
 ): Mark[] {
-  const on = cornersOnBuildings(outlines.filter((one) => isNear(frame.window, one)));
+  const on = cornersOnBuildings(outlines);
   const wanted = [...stretchesByName(frame, background)].map(
     ([name, stretches]): Wanted<string> => {
       const spots = spotsOf(stretches, measure(name, SIZE, false) + ROOM);

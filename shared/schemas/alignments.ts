@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { LIMITS } from './limits.ts';
+import { chainageSchema, coordinateSchema } from './places.ts';
 import { writtenLine } from './written.ts';
 
 /**
@@ -16,9 +17,7 @@ export const ALIGNMENT_LIMITS = {
   source: 200,
 } as const;
 
-const coordinate = z.number().min(-LIMITS.coordinate).max(LIMITS.coordinate);
 const level = z.number('Write a number.').min(-LIMITS.level).max(LIMITS.level);
-const chainage = z.number('Write a number.').min(0).max(1_000_000);
 const volumeLoss = z.number('Write a number.').min(0).max(LIMITS.volumeLoss, 'At most 20 %.');
 const troughWidth = z.number('Write a number.').positive().max(LIMITS.troughWidth);
 
@@ -32,8 +31,8 @@ function range(value: z.ZodNumber) {
 
 const interval = z
   .strictObject({
-    from: chainage,
-    to: chainage,
+    from: chainageSchema,
+    to: chainageSchema,
     volumeLoss: range(volumeLoss),
     troughWidth: range(troughWidth),
   })
@@ -55,11 +54,11 @@ const interval = z
 export const alignmentDesignSchema = z
   .strictObject({
     line: z
-      .array(z.tuple([coordinate, coordinate]))
+      .array(z.tuple([coordinateSchema, coordinateSchema]))
       .min(2, 'Draw two points at least.')
       .max(ALIGNMENT_LIMITS.points),
     levels: z
-      .array(z.strictObject({ chainage, level }))
+      .array(z.strictObject({ chainage: chainageSchema, level }))
       .min(1, 'Give the level of the axis at one chainage at least.')
       .max(ALIGNMENT_LIMITS.levels)
       .refine(
@@ -100,8 +99,6 @@ export const alignmentDesignSchema = z
  */
 export type AlignmentDesign = z.infer<typeof alignmentDesignSchema>;
 
-const coordinateGiven = z.number('Write a number.').min(-LIMITS.coordinate).max(LIMITS.coordinate);
-
 /**
  * The shafts of an option: named places beside what is driven, each with where it comes from. No run takes
  * them; rules of letters do.
@@ -112,8 +109,8 @@ export const shaftsSchema = z
   .array(
     z.strictObject({
       name: writtenLine(ALIGNMENT_LIMITS.name).min(1, 'Name the shaft.'),
-      east: coordinateGiven,
-      north: coordinateGiven,
+      east: coordinateSchema,
+      north: coordinateSchema,
       source: writtenLine(ALIGNMENT_LIMITS.source).min(1, 'Say where this comes from.'),
     }),
   )

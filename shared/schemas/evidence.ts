@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { LIMITS } from './limits.ts';
+import { chainageSchema, coordinateSchema } from './places.ts';
 
 /**
  * How much a layout may ask for, and how long its words may be.
@@ -94,8 +94,6 @@ export const planContentSchema = z.strictObject({
  */
 export type PlanContent = z.infer<typeof planContentSchema>;
 
-const coordinate = z.number('Write a number.').min(-LIMITS.coordinate).max(LIMITS.coordinate);
-const chainage = z.number('Write a number.').min(0).max(1_000_000);
 const { least, most } = EVIDENCE_LIMITS.denominator;
 const sheets = {
   paper: z.enum(PAPER_NAMES),
@@ -118,14 +116,14 @@ export const evidenceLayoutSchema = z.discriminatedUnion('kind', [
   z.strictObject({
     kind: z.literal('plan'),
     ...sheets,
-    centre: z.tuple([coordinate, coordinate]),
+    centre: z.tuple([coordinateSchema, coordinateSchema]),
     content: planContentSchema,
   }),
   z.strictObject({
     kind: z.literal('strip'),
     ...sheets,
-    from: chainage,
-    to: chainage.nullable(),
+    from: chainageSchema,
+    to: chainageSchema.nullable(),
     overlap: z.number('Write a number.').min(0).max(1000),
     content: planContentSchema,
   }),
@@ -135,7 +133,7 @@ export const evidenceLayoutSchema = z.discriminatedUnion('kind', [
     exaggeration: z.number('Write a number.').min(1).max(100),
     settlementExaggeration: z.number('Write a number.').min(1).max(EVIDENCE_LIMITS.exaggeration),
     isLong: z.boolean(),
-    across: z.array(chainage).max(EVIDENCE_LIMITS.sections),
+    across: z.array(chainageSchema).max(EVIDENCE_LIMITS.sections),
     halfWidth: z.number('Write a number.').min(5).max(EVIDENCE_LIMITS.halfWidth),
   }),
   z.strictObject({

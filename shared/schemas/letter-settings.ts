@@ -1,6 +1,6 @@
 import { z } from 'zod';
-import { LIMITS } from './limits.ts';
 import { answerDaysSchema, holidaysSchema, repairsSchema, timeZoneSchema } from './owner-terms.ts';
+import { coordinateSchema } from './places.ts';
 import { registerFilterSchema } from './register.ts';
 import { writtenLine } from './written.ts';
 
@@ -43,7 +43,6 @@ export const SETTINGS_LIMITS = {
 
 const days = z.number('Write a number.').int().min(1).max(SETTINGS_LIMITS.days);
 const metres = z.number('Write a number.').positive().max(SETTINGS_LIMITS.near);
-const coordinate = z.number('Write a number.').min(-LIMITS.coordinate).max(LIMITS.coordinate);
 
 /**
  * A place that buildings may be near to, as a work site.
@@ -52,8 +51,8 @@ const coordinate = z.number('Write a number.').min(-LIMITS.coordinate).max(LIMIT
  */
 export const nearPlaceSchema = z.strictObject({
   name: writtenLine(SETTINGS_LIMITS.title).min(1, 'Name the place.'),
-  east: coordinate,
-  north: coordinate,
+  east: coordinateSchema,
+  north: coordinateSchema,
   metres,
 });
 

@@ -2,13 +2,16 @@ import type { MapPort } from '../../src/features/map/controller/map-port.ts';
 
 export type NotingMap = {
   readonly map: MapPort;
+  /** Draws a frame: whoever waited for it is told. */
+  readonly drawFrame: () => void;
   /** What the map was told since it was last asked, in words. */
   readonly told: () => string[];
 };
 
-/** A map that draws nothing, notes what it is told and, like a real one, refuses what cannot be. */
-export function notingMap(): NotingMap {
+/** A map that draws nothing, notes what it is told and, like a real one, refuses what cannot be; `seen` from near. */
+export function notingMap(seen: ReadonlySet<number> | null = null): NotingMap {
   let notes: string[] = [];
+  let waiting: (() => void)[] = [];
   const sources = new Set<string>();
   const layers = new Map<string, string | undefined>();
 
@@ -63,12 +66,21 @@ export function notingMap(): NotingMap {
       need(sources.has(source), `There is no source ${source}.`);
       note('mark', sourceLayer, id, state);
     },
+    buildingsSeenNear: () => seen,
+    afterFrame: (then) => {
+      waiting.push(then);
+    },
     setData: (name, data) => {
       note('draw', name, data.features.length);
     },
   };
   return {
     map,
+    drawFrame: () => {
+      const told = waiting;
+      waiting = [];
+      for (const then of told) then();
+    },
     told: () => {
       const since = notes;
       notes = [];

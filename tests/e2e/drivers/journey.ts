@@ -1,20 +1,8 @@
-import { chromium, type Browser } from 'playwright-core';
+import type { Browser } from 'playwright-core';
 import { expect, test } from 'vitest';
+import { openChromium } from '../../../scripts/open-chromium.ts';
 import { takeDemo } from './take-demo.ts';
 import { newVisitor, type Size, type Visitor } from './visitor.ts';
-
-const FLAGS = [
-  '--no-sandbox',
-  '--disable-dev-shm-usage',
-  '--disable-quic',
-  '--no-first-run',
-  '--disable-background-networking',
-  '--disable-component-update',
-  '--disable-sync',
-  '--use-angle=swiftshader',
-  '--enable-unsafe-swiftshader',
-  '--disable-gpu-rasterization',
-];
 
 type Stage = {
   /** The address of the demo that the file has to itself. */
@@ -36,7 +24,7 @@ export const journey = test.extend<Stage>({
   ],
   browser: [
     async ({}, use) => {
-      const browser = await chromium.launch({ executablePath: '/usr/bin/chromium', args: FLAGS });
+      const browser = await openChromium();
       await use(browser);
       await browser.close();
     },

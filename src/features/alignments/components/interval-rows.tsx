@@ -1,8 +1,8 @@
 import { useFieldArray, useFormState } from 'react-hook-form';
-import { Button } from '../../../components/ui/button.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { blankInterval, type OptionDraft } from '../drafts/option-draft.ts';
 import { FaultLine, RangeFields, type FieldsProps } from './range-fields.tsx';
+import { AddRow, RemoveRow } from './row-buttons.tsx';
 
 type IntervalRowsProps = FieldsProps & { readonly valuesOf: () => OptionDraft };
 
@@ -31,30 +31,25 @@ export function IntervalRows({ control, register, valuesOf }: IntervalRowsProps)
                 {...register(`design.intervals.${k}.${end}`)}
               />
             ))}
-            <Button
-              kind="quiet"
-              aria-label={`Remove interval ${k + 1}`}
+            <RemoveRow
+              named={`interval ${k + 1}`}
               onClick={() => {
                 remove(k);
               }}
-            >
-              ×
-            </Button>
+            />
           </div>
           <RangeFields {...{ control, register }} of="volumeLoss" interval={k} />
           <RangeFields {...{ control, register }} of="troughWidth" interval={k} />
         </div>
       ))}
       <FaultLine>{faults?.message ?? faults?.root?.message}</FaultLine>
-      <Button
-        kind="quiet"
-        className="-ml-1.5"
+      <AddRow
         onClick={() => {
           append(blankInterval(valuesOf().design));
         }}
       >
         Another interval
-      </Button>
+      </AddRow>
     </fieldset>
   );
 }

@@ -1,7 +1,7 @@
 import { useFieldArray, useFormState } from 'react-hook-form';
-import { Button } from '../../../components/ui/button.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { FaultLine, type FieldsProps } from './range-fields.tsx';
+import { AddRow, RemoveRow } from './row-buttons.tsx';
 
 /** Levels of the axis along the line; straight between them. */
 export function LevelRows({ control, register }: FieldsProps) {
@@ -35,28 +35,23 @@ export function LevelRows({ control, register }: FieldsProps) {
             {...register(`design.levels.${k}.level`)}
           />
           {fields.length > 1 && (
-            <Button
-              kind="quiet"
-              aria-label={`Remove level ${k + 1}`}
+            <RemoveRow
+              named={`level ${k + 1}`}
               onClick={() => {
                 remove(k);
               }}
-            >
-              ×
-            </Button>
+            />
           )}
         </div>
       ))}
       <FaultLine>{faults?.message ?? faults?.root?.message}</FaultLine>
-      <Button
-        kind="quiet"
-        className="-ml-1.5"
+      <AddRow
         onClick={() => {
           append({ chainage: '', level: '' });
         }}
       >
         Another level
-      </Button>
+      </AddRow>
     </fieldset>
   );
 }

@@ -2,6 +2,7 @@ import { useFieldArray, useFormState } from 'react-hook-form';
 import { Button } from '../../../components/ui/button.tsx';
 import { Field } from '../../../components/ui/field.tsx';
 import { FaultLine, type FieldsProps } from './range-fields.tsx';
+import { AddRow } from './row-buttons.tsx';
 
 const FIELDS = [
   ['name', 'Name', undefined],
@@ -49,15 +50,13 @@ export function ShaftRows({ control, register }: FieldsProps) {
         </div>
       ))}
       <FaultLine>{faults?.message ?? faults?.root?.message}</FaultLine>
-      <Button
-        kind="quiet"
-        className="-ml-1.5"
+      <AddRow
         onClick={() => {
           append({ name: '', east: '', north: '', source: '' });
         }}
       >
         {fields.length === 0 ? 'Add a shaft' : 'Another shaft'}
-      </Button>
+      </AddRow>
     </fieldset>
   );
 }

@@ -22,5 +22,9 @@ export type MapPort = {
     building: BuildingKey,
     state: Readonly<Record<string, boolean | number | null>>,
   ): unknown;
+  /** Numbers of the buildings that are seen, where they are near; null where more is seen than is soon listed. */
+  buildingsSeenNear(): ReadonlySet<number> | null;
+  /** Tells once, after the next frame; never once the map is gone. */
+  afterFrame(then: () => void): unknown;
   setData(name: string, data: GeoJSON.FeatureCollection): unknown;
 };

@@ -1,10 +1,12 @@
 import { GeoJSONSource, VectorTileSource, type Map as MapLibreMap } from 'maplibre-gl';
+import { buildingsInView } from '../buildings-in-view.ts';
 import type { MissedTiles } from '../missed-tiles.ts';
+import { NEAR_FROM } from '../style/building-layers.ts';
 import type { MapPort } from './map-port.ts';
 
 /** A real map, as the controller asks for it. */
 export function portOfMap(map: MapLibreMap, missed: MissedTiles): MapPort {
-  const plain: Omit<MapPort, 'setTiles' | 'setData'> = map;
+  const plain: Omit<MapPort, 'buildingsSeenNear' | 'afterFrame' | 'setTiles' | 'setData'> = map;
   return {
     addSource: (name, source) => plain.addSource(name, source),
     removeSource: (name) => plain.removeSource(name),
@@ -16,6 +18,8 @@ export function portOfMap(map: MapLibreMap, missed: MissedTiles): MapPort {
     setFilter: (layer, filter) => plain.setFilter(layer, filter),
     setLayerZoomRange: (layer, least, most) => plain.setLayerZoomRange(layer, least, most),
     setFeatureState: (building, state) => plain.setFeatureState(building, state),
+    buildingsSeenNear: () => (map.getZoom() < NEAR_FROM ? null : new Set(buildingsInView(map))),
+    afterFrame: (then) => map.once('render', then),
     setTiles: (name, urls) => {
       const source = map.getSource(name);
       if (!(source instanceof VectorTileSource)) return;

@@ -1,4 +1,8 @@
-import type { LayerSpecification, SymbolLayerSpecification } from 'maplibre-gl';
+import type {
+  ExpressionSpecification,
+  LayerSpecification,
+  SymbolLayerSpecification,
+} from 'maplibre-gl';
 import { HOVERED, SELECTED, solidity } from './building-states.ts';
 import { LABEL_FONTS } from './label-fonts.ts';
 import { MAP_COLOURS } from './map-colours.ts';
@@ -11,6 +15,51 @@ import {
 
 const LABELS = { source: SOURCES.buildings, 'source-layer': LABELS_TILE_LAYER } as const;
 const BUILDINGS = { source: SOURCES.buildings, 'source-layer': BUILDINGS_TILE_LAYER } as const;
+
+/**
+ * From here on edges take a colour and hatches are drawn. Farther off a building is a few pixels, and
+ * what hangs on its state is told to a whole town at once.
+ */
+export const NEAR_FROM = 14;
+
+const MARK_WIDTH: ExpressionSpecification = ['case', SELECTED, 3, HOVERED, 1.5, 0];
+
+function edges(): LayerSpecification[] {
+  const edge = {
+    type: 'line',
+    ...BUILDINGS,
+    layout: { 'line-join': 'round' },
+    paint: {
+      'line-color': MAP_COLOURS.bldgEdge,
+      'line-width': ['interpolate', ['linear'], ['zoom'], 13, 0.25, 16, 0.7, 19, 1.2],
+    },
+  } satisfies Omit<LayerSpecification, 'id'>;
+  return [
+    { id: 'building-far-edges', ...edge, maxzoom: NEAR_FROM },
+    { id: 'building-edges', ...edge, minzoom: NEAR_FROM },
+  ];
+}
+
+function marks(): LayerSpecification[] {
+  const mark = { type: 'line', ...BUILDINGS, layout: { 'line-join': 'miter' } } as const;
+  return [
+    {
+      id: 'building-far-marks',
+      ...mark,
+      maxzoom: NEAR_FROM,
+      paint: { 'line-color': MAP_COLOURS.select, 'line-width': MARK_WIDTH },
+    },
+    {
+      id: 'building-marks',
+      ...mark,
+      minzoom: NEAR_FROM,
+      paint: {
+        'line-color': ['case', SELECTED, MAP_COLOURS.select, MAP_COLOURS.ink],
+        'line-width': MARK_WIDTH,
+      },
+    },
+  ];
+}
 
 /** Buildings with a darker edge; a blue outline round the selected one. */
 export function buildingLayers(): LayerSpecification[] {
@@ -25,28 +74,8 @@ export function buildingLayers(): LayerSpecification[] {
         'fill-antialias': false,
       },
     },
-    {
-      id: 'building-edges',
-      type: 'line',
-      ...BUILDINGS,
-      layout: { 'line-join': 'round' },
-      paint: {
-        'line-color': MAP_COLOURS.bldgEdge,
-        'line-opacity': solidity(1, 1),
-        'line-width': ['interpolate', ['linear'], ['zoom'], 13, 0.25, 16, 0.7, 19, 1.2],
-      },
-    },
-    {
-      id: 'building-marks',
-      type: 'line',
-      ...BUILDINGS,
-      layout: { 'line-join': 'miter' },
-      paint: {
-        'line-color': ['case', SELECTED, MAP_COLOURS.select, MAP_COLOURS.ink],
-        'line-opacity': solidity(1, 1),
-        'line-width': ['case', SELECTED, 3, HOVERED, 1.5, 0],
-      },
-    },
+    ...edges(),
+    ...marks(),
   ];
 }
 

@@ -1,4 +1,8 @@
-import type { ExpressionSpecification, LayerSpecification } from 'maplibre-gl';
+import type {
+  ExpressionSpecification,
+  LayerSpecification,
+  SymbolLayerSpecification,
+} from 'maplibre-gl';
 import type { LineShape, SectionShape } from '../map-line.ts';
 import { LABEL_FONTS } from './label-fonts.ts';
 import { MAP_COLOURS } from './map-colours.ts';
@@ -7,6 +11,7 @@ import { SOURCES } from './source-names.ts';
 const LINE = { source: SOURCES.line } as const;
 const SECTION = { source: SOURCES.section } as const;
 const { ink, bandLine, paperRaised, clay, clayDeep } = MAP_COLOURS;
+type SymbolLayout = NonNullable<SymbolLayerSpecification['layout']>;
 const LEVEL: ExpressionSpecification = ['get', 'level'];
 /** In mm: the outermost contour is dashed, the one that people ask for first is drawn heavier. */
 const [OUTERMOST, EMPHASISED] = [1, 10];
@@ -105,72 +110,49 @@ export function lineLayers(): LayerSpecification[] {
   ];
 }
 
-function shaftNames(): LayerSpecification {
+/** Words of the line: one type for all, with a halo that parts them from what lies under them. */
+function words(
+  { id, of, from = LINE }: { id: string; of: ReturnType<typeof kind>; from?: { source: string } },
+  colour: string,
+  layout: SymbolLayout,
+): SymbolLayerSpecification {
   return {
-    id: 'line-shaft-names',
+    id,
     type: 'symbol',
-    ...LINE,
-    filter: kind('shaft'),
-    layout: {
-      'text-field': ['get', 'text'],
-      'text-font': LABEL_FONTS.semibold,
-      'text-size': 11.5,
-      'text-anchor': 'top',
-      'text-offset': [0, 0.8],
-      'text-padding': 3,
-    },
-    paint: { 'text-color': ink, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
+    ...from,
+    filter: of,
+    layout: { 'text-field': ['get', 'text'], 'text-font': LABEL_FONTS.semibold, ...layout },
+    paint: { 'text-color': colour, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
   };
 }
 
 /** What is written on them; what meets something else is left out. */
 export function lineLabelLayers(): LayerSpecification[] {
   return [
-    {
-      id: 'line-contour-levels',
-      type: 'symbol',
-      ...LINE,
-      filter: kind('contour'),
-      layout: {
-        'symbol-placement': 'line',
-        'symbol-spacing': 300,
-        'text-field': ['case', ['==', LEVEL, EMPHASISED], '10 mm', ['to-string', LEVEL]],
-        'text-font': LABEL_FONTS.semibold,
-        'text-size': 10.5,
-        'text-max-angle': 40,
-        'text-padding': 3,
-      },
-      paint: { 'text-color': bandLine, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
-    },
-    {
-      id: 'line-chainages',
-      type: 'symbol',
-      ...LINE,
-      filter: kind('chainage'),
-      layout: {
-        'text-field': ['get', 'text'],
-        'text-font': LABEL_FONTS.semibold,
-        'text-size': 11,
-        'text-padding': 3,
-      },
-      paint: { 'text-color': ink, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
-    },
-    shaftNames(),
-    {
-      id: 'section-name',
-      type: 'symbol',
-      ...SECTION,
-      filter: kind('name'),
-      layout: {
-        'text-field': ['get', 'text'],
-        'text-font': LABEL_FONTS.semibold,
-        'text-size': 11,
-        'text-anchor': 'left',
-        'text-offset': [0.6, 0],
-        'text-allow-overlap': true,
-        'text-ignore-placement': true,
-      },
-      paint: { 'text-color': clayDeep, 'text-halo-color': paperRaised, 'text-halo-width': 1.8 },
-    },
+    words({ id: 'line-contour-levels', of: kind('contour') }, bandLine, {
+      'symbol-placement': 'line',
+      'symbol-spacing': 300,
+      'text-field': ['case', ['==', LEVEL, EMPHASISED], '10 mm', ['to-string', LEVEL]],
+      'text-size': 10.5,
+      'text-max-angle': 40,
+      'text-padding': 3,
+    }),
+    words({ id: 'line-chainages', of: kind('chainage') }, ink, {
+      'text-size': 11,
+      'text-padding': 3,
+    }),
+    words({ id: 'line-shaft-names', of: kind('shaft') }, ink, {
+      'text-size': 11.5,
+      'text-anchor': 'top',
+      'text-offset': [0, 0.8],
+      'text-padding': 3,
+    }),
+    words({ id: 'section-name', of: kind('name'), from: SECTION }, clayDeep, {
+      'text-size': 11,
+      'text-anchor': 'left',
+      'text-offset': [0.6, 0],
+      'text-allow-overlap': true,
+      'text-ignore-placement': true,
+    }),
   ];
 }

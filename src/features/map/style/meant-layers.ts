@@ -10,7 +10,9 @@ export function meantLayers(layers: readonly LayerSpecification[]): LayerSpecifi
       return { ...layer, paint: { ...layer.paint, 'fill-opacity': solidity(1, 0.3) } };
     }
     if (layer.type === 'line') {
-      return { ...layer, paint: { ...layer.paint, 'line-opacity': solidity(1, 0.35) } };
+      // by a name of its own: elsewhere no line's opacity hangs on the state of its building
+      const paint = { ...layer.paint, 'line-opacity': solidity(1, 0.35) };
+      return { ...layer, id: `meant-${layer.id}`, paint };
     }
     if (layer.type !== 'symbol') return layer;
     return { ...layer, paint: { ...layer.paint, 'text-opacity': NAMED } };

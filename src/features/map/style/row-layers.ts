@@ -80,6 +80,6 @@ export function faintLayers(layers: readonly LayerSpecification[]): LayerSpecifi
       return { ...layer, paint: { ...layer.paint, 'fill-opacity': solidity(0.4, 0.4) } };
     }
     if (layer.type !== 'line') return layer;
-    return { ...layer, paint: { ...layer.paint, 'line-opacity': solidity(0.5, 0.5) } };
+    return { ...layer, paint: { ...layer.paint, 'line-opacity': 0.5 } };
   });
 }

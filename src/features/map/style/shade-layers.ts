@@ -7,6 +7,7 @@ import {
   type Tint,
 } from '../../../../shared/presentation/ground-tints.ts';
 import { FIRST_SHADE } from '../shades.ts';
+import { NEAR_FROM } from './building-layers.ts';
 import { SELECTED } from './building-states.ts';
 import { damageName } from './damage-images.ts';
 import { LABEL_FONTS } from './label-fonts.ts';
@@ -51,17 +52,14 @@ const TINTS = [
   ...shifted(SETTLEMENT_TINTS, FIRST_SHADE.settlement),
 ];
 
-/** Farther off a building is smaller than a tile of its hatch, and a whole town is told its colours at once. */
-const HATCHES_FROM = 14;
-
-/** A pattern ignores the state of a building: one layer a category, seen where its number is. */
+/** A pattern ignores the state of a building: one layer a category, seen where its number is; from near. */
 function hatches(): LayerSpecification[] {
   const hatched = CATEGORIES.filter(({ category }) => DAMAGE[category].hatch !== null);
   return hatched.map(({ category }) => ({
     id: `category-${category}`,
     type: 'fill',
     ...BUILDINGS,
-    minzoom: HATCHES_FROM,
+    minzoom: NEAR_FROM,
     paint: {
       'fill-pattern': damageName(category),
       'fill-opacity': whereShade(FIRST_SHADE.category + category),
@@ -82,8 +80,8 @@ export function withShades(shapes: readonly LayerSpecification[]): LayerSpecific
     }
     if (layer.type !== 'line' || layer.id !== 'building-edges') return [layer];
     const paint = { ...layer.paint, 'line-color': EDGE_COLOUR };
-    const near = { ...layer, id: 'category-edges', minzoom: HATCHES_FROM, paint };
-    return [{ ...layer, maxzoom: HATCHES_FROM }, near];
+    // by another name: what hangs on a building's state does so in every plan, by the name of its layer
+    return [{ ...layer, id: 'category-edges', paint }];
   });
 }
 

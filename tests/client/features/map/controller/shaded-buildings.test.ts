@@ -37,6 +37,37 @@ describe('buildings in colours', () => {
     expect(notes.filter((note) => !note.startsWith('mark'))).toEqual([]);
   });
 
+  it('are told first of those that are seen, and of the others frame by frame', () => {
+    const { map, told, drawFrame } = notingMap(new Set([7, 11_000]));
+    const controller = createMapController(map);
+    const town = (shade: number) => new Map(Array.from({ length: 25_000 }, (_, id) => [id, shade]));
+    controller.show(shown(town(1)));
+    expect(ofShapes(told())).toEqual([
+      'mark buildings 7 {"shade":1}',
+      'mark buildings 11000 {"shade":1}',
+    ]);
+    drawFrame();
+    expect(ofShapes(told())).toHaveLength(10_000);
+    // other colours before all have heard of the first: nobody is told what is no longer so
+    controller.show(shown(town(2)));
+    expect(ofShapes(told())).toHaveLength(2);
+    const later: string[] = [];
+    for (let frame = 0; frame < 4; frame += 1) {
+      drawFrame();
+      later.push(...ofShapes(told()));
+    }
+    expect(later).toHaveLength(24_998);
+    expect(later.every((words) => words.endsWith('{"shade":2}'))).toBe(true);
+  });
+
+  it('are all told at once where they are not seen from near', () => {
+    const { map, told } = notingMap();
+    createMapController(map).show(
+      shown(new Map(Array.from({ length: 12_000 }, (_, id) => [id, 1]))),
+    );
+    expect(ofShapes(told())).toHaveLength(12_000);
+  });
+
   it('keep them while nobody asks, and are told again when their source is another', () => {
     const { map, told } = notingMap();
     const controller = createMapController(map);

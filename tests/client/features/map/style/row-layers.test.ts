@@ -2,7 +2,6 @@
 import { describe, expect, it } from 'vitest';
 import { ROW_OUTCOMES } from '../../../../../shared/schemas/imports.ts';
 import { createMapController } from '../../../../../src/features/map/controller/map-controller.ts';
-import { solidity } from '../../../../../src/features/map/style/building-states.ts';
 import { addHatches, hatchImage } from '../../../../../src/features/map/style/hatch-images.ts';
 import { layersOfPlan } from '../../../../../src/features/map/style/layers-of-plan.ts';
 import { faintLayers, rowLayers } from '../../../../../src/features/map/style/row-layers.ts';
@@ -36,7 +35,7 @@ describe('a plan with rows', () => {
     expect(ids).not.toContain('building-names');
     expect(ids.indexOf('rows')).toBeGreaterThan(ids.indexOf('building-marks'));
     const line = faintLayers(rowLayers()).find(({ type }) => type === 'line');
-    expect(line?.paint).toMatchObject({ 'line-opacity': solidity(0.5, 0.5) });
+    expect(line?.paint).toMatchObject({ 'line-opacity': 0.5 });
   });
 
   it('marks rows and no buildings', () => {

@@ -31,7 +31,7 @@ describe('buildings by category', () => {
     expect(ids.slice(first, first + 7)).toEqual([
       'buildings',
       ...HATCHED.map((category) => `category-${category}`),
-      'building-edges',
+      'building-far-edges',
       'category-edges',
     ]);
   });

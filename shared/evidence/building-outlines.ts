@@ -1,7 +1,9 @@
 import { boundingBox } from '../geometry/bounding-box.ts';
 import { pointInPolygon } from '../geometry/point-in-polygon.ts';
+import type { GroundFrame } from './ground-frame.ts';
 import { labelCorners, type LabelBox } from './label-box.ts';
 import type { Spot } from './marks.ts';
+import type { PlanBuilding } from './plan-material.ts';
 
 /**
  * The outline of a building on paper.
@@ -9,6 +11,15 @@ import type { Spot } from './marks.ts';
  * Units: mm. Valid: rings by the rule of even and odd. Source: [own].
  */
 export type Outline = readonly (readonly Spot[])[];
+
+/**
+ * Lays a building on paper.
+ *
+ * Units: mm. Valid: any building. Source: [own].
+ */
+export function outlineOf({ place }: GroundFrame, { parts }: Pick<PlanBuilding, 'parts'>): Outline {
+  return parts.flatMap((part) => part.map((ring) => ring.map(place)));
+}
 
 /**
  * Tells how many corners of a label, and its middle, lie on buildings.
