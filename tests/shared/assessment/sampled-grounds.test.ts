@@ -21,7 +21,13 @@ describe('sampledGrounds', () => {
   it('puts all lengths with the same ranges together, whichever drive they are of', () => {
     expect(sampledGrounds(aModel(TWIN))).toEqual([
       { number: 1, volumeLoss: LOSS, troughWidth: K, lossInput: 1, widthInput: 2 },
-      { number: 2, volumeLoss: { ...LOSS, high: 0.03 }, troughWidth: K, lossInput: 3, widthInput: 4 },
+      {
+        number: 2,
+        volumeLoss: { ...LOSS, high: 0.03 },
+        troughWidth: K,
+        lossInput: 3,
+        widthInput: 4,
+      },
     ]);
   });
 
