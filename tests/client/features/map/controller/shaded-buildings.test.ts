@@ -60,12 +60,22 @@ describe('buildings in colours', () => {
     expect(later.every((words) => words.endsWith('{"shade":2}'))).toBe(true);
   });
 
-  it('are all told at once where they are not seen from near', () => {
-    const { map, told } = notingMap();
+  it('are all told at once where they are seen from far, and what is written on them after it', () => {
+    const { map, told, drawFrame } = notingMap();
     createMapController(map).show(
       shown(new Map(Array.from({ length: 12_000 }, (_, id) => [id, 1]))),
     );
-    expect(ofShapes(told())).toHaveLength(12_000);
+    const shapes = told().filter((words) => words.startsWith('mark'));
+    expect(shapes).toHaveLength(12_000);
+    expect(ofShapes(shapes)).toHaveLength(12_000);
+    drawFrame();
+    const labels = told();
+    expect(labels).toHaveLength(10_000);
+    expect(ofShapes(labels)).toEqual([]);
+    drawFrame();
+    expect(told()).toHaveLength(2_000);
+    drawFrame();
+    expect(told()).toEqual([]);
   });
 
   it('keep them while nobody asks, and are told again when their source is another', () => {
