@@ -60,9 +60,9 @@ export function fieldsOverGrounds(
     if (group === undefined) return { ground, halves: [] };
     const known = new Map<number, Profile>();
     const profileAt = (width: number): Profile => {
-      const position = positionOf(ground.troughWidth, width);
       const found = known.get(width);
       if (found !== undefined) return found;
+      const position = positionOf(ground.troughWidth, width);
       const pack = levelField(model, site, { position, faces, only }).packs[group];
       const profile = profileOfPack(pack ?? NO_PIECES, wall, nodes);
       known.set(width, profile);

@@ -2,7 +2,7 @@ import { CATEGORIES, type Category } from '../damage/categories.ts';
 import { usesTroughWidthParameter } from '../ground/trough-width-rule.ts';
 import type { Range } from '../numerics/range.ts';
 import type { WorkingLine } from '../working.ts';
-import { isOfGround, sampledGrounds, type SampledGround } from './sampled-grounds.ts';
+import type { SampledGround } from './sampled-grounds.ts';
 import {
   mostGoverning,
   sampleAtShare,
@@ -12,7 +12,6 @@ import {
 } from './sampled-run.ts';
 import { sensitivityOf, type Sensitivity } from './sensitivity.ts';
 import type { BuildingSheet } from './sheet-of-building.ts';
-import { siteOfWall } from './wall-field.ts';
 import { workingOfSample } from './working-of-sample.ts';
 import type { WorkingSection } from './working-of-wall.ts';
 
@@ -66,6 +65,15 @@ function categoriesOf(run: SampledRun): OpenedSamples['categories'] {
   });
 }
 
+/** Those that reach a wall of the building. */
+function groundsOf({ fields }: SampledRun): SampledGround[] {
+  const reaching = fields
+    .flatMap(({ grounds }) => grounds)
+    .filter(({ halves }) => halves.length > 0);
+  const grounds = new Set(reaching.map(({ ground }) => ground));
+  return [...grounds].sort((a, b) => a.number - b.number);
+}
+
 /**
  * Draws the samples of a building's sheet and opens them up. Nothing that a run records changes by it.
  *
@@ -78,16 +86,11 @@ export function openSamples({ inputs, strain }: BuildingSheet, seed: number): Op
   const { model, rules } = inputs;
   const walls = strain.walls.map(({ wall }) => wall);
   const run = sampledRun(model, walls, rules, [], seed);
-  const reaching = walls.flatMap((wall) =>
-    siteOfWall(model, wall).blocks.flatMap(({ pieces }) => pieces),
-  );
   const governing = mostGoverning(run);
   return {
     seed,
     n: run.strains.length,
-    grounds: sampledGrounds(model).filter((ground) =>
-      reaching.some((piece) => isOfGround(model, ground, piece)),
-    ),
+    grounds: groundsOf(run),
     drawsTroughWidth: rules.depth.kind === 'layered' || usesTroughWidthParameter(rules.depth),
     eOverG: first.wall.eOverG,
     categories: categoriesOf(run),
@@ -96,7 +99,7 @@ export function openSamples({ inputs, strain }: BuildingSheet, seed: number): Op
       return {
         share,
         strain: run.strains[sample] ?? 0,
-        working: workingOfSample(model, walls, rules, [], run, sample),
+        working: workingOfSample(model, rules, [], run, sample),
       };
     }),
     governing:

@@ -20,13 +20,15 @@ export const SAMPLES = 500;
 
 /**
  * What a sampled run finds of a building: of each sample the strain and which wall governs, and how many
- * samples come into each category.
+ * samples come into each category; with what it drew and the fields of each wall, which its working opens.
  *
  * Units: strains m/m; worst are indices of the walls, −1 where none is strained. Valid: made by `sampledRun`;
  * the counts, from category 0 up, sum to the number of samples. Source: [own].
  */
 export type SampledRun = {
-  readonly seed: number;
+  readonly shares: readonly Float64Array[];
+  readonly samples: readonly DrawnInputs[];
+  readonly fields: readonly FieldsOverGrounds[];
   readonly strains: readonly number[];
   readonly counts: readonly number[];
   readonly worst: readonly number[];
@@ -69,19 +71,22 @@ export function sampledRun(
   n = SAMPLES,
 ): SampledRun {
   const grounds = sampledGrounds(model);
-  const samples = drawnInputs(grounds, drawnShares(grounds, n, seed));
+  const shares = drawnShares(grounds, n, seed);
+  const samples = drawnInputs(grounds, shares);
+  const fields = walls.map((wall) => fieldsOverGrounds(model, wall, grounds, rules.cutOff, faces));
   const strains = samples.map(() => 0);
   const worst = samples.map(() => -1);
-  for (const [index, wall] of walls.entries()) {
-    const fields = fieldsOverGrounds(model, wall, grounds, rules.cutOff, faces);
+  for (const [index, ofWall] of fields.entries()) {
     for (const [k, drawn] of samples.entries()) {
-      const strain = sampledStrain(model, fields, drawn, rules, faces);
+      const strain = sampledStrain(model, ofWall, drawn, rules, faces);
       if (strain > (strains[k] ?? 0)) [strains[k], worst[k]] = [strain, index];
     }
   }
   const categories = strains.map((strain) => categoryOfStrain(strain));
   return {
-    seed,
+    shares,
+    samples,
+    fields,
     strains,
     counts: CATEGORIES.map(({ category }) => categories.filter((one) => one === category).length),
     worst,

@@ -1,5 +1,4 @@
 import { strainedZone } from '../building/strained-zone.ts';
-import type { Wall } from '../building/wall.ts';
 import { zoneShape } from '../building/zone-shape.ts';
 import { categoryOfStrain } from '../damage/category-of-strain.ts';
 import type { GroundModel } from '../ground/ground-model.ts';
@@ -7,10 +6,10 @@ import type { GroundState } from '../ground/level-field.ts';
 import { at } from '../numerics/at.ts';
 import { isRange } from '../numerics/range.ts';
 import type { Recorder, WorkingLine } from '../working.ts';
-import { drawnEOverG, drawnGround, drawnInputs, drawnShares } from './drawn-inputs.ts';
-import { fieldsOverGrounds } from './fields-over-grounds.ts';
+import { drawnEOverG, drawnGround, type DrawnInputs } from './drawn-inputs.ts';
+import type { FieldsOverGrounds } from './fields-over-grounds.ts';
 import type { AssessmentRules } from './rules.ts';
-import { sampledGrounds, type SampledGround } from './sampled-grounds.ts';
+import type { SampledGround } from './sampled-grounds.ts';
 import { recordInterpolation, sampledCutOff, sampledProfile } from './sampled-profile.ts';
 import type { SampledRun } from './sampled-run.ts';
 import { shapesOfWall } from './shapes-of-wall.ts';
@@ -61,8 +60,8 @@ function linesOfGround(
 
 function linesOfWall(
   model: GroundModel,
-  fields: ReturnType<typeof fieldsOverGrounds>,
-  drawn: ReturnType<typeof drawnInputs>[number],
+  fields: FieldsOverGrounds,
+  drawn: DrawnInputs,
   rules: AssessmentRules,
   faces: GroundState['faces'],
   n: number,
@@ -96,25 +95,19 @@ function linesOfWall(
  * The working of one sample: what is drawn of each ground that reaches its governing wall and of E/G, how
  * the unit fields are put together, and the strain of the zone that governs.
  *
- * Units: SI. Valid: `run` of the same model, walls, rules and faces; k an index of its samples; nothing where
- * no wall is strained in it. Source: each line names its own.
+ * Units: SI. Valid: `run` of the same model, rules and faces; k an index of its samples; nothing where no
+ * wall is strained in it. Source: each line names its own.
  */
 export function workingOfSample(
   model: GroundModel,
-  walls: readonly Wall[],
   rules: AssessmentRules,
   faces: GroundState['faces'],
-  run: SampledRun,
+  { shares, samples, fields: ofWalls, worst }: SampledRun,
   k: number,
 ): WorkingSection[] {
-  const wall = walls[run.worst[k] ?? -1];
-  if (wall === undefined) return [];
-  const n = run.strains.length;
-  const grounds = sampledGrounds(model);
-  const shares = drawnShares(grounds, n, run.seed);
-  const drawn = drawnInputs(grounds, shares)[k];
-  if (drawn === undefined) return [];
-  const fields = fieldsOverGrounds(model, wall, grounds, rules.cutOff, faces);
+  const [fields, drawn] = [ofWalls[worst[k] ?? -1], samples[k]];
+  if (fields === undefined || drawn === undefined) return [];
+  const n = samples.length;
   const ofGrounds = fields.grounds.flatMap((one) => {
     const { number } = one.ground;
     const ofGround = drawn.grounds[number - 1];
@@ -126,5 +119,5 @@ export function workingOfSample(
     return [{ title: `Sample ${k + 1}, ground ${number}`, lines }];
   });
   const lines = linesOfWall(model, fields, drawn, rules, faces, n);
-  return [...ofGrounds, { title: `Sample ${k + 1}, wall ${wall.name}`, lines }];
+  return [...ofGrounds, { title: `Sample ${k + 1}, wall ${fields.wall.name}`, lines }];
 }

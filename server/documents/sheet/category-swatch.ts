@@ -1,9 +1,18 @@
 import type { Category } from '../../../shared/damage/categories.ts';
 import { DAMAGE } from '../../../shared/presentation/damage-style.ts';
 import type { Block } from '../pdf/block.ts';
-import { fillCategory } from '../pdf/hatch.ts';
+import { fillCategory, type Bounds } from '../pdf/hatch.ts';
 import type { Paper } from '../pdf/paper.ts';
 import { pixelBlock } from '../pdf/pixels.ts';
+
+/** A category's hatch with its edge. */
+export function drawSwatch(paper: Paper, category: Category, bounds: Bounds): void {
+  const { doc } = paper;
+  const { left, top, right, bottom } = bounds;
+  const [width, height] = [right - left, bottom - top];
+  fillCategory(paper, category, () => doc.rect(left, top, width, height), bounds);
+  doc.lineWidth(1).strokeColor(DAMAGE[category].edge).rect(left, top, width, height).stroke();
+}
 
 /** A piece of a category's hatch with its edge, so many pixels wide and high. */
 export function categorySwatch(
@@ -11,10 +20,7 @@ export function categorySwatch(
   category: Category,
   { width, height }: { readonly width: number; readonly height: number },
 ): Block {
-  const { doc } = paper;
   return pixelBlock(paper, height, () => {
-    const bounds = { left: 0, top: 0, right: width, bottom: height };
-    fillCategory(paper, category, () => doc.rect(0, 0, width, height), bounds);
-    doc.lineWidth(1).strokeColor(DAMAGE[category].edge).rect(0, 0, width, height).stroke();
+    drawSwatch(paper, category, { left: 0, top: 0, right: width, bottom: height });
   });
 }

@@ -1,6 +1,5 @@
 import type { OpenedSamples } from '../../../shared/assessment/opened-samples.ts';
 import { categoryLabel, settledWords } from '../../../shared/presentation/bracket-words.ts';
-import { DAMAGE } from '../../../shared/presentation/damage-style.ts';
 import {
   drawnFromWords,
   governingWords,
@@ -10,13 +9,13 @@ import {
   shareWords,
 } from '../../../shared/presentation/sample-words.ts';
 import { beside, gap, stack, type Block } from '../pdf/block.ts';
-import { fillCategory } from '../pdf/hatch.ts';
 import { INKS } from '../pdf/inks.ts';
 import { label } from '../pdf/label.ts';
 import type { Paper } from '../pdf/paper.ts';
 import { pixelBlock, POINTS_PER_PIXEL } from '../pdf/pixels.ts';
 import { tableBlock } from '../pdf/table.ts';
 import { wordsBlock } from '../pdf/words-block.ts';
+import { drawSwatch } from './category-swatch.ts';
 import { percentFigure } from './figures.ts';
 import type { SheetParts } from './sheet-parts.ts';
 import { SHEET_WIDTH } from './sheet-width.ts';
@@ -30,19 +29,15 @@ const ASIDE = SHEET_WIDTH - (SHARES + BETWEEN) * POINTS_PER_PIXEL;
 
 /** Each category with a bar as long as its share of the samples, in its hatch. */
 function sharesBlock(paper: Paper, { categories }: OpenedSamples): Block {
-  const { doc } = paper;
   return pixelBlock(paper, categories.length * ROW, () => {
     for (const [row, { category, count, share }] of categories.entries()) {
       const [top, foot] = [row * ROW + 5, row * ROW + 17];
-      const hatched = (left: number, right: number) => {
-        const bounds = { left, top, right, bottom: foot };
-        fillCategory(paper, category, () => doc.rect(left, top, right - left, foot - top), bounds);
-        doc.lineWidth(1).strokeColor(DAMAGE[category].edge);
-        doc.rect(left, top, right - left, foot - top).stroke();
-      };
-      hatched(0.5, SWATCH);
+      drawSwatch(paper, category, { left: 0.5, top, right: SWATCH, bottom: foot });
       label(paper, categoryLabel(category), SWATCH + 7, foot - 1, { size: 11, weight: 'strong' });
-      if (count > 0) hatched(BAR_FROM, BAR_FROM + Math.max(2, share * (BAR_TO - BAR_FROM)));
+      if (count > 0) {
+        const right = BAR_FROM + Math.max(2, share * (BAR_TO - BAR_FROM));
+        drawSwatch(paper, category, { left: BAR_FROM, top, right, bottom: foot });
+      }
       label(paper, `${percentFigure(share, 1)} %`, 272, foot - 1, { size: 11, anchor: 'end' });
       label(paper, `${count}`, SHARES - 8, foot - 1, { size: 10, ink: INKS.second, anchor: 'end' });
     }

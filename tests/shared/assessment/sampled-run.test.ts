@@ -133,7 +133,7 @@ describe('settled or sensitive', () => {
 describe('workingOfSample', () => {
   const sampled = run(1);
   const middle = sampleAtShare(sampled, 0.5);
-  const sections = workingOfSample(MODEL, WALLS, RULES, [], sampled, middle);
+  const sections = workingOfSample(MODEL, RULES, [], sampled, middle);
   const lines = sections.flatMap((section) => section.lines);
 
   it('says what was drawn of each ground and how the wall is strained by it', () => {
@@ -170,13 +170,13 @@ describe('workingOfSample', () => {
 
   it('is short where nothing has a range, and empty where nothing is strained', () => {
     const certainRun = sampledRun(aModel(), [aWall()], RULES, [], 1, 3);
-    const symbols = workingOfSample(aModel(), [aWall()], RULES, [], certainRun, 0)
+    const symbols = workingOfSample(aModel(), RULES, [], certainRun, 0)
       .flatMap((section) => section.lines)
       .map(({ symbol }) => symbol);
     expect(symbols.slice(0, 2)).toEqual(['r', 'w_1']);
     expect(symbols).not.toContain('EG');
     const model = aModel([aDrive({ volumeLoss: certain(0) })]);
     const still = sampledRun(model, [aWall()], RULES, [], 1, 3);
-    expect(workingOfSample(model, [aWall()], RULES, [], still, 0)).toEqual([]);
+    expect(workingOfSample(model, RULES, [], still, 0)).toEqual([]);
   });
 });

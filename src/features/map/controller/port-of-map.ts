@@ -1,5 +1,5 @@
 import { GeoJSONSource, VectorTileSource, type Map as MapLibreMap } from 'maplibre-gl';
-import { buildingsInView } from '../buildings-in-view.ts';
+import { idsInView } from '../buildings-in-view.ts';
 import type { MissedTiles } from '../missed-tiles.ts';
 import { NEAR_FROM } from '../style/building-layers.ts';
 import type { MapPort } from './map-port.ts';
@@ -18,7 +18,7 @@ export function portOfMap(map: MapLibreMap, missed: MissedTiles): MapPort {
     setFilter: (layer, filter) => plain.setFilter(layer, filter),
     setLayerZoomRange: (layer, least, most) => plain.setLayerZoomRange(layer, least, most),
     setFeatureState: (building, state) => plain.setFeatureState(building, state),
-    buildingsSeenNear: () => (map.getZoom() < NEAR_FROM ? null : new Set(buildingsInView(map))),
+    buildingsSeenNear: () => (map.getZoom() < NEAR_FROM ? null : idsInView(map)),
     afterFrame: (then) => map.once('render', then),
     setTiles: (name, urls) => {
       const source = map.getSource(name);
