@@ -15,6 +15,10 @@ export default defineConfig({
     sourcemap: true,
     // the map library is one part of 1.2 MB, fetched when a plan is first opened
     chunkSizeWarningLimit: 1300,
+    // what many pages share comes as one part: each of a hundred small ones would be a request
+    rolldownOptions: {
+      output: { codeSplitting: { groups: [{ name: 'common', minShareCount: 6 }] } },
+    },
   },
   server: { port: 4601, proxy: { '/api': server, '/tiles': server } },
 });

@@ -70,6 +70,7 @@ export default defineConfig({
         test: {
           name: 'e2e',
           include: ['tests/e2e/**/*.test.ts'],
+          isolate: false,
           globalSetup: ['tests/support/browser-setup.ts'],
           maxWorkers: Math.min(2, availableParallelism()),
           sequence: { groupOrder: 1 },

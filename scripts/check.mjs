@@ -1,5 +1,5 @@
 import { installPackages, requireNode } from './packages.mjs';
-import { ARCHITECTURE, FORMAT, QUICK_LINT, run, TYPES, UNUSED } from './tools.mjs';
+import { ARCHITECTURE, FORMAT, LINT, run, TYPES, UNUSED } from './tools.mjs';
 
 /** Two processors; the longest run goes first. */
 const AT_ONCE = 2;
@@ -7,7 +7,7 @@ const AT_ONCE = 2;
 requireNode();
 installPackages();
 const start = performance.now();
-const waiting = [QUICK_LINT, ARCHITECTURE, TYPES, FORMAT, UNUSED];
+const waiting = [LINT, ARCHITECTURE, TYPES, FORMAT, UNUSED];
 const failed = [];
 
 async function work() {

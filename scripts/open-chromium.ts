@@ -13,7 +13,10 @@ const FLAGS = [
   '--disable-gpu-rasterization',
 ];
 
-/** Opens the Chromium of this machine, which asks for nothing outside and draws without a graphics processor. */
+/**
+ * Opens the Chromium of this machine that has no windows of its own. It asks for nothing outside and draws
+ * without a graphics processor.
+ */
 export function openChromium(): Promise<Browser> {
-  return chromium.launch({ executablePath: '/usr/bin/chromium', args: FLAGS });
+  return chromium.launch({ executablePath: '/usr/bin/chromium-headless-shell', args: FLAGS });
 }

@@ -7,7 +7,10 @@ function has(program) {
 }
 
 export const POSTGRESQL = { name: 'postgresql', isThere: () => postgresPrograms() !== undefined };
-export const CHROMIUM = { name: 'chromium', isThere: has('chromium') };
+export const CHROMIUM = {
+  name: 'chromium-headless-shell',
+  isThere: has('chromium-headless-shell'),
+};
 export const POPPLER = { name: 'poppler-utils', isThere: has('pdftotext') };
 
 const APT = [

@@ -7,7 +7,7 @@ import {
   runsSchema,
   type RunDetail,
 } from '../../../shared/schemas/runs.ts';
-import { sessionSchema } from '../../../shared/schemas/session.ts';
+import { answered, sent } from './api.ts';
 import { mapIsStill } from './plan.ts';
 import type { Visitor } from './visitor.ts';
 
@@ -48,24 +48,13 @@ export async function countsOfShownRun({ page }: Visitor, scheme: string) {
   return withCounts.parse(await detail.json()).counts;
 }
 
-/** What the server answers to a question of the application, by its path after `/api`. */
-export async function answered({ page }: Visitor, path: string): Promise<unknown> {
-  const answer = await page.request.get(`/api${path}`, { timeout: PATIENCE_MS });
-  if (!answer.ok()) throw new Error(`${path} was not answered: ${await answer.text()}`);
-  return answer.json();
-}
-
 /** Runs an option as its page would, with no map on the screen, and waits until the run has ended. */
 async function runBeside(visitor: Visitor, scheme: string, option: string): Promise<string> {
   const { page } = visitor;
-  const { csrfToken } = sessionSchema.parse(await answered(visitor, '/session'));
   const options = alignmentsSchema.parse(await answered(visitor, `${scheme}/alignments`));
   const chosen = options.find(({ name }) => name === option);
-  const started = await page.request.post(`/api${scheme}/runs`, {
-    headers: { 'X-CSRF-Token': csrfToken },
-    data: { alignmentId: chosen?.id, alignmentVersion: chosen?.version },
-  });
-  const { id } = runSchema.parse(await started.json());
+  const started = { alignmentId: chosen?.id, alignmentVersion: chosen?.version };
+  const { id } = runSchema.parse(await sent(visitor, `${scheme}/runs`, started));
   // it is told how far the run is until it has ended
   await page.request.get(`/api${scheme}/runs/${id}/progress`, { timeout: PATIENCE_MS });
   return id;

@@ -5,8 +5,7 @@ import {
   MOST_REGISTER_ROWS,
   type RegisterRow,
 } from '../../../shared/schemas/register.ts';
-import { sessionSchema } from '../../../shared/schemas/session.ts';
-import { answered } from './runs.ts';
+import { answered, sent } from './api.ts';
 import type { Visitor } from './visitor.ts';
 
 const PATIENCE = { timeout: 90_000, interval: 200 };
@@ -17,15 +16,11 @@ export async function printOf(
   { scheme, run }: { readonly scheme: string; readonly run: string },
   layout: EvidenceLayout,
 ): Promise<Buffer> {
-  const { request } = visitor.page;
-  const { csrfToken } = sessionSchema.parse(await answered(visitor, '/session'));
-  const headers = { 'X-CSRF-Token': csrfToken };
-  const data = { name: 'Schedule', layout };
-  const asked = await request.post(`/api${run}/prints`, { headers, data });
-  const print = `${scheme}/prints/${printSchema.parse(await asked.json()).id}`;
+  const asked = await sent(visitor, `${run}/prints`, { name: 'Schedule', layout });
+  const print = `${scheme}/prints/${printSchema.parse(asked).id}`;
   const state = async () => printSchema.parse(await answered(visitor, print)).state;
   await expect.poll(state, PATIENCE).toBe('done');
-  return (await request.get(`/api${print}/file`)).body();
+  return (await visitor.page.request.get(`/api${print}/file`)).body();
 }
 
 /** All rows of the register by reference. */

@@ -1,7 +1,7 @@
 import { assessCaseSchema, type AssessCase } from '../../../shared/schemas/assess-case.ts';
 import { runBuildingSchema, type RunBuilding } from '../../../shared/schemas/runs.ts';
 import { runMapSchema, type RunMap } from '../../../shared/schemas/run-map.ts';
-import { answered } from './runs.ts';
+import { answered } from './api.ts';
 import type { Visitor } from './visitor.ts';
 
 /** Waits until the sheet of a building is shown. */

@@ -39,6 +39,8 @@ export async function newVisitor(browser: Browser, baseURL: string, size = DESK)
     viewport: size,
     locale: 'en-GB',
     reducedMotion: 'reduce',
+    // what is drawn by software takes time by its pixels; pages are laid out as at the full number
+    deviceScaleFactor: 0.5,
   });
   context.setDefaultTimeout(PATIENCE_MS);
   const faults: string[] = [];

@@ -1,11 +1,11 @@
 import { expect } from 'vitest';
 import { z } from 'zod';
-import { sessionSchema } from '../../../shared/schemas/session.ts';
+import { answered, sent } from '../drivers/api.ts';
 import { axeFaultsAtBothSizes } from '../drivers/axe.ts';
 import { journey } from '../drivers/journey.ts';
 import { checkAndSend, prepareLetters } from '../drivers/letters.ts';
 import { readLetterTo } from '../drivers/mailbox.ts';
-import { answered, runOf } from '../drivers/runs.ts';
+import { runOf } from '../drivers/runs.ts';
 import { addressOf } from '../drivers/schemes.ts';
 import { signInAs } from '../drivers/sign-in.ts';
 import { PHONE, type Visitor } from '../drivers/visitor.ts';
@@ -24,23 +24,18 @@ const parties = z.object({
 
 /** Offers the demo's owner a day for the survey, as the page of appointments does. */
 async function offerSurvey(visitor: Visitor, scheme: string): Promise<void> {
-  const { csrfToken } = sessionSchema.parse(await answered(visitor, '/session'));
   const found = parties.parse(await answered(visitor, `${scheme}/parties?search=${OWNER}`));
   const [party] = found.parties;
-  const offered = await visitor.page.request.post(`/api${scheme}/appointments`, {
-    headers: { 'X-CSRF-Token': csrfToken },
-    data: {
-      id: crypto.randomUUID(),
-      buildingId: party?.interests[0]?.building.id,
-      partyId: party?.id,
-      purpose: 'condition survey',
-      startsAt: new Date(Date.now() + 10 * 24 * 60 * 60 * 1000).toISOString(),
-      minutes: 60,
-      place: 'At the front door',
-      isFreeDayMeant: true,
-    },
+  await sent(visitor, `${scheme}/appointments`, {
+    id: crypto.randomUUID(),
+    buildingId: party?.interests[0]?.building.id,
+    partyId: party?.id,
+    purpose: 'condition survey',
+    startsAt: new Date(Date.now() + 10 * 24 * 60 * 60 * 1000).toISOString(),
+    minutes: 60,
+    place: 'At the front door',
+    isFreeDayMeant: true,
   });
-  expect(offered.status()).toBe(201);
 }
 
 journey(

@@ -1,8 +1,9 @@
 import { expect } from 'vitest';
 import { visitsSchema } from '../../../shared/schemas/visits.ts';
 import { axeFaultsAtBothSizes } from '../drivers/axe.ts';
+import { answered } from '../drivers/api.ts';
 import { journey } from '../drivers/journey.ts';
-import { answered, runOf } from '../drivers/runs.ts';
+import { runOf } from '../drivers/runs.ts';
 import { addressOf } from '../drivers/schemes.ts';
 import { signInAs } from '../drivers/sign-in.ts';
 import { PHONE } from '../drivers/visitor.ts';
