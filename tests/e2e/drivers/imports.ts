@@ -1,5 +1,5 @@
 import { registerPageSchema } from '../../../shared/schemas/register.ts';
-import { sessionSchema } from '../../../shared/schemas/session.ts';
+import { answered, sent } from './api.ts';
 import type { Visitor } from './visitor.ts';
 
 /** The server reads and checks a file beside what else it does. */
@@ -77,19 +77,14 @@ export async function bringIn({ page }: Visitor): Promise<string> {
 
 /** Changes a building's values as somebody does who works beside. */
 export async function changeByHand(
-  { page }: Visitor,
+  visitor: Visitor,
   scheme: string,
   reference: string,
-  values: Readonly<Record<string, string | number>>,
+  attributes: Readonly<Record<string, string | number>>,
 ): Promise<void> {
-  const session = sessionSchema.parse(await (await page.request.get('/api/session')).json());
   const filter = encodeURIComponent(JSON.stringify({ search: reference }));
-  const found = await page.request.get(`/api${scheme}/register?filter=${filter}`);
-  const { rows } = registerPageSchema.parse(await found.json());
-  const building = rows.find((row) => row.reference === reference);
-  const answer = await page.request.patch(`/api${scheme}/buildings/${building?.id ?? 0}`, {
-    headers: { 'X-CSRF-Token': session.csrfToken },
-    data: { version: building?.version, attributes: values },
-  });
-  if (!answer.ok()) throw new Error(`The building was not changed: ${await answer.text()}`);
+  const found = await answered(visitor, `${scheme}/register?filter=${filter}`);
+  const building = registerPageSchema.parse(found).rows.find((row) => row.reference === reference);
+  const change = { version: building?.version, attributes };
+  await sent(visitor, `${scheme}/buildings/${building?.id ?? 0}`, change, 'PATCH');
 }

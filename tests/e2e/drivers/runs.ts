@@ -7,12 +7,9 @@ import {
   runsSchema,
   type RunDetail,
 } from '../../../shared/schemas/runs.ts';
-import { answered, sent } from './api.ts';
+import { answered, PATIENCE_MS, sent } from './api.ts';
 import { mapIsStill } from './plan.ts';
 import type { Visitor } from './visitor.ts';
-
-/** Working out a town takes its time where others work too. */
-const PATIENCE_MS = 90_000;
 
 /** Runs the option that is shown, and waits until the map shows what was found. */
 export async function runOption(visitor: Visitor): Promise<void> {
@@ -41,11 +38,10 @@ const shownRun = z.array(z.looseObject({ id: z.string(), isShown: z.boolean() })
 const withCounts = z.looseObject({ counts: runCountsSchema });
 
 /** What the server counts of the run that is shown. */
-export async function countsOfShownRun({ page }: Visitor, scheme: string) {
-  const listed = await page.request.get(`/api${scheme}/runs`);
-  const run = shownRun.parse(await listed.json()).find(({ isShown }) => isShown);
-  const detail = await page.request.get(`/api${scheme}/runs/${run?.id ?? ''}`);
-  return withCounts.parse(await detail.json()).counts;
+export async function countsOfShownRun(visitor: Visitor, scheme: string) {
+  const listed = shownRun.parse(await answered(visitor, `${scheme}/runs`));
+  const run = listed.find(({ isShown }) => isShown);
+  return withCounts.parse(await answered(visitor, `${scheme}/runs/${run?.id ?? ''}`)).counts;
 }
 
 /** Runs an option as its page would, with no map on the screen, and waits until the run has ended. */
@@ -54,7 +50,8 @@ async function runBeside(visitor: Visitor, scheme: string, option: string): Prom
   const options = alignmentsSchema.parse(await answered(visitor, `${scheme}/alignments`));
   const chosen = options.find(({ name }) => name === option);
   const started = { alignmentId: chosen?.id, alignmentVersion: chosen?.version };
-  const { id } = runSchema.parse(await sent(visitor, `${scheme}/runs`, started));
+  const answer = await sent(visitor, `${scheme}/runs`, started);
+  const { id } = runSchema.parse(await answer.json());
   // it is told how far the run is until it has ended
   await page.request.get(`/api${scheme}/runs/${id}/progress`, { timeout: PATIENCE_MS });
   return id;

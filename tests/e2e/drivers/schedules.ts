@@ -17,7 +17,7 @@ export async function printOf(
   layout: EvidenceLayout,
 ): Promise<Buffer> {
   const asked = await sent(visitor, `${run}/prints`, { name: 'Schedule', layout });
-  const print = `${scheme}/prints/${printSchema.parse(asked).id}`;
+  const print = `${scheme}/prints/${printSchema.parse(await asked.json()).id}`;
   const state = async () => printSchema.parse(await answered(visitor, print)).state;
   await expect.poll(state, PATIENCE).toBe('done');
   return (await visitor.page.request.get(`/api${print}/file`)).body();

@@ -26,7 +26,7 @@ const parties = z.object({
 async function offerSurvey(visitor: Visitor, scheme: string): Promise<void> {
   const found = parties.parse(await answered(visitor, `${scheme}/parties?search=${OWNER}`));
   const [party] = found.parties;
-  await sent(visitor, `${scheme}/appointments`, {
+  const offered = await sent(visitor, `${scheme}/appointments`, {
     id: crypto.randomUUID(),
     buildingId: party?.interests[0]?.building.id,
     partyId: party?.id,
@@ -36,6 +36,7 @@ async function offerSurvey(visitor: Visitor, scheme: string): Promise<void> {
     place: 'At the front door',
     isFreeDayMeant: true,
   });
+  expect(offered.status()).toBe(201);
 }
 
 journey(

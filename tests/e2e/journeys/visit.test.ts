@@ -1,7 +1,7 @@
 import { expect } from 'vitest';
 import { visitsSchema } from '../../../shared/schemas/visits.ts';
-import { axeFaultsAtBothSizes } from '../drivers/axe.ts';
 import { answered } from '../drivers/api.ts';
+import { axeFaultsAtBothSizes } from '../drivers/axe.ts';
 import { journey } from '../drivers/journey.ts';
 import { runOf } from '../drivers/runs.ts';
 import { addressOf } from '../drivers/schemes.ts';
