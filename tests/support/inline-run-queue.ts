@@ -1,8 +1,9 @@
 import type { Sequelize } from 'sequelize';
-import { compute, type Asked, type Computed } from '../../server/runs/compute.ts';
+import type { Asked, Computed } from '../../server/runs/compute.ts';
 import { doStep, failRun } from '../../server/runs/do-step.ts';
 import type { RunQueue } from '../../server/runs/run-queue.ts';
 import type { RunStep } from '../../server/runs/run-step.ts';
+import { computedOnce } from './computed-once.ts';
 
 export type InlineRunQueue = RunQueue & {
   /** Resolves when there is nothing to do. */
@@ -18,7 +19,7 @@ export function inlineRunQueue(database: Sequelize): InlineRunQueue {
   let isHeld = false;
   const threads = {
     compute: <A extends Asked>(asked: A): Promise<Computed<A>> =>
-      Promise.resolve().then(() => compute(asked)),
+      Promise.resolve().then(() => computedOnce(asked)),
   };
 
   async function workAll(): Promise<void> {

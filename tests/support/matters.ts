@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto';
-import type { Express } from 'express';
+import type { Server } from 'node:http';
 import type { NewMatter } from '../../shared/schemas/matters.ts';
 import type { PartyValues } from '../../shared/schemas/parties.ts';
 import type { Scheme } from '../../server/models/scheme.ts';
@@ -8,7 +8,7 @@ import { aBuilding, aMember } from './factories.ts';
 import { aParty } from './parties.ts';
 import { signIn } from './sign-in.ts';
 
-type Running = { readonly app: () => Express; readonly services: () => Services };
+type Running = { readonly app: () => Server; readonly services: () => Services };
 
 /** An owner who is signed in, with a building of theirs, through the register of parties. */
 export async function aSignedInOwner(

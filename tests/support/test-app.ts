@@ -1,7 +1,8 @@
+import { once } from 'node:events';
 import { mkdtemp, rm } from 'node:fs/promises';
+import { createServer, type Server } from 'node:http';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
-import type { Express } from 'express';
 import pg from 'pg';
 import type { DestinationStream } from 'pino';
 import { afterAll, beforeAll } from 'vitest';
@@ -18,7 +19,8 @@ import { createTileCache } from '../../server/tiles/tile-cache.ts';
 import { createTestDatabase } from './test-database.ts';
 
 export type TestApp = {
-  readonly app: () => Express;
+  /** Listening, so that a request need not open and close a port. */
+  readonly app: () => Server;
   readonly services: () => Services;
   /** Steps of runs are done in it at once. */
   readonly runQueue: () => InlineRunQueue;
@@ -45,7 +47,7 @@ export function testApp({
 } = {}): TestApp {
   const letters: Letter[] = [];
   let running:
-    { app: Express; services: Services; queue: InlineRunQueue; outbox: InlineOutbox } | undefined;
+    { app: Server; services: Services; queue: InlineRunQueue; outbox: InlineOutbox } | undefined;
   let close: (() => Promise<void>) | undefined;
 
   beforeAll(async () => {
@@ -86,8 +88,12 @@ export function testApp({
     const queue = inlineRunQueue(database);
     const outbox = inlineOutbox({ ...tools, runs: queue });
     const services = { ...tools, jobs, runs: queue, outbox };
-    running = { services, queue, outbox, app: createApp(services, pool, root) };
+    const app = createServer(createApp(services, pool, root)).listen(0, '127.0.0.1');
+    await once(app, 'listening');
+    running = { services, queue, outbox, app };
     close = async () => {
+      app.close();
+      app.closeAllConnections();
       await jobs.close();
       await queue.close();
       await outbox.idle();

@@ -1,4 +1,4 @@
-import type { Express } from 'express';
+import type { Server } from 'node:http';
 import request from 'supertest';
 import { describe, expect, test } from 'vitest';
 import { aPerson, PASSWORD } from '../../support/factories.ts';
@@ -15,7 +15,7 @@ function machine(): string {
   return `203.0.113.${machines}`;
 }
 
-async function visitorFrom(running: Express, ip: string) {
+async function visitorFrom(running: Server, ip: string) {
   return (await visitor(running)).set('X-Forwarded-For', ip);
 }
 

@@ -1,4 +1,5 @@
 import request from 'supertest';
+import type TestAgent from 'supertest/lib/agent.js';
 import { beforeAll, describe, expect, test } from 'vitest';
 import {
   registerChoicesSchema,
@@ -32,8 +33,18 @@ function queryOf({ filter, sort, ...others }: Asked) {
   };
 }
 
+const witnesses = new Map<string, Promise<TestAgent>>();
+
+/** The witness of a scheme, who stays signed in. */
+function witnessOf(scheme: Scheme): Promise<TestAgent> {
+  const signedIn = async () => signIn(app(), await aMember(scheme, 'witness'));
+  const witness = witnesses.get(scheme.id) ?? signedIn();
+  witnesses.set(scheme.id, witness);
+  return witness;
+}
+
 async function get(scheme: Scheme, end: string, asked: Asked | Record<string, unknown> = {}) {
-  const agent = await signIn(app(), await aMember(scheme, 'witness'));
+  const agent = await witnessOf(scheme);
   return agent.get(`/api/schemes/${scheme.id}/register${end}`).query(queryOf(asked));
 }
 
