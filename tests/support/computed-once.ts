@@ -13,21 +13,28 @@ function once<A extends Asked>(asked: A): Computed<A> | Promise<Computed<A>> {
   return found as Computed<A>;
 }
 
-/** The chunk as if its first building were the first of the database, and what was taken off the numbers. */
-function fromOne(asked: Chunk): { asked: Chunk; taken: number } {
+/**
+ * The chunk with its buildings numbered anew, all in as many figures, and what they are numbered by the
+ * database. They stay in order as texts, by which rows are put together.
+ */
+function numberedAnew(asked: Chunk): { asked: Chunk; ids: Map<number, number> } {
   const members = JSON.parse(asked.members) as Numbered[];
   const beside = JSON.parse(asked.beside) as Numbered[];
-  const taken = Math.min(...[...members, ...beside].map(({ id }) => Number(id))) - 1;
-  const less = (all: readonly Numbered[]) =>
-    JSON.stringify(all.map((one) => ({ ...one, id: String(Number(one.id) - taken) })));
-  return { asked: { ...asked, members: less(members), beside: less(beside) }, taken };
+  const sorted = [...members, ...beside].map(({ id }) => id).sort();
+  const anew = new Map(sorted.map((id, k) => [id, 1_000_000 + k]));
+  const renumber = (all: readonly Numbered[]) =>
+    JSON.stringify(all.map((one) => ({ ...one, id: String(anew.get(one.id)) })));
+  return {
+    asked: { ...asked, members: renumber(members), beside: renumber(beside) },
+    ids: new Map([...anew].map(([id, k]) => [k, Number(id)])),
+  };
 }
 
 function chunkOnce(chunk: Chunk): string {
-  const { asked, taken } = fromOne(chunk);
+  const { asked, ids } = numberedAnew(chunk);
   const results = JSON.parse(once(asked) as string) as Result[];
   return JSON.stringify(
-    results.map((result) => ({ ...result, buildingId: result.buildingId + taken })),
+    results.map((result) => ({ ...result, buildingId: ids.get(result.buildingId) })),
   );
 }
 
