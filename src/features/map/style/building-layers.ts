@@ -28,7 +28,6 @@ function edges(): LayerSpecification[] {
   const edge = {
     type: 'line',
     ...BUILDINGS,
-    layout: { 'line-join': 'round' },
     paint: {
       'line-color': MAP_COLOURS.bldgEdge,
       'line-width': ['interpolate', ['linear'], ['zoom'], 13, 0.25, 16, 0.7, 19, 1.2],

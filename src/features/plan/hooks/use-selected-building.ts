@@ -21,7 +21,8 @@ export function useSelectedBuilding(): readonly [
         else next.set(NAME, String(buildingId));
         return next;
       },
-      { replace: true },
+      // what is about to be gone is let go of at once: later, it would be asked for again
+      { replace: true, flushSync: buildingId === null },
     );
   }
   return [idOf(search.get(NAME)), select];
