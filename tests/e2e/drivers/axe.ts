@@ -1,12 +1,16 @@
-import { AxeBuilder } from '@axe-core/playwright';
+import { readFileSync } from 'node:fs';
+import { createRequire } from 'node:module';
+import type { AxeResults } from 'axe-core';
 import type { Page } from 'playwright-core';
 import { DESK, PHONE } from './visitor.ts';
 
+const AXE = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
+
 /** What axe finds against a page: the rule and where it is broken. Our pages hold no frames to go into. */
 export async function axeFaults(page: Page): Promise<string[]> {
-  const axe = new AxeBuilder({ page }).setLegacyMode().options({ resultTypes: ['violations'] });
-  const { violations } = await axe.analyze();
-  return violations.flatMap(({ id, nodes }) =>
+  if (!(await page.evaluate(() => 'axe' in globalThis))) await page.evaluate(AXE);
+  const results = await page.evaluate<AxeResults>('axe.run({ resultTypes: ["violations"] })');
+  return results.violations.flatMap(({ id, nodes }) =>
     nodes.map(({ target }) => `${id}: ${target.join(' ')}`),
   );
 }

@@ -1,6 +1,7 @@
 import type { Browser } from 'playwright-core';
 import { expect, test } from 'vitest';
 import { openChromium } from '../../../scripts/open-chromium.ts';
+import { keepToOneProcessor } from './one-processor.ts';
 import { takeDemo } from './take-demo.ts';
 import { newVisitor, type Size, type Visitor } from './visitor.ts';
 
@@ -24,11 +25,13 @@ export const journey = test.extend<Stage>({
   ],
   browser: [
     async ({}, use) => {
+      keepToOneProcessor();
       const browser = await openChromium();
       await use(browser);
       await browser.close();
     },
-    { scope: 'file' },
+    // one for all journeys of a worker: it keeps what the map's shaders came to
+    { scope: 'worker' },
   ],
   visit: async ({ browser, demo }, use) => {
     const visitors: Visitor[] = [];

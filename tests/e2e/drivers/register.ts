@@ -1,11 +1,10 @@
 import type { Locator } from 'playwright-core';
-import { openScheme } from './schemes.ts';
+import { addressOf } from './schemes.ts';
 import type { Visitor } from './visitor.ts';
 
 /** Opens the register of the demo scheme and waits for its rows. */
 export async function openRegister(visitor: Visitor): Promise<void> {
-  await openScheme(visitor);
-  await visitor.page.getByRole('link', { name: 'Register', exact: true }).click();
+  await visitor.open(`${await addressOf(visitor)}/register`);
   await rowOf(visitor, 'B0001').waitFor();
 }
 

@@ -1,5 +1,6 @@
 import { describe, expect, inject } from 'vitest';
 import { journey } from '../drivers/journey.ts';
+import { rowOf } from '../drivers/register.ts';
 import { DEMO_SCHEME, openScheme, tabs } from '../drivers/schemes.ts';
 import { signInAs, signInWith, signOut } from '../drivers/sign-in.ts';
 
@@ -12,6 +13,8 @@ describe('signing in', () => {
     expect(await tabs(visitor)).toEqual([
       ...['Plan', 'Register', 'Measures', 'Owners', 'Evidence', 'Settings', 'Method'],
     ]);
+    await visitor.page.getByRole('link', { name: 'Register', exact: true }).click();
+    await rowOf(visitor, 'B0001').waitFor();
   });
 
   for (const role of ['designer', 'assessor', 'second-assessor', 'witness'] as const) {
