@@ -18,5 +18,5 @@ function processors(): number[] {
 export function keepToOneProcessor(): void {
   const all = processors();
   const own = all[Number(process.env.VITEST_POOL_ID ?? 1) % all.length] ?? 0;
-  execFileSync('taskset', ['-a', '-c', '-p', String(own), String(process.pid)]);
+  execFileSync('/usr/bin/taskset', ['-a', '-c', '-p', String(own), String(process.pid)]);
 }
