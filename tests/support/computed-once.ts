@@ -1,16 +1,17 @@
 import { compute, type Asked, type Computed } from '../../server/runs/compute.ts';
 
 type Chunk = Asked & { readonly kind: 'chunk' };
+type Contours = Asked & { readonly kind: 'contours' };
 type Numbered = { readonly id: string };
 type Result = { readonly buildingId: number };
 
-const computed = new Map<string, Computed<Asked> | Promise<Computed<Asked>>>();
+const computed = new Map<string, string>();
 
-function once<A extends Asked>(asked: A): Computed<A> | Promise<Computed<A>> {
+function once(asked: Chunk | Contours): string {
   const key = JSON.stringify(asked);
-  const found = computed.get(key) ?? compute<A>(asked);
-  computed.set(key, found);
-  return found as Computed<A>;
+  const text = computed.get(key) ?? (compute(asked) as string);
+  computed.set(key, text);
+  return text;
 }
 
 /**
@@ -32,7 +33,7 @@ function numberedAnew(asked: Chunk): { asked: Chunk; ids: Map<number, number> } 
 
 function chunkOnce(chunk: Chunk): string {
   const { asked, ids } = numberedAnew(chunk);
-  const results = JSON.parse(once(asked) as string) as Result[];
+  const results = JSON.parse(once(asked)) as Result[];
   return JSON.stringify(
     results.map((result) => ({ ...result, buildingId: ids.get(result.buildingId) })),
   );
@@ -44,5 +45,5 @@ function chunkOnce(chunk: Chunk): string {
  */
 export function computedOnce<A extends Asked>(asked: A): Computed<A> | Promise<Computed<A>> {
   if (asked.kind === 'chunk') return chunkOnce(asked) as Computed<A>;
-  return asked.kind === 'contours' ? once(asked) : compute(asked);
+  return asked.kind === 'contours' ? (once(asked) as Computed<A>) : compute(asked);
 }

@@ -22,6 +22,15 @@ export async function openPlan(visitor: Visitor): Promise<string> {
   return scheme;
 }
 
+/** Shows the register alone, without an option and what a run of it found. */
+export async function showNoOption(visitor: Visitor): Promise<void> {
+  const { page } = visitor;
+  await page.getByRole('button', { name: /choose another option$/ }).click();
+  await page.getByRole('button', { name: 'No option', exact: true }).click();
+  await page.getByText('Nothing worked out yet').waitFor();
+  await mapIsStill(visitor);
+}
+
 /** What the side of the map says is selected. */
 export function selectedName({ page }: Visitor): Promise<string | null> {
   const headings = page.getByRole('complementary').getByRole('heading', { level: 2 });

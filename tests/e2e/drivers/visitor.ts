@@ -20,8 +20,8 @@ export const PHONE: Size = { width: 390, height: 844 };
 /** Errors on the console and in scripts, and requests that leave this machine. */
 function watch(page: Page, faults: string[]): void {
   page.on('console', (message: ConsoleMessage) => {
-    if (message.type() === 'error')
-      faults.push(`console: ${message.text()} ${message.location().url}`);
+    if (message.type() !== 'error') return;
+    faults.push(`console: ${message.text()} ${message.location().url}`);
   });
   page.on('pageerror', (error: Error) => {
     faults.push(`script: ${error.message}`);

@@ -1,7 +1,7 @@
 import { describe, expect } from 'vitest';
 import { axeFaultsAtBothSizes } from '../drivers/axe.ts';
 import { journey } from '../drivers/journey.ts';
-import { addressOf, openScheme } from '../drivers/schemes.ts';
+import { openScheme } from '../drivers/schemes.ts';
 import { signInAs } from '../drivers/sign-in.ts';
 import type { Visitor } from '../drivers/visitor.ts';
 
@@ -28,12 +28,12 @@ describe('axe finds nothing', () => {
   journey('for the administrator', async ({ visit }) => {
     const visitor = await visit();
     await signInAs(visitor, 'administrator');
-    const scheme = await addressOf(visitor);
+    const scheme = await openScheme(visitor);
     const settings = ['', '/people', '/rules', '/background'].map(
       (end) => `${scheme}/settings${end}`,
     );
     const paths = ['/', '/people', '/audit', '/mailbox', '/account', '/schemes/new', '/nowhere'];
-    expect(await faultsOn(visitor, [...paths, ...settings])).toEqual([]);
+    expect(await faultsOn(visitor, [...paths, ...settings, `${scheme}/plan`])).toEqual([]);
   });
 
   journey('for the owner', async ({ visit }) => {

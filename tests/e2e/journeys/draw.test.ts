@@ -2,7 +2,7 @@ import { expect } from 'vitest';
 import { axeFaults } from '../drivers/axe.ts';
 import { buildingShown, pressGround } from '../drivers/ground.ts';
 import { journey } from '../drivers/journey.ts';
-import { isSelected, mapIsStill, openPlan, search } from '../drivers/plan.ts';
+import { isSelected, mapIsStill, openPlan, search, showNoOption } from '../drivers/plan.ts';
 import { signInAs } from '../drivers/sign-in.ts';
 import type { Visitor } from '../drivers/visitor.ts';
 
@@ -55,6 +55,8 @@ journey('a building is drawn, changed, split, joined and removed', async ({ visi
   const { page } = visitor;
   await signInAs(visitor, 'assessor');
   await openPlan(visitor);
+  // a run that another journey left knows nothing of a building that is drawn after it
+  await showNoOption(visitor);
   await search(visitor, 'customs');
   await page.keyboard.press('Enter');
   await isSelected(visitor, 'Customs House');
@@ -108,6 +110,4 @@ journey('a building is drawn, changed, split, joined and removed', async ({ visi
   await isTold(visitor, /^Undone: Annexe is removed\.$/);
   await isSelected(visitor, 'Annexe');
   await mapIsStill(visitor);
-  // a run that another journey left did not have it, and that is how the server says so
-  while (visitor.faults.length > 0) visitor.expectFault(/404 .*\/runs\/[^/]+\/buildings\/\d+$/);
 });

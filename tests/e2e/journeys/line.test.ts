@@ -1,7 +1,14 @@
 import { expect } from 'vitest';
 import { axeFaults } from '../drivers/axe.ts';
 import { journey } from '../drivers/journey.ts';
-import { mapIsStill, mapOf, middleChanges, middleOf, openPlan } from '../drivers/plan.ts';
+import {
+  mapIsStill,
+  mapOf,
+  middleChanges,
+  middleOf,
+  openPlan,
+  showNoOption,
+} from '../drivers/plan.ts';
 import { signInAs } from '../drivers/sign-in.ts';
 import type { Visitor } from '../drivers/visitor.ts';
 
@@ -112,10 +119,7 @@ journey('a line is drawn, shows its settlement, and two who change it meet', asy
   // contours of the line come and go with it
   await mapIsStill(designer);
   const seen = await middleOf(designer);
-  await page.getByRole('button', { name: /choose another option$/ }).click();
-  await page.getByRole('button', { name: 'No option', exact: true }).click();
-  await page.getByText('Nothing worked out yet').waitFor();
-  await mapIsStill(designer);
+  await showNoOption(designer);
   await middleChanges(designer, seen);
 
   await openOption(designer, 'Straight on');
