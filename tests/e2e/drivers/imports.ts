@@ -1,3 +1,4 @@
+import { randomBytes } from 'node:crypto';
 import { registerPageSchema } from '../../../shared/schemas/register.ts';
 import { answered, sent } from './api.ts';
 import type { Visitor } from './visitor.ts';
@@ -5,10 +6,13 @@ import type { Visitor } from './visitor.ts';
 /** The server reads and checks a file beside what else it does. */
 const PATIENCE_MS = 60_000;
 
-/** Makes a scheme in UTM zone 31 and lets the assessor work in it; gives its address. */
+/**
+ * Makes a scheme in UTM zone 31 and lets the assessor work in it; gives its address. No two schemes have one
+ * name, so a second go has one of its own.
+ */
 export async function makeScheme({ page, open }: Visitor, name: string): Promise<string> {
   await open('/schemes/new');
-  await page.getByLabel('Name').fill(name);
+  await page.getByLabel('Name').fill(`${name} ${randomBytes(4).toString('hex')}`);
   await page.getByRole('combobox').fill('32631');
   await page.getByRole('option').first().click();
   await page.getByRole('button', { name: 'Make the scheme' }).click();

@@ -1,3 +1,4 @@
+import { randomBytes } from 'node:crypto';
 import { describe, expect } from 'vitest';
 import { axeFaults, axeFaultsAtBothSizes } from '../drivers/axe.ts';
 import { journey } from '../drivers/journey.ts';
@@ -122,7 +123,7 @@ journey('a scheme without buildings says what to do first', async ({ visit }) =>
   const { page, open } = visitor;
   await signInAs(visitor, 'administrator');
   await open('/schemes/new');
-  await page.getByLabel('Name').fill('Empty crossing');
+  await page.getByLabel('Name').fill(`Empty crossing ${randomBytes(4).toString('hex')}`);
   await page.getByRole('combobox').fill('25832');
   await page.getByRole('option').first().click();
   await page.getByRole('button', { name: 'Make the scheme' }).click();

@@ -3,6 +3,7 @@ import type { ImportAnswer } from '../../../../shared/schemas/imports.ts';
 import { LoadingRows } from '../../../components/ui/loading-rows.tsx';
 import { QueryError } from '../../../components/ui/query-error.tsx';
 import { Table } from '../../../components/ui/table/table.tsx';
+import { classNames } from '../../../lib/class-names.ts';
 import { apiPath } from '../../../lib/api-path.ts';
 import { useScheme } from '../../schemes/scheme-context.ts';
 import type { ImportDraft } from '../hooks/use-import-draft.ts';
@@ -36,7 +37,7 @@ export function ReportTable({ answer, draft, report }: ReportTableProps) {
   const { kind } = answer;
   const columns = useMemo(() => reportColumns(kind), [kind]);
   const frame = useScrollToOpen(open, shown !== undefined);
-  const { data } = page;
+  const { data, isPlaceholderData } = page;
   return (
     <div ref={frame}>
       <div className="mb-1 flex flex-wrap items-baseline justify-between gap-x-4 gap-y-1">
@@ -77,6 +78,8 @@ export function ReportTable({ answer, draft, report }: ReportTableProps) {
                 </div>
               ) : undefined
             }
+            // a press on rows that are about to go would fall on those that come
+            className={classNames(isPlaceholderData && 'pointer-events-none opacity-60')}
           />
           <ReportPages offset={asked.offset} found={data.found} onGoTo={report.goTo} />
         </>
